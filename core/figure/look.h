@@ -1,0 +1,21 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/figure/picture.h"
+
+#include <cstdint>
+
+namespace planewright {
+
+/// A colour as 0xRRGGBB.
+struct Colour {
+  std::uint32_t rgb = 0;
+  bool operator==(const Colour&) const = default;
+};
+
+enum class Palette { light, dark, mono };
+
+/// The colour of a role in a palette. Figures use light or mono, never dark.
+Colour colourOf(Role role, Palette palette);
+
+} // namespace planewright

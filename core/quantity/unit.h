@@ -1,0 +1,57 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/words/problem.h"
+
+#include <string>
+#include <string_view>
+#include <vector>
+
+namespace planewright {
+
+/// Exponents of the three kinds of thing that a point calculation is made of. Stress is force 1, length -2.
+struct Dimension {
+  int force = 0;
+  int length = 0;
+  int angle = 0;
+  constexpr bool operator==(const Dimension&) const = default;
+};
+
+namespace dimension {
+inline constexpr Dimension none{};
+inline constexpr Dimension force{1, 0, 0};
+inline constexpr Dimension length{0, 1, 0};
+inline constexpr Dimension angle{0, 0, 1};
+inline constexpr Dimension stress{1, -2, 0};
+inline constexpr Dimension moment{1, 1, 0};
+} // namespace dimension
+
+/// What a dimension is called: "a force", "a stress", "a plain number", "force^2 * length".
+Text nameOf(Dimension dimension);
+
+/// A unit: value in the base (N, mm, deg; so a stress in MPa) = value * numerator / denominator, each exactly
+/// the nearest double of the exact factor.
+struct Unit {
+  std::string name;
+  Dimension dimension;
+  double numerator = 1;
+  double denominator = 1;
+
+  double toBase(double value) const { return value * numerator / denominator; }
+  double fromBase(double value) const { return value * denominator / numerator; }
+  bool operator==(const Unit&) const = default;
+};
+
+/// One row of the table of units, with the source of its factor.
+struct UnitRow {
+  Unit unit;
+  const char* source;
+};
+/// Every unit that an expression can name (contract of the expressions: Pa ... %, see README).
+const std::vector<UnitRow>& unitTable();
+
+/// Reads a unit as a study names it ("MPa", "kN*m", "N/mm^2"); a Problem when it is unknown or its dimension
+/// differs from `wanted`.
+Result<Unit> readUnit(std::string_view text, Dimension wanted);
+
+} // namespace planewright

@@ -1,0 +1,17 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/readout.h"
+
+namespace planewright {
+
+/// `planewright-readout` version 1: everything that follows from the study for these points, as JSON with 15
+/// significant digits, stresses in the study's unit.
+std::string readoutJson(const Study& study, const std::vector<Readout>& points);
+/// The same as csv: one row a plane or line of each state.
+std::string readoutCsv(const Study& study, const std::vector<Readout>& points);
+/// The same for people, with the working of the state, in English or another language.
+std::string readoutText(const Study& study, const std::vector<Readout>& points,
+                        const Translate& translate = {});
+
+} // namespace planewright

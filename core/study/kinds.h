@@ -1,0 +1,35 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/words/names.h"
+
+namespace planewright {
+
+/// Which normal stress counts positive in everything typed and reported.
+enum class Positive { tension, compression };
+/// How the shear axis of the circle is drawn: tnt positive downwards, so that the circle turns the way the
+/// element turns, or upwards, so that it turns the other way.
+enum class ShearAxis { tensorDown, tensorUp };
+/// What a line in the plane of stress is.
+enum class LineKind { grain, fibre, weld, bond, other };
+/// The nature of an action.
+enum class Nature { permanent, variable, accidental, seismic };
+/// Classes of duration of an action, longest first.
+enum class Duration { permanent, longTerm, medium, shortTerm, instantaneous };
+/// What the factors of a combination make of the actions.
+enum class Basis { design, characteristic, allowable, measured };
+
+template <>
+const std::vector<Named<Positive>>& namesOf<Positive>();
+template <>
+const std::vector<Named<ShearAxis>>& namesOf<ShearAxis>();
+template <>
+const std::vector<Named<LineKind>>& namesOf<LineKind>();
+template <>
+const std::vector<Named<Nature>>& namesOf<Nature>();
+template <>
+const std::vector<Named<Duration>>& namesOf<Duration>();
+template <>
+const std::vector<Named<Basis>>& namesOf<Basis>();
+
+} // namespace planewright

@@ -1,0 +1,91 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/quantity/expression.h"
+#include "core/study/study.h"
+
+namespace planewright {
+
+/// Every kind of spot in a study. The first group holds things that are inserted, removed, moved and renamed;
+/// the second holds single texts that are typed.
+enum class Spot {
+  loadCase,
+  combination,
+  factorOf,
+  point,
+  caseStress,
+  line,
+  plane,
+  // typed texts
+  titleProject,
+  titleSubject,
+  titleNumber,
+  titleRevision,
+  titlePrepared,
+  titleChecked,
+  titleDate,
+  titleNotes,
+  unitStress,
+  unitForce,
+  unitLength,
+  unitMoment,
+  positive,
+  shearAxis,
+  caseName,
+  caseNature,
+  caseDuration,
+  caseExcludes, ///< ids joined by ", "
+  factor,
+  combinationBasis,
+  pointNote,
+  axes,
+  sx,
+  sy,
+  txy,
+  sz,
+  lineName,
+  lineKind,
+  lineAngle,
+  lineTolerance,
+  planeNormal,
+  planeTolerance,
+  reading,
+  shownPoint,
+  shownCombination
+};
+
+/// One spot in a study: `owner` is the case id, combination or point it belongs to, `item` the case id or
+/// plane inside that; both empty where the spot needs none.
+struct Place {
+  Spot spot = Spot::titleProject;
+  std::string owner;
+  std::string item;
+  bool operator==(const Place&) const = default;
+};
+
+/// What a typed spot holds.
+enum class Holds { freeText, name, word, unit, expression };
+
+/// The one row that gives a spot its path, label and parser.
+struct SpotRow {
+  Spot spot;
+  const char* path; ///< with * for owner and item: "points/*/stress/*/sx"
+  Text label;       ///< "σ_{x}", "angle of the line"
+  Holds holds;
+  Dimension dimension; ///< of an expression
+  Slopes slopes;
+  bool mayBeEmpty;
+};
+const SpotRow& rowOf(Spot spot);
+
+/// "points/P1/stress/G/sx"; "~" and "/" in names are written ~0 and ~1.
+std::string pathOf(const Place& place);
+/// The place of such a path; none when no spot has it.
+std::optional<Place> placeOf(std::string_view path);
+
+/// The typed text at a place, none when the place does not exist in this study.
+std::optional<std::string> textAt(const Study& study, const Place& place);
+/// What an expression at this place reads: dimension and the study's unit for it.
+EntryKind entryKindOf(const Study& study, Spot spot);
+
+} // namespace planewright

@@ -1,0 +1,55 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/readout.h"
+
+namespace planewright {
+
+/// A column: `key` is its name in csv and json, `heading` on screen and paper, `unit` stands behind it.
+struct Column {
+  std::string key;
+  Text heading;
+  std::string unit; ///< "MPa", "°", empty
+  bool isNumber = true;
+};
+
+/// A cell: `shown` with the state's count of decimals, `exact` in the column's unit where it is a number.
+struct Cell {
+  Text shown;
+  std::optional<double> exact;
+};
+
+/// A row; `kind` gives its mark. `group` changes where a hair rule stands.
+struct Row {
+  PlaneKind kind = PlaneKind::reading;
+  std::string name;
+  int group = 0;
+  std::vector<Cell> cells;
+};
+
+/// Rows as window, csv, figure and clipboard share them: headings, signs and rounding exist once.
+struct Table {
+  std::vector<Column> columns;
+  std::vector<Row> rows;
+};
+
+/// plane | normal at | cut at | sn | tnt for one state, in the study's unit.
+Table planesTable(const Study& study, const Readout& readout, const StateReading& state);
+/// The same columns for normals from -90 (excluded) to 90 deg by `step` degrees (0.1 to 90).
+Table sweepTable(const Study& study, const StateReading& state, Angle step);
+
+/// Tab separated, a heading line first, numbers at full precision with ASCII minus.
+std::string tabSeparated(const Table& table, const Translate& translate = {});
+/// One HTML table element, with the shown numbers.
+std::string html(const Table& table, const Translate& translate = {});
+
+/// Decimals for every stress of this state in the study's unit: four significant digits in its largest.
+int stressDecimals(const Study& study, const StateReading& state);
+/// A stress of the base written in the study's unit with that count of decimals.
+std::string shownStress(const Study& study, const StateReading& state, double stress);
+/// A stress of the base in the study's unit.
+double inStressUnit(const Study& study, double stress);
+/// Decimals of every angle in tables.
+inline constexpr int angleDecimals = 2;
+
+} // namespace planewright

@@ -1,0 +1,78 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/desk/desk.h"
+
+#include <QUndoCommand>
+
+namespace planewright {
+
+/// The one undo command: swaps whole studies. Edits of one gesture merge; a gesture that ends where it began
+/// leaves no step.
+class StudyCommand : public QUndoCommand {
+public:
+  StudyCommand(Desk& desk, std::shared_ptr<const Study> after, Gesture gesture, const QString& what)
+      : QUndoCommand(what), m_desk(desk), m_before(desk.m_study), m_after(std::move(after)),
+        m_gesture(gesture) {}
+
+  int id() const override { return 1; }
+  void undo() override { m_desk.take(m_before); }
+  void redo() override { m_desk.take(m_after); }
+
+  bool mergeWith(const QUndoCommand* other) override {
+    const auto* later = static_cast<const StudyCommand*>(other);
+    if (later->m_gesture != m_gesture)
+      return false;
+    m_after = later->m_after;
+    setText(later->text());
+    setObsolete(*m_after == *m_before);
+    return true;
+  }
+
+private:
+  Desk& m_desk;
+  std::shared_ptr<const Study> m_before;
+  std::shared_ptr<const Study> m_after;
+  Gesture m_gesture;
+};
+
+namespace {
+constexpr int undoLimit = 1000;
+}
+
+Desk::Desk(Study study, QObject* parent)
+    : QObject(parent), m_study(std::make_shared<const Study>(std::move(study))),
+      m_readout(evaluate(*m_study)) {
+  m_undo.setUndoLimit(undoLimit);
+}
+
+Gesture Desk::newGesture() { return {++m_lastGesture}; }
+
+std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const QString& what) {
+  Result<Study> after = edited(*m_study, edits);
+  if (!after)
+    return std::move(after).error();
+  if (*after != *m_study)
+    m_undo.push(new StudyCommand(*this, std::make_shared<const Study>(*std::move(after)), gesture, what));
+  return std::nullopt;
+}
+
+void Desk::show(const std::string& point, const std::string& combination) {
+  const Result<Study> after = edited(
+      *m_study, Edits{Type{{Spot::shownPoint, {}, {}}, point}, Type{{Spot::shownCombination, {}, {}}, combination}});
+  if (after && *after != *m_study)
+    take(std::make_shared<const Study>(*after));
+}
+
+void Desk::replace(Study study) {
+  m_undo.clear();
+  take(std::make_shared<const Study>(std::move(study)));
+}
+
+void Desk::say(const QString& message) { Q_EMIT said(message); }
+
+void Desk::take(std::shared_ptr<const Study> study) {
+  m_study = std::move(study);
+  m_readout = evaluate(*m_study);
+  Q_EMIT changed();
+}
+
+} // namespace planewright

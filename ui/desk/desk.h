@@ -1,0 +1,57 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/edit.h"
+#include "core/study/readout.h"
+
+#include <QObject>
+#include <QUndoStack>
+
+#include <memory>
+#include <optional>
+
+namespace planewright {
+
+/// Names one drag or one stay in a field; edits of one gesture make one undo step. Never reused.
+struct Gesture {
+  quint64 number = 0;
+  bool operator==(const Gesture&) const = default;
+};
+
+/// Owns the study, its readout and the undo history. The only way to change the study is request().
+class Desk : public QObject {
+  Q_OBJECT
+
+public:
+  explicit Desk(Study study, QObject* parent = nullptr);
+
+  const Study& study() const { return *m_study; }
+  const Readout& readout() const { return m_readout; }
+  QUndoStack* undoStack() { return &m_undo; }
+
+  Gesture newGesture();
+  /// Applies the edits as one step of the gesture; the Problem when they are not taken. Edits that change
+  /// nothing leave no step.
+  std::optional<Problem> request(const Edits& edits, Gesture gesture, const QString& what);
+  /// Shows another point or combination: no undo step, not a change to save.
+  void show(const std::string& point, const std::string& combination);
+  /// Puts another study on the desk with an empty history (New, Open).
+  void replace(Study study);
+  /// A message for the status line, with what changed.
+  void say(const QString& message);
+
+signals:
+  void changed();
+  void said(const QString& message);
+
+private:
+  friend class StudyCommand;
+  void take(std::shared_ptr<const Study> study);
+
+  std::shared_ptr<const Study> m_study;
+  Readout m_readout;
+  QUndoStack m_undo;
+  quint64 m_lastGesture = 0;
+};
+
+} // namespace planewright
