@@ -24,7 +24,16 @@ enum class Role {
   grid,
   rule,
   band,
-  canvas
+  canvas,
+  // grounds and states of the window only
+  window,
+  field,
+  wrong,
+  wrongGround,
+  focus,
+  selection,
+  safeGround,
+  safeEdge
 };
 
 /// Kinds of stroke, equal in colour and mono.

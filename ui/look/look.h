@@ -1,0 +1,36 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/figure/look.h"
+#include "core/words/problem.h"
+
+#include <QColor>
+#include <QPalette>
+#include <QString>
+
+class QWidget;
+
+namespace planewright {
+
+/// Colours of the window: a small value that a view takes from its own palette, so that nothing is shared.
+struct Look {
+  Palette palette = Palette::light;
+  QColor colour(Role role) const;
+  bool operator==(const Look&) const = default;
+};
+
+/// Light or dark, by the lightness of the widget's window colour. Views call it when they paint.
+Look lookOf(const QWidget& widget);
+/// The palette that makes the standard widgets wear a Look.
+QPalette paletteFor(const Look& look);
+
+/// A core text in the language of the program, without and with lowered indices (as rich text).
+QString shown(const Text& text);
+QString shownRich(const Text& text);
+QString shown(const Problem& problem);
+/// The translation that core's figures and outputs take.
+Translate translation();
+
+inline QString fromUtf8(const std::string& words) { return QString::fromStdString(words); }
+
+} // namespace planewright
