@@ -19,12 +19,12 @@ struct LabelWish {
 
 /// Two columns at the sides of a drawing. A mark belongs to the column on its side of `centre`.
 struct LabelColumns {
-  double centre = 0;    ///< x that parts left from right
-  double leftEnd = 0;   ///< labels of the left column end here
+  double centre = 0;     ///< x that parts left from right
+  double leftEnd = 0;    ///< labels of the left column end here
   double rightStart = 0; ///< labels of the right column start here
-  double top = 0;       ///< no label's box leaves top..bottom
+  double top = 0;        ///< no label's box leaves top..bottom
   double bottom = 0;
-  double size = 0;      ///< of the text
+  double size = 0; ///< of the text
   double leaderWidth = 0.18;
 };
 

@@ -34,16 +34,21 @@ CosSin cosSinOfDegrees(double degrees) {
 } // namespace
 
 Angle Angle::fromRadians(double radians) {
-  return Angle(static_cast<double>(static_cast<long double>(radians) * 180 / std::numbers::pi_v<long double>));
+  return Angle(
+      static_cast<double>(static_cast<long double>(radians) * 180 / std::numbers::pi_v<long double>));
 }
 
 double Angle::radians() const {
   return static_cast<double>(static_cast<long double>(m_degrees) * std::numbers::pi_v<long double> / 180);
 }
 
-CosSin cosSin(Angle angle) { return cosSinOfDegrees(angle.degrees()); }
+CosSin cosSin(Angle angle) {
+  return cosSinOfDegrees(angle.degrees());
+}
 
-CosSin cosSinOfDouble(Angle angle) { return cosSinOfDegrees(2 * angle.degrees()); }
+CosSin cosSinOfDouble(Angle angle) {
+  return cosSinOfDegrees(2 * angle.degrees());
+}
 
 Angle folded(Angle angle) {
   const double rest = std::remainder(angle.degrees(), 180.0);
@@ -60,9 +65,17 @@ namespace {
 constexpr Angle rightAngle = Angle::fromDegrees(90);
 }
 
-NormalAngle crossing(LineAngle line) { return {folded(line.value)}; }
-NormalAngle following(LineAngle line) { return {folded(line.value + rightAngle)}; }
-LineAngle cutOf(NormalAngle normal) { return {folded(normal.value + rightAngle)}; }
-NormalAngle normalOf(LineAngle cut) { return {folded(cut.value - rightAngle)}; }
+NormalAngle crossing(LineAngle line) {
+  return {folded(line.value)};
+}
+NormalAngle following(LineAngle line) {
+  return {folded(line.value + rightAngle)};
+}
+LineAngle cutOf(NormalAngle normal) {
+  return {folded(normal.value + rightAngle)};
+}
+NormalAngle normalOf(LineAngle cut) {
+  return {folded(cut.value - rightAngle)};
+}
 
 } // namespace planewright

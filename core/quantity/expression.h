@@ -21,9 +21,10 @@ struct EntryKind {
 
 /// A typed text that was read.
 struct Entry {
-  double value = 0;     ///< in the base (N, mm, deg)
-  std::string text;     ///< the typed text, trimmed; a text without any unit is completed with the field's
-  double halfWidth = 0; ///< in the base: half the last digit of a plain number, 1e-12 |value| of an expression
+  double value = 0; ///< in the base (N, mm, deg)
+  std::string text; ///< the typed text, trimmed; a text without any unit is completed with the field's
+  double halfWidth =
+      0; ///< in the base: half the last digit of a plain number, 1e-12 |value| of an expression
   bool operator==(const Entry&) const = default;
 };
 

@@ -17,8 +17,12 @@ std::optional<NormalAngle> turned(std::optional<NormalAngle> from, double degree
 
 } // namespace
 
-std::optional<NormalAngle> Circle::theta2() const { return turned(theta1, 90); }
-std::optional<NormalAngle> Circle::thetaTauMin() const { return turned(theta1, 45); }
+std::optional<NormalAngle> Circle::theta2() const {
+  return turned(theta1, 90);
+}
+std::optional<NormalAngle> Circle::thetaTauMin() const {
+  return turned(theta1, 45);
+}
 
 Circle circleOf(const PlaneStress& stress, double scale, double s3) {
   Circle circle;
@@ -39,7 +43,9 @@ Circle circleOf(const PlaneStress& stress, double scale, double s3) {
   return circle;
 }
 
-Circle circleOf(const PlaneStress& stress) { return circleOf(stress, scaleOf(stress)); }
+Circle circleOf(const PlaneStress& stress) {
+  return circleOf(stress, scaleOf(stress));
+}
 
 double scaleOf(const PlaneStress& stress) {
   return std::max({std::abs(stress.sx), std::abs(stress.sy), std::abs(stress.txy)});

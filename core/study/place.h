@@ -7,15 +7,15 @@
 namespace planewright {
 
 /// Every kind of spot in a study. The first group holds things that are inserted, removed, moved and renamed;
-/// the second holds single texts that are typed.
+/// the second holds single texts that are typed (a factor is both).
 enum class Spot {
   loadCase,
   combination,
-  factorOf,
   point,
   caseStress,
   line,
   plane,
+  factor,
   // typed texts
   titleProject,
   titleSubject,
@@ -35,7 +35,6 @@ enum class Spot {
   caseNature,
   caseDuration,
   caseExcludes, ///< ids joined by ", "
-  factor,
   combinationBasis,
   pointNote,
   axes,
@@ -63,18 +62,18 @@ struct Place {
   bool operator==(const Place&) const = default;
 };
 
-/// What a typed spot holds.
-enum class Holds { freeText, name, word, unit, expression };
+/// What a spot holds: a thing with spots of its own, or a typed text of some kind.
+enum class Holds { thing, freeText, name, word, ids, unit, expression };
 
 /// The one row that gives a spot its path, label and parser.
 struct SpotRow {
   Spot spot;
   const char* path; ///< with * for owner and item: "points/*/stress/*/sx"
   Text label;       ///< "σ_{x}", "angle of the line"
-  Holds holds;
-  Dimension dimension; ///< of an expression
-  Slopes slopes;
-  bool mayBeEmpty;
+  Holds holds = Holds::thing;
+  Dimension dimension = dimension::none; ///< of an expression or a unit
+  Slopes slopes = Slopes::none;
+  bool mayBeEmpty = false;
 };
 const SpotRow& rowOf(Spot spot);
 

@@ -11,11 +11,17 @@ Text Text::with(Text argument) const {
   return result;
 }
 
-Text Text::with(std::string_view words) const { return with(planewright::verbatim(words)); }
+Text Text::with(std::string_view words) const {
+  return with(planewright::verbatim(words));
+}
 
-Text verbatim(std::string_view words) { return {"", std::string(words), {}}; }
+Text verbatim(std::string_view words) {
+  return {"", std::string(words), {}};
+}
 
-Text symbol(std::string_view source) { return {"Symbol", std::string(source), {}}; }
+Text symbol(std::string_view source) {
+  return {"Symbol", std::string(source), {}};
+}
 
 namespace {
 
@@ -66,6 +72,8 @@ std::string plain(const Runs& runs) {
   return result;
 }
 
-std::string plain(const Text& text, const Translate& translate) { return plain(runs(text, translate)); }
+std::string plain(const Text& text, const Translate& translate) {
+  return plain(runs(text, translate));
+}
 
 } // namespace planewright

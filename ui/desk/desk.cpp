@@ -44,7 +44,9 @@ Desk::Desk(Study study, QObject* parent)
   m_undo.setUndoLimit(undoLimit);
 }
 
-Gesture Desk::newGesture() { return {++m_lastGesture}; }
+Gesture Desk::newGesture() {
+  return {++m_lastGesture};
+}
 
 std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const QString& what) {
   Result<Study> after = edited(*m_study, edits);
@@ -56,8 +58,8 @@ std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const 
 }
 
 void Desk::show(const std::string& point, const std::string& combination) {
-  const Result<Study> after = edited(
-      *m_study, Edits{Type{{Spot::shownPoint, {}, {}}, point}, Type{{Spot::shownCombination, {}, {}}, combination}});
+  const Result<Study> after = edited(*m_study, Edits{Type{{Spot::shownPoint, {}, {}}, point},
+                                                     Type{{Spot::shownCombination, {}, {}}, combination}});
   if (after && *after != *m_study)
     take(std::make_shared<const Study>(*after));
 }
@@ -67,7 +69,9 @@ void Desk::replace(Study study) {
   take(std::make_shared<const Study>(std::move(study)));
 }
 
-void Desk::say(const QString& message) { Q_EMIT said(message); }
+void Desk::say(const QString& message) {
+  Q_EMIT said(message);
+}
 
 void Desk::take(std::shared_ptr<const Study> study) {
   m_study = std::move(study);

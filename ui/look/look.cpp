@@ -6,7 +6,9 @@
 
 namespace planewright {
 
-QColor Look::colour(Role role) const { return QColor::fromRgb(colourOf(role, palette).rgb); }
+QColor Look::colour(Role role) const {
+  return QColor::fromRgb(colourOf(role, palette).rgb);
+}
 
 Look lookOf(const QWidget& widget) {
   const bool dark = widget.palette().color(QPalette::Window).lightnessF() < 0.5F;
@@ -50,7 +52,9 @@ Translate translation() {
   };
 }
 
-QString shown(const Text& text) { return QString::fromStdString(plain(text, translation())); }
+QString shown(const Text& text) {
+  return QString::fromStdString(plain(text, translation()));
+}
 
 QString shownRich(const Text& text) {
   QString result;
@@ -61,6 +65,8 @@ QString shownRich(const Text& text) {
   return result;
 }
 
-QString shown(const Problem& problem) { return QString::fromStdString(plain(problem, translation())); }
+QString shown(const Problem& problem) {
+  return QString::fromStdString(plain(problem, translation()));
+}
 
 } // namespace planewright

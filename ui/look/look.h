@@ -31,6 +31,8 @@ QString shown(const Problem& problem);
 /// The translation that core's figures and outputs take.
 Translate translation();
 
-inline QString fromUtf8(const std::string& words) { return QString::fromStdString(words); }
+inline QString fromUtf8(const std::string& words) {
+  return QString::fromStdString(words);
+}
 
 } // namespace planewright

@@ -1,0 +1,100 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/slot.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+/// A list of a study whose items have a name as their key, seen alike by insert, remove, move and rename.
+template <class Item>
+struct KeyedList {
+  std::vector<Item>& items;
+  std::string Item::*key;
+
+  std::optional<std::size_t> indexOf(const std::string& name) const {
+    const auto at = std::ranges::find(items, name, key);
+    return at == items.end() ? std::nullopt : std::optional(static_cast<std::size_t>(at - items.begin()));
+  }
+  bool holds(const std::string& name) const { return indexOf(name).has_value(); }
+  bool isTaken(const std::string& name) const { return holds(name); }
+  void insert(std::optional<std::size_t> index, const std::string& name) {
+    Item item;
+    item.*key = name;
+    const std::size_t at = std::min(index.value_or(items.size()), items.size());
+    items.insert(items.begin() + static_cast<std::ptrdiff_t>(at), std::move(item));
+  }
+  bool erase(const std::string& name) {
+    return std::erase_if(items, [&](const Item& item) { return item.*key == name; }) > 0;
+  }
+  bool move(const std::string& name, std::size_t index) {
+    const auto from = indexOf(name);
+    if (!from || index >= items.size())
+      return false;
+    Item item = std::move(items[*from]);
+    items.erase(items.begin() + static_cast<std::ptrdiff_t>(*from));
+    items.insert(items.begin() + static_cast<std::ptrdiff_t>(index), std::move(item));
+    return true;
+  }
+  bool rename(const std::string& from, const std::string& to) {
+    const auto at = indexOf(from);
+    if (at)
+      items[*at].*key = to;
+    return at.has_value();
+  }
+};
+
+/// The one line of a point seen as a list of at most one: its place needs no key, and any name is free.
+struct LineList {
+  std::optional<Line>& line;
+
+  bool holds(const std::string&) const { return line.has_value(); }
+  bool isTaken(const std::string&) const { return false; }
+  void insert(std::optional<std::size_t>, const std::string&) { line = Line{}; }
+  bool erase(const std::string&) {
+    const bool was = line.has_value();
+    line.reset();
+    return was;
+  }
+  bool move(const std::string&, std::size_t index) const { return line && index == 0; }
+  bool rename(const std::string&, const std::string& to) {
+    if (line)
+      line->name = to;
+    return line.has_value();
+  }
+};
+
+/// The key of the thing that a place names.
+inline const std::string& keyOf(const Place& place) {
+  return place.item.empty() ? place.owner : place.item;
+}
+
+/// Calls `visit` with the list that holds the thing at `place`; false when there is no such list.
+template <class Visit>
+bool withList(Study& study, const Place& place, Visit visit) {
+  const auto in = [&visit](auto list) { return visit(list); };
+  Point* point = itemIn(study.points, &Point::name, place.owner);
+  switch (place.spot) {
+  case Spot::loadCase:
+    return in(KeyedList<LoadCase>{study.cases, &LoadCase::id});
+  case Spot::combination:
+    return in(KeyedList<Combination>{study.combinations, &Combination::name});
+  case Spot::point:
+    return in(KeyedList<Point>{study.points, &Point::name});
+  case Spot::caseStress:
+    return point && in(KeyedList<CaseStress>{point->stress, &CaseStress::caseId});
+  case Spot::plane:
+    return point && in(KeyedList<WatchedPlane>{point->planes, &WatchedPlane::name});
+  case Spot::line:
+    return point && in(LineList{point->line});
+  case Spot::factor: {
+    Combination* combination = itemIn(study.combinations, &Combination::name, place.owner);
+    return combination && in(KeyedList<Factor>{combination->factors, &Factor::caseId});
+  }
+  default:
+    return false;
+  }
+}
+
+} // namespace planewright

@@ -1,0 +1,19 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/slot.h"
+
+namespace planewright {
+
+/// `text` as the study keeps it at this place (a bare number completed with its unit, blanks trimmed), or
+/// the Problem, with the place's path.
+Result<std::string> keptText(const Study& study, const Place& place, const Slot& slot, std::string_view text);
+
+/// Why a name cannot be a key: empty, blank at an end, control characters, longer than 200 bytes, broken
+/// UTF-8. Empty for a good name.
+Text faultOfName(std::string_view name);
+
+/// A Problem at a place.
+Problem problemAt(const Place& place, std::string_view quoted, Text what, Text mend = {});
+
+} // namespace planewright

@@ -1,0 +1,85 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/table/table.h"
+
+#include "core/quantity/format.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+std::string headingOf(const Column& column, const Translate& translate) {
+  std::string heading = plain(column.heading, translate);
+  if (!column.unit.empty())
+    heading += " (" + column.unit + ")";
+  return heading;
+}
+
+/// Tabs and line ends part cells and rows, so none may stand inside one.
+std::string inOneCell(std::string words) {
+  std::ranges::replace_if(
+      words, [](char c) { return c == '\t' || c == '\n' || c == '\r'; }, ' ');
+  return words;
+}
+
+std::string escapedHtml(const std::string& words) {
+  std::string result;
+  for (const char c : words) {
+    if (c == '&')
+      result += "&amp;";
+    else if (c == '<')
+      result += "&lt;";
+    else if (c == '>')
+      result += "&gt;";
+    else
+      result += c;
+  }
+  return result;
+}
+
+std::string htmlRuns(const Text& text, const Translate& translate) {
+  std::string result;
+  for (const Run& run : runs(text, translate))
+    result += run.lowered ? "<sub>" + escapedHtml(run.text) + "</sub>" : escapedHtml(run.text);
+  return result;
+}
+
+std::string htmlCell(const char* tag, bool isNumber, const std::string& content) {
+  const std::string align = isNumber ? " style=\"text-align:right\"" : "";
+  return std::string("<") + tag + align + ">" + content + "</" + tag + ">";
+}
+
+} // namespace
+
+std::string tabSeparated(const Table& table, const Translate& translate) {
+  std::string result;
+  for (const Column& column : table.columns)
+    result += (&column == &table.columns.front() ? "" : "\t") + inOneCell(headingOf(column, translate));
+  result += '\n';
+  for (const Row& row : table.rows) {
+    for (const Cell& cell : row.cells)
+      result += (&cell == &row.cells.front() ? "" : "\t") +
+                inOneCell(cell.exact ? exactNumber(*cell.exact) : plain(cell.shown, translate));
+    result += '\n';
+  }
+  return result;
+}
+
+std::string html(const Table& table, const Translate& translate) {
+  std::string result = "<table><tr>";
+  for (const Column& column : table.columns) {
+    const std::string unit = column.unit.empty() ? "" : " (" + escapedHtml(column.unit) + ")";
+    result += htmlCell("th", column.isNumber, htmlRuns(column.heading, translate) + unit);
+  }
+  result += "</tr>\n";
+  for (const Row& row : table.rows) {
+    result += "<tr>";
+    for (std::size_t i = 0; i < row.cells.size(); ++i)
+      result += htmlCell("td", table.columns[i].isNumber, htmlRuns(row.cells[i].shown, translate));
+    result += "</tr>\n";
+  }
+  return result + "</table>\n";
+}
+
+} // namespace planewright

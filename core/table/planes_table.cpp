@@ -1,0 +1,143 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/table/table.h"
+
+#include "core/quantity/format.h"
+#include "core/study/place.h"
+
+#include <algorithm>
+#include <cassert>
+#include <cmath>
+
+namespace planewright {
+
+namespace {
+
+Unit stressUnit(const Study& study) {
+  return entryKindOf(study, Spot::sx).unit;
+}
+
+std::vector<Column> columnsOf(const Study& study) {
+  const std::string& unit = study.units.stress;
+  return {{"plane", PW_TEXT("Table", "Plane"), "", false},
+          {"normal", PW_TEXT("Table", "normal at"), "", true},
+          {"cut", PW_TEXT("Table", "cut at"), "", true},
+          {"sn", symbol("σ_{n}"), unit, true},
+          {"tnt", symbol("τ_{nt}"), unit, true}};
+}
+
+Text nameOf(const PlaneReading& plane) {
+  switch (plane.kind) {
+  case PlaneKind::reading:
+    return PW_TEXT("Table", "Reading plane");
+  case PlaneKind::x:
+    return PW_TEXT("Table", "x face");
+  case PlaneKind::y:
+    return PW_TEXT("Table", "y face");
+  case PlaneKind::s1:
+    return PW_TEXT("Table", "Principal σ_{1}");
+  case PlaneKind::s2:
+    return PW_TEXT("Table", "Principal σ_{2}");
+  case PlaneKind::shearMax:
+    return PW_TEXT("Table", "Greatest shear, τ_{nt} > 0");
+  case PlaneKind::shearMin:
+    return PW_TEXT("Table", "Greatest shear, τ_{nt} < 0");
+  case PlaneKind::crossing:
+    return PW_TEXT("Table", "Crossing the %1 (stress along it)").with(plane.name);
+  case PlaneKind::following:
+    return PW_TEXT("Table", "Following the %1 (stress across it)").with(plane.name);
+  case PlaneKind::watched:
+    break;
+  }
+  return verbatim(plane.name);
+}
+
+int groupOf(PlaneKind kind) {
+  switch (kind) {
+  case PlaneKind::reading:
+    return 0;
+  case PlaneKind::x:
+  case PlaneKind::y:
+    return 1;
+  case PlaneKind::s1:
+  case PlaneKind::s2:
+    return 2;
+  case PlaneKind::shearMax:
+  case PlaneKind::shearMin:
+    return 3;
+  case PlaneKind::crossing:
+  case PlaneKind::following:
+    return 4;
+  case PlaneKind::watched:
+    break;
+  }
+  return 5;
+}
+
+Cell angleCell(Angle angle) {
+  return {verbatim(shownDegrees(angle, angleDecimals)), angle.degrees()};
+}
+
+Cell stressCell(const Study& study, const StateReading& state, double stress) {
+  return {verbatim(shownStress(study, state, stress)), inStressUnit(study, stress)};
+}
+
+/// A degenerate state has no angle of its own for these planes: every direction is one.
+void addAngles(Row& row, const PlaneReading& plane) {
+  if (plane.normal) {
+    row.cells.push_back(angleCell(plane.normal->value));
+    row.cells.push_back(angleCell(plane.cut()->value));
+  } else {
+    row.cells.push_back({PW_TEXT("Table", "every direction"), std::nullopt});
+    row.cells.push_back({{}, std::nullopt});
+  }
+}
+
+Row rowOfPlane(const Study& study, const StateReading& state, const PlaneReading& plane, Text name) {
+  Row row{plane.kind, plane.name, groupOf(plane.kind), {}};
+  row.cells.push_back({std::move(name), std::nullopt});
+  addAngles(row, plane);
+  row.cells.push_back(stressCell(study, state, plane.traction.sn));
+  row.cells.push_back(stressCell(study, state, plane.traction.tnt));
+  return row;
+}
+
+} // namespace
+
+double inStressUnit(const Study& study, double stress) {
+  return stressUnit(study).fromBase(stress);
+}
+
+// The greatest |stress| on any plane sets the decimals, so that they do not change while a plane turns; a
+// radius lost in cancellation shows no digits that mean nothing.
+int stressDecimals(const Study& study, const StateReading& state) {
+  const Circle& circle = state.circle;
+  const double largest = std::max({std::abs(circle.s1), std::abs(circle.s2), std::abs(state.sz)});
+  return decimalsFor(inStressUnit(study, largest));
+}
+
+std::string shownStress(const Study& study, const StateReading& state, double stress) {
+  return shownNumber(inStressUnit(study, stress), stressDecimals(study, state));
+}
+
+Table planesTable(const Study& study, const Readout& readout, const StateReading& state) {
+  Table table{columnsOf(study), {}};
+  for (const PlaneReading& plane : planesOf(readout, state))
+    table.rows.push_back(rowOfPlane(study, state, plane, nameOf(plane)));
+  return table;
+}
+
+Table sweepTable(const Study& study, const StateReading& state, Angle step) {
+  assert(step.degrees() >= 0.1 && step.degrees() <= 90);
+  Table table{columnsOf(study), {}};
+  const int most = static_cast<int>(std::floor(90 / step.degrees() + 1e-9));
+  for (int i = -most; i <= most; ++i) {
+    const Angle angle = Angle::fromDegrees(i * step.degrees());
+    if (angle.degrees() <= -90 + 1e-9)
+      continue;
+    const PlaneReading plane = planeAt(state, {angle});
+    table.rows.push_back(rowOfPlane(study, state, plane, verbatim(shownDegrees(angle, angleDecimals))));
+  }
+  return table;
+}
+
+} // namespace planewright
