@@ -10,7 +10,9 @@
 namespace planewright {
 namespace {
 
-Angle deg(double degrees) { return Angle::fromDegrees(degrees); }
+Angle deg(double degrees) {
+  return Angle::fromDegrees(degrees);
+}
 
 TEST(Angle, cosineAndSineAreExactAtMultiplesOf90AndAlikeAt45) {
   for (int turn = -8; turn <= 8; ++turn) {

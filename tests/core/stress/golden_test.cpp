@@ -11,7 +11,9 @@ namespace planewright {
 namespace {
 
 constexpr PlaneStress golden{80, 20, -30};
-NormalAngle normalAt(double degrees) { return {Angle::fromDegrees(degrees)}; }
+NormalAngle normalAt(double degrees) {
+  return {Angle::fromDegrees(degrees)};
+}
 
 TEST(Golden, circleOfTheState) {
   const Circle circle = circleOf(golden);

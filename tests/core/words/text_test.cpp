@@ -29,7 +29,11 @@ TEST(Text, anArgumentKeepsItsOwnIndex) {
 }
 
 TEST(Problem, saysPlaceLineAndColumnBeforeTheSentences) {
-  const Problem problem{"study", 3, 5, "1,5", PW_TEXT("Test", "“%1” has a decimal comma.").with("1,5"),
+  const Problem problem{"study",
+                        3,
+                        5,
+                        "1,5",
+                        PW_TEXT("Test", "“%1” has a decimal comma.").with("1,5"),
                         PW_TEXT("Test", "Write 1.5.")};
   EXPECT_EQ(plain(problem), "study, line 3, column 5: “1,5” has a decimal comma. Write 1.5.");
 }
