@@ -38,6 +38,8 @@ enum class Role {
 
 /// Kinds of stroke, equal in colour and mono.
 enum class Dash { solid, shortDash, longDashDot, dotted };
+/// Its strokes and gaps in turn, in widths of the pen; none for a solid line. Ends are flat.
+std::vector<double> dashLengths(Dash dash);
 
 /// A place on the sheet in mm (in the window: in pixels), x to the right, y down.
 struct Vec {

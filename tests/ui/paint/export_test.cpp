@@ -1,0 +1,118 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "tests/ui/paint/sample.h"
+#include "ui/paint/export.h"
+
+#include <QFile>
+#include <QImage>
+#include <QProcess>
+#include <QRegularExpression>
+#include <QTemporaryDir>
+
+#include <gtest/gtest.h>
+
+namespace planewright {
+namespace {
+
+QString outputOf(const QString& program, const QStringList& arguments) {
+  QProcess process;
+  process.start(program, arguments);
+  EXPECT_TRUE(process.waitForFinished()) << program.toStdString();
+  EXPECT_EQ(process.exitCode(), 0) << process.readAllStandardError().toStdString();
+  return QString::fromUtf8(process.readAllStandardOutput());
+}
+
+QString written(const QTemporaryDir& folder, const QString& name, const QByteArray& bytes) {
+  QFile file(folder.filePath(name));
+  EXPECT_TRUE(file.open(QIODevice::WriteOnly));
+  file.write(bytes);
+  return file.fileName();
+}
+
+TEST(Png, StatesTheAskedResolutionAndSize) {
+  for (const int dpi : {96, 150, 300, 600}) {
+    const auto bytes = pngOf(samplePicture(), Palette::light, dpi);
+    ASSERT_TRUE(bytes);
+    const QImage image = QImage::fromData(*bytes, "PNG");
+    EXPECT_EQ(qRound(image.dotsPerMeterX() * 0.0254), dpi);
+    EXPECT_EQ(image.dotsPerMeterX(), image.dotsPerMeterY());
+    EXPECT_NEAR(image.width() / (dpi / 25.4), 90, 0.51 * 25.4 / dpi);
+    EXPECT_NEAR(image.height() / (dpi / 25.4), 60, 0.51 * 25.4 / dpi);
+    EXPECT_FALSE(image.hasAlphaChannel());
+    EXPECT_EQ(image.text(QStringLiteral("Title")), QStringLiteral("Chord & strut <invented>"));
+  }
+}
+
+TEST(Png, RefusesAResolutionOutOfRangeAndTooManyPixels) {
+  EXPECT_EQ(pngOf(samplePicture(), Palette::light, 49).error().quoted, "49");
+  EXPECT_EQ(pngOf(samplePicture(), Palette::light, 2401).error().quoted, "2401");
+  Picture large = samplePicture();
+  large.width = large.height = 400;
+  EXPECT_EQ(pngOf(large, Palette::light, 2400).error().quoted, "2400");
+  EXPECT_TRUE(pngOf(large, Palette::light, 300));
+}
+
+TEST(Png, OfMonoHoldsNoColour) {
+  const QImage image = QImage::fromData(*pngOf(samplePicture(), Palette::mono, 150), "PNG");
+  for (int y = 0; y < image.height(); ++y)
+    for (int x = 0; x < image.width(); ++x) {
+      const QRgb pixel = image.pixel(x, y);
+      ASSERT_TRUE(qRed(pixel) == qGreen(pixel) && qGreen(pixel) == qBlue(pixel)) << x << ' ' << y;
+    }
+}
+
+TEST(Pdf, HasThePageInTrueMillimetres) {
+  QTemporaryDir folder;
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString info = outputOf(QStringLiteral("pdfinfo"), {file});
+  const auto match = QRegularExpression(QStringLiteral("Page size: +([0-9.]+) x ([0-9.]+) pts")).match(info);
+  ASSERT_TRUE(match.hasMatch()) << info.toStdString();
+  EXPECT_NEAR(match.captured(1).toDouble() / 72 * 25.4, 90, 0.002);
+  EXPECT_NEAR(match.captured(2).toDouble() / 72 * 25.4, 60, 0.002);
+  EXPECT_TRUE(info.contains(QStringLiteral("Chord & strut <invented>"))) << info.toStdString();
+}
+
+TEST(Pdf, HoldsEveryLabelWholeAsText) {
+  QTemporaryDir folder;
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString text =
+      outputOf(QStringLiteral("pdftotext"), {QStringLiteral("-layout"), file, QStringLiteral("-")});
+  for (const auto& part : samplePicture().parts) {
+    if (const auto* label = std::get_if<Label>(&part)) {
+      const std::string words = plain(label->runs);
+      EXPECT_TRUE(text.contains(QString::fromStdString(words))) << words << '\n' << text.toStdString();
+    }
+  }
+}
+
+TEST(Pdf, EmbedsItsFontAndNoPicture) {
+  QTemporaryDir folder;
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString fonts = outputOf(QStringLiteral("pdffonts"), {file});
+  const QStringList lines = fonts.split(QLatin1Char('\n'), Qt::SkipEmptyParts).mid(2);
+  EXPECT_EQ(lines.size(), 2) << fonts.toStdString();
+  for (const QString& line : lines)
+    EXPECT_TRUE(line.contains(QStringLiteral("Liberation")) && line.contains(QStringLiteral(" yes ")))
+        << line.toStdString();
+  EXPECT_EQ(outputOf(QStringLiteral("pdfimages"), {QStringLiteral("-list"), file}).count(QLatin1Char('\n')),
+            2);
+}
+
+TEST(Pdf, LooksLikeThePng) {
+  QTemporaryDir folder;
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  outputOf(QStringLiteral("pdftoppm"),
+           {QStringLiteral("-r"), QStringLiteral("150"), QStringLiteral("-png"),
+            QStringLiteral("-singlefile"), file, folder.filePath(QStringLiteral("a"))});
+  const QImage pdf = QImage(folder.filePath(QStringLiteral("a.png"))).convertToFormat(QImage::Format_RGB32);
+  const QImage png = QImage::fromData(*pngOf(samplePicture(), Palette::light, 150), "PNG");
+  ASSERT_NEAR(pdf.width(), png.width(), 1);
+  ASSERT_NEAR(pdf.height(), png.height(), 1);
+  int far = 0;
+  for (int y = 0; y < std::min(pdf.height(), png.height()); ++y)
+    for (int x = 0; x < std::min(pdf.width(), png.width()); ++x)
+      far += std::abs(qGray(pdf.pixel(x, y)) - qGray(png.pixel(x, y))) > 100 ? 1 : 0;
+  EXPECT_LT(far, png.width() * png.height() / 500);
+}
+
+} // namespace
+} // namespace planewright

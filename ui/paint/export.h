@@ -1,0 +1,27 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/figure/look.h"
+#include "core/words/problem.h"
+
+#include <QByteArray>
+
+class QPrinter;
+
+namespace planewright {
+
+inline constexpr int leastDpi = 50;
+inline constexpr int greatestDpi = 2400;
+
+/// The picture, in mm, as a PNG on white with exactly this resolution stated; a Problem for a resolution out
+/// of range or a picture of more than 120 million pixels.
+Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi);
+
+/// The picture, in mm, as a PDF of one page of exactly its size, with real text in the embedded font.
+Result<QByteArray> pdfOf(const Picture& picture, Palette palette);
+
+/// Prints the picture at true size at the top left of the printable page, made smaller only when it does not
+/// fit. A Problem when the printer does not start.
+Result<void> printPicture(QPrinter& printer, const Picture& picture, Palette palette);
+
+} // namespace planewright
