@@ -17,5 +17,7 @@ inline constexpr double unitsPerEm = 2048;
 
 /// The table of resources/font/advances.txt, ascending by code.
 std::span<const Advance> advanceTable();
+/// The row of a character, null when the table lacks it.
+const Advance* advanceOf(char32_t code);
 
 } // namespace planewright

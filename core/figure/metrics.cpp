@@ -8,14 +8,19 @@
 
 namespace planewright {
 
-namespace {
-
-double advanceOf(char32_t code, bool bold) {
+const Advance* advanceOf(char32_t code) {
   const auto table = advanceTable();
   const auto row =
       std::lower_bound(table.begin(), table.end(), code,
                        [](const Advance& advance, char32_t wanted) { return advance.code < wanted; });
-  if (row == table.end() || row->code != code)
+  return row == table.end() || row->code != code ? nullptr : &*row;
+}
+
+namespace {
+
+double unitsOf(char32_t code, bool bold) {
+  const Advance* row = advanceOf(code);
+  if (!row)
     return unitsPerEm;
   return bold ? row->bold : row->regular;
 }
@@ -27,7 +32,7 @@ double textWidth(const Runs& runs, double size, bool bold) {
   for (const Run& run : runs) {
     double units = 0;
     for (const Character& character : charactersOf(run.text))
-      units += advanceOf(character.code, bold);
+      units += unitsOf(character.code, bold);
     ems += units / unitsPerEm * (run.lowered ? loweredSize : 1);
   }
   return ems * size;

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/paint/painter.h"
 
+#include "core/figure/advances.h"
+#include "core/figure/characters.h"
 #include "core/figure/metrics.h"
 #include "ui/look/font.h"
 #include "ui/look/look.h"
@@ -15,9 +17,9 @@ namespace planewright {
 
 namespace {
 
-/// The em in which texts are set before they are scaled to their size: the font's own design units, so that
-/// every advance is a whole number and no size is rounded to pixels.
-constexpr double em = 2048;
+/// Texts are set in the font's own units and scaled to their size: every advance is a whole number then, and
+/// no size is rounded to pixels.
+constexpr double em = unitsPerEm;
 
 /// The program's font alone: what it lacks is not silently taken from another one.
 QFont setterOf(bool bold) {
@@ -44,33 +46,20 @@ QPointF pointOf(Vec at) {
   return {at.x, at.y};
 }
 
-/// A stretch of a run: in the program's font, or one character that it lacks, in a cell of one em.
+/// A stretch of a run: measured characters, or one that the table of widths lacks.
 struct Stretch {
-  QString text;
-  double width;
-  bool foreign;
+  std::string text;
+  bool measured;
 };
 
-std::vector<Stretch> stretchesOf(const QString& text, const QFontMetricsF& metrics) {
+std::vector<Stretch> stretchesOf(const std::string& text) {
   std::vector<Stretch> result;
-  const auto finish = [&] {
-    if (!result.empty() && !result.back().foreign)
-      result.back().width = metrics.horizontalAdvance(result.back().text);
-  };
-  qsizetype at = 0;
-  for (const uint character : text.toUcs4()) {
-    const qsizetype length = QChar::requiresSurrogates(character) ? 2 : 1;
-    const QString piece = text.mid(at, length);
-    at += length;
-    const bool foreign = !metrics.inFontUcs4(character);
-    if (!foreign && !result.empty() && !result.back().foreign) {
-      result.back().text += piece;
-      continue;
-    }
-    finish();
-    result.push_back({piece, em, foreign});
+  for (const Character& character : charactersOf(text)) {
+    const bool measured = advanceOf(character.code) != nullptr;
+    if (!measured || result.empty() || !result.back().measured)
+      result.push_back({"", measured});
+    result.back().text += character.bytes;
   }
-  finish();
   return result;
 }
 
@@ -107,49 +96,38 @@ public:
   }
 
   void operator()(const Label& label) {
-    const double width = widthOf(label);
-    const double shift = label.align == Align::start ? 0 : label.align == Align::middle ? width / 2 : width;
-    QPointF at(label.at.x - shift, label.at.y);
-    if (label.ground) {
-      const QRectF box(at.x(), at.y() - ascent * label.size, width, (ascent + descent) * label.size);
-      m_painter.fillRect(box, m_look.colour(Role::canvas));
-    }
+    const Box box = boxOf(label);
+    if (label.ground)
+      m_painter.fillRect(QRectF(QPointF(box.left, box.top), QPointF(box.right, box.bottom)),
+                         m_look.colour(Role::canvas));
+    Vec at{box.left + boxSide * label.size, label.at.y};
     m_painter.setPen(m_look.colour(label.role));
     for (const Run& run : label.runs) {
       const double size = run.lowered ? loweredSize * label.size : label.size;
-      const double drop = run.lowered ? loweredDrop * label.size : 0;
-      at.rx() += set(QString::fromStdString(run.text), at + QPointF(0, drop), size, label.bold);
+      set(run.text, at + Vec{0, run.lowered ? loweredDrop * label.size : 0}, size, label.bold);
+      at.x += textWidth({{run.text, false}}, size, label.bold);
     }
   }
 
 private:
-  double widthOf(const Label& label) const {
-    const QFontMetricsF metrics(m_fonts[label.bold ? 1 : 0]);
-    double width = 0;
-    for (const Run& run : label.runs)
-      for (const Stretch& stretch : stretchesOf(QString::fromStdString(run.text), metrics))
-        width += stretch.width * (run.lowered ? loweredSize : 1) * label.size / em;
-    return width;
-  }
-
-  /// Sets one run from `at` and says how far it went.
-  double set(const QString& text, QPointF at, double size, bool bold) {
-    const QFont& font = m_fonts[bold ? 1 : 0];
-    const QFontMetricsF metrics(font);
+  void set(const std::string& text, Vec at, double size, bool bold) {
     m_painter.save();
-    m_painter.setFont(font);
-    m_painter.translate(at);
+    m_painter.translate(at.x, at.y);
     m_painter.scale(size / em, size / em);
     double pen = 0;
-    for (const Stretch& stretch : stretchesOf(text, metrics)) {
-      if (stretch.foreign)
-        setForeign(stretch.text, pen, bold);
+    for (const Stretch& stretch : stretchesOf(text)) {
+      if (stretch.measured)
+        setMeasured(fromUtf8(stretch.text), pen, bold);
       else
-        m_painter.drawText(QPointF(pen, 0), stretch.text);
-      pen += stretch.width;
+        setForeign(fromUtf8(stretch.text), pen, bold);
+      pen += textWidth({{stretch.text, false}}, em, bold);
     }
     m_painter.restore();
-    return pen * size / em;
+  }
+
+  void setMeasured(const QString& text, double pen, bool bold) {
+    m_painter.setFont(m_fonts[bold ? 1 : 0]);
+    m_painter.drawText(QPointF(pen, 0), text);
   }
 
   /// A character from whatever font has it, in the middle of a cell of one em, made narrower to fit.
