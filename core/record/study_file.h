@@ -6,6 +6,8 @@
 
 namespace planewright {
 
+/// What "format" says in a study file.
+inline constexpr std::string_view studyFormat = "planewright-study";
 /// Version of the study file that this program writes and the newest that it reads.
 inline constexpr int studyFileVersion = 1;
 
