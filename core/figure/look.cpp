@@ -56,6 +56,8 @@ Colour colourOf(Role role, Palette palette) {
     return {shade.light};
   case Palette::dark:
     return {shade.dark};
+  case Palette::paper:
+    return {role == Role::canvas || role == Role::window ? 0xFFFFFF : shade.light};
   case Palette::mono:
     break;
   }

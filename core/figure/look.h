@@ -13,9 +13,10 @@ struct Colour {
   bool operator==(const Colour&) const = default;
 };
 
-enum class Palette { light, dark, mono };
+/// Paper is the light set on white.
+enum class Palette { light, dark, mono, paper };
 
-/// The colour of a role in a palette. Figures use light or mono, never dark.
+/// The colour of a role in a palette. Figures use paper or mono, whatever the window wears.
 Colour colourOf(Role role, Palette palette);
 
 } // namespace planewright
