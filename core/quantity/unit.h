@@ -16,6 +16,16 @@ struct Dimension {
   int angle = 0;
   constexpr bool operator==(const Dimension&) const = default;
 };
+constexpr Dimension operator+(Dimension a, Dimension b) {
+  return {a.force + b.force, a.length + b.length, a.angle + b.angle};
+}
+/// Exponents times `times`: the dimension of a power.
+constexpr Dimension operator*(int times, Dimension a) {
+  return {times * a.force, times * a.length, times * a.angle};
+}
+
+/// Exponents beyond this are refused: nothing of the trade needs them, and sums stay far from overflow.
+inline constexpr int greatestExponent = 100;
 
 namespace dimension {
 inline constexpr Dimension none{};
@@ -37,8 +47,9 @@ struct Unit {
   double numerator = 1;
   double denominator = 1;
 
-  double toBase(double value) const { return value * numerator / denominator; }
-  double fromBase(double value) const { return value * denominator / numerator; }
+  /// Relative error at most two roundings; finite wherever the result is.
+  double toBase(double value) const;
+  double fromBase(double value) const;
   bool operator==(const Unit&) const = default;
 };
 
@@ -49,6 +60,11 @@ struct UnitRow {
 };
 /// Every unit that an expression can name (contract of the expressions: Pa ... %, see README).
 const std::vector<UnitRow>& unitTable();
+/// The unit of this name, also "°" for deg; null for any other word.
+const Unit* findUnit(std::string_view name);
+/// The name in the table that a mistyped one most likely means: differing case counts least, then a missing
+/// or surplus letter, then a wrong one.
+std::string_view nearestUnitName(std::string_view name);
 
 /// Reads a unit as a study names it ("MPa", "kN*m", "N/mm^2"); a Problem when it is unknown or its dimension
 /// differs from `wanted`.
