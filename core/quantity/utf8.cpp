@@ -64,11 +64,11 @@ std::size_t codePointsIn(std::string_view text) {
 
 std::string hexadecimal(unsigned long value, std::size_t digits) {
   std::string result;
-  do {
-    result.insert(result.begin(), "0123456789ABCDEF"[value & 15]);
+  while (value != 0 || result.size() < digits) {
+    result.push_back("0123456789ABCDEF"[value & 15]);
     value >>= 4;
-  } while (value != 0);
-  result.insert(0, digits - std::min(digits, result.size()), '0');
+  }
+  std::reverse(result.begin(), result.end());
   return result;
 }
 
