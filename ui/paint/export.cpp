@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/paint/export.h"
 
+#include "core/words/version.h"
 #include "ui/look/look.h"
 #include "ui/paint/painter.h"
 
@@ -23,7 +24,7 @@ constexpr int pdfResolution = 1200;
 constexpr double pointsPerMm = 72 / mmPerInch;
 
 QString creator() {
-  return QStringLiteral("Planewright ") + QStringLiteral(PLANEWRIGHT_VERSION);
+  return QStringLiteral("Planewright ") + fromUtf8(std::string(programVersion()));
 }
 
 Problem resolutionProblem(int dpi) {

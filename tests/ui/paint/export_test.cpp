@@ -30,7 +30,7 @@ QString written(const QTemporaryDir& folder, const QString& name, const QByteArr
 
 TEST(Png, StatesTheAskedResolutionAndSize) {
   for (const int dpi : {96, 150, 300, 600}) {
-    const auto bytes = pngOf(samplePicture(), Palette::light, dpi);
+    const auto bytes = pngOf(samplePicture(), Palette::paper, dpi);
     ASSERT_TRUE(bytes);
     const QImage image = QImage::fromData(*bytes, "PNG");
     EXPECT_EQ(qRound(image.dotsPerMeterX() * 0.0254), dpi);
@@ -43,12 +43,12 @@ TEST(Png, StatesTheAskedResolutionAndSize) {
 }
 
 TEST(Png, RefusesAResolutionOutOfRangeAndTooManyPixels) {
-  EXPECT_EQ(pngOf(samplePicture(), Palette::light, 49).error().quoted, "49");
-  EXPECT_EQ(pngOf(samplePicture(), Palette::light, 2401).error().quoted, "2401");
+  EXPECT_EQ(pngOf(samplePicture(), Palette::paper, 49).error().quoted, "49");
+  EXPECT_EQ(pngOf(samplePicture(), Palette::paper, 2401).error().quoted, "2401");
   Picture large = samplePicture();
   large.width = large.height = 400;
-  EXPECT_EQ(pngOf(large, Palette::light, 2400).error().quoted, "2400");
-  EXPECT_TRUE(pngOf(large, Palette::light, 300));
+  EXPECT_EQ(pngOf(large, Palette::paper, 2400).error().quoted, "2400");
+  EXPECT_TRUE(pngOf(large, Palette::paper, 300));
 }
 
 TEST(Png, OfMonoHoldsNoColour) {
@@ -62,7 +62,7 @@ TEST(Png, OfMonoHoldsNoColour) {
 
 TEST(Pdf, HasThePageInTrueMillimetres) {
   QTemporaryDir folder;
-  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::paper));
   const QString info = outputOf(QStringLiteral("pdfinfo"), {file});
   const auto match = QRegularExpression(QStringLiteral("Page size: +([0-9.]+) x ([0-9.]+) pts")).match(info);
   ASSERT_TRUE(match.hasMatch()) << info.toStdString();
@@ -73,7 +73,7 @@ TEST(Pdf, HasThePageInTrueMillimetres) {
 
 TEST(Pdf, HoldsEveryLabelWholeAsText) {
   QTemporaryDir folder;
-  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::paper));
   const QString text =
       outputOf(QStringLiteral("pdftotext"), {QStringLiteral("-layout"), file, QStringLiteral("-")});
   for (const auto& part : samplePicture().parts) {
@@ -86,7 +86,7 @@ TEST(Pdf, HoldsEveryLabelWholeAsText) {
 
 TEST(Pdf, EmbedsItsFontAndNoPicture) {
   QTemporaryDir folder;
-  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::paper));
   const QString fonts = outputOf(QStringLiteral("pdffonts"), {file});
   const QStringList lines = fonts.split(QLatin1Char('\n'), Qt::SkipEmptyParts).mid(2);
   EXPECT_EQ(lines.size(), 2) << fonts.toStdString();
@@ -99,12 +99,12 @@ TEST(Pdf, EmbedsItsFontAndNoPicture) {
 
 TEST(Pdf, LooksLikeThePng) {
   QTemporaryDir folder;
-  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::light));
+  const QString file = written(folder, QStringLiteral("a.pdf"), *pdfOf(samplePicture(), Palette::paper));
   outputOf(QStringLiteral("pdftoppm"),
            {QStringLiteral("-r"), QStringLiteral("150"), QStringLiteral("-png"),
             QStringLiteral("-singlefile"), file, folder.filePath(QStringLiteral("a"))});
   const QImage pdf = QImage(folder.filePath(QStringLiteral("a.png"))).convertToFormat(QImage::Format_RGB32);
-  const QImage png = QImage::fromData(*pngOf(samplePicture(), Palette::light, 150), "PNG");
+  const QImage png = QImage::fromData(*pngOf(samplePicture(), Palette::paper, 150), "PNG");
   ASSERT_NEAR(pdf.width(), png.width(), 1);
   ASSERT_NEAR(pdf.height(), png.height(), 1);
   int far = 0;

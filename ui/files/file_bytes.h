@@ -1,0 +1,28 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/words/problem.h"
+
+#include <string>
+#include <string_view>
+
+namespace planewright {
+
+/// The bytes of a file, at most `most` and one more, so that a reader sees that it is too large.
+Result<std::string> bytesOf(const std::string& path, std::size_t most);
+
+/// The same from an open descriptor; `place` names it in a Problem.
+Result<std::string> bytesFrom(int descriptor, std::size_t most, const std::string& place);
+
+/// Writes a file aside in its folder, syncs it and puts it in the place of the old one: at every moment the
+/// old or the new bytes stand there whole. A link stays a link and the old file's permissions stay. What is
+/// no plain file (a pipe, a device) is written to directly.
+Result<void> writeAside(const std::string& path, std::string_view bytes);
+
+/// Writes all bytes to an open descriptor; `place` names it in a Problem.
+Result<void> writeTo(int descriptor, std::string_view bytes, const std::string& place);
+
+/// True when both paths lead to one existing file.
+bool isSameFile(const std::string& a, const std::string& b);
+
+} // namespace planewright
