@@ -1,0 +1,74 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+// Values printed in textbooks, each named with its place and basis in resources/checks.
+#include "core/evidence/evidence.h"
+
+#include <gtest/gtest.h>
+
+#include <cmath>
+#include <fstream>
+#include <map>
+
+namespace planewright {
+namespace {
+
+std::vector<std::string> linesOf(const std::string& name) {
+  std::ifstream file(std::string(PLANEWRIGHT_TESTS_DIR) + "/../resources/checks/" + name);
+  std::vector<std::string> lines;
+  for (std::string line; std::getline(file, line);)
+    lines.push_back(line);
+  return lines;
+}
+
+std::vector<CheckResult> results() {
+  auto checks = publishedChecks();
+  EXPECT_TRUE(checks) << (checks ? "" : plain(checks.error().front()));
+  return checks ? *std::move(checks) : std::vector<CheckResult>{};
+}
+
+TEST(Published, everyRowOfTheFileIsRecomputedInItsOrder) {
+  const std::vector<std::string> lines = linesOf("plane_stress_transform.csv");
+  const std::vector<CheckResult> checks = results();
+  ASSERT_EQ(lines.size(), 123u);
+  ASSERT_EQ(checks.size(), lines.size() - 1);
+  for (std::size_t i = 0; i < checks.size(); ++i)
+    EXPECT_EQ(checks[i].id, lines[i + 1].substr(0, lines[i + 1].find(',')));
+}
+
+TEST(Published, everyValueAgrees) {
+  for (const CheckResult& check : results())
+    EXPECT_TRUE(check.agrees) << check.id << " " << check.quantity << " printed " << check.printed.value_or(0)
+                              << ", computed " << check.computed << " (" << check.source << ", "
+                              << check.locator << "; " << check.basis << ")";
+}
+
+TEST(Published, rowsAreJudgedAsTheirStatusSays) {
+  std::map<CheckStatus, int> count;
+  for (const CheckResult& check : results())
+    ++count[check.status];
+  EXPECT_EQ(count[CheckStatus::ok], 106);
+  EXPECT_EQ(count[CheckStatus::lastDigit], 5);
+  EXPECT_EQ(count[CheckStatus::sign], 6);
+  EXPECT_EQ(count[CheckStatus::noPrintedValue], 5);
+}
+
+// The rows that invite a mistake of sign: here the conventions of this program give the other one.
+TEST(Published, whereASourceHasAnotherSignOursIsTheOpposite) {
+  for (const CheckResult& check : results())
+    if (check.status == CheckStatus::sign) {
+      EXPECT_LT(check.computed * check.printed.value(), 0) << check.id;
+    }
+}
+
+TEST(Published, ownArithmeticBesideEveryRowAgreesToItsDigits) {
+  for (const CheckResult& check : results())
+    EXPECT_NEAR(check.computed, check.recomputed, 1e-9 * std::max(1.0, std::abs(check.recomputed)))
+        << check.id << " " << check.quantity;
+}
+
+TEST(Published, everyRowNamesSourcePlaceAndBasis) {
+  for (const CheckResult& check : results())
+    EXPECT_FALSE(check.source.empty() || check.locator.empty() || check.basis.empty()) << check.id;
+}
+
+} // namespace
+} // namespace planewright
