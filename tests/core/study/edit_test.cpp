@@ -1,0 +1,136 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/edit.h"
+
+#include <gtest/gtest.h>
+
+namespace planewright {
+namespace {
+
+const Place sx{Spot::sx, "P1", "G"};
+const Place angle{Spot::lineAngle, "P1", {}};
+const std::string sum = "1.35 G + 1.5 S";
+
+Study with(const Study& study, const Edits& edits) {
+  const Result<Study> after = edited(study, edits);
+  EXPECT_TRUE(after) << plain(after.error());
+  return after.value_or(study);
+}
+
+Problem refused(const Study& study, const Edits& edits) {
+  const Result<Study> after = edited(study, edits);
+  EXPECT_FALSE(after);
+  return after ? Problem{} : after.error();
+}
+
+/// Two cases, a combination of both, two points, a watched plane.
+Study richStudy() {
+  return with(newStudy(),
+              {Insert{{Spot::loadCase, "S", {}}, {}}, Insert{{Spot::combination, sum, {}}, {}},
+               Insert{{Spot::factor, sum, "G"}, {}}, Type{{Spot::factor, sum, "G"}, "1.35"},
+               Insert{{Spot::factor, sum, "S"}, {}}, Type{{Spot::factor, sum, "S"}, "1.5"},
+               Insert{{Spot::caseStress, "P1", "S"}, {}}, Insert{{Spot::point, "P2", {}}, {}},
+               Insert{{Spot::plane, "P1", "scarf"}, {}}, Type{{Spot::shownPoint, {}, {}}, "P2"},
+               Type{{Spot::shownCombination, {}, {}}, sum}, Type{{Spot::caseExcludes, "S", {}}, "G"}});
+}
+
+TEST(Edit, aBareNumberIsCompletedSoThatAChangeOfUnitChangesNoStress) {
+  const Study typed = with(newStudy(), {Type{sx, "-2.1"}});
+  EXPECT_EQ(textAt(typed, sx), "-2.1 MPa");
+  const Study inPsi = with(typed, {Type{{Spot::unitStress, {}, {}}, "psi"}});
+  EXPECT_EQ(textAt(inPsi, sx), "-2.1 MPa");
+  EXPECT_EQ(textAt(with(inPsi, {Type{sx, "300"}}), sx), "300 psi");
+}
+
+TEST(Edit, theTypedTextIsKept) {
+  const Study study = with(newStudy(), {Type{sx, "18.6 kN/(90 mm*240 mm)"}, Type{angle, "1 in 10"}});
+  EXPECT_EQ(textAt(study, sx), "18.6 kN/(90 mm*240 mm)");
+  EXPECT_EQ(textAt(study, angle), "1 in 10");
+}
+
+TEST(Edit, aTextThatDoesNotReadIsRefusedWithItsPlace) {
+  const Problem problem = refused(newStudy(), {Type{sx, "12 kN"}});
+  EXPECT_EQ(problem.place, "points/P1/stress/G/sx");
+  EXPECT_FALSE(problem.what.empty());
+}
+
+TEST(Edit, whatCannotBeMeantIsRefused) {
+  EXPECT_FALSE(refused(newStudy(), {Type{sx, "1e101 MPa"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{angle, "1e7 deg"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineTolerance, "P1", {}}, "-3 deg"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineKind, "P1", {}}, "Grain"}}).mend.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::unitStress, {}, {}}, "kN"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineName, "P1", {}}, "  "}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::pointNote, "P1", {}}, "\xC3\x28"}}).what.empty());
+}
+
+TEST(Edit, ofSeveralEditsAllAreTakenOrNone) {
+  const Study before = newStudy();
+  EXPECT_FALSE(edited(before, Edits{Type{sx, "5"}, Type{sx, "five"}}));
+  EXPECT_EQ(before, newStudy());
+}
+
+TEST(Edit, anEmptyToleranceMeansNone) {
+  const Place tolerance{Spot::lineTolerance, "P1", {}};
+  const Study study = with(newStudy(), {Type{tolerance, "3"}});
+  EXPECT_EQ(textAt(study, tolerance), "3 deg");
+  EXPECT_EQ(textAt(with(study, {Type{tolerance, " "}}), tolerance), "");
+}
+
+TEST(Edit, aCaseTakesItsFactorsAndStressesAlongWhenItGoes) {
+  const Study study = with(richStudy(), {Remove{{Spot::loadCase, "S", {}}}});
+  EXPECT_EQ(study.cases.size(), 1U);
+  EXPECT_EQ(study.combinations.front().factors.size(), 1U);
+  EXPECT_EQ(study.points.front().stress.size(), 1U);
+  EXPECT_TRUE(problemsIn(study).empty());
+}
+
+TEST(Edit, aRenamedThingIsFollowedEverywhere) {
+  const Study study = with(
+      richStudy(), {Rename{{Spot::loadCase, "S", {}}, "W"}, Rename{{Spot::loadCase, "G", {}}, "A"},
+                    Rename{{Spot::point, "P2", {}}, "heel"}, Rename{{Spot::combination, sum, {}}, "ULS"}});
+  EXPECT_EQ(study.combinations.front().factors.front().caseId, "A");
+  EXPECT_EQ(study.points.front().stress.back().caseId, "W");
+  EXPECT_EQ(study.cases.back().excludes, std::vector<std::string>{"A"});
+  EXPECT_EQ(study.shown, (Shown{"heel", "ULS"}));
+  EXPECT_TRUE(problemsIn(study).empty());
+}
+
+TEST(Edit, namesStayUniqueAndNeeded) {
+  EXPECT_FALSE(refused(richStudy(), {Rename{{Spot::loadCase, "S", {}}, "G"}}).mend.empty());
+  EXPECT_FALSE(refused(richStudy(), {Insert{{Spot::plane, "P1", "scarf"}, {}}}).mend.empty());
+  EXPECT_FALSE(refused(newStudy(), {Remove{{Spot::loadCase, "G", {}}}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Remove{{Spot::point, "P1", {}}}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::shownPoint, {}, {}}, "P9"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Insert{{Spot::caseStress, "P1", "Q"}, {}}}).what.empty());
+}
+
+TEST(Edit, movingChangesTheOrderOnly) {
+  const Study study = with(richStudy(), {Move{{Spot::loadCase, "S", {}}, 0}});
+  EXPECT_EQ(study.cases.front().id, "S");
+  EXPECT_EQ(study.cases.back().id, "G");
+  EXPECT_FALSE(edited(study, Edit{Move{{Spot::loadCase, "S", {}}, 2}}));
+}
+
+TEST(Edit, theLineComesAndGoes) {
+  const Place line{Spot::line, "P1", {}};
+  const Study without = with(newStudy(), {Remove{line}});
+  EXPECT_FALSE(without.points.front().line);
+  EXPECT_FALSE(textAt(without, angle));
+  EXPECT_FALSE(edited(without, Edit{Type{angle, "5"}}));
+  const Study again = with(without, {Insert{line, {}}, Type{angle, "5"}});
+  EXPECT_EQ(textAt(again, angle), "5 deg");
+  EXPECT_FALSE(edited(again, Edit{Insert{line, {}}}));
+  EXPECT_EQ(with(again, {Rename{line, "seam"}}).points.front().line->name, "seam");
+}
+
+TEST(Study, aTextWithoutItsUnitIsAProblemOfTheStudy) {
+  Study study = newStudy();
+  study.points.front().stress.front().sx = "-2.1";
+  const Problems problems = problemsIn(study);
+  ASSERT_EQ(problems.size(), 1U);
+  EXPECT_EQ(problems.front().place, "points/P1/stress/G/sx");
+  EXPECT_NE(plain(problems.front()).find("-2.1 MPa"), std::string::npos);
+}
+
+} // namespace
+} // namespace planewright
