@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/lexer.h"
 
-#include "core/quantity/utf8.h"
+#include "core/words/utf8.h"
 
 #include <cassert>
 

@@ -2,7 +2,7 @@
 #include "core/quantity/writing_problems.h"
 
 #include "core/quantity/nearest.h"
-#include "core/quantity/utf8.h"
+#include "core/words/utf8.h"
 
 #include <algorithm>
 

@@ -1,64 +1,84 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/words/utf8.h"
 
-#include <array>
+#include <algorithm>
 
 namespace planewright {
 
 namespace {
 
-struct Form {
-  unsigned char least, greatest; // of the first byte
-  std::size_t length;
-  unsigned char secondLeast, secondGreatest;
+struct Lead {
+  std::size_t bytes;
+  char32_t bits;
+  char32_t least; ///< smallest code point that may take this many bytes
 };
-// The table of well-formed sequences of the Unicode Standard, section 3.9 (from memory).
-constexpr std::array forms = {
-    Form{0x00, 0x7F, 1, 0x80, 0xBF}, Form{0xC2, 0xDF, 2, 0x80, 0xBF}, Form{0xE0, 0xE0, 3, 0xA0, 0xBF},
-    Form{0xE1, 0xEC, 3, 0x80, 0xBF}, Form{0xED, 0xED, 3, 0x80, 0x9F}, Form{0xEE, 0xEF, 3, 0x80, 0xBF},
-    Form{0xF0, 0xF0, 4, 0x90, 0xBF}, Form{0xF1, 0xF3, 4, 0x80, 0xBF}, Form{0xF4, 0xF4, 4, 0x80, 0x8F}};
 
-bool follows(std::string_view text, const Form& form) {
-  if (text.size() < form.length)
-    return false;
-  for (std::size_t i = 1; i < form.length; ++i) {
-    const auto byte = static_cast<unsigned char>(text[i]);
-    const bool second = i == 1;
-    if (byte < (second ? form.secondLeast : 0x80) || byte > (second ? form.secondGreatest : 0xBF))
-      return false;
-  }
-  return true;
+std::optional<Lead> leadOf(unsigned char byte) {
+  if (byte < 0x80)
+    return Lead{1, byte, 0};
+  if (byte >= 0xC2 && byte < 0xE0)
+    return Lead{2, byte & 0x1Fu, 0x80};
+  if (byte >= 0xE0 && byte < 0xF0)
+    return Lead{3, byte & 0x0Fu, 0x800};
+  if (byte >= 0xF0 && byte < 0xF5)
+    return Lead{4, byte & 0x07u, 0x10000};
+  return std::nullopt;
 }
 
 } // namespace
 
+std::optional<CodePoint> codePointAt(std::string_view text, std::size_t offset) {
+  if (offset >= text.size())
+    return std::nullopt;
+  const auto lead = leadOf(static_cast<unsigned char>(text[offset]));
+  if (!lead || text.size() - offset < lead->bytes)
+    return std::nullopt;
+  char32_t value = lead->bits;
+  for (std::size_t i = 1; i < lead->bytes; ++i) {
+    const auto byte = static_cast<unsigned char>(text[offset + i]);
+    if ((byte & 0xC0) != 0x80)
+      return std::nullopt;
+    value = (value << 6) | (byte & 0x3Fu);
+  }
+  const bool surrogate = value >= 0xD800 && value <= 0xDFFF;
+  if (value < lead->least || surrogate || value > 0x10FFFF)
+    return std::nullopt;
+  return CodePoint{value, lead->bytes};
+}
+
+std::optional<std::size_t> invalidUtf8In(std::string_view text) {
+  for (std::size_t offset = 0; offset < text.size();) {
+    const auto point = codePointAt(text, offset);
+    if (!point)
+      return offset;
+    offset += point->bytes;
+  }
+  return std::nullopt;
+}
+
 std::size_t utf8Length(std::string_view text) {
-  if (text.empty())
-    return 0;
-  const auto first = static_cast<unsigned char>(text.front());
-  for (const Form& form : forms)
-    if (first >= form.least && first <= form.greatest)
-      return follows(text, form) ? form.length : 0;
-  return 0;
+  const auto point = codePointAt(text, 0);
+  return point ? point->bytes : 0;
 }
 
 bool isUtf8(std::string_view text) {
-  while (!text.empty()) {
-    const std::size_t length = utf8Length(text);
-    if (length == 0)
-      return false;
-    text.remove_prefix(length);
-  }
-  return true;
+  return !invalidUtf8In(text);
 }
 
-std::size_t codePoints(std::string_view text) {
-  std::size_t count = 0;
-  for (; !text.empty(); ++count) {
-    const std::size_t length = utf8Length(text);
-    text.remove_prefix(length == 0 ? 1 : length);
+std::size_t codePointsIn(std::string_view text) {
+  const auto starts = std::count_if(
+      text.begin(), text.end(), [](char byte) { return (static_cast<unsigned char>(byte) & 0xC0) != 0x80; });
+  return static_cast<std::size_t>(starts);
+}
+
+std::string hexadecimal(unsigned long value, std::size_t digits) {
+  std::string result;
+  while (value != 0 || result.size() < digits) {
+    result.push_back("0123456789ABCDEF"[value & 15]);
+    value >>= 4;
   }
-  return count;
+  std::reverse(result.begin(), result.end());
+  return result;
 }
 
 } // namespace planewright

@@ -2,7 +2,7 @@
 #include "tests/support/approved.h"
 #include "tests/support/expression_corpus.h"
 
-#include "core/quantity/utf8.h"
+#include "core/words/utf8.h"
 
 #include <charconv>
 #include <cmath>
