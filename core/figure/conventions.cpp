@@ -1,0 +1,76 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/figure/conventions.h"
+
+#include "core/quantity/format.h"
+#include "core/table/table.h"
+
+namespace planewright {
+
+namespace {
+
+Text senseOf(const Study& study) {
+  return study.convention.positive == Positive::tension ? PW_TEXT("Figure", "Tension positive.")
+                                                        : PW_TEXT("Figure", "Compression positive.");
+}
+
+Text shearSenseOf(const Study& study) {
+  return study.convention.shearAxis == ShearAxis::tensorDown
+             ? PW_TEXT(
+                   "Figure",
+                   "τ_{nt} acts on the n face, positive towards t (n turned by +90°), and is drawn + down: "
+                   "turning the plane by θ turns its point by 2θ in the same sense.")
+             : PW_TEXT("Figure",
+                       "τ_{nt} acts on the n face, positive towards t (n turned by +90°), and is drawn + up: "
+                       "turning the plane by θ turns its point by 2θ the other way.");
+}
+
+Text lineOf(const LineReading& line) {
+  const Text base = PW_TEXT("Figure", "Line “%1” (%2): φ = %3, given as %4")
+                        .with(line.name)
+                        .with(labelOf(line.kind))
+                        .with(shownDegrees(line.angle.value, angleDecimals))
+                        .with(line.typed);
+  if (line.tolerance == Angle())
+    return PW_TEXT("Figure", "%1, without tolerance.").with(base);
+  return PW_TEXT("Figure", "%1, ± %2.").with(base).with(shownDegrees(line.tolerance, angleDecimals));
+}
+
+Text thirdStressOf(const Study& study, const StateReading& state) {
+  return PW_TEXT("Figure", "With σ_{3} = %1 the greatest shear on any plane is %2 %3.")
+      .with(state.sz == 0 ? "0" : shownStress(study, state, state.sz) + " " + study.units.stress)
+      .with(shownStress(study, state, state.circle.tauAbsMax))
+      .with(study.units.stress);
+}
+
+Text missingOf(const StateReading& state) {
+  std::string cases;
+  for (const std::string& id : state.missing)
+    cases += (cases.empty() ? "" : ", ") + id;
+  return PW_TEXT("Figure", "No stresses are given for %1: counted as 0.").with(cases);
+}
+
+} // namespace
+
+std::vector<Text> conventionsOf(const Study& study, const Readout& readout) {
+  const StateReading& state = readout.state();
+  std::vector<Text> sentences;
+  for (const LineReading& line : readout.lines)
+    sentences.push_back(lineOf(line));
+  if (!state.circle.theta1)
+    sentences.push_back(PW_TEXT("Figure", "The circle is a point: every direction is principal."));
+  sentences.push_back(thirdStressOf(study, state));
+  if (!state.missing.empty())
+    sentences.push_back(missingOf(state));
+  sentences.push_back(senseOf(study));
+  sentences.push_back(PW_TEXT("Figure", "Angles counter-clockwise from +x, seen from +z."));
+  if (readout.axes != Angle())
+    sentences.push_back(PW_TEXT("Figure", "The elements are drawn with x inclined by %1.")
+                            .with(shownDegrees(readout.axes, angleDecimals)));
+  sentences.push_back(shearSenseOf(study));
+  sentences.push_back(PW_TEXT("Figure", "All arrows in one scale."));
+  sentences.push_back(PW_TEXT("Figure", "Stresses at one point, not a design check: the code in force and a "
+                                        "licensed engineer decide."));
+  return sentences;
+}
+
+} // namespace planewright

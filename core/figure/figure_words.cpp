@@ -1,0 +1,156 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/figure/figure_words.h"
+
+#include "core/figure/conventions.h"
+#include "core/figure/text_lines.h"
+#include "core/quantity/format.h"
+#include "core/table/table.h"
+#include "core/words/version.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+constexpr std::size_t mostTitleLines = 4;
+constexpr double titlePitch = 1.25; // ems
+constexpr double wordPitch = 1.42;
+
+const std::string& subjectOf(const Setting& setting) {
+  const Point* point = findPoint(setting.study, setting.readout.point);
+  return point && !point->note.empty() ? point->note : setting.study.title.subject;
+}
+
+Text headingOf(const Setting& setting) {
+  const std::string& subject = subjectOf(setting);
+  if (subject.empty())
+    return verbatim(setting.readout.point);
+  return PW_TEXT("Figure", "%1 — %2").with(setting.readout.point).with(subject);
+}
+
+std::vector<Runs> atMost(std::vector<Runs> lines, std::size_t most, double width, double size, bool bold) {
+  if (lines.size() <= most)
+    return lines;
+  Runs last = lines[most - 1];
+  last.push_back({" " + plain(lines[most]), false});
+  lines.resize(most);
+  lines.back() = elided(last, width, size, bold);
+  return lines;
+}
+
+/// Sets lines one under the other and returns the base line of the last.
+double setLines(Picture& picture, const std::vector<Runs>& lines, Vec first, double pitch, double size,
+                Align align, Role role, bool bold) {
+  double y = first.y - pitch;
+  for (const Runs& line : lines) {
+    y += pitch;
+    setWords(picture, {first.x, y}, line, size, align, role, bold);
+  }
+  return y;
+}
+
+void append(Runs& text, const Runs& more) {
+  if (!text.empty())
+    text.push_back({" ", false});
+  text.insert(text.end(), more.begin(), more.end());
+}
+
+/// "Planewright 0.1.0 · chord-notch".
+Runs signatureOf(const Setting& setting) {
+  std::string words;
+  if (setting.order.parts.version)
+    words = "Planewright " + std::string(programVersion());
+  if (!setting.order.studyName.empty())
+    words += (words.empty() ? "" : " · ") + setting.order.studyName;
+  return words.empty() ? Runs{} : Runs{{words, false}};
+}
+
+double drawConventions(Picture& picture, const Setting& setting, double left, double right, double top) {
+  const double size = setting.small;
+  Runs text;
+  for (const Text& sentence : conventionsOf(setting.study, setting.readout))
+    append(text, setting.runsOf(sentence));
+  const std::vector<Runs> lines = brokenLines(text, right - left, size, false);
+  double y = setLines(picture, lines, {left, top + 1.35 * size}, wordPitch * size, size, Align::start,
+                      Role::soft, false);
+  const Runs signature = elided(signatureOf(setting), right - left, size, false);
+  if (signature.empty())
+    return y;
+  const double taken = setting.widthOf(lines.back(), size) + setting.widthOf(signature, size);
+  if (taken + 1.5 * size > right - left)
+    y += wordPitch * size;
+  setWords(picture, {right, y}, signature, size, Align::end, Role::soft);
+  return y;
+}
+
+} // namespace
+
+std::string figureTitle(const Setting& setting) {
+  const std::string heading = plain(headingOf(setting), setting.order.translate);
+  return heading + ", " + setting.readout.state().combination;
+}
+
+std::string figureDescription(const Setting& setting) {
+  const StateReading& state = setting.readout.state();
+  const auto shown = [&](double stress) {
+    return shownStress(setting.study, state, stress) + " " + setting.study.units.stress;
+  };
+  Text words =
+      PW_TEXT("Figure", "Plane stress: σ_{x} %1, σ_{y} %2, τ_{xy} %3. Principal stresses %4 and %5. On the "
+                        "plane with its normal at %6: σ_{n} %7, τ_{nt} %8.")
+          .with(shown(state.stress.sx))
+          .with(shown(state.stress.sy))
+          .with(shown(state.stress.txy))
+          .with(shown(state.circle.s1))
+          .with(shown(state.circle.s2))
+          .with(shownDegrees(setting.readout.reading.value, angleDecimals))
+          .with(shown(state.reading.sn))
+          .with(shown(state.reading.tnt));
+  return plain(words, setting.order.translate);
+}
+
+double drawTitle(Picture& picture, const Setting& setting, double left, double right) {
+  const FigureParts& parts = setting.order.parts;
+  if (!parts.title && !parts.combination)
+    return 0.4 * setting.text;
+  const double width = right - left;
+  const Runs heading = parts.title ? setting.runsOf(headingOf(setting)) : Runs{};
+  const Runs combination = parts.combination ? Runs{{setting.readout.state().combination, false}} : Runs{};
+  double y = 0.25 * setting.title;
+  const bool oneRow = setting.widthOf(heading, setting.title, true) +
+                          setting.widthOf(combination, setting.text) + 2 * setting.text <=
+                      width;
+  if (oneRow) {
+    y += 0.85 * setting.title;
+    setWords(picture, {left, y}, heading, setting.title, Align::start, Role::ink, true);
+    setWords(picture, {right, y}, combination, setting.text, Align::end);
+  } else {
+    const auto lines =
+        atMost(brokenLines(heading, width, setting.title, true), mostTitleLines, width, setting.title, true);
+    if (!lines.empty())
+      y = setLines(picture, lines, {left, y + 0.85 * setting.title}, titlePitch * setting.title,
+                   setting.title, Align::start, Role::ink, true);
+    const auto below = atMost(brokenLines(combination, width, setting.text, false), mostTitleLines, width,
+                              setting.text, false);
+    if (!below.empty())
+      y = setLines(picture, below, {left, y + 1.35 * setting.text}, titlePitch * setting.text, setting.text,
+                   Align::start, Role::ink, false);
+  }
+  y += 0.5 * setting.title;
+  setLine(picture, {left, y}, {right, y}, {Role::ink, setting.medium, Dash::solid});
+  return y + 0.6 * setting.text;
+}
+
+double drawClosing(Picture& picture, const Setting& setting, double left, double right, double top) {
+  const double size = setting.text;
+  double y = drawConventions(picture, setting, left, right, top);
+  const std::vector<Runs> caption =
+      brokenLines(setting.runsOf(setting.order.caption), right - left, size, false);
+  if (!caption.empty())
+    y = setLines(picture, caption, {left, y + 1.9 * size}, wordPitch * size, size, Align::start, Role::ink,
+                 false);
+  return y + 0.45 * size;
+}
+
+} // namespace planewright
