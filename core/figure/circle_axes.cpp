@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/circle_axes.h"
 
-#include "core/quantity/format.h"
 #include "core/table/table.h"
 
 #include <cmath>
@@ -47,10 +46,10 @@ void drawSigmaTicks(const Plot& plot) {
   const Box& frame = plot.fit.frame;
   const double from = plot.meanInUnit() + (frame.left - plot.fit.centre.x) / plot.perUnit();
   const double to = plot.meanInUnit() + (frame.right - plot.fit.centre.x) / plot.perUnit();
-  for (const double tick : ticksBetween(plot.fit.steps, from, to)) {
+  for (const double tick : ticksBetween(plot.fit.across, from, to)) {
     const double x = plot.across(tick);
     setLine(plot.picture, {x, frame.top}, {x, frame.bottom}, {Role::grid, plot.setting.grid, Dash::solid});
-    const Text number = verbatim(shownNumber(tick, plot.fit.steps.decimals));
+    const Text number = verbatim(tickWords(tick, plot.fit.across));
     const double half = plot.setting.widthOf(plot.setting.runsOf(number), plot.setting.text) / 2;
     if (x + half <= frame.right)
       plot.words({x, frame.bottom + firstRow * plot.setting.text}, number, Align::middle, Role::soft);
@@ -61,13 +60,13 @@ void drawTauTicks(const Plot& plot) {
   const Box& frame = plot.fit.frame;
   const double reach = (frame.bottom - frame.top) / 2 / plot.perUnit();
   const double text = plot.setting.text;
-  for (const double tick : ticksBetween(plot.fit.steps, -reach, reach)) {
+  for (const double tick : ticksBetween(plot.fit.upright, -reach, reach)) {
     const double y = plot.down(tick);
     setLine(plot.picture, {frame.left, y}, {frame.right, y}, {Role::grid, plot.setting.grid, Dash::solid});
     const bool free = y - frame.top > capHeight / 2 * text && frame.bottom - y > capHeight / 2 * text;
     if (free)
       plot.words({frame.left - tickGap * text, y + capHeight / 2 * text},
-                 verbatim(shownNumber(tick, plot.fit.steps.decimals)), Align::end, Role::soft);
+                 verbatim(tickWords(tick, plot.fit.upright)), Align::end, Role::soft);
   }
 }
 

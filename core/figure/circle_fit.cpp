@@ -12,13 +12,12 @@ namespace planewright {
 namespace {
 
 // In ems of the text.
-constexpr double leaderRoom = 1.7;  ///< between circle and labels, where band arcs and leaders run
+constexpr double leaderRoom = 1.5;  ///< between circle and labels, where band arcs and leaders run
 constexpr double aboveCircle = 1.3; ///< and below it, inside the frame
 constexpr double axisGap = 0.5;     ///< between tick labels and frame
-constexpr double underFrame = 3.0;  ///< tick labels and title of the sigma axis
+constexpr double underFrame = 3.1;  ///< tick labels and title of the sigma axis
 constexpr double edgeRoom = 0.6;    ///< between the tau axis and the frame's side
 
-constexpr double leastShare = 0.42; ///< of the shorter side of the area, for the circle
 constexpr double originShare = 2.0 / 3;
 
 /// What the two columns of labels take.
@@ -90,14 +89,12 @@ void fitPoint(CircleFit& fit, const Setting& setting, double mean) {
 }
 
 void fitCircle(CircleFit& fit, const Setting& setting, const std::vector<LabelWish>& wishes,
-               const Box& area) {
+               double leastDiameter) {
   const Circle& circle = setting.readout.state().circle;
   const double text = setting.text;
-  const double shorter = std::min(area.right - area.left, area.bottom - area.top);
   const double high = fit.frame.bottom - fit.frame.top - 2 * aboveCircle * text;
-  const double leastDiameter = std::min(leastShare * shorter, high);
   const double wide = fit.frame.right - fit.frame.left - 2 * (leaderRoom + boxSide) * text;
-  const Columns columns = columnsIn(setting, wishes, wide - leastDiameter);
+  const Columns columns = columnsIn(setting, wishes, wide - std::min(leastDiameter, high));
   Across across;
   across.diameter = std::min(high, wide - columns.left - columns.right);
   across.from = fit.frame.left + boxSide * text + columns.left + leaderRoom * text + across.diameter / 2;
@@ -125,20 +122,24 @@ LabelColumns columnsBeside(const CircleFit& fit, const Setting& setting) {
   return columns;
 }
 
-/// The widest label of a tick on an axis of this reach (in the study's unit).
+/// The width of the label of the last tick up to `reach`.
 double tickWidth(const Setting& setting, const Steps& steps, double reach) {
-  const double last = steps.step * std::ceil(reach / steps.step);
-  return setting.widthOf({{shownNumber(-last, steps.decimals), false}}, setting.text);
+  const double last = steps.step * std::floor(reach / steps.step);
+  return setting.widthOf({{tickWords(-last, steps), false}}, setting.text);
 }
 
-Steps stepsOf(const CircleFit& fit, const Setting& setting) {
-  const double perUnit = fit.scale / inStressUnit(setting.study, 1);
+double unitsIn(const CircleFit& fit, const Setting& setting, double mm) {
+  return mm / fit.scale * inStressUnit(setting.study, 1);
+}
+
+void fitSteps(CircleFit& fit, const Setting& setting) {
+  const double text = setting.text;
   const double reach = std::abs(inStressUnit(setting.study, fit.mean)) +
-                       std::max(fit.frame.right - fit.frame.left, fit.frame.bottom - fit.frame.top) / perUnit;
-  Steps steps = roundSteps(3.2 * setting.text / perUnit);
-  while (tickWidth(setting, steps, reach) + 1.2 * setting.text > steps.step * perUnit)
-    steps = roundSteps(1.5 * steps.step);
-  return steps;
+                       unitsIn(fit, setting, fit.frame.right - fit.frame.left);
+  fit.upright = roundSteps(unitsIn(fit, setting, 3.2 * text));
+  fit.across = fit.upright;
+  while (unitsIn(fit, setting, tickWidth(setting, fit.across, reach) + 1.2 * text) > fit.across.step)
+    fit.across = roundSteps(1.5 * fit.across.step);
 }
 
 } // namespace
@@ -153,6 +154,10 @@ Steps roundSteps(double least) {
     }
 }
 
+std::string tickWords(double value, const Steps& steps) {
+  return shownNumber(value, value == 0 ? 0 : steps.decimals);
+}
+
 Vec CircleFit::at(const Traction& traction) const {
   return {centre.x + scale * (traction.sn - mean), centre.y + (down ? scale : -scale) * traction.tnt};
 }
@@ -161,26 +166,25 @@ bool CircleFit::showsZero() const {
   return zeroAcross() >= frame.left && zeroAcross() <= frame.right;
 }
 
-CircleFit circleFitOf(const Setting& setting, const std::vector<LabelWish>& wishes, const Box& area) {
+CircleFit circleFitOf(const Setting& setting, const std::vector<LabelWish>& wishes, const Box& area,
+                      double leastDiameter) {
   const Circle& circle = setting.readout.state().circle;
   CircleFit fit;
   fit.mean = circle.mean;
   fit.down = setting.study.convention.shearAxis == ShearAxis::tensorDown;
-  double ticks = 3 * setting.text;
+  double ticks = 0;
   // The width of the tick labels depends on the scale, which depends on the width they leave.
-  for (int round = 0; round < 3; ++round) {
+  for (int round = 0; round < 4; ++round) {
     fit.frame = {area.left + ticks + axisGap * setting.text, area.top, area.right,
                  area.bottom - underFrame * setting.text};
     fit.centre.y = (fit.frame.top + fit.frame.bottom) / 2;
     if (circle.radius > 0)
-      fitCircle(fit, setting, wishes, area);
+      fitCircle(fit, setting, wishes, leastDiameter);
     else
       fitPoint(fit, setting, circle.mean);
-    fit.steps = stepsOf(fit, setting);
-    const double perUnit = fit.scale / inStressUnit(setting.study, 1);
-    ticks = std::max(ticks, tickWidth(setting, fit.steps, (fit.frame.bottom - fit.frame.top) / 2 / perUnit));
-    if (round == 0)
-      ticks = tickWidth(setting, fit.steps, (fit.frame.bottom - fit.frame.top) / 2 / perUnit);
+    fitSteps(fit, setting);
+    const double reach = unitsIn(fit, setting, (fit.frame.bottom - fit.frame.top) / 2);
+    ticks = std::max(ticks, tickWidth(setting, fit.upright, reach));
   }
   fit.columns = columnsBeside(fit, setting);
   return fit;

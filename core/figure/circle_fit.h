@@ -14,6 +14,8 @@ struct Steps {
 };
 /// The least such step of at least `least`, which is positive.
 Steps roundSteps(double least);
+/// A multiple of the step in words; zero is "0".
+std::string tickWords(double value, const Steps& steps);
 
 /// Where a circle lies on the sheet: one scale for both axes.
 struct CircleFit {
@@ -23,7 +25,8 @@ struct CircleFit {
   double scale = 1;  ///< mm for 1 N/mm2
   double radius = 0; ///< drawn; 0 for a degenerate state
   bool down = true;  ///< tau_nt is drawn positive downwards
-  Steps steps;       ///< of both axes, in the study's unit
+  Steps across;      ///< of the sigma axis, in the study's unit
+  Steps upright;     ///< of the tau axis; wide numbers can make those of the sigma axis larger
   LabelColumns columns;
 
   Vec at(const Traction& traction) const;
@@ -36,8 +39,9 @@ struct CircleFit {
 };
 
 /// Fits the circle of the shown state into an area, between the columns of its labels: their widths come
-/// first, yet the circle keeps at least 42 % of the area's shorter side. The origin is shown where that costs
-/// less than a third of the circle's size.
-CircleFit circleFitOf(const Setting& setting, const std::vector<LabelWish>& wishes, const Box& area);
+/// first, yet the circle keeps at least `leastDiameter`. The origin is shown where that costs less than a
+/// third of the circle's size. In `wishes` only the side of a mark counts: x is its distance from the centre.
+CircleFit circleFitOf(const Setting& setting, const std::vector<LabelWish>& wishes, const Box& area,
+                      double leastDiameter);
 
 } // namespace planewright

@@ -13,6 +13,7 @@ namespace planewright {
 
 namespace {
 
+constexpr double leastShare = 0.4;        // of the panel's shorter side, for the circle
 constexpr double doubleAngleRadius = 0.3; // of the circle's
 constexpr double bandGap = 0.3;           // in ems, between circle and band
 
@@ -56,6 +57,15 @@ std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>&
                       "mark " + std::to_string(wishes.size())});
   }
   return wishes;
+}
+
+/// Puts a wish at its mark. A free text that is too long even in its short form is cut to its column.
+void place(LabelWish& wish, Vec mark, const LabelColumns& columns) {
+  constexpr double rounding = 1e-6;
+  const double width =
+      mark.x < columns.centre ? columns.leftEnd - columns.leftStart : columns.rightEnd - columns.rightStart;
+  wish.mark = mark;
+  wish.shortForm = elided(wish.shortForm, width + rounding, columns.size, wish.bold);
 }
 
 /// The tolerance of the line as thick arcs outside the circle, so that the circle stays whole.
@@ -121,18 +131,20 @@ void drawDoubleAngle(const CircleDrawing& drawing) {
            Role::reading});
 }
 
-/// "2θ" inside the circle, where it covers the least of what is drawn: near the middle of its arc first.
+/// "2θ" inside the circle, where it covers the least of what is drawn: outside its arc and within it first.
 void labelDoubleAngle(const CircleDrawing& drawing) {
   const double sweep = drawing.fit.drawnTurn(drawing.setting.readout.reading.value);
-  const double middle = drawing.drawnAngle(Angle()) + sweep / 2;
   const double text = drawing.setting.text;
+  const double arc = doubleAngleRadius * drawing.fit.radius;
   Label best;
   double least = 1e9;
-  for (const double radius : {0.3, 0.42, 0.54, 0.66})
-    for (const double turn : {0.0, 0.3, -0.3, 0.5, -0.5}) {
-      const double aside = turn * (std::abs(sweep) + 80);
-      const Vec at =
-          drawing.polar(radius * drawing.fit.radius + (radius < 0.4 ? -text : 0.0), middle + aside);
+  for (const double away : {1.0, 1.4, 1.9, 2.5, -1.0})
+    for (const double part : {0.5, 0.6, 0.4, 0.7, 0.3, 0.8, 0.2, 0.9, 0.1, 1.3, -0.3, 1.8, -0.8}) {
+      const bool outside = part < 0 || part > 1;
+      const double angle = outside ? sweep * (part > 0 ? 1 : 0) +
+                                         std::copysign(60 * (part > 0 ? part - 1 : part), sweep * part)
+                                   : sweep * part;
+      const Vec at = drawing.polar(arc + away * text, drawing.drawnAngle(Angle()) + angle);
       const Label label{at + Vec{0, capHeight / 2 * text},
                         {{"2θ", false}},
                         text,
@@ -141,7 +153,8 @@ void labelDoubleAngle(const CircleDrawing& drawing) {
                         false,
                         true,
                         "double angle"};
-      const double cost = strokesUnder(drawing.picture, boxOf(label)) + std::abs(turn) + radius;
+      const double cost = strokesUnder(drawing.picture, boxOf(label)) + std::abs(part - 0.5) +
+                          std::abs(away - 1) + (outside ? 0.5 : 0);
       if (cost < least) {
         least = cost;
         best = label;
@@ -221,9 +234,10 @@ bool drawCirclePanel(Picture& picture, const Setting& setting, const Box& area) 
     plot.top += 1.5 * text;
   }
   plot.top += tauTitleHeight * text;
-  const CircleFit fit = circleFitOf(setting, wishes, plot);
+  const CircleFit fit = circleFitOf(setting, wishes, plot,
+                                    leastShare * std::min(area.right - area.left, area.bottom - area.top));
   for (std::size_t i = 0; i < marks.size(); ++i)
-    wishes[i].mark = fit.at(marks[i].at);
+    place(wishes[i], fit.at(marks[i].at), fit.columns);
   const PlacedLabels placed = placeLabels(wishes, fit.columns);
   drawCircleAxes(picture, setting, fit);
   picture.parts.insert(picture.parts.end(), placed.leaders.begin(), placed.leaders.end());

@@ -24,10 +24,16 @@ Text shearSenseOf(const Study& study) {
                        "turning the plane by θ turns its point by 2θ the other way.");
 }
 
+/// The name, and the kind where the name does not say it.
+Text nameOf(const LineReading& line) {
+  if (line.name == wordOf(line.kind))
+    return PW_TEXT("Figure", "Line “%1”").with(line.name);
+  return PW_TEXT("Figure", "Line “%1” (%2)").with(line.name).with(labelOf(line.kind));
+}
+
 Text lineOf(const LineReading& line) {
-  const Text base = PW_TEXT("Figure", "Line “%1” (%2): φ = %3, given as %4")
-                        .with(line.name)
-                        .with(labelOf(line.kind))
+  const Text base = PW_TEXT("Figure", "%1: φ = %2, given as %3")
+                        .with(nameOf(line))
                         .with(shownDegrees(line.angle.value, angleDecimals))
                         .with(line.typed);
   if (line.tolerance == Angle())

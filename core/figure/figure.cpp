@@ -14,7 +14,7 @@ namespace planewright {
 
 namespace {
 
-constexpr double margin = 0.5; // mm at the sides
+constexpr double margin = 0.6; // mm at the sides
 
 Problem rangeProblem(const char* place, double value, const Text& what, double least, double greatest) {
   return {
@@ -77,7 +77,7 @@ void drawWide(Sheet& sheet) {
   const double unit = sheet.width() / 160;
   const bool both = sheet.parts().givenElement && sheet.parts().turnedElement;
   const double height = (both ? 96 : 70) * unit;
-  const double column = sheet.left + 62 * unit;
+  const double column = sheet.left + 58 * unit;
   std::vector<ElementPanel> panels;
   double top = sheet.bottom;
   for (const bool turned : {false, true})
@@ -95,7 +95,7 @@ void drawWide(Sheet& sheet) {
 /// Elements side by side, the circle under them.
 void drawUpright(Sheet& sheet) {
   const double unit = sheet.width() / (sheet.setting.isNarrow ? 90 : 160);
-  const std::vector<ElementPanel> panels = elementsBeside(sheet, (sheet.setting.isNarrow ? 42 : 60) * unit);
+  const std::vector<ElementPanel> panels = elementsBeside(sheet, (sheet.setting.isNarrow ? 37 : 60) * unit);
   sheet.fits = drawElementPanels(sheet.picture, sheet.setting, panels) && sheet.fits;
   if (!panels.empty())
     sheet.bottom = panels.front().area.bottom + 0.5 * sheet.setting.text;

@@ -29,6 +29,12 @@ Text headingOf(const Setting& setting) {
   return PW_TEXT("Figure", "%1 — %2").with(setting.readout.point).with(subject);
 }
 
+/// The name of the combination; a single case says that it is one.
+Text combinationOf(const Setting& setting) {
+  const std::string& name = setting.readout.state().combination;
+  return findCombination(setting.study, name) ? verbatim(name) : PW_TEXT("Figure", "case %1").with(name);
+}
+
 std::vector<Runs> atMost(std::vector<Runs> lines, std::size_t most, double width, double size, bool bold) {
   if (lines.size() <= most)
     return lines;
@@ -88,7 +94,7 @@ double drawConventions(Picture& picture, const Setting& setting, double left, do
 
 std::string figureTitle(const Setting& setting) {
   const std::string heading = plain(headingOf(setting), setting.order.translate);
-  return heading + ", " + setting.readout.state().combination;
+  return heading + ", " + plain(combinationOf(setting), setting.order.translate);
 }
 
 std::string figureDescription(const Setting& setting) {
@@ -116,7 +122,7 @@ double drawTitle(Picture& picture, const Setting& setting, double left, double r
     return 0.4 * setting.text;
   const double width = right - left;
   const Runs heading = parts.title ? setting.runsOf(headingOf(setting)) : Runs{};
-  const Runs combination = parts.combination ? Runs{{setting.readout.state().combination, false}} : Runs{};
+  const Runs combination = parts.combination ? setting.runsOf(combinationOf(setting)) : Runs{};
   double y = 0.25 * setting.title;
   const bool oneRow = setting.widthOf(heading, setting.title, true) +
                           setting.widthOf(combination, setting.text) + 2 * setting.text <=

@@ -15,6 +15,8 @@ namespace {
 /// Space between label and leader, and between labels that share a row, in ems.
 constexpr double leaderGap = 0.3;
 constexpr double rowGap = 0.6;
+/// What a width may exceed its room by, for rounding.
+constexpr double rounding = 1e-6;
 
 /// One side of the drawing while its labels find their places.
 struct Side {
@@ -171,7 +173,7 @@ Side sideOf(const std::vector<LabelWish>& wishes, const LabelColumns& columns, b
   Side side{wishes,
             isLeft,
             edge,
-            isLeft ? edge - columns.leftStart : columns.rightEnd - edge,
+            rounding + (isLeft ? edge - columns.leftStart : columns.rightEnd - edge),
             columns.top + (boxOver - capHeight / 2) * columns.size,
             columns.bottom - (boxUnderIndex + capHeight / 2) * columns.size,
             columns.size,

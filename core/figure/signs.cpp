@@ -93,8 +93,10 @@ void drawSign(Picture& picture, const PlacedSign& sign) {
   std::vector<Vec> outline = shape.outline;
   for (Vec& point : outline)
     point = sign.at + point;
-  picture.parts.push_back(
-      Path{outline, true, Pen{Role::canvas, 2 * halo + sign.stroke, Dash::solid}, Role::canvas});
+  const bool isTick = sign.sign == Sign::uprightTick || sign.sign == Sign::levelTick;
+  if (!isTick)
+    picture.parts.push_back(
+        Path{outline, true, Pen{Role::canvas, 2 * halo + sign.stroke, Dash::solid}, Role::canvas});
   picture.parts.push_back(Path{outline, true, shape.filled ? std::nullopt : std::optional(pen), fill});
 }
 
