@@ -5,6 +5,7 @@
 #include "core/figure/signs.h"
 #include "core/figure/strokes.h"
 #include "core/figure/text_lines.h"
+#include "core/quantity/format.h"
 
 #include <algorithm>
 #include <cmath>
@@ -54,7 +55,7 @@ std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>&
                       role,
                       bold,
                       mark.priority,
-                      "mark " + std::to_string(wishes.size())});
+                      "mark " + exactNumber(static_cast<double>(wishes.size()))});
   }
   return wishes;
 }

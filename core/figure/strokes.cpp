@@ -38,6 +38,9 @@ int countUnder(const Path& path, const Box& box) {
 
 int countUnder(const Arc& arc, const Box& box) {
   constexpr int pieces = 90;
+  if (!overlap(box, {arc.centre.x - arc.radius, arc.centre.y - arc.radius, arc.centre.x + arc.radius,
+                     arc.centre.y + arc.radius}))
+    return 0;
   const auto at = [&](int i) {
     const CosSin d = cosSin(Angle::fromDegrees(arc.start + arc.sweep * i / pieces));
     return arc.centre + arc.radius * Vec{d.cos, -d.sin};
