@@ -1,0 +1,153 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/record/study_file.h"
+
+#include <rapidcheck.h>
+
+namespace planewright {
+
+/// Shows a failing study as its file.
+inline void showValue(const Study& study, std::ostream& out) {
+  out << writeStudy(study);
+}
+
+namespace study_gen {
+
+using std::string;
+
+inline string oneOf(std::initializer_list<const char*> words) {
+  return *rc::gen::elementOf(std::vector<string>(words.begin(), words.end()));
+}
+
+inline int upTo(int most) {
+  return *rc::gen::inRange(0, most + 1);
+}
+
+template <class Enum>
+Enum anyWord() {
+  return (*rc::gen::elementOf(namesOf<Enum>())).value;
+}
+
+/// Names with what trips writers of files and paths; the number keeps them apart.
+inline string anyName(int number) {
+  return oneOf({"P", "G", "seat cut", "1.35 G + 1.5 S", "a/b", "~0", "~1/", "“q\"", "back\\slash", "σ𝜎",
+                "x,y;z", "=1", "%1", "_{n}", "{\"a\":[", "\xC2\x85", "-", "points/P1"}) +
+         std::to_string(number);
+}
+
+inline string anyFreeText() {
+  return oneOf({"", "", "plain", "two\nlines\tand a tab", "\"quoted\" \\ / ~", "Grüße σ 𝜎 \xE2\x80\xA8 end",
+                " blank ends ", "{\"format\": 1}", "null", "%1 _{x}"});
+}
+
+inline string anyStressText() {
+  if (upTo(2) == 0)
+    return oneOf({"0 MPa", "1.5*12 kN/(90 mm*240 mm)",
+                  "-18.6 kN/(90 mm*240 mm) - 3.2 kN*m/(90 mm*(240 mm)^2/6)", "0.4*sqrt(3) MPa",
+                  "12 kN / 100 mm^2", "(2+3) MPa", "1e-30 GPa", "-1.2e20 Pa", "3 N/mm²", "1450 psi"});
+  const int thousandths = *rc::gen::inRange(-100000, 100001);
+  return std::to_string(thousandths / 1000) + "." + std::to_string(std::abs(thousandths % 1000)) +
+         oneOf({" MPa", " kPa", " psi", " N/mm^2"});
+}
+
+inline string anyAngleText() {
+  if (upTo(2) == 0)
+    return oneOf(
+        {"0 deg", "90 deg", "-90 deg", "45 deg", "(pi/6) rad", "30 deg + 0.1 rad", "360 deg", "-22.5°"});
+  return std::to_string(*rc::gen::inRange(-360, 361)) + "." + std::to_string(upTo(999)) + " deg";
+}
+
+inline string anyToleranceText(bool slopes) {
+  if (slopes && upTo(3) == 0)
+    return oneOf({"1 in 20", "1:15"});
+  return oneOf({"", "", "0 deg", "3 deg", "0.05 rad", "95 deg"});
+}
+
+inline string anyLineAngleText() {
+  return upTo(2) == 0 ? oneOf({"1 in 12", "-1 in 8", "1:12", "8 %"}) : anyAngleText();
+}
+
+inline Title anyTitle() {
+  return {anyFreeText(), anyFreeText(), anyFreeText(), anyFreeText(),
+          anyFreeText(), anyFreeText(), anyFreeText(), anyFreeText()};
+}
+
+inline Units anyUnits() {
+  return {oneOf({"MPa", "kPa", "psi", "ksi", "N/mm^2"}), oneOf({"N", "kN", "lbf"}), oneOf({"mm", "m", "in"}),
+          oneOf({"kN*m", "N*mm", "lbf*in"})};
+}
+
+inline std::vector<LoadCase> anyCases() {
+  std::vector<LoadCase> cases;
+  const int count = 1 + upTo(3);
+  for (int i = 0; i < count; ++i) {
+    LoadCase one{anyName(i), anyFreeText(), anyWord<Nature>(), anyWord<Duration>(), {}};
+    if (i > 0 && upTo(2) == 0)
+      one.excludes.push_back(cases[static_cast<std::size_t>(upTo(i - 1))].id);
+    cases.push_back(one);
+  }
+  return cases;
+}
+
+inline std::vector<Combination> anyCombinations(const std::vector<LoadCase>& cases) {
+  std::vector<Combination> combinations;
+  const int count = upTo(3);
+  for (int i = 0; i < count; ++i) {
+    Combination one{anyName(i), {}, anyWord<Basis>()};
+    for (const LoadCase& loadCase : cases)
+      if (upTo(3) > 0)
+        one.factors.push_back({loadCase.id, oneOf({"1", "1.35", "1.5", "0", "-1", "1.5*0.7", "0.9"})});
+    combinations.push_back(one);
+  }
+  return combinations;
+}
+
+inline Point anyPoint(int number, const std::vector<LoadCase>& cases) {
+  Point point;
+  point.name = anyName(number);
+  point.note = anyFreeText();
+  point.axes = anyAngleText();
+  for (const LoadCase& loadCase : cases)
+    if (upTo(4) > 0)
+      point.stress.push_back({loadCase.id, anyStressText(), anyStressText(), anyStressText(),
+                              upTo(3) == 0 ? anyStressText() : "0 MPa"});
+  if (upTo(3) > 0)
+    point.line = Line{anyName(0), anyWord<LineKind>(), anyLineAngleText(), anyToleranceText(true)};
+  const int planes = upTo(3);
+  for (int i = 0; i < planes; ++i)
+    point.planes.push_back({anyName(i), anyAngleText(), anyToleranceText(false)});
+  point.reading = anyAngleText();
+  return point;
+}
+
+inline Shown anyShown(const Study& study) {
+  Shown shown;
+  if (upTo(1) == 0)
+    shown.point = (*rc::gen::elementOf(study.points)).name;
+  if (!study.combinations.empty() && upTo(1) == 0)
+    shown.combination = (*rc::gen::elementOf(study.combinations)).name;
+  return shown;
+}
+
+} // namespace study_gen
+
+/// Valid studies of a few cases, combinations and points, with names and texts that are hard on files.
+inline rc::Gen<Study> anyStudy() {
+  return rc::gen::exec([] {
+    using namespace study_gen;
+    Study study;
+    study.title = anyTitle();
+    study.units = anyUnits();
+    study.convention = {anyWord<Positive>(), anyWord<ShearAxis>()};
+    study.cases = anyCases();
+    study.combinations = anyCombinations(study.cases);
+    const int points = 1 + upTo(3);
+    for (int i = 0; i < points; ++i)
+      study.points.push_back(anyPoint(i, study.cases));
+    study.shown = anyShown(study);
+    return study;
+  });
+}
+
+} // namespace planewright
