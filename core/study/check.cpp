@@ -21,14 +21,40 @@ std::optional<Problem> faultAt(Study& study, const Place& place) {
                    PW_TEXT("Study", "Write “%1”.").with(*kept));
 }
 
+void addFaults(Problems& problems, Study& study, const std::vector<Place>& places) {
+  for (const Place& place : places)
+    if (problems.size() < mostProblems)
+      if (auto problem = faultAt(study, place))
+        problems.push_back(*std::move(problem));
+}
+
+/// Looks at each item in a study of its own, so that finding its places does not search all the others.
+template <class Item>
+void addFaults(Problems& problems, const Study& study, std::vector<Item> Study::*list) {
+  Study part;
+  part.units = study.units;
+  for (const Item& item : study.*list) {
+    (part.*list).assign(1, item);
+    addFaults(problems, part, typedPlacesIn(item));
+  }
+}
+
 } // namespace
 
 Problems problemsIn(const Study& study) {
+  if (Problems excess = excessIn(study); !excess.empty())
+    return excess;
   Problems problems = brokenRules(study);
-  Study copy = study;
-  for (const Place& place : typedPlacesIn(study))
-    if (auto problem = faultAt(copy, place))
-      problems.push_back(*std::move(problem));
+  Study ends;
+  ends.title = study.title;
+  ends.units = study.units;
+  ends.convention = study.convention;
+  ends.shown = study.shown;
+  addFaults(problems, ends, typedPlacesInHead());
+  addFaults(problems, study, &Study::cases);
+  addFaults(problems, study, &Study::combinations);
+  addFaults(problems, study, &Study::points);
+  addFaults(problems, ends, typedPlacesInFoot());
   return problems;
 }
 

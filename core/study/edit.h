@@ -50,7 +50,9 @@ using Edits = std::vector<Edit>;
 Result<Study> edited(const Study& study, const Edit& edit);
 Result<Study> edited(const Study& study, const Edits& edits);
 
-/// Everything that keeps a study from being valid, each with the path of its place.
+/// Everything that keeps a study from being valid, each with the path of its place; no more than the first
+/// 100, and of a study with too many things in a list only that.
+inline constexpr std::size_t mostProblems = 100;
 Problems problemsIn(const Study& study);
 
 } // namespace planewright

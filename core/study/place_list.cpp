@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/place_list.h"
 
+#include <iterator>
+
 namespace planewright {
 
 namespace {
@@ -13,7 +15,43 @@ void add(Places& places, std::initializer_list<Spot> spots, const std::string& o
     places.push_back({spot, owner, item});
 }
 
-void addPoint(Places& places, const Point& point) {
+void append(Places& places, Places more) {
+  places.insert(places.end(), std::move_iterator(more.begin()), std::move_iterator(more.end()));
+}
+
+} // namespace
+
+std::vector<Place> typedPlacesInHead() {
+  Places places;
+  add(places, {Spot::titleProject, Spot::titleSubject, Spot::titleNumber, Spot::titleRevision,
+               Spot::titlePrepared, Spot::titleChecked, Spot::titleDate, Spot::titleNotes});
+  add(places, {Spot::unitStress, Spot::unitForce, Spot::unitLength, Spot::unitMoment});
+  add(places, {Spot::positive, Spot::shearAxis});
+  return places;
+}
+
+std::vector<Place> typedPlacesInFoot() {
+  Places places;
+  add(places, {Spot::shownPoint, Spot::shownCombination});
+  return places;
+}
+
+std::vector<Place> typedPlacesIn(const LoadCase& loadCase) {
+  Places places;
+  add(places, {Spot::caseName, Spot::caseNature, Spot::caseDuration, Spot::caseExcludes}, loadCase.id);
+  return places;
+}
+
+std::vector<Place> typedPlacesIn(const Combination& combination) {
+  Places places;
+  for (const Factor& factor : combination.factors)
+    add(places, {Spot::factor}, combination.name, factor.caseId);
+  add(places, {Spot::combinationBasis}, combination.name);
+  return places;
+}
+
+std::vector<Place> typedPlacesIn(const Point& point) {
+  Places places;
   add(places, {Spot::pointNote, Spot::axes}, point.name);
   for (const CaseStress& stress : point.stress)
     add(places, {Spot::sx, Spot::sy, Spot::txy, Spot::sz}, point.name, stress.caseId);
@@ -22,26 +60,18 @@ void addPoint(Places& places, const Point& point) {
   for (const WatchedPlane& plane : point.planes)
     add(places, {Spot::planeNormal, Spot::planeTolerance}, point.name, plane.name);
   add(places, {Spot::reading}, point.name);
+  return places;
 }
 
-} // namespace
-
 std::vector<Place> typedPlacesIn(const Study& study) {
-  Places places;
-  add(places, {Spot::titleProject, Spot::titleSubject, Spot::titleNumber, Spot::titleRevision,
-               Spot::titlePrepared, Spot::titleChecked, Spot::titleDate, Spot::titleNotes});
-  add(places, {Spot::unitStress, Spot::unitForce, Spot::unitLength, Spot::unitMoment});
-  add(places, {Spot::positive, Spot::shearAxis});
+  Places places = typedPlacesInHead();
   for (const LoadCase& loadCase : study.cases)
-    add(places, {Spot::caseName, Spot::caseNature, Spot::caseDuration, Spot::caseExcludes}, loadCase.id);
-  for (const Combination& combination : study.combinations) {
-    for (const Factor& factor : combination.factors)
-      add(places, {Spot::factor}, combination.name, factor.caseId);
-    add(places, {Spot::combinationBasis}, combination.name);
-  }
+    append(places, typedPlacesIn(loadCase));
+  for (const Combination& combination : study.combinations)
+    append(places, typedPlacesIn(combination));
   for (const Point& point : study.points)
-    addPoint(places, point);
-  add(places, {Spot::shownPoint, Spot::shownCombination});
+    append(places, typedPlacesIn(point));
+  append(places, typedPlacesInFoot());
   return places;
 }
 

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/rules.h"
 
+#include "core/study/edit.h"
 #include "core/study/typed.h"
 
 #include <unordered_set>
@@ -16,8 +17,14 @@ constexpr std::size_t mostCombinations = 10000;
 constexpr std::size_t mostPoints = 10000;
 constexpr std::size_t mostPlanes = 1000;
 
-Place listPlace(Spot spot) {
-  return {spot, {}, {}};
+Place listPlace(Spot spot, const std::string& owner = {}) {
+  return {spot, owner, {}};
+}
+
+void limit(Problems& problems, std::size_t size, std::size_t most, const Place& place) {
+  if (size > most && problems.size() < mostProblems)
+    problems.push_back(problemAt(
+        place, {}, PW_TEXT("Study", "There are too many of this kind: %1.").with(rowOf(place.spot).label)));
 }
 
 class Rules {
@@ -27,14 +34,13 @@ public:
   Problems broken() {
     for (const LoadCase& one : m_study.cases)
       key(m_cases, {Spot::loadCase, one.id, {}}, one.id);
-    count(m_study.cases.size(), 1, mostCases, Spot::loadCase);
+    needed(m_study.cases.size(), Spot::loadCase);
     for (const LoadCase& one : m_study.cases)
       excludes(one);
-    count(m_study.combinations.size(), 0, mostCombinations, Spot::combination);
     Names combinations;
     for (const Combination& one : m_study.combinations)
       combination(combinations, one);
-    count(m_study.points.size(), 1, mostPoints, Spot::point);
+    needed(m_study.points.size(), Spot::point);
     Names points;
     for (const Point& one : m_study.points)
       point(points, one);
@@ -44,7 +50,8 @@ public:
 
 private:
   void add(const Place& place, std::string_view quoted, Text what, Text mend = {}) {
-    m_problems.push_back(problemAt(place, quoted, std::move(what), std::move(mend)));
+    if (m_problems.size() < mostProblems)
+      m_problems.push_back(problemAt(place, quoted, std::move(what), std::move(mend)));
   }
 
   void key(Names& names, const Place& place, const std::string& name) {
@@ -61,12 +68,9 @@ private:
           PW_TEXT("Study", "Use a name that the study has."));
   }
 
-  void count(std::size_t size, std::size_t least, std::size_t most, Spot spot) {
-    const Text& what = rowOf(spot).label;
-    if (size < least)
-      add(listPlace(spot), {}, PW_TEXT("Study", "A study needs at least one %1.").with(what));
-    if (size > most)
-      add(listPlace(spot), {}, PW_TEXT("Study", "There are too many of this kind: %1.").with(what));
+  void needed(std::size_t size, Spot spot) {
+    if (size == 0)
+      add(listPlace(spot), {}, PW_TEXT("Study", "A study needs at least one %1.").with(rowOf(spot).label));
   }
 
   void excludes(const LoadCase& one) {
@@ -96,7 +100,6 @@ private:
       reference(m_cases, place, stress.caseId);
       key(stresses, place, stress.caseId);
     }
-    count(one.planes.size(), 0, mostPlanes, Spot::plane);
     Names planes;
     for (const WatchedPlane& plane : one.planes)
       key(planes, {Spot::plane, one.name, plane.name}, plane.name);
@@ -117,8 +120,25 @@ private:
 
 } // namespace
 
+Problems excessIn(const Study& study) {
+  Problems problems;
+  limit(problems, study.cases.size(), mostCases, listPlace(Spot::loadCase));
+  for (const LoadCase& one : study.cases)
+    limit(problems, one.excludes.size(), mostCases, listPlace(Spot::caseExcludes, one.id));
+  limit(problems, study.combinations.size(), mostCombinations, listPlace(Spot::combination));
+  for (const Combination& one : study.combinations)
+    limit(problems, one.factors.size(), mostCases, listPlace(Spot::factor, one.name));
+  limit(problems, study.points.size(), mostPoints, listPlace(Spot::point));
+  for (const Point& one : study.points) {
+    limit(problems, one.stress.size(), mostCases, listPlace(Spot::caseStress, one.name));
+    limit(problems, one.planes.size(), mostPlanes, listPlace(Spot::plane, one.name));
+  }
+  return problems;
+}
+
 Problems brokenRules(const Study& study) {
-  return Rules(study).broken();
+  Problems excess = excessIn(study);
+  return excess.empty() ? Rules(study).broken() : excess;
 }
 
 } // namespace planewright

@@ -6,8 +6,13 @@
 
 namespace planewright {
 
+/// The lists that are longer than a study may have them. Nothing else is looked at in such a study, so that
+/// checking takes a bounded time.
+Problems excessIn(const Study& study);
+
 /// The rules between the places of a study: at least one case and one point, at most so many of each; keys
-/// that can be names, each once in its list; every name that is referred to exists.
+/// that can be names, each once in its list; every name that is referred to exists. No more than the first
+/// 100.
 Problems brokenRules(const Study& study);
 
 } // namespace planewright
