@@ -35,6 +35,8 @@ public:
       : m_problems(problems), m_bytes(problems.bytes()), m_at(byteOrderMark(m_bytes)) {}
 
   Json&& root() { return std::move(m_root); }
+  /// Whether every text can be shown to people.
+  bool usable() const { return m_usable; }
   /// First byte after the last token, but for blanks.
   size_t rest() const { return std::min(m_bytes.find_first_not_of(" \t\r\n", m_at), m_bytes.size()); }
 
@@ -82,12 +84,15 @@ private:
   std::string m_key;
   size_t m_keyOffset = 0;
   size_t m_count = 0;
+  bool m_usable = true;
 };
 
 void TreeBuilder::refuseControls(std::string_view text) {
-  if (hasControls(text))
-    m_problems.add(tokenStart(m_bytes, m_at), {}, PW_TEXT("File", "This text has control characters."),
-                   PW_TEXT("File", "Take them out."));
+  if (!hasControls(text))
+    return;
+  m_usable = false;
+  m_problems.add(tokenStart(m_bytes, m_at), {}, PW_TEXT("File", "This text has control characters."),
+                 PW_TEXT("File", "Take them out."));
 }
 
 bool TreeBuilder::addNumber() {
@@ -161,7 +166,9 @@ bool TreeBuilder::parse_error(size_t position, const std::string&, const nlohman
         PW_TEXT("File", "Close it with a quote; write \\n for a new line and \\\\ for a backslash.");
   } else {
     problem.quoted = brokenPiece(m_bytes, offset);
-    problem.what = PW_TEXT("File", "“%1” does not belong here.").with(problem.quoted);
+    problem.what = problem.quoted.empty()
+                       ? PW_TEXT("File", "A character that cannot be seen does not belong here.")
+                       : PW_TEXT("File", "“%1” does not belong here.").with(problem.quoted);
     problem.mend = PW_TEXT("File", "Look for a missing or surplus comma, quote or bracket just before it.");
   }
   m_problems.add(offset, std::move(problem));
@@ -209,6 +216,8 @@ std::optional<Json> readJson(FileProblems& problems) {
     problems.add(rest, Problem{{}, 0, 0, {}, PW_TEXT("File", "The file goes on after its end."), {}});
     return std::nullopt;
   }
+  if (!builder.usable())
+    return std::nullopt;
   return builder.root();
 }
 

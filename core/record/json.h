@@ -35,9 +35,9 @@ inline constexpr std::size_t longestJson = 16u << 20;
 inline constexpr std::size_t deepestJson = 64;
 inline constexpr std::size_t mostJsonValues = 1'000'000;
 
-/// Reads JSON (RFC 8259) strictly into a tree. None when it cannot be read to its end; an object that has a
-/// key twice and texts with control characters other than line feed and tab are Problems too, but reading
-/// goes on and the first of two stands.
+/// Reads JSON (RFC 8259) strictly into a tree. None when it cannot be read to its end, or when a text or key
+/// has control characters other than line feed and tab. An object that has a key twice is a Problem too, but
+/// reading goes on and the first of the two stands.
 std::optional<Json> readJson(FileProblems& problems);
 
 } // namespace planewright

@@ -195,7 +195,7 @@ Results<Study> readStudy(std::string_view bytes) {
   checkHead(*root, head);
   if (!head.empty())
     return tl::unexpected(head.taken());
-  Reading reading{problems};
+  Reading reading{problems, problems.empty()};
   Study study = readParts(*root, reading);
   if (reading.complete)
     for (Problem& problem : problemsIn(study)) {
