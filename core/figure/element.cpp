@@ -73,14 +73,15 @@ void drawAxes(const Drawing& drawing) {
   const std::pair<Angle, const char*> axes[] = {{Angle(), "x"}, {quarterTurn, "y"}};
   for (const auto& [direction, name] : axes) {
     drawing.stroke({frame.centre, frame.at(direction, end)}, pen);
-    drawing.picture.parts.push_back(Label{frame.at(direction, letter) + Vec{0, 0.26 * size},
-                                          {{name, false}},
-                                          size,
-                                          Align::middle,
-                                          Role::soft,
-                                          false,
-                                          false,
-                                          name});
+    if (drawing.order.letters)
+      drawing.picture.parts.push_back(Label{frame.at(direction, letter) + Vec{0, 0.26 * size},
+                                            {{name, false}},
+                                            size,
+                                            Align::middle,
+                                            Role::soft,
+                                            false,
+                                            false,
+                                            name});
   }
 }
 
@@ -247,7 +248,7 @@ std::vector<LabelWish> drawElement(Picture& picture, const Study& study, const R
     if (order.handles)
       drawBars(picture, frame, line->angle.value, order);
   }
-  if (order.handles && order.turned)
+  if (order.handles && order.knob)
     drawKnob(picture, frame, normal, order);
   return wishes;
 }

@@ -9,8 +9,8 @@ namespace planewright {
 
 /// How a stress element is drawn, in the figure (mm) and in the window (pixels) alike.
 ///
-/// Nothing but the letters x and y leaves the circle of radius `outer`: with handles the knob reaches 1.02 of
-/// it and the letters stand outside; without handles the letters stand inside it.
+/// Nothing but the letters x and y leaves the circle of radius `outer`: with handles the drawing reaches 1.03
+/// of it and the letters stand outside; without handles the letters stand inside it.
 struct ElementOrder {
   Vec centre;
   double outer = 20;        ///< R: every radius of the drawing is a part of it
@@ -21,6 +21,8 @@ struct ElementOrder {
   bool otherFace = false;   ///< n face and knob at theta + 180 deg: the same plane seen from its other side
   bool otherEnd = false;    ///< the wish of phi at the line's end at phi; else at phi + 180 deg
   bool lineArc = false;     ///< the arc of phi
+  bool letters = true;      ///< x and y at the ends of the axes
+  bool knob = true;         ///< with handles; false where it is drawn later, over the labels
   double wide = 0.5;        ///< stroke of the turned square
   double cut = 0.7;         ///< stroke of the cut
   double medium = 0.35;     ///< arrows, line

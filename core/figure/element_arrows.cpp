@@ -9,7 +9,8 @@ namespace {
 
 constexpr double headLength = 0.085;
 constexpr double headHalfWidth = 0.032;
-constexpr double barbWidth = 0.036;
+constexpr double halfHeadLength = 0.07;
+constexpr double barbWidth = 0.032;
 
 void drawNormal(Picture& picture, const ElementFrame& frame, Angle face, double length, const Pen& pen,
                 ArrowHead head) {
@@ -32,7 +33,7 @@ void drawNormal(Picture& picture, const ElementFrame& frame, Angle face, double 
 void drawShear(Picture& picture, const ElementFrame& frame, Angle face, double length, const Pen& pen,
                ArrowHead head) {
   const double tip = length / 2;
-  const double base = tip - std::copysign(headLength, length);
+  const double base = tip - std::copysign(halfHeadLength, length);
   const Vec end = frame.in(face, part::shear, tip);
   const Vec barb = frame.in(face, part::shear + barbWidth, base);
   picture.parts.push_back(Path{{frame.in(face, part::shear, -tip), end}, false, pen, {}});
