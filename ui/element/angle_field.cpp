@@ -1,0 +1,29 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/element/angle_field.h"
+
+#include <QKeyEvent>
+
+namespace planewright {
+
+AngleField::AngleField(const QString& text, QWidget* parent) : QLineEdit(text, parent) {
+  constexpr int characters = 14;
+  setFixedWidth(fontMetrics().averageCharWidth() * characters + 16);
+  selectAll();
+}
+
+void AngleField::keyPressEvent(QKeyEvent* event) {
+  if (event->key() == Qt::Key_Return || event->key() == Qt::Key_Enter)
+    Q_EMIT offered(text());
+  else if (event->key() == Qt::Key_Escape)
+    parentWidget()->setFocus(Qt::OtherFocusReason);
+  else
+    QLineEdit::keyPressEvent(event);
+}
+
+void AngleField::focusOutEvent(QFocusEvent* event) {
+  QLineEdit::focusOutEvent(event);
+  if (event->reason() != Qt::PopupFocusReason && event->reason() != Qt::ActiveWindowFocusReason)
+    deleteLater();
+}
+
+} // namespace planewright

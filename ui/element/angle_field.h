@@ -1,0 +1,24 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include <QLineEdit>
+
+namespace planewright {
+
+/// The small field in which an angle is typed over a drawing: Enter offers the text, Escape and leaving give
+/// it up. It lives as long as it is open.
+class AngleField : public QLineEdit {
+  Q_OBJECT
+
+public:
+  AngleField(const QString& text, QWidget* parent);
+
+signals:
+  void offered(const QString& text);
+
+protected:
+  void keyPressEvent(QKeyEvent* event) override;
+  void focusOutEvent(QFocusEvent* event) override;
+};
+
+} // namespace planewright

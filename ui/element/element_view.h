@@ -1,0 +1,87 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/element/element_drag.h"
+#include "ui/element/scene.h"
+
+#include <QPointer>
+#include <QWidget>
+
+namespace planewright {
+
+class AngleField;
+
+/// The stress element with its two handles: the knob turns the reading plane, the bars turn the line. It
+/// holds nothing of the study; it paints what the desk reads out and asks the desk for what the hand wants.
+class ElementView : public QWidget {
+  Q_OBJECT
+
+public:
+  explicit ElementView(Desk& desk, QWidget* parent = nullptr);
+
+  void setShowGivenArrows(bool shown);
+  void setSnapping(bool snapping);
+  bool showsGivenArrows() const { return m_glance.givenArrows; }
+  bool snaps() const { return m_glance.snapping; }
+
+  /// The handle that keys turn.
+  ElementHandle currentHandle() const { return m_current; }
+  /// Where a handle stands in the widget: the knob, the bar nearer to +x; none for bars without a line.
+  std::optional<QPointF> placeOf(ElementHandle handle) const;
+  /// The picture that is painted.
+  Picture picture() const;
+  /// The angle of a handle (deg, folded) and what it means in words; none for bars without a line.
+  std::optional<Angle> angleOf(ElementHandle handle) const;
+  QString wordsOf(ElementHandle handle) const;
+  /// Turns a handle, as one step of its own.
+  void turn(ElementHandle handle, Angle to);
+
+  QSize sizeHint() const override { return {520, 480}; }
+  QSize minimumSizeHint() const override { return {260, 260}; }
+
+signals:
+  void currentHandleChanged();
+
+protected:
+  bool event(QEvent* event) override;
+  bool focusNextPrevChild(bool next) override;
+  void focusInEvent(QFocusEvent* event) override;
+  void focusOutEvent(QFocusEvent* event) override;
+  void keyPressEvent(QKeyEvent* event) override;
+  void mousePressEvent(QMouseEvent* event) override;
+  void mouseMoveEvent(QMouseEvent* event) override;
+  void mouseReleaseEvent(QMouseEvent* event) override;
+  void leaveEvent(QEvent* event) override;
+  void paintEvent(QPaintEvent* event) override;
+  void changeEvent(QEvent* event) override;
+
+private:
+  void follow();
+  ElementGlance glance() const;
+  ElementGeometry geometry() const;
+  ElementHandle handleAt(QPointF at) const;
+  Facing& facingOf(ElementHandle handle);
+  QString whatTurns(ElementHandle handle) const;
+  QString tipAt(QPointF at) const;
+  void setCurrent(ElementHandle handle);
+  void setCursorFor(ElementHandle handle);
+  void dragTo(QPointF at, Qt::KeyboardModifiers held);
+  void putBack();
+  void endDrag();
+  bool type(const ElementHold& hold, const std::string& text, Gesture gesture, Angle wanted);
+  void turnByKey(const ElementHold& hold, Angle to);
+  Gesture keyGesture();
+  void openField(const ElementHold& hold);
+  void sayLine(const std::string& before);
+
+  Desk& m_desk;
+  ElementGlance m_glance; ///< of the window's own; size, focus and drag are added when it is painted
+  ElementHandle m_current = ElementHandle::reading;
+  std::optional<ElementDrag> m_drag;
+  std::optional<Sides> m_sides;
+  QPointer<AngleField> m_field;
+  Gesture m_keys;       ///< of the keys pressed one after the other
+  int m_keysIndex = -1; ///< where the undo stack stood after the last of them
+};
+
+} // namespace planewright
