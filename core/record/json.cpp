@@ -175,17 +175,6 @@ bool TreeBuilder::parse_error(size_t position, const std::string&, const nlohman
   return false;
 }
 
-size_t firstBroken(std::string_view bytes) {
-  size_t at = 0;
-  while (at < bytes.size()) {
-    const size_t length = utf8Length(bytes.substr(at));
-    if (length == 0)
-      break;
-    at += length;
-  }
-  return at;
-}
-
 } // namespace
 
 const JsonMember* member(const Json& object, std::string_view key) {
@@ -199,13 +188,13 @@ std::optional<Json> readJson(FileProblems& problems) {
     problems.add(0, Problem{{}, 0, 0, {}, PW_TEXT("File", "The file is larger than 16 MB."), {}});
     return std::nullopt;
   }
-  if (const size_t broken = firstBroken(bytes); broken < bytes.size()) {
-    problems.add(broken, Problem{{},
-                                 0,
-                                 0,
-                                 {},
-                                 PW_TEXT("File", "The file is not UTF-8 from here on."),
-                                 PW_TEXT("File", "Save it as UTF-8.")});
+  if (const auto broken = invalidUtf8In(bytes)) {
+    problems.add(*broken, Problem{{},
+                                  0,
+                                  0,
+                                  {},
+                                  PW_TEXT("File", "The file is not UTF-8 from here on."),
+                                  PW_TEXT("File", "Save it as UTF-8.")});
     return std::nullopt;
   }
   TreeBuilder builder(problems);

@@ -1,0 +1,109 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/quantity/format.h"
+#include "core/record/csv.h"
+#include "core/record/readout_cautions.h"
+#include "core/record/readout_file.h"
+#include "core/table/table.h"
+
+namespace planewright {
+
+namespace {
+
+using Fields = std::vector<std::string>;
+
+const Fields& heading() {
+  static const Fields names = {
+      "point",  "combination", "judged", "sx",     "sy",      "txy",           "mean",
+      "radius", "s1",          "s2",     "theta1", "tau_max", "theta_tau_max", "tau_abs_max",
+      "row",    "name",        "normal", "cut",    "sn",      "tnt",           "kind",
+      "angle",  "tolerance",   "along",  "across", "shear",   "cautions"};
+  return names;
+}
+
+/// The rows of one state: its own numbers stand in each of them.
+class StateRows {
+public:
+  StateRows(const Study& study, const Readout& readout, const StateReading& state)
+      : m_study(study), m_readout(readout), m_state(state) {}
+
+  std::string written() const {
+    std::string rows;
+    for (std::size_t i = 0; i < m_readout.watched.size(); ++i)
+      rows += row("plane", m_readout.watched[i].name, planeFields(i), Fields(6));
+    for (std::size_t i = 0; i < m_readout.lines.size(); ++i)
+      rows += row("line", m_readout.lines[i].name, Fields(4), lineFields(i));
+    // A state without planes and lines is not lost.
+    return rows.empty() ? row("state", "", Fields(4), Fields(6)) : rows;
+  }
+
+private:
+  std::string stress(double value) const { return exactNumber(inStressUnit(m_study, value)); }
+  static std::string angle(Angle value) { return exactNumber(value.degrees()); }
+  static std::string angle(const std::optional<NormalAngle>& normal) {
+    return normal ? angle(normal->value) : "";
+  }
+
+  Fields stateFields() const {
+    const PlaneStress& s = m_state.stress;
+    const Circle& circle = m_state.circle;
+    return {m_readout.point,
+            m_state.combination,
+            m_state.judged ? "true" : "false",
+            stress(s.sx),
+            stress(s.sy),
+            stress(s.txy),
+            stress(circle.mean),
+            stress(circle.radius),
+            stress(circle.s1),
+            stress(circle.s2),
+            angle(circle.theta1),
+            stress(circle.radius),
+            angle(circle.thetaTauMax),
+            stress(circle.tauAbsMax)};
+  }
+
+  Fields planeFields(std::size_t i) const {
+    const NormalAngle normal = m_readout.watched[i].normal;
+    return {angle(normal.value), angle(cutOf(normal).value), stress(m_state.watched[i].sn),
+            stress(m_state.watched[i].tnt)};
+  }
+
+  Fields lineFields(std::size_t i) const {
+    const LineReading& line = m_readout.lines[i];
+    const LineStress& stresses = m_state.lines[i];
+    return {std::string(wordOf(line.kind)), angle(line.angle.value), angle(line.tolerance),
+            stress(stresses.along),         stress(stresses.across), stress(stresses.shear)};
+  }
+
+  std::string cautions() const {
+    std::string words;
+    for (const Text& caution : cautionsOf(m_state))
+      words += (words.empty() ? "" : " ") + plain(caution);
+    return words;
+  }
+
+  std::string row(const char* kind, const std::string& name, const Fields& plane, const Fields& line) const {
+    Fields fields = stateFields();
+    fields.insert(fields.end(), {kind, name});
+    fields.insert(fields.end(), plane.begin(), plane.end());
+    fields.insert(fields.end(), line.begin(), line.end());
+    fields.push_back(cautions());
+    return csvRow(fields);
+  }
+
+  const Study& m_study;
+  const Readout& m_readout;
+  const StateReading& m_state;
+};
+
+} // namespace
+
+std::string readoutCsv(const Study& study, const std::vector<Readout>& points) {
+  std::string rows = csvRow(heading());
+  for (const Readout& readout : points)
+    for (const StateReading& state : readout.states)
+      rows += StateRows(study, readout, state).written();
+  return rows;
+}
+
+} // namespace planewright

@@ -1,0 +1,131 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/record/json_writer.h"
+#include "core/record/readout_cautions.h"
+#include "core/record/readout_file.h"
+#include "core/table/table.h"
+
+namespace planewright {
+
+namespace {
+
+constexpr int readoutVersion = 1;
+
+/// Writes the parts of a readout, stresses in the study's unit.
+class ReadoutWriter {
+public:
+  explicit ReadoutWriter(const Study& study) : m_study(study) {}
+
+  std::string written(const std::vector<Readout>& points) {
+    m_json.beginObject();
+    text("format", "planewright-readout");
+    m_json.key("version").whole(readoutVersion);
+    head();
+    m_json.key("governing").null();
+    m_json.key("points").beginList();
+    for (const Readout& readout : points)
+      point(readout);
+    m_json.endList();
+    m_json.endObject();
+    return m_json.taken();
+  }
+
+private:
+  void text(const char* key, std::string_view words) { m_json.key(key).text(words); }
+  void stress(const char* key, double value) { m_json.key(key).number(inStressUnit(m_study, value)); }
+  void angle(const char* key, Angle value) { m_json.key(key).number(value.degrees()); }
+  void angle(const char* key, const std::optional<NormalAngle>& normal) {
+    if (normal)
+      angle(key, normal->value);
+    else
+      m_json.key(key).null();
+  }
+
+  void head() {
+    m_json.key("units").beginObject();
+    text("stress", m_study.units.stress);
+    text("angle", "deg");
+    m_json.endObject();
+    m_json.key("convention").beginObject();
+    text("positive", wordOf(m_study.convention.positive));
+    m_json.endObject();
+  }
+
+  void point(const Readout& readout) {
+    m_json.beginObject();
+    text("name", readout.point);
+    m_json.key("cautions").beginList();
+    for (const Text& caution : cautionsOf(readout))
+      m_json.text(plain(caution));
+    m_json.endList();
+    m_json.key("states").beginList();
+    for (const StateReading& one : readout.states)
+      state(readout, one);
+    m_json.endList();
+    m_json.endObject();
+  }
+
+  void state(const Readout& readout, const StateReading& state) {
+    m_json.beginObject();
+    text("combination", state.combination);
+    m_json.key("judged").boolean(state.judged);
+    stress("sx", state.stress.sx);
+    stress("sy", state.stress.sy);
+    stress("txy", state.stress.txy);
+    circle(state.circle);
+    m_json.key("planes").beginList();
+    for (std::size_t i = 0; i < readout.watched.size(); ++i)
+      plane(readout.watched[i], state.watched[i]);
+    m_json.endList();
+    m_json.key("lines").beginList();
+    for (std::size_t i = 0; i < readout.lines.size(); ++i)
+      line(readout.lines[i], state.lines[i]);
+    m_json.endList();
+    m_json.key("checks").beginList();
+    m_json.endList();
+    m_json.endObject();
+  }
+
+  void circle(const Circle& circle) {
+    stress("mean", circle.mean);
+    stress("radius", circle.radius);
+    stress("s1", circle.s1);
+    stress("s2", circle.s2);
+    angle("theta1", circle.theta1);
+    stress("tau_max", circle.radius);
+    angle("theta_tau_max", circle.thetaTauMax);
+    stress("tau_abs_max", circle.tauAbsMax);
+  }
+
+  void plane(const WatchedReading& plane, const Traction& traction) {
+    m_json.beginObject();
+    text("name", plane.name);
+    angle("normal", plane.normal.value);
+    angle("cut", cutOf(plane.normal).value);
+    stress("sn", traction.sn);
+    stress("tnt", traction.tnt);
+    m_json.endObject();
+  }
+
+  void line(const LineReading& line, const LineStress& stresses) {
+    m_json.beginObject();
+    text("name", line.name);
+    text("kind", wordOf(line.kind));
+    angle("angle", line.angle.value);
+    angle("tolerance", line.tolerance);
+    stress("along", stresses.along);
+    stress("across", stresses.across);
+    stress("shear", stresses.shear);
+    m_json.endObject();
+  }
+
+  const Study& m_study;
+  JsonWriter m_json;
+};
+
+} // namespace
+
+std::string readoutJson(const Study& study, const std::vector<Readout>& points) {
+  return ReadoutWriter(study).written(points);
+}
+
+} // namespace planewright

@@ -1,0 +1,142 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/quantity/format.h"
+#include "core/record/readout_cautions.h"
+#include "core/record/readout_file.h"
+#include "core/study/working_of_state.h"
+#include "core/table/table.h"
+#include "core/words/utf8.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+using Cells = std::vector<std::string>;
+
+std::string blanks(std::size_t width, const std::string& beside) {
+  return std::string(width - std::min(width, codePointsIn(beside)), ' ');
+}
+
+/// Rows set in columns: the first to the left, numbers to the right.
+std::string aligned(const std::vector<Cells>& rows, std::string_view indent) {
+  std::vector<std::size_t> widths(rows.front().size());
+  for (const Cells& row : rows)
+    for (std::size_t i = 0; i < row.size(); ++i)
+      widths[i] = std::max(widths[i], codePointsIn(row[i]));
+  std::string lines;
+  for (const Cells& row : rows) {
+    lines += std::string(indent) + row[0] + blanks(widths[0], row[0]);
+    for (std::size_t i = 1; i < row.size(); ++i)
+      lines += "  " + blanks(widths[i], row[i]) + row[i];
+    lines += '\n';
+  }
+  return lines;
+}
+
+/// Writes the readout in one language.
+class TextWriter {
+public:
+  TextWriter(const Study& study, const Translate& translate) : m_study(study), m_translate(translate) {}
+
+  std::string written(const std::vector<Readout>& points) {
+    line("", PW_TEXT("Readout", "Stresses in %1, %2. Angles from +x, counter-clockwise, seen from +z.")
+                 .with(m_study.units.stress)
+                 .with(labelOf(m_study.convention.positive)));
+    for (const Readout& readout : points)
+      point(readout);
+    m_out += '\n';
+    line("", PW_TEXT("Readout", "Stresses at single points, not a design check: the code in force and a "
+                                "licensed engineer decide."));
+    return std::move(m_out);
+  }
+
+private:
+  std::string words(const Text& text) const { return plain(text, m_translate); }
+  void line(std::string_view indent, const Text& text) { m_out += std::string(indent) + words(text) + "\n"; }
+
+  /// The name, with the kind where it says more, the angle both ways and the tolerance.
+  static Text described(const LineReading& line) {
+    const bool namesKind = line.kind == LineKind::other || line.name == wordOf(line.kind);
+    const Text name = namesKind ? PW_TEXT("Readout", "Line %1").with(line.name)
+                                : PW_TEXT("Readout", "Line %1 (%2)").with(line.name).with(labelOf(line.kind));
+    const std::string angle = shownDegrees(line.angle.value, angleDecimals);
+    if (line.tolerance == Angle())
+      return PW_TEXT("Readout", "%1: %2, given as %3, without tolerance")
+          .with(name)
+          .with(angle)
+          .with(line.typed);
+    return PW_TEXT("Readout", "%1: %2 ± %3, given as %4")
+        .with(name)
+        .with(angle)
+        .with(shownDegrees(line.tolerance, angleDecimals))
+        .with(line.typed);
+  }
+
+  void point(const Readout& readout) {
+    m_out += '\n';
+    line("", PW_TEXT("Readout", "Point %1").with(readout.point));
+    for (const LineReading& one : readout.lines)
+      line("  ", described(one));
+    for (const Text& caution : cautionsOf(readout))
+      line("  ", PW_TEXT("Readout", "Caution: %1").with(caution));
+    for (std::size_t i = 0; i < readout.states.size(); ++i)
+      state(readout, readout.states[i], i < m_study.combinations.size());
+  }
+
+  Text nameOf(const StateReading& state, bool isCombination) const {
+    if (isCombination)
+      return PW_TEXT("Readout", "Combination %1").with(state.combination);
+    return state.judged ? PW_TEXT("Readout", "Case %1").with(state.combination)
+                        : PW_TEXT("Readout", "Case %1 alone").with(state.combination);
+  }
+
+  std::string value(const StateReading& state, double stress) const {
+    return shownStress(m_study, state, stress) + " " + m_study.units.stress;
+  }
+
+  void state(const Readout& readout, const StateReading& state, bool isCombination) {
+    m_out += '\n';
+    line("  ", nameOf(state, isCombination));
+    line("    ", symbol("σ_{x} = %1, σ_{y} = %2, τ_{xy} = %3, σ_{z} = %4")
+                     .with(value(state, state.stress.sx))
+                     .with(value(state, state.stress.sy))
+                     .with(value(state, state.stress.txy))
+                     .with(value(state, state.sz)));
+    m_out += '\n';
+    planes(planesTable(m_study, readout, state));
+    m_out += '\n';
+    working(readout, state);
+  }
+
+  void planes(const Table& table) {
+    std::vector<Cells> rows(1);
+    for (const Column& column : table.columns)
+      rows.front().push_back(words(column.heading) + (column.unit.empty() ? "" : " (" + column.unit + ")"));
+    for (const Row& row : table.rows) {
+      Cells& cells = rows.emplace_back();
+      for (const Cell& cell : row.cells)
+        cells.push_back(words(cell.shown));
+    }
+    m_out += aligned(rows, "    ");
+  }
+
+  void working(const Readout& readout, const StateReading& state) {
+    for (const Step& step : workingOf(m_study, readout, state)) {
+      line("    ", PW_TEXT("Readout", "%1 (%2)").with(step.name).with(step.source));
+      line("      ", planewright::written(step));
+    }
+  }
+
+  const Study& m_study;
+  const Translate& m_translate;
+  std::string m_out;
+};
+
+} // namespace
+
+std::string readoutText(const Study& study, const std::vector<Readout>& points, const Translate& translate) {
+  return TextWriter(study, translate).written(points);
+}
+
+} // namespace planewright
