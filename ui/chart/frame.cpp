@@ -1,0 +1,115 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/chart/frame.h"
+
+#include "ui/chart/tick_item.h"
+
+#include <QChart>
+#include <QEvent>
+#include <QResizeEvent>
+#include <QValueAxis>
+#include <QXYSeries>
+
+#include <cmath>
+
+namespace planewright {
+
+namespace {
+
+// Pixels round the plot: a row above for the title of the upright axis, one below for tick labels and one
+// more for the title and the words of the level axis.
+constexpr double rowAbove = 24;
+constexpr double rowsBelow = 38;
+constexpr double marginRight = 16;
+constexpr double marginLeft = 8;
+constexpr double leastExtent = 40;
+
+QValueAxis* newAxis() {
+  auto* axis = new QValueAxis;
+  axis->setTickType(QValueAxis::TicksDynamic);
+  axis->setTickAnchor(0);
+  axis->setTickInterval(1);
+  axis->setLabelsVisible(false);
+  axis->setLineVisible(false);
+  return axis;
+}
+
+} // namespace
+
+EqualScaleFrame::EqualScaleFrame(QWidget* parent)
+    : QChartView(parent), m_x(newAxis()), m_y(newAxis()), m_ticks(new TickItem(chart())) {
+  chart()->addAxis(m_x, Qt::AlignBottom);
+  chart()->addAxis(m_y, Qt::AlignLeft);
+  chart()->legend()->hide();
+  chart()->setMargins({});
+  chart()->setBackgroundRoundness(0);
+  chart()->setAnimationOptions(QChart::NoAnimation);
+  setViewportUpdateMode(QGraphicsView::BoundingRectViewportUpdate);
+  setRenderHint(QPainter::Antialiasing);
+  setFrameShape(QFrame::NoFrame);
+  setMinimumSize(240, 200);
+  putColours();
+}
+
+void EqualScaleFrame::attach(QXYSeries* series) {
+  chart()->addSeries(series);
+  series->attachAxis(m_x);
+  series->attachAxis(m_y);
+}
+
+QPointF EqualScaleFrame::chartPoint(QPointF values) const {
+  return (values - m_middle) / m_tick;
+}
+
+QRectF EqualScaleFrame::plotFor(double tickWidth) const {
+  const double left = marginLeft + tickWidth + tickGap;
+  return {left, rowAbove, std::max(leastExtent, width() - left - marginRight),
+          std::max(leastExtent, height() - rowAbove - rowsBelow)};
+}
+
+void EqualScaleFrame::refit() {
+  // Twice, because the width of the tick labels follows from the scale: first with a usual width.
+  const EqualScale guess = fittedTo(plotFor(widthOfTickLabels({"\u221200"})));
+  showScale(fittedTo(plotFor(widthOfTickLabels(TickMarks(guess).yLabels))));
+  arrange();
+}
+
+void EqualScaleFrame::showScale(const EqualScale& scale) {
+  if (scale == m_scale)
+    return;
+  m_scale = scale;
+  m_tick = TickMarks(scale).step;
+  const QRectF range = scale.range();
+  m_middle = {std::round(range.center().x() / m_tick) * m_tick,
+              std::round(range.center().y() / m_tick) * m_tick};
+  const QPointF low = chartPoint(range.topLeft());
+  const QPointF high = chartPoint(range.bottomRight());
+  chart()->setPlotArea(scale.plot());
+  m_y->setReverse(scale.yDown());
+  m_x->setRange(low.x(), high.x());
+  m_y->setRange(low.y(), high.y());
+  m_ticks->show(TickMarks(scale));
+}
+
+void EqualScaleFrame::putColours() {
+  const Look now = look();
+  chart()->setBackgroundBrush(now.colour(Role::canvas));
+  setBackgroundBrush(now.colour(Role::canvas));
+  for (QValueAxis* axis : {m_x, m_y})
+    axis->setGridLinePen(QPen(now.colour(Role::grid), 1));
+  m_ticks->wear(now);
+}
+
+void EqualScaleFrame::resizeEvent(QResizeEvent* event) {
+  QChartView::resizeEvent(event);
+  refit();
+}
+
+void EqualScaleFrame::changeEvent(QEvent* event) {
+  QChartView::changeEvent(event);
+  if (event->type() != QEvent::PaletteChange)
+    return;
+  putColours();
+  arrange();
+}
+
+} // namespace planewright

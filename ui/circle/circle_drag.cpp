@@ -1,0 +1,61 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/circle/circle_drag.h"
+
+#include "core/quantity/format.h"
+
+namespace planewright {
+
+namespace {
+
+/// Pixels of arc within which a named direction takes the mark.
+constexpr double snapReach = 6;
+
+Place stressPlace(const Readout& readout, const std::string& caseId, Spot spot) {
+  return {spot, readout.point, caseId};
+}
+
+Type asTyped(const Study& study, const Place& place) {
+  return {place, textAt(study, place).value_or(std::string())};
+}
+
+} // namespace
+
+Place readingPlace(const Readout& readout) {
+  return {Spot::reading, readout.point, {}};
+}
+
+ReadingDrag::ReadingDrag(const Stage& stage, QPointF pointer)
+    : m_place(readingPlace(stage.readout)), m_before(asTyped(stage.study, m_place).text),
+      m_turn(stage.readout.reading.value), m_last(pointer) {}
+
+Edits ReadingDrag::moved(const Stage& stage, QPointF pointer, Qt::KeyboardModifiers held) {
+  const Round round = stage.round();
+  m_turn.move(round.turnBetween(m_last, pointer), held);
+  m_last = pointer;
+  Rest rest = restOf(m_turn, directionsForNormal(stage.readout), round.turnAlong(snapReach),
+                     round.turnAlong(1), held);
+  m_on = std::move(rest.on);
+  return {Type{m_place, typedAngle(rest.angle)}};
+}
+
+EarDrag::EarDrag(const Stage& stage, const std::string& caseId, QPointF pointer)
+    : m_caseId(caseId), m_hold(xMarkAt(stage) - pointer) {
+  for (const Spot spot : {Spot::sx, Spot::txy})
+    m_before.push_back(asTyped(stage.study, stressPlace(stage.readout, caseId, spot)));
+}
+
+Edits EarDrag::moved(const Stage& stage, QPointF pointer) const {
+  return xFaceEdits(stage.study, stage.readout, m_caseId, stage.scale.valuesAt(pointer + m_hold),
+                    1 / stage.scale.pixelsPerUnit());
+}
+
+Edits xFaceEdits(const Study& study, const Readout& readout, const std::string& caseId, QPointF values,
+                 double step) {
+  const auto typed = [&](Spot spot, double value) {
+    const std::string number = exactNumber(roundedTo(value, decadeBelow(step)));
+    return Type{stressPlace(readout, caseId, spot), number + " " + study.units.stress};
+  };
+  return {typed(Spot::sx, values.x()), typed(Spot::txy, values.y())};
+}
+
+} // namespace planewright

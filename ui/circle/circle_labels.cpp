@@ -1,0 +1,126 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/circle/circle_labels.h"
+
+#include "core/figure/metrics.h"
+#include "ui/circle/circle_fit.h"
+#include "ui/look/look.h"
+
+#include <algorithm>
+#include <ranges>
+
+namespace planewright {
+
+namespace {
+
+constexpr double leaderWidth = 1;
+/// Labels keep clear of the words in the corners of the plot.
+constexpr double corner = 20;
+/// From a mark on the circle to the label that goes round with it.
+constexpr double outside = 14;
+
+bool isBold(PlaneKind kind) {
+  return kind == PlaneKind::reading || kind == PlaneKind::s1 || kind == PlaneKind::s2 ||
+         kind == PlaneKind::x || kind == PlaneKind::y;
+}
+
+std::string keyOf(PlaneKind kind, const std::string& name) {
+  return std::to_string(static_cast<int>(kind)) + " " + name;
+}
+
+std::vector<LabelWish> wishesOf(const Stage& stage) {
+  std::vector<LabelWish> wishes;
+  for (const Mark& mark : marksOf(stage.study, stage.readout))
+    wishes.push_back(wishOf(mark, stage.pixelOf(mark.at)));
+  return wishes;
+}
+
+LabelColumns columnsOf(const Stage& stage) {
+  const QRectF& plot = stage.scale.plot();
+  const Round round = stage.round();
+  LabelColumns columns;
+  columns.centre = round.centre.x();
+  columns.leftStart = plot.left();
+  columns.leftEnd = std::max(plot.left(), round.centre.x() - round.radius - circle_size::labelGap);
+  columns.rightEnd = plot.right() + circle_size::overhang;
+  columns.rightStart = std::min(columns.rightEnd, round.centre.x() + round.radius + circle_size::labelGap);
+  columns.top = plot.top() + corner;
+  columns.bottom = plot.bottom() - corner;
+  columns.size = circle_size::text;
+  columns.leaderWidth = leaderWidth;
+  return columns;
+}
+
+/// Keeps the whole box of a label inside the plot.
+void clampInto(Label& label, const QRectF& plot) {
+  const Box box = boxOf(label);
+  const double right = plot.right() + circle_size::overhang;
+  label.at.x += std::max(0.0, plot.left() - box.left) - std::max(0.0, box.right - right);
+  label.at.y += std::max(0.0, plot.top() - box.top) - std::max(0.0, box.bottom - plot.bottom());
+}
+
+/// Beside its mark, outside the circle; its place changes without a step as the mark goes round.
+void putOutside(Label& label, const Stage& stage, QPointF mark) {
+  const Round round = stage.round();
+  const QPointF at = round.at(round.seenAt(mark), round.radius + outside);
+  const double share = round.radius > 0 ? (mark.x() - round.centre.x()) / round.radius : 1;
+  const double width = textWidth(label.runs, label.size, label.bold);
+  label.align = Align::start;
+  label.at = vecOf(at + QPointF((share - 1) / 2 * width, capHeight / 2 * label.size));
+}
+
+} // namespace
+
+LabelWish wishOf(const Mark& mark, QPointF at) {
+  return {vecOf(at),
+          runs(mark.longForm, translation()),
+          runs(mark.shortForm, translation()),
+          roleOf(mark.kind),
+          isBold(mark.kind),
+          mark.priority,
+          keyOf(mark.kind, mark.name)};
+}
+
+std::string readingKey() {
+  return keyOf(PlaneKind::reading, {});
+}
+
+CircleLabels placedLabels(const Stage& stage) {
+  std::vector<LabelWish> wishes = wishesOf(stage);
+  PlacedLabels placed = placeLabels(wishes, columnsOf(stage));
+  return {stage.readout.reading, false, std::move(wishes), std::move(placed)};
+}
+
+CircleLabels riddenLabels(const Stage& stage, const CircleLabels& before, const CircleLabels& latest) {
+  const bool goesRound = latest.goesRound || stage.readout.reading != before.reading;
+  CircleLabels now{stage.readout.reading, goesRound, wishesOf(stage), {}};
+  std::vector<Label>& labels = now.placed.labels;
+  for (Label label : before.placed.labels) {
+    const auto old = std::ranges::find(before.wishes, label.key, &LabelWish::key);
+    const auto wish = std::ranges::find(now.wishes, label.key, &LabelWish::key);
+    if (old == before.wishes.end() || wish == now.wishes.end())
+      continue;
+    const bool isShort = std::ranges::count(before.placed.shortened, label.key) > 0;
+    const Vec motion = wish->mark - old->mark;
+    label.runs = isShort ? wish->shortForm : wish->longForm;
+    label.at = label.at + motion;
+    const bool turned = label.key == readingKey() && goesRound;
+    if (turned)
+      putOutside(label, stage, pointOf(wish->mark));
+    clampInto(label, stage.scale.plot());
+    labels.push_back(label);
+    const auto leader = std::ranges::find_if(before.placed.leaders, [&](const Path& path) {
+      return path.points.front() == old->mark && path.pen->role == label.role;
+    });
+    if (turned || leader == before.placed.leaders.end())
+      continue;
+    now.placed.leaders.push_back(*leader);
+    for (Vec& point : now.placed.leaders.back().points)
+      point = point + motion;
+  }
+  // Drawn last, because it goes over all others.
+  std::ranges::stable_partition(labels, [](const Label& label) { return label.key != readingKey(); });
+  now.placed.shortened = before.placed.shortened;
+  return now;
+}
+
+} // namespace planewright

@@ -1,0 +1,84 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/circle/circle_view.h"
+
+#include "ui/circle/circle_access.h"
+#include "ui/circle/circle_plot.h"
+
+#include <QActionGroup>
+#include <QHBoxLayout>
+#include <QLabel>
+#include <QMenu>
+#include <QPainter>
+#include <QPushButton>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+namespace {
+
+QLabel* newHeading(const QString& words, QWidget* parent) {
+  auto* heading = new QLabel(words, parent);
+  QFont font = heading->font();
+  font.setBold(true);
+  heading->setFont(font);
+  return heading;
+}
+
+} // namespace
+
+CircleView::CircleView(Desk& desk, QWidget* parent)
+    : QWidget(parent), m_plot(new CirclePlot(desk, this)), m_menu(new QPushButton(this)) {
+  auto* menu = new QMenu(m_menu);
+  auto* group = new QActionGroup(menu);
+  m_this = group->addAction(tr("This circle"));
+  m_all = group->addAction(tr("All combinations"));
+  for (QAction* action : group->actions())
+    action->setCheckable(true);
+  menu->addActions(group->actions());
+  connect(m_this, &QAction::triggered, this, &CircleView::fit);
+  connect(m_all, &QAction::triggered, this, [this] {
+    m_plot->setFit(Fit::allCombinations);
+    showFit();
+  });
+  m_menu->setMenu(menu);
+  m_menu->setFlat(true);
+  m_menu->setFocusPolicy(Qt::TabFocus);
+
+  auto* row = new QHBoxLayout;
+  row->setContentsMargins(12, 4, 8, 0);
+  row->addWidget(newHeading(tr("Circle"), this));
+  row->addStretch();
+  row->addWidget(m_menu);
+  auto* column = new QVBoxLayout(this);
+  column->setContentsMargins({});
+  column->setSpacing(0);
+  column->addLayout(row);
+  column->addWidget(m_plot, 1);
+
+  setAccessibleName(tr("Circle"));
+  setFocusProxy(m_plot);
+  const QString keys = tr("Left/Right turn by 1°, Ctrl 15°, Shift 0.1°");
+  setProperty("areaKeys", keys);
+  makeAccessible(*m_plot, desk);
+  connect(m_plot, &CirclePlot::angleEntryWanted, this, &CircleView::angleEntryWanted);
+  showFit();
+}
+
+/// The heading stands on the same ground as the drawing.
+void CircleView::paintEvent(QPaintEvent*) {
+  QPainter(this).fillRect(rect(), lookOf(*this).colour(Role::canvas));
+}
+
+void CircleView::fit() {
+  m_plot->setFit(Fit::thisCircle);
+  showFit();
+}
+
+void CircleView::showFit() {
+  const bool all = m_plot->fit() == Fit::allCombinations;
+  (all ? m_all : m_this)->setChecked(true);
+  m_menu->setText(all ? tr("fit: all combinations") : tr("fit: this circle"));
+  m_menu->setAccessibleName(m_menu->text());
+}
+
+} // namespace planewright
