@@ -166,7 +166,7 @@ private:
     const std::size_t start = m_cursor.at();
     const auto& names = functionNames();
     if (std::find(names.begin(), names.end(), name.text) == names.end())
-      return tl::unexpected(unknownFunction(name));
+      return tl::unexpected(strayCall(m_cursor));
     const bool several = name.text == "min" || name.text == "max";
     m_cursor.take();
     std::vector<Value> arguments;

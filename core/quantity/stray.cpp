@@ -142,6 +142,12 @@ Problem strayForValue(const Cursor& cursor) {
   return valueMissing(cursor.here());
 }
 
+Problem strayCall(const Cursor& cursor) {
+  if (isUnitName(cursor.peek()))
+    return operatorMissing(cursor.here(), pieceOf(cursor.peek(1)));
+  return unknownFunction(cursor.here());
+}
+
 Problem strayAfterValue(const Cursor& cursor, Slopes slopes) {
   const Token& token = cursor.peek();
   const Token& before = cursor.taken();

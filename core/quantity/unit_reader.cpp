@@ -34,7 +34,9 @@ Result<int> exponentAt(Cursor& cursor) {
     const bool negative = cursor.next(Kind::minus);
     if (negative)
       cursor.take();
-    const auto whole = cursor.next(Kind::number) ? smallWhole(cursor.peek().text) : std::nullopt;
+    if (!cursor.next(Kind::number))
+      return tl::unexpected(unitExponent(cursor.since(start)));
+    const auto whole = smallWhole(cursor.peek().text);
     cursor.take();
     if (!whole)
       return tl::unexpected(unitExponent(cursor.since(start)));

@@ -78,7 +78,7 @@ TEST(Unit, refusesWhatIsNoUnitOfItsKind) {
   EXPECT_EQ(readUnit("", dimension::stress).error().column, 1);
   EXPECT_EQ(readUnit("MPa 2", dimension::stress).error().quoted, "2");
   EXPECT_EQ(readUnit("2 MPa", dimension::stress).error().quoted, "2");
-  EXPECT_EQ(readUnit("mm^x", dimension::length).error().quoted, "^x");
+  EXPECT_EQ(readUnit("mm^x", dimension::length).error().quoted, "^");
   EXPECT_FALSE(readUnit("\xFF", dimension::length));
 }
 
