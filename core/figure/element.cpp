@@ -16,6 +16,9 @@ namespace {
 
 constexpr Angle quarterTurn = Angle::fromDegrees(90);
 constexpr Angle halfTurn = Angle::fromDegrees(180);
+/// Turns (deg) by which an arc stops short of a handle that would cover its head.
+constexpr double behindKnob = 3.2;
+constexpr double behindBar = 2.8;
 
 /// What one drawing of an element needs at hand.
 struct Drawing {
@@ -112,8 +115,8 @@ void drawNormal(const Drawing& drawing) {
   if (order.otherFace)
     drawing.stroke({frame.centre, frame.at(theta, order.handles ? 1 : part::axisEnd)},
                    {Role::reading, order.narrow, Dash::shortDash});
-  const double behindKnob = order.handles && !order.otherFace ? 3.2 : 0;
-  drawAngle(drawing.picture, frame, theta, order.handles ? 1 : part::axisEnd, behindKnob,
+  const bool knobCovers = order.handles && !order.otherFace;
+  drawAngle(drawing.picture, frame, theta, order.handles ? 1 : part::axisEnd, knobCovers ? behindKnob : 0,
             solid(Role::reading, order.medium));
 }
 
@@ -244,7 +247,8 @@ std::vector<LabelWish> drawElement(Picture& picture, const Study& study, const R
   if (line) {
     wishes.push_back(lineWish(drawing));
     if (order.lineArc)
-      drawAngle(picture, frame, line->angle.value, part::lineEnd, 0, solid(Role::line, order.medium));
+      drawAngle(picture, frame, line->angle.value, part::lineEnd, order.handles ? behindBar : 0,
+                solid(Role::line, order.medium));
     if (order.handles)
       drawBars(picture, frame, line->angle.value, order);
   }

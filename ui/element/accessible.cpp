@@ -10,6 +10,10 @@ namespace planewright {
 
 namespace {
 
+double valueOf(const ElementView& view) {
+  return view.angleOf(view.currentHandle()).value_or(Angle()).degrees();
+}
+
 class ElementAccessible : public QAccessibleWidget, public QAccessibleValueInterface {
 public:
   explicit ElementAccessible(ElementView& view) : QAccessibleWidget(&view, QAccessible::Dial), m_view(view) {}
@@ -29,7 +33,7 @@ public:
     return line.isEmpty() ? reading : reading + QStringLiteral("; ") + line;
   }
 
-  QVariant currentValue() const override { return m_view.angleOf(m_view.currentHandle())->degrees(); }
+  QVariant currentValue() const override { return valueOf(m_view); }
   void setCurrentValue(const QVariant& value) override {
     m_view.turn(m_view.currentHandle(), Angle::fromDegrees(value.toDouble()));
   }
@@ -56,7 +60,7 @@ void installElementAccessibility() {
 void announceElement(ElementView& view) {
   if (!QAccessible::isActive())
     return;
-  QAccessibleValueChangeEvent event(&view, view.angleOf(view.currentHandle())->degrees());
+  QAccessibleValueChangeEvent event(&view, valueOf(view));
   QAccessible::updateAccessibility(&event);
 }
 

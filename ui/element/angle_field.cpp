@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/element/angle_field.h"
 
+#include "ui/look/look.h"
+
 #include <QKeyEvent>
 
 namespace planewright {
@@ -9,6 +11,21 @@ AngleField::AngleField(const QString& text, QWidget* parent) : QLineEdit(text, p
   constexpr int characters = 14;
   setFixedWidth(fontMetrics().averageCharWidth() * characters + 16);
   selectAll();
+}
+
+void AngleField::refuse(const QString& why) {
+  const Look look = lookOf(*this);
+  QPalette wrong = palette();
+  wrong.setColor(QPalette::Base, look.colour(Role::wrongGround));
+  wrong.setColor(QPalette::Text, look.colour(Role::wrong));
+  setPalette(wrong);
+  setToolTip(why);
+  selectAll();
+}
+
+bool AngleField::focusNextPrevChild(bool) {
+  Q_EMIT offered(text());
+  return true;
 }
 
 void AngleField::keyPressEvent(QKeyEvent* event) {

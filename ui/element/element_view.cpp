@@ -117,6 +117,9 @@ void ElementView::mousePressEvent(QMouseEvent* event) {
 }
 
 void ElementView::mouseMoveEvent(QMouseEvent* event) {
+  // A release that went elsewhere ends the drag as well.
+  if (m_drag && !(event->buttons() & Qt::LeftButton))
+    endDrag();
   if (m_drag)
     dragTo(event->position(), event->modifiers());
   else
@@ -163,16 +166,15 @@ void ElementView::endDrag() {
 }
 
 /// Asks the desk; the handle keeps the side on which the hand wants it.
-bool ElementView::type(const ElementHold& hold, const std::string& text, Gesture gesture, Angle wanted) {
-  const std::optional<Problem> problem =
-      m_desk.request({Type{hold.place, text}}, gesture, whatTurns(hold.handle));
-  if (problem) {
+std::optional<Problem> ElementView::type(const ElementHold& hold, const std::string& text, Gesture gesture,
+                                         Angle wanted) {
+  std::optional<Problem> problem = m_desk.request({Type{hold.place, text}}, gesture, whatTurns(hold.handle));
+  if (problem)
     m_desk.say(shown(*problem));
-    return false;
-  }
-  facingOf(hold.handle).keepNear(wanted, *angleOf(hold.handle));
+  else
+    facingOf(hold.handle).keepNear(wanted, *angleOf(hold.handle));
   update();
-  return true;
+  return problem;
 }
 
 void ElementView::turn(ElementHandle handle, Angle to) {
@@ -237,7 +239,7 @@ void ElementView::turnByKey(const ElementHold& hold, Angle to) {
   const std::string before = textAt(m_desk.study(), hold.place).value_or(std::string());
   const Angle from = facingOf(hold.handle).shown(hold.folded);
   const Gesture gesture = keyGesture();
-  if (!type(hold, typedAngle(to), gesture, from))
+  if (type(hold, typedAngle(to), gesture, from))
     return;
   m_keysIndex = m_desk.undoStack()->index();
   if (hold.handle == ElementHandle::line)
@@ -259,19 +261,21 @@ void ElementView::openField(const ElementHold& hold) {
   constexpr int beside = 14;
   m_field->move(qBound(0, qRound(at.x()) + beside, qMax(0, width() - m_field->width())),
                 qBound(0, qRound(at.y()) - m_field->height() / 2, qMax(0, height() - m_field->height())));
-  const ElementHandle handle = hold.handle;
-  connect(m_field, &AngleField::offered, this, [this, handle](const QString& text) {
-    const std::optional<ElementHold> now = holdOf(m_desk.readout(), handle);
-    const std::string before =
-        now ? textAt(m_desk.study(), now->place).value_or(std::string()) : std::string();
-    if (now && !type(*now, text.toStdString(), m_desk.newGesture(), now->folded))
-      return m_field->selectAll();
-    setFocus(Qt::OtherFocusReason);
-    if (handle == ElementHandle::line)
-      sayLine(before);
-  });
+  connect(m_field, &AngleField::offered, this,
+          [this, handle = hold.handle](const QString& text) { takeTyped(handle, text); });
   m_field->show();
   m_field->setFocus(Qt::OtherFocusReason);
+}
+
+void ElementView::takeTyped(ElementHandle handle, const QString& text) {
+  if (const std::optional<ElementHold> hold = holdOf(m_desk.readout(), handle)) {
+    const std::string before = textAt(m_desk.study(), hold->place).value_or(std::string());
+    if (const auto problem = type(*hold, text.toStdString(), m_desk.newGesture(), hold->folded))
+      return m_field->refuse(shown(*problem));
+    if (handle == ElementHandle::line)
+      sayLine(before);
+  }
+  setFocus(Qt::OtherFocusReason);
 }
 
 // --- the words

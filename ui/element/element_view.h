@@ -68,10 +68,12 @@ private:
   void dragTo(QPointF at, Qt::KeyboardModifiers held);
   void putBack();
   void endDrag();
-  bool type(const ElementHold& hold, const std::string& text, Gesture gesture, Angle wanted);
+  std::optional<Problem> type(const ElementHold& hold, const std::string& text, Gesture gesture,
+                              Angle wanted);
   void turnByKey(const ElementHold& hold, Angle to);
   Gesture keyGesture();
   void openField(const ElementHold& hold);
+  void takeTyped(ElementHandle handle, const QString& text);
   void sayLine(const std::string& before);
 
   Desk& m_desk;

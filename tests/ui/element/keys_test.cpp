@@ -138,6 +138,20 @@ TEST(ElementKeys, escapeGivesUpTheTypedAngle) {
   EXPECT_TRUE(rig.view.hasFocus());
 }
 
+TEST(ElementKeys, tabTakesTheTypedAngleToo) {
+  ElementRig rig;
+  rig.key(Qt::Key_Tab);
+  rig.key(Qt::Key_Enter);
+  auto* field = rig.view.findChild<AngleField*>();
+  ASSERT_TRUE(field);
+  EXPECT_EQ(field->text(), QStringLiteral("1 in 10"));
+  field->setText(QStringLiteral("1 in 8"));
+  QTest::keyClick(field, Qt::Key_Tab);
+  EXPECT_EQ(rig.line(), "1 in 8");
+  EXPECT_TRUE(rig.view.hasFocus());
+  EXPECT_EQ(rig.view.currentHandle(), ElementHandle::line);
+}
+
 TEST(ElementKeys, areNamedForTheStatusLine) {
   ElementRig rig;
   EXPECT_EQ(rig.view.property("areaKeys").toString(),
