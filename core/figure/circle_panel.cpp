@@ -222,15 +222,23 @@ void drawRound(const CircleDrawing& drawing) {
   drawCentre(drawing);
 }
 
+/// Labels are left out from the least wanted on: watched planes first.
+CircleLabels outcomeOf(const PlacedLabels& placed, const std::vector<Mark>& marks) {
+  const std::size_t without = marks.size() - placed.labels.size();
+  const auto watched = std::count_if(marks.begin(), marks.end(),
+                                     [](const Mark& mark) { return mark.kind == PlaneKind::watched; });
+  return {without <= static_cast<std::size_t>(watched), without};
+}
+
 } // namespace
 
-bool drawCirclePanel(Picture& picture, const Setting& setting, const Box& area) {
+CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box& area) {
   const double text = setting.text;
   const std::vector<Mark> marks = marksOf(setting.study, setting.readout);
   std::vector<LabelWish> wishes = wishesOf(setting, marks);
   Box plot = area;
   if (!setting.isNarrow) {
-    setWords(picture, {area.left, area.top + capHeight * text},
+    setWords(picture, {area.left, area.top + boxOver * text},
              setting.runsOf(PW_TEXT("Figure", "Circle of the state")), text, Align::start, Role::soft);
     plot.top += 1.5 * text;
   }
@@ -249,7 +257,7 @@ bool drawCirclePanel(Picture& picture, const Setting& setting, const Box& area) 
   if (fit.radius > 0 && setting.readout.reading.value != Angle())
     labelDoubleAngle(drawing);
   picture.parts.insert(picture.parts.end(), placed.labels.begin(), placed.labels.end());
-  return placed.fits;
+  return outcomeOf(placed, marks);
 }
 
 } // namespace planewright

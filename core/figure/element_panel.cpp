@@ -12,6 +12,7 @@ namespace planewright {
 namespace {
 
 constexpr double headingHeight = 1.5; // ems
+constexpr double edgeRoom = 0.3;      // ems under the drawing
 constexpr double leaderRoom = 0.9;    // ems between drawing and labels
 
 /// Distances from the centre of a drawing to the edges of its strokes, and the width of its labels.
@@ -73,7 +74,7 @@ Reach reachOf(const Setting& setting, bool turned, double outer, double mostLabe
 /// Room for the drawing under the heading.
 Box roomOf(const Setting& setting, const ElementPanel& panel) {
   return {panel.area.left, panel.area.top + headingHeight * setting.text, panel.area.right,
-          panel.area.bottom};
+          panel.area.bottom - edgeRoom * setting.text};
 }
 
 Reach greatest(const Setting& setting, const std::vector<ElementPanel>& panels, double outer,
@@ -90,39 +91,73 @@ Reach greatest(const Setting& setting, const std::vector<ElementPanel>& panels, 
   return result;
 }
 
-/// Which wishes stand over a letter of the axes at this height: those that begin over it, and of those level
-/// with it the upper half. `wishes` ascend by height.
-std::size_t countAbove(const std::vector<LabelWish>& wishes, double letter, double half) {
+/// A stretch of the column between letters of the axes.
+struct Band {
+  double top = 0;
+  double bottom = 0;
+  std::size_t count = 0; ///< of labels in it
+};
+
+/// How many rows of labels a band holds.
+std::size_t rowsIn(const Band& band, double size) {
+  const double room = (band.bottom - band.top) / size - boxOver - boxUnderIndex;
+  return room < 0 ? 0 : static_cast<std::size_t>(room / labelPitch) + 1;
+}
+
+std::vector<Band> bandsOf(const LabelColumns& columns, std::vector<double> letters) {
+  const double half = 0.6 * columns.size;
+  std::sort(letters.begin(), letters.end());
+  std::vector<Band> bands;
+  double top = columns.top;
+  for (const double letter : letters) {
+    bands.push_back({top, letter - half});
+    top = letter + half;
+  }
+  bands.push_back({top, columns.bottom});
+  return bands;
+}
+
+/// Shares `wishes`, which ascend by height, out to the bands: over a letter those that begin over it, and of
+/// those level with it the upper half, as far as the bands hold them.
+void shareOut(std::vector<Band>& bands, const std::vector<LabelWish>& wishes, double size) {
+  std::size_t room = 0;
+  for (const Band& band : bands)
+    room += rowsIn(band, size);
   const auto under = [&](double height) {
     return static_cast<std::size_t>(std::count_if(
         wishes.begin(), wishes.end(), [&](const LabelWish& wish) { return wish.mark.y < height; }));
   };
-  return (under(letter - half) + under(letter + half) + 1) / 2;
+  std::size_t from = 0;
+  for (Band& band : bands) {
+    const std::size_t rows = rowsIn(band, size);
+    room -= rows;
+    const std::size_t wished = (under(band.bottom) + under(band.bottom + 1.2 * size) + 1) / 2;
+    const std::size_t needed = wishes.size() > room ? wishes.size() - room : 0;
+    const bool last = &band == &bands.back();
+    const std::size_t to = last ? wishes.size() : std::min(std::max({from, wished, needed}), from + rows);
+    band.count = to - from;
+    from = to;
+  }
 }
 
 /// Places the wishes in bands of the column between the letters of the axes, so that no leader runs under
 /// one.
 bool placeBetween(Picture& picture, std::vector<LabelWish> wishes, LabelColumns columns,
-                  std::vector<double> letters) {
-  const double half = 0.6 * columns.size;
-  const double bottom = columns.bottom;
-  std::sort(letters.begin(), letters.end());
+                  const std::vector<double>& letters) {
   std::stable_sort(wishes.begin(), wishes.end(),
                    [](const LabelWish& a, const LabelWish& b) { return a.mark.y < b.mark.y; });
-  std::size_t from = 0;
+  std::vector<Band> bands = bandsOf(columns, letters);
+  shareOut(bands, wishes, columns.size);
+  auto from = wishes.begin();
   bool fits = true;
-  for (std::size_t band = 0; band <= letters.size(); ++band) {
-    const bool last = band == letters.size();
-    const std::size_t to = last ? wishes.size() : std::max(from, countAbove(wishes, letters[band], half));
-    columns.bottom = last ? bottom : letters[band] - half;
-    const PlacedLabels placed = placeLabels({wishes.begin() + static_cast<std::ptrdiff_t>(from),
-                                             wishes.begin() + static_cast<std::ptrdiff_t>(to)},
-                                            columns);
+  for (const Band& band : bands) {
+    const auto to = from + static_cast<std::ptrdiff_t>(band.count);
+    columns.top = band.top;
+    columns.bottom = band.bottom;
+    const PlacedLabels placed = placeLabels({from, to}, columns);
     picture.parts.insert(picture.parts.end(), placed.leaders.begin(), placed.leaders.end());
     picture.parts.insert(picture.parts.end(), placed.labels.begin(), placed.labels.end());
     fits = fits && placed.fits;
-    if (!last)
-      columns.top = letters[band] + half;
     from = to;
   }
   return fits;
@@ -132,7 +167,7 @@ bool drawPanel(Picture& picture, const Setting& setting, const ElementPanel& pan
                const Reach& reach) {
   const double size = setting.text;
   setWords(
-      picture, {panel.area.left, panel.area.top + capHeight * size},
+      picture, {panel.area.left, panel.area.top + boxOver * size},
       setting.runsOf(panel.turned ? PW_TEXT("Figure", "Reading plane") : PW_TEXT("Figure", "Given axes")),
       size, Align::start, Role::soft);
   Picture element;

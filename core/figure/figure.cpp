@@ -17,12 +17,13 @@ namespace {
 constexpr double margin = 0.6; // mm at the sides
 
 Problem rangeProblem(const char* place, double value, const Text& what, double least, double greatest) {
+  const std::string quoted = std::isfinite(value) ? exactNumber(value) : "?";
   return {
       place,
       0,
       0,
-      exactNumber(value),
-      what.with(exactNumber(value)),
+      quoted,
+      what.with(quoted),
       PW_TEXT("Figure", "Take a number from %1 to %2.").with(exactNumber(least)).with(exactNumber(greatest))};
 }
 
@@ -42,7 +43,7 @@ Problem crowdedProblem(const FigureOrder& order) {
           0,
           exactNumber(order.width),
           PW_TEXT("Figure", "At %1 mm the labels find no room.").with(exactNumber(order.width)),
-          PW_TEXT("Figure", "Take a wider figure or smaller text, or watch fewer planes.")};
+          PW_TEXT("Figure", "Take a wider figure, smaller text or fewer lines.")};
 }
 
 /// One figure while it grows downwards.
@@ -53,6 +54,7 @@ struct Sheet {
   double right = 0;
   double bottom = 0; ///< of what stands already
   bool fits = true;
+  std::size_t unnamed = 0; ///< watched planes without a label on the circle
 
   double width() const { return right - left; }
   const FigureParts& parts() const { return setting.order.parts; }
@@ -72,6 +74,14 @@ std::vector<ElementPanel> elementsBeside(const Sheet& sheet, double height) {
   return panels;
 }
 
+void drawCircle(Sheet& sheet, double left, double height) {
+  const CircleLabels labels =
+      drawCirclePanel(sheet.picture, sheet.setting, {left, sheet.bottom, sheet.right, sheet.bottom + height});
+  sheet.fits = sheet.fits && labels.fit;
+  sheet.unnamed = labels.unnamed;
+  sheet.bottom += height;
+}
+
 /// Elements in a column at the left, circle at the right.
 void drawWide(Sheet& sheet) {
   const double unit = sheet.width() / 160;
@@ -86,10 +96,7 @@ void drawWide(Sheet& sheet) {
       top += 48 * unit;
     }
   sheet.fits = drawElementPanels(sheet.picture, sheet.setting, panels) && sheet.fits;
-  const Box circle{panels.empty() ? sheet.left : column + 2 * unit, sheet.bottom, sheet.right,
-                   sheet.bottom + height};
-  sheet.fits = drawCirclePanel(sheet.picture, sheet.setting, circle) && sheet.fits;
-  sheet.bottom += height;
+  drawCircle(sheet, panels.empty() ? sheet.left : column + 2 * unit, height);
 }
 
 /// Elements side by side, the circle under them.
@@ -99,13 +106,8 @@ void drawUpright(Sheet& sheet) {
   sheet.fits = drawElementPanels(sheet.picture, sheet.setting, panels) && sheet.fits;
   if (!panels.empty())
     sheet.bottom = panels.front().area.bottom + 0.5 * sheet.setting.text;
-  if (!sheet.parts().circle)
-    return;
-  const double height = (sheet.setting.isNarrow ? 56 : 90) * unit;
-  sheet.fits = drawCirclePanel(sheet.picture, sheet.setting,
-                               {sheet.left, sheet.bottom, sheet.right, sheet.bottom + height}) &&
-               sheet.fits;
-  sheet.bottom += height;
+  if (sheet.parts().circle)
+    drawCircle(sheet, sheet.left, (sheet.setting.isNarrow ? 56 : 90) * unit);
 }
 
 void drawPictures(Sheet& sheet) {
@@ -138,7 +140,7 @@ Result<Picture> figureOf(const Study& study, const Readout& readout, const Figur
   drawPictures(sheet);
   if (order.parts.planes)
     sheet.bottom = drawPlanes(picture, sheet.setting, sheet.left, sheet.right, sheet.bottom);
-  sheet.bottom = drawClosing(picture, sheet.setting, sheet.left, sheet.right, sheet.bottom);
+  sheet.bottom = drawClosing(picture, sheet.setting, sheet.left, sheet.right, sheet.bottom, sheet.unnamed);
   if (!sheet.fits)
     return tl::unexpected(crowdedProblem(order));
   picture.height = std::ceil(sheet.bottom * 10) / 10;

@@ -72,9 +72,14 @@ Runs signatureOf(const Setting& setting) {
   return words.empty() ? Runs{} : Runs{{words, false}};
 }
 
-double drawConventions(Picture& picture, const Setting& setting, double left, double right, double top) {
+double drawConventions(Picture& picture, const Setting& setting, double left, double right, double top,
+                       std::size_t unnamed) {
   const double size = setting.small;
   Runs text;
+  if (unnamed > 0)
+    append(text,
+           setting.runsOf(PW_TEXT("Figure", "Without room for their names on the circle: %1 watched planes.")
+                              .with(exactNumber(static_cast<double>(unnamed)))));
   for (const Text& sentence : conventionsOf(setting.study, setting.readout))
     append(text, setting.runsOf(sentence));
   const std::vector<Runs> lines = brokenLines(text, right - left, size, false);
@@ -148,9 +153,10 @@ double drawTitle(Picture& picture, const Setting& setting, double left, double r
   return y + 0.6 * setting.text;
 }
 
-double drawClosing(Picture& picture, const Setting& setting, double left, double right, double top) {
+double drawClosing(Picture& picture, const Setting& setting, double left, double right, double top,
+                   std::size_t unnamed) {
   const double size = setting.text;
-  double y = drawConventions(picture, setting, left, right, top);
+  double y = drawConventions(picture, setting, left, right, top, unnamed);
   const std::vector<Runs> caption =
       brokenLines(setting.runsOf(setting.order.caption), right - left, size, false);
   if (!caption.empty())

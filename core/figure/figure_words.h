@@ -13,7 +13,8 @@ std::string figureDescription(const Setting& setting);
 /// Draws the title from the top down and returns where it ends; nothing when the title is left out.
 double drawTitle(Picture& picture, const Setting& setting, double left, double right);
 /// Draws the conventions, version and study name at the end of their last row, and the caption from `top`
-/// down; returns where they end.
-double drawClosing(Picture& picture, const Setting& setting, double left, double right, double top);
+/// down; returns where they end. `unnamed` watched planes have a mark on the circle without a label.
+double drawClosing(Picture& picture, const Setting& setting, double left, double right, double top,
+                   std::size_t unnamed);
 
 } // namespace planewright

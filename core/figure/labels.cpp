@@ -30,11 +30,13 @@ struct Side {
   std::size_t capacity = 0;
   std::vector<std::size_t> order;
   std::vector<bool> isShort; ///< of each of `all`
+  std::vector<double> longWidths;
+  std::vector<double> shortWidths;
 
   const Runs& form(std::size_t wish) const {
     return isShort[wish] ? all[wish].shortForm : all[wish].longForm;
   }
-  double formWidth(std::size_t wish) const { return textWidth(form(wish), size, all[wish].bold); }
+  double formWidth(std::size_t wish) const { return isShort[wish] ? shortWidths[wish] : longWidths[wish]; }
   double leaderEnd() const { return edge + (isLeft ? leaderGap : -leaderGap) * size; }
   bool hasLeader(std::size_t wish) const {
     return isLeft ? all[wish].mark.x > leaderEnd() : all[wish].mark.x < leaderEnd();
@@ -180,7 +182,13 @@ Side sideOf(const std::vector<LabelWish>& wishes, const LabelColumns& columns, b
             room < 0 ? 0
                      : static_cast<std::size_t>(std::floor(room / (labelPitch * columns.size) + 1e-9)) + 1,
             {},
-            std::vector<bool>(wishes.size(), false)};
+            std::vector<bool>(wishes.size(), false),
+            {},
+            {}};
+  for (const LabelWish& wish : wishes) {
+    side.longWidths.push_back(textWidth(wish.longForm, columns.size, wish.bold));
+    side.shortWidths.push_back(textWidth(wish.shortForm, columns.size, wish.bold));
+  }
   for (std::size_t i = 0; i < wishes.size(); ++i)
     if ((wishes[i].mark.x < columns.centre) == isLeft)
       side.order.push_back(i);

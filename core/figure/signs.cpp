@@ -3,6 +3,7 @@
 
 #include "core/quantity/angle.h"
 
+#include <algorithm>
 #include <cmath>
 
 namespace planewright {
@@ -51,19 +52,20 @@ bool covers(const PlacedSign& sign, Vec point) {
   return true;
 }
 
-bool sameSignAndPlace(const PlacedSign& a, const PlacedSign& b) {
-  return a.sign == b.sign && std::hypot(a.at.x - b.at.x, a.at.y - b.at.y) < halo;
+bool areNear(const PlacedSign& a, const PlacedSign& b) {
+  return std::hypot(a.at.x - b.at.x, a.at.y - b.at.y) < a.size + b.size;
 }
 
 double visibleShare(const std::vector<PlacedSign>& signs, std::size_t which) {
   const std::vector<Vec> outline = outlineOf(signs[which]);
-  std::size_t seen = 0;
-  for (const Vec point : outline) {
-    bool hidden = false;
-    for (std::size_t above = which + 1; above < signs.size() && !hidden; ++above)
-      hidden = !sameSignAndPlace(signs[which], signs[above]) && covers(signs[above], point);
-    seen += hidden ? 0 : 1;
-  }
+  std::vector<const PlacedSign*> above;
+  for (std::size_t i = which + 1; i < signs.size(); ++i)
+    if (signs[i].sign != signs[which].sign && areNear(signs[i], signs[which]))
+      above.push_back(&signs[i]);
+  const auto seen = std::count_if(outline.begin(), outline.end(), [&](Vec point) {
+    return std::none_of(above.begin(), above.end(),
+                        [&](const PlacedSign* sign) { return covers(*sign, point); });
+  });
   return static_cast<double>(seen) / static_cast<double>(outline.size());
 }
 

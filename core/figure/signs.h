@@ -15,7 +15,7 @@ struct PlacedSign {
 };
 
 /// Makes signs that others hide larger until 60 % of their outline is seen, at most three times their size.
-/// Later signs lie over earlier ones. Like signs in one place stay as they are.
+/// Later signs lie over earlier ones. Like signs do not count as hiding each other.
 void showHidden(std::vector<PlacedSign>& signs);
 
 /// Draws a sign: filled in its role or hollow on canvas.
