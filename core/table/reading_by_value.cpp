@@ -1,0 +1,75 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/table/reading_by_value.h"
+
+#include "core/quantity/format.h"
+#include "core/study/cut_text.h"
+#include "core/study/place.h"
+
+namespace planewright {
+
+namespace {
+
+constexpr int noteDecimals = 1;
+
+Text symbolOf(Component component) {
+  return symbol(component == Component::sn ? "σ_{n}" : "τ_{nt}");
+}
+
+Problem outOfReach(const Study& study, const Readout& readout, Component component,
+                   const PlanesOfValue& planes, std::string_view text) {
+  const StateReading& state = readout.state();
+  Problem problem;
+  problem.place = pathOf({Spot::reading, readout.point, {}});
+  problem.quoted = text;
+  problem.what = PW_TEXT("Inverse", "%1 reaches only %2 to %3.")
+                     .with(symbolOf(component))
+                     .with(shownStress(study, state, planes.least))
+                     .with(shownStress(study, state, planes.greatest) + " " + study.units.stress);
+  return problem;
+}
+
+Text touchedName(Component component, bool greatest) {
+  if (component == Component::sn)
+    return symbol(greatest ? "σ_{1}" : "σ_{2}");
+  return greatest ? PW_TEXT("Inverse", "the greatest τ_{nt}") : PW_TEXT("Inverse", "the least τ_{nt}");
+}
+
+Text touchingNote(Component component, const PlanesOfValue& planes, double value) {
+  const bool greatest = planes.greatest - value < value - planes.least;
+  const int decimals = decimalsFor(planes.spread.degrees(), 1);
+  return PW_TEXT("Inverse", "touches at %1, ± %2")
+      .with(touchedName(component, greatest))
+      .with(shownDegrees(planes.spread, decimals));
+}
+
+} // namespace
+
+Result<ReadingByValue> readingFor(const Study& study, const Readout& readout, Component component,
+                                  std::string_view text) {
+  Result<Entry> entry = readEntry(text, entryKindOf(study, Spot::sx));
+  if (!entry)
+    return tl::unexpected(std::move(entry).error());
+  const StateReading& state = readout.state();
+  ReadingByValue result;
+  result.planes = planesOf(state.circle, component, {entry->value, entry->halfWidth}, readout.reading);
+  result.reading = angleText(result.planes.first.value);
+  switch (result.planes.kind) {
+  case PlanesOfValue::Kind::outOfReach:
+    return tl::unexpected(outOfReach(study, readout, component, result.planes, text));
+  case PlanesOfValue::Kind::two:
+    result.other = angleText(result.planes.second.value);
+    result.note =
+        PW_TEXT("Inverse", "also at %1").with(shownDegrees(result.planes.second.value, noteDecimals));
+    break;
+  case PlanesOfValue::Kind::touching:
+    result.note = touchingNote(component, result.planes, entry->value);
+    break;
+  case PlanesOfValue::Kind::every:
+    result.reading = findPoint(study, readout.point)->reading;
+    result.note = PW_TEXT("Inverse", "every direction");
+    break;
+  }
+  return result;
+}
+
+} // namespace planewright
