@@ -12,7 +12,7 @@ function order(part, folders,   list, count, i) {
 BEGIN {
   # Each folder includes only folders before it in its row, and its own.
   order("core", "words quantity working stress study table figure record evidence")
-  order("ui", "look entry chart desk paint files given element circle planes figure shell")
+  order("ui", "look desk entry chart paint files given element circle planes figure shell")
   split("given element circle planes figure", views, " ")
   for (i in views) isView[views[i]] = 1
   edge = "(^|[^A-Za-z0-9_])"

@@ -52,8 +52,11 @@ std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const 
   Result<Study> after = edited(*m_study, edits);
   if (!after)
     return std::move(after).error();
-  if (*after != *m_study)
+  if (*after != *m_study) {
+    m_cause = gesture;
     m_undo.push(new StudyCommand(*this, std::make_shared<const Study>(*std::move(after)), gesture, what));
+    m_cause.reset();
+  }
   return std::nullopt;
 }
 

@@ -33,6 +33,8 @@ public:
   /// Applies the edits as one step of the gesture; the Problem when they are not taken. Edits that change
   /// nothing leave no step.
   std::optional<Problem> request(const Edits& edits, Gesture gesture, const QString& what);
+  /// While changed() tells of a request: its gesture. None for undo, redo, show and replace.
+  const std::optional<Gesture>& cause() const { return m_cause; }
   /// Shows another point or combination: no undo step, not a change to save.
   void show(const std::string& point, const std::string& combination);
   /// Puts another study on the desk with an empty history (New, Open).
@@ -52,6 +54,7 @@ private:
   Readout m_readout;
   QUndoStack m_undo;
   quint64 m_lastGesture = 0;
+  std::optional<Gesture> m_cause;
 };
 
 } // namespace planewright

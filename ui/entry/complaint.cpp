@@ -1,0 +1,102 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/entry/complaint.h"
+
+#include "ui/look/look.h"
+
+#include <QPainter>
+#include <QPolygonF>
+#include <QTextLayout>
+
+namespace planewright {
+
+namespace {
+
+constexpr int mostLines = 2;
+constexpr int textStart = 14;
+constexpr qreal triangle = 8;
+
+/// The lines of a text broken between words, or inside one that is wider than a line.
+QStringList broken(const QString& text, const QFont& font, int width) {
+  QTextLayout layout(text, font);
+  QTextOption option;
+  option.setWrapMode(QTextOption::WrapAtWordBoundaryOrAnywhere);
+  layout.setTextOption(option);
+  layout.beginLayout();
+  QStringList lines;
+  for (QTextLine line = layout.createLine(); line.isValid(); line = layout.createLine()) {
+    line.setLineWidth(width);
+    lines += text.mid(line.textStart(), line.textLength()).trimmed();
+  }
+  layout.endLayout();
+  return lines;
+}
+
+} // namespace
+
+QStringList complaintLines(const QString& what, const QString& mend, const QFont& font, int width) {
+  const QFontMetrics metrics(font);
+  if (metrics.horizontalAdvance(what) <= width && metrics.horizontalAdvance(mend) <= width)
+    return mend.isEmpty() ? QStringList{what} : QStringList{what, mend};
+  QString first = what;
+  QStringList lines = broken(first + QLatin1Char(' ') + mend, font, width);
+  while (lines.size() > mostLines && !first.isEmpty()) {
+    first.chop(1);
+    lines = broken(first.trimmed() + QStringLiteral("… ") + mend, font, width);
+  }
+  if (lines.size() > mostLines)
+    lines = {lines.at(0), metrics.elidedText(lines.mid(1).join(QLatin1Char(' ')), Qt::ElideRight, width)};
+  return lines;
+}
+
+Complaint::Complaint(QWidget* parent) : QWidget(parent) {
+  QSizePolicy policy(QSizePolicy::Ignored, QSizePolicy::Minimum);
+  policy.setHeightForWidth(true);
+  setSizePolicy(policy);
+}
+
+void Complaint::say(const QString& what, const QString& mend) {
+  m_what = what;
+  m_mend = mend;
+  setToolTip(words());
+  updateGeometry();
+  update();
+}
+
+QString Complaint::words() const {
+  return m_mend.isEmpty() ? m_what : m_what + QLatin1Char(' ') + m_mend;
+}
+
+QStringList Complaint::linesIn(int width) const {
+  return complaintLines(m_what, m_mend, font(), qMax(40, width - textStart));
+}
+
+int Complaint::heightForWidth(int width) const {
+  return static_cast<int>(linesIn(width).size()) * fontMetrics().lineSpacing() + 2;
+}
+
+QSize Complaint::sizeHint() const {
+  return {160, heightForWidth(qMax(160, width()))};
+}
+
+QSize Complaint::minimumSizeHint() const {
+  return {0, fontMetrics().lineSpacing() + 2};
+}
+
+void Complaint::paintEvent(QPaintEvent*) {
+  QPainter painter(this);
+  painter.setRenderHint(QPainter::Antialiasing);
+  const QColor wrong = lookOf(*this).colour(Role::wrong);
+  const QFontMetrics metrics = fontMetrics();
+  const qreal foot = metrics.ascent();
+  painter.setPen(Qt::NoPen);
+  painter.setBrush(wrong);
+  painter.drawPolygon(QPolygonF{{0, foot}, {triangle, foot}, {triangle / 2, foot - triangle}});
+  painter.setPen(wrong);
+  int base = metrics.ascent();
+  for (const QString& line : linesIn(width())) {
+    painter.drawText(textStart, base, line);
+    base += metrics.lineSpacing();
+  }
+}
+
+} // namespace planewright
