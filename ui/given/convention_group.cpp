@@ -1,0 +1,108 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/given/convention_group.h"
+
+#include "ui/given/choice_button.h"
+#include "ui/given/sense_picture.h"
+#include "ui/look/look.h"
+
+#include <QButtonGroup>
+#include <QHBoxLayout>
+#include <QLabel>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+namespace {
+
+ChoiceButton::Picture pictureOf(Positive positive) {
+  return [positive](QPainter& painter, const QRectF& box, const Look& look) {
+    paintSense(painter, box, positive, look);
+  };
+}
+
+ChoiceButton::Picture pictureOf(ShearAxis axis) {
+  return [axis](QPainter& painter, const QRectF& box, const Look& look) {
+    paintShearAxis(painter, box, axis, look);
+  };
+}
+
+void check(const QList<ChoiceButton*>& buttons, int which) {
+  buttons.at(which)->setChecked(true);
+}
+
+} // namespace
+
+ConventionGroup::ConventionGroup(Desk& desk, QWidget* parent)
+    : FoldGroup(tr("Conventions"), Role::ink, parent), m_desk(desk) {
+  addChoices<Positive>(m_positive);
+  addChoices<ShearAxis>(m_shearAxis);
+  addUnits();
+  setFolded(true);
+  connect(&m_desk, &Desk::changed, this, &ConventionGroup::refresh);
+  refresh();
+}
+
+template <class Enum>
+void ConventionGroup::addChoices(QList<ChoiceButton*>& buttons) {
+  auto* line = new QHBoxLayout;
+  line->setSpacing(6);
+  auto* group = new QButtonGroup(this);
+  for (const Named<Enum>& row : namesOf<Enum>()) {
+    auto* button = new ChoiceButton(pictureOf(row.value), row.label, this);
+    connect(button, &QAbstractButton::clicked, this, [this, value = row.value] { choose(value); });
+    group->addButton(button);
+    line->addWidget(button);
+    buttons += button;
+  }
+  body().addLayout(line);
+}
+
+void ConventionGroup::addUnits() {
+  auto* heading = new QLabel(tr("Units of bare numbers and of results"), this);
+  heading->setForegroundRole(QPalette::PlaceholderText);
+  heading->setWordWrap(true);
+  body().addWidget(heading);
+  const std::initializer_list<std::pair<Spot, Text>> units = {{Spot::unitStress, PW_TEXT("Given", "stress")},
+                                                              {Spot::unitForce, PW_TEXT("Given", "force")},
+                                                              {Spot::unitLength, PW_TEXT("Given", "length")},
+                                                              {Spot::unitMoment, PW_TEXT("Given", "moment")}};
+  for (const auto& [spot, caption] : units) {
+    EntryBinding binding = boundTo([spot = spot](const Study&) { return Place{spot, {}, {}}; });
+    auto* field = new EntryField(m_desk, std::move(binding), {caption, shown(rowOf(spot).label)}, this);
+    field->caption().setFixedWidth(fontMetrics().horizontalAdvance(tr("moment")) + 8);
+    body().addWidget(field);
+    m_fields += field;
+  }
+}
+
+QList<QWidget*> ConventionGroup::buttons() const {
+  return {m_positive.at(0), m_positive.at(1), m_shearAxis.at(0), m_shearAxis.at(1)};
+}
+
+void ConventionGroup::choose(Positive positive) {
+  if (positive == m_desk.study().convention.positive)
+    return;
+  m_desk.request({Type{{Spot::positive, {}, {}}, std::string(wordOf(positive))}}, m_desk.newGesture(),
+                 tr("sign convention"));
+  m_desk.say(positive == Positive::tension
+                 ? tr("Tension now counts positive. Typed numbers keep their digits and now mean the "
+                      "opposite sense.")
+                 : tr("Compression now counts positive. Typed numbers keep their digits and now mean the "
+                      "opposite sense."));
+}
+
+void ConventionGroup::choose(ShearAxis axis) {
+  m_desk.request({Type{{Spot::shearAxis, {}, {}}, std::string(wordOf(axis))}}, m_desk.newGesture(),
+                 tr("direction of the shear axis"));
+}
+
+void ConventionGroup::refresh() {
+  const Convention& convention = m_desk.study().convention;
+  check(m_positive, static_cast<int>(convention.positive));
+  check(m_shearAxis, static_cast<int>(convention.shearAxis));
+  setSummary(tr("%1, %2").arg(
+      convention.positive == Positive::tension ? tr("tension +") : tr("compression +"),
+      convention.shearAxis == ShearAxis::tensorDown ? tr("τ drawn + down") : tr("τ drawn + up")));
+}
+
+} // namespace planewright

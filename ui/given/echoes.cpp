@@ -1,0 +1,63 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/given/echoes.h"
+
+#include "core/quantity/format.h"
+#include "core/study/cut_text.h"
+#include "core/table/table.h"
+#include "ui/look/look.h"
+
+#include <QCoreApplication>
+
+namespace planewright {
+
+namespace {
+
+QString stressWithUnit(const Study& study, const StateReading& state, double stress) {
+  return fromUtf8(shownStress(study, state, stress) + " " + study.units.stress);
+}
+
+} // namespace
+
+const StateReading* stateOfCase(const Readout& readout, const std::string& caseId) {
+  for (auto state = readout.states.rbegin(); state != readout.states.rend(); ++state)
+    if (state->combination == caseId)
+      return &*state;
+  return nullptr;
+}
+
+QString echoOfStress(const Study& study, const Readout& readout, const std::string& caseId,
+                     double PlaneStress::*component) {
+  const StateReading* state = stateOfCase(readout, caseId);
+  return state ? stressWithUnit(study, *state, state->stress.*component) : QString();
+}
+
+QString echoOfThird(const Study& study, const Readout& readout, const std::string& caseId) {
+  const StateReading* state = stateOfCase(readout, caseId);
+  return state ? stressWithUnit(study, *state, state->sz) : QString();
+}
+
+QString echoOfLine(const Readout& readout) {
+  if (readout.lines.empty())
+    return {};
+  const Angle angle = readout.lines.front().angle.value;
+  const QString degrees = fromUtf8(shownDegrees(angle, angleDecimals));
+  const QString slope = fromUtf8(shownSlope(angle));
+  if (slope.isEmpty())
+    return QCoreApplication::translate("Echo", "%1 from +x").arg(degrees);
+  return QCoreApplication::translate("Echo", "%1 from +x, %2").arg(degrees, slope);
+}
+
+QString echoOfTolerance(const Study& study, const Readout& readout) {
+  const Point& point = shownPoint(study);
+  if (!point.line || point.line->tolerance.empty() || readout.lines.empty())
+    return {};
+  return echoOfDirection(point.line->tolerance, readout.lines.front().tolerance);
+}
+
+QString echoOfDirection(const std::string& typed, Angle angle) {
+  const std::string plainly = angleText(angle);
+  return typed == plainly || typed + " deg" == plainly ? QString()
+                                                       : fromUtf8(shownDegrees(angle, angleDecimals));
+}
+
+} // namespace planewright

@@ -1,0 +1,63 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+
+#include <QScrollArea>
+
+class QLabel;
+
+namespace planewright {
+
+class ConventionGroup;
+class EntryField;
+class FoldGroup;
+class LineGroup;
+class NoteField;
+class ReadingGroup;
+class StressGroup;
+
+/// Everything that is given, in groups that fold: what counts positive, stress, line, reading plane,
+/// conventions, notes.
+class GivenPanel : public QScrollArea {
+  Q_OBJECT
+
+public:
+  explicit GivenPanel(Desk& desk, QWidget* parent = nullptr);
+
+  QSize sizeHint() const override { return {300, 600}; }
+  QSize minimumSizeHint() const override { return {264, 200}; }
+
+public slots:
+  /// Puts the cursor into the first component, its text selected.
+  void focusFirst();
+  /// To the next or previous entry that is not taken, round the end.
+  void focusNextProblem();
+  void focusPreviousProblem();
+
+signals:
+  /// How many entries stand here that the study could not take, and what the first is called:
+  /// "τxy of case S".
+  void entriesNotTaken(int count, const QString& firstLabel);
+
+private:
+  void buildGroups(QWidget* content);
+  void buildHeading(QWidget* content);
+  void orderTabs();
+  void refresh();
+  void countProblems();
+  void focusProblem(int step);
+  QString labelOfEntry(const EntryField& field) const;
+  QList<EntryField*> fields() const;
+
+  Desk& m_desk;
+  QLabel* m_fact;
+  StressGroup* m_stress;
+  LineGroup* m_line;
+  ReadingGroup* m_reading;
+  ConventionGroup* m_conventions;
+  FoldGroup* m_notes;
+  NoteField* m_note;
+};
+
+} // namespace planewright

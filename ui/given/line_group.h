@@ -1,0 +1,47 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+#include "ui/entry/entry_field.h"
+#include "ui/given/fold_group.h"
+
+class QLabel;
+
+namespace planewright {
+
+class QuietButton;
+
+/// The physical line in the plane of stress: its kind and name, its angle and tolerance, and where the
+/// normal of the cut that follows it stands.
+class LineGroup : public FoldGroup {
+  Q_OBJECT
+
+public:
+  explicit LineGroup(Desk& desk, QWidget* parent = nullptr);
+
+  /// In the order of Tab: angle, tolerance; then the name.
+  const QList<EntryField*>& fields() const { return m_fields; }
+  QList<QWidget*> buttons() const;
+
+private:
+  void buildKinds();
+  void addField(EntryBinding binding, EntryWords words);
+  void addName();
+  void editName();
+  bool isNamedByKind() const;
+  void addAngle();
+  void addTolerance();
+  void chooseKind(LineKind kind);
+  void removeLine();
+  void refresh();
+  QString sentence() const;
+  QString summary() const;
+
+  Desk& m_desk;
+  QuietButton* m_kind;
+  bool m_nameWanted = false;
+  QList<EntryField*> m_fields;
+  QLabel* m_sentence;
+};
+
+} // namespace planewright

@@ -1,0 +1,37 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+
+#include <QPlainTextEdit>
+#include <QTimer>
+
+namespace planewright {
+
+/// The note of the shown point: several lines of free text, taken after a pause and on leaving; one stay is
+/// one undo step.
+class NoteField : public QPlainTextEdit {
+  Q_OBJECT
+
+public:
+  explicit NoteField(Desk& desk, QWidget* parent = nullptr);
+  QSize sizeHint() const override;
+  QSize minimumSizeHint() const override { return sizeHint(); }
+
+protected:
+  void focusInEvent(QFocusEvent* event) override;
+  void focusOutEvent(QFocusEvent* event) override;
+  void keyPressEvent(QKeyEvent* event) override;
+  void paintEvent(QPaintEvent* event) override;
+
+private:
+  std::string noted() const;
+  void take();
+  void refresh();
+
+  Desk& m_desk;
+  QTimer m_settle;
+  std::optional<Gesture> m_visit;
+};
+
+} // namespace planewright
