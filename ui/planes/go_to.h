@@ -1,0 +1,12 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/table/table.h"
+#include "ui/desk/desk.h"
+
+namespace planewright {
+
+/// Brings the reading plane to the plane of a row; says so where every direction is one.
+void bringReadingTo(Desk& desk, const Table& table, int row);
+
+} // namespace planewright

@@ -1,0 +1,148 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/planes/plane_table.h"
+
+#include "ui/look/look.h"
+#include "ui/planes/copied_table.h"
+#include "ui/planes/plane_delegate.h"
+#include "ui/planes/plane_header.h"
+#include "ui/planes/table_model.h"
+
+#include <QApplication>
+#include <QClipboard>
+#include <QKeyEvent>
+#include <QMimeData>
+
+#include <numeric>
+
+namespace planewright {
+
+namespace {
+
+constexpr int headingPadding = 18;
+constexpr int namesWithNote = 400;
+constexpr int mostAir = 32;
+
+void putOnClipboard(const Table& table) {
+  auto* data = new QMimeData;
+  data->setText(fromUtf8(tabSeparated(table, translation())));
+  data->setHtml(fromUtf8(html(table, translation())));
+  QApplication::clipboard()->setMimeData(data);
+}
+
+bool isEnter(const QKeyEvent& key) {
+  return key.key() == Qt::Key_Return || key.key() == Qt::Key_Enter;
+}
+
+} // namespace
+
+PlaneTable::PlaneTable(TableModel& model, QWidget* parent)
+    : QTableView(parent), m_model(model), m_delegate(new PlaneDelegate(this)),
+      m_header(new PlaneHeader(this)) {
+  setHorizontalHeader(m_header);
+  setItemDelegate(m_delegate);
+  setModel(&m_model);
+  verticalHeader()->hide();
+  setShowGrid(false);
+  setFrameShape(QFrame::NoFrame);
+  setTabKeyNavigation(false);
+  setSelectionMode(QAbstractItemView::ExtendedSelection);
+  setEditTriggers(QAbstractItemView::EditKeyPressed | QAbstractItemView::AnyKeyPressed);
+  setHorizontalScrollMode(QAbstractItemView::ScrollPerPixel);
+  setWordWrap(false);
+  viewport()->setBackgroundRole(QPalette::AlternateBase);
+  connect(&m_model, &QAbstractItemModel::dataChanged, this, &PlaneTable::growColumns);
+  connect(&m_model, &QAbstractItemModel::modelReset, this, &PlaneTable::measure);
+  measure();
+}
+
+void PlaneTable::measure() {
+  m_needed.fill(0, m_model.columnCount());
+  verticalHeader()->setDefaultSectionSize(PlaneDelegate::rowHeight(font()));
+  verticalHeader()->setMinimumSectionSize(PlaneDelegate::rowHeight(font()));
+  growColumns();
+}
+
+void PlaneTable::growColumns() {
+  const QList<int> before = m_needed;
+  for (int column = 0; column < m_model.columnCount(); ++column) {
+    int& needed = m_needed[column];
+    needed = qMax(needed, m_header->headingWidth(column) + headingPadding);
+    for (int row = 0; row < m_model.rowCount(); ++row)
+      needed = qMax(needed, PlaneDelegate::cellWidth(font(), m_model.index(row, column)));
+  }
+  if (m_needed != before)
+    spreadColumns();
+}
+
+// First the names get room for a note behind them, then the numbers some air, then the names the rest.
+void PlaneTable::spreadColumns() {
+  const int count = static_cast<int>(m_needed.size()) - 1;
+  const int numbers = std::accumulate(m_needed.begin() + 1, m_needed.end(), 0);
+  const int names = isColumnHidden(0) ? 0 : qMax(m_needed.front(), namesWithNote);
+  const int air = qBound(0, (viewport()->width() - numbers - names) / count, mostAir);
+  for (int column = 1; column <= count; ++column)
+    setColumnWidth(column, m_needed.at(column) + air);
+  setColumnWidth(0, qMax(m_needed.front(), viewport()->width() - numbers - count * air));
+}
+
+void PlaneTable::resizeEvent(QResizeEvent* event) {
+  QTableView::resizeEvent(event);
+  spreadColumns();
+}
+
+void PlaneTable::changeEvent(QEvent* event) {
+  QTableView::changeEvent(event);
+  if (event->type() == QEvent::FontChange)
+    measure();
+  if (event->type() == QEvent::PaletteChange)
+    viewport()->update();
+}
+
+bool PlaneTable::event(QEvent* event) {
+  if (event->type() == QEvent::ShortcutOverride) {
+    const auto* key = static_cast<QKeyEvent*>(event);
+    const bool own = key->matches(QKeySequence::Copy) || key->key() == Qt::Key_Delete ||
+                     key->key() == Qt::Key_Insert || isEnter(*key);
+    if (own) {
+      event->accept();
+      return true;
+    }
+  }
+  return QTableView::event(event);
+}
+
+void PlaneTable::keyPressEvent(QKeyEvent* event) {
+  if (event->matches(QKeySequence::Copy))
+    copySelected();
+  else if (isEnter(*event) && event->modifiers() & Qt::ControlModifier)
+    Q_EMIT otherPressed();
+  else if (isEnter(*event))
+    Q_EMIT goTo(currentIndex().row());
+  else if (event->key() == Qt::Key_Insert)
+    Q_EMIT insertPressed();
+  else if (event->key() == Qt::Key_Delete)
+    Q_EMIT deletePressed(currentIndex().row());
+  else
+    QTableView::keyPressEvent(event);
+}
+
+void PlaneTable::mouseDoubleClickEvent(QMouseEvent* event) {
+  QTableView::mouseDoubleClickEvent(event);
+  if (const QModelIndex index = indexAt(event->pos()); index.isValid())
+    Q_EMIT goTo(index.row());
+}
+
+void PlaneTable::copyAll() {
+  putOnClipboard(m_model.table());
+}
+
+void PlaneTable::copySelected() {
+  const QModelIndexList cells = selectionModel()->selectedIndexes();
+  if (cells.size() == 1) {
+    QApplication::clipboard()->setText(oneCell(m_model.table(), cells.front()));
+    return;
+  }
+  putOnClipboard(cells.isEmpty() ? m_model.table() : partOf(m_model.table(), cells));
+}
+
+} // namespace planewright

@@ -1,0 +1,38 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+
+#include <QWidget>
+
+class QStackedWidget;
+
+namespace planewright {
+
+class PlanesPage;
+class QuietTabs;
+class SweepPage;
+
+/// The tables under the drawings: the planes of the shown state, and a sweep all round.
+class PlanesPanel : public QWidget {
+  Q_OBJECT
+
+public:
+  explicit PlanesPanel(Desk& desk, QWidget* parent = nullptr);
+
+  PlanesPage& planes() const { return *m_planes; }
+  SweepPage& sweep() const { return *m_sweep; }
+  QuietTabs& tabs() const { return *m_tabs; }
+  QSize sizeHint() const override { return {830, 300}; }
+
+private:
+  void showPage(int index);
+  void copyShown();
+
+  QuietTabs* m_tabs;
+  QStackedWidget* m_pages;
+  PlanesPage* m_planes;
+  SweepPage* m_sweep;
+};
+
+} // namespace planewright

@@ -1,0 +1,34 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/planes/sweep_model.h"
+
+#include <algorithm>
+#include <cassert>
+
+namespace planewright {
+
+SweepModel::SweepModel(Desk& desk, QObject* parent) : TableModel(parent), m_desk(desk) {
+  connect(&m_desk, &Desk::changed, this, &SweepModel::refresh);
+  refresh();
+}
+
+void SweepModel::setStep(Angle step) {
+  assert(step.degrees() >= leastStep && step.degrees() <= greatestStep);
+  m_step = step;
+  refresh();
+}
+
+void SweepModel::refresh() {
+  setTable(sweepTable(m_desk.study(), m_desk.readout().state(), m_step));
+}
+
+int SweepModel::tintedRow() const {
+  const Angle reading = m_desk.readout().reading.value;
+  const auto distance = [reading](const Row& row) {
+    const auto& normal = row.cells[static_cast<std::size_t>(PlaneColumn::normal)].exact;
+    return apart(Angle::fromDegrees(normal.value_or(0)), reading);
+  };
+  const auto nearest = std::ranges::min_element(table().rows, {}, distance);
+  return nearest == table().rows.end() ? -1 : static_cast<int>(nearest - table().rows.begin());
+}
+
+} // namespace planewright

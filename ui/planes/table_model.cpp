@@ -1,0 +1,96 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/planes/table_model.h"
+
+#include "core/quantity/format.h"
+#include "ui/look/look.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+bool isSameRow(const Row& a, const Row& b) {
+  return a.kind == b.kind && a.name == b.name;
+}
+
+/// Full digits with the true minus and the unit.
+QString fullDigits(double value, const Column& column) {
+  QString digits = fromUtf8(exactNumber(value));
+  digits.replace(QLatin1Char('-'), QChar(0x2212));
+  return column.unit.empty() ? digits + QChar(0xB0) : digits + QLatin1Char(' ') + fromUtf8(column.unit);
+}
+
+} // namespace
+
+int TableModel::rowCount(const QModelIndex& parent) const {
+  return parent.isValid() ? 0 : static_cast<int>(m_table.rows.size());
+}
+
+int TableModel::columnCount(const QModelIndex& parent) const {
+  return parent.isValid() ? 0 : static_cast<int>(m_table.columns.size());
+}
+
+QVariant TableModel::data(const QModelIndex& index, int role) const {
+  const auto row = static_cast<std::size_t>(index.row());
+  if (!index.isValid() || row >= m_table.rows.size())
+    return {};
+  const auto at = static_cast<std::size_t>(index.column());
+  const Column& column = m_table.columns[at];
+  const Cell& cell = m_table.rows[row].cells[at];
+  switch (role) {
+  case Qt::DisplayRole:
+    return shown(cell.shown);
+  case Qt::ToolTipRole:
+    if (cell.exact)
+      return fullDigits(*cell.exact, column);
+    return shown(noteOf(index.row()).words);
+  case Qt::TextAlignmentRole:
+    return int(column.isNumber ? Qt::AlignRight | Qt::AlignVCenter : Qt::AlignLeft | Qt::AlignVCenter);
+  default:
+    return {};
+  }
+}
+
+QVariant TableModel::headerData(int section, Qt::Orientation orientation, int role) const {
+  if (orientation != Qt::Horizontal || role != Qt::DisplayRole || section >= columnCount())
+    return {};
+  const Column& column = m_table.columns[static_cast<std::size_t>(section)];
+  const QString heading = shown(column.heading);
+  return column.unit.empty() ? heading : heading + QLatin1Char(' ') + fromUtf8(column.unit);
+}
+
+// Rows come and go in one block at most; what stands above and below it stays.
+void TableModel::setTable(Table table) {
+  const std::vector<Row>& old = m_table.rows;
+  const std::vector<Row>& now = table.rows;
+  if (m_table.columns.size() != table.columns.size()) {
+    beginResetModel();
+    m_table = std::move(table);
+    endResetModel();
+    return;
+  }
+  const std::size_t shorter = std::min(old.size(), now.size());
+  std::size_t above = 0;
+  while (above < shorter && isSameRow(old[above], now[above]))
+    ++above;
+  const int first = static_cast<int>(above);
+  const int gone = static_cast<int>(old.size()) - static_cast<int>(now.size());
+  if (gone > 0)
+    beginRemoveRows({}, first, first + gone - 1);
+  else if (gone < 0)
+    beginInsertRows({}, first, first - gone - 1);
+  m_table = std::move(table);
+  if (gone > 0)
+    endRemoveRows();
+  else if (gone < 0)
+    endInsertRows();
+  tellChanged();
+}
+
+void TableModel::tellChanged() {
+  if (rowCount() > 0)
+    Q_EMIT dataChanged(index(0, 0), index(rowCount() - 1, columnCount() - 1));
+}
+
+} // namespace planewright

@@ -1,0 +1,48 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+// First, because moc does not read <compare> of the standard library on its own.
+#include <QAbstractTableModel>
+
+#include "core/table/table.h"
+
+namespace planewright {
+
+/// The columns of the tables of planes.
+enum class PlaneColumn { plane, normal, cut, sn, tnt };
+
+/// What stands at the right end of the first cell of a row: a fact, a choice to click, or what is wrong.
+struct RowNote {
+  enum class Kind { none, fact, choice, wrong };
+  Kind kind = Kind::none;
+  Text words;
+};
+
+/// A Table of core as an item model. A new Table of the same shape only changes data, so that cursor,
+/// selection and an open editor stay.
+class TableModel : public QAbstractTableModel {
+  Q_OBJECT
+
+public:
+  using QAbstractTableModel::QAbstractTableModel;
+
+  const Table& table() const { return m_table; }
+  /// The row on the selection ground, -1 for none; bold where it is the reading plane itself.
+  virtual int tintedRow() const = 0;
+  virtual bool tintIsBold() const = 0;
+  virtual RowNote noteOf(int row) const = 0;
+
+  int rowCount(const QModelIndex& parent = {}) const override;
+  int columnCount(const QModelIndex& parent = {}) const override;
+  QVariant data(const QModelIndex& index, int role) const override;
+  QVariant headerData(int section, Qt::Orientation orientation, int role) const override;
+
+protected:
+  void setTable(Table table);
+  void tellChanged();
+
+private:
+  Table m_table;
+};
+
+} // namespace planewright
