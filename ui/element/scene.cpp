@@ -66,7 +66,7 @@ void addNamedTicks(Picture& picture, const Staging& staging) {
     for (const Angle end : {direction.angle, direction.angle + halfTurn})
       picture.parts.push_back(
           Path{{staging.geometry.pixel(end, 1),
-                staging.geometry.pixel(end, 1 + (rests ? 9 : 5) / staging.geometry.frame.outer)},
+                staging.geometry.pixel(end, 1 + (rests ? 8 : 5) / staging.geometry.frame.outer)},
                false,
                pen,
                {}});
@@ -131,7 +131,7 @@ void addLetter(Picture& picture, const Staging& staging, Angle axis, const char*
                        Align::middle,
                        Role::soft,
                        false,
-                       false,
+                       true,
                        name};
     const Box box = boxOf(letter);
     const bool taken = meetsKnob(staging, box) || std::ranges::any_of(labels, [&](const Label& label) {
@@ -198,8 +198,8 @@ ElementScene elementScene(const Study& study, const Readout& readout, const Elem
   picture.height = glance.size.height();
   addAll(picture, placed.leaders);
   picture.parts.insert(picture.parts.end(), element.parts.begin(), element.parts.end());
-  addAll(picture, placed.labels);
   addNamedTicks(picture, staging);
+  addAll(picture, placed.labels);
   addLetter(picture, staging, Angle(), "x", placed.labels);
   addLetter(picture, staging, Angle::fromDegrees(90), "y", placed.labels);
   drawKnob(picture, staging.geometry.frame, staging.knob, order);

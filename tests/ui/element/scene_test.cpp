@@ -48,6 +48,57 @@ TEST(ElementScene, labelsNeverMeetNorLeaveThePanel) {
       }
 }
 
+/// Places along a stroke, close to each other.
+std::vector<Vec> placesOf(const Path& path) {
+  std::vector<Vec> places;
+  for (std::size_t i = 0; path.pen && i + (path.closed ? 0 : 1) < path.points.size(); ++i)
+    for (int k = 0; k <= 80; ++k)
+      places.push_back(path.points[i] +
+                       k / 80.0 * (path.points[(i + 1) % path.points.size()] - path.points[i]));
+  return places;
+}
+std::vector<Vec> placesOf(const Arc& arc) {
+  std::vector<Vec> places;
+  for (int k = 0; arc.pen && k <= 400; ++k) {
+    const CosSin d = cosSin(Angle::fromDegrees(arc.start + arc.sweep * k / 400));
+    places.push_back(arc.centre + arc.radius * Vec{d.cos, -d.sin});
+  }
+  return places;
+}
+std::vector<Vec> placesOf(const Label&) {
+  return {};
+}
+
+/// The stroke that lies over a label, or under one that has no ground of its own; none is -1.
+int strokeOn(const Picture& picture, std::size_t index) {
+  const Label& label = std::get<Label>(picture.parts[index]);
+  const Box box = boxOf(label);
+  for (std::size_t i = label.ground ? index : 0; i < picture.parts.size(); ++i)
+    for (const Vec place : std::visit([](const auto& part) { return placesOf(part); }, picture.parts[i]))
+      if (place.x > box.left && place.x < box.right && place.y > box.top && place.y < box.bottom)
+        return static_cast<int>(i);
+  return -1;
+}
+
+// A line behind a number reads as a minus.
+TEST(ElementScene, noStrokeRunsThroughALabel) {
+  ElementGlance glance;
+  glance.held = ElementHandle::reading;
+  glance.onSnap = true;
+  for (const QSize size : shapes)
+    for (int reading = -85; reading <= 90; reading += 5) {
+      const Picture picture =
+          sceneOf({.reading = typedAngle(Angle::fromDegrees(reading)), .tolerance = "12 deg"}, size, glance)
+              .picture;
+      for (std::size_t i = 0; i < picture.parts.size(); ++i) {
+        const Label* label = std::get_if<Label>(&picture.parts[i]);
+        if (label && label->key != "knob") {
+          EXPECT_EQ(strokeOn(picture, i), -1) << label->key << " at " << reading << " in " << size.width();
+        }
+      }
+    }
+}
+
 TEST(ElementScene, aNarrowPanelHasTheStressesInItsCaption) {
   const Picture narrow = sceneOf({}, {342, 369}).picture;
   EXPECT_EQ(labelOf(narrow, "sigma_n"), "");
