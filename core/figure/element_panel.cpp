@@ -61,7 +61,7 @@ Reach reachOf(const Setting& setting, bool turned, double outer, double mostLabe
   const auto wishes = drawElement(trial, setting.study, setting.readout, orderOf(setting, turned, {}, outer));
   const Box strokes = strokesOf(trial);
   const Box all = extentOf(trial);
-  Reach reach{-all.left, strokes.right, -all.top, all.bottom};
+  Reach reach{setting.wide - all.left, strokes.right, -all.top, all.bottom}; // a band is twice as wide
   for (const LabelWish& wish : wishes) {
     const double longWidth = textWidth(wish.longForm, setting.text, wish.bold);
     const double width =
