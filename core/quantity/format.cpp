@@ -41,20 +41,24 @@ Decimal decimalOf(const std::string& scientific) {
 
 /// The shortest digits that read back, or the nearest of `digits` significant ones.
 Decimal decimalOf(double magnitude, int digits) {
-  const Decimal shortest = decimalOf(written(magnitude, std::chars_format::scientific));
+  Decimal shortest = decimalOf(written(magnitude, std::chars_format::scientific));
   if (static_cast<int>(shortest.digits.size()) <= digits)
     return shortest;
   return decimalOf(written(magnitude, std::chars_format::scientific, digits - 1));
 }
 
+std::string zeros(int count) {
+  return std::string(static_cast<std::size_t>(count), '0');
+}
+
 std::string fixed(const Decimal& number) {
-  const auto count = static_cast<int>(number.digits.size());
+  const int after = static_cast<int>(number.digits.size()) - 1 - number.exponent;
   if (number.exponent < 0)
-    return "0." + std::string(static_cast<std::size_t>(-number.exponent - 1), '0') + number.digits;
-  if (number.exponent >= count - 1)
-    return number.digits + std::string(static_cast<std::size_t>(number.exponent - count + 1), '0');
-  const auto whole = static_cast<std::size_t>(number.exponent + 1);
-  return number.digits.substr(0, whole) + "." + number.digits.substr(whole);
+    return "0." + zeros(-1 - number.exponent) + number.digits;
+  if (after <= 0)
+    return number.digits + zeros(-after);
+  const std::size_t point = number.digits.size() - static_cast<std::size_t>(after);
+  return number.digits.substr(0, point) + "." + number.digits.substr(point);
 }
 
 std::string scientific(const Decimal& number) {

@@ -36,7 +36,7 @@ private:
     while (left && (m_cursor.next(Kind::plus) || m_cursor.next(Kind::minus))) {
       const bool plus = m_cursor.next(Kind::plus);
       m_cursor.take();
-      const auto right = product();
+      auto right = product();
       if (!right)
         return right;
       left = (plus ? sumOf : differenceOf)(*left, *right, m_cursor.since(start));
@@ -50,7 +50,7 @@ private:
     while (left && (m_cursor.next(Kind::times) || m_cursor.next(Kind::divide))) {
       const bool times = m_cursor.next(Kind::times);
       m_cursor.take();
-      const auto right = signedPower(m_cursor.at());
+      auto right = signedPower(m_cursor.at());
       if (!right)
         return right;
       left = (times ? productOf : quotientOf)(*left, *right, m_cursor.since(start));
@@ -65,7 +65,7 @@ private:
       return power(outermost);
     const bool minus = m_cursor.next(Kind::minus);
     m_cursor.take();
-    const auto value = nested([&] { return signedPower(outermost == start ? m_cursor.at() : outermost); });
+    auto value = nested([&] { return signedPower(outermost == start ? m_cursor.at() : outermost); });
     if (!value || !minus)
       return value;
     return negated(*value, m_cursor.since(start));
@@ -79,7 +79,7 @@ private:
     if (!base || !m_cursor.next(Kind::power))
       return base;
     m_cursor.take();
-    const auto exponent = nested([&] { return signedPower(outermost); });
+    auto exponent = nested([&] { return signedPower(outermost); });
     if (!exponent)
       return exponent;
     if (exponent->unitAt != 0)
@@ -96,7 +96,7 @@ private:
     m_cursor.take();
     if (m_cursor.next(Kind::superscript))
       return tl::unexpected(superscriptRow(m_cursor.here()));
-    const auto raised = powerOf(base, exponent, m_cursor.since(start));
+    auto raised = powerOf(base, exponent, m_cursor.since(start));
     if (raised && unitFollows(m_cursor))
       return tl::unexpected(
           unitOnExponent(m_cursor.upTo(start, m_cursor.at() + 1), m_cursor.since(start), m_cursor.here()));
@@ -172,7 +172,7 @@ private:
     std::vector<Value> arguments;
     do {
       m_cursor.take();
-      const auto value = sum();
+      auto value = sum();
       if (!value)
         return value;
       arguments.push_back(*value);

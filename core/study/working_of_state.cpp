@@ -79,7 +79,7 @@ private:
     return numbers;
   }
 
-  void addStress(Text name, const char* symbolOf, const Formula& formula, NumbersPutIn numbers,
+  void addStress(Text name, const char* symbolOf, const Formula& formula, const NumbersPutIn& numbers,
                  double result) {
     m_steps.push_back({std::move(name), symbol(symbolOf), formula, used(formula, numbers),
                        m_unit.fromBase(result), m_decimals, m_unit.name,
