@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/words/problem.h"
 
+#include <algorithm>
 #include <array>
 #include <charconv>
 
@@ -37,6 +38,9 @@ std::string plain(const Problem& problem, const Translate& translate) {
   result += plain(problem.what, translate);
   if (!problem.mend.empty())
     result += " " + plain(problem.mend, translate);
+  // What is quoted may come from anywhere: it must neither break the line nor steer a terminal.
+  std::ranges::replace_if(
+      result, [](unsigned char c) { return c < 0x20 || c == 0x7F; }, ' ');
   return result;
 }
 

@@ -25,7 +25,7 @@ using Result = tl::expected<T, Problem>;
 template <class T>
 using Results = tl::expected<T, Problems>;
 
-/// "place, line 3, column 5: what. mend." on one line.
+/// "place, line 3, column 5: what. mend." on one line; control characters become blanks.
 std::string plain(const Problem& problem, const Translate& translate = {});
 
 } // namespace planewright

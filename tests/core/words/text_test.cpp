@@ -38,5 +38,10 @@ TEST(Problem, saysPlaceLineAndColumnBeforeTheSentences) {
   EXPECT_EQ(plain(problem), "study, line 3, column 5: “1,5” has a decimal comma. Write 1.5.");
 }
 
+TEST(Problem, staysOnOneLineAndSteersNoTerminal) {
+  const Problem problem{"P\n1", 0, 0, {}, PW_TEXT("Test", "“%1” is odd.").with("\x1B[31m\x7F\t"), {}};
+  EXPECT_EQ(plain(problem), "P 1: “ [31m  ” is odd.");
+}
+
 } // namespace
 } // namespace planewright
