@@ -257,6 +257,7 @@ CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box
   if (fit.radius > 0 && setting.readout.reading.value != Angle())
     labelDoubleAngle(drawing);
   picture.parts.insert(picture.parts.end(), placed.labels.begin(), placed.labels.end());
+  noteShortened(picture, placed);
   return outcomeOf(placed, marks);
 }
 

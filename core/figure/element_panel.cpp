@@ -157,6 +157,7 @@ bool placeBetween(Picture& picture, std::vector<LabelWish> wishes, LabelColumns 
     const PlacedLabels placed = placeLabels({from, to}, columns);
     picture.parts.insert(picture.parts.end(), placed.leaders.begin(), placed.leaders.end());
     picture.parts.insert(picture.parts.end(), placed.labels.begin(), placed.labels.end());
+    noteShortened(picture, placed);
     fits = fits && placed.fits;
     from = to;
   }

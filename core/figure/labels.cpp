@@ -212,4 +212,10 @@ PlacedLabels placeLabels(const std::vector<LabelWish>& wishes, const LabelColumn
   return placed;
 }
 
+void noteShortened(Picture& picture, const PlacedLabels& placed) {
+  for (const Label& label : placed.labels)
+    if (std::find(placed.shortened.begin(), placed.shortened.end(), label.key) != placed.shortened.end())
+      picture.shortened.push_back(plain(label.runs));
+}
+
 } // namespace planewright

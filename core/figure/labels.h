@@ -49,4 +49,7 @@ struct PlacedLabels {
 /// the greatest priority number on, and neighbours that are short share a row, side by side.
 PlacedLabels placeLabels(const std::vector<LabelWish>& wishes, const LabelColumns& columns);
 
+/// Adds the labels that went short to what the picture gave up.
+void noteShortened(Picture& picture, const PlacedLabels& placed);
+
 } // namespace planewright

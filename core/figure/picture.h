@@ -99,8 +99,9 @@ struct Picture {
   double width = 0;
   double height = 0;
   std::vector<std::variant<Path, Arc, Label>> parts;
-  std::string title;       ///< for the file's own title
-  std::string description; ///< in words, for those who cannot see it
+  std::string title;                  ///< for the file's own title
+  std::string description;            ///< in words, for those who cannot see it
+  std::vector<std::string> shortened; ///< labels that found no room for their values: "σ1"
   bool operator==(const Picture&) const = default;
 };
 

@@ -15,7 +15,7 @@ Label labelOf(const Runs& runs) {
 
 /// One of everything that a picture can hold.
 Picture sample() {
-  Picture picture{40, 25.5, {}, "Title & <more>", "Said \"in words\"\x01\xff"};
+  Picture picture{40, 25.5, {}, "Title & <more>", "Said \"in words\"\x01\xff", {}};
   picture.parts.push_back(Path{{{1, 2}, {3.00049, 4}, {-1e-9, 5}}, true, {}, Role::band});
   picture.parts.push_back(Path{{{1, 2}, {30, 2}}, false, Pen{Role::line, 0.35, Dash::longDashDot}, {}});
   picture.parts.push_back(Arc{{20, 12}, 5, 0, 360, Pen{Role::state, 0.5, Dash::solid}, Role::canvas});
@@ -36,7 +36,7 @@ TEST(Svg, isWellFormed) {
 }
 
 TEST(Svg, aWholeLabelStandsInOneTextElement) {
-  Picture picture{10, 10, {labelOf({{"τ", false}, {"nt", true}, {" −2.85", false}})}, "", ""};
+  Picture picture{10, 10, {labelOf({{"τ", false}, {"nt", true}, {" −2.85", false}})}, "", "", {}};
   const std::string svg = svgOf(picture, Palette::paper);
   EXPECT_NE(
       svg.find(">τ<tspan font-size=\"2.1\" dy=\"0.66\">nt</tspan><tspan dy=\"-0.66\"> −2.85</tspan></text>"),
@@ -45,7 +45,7 @@ TEST(Svg, aWholeLabelStandsInOneTextElement) {
 }
 
 TEST(Svg, quarterArcEndsWhereItShould) {
-  Picture picture{10, 10, {Arc{{5, 5}, 2, 0, 90, Pen{}, {}}}, "", ""};
+  Picture picture{10, 10, {Arc{{5, 5}, 2, 0, 90, Pen{}, {}}}, "", "", {}};
   EXPECT_NE(svgOf(picture, Palette::paper).find("d=\"M7 5A2 2 0 0 0 5 3\""), std::string::npos);
 }
 

@@ -68,7 +68,7 @@ QRect inkedBy(const Label& label, int scale) {
   image.fill(Qt::white);
   QPainter painter(&image);
   painter.scale(scale, scale);
-  paintPicture(painter, Picture{100, 20, {label}, "", ""}, Palette::mono);
+  paintPicture(painter, Picture{100, 20, {label}, "", "", {}}, Palette::mono);
   return inked(image);
 }
 

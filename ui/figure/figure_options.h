@@ -1,0 +1,53 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/figure/figure_settings.h"
+
+#include <QWidget>
+
+#include <functional>
+#include <optional>
+
+class QComboBox;
+class QLineEdit;
+class QRadioButton;
+class QVBoxLayout;
+
+namespace planewright {
+
+/// The choices of a figure: parts, width, text, colour, caption, format.
+class FigureOptions : public QWidget {
+  Q_OBJECT
+
+public:
+  explicit FigureOptions(const FigureSettings& settings, QWidget* parent = nullptr);
+
+  const FigureSettings& settings() const { return m_settings; }
+  QString caption() const;
+  /// Why the width that stands in its field does not read; none when it does.
+  const std::optional<Problem>& problem() const { return m_problem; }
+
+signals:
+  void changed();
+
+private:
+  QVBoxLayout* group(const QString& heading);
+  void addSwitch(QVBoxLayout& group, const QString& words, bool* value);
+  QRadioButton* addChoice(QVBoxLayout& group, const QString& words, bool chosen,
+                          std::function<void()> choose);
+  void buildParts();
+  void buildWidth();
+  void buildText();
+  void buildFormat();
+  void takeWidth(double width);
+  void takeOwnWidth();
+  void takeFormat(FigureFormat format);
+
+  FigureSettings m_settings;
+  std::optional<Problem> m_problem;
+  QLineEdit* m_ownWidth = nullptr;
+  QLineEdit* m_caption = nullptr;
+  QComboBox* m_dpi = nullptr;
+};
+
+} // namespace planewright

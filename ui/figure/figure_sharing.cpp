@@ -1,0 +1,122 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/figure/figure_sharing.h"
+
+#include "core/figure/svg.h"
+#include "ui/look/look.h"
+#include "ui/paint/export.h"
+
+#include <QClipboard>
+#include <QFileInfo>
+#include <QGuiApplication>
+#include <QImage>
+#include <QMimeData>
+#include <QPrintDialog>
+#include <QPrinter>
+#include <QRegularExpression>
+#include <QSettings>
+
+namespace planewright {
+
+namespace {
+
+FigureOrder orderOf(const FigureSettings& settings, const QString& studyFile, const QString& caption) {
+  FigureOrder order;
+  order.width = settings.width;
+  order.textPoints = settings.textPoints;
+  order.mono = settings.mono;
+  order.parts = settings.parts;
+  order.caption = verbatim(caption.trimmed().toStdString());
+  order.studyName = QFileInfo(studyFile).completeBaseName().toStdString();
+  order.translate = translation();
+  return order;
+}
+
+Palette paletteOf(const FigureSettings& settings) {
+  return settings.mono ? Palette::mono : Palette::paper;
+}
+
+/// Every file system takes the result: no separators, no blanks, no leading dot.
+QString inFileName(const std::string& words) {
+  static const QRegularExpression blanks(QStringLiteral("\\s*\\+\\s*"));
+  static const QRegularExpression unwanted(QStringLiteral("[\\s/\\\\:*?\"<>|\\x00-\\x1f]+"));
+  QString name = fromUtf8(words).replace(blanks, QStringLiteral("+"));
+  name.replace(unwanted, QStringLiteral("-"));
+  while (name.startsWith(QLatin1Char('.')) || name.startsWith(QLatin1Char('-')))
+    name.remove(0, 1);
+  constexpr int longest = 60;
+  return name.left(longest);
+}
+
+} // namespace
+
+Result<Picture> figureFor(const Desk& desk, const FigureSettings& settings, const QString& studyFile,
+                          const QString& caption) {
+  return figureOf(desk.study(), desk.readout(), orderOf(settings, studyFile, caption));
+}
+
+Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings) {
+  switch (settings.format) {
+  case FigureFormat::pdf:
+    return pdfOf(picture, paletteOf(settings));
+  case FigureFormat::png:
+    return pngOf(picture, paletteOf(settings), settings.dpi);
+  case FigureFormat::svg:
+    break;
+  }
+  return QByteArray::fromStdString(svgOf(picture, paletteOf(settings)));
+}
+
+Result<std::unique_ptr<QMimeData>> mimeOf(const Picture& picture, const FigureSettings& settings) {
+  const Palette palette = paletteOf(settings);
+  const Result<QByteArray> pdf = pdfOf(picture, palette);
+  const Result<QByteArray> png = pngOf(picture, palette, settings.dpi);
+  if (!pdf || !png)
+    return tl::unexpected(pdf ? png.error() : pdf.error());
+  auto mime = std::make_unique<QMimeData>();
+  mime->setData(QStringLiteral("image/svg+xml"), QByteArray::fromStdString(svgOf(picture, palette)));
+  mime->setData(QStringLiteral("application/pdf"), *pdf);
+  mime->setImageData(QImage::fromData(*png, "PNG"));
+  return mime;
+}
+
+QString figureName(const Desk& desk, const QString& studyFile) {
+  const QString study = QFileInfo(studyFile).completeBaseName();
+  const Readout& readout = desk.readout();
+  QStringList parts;
+  for (const std::string& part : {study.isEmpty() ? std::string("figure") : study.toStdString(),
+                                  readout.point, readout.state().combination})
+    if (const QString name = inFileName(part); !name.isEmpty())
+      parts << name;
+  return parts.join(QLatin1Char('-'));
+}
+
+Result<void> copyFigure(const Desk& desk, const QString& studyFile) {
+  const FigureSettings settings = rememberedFigure(QSettings());
+  const Result<Picture> picture = figureFor(desk, settings, studyFile);
+  if (!picture)
+    return tl::unexpected(picture.error());
+  Result<std::unique_ptr<QMimeData>> mime = mimeOf(*picture, settings);
+  if (!mime)
+    return tl::unexpected(std::move(mime).error());
+  QGuiApplication::clipboard()->setMimeData(mime->release());
+  return {};
+}
+
+Result<void> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent) {
+  QPrinter printer(QPrinter::HighResolution);
+  printer.setDocName(fromUtf8(picture.title));
+  QPrintDialog dialog(&printer, parent);
+  if (dialog.exec() != QDialog::Accepted)
+    return {};
+  return printPicture(printer, picture, paletteOf(settings));
+}
+
+Result<void> printFigure(const Desk& desk, const QString& studyFile, QWidget* parent) {
+  const FigureSettings settings = rememberedFigure(QSettings());
+  const Result<Picture> picture = figureFor(desk, settings, studyFile);
+  if (!picture)
+    return tl::unexpected(picture.error());
+  return printAsked(*picture, settings, parent);
+}
+
+} // namespace planewright

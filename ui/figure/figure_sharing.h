@@ -1,0 +1,36 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+#include "ui/figure/figure_settings.h"
+
+#include <QByteArray>
+
+class QMimeData;
+class QWidget;
+
+namespace planewright {
+
+/// The study's figure as the settings arrange it. `studyFile` is the file it was saved to, or empty.
+Result<Picture> figureFor(const Desk& desk, const FigureSettings& settings, const QString& studyFile,
+                          const QString& caption = {});
+
+/// The picture as a file of the settings' format.
+Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings);
+
+/// The picture for the clipboard: SVG, PDF and a pixel image, so that a document takes the best it knows.
+Result<std::unique_ptr<QMimeData>> mimeOf(const Picture& picture, const FigureSettings& settings);
+
+/// Asks for a printer and prints the picture at true size. Done also when the user thinks better of it.
+Result<void> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent);
+
+/// Study, point and combination joined to the name of a file, without an ending.
+QString figureName(const Desk& desk, const QString& studyFile);
+
+/// Puts the figure, arranged as the last one was, on the clipboard (Edit, Copy figure).
+Result<void> copyFigure(const Desk& desk, const QString& studyFile);
+
+/// Prints the figure, arranged as the last one was (File, Print).
+Result<void> printFigure(const Desk& desk, const QString& studyFile, QWidget* parent);
+
+} // namespace planewright
