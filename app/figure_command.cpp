@@ -1,0 +1,200 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/figure_command.h"
+
+#include "app/help.h"
+#include "app/offscreen.h"
+#include "app/study_source.h"
+#include "core/figure/figure.h"
+#include "core/figure/svg.h"
+#include "core/quantity/expression.h"
+#include "ui/paint/export.h"
+
+#include <algorithm>
+#include <array>
+#include <charconv>
+
+namespace planewright {
+
+namespace {
+
+using Takes = OptionRow::Takes;
+
+constexpr std::array known = {OptionRow{"-o"},      OptionRow{"--point"}, OptionRow{"--combination"},
+                              OptionRow{"--width"}, OptionRow{"--text"},  OptionRow{"--mono", Takes::nothing},
+                              OptionRow{"--dpi"}};
+
+constexpr int usualDpi = 300;
+
+enum class PictureKind { svg, pdf, png };
+
+/// What the options ask for, before the study is read.
+struct Wanted {
+  std::string file;
+  PictureKind kind = PictureKind::svg;
+  int dpi = usualDpi;
+  FigureOrder order;
+};
+
+std::string lowered(std::string word) {
+  for (char& letter : word)
+    if (letter >= 'A' && letter <= 'Z')
+      letter = static_cast<char>(letter - 'A' + 'a');
+  return word;
+}
+
+/// By the ending of the file's name; standard output takes SVG.
+Result<PictureKind> kindOf(const std::string& file) {
+  const std::string name = lowered(file);
+  if (name == "-" || name.ends_with(".svg"))
+    return PictureKind::svg;
+  if (name.ends_with(".pdf"))
+    return PictureKind::pdf;
+  if (name.ends_with(".png"))
+    return PictureKind::png;
+  return tl::unexpected(Problem{"-o", 0, 0, file,
+                                PW_TEXT("Command", "The ending of “%1” names no kind of picture.").with(file),
+                                PW_TEXT("Command", "End the name with .svg, .pdf or .png.")});
+}
+
+/// The number of an option in `unit`, or what stands in `value` without it.
+std::optional<Problem> readNumber(const Arguments& arguments, const char* option, const Unit& unit,
+                                  double& value) {
+  const std::string* text = arguments.valueOf(option);
+  if (!text)
+    return std::nullopt;
+  Result<Entry> entry = readEntry(*text, {unit.dimension, unit, Slopes::none});
+  if (!entry) {
+    entry.error().place = option;
+    return std::move(entry).error();
+  }
+  value = entry->value;
+  return std::nullopt;
+}
+
+std::optional<Problem> readDpi(const Arguments& arguments, Wanted& wanted) {
+  const std::string* text = arguments.valueOf("--dpi");
+  if (!text)
+    return std::nullopt;
+  if (wanted.kind != PictureKind::png)
+    return Problem{"--dpi",
+                   0,
+                   0,
+                   *text,
+                   PW_TEXT("Command", "Only a PNG has a resolution; SVG and PDF are drawn with lines."),
+                   PW_TEXT("Command", "Leave out --dpi, or end the name of the output with .png.")};
+  const char* end = text->data() + text->size();
+  const auto read = std::from_chars(text->data(), end, wanted.dpi);
+  if (read.ec == std::errc() && read.ptr == end)
+    return std::nullopt;
+  return Problem{"--dpi",
+                 0,
+                 0,
+                 *text,
+                 PW_TEXT("Command", "“%1” is not a whole number.").with(*text),
+                 PW_TEXT("Command", "Write the resolution as a whole number, for instance 300.")};
+}
+
+Result<Wanted> wantedBy(const Arguments& arguments) {
+  if (arguments.operands.empty())
+    return tl::unexpected(Problem{"", 0, 0, "", PW_TEXT("Command", "No study is given."),
+                                  PW_TEXT("Command", "Write planewright figure STUDY -o FILE.svg.")});
+  if (!arguments.has("-o"))
+    return tl::unexpected(Problem{"-o", 0, 0, "", PW_TEXT("Command", "No file is given for the figure."),
+                                  PW_TEXT("Command", "Write -o FILE.svg, -o FILE.pdf or -o FILE.png.")});
+  Wanted wanted;
+  const Result<std::string> file = outputOf(arguments);
+  if (!file)
+    return tl::unexpected(file.error());
+  wanted.file = *file;
+  const Result<PictureKind> kind = kindOf(wanted.file);
+  if (!kind)
+    return tl::unexpected(kind.error());
+  wanted.kind = *kind;
+  wanted.order.mono = arguments.has("--mono");
+  wanted.order.studyName = studyNameOf(arguments.operands.front());
+  const Unit mm{"mm", dimension::length, 1, 1};
+  if (auto problem = readNumber(arguments, "--width", mm, wanted.order.width))
+    return tl::unexpected(*std::move(problem));
+  if (auto problem = readNumber(arguments, "--text", Unit{}, wanted.order.textPoints))
+    return tl::unexpected(*std::move(problem));
+  if (auto problem = readDpi(arguments, wanted))
+    return tl::unexpected(*std::move(problem));
+  return wanted;
+}
+
+Problem unknownName(const char* option, const std::string& name, const std::vector<std::string>& names) {
+  std::string list;
+  for (const std::string& one : names)
+    list += (list.empty() ? "“" : ", “") + one + "”";
+  return {option,
+          0,
+          0,
+          name,
+          PW_TEXT("Command", "The study has no “%1”.").with(name),
+          PW_TEXT("Command", "It has: %1.").with(list)};
+}
+
+/// The readout of the point and combination that the options name, else of those that the study shows.
+Result<Readout> readoutOf(const Study& study, const Arguments& arguments) {
+  const std::string* point = arguments.valueOf("--point");
+  std::vector<std::string> names;
+  if (point && !findPoint(study, *point)) {
+    for (const Point& one : study.points)
+      names.push_back(one.name);
+    return tl::unexpected(unknownName("--point", *point, names));
+  }
+  Readout readout = point ? evaluate(study, *point) : evaluate(study);
+  const std::string* combination = arguments.valueOf("--combination");
+  if (!combination)
+    return readout;
+  for (const StateReading& state : readout.states)
+    names.push_back(state.combination);
+  const auto at = std::ranges::find(names, *combination);
+  if (at == names.end())
+    return tl::unexpected(unknownName("--combination", *combination, names));
+  readout.shown = static_cast<std::size_t>(at - names.begin());
+  return readout;
+}
+
+Outcome<std::string> bytesOf(const Picture& picture, const Wanted& wanted) {
+  const Palette palette = paletteOf(wanted.order);
+  switch (wanted.kind) {
+  case PictureKind::pdf:
+    return paintedOffscreen([&] { return pdfOf(picture, palette); });
+  case PictureKind::png:
+    return paintedOffscreen([&] { return pngOf(picture, palette, wanted.dpi); });
+  case PictureKind::svg:
+    break;
+  }
+  return svgOf(picture, palette);
+}
+
+} // namespace
+
+Outcome<Delivery> drawnFigure(std::span<const std::string> words) {
+  const Result<Arguments> arguments = argumentsOf(words, known, 1);
+  if (!arguments)
+    return wrongUse(arguments.error());
+  if (arguments->helpAsked)
+    return Delivery{figureHelp(), "-"};
+  const Result<Wanted> wanted = wantedBy(*arguments);
+  if (!wanted)
+    return wrongUse(wanted.error());
+  const Outcome<Study> study = studyIn(arguments->operands.front());
+  if (!study)
+    return tl::unexpected(study.error());
+  const Result<Readout> readout = readoutOf(*study, *arguments);
+  if (!readout)
+    return wrongUse(readout.error());
+  Result<Picture> picture = figureOf(*study, *readout, wanted->order);
+  if (!picture) {
+    picture.error().place.insert(0, "--"); // its places are called like the options
+    return wrongUse(std::move(picture).error());
+  }
+  Outcome<std::string> bytes = bytesOf(*picture, *wanted);
+  if (!bytes)
+    return tl::unexpected(std::move(bytes).error());
+  return Delivery{*std::move(bytes), wanted->file};
+}
+
+} // namespace planewright

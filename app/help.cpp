@@ -1,0 +1,75 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/help.h"
+
+#include "core/words/text.h"
+#include "core/words/version.h"
+
+namespace planewright {
+
+std::string programHelp() {
+  return plain(PW_TEXT("Help", R"help(Planewright: plane stress at a point, resolved to the line that matters.
+
+planewright [STUDY]            opens the window, with a study
+planewright resolve ...        prints everything that follows from a study or from three components
+planewright figure STUDY ...   writes the labelled figure as SVG, PDF or PNG
+planewright COMMAND --help     explains a command
+planewright --version          prints the version
+
+A first word that is a command is a command: write ./figure for a file of that name.
+Commands need no display. “-” is standard input or output.
+
+Exit codes: 0 done; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font).
+
+An aid to a licensed engineer: it looks at one point in plane stress. It sees no volume, size, moisture,
+duration, edge, notch or third-direction effects. Local codes govern.
+)help"));
+}
+
+std::string programVersionLines() {
+  return plain(PW_TEXT("Help", R"help(Planewright %1
+Free software under the GNU General Public License, version 3 or later; there is no warranty.
+Figures are set in Liberation Sans, under the SIL Open Font License 1.1.
+)help")
+                   .with(programVersion()));
+}
+
+std::string resolveHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright resolve STUDY [options]
+planewright resolve --sx STRESS --sy STRESS --txy STRESS [--sz STRESS] [options]
+
+Prints everything that follows from a study, or from three components. Without a study, numbers without a unit
+are MPa and degrees.
+
+--sx, --sy, --txy, --sz STRESS   components in the point's axes, for instance "18.6 kN/(90 mm*240 mm)"
+--positive tension|compression   which normal stress counts positive; tension without it
+--normal ANGLE                   one more plane, by its normal from +x, counter-clockwise; may be repeated
+--line ANGLE                     one more line, for instance "25 deg" or "1 in 10"; may be repeated
+--tolerance ANGLE                how far the --line before it may be off, to either side
+--format text|json|csv           text without it
+-o FILE                          writes there; "-" or nothing is standard output
+
+The cut that crosses a line has its normal along the line; the cut that follows it, at 90 deg to it.
+Shear τxy is positive on the +x face in the +y direction.
+
+planewright resolve --sx "80 MPa" --sy "20 MPa" --txy "-30 MPa" --normal "25 deg" --line "1 in 10" --format json
+)help"));
+}
+
+std::string figureHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright figure STUDY -o FILE.svg|.pdf|.png [options]
+
+Writes the labelled figure of one point and combination.
+
+-o FILE              the ending says the kind; "-" is standard output, as SVG
+--point NAME         without it, the point that the study shows, else its first
+--combination NAME   without it, the combination that the study shows, else the first
+--width MM           width of the figure, 90 to 400 mm; 160 without it
+--text PT            size of the text, 7 to 10 pt; 8 without it
+--mono               black and greys only
+--dpi N              resolution of a PNG; 300 without it
+
+planewright figure beam.planewright -o beam.pdf --width 90
+)help"));
+}
+
+} // namespace planewright

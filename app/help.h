@@ -1,0 +1,14 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include <string>
+
+namespace planewright {
+
+/// What `--help` and `--version` print, and `--help` behind a command.
+std::string programHelp();
+std::string programVersionLines();
+std::string resolveHelp();
+std::string figureHelp();
+
+} // namespace planewright

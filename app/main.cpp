@@ -1,0 +1,81 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/figure_command.h"
+#include "app/help.h"
+#include "app/resolve_command.h"
+#include "ui/files/file_bytes.h"
+
+#include <csignal>
+
+#include <fcntl.h>
+#include <unistd.h>
+
+namespace planewright {
+namespace {
+
+using Words = std::span<const std::string>;
+
+/// A closed standard stream must not become the number of the next file that is opened: output would land in
+/// that file. Opened for reading only, writing to it still fails and is noticed.
+void keepStandardStreams() {
+  for (const int stream : {STDIN_FILENO, STDOUT_FILENO, STDERR_FILENO})
+    if (::fcntl(stream, F_GETFD) < 0)
+      static_cast<void>(::open("/dev/null", O_RDONLY));
+}
+
+Outcome<Delivery> alone(std::string text, Words rest) {
+  if (rest.empty())
+    return Delivery{std::move(text), "-"};
+  return wrongUse({"", 0, 0, rest.front(),
+                   PW_TEXT("Command", "The word “%1” is one too many.").with(rest.front()),
+                   PW_TEXT("Command", "Write planewright COMMAND --help for one command.")});
+}
+
+Problem unknownWord(const std::string& word) {
+  return {"",
+          0,
+          0,
+          word,
+          PW_TEXT("Command", "“%1” is not a command.").with(word),
+          PW_TEXT("Command", "The commands are resolve and figure; planewright --help explains them.")};
+}
+
+Outcome<Delivery> commanded(Words words) {
+  if (words.empty())
+    return wrongUse({"", 0, 0, "", PW_TEXT("Command", "No command is given."),
+                     PW_TEXT("Command", "planewright --help explains the commands.")});
+  const std::string& first = words.front();
+  const Words rest = words.subspan(1);
+  if (first == "resolve")
+    return resolved(rest);
+  if (first == "figure")
+    return drawnFigure(rest);
+  if (first == "--help")
+    return alone(programHelp(), rest);
+  if (first == "--version")
+    return alone(programVersionLines(), rest);
+  return wrongUse(unknownWord(first));
+}
+
+int reported(const Failure& failure) {
+  std::string lines;
+  for (const Problem& problem : failure.problems)
+    lines += "planewright: " + plain(problem) + "\n";
+  static_cast<void>(writeTo(STDERR_FILENO, lines, ""));
+  return static_cast<int>(failure.exit);
+}
+
+int run(Words words) {
+  std::signal(SIGPIPE, SIG_IGN);
+  const Outcome<void> outcome = commanded(words).and_then(delivered);
+  return outcome ? static_cast<int>(Exit::done) : reported(outcome.error());
+}
+
+} // namespace
+} // namespace planewright
+
+int main(int argc, char** argv) {
+  using namespace planewright;
+  keepStandardStreams();
+  const std::vector<std::string> words(argv + 1, argv + argc);
+  return run(words);
+}

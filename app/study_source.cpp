@@ -1,0 +1,49 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/study_source.h"
+
+#include "core/record/study_file.h"
+#include "ui/files/file_bytes.h"
+
+#include <filesystem>
+
+#include <unistd.h>
+
+namespace planewright {
+
+namespace {
+
+constexpr std::size_t mostBytes = 16 * 1024 * 1024;
+
+Outcome<std::string> bytesIn(const std::string& file) {
+  const bool isInput = file == "-";
+  Result<std::string> bytes =
+      isInput ? bytesFrom(STDIN_FILENO, mostBytes, "standard input") : bytesOf(file, mostBytes);
+  if (bytes)
+    return *std::move(bytes);
+  // A file that is there and cannot be read is the machine's fault; one that is not there is the caller's.
+  std::error_code failed;
+  if (isInput || std::filesystem::is_regular_file(file, failed))
+    return machineFailed(std::move(bytes).error());
+  return wrongUse(std::move(bytes).error());
+}
+
+} // namespace
+
+Outcome<Study> studyIn(const std::string& file) {
+  Outcome<std::string> bytes = bytesIn(file);
+  if (!bytes)
+    return tl::unexpected(std::move(bytes).error());
+  Results<Study> study = readStudy(*bytes);
+  if (study)
+    return *std::move(study);
+  Problems problems = std::move(study).error();
+  for (Problem& problem : problems)
+    problem.place = problem.place.empty() ? file : file + ": " + problem.place;
+  return tl::unexpected(Failure{Exit::wrongUse, std::move(problems)});
+}
+
+std::string studyNameOf(const std::string& file) {
+  return file == "-" ? std::string() : std::filesystem::path(file).stem().string();
+}
+
+} // namespace planewright

@@ -1,0 +1,99 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "tests/app/run_program.h"
+
+#include <gmock/gmock.h>
+
+namespace planewright {
+namespace {
+
+using testing::HasSubstr;
+using testing::StartsWith;
+
+class FigureCommand : public ProgramTest {};
+
+TEST_F(FigureCommand, writesTheKindThatTheNameEndsWith) {
+  for (const auto& [name, head] :
+       {std::pair{"a.svg", "<?xml"}, {"a.pdf", "%PDF-"}, {"a.png", "\x89PNG"}, {"B.SVG", "<?xml"}}) {
+    const Ran ran = run(std::string("figure \"$demo\" -o ") + name);
+    EXPECT_EQ(ran.exit, 0) << name << ": " << ran.err;
+    EXPECT_EQ(ran.out + ran.err, "");
+    EXPECT_THAT(contents(name), StartsWith(head));
+  }
+  EXPECT_EQ(files(), 4U);
+  EXPECT_THAT(run("figure \"$demo\" -o -").out, StartsWith("<?xml"));
+}
+
+TEST_F(FigureCommand, givesTheSameSvgEveryTime) {
+  const std::string first = run("figure \"$demo\" -o -").out;
+  EXPECT_THAT(first, StartsWith("<?xml"));
+  EXPECT_EQ(run("figure \"$demo\" -o -", "env LC_ALL=C.UTF-8 HOME=/nowhere TZ=Asia/Tokyo").out, first);
+}
+
+TEST_F(FigureCommand, obeysWidthAndResolution) {
+  ASSERT_EQ(run("figure \"$demo\" -o a.pdf --width 90").exit, 0);
+  EXPECT_THAT(shell("pdfinfo a.pdf").out, HasSubstr("255.118 x")) << "90 mm in points";
+  ASSERT_EQ(run("figure \"$demo\" -o a.svg --width '9 cm'").exit, 0);
+  EXPECT_THAT(contents("a.svg"), HasSubstr("width=\"90mm\""));
+  ASSERT_EQ(run("figure \"$demo\" -o a.png --dpi 150 --width 100").exit, 0);
+  // 100 mm at 150 dpi are 590.55 pixels; 150 dpi are 5906 (0x1712) pixels a metre.
+  EXPECT_EQ(contents("a.png").substr(16, 4), std::string("\0\0\x02\x4F", 4));
+  EXPECT_THAT(contents("a.png"), HasSubstr(std::string("pHYs\0\0\x17\x12\0\0\x17\x12\x01", 13)));
+}
+
+TEST_F(FigureCommand, drawsInMonoWithoutAnyColour) {
+  ASSERT_EQ(run("figure \"$demo\" -o a.svg --mono").exit, 0);
+  const std::string svg = contents("a.svg");
+  int colours = 0;
+  for (auto at = svg.find("\"#"); at != std::string::npos; at = svg.find("\"#", at + 1)) {
+    const std::string hex = svg.substr(at + 2, 6);
+    EXPECT_TRUE(hex.substr(0, 2) == hex.substr(2, 2) && hex.substr(2, 2) == hex.substr(4, 2)) << hex;
+    ++colours;
+  }
+  EXPECT_GT(colours, 50);
+}
+
+TEST_F(FigureCommand, refusesWrongUse) {
+  expectWrongUse(run("figure"), "No study is given.");
+  expectWrongUse(run("figure \"$demo\""), "No file is given for the figure.");
+  expectWrongUse(run("figure \"$demo\" -o a.jpg"), "End the name with .svg, .pdf or .png.");
+  expectWrongUse(run("figure \"$demo\" -o a"), "End the name with .svg, .pdf or .png.");
+  expectWrongUse(run("figure \"$demo\" -o a.svg -o b.svg"), "The option -o is given twice.");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --point none"), "The study has no “none”.");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --combination none"), "The study has no “none”.");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --width 30"), "--width");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --width 3e9"), "--width");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --width '90 MPa'"), "--width");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --text 4"), "--text");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --mono=yes"), "takes no value");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --dpi 300"), "Only a PNG has a resolution");
+  expectWrongUse(run("figure \"$demo\" -o a.png --dpi 3.5"), "“3.5” is not a whole number.");
+  expectWrongUse(run("figure \"$demo\" -o a.png --dpi 10"), "--dpi");
+  expectWrongUse(run("figure \"$demo\" -o a.png --dpi 99999999999"), "--dpi");
+  expectWrongUse(run("figure \"$demo\" -o a.png --dpi 2400 --width 400"), "too many pixels");
+  expectWrongUse(run("figure none -o a.svg"), "there is no such file");
+  EXPECT_EQ(files(), 0U);
+}
+
+TEST_F(FigureCommand, drawsTheNamedPointAndCombination) {
+  put("s.planewright", R"({"format":"planewright-study","version":1,
+ "cases":[{"id":"G"},{"id":"S"}],
+ "points":[{"name":"A & <B>","stress":{"G":{"sx":"8 MPa"},"S":{"sx":"3 MPa"}}},
+           {"name":"second","stress":{"G":{"sx":"5 MPa"},"S":{"sx":"4 MPa"}}}]})");
+  const Ran first = run("figure s.planewright -o -");
+  ASSERT_EQ(first.exit, 0) << first.err;
+  EXPECT_THAT(first.out, HasSubstr("A &amp; &lt;B&gt;"));
+  const Ran second = run("figure s.planewright -o - --point second --combination S");
+  ASSERT_EQ(second.exit, 0) << second.err;
+  EXPECT_THAT(second.out, HasSubstr("second"));
+  EXPECT_THAT(second.out, HasSubstr("4.000"));
+  EXPECT_THAT(second.out, testing::Not(HasSubstr("A &amp;")));
+}
+
+TEST_F(FigureCommand, takesACommandsNameForAFileBehindAPath) {
+  ASSERT_EQ(shell("cp \"$demo\" figure").exit, 0);
+  EXPECT_EQ(run("figure ./figure -o a.svg").exit, 0);
+  EXPECT_EQ(run("resolve figure").exit, 0);
+}
+
+} // namespace
+} // namespace planewright
