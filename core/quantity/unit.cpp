@@ -91,7 +91,7 @@ std::string_view nearestUnitName(std::string_view name) {
   std::string typed(name);
   for (const std::string_view micro : {"\u00B5", "\u03BC"})
     if (const std::size_t at = typed.find(micro); at != std::string::npos)
-      typed.replace(at, micro.size(), "u");
+      typed.replace(at, micro.size(), 1, 'u');
   return nearestOf(names, typed);
 }
 
