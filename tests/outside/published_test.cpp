@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 // Values printed in textbooks, each named with its place and basis in resources/checks.
 #include "core/evidence/evidence.h"
+#include "core/record/csv.h"
 
 #include <gtest/gtest.h>
 
@@ -28,7 +29,7 @@ std::vector<CheckResult> results() {
 TEST(Published, everyRowOfTheFileIsRecomputedInItsOrder) {
   const std::vector<std::string> lines = linesOf("plane_stress_transform.csv");
   const std::vector<CheckResult> checks = results();
-  ASSERT_EQ(lines.size(), 123u);
+  ASSERT_GE(lines.size(), 123u);
   ASSERT_EQ(checks.size(), lines.size() - 1);
   for (std::size_t i = 0; i < checks.size(); ++i)
     EXPECT_EQ(checks[i].id, lines[i + 1].substr(0, lines[i + 1].find(',')));
@@ -42,13 +43,18 @@ TEST(Published, everyValueAgrees) {
 }
 
 TEST(Published, rowsAreJudgedAsTheirStatusSays) {
-  std::map<CheckStatus, int> count;
-  for (const CheckResult& check : results())
-    ++count[check.status];
-  EXPECT_EQ(count[CheckStatus::ok], 106);
-  EXPECT_EQ(count[CheckStatus::lastDigit], 5);
-  EXPECT_EQ(count[CheckStatus::sign], 6);
-  EXPECT_EQ(count[CheckStatus::noPrintedValue], 5);
+  const std::map<std::string, CheckStatus> words = {{"OK", CheckStatus::ok},
+                                                    {"LAST_DIGIT", CheckStatus::lastDigit},
+                                                    {"SIGN", CheckStatus::sign},
+                                                    {"NO_PRINTED_VALUE", CheckStatus::noPrintedValue}};
+  const std::vector<std::string> lines = linesOf("plane_stress_transform.csv");
+  const std::vector<CheckResult> checks = results();
+  ASSERT_EQ(checks.size(), lines.size() - 1);
+  for (std::size_t i = 0; i < checks.size(); ++i) {
+    const std::vector<std::string> fields = csvFields(lines[i + 1]);
+    EXPECT_EQ(checks[i].status, words.at(fields.at(9))) << lines[i + 1];
+    EXPECT_EQ(checks[i].printed.has_value(), !fields.at(6).empty()) << lines[i + 1];
+  }
 }
 
 // The rows that invite a mistake of sign: here the conventions of this program give the other one.
