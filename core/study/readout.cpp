@@ -6,6 +6,7 @@
 #include <algorithm>
 #include <cassert>
 #include <cmath>
+#include <limits>
 
 namespace planewright {
 
@@ -56,6 +57,18 @@ void addTerm(StateReading& state, double factor, const CaseValues& values) {
     state.missing.push_back(values.id);
 }
 
+/// Of several terms that cancel only rounding is left: it is not shown as a stress, nor as a direction.
+void dropRounding(StateReading& state) {
+  const double noise = 8 * std::numeric_limits<double>::epsilon() * state.scale;
+  for (double* component : {&state.stress.sx, &state.stress.sy, &state.stress.txy})
+    if (std::abs(*component) <= noise)
+      *component = 0;
+  if (circleOf(state.stress, state.scale).theta1)
+    return;
+  const double mean = state.stress.sx / 2 + state.stress.sy / 2;
+  state.stress = {mean, mean, 0};
+}
+
 void resolve(StateReading& state, const Readout& readout) {
   state.circle = circleOf(state.stress, state.scale, state.sz);
   state.reading = tractionOn(state.stress, readout.reading);
@@ -74,6 +87,8 @@ StateReading combinedState(const Study& study, const Combination& combination,
     assert(values != cases.end());
     addTerm(state, valueOf(study, Spot::factor, factor.factor), *values);
   }
+  if (combination.factors.size() > 1)
+    dropRounding(state);
   return state;
 }
 

@@ -16,12 +16,17 @@ constexpr double greatestValue = 1e100;
 // Beyond this the fraction of a turn is lost in the last digits of a double.
 constexpr double greatestAngle = 1e6;
 
+bool isControl(char32_t code, bool linesAllowed) {
+  if (linesAllowed && (code == '\n' || code == '\t'))
+    return false;
+  return code < 0x20 || (code >= 0x7F && code < 0xA0);
+}
+
+/// Of a text that is UTF-8.
 bool hasControls(std::string_view text, bool linesAllowed) {
-  for (const char c : text) {
-    const auto byte = static_cast<unsigned char>(c);
-    if ((byte < 0x20 && !(linesAllowed && (c == '\n' || c == '\t'))) || byte == 0x7F)
+  for (std::size_t at = 0; const auto point = codePointAt(text, at); at += point->bytes)
+    if (isControl(point->value, linesAllowed))
       return true;
-  }
   return false;
 }
 

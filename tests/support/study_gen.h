@@ -32,7 +32,7 @@ Enum anyWord() {
 /// Names with what trips writers of files and paths; the number keeps them apart.
 inline string anyName(int number) {
   return oneOf({"P", "G", "seat cut", "1.35 G + 1.5 S", "a/b", "~0", "~1/", "“q\"", "back\\slash", "σ𝜎",
-                "x,y;z", "=1", "%1", "_{n}", "{\"a\":[", "\xC2\x85", "-", "points/P1"}) +
+                "x,y;z", "=1", "%1", "_{n}", "{\"a\":[", "\xC2\xAD", "-", "points/P1"}) +
          std::to_string(number);
 }
 

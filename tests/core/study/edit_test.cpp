@@ -61,6 +61,10 @@ TEST(Edit, whatCannotBeMeantIsRefused) {
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::unitStress, {}, {}}, "kN"}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineName, "P1", {}}, "  "}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::pointNote, "P1", {}}, "\xC3\x28"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::pointNote, "P1", {}},
+                                         "a\xC2\x9B"
+                                         "b"}})
+                   .what.empty());
 }
 
 TEST(Edit, ofSeveralEditsAllAreTakenOrNone) {

@@ -82,11 +82,23 @@ TEST(Readout, termsThatCancelLeaveNoFalseAngle) {
       newStudy(), Edits{Type{{Spot::sx, "P1", "G"}, "0.3"}, Type{{Spot::sy, "P1", "G"}, "0.1"},
                         Insert{{Spot::loadCase, "S", {}}, {}}, Insert{{Spot::caseStress, "P1", "S"}, {}},
                         Type{{Spot::sx, "P1", "S"}, "-0.1"}, Type{{Spot::sy, "P1", "S"}, "0.1"}});
-  // 0.3 - 0.1 and 0.1 + 0.1 differ in the last digit only.
+  // 0.3 - 0.1 and 0.1 + 0.1 differ in the last digit only: that digit is no stress and no direction.
+  ASSERT_NE(0.3 - 0.1, 0.1 + 0.1);
   const StateReading state = evaluate(withCombination(cases, "both", {{"G", "1"}, {"S", "1"}})).state();
-  EXPECT_NE(state.stress.sx, state.stress.sy);
+  EXPECT_EQ(state.stress.sx, state.stress.sy);
+  EXPECT_EQ(state.reading.tnt, 0);
   EXPECT_EQ(state.circle.radius, 0);
   EXPECT_FALSE(state.circle.theta1);
+}
+
+TEST(Readout, whatCancelsToRoundingIsZero) {
+  const Study cases =
+      *edited(newStudy(), Edits{Type{{Spot::txy, "P1", "G"}, "0.3"}, Insert{{Spot::loadCase, "S", {}}, {}},
+                                Insert{{Spot::caseStress, "P1", "S"}, {}},
+                                Type{{Spot::txy, "P1", "S"}, "-0.1"}, Type{{Spot::sx, "P1", "S"}, "2"}});
+  const StateReading state = evaluate(withCombination(cases, "c", {{"G", "1"}, {"S", "3"}})).state();
+  EXPECT_EQ(state.stress.txy, 0);
+  EXPECT_EQ(state.stress.sx, 6);
 }
 
 TEST(Readout, onlyAPlainCaseMayBeDragged) {
