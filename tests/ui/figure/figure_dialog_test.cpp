@@ -139,6 +139,22 @@ TEST_F(Arrange, SaysWhatIsWrongWithAWidthAndSavesNothing) {
   EXPECT_TRUE(contents("a.svg").contains("width=\"125mm\""));
 }
 
+TEST_F(Arrange, SaysWhichValuesMovedToTheTable) {
+  FigureDialog dialog(desk);
+  dialog.show();
+  EXPECT_FALSE(says(dialog, "No room beside the drawings"));
+  Edits edits;
+  for (int i = 1; i <= 30; ++i) {
+    const std::string name = "seam " + std::to_string(i);
+    edits.push_back(Insert{{Spot::plane, "P1", name}, {}});
+    edits.push_back(Type{{Spot::planeNormal, "P1", name}, std::to_string(6 * i) + " deg"});
+  }
+  desk.request(edits, desk.newGesture(), QString());
+  click(button<QRadioButton>(dialog, "90 mm, half a page"));
+  EXPECT_TRUE(says(dialog, "No room beside the drawings"));
+  EXPECT_TRUE(says(dialog, "they stand in the table."));
+}
+
 TEST_F(Arrange, OpensWithTheChoicesUsedLast) {
   {
     FigureDialog dialog(desk);

@@ -4,6 +4,7 @@
 
 #include <QFile>
 #include <QImage>
+#include <QPrinter>
 #include <QProcess>
 #include <QRegularExpression>
 #include <QTemporaryDir>
@@ -112,6 +113,39 @@ TEST(Pdf, LooksLikeThePng) {
     for (int x = 0; x < std::min(pdf.width(), png.width()); ++x)
       far += std::abs(qGray(pdf.pixel(x, y)) - qGray(png.pixel(x, y))) > 100 ? 1 : 0;
   EXPECT_LT(far, png.width() * png.height() / 500);
+}
+
+/// The width in mm of what is not white on the first page of a PDF.
+double inkedWidth(const QTemporaryDir& folder, const QString& pdf) {
+  outputOf(QStringLiteral("pdftoppm"),
+           {QStringLiteral("-r"), QStringLiteral("127"), QStringLiteral("-png"),
+            QStringLiteral("-singlefile"), pdf, folder.filePath(QStringLiteral("p"))});
+  const QImage page(folder.filePath(QStringLiteral("p.png")));
+  int left = page.width();
+  int right = -1;
+  for (int y = 0; y < page.height(); ++y)
+    for (int x = 0; x < page.width(); ++x)
+      if (qGray(page.pixel(x, y)) < 200) {
+        left = std::min(left, x);
+        right = std::max(right, x);
+      }
+  return (right + 1 - left) / 5.0; // 127 dpi are 5 pixels a mm
+}
+
+TEST(Print, IsOfTrueSizeWhereThePageHoldsIt) {
+  QTemporaryDir folder;
+  for (const auto& [width, expected] : {std::pair{90.0, 86.0}, {360.0, 356.0 * 190 / 360}}) {
+    QPrinter printer(QPrinter::HighResolution);
+    printer.setOutputFormat(QPrinter::PdfFormat);
+    printer.setOutputFileName(folder.filePath(QStringLiteral("print.pdf")));
+    printer.setPageSize(QPageSize(QPageSize::A4));
+    printer.setPageMargins(QMarginsF(10, 10, 10, 10), QPageLayout::Millimeter);
+    Picture picture = samplePicture();
+    picture.width = width;
+    picture.parts = {Path{{{2, 8}, {width - 2, 8}}, false, Pen{Role::ink, 0.5, Dash::solid}, {}}};
+    ASSERT_TRUE(printPicture(printer, picture, Palette::paper));
+    EXPECT_NEAR(inkedWidth(folder, folder.filePath(QStringLiteral("print.pdf"))), expected, 0.5) << width;
+  }
 }
 
 } // namespace
