@@ -24,9 +24,12 @@ bool isControl(char32_t code, bool linesAllowed) {
 
 /// Of a text that is UTF-8.
 bool hasControls(std::string_view text, bool linesAllowed) {
-  for (std::size_t at = 0; const auto point = codePointAt(text, at); at += point->bytes)
+  std::size_t at = 0;
+  while (const auto point = codePointAt(text, at)) {
     if (isControl(point->value, linesAllowed))
       return true;
+    at += point->bytes;
+  }
   return false;
 }
 
