@@ -12,6 +12,7 @@ namespace planewright {
 namespace {
 
 constexpr int mostLines = 2;
+constexpr int mostLetters = 1000; // two lines never hold more
 constexpr int textStart = 14;
 constexpr qreal triangle = 8;
 
@@ -37,12 +38,19 @@ QStringList complaintLines(const QString& what, const QString& mend, const QFont
   const QFontMetrics metrics(font);
   if (metrics.horizontalAdvance(what) <= width && metrics.horizontalAdvance(mend) <= width)
     return mend.isEmpty() ? QStringList{what} : QStringList{what, mend};
-  QString first = what;
-  QStringList lines = broken(first + QLatin1Char(' ') + mend, font, width);
-  while (lines.size() > mostLines && !first.isEmpty()) {
-    first.chop(1);
-    lines = broken(first.trimmed() + QStringLiteral("… ") + mend, font, width);
+  QStringList lines = broken(what + QLatin1Char(' ') + mend, font, width);
+  if (lines.size() <= mostLines)
+    return lines;
+  // The longest beginning of the first sentence that leaves room for the second.
+  const auto shortened = [&](qsizetype length) {
+    return broken(what.left(length).trimmed() + QStringLiteral("… ") + mend, font, width);
+  };
+  qsizetype fits = 0;
+  for (qsizetype tooLong = qMin(what.size(), qsizetype(mostLetters)); tooLong - fits > 1;) {
+    const qsizetype middle = (fits + tooLong) / 2;
+    (shortened(middle).size() <= mostLines ? fits : tooLong) = middle;
   }
+  lines = shortened(fits);
   if (lines.size() > mostLines)
     lines = {lines.at(0), metrics.elidedText(lines.mid(1).join(QLatin1Char(' ')), Qt::ElideRight, width)};
   return lines;

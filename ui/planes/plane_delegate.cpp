@@ -193,16 +193,23 @@ QWidget* PlaneDelegate::createEditor(QWidget* parent, const QStyleOptionViewItem
   return editor;
 }
 
+// Called at each change of the table too: what is being typed stays.
 void PlaneDelegate::setEditorData(QWidget* editor, const QModelIndex& index) const {
-  static_cast<DraftEdit*>(editor)->setText(index.data(Qt::EditRole).toString());
+  auto* edit = static_cast<DraftEdit*>(editor);
+  if (!edit->isModified())
+    edit->setText(index.data(Qt::EditRole).toString());
 }
 
 // A text that was not touched is no entry.
 void PlaneDelegate::setModelData(QWidget* editor, QAbstractItemModel* model, const QModelIndex& index) const {
   auto* edit = static_cast<DraftEdit*>(editor);
-  if (edit->isModified())
-    edit->setWrong(!model->setData(index, edit->text(), Qt::EditRole));
+  if (!edit->isModified())
+    return;
+  const std::optional<Problem> problem = static_cast<TableModel*>(model)->enter(index, edit->text());
+  edit->setWrong(problem.has_value());
   edit->setModified(edit->isWrong());
+  if (problem)
+    edit->selectPiece(problem->quoted, problem->column);
 }
 
 void PlaneDelegate::updateEditorGeometry(QWidget* editor, const QStyleOptionViewItem& option,
@@ -225,9 +232,7 @@ bool PlaneDelegate::eventFilter(QObject* object, QEvent* event) {
   if (key != Qt::Key_Return && key != Qt::Key_Enter && key != Qt::Key_Tab && key != Qt::Key_Backtab)
     return QStyledItemDelegate::eventFilter(object, event);
   Q_EMIT commitData(editor);
-  if (editor->isWrong())
-    editor->selectAll();
-  else
+  if (!editor->isWrong())
     Q_EMIT closeEditor(editor, NoHint);
   return true;
 }

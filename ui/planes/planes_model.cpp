@@ -69,10 +69,6 @@ Qt::ItemFlags PlanesModel::flags(const QModelIndex& index) const {
   return editable ? flags | Qt::ItemIsEditable : flags;
 }
 
-bool PlanesModel::setData(const QModelIndex& index, const QVariant& value, int role) {
-  return role == Qt::EditRole && !enter(index, value.toString());
-}
-
 QString PlanesModel::editText(const QModelIndex& index) const {
   if (!index.isValid() || isWatchRow(index.row()))
     return {};
@@ -138,6 +134,8 @@ std::optional<Problem> PlanesModel::enter(const QModelIndex& index, const QStrin
   if (problem)
     m_refused = Refused{index.row(), *problem};
   tellChanged();
+  if (const RowNote note = noteOf(index.row()); note.kind != RowNote::Kind::none)
+    m_desk.say(shown(note.words));
   return problem;
 }
 

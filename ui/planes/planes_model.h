@@ -19,7 +19,6 @@ public:
   int rowCount(const QModelIndex& parent = {}) const override;
   QVariant data(const QModelIndex& index, int role) const override;
   Qt::ItemFlags flags(const QModelIndex& index) const override;
-  bool setData(const QModelIndex& index, const QVariant& value, int role) override;
 
   int tintedRow() const override { return 0; }
   bool tintIsBold() const override { return true; }
@@ -30,7 +29,7 @@ public:
 
   /// Takes what was typed in a cell: a name, an angle, or for the reading plane a stress. The Problem, which
   /// the row then tells, when it is not taken.
-  std::optional<Problem> enter(const QModelIndex& index, const QString& typed);
+  std::optional<Problem> enter(const QModelIndex& index, const QString& typed) override;
   /// Brings the reading plane to the other plane of the stress that was typed last; false without one.
   bool swapSolution();
   /// Watches the reading plane under a name of its own and gives its row.

@@ -14,7 +14,7 @@ SweepModel::SweepModel(Desk& desk, QObject* parent) : TableModel(parent), m_desk
 void SweepModel::setStep(Angle step) {
   assert(step.degrees() >= leastStep && step.degrees() <= greatestStep);
   m_step = step;
-  refresh();
+  resetTable(sweepTable(m_desk.study(), m_desk.readout().state(), m_step));
 }
 
 void SweepModel::refresh() {

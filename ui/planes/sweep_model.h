@@ -23,6 +23,8 @@ public:
   int tintedRow() const override;
   bool tintIsBold() const override { return false; }
   RowNote noteOf(int) const override { return {}; }
+  /// Nothing is typed here.
+  std::optional<Problem> enter(const QModelIndex&, const QString&) override { return std::nullopt; }
 
 private:
   void refresh();

@@ -45,11 +45,17 @@ QVariant TableModel::data(const QModelIndex& index, int role) const {
     if (cell.exact)
       return fullDigits(*cell.exact, column);
     return shown(noteOf(index.row()).words);
+  case Qt::AccessibleDescriptionRole:
+    return index.column() == 0 ? shown(noteOf(index.row()).words) : QString();
   case Qt::TextAlignmentRole:
     return int(column.isNumber ? Qt::AlignRight | Qt::AlignVCenter : Qt::AlignLeft | Qt::AlignVCenter);
   default:
     return {};
   }
+}
+
+bool TableModel::setData(const QModelIndex& index, const QVariant& value, int role) {
+  return role == Qt::EditRole && !enter(index, value.toString());
 }
 
 QVariant TableModel::headerData(int section, Qt::Orientation orientation, int role) const {
@@ -60,32 +66,40 @@ QVariant TableModel::headerData(int section, Qt::Orientation orientation, int ro
   return column.unit.empty() ? heading : heading + QLatin1Char(' ') + fromUtf8(column.unit);
 }
 
-// Rows come and go in one block at most; what stands above and below it stays.
+// One block of rows may come or go; what stands above and below it stays. Any other change of rows is a
+// table anew.
 void TableModel::setTable(Table table) {
   const std::vector<Row>& old = m_table.rows;
   const std::vector<Row>& now = table.rows;
-  if (m_table.columns.size() != table.columns.size()) {
-    beginResetModel();
-    m_table = std::move(table);
-    endResetModel();
+  const std::size_t shorter = std::min(old.size(), now.size());
+  const auto above = static_cast<std::size_t>(
+      std::mismatch(old.begin(), old.begin() + static_cast<std::ptrdiff_t>(shorter), now.begin(), isSameRow)
+          .first -
+      old.begin());
+  const bool below = std::equal(old.rbegin(), old.rbegin() + static_cast<std::ptrdiff_t>(shorter - above),
+                                now.rbegin(), isSameRow);
+  const int first = static_cast<int>(above);
+  const int come = static_cast<int>(now.size()) - static_cast<int>(old.size());
+  if (m_table.columns.size() != table.columns.size() || (come != 0 && !below)) {
+    resetTable(std::move(table));
     return;
   }
-  const std::size_t shorter = std::min(old.size(), now.size());
-  std::size_t above = 0;
-  while (above < shorter && isSameRow(old[above], now[above]))
-    ++above;
-  const int first = static_cast<int>(above);
-  const int gone = static_cast<int>(old.size()) - static_cast<int>(now.size());
-  if (gone > 0)
-    beginRemoveRows({}, first, first + gone - 1);
-  else if (gone < 0)
-    beginInsertRows({}, first, first - gone - 1);
+  if (come < 0)
+    beginRemoveRows({}, first, first - come - 1);
+  else if (come > 0)
+    beginInsertRows({}, first, first + come - 1);
   m_table = std::move(table);
-  if (gone > 0)
+  if (come < 0)
     endRemoveRows();
-  else if (gone < 0)
+  else if (come > 0)
     endInsertRows();
   tellChanged();
+}
+
+void TableModel::resetTable(Table table) {
+  beginResetModel();
+  m_table = std::move(table);
+  endResetModel();
 }
 
 void TableModel::tellChanged() {

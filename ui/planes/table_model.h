@@ -5,6 +5,7 @@
 #include <QAbstractTableModel>
 
 #include "core/table/table.h"
+#include "core/words/problem.h"
 
 namespace planewright {
 
@@ -31,14 +32,18 @@ public:
   virtual int tintedRow() const = 0;
   virtual bool tintIsBold() const = 0;
   virtual RowNote noteOf(int row) const = 0;
+  /// Takes what was typed in a cell; the Problem when it is not taken.
+  virtual std::optional<Problem> enter(const QModelIndex& index, const QString& typed) = 0;
 
   int rowCount(const QModelIndex& parent = {}) const override;
   int columnCount(const QModelIndex& parent = {}) const override;
   QVariant data(const QModelIndex& index, int role) const override;
+  bool setData(const QModelIndex& index, const QVariant& value, int role) override;
   QVariant headerData(int section, Qt::Orientation orientation, int role) const override;
 
 protected:
   void setTable(Table table);
+  void resetTable(Table table);
   void tellChanged();
 
 private:
