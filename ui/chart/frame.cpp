@@ -23,13 +23,15 @@ constexpr double marginRight = 16;
 constexpr double marginLeft = 8;
 constexpr double leastExtent = 40;
 
+/// An axis that only maps: grid, ticks and labels are the frame's own. Those of the chart cost it a layout of
+/// every label at each new range, and its softened grid lines cost more than all else in the plot.
 QValueAxis* newAxis() {
   auto* axis = new QValueAxis;
-  axis->setTickType(QValueAxis::TicksDynamic);
-  axis->setTickAnchor(0);
-  axis->setTickInterval(1);
+  axis->setTickCount(2);
+  axis->setGridLineVisible(false);
   axis->setLabelsVisible(false);
   axis->setLineVisible(false);
+  axis->setVisible(false);
   return axis;
 }
 
@@ -41,10 +43,13 @@ EqualScaleFrame::EqualScaleFrame(QWidget* parent)
   chart()->addAxis(m_y, Qt::AlignLeft);
   chart()->legend()->hide();
   chart()->setMargins({});
-  chart()->setBackgroundRoundness(0);
+  chart()->setBackgroundVisible(false);
   chart()->setAnimationOptions(QChart::NoAnimation);
   setViewportUpdateMode(QGraphicsView::BoundingRectViewportUpdate);
   setRenderHint(QPainter::Antialiasing);
+  // The view fills its whole ground itself; once is enough.
+  viewport()->setAttribute(Qt::WA_OpaquePaintEvent);
+  viewport()->setAutoFillBackground(false);
   setFrameShape(QFrame::NoFrame);
   setMinimumSize(240, 200);
   putColours();
@@ -83,8 +88,10 @@ void EqualScaleFrame::showScale(const EqualScale& scale) {
               std::round(range.center().y() / m_tick) * m_tick};
   const QPointF low = chartPoint(range.topLeft());
   const QPointF high = chartPoint(range.bottomRight());
-  chart()->setPlotArea(scale.plot());
-  m_y->setReverse(scale.yDown());
+  if (chart()->plotArea() != scale.plot())
+    chart()->setPlotArea(scale.plot());
+  if (m_y->isReverse() != scale.yDown())
+    m_y->setReverse(scale.yDown());
   m_x->setRange(low.x(), high.x());
   m_y->setRange(low.y(), high.y());
   m_ticks->show(TickMarks(scale));
@@ -92,10 +99,7 @@ void EqualScaleFrame::showScale(const EqualScale& scale) {
 
 void EqualScaleFrame::putColours() {
   const Look now = look();
-  chart()->setBackgroundBrush(now.colour(Role::canvas));
   setBackgroundBrush(now.colour(Role::canvas));
-  for (QValueAxis* axis : {m_x, m_y})
-    axis->setGridLinePen(QPen(now.colour(Role::grid), 1));
   m_ticks->wear(now);
 }
 

@@ -6,6 +6,7 @@
 
 #include <QFontMetricsF>
 #include <QPainter>
+#include <QStyleOptionGraphicsItem>
 
 #include <algorithm>
 
@@ -14,7 +15,7 @@ namespace planewright {
 namespace {
 
 constexpr double labelSize = 12;
-/// Below the series, above the grid.
+/// Below the series.
 constexpr double depth = 3;
 /// Pixels between neighbouring ticks, at least.
 constexpr double leastBetween = 44;
@@ -50,6 +51,7 @@ TickMarks::TickMarks(const EqualScale& shown) : scale(shown) {
 
 TickItem::TickItem(QGraphicsItem* parent) : QGraphicsItem(parent) {
   setZValue(depth);
+  setFlag(ItemUsesExtendedStyleOption); // to be told what is exposed
 }
 
 void TickItem::show(TickMarks marks) {
@@ -69,43 +71,60 @@ QRectF TickItem::boundingRect() const {
   return m_marks.scale.plot().adjusted(-std::max(left, side), -labelSize, side, labelSize + 2 * tickGap);
 }
 
-void TickItem::paint(QPainter* painter, const QStyleOptionGraphicsItem*, QWidget*) {
-  paintAxes(*painter);
-  paintLabels(*painter);
+/// A drag inside the plot leaves the labels round it alone.
+void TickItem::paint(QPainter* painter, const QStyleOptionGraphicsItem* option, QWidget*) {
+  const QRectF plot = m_marks.scale.plot();
+  paintLines(*painter);
+  painter->setFont(programFont(labelSize));
+  painter->setPen(m_look.colour(Role::soft));
+  if (option->exposedRect.bottom() > plot.bottom())
+    paintXLabels(*painter);
+  if (option->exposedRect.left() < plot.left())
+    paintYLabels(*painter);
 }
 
-void TickItem::paintAxes(QPainter& painter) const {
-  const QRectF plot = m_marks.scale.plot();
-  const QPointF origin = m_marks.scale.pixelOf({0, 0});
+void TickItem::paintLines(QPainter& painter) const {
+  const EqualScale& scale = m_marks.scale;
+  const QRectF plot = scale.plot();
+  const auto upright = [&](double value) {
+    const double x = scale.pixelOf({value, 0}).x();
+    painter.drawLine(QPointF(x, plot.top()), QPointF(x, plot.bottom()));
+  };
+  const auto level = [&](double value) {
+    const double y = scale.pixelOf({0, value}).y();
+    painter.drawLine(QPointF(plot.left(), y), QPointF(plot.right(), y));
+  };
   painter.setRenderHint(QPainter::Antialiasing, false);
+  painter.setPen(QPen(m_look.colour(Role::grid), 1));
+  std::ranges::for_each(m_marks.x, upright);
+  std::ranges::for_each(m_marks.y, level);
   painter.setPen(QPen(m_look.colour(Role::soft), 1));
-  if (origin.x() >= plot.left() && origin.x() <= plot.right())
-    painter.drawLine(QPointF(origin.x(), plot.top()), QPointF(origin.x(), plot.bottom()));
-  if (origin.y() >= plot.top() && origin.y() <= plot.bottom())
-    painter.drawLine(QPointF(plot.left(), origin.y()), QPointF(plot.right(), origin.y()));
+  if (std::ranges::count(m_marks.x, 0.0) > 0)
+    upright(0);
+  if (std::ranges::count(m_marks.y, 0.0) > 0)
+    level(0);
 }
 
-void TickItem::paintLabels(QPainter& painter) const {
-  const QFont font = programFont(labelSize);
-  const QFontMetricsF metrics(font);
-  const QRectF plot = m_marks.scale.plot();
-  painter.setFont(font);
-  painter.setPen(m_look.colour(Role::soft));
+void TickItem::paintXLabels(QPainter& painter) const {
+  const QFontMetricsF metrics(painter.font());
+  const double base = m_marks.scale.plot().bottom() + tickGap / 2 + metrics.ascent();
   for (std::size_t i = 0; i < m_marks.x.size(); ++i) {
-    const QString label = fromUtf8(m_marks.xLabels[i]);
     const double x = m_marks.scale.pixelOf({m_marks.x[i], 0}).x();
-    painter.drawText(
-        QPointF(x - metrics.horizontalAdvance(label) / 2, plot.bottom() + tickGap / 2 + metrics.ascent()),
-        label);
+    const double width = widthOfTickLabels({m_marks.xLabels[i]});
+    painter.drawText(QPointF(x - width / 2, base), fromUtf8(m_marks.xLabels[i]));
   }
+}
+
+void TickItem::paintYLabels(QPainter& painter) const {
+  const QFontMetricsF metrics(painter.font());
+  const QRectF plot = m_marks.scale.plot();
   for (std::size_t i = 0; i < m_marks.y.size(); ++i) {
-    const QString label = fromUtf8(m_marks.yLabels[i]);
     const double y = m_marks.scale.pixelOf({0, m_marks.y[i]}).y();
     if (y < plot.top() + titleClear)
       continue;
-    painter.drawText(
-        QPointF(plot.left() - tickGap - metrics.horizontalAdvance(label), y + metrics.capHeight() / 2),
-        label);
+    const double width = widthOfTickLabels({m_marks.yLabels[i]});
+    painter.drawText(QPointF(plot.left() - tickGap - width, y + metrics.capHeight() / 2),
+                     fromUtf8(m_marks.yLabels[i]));
   }
 }
 

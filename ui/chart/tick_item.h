@@ -27,7 +27,7 @@ struct TickMarks {
 /// Pixels that the widest of the labels takes.
 double widthOfTickLabels(const std::vector<std::string>& labels);
 
-/// Tick labels and the axes through 0: the chart's own labels have no true minus.
+/// Grid, axes through 0 and tick labels: the chart's own labels have no true minus.
 class TickItem : public QGraphicsItem {
 public:
   explicit TickItem(QGraphicsItem* parent);
@@ -39,8 +39,9 @@ public:
   void paint(QPainter* painter, const QStyleOptionGraphicsItem* option, QWidget* widget) override;
 
 private:
-  void paintAxes(QPainter& painter) const;
-  void paintLabels(QPainter& painter) const;
+  void paintLines(QPainter& painter) const;
+  void paintXLabels(QPainter& painter) const;
+  void paintYLabels(QPainter& painter) const;
 
   TickMarks m_marks;
   Look m_look;

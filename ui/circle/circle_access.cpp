@@ -51,6 +51,8 @@ void makeAccessible(CirclePlot& plot, Desk& desk) {
   [[maybe_unused]] static const bool once = (QAccessible::installFactory(dialOf), true);
   plot.setAccessibleName(CirclePlot::tr("Reading plane on the circle"));
   QObject::connect(&desk, &Desk::changed, &plot, [&plot] {
+    if (!QAccessible::isActive())
+      return;
     QAccessibleValueChangeEvent event(&plot, plot.reading().degrees());
     QAccessible::updateAccessibility(&event);
   });

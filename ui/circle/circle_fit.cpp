@@ -21,10 +21,13 @@ constexpr double edgeGap = 8;
 /// Width of the reading plane's label at its longest on any plane of the state.
 double readingWidth(const Study& study, const StateReading& state) {
   const Circle& circle = state.circle;
-  const double largest = std::max(std::abs(circle.s1), std::abs(circle.s2));
-  const std::string widest =
-      "n " + shownStress(study, state, -largest) + " | " + shownStress(study, state, -circle.radius);
-  return textWidth({{widest}}, circle_size::text, true);
+  double widest = 0;
+  for (const double sn : {circle.s1, circle.s2}) {
+    const std::string words =
+        "n " + shownStress(study, state, sn) + " | " + shownStress(study, state, -circle.radius);
+    widest = std::max(widest, textWidth({{words}}, circle_size::text, true));
+  }
+  return widest;
 }
 
 struct Needs {
@@ -68,13 +71,14 @@ LabelRoom labelRoom(const Study& study, const Readout& readout, double plotWidth
       side = std::max(side, textWidth(wish.longForm, circle_size::text, wish.bold));
   }
   const double gaps = 2 * circle_size::labelGap;
-  const double most = (plotWidth + circle_size::overhang - gaps - diameter) / 2;
-  return {circle_size::labelGap + std::clamp(room.left, 0.0, std::max(0.0, most)),
+  const double overhangs = circle_size::overhang + circle_size::leftOverhang;
+  const double most = (plotWidth + overhangs - gaps - diameter) / 2;
+  return {circle_size::labelGap - circle_size::leftOverhang + std::clamp(room.left, 0.0, std::max(0.0, most)),
           circle_size::labelGap - circle_size::overhang + std::clamp(room.right, 0.0, std::max(0.0, most))};
 }
 
 double leastDiameter(const QSizeF& panel) {
-  constexpr double share = 0.41;
+  constexpr double share = 0.405;
   return share * std::min(panel.width(), panel.height());
 }
 

@@ -15,8 +15,9 @@ namespace {
 constexpr double leaderWidth = 1;
 /// Labels keep clear of the words in the corners of the plot.
 constexpr double corner = 20;
-/// From a mark on the circle to the label that goes round with it.
-constexpr double outside = 14;
+/// From a mark on the circle to the label that goes round with it, beside the mark and above or below it.
+constexpr double beside = 16;
+constexpr double above = 20;
 
 bool isBold(PlaneKind kind) {
   return kind == PlaneKind::reading || kind == PlaneKind::s1 || kind == PlaneKind::s2 ||
@@ -39,8 +40,8 @@ LabelColumns columnsOf(const Stage& stage) {
   const Round round = stage.round();
   LabelColumns columns;
   columns.centre = round.centre.x();
-  columns.leftStart = plot.left();
-  columns.leftEnd = std::max(plot.left(), round.centre.x() - round.radius - circle_size::labelGap);
+  columns.leftStart = plot.left() - circle_size::leftOverhang;
+  columns.leftEnd = std::max(columns.leftStart, round.centre.x() - round.radius - circle_size::labelGap);
   columns.rightEnd = plot.right() + circle_size::overhang;
   columns.rightStart = std::min(columns.rightEnd, round.centre.x() + round.radius + circle_size::labelGap);
   columns.top = plot.top() + corner;
@@ -53,19 +54,20 @@ LabelColumns columnsOf(const Stage& stage) {
 /// Keeps the whole box of a label inside the plot.
 void clampInto(Label& label, const QRectF& plot) {
   const Box box = boxOf(label);
+  const double left = plot.left() - circle_size::leftOverhang;
   const double right = plot.right() + circle_size::overhang;
-  label.at.x += std::max(0.0, plot.left() - box.left) - std::max(0.0, box.right - right);
+  label.at.x += std::max(0.0, left - box.left) - std::max(0.0, box.right - right);
   label.at.y += std::max(0.0, plot.top() - box.top) - std::max(0.0, box.bottom - plot.bottom());
 }
 
 /// Beside its mark, outside the circle; its place changes without a step as the mark goes round.
 void putOutside(Label& label, const Stage& stage, QPointF mark) {
   const Round round = stage.round();
-  const QPointF at = round.at(round.seenAt(mark), round.radius + outside);
-  const double share = round.radius > 0 ? (mark.x() - round.centre.x()) / round.radius : 1;
+  const QPointF out = round.radius > 0 ? (mark - round.centre) / round.radius : QPointF(1, 0);
+  const QPointF at = mark + QPointF(beside * out.x(), above * out.y());
   const double width = textWidth(label.runs, label.size, label.bold);
   label.align = Align::start;
-  label.at = vecOf(at + QPointF((share - 1) / 2 * width, capHeight / 2 * label.size));
+  label.at = vecOf(at + QPointF((out.x() - 1) / 2 * width, capHeight / 2 * label.size));
 }
 
 } // namespace

@@ -15,8 +15,8 @@ namespace planewright {
 
 namespace {
 
-// The order of the layers. The chart draws its series at 4.
-constexpr double underSeries = 3.5;
+// The order of the layers. The frame draws its grid and axes at 3, the chart its series at 4.
+constexpr double underFrame = 2.5;
 constexpr double wordsDepth = 3.6;
 constexpr double leadersDepth = 3.8;
 constexpr double overSeries = 5;
@@ -36,7 +36,7 @@ QGraphicsRectItem* newClip(QGraphicsItem* parent) {
   auto* item = new QGraphicsRectItem(parent);
   item->setPen(Qt::NoPen);
   item->setFlag(QGraphicsItem::ItemClipsChildrenToShape);
-  item->setZValue(underSeries);
+  item->setZValue(underFrame);
   return item;
 }
 

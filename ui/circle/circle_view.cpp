@@ -3,6 +3,7 @@
 
 #include "ui/circle/circle_access.h"
 #include "ui/circle/circle_plot.h"
+#include "ui/look/font.h"
 
 #include <QActionGroup>
 #include <QHBoxLayout>
@@ -42,6 +43,7 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
   });
   m_menu->setMenu(menu);
   m_menu->setFlat(true);
+  m_menu->setFont(programFont(circle_size::text));
   m_menu->setFocusPolicy(Qt::TabFocus);
 
   auto* row = new QHBoxLayout;
@@ -57,8 +59,7 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
 
   setAccessibleName(tr("Circle"));
   setFocusProxy(m_plot);
-  const QString keys = tr("Left/Right turn by 1°, Ctrl 15°, Shift 0.1°");
-  setProperty("areaKeys", keys);
+  setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
   makeAccessible(*m_plot, desk);
   connect(m_plot, &CirclePlot::angleEntryWanted, this, &CircleView::angleEntryWanted);
   showFit();
