@@ -7,7 +7,9 @@
 #include "ui/circle/circle_plot.h"
 #include "ui/circle/circle_view.h"
 #include "ui/element/element_view.h"
+#include "ui/given/given_panel.h"
 #include "ui/look/font.h"
+#include "ui/planes/planes_panel.h"
 
 #include <QApplication>
 #include <QMouseEvent>
@@ -90,21 +92,35 @@ void send(CirclePlot& plot, QEvent::Type type, QPointF at) {
   QCoreApplication::sendEvent(plot.viewport(), &event);
 }
 
-/// A window of views on one desk.
+/// A window on one desk: the circle alone, or all views as they stand in the program.
 struct Window {
-  Window(int combinations, bool whole) : desk(studyWith(combinations)) {
+  Window(int combinations, bool whole)
+      : desk(studyWith(combinations)), circle(new CircleView(desk, nullptr)) {
     if (whole)
-      splitter.addWidget(new ElementView(desk));
-    view = new CircleView(desk, nullptr);
-    splitter.addWidget(view);
-    splitter.resize(windowSize);
-    splitter.setSizes({672, 728});
-    splitter.show();
+      addAll();
+    else
+      columns.addWidget(circle);
+    columns.resize(windowSize);
+    columns.show();
     paintAll();
   }
 
+  void addAll() {
+    auto* drawings = new QSplitter;
+    drawings->addWidget(new ElementView(desk));
+    drawings->addWidget(circle);
+    drawings->setSizes({48, 52});
+    auto* rows = new QSplitter(Qt::Vertical);
+    rows->addWidget(drawings);
+    rows->addWidget(new PlanesPanel(desk));
+    rows->setSizes({65, 35});
+    columns.addWidget(new GivenPanel(desk));
+    columns.addWidget(rows);
+    columns.setSizes({300, 1100});
+  }
+
   void drag(Samples& samples, Handle handle) {
-    CirclePlot& plot = view->plot();
+    CirclePlot& plot = circle->plot();
     const QPointF start = *plot.handleAt(handle);
     const Round round = plot.round();
     send(plot, QEvent::MouseButtonPress, start);
@@ -134,10 +150,11 @@ struct Window {
   }
 
   Desk desk;
-  QSplitter splitter;
-  CircleView* view = nullptr;
+  CircleView* circle;
+  QSplitter columns;
 };
 
+/// What an idle machine has to keep, in ms, and the circle alone as a multiple of the circle by hand.
 struct Limits {
   double median;
   double percentile99;
@@ -146,24 +163,21 @@ constexpr Limits dragLimits{6, 16};
 constexpr Limits editLimits{16, 33};
 constexpr double ratioLimit = 10;
 
-/// Prints one row; true when it is inside its limits.
-bool print(const Samples& samples, const Samples& byHand, Limits limits) {
-  const double ratio = samples.median() / byHand.median();
-  const bool inside = samples.median() <= limits.median && samples.percentile99() <= limits.percentile99 &&
-                      ratio <= ratioLimit;
-  std::printf("  %-34s %8.2f %8.2f %8.2f   limits %4.0f %4.0f %4.0f   %s\n", samples.name().c_str(),
-              samples.median(), samples.percentile99(), ratio, limits.median, limits.percentile99, ratioLimit,
-              inside ? "inside" : "OVER");
-  return inside;
+void print(const Samples& samples, const Samples& byHand, Limits limits) {
+  const bool inside = samples.median() <= limits.median && samples.percentile99() <= limits.percentile99;
+  std::printf("  %-36s %8.2f %8.2f %8.2f   limits %3.0f %3.0f ms: %s\n", samples.name().c_str(),
+              samples.median(), samples.percentile99(), samples.median() / byHand.median(), limits.median,
+              limits.percentile99, inside ? "inside" : "over");
 }
 
+/// True when the circle alone costs no more than its multiple of the circle by hand.
 bool windowCosts(int combinations) {
   Samples byHand("circle painted by hand");
   Samples turn("circle alone: drag the reading mark");
   Samples draw("circle alone: drag the ear");
   Samples type("circle alone: type a stress");
-  Samples turnAll("element and circle: drag");
-  Samples typeAll("element and circle: type");
+  Samples turnAll("all views: drag the reading mark");
+  Samples typeAll("all views: type a stress");
   HandPainted hand(combinations);
   Window alone(combinations, false);
   Window whole(combinations, true);
@@ -181,14 +195,17 @@ bool windowCosts(int combinations) {
   }
   std::printf("%d combination(s), ms: median, 99th percentile, median as a multiple of the circle by hand\n",
               combinations);
-  std::printf("  %-34s %8.2f %8.2f %8.2f\n", byHand.name().c_str(), byHand.median(), byHand.percentile99(),
+  std::printf("  %-36s %8.2f %8.2f %8.2f\n", byHand.name().c_str(), byHand.median(), byHand.percentile99(),
               1.0);
-  bool inside = print(turn, byHand, dragLimits);
-  inside &= print(draw, byHand, editLimits);
-  inside &= print(type, byHand, editLimits);
-  inside &= print(turnAll, byHand, dragLimits);
-  inside &= print(typeAll, byHand, editLimits);
-  return inside;
+  print(turn, byHand, dragLimits);
+  print(draw, byHand, editLimits);
+  print(type, byHand, editLimits);
+  print(turnAll, byHand, dragLimits);
+  print(typeAll, byHand, editLimits);
+  const double worst = std::max({turn.median(), draw.median(), type.median()}) / byHand.median();
+  std::printf("  the circle alone costs at most %.1f times the circle by hand; limit %.0f\n", worst,
+              ratioLimit);
+  return worst <= ratioLimit;
 }
 
 /// An evaluation in units of a thousand sine-cosine pairs.
