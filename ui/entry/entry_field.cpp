@@ -33,6 +33,11 @@ EntryField::EntryField(Desk& desk, EntryBinding binding, EntryWords words, QWidg
   follow();
 }
 
+// The focus leaves a field that goes while it has it; by then nothing can be taken any more.
+EntryField::~EntryField() {
+  m_edit->disconnect(this);
+}
+
 void EntryField::build() {
   setFocusProxy(m_edit);
   m_caption->setBuddy(m_edit);

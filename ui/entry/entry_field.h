@@ -34,6 +34,7 @@ public:
   static constexpr int complaintPause = 400; ///< ms without a key until a bad one is explained
 
   EntryField(Desk& desk, EntryBinding binding, EntryWords words, QWidget* parent = nullptr);
+  ~EntryField() override;
 
   DraftEdit& edit() const { return *m_edit; }
   QLabel& caption() const { return *m_caption; }

@@ -74,6 +74,11 @@ void SweepPage::showEvent(QShowEvent* event) {
   m_table->scrollTo(nearest, QAbstractItemView::PositionAtCenter);
 }
 
+// The focus may leave the step as the page goes.
+SweepPage::~SweepPage() {
+  m_step->disconnect(this);
+}
+
 QString SweepPage::complaint() const {
   return m_complaint->isHidden() ? QString() : m_complaint->words();
 }

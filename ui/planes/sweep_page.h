@@ -18,6 +18,7 @@ class SweepPage : public QWidget {
 
 public:
   explicit SweepPage(Desk& desk, QWidget* parent = nullptr);
+  ~SweepPage() override;
   PlaneTable& table() const { return *m_table; }
   DraftEdit& step() const { return *m_step; }
   QString complaint() const;

@@ -285,6 +285,19 @@ TEST_F(EntryFieldTest, saysWhatItIs) {
   EXPECT_EQ(field.edit().accessibleDescription(), "= 0.000 MPa");
 }
 
+TEST(EntryFieldEnd, aFieldMayGoWhileItIsTypedInto) {
+  Desk desk(newStudy());
+  QWidget window;
+  auto* field = new EntryField(desk, stressBinding(), {rowOf(Spot::sx).label, {}}, &window);
+  window.show();
+  window.activateWindow();
+  ASSERT_TRUE(QTest::qWaitForWindowActive(&window));
+  field->edit().setFocus();
+  QTest::keyClicks(&field->edit(), "1,5");
+  delete field;
+  EXPECT_EQ(textAt(desk.study(), sx), "0 MPa");
+}
+
 /// A field that follows the shown point.
 TEST(EntryFieldPoint, aDraftStaysWithItsPoint) {
   Study study = *edited(

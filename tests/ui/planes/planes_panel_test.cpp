@@ -167,6 +167,19 @@ TEST_F(PlanesPanelTest, aDraftSurvivesATurnMeanwhile) {
   EXPECT_EQ(editor()->text(), "jo");
 }
 
+TEST_F(PlanesPanelTest, thePanelMayGoWhileACellIsTyped) {
+  auto* other = new PlanesPanel(desk);
+  other->show();
+  other->activateWindow();
+  ASSERT_TRUE(QTest::qWaitForWindowActive(other));
+  other->planes().table().setFocus();
+  other->planes().table().setCurrentIndex(other->planes().model().index(reading, 1));
+  QTest::keyClicks(&other->planes().table(), "7");
+  ASSERT_NE(editor(), nullptr);
+  delete other;
+  EXPECT_EQ(model.rowCount(), 11);
+}
+
 TEST_F(PlanesPanelTest, insertAndDelete) {
   press(Qt::Key_Insert);
   EXPECT_EQ(kept(Spot::planeNormal, "plane 1"), "30 deg");

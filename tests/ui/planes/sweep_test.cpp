@@ -71,6 +71,17 @@ TEST_F(SweepTest, aWrongStepIsExplainedAndTheTableStays) {
   EXPECT_TRUE(page.complaint().isEmpty());
 }
 
+TEST_F(SweepTest, thePageMayGoWhileItsStepIsTyped) {
+  auto* other = new SweepPage(desk);
+  other->show();
+  other->activateWindow();
+  ASSERT_TRUE(QTest::qWaitForWindowActive(other));
+  other->step().setFocus();
+  QTest::keyClicks(&other->step(), ",");
+  delete other;
+  EXPECT_EQ(rows(), 36);
+}
+
 TEST_F(SweepTest, enterBringsTheReadingPlaneToARow) {
   page.table().setCurrentIndex(page.table().model()->index(0, 2));
   QTest::keyClick(&page.table(), Qt::Key_Return);
