@@ -2,6 +2,7 @@
 #include "app/figure_command.h"
 #include "app/help.h"
 #include "app/resolve_command.h"
+#include "app/window_command.h"
 #include "ui/files/file_bytes.h"
 
 #include <csignal>
@@ -35,14 +36,11 @@ Problem unknownWord(const std::string& word) {
           0,
           0,
           word,
-          PW_TEXT("Command", "“%1” is not a command.").with(word),
+          PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
           PW_TEXT("Command", "The commands are resolve and figure; planewright --help explains them.")};
 }
 
 Outcome<Delivery> commanded(Words words) {
-  if (words.empty())
-    return wrongUse({"", 0, 0, "", PW_TEXT("Command", "No command is given."),
-                     PW_TEXT("Command", "planewright --help explains the commands.")});
   const std::string& first = words.front();
   const Words rest = words.subspan(1);
   if (first == "resolve")
@@ -77,5 +75,8 @@ int main(int argc, char** argv) {
   using namespace planewright;
   keepStandardStreams();
   const std::vector<std::string> words(argv + 1, argv + argc);
-  return run(words);
+  if (!asksForWindow(words))
+    return run(words);
+  const Outcome<int> status = shownWindow(argc, argv, words);
+  return status ? *status : reported(status.error());
 }

@@ -32,7 +32,7 @@ TEST_F(Program, saysItsVersionAndHowItIsUsed) {
 }
 
 TEST_F(Program, knowsItsCommands) {
-  expectWrongUse(run("reslove --sx 1"), "“reslove” is not a command.");
+  expectWrongUse(run("reslove --sx 1"), "“reslove” is neither a command nor a file.");
   expectWrongUse(run("--resolve"), "--resolve");
 }
 

@@ -17,6 +17,8 @@ public:
   void undo() override { m_desk.take(m_before); }
   void redo() override { m_desk.take(m_after); }
 
+  const Study& before() const { return *m_before; }
+
   bool mergeWith(const QUndoCommand* other) override {
     const auto* later = static_cast<const StudyCommand*>(other);
     if (later->m_gesture != m_gesture)
@@ -58,6 +60,11 @@ std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const 
     m_cause.reset();
   }
   return std::nullopt;
+}
+
+const Study* Desk::beforeNewestStep() const {
+  const auto* newest = static_cast<const StudyCommand*>(m_undo.command(m_undo.index() - 1));
+  return newest ? &newest->before() : nullptr;
 }
 
 void Desk::show(const std::string& point, const std::string& combination) {

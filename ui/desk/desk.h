@@ -35,6 +35,8 @@ public:
   std::optional<Problem> request(const Edits& edits, Gesture gesture, const QString& what);
   /// While changed() tells of a request: its gesture. None for undo, redo, show and replace.
   const std::optional<Gesture>& cause() const { return m_cause; }
+  /// The study before the newest step of the history; null where there is none to undo.
+  const Study* beforeNewestStep() const;
   /// Shows another point or combination: no undo step, not a change to save.
   void show(const std::string& point, const std::string& combination);
   /// Puts another study on the desk with an empty history (New, Open).

@@ -129,6 +129,12 @@ void GivenPanel::focusFirst() {
   first.selectAll();
 }
 
+void GivenPanel::focusConventions() {
+  m_conventions->setFolded(false);
+  m_conventions->buttons().front()->setFocus(Qt::OtherFocusReason);
+  ensureWidgetVisible(m_conventions);
+}
+
 void GivenPanel::focusNextProblem() {
   focusProblem(1);
 }

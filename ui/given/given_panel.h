@@ -31,6 +31,8 @@ public:
 public slots:
   /// Puts the cursor into the first component, its text selected.
   void focusFirst();
+  /// Opens the group of conventions and units and puts the cursor into it.
+  void focusConventions();
   /// To the next or previous entry that is not taken, round the end.
   void focusNextProblem();
   void focusPreviousProblem();

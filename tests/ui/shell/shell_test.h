@@ -1,0 +1,53 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/edit.h"
+#include "ui/shell/filing.h"
+
+#include <QCoreApplication>
+#include <QSettings>
+#include <QTemporaryDir>
+
+#include <gtest/gtest.h>
+
+namespace planewright {
+
+/// A folder and settings of its own for each test, and a person who answers the questions about files.
+class ShellTest : public testing::Test {
+protected:
+  ShellTest() {
+    QCoreApplication::setOrganizationName(QStringLiteral("planewright-tests"));
+    QCoreApplication::setApplicationName(QStringLiteral("planewright-tests"));
+    QSettings::setDefaultFormat(QSettings::IniFormat);
+    QSettings::setPath(QSettings::IniFormat, QSettings::UserScope, m_folder.path());
+    QSettings().clear();
+  }
+
+  QString file(const QString& name) const { return m_folder.filePath(name); }
+
+  FileQuestions answers() {
+    return {[this](const QString&) {
+              ++m_askedUnsaved;
+              return m_unsaved;
+            },
+            [this] { return m_openPath; }, [this](const QString&) { return m_savePath; }};
+  }
+
+  static void type(Desk& desk, Spot spot, const std::string& text) {
+    const Point& point = shownPoint(desk.study());
+    const std::string item =
+        spot == Spot::sx || spot == Spot::sy || spot == Spot::txy ? point.stress[0].caseId : "";
+    ASSERT_FALSE(
+        desk.request({Type{{spot, point.name, item}, text}}, desk.newGesture(), QStringLiteral("typing")));
+  }
+
+  Unsaved m_unsaved = Unsaved::stay;
+  QString m_openPath;
+  QString m_savePath;
+  int m_askedUnsaved = 0;
+
+private:
+  QTemporaryDir m_folder;
+};
+
+} // namespace planewright

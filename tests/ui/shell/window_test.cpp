@@ -1,0 +1,228 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/record/study_file.h"
+#include "shell_test.h"
+#include "ui/circle/circle_view.h"
+#include "ui/element/element_view.h"
+#include "ui/given/given_panel.h"
+#include "ui/planes/planes_panel.h"
+#include "ui/shell/body.h"
+#include "ui/shell/main_window.h"
+#include "ui/shell/picker.h"
+#include "ui/shell/recent_files.h"
+#include "ui/shell/state_bar.h"
+#include "ui/shell/status_line.h"
+#include "ui/shell/strip.h"
+#include "ui/shell/worked_example.h"
+
+#include <QApplication>
+#include <QDropEvent>
+#include <QFile>
+#include <QLineEdit>
+#include <QMimeData>
+#include <QPushButton>
+#include <QSplitter>
+#include <QTest>
+
+namespace planewright {
+namespace {
+
+class WindowTest : public ShellTest {
+protected:
+  MainWindow& shown(QSize size = {1400, 900}) {
+    m_window = std::make_unique<MainWindow>(answers());
+    m_window->resize(size);
+    m_window->show();
+    m_window->activateWindow();
+    EXPECT_TRUE(QTest::qWaitForWindowActive(m_window.get()));
+    return *m_window;
+  }
+  QString saved(const QString& name, const Study& study) {
+    QFile opened(file(name));
+    EXPECT_TRUE(opened.open(QIODevice::WriteOnly));
+    opened.write(QByteArray::fromStdString(writeStudy(study)));
+    return opened.fileName();
+  }
+  static void drop(QWidget& on, const QString& path) {
+    QMimeData data;
+    data.setUrls({QUrl::fromLocalFile(path)});
+    QDragEnterEvent enter(QPoint(5, 5), Qt::CopyAction, &data, Qt::LeftButton, Qt::NoModifier);
+    QApplication::sendEvent(&on, &enter);
+    EXPECT_TRUE(enter.isAccepted());
+    QDropEvent event(QPointF(5, 5), Qt::CopyAction, &data, Qt::LeftButton, Qt::NoModifier);
+    QApplication::sendEvent(&on, &event);
+  }
+  std::unique_ptr<MainWindow> m_window;
+};
+
+TEST_F(WindowTest, startsWithANewStudyAndTheCursorInItsFirstComponent) {
+  MainWindow& window = shown();
+  EXPECT_EQ(window.desk().study(), newStudy());
+  auto* field = qobject_cast<QLineEdit*>(QApplication::focusWidget());
+  ASSERT_NE(field, nullptr);
+  EXPECT_EQ(field->selectedText(), "0 MPa");
+  EXPECT_TRUE(window.welcome().isVisible());
+  EXPECT_TRUE(window.welcome().offers().contains(QStringLiteral("Open the worked example")));
+  EXPECT_FALSE(window.trouble().isVisible());
+}
+
+TEST_F(WindowTest, theWorkedExampleSaysThatItIsInvented) {
+  MainWindow& window = shown();
+  window.welcome().follow(QStringLiteral("Open the worked example"));
+  EXPECT_EQ(window.desk().study(), workedExample());
+  EXPECT_TRUE(window.welcome().sentence().contains(QStringLiteral("invented")));
+  EXPECT_TRUE(window.filing().path().isEmpty()) << "saving it asks for a name";
+  window.welcome().follow(QStringLiteral("New study"));
+  EXPECT_EQ(window.desk().study(), newStudy());
+}
+
+TEST_F(WindowTest, opensAStudyAndRemembersIt) {
+  MainWindow& window = shown();
+  Study study = workedExample();
+  study.title.subject = "another";
+  const QString path = saved(QStringLiteral("beam.planewright"), study);
+  ASSERT_TRUE(window.open(path));
+  EXPECT_EQ(window.desk().study(), study);
+  EXPECT_EQ(window.windowTitle(), "beam[*] – Planewright");
+  EXPECT_FALSE(window.isWindowModified());
+  EXPECT_FALSE(window.welcome().isVisible());
+  EXPECT_EQ(recentFiles(), QStringList{path});
+  type(window.desk(), Spot::sx, "8 MPa");
+  EXPECT_TRUE(window.isWindowModified());
+  window.desk().undoStack()->undo();
+  EXPECT_FALSE(window.isWindowModified());
+}
+
+TEST_F(WindowTest, aBadFileIsToldInTheWindowAndAGoodOneEndsTheMessage) {
+  MainWindow& window = shown();
+  QFile bad(file(QStringLiteral("bad.planewright")));
+  ASSERT_TRUE(bad.open(QIODevice::WriteOnly));
+  bad.write("{\"format\":\"planewright-study\",\"version\":1,\"pionts\":[],\"titel\":{}}");
+  bad.close();
+  EXPECT_FALSE(window.open(bad.fileName()));
+  EXPECT_TRUE(window.trouble().isVisible());
+  EXPECT_TRUE(window.trouble().sentence().startsWith(QStringLiteral("bad.planewright: ")));
+  EXPECT_EQ(window.trouble().offers().size(), 1) << "the list of all problems";
+  EXPECT_TRUE(recentFiles().isEmpty());
+  EXPECT_TRUE(window.open(saved(QStringLiteral("good.planewright"), workedExample())));
+  EXPECT_FALSE(window.trouble().isVisible());
+}
+
+TEST_F(WindowTest, aDroppedStudyIsOpenedWhereverItIsDropped) {
+  MainWindow& window = shown();
+  Study study = workedExample();
+  study.title.subject = "another";
+  const QString path = saved(QStringLiteral("beam.planewright"), study);
+  QWidget* field = QApplication::focusWidget();
+  ASSERT_NE(field, nullptr);
+  drop(*field, path);
+  EXPECT_EQ(window.desk().study(), study);
+  window.filing().begin();
+  drop(window.element(), path);
+  EXPECT_EQ(window.desk().study(), study);
+}
+
+TEST_F(WindowTest, anUnsavedStudyIsAskedAboutAtClosing) {
+  MainWindow& window = shown();
+  type(window.desk(), Spot::sx, "8 MPa");
+  EXPECT_FALSE(window.close()) << "the answer was to stay";
+  EXPECT_EQ(m_askedUnsaved, 1);
+  m_unsaved = Unsaved::drop;
+  EXPECT_TRUE(window.close());
+}
+
+TEST_F(WindowTest, aTextStillBeingTypedIsSaved) {
+  MainWindow& window = shown();
+  m_savePath = file(QStringLiteral("beam.planewright"));
+  QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("7.5"));
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_S, Qt::ControlModifier);
+  QFile written(m_savePath);
+  ASSERT_TRUE(written.open(QIODevice::ReadOnly));
+  EXPECT_EQ(readStudy(written.readAll().toStdString()).value().points[0].stress[0].sx, "7.5 MPa");
+  EXPECT_FALSE(window.isWindowModified());
+}
+
+TEST_F(WindowTest, theStatusLineTellsAStepAndTakesItBack) {
+  MainWindow& window = shown();
+  type(window.desk(), Spot::lineAngle, "1 in 10");
+  type(window.desk(), Spot::lineAngle, "7.4 deg");
+  EXPECT_EQ(window.statusLine().words(), "Angle of the line now 7.4 deg, was 1 in 10. Undo");
+  Q_EMIT window.statusLine().actionClicked();
+  EXPECT_EQ(window.desk().study().points[0].line->angle, "1 in 10");
+  EXPECT_TRUE(window.statusLine().words().startsWith(QStringLiteral("Undone")));
+}
+
+TEST_F(WindowTest, f6GoesRoundTheAreasAndComesBackToWhereItWas) {
+  MainWindow& window = shown();
+  QWidget* start = QApplication::focusWidget();
+  const QList<QWidget*> order{&window.element(), &window.circle(), &window.planes(), &window.stateBar(),
+                              &window.given()};
+  for (QWidget* area : order) {
+    QTest::keyClick(QApplication::focusWidget(), Qt::Key_F6);
+    QWidget* focused = QApplication::focusWidget();
+    EXPECT_TRUE(focused && (focused == area || area->isAncestorOf(focused)))
+        << area->metaObject()->className();
+  }
+  EXPECT_EQ(QApplication::focusWidget(), start);
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_F6, Qt::ShiftModifier);
+  EXPECT_TRUE(window.stateBar().isAncestorOf(QApplication::focusWidget()));
+}
+
+TEST_F(WindowTest, pickersShowAnotherPointWithoutAStep) {
+  MainWindow& window = shown();
+  Study study = workedExample();
+  study.points.push_back(study.points[0]);
+  study.points[1].name = "P2";
+  ASSERT_TRUE(window.filing().openUnnamed(study));
+  QTest::keyClick(&window, Qt::Key_PageDown, Qt::ControlModifier);
+  EXPECT_EQ(window.desk().readout().point, "P2");
+  EXPECT_EQ(window.desk().undoStack()->count(), 0);
+  EXPECT_FALSE(window.isWindowModified());
+  QTest::keyClick(&window, Qt::Key_PageUp, Qt::ControlModifier);
+  EXPECT_EQ(window.desk().readout().point, study.points[0].name);
+}
+
+/// Rectangle of a widget in the window.
+QRect placed(const QWidget& widget, const QWidget& window) {
+  return {widget.mapTo(&window, QPoint(0, 0)), widget.size()};
+}
+
+class WindowSizes : public WindowTest, public testing::WithParamInterface<std::pair<int, int>> {};
+
+TEST_P(WindowSizes, noPanelIsClippedAndNoneCoversAnother) {
+  const QSize size(GetParam().first, GetParam().second);
+  MainWindow& window = shown(size);
+  window.openWorkedExample();
+  QCoreApplication::processEvents();
+  ASSERT_EQ(window.size(), size);
+  const QList<QWidget*> panels{&window.stateBar(), &window.given(),  &window.element(),
+                               &window.circle(),   &window.planes(), &window.statusLine()};
+  for (qsizetype i = 0; i < panels.size(); ++i) {
+    const QRect place = placed(*panels[i], window);
+    EXPECT_TRUE(window.rect().contains(place)) << panels[i]->metaObject()->className();
+    EXPECT_GE(place.width(), panels[i]->minimumSizeHint().width()) << panels[i]->metaObject()->className();
+    EXPECT_GE(place.height(), panels[i]->minimumSizeHint().height()) << panels[i]->metaObject()->className();
+    for (qsizetype k = 0; k < i; ++k)
+      EXPECT_FALSE(place.intersects(placed(*panels[k], window)));
+  }
+}
+
+INSTANTIATE_TEST_SUITE_P(Sizes, WindowSizes,
+                         testing::Values(std::pair{1024, 700}, std::pair{1100, 760}, std::pair{1600, 1000},
+                                         std::pair{2560, 1400}));
+
+TEST_F(WindowTest, sizesThatTheUserChoseComeBack) {
+  MainWindow& first = shown();
+  const int usual = first.given().width();
+  auto* columns = first.body().findChild<QSplitter*>(QStringLiteral("columns"));
+  ASSERT_NE(columns, nullptr);
+  QTest::mousePress(columns->handle(1), Qt::LeftButton, {}, QPoint(0, 40));
+  QTest::mouseMove(columns->handle(1), QPoint(60, 40));
+  QTest::mouseRelease(columns->handle(1), Qt::LeftButton, {}, QPoint(60, 40));
+  const int chosen = first.given().width();
+  EXPECT_GT(chosen, usual);
+  EXPECT_TRUE(first.close());
+  EXPECT_EQ(shown().given().width(), chosen);
+}
+
+} // namespace
+} // namespace planewright

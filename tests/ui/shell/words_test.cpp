@@ -1,0 +1,128 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "shell_test.h"
+#include "ui/shell/body.h"
+#include "ui/shell/change_words.h"
+#include "ui/shell/filter_list.h"
+#include "ui/shell/picker.h"
+#include "ui/shell/status_line.h"
+#include "ui/shell/strip.h"
+
+#include <QLabel>
+#include <QLineEdit>
+#include <QListWidget>
+#include <QSignalSpy>
+#include <QTest>
+
+#include <algorithm>
+
+namespace planewright {
+namespace {
+
+class ShellWords : public ShellTest {};
+
+TEST_F(ShellWords, oneTypedTextIsToldWithWhatItWas) {
+  Desk desk(newStudy());
+  const Study before = desk.study();
+  type(desk, Spot::lineAngle, "1 in 10");
+  EXPECT_EQ(changeInWords(before, desk.study()), "Angle of the line now 1 in 10, was 0 deg");
+  EXPECT_EQ(changeInWords(desk.study(), desk.study()), "");
+  type(desk, Spot::sx, "8 MPa");
+  EXPECT_EQ(changeInWords(before, desk.study()), "") << "two texts changed";
+}
+
+TEST_F(ShellWords, whatIsShownDoesNotCountAsAChange) {
+  Desk desk(newStudy());
+  Study before = desk.study();
+  before.shown.point = "another";
+  type(desk, Spot::sx, "8 MPa");
+  EXPECT_EQ(changeInWords(before, desk.study()), "σx now 8 MPa, was 0 MPa");
+}
+
+TEST_F(ShellWords, longTextsAreCut) {
+  Desk desk(newStudy());
+  const Study before = desk.study();
+  type(desk, Spot::sx, "1 MPa + 2 MPa + 3 MPa + 4 MPa + 5 MPa + 6 MPa + 7 MPa");
+  EXPECT_TRUE(changeInWords(before, desk.study()).contains(QStringLiteral("…, was 0 MPa")));
+}
+
+TEST_F(ShellWords, entriesNotTakenStandBeforeEveryMessage) {
+  StatusLine line(nullptr);
+  line.say(QStringLiteral("Angle now 7 deg."), QStringLiteral("Undo"));
+  EXPECT_EQ(line.words(), "Angle now 7 deg. Undo");
+  line.setNotTaken(1, QStringLiteral("τxy of case S"));
+  line.say(QStringLiteral("Saved."));
+  EXPECT_EQ(line.words(), "1 entry not taken: τxy of case S");
+  line.setNotTaken(2, QStringLiteral("τxy"));
+  EXPECT_EQ(line.words(), "2 entries not taken, first τxy");
+  line.setNotTaken(0, {});
+  EXPECT_EQ(line.words(), "Saved.");
+}
+
+TEST_F(ShellWords, wordsOfTheUserAreNoMarkup) {
+  StatusLine line(nullptr);
+  line.say(QStringLiteral("a <b> & c"));
+  EXPECT_EQ(line.words(), "a <b> & c");
+}
+
+TEST_F(ShellWords, aStripFollowsOnlyTheLinksOfItsSentence) {
+  Strip strip(nullptr);
+  int first = 0;
+  int second = 0;
+  strip.say(QStringLiteral("One."));
+  strip.offer(QStringLiteral("Do it"), [&] { ++first; });
+  strip.follow(QStringLiteral("Do it"));
+  strip.say(QStringLiteral("Two."));
+  strip.offer(QStringLiteral("Do it"), [&] { ++second; });
+  strip.offer(QStringLiteral("Do else"), [] { FAIL(); });
+  strip.follow(QStringLiteral("Do it"));
+  EXPECT_EQ(first, 1);
+  EXPECT_EQ(second, 1);
+  EXPECT_EQ(strip.offers().size(), 2);
+}
+
+TEST_F(ShellWords, aPickerStepsInsideItsNamesAndCounts) {
+  Picker picker(QStringLiteral("Point"), QStringLiteral("Ctrl"), nullptr);
+  QSignalSpy chosen(&picker, &Picker::chosen);
+  picker.show({"A", "B", "C"}, 1);
+  picker.next();
+  picker.previous();
+  ASSERT_EQ(chosen.size(), 2);
+  EXPECT_EQ(chosen[0][0], "C");
+  EXPECT_EQ(chosen[1][0], "A");
+  picker.show({"A"}, 0);
+  picker.next();
+  picker.previous();
+  EXPECT_EQ(chosen.size(), 2);
+  const QList<QLabel*> labels = picker.findChildren<QLabel*>();
+  EXPECT_TRUE(std::ranges::any_of(labels, [](const QLabel* label) { return label->text() == "1 of 1"; }));
+}
+
+TEST_F(ShellWords, typingFiltersTheListAndEnterChooses) {
+  FilterList list({"1.35 G", "1.35 G + 1.5 S", "1.35 G + 1.5 W"}, QStringLiteral("1.35 G"), nullptr);
+  QSignalSpy chosen(&list, &FilterList::chosen);
+  QTest::keyClicks(&list.filter(), QStringLiteral("1.5 w"));
+  EXPECT_TRUE(list.list().item(0)->isHidden());
+  EXPECT_FALSE(list.list().item(2)->isHidden());
+  list.setAttribute(Qt::WA_DeleteOnClose, false);
+  QTest::keyClick(&list.filter(), Qt::Key_Return);
+  ASSERT_EQ(chosen.size(), 1);
+  EXPECT_EQ(chosen[0][0], "1.35 G + 1.5 W");
+}
+
+TEST_F(ShellWords, panelsHaveTheSizesOfTheWindow) {
+  const BodySizes small = sizesIn({1024, 600}, 220);
+  EXPECT_EQ(small.given, 264);
+  EXPECT_EQ(small.element + small.circle, 760);
+  EXPECT_NEAR(double(small.element) / 760, 0.48, 0.002);
+  EXPECT_EQ(small.planes, 220) << "never less than its rows";
+  const BodySizes usual = sizesIn({1600, 900}, 220);
+  EXPECT_EQ(usual.given, 300);
+  EXPECT_EQ(usual.planes, 315) << "35 % of the height";
+  EXPECT_EQ(usual.drawings + usual.planes, 900);
+  const BodySizes large = sizesIn({3800, 2000}, 220);
+  EXPECT_EQ(large.drawings, 900) << "above that the table gets the room";
+  EXPECT_EQ(large.planes, 1100);
+}
+
+} // namespace
+} // namespace planewright

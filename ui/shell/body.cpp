@@ -1,0 +1,91 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/body.h"
+
+#include <QHBoxLayout>
+#include <QSettings>
+#include <QSplitter>
+
+#include <algorithm>
+
+namespace planewright {
+
+BodySizes sizesIn(QSize body, int leastPlanes) {
+  constexpr int roomy = 1100;
+  constexpr int greatestDrawing = 900;
+  BodySizes sizes;
+  sizes.given = body.width() < roomy ? 264 : 300;
+  const int rest = std::max(0, body.width() - sizes.given);
+  sizes.element = rest * 48 / 100;
+  sizes.circle = rest - sizes.element;
+  sizes.planes = std::max(body.height() * 35 / 100, leastPlanes);
+  sizes.drawings = std::clamp(body.height() - sizes.planes, 0, greatestDrawing);
+  sizes.planes = body.height() - sizes.drawings;
+  return sizes;
+}
+
+Body::Body(const Panels& panels, QWidget* parent)
+    : QWidget(parent), m_columns(splitter(Qt::Horizontal, QStringLiteral("columns"))),
+      m_rows(splitter(Qt::Vertical, QStringLiteral("rows"))),
+      m_drawings(splitter(Qt::Horizontal, QStringLiteral("drawings"))), m_planes(panels.planes) {
+  auto* layout = new QHBoxLayout(this);
+  layout->setContentsMargins(0, 0, 0, 0);
+  layout->addWidget(m_columns);
+  m_drawings->addWidget(panels.element);
+  m_drawings->addWidget(panels.circle);
+  m_rows->addWidget(m_drawings);
+  m_rows->addWidget(panels.planes);
+  m_columns->addWidget(panels.given);
+  m_columns->addWidget(m_rows);
+  m_columns->setStretchFactor(0, 0);
+  m_columns->setStretchFactor(1, 1);
+  m_rows->setStretchFactor(0, 65);
+  m_rows->setStretchFactor(1, 35);
+  m_drawings->setStretchFactor(0, 48);
+  m_drawings->setStretchFactor(1, 52);
+}
+
+QSplitter* Body::splitter(Qt::Orientation orientation, const QString& name) {
+  auto* made = new QSplitter(orientation, this);
+  made->setObjectName(name);
+  made->setChildrenCollapsible(false);
+  made->setHandleWidth(1);
+  made->setStyleSheet(QStringLiteral("QSplitter::handle { background: palette(mid); }"));
+  connect(made, &QSplitter::splitterMoved, this, [this] { m_ownSizes = true; });
+  return made;
+}
+
+void Body::store(QSettings& settings) const {
+  for (const QSplitter* one : splitters()) {
+    const QString key = QStringLiteral("splitters/") + one->objectName();
+    if (m_ownSizes)
+      settings.setValue(key, one->saveState());
+    else
+      settings.remove(key);
+  }
+}
+
+void Body::restore(const QSettings& settings) {
+  for (QSplitter* one : splitters())
+    m_ownSizes |=
+        one->restoreState(settings.value(QStringLiteral("splitters/") + one->objectName()).toByteArray());
+}
+
+void Body::resetSizes() {
+  m_ownSizes = false;
+  // Tabs, heading and eight rows.
+  constexpr int leastRows = 11;
+  const int leastPlanes =
+      std::max(m_planes->minimumSizeHint().height(), leastRows * (fontMetrics().height() + 7));
+  const BodySizes sizes = sizesIn(size(), leastPlanes);
+  m_columns->setSizes({sizes.given, sizes.element + sizes.circle});
+  m_drawings->setSizes({sizes.element, sizes.circle});
+  m_rows->setSizes({sizes.drawings, sizes.planes});
+}
+
+void Body::resizeEvent(QResizeEvent* event) {
+  QWidget::resizeEvent(event);
+  if (!m_ownSizes)
+    resetSizes();
+}
+
+} // namespace planewright

@@ -1,0 +1,67 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/file_questions.h"
+
+#include "ui/shell/recent_files.h"
+
+#include <QCoreApplication>
+#include <QDir>
+#include <QFileDialog>
+#include <QMessageBox>
+#include <QStandardPaths>
+
+namespace planewright {
+
+namespace {
+
+QString words(const char* source) {
+  return QCoreApplication::translate("FileQuestions", source);
+}
+
+QString filter() {
+  return words(QT_TRANSLATE_NOOP("FileQuestions", "Studies (*.planewright);;All files (*)"));
+}
+
+/// The folder of the newest file, else that of documents.
+QString folder() {
+  const QString newest = recentFiles().value(0);
+  return newest.isEmpty() ? QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation)
+                          : QFileInfo(newest).absolutePath();
+}
+
+Unsaved askAboutUnsaved(QWidget& window, const QString& name) {
+  QMessageBox box(
+      QMessageBox::NoIcon, words(QT_TRANSLATE_NOOP("FileQuestions", "Unsaved changes")),
+      words(QT_TRANSLATE_NOOP("FileQuestions", "“%1” has changes that are in no file.")).arg(name),
+      QMessageBox::Save | QMessageBox::Discard | QMessageBox::Cancel, &window);
+  box.setInformativeText(words(QT_TRANSLATE_NOOP("FileQuestions", "Save them before going on?")));
+  box.setDefaultButton(QMessageBox::Save);
+  const int answer = box.exec();
+  return answer == QMessageBox::Save      ? Unsaved::save
+         : answer == QMessageBox::Discard ? Unsaved::drop
+                                          : Unsaved::stay;
+}
+
+QString askPathToOpen(QWidget& window) {
+  return QFileDialog::getOpenFileName(&window, words(QT_TRANSLATE_NOOP("FileQuestions", "Open a study")),
+                                      folder(), filter());
+}
+
+QString askPathToSave(QWidget& window, const QString& proposed) {
+  const QString start = QFileInfo(proposed).isAbsolute() ? proposed : QDir(folder()).filePath(proposed);
+  QFileDialog dialog(&window, words(QT_TRANSLATE_NOOP("FileQuestions", "Save the study as")),
+                     QFileInfo(start).absolutePath(), filter());
+  dialog.setAcceptMode(QFileDialog::AcceptSave);
+  dialog.setDefaultSuffix(QStringLiteral("planewright"));
+  dialog.selectFile(QFileInfo(start).fileName());
+  return dialog.exec() == QDialog::Accepted ? dialog.selectedFiles().value(0) : QString();
+}
+
+} // namespace
+
+FileQuestions askedOver(QWidget& window) {
+  return {[&window](const QString& name) { return askAboutUnsaved(window, name); },
+          [&window] { return askPathToOpen(window); },
+          [&window](const QString& proposed) { return askPathToSave(window, proposed); }};
+}
+
+} // namespace planewright

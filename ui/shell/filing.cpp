@@ -1,0 +1,92 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/filing.h"
+
+#include "core/record/study_file.h"
+#include "ui/files/file_bytes.h"
+
+#include <QFileInfo>
+
+namespace planewright {
+
+Filing::Filing(Desk& desk, FileQuestions questions, QObject* parent)
+    : QObject(parent), m_desk(desk), m_questions(std::move(questions)) {}
+
+QString Filing::name() const {
+  return m_path.isEmpty() ? tr("New study") : QFileInfo(m_path).completeBaseName();
+}
+
+bool Filing::begin() {
+  return openUnnamed(newStudy());
+}
+
+bool Filing::open() {
+  const QString path = m_questions.pathToOpen();
+  return !path.isEmpty() && open(path);
+}
+
+bool Filing::open(const QString& path) {
+  const auto refuse = [&](Problems problems) {
+    Q_EMIT refused(path, problems);
+    return false;
+  };
+  const Result<std::string> bytes = bytesOf(path.toStdString(), greatestFile);
+  if (!bytes)
+    return refuse({bytes.error()});
+  Results<Study> study = readStudy(*bytes);
+  if (!study)
+    return refuse(std::move(study).error());
+  if (!mayLeave())
+    return false;
+  put(*std::move(study), QFileInfo(path).absoluteFilePath());
+  return true;
+}
+
+bool Filing::openUnnamed(Study study) {
+  if (!mayLeave())
+    return false;
+  put(std::move(study), {});
+  return true;
+}
+
+bool Filing::save() {
+  return m_path.isEmpty() ? saveAs() : writeTo(m_path);
+}
+
+bool Filing::saveAs() {
+  const QString path = m_questions.pathToSave(m_path.isEmpty() ? tr("study.planewright") : m_path);
+  return !path.isEmpty() && writeTo(QFileInfo(path).absoluteFilePath());
+}
+
+bool Filing::mayLeave() {
+  if (!hasChanges())
+    return true;
+  switch (m_questions.aboutUnsaved(name())) {
+  case Unsaved::save:
+    return save();
+  case Unsaved::drop:
+    return true;
+  case Unsaved::stay:
+    break;
+  }
+  return false;
+}
+
+void Filing::put(Study study, const QString& path) {
+  m_path = path;
+  m_desk.replace(std::move(study));
+  Q_EMIT fileChanged(m_path);
+  Q_EMIT begun();
+}
+
+bool Filing::writeTo(const QString& path) {
+  if (const Result<void> written = writeAside(path.toStdString(), writeStudy(m_desk.study())); !written) {
+    Q_EMIT refused(path, {written.error()});
+    return false;
+  }
+  m_path = path;
+  m_desk.undoStack()->setClean();
+  Q_EMIT fileChanged(m_path);
+  return true;
+}
+
+} // namespace planewright

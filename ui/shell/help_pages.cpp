@@ -1,0 +1,120 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/help_pages.h"
+
+#include <QCoreApplication>
+
+namespace planewright {
+
+namespace {
+
+QString words(const char* source) {
+  return QCoreApplication::translate("Help", source);
+}
+
+QString entries() {
+  return words(QT_TRANSLATE_NOOP("Help", R"help(
+<p>Type a component the way the hand calculation has it, with its units; below the field stands what it comes to.</p>
+<p><code>-18.6 kN/(90 mm*240 mm)</code> &nbsp; <code>1.5*12 kN/(90 mm*240 mm)</code> &nbsp; <code>0.4*sqrt(3) MPa</code></p>
+<table cellpadding="3">
+<tr><td>Operators</td><td><code>+ - * / ^</code>, parentheses; <code>sqrt abs min max sin cos tan</code>; <code>pi</code></td></tr>
+<tr><td>Stress</td><td>Pa kPa MPa GPa psi ksi psf bar, or a force over an area</td></tr>
+<tr><td>Force</td><td>N kN MN lbf kip kgf tf</td></tr>
+<tr><td>Length</td><td>um mm cm m in ft</td></tr>
+<tr><td>Angle</td><td>deg rad; a plain number is in degrees</td></tr>
+</table>
+<p>A unit binds tighter than <code>*</code> and <code>/</code>: <code>12 kN / 100 mm^2</code> is 12 kN over 100 square
+millimetres. A number without a unit takes the study's unit and is completed with it, so that another unit never
+changes a stress.</p>
+<p>The angle and the tolerance of a line also read slopes: <code>1 in 12</code>, <code>1:12</code>, the angle <code>8 %</code> too.
+The echo gives both, 5.71° and 1 in 10, so that 10 for 1 in 10 is seen at once. The normal of a plane takes no slope.</p>
+<p>A decimal comma is not read; write 1.5. A text that does not read stays in its field, marked, with what is wrong and
+how to mend it; the study keeps the last text that did.</p>
+)help"));
+}
+
+QString conventions() {
+  return words(QT_TRANSLATE_NOOP("Help", R"help(
+<table cellpadding="6"><tr>
+<td><img src="picture:given" width="300" height="250"></td>
+<td><img src="picture:turned" width="300" height="250"></td></tr>
+<tr><td>Given: positive components, tension positive.</td>
+<td>Turned: the heavy face is the cut; its normal n stands at θ.</td></tr></table>
+<p>x runs along the member, y up; everything is seen from +z. All angles are measured from +x, counter-clockwise, and
+reported from −90° (excluded) to 90°.</p>
+<p><b>A plane is named by its normal.</b> The cut itself runs 90° further; the table has both. τ<sub>nt</sub> is positive
+towards t, the normal turned by +90°.</p>
+<p><b>A line has an angle of its own</b>, φ. The cut that <i>crosses</i> the line has its normal along it, at φ: its normal
+stress acts <i>along</i> the line. The cut that <i>follows</i> the line has its normal at φ + 90°: its normal stress acts
+<i>across</i> the line. Both carry the same shear with opposite signs.</p>
+<p>On the circle τ<sub>nt</sub> is drawn positive downwards, so that the circle turns the way the element turns, by twice
+the angle. A study may choose upwards; then the circle turns the other way.</p>
+<p>A study may count compression positive: then every typed and reported component has the opposite sign. The arrows of
+the element show what the body feels and do not change.</p>
+)help"));
+}
+
+QString keys() {
+  return words(QT_TRANSLATE_NOOP("Help", R"help(
+<table cellpadding="4">
+<tr><td><b>F1</b></td><td>help on the focused area</td></tr>
+<tr><td><b>F6, Shift+F6</b></td><td>next, previous area</td></tr>
+<tr><td><b>Tab</b></td><td>next field; inside a drawing the next handle</td></tr>
+<tr><td><b>F8, Shift+F8</b></td><td>next, previous entry that is not taken</td></tr>
+<tr><td><b>Left, Down; Right, Up</b></td><td>turn a handle by −1°, +1°; with Shift 0.1°, with Ctrl 15°</td></tr>
+<tr><td><b>PageUp, PageDown</b></td><td>on a handle: next, previous named direction</td></tr>
+<tr><td><b>Home, Enter, Esc</b></td><td>on a handle: to 0°; type an angle; a drag back to its start</td></tr>
+<tr><td><b>Ctrl, Shift</b></td><td>in a drag: turn freely; turn at a tenth</td></tr>
+<tr><td><b>F2, Enter</b></td><td>in Planes: edit; bring the reading plane there</td></tr>
+<tr><td><b>Ctrl+Enter</b></td><td>in Planes: the other plane with the same stress</td></tr>
+<tr><td><b>Insert, Delete</b></td><td>in Planes: watch the reading plane; remove</td></tr>
+<tr><td><b>Ctrl+PageUp, Ctrl+PageDown</b></td><td>previous, next point</td></tr>
+<tr><td><b>Alt+PageUp, Alt+PageDown</b></td><td>previous, next combination</td></tr>
+<tr><td><b>Ctrl+E, Ctrl+0</b></td><td>arrange the figure; fit the circle</td></tr>
+<tr><td><b>Ctrl+N, O, S, P, Q, Z, C; F11</b></td><td>as everywhere</td></tr>
+</table>
+)help"));
+}
+
+QString cautions() {
+  return words(QT_TRANSLATE_NOOP("Help", R"help(
+<p><b>Planewright looks at one point in plane stress.</b> It is an aid to a licensed engineer, who decides, under the
+code that governs where the structure stands. It is no design check.</p>
+<p>It does not see:</p>
+<ul>
+<li>the stressed volume, effects of size and depth;</li>
+<li>moisture, temperature, duration of load, fatigue;</li>
+<li>notches, holes, edges, ends, curved parts, ply drops, where stresses out of the plane are not small;</li>
+<li>stresses in the third direction beyond the one normal stress that may be given;</li>
+<li>the scatter of a material, buckling, and whatever acts at another point.</li>
+</ul>
+<p>The components are taken as they are typed: an error in them is an error in everything that follows. Compare the
+signs with the picture of positive stresses before trusting a result.</p>
+)help"));
+}
+
+} // namespace
+
+QString titleOf(HelpPage page) {
+  switch (page) {
+  case HelpPage::entries:
+    return words(QT_TRANSLATE_NOOP("Help", "Entries and units"));
+  case HelpPage::conventions:
+    return words(QT_TRANSLATE_NOOP("Help", "Conventions"));
+  case HelpPage::keys:
+    return words(QT_TRANSLATE_NOOP("Help", "Keys"));
+  case HelpPage::cautions:
+    break;
+  }
+  return words(QT_TRANSLATE_NOOP("Help", "Cautions"));
+}
+
+QString htmlOf(HelpPage page, const Look& look) {
+  const QString body = page == HelpPage::entries       ? entries()
+                       : page == HelpPage::conventions ? conventions()
+                       : page == HelpPage::keys        ? keys()
+                                                       : cautions();
+  return QStringLiteral("<body style=\"color:%1\"><h2>%2</h2>%3</body>")
+      .arg(look.colour(Role::ink).name(), titleOf(page), body);
+}
+
+} // namespace planewright

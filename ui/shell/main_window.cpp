@@ -1,0 +1,230 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/main_window.h"
+
+#include "ui/circle/circle_view.h"
+#include "ui/element/element_view.h"
+#include "ui/figure/figure_dialog.h"
+#include "ui/given/given_panel.h"
+#include "ui/planes/planes_panel.h"
+#include "ui/shell/appearance.h"
+#include "ui/shell/areas.h"
+#include "ui/shell/body.h"
+#include "ui/shell/change_words.h"
+#include "ui/shell/file_questions.h"
+#include "ui/shell/help_window.h"
+#include "ui/shell/problem_list.h"
+#include "ui/shell/recent_files.h"
+#include "ui/shell/state_bar.h"
+#include "ui/shell/status_line.h"
+#include "ui/shell/strip.h"
+#include "ui/shell/title_dialog.h"
+#include "ui/shell/window_icon.h"
+#include "ui/shell/worked_example.h"
+
+#include <QApplication>
+#include <QCloseEvent>
+#include <QDropEvent>
+#include <QFileInfo>
+#include <QMenuBar>
+#include <QMimeData>
+#include <QPushButton>
+#include <QSettings>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+namespace {
+
+/// The one local file that is dragged over the window; empty for everything else.
+QString draggedFile(const QMimeData& data) {
+  const QList<QUrl> urls = data.urls();
+  return urls.size() == 1 && urls.front().isLocalFile() ? urls.front().toLocalFile() : QString();
+}
+
+} // namespace
+
+MainWindow::MainWindow() : MainWindow(askedOver(*this)) {}
+
+MainWindow::MainWindow(FileQuestions questions)
+    : m_desk(newStudy()), m_filing(new Filing(m_desk, std::move(questions), this)),
+      m_stateBar(new StateBar(m_desk, this)), m_welcome(new Strip(this)), m_trouble(new Strip(this)),
+      m_given(new GivenPanel(m_desk)), m_element(new ElementView(m_desk)),
+      m_circle(new CircleView(m_desk, nullptr)), m_planes(new PlanesPanel(m_desk)),
+      m_body(new Body({m_given, m_element, m_circle, m_planes}, this)), m_status(new StatusLine(this)),
+      m_areas(new Areas({m_stateBar, m_given, m_element, m_circle, m_planes}, this)) {
+  build();
+  addFileMenu();
+  addEditMenu();
+  addStudyMenu();
+  addViewMenu();
+  addHelpMenu();
+  connectViews();
+  restoreGeometryAndSizes();
+  showFile({});
+  m_given->focusFirst();
+  qApp->installEventFilter(this);
+}
+
+// Views end before the desk that they look at; the follower of the focus before the areas.
+MainWindow::~MainWindow() {
+  m_desk.undoStack()->disconnect(this);
+  delete m_areas;
+  qDeleteAll(findChildren<QWidget*>(Qt::FindDirectChildrenOnly));
+}
+
+void MainWindow::build() {
+  auto* page = new QWidget(this);
+  auto* rows = new QVBoxLayout(page);
+  rows->setContentsMargins(0, 0, 0, 0);
+  rows->setSpacing(0);
+  rows->addWidget(m_stateBar);
+  rows->addWidget(m_trouble);
+  rows->addWidget(m_welcome);
+  rows->addWidget(m_body, 1);
+  rows->addWidget(m_status);
+  setCentralWidget(page);
+  setWindowIcon(windowIcon());
+  setMinimumSize(800, 560);
+  setAcceptDrops(true);
+  QWidget::setTabOrder(&m_stateBar->figureButton(), m_given);
+}
+
+void MainWindow::connectViews() {
+  connect(&m_desk, &Desk::said, this, [this](const QString& message) { m_status->say(message); });
+  connect(m_desk.undoStack(), &QUndoStack::indexChanged, this, &MainWindow::tellStep);
+  connect(m_desk.undoStack(), &QUndoStack::cleanChanged, this, [this] { showTitle(); });
+  connect(m_given, &GivenPanel::entriesNotTaken, m_status, &StatusLine::setNotTaken);
+  connect(m_status, &StatusLine::notTakenClicked, m_given, &GivenPanel::focusNextProblem);
+  connect(m_status, &StatusLine::actionClicked, m_desk.undoStack(), &QUndoStack::undo);
+  connect(m_areas, &Areas::focusMoved, this, [this] { m_status->setKeys(m_areas->keys()); });
+  connect(&m_stateBar->figureButton(), &QPushButton::clicked, this, &MainWindow::arrangeFigure);
+  connect(m_filing, &Filing::fileChanged, this, &MainWindow::showFile);
+  connect(m_filing, &Filing::begun, m_given, &GivenPanel::focusFirst);
+  connect(m_filing, &Filing::refused, this, &MainWindow::showRefusal);
+}
+
+void MainWindow::restoreGeometryAndSizes() {
+  const QSettings settings;
+  if (!restoreGeometry(settings.value(QStringLiteral("geometry")).toByteArray()))
+    resize(1400, 900);
+  m_body->restore(settings);
+}
+
+bool MainWindow::open(const QString& path) {
+  return m_filing->open(path);
+}
+
+void MainWindow::openWorkedExample() {
+  m_filing->openUnnamed(workedExample());
+}
+
+void MainWindow::showFile(const QString& path) {
+  m_trouble->hide();
+  if (!path.isEmpty())
+    rememberFile(path);
+  showTitle();
+  if (m_figure)
+    m_figure->setStudyFile(path);
+  if (isWorkedExample(m_desk.study())) {
+    m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
+    m_welcome->offer(tr("New study"), [this] { m_filing->begin(); });
+    m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
+  } else if (m_desk.study() == newStudy()) {
+    m_welcome->say(tr("A new study: type the stresses of your point."));
+    m_welcome->offer(tr("Open the worked example"), [this] { openWorkedExample(); });
+    m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
+  } else {
+    m_welcome->hide();
+  }
+}
+
+void MainWindow::showTitle() {
+  setWindowTitle(tr("%1[*] – Planewright").arg(m_filing->name()));
+  setWindowModified(m_filing->hasChanges());
+}
+
+void MainWindow::showRefusal(const QString& path, const Problems& problems) {
+  const QString file = QFileInfo(path).fileName();
+  m_trouble->say(tr("%1: %2").arg(file, problems.empty() ? QString() : shown(problems.front())),
+                 Strip::Tone::wrong);
+  if (problems.size() > 1)
+    m_trouble->offer(tr("All %1 problems").arg(problems.size()), [this, file, problems] {
+      (new ProblemList(tr("Problems in %1").arg(file), problems, this))->show();
+    });
+}
+
+void MainWindow::tellStep(int index) {
+  QUndoStack& undo = *m_desk.undoStack();
+  if (index < m_toldStep) {
+    m_status->say(index == 0 && undo.count() == 0 ? QString() : tr("Undone: %1.").arg(undo.redoText()));
+  } else if (const Study* before = m_desk.beforeNewestStep()) {
+    const QString change = changeInWords(*before, m_desk.study());
+    m_status->say(change.isEmpty() ? tr("%1.").arg(undo.undoText()) : change + QLatin1Char('.'), tr("Undo"));
+  }
+  m_toldStep = index;
+}
+
+void MainWindow::settleDrafts() {
+  if (QWidget* focused = QApplication::focusWidget(); focused && isAncestorOf(focused)) {
+    focused->clearFocus();
+    focused->setFocus();
+  }
+}
+
+void MainWindow::arrangeFigure() {
+  settleDrafts();
+  if (!m_figure) {
+    m_figure = new FigureDialog(m_desk, this);
+    m_figure->setStudyFile(m_filing->path());
+  }
+  m_figure->show();
+  m_figure->raise();
+  m_figure->activateWindow();
+}
+
+HelpWindow& MainWindow::help() {
+  if (!m_help)
+    m_help = new HelpWindow(this);
+  return *m_help;
+}
+
+void MainWindow::helpOnFocus() {
+  const QWidget* area = m_areas->current();
+  help().showPage(area == m_given                         ? HelpPage::entries
+                  : area == m_element || area == m_circle ? HelpPage::conventions
+                                                          : HelpPage::keys);
+}
+
+bool MainWindow::event(QEvent* event) {
+  if (event->type() == QEvent::ThemeChange)
+    dressApplication();
+  return QMainWindow::event(event);
+}
+
+bool MainWindow::eventFilter(QObject* watched, QEvent* event) {
+  const QEvent::Type type = event->type();
+  if (type != QEvent::DragEnter && type != QEvent::DragMove && type != QEvent::Drop)
+    return QMainWindow::eventFilter(watched, event);
+  const auto* widget = qobject_cast<const QWidget*>(watched);
+  auto* drop = static_cast<QDropEvent*>(event);
+  if (!widget || widget->window() != this || draggedFile(*drop->mimeData()).isEmpty())
+    return QMainWindow::eventFilter(watched, event);
+  drop->acceptProposedAction();
+  if (type == QEvent::Drop)
+    open(draggedFile(*drop->mimeData()));
+  return true;
+}
+
+void MainWindow::closeEvent(QCloseEvent* event) {
+  settleDrafts();
+  if (!m_filing->mayLeave()) {
+    event->ignore();
+    return;
+  }
+  QSettings settings;
+  settings.setValue(QStringLiteral("geometry"), saveGeometry());
+  m_body->store(settings);
+  event->accept();
+}
+
+} // namespace planewright

@@ -1,0 +1,109 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+#include "ui/shell/filing.h"
+
+#include <QMainWindow>
+#include <QPointer>
+
+class QMenu;
+
+namespace planewright {
+
+class Areas;
+class Body;
+class CircleView;
+class ElementView;
+class FigureDialog;
+class GivenPanel;
+class HelpWindow;
+class PlanesPanel;
+class StateBar;
+class StatusLine;
+class Strip;
+class TitleDialog;
+
+/// The window: state bar, panels and status line over one desk. The only place where views, files and menus
+/// meet.
+class MainWindow : public QMainWindow {
+  Q_OBJECT
+
+public:
+  /// With the questions about files asked by dialogs, or by those given.
+  MainWindow();
+  explicit MainWindow(FileQuestions questions);
+  ~MainWindow() override;
+
+  /// Opens a study; false, with the reasons in the window, when it cannot be read.
+  bool open(const QString& path);
+
+  Desk& desk() { return m_desk; }
+  Filing& filing() { return *m_filing; }
+  StateBar& stateBar() const { return *m_stateBar; }
+  StatusLine& statusLine() const { return *m_status; }
+  Body& body() const { return *m_body; }
+  GivenPanel& given() const { return *m_given; }
+  ElementView& element() const { return *m_element; }
+  CircleView& circle() const { return *m_circle; }
+  PlanesPanel& planes() const { return *m_planes; }
+  /// The strip that greets, and the one that tells of files.
+  Strip& welcome() const { return *m_welcome; }
+  Strip& trouble() const { return *m_trouble; }
+
+public slots:
+  void arrangeFigure();
+  void openWorkedExample();
+
+protected:
+  bool event(QEvent* event) override;
+  bool eventFilter(QObject* watched, QEvent* event) override;
+  void closeEvent(QCloseEvent* event) override;
+
+private:
+  void build();
+  void connectViews();
+  void restoreGeometryAndSizes();
+
+  void addFileMenu();
+  void addEditMenu();
+  void addStudyMenu();
+  void addViewMenu();
+  void addAppearanceMenu(QMenu& menu);
+  void addHelpMenu();
+  template <class Act>
+  QAction* add(QMenu& menu, const QString& words, const QKeySequence& keys, Act act);
+  void listRecent();
+
+  void settleDrafts();
+  void showFile(const QString& path);
+  void showTitle();
+  void showRefusal(const QString& path, const Problems& problems);
+  void tellStep(int index);
+  void copyFromFocus();
+  void copyFigureNow();
+  void printFigureNow();
+  void helpOnFocus();
+  void showAbout();
+  HelpWindow& help();
+
+  Desk m_desk;
+  Filing* m_filing;
+  StateBar* m_stateBar;
+  Strip* m_welcome;
+  Strip* m_trouble;
+  GivenPanel* m_given;
+  ElementView* m_element;
+  CircleView* m_circle;
+  PlanesPanel* m_planes;
+  Body* m_body;
+  StatusLine* m_status;
+  Areas* m_areas;
+  QMenu* m_recent = nullptr;
+  int m_toldStep = 0; ///< where the undo stack stood when a step was last told
+  QPointer<FigureDialog> m_figure;
+  QPointer<HelpWindow> m_help;
+  QPointer<TitleDialog> m_title;
+};
+
+} // namespace planewright

@@ -1,0 +1,187 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/words/version.h"
+#include "ui/circle/circle_view.h"
+#include "ui/element/element_view.h"
+#include "ui/figure/figure_sharing.h"
+#include "ui/given/given_panel.h"
+#include "ui/look/look.h"
+#include "ui/shell/appearance.h"
+#include "ui/shell/areas.h"
+#include "ui/shell/body.h"
+#include "ui/shell/help_window.h"
+#include "ui/shell/main_window.h"
+#include "ui/shell/picker.h"
+#include "ui/shell/recent_files.h"
+#include "ui/shell/state_bar.h"
+#include "ui/shell/strip.h"
+#include "ui/shell/title_dialog.h"
+
+#include <QActionGroup>
+#include <QApplication>
+#include <QFileInfo>
+#include <QKeyEvent>
+#include <QMenuBar>
+#include <QMessageBox>
+
+namespace planewright {
+
+template <class Act>
+QAction* MainWindow::add(QMenu& menu, const QString& words, const QKeySequence& keys, Act act) {
+  QAction* action = menu.addAction(words, this, act);
+  action->setShortcut(keys);
+  return action;
+}
+
+void MainWindow::addFileMenu() {
+  QMenu& menu = *menuBar()->addMenu(tr("&File"));
+  add(menu, tr("&New"), QKeySequence::New, [this] {
+    settleDrafts();
+    m_filing->begin();
+  });
+  add(menu, tr("&Open…"), QKeySequence::Open, [this] {
+    settleDrafts();
+    m_filing->open();
+  });
+  m_recent = menu.addMenu(tr("Open &recent"));
+  connect(m_recent, &QMenu::aboutToShow, this, &MainWindow::listRecent);
+  listRecent();
+  menu.addSeparator();
+  add(menu, tr("&Save"), QKeySequence::Save, [this] {
+    settleDrafts();
+    m_filing->save();
+  });
+  add(menu, tr("Save &as…"), Qt::CTRL | Qt::SHIFT | Qt::Key_S, [this] {
+    settleDrafts();
+    m_filing->saveAs();
+  });
+  menu.addSeparator();
+  add(menu, tr("&Export figure…"), Qt::CTRL | Qt::Key_E, [this] { arrangeFigure(); });
+  add(menu, tr("&Copy figure"), {}, [this] { copyFigureNow(); });
+  add(menu, tr("&Print figure…"), QKeySequence::Print, [this] { printFigureNow(); });
+  menu.addSeparator();
+  add(menu, tr("&Quit"), QKeySequence(Qt::CTRL | Qt::Key_Q), [this] { close(); });
+}
+
+void MainWindow::listRecent() {
+  m_recent->clear();
+  for (const QString& file : recentFiles())
+    m_recent->addAction(QFileInfo(file).fileName(), this, [this, file] { open(file); })->setToolTip(file);
+  m_recent->setToolTipsVisible(true);
+  m_recent->setEnabled(!m_recent->isEmpty());
+}
+
+void MainWindow::addEditMenu() {
+  QMenu& menu = *menuBar()->addMenu(tr("&Edit"));
+  QAction* undo = m_desk.undoStack()->createUndoAction(this, tr("&Undo"));
+  undo->setShortcut(QKeySequence::Undo);
+  QAction* redo = m_desk.undoStack()->createRedoAction(this, tr("&Redo"));
+  redo->setShortcut(QKeySequence::Redo);
+  menu.addAction(undo);
+  menu.addAction(redo);
+  menu.addSeparator();
+  add(menu, tr("&Copy"), QKeySequence::Copy, [this] { copyFromFocus(); });
+}
+
+void MainWindow::addStudyMenu() {
+  QMenu& menu = *menuBar()->addMenu(tr("&Study"));
+  add(menu, tr("&Title block…"), {}, [this] {
+    if (!m_title)
+      m_title = new TitleDialog(m_desk, this);
+    m_title->show();
+    m_title->raise();
+  });
+  add(menu, tr("&Stresses"), {}, [this] { m_given->focusFirst(); });
+  add(menu, tr("&Units and conventions"), {}, [this] { m_given->focusConventions(); });
+  menu.addSeparator();
+  add(menu, tr("&Next entry not taken"), Qt::Key_F8, [this] { m_given->focusNextProblem(); });
+  add(menu, tr("&Previous entry not taken"), Qt::SHIFT | Qt::Key_F8,
+      [this] { m_given->focusPreviousProblem(); });
+  menu.addSeparator();
+  Picker* points = &m_stateBar->points();
+  Picker* combinations = &m_stateBar->combinations();
+  add(menu, tr("Previous point"), Qt::CTRL | Qt::Key_PageUp, [points] { points->previous(); });
+  add(menu, tr("Next point"), Qt::CTRL | Qt::Key_PageDown, [points] { points->next(); });
+  add(menu, tr("Previous combination"), Qt::ALT | Qt::Key_PageUp,
+      [combinations] { combinations->previous(); });
+  add(menu, tr("Next combination"), Qt::ALT | Qt::Key_PageDown, [combinations] { combinations->next(); });
+}
+
+void MainWindow::addViewMenu() {
+  QMenu& menu = *menuBar()->addMenu(tr("&View"));
+  add(menu, tr("Show &given arrows"), {}, [this](bool shown) {
+    m_element->setShowGivenArrows(shown);
+  })->setCheckable(true);
+  QAction* snapping =
+      add(menu, tr("&Snap to named directions"), {}, [this](bool on) { m_element->setSnapping(on); });
+  snapping->setCheckable(true);
+  snapping->setChecked(m_element->snaps());
+  add(menu, tr("&Fit the circle"), Qt::CTRL | Qt::Key_0, [this] { m_circle->fit(); });
+  menu.addSeparator();
+  add(menu, tr("Next area"), Qt::Key_F6, [this] { m_areas->next(); });
+  add(menu, tr("Previous area"), Qt::SHIFT | Qt::Key_F6, [this] { m_areas->previous(); });
+  add(menu, tr("&Usual sizes of the panels"), {}, [this] { m_body->resetSizes(); });
+  menu.addSeparator();
+  addAppearanceMenu(*menu.addMenu(tr("&Appearance")));
+  QAction* full = add(menu, tr("F&ull screen"), Qt::Key_F11,
+                      [this](bool on) { setWindowState(windowState().setFlag(Qt::WindowFullScreen, on)); });
+  full->setCheckable(true);
+}
+
+void MainWindow::addAppearanceMenu(QMenu& menu) {
+  auto* group = new QActionGroup(this);
+  for (const auto& [appearance, words] : {std::pair{Appearance::system, tr("As the &system")},
+                                          {Appearance::light, tr("&Light")},
+                                          {Appearance::dark, tr("&Dark")}}) {
+    QAction* action =
+        menu.addAction(words, this, [appearance = appearance] { chooseAppearance(appearance); });
+    action->setCheckable(true);
+    action->setChecked(appearance == chosenAppearance());
+    group->addAction(action);
+  }
+}
+
+void MainWindow::addHelpMenu() {
+  QMenu& menu = *menuBar()->addMenu(tr("&Help"));
+  add(menu, tr("&Help on this area"), QKeySequence::HelpContents, [this] { helpOnFocus(); });
+  menu.addSeparator();
+  for (int i = 0; i < helpPageCount; ++i) {
+    const auto page = static_cast<HelpPage>(i);
+    menu.addAction(titleOf(page), this, [this, page] { help().showPage(page); });
+  }
+  menu.addSeparator();
+  menu.addAction(tr("&Worked example"), this, &MainWindow::openWorkedExample);
+  menu.addAction(tr("&About Planewright"), this, &MainWindow::showAbout);
+}
+
+void MainWindow::copyFromFocus() {
+  QWidget* focused = QApplication::focusWidget();
+  if (!focused)
+    return;
+  QKeyEvent copy(QEvent::KeyPress, Qt::Key_C, Qt::ControlModifier);
+  QApplication::sendEvent(focused, &copy);
+}
+
+void MainWindow::copyFigureNow() {
+  settleDrafts();
+  const Result<void> copied = copyFigure(m_desk, m_filing->path());
+  m_desk.say(copied ? tr("The figure is on the clipboard.") : shown(copied.error()));
+}
+
+void MainWindow::printFigureNow() {
+  settleDrafts();
+  if (const Result<void> printed = printFigure(m_desk, m_filing->path(), this); !printed)
+    m_trouble->say(shown(printed.error()), Strip::Tone::wrong);
+}
+
+void MainWindow::showAbout() {
+  QMessageBox::about(
+      this, tr("About Planewright"),
+      tr("<h3>Planewright %1</h3>"
+         "<p>Plane stress at a point, resolved to the line that matters.</p>"
+         "<p>An aid to a licensed engineer; the code that governs locally decides.</p>"
+         "<p>Free software under the GNU General Public License, version 3 or later; there is no "
+         "warranty. Built with Qt. Set in Liberation Sans, under the SIL Open Font License 1.1.</p>")
+          .arg(fromUtf8(std::string(programVersion()))));
+}
+
+} // namespace planewright

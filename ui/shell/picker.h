@@ -1,0 +1,51 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include <QStringList>
+#include <QWidget>
+
+class QLabel;
+class QPushButton;
+class QToolButton;
+
+namespace planewright {
+
+class FilterList;
+
+/// "Point [P1 chord notch] < > 3 of 24": says which of several things is shown and lets another be taken.
+class Picker : public QWidget {
+  Q_OBJECT
+
+public:
+  Picker(const QString& caption, const QString& keys, QWidget* parent);
+
+  void show(const QStringList& names, qsizetype current);
+  /// The width of the button that carries the name.
+  void setNameWidth(int width);
+  /// Opens the list of names.
+  FilterList* openList();
+
+public slots:
+  void previous() { step(-1); }
+  void next() { step(1); }
+
+signals:
+  void chosen(const QString& name);
+
+protected:
+  void resizeEvent(QResizeEvent* event) override;
+
+private:
+  void build(const QString& caption, const QString& keys);
+  void step(int by);
+  void writeName();
+
+  QPushButton* m_name;
+  QToolButton* m_previous;
+  QToolButton* m_next;
+  QLabel* m_count;
+  QStringList m_names; ///< what the buttons offer; the study has them
+  qsizetype m_current = 0;
+};
+
+} // namespace planewright

@@ -1,0 +1,55 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/state_bar.h"
+
+#include "ui/look/look.h"
+#include "ui/shell/picker.h"
+
+#include <QHBoxLayout>
+#include <QPushButton>
+
+namespace planewright {
+
+StateBar::StateBar(Desk& desk, QWidget* parent)
+    : QWidget(parent), m_desk(desk), m_points(new Picker(tr("Point"), tr("Ctrl"), this)),
+      m_combinations(new Picker(tr("Combination"), tr("Alt"), this)),
+      m_figure(new QPushButton(tr("Figure…"), this)) {
+  auto* row = new QHBoxLayout(this);
+  row->setContentsMargins(12, 0, 12, 0);
+  row->setSpacing(20);
+  row->addWidget(m_points);
+  row->addWidget(m_combinations);
+  row->addStretch();
+  row->addWidget(m_figure);
+  setFixedHeight(barHeight);
+  setAutoFillBackground(true);
+  setBackgroundRole(QPalette::AlternateBase);
+  setAccessibleName(tr("What is shown"));
+  setProperty("areaKeys", tr("Ctrl+PageUp/PageDown point, Alt+PageUp/PageDown combination"));
+  connect(m_points, &Picker::chosen, this,
+          [this](const QString& name) { m_desk.show(name.toStdString(), m_desk.study().shown.combination); });
+  connect(m_combinations, &Picker::chosen, this,
+          [this](const QString& name) { m_desk.show(m_desk.study().shown.point, name.toStdString()); });
+  connect(&m_desk, &Desk::changed, this, &StateBar::refresh);
+  refresh();
+}
+
+void StateBar::refresh() {
+  QStringList points;
+  for (const Point& point : m_desk.study().points)
+    points << fromUtf8(point.name);
+  m_points->show(points, points.indexOf(fromUtf8(shownPoint(m_desk.study()).name)));
+  QStringList states;
+  for (const StateReading& state : m_desk.readout().states)
+    states << fromUtf8(state.combination);
+  m_combinations->show(states, static_cast<qsizetype>(m_desk.readout().shown));
+}
+
+void StateBar::resizeEvent(QResizeEvent* event) {
+  QWidget::resizeEvent(event);
+  constexpr int roomy = 1100;
+  const int name = width() < roomy ? 128 : 200;
+  m_points->setNameWidth(name);
+  m_combinations->setNameWidth(name);
+}
+
+} // namespace planewright

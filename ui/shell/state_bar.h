@@ -1,0 +1,39 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+
+#include <QWidget>
+
+class QPushButton;
+
+namespace planewright {
+
+class Picker;
+
+/// Says what one looks at: point and combination; and leads to the figure.
+class StateBar : public QWidget {
+  Q_OBJECT
+
+public:
+  static constexpr int barHeight = 40;
+
+  StateBar(Desk& desk, QWidget* parent);
+
+  Picker& points() const { return *m_points; }
+  Picker& combinations() const { return *m_combinations; }
+  QPushButton& figureButton() const { return *m_figure; }
+
+protected:
+  void resizeEvent(QResizeEvent* event) override;
+
+private:
+  void refresh();
+
+  Desk& m_desk;
+  Picker* m_points;
+  Picker* m_combinations;
+  QPushButton* m_figure;
+};
+
+} // namespace planewright

@@ -1,0 +1,45 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/title_dialog.h"
+
+#include "ui/entry/draft_edit.h"
+#include "ui/entry/entry_field.h"
+#include "ui/look/look.h"
+
+#include <QDialogButtonBox>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+namespace {
+
+/// The name is the point's key: typing another renames it and what refers to it.
+EntryBinding nameOfPoint() {
+  const auto place = [](const Study& study) { return Place{Spot::point, shownPoint(study).name, {}}; };
+  return {[place](const Study& study) { return pathOf(place(study)); },
+          [](const Study& study) { return shownPoint(study).name; },
+          [place](const Study& study, const std::string& typed) -> Result<Edits> {
+            return Edits{Rename{place(study), typed}};
+          },
+          {}};
+}
+
+} // namespace
+
+TitleDialog::TitleDialog(Desk& desk, QWidget* parent) : QDialog(parent) {
+  setWindowTitle(tr("Title block"));
+  resize(520, 10);
+  auto* rows = new QVBoxLayout(this);
+  rows->addWidget(new EntryField(desk, nameOfPoint(),
+                                 {PW_TEXT("TitleDialog", "point"), tr("name of the shown point")}, this));
+  for (const Spot spot : {Spot::titleProject, Spot::titleSubject, Spot::titleNumber, Spot::titleRevision,
+                          Spot::titlePrepared, Spot::titleChecked, Spot::titleDate, Spot::titleNotes})
+    rows->addWidget(new EntryField(desk, boundTo([spot](const Study&) {
+                                     return Place{spot, {}, {}};
+                                   }),
+                                   {rowOf(spot).label, shown(rowOf(spot).label)}, this));
+  auto* buttons = new QDialogButtonBox(QDialogButtonBox::Close, this);
+  connect(buttons, &QDialogButtonBox::rejected, this, &QDialog::close);
+  rows->addWidget(buttons);
+}
+
+} // namespace planewright
