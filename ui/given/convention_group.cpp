@@ -6,7 +6,7 @@
 #include "ui/look/look.h"
 
 #include <QButtonGroup>
-#include <QHBoxLayout>
+#include <QGridLayout>
 #include <QLabel>
 #include <QVBoxLayout>
 
@@ -26,6 +26,16 @@ ChoiceButton::Picture pictureOf(ShearAxis axis) {
   };
 }
 
+/// The labels as they fit under a picture and beside a folded heading.
+Text shortLabel(Positive positive) {
+  return positive == Positive::tension ? PW_TEXT("Given", "tension +") : PW_TEXT("Given", "compression +");
+}
+
+Text shortLabel(ShearAxis axis) {
+  return axis == ShearAxis::tensorDown ? PW_TEXT("Given", "τ drawn + down")
+                                       : PW_TEXT("Given", "τ drawn + up");
+}
+
 void check(const QList<ChoiceButton*>& buttons, int which) {
   buttons.at(which)->setChecked(true);
 }
@@ -34,8 +44,11 @@ void check(const QList<ChoiceButton*>& buttons, int which) {
 
 ConventionGroup::ConventionGroup(Desk& desk, QWidget* parent)
     : FoldGroup(tr("Conventions"), Role::ink, parent), m_desk(desk) {
-  addChoices<Positive>(m_positive);
-  addChoices<ShearAxis>(m_shearAxis);
+  auto* grid = new QGridLayout;
+  grid->setSpacing(6);
+  addChoices<Positive>(*grid, m_positive);
+  addChoices<ShearAxis>(*grid, m_shearAxis);
+  body().addLayout(grid);
   addUnits();
   setFolded(true);
   connect(&m_desk, &Desk::changed, this, &ConventionGroup::refresh);
@@ -43,18 +56,17 @@ ConventionGroup::ConventionGroup(Desk& desk, QWidget* parent)
 }
 
 template <class Enum>
-void ConventionGroup::addChoices(QList<ChoiceButton*>& buttons) {
-  auto* line = new QHBoxLayout;
-  line->setSpacing(6);
+void ConventionGroup::addChoices(QGridLayout& grid, QList<ChoiceButton*>& buttons) {
+  const int row = grid.count() / 2;
   auto* group = new QButtonGroup(this);
-  for (const Named<Enum>& row : namesOf<Enum>()) {
-    auto* button = new ChoiceButton(pictureOf(row.value), row.label, this);
-    connect(button, &QAbstractButton::clicked, this, [this, value = row.value] { choose(value); });
+  for (const Named<Enum>& choice : namesOf<Enum>()) {
+    auto* button = new ChoiceButton(pictureOf(choice.value), shortLabel(choice.value), this);
+    button->setAccessibleName(shown(choice.label));
+    connect(button, &QAbstractButton::clicked, this, [this, value = choice.value] { choose(value); });
     group->addButton(button);
-    line->addWidget(button);
+    grid.addWidget(button, row, static_cast<int>(buttons.size()));
     buttons += button;
   }
-  body().addLayout(line);
 }
 
 void ConventionGroup::addUnits() {
@@ -100,9 +112,8 @@ void ConventionGroup::refresh() {
   const Convention& convention = m_desk.study().convention;
   check(m_positive, static_cast<int>(convention.positive));
   check(m_shearAxis, static_cast<int>(convention.shearAxis));
-  setSummary(tr("%1, %2").arg(
-      convention.positive == Positive::tension ? tr("tension +") : tr("compression +"),
-      convention.shearAxis == ShearAxis::tensorDown ? tr("τ drawn + down") : tr("τ drawn + up")));
+  setSummary(
+      tr("%1, %2").arg(shown(shortLabel(convention.positive)), shown(shortLabel(convention.shearAxis))));
 }
 
 } // namespace planewright

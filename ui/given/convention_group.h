@@ -5,6 +5,8 @@
 #include "ui/entry/entry_field.h"
 #include "ui/given/fold_group.h"
 
+class QGridLayout;
+
 namespace planewright {
 
 class ChoiceButton;
@@ -21,7 +23,7 @@ public:
 
 private:
   template <class Enum>
-  void addChoices(QList<ChoiceButton*>& buttons);
+  void addChoices(QGridLayout& grid, QList<ChoiceButton*>& buttons);
   void addUnits();
   void choose(Positive positive);
   void choose(ShearAxis axis);

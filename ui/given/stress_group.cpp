@@ -134,24 +134,25 @@ void StressGroup::refresh() {
 
 // Only where the shown state is not just the case that is typed here.
 QString StressGroup::sumLine() const {
-  const Study& study = m_desk.study();
   const StateReading& state = m_desk.readout().state();
-  if (&state == stateOfCase(m_desk.readout(), caseId(study)))
+  if (&state == stateOfCase(m_desk.readout(), caseId(m_desk.study())))
     return {};
-  const auto one = [&](double stress) { return fromUtf8(shownStress(study, state, stress)); };
-  return tr("in %1: %2   %3   %4")
-      .arg(fromUtf8(state.combination), one(state.stress.sx), one(state.stress.sy), one(state.stress.txy));
+  return tr("in %1: %2").arg(fromUtf8(state.combination), componentsOf(state));
 }
 
 QString StressGroup::summary() const {
+  const StateReading* state = stateOfCase(m_desk.readout(), caseId(m_desk.study()));
+  return state ? componentsOf(*state) : QString();
+}
+
+// The three numbers and their unit stay on one line.
+QString StressGroup::componentsOf(const StateReading& state) const {
   const Study& study = m_desk.study();
-  const StateReading* state = stateOfCase(m_desk.readout(), caseId(study));
-  if (!state)
-    return {};
-  const auto one = [&](double stress) { return fromUtf8(shownStress(study, *state, stress)); };
-  return tr("%1   %2   %3 %4")
-      .arg(one(state->stress.sx), one(state->stress.sy), one(state->stress.txy),
-           fromUtf8(study.units.stress));
+  const auto one = [&](double stress) { return fromUtf8(shownStress(study, state, stress)); };
+  const QString words = tr("%1   %2   %3 %4")
+                            .arg(one(state.stress.sx), one(state.stress.sy), one(state.stress.txy),
+                                 fromUtf8(study.units.stress));
+  return QString(words).replace(QLatin1Char(' '), QChar(QChar::Nbsp));
 }
 
 } // namespace planewright

@@ -36,6 +36,7 @@ private:
   void refresh();
   QString sumLine() const;
   QString summary() const;
+  QString componentsOf(const StateReading& state) const;
 
   Desk& m_desk;
   std::string m_case; ///< as chosen in the strip; the first where the study has it no more

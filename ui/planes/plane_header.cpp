@@ -25,7 +25,6 @@ PlaneHeader::PlaneHeader(QWidget* parent) : QHeaderView(Qt::Horizontal, parent) 
   setSectionsClickable(false);
   setHighlightSections(false);
   setMinimumSectionSize(20);
-  viewport()->setBackgroundRole(QPalette::AlternateBase);
 }
 
 int PlaneHeader::headingWidth(int section) const {
@@ -35,6 +34,13 @@ int PlaneHeader::headingWidth(int section) const {
 
 QSize PlaneHeader::sizeHint() const {
   return {100, fontMetrics().height() + 8};
+}
+
+// The style would paint the room beside the last heading in the colour of buttons.
+void PlaneHeader::paintEvent(QPaintEvent* event) {
+  QHeaderView::paintEvent(event);
+  QPainter painter(viewport());
+  painter.fillRect(viewport()->rect().adjusted(length(), 0, 0, 0), lookOf(*this).colour(Role::canvas));
 }
 
 void PlaneHeader::paintSection(QPainter* painter, const QRect& rect, int section) const {

@@ -16,6 +16,7 @@ public:
   QSize sizeHint() const override;
 
 protected:
+  void paintEvent(QPaintEvent* event) override;
   void paintSection(QPainter* painter, const QRect& rect, int section) const override;
 };
 
