@@ -36,6 +36,10 @@ Body::Body(const Panels& panels, QWidget* parent)
   m_rows->addWidget(panels.planes);
   m_columns->addWidget(panels.given);
   m_columns->addWidget(m_rows);
+  for (QSplitter* one : splitters()) {
+    one->handle(1)->setAutoFillBackground(true);
+    one->handle(1)->setBackgroundRole(QPalette::Mid);
+  }
   m_columns->setStretchFactor(0, 0);
   m_columns->setStretchFactor(1, 1);
   m_rows->setStretchFactor(0, 65);
@@ -49,7 +53,6 @@ QSplitter* Body::splitter(Qt::Orientation orientation, const QString& name) {
   made->setObjectName(name);
   made->setChildrenCollapsible(false);
   made->setHandleWidth(1);
-  made->setStyleSheet(QStringLiteral("QSplitter::handle { background: palette(mid); }"));
   connect(made, &QSplitter::splitterMoved, this, [this] { m_ownSizes = true; });
   return made;
 }

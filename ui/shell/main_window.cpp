@@ -122,6 +122,7 @@ void MainWindow::showFile(const QString& path) {
   m_trouble->hide();
   if (!path.isEmpty())
     rememberFile(path);
+  listRecent();
   showTitle();
   if (m_figure)
     m_figure->setStudyFile(path);

@@ -18,10 +18,13 @@
 #include <QDropEvent>
 #include <QFile>
 #include <QLineEdit>
+#include <QMenu>
 #include <QMimeData>
 #include <QPushButton>
 #include <QSplitter>
 #include <QTest>
+
+#include <algorithm>
 
 namespace planewright {
 namespace {
@@ -86,6 +89,11 @@ TEST_F(WindowTest, opensAStudyAndRemembersIt) {
   EXPECT_FALSE(window.isWindowModified());
   EXPECT_FALSE(window.welcome().isVisible());
   EXPECT_EQ(recentFiles(), QStringList{path});
+  const QList<QMenu*> menus = window.findChildren<QMenu*>();
+  EXPECT_TRUE(std::ranges::any_of(menus, [](const QMenu* menu) {
+    return menu->isEnabled() && menu->actions().size() == 1 &&
+           menu->actions().front()->text() == "beam.planewright";
+  }));
   type(window.desk(), Spot::sx, "8 MPa");
   EXPECT_TRUE(window.isWindowModified());
   window.desk().undoStack()->undo();
