@@ -89,7 +89,7 @@ bool CirclePlot::viewportEvent(QEvent* event) {
     return true;
   }
   if (event->type() == QEvent::Leave)
-    hover({-1e6, -1e6});
+    hoverNothing();
   return EqualScaleFrame::viewportEvent(event);
 }
 
@@ -159,17 +159,27 @@ void CirclePlot::cancelDrag() {
 void CirclePlot::hover(QPointF pixel) {
   const std::optional<Handle> handle = handleUnder(pixel);
   const StateReading* other = handle ? nullptr : nearestOther(stage(), pixel, hoverReach);
+  viewport()->setCursor(handle ? Qt::OpenHandCursor : other ? Qt::PointingHandCursor : Qt::ArrowCursor);
+  highlight(other);
+}
+
+void CirclePlot::hoverNothing() {
+  if (!m_hovered.isEmpty())
+    highlight(nullptr);
+}
+
+/// Draws the circle of the state under the pointer, and names it in the status line.
+void CirclePlot::highlight(const StateReading* other) {
+  const QString name = other ? fromUtf8(other->combination) : QString();
+  if (name == m_hovered)
+    return;
+  m_hovered = name;
   QPainterPath near;
   if (other) {
     const Round round = stage().roundOf(*other);
     near.addEllipse(round.centre, round.radius, round.radius);
   }
   m_near->setPath(near);
-  viewport()->setCursor(handle ? Qt::OpenHandCursor : other ? Qt::PointingHandCursor : Qt::ArrowCursor);
-  const QString name = other ? fromUtf8(other->combination) : QString();
-  if (name == m_hovered)
-    return;
-  m_hovered = name;
   QStatusTipEvent tip(name);
   QCoreApplication::sendEvent(this, &tip);
 }

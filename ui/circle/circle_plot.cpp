@@ -96,6 +96,7 @@ void CirclePlot::rest() {
 void CirclePlot::arrange() {
   const Stage now = stage();
   m_plotClip->setRect(now.scale.plot());
+  hoverNothing(); // what was under the pointer may be elsewhere now
   arrangeCircle();
   arrangeOthers();
   arrangeLabels();

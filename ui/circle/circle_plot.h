@@ -74,6 +74,8 @@ private:
   void endDrag();
   void cancelDrag();
   void hover(QPointF pixel);
+  void hoverNothing();
+  void highlight(const StateReading* other);
   void take(Handle handle);
   bool turnByKey(const QKeyEvent& event);
   bool moveEarByKey(const QKeyEvent& event);

@@ -85,6 +85,8 @@ TEST(Others, TheCombinationUnderThePointerIsNamed) {
   const QPointF at = round.at(Angle::fromDegrees(200), round.radius);
   QTest::mouseMove(panel.plot.viewport(), at.toPoint());
   EXPECT_EQ(panel.plot.tipAt(at), "k0");
+  panel.desk.show("P1", "k0");
+  EXPECT_EQ(panel.plot.tipAt(at), "") << "it is the shown one now";
 }
 
 TEST(Words, NameTheUnitAndTheEndsOfTheAxis) {
