@@ -41,7 +41,9 @@ Picture pictureOf(bool turned) {
   order.hair = 0.8;
   order.textSize = 14;
   order.translate = translation();
-  Picture picture{double(size.width()), double(size.height()), {}, {}, {}};
+  Picture picture;
+  picture.width = size.width();
+  picture.height = size.height();
   const std::vector<LabelWish> wishes = drawElement(picture, study, readout, order);
   const LabelColumns columns{order.centre.x, 58, size.width() - 58.0, 4, size.height() - 4.0, 13, 0.8};
   std::vector<LabelWish> symbols = wishes;
