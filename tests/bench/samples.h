@@ -19,8 +19,10 @@ public:
   void time(Work work) {
     const double start = now();
     work();
-    m_times.push_back(now() - start);
+    add(now() - start);
   }
+
+  void add(double time) { m_times.push_back(time); }
 
   const std::string& name() const { return m_name; }
   double median() const { return at(0.5); }
