@@ -56,7 +56,9 @@ void DraftEdit::selectPiece(const std::string& quoted, int column) {
 bool DraftEdit::event(QEvent* event) {
   if (event->type() == QEvent::ShortcutOverride) {
     auto* key = static_cast<QKeyEvent*>(event);
-    if ((key->matches(QKeySequence::Undo) && !isUndoAvailable()) ||
+    // On some platforms Ctrl+E means the end of the line; here it is the figure, from every field.
+    const bool figure = key->key() == Qt::Key_E && key->modifiers() == Qt::ControlModifier;
+    if (figure || (key->matches(QKeySequence::Undo) && !isUndoAvailable()) ||
         (key->matches(QKeySequence::Redo) && !isRedoAvailable())) {
       event->ignore();
       return false;

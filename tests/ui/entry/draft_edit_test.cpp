@@ -40,6 +40,15 @@ bool takesUndo(DraftEdit& edit) {
   return key.isAccepted();
 }
 
+TEST(DraftEdit, leavesTheKeyOfTheFigureToTheWindow) {
+  DraftEdit edit;
+  edit.setText("5 MPa");
+  QKeyEvent key(QEvent::ShortcutOverride, Qt::Key_E, Qt::ControlModifier);
+  key.ignore();
+  QCoreApplication::sendEvent(&edit, &key);
+  EXPECT_FALSE(key.isAccepted());
+}
+
 TEST(DraftEdit, undoGoesOnToTheStudyWhenNothingIsTyped) {
   DraftEdit edit;
   edit.setText("5 MPa");
