@@ -20,9 +20,10 @@ ElementView::ElementView(Desk& desk, QWidget* parent) : QWidget(parent), m_desk(
   setFocusPolicy(Qt::StrongFocus);
   setMouseTracking(true);
   setAttribute(Qt::WA_OpaquePaintEvent);
+  // Before anything asks for the view's interface, which Qt keeps from then on.
+  installElementAccessibility();
   setAccessibleName(tr("Element"));
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
-  installElementAccessibility();
   connect(&m_desk, &Desk::changed, this, &ElementView::follow);
 }
 
