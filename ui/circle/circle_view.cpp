@@ -3,14 +3,13 @@
 
 #include "ui/circle/circle_access.h"
 #include "ui/circle/circle_plot.h"
-#include "ui/look/font.h"
+#include "ui/look/quiet_button.h"
 
 #include <QActionGroup>
 #include <QHBoxLayout>
 #include <QLabel>
 #include <QMenu>
 #include <QPainter>
-#include <QPushButton>
 #include <QVBoxLayout>
 
 namespace planewright {
@@ -28,7 +27,8 @@ QLabel* newHeading(const QString& words, QWidget* parent) {
 } // namespace
 
 CircleView::CircleView(Desk& desk, QWidget* parent)
-    : QWidget(parent), m_plot(new CirclePlot(desk, this)), m_menu(new QPushButton(this)) {
+    : QWidget(parent), m_plot(new CirclePlot(desk, this)),
+      m_menu(new QuietButton(QString(), Role::soft, this)) {
   auto* menu = new QMenu(m_menu);
   auto* group = new QActionGroup(menu);
   m_this = group->addAction(tr("This circle"));
@@ -42,8 +42,6 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
     showFit();
   });
   m_menu->setMenu(menu);
-  m_menu->setFlat(true);
-  m_menu->setFont(programFont(circle_size::text));
   m_menu->setFocusPolicy(Qt::TabFocus);
 
   auto* row = new QHBoxLayout;

@@ -4,12 +4,12 @@
 #include <QWidget>
 
 class QAction;
-class QPushButton;
 
 namespace planewright {
 
 class CirclePlot;
 class Desk;
+class QuietButton;
 
 /// The panel of the circle: heading, the menu of what the axes are fitted to, and the plot.
 class CircleView : public QWidget {
@@ -35,7 +35,7 @@ private:
   void showFit();
 
   CirclePlot* m_plot;
-  QPushButton* m_menu;
+  QuietButton* m_menu;
   QAction* m_this;
   QAction* m_all;
 };

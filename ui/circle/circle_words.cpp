@@ -97,7 +97,10 @@ void drawSense(Picture& picture, Vec centre, bool positive) {
 void drawSenses(Picture& picture, const Stage& stage) {
   const QRectF& plot = stage.scale.plot();
   const bool down = stage.scale.yDown();
-  const double x = plot.right() - 14;
+  constexpr double room = 16;
+  const double axis = stage.scale.pixelOf({0, 0}).x();
+  const bool meetsAxis = axis > plot.right() - 2 * room - 2 && axis < plot.right() + room;
+  const double x = (meetsAxis ? axis - 4 : plot.right() + 2) - room;
   drawSense(picture, {x, plot.top() + 13}, !down);
   drawSense(picture, {x, plot.bottom() - 13}, down);
 }

@@ -129,6 +129,14 @@ void GivenPanel::focusFirst() {
   first.selectAll();
 }
 
+void GivenPanel::focusReading() {
+  m_reading->setFolded(false);
+  DraftEdit& normal = m_reading->fields().front()->edit();
+  normal.setFocus(Qt::OtherFocusReason);
+  normal.selectAll();
+  ensureWidgetVisible(m_reading);
+}
+
 void GivenPanel::focusConventions() {
   m_conventions->setFolded(false);
   m_conventions->buttons().front()->setFocus(Qt::OtherFocusReason);

@@ -31,6 +31,8 @@ public:
 public slots:
   /// Puts the cursor into the first component, its text selected.
   void focusFirst();
+  /// Puts the cursor into the angle of the reading plane's normal, its text selected.
+  void focusReading();
   /// Opens the group of conventions and units and puts the cursor into it.
   void focusConventions();
   /// To the next or previous entry that is not taken, round the end.

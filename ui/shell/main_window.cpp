@@ -94,6 +94,7 @@ void MainWindow::connectViews() {
   connect(m_desk.undoStack(), &QUndoStack::indexChanged, this, &MainWindow::tellStep);
   connect(m_desk.undoStack(), &QUndoStack::cleanChanged, this, [this] { showTitle(); });
   connect(m_given, &GivenPanel::entriesNotTaken, m_status, &StatusLine::setNotTaken);
+  connect(m_circle, &CircleView::angleEntryWanted, m_given, &GivenPanel::focusReading);
   connect(m_status, &StatusLine::notTakenClicked, m_given, &GivenPanel::focusNextProblem);
   connect(m_status, &StatusLine::actionClicked, m_desk.undoStack(), &QUndoStack::undo);
   connect(m_areas, &Areas::focusMoved, this, [this] { m_status->setKeys(m_areas->keys()); });

@@ -57,6 +57,15 @@ protected:
   std::unique_ptr<MainWindow> m_window;
 };
 
+TEST_F(WindowTest, enterOnTheCircleTypesTheAngleOfTheReadingPlane) {
+  MainWindow& window = shown();
+  window.circle().setFocus();
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_Return);
+  QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("33"));
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_Return);
+  EXPECT_DOUBLE_EQ(window.desk().readout().reading.value.degrees(), 33);
+}
+
 TEST_F(WindowTest, startsWithANewStudyAndTheCursorInItsFirstComponent) {
   MainWindow& window = shown();
   EXPECT_EQ(window.desk().study(), newStudy());
