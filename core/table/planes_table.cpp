@@ -77,8 +77,19 @@ Cell angleCell(Angle angle) {
   return {verbatim(shownDegrees(angle, angleDecimals)), angle.degrees()};
 }
 
-Cell stressCell(const Study& study, const StateReading& state, double stress) {
-  return {verbatim(shownStress(study, state, stress)), inStressUnit(study, stress)};
+/// Stresses of one state as they are shown, the unit read once for all of them.
+struct StressColumn {
+  Unit unit;
+  int decimals;
+
+  Cell cell(double stress) const {
+    const double exact = unit.fromBase(stress);
+    return {verbatim(shownNumber(exact, decimals)), exact};
+  }
+};
+
+StressColumn stressColumn(const Study& study, const StateReading& state) {
+  return {stressUnit(study), stressDecimals(study, state)};
 }
 
 /// A degenerate state has no angle of its own for these planes: every direction is one.
@@ -92,12 +103,12 @@ void addAngles(Row& row, const PlaneReading& plane) {
   }
 }
 
-Row rowOfPlane(const Study& study, const StateReading& state, const PlaneReading& plane, Text name) {
+Row rowOfPlane(const StressColumn& stresses, const PlaneReading& plane, Text name) {
   Row row{plane.kind, plane.name, groupOf(plane.kind), {}};
   row.cells.push_back({std::move(name), std::nullopt});
   addAngles(row, plane);
-  row.cells.push_back(stressCell(study, state, plane.traction.sn));
-  row.cells.push_back(stressCell(study, state, plane.traction.tnt));
+  row.cells.push_back(stresses.cell(plane.traction.sn));
+  row.cells.push_back(stresses.cell(plane.traction.tnt));
   return row;
 }
 
@@ -121,21 +132,23 @@ std::string shownStress(const Study& study, const StateReading& state, double st
 
 Table planesTable(const Study& study, const Readout& readout, const StateReading& state) {
   Table table{columnsOf(study), {}};
+  const StressColumn stresses = stressColumn(study, state);
   for (const PlaneReading& plane : planesOf(readout, state))
-    table.rows.push_back(rowOfPlane(study, state, plane, nameOf(plane)));
+    table.rows.push_back(rowOfPlane(stresses, plane, nameOf(plane)));
   return table;
 }
 
 Table sweepTable(const Study& study, const StateReading& state, Angle step) {
   assert(step.degrees() >= 0.1 && step.degrees() <= 90);
   Table table{columnsOf(study), {}};
+  const StressColumn stresses = stressColumn(study, state);
   const int most = static_cast<int>(std::floor(90 / step.degrees() + 1e-9));
   for (int i = -most; i <= most; ++i) {
     const Angle angle = Angle::fromDegrees(i * step.degrees());
     if (angle.degrees() <= -90 + 1e-9)
       continue;
     const PlaneReading plane = planeAt(state, {angle});
-    table.rows.push_back(rowOfPlane(study, state, plane, verbatim(shownDegrees(angle, angleDecimals))));
+    table.rows.push_back(rowOfPlane(stresses, plane, verbatim(shownDegrees(angle, angleDecimals))));
   }
   return table;
 }

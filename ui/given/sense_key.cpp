@@ -29,7 +29,10 @@ void SenseKey::tell() {
   QStringList words;
   for (const Text& line : lines())
     words += shown(line);
-  setAccessibleName(words.join(QLatin1Char(' ')));
+  const QString name = words.join(QLatin1Char(' '));
+  if (name == accessibleName())
+    return;
+  setAccessibleName(name);
   update();
 }
 

@@ -10,12 +10,10 @@ namespace planewright {
 
 namespace {
 
-constexpr auto family = "Liberation Sans";
-
 bool load(const char* file) {
   const int id =
       QFontDatabase::addApplicationFont(QStringLiteral(":/planewright/fonts/") + QLatin1String(file));
-  return id >= 0 && QFontDatabase::applicationFontFamilies(id).contains(QLatin1String(family));
+  return id >= 0 && QFontDatabase::applicationFontFamilies(id).contains(QLatin1String(programFamily));
 }
 
 } // namespace
@@ -26,7 +24,7 @@ bool loadProgramFont() {
 }
 
 QFont programFont(double pixels, bool bold) {
-  QFont font{QString::fromLatin1(family)};
+  QFont font{QString::fromLatin1(programFamily)};
   font.setPixelSize(std::max(1, qRound(pixels)));
   font.setBold(bold);
   font.setKerning(false);

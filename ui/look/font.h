@@ -5,6 +5,8 @@
 
 namespace planewright {
 
+inline constexpr auto programFamily = "Liberation Sans";
+
 /// Makes the embedded Liberation Sans known to Qt; false when it does not load (then no picture can be made
 /// and the program stops with a message).
 bool loadProgramFont();

@@ -1,12 +1,17 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/look/runs_text.h"
 
+#include "core/figure/advances.h"
+#include "core/figure/characters.h"
 #include "core/figure/metrics.h"
+#include "ui/look/font.h"
 #include "ui/look/look.h"
 
 #include <QFontInfo>
 #include <QFontMetricsF>
 #include <QPainter>
+
+#include <algorithm>
 
 namespace planewright {
 
@@ -18,8 +23,19 @@ QFont fontOf(const Run& run, QFont font) {
   return font;
 }
 
+bool isMeasured(const std::string& text) {
+  return std::ranges::all_of(charactersOf(text), [](const Character& character) {
+    return advanceOf(character.code) != nullptr;
+  });
+}
+
+/// Windows and figures are set in the same font without kerning or hinting, so core's table of widths holds
+/// for both and spares the shaping of the text; what the table lacks comes from another font.
 qreal runWidth(const Run& run, const QFont& font) {
-  return QFontMetricsF(fontOf(run, font)).horizontalAdvance(fromUtf8(run.text));
+  const QFont set = fontOf(run, font);
+  if (set.pixelSize() > 0 && set.family() == QLatin1String(programFamily) && isMeasured(run.text))
+    return textWidth({{run.text, false}}, set.pixelSize(), set.bold());
+  return QFontMetricsF(set).horizontalAdvance(fromUtf8(run.text));
 }
 
 } // namespace

@@ -7,7 +7,6 @@
 namespace planewright {
 
 SweepModel::SweepModel(Desk& desk, QObject* parent) : TableModel(parent), m_desk(desk) {
-  connect(&m_desk, &Desk::changed, this, &SweepModel::refresh);
   refresh();
 }
 

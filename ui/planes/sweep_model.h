@@ -26,9 +26,10 @@ public:
   /// Nothing is typed here.
   std::optional<Problem> enter(const QModelIndex&, const QString&) override { return std::nullopt; }
 
-private:
+  /// Follows the desk; called by the page while it is shown.
   void refresh();
 
+private:
   Desk& m_desk;
   Angle m_step = Angle::fromDegrees(5);
 };

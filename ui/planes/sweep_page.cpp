@@ -54,6 +54,10 @@ SweepPage::SweepPage(Desk& desk, QWidget* parent)
   rows->addWidget(m_table, 1);
   m_table->setAccessibleName(tr("Sweep"));
   m_table->hideColumn(static_cast<int>(PlaneColumn::plane)); // it would only repeat the normal
+  connect(&m_desk, &Desk::changed, this, [this] {
+    if (isVisible())
+      m_model->refresh();
+  });
   connect(m_step, &DraftEdit::accepted, this, &SweepPage::takeStep);
   connect(m_step, &DraftEdit::left, this, &SweepPage::takeStep);
   connect(m_table, &PlaneTable::goTo, this,
@@ -69,6 +73,7 @@ SweepPage::SweepPage(Desk& desk, QWidget* parent)
 // The sweep opens at the reading plane.
 void SweepPage::showEvent(QShowEvent* event) {
   QWidget::showEvent(event);
+  m_model->refresh();
   const QModelIndex nearest = m_model->index(m_model->tintedRow(), static_cast<int>(PlaneColumn::normal));
   m_table->setCurrentIndex(nearest);
   m_table->scrollTo(nearest, QAbstractItemView::PositionAtCenter);

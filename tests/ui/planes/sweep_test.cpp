@@ -49,6 +49,7 @@ TEST(SweepModel, theNearestRowIsTinted) {
   SweepModel model(desk);
   EXPECT_EQ(model.index(model.tintedRow(), 1).data().toString(), QString::fromUtf8("30.00°"));
   desk.request({Type{{Spot::reading, "P1", {}}, "-89"}}, desk.newGesture(), {});
+  model.refresh();
   EXPECT_EQ(model.index(model.tintedRow(), 1).data().toString(), QString::fromUtf8("90.00°"));
 }
 
