@@ -8,12 +8,15 @@
 
 namespace planewright {
 
-/// A number that stands for a symbol in a Formula. Angles are in degrees.
+/// A number that stands for a symbol in a Formula. Angles are in degrees. A formula over quantities of
+/// several kinds is evaluated in N, mm and their products; each number is then written in a unit of its own.
 struct NumberPutIn {
   std::string symbol; ///< as the formula names it: "σ_{x}"
-  double value = 0;
-  int decimals = 3; ///< with which it is written
+  double value = 0;   ///< in the unit in which the formula is evaluated
+  int decimals = 3;   ///< with which it is written
   bool isAngle = false;
+  std::string unit = {}; ///< written behind it: "kN·m"; none where the step's unit says it
+  double scale = 1;      ///< of one `unit`, in the unit of `value`: 1e6 for kN·m and N·mm
   bool operator==(const NumberPutIn&) const = default;
 };
 using NumbersPutIn = std::vector<NumberPutIn>;

@@ -7,7 +7,7 @@
 namespace planewright {
 
 std::string shownResult(const Step& step) {
-  const std::string number = shownNumber(step.result, step.decimals);
+  const std::string number = shownNumber(step.result / step.scale, step.decimals);
   return number + (step.unit == "°" || step.unit.empty() ? "" : " ") + step.unit;
 }
 

@@ -16,6 +16,7 @@ struct Step {
   int decimals = 3;   ///< of the result
   std::string unit;   ///< "MPa", "°"
   Text source;        ///< where the formula is from
+  double scale = 1;   ///< of one `unit`, in the unit of `result`
 };
 
 /// "12.34 MPa", "−22.50°".

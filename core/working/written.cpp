@@ -64,8 +64,13 @@ private:
       return {symbol};
     const auto row = std::ranges::find(*m_numbers, symbol, &NumberPutIn::symbol);
     assert(row != m_numbers->end());
-    return ofNumber(row->isAngle ? shownDegrees(Angle::fromDegrees(row->value), row->decimals)
-                                 : shownNumber(row->value, row->decimals));
+    if (row->isAngle)
+      return ofNumber(shownDegrees(Angle::fromDegrees(row->value), row->decimals));
+    Line line = ofNumber(shownNumber(row->value / row->scale, row->decimals));
+    if (row->unit.empty())
+      return line;
+    // A number with its unit is a product of the two.
+    return {line.words + " " + row->unit, std::min(line.hold, Hold::product)};
   }
 
   static Line ofPower(const Line& base, const Line& exponent) {

@@ -65,6 +65,20 @@ TEST(Formula, isWrittenWithNumbersPutIn) {
   EXPECT_EQ(inNumbers(cosine(2 * angle)), "cos(2 · 30.0°)");
 }
 
+TEST(Formula, numbersOfSeveralKindsAreWrittenInUnitsOfTheirOwn) {
+  const Formula moment = Formula::symbol("M_{z}");
+  const Formula y = Formula::symbol("y");
+  const Formula second = Formula::symbol("I_{z}");
+  const NumbersPutIn mixed = {{"M_{z}", -12.4e6, 1, false, "kN·m", 1e6},
+                              {"y", 120, 0, false, "mm", 1},
+                              {"I_{z}", 368.64e6, 2, false, "10⁶ mm⁴", 1e6}};
+  const Formula bending = -(moment * y / second);
+  EXPECT_EQ(plain(written(bending, mixed)), "−(−12.4 kN·m) · 120 mm/(368.64 10⁶ mm⁴)");
+  EXPECT_DOUBLE_EQ(bending.valueWith(mixed), 12.4e6 * 120 / 368.64e6);
+  EXPECT_EQ(plain(written(y + y, mixed)), "120 mm + 120 mm");
+  EXPECT_EQ(plain(written(power(y, 3), mixed)), "(120 mm)³");
+}
+
 TEST(Formula, indicesStayIndices) {
   const Runs expected = {{"a + b", false}, {"1", true}};
   EXPECT_EQ(runs(written(a + b)), expected);
@@ -74,6 +88,12 @@ TEST(Formula, equalTreesAreEqual) {
   EXPECT_EQ((a + b) / 2, (a + b) / 2);
   EXPECT_NE((a + b) / 2, (a + b) / 3);
   EXPECT_NE(a + b, a - b);
+}
+
+TEST(Step, theResultIsWrittenInItsUnit) {
+  const Step step{
+      PW_TEXT("Test", "second moment"), symbol("I_{z}"), a, numbers, 368.64e6, 1, "10⁶ mm⁴", {}, 1e6};
+  EXPECT_EQ(shownResult(step), "368.6 10⁶ mm⁴");
 }
 
 TEST(Step, isWrittenAsOneLine) {
