@@ -24,9 +24,8 @@ QFont fontOf(const Run& run, QFont font) {
 }
 
 bool isMeasured(const std::string& text) {
-  return std::ranges::all_of(charactersOf(text), [](const Character& character) {
-    return advanceOf(character.code) != nullptr;
-  });
+  return std::ranges::all_of(charactersOf(text),
+                             [](const Character& character) { return advanceOf(character.code) != nullptr; });
 }
 
 /// Windows and figures are set in the same font without kerning or hinting, so core's table of widths holds
