@@ -82,20 +82,21 @@ int errorOfWritingDirectly(const std::string& path, std::string_view bytes) {
   return error ? error : file.errorOfClosing();
 }
 
-/// A new file beside `target`, named after it so that a leftover tells where it comes from.
+/// A new file beside `target`, named after it so that a leftover tells where it comes from. `mode` is less
+/// the user's mask.
 struct Aside {
   std::string path;
   Descriptor file;
 };
 
-Aside openedAside(const fs::path& target) {
+Aside openedAside(const fs::path& target, mode_t mode) {
   constexpr int tries = 100;
   Aside aside;
   for (int i = 0; i < tries && !aside.file; ++i) {
     const std::string name = "." + target.filename().string().substr(0, 200) + "." +
                              std::to_string(::getpid()) + "-" + std::to_string(i);
     aside.path = (target.parent_path() / name).string();
-    aside.file = Descriptor(::open(aside.path.c_str(), O_WRONLY | O_CREAT | O_EXCL | O_CLOEXEC, 0666));
+    aside.file = Descriptor(::open(aside.path.c_str(), O_WRONLY | O_CREAT | O_EXCL | O_CLOEXEC, mode));
     if (!aside.file && errno != EEXIST)
       break;
   }
@@ -112,7 +113,8 @@ void syncFolderOf(const fs::path& target) {
 }
 
 int errorOfReplacing(const std::string& target, std::string_view bytes, std::optional<mode_t> mode) {
-  Aside aside = openedAside(target);
+  // What replaces a private file is private from its first byte on.
+  Aside aside = openedAside(target, mode ? 0600 : 0666);
   if (!aside.file)
     return errno;
   int error = errorOfWriting(aside.file.number(), bytes);

@@ -7,8 +7,11 @@
 #include <gtest/gtest.h>
 
 #include <array>
+#include <atomic>
 #include <csignal>
 #include <filesystem>
+#include <optional>
+#include <thread>
 
 #include <fcntl.h>
 #include <sys/resource.h>
@@ -54,6 +57,35 @@ TEST_F(FileBytes, ReplaceAnOlderFileAndKeepItsPermissions) {
   EXPECT_EQ(read(path("a")), "new");
   EXPECT_EQ(modeOf(path("a")), 0640U);
   EXPECT_EQ(filesInFolder(), 1U);
+}
+
+/// The mode of the file that stands aside while bytes are written in the place of `target`, as soon as it is
+/// seen there; none when it came and went unseen.
+std::optional<mode_t> modeWhileReplacing(const fs::path& target, const std::string& bytes) {
+  std::atomic<bool> done = false;
+  std::thread writer([&] {
+    EXPECT_TRUE(writeAside(target.string(), bytes));
+    done = true;
+  });
+  std::optional<mode_t> seen;
+  while (!done && !seen)
+    for (const fs::directory_entry& entry : fs::directory_iterator(target.parent_path())) {
+      struct stat status {};
+      if (entry.path() != target && ::stat(entry.path().c_str(), &status) == 0)
+        seen = status.st_mode & 0777;
+    }
+  writer.join();
+  return seen;
+}
+
+TEST_F(FileBytes, AreNotShownToOthersWhileAPrivateFileIsReplaced) {
+  ASSERT_TRUE(writeAside(path("a"), "old"));
+  ASSERT_EQ(::chmod(path("a").c_str(), 0600), 0);
+  const std::string bytes(std::size_t{8} << 20, 'x');
+  std::optional<mode_t> mode;
+  for (int i = 0; i < 100 && !mode; ++i)
+    mode = modeWhileReplacing(path("a"), bytes);
+  EXPECT_EQ(mode, std::optional<mode_t>(0600));
 }
 
 TEST_F(FileBytes, OfANewFileFollowTheUsersMask) {
