@@ -5,14 +5,19 @@
 #include "ui/look/look.h"
 
 #include <QFocusEvent>
-#include <QKeyEvent>
 #include <QPainter>
 
 namespace planewright {
 
 namespace {
+
 constexpr int shownLines = 3;
+
+Place noteOfShownPoint(const Study& study) {
+  return {Spot::pointNote, shownPoint(study).name, {}};
 }
+
+} // namespace
 
 NoteField::NoteField(Desk& desk, QWidget* parent) : QPlainTextEdit(parent), m_desk(desk) {
   setTabChangesFocus(true);
@@ -21,9 +26,10 @@ NoteField::NoteField(Desk& desk, QWidget* parent) : QPlainTextEdit(parent), m_de
   document()->setDocumentMargin(6);
   m_settle.setSingleShot(true);
   m_settle.setInterval(EntryField::settlePause);
+  connect(this, &QPlainTextEdit::textChanged, &m_settle, qOverload<>(&QTimer::start));
   connect(&m_settle, &QTimer::timeout, this, &NoteField::take);
   connect(&m_desk, &Desk::changed, this, &NoteField::refresh);
-  refresh();
+  follow();
 }
 
 QSize NoteField::sizeHint() const {
@@ -44,11 +50,6 @@ void NoteField::focusOutEvent(QFocusEvent* event) {
   m_visit.reset();
 }
 
-void NoteField::keyPressEvent(QKeyEvent* event) {
-  QPlainTextEdit::keyPressEvent(event);
-  m_settle.start();
-}
-
 void NoteField::paintEvent(QPaintEvent* event) {
   QPlainTextEdit::paintEvent(event);
   QPainter painter(viewport());
@@ -59,28 +60,54 @@ void NoteField::paintEvent(QPaintEvent* event) {
                           3, 3);
 }
 
-std::string NoteField::noted() const {
-  return shownPoint(m_desk.study()).note;
+bool NoteField::hasDraft() const {
+  return toPlainText() != m_shown;
 }
 
 void NoteField::take() {
   m_settle.stop();
-  const std::string text = toPlainText().toStdString();
-  if (text == noted())
+  if (!hasDraft())
     return;
-  const auto problem = m_desk.request({Type{{Spot::pointNote, shownPoint(m_desk.study()).name, {}}, text}},
-                                      m_visit ? *m_visit : m_desk.newGesture(), tr("note"));
-  if (problem)
+  m_shown = toPlainText();
+  request({m_place, m_shown.toStdString()}, m_visit ? *m_visit : m_desk.newGesture());
+}
+
+void NoteField::request(const Type& draft, Gesture gesture) {
+  if (const auto problem = m_desk.request({draft}, gesture, tr("note")))
     m_desk.say(shown(*problem));
 }
 
-// What is being typed stays; anything else that changes the note is shown at once.
+// Another point, or another text of this note, ends the draft; a change elsewhere leaves it.
 void NoteField::refresh() {
+  const Study& study = m_desk.study();
+  const Place place = noteOfShownPoint(study);
+  const std::string note = textAt(study, place).value_or("");
   const bool isOwn = m_visit && m_desk.cause() == m_visit;
-  const QString note = fromUtf8(noted());
-  if (isOwn || note == toPlainText() || m_settle.isActive())
+  if (place == m_place && (note == m_known || isOwn)) {
+    m_known = note;
     return;
-  setPlainText(note);
+  }
+  if (place != m_place && hasDraft())
+    takeLater({m_place, toPlainText().toStdString()});
+  follow();
+}
+
+// The desk is in the middle of telling of another change. What then has no such note, or another one, is
+// another study.
+void NoteField::takeLater(const Type& draft) {
+  const Gesture gesture = m_visit ? *m_visit : m_desk.newGesture();
+  const auto takeNow = [this, draft, gesture, known = m_known] {
+    if (textAt(m_desk.study(), draft.place) == known)
+      request(draft, gesture);
+  };
+  QMetaObject::invokeMethod(this, takeNow, Qt::QueuedConnection);
+}
+
+void NoteField::follow() {
+  m_place = noteOfShownPoint(m_desk.study());
+  m_known = textAt(m_desk.study(), m_place).value_or("");
+  setPlainText(fromUtf8(m_known));
+  m_shown = toPlainText();
   if (m_visit)
     m_visit = m_desk.newGesture();
 }

@@ -21,16 +21,21 @@ public:
 protected:
   void focusInEvent(QFocusEvent* event) override;
   void focusOutEvent(QFocusEvent* event) override;
-  void keyPressEvent(QKeyEvent* event) override;
   void paintEvent(QPaintEvent* event) override;
 
 private:
-  std::string noted() const;
+  bool hasDraft() const;
   void take();
+  void takeLater(const Type& draft);
+  void request(const Type& draft, Gesture gesture);
   void refresh();
+  void follow();
 
   Desk& m_desk;
   QTimer m_settle;
+  Place m_place;       ///< the note that is shown,
+  std::string m_known; ///< its text when last seen, to tell whether it has moved,
+  QString m_shown;     ///< and as it stands here while nobody types
   std::optional<Gesture> m_visit;
 };
 

@@ -38,5 +38,37 @@ TEST_F(NoteFieldTest, tabLeavesIt) {
   EXPECT_FALSE(note.hasFocus());
 }
 
+/// With a second point to go to.
+struct NoteOfTwoPoints : NoteFieldTest {
+  NoteOfTwoPoints() {
+    desk.request({Insert{{Spot::point, "P2", {}}, {}}, Insert{{Spot::caseStress, "P2", "G"}, {}}},
+                 desk.newGesture(), {});
+    desk.show("P1", {});
+  }
+};
+
+TEST_F(NoteOfTwoPoints, aDraftGoesToThePointWhereItWasTyped) {
+  QTest::keyClicks(&note, "Knot near");
+  desk.show("P2", {});
+  EXPECT_EQ(note.toPlainText(), "");
+  EXPECT_TRUE(QTest::qWaitFor([this] { return kept(Spot::pointNote, "P1") == "Knot near"; }, 2000));
+  EXPECT_EQ(kept(Spot::pointNote, "P2"), "");
+  QTest::keyClicks(&note, "Sound");
+  panel.focusFirst();
+  EXPECT_EQ(kept(Spot::pointNote, "P1"), "Knot near");
+  EXPECT_EQ(kept(Spot::pointNote, "P2"), "Sound");
+  desk.undoStack()->undo();
+  EXPECT_EQ(kept(Spot::pointNote, "P1"), "Knot near") << "each point's note is a step of its own";
+}
+
+TEST_F(NoteFieldTest, whatNoKeyTypedCountsToo) {
+  QInputMethodEvent event;
+  event.setCommitString(QStringLiteral("节疤"));
+  QCoreApplication::sendEvent(&note, &event);
+  desk.request({Type{{Spot::reading, "P1", {}}, "30"}}, desk.newGesture(), {});
+  EXPECT_EQ(note.toPlainText(), QStringLiteral("节疤")) << "a change elsewhere leaves the draft";
+  EXPECT_TRUE(QTest::qWaitFor([this] { return kept(Spot::pointNote) == "节疤"; }, 2000));
+}
+
 } // namespace
 } // namespace planewright
