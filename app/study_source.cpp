@@ -12,12 +12,10 @@ namespace planewright {
 
 namespace {
 
-constexpr std::size_t mostBytes = 16 * 1024 * 1024;
-
 Outcome<std::string> bytesIn(const std::string& file) {
   const bool isInput = file == "-";
-  Result<std::string> bytes =
-      isInput ? bytesFrom(STDIN_FILENO, mostBytes, "standard input") : bytesOf(file, mostBytes);
+  Result<std::string> bytes = isInput ? bytesFrom(STDIN_FILENO, greatestStudyFile, "standard input")
+                                      : bytesOf(file, greatestStudyFile);
   if (bytes)
     return *std::move(bytes);
   // A file that is there and cannot be read is the machine's fault; one that is not there is the caller's.

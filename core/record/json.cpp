@@ -2,6 +2,7 @@
 #include "core/record/json.h"
 
 #include "core/record/json_text.h"
+#include "core/record/study_file.h"
 #include "core/words/utf8.h"
 
 #include <nlohmann/json.hpp>
@@ -184,7 +185,7 @@ const JsonMember* member(const Json& object, std::string_view key) {
 
 std::optional<Json> readJson(FileProblems& problems) {
   const std::string_view bytes = problems.bytes();
-  if (bytes.size() > longestJson) {
+  if (bytes.size() > greatestStudyFile) {
     problems.add(0, Problem{{}, 0, 0, {}, PW_TEXT("File", "The file is larger than 16 MB."), {}});
     return std::nullopt;
   }

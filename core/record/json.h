@@ -31,7 +31,6 @@ struct JsonMember {
 const JsonMember* member(const Json& object, std::string_view key);
 
 /// Bounds of what is read.
-inline constexpr std::size_t longestJson = 16u << 20;
 inline constexpr std::size_t deepestJson = 64;
 inline constexpr std::size_t mostJsonValues = 1'000'000;
 

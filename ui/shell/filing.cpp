@@ -8,6 +8,17 @@
 
 namespace planewright {
 
+namespace {
+
+Results<Study> studyIn(const QString& path) {
+  const Result<std::string> bytes = bytesOf(path.toStdString(), greatestStudyFile);
+  if (!bytes)
+    return tl::unexpected(Problems{bytes.error()});
+  return readStudy(*bytes);
+}
+
+} // namespace
+
 Filing::Filing(Desk& desk, FileQuestions questions, QObject* parent)
     : QObject(parent), m_desk(desk), m_questions(std::move(questions)) {}
 
@@ -29,14 +40,14 @@ bool Filing::open(const QString& path) {
     Q_EMIT refused(path, problems);
     return false;
   };
-  const Result<std::string> bytes = bytesOf(path.toStdString(), greatestFile);
-  if (!bytes)
-    return refuse({bytes.error()});
-  Results<Study> study = readStudy(*bytes);
-  if (!study)
-    return refuse(std::move(study).error());
+  if (Results<Study> early = studyIn(path); !early)
+    return refuse(std::move(early).error());
   if (!mayLeave())
     return false;
+  // Only now, for leaving may have saved to this very file.
+  Results<Study> study = studyIn(path);
+  if (!study)
+    return refuse(std::move(study).error());
   put(*std::move(study), QFileInfo(path).absoluteFilePath());
   return true;
 }

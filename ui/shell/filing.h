@@ -23,8 +23,6 @@ class Filing : public QObject {
   Q_OBJECT
 
 public:
-  static constexpr std::size_t greatestFile = 16'000'000; ///< bytes of a study file that are read
-
   Filing(Desk& desk, FileQuestions questions, QObject* parent = nullptr);
 
   /// The file of the study; empty while it has none.

@@ -2,6 +2,7 @@
 #include "core/record/json.h"
 
 #include "core/record/json_text.h"
+#include "core/record/study_file.h"
 
 #include <gmock/gmock.h>
 #include <gtest/gtest.h>
@@ -149,7 +150,7 @@ TEST(Json, depthAndSizeAreBounded) {
   for (int i = 0; i < 100000; ++i)
     objects += "{\"a\":";
   EXPECT_EQ(whatOf(objects), "The brackets are nested more than 64 deep.");
-  EXPECT_EQ(whatOf(std::string(longestJson + 1, ' ')), "The file is larger than 16 MB.");
+  EXPECT_EQ(whatOf(std::string(greatestStudyFile + 1, ' ')), "The file is larger than 16 MB.");
   std::string many = "[0";
   while (many.size() < 2 * mostJsonValues + 2)
     many += ",0";

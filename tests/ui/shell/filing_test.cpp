@@ -70,6 +70,26 @@ TEST_F(FilingTest, nothingIsLostWithoutAsking) {
   EXPECT_TRUE(m_filing.path().isEmpty());
 }
 
+TEST_F(FilingTest, openingTheFileThatWasJustSavedShowsWhatWasSaved) {
+  m_savePath = file("beam.planewright");
+  ASSERT_TRUE(m_filing.save());
+  type(m_desk, Spot::sx, "8 MPa");
+  const Study typed = m_desk.study();
+  m_unsaved = Unsaved::save;
+  ASSERT_TRUE(m_filing.open(m_savePath));
+  EXPECT_EQ(m_askedUnsaved, 1);
+  EXPECT_EQ(m_desk.study(), typed);
+}
+
+TEST_F(FilingTest, readsFilesUpToTheSizeThatCoreReads) {
+  std::string bytes = writeStudy(workedExample());
+  bytes.resize(greatestStudyFile, '\n');
+  write(file("large.planewright"), bytes);
+  EXPECT_TRUE(m_filing.open(file("large.planewright")));
+  write(file("large.planewright"), bytes + '\n');
+  EXPECT_FALSE(m_filing.open(file("large.planewright")));
+}
+
 TEST_F(FilingTest, whatIsShownIsNotAskedAbout) {
   ASSERT_TRUE(m_filing.openUnnamed(workedExample()));
   m_desk.show(m_desk.study().points.front().name, m_desk.readout().states.back().combination);
