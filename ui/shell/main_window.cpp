@@ -112,10 +112,17 @@ void MainWindow::restoreGeometryAndSizes() {
 }
 
 bool MainWindow::open(const QString& path) {
+  settleDrafts();
   return m_filing->open(path);
 }
 
+void MainWindow::beginStudy() {
+  settleDrafts();
+  m_filing->begin();
+}
+
 void MainWindow::openWorkedExample() {
+  settleDrafts();
   m_filing->openUnnamed(workedExample());
 }
 
@@ -129,7 +136,7 @@ void MainWindow::showFile(const QString& path) {
     m_figure->setStudyFile(path);
   if (isWorkedExample(m_desk.study())) {
     m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
-    m_welcome->offer(tr("New study"), [this] { m_filing->begin(); });
+    m_welcome->offer(tr("New study"), [this] { beginStudy(); });
     m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
   } else if (m_desk.study() == newStudy()) {
     m_welcome->say(tr("A new study: type the stresses of your point."));

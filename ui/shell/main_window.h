@@ -76,6 +76,7 @@ private:
   void listRecent();
 
   void settleDrafts();
+  void beginStudy();
   void showFile(const QString& path);
   void showTitle();
   void showRefusal(const QString& path, const Problems& problems);

@@ -34,10 +34,7 @@ QAction* MainWindow::add(QMenu& menu, const QString& words, const QKeySequence& 
 
 void MainWindow::addFileMenu() {
   QMenu& menu = *menuBar()->addMenu(tr("&File"));
-  add(menu, tr("&New"), QKeySequence::New, [this] {
-    settleDrafts();
-    m_filing->begin();
-  });
+  add(menu, tr("&New"), QKeySequence::New, [this] { beginStudy(); });
   add(menu, tr("&Open…"), QKeySequence::Open, [this] {
     settleDrafts();
     m_filing->open();
@@ -99,8 +96,14 @@ void MainWindow::addStudyMenu() {
   menu.addSeparator();
   Picker* points = &m_stateBar->points();
   Picker* combinations = &m_stateBar->combinations();
-  add(menu, tr("Previous point"), Qt::CTRL | Qt::Key_PageUp, [points] { points->previous(); });
-  add(menu, tr("Next point"), Qt::CTRL | Qt::Key_PageDown, [points] { points->next(); });
+  add(menu, tr("Previous point"), Qt::CTRL | Qt::Key_PageUp, [this, points] {
+    settleDrafts();
+    points->previous();
+  });
+  add(menu, tr("Next point"), Qt::CTRL | Qt::Key_PageDown, [this, points] {
+    settleDrafts();
+    points->next();
+  });
   add(menu, tr("Previous combination"), Qt::ALT | Qt::Key_PageUp,
       [combinations] { combinations->previous(); });
   add(menu, tr("Next combination"), Qt::ALT | Qt::Key_PageDown, [combinations] { combinations->next(); });

@@ -158,6 +158,41 @@ TEST_F(WindowTest, aTextStillBeingTypedIsSaved) {
   EXPECT_FALSE(window.isWindowModified());
 }
 
+TEST_F(WindowTest, aTextStillBeingTypedIsAskedAboutBeforeAnotherStudyComes) {
+  MainWindow& window = shown();
+  const QString path = saved(QStringLiteral("beam.planewright"), workedExample());
+  QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("7"));
+  EXPECT_FALSE(window.open(path)) << "the answer was to stay";
+  EXPECT_EQ(m_askedUnsaved, 1);
+  EXPECT_EQ(window.desk().study().points[0].stress[0].sx, "7 MPa");
+
+  window.desk().undoStack()->undo();
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_A, Qt::ControlModifier);
+  QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("8"));
+  window.openWorkedExample();
+  EXPECT_EQ(m_askedUnsaved, 2);
+
+  m_unsaved = Unsaved::drop;
+  window.openWorkedExample();
+  m_unsaved = Unsaved::stay;
+  QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("9"));
+  window.welcome().follow(QStringLiteral("New study"));
+  EXPECT_EQ(m_askedUnsaved, 4);
+}
+
+TEST_F(WindowTest, aTextStillBeingTypedBelongsToThePointThatIsLeft) {
+  MainWindow& window = shown();
+  Study study = newStudy();
+  study.points.push_back(study.points[0]);
+  study.points[1].name = "P2";
+  ASSERT_TRUE(window.filing().openUnnamed(study));
+  QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("7"));
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_PageDown, Qt::ControlModifier);
+  EXPECT_EQ(window.desk().readout().point, "P2");
+  EXPECT_EQ(window.desk().study().points[0].stress[0].sx, "7 MPa");
+  EXPECT_EQ(window.desk().study().points[1].stress[0].sx, "0 MPa");
+}
+
 TEST_F(WindowTest, theStatusLineTellsAStepAndTakesItBack) {
   MainWindow& window = shown();
   type(window.desk(), Spot::lineAngle, "1 in 10");
