@@ -73,7 +73,7 @@ std::vector<Text> conventionsOf(const Study& study, const Readout& readout) {
     sentences.push_back(PW_TEXT("Figure", "The elements are drawn with x inclined by %1.")
                             .with(shownDegrees(readout.axes, angleDecimals)));
   sentences.push_back(shearSenseOf(study));
-  sentences.push_back(PW_TEXT("Figure", "All arrows in one scale."));
+  sentences.push_back(PW_TEXT("Figure", "Arrows in one scale, small ones at a least length."));
   sentences.push_back(PW_TEXT("Figure", "Stresses at one point, not a design check: the code in force and a "
                                         "licensed engineer decide."));
   return sentences;

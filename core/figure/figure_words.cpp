@@ -14,6 +14,7 @@ namespace planewright {
 namespace {
 
 constexpr std::size_t mostTitleLines = 4;
+constexpr std::size_t mostPackageLines = 2;
 constexpr double titlePitch = 1.25; // ems
 constexpr double wordPitch = 1.42;
 
@@ -27,6 +28,26 @@ Text headingOf(const Setting& setting) {
   if (subject.empty())
     return verbatim(setting.readout.point);
   return PW_TEXT("Figure", "%1 — %2").with(setting.readout.point).with(subject);
+}
+
+void join(std::string& words, const std::string& more) {
+  if (!more.empty())
+    words += (words.empty() ? "" : " · ") + more;
+}
+
+/// What the title block says of the calculation that the figure belongs to: "project · subject · no. 7, rev.
+/// B".
+std::string packageOf(const Setting& setting) {
+  const Title& title = setting.study.title;
+  std::string words;
+  join(words, title.project);
+  if (&subjectOf(setting) != &title.subject)
+    join(words, title.subject);
+  if (!title.number.empty())
+    join(words, plain(PW_TEXT("Figure", "no. %1").with(title.number), setting.order.translate));
+  if (!title.revision.empty())
+    join(words, plain(PW_TEXT("Figure", "rev. %1").with(title.revision), setting.order.translate));
+  return words;
 }
 
 /// The name of the combination; a single case says that it is one.
@@ -147,6 +168,12 @@ double drawTitle(Picture& picture, const Setting& setting, double left, double r
     if (!below.empty())
       y = setLines(picture, below, {left, y + 1.35 * setting.text}, titlePitch * setting.text, setting.text,
                    Align::start, Role::ink, false);
+  }
+  if (const std::string package = parts.title ? packageOf(setting) : ""; !package.empty()) {
+    const auto lines = atMost(brokenLines({{package, false}}, width, setting.small, false), mostPackageLines,
+                              width, setting.small, false);
+    y = setLines(picture, lines, {left, y + 1.5 * setting.small}, wordPitch * setting.small, setting.small,
+                 Align::start, Role::soft, false);
   }
   y += 0.5 * setting.title;
   setLine(picture, {left, y}, {right, y}, {Role::ink, setting.medium, Dash::solid});

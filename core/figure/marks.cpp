@@ -147,7 +147,7 @@ SignShape shapeOf(Sign sign, double size) {
   constexpr double square = 0.9;
   constexpr double lozengeReach = 1.22;
   constexpr double tickReach = 1.15;
-  constexpr double tickWidth = 0.24;
+  constexpr double tickWidth = 0.42; // stands out from the circle that it lies along
   switch (sign) {
   case Sign::filledRound:
     return {{}, true, true};

@@ -73,8 +73,12 @@ int groupOf(PlaneKind kind) {
   return 5;
 }
 
+/// Folded angles lie in (-90, 90] deg, in what is shown too.
 Cell angleCell(Angle angle) {
-  return {verbatim(shownDegrees(angle, angleDecimals)), angle.degrees()};
+  const std::string shown = shownDegrees(angle, angleDecimals);
+  const std::string least = shownDegrees(Angle::fromDegrees(-90), angleDecimals);
+  return {verbatim(shown == least ? shownDegrees(Angle::fromDegrees(90), angleDecimals) : shown),
+          angle.degrees()};
 }
 
 /// Stresses of one state as they are shown, the unit read once for all of them.

@@ -5,6 +5,8 @@
 #include "core/study/cut_text.h"
 #include "core/study/place.h"
 
+#include <cmath>
+
 namespace planewright {
 
 namespace {
@@ -36,10 +38,12 @@ Text touchedName(Component component, bool greatest) {
 
 Text touchingNote(Component component, const PlanesOfValue& planes, double value) {
   const bool greatest = planes.greatest - value < value - planes.least;
-  const int decimals = decimalsFor(planes.spread.degrees(), 1);
-  return PW_TEXT("Inverse", "touches at %1, ± %2")
-      .with(touchedName(component, greatest))
-      .with(shownDegrees(planes.spread, decimals));
+  const Text at = PW_TEXT("Inverse", "touches the circle at %1").with(touchedName(component, greatest));
+  // Rounded up, for the target as typed is met nowhere outside the spread.
+  const double spread = std::ceil(planes.spread.degrees() * 10 - 1e-9) / 10;
+  if (planes.spread.degrees() < 1e-3)
+    return at;
+  return PW_TEXT("Inverse", "%1, ± %2").with(at).with(shownDegrees(Angle::fromDegrees(spread), noteDecimals));
 }
 
 } // namespace

@@ -13,7 +13,7 @@ struct ReadingByValue {
   std::string
       reading; ///< text for the reading plane's normal; the present one where every plane has the value
   std::optional<std::string> other; ///< the other of two planes
-  Text note;                        ///< "also at 74.2°", "touches at σ_{1}, ± 0.4°", "every direction"
+  Text note; ///< "also at 74.2°", "touches the circle at σ_{1}, ± 0.4°", "every direction"
 };
 
 /// Inverse reading: the planes of the shown state on which `component` has the typed stress, the one nearest

@@ -13,7 +13,7 @@ enum class Fit { thisCircle, allCombinations };
 namespace circle_size {
 inline constexpr double text = 12;
 inline constexpr double stem = 16;        ///< from the x mark to the middle of its ear
-inline constexpr double labelGap = 24;    ///< from the circle to a column of labels
+inline constexpr double labelGap = 30;    ///< from the circle to a column of labels, beyond the ear
 inline constexpr double overhang = 12;    ///< of the labels beyond the right edge of the plot
 inline constexpr double leftOverhang = 4; ///< and beyond the left edge, short of the tick labels
 } // namespace circle_size

@@ -60,6 +60,27 @@ void clampInto(Label& label, const QRectF& plot) {
   label.at.y += std::max(0.0, plot.top() - box.top) - std::max(0.0, box.bottom - plot.bottom());
 }
 
+/// A label that rides on its mark, with its leader; a lesser rank is wanted more.
+struct Rider {
+  Label label;
+  std::optional<Path> leader;
+  int rank = 0;
+};
+
+/// In a motion labels run into each other; the more wanted ones are shown whole, the others not at all.
+std::vector<Rider> withoutCovered(std::vector<Rider> riders) {
+  std::ranges::stable_sort(riders, {}, &Rider::rank);
+  std::vector<Box> taken;
+  std::erase_if(riders, [&taken](const Rider& rider) {
+    const Box box = boxOf(rider.label);
+    if (std::ranges::any_of(taken, [&box](const Box& other) { return overlap(box, other); }))
+      return true;
+    taken.push_back(box);
+    return false;
+  });
+  return riders;
+}
+
 /// Beside its mark, outside the circle; its place changes without a step as the mark goes round.
 void putOutside(Label& label, const Stage& stage, QPointF mark) {
   const Round round = stage.round();
@@ -95,32 +116,36 @@ CircleLabels placedLabels(const Stage& stage) {
 CircleLabels riddenLabels(const Stage& stage, const CircleLabels& before, const CircleLabels& latest) {
   const bool goesRound = latest.goesRound || stage.readout.reading != before.reading;
   CircleLabels now{stage.readout.reading, goesRound, wishesOf(stage), {}};
-  std::vector<Label>& labels = now.placed.labels;
-  for (Label label : before.placed.labels) {
+  std::vector<Rider> riders;
+  for (const Label& label : before.placed.labels) {
     const auto old = std::ranges::find(before.wishes, label.key, &LabelWish::key);
     const auto wish = std::ranges::find(now.wishes, label.key, &LabelWish::key);
     if (old == before.wishes.end() || wish == now.wishes.end())
       continue;
+    Rider rider{label, std::nullopt, label.key == readingKey() ? -1 : wish->priority};
     const bool isShort = std::ranges::count(before.placed.shortened, label.key) > 0;
     const Vec motion = wish->mark - old->mark;
-    label.runs = isShort ? wish->shortForm : wish->longForm;
-    label.at = label.at + motion;
+    rider.label.runs = isShort ? wish->shortForm : wish->longForm;
+    rider.label.at = label.at + motion;
     const bool turned = label.key == readingKey() && goesRound;
     if (turned)
-      putOutside(label, stage, pointOf(wish->mark));
-    clampInto(label, stage.scale.plot());
-    labels.push_back(label);
+      putOutside(rider.label, stage, pointOf(wish->mark));
+    clampInto(rider.label, stage.scale.plot());
     const auto leader = std::ranges::find_if(before.placed.leaders, [&](const Path& path) {
       return path.points.front() == old->mark && path.pen->role == label.role;
     });
-    if (turned || leader == before.placed.leaders.end())
-      continue;
-    now.placed.leaders.push_back(*leader);
-    for (Vec& point : now.placed.leaders.back().points)
-      point = point + motion;
+    if (!turned && leader != before.placed.leaders.end()) {
+      rider.leader = *leader;
+      for (Vec& point : rider.leader->points)
+        point = point + motion;
+    }
+    riders.push_back(std::move(rider));
   }
-  // Drawn last, because it goes over all others.
-  std::ranges::stable_partition(labels, [](const Label& label) { return label.key != readingKey(); });
+  for (Rider& rider : withoutCovered(std::move(riders))) {
+    now.placed.labels.push_back(std::move(rider.label));
+    if (rider.leader)
+      now.placed.leaders.push_back(*std::move(rider.leader));
+  }
   now.placed.shortened = before.placed.shortened;
   return now;
 }

@@ -11,8 +11,8 @@ namespace planewright {
 
 namespace {
 
-constexpr int mostLines = 2;
-constexpr int mostLetters = 1000; // two lines never hold more
+constexpr int mostLines = 3;
+constexpr int mostLetters = 1000; // three lines never hold more
 constexpr int textStart = 14;
 constexpr qreal triangle = 8;
 
@@ -51,8 +51,10 @@ QStringList complaintLines(const QString& what, const QString& mend, const QFont
     (shortened(middle).size() <= mostLines ? fits : tooLong) = middle;
   }
   lines = shortened(fits);
-  if (lines.size() > mostLines)
-    lines = {lines.at(0), metrics.elidedText(lines.mid(1).join(QLatin1Char(' ')), Qt::ElideRight, width)};
+  if (lines.size() > mostLines) {
+    const QString rest = lines.mid(mostLines - 1).join(QLatin1Char(' '));
+    lines = lines.mid(0, mostLines - 1) << metrics.elidedText(rest, Qt::ElideRight, width);
+  }
   return lines;
 }
 

@@ -5,10 +5,10 @@
 
 namespace planewright {
 
-/// What is wrong and what to do, cut to at most two lines so that the second sentence stays whole.
+/// What is wrong and what to do, cut to at most three lines so that the second sentence stays whole.
 QStringList complaintLines(const QString& what, const QString& mend, const QFont& font, int width);
 
-/// The message under a wrong entry: a triangle and at most two lines. It takes lines of its own.
+/// The message under a wrong entry: a triangle and at most three lines. It takes lines of its own.
 class Complaint : public QWidget {
   Q_OBJECT
 

@@ -39,7 +39,6 @@ EntryField::~EntryField() {
 }
 
 void EntryField::build() {
-  setFocusProxy(m_edit);
   m_caption->setBuddy(m_edit);
   m_edit->setAccessibleName(name() == m_words.meaning || m_words.meaning.isEmpty()
                                 ? name()

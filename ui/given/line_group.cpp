@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/table/table.h"
+#include "ui/entry/draft_edit.h"
 #include "ui/given/echoes.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
@@ -108,7 +109,7 @@ bool LineGroup::isNamedByKind() const {
 void LineGroup::editName() {
   m_nameWanted = true;
   refresh();
-  m_fields.back()->setFocus(Qt::OtherFocusReason);
+  m_fields.back()->edit().setFocus(Qt::OtherFocusReason);
 }
 
 void LineGroup::removeLine() {

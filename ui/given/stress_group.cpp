@@ -2,6 +2,7 @@
 #include "ui/given/stress_group.h"
 
 #include "core/table/table.h"
+#include "ui/entry/draft_edit.h"
 #include "ui/given/case_strip.h"
 #include "ui/given/echoes.h"
 #include "ui/look/look.h"
@@ -89,12 +90,12 @@ void StressGroup::buildMore() {
   connect(m_addThird, &QAbstractButton::clicked, this, [this] {
     m_thirdWanted = true;
     refresh();
-    m_fields[sz]->setFocus();
+    m_fields[sz]->edit().setFocus();
   });
   connect(m_addAxes, &QAbstractButton::clicked, this, [this] {
     m_axesWanted = true;
     refresh();
-    m_fields[axes]->setFocus();
+    m_fields[axes]->edit().setFocus();
   });
 }
 

@@ -52,6 +52,11 @@ PlaneTable::PlaneTable(TableModel& model, QWidget* parent)
   viewport()->setBackgroundRole(QPalette::AlternateBase);
   connect(&m_model, &QAbstractItemModel::dataChanged, this, &PlaneTable::growColumns);
   connect(&m_model, &QAbstractItemModel::modelReset, this, &PlaneTable::measure);
+  connect(m_delegate, &QAbstractItemDelegate::closeEditor, this,
+          [this](QWidget*, QAbstractItemDelegate::EndEditHint hint) {
+            if (hint == QAbstractItemDelegate::RevertModelCache)
+              m_model.forget();
+          });
   measure();
 }
 

@@ -139,6 +139,14 @@ std::optional<Problem> PlanesModel::enter(const QModelIndex& index, const QStrin
   return problem;
 }
 
+void PlanesModel::forget() {
+  if (!m_refused)
+    return;
+  m_refused.reset();
+  tellChanged();
+  m_desk.say({});
+}
+
 std::optional<Problem> PlanesModel::enterReading(PlaneColumn column, const std::string& typed) {
   if (column == PlaneColumn::sn || column == PlaneColumn::tnt)
     return enterValue(column == PlaneColumn::sn ? Component::sn : Component::tnt, typed);

@@ -29,6 +29,7 @@ public:
 
   /// Takes what was typed in a cell: a name, an angle, or for the reading plane a stress. The Problem, which
   /// the row then tells, when it is not taken.
+  void forget() override;
   std::optional<Problem> enter(const QModelIndex& index, const QString& typed) override;
   /// Brings the reading plane to the other plane of the stress that was typed last; false without one.
   bool swapSolution();

@@ -35,6 +35,9 @@ public:
   /// Takes what was typed in a cell; the Problem when it is not taken.
   virtual std::optional<Problem> enter(const QModelIndex& index, const QString& typed) = 0;
 
+  /// An editor closed without an entry: what it was told does not count any more.
+  virtual void forget() {}
+
   int rowCount(const QModelIndex& parent = {}) const override;
   int columnCount(const QModelIndex& parent = {}) const override;
   QVariant data(const QModelIndex& index, int role) const override;

@@ -1,10 +1,14 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/change_words.h"
 
+#include "core/quantity/format.h"
 #include "core/study/place_list.h"
+#include "core/table/table.h"
 #include "ui/look/look.h"
 
 #include <QCoreApplication>
+
+#include <algorithm>
 
 namespace planewright {
 
@@ -14,13 +18,13 @@ bool isShown(const Place& place) {
   return place.spot == Spot::shownPoint || place.spot == Spot::shownCombination;
 }
 
-/// Places of `after` whose text is another in `before`; only the first two matter.
+/// Places of `after` whose text is another in `before`; no more than are told.
 std::vector<Place> changedPlaces(const Study& before, const Study& after) {
   std::vector<Place> changed;
   for (const Place& place : typedPlacesIn(after)) {
     if (!isShown(place) && textAt(before, place) != textAt(after, place))
       changed.push_back(place);
-    if (changed.size() == 2)
+    if (changed.size() > 2)
       break;
   }
   return changed;
@@ -38,18 +42,39 @@ QString capital(QString words) {
   return words;
 }
 
+QString nameOf(const Place& place) {
+  return capital(shown(rowOf(place.spot).label));
+}
+
+/// A text as it is told: numbers with more digits than anyone reads are rounded, long texts are cut.
+QString told(const Study& study, const Place& place) {
+  const std::string text = textAt(study, place).value_or(std::string());
+  if (text.empty())
+    return QCoreApplication::translate("ChangeWords", "none");
+  const EntryKind kind = entryKindOf(study, place.spot);
+  const bool isAngle = rowOf(place.spot).holds == Holds::expression && kind.dimension == dimension::angle;
+  constexpr std::size_t readable = 14;
+  if (isAngle && text.size() > readable)
+    if (const Result<Entry> entry = readEntry(text, kind))
+      return fromUtf8(shownDegrees(Angle::fromDegrees(entry->value), angleDecimals));
+  return cut(text);
+}
+
 } // namespace
 
 QString changeInWords(const Study& before, const Study& after) {
   const std::vector<Place> changed = changedPlaces(before, after);
-  if (changed.size() != 1 || rowOf(changed.front().spot).holds == Holds::word)
+  const auto holdsWord = [](const Place& place) { return rowOf(place.spot).holds == Holds::word; };
+  if (changed.empty() || changed.size() > 2 || std::ranges::any_of(changed, holdsWord))
     return {};
-  const auto was = textAt(before, changed.front());
-  const auto now = textAt(after, changed.front());
-  if (!was || !now || was->empty() || now->empty())
+  if (changed.size() == 2)
+    return QCoreApplication::translate("ChangeWords", "%1 now %2, %3 now %4")
+        .arg(nameOf(changed[0]), told(after, changed[0]), nameOf(changed[1]), told(after, changed[1]));
+  const Place& place = changed.front();
+  if (!textAt(before, place))
     return {};
   return QCoreApplication::translate("ChangeWords", "%1 now %2, was %3")
-      .arg(capital(shown(rowOf(changed.front().spot).label)), cut(*now), cut(*was));
+      .arg(nameOf(place), told(after, place), told(before, place));
 }
 
 } // namespace planewright

@@ -3,6 +3,7 @@
 
 #include "ui/shell/filter_list.h"
 
+#include <QEvent>
 #include <QHBoxLayout>
 #include <QLabel>
 #include <QPushButton>
@@ -45,16 +46,29 @@ void Picker::build(const QString& caption, const QString& keys) {
   row->addWidget(m_previous);
   row->addWidget(m_next);
   row->addWidget(m_count);
-  m_name->setStyleSheet(QStringLiteral(
-      "QPushButton { text-align: left; padding: 4px 8px; background: palette(base); border: 1px solid "
-      "palette(dark); "
-      "border-radius: 3px; } QPushButton:focus { border: 2px solid palette(link); padding: 3px 7px; }"));
+  dress();
   m_name->setAccessibleName(caption);
   m_name->setAccessibleDescription(keys);
   label->setBuddy(m_name);
   connect(m_name, &QPushButton::clicked, this, &Picker::openList);
   connect(m_previous, &QToolButton::clicked, this, &Picker::previous);
   connect(m_next, &QToolButton::clicked, this, &Picker::next);
+}
+
+void Picker::dress() {
+  m_name->setStyleSheet(QStringLiteral(
+      "QPushButton { text-align: left; padding: 4px 8px; background: palette(base); border: 1px solid "
+      "palette(dark); "
+      "border-radius: 3px; } QPushButton:focus { border: 2px solid palette(link); padding: 3px 7px; }"));
+}
+
+// A style sheet looks its colours up when it is set.
+void Picker::changeEvent(QEvent* event) {
+  QWidget::changeEvent(event);
+  if (event->type() == QEvent::PaletteChange) {
+    m_name->setStyleSheet({});
+    dress();
+  }
 }
 
 void Picker::show(const QStringList& names, qsizetype current) {

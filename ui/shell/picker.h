@@ -34,8 +34,10 @@ signals:
 
 protected:
   void resizeEvent(QResizeEvent* event) override;
+  void changeEvent(QEvent* event) override;
 
 private:
+  void dress();
   void build(const QString& caption, const QString& keys);
   void step(int by);
   void writeName();

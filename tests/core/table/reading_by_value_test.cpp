@@ -46,10 +46,11 @@ TEST(ReadingByValue, aPrincipalValueIsTouched) {
   ASSERT_TRUE(found);
   EXPECT_EQ(found->planes.kind, Kind::touching);
   EXPECT_FALSE(found->other);
-  EXPECT_TRUE(plain(found->note).starts_with("touches at σ1, ± ")) << plain(found->note);
+  EXPECT_TRUE(plain(found->note).starts_with("touches the circle at σ1, ± ")) << plain(found->note);
   const auto least = asked(typed("80", "20", "-30", "0"), Component::tnt, "-42.4");
   ASSERT_TRUE(least);
-  EXPECT_TRUE(plain(least->note).starts_with("touches at the least τnt, ± ")) << plain(least->note);
+  EXPECT_TRUE(plain(least->note).starts_with("touches the circle at the least τnt, ± "))
+      << plain(least->note);
 }
 
 TEST(ReadingByValue, whatIsOutOfReachNamesTheRange) {

@@ -123,7 +123,7 @@ TEST_F(PlanesModelTest, outOfReachIsSaidInTheRow) {
 TEST_F(PlanesModelTest, aPrincipalValueIsTouched) {
   ASSERT_TRUE(enter(reading, PlaneColumn::sn, "92.43"));
   EXPECT_EQ(model.noteOf(reading).kind, RowNote::Kind::fact);
-  EXPECT_TRUE(note().startsWith(QString::fromUtf8("touches at σ1, ± "))) << note().toStdString();
+  EXPECT_TRUE(note().startsWith(QString::fromUtf8("touches the circle at σ1, ± "))) << note().toStdString();
   EXPECT_NEAR(desk.readout().reading.value.degrees(), -22.5, 1e-9);
 }
 

@@ -219,6 +219,31 @@ TEST_F(WindowTest, f6GoesRoundTheAreasAndComesBackToWhereItWas) {
   EXPECT_TRUE(window.stateBar().isAncestorOf(QApplication::focusWidget()));
 }
 
+TEST_F(WindowTest, tabGoesThroughEveryAreaAndComesBackToWhereItWas) {
+  MainWindow& window = shown();
+  const QList<QWidget*> areas{&window.given(), &window.element(), &window.circle(), &window.planes(),
+                              &window.stateBar()};
+  for (const bool forward : {true, false}) {
+    QWidget* start = QApplication::focusWidget();
+    QList<QWidget*> visited;
+    QList<QWidget*> stops;
+    constexpr int most = 100;
+    do {
+      QTest::keyClick(QApplication::focusWidget(), forward ? Qt::Key_Tab : Qt::Key_Backtab);
+      QWidget* focused = QApplication::focusWidget();
+      ASSERT_NE(focused, nullptr);
+      stops += focused;
+      for (QWidget* area : areas)
+        if ((focused == area || area->isAncestorOf(focused)) && (visited.isEmpty() || visited.last() != area))
+          visited += area;
+    } while (QApplication::focusWidget() != start && stops.size() < most);
+    EXPECT_EQ(QApplication::focusWidget(), start) << "never comes back";
+    for (QWidget* area : areas)
+      EXPECT_TRUE(visited.contains(area)) << area->metaObject()->className();
+    EXPECT_LE(visited.size(), areas.size() + 1) << "an area is entered twice";
+  }
+}
+
 TEST_F(WindowTest, pickersShowAnotherPointWithoutAStep) {
   MainWindow& window = shown();
   Study study = workedExample();

@@ -27,7 +27,16 @@ TEST_F(ShellWords, oneTypedTextIsToldWithWhatItWas) {
   EXPECT_EQ(changeInWords(before, desk.study()), "Angle of the line now 1 in 10, was 0 deg");
   EXPECT_EQ(changeInWords(desk.study(), desk.study()), "");
   type(desk, Spot::sx, "8 MPa");
-  EXPECT_EQ(changeInWords(before, desk.study()), "") << "two texts changed";
+  EXPECT_EQ(changeInWords(before, desk.study()), "σx now 8 MPa, Angle of the line now 1 in 10");
+  type(desk, Spot::txy, "8 MPa");
+  EXPECT_EQ(changeInWords(before, desk.study()), "") << "three texts changed";
+  const Study three = desk.study();
+  type(desk, Spot::lineTolerance, "3 deg");
+  EXPECT_EQ(changeInWords(three, desk.study()), "Tolerance of the line's angle now 3 deg, was none");
+  const Study turned = desk.study();
+  type(desk, Spot::reading, "-84.2894068625004 deg");
+  EXPECT_EQ(changeInWords(turned, desk.study()),
+            QString::fromUtf8("Normal of the reading plane now −84.29°, was 0 deg"));
 }
 
 TEST_F(ShellWords, whatIsShownDoesNotCountAsAChange) {
