@@ -124,7 +124,7 @@ AreaMoments momentsAbove(const Contour& contour, double y) {
 std::vector<Span> spansAt(const Contour& contour, double y, Side side) {
   std::vector<double> crossings;
   for (const Edge& edge : contour) {
-    const auto [low, high] = std::minmax(edge.from.y, edge.to.y);
+    const auto [low, high] = std::minmax({edge.from.y, edge.to.y});
     if (side == Side::above ? low <= y && y < high : low < y && y <= high)
       crossings.push_back(zAt(edge, y));
   }
