@@ -39,12 +39,16 @@ Edits ReadingDrag::moved(const Stage& stage, QPointF pointer, Qt::KeyboardModifi
 }
 
 EarDrag::EarDrag(const Stage& stage, const std::string& caseId, QPointF pointer)
-    : m_caseId(caseId), m_hold(xMarkAt(stage) - pointer) {
+    : m_caseId(caseId), m_slip(pointer), m_hold(xMarkAt(stage) - pointer) {
   for (const Spot spot : {Spot::sx, Spot::txy})
     m_before.push_back(asTyped(stage.study, stressPlace(stage.readout, caseId, spot)));
 }
 
-Edits EarDrag::moved(const Stage& stage, QPointF pointer) const {
+Edits EarDrag::moved(const Stage& stage, QPointF pointer) {
+  if (!m_slip.isOver(pointer))
+    return {};
+  if (pointer == m_slip.pressed())
+    return m_before;
   return xFaceEdits(stage.study, stage.readout, m_caseId, stage.scale.valuesAt(pointer + m_hold),
                     1 / stage.scale.pixelsPerUnit());
 }

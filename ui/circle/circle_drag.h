@@ -3,6 +3,7 @@
 
 #include "ui/circle/circle_layers.h"
 #include "ui/desk/desk.h"
+#include "ui/desk/slip.h"
 #include "ui/desk/turning.h"
 
 #include <variant>
@@ -34,11 +35,14 @@ public:
   /// `caseId` is the draggable case.
   EarDrag(const Stage& stage, const std::string& caseId, QPointF pointer);
 
-  Edits moved(const Stage& stage, QPointF pointer) const;
+  /// What the pointer's next place asks for: nothing while it may only have slipped; back at the press the
+  /// texts of the start.
+  Edits moved(const Stage& stage, QPointF pointer);
   Edits restored() const { return m_before; }
 
 private:
   std::string m_caseId;
+  Slip m_slip;
   QPointF m_hold; ///< from the pointer to the x mark
   Edits m_before;
 };

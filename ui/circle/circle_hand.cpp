@@ -121,6 +121,9 @@ void CirclePlot::startDrag(Handle handle, QPointF pixel) {
 
 void CirclePlot::mouseMoveEvent(QMouseEvent* event) {
   const QPointF pixel = event->position();
+  // A release that went elsewhere ends the drag as well.
+  if (m_drag && !(event->buttons() & Qt::LeftButton))
+    endDrag();
   if (!m_drag) {
     hover(pixel);
     return;
@@ -145,7 +148,7 @@ void CirclePlot::endDrag() {
   m_ride.reset();
   m_settle.stop();
   m_old->setPath({});
-  m_stay = m_desk.newGesture();
+  m_keys.end();
   viewport()->unsetCursor();
   refit();
 }
@@ -209,7 +212,8 @@ bool CirclePlot::turnByKey(const QKeyEvent& event) {
   const std::optional<Angle> turned =
       keyedTurn(readout.reading.value, event.key(), event.modifiers(), directionsForNormal(readout));
   if (turned)
-    ask({Type{readingPlace(readout), typedAngle(*turned)}}, m_stay, tr("Turn the reading plane"));
+    askByKey(readingPlace(readout), {Type{readingPlace(readout), typedAngle(*turned)}},
+             tr("Turn the reading plane"));
   return turned.has_value();
 }
 
@@ -222,7 +226,8 @@ bool CirclePlot::moveEarByKey(const QKeyEvent& event) {
   const double step = earStep(tick(), event.modifiers());
   const QPointF values =
       plotted(now.study, planeAt(now.readout.state(), {Angle()}).traction) + step * direction;
-  ask(xFaceEdits(now.study, now.readout, *caseId, values, step), m_stay, tr("Draw the x face"));
+  askByKey({Spot::caseStress, now.readout.point, *caseId},
+           xFaceEdits(now.study, now.readout, *caseId, values, step), tr("Draw the x face"));
   return true;
 }
 
@@ -233,7 +238,7 @@ void CirclePlot::turnTo(Angle normal) {
 
 void CirclePlot::take(Handle handle) {
   m_handle = handle;
-  m_stay = m_desk.newGesture();
+  m_keys.end();
   arrangeHandles();
 }
 
@@ -261,6 +266,11 @@ bool CirclePlot::focusNextPrevChild(bool next) {
 void CirclePlot::ask(const Edits& edits, Gesture gesture, const QString& what) {
   if (const std::optional<Problem> problem = m_desk.request(edits, gesture, what))
     m_desk.say(shown(*problem));
+}
+
+void CirclePlot::askByKey(const Place& place, const Edits& edits, const QString& what) {
+  ask(edits, m_keys.gestureOn(place, m_desk), what);
+  m_keys.pressed(m_desk);
 }
 
 } // namespace planewright

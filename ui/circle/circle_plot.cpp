@@ -43,8 +43,8 @@ QGraphicsRectItem* newClip(QGraphicsItem* parent) {
 } // namespace
 
 CirclePlot::CirclePlot(Desk& desk, QWidget* parent)
-    : EqualScaleFrame(parent), m_desk(desk), m_stay(desk.newGesture()), m_circle(new QLineSeries(chart())),
-      m_plotClip(newClip(chart())), m_shape(newPath(m_plotClip, 0)), m_hairlines(newPath(m_plotClip, 1)),
+    : EqualScaleFrame(parent), m_desk(desk), m_circle(new QLineSeries(chart())), m_plotClip(newClip(chart())),
+      m_shape(newPath(m_plotClip, 0)), m_hairlines(newPath(m_plotClip, 1)),
       m_extremes(newPath(m_plotClip, 2)), m_old(newPath(m_plotClip, 3)), m_near(newPath(m_plotClip, 4)),
       m_words(new PictureItem(chart(), wordsDepth)), m_leaders(new PictureItem(chart(), leadersDepth)),
       m_still(new PictureItem(chart(), overSeries)), m_reading(new PictureItem(chart(), overSeries + 1)),

@@ -5,6 +5,7 @@
 #include "ui/circle/circle_drag.h"
 #include "ui/circle/circle_fit.h"
 #include "ui/circle/circle_labels.h"
+#include "ui/desk/key_stay.h"
 
 #include <QTimer>
 
@@ -80,12 +81,13 @@ private:
   bool turnByKey(const QKeyEvent& event);
   bool moveEarByKey(const QKeyEvent& event);
   void ask(const Edits& edits, Gesture gesture, const QString& what);
+  void askByKey(const Place& place, const Edits& edits, const QString& what);
 
   Desk& m_desk;
   Fit m_fit = Fit::thisCircle;
   Handle m_handle = Handle::reading;
   std::optional<CircleDrag> m_drag;
-  Gesture m_stay;                     ///< of the keys: one stay on a handle
+  KeyStay m_keys;
   QTimer m_settle;                    ///< runs while changes follow each other closely
   std::optional<CircleLabels> m_ride; ///< labels as they stood when something began to move
   CircleLabels m_labels;

@@ -112,6 +112,16 @@ TEST(ReadingDrag, EscapePutsBackTheTypedText) {
   EXPECT_EQ(panel.desk.study(), study) << "a move after Escape is not a drag";
 }
 
+TEST(ReadingDrag, EndsWhenTheReleaseWentElsewhere) {
+  Panel panel(studyOf());
+  panel.press(*panel.plot.handleAt(Handle::reading));
+  panel.move(panel.markOf(degrees(40)));
+  const double there = panel.reading();
+  panel.hover(panel.markOf(degrees(70)));
+  EXPECT_FALSE(panel.plot.isDragging());
+  EXPECT_EQ(panel.reading(), there);
+}
+
 TEST(ReadingDrag, AStateWithoutACircleHasNothingToTurnBy) {
   Panel panel(studyOf("5 MPa", "5 MPa", "0 MPa"));
   panel.press(*panel.plot.handleAt(Handle::reading));
@@ -172,6 +182,24 @@ TEST(Ear, TypesNumbersAsFineAsThePixelsInTheStudysUnit) {
   EXPECT_TRUE(panel.typed().sx.ends_with(" ksi")) << panel.typed().sx;
   EXPECT_LE(panel.typed().sx.size(), std::string("11.34 ksi").size()) << panel.typed().sx;
   EXPECT_GT(valueOf(panel.typed().sx), valueOf("11 ksi"));
+}
+
+TEST(Ear, AnUnsteadyClickChangesNothing) {
+  const Study study = studyOf("160 kN/(2000 mm^2)", "20 MPa", "-30 MPa");
+  Panel panel(study);
+  const QPointF ear = *panel.plot.handleAt(Handle::ear);
+  for (const QPointF slip : {QPointF(1, 0), QPointF(0, 3), QPointF(-2, 2)})
+    panel.drag(Handle::ear, ear + slip);
+  EXPECT_EQ(panel.desk.study(), study);
+  panel.press(ear);
+  panel.move(ear + QPointF(4, 0));
+  EXPECT_NE(panel.desk.study(), study);
+  panel.move(ear + QPointF(2, 0));
+  EXPECT_NE(panel.desk.study(), study) << "a drag goes on also near its start";
+  panel.move(ear);
+  EXPECT_EQ(panel.desk.study(), study) << "at its start stands what was typed";
+  panel.release(ear);
+  EXPECT_EQ(panel.steps(), 0);
 }
 
 TEST(Ear, EscapeRestoresWhatWasTyped) {

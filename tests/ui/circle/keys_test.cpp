@@ -37,6 +37,30 @@ TEST(CircleKeys, OneStayOnAHandleIsOneStep) {
   EXPECT_EQ(panel.reading(), 30);
 }
 
+TEST(CircleKeys, OnTwoPointsAreTwoSteps) {
+  Study study = studyOf();
+  study.points.push_back(study.points.front());
+  study.points.back().name = "P2";
+  Panel panel(study);
+  panel.key(Qt::Key_Right);
+  panel.desk.show("P2", {});
+  panel.key(Qt::Key_Right);
+  EXPECT_EQ(panel.steps(), 2);
+  panel.desk.undoStack()->undo();
+  EXPECT_EQ(panel.desk.study().points.front().reading, "26 deg");
+}
+
+TEST(CircleKeys, AfterUndoBeginAnotherStep) {
+  Panel panel(studyOf());
+  panel.key(Qt::Key_Right);
+  panel.key(Qt::Key_Tab);
+  panel.key(Qt::Key_Right);
+  panel.desk.undoStack()->undo();
+  panel.key(Qt::Key_Backtab);
+  panel.key(Qt::Key_Right);
+  EXPECT_EQ(panel.steps(), 2);
+}
+
 TEST(CircleKeys, LeaveAloneWhatIsNotTheirs) {
   Panel panel(studyOf());
   panel.key(Qt::Key_PageUp, Qt::AltModifier);

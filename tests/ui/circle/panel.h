@@ -53,6 +53,8 @@ struct Panel {
   void move(QPointF at, Qt::KeyboardModifiers held = {}) {
     send(QEvent::MouseMove, at, Qt::NoButton, Qt::LeftButton, held);
   }
+  /// Moved without a button, as after a release that went elsewhere.
+  void hover(QPointF at) { send(QEvent::MouseMove, at, Qt::NoButton, Qt::NoButton); }
   void release(QPointF at) { send(QEvent::MouseButtonRelease, at, Qt::LeftButton, Qt::NoButton); }
   void key(int key, Qt::KeyboardModifiers held = {}) { QTest::keyClick(&plot, Qt::Key(key), held); }
 
