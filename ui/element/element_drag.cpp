@@ -1,15 +1,12 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/element/element_drag.h"
 
-#include <QLineF>
-
 #include <cmath>
 
 namespace planewright {
 
 namespace {
 
-constexpr double slip = 4;  ///< px that a bar may slip without being dragged
 constexpr double reach = 6; ///< px of arc within which a named direction takes the handle
 
 } // namespace
@@ -30,12 +27,12 @@ ElementDrag::ElementDrag(const Study& study, const ElementHold& hold, const Faci
                          Gesture gesture)
     : m_handle(hold.handle), m_gesture(gesture), m_place(hold.place),
       m_startText(textAt(study, hold.place).value_or(std::string())), m_startFolded(hold.folded),
-      m_startFacing(facing), m_turn(facing.shown(hold.folded)), m_pressed(pressed), m_last(pressed) {}
+      m_startFacing(facing), m_turn(facing.shown(hold.folded)), m_slip(pressed), m_last(pressed) {}
 
 std::optional<std::string> ElementDrag::moved(const ElementGeometry& geometry, const ElementHold& hold,
                                               QPointF to, Qt::KeyboardModifiers held, bool snapping) {
-  m_started = m_started || m_handle != ElementHandle::line || QLineF(m_pressed, to).length() >= slip;
-  const std::optional<Angle> motion = m_started ? geometry.motion(m_last, to) : std::nullopt;
+  const bool isDragged = m_handle != ElementHandle::line || m_slip.isOver(to);
+  const std::optional<Angle> motion = isDragged ? geometry.motion(m_last, to) : std::nullopt;
   if (!motion || to == m_last)
     return std::nullopt;
   m_turn.move(*motion, held);

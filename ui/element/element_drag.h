@@ -2,6 +2,7 @@
 #pragma once
 
 #include "ui/desk/desk.h"
+#include "ui/desk/slip.h"
 #include "ui/desk/turning.h"
 #include "ui/element/facing.h"
 #include "ui/element/geometry.h"
@@ -48,9 +49,8 @@ private:
   Angle m_startFolded;
   Facing m_startFacing;
   Turn m_turn;
-  QPointF m_pressed;
+  Slip m_slip;
   QPointF m_last;
-  bool m_started = false;
   bool m_onSnap = false;
 };
 

@@ -111,7 +111,7 @@ void ElementView::mousePressEvent(QMouseEvent* event) {
     return;
   QToolTip::hideText();
   setCurrent(handle);
-  m_keysIndex = -1;
+  m_keys.end();
   m_drag.emplace(m_desk.study(), *hold, facingOf(handle), event->position(), m_desk.newGesture());
   setCursor(Qt::ClosedHandCursor);
   update();
@@ -159,10 +159,7 @@ void ElementView::putBack() {
 }
 
 void ElementView::endDrag() {
-  const ElementDrag drag = *m_drag;
   m_drag.reset();
-  if (drag.handle() == ElementHandle::line)
-    sayLine(drag.startText());
   update();
 }
 
@@ -186,7 +183,7 @@ void ElementView::turn(ElementHandle handle, Angle to) {
 // --- the keys
 
 void ElementView::setCurrent(ElementHandle handle) {
-  m_keysIndex = -1;
+  m_keys.end();
   if (handle == m_current)
     return;
   m_current = handle;
@@ -213,7 +210,7 @@ void ElementView::focusInEvent(QFocusEvent* event) {
 
 void ElementView::focusOutEvent(QFocusEvent* event) {
   QWidget::focusOutEvent(event);
-  m_keysIndex = -1;
+  m_keys.end();
 }
 
 void ElementView::keyPressEvent(QKeyEvent* event) {
@@ -237,21 +234,9 @@ void ElementView::keyPressEvent(QKeyEvent* event) {
 }
 
 void ElementView::turnByKey(const ElementHold& hold, Angle to) {
-  const std::string before = textAt(m_desk.study(), hold.place).value_or(std::string());
   const Angle from = facingOf(hold.handle).shown(hold.folded);
-  const Gesture gesture = keyGesture();
-  if (type(hold, typedAngle(to), gesture, from))
-    return;
-  m_keysIndex = m_desk.undoStack()->index();
-  if (hold.handle == ElementHandle::line)
-    sayLine(before);
-}
-
-/// Keys pressed one after the other are one step of undo, until the handle, the focus or the history changes.
-Gesture ElementView::keyGesture() {
-  if (m_keysIndex < 0 || m_keysIndex != m_desk.undoStack()->index())
-    m_keys = m_desk.newGesture();
-  return m_keys;
+  type(hold, typedAngle(to), m_keys.gestureOn(hold.place, m_desk), from);
+  m_keys.pressed(m_desk);
 }
 
 void ElementView::openField(const ElementHold& hold) {
@@ -270,11 +255,8 @@ void ElementView::openField(const ElementHold& hold) {
 
 void ElementView::takeTyped(ElementHandle handle, const QString& text) {
   if (const std::optional<ElementHold> hold = holdOf(m_desk.readout(), handle)) {
-    const std::string before = textAt(m_desk.study(), hold->place).value_or(std::string());
     if (const auto problem = type(*hold, text.toStdString(), m_desk.newGesture(), hold->folded))
       return m_field->refuse(shown(*problem));
-    if (handle == ElementHandle::line)
-      sayLine(before);
   }
   setFocus(Qt::OtherFocusReason);
 }
@@ -285,16 +267,6 @@ QString ElementView::whatTurns(ElementHandle handle) const {
   if (handle == ElementHandle::line && !m_desk.readout().lines.empty())
     return tr("Turn the %1").arg(fromUtf8(m_desk.readout().lines.front().name));
   return tr("Turn the reading plane");
-}
-
-void ElementView::sayLine(const std::string& before) {
-  const std::optional<ElementHold> hold = holdOf(m_desk.readout(), ElementHandle::line);
-  const std::string now = hold ? textAt(m_desk.study(), hold->place).value_or(before) : before;
-  if (now == before)
-    return;
-  QString name = fromUtf8(m_desk.readout().lines.front().name);
-  name.replace(0, 1, name.left(1).toUpper());
-  m_desk.say(tr("%1 now %2, was %3.").arg(name, fromUtf8(now), fromUtf8(before)));
 }
 
 QString ElementView::wordsOf(ElementHandle handle) const {

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "ui/desk/key_stay.h"
 #include "ui/element/element_drag.h"
 #include "ui/element/scene.h"
 
@@ -71,10 +72,8 @@ private:
   std::optional<Problem> type(const ElementHold& hold, const std::string& text, Gesture gesture,
                               Angle wanted);
   void turnByKey(const ElementHold& hold, Angle to);
-  Gesture keyGesture();
   void openField(const ElementHold& hold);
   void takeTyped(ElementHandle handle, const QString& text);
-  void sayLine(const std::string& before);
 
   Desk& m_desk;
   ElementGlance m_glance; ///< of the window's own; size, focus and drag are added when it is painted
@@ -82,8 +81,7 @@ private:
   std::optional<ElementDrag> m_drag;
   std::optional<Sides> m_sides;
   QPointer<AngleField> m_field;
-  Gesture m_keys;       ///< of the keys pressed one after the other
-  int m_keysIndex = -1; ///< where the undo stack stood after the last of them
+  KeyStay m_keys;
 };
 
 } // namespace planewright

@@ -30,6 +30,12 @@ std::vector<Place> changedPlaces(const Study& before, const Study& after) {
   return changed;
 }
 
+/// A line goes by its own name.
+QString nameOf(const Study& study, const Place& place) {
+  const Point* point = place.spot == Spot::lineAngle ? findPoint(study, place.owner) : nullptr;
+  return point && point->line ? fromUtf8(point->line->name) : shown(rowOf(place.spot).label);
+}
+
 QString cut(const std::string& text) {
   constexpr int most = 40;
   const QString line = fromUtf8(text).simplified();
@@ -40,10 +46,6 @@ QString capital(QString words) {
   if (!words.isEmpty() && words[0].script() == QChar::Script_Latin)
     words[0] = words[0].toUpper();
   return words;
-}
-
-QString nameOf(const Place& place) {
-  return capital(shown(rowOf(place.spot).label));
 }
 
 /// A text as it is told: numbers with more digits than anyone reads are rounded, long texts are cut.
@@ -68,13 +70,14 @@ QString changeInWords(const Study& before, const Study& after) {
   if (changed.empty() || changed.size() > 2 || std::ranges::any_of(changed, holdsWord))
     return {};
   if (changed.size() == 2)
-    return QCoreApplication::translate("ChangeWords", "%1 now %2, %3 now %4")
-        .arg(nameOf(changed[0]), told(after, changed[0]), nameOf(changed[1]), told(after, changed[1]));
+    return capital(QCoreApplication::translate("ChangeWords", "%1 now %2, %3 now %4")
+                       .arg(nameOf(after, changed[0]), told(after, changed[0]), nameOf(after, changed[1]),
+                            told(after, changed[1])));
   const Place& place = changed.front();
   if (!textAt(before, place))
     return {};
-  return QCoreApplication::translate("ChangeWords", "%1 now %2, was %3")
-      .arg(nameOf(place), told(after, place), told(before, place));
+  return capital(QCoreApplication::translate("ChangeWords", "%1 now %2, was %3")
+                     .arg(nameOf(after, place), told(after, place), told(before, place)));
 }
 
 } // namespace planewright

@@ -165,7 +165,7 @@ void MainWindow::showRefusal(const QString& path, const Problems& problems) {
 void MainWindow::tellStep(int index) {
   QUndoStack& undo = *m_desk.undoStack();
   if (index < m_toldStep) {
-    m_status->say(index == 0 && undo.count() == 0 ? QString() : tr("Undone: %1.").arg(undo.redoText()));
+    m_status->say(undo.canRedo() ? tr("Undone: %1.").arg(undo.redoText()) : QString());
   } else if (const Study* before = m_desk.beforeNewestStep()) {
     const QString change = changeInWords(*before, m_desk.study());
     m_status->say(change.isEmpty() ? tr("%1.").arg(undo.undoText()) : change + QLatin1Char('.'), tr("Undo"));

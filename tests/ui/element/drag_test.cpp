@@ -153,14 +153,10 @@ TEST(ElementDrag, aSlipOfThreePixelsOnABarChangesNothing) {
   EXPECT_EQ(rig.steps(), 0);
 }
 
-TEST(ElementDrag, bothBarsTurnTheLineAndTheStatusLineSaysSo) {
+TEST(ElementDrag, bothBarsTurnTheLine) {
   ElementRig rig;
-  QSignalSpy said(&rig.desk, &Desk::said);
   rig.drag(rig.bar(), rig.at(25, 0.8), Qt::ControlModifier);
   EXPECT_NEAR(rig.lineDegrees(), 25, 0.6);
-  ASSERT_EQ(said.size(), 1);
-  EXPECT_EQ(said.front().front().toString(),
-            QStringLiteral("Grain now %1, was 1 in 10.").arg(QString::fromStdString(rig.line())));
   rig.drag(rig.at(rig.lineDegrees() + 180, 0.8), rig.at(235, 0.8), Qt::ControlModifier);
   EXPECT_NEAR(rig.lineDegrees(), 55, 0.6);
   EXPECT_EQ(rig.steps(), 2);

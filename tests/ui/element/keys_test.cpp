@@ -59,6 +59,19 @@ TEST(ElementKeys, oneAfterTheOtherAreOneStepUntilTheHistoryChanges) {
   EXPECT_EQ(rig.steps(), 3);
 }
 
+TEST(ElementKeys, onTwoPointsAreTwoSteps) {
+  ElementRig rig;
+  rig.desk.request({Insert{{Spot::point, "P2", {}}, {}}, Insert{{Spot::caseStress, "P2", "G"}, {}}},
+                   rig.desk.newGesture(), {});
+  rig.desk.show("P1", {});
+  rig.key(Qt::Key_Right);
+  rig.desk.show("P2", {});
+  rig.key(Qt::Key_Right);
+  EXPECT_EQ(rig.steps(), 3);
+  rig.desk.undoStack()->undo();
+  EXPECT_EQ(rig.reading(), "31 deg") << "the first point keeps its turn";
+}
+
 TEST(ElementKeys, tabGoesFromTheKnobToTheBarsAndOn) {
   QWidget window;
   QVBoxLayout layout(&window);

@@ -4,6 +4,7 @@
 #include "ui/circle/circle_view.h"
 #include "ui/element/element_view.h"
 #include "ui/given/given_panel.h"
+#include "ui/look/look.h"
 #include "ui/planes/planes_panel.h"
 #include "ui/shell/body.h"
 #include "ui/shell/main_window.h"
@@ -197,10 +198,42 @@ TEST_F(WindowTest, theStatusLineTellsAStepAndTakesItBack) {
   MainWindow& window = shown();
   type(window.desk(), Spot::lineAngle, "1 in 10");
   type(window.desk(), Spot::lineAngle, "7.4 deg");
-  EXPECT_EQ(window.statusLine().words(), "Angle of the line now 7.4 deg, was 1 in 10. Undo");
+  EXPECT_EQ(window.statusLine().words(), "Grain now 7.4 deg, was 1 in 10. Undo");
   Q_EMIT window.statusLine().actionClicked();
   EXPECT_EQ(window.desk().study().points[0].line->angle, "1 in 10");
   EXPECT_TRUE(window.statusLine().words().startsWith(QStringLiteral("Undone")));
+}
+
+/// Presses on the bar of the line, moves by each of the ways and lets go there.
+void dragBar(MainWindow& window, const QList<QPoint>& ways) {
+  ElementView& element = window.element();
+  const QPoint start = element.placeOf(ElementHandle::line)->toPoint();
+  QTest::mousePress(&element, Qt::LeftButton, {}, start);
+  for (const QPoint way : ways) {
+    QMouseEvent event(QEvent::MouseMove, start + way, element.mapToGlobal(start + way), Qt::NoButton,
+                      Qt::LeftButton, Qt::ControlModifier);
+    QApplication::sendEvent(&element, &event);
+  }
+  QTest::mouseRelease(&element, Qt::LeftButton, Qt::ControlModifier, start + ways.back());
+}
+
+TEST_F(WindowTest, aDraggedLineIsToldWithTheWayBack) {
+  MainWindow& window = shown();
+  type(window.desk(), Spot::lineAngle, "1 in 10");
+  dragBar(window, {QPoint(0, -40)});
+  const std::string now = window.desk().study().points[0].line->angle;
+  EXPECT_NE(now, "1 in 10");
+  EXPECT_EQ(window.statusLine().words().toStdString(), "Grain now " + now + ", was 1 in 10. Undo");
+  QTest::keyClick(&window.element(), Qt::Key_Right);
+  EXPECT_TRUE(window.statusLine().words().endsWith(QStringLiteral(", was %1. Undo").arg(fromUtf8(now))));
+}
+
+TEST_F(WindowTest, aDragThatEndsWhereItBeganSaysNothing) {
+  MainWindow& window = shown();
+  type(window.desk(), Spot::lineAngle, "1 in 10");
+  dragBar(window, {QPoint(0, -40), QPoint()});
+  EXPECT_EQ(window.desk().study().points[0].line->angle, "1 in 10");
+  EXPECT_EQ(window.statusLine().words(), "");
 }
 
 TEST_F(WindowTest, f6GoesRoundTheAreasAndComesBackToWhereItWas) {

@@ -24,10 +24,10 @@ TEST_F(ShellWords, oneTypedTextIsToldWithWhatItWas) {
   Desk desk(newStudy());
   const Study before = desk.study();
   type(desk, Spot::lineAngle, "1 in 10");
-  EXPECT_EQ(changeInWords(before, desk.study()), "Angle of the line now 1 in 10, was 0 deg");
+  EXPECT_EQ(changeInWords(before, desk.study()), "Grain now 1 in 10, was 0 deg");
   EXPECT_EQ(changeInWords(desk.study(), desk.study()), "");
   type(desk, Spot::sx, "8 MPa");
-  EXPECT_EQ(changeInWords(before, desk.study()), "σx now 8 MPa, Angle of the line now 1 in 10");
+  EXPECT_EQ(changeInWords(before, desk.study()), "σx now 8 MPa, grain now 1 in 10");
   type(desk, Spot::txy, "8 MPa");
   EXPECT_EQ(changeInWords(before, desk.study()), "") << "three texts changed";
   const Study three = desk.study();
