@@ -12,15 +12,18 @@ namespace planewright {
 
 namespace {
 
-/// The name is the point's key: typing another renames it and what refers to it.
+/// The name is the point's key: typing another renames it and what refers to it. Its spot is told by the
+/// order of the points, which stays the same meanwhile.
 EntryBinding nameOfPoint() {
-  const auto place = [](const Study& study) { return Place{Spot::point, shownPoint(study).name, {}}; };
-  return {[place](const Study& study) { return pathOf(place(study)); },
-          [](const Study& study) { return shownPoint(study).name; },
-          [place](const Study& study, const std::string& typed) -> Result<Edits> {
-            return Edits{Rename{place(study), typed}};
-          },
-          {}};
+  EntryBinding binding;
+  binding.path = [](const Study& study) {
+    return "points/" + std::to_string(&shownPoint(study) - study.points.data());
+  };
+  binding.text = [](const Study& study) { return shownPoint(study).name; };
+  binding.edits = [](const Study& study, const std::string& typed) -> Result<Edits> {
+    return Edits{Rename{{Spot::point, shownPoint(study).name, {}}, typed}};
+  };
+  return binding;
 }
 
 } // namespace
