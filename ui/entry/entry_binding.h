@@ -18,13 +18,18 @@ struct EntryBinding {
   std::function<std::string(const Study&)> text;
   /// What taking a typed text does.
   std::function<Result<Edits>(const Study&, const std::string& typed)> edits;
+  /// What Escape does to bring the text at entry back; an empty function when that is taking it again.
+  std::function<Result<Edits>(const Study&, const std::string& atEntry)> putBack;
   /// The evaluated value, "8.611 MPa", to show under a text of a study that has it; an empty function or
   /// text for none.
   std::function<QString(const Study&, const Readout&, const std::string& typed)> echo;
 };
 
-/// A field over one place, which may follow the shown point or case. A place that the study does not have
-/// yet is shown empty and made by the first text, when `made` inserts it.
-EntryBinding boundTo(std::function<Place(const Study&)> place, std::function<Edits(const Study&)> made = {});
+/// A field over one place, which may follow the shown point or case.
+EntryBinding boundTo(std::function<Place(const Study&)> place);
+
+/// The same over a place in a thing, `owner`, that the study need not have: then it is shown empty, the first
+/// text inserts the thing, and Escape removes it.
+EntryBinding boundInto(std::function<Place(const Study&)> owner, Spot spot);
 
 } // namespace planewright

@@ -166,8 +166,9 @@ void EntryField::accept() {
 bool EntryField::putBack() {
   if (!m_visit || (!m_hasDraft && m_known == m_visit->textAtEntry))
     return false;
-  // The text stood in the study, so it is taken as it stands; an empty one goes as an empty draft.
-  if (Result<Edits> edits = m_binding.edits(m_desk.study(), m_visit->textAtEntry);
+  // What stood in the study is taken as it stands.
+  const auto& back = m_binding.putBack ? m_binding.putBack : m_binding.edits;
+  if (Result<Edits> edits = back(m_desk.study(), m_visit->textAtEntry);
       edits && m_known != m_visit->textAtEntry)
     m_desk.request(*edits, m_visit->gesture, tr("typing of %1").arg(name()));
   dropDraft();

@@ -40,13 +40,11 @@ StressGroup::StressGroup(Desk& desk, QWidget* parent)
 }
 
 void StressGroup::addStress(Spot spot, const QString& meaning, decltype(EntryBinding::echo) echo) {
-  EntryBinding binding = boundTo(
-      [this, spot](const Study& study) {
-        return Place{spot, shownPoint(study).name, caseId(study)};
-      },
+  EntryBinding binding = boundInto(
       [this](const Study& study) {
-        return Edits{Insert{{Spot::caseStress, shownPoint(study).name, caseId(study)}, std::nullopt}};
-      });
+        return Place{Spot::caseStress, shownPoint(study).name, caseId(study)};
+      },
+      spot);
   binding.echo = std::move(echo);
   auto* field = new EntryField(m_desk, std::move(binding), {rowOf(spot).label, meaning, true}, this);
   field->caption().setFixedWidth(fontMetrics().horizontalAdvance(QStringLiteral("τxyx")));

@@ -213,6 +213,18 @@ TEST_F(GivenTest, severalCasesAreChosenInAStrip) {
   EXPECT_EQ(field("σx").edit().text(), "2 MPa");
 }
 
+TEST_F(GivenTest, escapeTakesBackACaseThatTheStayMade) {
+  const Study before = twoCases();
+  desk.replace(before);
+  button("case S").click();
+  type("σx", "10");
+  ASSERT_EQ(kept(Spot::sx, "P1", "S"), "10 MPa");
+  QTest::keyClick(&field("σx").edit(), Qt::Key_Escape);
+  EXPECT_EQ(desk.study(), before);
+  EXPECT_EQ(field("σx").edit().text(), "");
+  EXPECT_EQ(desk.undoStack()->count(), 0);
+}
+
 TEST_F(GivenTest, anEntryNotTakenNamesItsCase) {
   desk.replace(twoCases());
   QSignalSpy counted(&panel, &GivenPanel::entriesNotTaken);
