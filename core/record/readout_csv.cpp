@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
 #include "core/record/csv.h"
-#include "core/record/readout_cautions.h"
 #include "core/record/readout_file.h"
+#include "core/table/cautions.h"
 #include "core/table/table.h"
 
 namespace planewright {

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/record/json_writer.h"
-#include "core/record/readout_cautions.h"
 #include "core/record/readout_file.h"
+#include "core/table/cautions.h"
 #include "core/table/table.h"
 
 namespace planewright {

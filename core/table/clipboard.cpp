@@ -63,6 +63,8 @@ std::string tabSeparated(const Table& table, const Translate& translate) {
                 inOneCell(cell.exact ? exactNumber(*cell.exact) : plain(cell.shown, translate));
     result += '\n';
   }
+  for (const Text& caution : table.cautions)
+    result += inOneCell(plain(caution, translate)) + '\n';
   return result;
 }
 
@@ -79,7 +81,10 @@ std::string html(const Table& table, const Translate& translate) {
       result += htmlCell("td", table.columns[i].isNumber, htmlRuns(row.cells[i].shown, translate));
     result += "</tr>\n";
   }
-  return result + "</table>\n";
+  result += "</table>\n";
+  for (const Text& caution : table.cautions)
+    result += "<p>" + htmlRuns(caution, translate) + "</p>\n";
+  return result;
 }
 
 } // namespace planewright

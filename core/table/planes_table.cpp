@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/study/place.h"
+#include "core/table/cautions.h"
 
 #include <algorithm>
 #include <cassert>
@@ -135,7 +136,7 @@ std::string shownStress(const Study& study, const StateReading& state, double st
 }
 
 Table planesTable(const Study& study, const Readout& readout, const StateReading& state) {
-  Table table{columnsOf(study), {}};
+  Table table{columnsOf(study), {}, cautionsOf(state)};
   const StressColumn stresses = stressColumn(study, state);
   for (const PlaneReading& plane : planesOf(readout, state))
     table.rows.push_back(rowOfPlane(stresses, plane, nameOf(plane)));
@@ -144,7 +145,7 @@ Table planesTable(const Study& study, const Readout& readout, const StateReading
 
 Table sweepTable(const Study& study, const StateReading& state, Angle step) {
   assert(step.degrees() >= 0.1 && step.degrees() <= 90);
-  Table table{columnsOf(study), {}};
+  Table table{columnsOf(study), {}, cautionsOf(state)};
   const StressColumn stresses = stressColumn(study, state);
   const int most = static_cast<int>(std::floor(90 / step.degrees() + 1e-9));
   for (int i = -most; i <= most; ++i) {

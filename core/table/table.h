@@ -31,6 +31,7 @@ struct Row {
 struct Table {
   std::vector<Column> columns;
   std::vector<Row> rows;
+  std::vector<Text> cautions; ///< what a reader of the rows must know, a sentence each
 };
 
 /// plane | normal at | cut at | sn | tnt for one state, in the study's unit.
@@ -38,9 +39,10 @@ Table planesTable(const Study& study, const Readout& readout, const StateReading
 /// The same columns for normals from -90 (excluded) to 90 deg by `step` degrees (0.1 to 90).
 Table sweepTable(const Study& study, const StateReading& state, Angle step);
 
-/// Tab separated, a heading line first, numbers at full precision with ASCII minus.
+/// Tab separated, a heading line first, numbers at full precision with ASCII minus; then a line for each
+/// caution.
 std::string tabSeparated(const Table& table, const Translate& translate = {});
-/// One HTML table element, with the shown numbers.
+/// One HTML table element, with the shown numbers; then a paragraph for each caution.
 std::string html(const Table& table, const Translate& translate = {});
 
 /// Decimals for every stress of this state in the study's unit: four significant digits in its largest.

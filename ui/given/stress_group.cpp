@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/given/stress_group.h"
 
+#include "core/table/cautions.h"
 #include "core/table/table.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/given/case_strip.h"
@@ -22,7 +23,8 @@ enum Field { sx, sy, txy, sz, axes };
 
 StressGroup::StressGroup(Desk& desk, QWidget* parent)
     : FoldGroup(tr("Stress"), Role::ink, parent), m_desk(desk), m_strip(new CaseStrip(this)),
-      m_sum(new QLabel(this)), m_addThird(new QuietButton(tr("Third direction"), Role::focus, this)),
+      m_sum(new QLabel(this)), m_caution(new QLabel(this)),
+      m_addThird(new QuietButton(tr("Third direction"), Role::focus, this)),
       m_addAxes(new QuietButton(tr("Inclined axes"), Role::focus, this)) {
   body().addWidget(m_strip);
   addComponent(Spot::sx, tr("normal stress on the x face"), &PlaneStress::sx);
@@ -77,6 +79,8 @@ void StressGroup::buildMore() {
   m_sum->setForegroundRole(QPalette::PlaceholderText);
   m_sum->setWordWrap(true);
   body().addWidget(m_sum);
+  m_caution->setWordWrap(true);
+  body().addWidget(m_caution);
   m_addThird->setToolTip(
       tr("A normal stress out of the plane; it counts only in the absolute greatest shear"));
   m_addAxes->setToolTip(tr("Draw the element in the axes of an inclined member; no stress changes"));
@@ -128,6 +132,9 @@ void StressGroup::refresh() {
   const QString sum = sumLine();
   m_sum->setText(sum);
   m_sum->setVisible(!sum.isEmpty());
+  const QString caution = cautionLine();
+  m_caution->setText(caution);
+  m_caution->setVisible(!caution.isEmpty());
   setSummary(summary());
 }
 
@@ -137,6 +144,13 @@ QString StressGroup::sumLine() const {
   if (&state == stateOfCase(m_desk.readout(), caseId(m_desk.study())))
     return {};
   return tr("in %1: %2").arg(fromUtf8(state.combination), componentsOf(state));
+}
+
+QString StressGroup::cautionLine() const {
+  QStringList sentences;
+  for (const Text& caution : cautionsOf(m_desk.readout().state()))
+    sentences << shown(caution);
+  return sentences.join(QLatin1Char(' '));
 }
 
 QString StressGroup::summary() const {

@@ -35,6 +35,7 @@ private:
   void chooseCase(const std::string& id);
   void refresh();
   QString sumLine() const;
+  QString cautionLine() const;
   QString summary() const;
   QString componentsOf(const StateReading& state) const;
 
@@ -45,6 +46,7 @@ private:
   QList<EntryField*> m_fields;
   CaseStrip* m_strip;
   QLabel* m_sum;
+  QLabel* m_caution;
   QuietButton* m_addThird;
   QuietButton* m_addAxes;
 };

@@ -16,6 +16,7 @@ Table partOf(const Table& table, const QModelIndexList& cells) {
     columns.insert(static_cast<std::size_t>(cell.column()));
   }
   Table part;
+  part.cautions = table.cautions;
   for (const std::size_t column : columns)
     part.columns.push_back(table.columns[column]);
   for (const std::size_t at : rows) {

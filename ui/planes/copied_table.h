@@ -8,7 +8,7 @@
 
 namespace planewright {
 
-/// The rows and columns that the cells touch, with their headings.
+/// The rows and columns that the cells touch, with their headings and the table's cautions.
 Table partOf(const Table& table, const QModelIndexList& cells);
 
 /// One cell: a number at full precision as a spreadsheet reads it, else its words.

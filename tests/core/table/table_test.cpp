@@ -82,5 +82,30 @@ TEST(Clipboard, namesCannotBreakTheTable) {
   EXPECT_NE(text.find("σ<sub>n</sub> (MPa)"), std::string::npos);
 }
 
+/// The golden state in "G + S", of which the point lacks S.
+Study studyWithoutOneCase() {
+  return *edited(goldenStudy(),
+                 Edits{Insert{{Spot::loadCase, "S", {}}, {}}, Insert{{Spot::combination, "G + S", {}}, {}},
+                       Insert{{Spot::factor, "G + S", "G"}, {}}, Type{{Spot::factor, "G + S", "G"}, "1"},
+                       Insert{{Spot::factor, "G + S", "S"}, {}}, Type{{Spot::factor, "G + S", "S"}, "1"}});
+}
+
+TEST(Table, aCaseThatCountsAsZeroIsCopiedAsACaution) {
+  const Study study = studyWithoutOneCase();
+  const Readout readout = evaluate(study);
+  const std::string caution = "No stresses are given for case S: it counts as 0.";
+  for (const Table& table : {planesTable(study, readout, readout.state()),
+                             sweepTable(study, readout.state(), Angle::fromDegrees(45))}) {
+    EXPECT_TRUE(tabSeparated(table).ends_with("\n" + caution + "\n")) << tabSeparated(table);
+    EXPECT_TRUE(html(table).ends_with("</table>\n<p>" + caution + "</p>\n")) << html(table);
+  }
+}
+
+TEST(Table, withoutACautionTheRowsEndIt) {
+  const Study study = goldenStudy();
+  const Readout readout = evaluate(study);
+  EXPECT_TRUE(html(planesTable(study, readout, readout.state())).ends_with("</table>\n"));
+}
+
 } // namespace
 } // namespace planewright

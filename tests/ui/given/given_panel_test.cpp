@@ -213,6 +213,16 @@ TEST_F(GivenTest, severalCasesAreChosenInAStrip) {
   EXPECT_EQ(field("σx").edit().text(), "2 MPa");
 }
 
+TEST_F(GivenTest, aCaseThatThePointLacksIsSaidToCountAsZero) {
+  const QString caution = QStringLiteral("No stresses are given for case S: it counts as 0.");
+  EXPECT_FALSE(says(caution));
+  desk.replace(twoCases());
+  EXPECT_TRUE(says(caution)) << "the sum in 1.35 G + 1.5 S is without it";
+  button("case S").click();
+  type("σx", "10");
+  EXPECT_FALSE(says(caution));
+}
+
 TEST_F(GivenTest, escapeTakesBackACaseThatTheStayMade) {
   const Study before = twoCases();
   desk.replace(before);

@@ -19,6 +19,14 @@ TEST(CopiedTable, aPartHasTheTouchedRowsAndColumnsWithTheirHeadings) {
             "Plane\tnormal at\tσn (MPa)\nx face\t0\t80\nPrincipal σ1\t-22.5\t92.4264068711929\n");
 }
 
+TEST(CopiedTable, aPartKeepsTheCautions) {
+  Desk desk(planesStudy());
+  PlanesModel model(desk);
+  Table table = model.table();
+  table.cautions = {verbatim("Case S counts as 0.")};
+  EXPECT_EQ(tabSeparated(partOf(table, {model.index(x, 1)})), "normal at\n0\nCase S counts as 0.\n");
+}
+
 TEST(CopiedTable, aCellIsANumberAtFullPrecisionOrItsWords) {
   Desk desk(planesStudy());
   PlanesModel model(desk);

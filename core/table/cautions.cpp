@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/record/readout_cautions.h"
+#include "core/table/cautions.h"
 
 #include <algorithm>
 
