@@ -2,46 +2,15 @@
 #include "core/evidence/evidence.h"
 
 #include "core/evidence/check_row.h"
-#include "core/stress/circle.h"
+#include "core/evidence/quantity.h"
 
-#include <algorithm>
-#include <array>
+#include "core/quantity/angle.h"
+
 #include <cmath>
 
 namespace planewright {
 
 namespace {
-
-struct Computed {
-  PlaneStress stress;
-  std::optional<PlaneStress> turned;
-  Circle circle;
-};
-using Value = std::optional<double>;
-
-Value degrees(const std::optional<NormalAngle>& normal) {
-  return normal ? Value(normal->value.degrees()) : std::nullopt;
-}
-
-/// What a quantity is and how it follows; none where the state or its inputs do not have it.
-struct Quantity {
-  std::string_view word;
-  Value (*value)(const Computed&);
-  bool isAngle = false;
-};
-constexpr std::array quantities = {
-    Quantity{"sxp", [](const Computed& c) { return c.turned ? Value(c.turned->sx) : std::nullopt; }},
-    Quantity{"syp", [](const Computed& c) { return c.turned ? Value(c.turned->sy) : std::nullopt; }},
-    Quantity{"txyp", [](const Computed& c) { return c.turned ? Value(c.turned->txy) : std::nullopt; }},
-    Quantity{"s1", [](const Computed& c) { return Value(c.circle.s1); }},
-    Quantity{"s2", [](const Computed& c) { return Value(c.circle.s2); }},
-    Quantity{"tmax", [](const Computed& c) { return Value(c.circle.radius); }},
-    Quantity{"tabs", [](const Computed& c) { return Value(c.circle.tauAbsMax); }},
-    Quantity{"savg", [](const Computed& c) { return Value(c.circle.mean); }},
-    Quantity{"txy", [](const Computed& c) { return Value(c.stress.txy); }},
-    Quantity{"thp1", [](const Computed& c) { return degrees(c.circle.theta1); }, true},
-    Quantity{"thp2", [](const Computed& c) { return degrees(c.circle.theta2()); }, true},
-    Quantity{"ths", [](const Computed& c) { return degrees(c.circle.thetaTauMax); }, true}};
 
 double difference(bool isAngle, double a, double b) {
   return isAngle ? apart(Angle::fromDegrees(a), Angle::fromDegrees(b)).degrees() : std::abs(a - b);
@@ -50,9 +19,10 @@ double difference(bool isAngle, double a, double b) {
 /// Own arithmetic stands in the files with ten digits.
 constexpr double ownDigits = 1e-9;
 
-bool agreement(const CheckResult& result, bool isAngle, double scale) {
+bool agreement(const CheckResult& result, const Quantity& quantity) {
+  const bool isAngle = quantity.isAngle;
   if (result.status == CheckStatus::lastDigit || !result.printed)
-    return difference(isAngle, result.computed, result.recomputed) <= ownDigits * (isAngle ? 180 : scale);
+    return difference(isAngle, result.computed, result.recomputed) <= ownDigits * quantity.scale;
   // A value printed exactly on the edge of its tolerance agrees.
   const double tolerance = result.tolerance * (1 + ownDigits);
   if (result.status == CheckStatus::sign)
@@ -60,22 +30,15 @@ bool agreement(const CheckResult& result, bool isAngle, double scale) {
   return difference(isAngle, result.computed, *result.printed) <= tolerance;
 }
 
-Result<CheckResult> judged(CheckRow row) {
-  const auto quantity = std::ranges::find(quantities, std::string_view(row.result.quantity), &Quantity::word);
-  Computed computed{row.stress, std::nullopt, circleOf(row.stress)};
-  if (row.theta)
-    computed.turned = inTurnedAxes(row.stress, *row.theta);
-  const Value value = quantity == quantities.end() ? std::nullopt : quantity->value(computed);
-  if (!value)
-    return tl::unexpected(Problem{{},
-                                  0,
-                                  0,
-                                  row.result.quantity,
-                                  PW_TEXT("Check", "This quantity does not follow from these inputs."),
-                                  {}});
-  row.result.computed = *value;
-  row.result.agrees = agreement(row.result, quantity->isAngle, scaleOf(row.stress));
-  return std::move(row.result);
+Result<CheckResult> judged(CheckResult result) {
+  const CheckInputs inputs(result.inputs);
+  Result<Quantity> quantity = inputs.word("shape") ? quantityOfSection(inputs, result.quantity, result.unit)
+                                                   : quantityOfState(inputs, result.quantity);
+  if (!quantity)
+    return tl::unexpected(std::move(quantity).error());
+  result.computed = quantity->value;
+  result.agrees = agreement(result, *quantity);
+  return result;
 }
 
 } // namespace
@@ -101,7 +64,21 @@ Results<std::vector<CheckResult>> recomputed(std::span<const std::string_view> r
 }
 
 Results<std::vector<CheckResult>> publishedChecks() {
-  return recomputed(shippedChecks());
+  std::vector<CheckResult> results;
+  Problems problems;
+  for (const ShippedChecks& file : shippedChecks()) {
+    Results<std::vector<CheckResult>> checks = recomputed(file.rows);
+    if (checks)
+      results.insert(results.end(), checks->begin(), checks->end());
+    else
+      for (Problem& problem : checks.error()) {
+        problem.place = file.name;
+        problems.push_back(std::move(problem));
+      }
+  }
+  if (!problems.empty())
+    return tl::unexpected(std::move(problems));
+  return results;
 }
 
 } // namespace planewright

@@ -16,14 +16,14 @@ enum class CheckStatus {
   noPrintedValue ///< "NO_PRINTED_VALUE": only the inputs are published; no outside check of a number
 };
 
-/// One published value beside what core/stress computes from the published inputs, both in `unit`.
+/// One published value beside what the program computes from the published inputs, both in `unit`.
 struct CheckResult {
   std::string id;
   std::string source;  ///< the work
   std::string locator; ///< where in the work
   std::string basis;   ///< "read in the work itself", "from memory" ...
   std::string inputs;
-  std::string quantity; ///< sxp syp txyp s1 s2 tmax tabs savg thp1 thp2 ths txy
+  std::string quantity; ///< a word of core/evidence/quantity.h: "s1", "thp1", "Iz"
   std::string unit;
   CheckStatus status = CheckStatus::ok;
   std::optional<double> printed = std::nullopt;
@@ -37,10 +37,15 @@ struct CheckResult {
 /// read, and quantities that nothing computes, are Problems with their line: no row is passed over.
 Results<std::vector<CheckResult>> recomputed(std::span<const std::string_view> rows);
 
-/// The rows of the shipped file plane_stress_transform.csv, its heading first.
-std::span<const std::string_view> shippedChecks();
+/// A shipped file of checks.
+struct ShippedChecks {
+  std::string name;                       ///< "section_tables.csv"
+  std::span<const std::string_view> rows; ///< its heading first
+};
+/// The shipped files in the order in which they are reported.
+std::span<const ShippedChecks> shippedChecks();
 
-/// The shipped checks, recomputed.
+/// The shipped checks of all files, recomputed.
 Results<std::vector<CheckResult>> publishedChecks();
 
 } // namespace planewright

@@ -84,6 +84,34 @@ TEST(Evidence, theShearFollowsWhereS1IsGiven) {
   EXPECT_TRUE(agrees("sx=8; sy=0; s1=10", "s1,ksi,10,1e-9,10,OK"));
 }
 
+TEST(Evidence, sectionsAreChecksToo) {
+  const std::string beam = "shape=rectangle; b=80; h=300";
+  EXPECT_TRUE(agrees(beam, "Iz,cm4,18000,0.5,18000,OK"));
+  EXPECT_FALSE(agrees(beam, "Iz,cm4,18001,0.5,18000,OK"));
+  EXPECT_TRUE(agrees(beam + "; Mz=30e6; at=bottom", "sx,MPa,25,0.01,25,OK"));
+  EXPECT_TRUE(agrees(beam + "; Vy=16e3; z=40", "txy,kPa,1000,1,1000,OK"));
+  EXPECT_TRUE(agrees(beam + "; Vy=16e3; rule=slope; z=40", "txy,MPa,-1,0.01,-1,OK"));
+  EXPECT_TRUE(agrees(beam + "; Vz=16e3; y=150; view=top", "txy,MPa,-1,0.01,-1,OK"));
+}
+
+TEST(Evidence, sectionsThatDoNotReadAreProblems) {
+  const auto problem = [](const std::string& inputs, const std::string& quantity = "A") {
+    return problemOf(row(inputs, quantity + ",mm2,1,1,1,OK"));
+  };
+  EXPECT_EQ(problem("shape=oval; b=1"), "line 2: Checks know no such shape.");
+  EXPECT_EQ(problem("shape=tabled; A=1"), "line 2: Checks know no such shape.");
+  EXPECT_EQ(problem("shape=circle; d=4O"), "line 2: This input is no number.");
+  EXPECT_EQ(problem("shape=circle; d=40; N=1k"), "line 2: This input is no number.");
+  EXPECT_EQ(problem("shape=circle; d=40; view=back"), "line 2: This view is not known.");
+  EXPECT_EQ(problem("shape=circle; d=40; rule=down"), "line 2: This rule of signs is not known.");
+  EXPECT_EQ(problem("shape=circle; d=40; at=edge"), "line 2: This place in the section is not known.");
+  EXPECT_EQ(problem("shape=circle"), "line 2: The diameter is missing.");
+  EXPECT_EQ(problem("shape=circle; d=40", "thp1"),
+            "line 2: This quantity does not follow from these inputs.");
+  EXPECT_EQ(problem("shape=t; h=90; b=60; t_w=5; t_f=8", "Wpl"),
+            "line 2: This quantity does not follow from these inputs.");
+}
+
 TEST(Evidence, whatDoesNotReadIsAProblemAndNeverPassedOver) {
   EXPECT_EQ(problemOf("X1,too,short"), "line 2: This row has not as many fields as its heading.");
   EXPECT_EQ(problemOf(row(state, "s3,MPa,1,1,1,OK")),
