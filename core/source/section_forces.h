@@ -1,9 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/source/contribution.h"
 #include "core/source/shear_at.h"
 #include "core/source/torsion.h"
-#include "core/stress/plane_stress.h"
 
 namespace planewright {
 
@@ -48,15 +48,7 @@ struct FibreStress {
 Result<FibreStress> stressAt(const SectionModel& model, const SectionForces& forces, const Fibre& fibre,
                              ShearRule rule);
 
-/// What section forces add to the stress at a point, with the working that a checker follows.
-struct Contribution {
-  PlaneStress stress;
-  double axial = 0;   ///< N/A and bending are kept apart, since strengths differ
-  double bending = 0; ///< axial + bending = stress.sx
-  std::vector<Step> steps;
-  std::vector<Text> signRules; ///< of the forces that act
-  std::vector<Text> cautions;
-};
+/// What section forces add to the stress at a point; bending is the part of sx that moments make.
 Results<Contribution> contributionOf(const Section& section, const SectionForces& forces, const Fibre& fibre,
                                      ShearRule rule, const WrittenUnits& units = {});
 

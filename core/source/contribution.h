@@ -1,0 +1,20 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/stress/plane_stress.h"
+#include "core/working/step.h"
+
+namespace planewright {
+
+/// What one source adds to the stress of a case at a point, MPa, tension positive, in the axes of the point,
+/// with the working that a checker follows.
+struct Contribution {
+  PlaneStress stress;
+  double axial = 0;   ///< part of sx from a normal force: kept apart from bending, since strengths differ
+  double bending = 0; ///< part of sx from bending moments
+  std::vector<Step> steps;
+  std::vector<Text> signRules; ///< what the signs of the typed values mean
+  std::vector<Text> cautions;  ///< where the theory ends
+};
+
+} // namespace planewright
