@@ -3,6 +3,8 @@
 
 #include "core/quantity/format.h"
 
+#include <cmath>
+
 namespace planewright {
 
 namespace {
@@ -55,11 +57,18 @@ Edits EarDrag::moved(const Stage& stage, QPointF pointer) {
 
 Edits xFaceEdits(const Study& study, const Readout& readout, const std::string& caseId, QPointF values,
                  double step) {
-  const auto typed = [&](Spot spot, double value) {
+  const QPointF present = plotted(study, planeAt(readout.state(), {Angle()}).traction);
+  Edits edits;
+  // What stands still keeps the text that was typed for it.
+  const auto move = [&](Spot spot, double value, double from) {
+    if (std::abs(value - from) < step / 2)
+      return;
     const std::string number = exactNumber(roundedTo(value, decadeBelow(step)));
-    return Type{stressPlace(readout, caseId, spot), number + " " + study.units.stress};
+    edits.push_back(Type{stressPlace(readout, caseId, spot), number + " " + study.units.stress});
   };
-  return {typed(Spot::sx, values.x()), typed(Spot::txy, values.y())};
+  move(Spot::sx, values.x(), present.x());
+  move(Spot::txy, values.y(), present.y());
+  return edits;
 }
 
 } // namespace planewright

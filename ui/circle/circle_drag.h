@@ -47,8 +47,8 @@ private:
   Edits m_before;
 };
 
-/// Puts the x mark at this pair of values in the study's stress unit: each a number rounded to the power of
-/// ten next below `step`, with its unit.
+/// Puts the x mark at this pair of values in the study's stress unit: each that moves by half a step or more
+/// a number rounded to the power of ten next below `step`, with its unit.
 Edits xFaceEdits(const Study& study, const Readout& readout, const std::string& caseId, QPointF values,
                  double step);
 

@@ -97,6 +97,7 @@ bool Filing::writeTo(const QString& path) {
   m_path = path;
   m_desk.undoStack()->setClean();
   Q_EMIT fileChanged(m_path);
+  m_desk.say(tr("Saved as %1.").arg(QFileInfo(m_path).fileName()));
   return true;
 }
 

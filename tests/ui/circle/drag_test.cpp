@@ -184,6 +184,13 @@ TEST(Ear, TypesNumbersAsFineAsThePixelsInTheStudysUnit) {
   EXPECT_GT(valueOf(panel.typed().sx), valueOf("11 ksi"));
 }
 
+TEST(Ear, WhatStandsStillKeepsItsTypedText) {
+  Panel panel(studyOf("160 kN/(2000 mm^2)", "20 MPa", "-30.0 MPa"));
+  panel.drag(Handle::ear, *panel.plot.handleAt(Handle::ear) + QPointF(24, 0));
+  EXPECT_NE(panel.typed().sx, "160 kN/(2000 mm^2)");
+  EXPECT_EQ(panel.typed().txy, "-30.0 MPa");
+}
+
 TEST(Ear, AnUnsteadyClickChangesNothing) {
   const Study study = studyOf("160 kN/(2000 mm^2)", "20 MPa", "-30 MPa");
   Panel panel(study);

@@ -5,6 +5,7 @@
 #include "ui/shell/worked_example.h"
 
 #include <QFile>
+#include <QSignalSpy>
 
 namespace planewright {
 namespace {
@@ -34,7 +35,9 @@ protected:
 TEST_F(FilingTest, savingAsksForANameOnceAndReadsBackEqual) {
   type(m_desk, Spot::sx, "-18.6 kN/(90 mm*240 mm)");
   m_savePath = file("beam.planewright");
+  QSignalSpy said(&m_desk, &Desk::said);
   ASSERT_TRUE(m_filing.save());
+  EXPECT_EQ(said.last().first().toString(), "Saved as beam.planewright.");
   EXPECT_EQ(m_filing.path(), m_savePath);
   EXPECT_EQ(m_filing.name(), "beam");
   EXPECT_FALSE(m_filing.hasChanges());
