@@ -140,8 +140,10 @@ void FigureDialog::refresh() {
   for (QPushButton* button : m_needPicture)
     button->setEnabled(made.has_value());
   m_ending->setText(QStringLiteral(".") + QString::fromLatin1(endingOf(settings.format)));
-  if (!m_name->isModified())
+  if (!m_name->isModified()) {
     m_name->setText(figureName(m_desk, m_studyFile));
+    m_name->setCursorPosition(0);
+  }
   if (made)
     say(givenUp(*made), false);
   else
@@ -236,10 +238,12 @@ void FigureDialog::copy() {
 
 void FigureDialog::print() {
   const Result<Picture> made = picture();
-  const Result<void> printed =
+  const Result<QString> printed =
       made ? printAsked(*made, m_options->settings(), this) : tl::unexpected(made.error());
   if (!printed)
     say(shown(printed.error()), true);
+  else if (!printed->isEmpty())
+    say(*printed, false);
 }
 
 } // namespace planewright

@@ -6,6 +6,7 @@
 #include "ui/paint/export.h"
 
 #include <QClipboard>
+#include <QCoreApplication>
 #include <QFileInfo>
 #include <QGuiApplication>
 #include <QImage>
@@ -14,6 +15,8 @@
 #include <QPrinter>
 #include <QRegularExpression>
 #include <QSettings>
+
+#include <cmath>
 
 namespace planewright {
 
@@ -102,16 +105,24 @@ Result<void> copyFigure(const Desk& desk, const QString& studyFile) {
   return {};
 }
 
-Result<void> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent) {
+QString printedWords(double part) {
+  if (part >= 1)
+    return QCoreApplication::translate("Figure", "The figure is printed at its true size.");
+  return QCoreApplication::translate(
+             "Figure", "The paper does not hold the figure: it is printed at %1 % of its true size.")
+      .arg(static_cast<int>(std::floor(100 * part)));
+}
+
+Result<QString> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent) {
   QPrinter printer(QPrinter::HighResolution);
   printer.setDocName(fromUtf8(picture.title));
   QPrintDialog dialog(&printer, parent);
   if (dialog.exec() != QDialog::Accepted)
-    return {};
-  return printPicture(printer, picture, paletteOf(settings));
+    return QString();
+  return printPicture(printer, picture, paletteOf(settings)).map(printedWords);
 }
 
-Result<void> printFigure(const Desk& desk, const QString& studyFile, QWidget* parent) {
+Result<QString> printFigure(const Desk& desk, const QString& studyFile, QWidget* parent) {
   const FigureSettings settings = rememberedFigure(QSettings());
   const Result<Picture> picture = figureFor(desk, settings, studyFile);
   if (!picture)

@@ -21,8 +21,12 @@ Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& setti
 /// The picture for the clipboard: SVG, PDF and a pixel image, so that a document takes the best it knows.
 Result<std::unique_ptr<QMimeData>> mimeOf(const Picture& picture, const FigureSettings& settings);
 
-/// Asks for a printer and prints the picture at true size. Done also when the user thinks better of it.
-Result<void> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent);
+/// What is said of a figure that was printed at this part of its true size.
+QString printedWords(double part);
+
+/// Asks for a printer and prints the picture, at true size where the paper holds it; what is to be said about
+/// it, nothing when the user thinks better of it.
+Result<QString> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent);
 
 /// Study, point and combination joined to the name of a file, without an ending.
 QString figureName(const Desk& desk, const QString& studyFile);
@@ -31,6 +35,6 @@ QString figureName(const Desk& desk, const QString& studyFile);
 Result<void> copyFigure(const Desk& desk, const QString& studyFile);
 
 /// Prints the figure, arranged as the last one was (File, Print).
-Result<void> printFigure(const Desk& desk, const QString& studyFile, QWidget* parent);
+Result<QString> printFigure(const Desk& desk, const QString& studyFile, QWidget* parent);
 
 } // namespace planewright

@@ -125,7 +125,7 @@ Result<QByteArray> pdfOf(const Picture& picture, Palette palette) {
   return bytes;
 }
 
-Result<void> printPicture(QPrinter& printer, const Picture& picture, Palette palette) {
+Result<double> printPicture(QPrinter& printer, const Picture& picture, Palette palette) {
   QPainter painter;
   if (!painter.begin(&printer))
     return tl::unexpected(Problem{printer.printerName().toStdString(), 0, 0, "",
@@ -135,7 +135,7 @@ Result<void> printPicture(QPrinter& printer, const Picture& picture, Palette pal
   const double fit = std::min({1.0, room.width() / picture.width, room.height() / picture.height});
   painter.scale(fit * printer.logicalDpiX() / mmPerInch, fit * printer.logicalDpiY() / mmPerInch);
   paintPicture(painter, picture, palette);
-  return {};
+  return fit;
 }
 
 } // namespace planewright

@@ -21,7 +21,7 @@ Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi);
 Result<QByteArray> pdfOf(const Picture& picture, Palette palette);
 
 /// Prints the picture at true size at the top left of the printable page, made smaller only when it does not
-/// fit. A Problem when the printer does not start.
-Result<void> printPicture(QPrinter& printer, const Picture& picture, Palette palette);
+/// fit: gives the part of its true size, 1 or less. A Problem when the printer does not start.
+Result<double> printPicture(QPrinter& printer, const Picture& picture, Palette palette);
 
 } // namespace planewright

@@ -172,8 +172,11 @@ void MainWindow::copyFigureNow() {
 
 void MainWindow::printFigureNow() {
   settleDrafts();
-  if (const Result<void> printed = printFigure(m_desk, m_filing->path(), this); !printed)
+  const Result<QString> printed = printFigure(m_desk, m_filing->path(), this);
+  if (!printed)
     m_trouble->say(shown(printed.error()), Strip::Tone::wrong);
+  else if (!printed->isEmpty())
+    m_desk.say(*printed);
 }
 
 void MainWindow::showAbout() {

@@ -22,6 +22,7 @@
 
 #include <gtest/gtest.h>
 
+#include <algorithm>
 #include <stdexcept>
 
 namespace planewright {
@@ -209,6 +210,25 @@ TEST_F(Arrange, CopiesLinesAndPixels) {
   EXPECT_TRUE(mime->data(QStringLiteral("image/svg+xml")).startsWith("<?xml"));
   EXPECT_TRUE(mime->data(QStringLiteral("application/pdf")).startsWith("%PDF-"));
   EXPECT_EQ(qvariant_cast<QImage>(mime->imageData()).width(), qRound(160 / 25.4 * 300));
+}
+
+TEST_F(Arrange, ShowsTheStartOfALongFileName) {
+  FigureDialog dialog(desk);
+  dialog.setStudyFile(
+      path("a-study-whose-name-is-longer-than-the-field-for-the-name-of-a-figure.planewright"));
+  dialog.show();
+  const QList<QLineEdit*> edits = dialog.findChildren<QLineEdit*>();
+  const auto name = std::ranges::find_if(
+      edits, [](const QLineEdit* edit) { return edit->text().startsWith(QStringLiteral("a-study")); });
+  ASSERT_NE(name, edits.end());
+  EXPECT_EQ((*name)->cursorPosition(), 0);
+}
+
+TEST(PrintedWords, SayWhenTheFigureIsSmallerThanItsSize) {
+  EXPECT_EQ(printedWords(1), "The figure is printed at its true size.");
+  EXPECT_EQ(printedWords(0.8749),
+            "The paper does not hold the figure: it is printed at 87 % of its true size.");
+  EXPECT_TRUE(printedWords(0.9999).contains(QStringLiteral("99 %"))) << "never more than it is";
 }
 
 TEST_F(Arrange, ShowsTheFigureOnWhiteInADarkWindow) {

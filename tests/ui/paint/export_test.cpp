@@ -143,7 +143,9 @@ TEST(Print, IsOfTrueSizeWhereThePageHoldsIt) {
     Picture picture = samplePicture();
     picture.width = width;
     picture.parts = {Path{{{2, 8}, {width - 2, 8}}, false, Pen{Role::ink, 0.5, Dash::solid}, {}}};
-    ASSERT_TRUE(printPicture(printer, picture, Palette::paper));
+    const Result<double> part = printPicture(printer, picture, Palette::paper);
+    ASSERT_TRUE(part);
+    EXPECT_NEAR(*part, expected / (width - 4), 0.001) << width;
     EXPECT_NEAR(inkedWidth(folder, folder.filePath(QStringLiteral("print.pdf"))), expected, 0.5) << width;
   }
 }
