@@ -198,6 +198,8 @@ void EntryField::dropDraft() {
   m_patience.stop();
   m_hasDraft = false;
   m_edit->setText(fromUtf8(m_known));
+  if (!m_edit->hasFocus())
+    m_edit->setCursorPosition(0); // a long text shows its start
   complain(std::nullopt);
   showEcho(standingEcho(), false);
 }

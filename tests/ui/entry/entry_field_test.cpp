@@ -272,6 +272,16 @@ TEST_F(EntryFieldTest, undoDuringAStayBeginsAnotherStep) {
   EXPECT_EQ(kept(), "0 MPa");
 }
 
+TEST_F(EntryFieldTest, aLongTextShowsItsStartWhileNobodyTypes) {
+  desk.request({Type{sx, "1.35*12.5 kN/(90 mm*240 mm) + 1.5*3.25 kN/(90 mm*240 mm)"}}, desk.newGesture(), {});
+  EXPECT_EQ(field.edit().cursorPosition(), 0);
+  enter();
+  type("1.35*12.5 kN/(90 mm*240 mm) + 1.5*4.25 kN/(90 mm*240 mm)");
+  EXPECT_GT(field.edit().cursorPosition(), 0);
+  leave();
+  EXPECT_EQ(field.edit().cursorPosition(), 0);
+}
+
 TEST_F(EntryFieldTest, theWheelChangesNothing) {
   enter();
   QWheelEvent wheel({5, 5}, {5, 5}, {}, {0, 120}, Qt::NoButton, Qt::NoModifier, Qt::NoScrollPhase, false);
