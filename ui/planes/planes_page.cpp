@@ -7,6 +7,7 @@
 #include "ui/planes/planes_model.h"
 
 #include <QAction>
+#include <QApplication>
 #include <QVBoxLayout>
 
 namespace planewright {
@@ -24,6 +25,7 @@ PlanesPage::PlanesPage(Desk& desk, QWidget* parent)
   connect(m_table, &PlaneTable::deletePressed, this, &PlanesPage::remove);
   connect(m_table, &PlaneTable::otherPressed, m_model, &PlanesModel::swapSolution);
   connect(&m_table->delegate(), &PlaneDelegate::noteClicked, m_model, &PlanesModel::swapSolution);
+  connect(m_model, &QAbstractItemModel::rowsInserted, this, &PlanesPage::showWatchRow);
   buildMenu();
   m_table->setCurrentIndex(m_model->index(0, static_cast<int>(PlaneColumn::normal)));
 }
@@ -62,6 +64,13 @@ void PlanesPage::goTo(int row) {
 
 void PlanesPage::watch() {
   m_table->setCurrentIndex(m_model->index(m_model->watchReading(), 0));
+}
+
+// Whoever watches one plane may want to watch another.
+void PlanesPage::showWatchRow() {
+  const QWidget* focused = QApplication::focusWidget();
+  if (focused == m_table || m_table->isAncestorOf(focused))
+    m_table->scrollToBottom();
 }
 
 void PlanesPage::remove(int row) {

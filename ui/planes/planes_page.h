@@ -22,6 +22,7 @@ public:
 private:
   void goTo(int row);
   void watch();
+  void showWatchRow();
   void remove(int row);
   void buildMenu();
   void edit(int row, int column);

@@ -221,6 +221,31 @@ TEST_F(PlanesPanelTest, tabLeavesTheTable) {
   EXPECT_FALSE(table.hasFocus());
 }
 
+TEST_F(PlanesPanelTest, theRowToTypeIntoCanBeSeenWhole) {
+  for (int planes = 2; planes < 8; ++planes) {
+    model.watchReading();
+    stand(watch + planes - 1, PlaneColumn::plane);
+    for (int height = 240; height < 320; height += 7) {
+      panel.resize(830, height);
+      QCoreApplication::processEvents();
+      table.scrollToBottom();
+      const QRect last = table.visualRect(model.index(model.rowCount() - 1, 0));
+      EXPECT_TRUE(table.viewport()->rect().contains(QRect(last.topLeft(), QSize(1, last.height()))))
+          << planes << " planes, " << height << " px: " << last.top() << " to " << last.bottom() << " in "
+          << table.viewport()->height();
+    }
+  }
+}
+
+TEST_F(PlanesPanelTest, theRowToTypeIntoIsShownWholeAsSoonAsAPlaneIsWatched) {
+  for (int planes = 2; planes < 8; ++planes) {
+    press(Qt::Key_Insert);
+    QCoreApplication::processEvents();
+    const QRect last = table.visualRect(model.index(model.rowCount() - 1, 0));
+    EXPECT_TRUE(table.viewport()->rect().contains(QRect(last.topLeft(), QSize(1, last.height())))) << planes;
+  }
+}
+
 TEST_F(PlanesPanelTest, noNumberIsCutAndEightRowsFit) {
   for (const int width : {760, 830, 1300}) {
     panel.resize(width, 300);
