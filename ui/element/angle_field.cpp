@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/element/angle_field.h"
 
+#include "ui/entry/window_keys.h"
 #include "ui/look/look.h"
 
 #include <QKeyEvent>
@@ -21,6 +22,15 @@ void AngleField::refuse(const QString& why) {
   setPalette(wrong);
   setToolTip(why);
   selectAll();
+}
+
+bool AngleField::event(QEvent* event) {
+  if (event->type() == QEvent::ShortcutOverride &&
+      isForWindow(*static_cast<QKeyEvent*>(event), isUndoAvailable(), isRedoAvailable())) {
+    event->ignore();
+    return false;
+  }
+  return QLineEdit::event(event);
 }
 
 bool AngleField::focusNextPrevChild(bool) {

@@ -20,6 +20,7 @@ signals:
   void offered(const QString& text);
 
 protected:
+  bool event(QEvent* event) override;
   bool focusNextPrevChild(bool next) override;
   void keyPressEvent(QKeyEvent* event) override;
   void focusOutEvent(QFocusEvent* event) override;

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/entry/draft_edit.h"
 
+#include "ui/entry/window_keys.h"
 #include "ui/look/look.h"
 
 #include <QFocusEvent>
@@ -54,15 +55,10 @@ void DraftEdit::selectPiece(const std::string& quoted, int column) {
 }
 
 bool DraftEdit::event(QEvent* event) {
-  if (event->type() == QEvent::ShortcutOverride) {
-    auto* key = static_cast<QKeyEvent*>(event);
-    // On some platforms Ctrl+E means the end of the line; here it is the figure, from every field.
-    const bool figure = key->key() == Qt::Key_E && key->modifiers() == Qt::ControlModifier;
-    if (figure || (key->matches(QKeySequence::Undo) && !isUndoAvailable()) ||
-        (key->matches(QKeySequence::Redo) && !isRedoAvailable())) {
-      event->ignore();
-      return false;
-    }
+  if (event->type() == QEvent::ShortcutOverride &&
+      isForWindow(*static_cast<QKeyEvent*>(event), isUndoAvailable(), isRedoAvailable())) {
+    event->ignore();
+    return false;
   }
   return QLineEdit::event(event);
 }

@@ -2,9 +2,11 @@
 #include "ui/given/note_field.h"
 
 #include "ui/entry/entry_field.h"
+#include "ui/entry/window_keys.h"
 #include "ui/look/look.h"
 
 #include <QFocusEvent>
+#include <QKeyEvent>
 #include <QPainter>
 
 namespace planewright {
@@ -34,6 +36,16 @@ NoteField::NoteField(Desk& desk, QWidget* parent) : QPlainTextEdit(parent), m_de
 
 QSize NoteField::sizeHint() const {
   return {160, shownLines * fontMetrics().lineSpacing() + 14};
+}
+
+bool NoteField::event(QEvent* event) {
+  if (event->type() == QEvent::ShortcutOverride &&
+      isForWindow(*static_cast<QKeyEvent*>(event), document()->isUndoAvailable(),
+                  document()->isRedoAvailable())) {
+    event->ignore();
+    return false;
+  }
+  return QPlainTextEdit::event(event);
 }
 
 void NoteField::focusInEvent(QFocusEvent* event) {

@@ -19,6 +19,7 @@ public:
   QSize minimumSizeHint() const override { return sizeHint(); }
 
 protected:
+  bool event(QEvent* event) override;
   void focusInEvent(QFocusEvent* event) override;
   void focusOutEvent(QFocusEvent* event) override;
   void paintEvent(QPaintEvent* event) override;

@@ -38,6 +38,19 @@ TEST_F(NoteFieldTest, tabLeavesIt) {
   EXPECT_FALSE(note.hasFocus());
 }
 
+TEST_F(NoteFieldTest, leavesTheKeysOfTheWindowToIt) {
+  const auto takes = [this](int key) {
+    QKeyEvent event(QEvent::ShortcutOverride, key, Qt::ControlModifier);
+    event.ignore();
+    QCoreApplication::sendEvent(&note, &event);
+    return event.isAccepted();
+  };
+  EXPECT_FALSE(takes(Qt::Key_E));
+  EXPECT_FALSE(takes(Qt::Key_Z)) << "nothing is typed here";
+  QTest::keyClicks(&note, "K");
+  EXPECT_TRUE(takes(Qt::Key_Z));
+}
+
 /// With a second point to go to.
 struct NoteOfTwoPoints : NoteFieldTest {
   NoteOfTwoPoints() {

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/record/study_file.h"
 #include "shell_test.h"
+#include "ui/circle/circle_plot.h"
 #include "ui/circle/circle_view.h"
 #include "ui/element/element_view.h"
 #include "ui/given/given_panel.h"
@@ -21,6 +22,7 @@
 #include <QLineEdit>
 #include <QMenu>
 #include <QMimeData>
+#include <QPlainTextEdit>
 #include <QPushButton>
 #include <QSplitter>
 #include <QTest>
@@ -275,6 +277,47 @@ TEST_F(WindowTest, tabGoesThroughEveryAreaAndComesBackToWhereItWas) {
       EXPECT_TRUE(visited.contains(area)) << area->metaObject()->className();
     EXPECT_LE(visited.size(), areas.size() + 1) << "an area is entered twice";
   }
+}
+
+/// The keys of the window that a field with the focus would keep for itself.
+QStringList keptFromWindow(const MainWindow& window) {
+  QStringList kept;
+  for (const QAction* action : window.findChildren<QAction*>()) {
+    if (action->shortcut().isEmpty() || action->shortcut() == QKeySequence::Copy)
+      continue;
+    const QKeyCombination keys = action->shortcut()[0];
+    QKeyEvent event(QEvent::ShortcutOverride, keys.key(), keys.keyboardModifiers());
+    event.ignore();
+    QApplication::sendEvent(QApplication::focusWidget(), &event);
+    if (event.isAccepted())
+      kept << action->shortcut().toString();
+  }
+  return kept;
+}
+
+TEST_F(WindowTest, theKeysOfTheWindowWorkFromEveryField) {
+  MainWindow& window = shown();
+  const auto expectAll = [&](const char* field) {
+    EXPECT_TRUE(qobject_cast<QLineEdit*>(QApplication::focusWidget()) ||
+                qobject_cast<QPlainTextEdit*>(QApplication::focusWidget()))
+        << field;
+    EXPECT_EQ(keptFromWindow(window).join(' ').toStdString(), "") << field;
+    window.circle().plot().setFit(Fit::allCombinations);
+    QTest::keyClick(QApplication::focusWidget(), Qt::Key_0, Qt::ControlModifier);
+    EXPECT_EQ(window.circle().plot().fit(), Fit::thisCircle) << field;
+  };
+  expectAll("stress");
+  window.element().setFocus();
+  QTest::keyClick(&window.element(), Qt::Key_Return);
+  expectAll("angle on the element");
+  window.planes().setFocus();
+  QTest::keyClick(QApplication::focusWidget(), Qt::Key_F2);
+  expectAll("cell of the table");
+  for (auto* fold : window.given().findChildren<QAbstractButton*>())
+    if (fold->text() == QStringLiteral("Notes"))
+      fold->click();
+  window.given().findChild<QPlainTextEdit*>()->setFocus();
+  expectAll("note");
 }
 
 TEST_F(WindowTest, pickersShowAnotherPointWithoutAStep) {
