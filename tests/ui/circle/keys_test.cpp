@@ -50,17 +50,6 @@ TEST(CircleKeys, OnTwoPointsAreTwoSteps) {
   EXPECT_EQ(panel.desk.study().points.front().reading, "26 deg");
 }
 
-TEST(CircleKeys, AfterUndoBeginAnotherStep) {
-  Panel panel(studyOf());
-  panel.key(Qt::Key_Right);
-  panel.key(Qt::Key_Tab);
-  panel.key(Qt::Key_Right);
-  panel.desk.undoStack()->undo();
-  panel.key(Qt::Key_Backtab);
-  panel.key(Qt::Key_Right);
-  EXPECT_EQ(panel.steps(), 2);
-}
-
 TEST(CircleKeys, LeaveAloneWhatIsNotTheirs) {
   Panel panel(studyOf());
   panel.key(Qt::Key_PageUp, Qt::AltModifier);
