@@ -67,15 +67,15 @@ QString told(const Study& study, const Place& place) {
 QString changeInWords(const Study& before, const Study& after) {
   const std::vector<Place> changed = changedPlaces(before, after);
   const auto holdsWord = [](const Place& place) { return rowOf(place.spot).holds == Holds::word; };
-  if (changed.empty() || changed.size() > 2 || std::ranges::any_of(changed, holdsWord))
+  const auto isNew = [&](const Place& place) { return !textAt(before, place); };
+  if (changed.empty() || changed.size() > 2 || std::ranges::any_of(changed, holdsWord) ||
+      std::ranges::any_of(changed, isNew))
     return {};
   if (changed.size() == 2)
     return capital(QCoreApplication::translate("ChangeWords", "%1 now %2, %3 now %4")
                        .arg(nameOf(after, changed[0]), told(after, changed[0]), nameOf(after, changed[1]),
                             told(after, changed[1])));
   const Place& place = changed.front();
-  if (!textAt(before, place))
-    return {};
   return capital(QCoreApplication::translate("ChangeWords", "%1 now %2, was %3")
                      .arg(nameOf(after, place), told(after, place), told(before, place)));
 }

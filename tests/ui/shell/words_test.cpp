@@ -47,6 +47,14 @@ TEST_F(ShellWords, whatIsShownDoesNotCountAsAChange) {
   EXPECT_EQ(changeInWords(before, desk.study()), "σx now 8 MPa, was 0 MPa");
 }
 
+TEST_F(ShellWords, whatIsNewIsNoChangeOfATextBefore) {
+  Desk desk(newStudy());
+  const Study before = desk.study();
+  desk.request({Insert{{Spot::plane, "P1", "scarf"}, {}}}, desk.newGesture(), {});
+  ASSERT_NE(desk.study(), before);
+  EXPECT_EQ(changeInWords(before, desk.study()), "");
+}
+
 TEST_F(ShellWords, longTextsAreCut) {
   Desk desk(newStudy());
   const Study before = desk.study();
