@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/source/fibre.h"
 
+#include <cmath>
+
 namespace planewright {
 
 template <>
@@ -46,7 +48,8 @@ public:
 
 private:
   void add(Text name, double y, double z, View view = View::side) {
-    m_places.push_back({std::move(name), {y, z, view}});
+    const auto cleared = [&](double place) { return std::abs(place) <= m_region.slack() ? 0 : place; };
+    m_places.push_back({std::move(name), {cleared(y), cleared(z), view}});
   }
 
   std::vector<Span> inside(double y) const { return spansAt(m_region, y, y > 0 ? Side::below : Side::above); }
@@ -79,10 +82,23 @@ private:
         addAxis();
         axisAdded = true;
       }
-      if (hasJunctions && *level<m_region.yHigh&& * level> m_region.yLow)
+      if (hasJunctions && isJunction(*level))
         addWall(*level, *level > 0 ? PW_TEXT("Source", "upper junction, near face")
                                    : PW_TEXT("Source", "lower junction, near face"));
     }
+  }
+
+  bool isJunction(double level) const {
+    return m_region.yLow < level && level < m_region.yHigh && !isUnderFillet(level);
+  }
+
+  /// Where root fillets meet a flange no face of the web is seen; it begins at their other end.
+  bool isUnderFillet(double level) const {
+    if (m_section.shape != SectionShape::i || m_section.size("r") == 0)
+      return false;
+    const double slack = m_region.slack();
+    return std::abs(m_region.yHigh - m_section.size("t_top") - level) <= slack ||
+           std::abs(m_region.yLow + m_section.size("t_bottom") - level) <= slack;
   }
 
   void addAxis() {
@@ -91,7 +107,7 @@ private:
     if (spans.empty())
       return;
     add(PW_TEXT("Source", "axis, far face"), 0, spans.front().from);
-    add(PW_TEXT("Source", "axis, middle of the wall"), 0, (spans.back().from + spans.back().to) / 2);
+    add(PW_TEXT("Source", "axis, middle"), 0, (spans.back().from + spans.back().to) / 2);
   }
 
   void addWall(double y, Text name) {

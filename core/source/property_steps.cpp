@@ -79,7 +79,8 @@ public:
     default:
       addComposed();
     }
-    addModuli();
+    if (m_properties.Iyz == 0)
+      addModuli();
     return std::move(m_steps);
   }
 

@@ -73,8 +73,13 @@ Region regionOf(const Section& section) {
   align(aligned, &SectionPoint::y, slack);
   align(aligned, &SectionPoint::z, slack);
   const Region placed = regionAround(std::move(aligned));
-  const double y = placed.moments.y / placed.moments.area;
-  const double z = placed.moments.z / placed.moments.area;
+  // What cancelling halves leave is no distance.
+  const auto centroid = [&](double first) {
+    const double place = first / placed.moments.area;
+    return std::abs(place) <= 1e-4 * placed.slack() ? 0 : place;
+  };
+  const double y = centroid(placed.moments.y);
+  const double z = centroid(placed.moments.z);
   std::vector<Piece> pieces;
   for (const Piece& piece : placed.pieces)
     pieces.push_back(movedPiece(piece, -y, -z));

@@ -30,8 +30,8 @@ struct SectionProperties {
 /// Of a section that is not tabled.
 SectionProperties propertiesOf(const Region& region);
 
-/// The working of A, centroid, Iz, Iy, Iyz (where it is not 0) and W of a section that is not tabled, with
-/// its sizes put in. Composed sections by the theorem of parallel axes.
+/// The working of A, centroid, Iz, Iy, and Iyz where it is not 0 or else W, of a section that is not tabled,
+/// with its sizes put in. Composed sections by the theorem of parallel axes.
 std::vector<Step> propertySteps(const Section& section, const WrittenUnits& units = {});
 
 } // namespace planewright

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/source/section_forces.h"
 
+#include "core/quantity/format.h"
 #include "core/working/written.h"
 #include "tests/support/section_gen.h"
 #include "tests/support/strips.h"
@@ -403,6 +404,20 @@ TEST(ReadyFibres, lieInTheSectionAndHaveNames) {
       EXPECT_FALSE(named.name.empty());
     }
   }
+}
+
+TEST(ReadyFibres, ofARolledSectionStandOnTheWebWhereItsFilletsEnd) {
+  std::vector<std::string> places;
+  for (const NamedFibre& named : readyFibres(model(iSection(300, 8, 150, 10, 150, 10, 15))))
+    if (named.fibre.view == View::side)
+      places.push_back(plain(named.name) + " " + shownNumber(named.fibre.y, 0) + " " +
+                       shownNumber(named.fibre.z, 0));
+  EXPECT_EQ(places,
+            (std::vector<std::string>{"extreme fibre, top 150 0", "top corner, near face 150 75",
+                                      "top corner, far face 150 −75", "upper junction, near face 125 4",
+                                      "axis, near face 0 4", "axis, far face 0 −4", "axis, middle 0 0",
+                                      "lower junction, near face −125 4", "bottom corner, near face −150 75",
+                                      "bottom corner, far face −150 −75", "extreme fibre, bottom −150 0"}));
 }
 
 } // namespace
