@@ -81,6 +81,7 @@ Region regionOf(const Section& section) {
   const double y = centroid(placed.moments.y);
   const double z = centroid(placed.moments.z);
   std::vector<Piece> pieces;
+  pieces.reserve(placed.pieces.size());
   for (const Piece& piece : placed.pieces)
     pieces.push_back(movedPiece(piece, -y, -z));
   return regionAround(std::move(pieces));
@@ -88,6 +89,7 @@ Region regionOf(const Section& section) {
 
 Region transposed(const Region& region) {
   std::vector<Piece> pieces;
+  pieces.reserve(region.pieces.size());
   for (const Piece& piece : region.pieces)
     pieces.push_back(pieceOf(piece.name, transposed(piece.contour), piece.kind));
   return regionAround(std::move(pieces));
