@@ -35,7 +35,7 @@ const std::vector<Named<Nature>>& namesOf() {
       {Nature::permanent, "permanent", PW_TEXT("Case", "permanent")},
       {Nature::variable, "variable", PW_TEXT("Case", "variable")},
       {Nature::accidental, "accidental", PW_TEXT("Case", "accidental")},
-      {Nature::seismic, "seismic", PW_TEXT("Case", "seismic")}};
+      {Nature::measured, "measured", PW_TEXT("Case", "measured")}};
   return names;
 }
 
@@ -55,8 +55,7 @@ const std::vector<Named<Basis>>& namesOf() {
   static const std::vector<Named<Basis>> names = {
       {Basis::design, "design", PW_TEXT("Combination", "design")},
       {Basis::characteristic, "characteristic", PW_TEXT("Combination", "characteristic")},
-      {Basis::allowable, "allowable", PW_TEXT("Combination", "allowable")},
-      {Basis::measured, "measured", PW_TEXT("Combination", "measured")}};
+      {Basis::allowable, "allowable", PW_TEXT("Combination", "allowable")}};
   return names;
 }
 

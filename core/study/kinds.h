@@ -12,12 +12,12 @@ enum class Positive { tension, compression };
 enum class ShearAxis { tensorDown, tensorUp };
 /// What a line in the plane of stress is.
 enum class LineKind { grain, fibre, weld, bond, other };
-/// The nature of an action.
-enum class Nature { permanent, variable, accidental, seismic };
+/// The nature of an action; `measured`: its stresses come from strains that were measured.
+enum class Nature { permanent, variable, accidental, measured };
 /// Classes of duration of an action, longest first.
 enum class Duration { permanent, longTerm, medium, shortTerm, instantaneous };
 /// What the factors of a combination make of the actions.
-enum class Basis { design, characteristic, allowable, measured };
+enum class Basis { design, characteristic, allowable };
 
 template <>
 const std::vector<Named<Positive>>& namesOf<Positive>();

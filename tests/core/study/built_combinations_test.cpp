@@ -104,7 +104,7 @@ TEST(BuiltCombinations, eachFactorThatDoesNotReadIsToldAtItsPlace) {
 }
 
 TEST(BuiltCombinations, whatTakesNoPartIsSaid) {
-  const Study study = studyOf({{"G", Nature::permanent}, {"A", Nature::accidental}, {"M", Nature::seismic}});
+  const Study study = studyOf({{"G", Nature::permanent}, {"A", Nature::accidental}, {"M", Nature::measured}});
   const auto built = builtCombinations(study, recommendedFactors(study));
   ASSERT_TRUE(built);
   EXPECT_EQ(plain(built->notes.back()), "Neither permanent nor variable, so in none of them: A, M.");
