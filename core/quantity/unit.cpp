@@ -75,6 +75,11 @@ const std::vector<UnitRow>& unitTable() {
   return rows;
 }
 
+const Unit& degreeUnit() {
+  static const Unit degree = *findUnit("deg");
+  return degree;
+}
+
 const Unit* findUnit(std::string_view name) {
   if (name == "°")
     name = "deg";

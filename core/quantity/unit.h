@@ -60,6 +60,8 @@ struct UnitRow {
 };
 /// Every unit that an expression can name (contract of the expressions: Pa ... %, see README).
 const std::vector<UnitRow>& unitTable();
+/// The degree: the base of angles, and the unit of a bare number in every field of an angle.
+const Unit& degreeUnit();
 /// The unit of this name, also "°" for deg; null for any other word.
 const Unit* findUnit(std::string_view name);
 /// The name in the table that a mistyped one most likely means: differing case counts least, then a missing

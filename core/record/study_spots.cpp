@@ -6,6 +6,7 @@
 
 #include <algorithm>
 #include <array>
+#include <cassert>
 
 namespace planewright {
 
@@ -49,7 +50,8 @@ Found found(const Place& place, std::string_view quoted, const Json& root) {
     const std::size_t slash = std::min(path.find('/'), path.size());
     const std::string_view segment = path.substr(0, slash);
     path.remove_prefix(std::min(slash + 1, path.size()));
-    const JsonMember* inner = step(*at.value, segment == "*" ? names.at(next++) : segment);
+    assert(segment != "*" || next < names.size());
+    const JsonMember* inner = step(*at.value, segment == "*" ? names[next++] : segment);
     if (!inner)
       return at;
     const bool isKey = at.value->kind == Json::Kind::object && inner->key == quoted;

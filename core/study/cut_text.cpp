@@ -10,7 +10,7 @@ std::string angleText(Angle angle) {
 }
 
 Result<std::string> normalTextForCut(std::string_view cut) {
-  Result<Entry> entry = readEntry(cut, {dimension::angle, {"deg", dimension::angle, 1, 1}, Slopes::line});
+  Result<Entry> entry = readEntry(cut, {dimension::angle, degreeUnit(), Slopes::line});
   if (!entry)
     return tl::unexpected(std::move(entry).error());
   return angleText(normalOf(LineAngle{Angle::fromDegrees(entry->value)}).value);

@@ -105,9 +105,10 @@ std::optional<Place> matched(const SpotRow& row, const vector<string_view>& path
   std::array<string*, 2> names{&place.owner, &place.item};
   std::size_t next = 0;
   for (std::size_t i = 0; i < pattern.size(); ++i) {
-    if (pattern[i] == "*")
-      *names.at(next++) = unescaped(path[i]);
-    else if (pattern[i] != path[i])
+    if (pattern[i] == "*") {
+      assert(next < names.size());
+      *names[next++] = unescaped(path[i]);
+    } else if (pattern[i] != path[i])
       return std::nullopt;
   }
   return place;
@@ -116,7 +117,7 @@ std::optional<Place> matched(const SpotRow& row, const vector<string_view>& path
 } // namespace
 
 const SpotRow& rowOf(Spot spot) {
-  const SpotRow& row = spotTable().at(static_cast<std::size_t>(spot));
+  const SpotRow& row = spotTable()[static_cast<std::size_t>(spot)];
   assert(row.spot == spot);
   return row;
 }
@@ -128,7 +129,12 @@ string pathOf(const Place& place) {
   for (const string_view segment : segmentsOf(rowOf(place.spot).path)) {
     if (!path.empty())
       path += '/';
-    path += segment == "*" ? escaped(*names.at(next++)) : string(segment);
+    if (segment != "*") {
+      path += segment;
+      continue;
+    }
+    assert(next < names.size());
+    path += escaped(*names[next++]);
   }
   return path;
 }
@@ -143,24 +149,31 @@ std::optional<Place> placeOf(string_view path) {
 
 namespace {
 
-const string& unitWord(const Study& study, Dimension wanted) {
-  static const string none;
+/// The unit that a study names for a dimension, and what the base has for it.
+struct UnitWord {
+  const string& word;
+  const char* base;
+};
+
+UnitWord unitWord(const Units& units, Dimension wanted) {
   if (wanted == dimension::stress)
-    return study.units.stress;
+    return {units.stress, "MPa"};
   if (wanted == dimension::force)
-    return study.units.force;
+    return {units.force, "N"};
   if (wanted == dimension::length)
-    return study.units.length;
-  return wanted == dimension::moment ? study.units.moment : none;
+    return {units.length, "mm"};
+  assert(wanted == dimension::moment);
+  return {units.moment, "N*mm"};
 }
 
 Unit unitOf(const Study& study, Dimension wanted) {
   if (wanted == dimension::none)
     return {};
   if (wanted == dimension::angle)
-    return {"deg", dimension::angle, 1, 1};
+    return degreeUnit();
+  const auto [word, base] = unitWord(study.units, wanted);
   // A study whose unit does not read is refused for that; until then its texts are read in the base unit.
-  return readUnit(unitWord(study, wanted), wanted).value_or(Unit{"MPa", wanted, 1, 1});
+  return readUnit(word, wanted).value_or(Unit{base, wanted, 1, 1});
 }
 
 } // namespace

@@ -50,6 +50,16 @@ TEST(Place, everyTypedPlaceOfANewStudyHoldsItsText) {
   EXPECT_FALSE(textAt(study, {Spot::reading, "P2", {}}));
 }
 
+// Each dimension falls back to its own base, so that a study with several wrong units is told all of them.
+TEST(Place, aUnitThatDoesNotReadCountsAsTheBase) {
+  Study study = newStudy();
+  study.units = {"x", "x", "x", "x"};
+  EXPECT_EQ(entryKindOf(study, Spot::sx).unit, (Unit{"MPa", dimension::stress, 1, 1}));
+  EXPECT_EQ(entryKindOf(study, Spot::unitForce).unit, (Unit{"N", dimension::force, 1, 1}));
+  EXPECT_EQ(entryKindOf(study, Spot::unitLength).unit, (Unit{"mm", dimension::length, 1, 1}));
+  EXPECT_EQ(entryKindOf(study, Spot::unitMoment).unit, (Unit{"N*mm", dimension::moment, 1, 1}));
+}
+
 TEST(Place, anExpressionIsReadInTheStudysUnit) {
   Study study = newStudy();
   study.units.stress = "psi";
