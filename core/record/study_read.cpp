@@ -118,15 +118,16 @@ void read(const Json& json, Reading& reading, Point& point) {
   object.refuseUnread();
 }
 
-/// Reads a list in place of what a new study has.
+/// Reads a list in place of what a new study has; false when the file has none.
 template <class Item>
-void readItems(ObjectReader& object, const char* key, Reading& reading, std::vector<Item>& target) {
+bool readItems(ObjectReader& object, const char* key, Reading& reading, std::vector<Item>& target) {
   const auto* items = object.list(key);
   if (!items)
-    return;
+    return false;
   target.clear();
   for (const JsonMember& item : *items)
     read(item.value, reading, target.emplace_back());
+  return true;
 }
 
 template <class Part>
@@ -145,7 +146,10 @@ Study readParts(const Json& root, Reading& reading) {
   readPart(object, "convention", reading, study.convention);
   readItems(object, "cases", reading, study.cases);
   readItems(object, "combinations", reading, study.combinations);
-  readItems(object, "points", reading, study.points);
+  // The point of a new study has stresses of that study's own case.
+  if (!readItems(object, "points", reading, study.points))
+    std::erase_if(study.points.front().stress,
+                  [&](const CaseStress& stress) { return !findCase(study, stress.caseId); });
   readPart(object, "shown", reading, study.shown);
   object.refuseUnread();
   return study;
