@@ -13,8 +13,10 @@ namespace planewright {
 namespace {
 
 double valueOf(const Study& study, Spot spot, const std::string& text) {
-  if (text.empty())
+  if (text.empty()) {
+    assert(rowOf(spot).mayBeEmpty);
     return 0;
+  }
   const Result<Entry> entry = readEntry(text, entryKindOf(study, spot));
   assert(entry && "a valid study holds only texts that read");
   return entry->value;
@@ -58,8 +60,12 @@ void addTerm(StateReading& state, double factor, const CaseValues& values) {
 }
 
 /// Of several terms that cancel only rounding is left: it is not shown as a stress, nor as a direction.
-void dropRounding(StateReading& state) {
-  const double noise = 8 * std::numeric_limits<double>::epsilon() * state.scale;
+/// `scaleOfThird` is to σz what the state's scale is to the components in the plane.
+void dropRounding(StateReading& state, double scaleOfThird) {
+  constexpr double relative = 8 * std::numeric_limits<double>::epsilon();
+  if (std::abs(state.sz) <= relative * scaleOfThird)
+    state.sz = 0;
+  const double noise = relative * state.scale;
   for (double* component : {&state.stress.sx, &state.stress.sy, &state.stress.txy})
     if (std::abs(*component) <= noise)
       *component = 0;
@@ -82,13 +88,16 @@ StateReading combinedState(const Study& study, const Combination& combination,
                            const std::vector<CaseValues>& cases) {
   StateReading state;
   state.combination = combination.name;
+  double scaleOfThird = 0;
   for (const Factor& factor : combination.factors) {
     const auto values = std::ranges::find(cases, factor.caseId, &CaseValues::id);
     assert(values != cases.end());
-    addTerm(state, valueOf(study, Spot::factor, factor.factor), *values);
+    const double value = valueOf(study, Spot::factor, factor.factor);
+    addTerm(state, value, *values);
+    scaleOfThird += std::abs(value * values->sz);
   }
   if (combination.factors.size() > 1)
-    dropRounding(state);
+    dropRounding(state, scaleOfThird);
   return state;
 }
 

@@ -101,6 +101,17 @@ TEST(Readout, whatCancelsToRoundingIsZero) {
   EXPECT_EQ(state.stress.sx, 6);
 }
 
+// σz counts by its own terms: large stresses in the plane do not make a small one rounding.
+TEST(Readout, aThirdStressThatCancelsToRoundingIsZero) {
+  const Study cases = *edited(
+      newStudy(), Edits{Type{{Spot::sz, "P1", "G"}, "0.3"}, Type{{Spot::sx, "P1", "G"}, "1e20"},
+                        Insert{{Spot::loadCase, "S", {}}, {}}, Insert{{Spot::caseStress, "P1", "S"}, {}},
+                        Type{{Spot::sz, "P1", "S"}, "-0.1"}});
+  ASSERT_NE(0.3 - 3 * 0.1, 0);
+  EXPECT_EQ(evaluate(withCombination(cases, "c", {{"G", "1"}, {"S", "3"}})).state().sz, 0);
+  EXPECT_EQ(evaluate(withCombination(cases, "c", {{"G", "1"}, {"S", "1"}})).state().sz, 0.3 - 0.1);
+}
+
 TEST(Readout, onlyAPlainCaseMayBeDragged) {
   const Study study = goldenStudy();
   EXPECT_EQ(draggableCase(study, evaluate(study)), "G");
