@@ -30,7 +30,7 @@ std::optional<Problem> takes(Study& study, const Type& type) {
 
 std::optional<Problem> takes(Study& study, const Insert& insert) {
   const std::string& key = keyOf(insert.place);
-  if (Text fault = faultOfName(key); !fault.empty())
+  if (Text fault = faultOfKey(insert.place.spot, key); !fault.empty())
     return problemAt(insert.place, key, std::move(fault));
   const bool done = withList(study, insert.place, [&](auto& list) {
     if (list.holds(key))
@@ -60,21 +60,23 @@ std::optional<Problem> takes(Study& study, const Move& move) {
 }
 
 std::optional<Problem> takes(Study& study, const Rename& rename) {
-  if (Text fault = faultOfName(rename.name); !fault.empty())
+  if (Text fault = faultOfKey(rename.place.spot, rename.name); !fault.empty())
     return problemAt(rename.place, rename.name, std::move(fault));
-  if (rename.name == keyOf(rename.place))
-    return std::nullopt;
+  const std::string& key = keyOf(rename.place);
+  bool same = false;
   bool taken = false;
   const bool done = withList(study, rename.place, [&](auto& list) {
-    taken = list.isTaken(rename.name);
-    return !taken && list.rename(keyOf(rename.place), rename.name);
+    same = list.nameOf(key) == rename.name;
+    taken = !same && list.isTaken(rename.name);
+    return same || (!taken && list.rename(key, rename.name));
   });
   if (taken)
     return problemAt(rename.place, rename.name, PW_TEXT("Study", "The name “%1” is taken.").with(rename.name),
                      PW_TEXT("Study", "Use another name."));
   if (!done)
     return noSuchPlace(rename.place);
-  renameReferences(study, rename.place, rename.name);
+  if (!same)
+    renameReferences(study, rename.place, rename.name);
   return std::nullopt;
 }
 

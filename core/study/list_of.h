@@ -18,6 +18,10 @@ struct KeyedList {
     return at == items.end() ? std::nullopt : std::optional(static_cast<std::size_t>(at - items.begin()));
   }
   bool holds(const std::string& name) const { return indexOf(name).has_value(); }
+  /// The name of the item with this key, its key itself; none when there is no such item.
+  std::optional<std::string> nameOf(const std::string& name) const {
+    return holds(name) ? std::optional(name) : std::nullopt;
+  }
   bool isTaken(const std::string& name) const { return holds(name); }
   void insert(std::optional<std::size_t> index, const std::string& name) {
     Item item;
@@ -50,6 +54,9 @@ struct LineList {
   std::optional<Line>& line;
 
   bool holds(const std::string&) const { return line.has_value(); }
+  std::optional<std::string> nameOf(const std::string&) const {
+    return line ? std::optional(line->name) : std::nullopt;
+  }
   bool isTaken(const std::string&) const { return false; }
   void insert(std::optional<std::size_t>, const std::string&) { line = Line{}; }
   bool erase(const std::string&) {

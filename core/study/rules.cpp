@@ -55,9 +55,10 @@ private:
   }
 
   void key(Names& names, const Place& place, const std::string& name) {
-    if (Text fault = faultOfName(name); !fault.empty())
+    const bool isNew = names.insert(name).second;
+    if (Text fault = faultOfKey(place.spot, name); !fault.empty())
       add(place, name, std::move(fault));
-    else if (!names.insert(name).second)
+    else if (!isNew)
       add(place, name, PW_TEXT("Study", "The name “%1” stands twice.").with(name),
           PW_TEXT("Study", "Give each its own name."));
   }
@@ -74,16 +75,24 @@ private:
   }
 
   void excludes(const LoadCase& one) {
+    Names excluded;
     for (const std::string& id : one.excludes) {
       const Place place{Spot::caseExcludes, one.id, {}};
       reference(m_cases, place, id);
+      if (!excluded.insert(id).second)
+        add(place, id, PW_TEXT("Study", "The name “%1” stands twice.").with(id),
+            PW_TEXT("Study", "Name it once."));
       if (id == one.id)
         add(place, id, PW_TEXT("Study", "A case cannot exclude itself."));
     }
   }
 
   void combination(Names& names, const Combination& one) {
-    key(names, {Spot::combination, one.name, {}}, one.name);
+    const Place own{Spot::combination, one.name, {}};
+    key(names, own, one.name);
+    if (m_cases.contains(one.name))
+      add(own, one.name, PW_TEXT("Study", "“%1” is the id of a case already.").with(one.name),
+          PW_TEXT("Study", "Give the combination its factor, such as “1.0 %1”.").with(one.name));
     Names factors;
     for (const Factor& factor : one.factors) {
       const Place place{Spot::factor, one.name, factor.caseId};

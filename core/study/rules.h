@@ -11,7 +11,8 @@ namespace planewright {
 Problems excessIn(const Study& study);
 
 /// The rules between the places of a study: at least one case and one point, at most so many of each; keys
-/// that can be names, each once in its list; every name that is referred to exists. No more than the first
+/// that can be names, each once in its list; no combination goes by the id of a case, so that a state has a
+/// name of its own; every name that is referred to exists, and none is excluded twice. No more than the first
 /// 100.
 Problems brokenRules(const Study& study);
 

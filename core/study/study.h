@@ -39,7 +39,7 @@ struct LoadCase {
 /// One term of a combination; the factor is a typed text without a dimension.
 struct Factor {
   std::string caseId;
-  std::string factor;
+  std::string factor = "1";
   bool operator==(const Factor&) const = default;
 };
 

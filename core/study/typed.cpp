@@ -74,7 +74,7 @@ Result<std::string> keptExpression(const Study& study, const Place& place, std::
 Result<std::string> keptUnit(const Place& place, std::string_view text) {
   Result<Unit> unit = readUnit(text, rowOf(place.spot).dimension);
   if (unit)
-    return std::string(text);
+    return std::move(unit->name);
   Problem problem = std::move(unit).error();
   problem.place = pathOf(place);
   return tl::unexpected(std::move(problem));
@@ -110,6 +110,14 @@ Text faultOfName(std::string_view name) {
     return PW_TEXT("Study", "A name cannot have control characters.");
   if (name.size() > longestName)
     return PW_TEXT("Study", "This name has more than 200 bytes.");
+  return {};
+}
+
+Text faultOfKey(Spot spot, std::string_view name) {
+  if (Text fault = faultOfName(name); !fault.empty())
+    return fault;
+  if (spot == Spot::loadCase && name.find(',') != std::string_view::npos)
+    return PW_TEXT("Study", "The id of a case cannot have a comma.");
   return {};
 }
 

@@ -12,6 +12,9 @@ Result<std::string> keptText(const Study& study, const Place& place, const Slot&
 /// Why a name cannot be a key: empty, blank at an end, control characters, longer than 200 bytes, broken
 /// UTF-8. Empty for a good name.
 Text faultOfName(std::string_view name);
+/// The same for the key of a thing of this kind: the id of a case has no comma either, since ids are typed
+/// with commas between them.
+Text faultOfKey(Spot spot, std::string_view name);
 
 /// A Problem at a place.
 Problem problemAt(const Place& place, std::string_view quoted, Text what, Text mend = {});

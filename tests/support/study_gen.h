@@ -36,6 +36,13 @@ inline string anyName(int number) {
          std::to_string(number);
 }
 
+/// The id of a case: a name without a comma.
+inline string anyCaseId(int number) {
+  string id = anyName(number);
+  std::erase(id, ',');
+  return id;
+}
+
 inline string anyFreeText() {
   return oneOf({"", "", "plain", "two\nlines\tand a tab", "\"quoted\" \\ / ~", "Grüße σ 𝜎 \xE2\x80\xA8 end",
                 " blank ends ", "{\"format\": 1}", "null", "%1 _{x}"});
@@ -82,7 +89,7 @@ inline std::vector<LoadCase> anyCases() {
   std::vector<LoadCase> cases;
   const int count = 1 + upTo(3);
   for (int i = 0; i < count; ++i) {
-    LoadCase one{anyName(i), anyFreeText(), anyWord<Nature>(), anyWord<Duration>(), {}};
+    LoadCase one{anyCaseId(i), anyFreeText(), anyWord<Nature>(), anyWord<Duration>(), {}};
     if (i > 0 && upTo(2) == 0)
       one.excludes.push_back(cases[static_cast<std::size_t>(upTo(i - 1))].id);
     cases.push_back(one);
@@ -90,11 +97,12 @@ inline std::vector<LoadCase> anyCases() {
   return cases;
 }
 
+/// Their numbers keep their names apart from those of the cases.
 inline std::vector<Combination> anyCombinations(const std::vector<LoadCase>& cases) {
   std::vector<Combination> combinations;
   const int count = upTo(3);
   for (int i = 0; i < count; ++i) {
-    Combination one{anyName(i), {}, anyWord<Basis>()};
+    Combination one{anyName(90 + i), {}, anyWord<Basis>()};
     for (const LoadCase& loadCase : cases)
       if (upTo(3) > 0)
         one.factors.push_back({loadCase.id, oneOf({"1", "1.35", "1.5", "0", "-1", "1.5*0.7", "0.9"})});
@@ -125,7 +133,11 @@ inline Shown anyShown(const Study& study) {
   Shown shown;
   if (upTo(1) == 0)
     shown.point = (*rc::gen::elementOf(study.points)).name;
-  if (!study.combinations.empty() && upTo(1) == 0)
+  const int kinds = study.combinations.empty() ? 1 : 2;
+  const int kind = upTo(kinds);
+  if (kind == 1)
+    shown.combination = (*rc::gen::elementOf(study.cases)).id;
+  if (kind == 2)
     shown.combination = (*rc::gen::elementOf(study.combinations)).name;
   return shown;
 }

@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/study/edit.h"
 #include "core/study/place_list.h"
 
-#include <gtest/gtest.h>
+#include "tests/core/study/rich_study.h"
+
 #include <rapidcheck/gtest.h>
 
 #include <algorithm>
@@ -12,8 +12,7 @@ namespace {
 
 /// Few names, good and bad, so that edits often meet what is there.
 std::string anyName() {
-  return *rc::gen::element<std::string>("G", "S", "P1", "P2", "scarf", "1.35 G + 1.5 S", "a/b~c", "", " x",
-                                        "é");
+  return *rc::gen::element<std::string>("G", "S", "P1", "P2", "scarf", "W", sum, "a/b~c", "", " x", "é");
 }
 
 std::string anyText() {
@@ -22,13 +21,40 @@ std::string anyText() {
                                         "words\nof two lines", "P1", "scarf", "1.35", "\xFF");
 }
 
-Place anyPlace(const Study& study) {
-  if (*rc::gen::inRange(0, 3) > 0)
-    return *rc::gen::elementOf(typedPlacesIn(study));
-  const auto spot = static_cast<Spot>(*rc::gen::inRange(0, static_cast<int>(Spot::shownCombination) + 1));
+/// The key of a case, combination or point that stands in the study, whichever has such spots.
+std::string anyOwner(const Study& study, const std::string& path) {
+  if (path.starts_with("combinations/") && !study.combinations.empty())
+    return (*rc::gen::elementOf(study.combinations)).name;
+  return path.starts_with("points/") ? (*rc::gen::elementOf(study.points)).name
+                                     : (*rc::gen::elementOf(study.cases)).id;
+}
+
+/// A spot up to `last`: of what stands in the study, or with names that need not be there.
+Place anyPlaceUpTo(Spot last, const Study& study) {
+  const auto spot = static_cast<Spot>(*rc::gen::inRange(0, static_cast<int>(last) + 1));
   const std::string path = rowOf(spot).path;
   const auto stars = std::ranges::count(path, '*');
-  return {spot, stars > 0 ? anyName() : "", stars > 1 ? anyName() : ""};
+  if (stars == 0)
+    return {spot, "", ""};
+  const std::string owner = *rc::gen::arbitrary<bool>() ? anyOwner(study, path) : anyName();
+  return {spot, owner, stars > 1 ? anyName() : ""};
+}
+
+Place anyPlace(const Study& study) {
+  switch (*rc::gen::inRange(0, 3)) {
+  case 0:
+    return anyPlaceUpTo(Spot::shownCombination, study);
+  case 1:
+    // What is inserted, removed, moved and renamed.
+    return anyPlaceUpTo(Spot::factor, study);
+  default:
+    return *rc::gen::elementOf(typedPlacesIn(study));
+  }
+}
+
+/// A new study, or one in which there is something of each kind and a case that acts nowhere yet.
+Study anyStart() {
+  return *rc::gen::element(newStudy(), with(richStudy(), {Insert{{Spot::loadCase, "W", {}}, {}}}));
 }
 
 Edit anyEdit(const Study& study) {
@@ -48,9 +74,8 @@ Edit anyEdit(const Study& study) {
 }
 
 RC_GTEST_PROP(Edit, neverYieldsAnInvalidStudyAndNeverTouchesTheOldOne, ()) {
-  Study study = newStudy();
-  const int steps = *rc::gen::inRange(1, 30);
-  for (int i = 0; i < steps; ++i) {
+  Study study = anyStart();
+  for (int i = 0; i < 40; ++i) {
     const Study before = study;
     const Result<Study> after = edited(study, anyEdit(study));
     RC_ASSERT(study == before);
@@ -66,7 +91,7 @@ RC_GTEST_PROP(Edit, neverYieldsAnInvalidStudyAndNeverTouchesTheOldOne, ()) {
 }
 
 RC_GTEST_PROP(Edit, whatWasTypedStandsThere, ()) {
-  const Study study = newStudy();
+  const Study study = anyStart();
   const Place place = *rc::gen::elementOf(typedPlacesIn(study));
   const Result<Study> after = edited(study, Edit{Type{place, anyText()}});
   if (!after)

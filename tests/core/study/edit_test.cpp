@@ -1,36 +1,16 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/study/edit.h"
-
-#include <gtest/gtest.h>
+#include "tests/core/study/rich_study.h"
 
 namespace planewright {
 namespace {
 
 const Place sx{Spot::sx, "P1", "G"};
 const Place angle{Spot::lineAngle, "P1", {}};
-const std::string sum = "1.35 G + 1.5 S";
-
-Study with(const Study& study, const Edits& edits) {
-  const Result<Study> after = edited(study, edits);
-  EXPECT_TRUE(after) << plain(after.error());
-  return after.value_or(study);
-}
 
 Problem refused(const Study& study, const Edits& edits) {
   const Result<Study> after = edited(study, edits);
   EXPECT_FALSE(after);
   return after ? Problem{} : after.error();
-}
-
-/// Two cases, a combination of both, two points, a watched plane.
-Study richStudy() {
-  return with(newStudy(),
-              {Insert{{Spot::loadCase, "S", {}}, {}}, Insert{{Spot::combination, sum, {}}, {}},
-               Insert{{Spot::factor, sum, "G"}, {}}, Type{{Spot::factor, sum, "G"}, "1.35"},
-               Insert{{Spot::factor, sum, "S"}, {}}, Type{{Spot::factor, sum, "S"}, "1.5"},
-               Insert{{Spot::caseStress, "P1", "S"}, {}}, Insert{{Spot::point, "P2", {}}, {}},
-               Insert{{Spot::plane, "P1", "scarf"}, {}}, Type{{Spot::shownPoint, {}, {}}, "P2"},
-               Type{{Spot::shownCombination, {}, {}}, sum}, Type{{Spot::caseExcludes, "S", {}}, "G"}});
 }
 
 TEST(Edit, aBareNumberIsCompletedSoThatAChangeOfUnitChangesNoStress) {
@@ -106,6 +86,64 @@ TEST(Edit, namesStayUniqueAndNeeded) {
   EXPECT_FALSE(refused(newStudy(), {Remove{{Spot::point, "P1", {}}}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::shownPoint, {}, {}}, "P9"}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Insert{{Spot::caseStress, "P1", "Q"}, {}}}).what.empty());
+}
+
+// A state goes by the name of its combination or the id of its case: the two must tell states apart.
+TEST(Edit, aCombinationCannotHaveTheIdOfACase) {
+  const Place factored{Spot::combination, sum, {}};
+  const Problem inserted = refused(richStudy(), {Insert{{Spot::combination, "G", {}}, {}}});
+  EXPECT_EQ(inserted.place, "combinations/G");
+  EXPECT_EQ(inserted.quoted, "G");
+  EXPECT_NE(plain(inserted).find("“1.0 G”"), std::string::npos) << plain(inserted);
+  EXPECT_EQ(refused(richStudy(), {Rename{factored, "S"}}).place, "combinations/S");
+  EXPECT_EQ(refused(richStudy(), {Rename{{Spot::loadCase, "S", {}}, sum}}).place,
+            "combinations/1.35 G + 1.5 S");
+  EXPECT_EQ(refused(richStudy(), {Insert{{Spot::loadCase, sum, {}}, {}}}).place,
+            "combinations/1.35 G + 1.5 S");
+}
+
+TEST(Edit, aLineMayBeRenamedToTheNameOfItsPoint) {
+  const Place line{Spot::line, "P1", {}};
+  EXPECT_EQ(with(newStudy(), {Rename{line, "P1"}}).points.front().line->name, "P1");
+  EXPECT_EQ(with(newStudy(), {Rename{line, "grain"}}), newStudy());
+}
+
+TEST(Edit, whatIsNotThereCannotBeRenamedToItsOwnName) {
+  EXPECT_FALSE(edited(newStudy(), Edit{Rename{{Spot::loadCase, "Q", {}}, "Q"}}));
+  EXPECT_EQ(with(newStudy(), {Rename{{Spot::loadCase, "G", {}}, "G"}}), newStudy());
+}
+
+TEST(Edit, aNewFactorIsOne) {
+  const Study study =
+      with(richStudy(), {Insert{{Spot::loadCase, "W", {}}, {}}, Insert{{Spot::factor, sum, "W"}, {}}});
+  EXPECT_EQ(textAt(study, {Spot::factor, sum, "W"}), "1");
+  EXPECT_TRUE(problemsIn(study).empty());
+}
+
+TEST(Edit, aCaseIsExcludedOnce) {
+  const Place excludes{Spot::caseExcludes, "S", {}};
+  const Problem twice = refused(richStudy(), {Type{excludes, "G, G"}});
+  EXPECT_EQ(twice.place, "cases/S/excludes");
+  EXPECT_EQ(twice.quoted, "G");
+}
+
+// The excluded ids are typed with commas between them.
+TEST(Edit, theIdOfACaseHasNoComma) {
+  EXPECT_EQ(refused(newStudy(), {Insert{{Spot::loadCase, "S,W", {}}, {}}}).quoted, "S,W");
+  EXPECT_EQ(refused(newStudy(), {Rename{{Spot::loadCase, "G", {}}, "G,1"}}).quoted, "G,1");
+  EXPECT_TRUE(edited(newStudy(), Edit{Insert{{Spot::point, "seat, left", {}}, {}}}));
+  Study study = newStudy();
+  study.cases.push_back({"S,W", {}, {}, {}, {}});
+  const Problems problems = problemsIn(study);
+  ASSERT_EQ(problems.size(), 1U);
+  EXPECT_EQ(problems.front().place, "cases/S,W");
+}
+
+TEST(Edit, aUnitIsKeptWithoutItsBlanks) {
+  const Place unit{Spot::unitStress, {}, {}};
+  EXPECT_EQ(textAt(with(newStudy(), {Type{unit, " psi\t"}}), unit), "psi");
+  const Place moment{Spot::unitMoment, {}, {}};
+  EXPECT_EQ(textAt(with(newStudy(), {Type{moment, " N*mm "}}), moment), "N*mm");
 }
 
 TEST(Edit, movingChangesTheOrderOnly) {
