@@ -18,10 +18,14 @@ NormalAngle turnedFrom(NormalAngle start, double degrees) {
   return {folded(start.value + Angle::fromDegrees(degrees))};
 }
 
+/// Planes whose distances differ by less are equally near; the rest is rounding.
+constexpr double sameDistance = 1e-12 * 180;
+
 PlanesOfValue ordered(PlanesOfValue planes, NormalAngle near) {
-  const Angle first = apart(planes.first.value, near.value);
-  const Angle second = apart(planes.second.value, near.value);
-  if (second < first || (second == first && planes.second < planes.first))
+  const double farther =
+      (apart(planes.first.value, near.value) - apart(planes.second.value, near.value)).degrees();
+  const bool tie = std::abs(farther) <= sameDistance;
+  if (tie ? planes.second < planes.first : farther > 0)
     std::swap(planes.first, planes.second);
   return planes;
 }

@@ -31,8 +31,9 @@ struct PlanesOfValue {
 };
 
 /// sn(theta) = mean + r cos 2(theta - theta1), tnt(theta) = -r sin 2(theta - theta1), solved for theta.
-/// Angles are folded. Of two planes `first` is the one nearer to `near`; on a tie the smaller angle.
-/// Accuracy falls as the square root near an extreme value: hence `touching` and its spread.
+/// Angles are folded. Of two planes `first` is the one nearer to `near`; on a tie (within 1e-12 of 180 deg)
+/// the smaller angle. Accuracy falls as the square root near an extreme value: hence `touching` and its
+/// spread.
 PlanesOfValue planesOf(const Circle& circle, Component component, const Target& target, NormalAngle near);
 
 } // namespace planewright

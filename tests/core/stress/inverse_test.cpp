@@ -31,6 +31,30 @@ TEST(Inverse, ofATieTheSmallerAngleComesFirst) {
   EXPECT_NEAR(planes.first.value.degrees(), -45, 1e-12);
 }
 
+// Seen from a principal plane the two planes of one sn are equally near: rounding must not choose.
+TEST(Inverse, ofATieRoundingDoesNotChoose) {
+  const Circle circle = circleOf({80, 20, -30});
+  ASSERT_EQ(circle.theta1->value.degrees(), -22.5);
+  for (const double sn : {10.0, 20.0, 35.0, 50.0, 64.0, 80.0, 91.0}) {
+    const PlanesOfValue planes = planesOf(circle, Component::sn, {sn, 0}, *circle.theta1);
+    ASSERT_EQ(planes.kind, Kind::two);
+    EXPECT_LT(planes.first.value.degrees(), planes.second.value.degrees()) << sn;
+  }
+}
+
+RC_GTEST_PROP(Inverse, ofATieTheSmallerAngleComesFirstInEveryState, ()) {
+  const PlaneStress state = *anyStress();
+  const Circle circle = circleOf(state);
+  RC_PRE(circle.theta1.has_value());
+  const double part = *rc::gen::inRange(-99, 100) / 100.0;
+  const Component component = *rc::gen::element(Component::sn, Component::tnt);
+  const double value = (component == Component::sn ? circle.mean : 0) + part * circle.radius;
+  const NormalAngle top = component == Component::sn ? *circle.theta1 : *circle.thetaTauMax;
+  const PlanesOfValue planes = planesOf(circle, component, {value, 0}, top);
+  RC_PRE(planes.kind == Kind::two);
+  RC_ASSERT(planes.first < planes.second);
+}
+
 TEST(Inverse, zeroShearMeansThePrincipalPlanes) {
   const Circle circle = circleOf({80, 20, -30});
   const PlanesOfValue planes = planesOf(circle, Component::tnt, {0, 0}, normalAt(-20));
