@@ -12,6 +12,8 @@ namespace planewright {
 namespace {
 
 constexpr int mostDigits = 15;
+/// Digits that tell every double from the next.
+constexpr int allDigits = 17;
 
 template <class... How>
 std::string written(double value, How... how) {
@@ -82,20 +84,30 @@ bool isZero(const std::string& text) {
   return text.find_first_of("123456789") == std::string::npos;
 }
 
-} // namespace
-
-std::string exactNumber(double value) {
+std::string numberWith(int digits, double value) {
   assert(std::isfinite(value));
   if (value == 0)
     return "0";
-  const Decimal number = decimalOf(std::abs(value), mostDigits);
+  const Decimal number = decimalOf(std::abs(value), digits);
   const bool plain = number.exponent >= -5 && number.exponent < mostDigits;
   const std::string text = plain ? fixed(number) : scientific(number);
   return value < 0 ? "-" + text : text;
 }
 
+} // namespace
+
+std::string exactNumber(double value) {
+  return numberWith(mostDigits, value);
+}
+
+std::string shortestNumber(double value) {
+  return numberWith(allDigits, value);
+}
+
 std::string shownNumber(double value, int decimals) {
   assert(std::isfinite(value));
+  if (decimals > mostDigits && std::abs(value) <= 0.5 * std::pow(10.0, -decimals))
+    return "0";
   if (decimals < 0 || decimals > mostDigits || std::abs(value) >= 1e15)
     return withTrueMinus(written(value + 0.0, std::chars_format::scientific, 3));
   const std::string digits = written(std::abs(value), std::chars_format::fixed, decimals);
@@ -110,7 +122,8 @@ int decimalsFor(double largest, int significant) {
   // The exponent after rounding: 9.9996 shows as 10.00.
   const Decimal rounded =
       decimalOf(written(std::abs(largest), std::chars_format::scientific, significant - 1));
-  return std::clamp(significant - 1 - rounded.exponent, 0, most);
+  const int decimals = std::max(significant - 1 - rounded.exponent, 0);
+  return decimals <= most ? decimals : std::max(decimals, mostDigits + 1);
 }
 
 std::string shownDegrees(Angle angle, int decimals) {

@@ -7,16 +7,23 @@
 
 namespace planewright {
 
-/// Shortest decimal text that reads back as `value`, at most 15 significant digits, ASCII, never "-0".
-/// For files, csv, json and typed texts: it contains no thousands sign and always a decimal point.
+/// `value` for reported results (csv, json, clipboard): its shortest decimal text, of more than 15
+/// significant digits the nearest with 15, so that what is read back differs by 5e-15 of it at most. ASCII,
+/// never "-0", no thousands sign.
 std::string exactNumber(double value);
 
+/// The shortest decimal text that reads back as the same double, up to 17 digits, written likewise: for
+/// numbers that become typed texts of a study.
+std::string shortestNumber(double value);
+
 /// `value` with a fixed count of decimals for people: U+2212 for minus, never "-0.00".
-/// From 1e15 upwards (and for counts outside 0..15) the form is 1.234e+20.
+/// From 1e15 upwards and for counts outside 0..15 the form is 1.234e+20; with more than 15 decimals what
+/// rounds to nothing is "0".
 std::string shownNumber(double value, int decimals);
 
-/// Count of decimals that gives `largest` four significant digits: 8.4 gives 3, 84 gives 2, 8400 gives 0;
-/// at most 12. Zero gives 3.
+/// Count of decimals that gives `largest` four significant digits: 8.4 gives 3, 84 gives 2, 8400 gives 0.
+/// Where that needs more than 12 the count is above 15, for which shownNumber writes the power of ten. Zero
+/// gives 3.
 int decimalsFor(double largest, int significant = 4);
 
 /// "5.71°", with U+2212.

@@ -6,7 +6,7 @@
 namespace planewright {
 
 std::string angleText(Angle angle) {
-  return exactNumber(angle.degrees()) + " deg";
+  return shortestNumber(angle.degrees()) + " deg";
 }
 
 Result<std::string> normalTextForCut(std::string_view cut) {

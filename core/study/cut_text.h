@@ -6,7 +6,7 @@
 
 namespace planewright {
 
-/// A direction as the study keeps one that was not typed: "-60 deg", read back as the same double.
+/// An angle as the study keeps one that was not typed: "-60 deg", read back as the same double.
 std::string angleText(Angle angle);
 
 /// The text of a plane's normal for the direction in which its cut runs: an angle or, as for a line, a slope.

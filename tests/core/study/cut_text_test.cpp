@@ -19,6 +19,13 @@ TEST(CutText, aCutRunsAlongASlope) {
   EXPECT_EQ(normalTextForCut("-1:1"), "45 deg");
 }
 
+RC_GTEST_PROP(CutText, anAngleReadsBackAsTheSameDouble, (int numerator)) {
+  const Angle angle = Angle::fromDegrees(numerator / 7.0 / 1e6);
+  const Result<Entry> back = readEntry(angleText(angle), {dimension::angle, degreeUnit()});
+  RC_ASSERT(back.has_value());
+  RC_ASSERT(back->value == angle.degrees());
+}
+
 TEST(CutText, whatDoesNotReadSaysWhy) {
   const Result<std::string> normal = normalTextForCut("1,5");
   ASSERT_FALSE(normal);
@@ -31,7 +38,7 @@ RC_GTEST_PROP(CutText, aCutReadsBack, (int tenths)) {
   const NormalAngle normal{folded(Angle::fromDegrees(tenths % 1800 / 10.0))};
   const Result<std::string> back = normalTextForCut(cutText(normal));
   RC_ASSERT(back.has_value());
-  const Result<Entry> angle = readEntry(*back, {dimension::angle, {"deg", dimension::angle, 1, 1}});
+  const Result<Entry> angle = readEntry(*back, {dimension::angle, degreeUnit()});
   RC_ASSERT(angle.has_value());
   RC_ASSERT(apart(Angle::fromDegrees(angle->value), normal.value).degrees() < 1e-12);
 }
