@@ -29,6 +29,9 @@ Result<Entry> entryOf(const Value& value, std::string_view text, const EntryKind
 /// A text without any unit, completed with the field's: read again as it will be printed, so that value and
 /// text agree for good. A Problem points at the typed text, not at the completed one.
 Result<Entry> completed(const Value& value, std::string_view text, const EntryKind& kind) {
+  // Told by what was typed, since the Problem quotes it.
+  if (kind.slopes == Slopes::tolerance && value.number < 0)
+    return tl::unexpected(negativeTolerance(value.piece));
   const std::string typed(trimmed(text));
   const std::string group = value.form == Form::compound ? "(" + typed + ")" : typed;
   const std::string whole = group + " " + kind.unit.name;

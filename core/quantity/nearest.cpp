@@ -2,7 +2,6 @@
 #include "core/quantity/nearest.h"
 
 #include <algorithm>
-#include <limits>
 
 namespace planewright {
 
@@ -11,6 +10,8 @@ namespace {
 constexpr int otherCase = 1;
 constexpr int missing = 3;
 constexpr int wrong = 4;
+/// For each letter: at this distance a name is no longer proposed.
+constexpr int tooFar = 2;
 /// A longer word is nobody's mistyped name; bounds the work.
 constexpr std::size_t longest = 64;
 
@@ -44,9 +45,10 @@ int distance(std::string_view from, std::string_view to) {
 
 std::string_view nearestOf(const std::vector<std::string_view>& names, std::string_view word) {
   std::string_view nearest;
-  int least = std::numeric_limits<int>::max();
+  word = word.substr(0, longest);
+  int least = tooFar * static_cast<int>(word.size());
   for (const std::string_view name : names) {
-    const int cost = distance(word.substr(0, longest), name);
+    const int cost = distance(word, name);
     if (cost < least) {
       least = cost;
       nearest = name;

@@ -30,19 +30,34 @@ std::optional<Rise> riseAt(Cursor& cursor) {
   return rise;
 }
 
+/// Of "-1 in -12": the same slope with its sign in front, if any.
+std::string signInFront(const Rise& rise, const Token& word, std::string_view run) {
+  const std::string between = word.is(Kind::colon) ? ":" : " in ";
+  return (rise.negative ? "" : "-") + std::string(rise.number.text) + between + std::string(run);
+}
+
 /// The run of a slope; 100 for one in per cent. None when no slope stands here.
-std::optional<Result<double>> runAt(Cursor& cursor, Slopes slopes) {
+std::optional<Result<double>> runAt(Cursor& cursor, const Rise& rise, Slopes slopes) {
   const Token& sign = cursor.peek();
   if (sign.text == "%" && slopes != Slopes::tolerance && cursor.peek(1).is(Kind::end)) {
     cursor.take();
     return 100.0;
   }
-  if ((sign.text != "in" && !sign.is(Kind::colon)) || !cursor.peek(1).is(Kind::number) ||
-      !cursor.peek(2).is(Kind::end))
+  const bool negative = cursor.peek(1).is(Kind::minus);
+  const std::size_t number = negative ? 2 : 1;
+  if ((sign.text != "in" && !sign.is(Kind::colon)) || !cursor.peek(number).is(Kind::number) ||
+      !cursor.peek(number + 1).is(Kind::end))
     return std::nullopt;
   cursor.take();
+  const std::size_t start = cursor.at();
+  if (negative)
+    cursor.take();
   const Piece piece = cursor.here();
   cursor.take();
+  if (negative && slopes == Slopes::tolerance)
+    return tl::unexpected(negativeTolerance(cursor.since(0)));
+  if (negative)
+    return tl::unexpected(signBehindSlope(cursor.since(start), signInFront(rise, sign, piece.text)));
   const auto run = numberOf(piece);
   if (!run)
     return tl::unexpected(run.error());
@@ -58,7 +73,7 @@ std::optional<Result<double>> readSlope(std::string_view text, const Tokens& tok
   const auto rise = riseAt(cursor);
   if (!rise)
     return std::nullopt;
-  const auto run = runAt(cursor, slopes);
+  const auto run = runAt(cursor, *rise, slopes);
   if (!run)
     return std::nullopt;
   if (slopes == Slopes::none)

@@ -52,14 +52,17 @@ std::string without(std::string_view text, char sign) {
   return result;
 }
 
-/// "2,1", "1.234,5", "1,234.5" with the point where it was meant. The last sign of two kinds is the decimal
-/// one; a sign that is repeated parts thousands.
-std::string withPoint(std::string_view typed) {
+/// Of "1,234.5" and "1,234,567": the last sign of two kinds is the decimal one; a sign that is repeated parts
+/// thousands.
+bool partsThousands(std::string_view typed) {
   const std::size_t comma = typed.rfind(',');
   const std::size_t point = typed.rfind('.');
-  const bool once = typed.find(',') == comma;
-  if (!once || (point != std::string_view::npos && point > comma))
-    return without(typed, ',');
+  return typed.find(',') != comma || (point != std::string_view::npos && point > comma);
+}
+
+/// "2,1", "1.234,5" with the point where it was meant.
+std::string withPoint(std::string_view typed) {
+  const std::size_t comma = typed.rfind(',');
   const std::string whole = without(typed.substr(0, comma), '.');
   return (whole.empty() ? "0" : whole) + "." + std::string(typed.substr(comma + 1));
 }
@@ -77,7 +80,9 @@ std::optional<Problem> commaInNumber(Cursor cursor, const Token& first) {
   if (!last)
     return std::nullopt;
   const std::string_view typed(first.text.data(), last->offset + last->text.size() - start);
-  return decimalComma({typed, first.column}, withPoint(typed));
+  const Piece piece{typed, first.column};
+  return partsThousands(typed) ? thousandsComma(piece, without(typed, ','))
+                               : decimalComma(piece, withPoint(typed));
 }
 
 /// The unit that ends just before the cursor: back to its last name.

@@ -65,7 +65,7 @@ const Unit& degreeUnit();
 /// The unit of this name, also "°" for deg; null for any other word.
 const Unit* findUnit(std::string_view name);
 /// The name in the table that a mistyped one most likely means: differing case counts least, then a missing
-/// or surplus letter, then a wrong one.
+/// or surplus letter, then a wrong one. Empty when it is like none.
 std::string_view nearestUnitName(std::string_view name);
 
 /// Reads a unit as a study names it ("MPa", "kN*m", "N/mm^2"); a Problem when it is unknown or its dimension

@@ -69,8 +69,10 @@ Problem emptyUnit() {
 }
 
 Problem unknownUnit(const Piece& name) {
+  const std::string_view meant = nearestUnitName(name.text);
   return problemAt(name, PW_TEXT("Expression", "There is no unit “%1”.").with(shortened(name.text)),
-                   PW_TEXT("Expression", "Did you mean %1?").with(nearestUnitName(name.text)));
+                   meant.empty() ? PW_TEXT("Expression", "Type for example MPa, psi, kN, mm or deg.")
+                                 : PW_TEXT("Expression", "Did you mean %1?").with(meant));
 }
 
 Problem unitGoesOn(const Piece& piece) {
@@ -137,6 +139,13 @@ Problem slopeForNormal(const Piece& slope) {
 Problem slopeOverNothing(const Piece& run) {
   return problemAt(run, PW_TEXT("Expression", "The run of the slope is zero."),
                    PW_TEXT("Expression", "Write 90 deg for a line along y."));
+}
+
+Problem signBehindSlope(const Piece& run, std::string_view mended) {
+  return problemAt(run,
+                   PW_TEXT("Expression", "The sign of a slope stands in front, not before “%1”.")
+                       .with(shortened(run.text)),
+                   PW_TEXT("Expression", "Write %1.").with(shortened(mended)));
 }
 
 Problem negativeTolerance(const Piece& piece) {

@@ -78,6 +78,12 @@ Problem decimalComma(const Piece& piece, std::string_view mended) {
                    PW_TEXT("Expression", "Write %1, with a decimal point.").with(shortened(mended)));
 }
 
+Problem thousandsComma(const Piece& piece, std::string_view mended) {
+  return problemAt(piece,
+                   PW_TEXT("Expression", "“%1” has a comma between thousands.").with(shortened(piece.text)),
+                   PW_TEXT("Expression", "Write %1; digits are not grouped.").with(shortened(mended)));
+}
+
 Problem strayComma(const Piece& comma) {
   return problemAt(comma, PW_TEXT("Expression", "The “,” parts nothing here."),
                    PW_TEXT("Expression", "Commas stand only between the values of min and max."));
@@ -115,9 +121,10 @@ Problem strangeCharacter(const Piece& piece) {
 }
 
 Problem unknownFunction(const Piece& name) {
+  const std::string_view meant = nearestOf(functionNames(), name.text);
+  const Text all = PW_TEXT("Expression", "There are sqrt, abs, min, max, sin, cos and tan.");
   return problemAt(name, PW_TEXT("Expression", "There is no function “%1”.").with(shortened(name.text)),
-                   PW_TEXT("Expression", "Did you mean %1? There are sqrt, abs, min, max, sin, cos and tan.")
-                       .with(nearestOf(functionNames(), name.text)));
+                   meant.empty() ? all : PW_TEXT("Expression", "Did you mean %1? %2").with(meant).with(all));
 }
 
 Problem unknownWord(const Piece& name) {

@@ -20,6 +20,7 @@ Problem valueMissing(const Piece& piece);
 Problem operatorMissing(const Piece& first, const Piece& second);
 Problem brokenNumber(const Piece& piece);
 Problem decimalComma(const Piece& piece, std::string_view mended);
+Problem thousandsComma(const Piece& piece, std::string_view mended);
 Problem strayComma(const Piece& comma);
 Problem leadingEquals(const Piece& piece);
 Problem bracketsRoundUnit(const Piece& piece, std::string_view unit);
@@ -42,6 +43,7 @@ Problem superscriptRow(const Piece& piece);
 Problem slopeStandsAlone(const Piece& piece);
 Problem slopeForNormal(const Piece& slope);
 Problem slopeOverNothing(const Piece& run);
+Problem signBehindSlope(const Piece& run, std::string_view mended);
 Problem negativeTolerance(const Piece& piece);
 
 /// A unit of another dimension than the one wanted.
