@@ -3,16 +3,6 @@
 
 namespace planewright {
 
-Vec operator+(Vec a, Vec b) {
-  return {a.x + b.x, a.y + b.y};
-}
-Vec operator-(Vec a, Vec b) {
-  return {a.x - b.x, a.y - b.y};
-}
-Vec operator*(double factor, Vec a) {
-  return {factor * a.x, factor * a.y};
-}
-
 std::vector<double> dashLengths(Dash dash) {
   switch (dash) {
   case Dash::shortDash:

@@ -47,9 +47,15 @@ struct Vec {
   double y = 0;
   bool operator==(const Vec&) const = default;
 };
-Vec operator+(Vec a, Vec b);
-Vec operator-(Vec a, Vec b);
-Vec operator*(double factor, Vec a);
+constexpr Vec operator+(Vec a, Vec b) {
+  return {a.x + b.x, a.y + b.y};
+}
+constexpr Vec operator-(Vec a, Vec b) {
+  return {a.x - b.x, a.y - b.y};
+}
+constexpr Vec operator*(double factor, Vec a) {
+  return {factor * a.x, factor * a.y};
+}
 
 struct Pen {
   Role role = Role::ink;

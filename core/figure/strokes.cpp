@@ -36,18 +36,35 @@ int countUnder(const Path& path, const Box& box) {
   return count;
 }
 
+constexpr int pieces = 90;
+
+/// Whether the whole circle of an arc misses the box: the box lies outside it, or inside the chords of its
+/// pieces.
+bool misses(const Arc& arc, const Box& box) {
+  const double left = box.left - arc.centre.x;
+  const double right = box.right - arc.centre.x;
+  const double top = box.top - arc.centre.y;
+  const double bottom = box.bottom - arc.centre.y;
+  const double nearest = std::hypot(std::max({left, -right, 0.0}), std::max({top, -bottom, 0.0}));
+  const double farthest = std::hypot(std::max(-left, right), std::max(-top, bottom));
+  constexpr double chord = 0.999; // the middle of a piece of 4 deg lies at cos 2 deg
+  return nearest >= arc.radius || farthest <= chord * arc.radius;
+}
+
 int countUnder(const Arc& arc, const Box& box) {
-  constexpr int pieces = 90;
-  if (!overlap(box, {arc.centre.x - arc.radius, arc.centre.y - arc.radius, arc.centre.x + arc.radius,
-                     arc.centre.y + arc.radius}))
+  if (misses(arc, box))
     return 0;
   const auto at = [&](int i) {
     const CosSin d = cosSin(Angle::fromDegrees(arc.start + arc.sweep * i / pieces));
     return arc.centre + arc.radius * Vec{d.cos, -d.sin};
   };
-  for (int i = 0; i < pieces; ++i)
-    if (meets(at(i), at(i + 1), box))
+  Vec from = at(0);
+  for (int i = 1; i <= pieces; ++i) {
+    const Vec to = at(i);
+    if (meets(from, to, box))
       return 1;
+    from = to;
+  }
   return 0;
 }
 

@@ -59,6 +59,17 @@ inline bool meets(Vec from, Vec to, const Box& box) {
   return meets(from, middle, box) || meets(middle, to, box);
 }
 
+/// What the pieces of one part take, a hair more so that a straight one has an inside.
+inline Box extentOf(const std::vector<Segment>& pieces) {
+  constexpr double hair = 0.001;
+  Box box{1e9, 1e9, -1e9, -1e9};
+  for (const Segment& piece : pieces)
+    for (const Vec at : {piece.from, piece.to})
+      box = {std::min(box.left, at.x - hair), std::min(box.top, at.y - hair),
+             std::max(box.right, at.x + hair), std::max(box.bottom, at.y + hair)};
+  return box;
+}
+
 /// The box of a label's letters alone.
 inline Box lettersOf(const Label& label) {
   const Box box = boxOf(label);
@@ -94,12 +105,15 @@ inline std::string labelFault(const Picture& picture) {
       if (&one != &other && overlap(one.label->ground ? one.box : one.letters, other.letters))
         return words + " meets " + plain(other.label->runs);
   }
-  for (std::size_t i = 0; i < picture.parts.size(); ++i)
-    for (const Segment& piece :
-         std::visit([](const auto& part) { return segmentsOf(part); }, picture.parts[i]))
-      for (const Measured& one : labels)
-        if ((i > one.index || !one.label->ground) && meets(piece.from, piece.to, one.letters))
-          return plain(one.label->runs) + " has a stroke in it";
+  for (std::size_t i = 0; i < picture.parts.size(); ++i) {
+    const auto pieces = std::visit([](const auto& part) { return segmentsOf(part); }, picture.parts[i]);
+    const Box extent = extentOf(pieces);
+    for (const Measured& one : labels)
+      if ((i > one.index || !one.label->ground) && overlap(extent, one.letters))
+        for (const Segment& piece : pieces)
+          if (meets(piece.from, piece.to, one.letters))
+            return plain(one.label->runs) + " has a stroke in it";
+  }
   return {};
 }
 
