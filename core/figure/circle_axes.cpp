@@ -1,8 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/circle_axes.h"
 
-#include "core/table/table.h"
-
 #include <cmath>
 
 namespace planewright {
@@ -31,9 +29,9 @@ struct Plot {
   const Setting& setting;
   const CircleFit& fit;
 
-  double unitsPerStress() const { return inStressUnit(setting.study, 1); }
+  double unitsPerStress() const { return setting.stresses.inUnit(1); }
   double perUnit() const { return fit.scale / unitsPerStress(); }
-  double meanInUnit() const { return inStressUnit(setting.study, fit.mean); }
+  double meanInUnit() const { return setting.stresses.inUnit(fit.mean); }
   double across(double value) const { return fit.centre.x + (value - meanInUnit()) * perUnit(); }
   double down(double value) const { return fit.centre.y + (fit.down ? value : -value) * perUnit(); }
 
@@ -114,8 +112,7 @@ void drawTauTitle(const Plot& plot) {
   plot.words({frame.left, y}, title.with(plot.setting.study.units.stress), Align::start, Role::ink);
   if (plot.fit.showsZero())
     return;
-  const StateReading& state = plot.setting.readout.state();
-  const std::string distance = shownStress(plot.setting.study, state, std::abs(plot.fit.mean));
+  const std::string distance = plot.setting.stresses.shown(std::abs(plot.fit.mean));
   const bool left = plot.fit.mean > 0;
   const Text words = left ? PW_TEXT("Figure", "0 is %1 left of the centre")
                           : PW_TEXT("Figure", "0 is %1 right of the centre");

@@ -2,7 +2,6 @@
 #include "core/figure/circle_fit.h"
 
 #include "core/quantity/format.h"
-#include "core/table/table.h"
 
 #include <algorithm>
 #include <cmath>
@@ -80,7 +79,7 @@ void fitPoint(CircleFit& fit, const Setting& setting, double mean) {
   const double middle = (fit.frame.left + fit.frame.right) / 2;
   constexpr double span = 0.3;
   if (mean == 0) {
-    fit.scale = span * std::min(width, height) * inStressUnit(setting.study, 1);
+    fit.scale = span * std::min(width, height) * setting.stresses.inUnit(1);
     fit.centre.x = middle;
   } else {
     fit.scale = span * width / std::abs(mean);
@@ -129,13 +128,13 @@ double tickWidth(const Setting& setting, const Steps& steps, double reach) {
 }
 
 double unitsIn(const CircleFit& fit, const Setting& setting, double mm) {
-  return mm / fit.scale * inStressUnit(setting.study, 1);
+  return mm / fit.scale * setting.stresses.inUnit(1);
 }
 
 void fitSteps(CircleFit& fit, const Setting& setting) {
   const double text = setting.text;
-  const double reach = std::abs(inStressUnit(setting.study, fit.mean)) +
-                       unitsIn(fit, setting, fit.frame.right - fit.frame.left);
+  const double reach =
+      std::abs(setting.stresses.inUnit(fit.mean)) + unitsIn(fit, setting, fit.frame.right - fit.frame.left);
   fit.upright = roundSteps(unitsIn(fit, setting, 3.2 * text));
   fit.across = fit.upright;
   while (unitsIn(fit, setting, tickWidth(setting, fit.across, reach) + 1.2 * text) > fit.across.step)

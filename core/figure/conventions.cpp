@@ -2,7 +2,7 @@
 #include "core/figure/conventions.h"
 
 #include "core/quantity/format.h"
-#include "core/table/table.h"
+#include "core/study/stress_form.h"
 
 namespace planewright {
 
@@ -42,10 +42,10 @@ Text lineOf(const LineReading& line) {
 }
 
 Text thirdStressOf(const Study& study, const StateReading& state) {
-  return PW_TEXT("Figure", "With σ_{3} = %1 the greatest shear on any plane is %2 %3.")
-      .with(state.sz == 0 ? "0" : shownStress(study, state, state.sz) + " " + study.units.stress)
-      .with(shownStress(study, state, state.circle.tauAbsMax))
-      .with(study.units.stress);
+  const StressForm stresses = stressFormOf(study, state);
+  return PW_TEXT("Figure", "With σ_{3} = %1 the greatest shear on any plane is %2.")
+      .with(state.sz == 0 ? "0" : stresses.withUnit(state.sz))
+      .with(stresses.withUnit(state.circle.tauAbsMax));
 }
 
 Text missingOf(const StateReading& state) {

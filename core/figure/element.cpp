@@ -5,7 +5,7 @@
 #include "core/figure/element_line.h"
 #include "core/figure/element_texture.h"
 #include "core/quantity/format.h"
-#include "core/table/table.h"
+#include "core/study/stress_form.h"
 
 #include <algorithm>
 #include <cmath>
@@ -28,6 +28,7 @@ struct Drawing {
   const ElementOrder& order;
   ElementFrame frame;
   Angle normal; ///< of the n face as drawn
+  StressForm stresses;
 
   void stroke(std::vector<Vec> points, const Pen& pen) const {
     picture.parts.push_back(Path{std::move(points), false, pen, {}});
@@ -41,8 +42,8 @@ Pen solid(Role role, double width) {
 
 double arrowLength(const Drawing& drawing, double stress) {
   const StateReading& state = drawing.readout.state();
-  const double shown = std::abs(inStressUnit(drawing.study, stress));
-  if (2 * shown * std::pow(10.0, stressDecimals(drawing.study, state)) < 1)
+  const double shown = std::abs(drawing.stresses.inUnit(stress));
+  if (2 * shown * std::pow(10.0, drawing.stresses.decimals) < 1)
     return 0;
   // In a study with compression positive the numbers are those of the negated tensor; the body is not.
   const double sense = drawing.study.convention.positive == Positive::tension ? 1 : -1;
@@ -150,7 +151,7 @@ LabelWish wish(const Drawing& drawing, const char* key, Vec mark, const Text& lo
 
 LabelWish stressWish(const Drawing& drawing, const char* key, const std::string& name, double stress,
                      Vec mark, Role role, int priority) {
-  const std::string value = shownStress(drawing.study, drawing.readout.state(), stress);
+  const std::string value = drawing.stresses.shown(stress);
   return wish(drawing, key, mark, symbol(name + " %1").with(value), name.c_str(), role, priority);
 }
 
@@ -232,7 +233,7 @@ std::vector<LabelWish> drawElement(Picture& picture, const Study& study, const R
   const ElementFrame frame{order.centre, order.outer, readout.axes};
   const Angle normal =
       !order.turned ? Angle() : readout.reading.value + (order.otherFace ? halfTurn : Angle());
-  const Drawing drawing{picture, study, readout, order, frame, normal};
+  const Drawing drawing{picture, study, readout, order, frame, normal, stressFormOf(study, readout.state())};
   const LineReading* line = drawing.line();
   if (order.handles)
     drawRing(picture, frame, order);

@@ -4,7 +4,6 @@
 #include "core/figure/conventions.h"
 #include "core/figure/text_lines.h"
 #include "core/quantity/format.h"
-#include "core/table/table.h"
 #include "core/words/version.h"
 
 #include <algorithm>
@@ -125,9 +124,7 @@ std::string figureTitle(const Setting& setting) {
 
 std::string figureDescription(const Setting& setting) {
   const StateReading& state = setting.readout.state();
-  const auto shown = [&](double stress) {
-    return shownStress(setting.study, state, stress) + " " + setting.study.units.stress;
-  };
+  const auto shown = [&](double stress) { return setting.stresses.withUnit(stress); };
   Text words =
       PW_TEXT("Figure", "Plane stress: σ_{x} %1, σ_{y} %2, τ_{xy} %3. Principal stresses %4 and %5. On the "
                         "plane with its normal at %6: σ_{n} %7, τ_{nt} %8.")

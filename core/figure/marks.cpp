@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/marks.h"
 
-#include "core/table/table.h"
+#include "core/study/stress_form.h"
 
 namespace planewright {
 
@@ -96,10 +96,9 @@ Text shortFormOf(const PlaneReading& plane, bool manyLines) {
   return verbatim(plane.name);
 }
 
-Text longFormOf(const Study& study, const StateReading& state, const PlaneReading& plane,
-                const Text& shortForm) {
-  const std::string sn = shownStress(study, state, plane.traction.sn);
-  const std::string tnt = shownStress(study, state, plane.traction.tnt);
+Text longFormOf(const StressForm& stresses, const PlaneReading& plane, const Text& shortForm) {
+  const std::string sn = stresses.shown(plane.traction.sn);
+  const std::string tnt = stresses.shown(plane.traction.tnt);
   switch (plane.kind) {
   case PlaneKind::reading:
     return PW_TEXT("Mark", "%1 %2 | %3").with(shortForm).with(sn).with(tnt);
@@ -123,12 +122,13 @@ Text longFormOf(const Study& study, const StateReading& state, const PlaneReadin
 
 std::vector<Mark> marksOf(const Study& study, const Readout& readout) {
   const StateReading& state = readout.state();
+  const StressForm stresses = stressFormOf(study, state);
   std::vector<Mark> marks;
   for (const PlaneReading& plane : planesOf(readout, state)) {
     if (!plane.normal) // every direction is principal
       continue;
     const Text shortForm = shortFormOf(plane, readout.lines.size() > 1);
-    marks.push_back({plane.kind, plane.name, plane.traction, longFormOf(study, state, plane, shortForm),
+    marks.push_back({plane.kind, plane.name, plane.traction, longFormOf(stresses, plane, shortForm),
                      shortForm, priorityOf(plane.kind)});
   }
   return marks;

@@ -14,7 +14,7 @@ constexpr double narrowBelow = 130; // mm
 Setting settingOf(const Study& study, const Readout& readout, const FigureOrder& order) {
   const double points = order.textPoints;
   const double smallPoints = std::max(leastPoints, points - 1);
-  Setting setting{study, readout, order};
+  Setting setting{study, readout, order, stressFormOf(study, readout.state())};
   setting.isNarrow = order.width < narrowBelow;
   setting.text = points * mmPerPoint;
   setting.small = smallPoints * mmPerPoint;

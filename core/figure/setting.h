@@ -3,6 +3,7 @@
 
 #include "core/figure/figure.h"
 #include "core/figure/metrics.h"
+#include "core/study/stress_form.h"
 
 namespace planewright {
 
@@ -13,6 +14,7 @@ struct Setting {
   const Study& study;
   const Readout& readout;
   const FigureOrder& order;
+  StressForm stresses; ///< of the shown state
   bool isNarrow = false;
   double title = 0; ///< em of the title
   double text = 0;  ///< em of everything but title, table and conventions

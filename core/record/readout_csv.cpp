@@ -24,7 +24,7 @@ const Fields& heading() {
 class StateRows {
 public:
   StateRows(const Study& study, const Readout& readout, const StateReading& state)
-      : m_study(study), m_readout(readout), m_state(state) {}
+      : m_unit(stressUnitOf(study)), m_study(study), m_readout(readout), m_state(state) {}
 
   std::string written() const {
     std::string rows;
@@ -37,7 +37,7 @@ public:
   }
 
 private:
-  std::string stress(double value) const { return exactNumber(inStressUnit(m_study, value)); }
+  std::string stress(double value) const { return exactNumber(m_unit.fromBase(value)); }
   static std::string angle(Angle value) { return exactNumber(value.degrees()); }
   static std::string angle(const std::optional<NormalAngle>& normal) {
     return normal ? angle(normal->value) : "";
@@ -91,6 +91,7 @@ private:
     return csvRow(fields);
   }
 
+  Unit m_unit;
   const Study& m_study;
   const Readout& m_readout;
   const StateReading& m_state;

@@ -13,7 +13,7 @@ constexpr int readoutVersion = 1;
 /// Writes the parts of a readout, stresses in the study's unit.
 class ReadoutWriter {
 public:
-  explicit ReadoutWriter(const Study& study) : m_study(study) {}
+  explicit ReadoutWriter(const Study& study) : m_study(study), m_unit(stressUnitOf(study)) {}
 
   std::string written(const std::vector<Readout>& points) {
     m_json.beginObject();
@@ -31,7 +31,7 @@ public:
 
 private:
   void text(const char* key, std::string_view words) { m_json.key(key).text(words); }
-  void stress(const char* key, double value) { m_json.key(key).number(inStressUnit(m_study, value)); }
+  void stress(const char* key, double value) { m_json.key(key).number(m_unit.fromBase(value)); }
   void angle(const char* key, Angle value) { m_json.key(key).number(value.degrees()); }
   void angle(const char* key, const std::optional<NormalAngle>& normal) {
     if (normal)
@@ -119,6 +119,7 @@ private:
   }
 
   const Study& m_study;
+  Unit m_unit;
   JsonWriter m_json;
 };
 

@@ -91,18 +91,15 @@ private:
                         : PW_TEXT("Readout", "Case %1 alone").with(state.combination);
   }
 
-  std::string value(const StateReading& state, double stress) const {
-    return shownStress(m_study, state, stress) + " " + m_study.units.stress;
-  }
-
   void state(const Readout& readout, const StateReading& state, bool isCombination) {
+    const StressForm stresses = stressFormOf(m_study, state);
     m_out += '\n';
     line("  ", nameOf(state, isCombination));
     line("    ", symbol("σ_{x} = %1, σ_{y} = %2, τ_{xy} = %3, σ_{z} = %4")
-                     .with(value(state, state.stress.sx))
-                     .with(value(state, state.stress.sy))
-                     .with(value(state, state.stress.txy))
-                     .with(value(state, state.sz)));
+                     .with(stresses.withUnit(state.stress.sx))
+                     .with(stresses.withUnit(state.stress.sy))
+                     .with(stresses.withUnit(state.stress.txy))
+                     .with(stresses.withUnit(state.sz)));
     m_out += '\n';
     planes(planesTable(m_study, readout, state));
     m_out += '\n';

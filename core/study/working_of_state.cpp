@@ -1,17 +1,13 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/working_of_state.h"
 
-#include "core/quantity/format.h"
-#include "core/study/place.h"
+#include "core/study/stress_form.h"
 
 #include <algorithm>
-#include <cmath>
 
 namespace planewright {
 
 namespace {
-
-constexpr int angleDecimals = 2;
 
 const Formula sx = Formula::symbol("σ_{x}");
 const Formula sy = Formula::symbol("σ_{y}");
@@ -44,10 +40,7 @@ Formula foldedOnce(const Formula& formula, const NumbersPutIn& numbers) {
 class Working {
 public:
   Working(const Study& study, const StateReading& state)
-      : m_unit(entryKindOf(study, Spot::sx).unit), m_state(state) {
-    const Circle& circle = state.circle;
-    const double largest = std::max({std::abs(circle.s1), std::abs(circle.s2), std::abs(state.sz)});
-    m_decimals = decimalsFor(m_unit.fromBase(largest));
+      : m_form(stressFormOf(study, state)), m_state(state) {
     m_given = {stress(sx, state.stress.sx), stress(sy, state.stress.sy), stress(txy, state.stress.txy)};
   }
 
@@ -70,7 +63,7 @@ public:
 
 private:
   NumberPutIn stress(const Formula& symbol, double value) const {
-    return {symbol.symbol(), m_unit.fromBase(value), m_decimals + 1, false};
+    return {symbol.symbol(), m_form.inUnit(value), m_form.decimals + 1, false};
   }
 
   NumbersPutIn givenWith(const Formula& symbol, Angle angle) const {
@@ -82,7 +75,7 @@ private:
   void addStress(Text name, const char* symbolOf, const Formula& formula, const NumbersPutIn& numbers,
                  double result) {
     m_steps.push_back({std::move(name), symbol(symbolOf), formula, used(formula, numbers),
-                       m_unit.fromBase(result), m_decimals, m_unit.name,
+                       m_form.inUnit(result), m_form.decimals, m_form.unit.name,
                        PW_TEXT("Working", "common practice")});
   }
 
@@ -155,9 +148,8 @@ private:
               shearStress(phi), numbers, stresses.shear);
   }
 
-  Unit m_unit;
+  StressForm m_form;
   const StateReading& m_state;
-  int m_decimals = 0;
   NumbersPutIn m_given;
   std::vector<Step> m_steps;
 };

@@ -2,20 +2,14 @@
 #include "core/table/table.h"
 
 #include "core/quantity/format.h"
-#include "core/study/place.h"
 #include "core/table/cautions.h"
 
-#include <algorithm>
 #include <cassert>
 #include <cmath>
 
 namespace planewright {
 
 namespace {
-
-Unit stressUnit(const Study& study) {
-  return entryKindOf(study, Spot::sx).unit;
-}
 
 std::vector<Column> columnsOf(const Study& study) {
   const std::string& unit = study.units.stress;
@@ -82,19 +76,8 @@ Cell angleCell(Angle angle) {
           angle.degrees()};
 }
 
-/// Stresses of one state as they are shown, the unit read once for all of them.
-struct StressColumn {
-  Unit unit;
-  int decimals;
-
-  Cell cell(double stress) const {
-    const double exact = unit.fromBase(stress);
-    return {verbatim(shownNumber(exact, decimals)), exact};
-  }
-};
-
-StressColumn stressColumn(const Study& study, const StateReading& state) {
-  return {stressUnit(study), stressDecimals(study, state)};
+Cell stressCell(const StressForm& stresses, double stress) {
+  return {verbatim(stresses.shown(stress)), stresses.inUnit(stress)};
 }
 
 /// A degenerate state has no angle of its own for these planes: every direction is one.
@@ -108,36 +91,20 @@ void addAngles(Row& row, const PlaneReading& plane) {
   }
 }
 
-Row rowOfPlane(const StressColumn& stresses, const PlaneReading& plane, Text name) {
+Row rowOfPlane(const StressForm& stresses, const PlaneReading& plane, Text name) {
   Row row{plane.kind, plane.name, groupOf(plane.kind), {}};
   row.cells.push_back({std::move(name), std::nullopt});
   addAngles(row, plane);
-  row.cells.push_back(stresses.cell(plane.traction.sn));
-  row.cells.push_back(stresses.cell(plane.traction.tnt));
+  row.cells.push_back(stressCell(stresses, plane.traction.sn));
+  row.cells.push_back(stressCell(stresses, plane.traction.tnt));
   return row;
 }
 
 } // namespace
 
-double inStressUnit(const Study& study, double stress) {
-  return stressUnit(study).fromBase(stress);
-}
-
-// The greatest |stress| on any plane sets the decimals, so that they do not change while a plane turns; a
-// radius lost in cancellation shows no digits that mean nothing.
-int stressDecimals(const Study& study, const StateReading& state) {
-  const Circle& circle = state.circle;
-  const double largest = std::max({std::abs(circle.s1), std::abs(circle.s2), std::abs(state.sz)});
-  return decimalsFor(inStressUnit(study, largest));
-}
-
-std::string shownStress(const Study& study, const StateReading& state, double stress) {
-  return shownNumber(inStressUnit(study, stress), stressDecimals(study, state));
-}
-
 Table planesTable(const Study& study, const Readout& readout, const StateReading& state) {
   Table table{columnsOf(study), {}, cautionsOf(state)};
-  const StressColumn stresses = stressColumn(study, state);
+  const StressForm stresses = stressFormOf(study, state);
   for (const PlaneReading& plane : planesOf(readout, state))
     table.rows.push_back(rowOfPlane(stresses, plane, nameOf(plane)));
   return table;
@@ -146,7 +113,7 @@ Table planesTable(const Study& study, const Readout& readout, const StateReading
 Table sweepTable(const Study& study, const StateReading& state, Angle step) {
   assert(step.degrees() >= 0.1 && step.degrees() <= 90);
   Table table{columnsOf(study), {}, cautionsOf(state)};
-  const StressColumn stresses = stressColumn(study, state);
+  const StressForm stresses = stressFormOf(study, state);
   const int most = static_cast<int>(std::floor(90 / step.degrees() + 1e-9));
   for (int i = -most; i <= most; ++i) {
     const Angle angle = Angle::fromDegrees(i * step.degrees());

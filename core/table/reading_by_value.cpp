@@ -19,14 +19,14 @@ Text symbolOf(Component component) {
 
 Problem outOfReach(const Study& study, const Readout& readout, Component component,
                    const PlanesOfValue& planes, std::string_view text) {
-  const StateReading& state = readout.state();
+  const StressForm stresses = stressFormOf(study, readout.state());
   Problem problem;
   problem.place = pathOf({Spot::reading, readout.point, {}});
   problem.quoted = text;
   problem.what = PW_TEXT("Inverse", "%1 reaches only %2 to %3.")
                      .with(symbolOf(component))
-                     .with(shownStress(study, state, planes.least))
-                     .with(shownStress(study, state, planes.greatest) + " " + study.units.stress);
+                     .with(stresses.shown(planes.least))
+                     .with(stresses.withUnit(planes.greatest));
   return problem;
 }
 

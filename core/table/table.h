@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/study/readout.h"
+#include "core/study/stress_form.h"
 
 namespace planewright {
 
@@ -44,14 +44,5 @@ Table sweepTable(const Study& study, const StateReading& state, Angle step);
 std::string tabSeparated(const Table& table, const Translate& translate = {});
 /// One HTML table element, with the shown numbers; then a paragraph for each caution.
 std::string html(const Table& table, const Translate& translate = {});
-
-/// Decimals for every stress of this state in the study's unit: four significant digits in its largest.
-int stressDecimals(const Study& study, const StateReading& state);
-/// A stress of the base written in the study's unit with that count of decimals.
-std::string shownStress(const Study& study, const StateReading& state, double stress);
-/// A stress of the base in the study's unit.
-double inStressUnit(const Study& study, double stress);
-/// Decimals of every angle in tables.
-inline constexpr int angleDecimals = 2;
 
 } // namespace planewright
