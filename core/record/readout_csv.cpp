@@ -12,11 +12,14 @@ namespace {
 using Fields = std::vector<std::string>;
 
 const Fields& heading() {
-  static const Fields names = {
-      "point",  "combination", "judged", "sx",     "sy",      "txy",           "mean",
-      "radius", "s1",          "s2",     "theta1", "tau_max", "theta_tau_max", "tau_abs_max",
-      "row",    "name",        "normal", "cut",    "sn",      "tnt",           "kind",
-      "angle",  "tolerance",   "along",  "across", "shear",   "cautions"};
+  static const Fields names = {"point",       "combination", "judged",  "stress_unit",
+                               "positive",    "sx",          "sy",      "txy",
+                               "sz",          "mean",        "radius",  "s1",
+                               "s2",          "theta1",      "tau_max", "theta_tau_max",
+                               "tau_abs_max", "row",         "name",    "normal",
+                               "cut",         "sn",          "tnt",     "kind",
+                               "angle",       "tolerance",   "along",   "across",
+                               "shear",       "cautions"};
   return names;
 }
 
@@ -49,9 +52,12 @@ private:
     return {m_readout.point,
             m_state.combination,
             m_state.judged ? "true" : "false",
+            m_study.units.stress,
+            std::string(wordOf(m_study.convention.positive)),
             stress(s.sx),
             stress(s.sy),
             stress(s.txy),
+            stress(m_state.sz),
             stress(circle.mean),
             stress(circle.radius),
             stress(circle.s1),

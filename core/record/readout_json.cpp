@@ -71,6 +71,7 @@ private:
     stress("sx", state.stress.sx);
     stress("sy", state.stress.sy);
     stress("txy", state.stress.txy);
+    stress("sz", state.sz);
     circle(state.circle);
     m_json.key("planes").beginList();
     for (std::size_t i = 0; i < readout.watched.size(); ++i)

@@ -119,8 +119,13 @@ private:
   }
 
   void working(const Readout& readout, const StateReading& state) {
-    for (const Step& step : workingOf(m_study, readout, state)) {
-      line("    ", PW_TEXT("Readout", "%1 (%2)").with(step.name).with(step.source));
+    const std::vector<Step> steps = workingOf(m_study, readout, state);
+    const bool oneSource =
+        std::ranges::all_of(steps, [&](const Step& step) { return step.source == steps.front().source; });
+    if (oneSource)
+      line("    ", PW_TEXT("Readout", "Working (formulas: %1)").with(steps.front().source));
+    for (const Step& step : steps) {
+      line("    ", oneSource ? step.name : PW_TEXT("Readout", "%1 (%2)").with(step.name).with(step.source));
       line("      ", planewright::written(step));
     }
   }

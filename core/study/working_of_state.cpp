@@ -36,6 +36,8 @@ Formula foldedOnce(const Formula& formula, const NumbersPutIn& numbers) {
   return formula.valueWith(numbers) > -90 ? formula : formula + Formula::degrees(180);
 }
 
+const Text source = PW_TEXT("Working", "common practice, no source");
+
 /// Writes the steps of one state.
 class Working {
 public:
@@ -75,14 +77,13 @@ private:
   void addStress(Text name, const char* symbolOf, const Formula& formula, const NumbersPutIn& numbers,
                  double result) {
     m_steps.push_back({std::move(name), symbol(symbolOf), formula, used(formula, numbers),
-                       m_form.inUnit(result), m_form.decimals, m_form.unit.name,
-                       PW_TEXT("Working", "common practice")});
+                       m_form.inUnit(result), m_form.decimals, m_form.unit.name, source});
   }
 
   void addAngle(Text name, const char* symbolOf, const Formula& formula, const NumbersPutIn& numbers,
                 Angle result) {
     m_steps.push_back({std::move(name), symbol(symbolOf), formula, used(formula, numbers), result.degrees(),
-                       angleDecimals, "°", PW_TEXT("Working", "common practice")});
+                       angleDecimals, "°", source});
   }
 
   /// The numbers that the formula names, in their order.

@@ -86,6 +86,29 @@ TEST(ReadoutFile, csvLosesNoStateWithoutPlanesAndLines) {
   EXPECT_NE(csv.find("No stresses are given for case S: it counts as 0."), std::string::npos);
 }
 
+// What is needed to read a row alone, and to work out its greatest shear again.
+TEST(ReadoutFile, aCsvRowSaysItsUnitItsSignAndTheThirdStress) {
+  const Study study = combinedStudy();
+  const std::string csv = readoutCsv(study, readoutsOf(study));
+  const auto heading = csvFields(csv.substr(0, csv.find('\n')));
+  const std::size_t start = csv.find('\n') + 1;
+  const auto row = csvFields(csv.substr(start, csv.find('\n', start) - start));
+  const auto field = [&](const char* key) {
+    return row.at(static_cast<std::size_t>(std::ranges::find(heading, key) - heading.begin()));
+  };
+  EXPECT_EQ(field("stress_unit"), "ksi");
+  EXPECT_EQ(field("positive"), "compression");
+  EXPECT_EQ(field("sz"), "0.405");
+}
+
+TEST(ReadoutFile, aSourceThatAllStepsShareIsSaidOnce) {
+  const Study study = goldenStudy();
+  const std::string text = readoutText(study, readoutsOf(study));
+  const std::string source = "common practice, no source";
+  ASSERT_NE(text.find(source), std::string::npos);
+  EXPECT_EQ(text.find(source), text.rfind(source));
+}
+
 TEST(ReadoutFile, textIsWrittenInTheLanguageOfTheOutputs) {
   const Study study = goldenStudy();
   const Translate german = [](const std::string& context, const std::string& source) {
