@@ -61,6 +61,10 @@ Angle apart(Angle a, Angle b) {
   return Angle::fromDegrees(std::abs(std::remainder(a.degrees() - b.degrees(), 180.0)));
 }
 
+bool coincide(Angle a, Angle b) {
+  return apart(a, b) < coinciding;
+}
+
 namespace {
 constexpr Angle rightAngle = Angle::fromDegrees(90);
 }

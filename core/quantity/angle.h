@@ -41,6 +41,9 @@ CosSin cosSinOfDouble(Angle angle);
 Angle folded(Angle angle);
 /// Distance of two directions modulo 180 deg, in [0, 90].
 Angle apart(Angle a, Angle b);
+/// Two directions nearer to each other than this are one: what snaps, steps or names tells no more apart.
+inline constexpr Angle coinciding = Angle::fromDegrees(1e-9);
+bool coincide(Angle a, Angle b);
 
 /// Angle phi of a physical line (grain, fibre, weld, bond) from +x. Modulo 180 deg.
 struct LineAngle {

@@ -11,8 +11,6 @@ namespace {
 
 using Directions = std::vector<NamedDirection>;
 
-constexpr double coinciding = 1e-9;
-
 void add(Directions& directions, Angle angle, Text name) {
   directions.push_back({folded(angle), std::move(name), true});
 }
@@ -36,9 +34,8 @@ void addMultiples(Directions& directions) {
   const Directions named = directions;
   for (int degrees = -75; degrees <= 90; degrees += 15) {
     const Angle angle = Angle::fromDegrees(degrees);
-    const bool stands = std::ranges::any_of(named, [&](const NamedDirection& direction) {
-      return apart(direction.angle, angle).degrees() < coinciding;
-    });
+    const bool stands = std::ranges::any_of(
+        named, [&](const NamedDirection& direction) { return coincide(direction.angle, angle); });
     if (!stands)
       directions.push_back({angle, verbatim(shownDegrees(angle, 0)), false});
   }

@@ -12,7 +12,7 @@ struct NamedDirection {
   bool byName; ///< false for the plain multiples of 15 deg
 };
 
-/// Directions for the reading plane's normal, ascending; coinciding ones (within 1e-9 deg) both stand.
+/// Directions for the reading plane's normal, ascending; coinciding ones both stand.
 std::vector<NamedDirection> directionsForNormal(const Readout& readout);
 /// Directions for the line: principal axes, x, y, every 15 deg.
 std::vector<NamedDirection> directionsForLine(const Readout& readout);

@@ -69,7 +69,7 @@ TEST(OutsideSlopes, everyRowOfTheFileHasItsAngle) {
     const std::vector<std::string> row = csvFields(line);
     ASSERT_EQ(row.size(), 6u) << line;
     EXPECT_FALSE(row[3].empty() || row[4].empty() || row[5].empty()) << line;
-    const auto entry = readEntry(row[0], {dimension::angle, {"deg", dimension::angle, 1, 1}, Slopes::line});
+    const auto entry = readEntry(row[0], {dimension::angle, degreeUnit(), Slopes::line});
     ASSERT_TRUE(entry) << line << ": " << plain(entry.error());
     EXPECT_NEAR(entry->value, number(row[1]), number(row[2])) << line;
   }

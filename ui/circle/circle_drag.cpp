@@ -2,6 +2,7 @@
 #include "ui/circle/circle_drag.h"
 
 #include "core/quantity/format.h"
+#include "core/study/cut_text.h"
 
 #include <cmath>
 
@@ -37,7 +38,7 @@ Edits ReadingDrag::moved(const Stage& stage, QPointF pointer, Qt::KeyboardModifi
   Rest rest = restOf(m_turn, directionsForNormal(stage.readout), round.turnAlong(snapReach),
                      round.turnAlong(1), held);
   m_on = std::move(rest.on);
-  return {Type{m_place, typedAngle(rest.angle)}};
+  return {Type{m_place, angleText(rest.angle)}};
 }
 
 EarDrag::EarDrag(const Stage& stage, const std::string& caseId, QPointF pointer)

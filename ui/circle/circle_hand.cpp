@@ -2,6 +2,7 @@
 // Pointer and keys on the circle.
 #include "ui/circle/circle_plot.h"
 
+#include "core/study/cut_text.h"
 #include "ui/circle/others.h"
 
 #include <QCoreApplication>
@@ -212,7 +213,7 @@ bool CirclePlot::turnByKey(const QKeyEvent& event) {
   const std::optional<Angle> turned =
       keyedTurn(readout.reading.value, event.key(), event.modifiers(), directionsForNormal(readout));
   if (turned)
-    askByKey(readingPlace(readout), {Type{readingPlace(readout), typedAngle(*turned)}},
+    askByKey(readingPlace(readout), {Type{readingPlace(readout), angleText(*turned)}},
              tr("Turn the reading plane"));
   return turned.has_value();
 }
@@ -232,7 +233,7 @@ bool CirclePlot::moveEarByKey(const QKeyEvent& event) {
 }
 
 void CirclePlot::turnTo(Angle normal) {
-  ask({Type{readingPlace(m_desk.readout()), typedAngle(normal)}}, m_desk.newGesture(),
+  ask({Type{readingPlace(m_desk.readout()), angleText(folded(normal))}}, m_desk.newGesture(),
       tr("Turn the reading plane"));
 }
 

@@ -1,8 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/desk/turning.h"
 
-#include "core/quantity/format.h"
-
 #include <algorithm>
 #include <cmath>
 
@@ -10,15 +8,12 @@ namespace planewright {
 
 namespace {
 
-/// Directions nearer to each other than this are one place; a handle that is this near stands on it.
-constexpr double coinciding = 1e-9;
-
 /// How far the handle turns, counter-clockwise, before it meets the direction: in (0, 180].
 double wayTo(Angle direction, Angle from) {
   double way = std::fmod(direction.degrees() - from.degrees(), 180.0);
-  if (way <= coinciding)
+  if (way <= coinciding.degrees())
     way += 180;
-  return way <= coinciding ? way + 180 : way;
+  return way <= coinciding.degrees() ? way + 180 : way;
 }
 
 std::optional<Angle> nextNamed(Angle now, bool forward, const std::vector<NamedDirection>& directions) {
@@ -66,7 +61,7 @@ Rest restOf(const Turn& turn, const std::vector<NamedDirection>& directions, Ang
     return rest;
   rest.angle = nearest->angle;
   for (const NamedDirection& direction : directions)
-    if (apart(direction.angle, rest.angle).degrees() < coinciding)
+    if (coincide(direction.angle, rest.angle))
       rest.on.push_back(direction.name);
   return rest;
 }
@@ -89,10 +84,6 @@ std::optional<Angle> keyedTurn(Angle now, int key, Qt::KeyboardModifiers held,
   default:
     return std::nullopt;
   }
-}
-
-std::string typedAngle(Angle angle) {
-  return exactNumber(folded(angle).degrees()) + " deg";
 }
 
 double decadeBelow(double size) {

@@ -6,7 +6,6 @@
 #include <Qt>
 
 #include <optional>
-#include <string>
 #include <vector>
 
 namespace planewright {
@@ -44,9 +43,6 @@ Rest restOf(const Turn& turn, const std::vector<NamedDirection>& directions, Ang
 /// PageDown to the next and the previous named direction; Home to 0. None for every other key.
 std::optional<Angle> keyedTurn(Angle now, int key, Qt::KeyboardModifiers held,
                                const std::vector<NamedDirection>& directions);
-
-/// The typed text of an angle that a handle was given: "12.5 deg", folded.
-std::string typedAngle(Angle angle);
 
 /// The power of ten next below `size`, which is greater than 0: 0.286 gives 0.1.
 double decadeBelow(double size);

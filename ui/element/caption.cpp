@@ -22,7 +22,7 @@ constexpr double secondLine = 8;
 std::vector<Text> namesAt(Angle angle, const std::vector<NamedDirection>& directions) {
   std::vector<Text> names;
   for (const NamedDirection& direction : directions)
-    if (direction.byName && apart(direction.angle, angle).degrees() < 1e-9)
+    if (direction.byName && coincide(direction.angle, angle))
       names.push_back(direction.name);
   return names;
 }

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/element/element_drag.h"
 
+#include "core/study/cut_text.h"
+
 #include <cmath>
 
 namespace planewright {
@@ -37,15 +39,14 @@ std::optional<std::string> ElementDrag::moved(const ElementGeometry& geometry, c
     return std::nullopt;
   m_turn.move(*motion, held);
   m_last = to;
-  constexpr double nothing = 1e-9;
-  if (std::abs((m_turn.now() - m_turn.start()).degrees()) < nothing) {
+  if (std::abs((m_turn.now() - m_turn.start()).degrees()) < coinciding.degrees()) {
     m_onSnap = false;
     return m_startText;
   }
   const Rest rest = restOf(m_turn, snapping ? hold.directions : std::vector<NamedDirection>(),
                            geometry.arcOf(reach, m_handle), geometry.arcOf(1, m_handle), held);
   m_onSnap = rest.snapped();
-  return typedAngle(rest.angle);
+  return angleText(rest.angle);
 }
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #include "ui/element/element_view.h"
 
 #include "core/quantity/format.h"
+#include "core/study/cut_text.h"
 #include "ui/element/accessible.h"
 #include "ui/element/angle_field.h"
 #include "ui/element/exact_words.h"
@@ -177,7 +178,7 @@ std::optional<Problem> ElementView::type(const ElementHold& hold, const std::str
 
 void ElementView::turn(ElementHandle handle, Angle to) {
   if (const std::optional<ElementHold> hold = holdOf(m_desk.readout(), handle))
-    type(*hold, typedAngle(to), m_desk.newGesture(), to);
+    type(*hold, angleText(folded(to)), m_desk.newGesture(), to);
 }
 
 // --- the keys
@@ -235,7 +236,7 @@ void ElementView::keyPressEvent(QKeyEvent* event) {
 
 void ElementView::turnByKey(const ElementHold& hold, Angle to) {
   const Angle from = facingOf(hold.handle).shown(hold.folded);
-  type(hold, typedAngle(to), m_keys.gestureOn(hold.place, m_desk), from);
+  type(hold, angleText(to), m_keys.gestureOn(hold.place, m_desk), from);
   m_keys.pressed(m_desk);
 }
 

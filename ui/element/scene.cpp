@@ -60,7 +60,7 @@ void addNamedTicks(Picture& picture, const Staging& staging) {
   const Pen pen{reading ? Role::reading : Role::line, 1.5, Dash::solid};
   for (const NamedDirection& direction :
        reading ? directionsForNormal(staging.readout) : directionsForLine(staging.readout)) {
-    const bool rests = staging.glance.onSnap && apart(direction.angle, held).degrees() < 1e-9;
+    const bool rests = staging.glance.onSnap && coincide(direction.angle, held);
     if (!direction.byName && !rests)
       continue;
     for (const Angle end : {direction.angle, direction.angle + halfTurn})

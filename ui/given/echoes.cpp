@@ -8,6 +8,8 @@
 
 #include <QCoreApplication>
 
+#include <algorithm>
+
 namespace planewright {
 
 namespace {
@@ -19,10 +21,8 @@ QString stressWithUnit(const Study& study, const StateReading& state, double str
 } // namespace
 
 const StateReading* stateOfCase(const Readout& readout, const std::string& caseId) {
-  for (auto state = readout.states.rbegin(); state != readout.states.rend(); ++state)
-    if (state->combination == caseId)
-      return &*state;
-  return nullptr;
+  const auto state = std::ranges::find(readout.states, caseId, &StateReading::combination);
+  return state == readout.states.end() ? nullptr : &*state;
 }
 
 QString echoOfStress(const Study& study, const Readout& readout, const std::string& caseId,

@@ -10,8 +10,6 @@ namespace planewright {
 
 namespace {
 
-constexpr double samePlane = 1e-9;
-
 PlaneColumn columnOf(const QModelIndex& index) {
   return static_cast<PlaneColumn>(index.column());
 }
@@ -116,7 +114,7 @@ std::optional<ReadingByValue> PlanesModel::solution() const {
   if (!found)
     return std::nullopt;
   const bool stands = found->planes.kind == PlanesOfValue::Kind::every ||
-                      apart(found->planes.first.value, readout.reading.value).degrees() < samePlane;
+                      coincide(found->planes.first.value, readout.reading.value);
   return stands ? std::optional(*found) : std::nullopt;
 }
 

@@ -20,7 +20,7 @@ namespace {
 
 /// A step as it is typed, an expression of an angle within the range that a sweep takes.
 Result<Angle> stepOf(const std::string& typed) {
-  Result<Entry> entry = readEntry(typed, {dimension::angle, {"deg", dimension::angle, 1, 1}, Slopes::none});
+  Result<Entry> entry = readEntry(typed, {dimension::angle, degreeUnit(), Slopes::none});
   if (!entry)
     return tl::unexpected(std::move(entry).error());
   if (entry->value >= SweepModel::leastStep && entry->value <= SweepModel::greatestStep)

@@ -2,6 +2,7 @@
 #include "core/figure/element.h"
 #include "core/quantity/format.h"
 #include "core/study/edit.h"
+#include "tests/support/picture_parts.h"
 
 #include <gtest/gtest.h>
 #include <rapidcheck/gtest.h>
@@ -65,15 +66,6 @@ ElementOrder withHandles() {
   ElementOrder order = orderOf();
   order.handles = true;
   return order;
-}
-
-template <class Part>
-std::vector<Part> partsOf(const Picture& picture) {
-  std::vector<Part> parts;
-  for (const auto& part : picture.parts)
-    if (const Part* found = std::get_if<Part>(&part))
-      parts.push_back(*found);
-  return parts;
 }
 
 double lengthOf(Vec v) {

@@ -7,6 +7,11 @@
 namespace planewright {
 namespace {
 
+TEST(CutText, anAngleCarriesItsUnit) {
+  EXPECT_EQ(angleText(Angle::fromDegrees(12.5)), "12.5 deg");
+  EXPECT_EQ(angleText(Angle::fromDegrees(-0.0)), "0 deg");
+}
+
 TEST(CutText, theNormalStandsSquareToTheCut) {
   EXPECT_EQ(normalTextForCut("30"), "-60 deg");
   EXPECT_EQ(normalTextForCut("-60 deg"), "30 deg");

@@ -2,6 +2,7 @@
 #include "tests/ui/circle/panel.h"
 
 #include "core/figure/metrics.h"
+#include "core/study/cut_text.h"
 
 #include <gtest/gtest.h>
 
@@ -107,7 +108,7 @@ TEST(CircleLabels, KeepTheirDistanceWhileTheEarIsDrawn) {
 TEST(CircleLabels, RideInAMotionFromElsewhereAndSettleAfterIt) {
   Panel panel(studyOf());
   const auto turn = [&](double normal) {
-    const std::string typed = typedAngle(Angle::fromDegrees(normal));
+    const std::string typed = angleText(Angle::fromDegrees(normal));
     panel.desk.request({Type{readingPlace(panel.desk.readout()), typed}}, {7000}, "turn");
   };
   for (int normal = 30; normal < 120; normal += 3)

@@ -91,12 +91,6 @@ TEST(Keys, StepThroughTheNamedDirectionsAndRound) {
   EXPECT_EQ(keyed(1, Qt::Key_PageDown), 0);
 }
 
-TEST(Typed, IsFoldedAndCarriesItsUnit) {
-  EXPECT_EQ(typedAngle(degrees(12.5)), "12.5 deg");
-  EXPECT_EQ(typedAngle(degrees(-90)), "90 deg");
-  EXPECT_EQ(typedAngle(degrees(-0.0)), "0 deg");
-}
-
 TEST(Rounding, GivesTheNearestDoubleOfTheDecimalNumber) {
   EXPECT_EQ(roundedTo(0.30000004, 0.1), 0.3);
   EXPECT_EQ(roundedTo(-1234.5678, 0.01), -1234.57);

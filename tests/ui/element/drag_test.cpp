@@ -166,7 +166,7 @@ TEST(ElementDrag, bothBarsTurnTheLine) {
 TEST(ElementDrag, aPressMovesOnlyItsOwnHandleWhereBothAreAligned) {
   for (int i = 0; i < 24; ++i) {
     const double angle = 15.0 * i;
-    const std::string text = typedAngle(Angle::fromDegrees(angle));
+    const std::string text = angleText(Angle::fromDegrees(angle));
     ElementRig knob({.reading = text, .line = text});
     const double start = knob.readingDegrees();
     knob.drag(knob.at(start, part::knob), knob.at(start + 7, part::knob), Qt::ControlModifier);

@@ -1,7 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/quantity/format.h"
+#include "core/study/cut_text.h"
+#include "tests/support/picture_parts.h"
 #include "ui/element/element_view.h"
 
 #include <QApplication>
@@ -77,21 +78,5 @@ struct ElementRig {
   Desk desk;
   ElementView view;
 };
-
-template <class Part>
-std::vector<Part> partsOf(const Picture& picture) {
-  std::vector<Part> parts;
-  for (const auto& part : picture.parts)
-    if (const Part* found = std::get_if<Part>(&part))
-      parts.push_back(*found);
-  return parts;
-}
-
-inline std::string labelOf(const Picture& picture, std::string_view key) {
-  for (const Label& label : partsOf<Label>(picture))
-    if (label.key == key)
-      return plain(label.runs);
-  return {};
-}
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #include "element_rig.h"
 
 #include "core/figure/metrics.h"
+#include "core/quantity/format.h"
 #include "ui/look/look.h"
 
 #include <QImage>
@@ -34,7 +35,7 @@ TEST(ElementScene, labelsNeverMeetNorLeaveThePanel) {
     for (int reading = -87; reading <= 90; reading += 3)
       for (const char* line : {"0 deg", "5.7 deg", "-88 deg", "45 deg"}) {
         const ElementScene scene =
-            sceneOf({.reading = typedAngle(Angle::fromDegrees(reading)), .line = line}, size);
+            sceneOf({.reading = angleText(Angle::fromDegrees(reading)), .line = line}, size);
         const std::vector<Label> labels = standing(scene.picture);
         for (std::size_t i = 0; i < labels.size(); ++i) {
           const Box box = boxOf(labels[i]);
@@ -88,7 +89,7 @@ TEST(ElementScene, noStrokeRunsThroughALabel) {
   for (const QSize size : shapes)
     for (int reading = -85; reading <= 90; reading += 5) {
       const Picture picture =
-          sceneOf({.reading = typedAngle(Angle::fromDegrees(reading)), .tolerance = "12 deg"}, size, glance)
+          sceneOf({.reading = angleText(Angle::fromDegrees(reading)), .tolerance = "12 deg"}, size, glance)
               .picture;
       for (std::size_t i = 0; i < picture.parts.size(); ++i) {
         const Label* label = std::get_if<Label>(&picture.parts[i]);
