@@ -19,9 +19,11 @@ class FigureDialog;
 class GivenPanel;
 class HelpWindow;
 class PlanesPanel;
+class SlipDialog;
 class StateBar;
 class StatusLine;
 class Strip;
+class ThingsDialog;
 class TitleDialog;
 
 /// The window: state bar, panels and status line over one desk. The only place where views, files and menus
@@ -68,6 +70,7 @@ private:
   void addFileMenu();
   void addEditMenu();
   void addStudyMenu();
+  void addListsOfStudy(QMenu& menu);
   void addViewMenu();
   void addAppearanceMenu(QMenu& menu);
   void addHelpMenu();
@@ -105,6 +108,10 @@ private:
   QPointer<FigureDialog> m_figure;
   QPointer<HelpWindow> m_help;
   QPointer<TitleDialog> m_title;
+  QPointer<SlipDialog> m_slips;
+  QPointer<ThingsDialog> m_cases;
+  QPointer<ThingsDialog> m_combinations;
+  QPointer<ThingsDialog> m_points;
 };
 
 } // namespace planewright

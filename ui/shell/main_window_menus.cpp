@@ -8,12 +8,15 @@
 #include "ui/shell/appearance.h"
 #include "ui/shell/areas.h"
 #include "ui/shell/body.h"
+#include "ui/shell/build_dialog.h"
 #include "ui/shell/help_window.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/picker.h"
 #include "ui/shell/recent_files.h"
+#include "ui/shell/slip_dialog.h"
 #include "ui/shell/state_bar.h"
 #include "ui/shell/strip.h"
+#include "ui/shell/things_dialog.h"
 #include "ui/shell/title_dialog.h"
 
 #include <QActionGroup>
@@ -94,6 +97,15 @@ void MainWindow::addStudyMenu() {
   add(menu, tr("&Previous entry not taken"), Qt::SHIFT | Qt::Key_F8,
       [this] { m_given->focusPreviousProblem(); });
   menu.addSeparator();
+  addListsOfStudy(menu);
+  add(menu, tr("Co&mpare somebody else's number…"), {}, [this] {
+    if (!m_slips)
+      m_slips = new SlipDialog(m_desk, this);
+    m_slips->show();
+    m_slips->raise();
+    m_slips->activateWindow();
+  });
+  menu.addSeparator();
   Picker* points = &m_stateBar->points();
   Picker* combinations = &m_stateBar->combinations();
   add(menu, tr("Previous point"), Qt::CTRL | Qt::Key_PageUp, [this, points] {
@@ -107,6 +119,25 @@ void MainWindow::addStudyMenu() {
   add(menu, tr("Previous combination"), Qt::ALT | Qt::Key_PageUp,
       [combinations] { combinations->previous(); });
   add(menu, tr("Next combination"), Qt::ALT | Qt::Key_PageDown, [combinations] { combinations->next(); });
+}
+
+void MainWindow::addListsOfStudy(QMenu& menu) {
+  const auto open = [this](QPointer<ThingsDialog>& dialog, Things (*things)()) {
+    settleDrafts();
+    if (!dialog)
+      dialog = new ThingsDialog(m_desk, things(), this);
+    dialog->show();
+    dialog->raise();
+    dialog->activateWindow();
+  };
+  add(menu, tr("P&oints…"), {}, [this, open] { open(m_points, points); });
+  add(menu, tr("&Load cases…"), {}, [this, open] { open(m_cases, loadCases); });
+  add(menu, tr("&Combinations…"), {}, [this, open] { open(m_combinations, combinations); });
+  add(menu, tr("&Build combinations…"), {}, [this] {
+    settleDrafts();
+    auto* dialog = new BuildDialog(m_desk, this);
+    dialog->show();
+  });
 }
 
 void MainWindow::addViewMenu() {

@@ -1,0 +1,171 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/combination_text.h"
+
+#include "core/words/utf8.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+/// One term with the place where it begins in the text.
+struct Term {
+  std::string_view words;
+  std::size_t at = 0;
+  bool negative = false;
+};
+
+bool isBlank(char c) {
+  return c == ' ' || c == '\t';
+}
+
+std::string_view trimmed(std::string_view words) {
+  while (!words.empty() && isBlank(words.front()))
+    words.remove_prefix(1);
+  while (!words.empty() && isBlank(words.back()))
+    words.remove_suffix(1);
+  return words;
+}
+
+Problem fault(std::string_view text, const Term& term, Text what, Text mend) {
+  Problem problem;
+  if (isUtf8(text))
+    problem.column = static_cast<int>(codePointsIn(text.substr(0, term.at))) + 1;
+  problem.quoted = term.words;
+  problem.what = std::move(what);
+  problem.mend = std::move(mend);
+  return problem;
+}
+
+/// Cuts at + and - outside parentheses that stand behind a term, not inside a number or a product.
+std::vector<Term> termsIn(std::string_view text) {
+  std::vector<Term> terms;
+  std::size_t start = 0;
+  bool negative = false;
+  int depth = 0;
+  const auto close = [&](std::size_t end) {
+    const std::string_view words = trimmed(text.substr(start, end - start));
+    terms.push_back(
+        {words, words.empty() ? start : static_cast<std::size_t>(words.data() - text.data()), negative});
+  };
+  for (std::size_t i = 0; i < text.size(); ++i) {
+    const char c = text[i];
+    depth += c == '(' ? 1 : c == ')' ? -1 : 0;
+    const std::string_view before = trimmed(text.substr(start, i - start));
+    const bool isSign = (c == '+' || c == '-') && depth == 0;
+    const bool afterBlank = i > 0 && isBlank(text[i - 1]);
+    if (!isSign || (!before.empty() && !afterBlank))
+      continue;
+    if (!before.empty() && (before.back() == '*' || before.back() == '/'))
+      continue;
+    if (!before.empty())
+      close(i);
+    else if (!terms.empty() || start > 0)
+      continue;
+    negative = c == '-';
+    start = i + 1;
+  }
+  close(text.size());
+  return terms;
+}
+
+/// The case whose id ends the term, the longest where several do.
+const LoadCase* caseOf(const Study& study, std::string_view words) {
+  const LoadCase* found = nullptr;
+  for (const LoadCase& one : study.cases) {
+    if (!words.ends_with(one.id) || (found && found->id.size() > one.id.size()))
+      continue;
+    const std::size_t rest = words.size() - one.id.size();
+    const std::string_view joints = " \t*)";
+    if (rest == 0 || joints.find(words[rest - 1]) != std::string_view::npos)
+      found = &one;
+  }
+  return found;
+}
+
+std::string_view withoutProductSign(std::string_view factor) {
+  factor = trimmed(factor);
+  if (factor.ends_with('*'))
+    factor = trimmed(factor.substr(0, factor.size() - 1));
+  return factor;
+}
+
+Result<Factor> factorOf(const Study& study, std::string_view text, const Term& term) {
+  const LoadCase* one = caseOf(study, term.words);
+  if (!one)
+    return tl::unexpected(fault(text, term, PW_TEXT("Combination", "“%1” names no case.").with(term.words),
+                                PW_TEXT("Combination", "Write terms such as 1.35 G, joined by +.")));
+  std::string factor(withoutProductSign(term.words.substr(0, term.words.size() - one->id.size())));
+  if (factor.empty())
+    factor = "1";
+  const Result<Entry> entry = readEntry(factor, entryKindOf(study, Spot::factor));
+  if (!entry)
+    return tl::unexpected(fault(text, term, entry.error().what, entry.error().mend));
+  if (!term.negative)
+    return Factor{one->id, factor};
+  const bool isOne = factor.find_first_of("+-") == std::string::npos;
+  return Factor{one->id, isOne ? "-" + factor : "-(" + factor + ")"};
+}
+
+} // namespace
+
+Result<std::vector<Factor>> factorsIn(const Study& study, std::string_view text) {
+  std::vector<Factor> factors;
+  for (const Term& term : termsIn(text)) {
+    Result<Factor> factor = factorOf(study, text, term);
+    if (!factor)
+      return tl::unexpected(std::move(factor).error());
+    if (std::ranges::count(factors, factor->caseId, &Factor::caseId) > 0)
+      return tl::unexpected(fault(text, term,
+                                  PW_TEXT("Combination", "The case %1 stands twice.").with(factor->caseId),
+                                  PW_TEXT("Combination", "Give it one factor, the sum of the two.")));
+    factors.push_back(*std::move(factor));
+  }
+  return factors;
+}
+
+std::string textOf(const Combination& combination) {
+  std::string text;
+  for (const Factor& factor : combination.factors) {
+    const bool negative = factor.factor.starts_with('-');
+    text += text.empty() ? (negative ? "-" : "") : negative ? " - " : " + ";
+    text += factor.factor.substr(negative ? 1 : 0) + " " + factor.caseId;
+  }
+  return text;
+}
+
+Result<Edits> editsThatSet(const Study& study, const std::string& name, std::string_view text) {
+  const Combination* old = findCombination(study, name);
+  const Result<std::vector<Factor>> factors = factorsIn(study, text);
+  if (!factors)
+    return tl::unexpected(factors.error());
+  Edits edits;
+  // All anew, so that the terms stand in the order in which they were written.
+  if (old)
+    for (const Factor& factor : old->factors)
+      edits.push_back(Remove{{Spot::factor, name, factor.caseId}});
+  for (const Factor& factor : *factors) {
+    const Place place{Spot::factor, name, factor.caseId};
+    edits.push_back(Insert{place, std::nullopt});
+    edits.push_back(Type{place, factor.factor});
+  }
+  if (old && name == textOf(*old))
+    edits.push_back(Rename{{Spot::combination, name, {}}, textOf({name, *factors, {}})});
+  return edits;
+}
+
+Result<Edits> editsThatAdd(const Study& study, std::string_view text) {
+  const Result<std::vector<Factor>> factors = factorsIn(study, text);
+  if (!factors)
+    return tl::unexpected(factors.error());
+  const std::string name = textOf({{}, *factors, {}});
+  Edits edits = {Insert{{Spot::combination, name, {}}, std::nullopt}};
+  const Result<Edits> terms = editsThatSet(study, name, text);
+  if (!terms)
+    return tl::unexpected(terms.error());
+  edits.insert(edits.end(), terms->begin(), terms->end());
+  return edits;
+}
+
+} // namespace planewright

@@ -1,0 +1,23 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/edit.h"
+
+namespace planewright {
+
+/// The terms of a combination written as people write it: "1.35 G + 1.5*0.7 S - W". A term is a factor, as
+/// any expression without a dimension, and the id of a case; without a factor it counts once. Each case
+/// stands once. A Problem with the column for a term that names no case, a factor that does not read, an
+/// empty text.
+Result<std::vector<Factor>> factorsIn(const Study& study, std::string_view text);
+
+/// The same the other way: factors as they were typed, "1.35 G + 1.5*0.7 S".
+std::string textOf(const Combination& combination);
+
+/// What gives the combination of this name the factors of the text. One that goes by its own expression is
+/// renamed to the new one.
+Result<Edits> editsThatSet(const Study& study, const std::string& combination, std::string_view text);
+/// What adds a combination that goes by its expression.
+Result<Edits> editsThatAdd(const Study& study, std::string_view text);
+
+} // namespace planewright

@@ -1,0 +1,90 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/combination_text.h"
+#include "core/study/copied_point.h"
+
+#include <gtest/gtest.h>
+
+namespace planewright {
+namespace {
+
+Study withCases(std::initializer_list<const char*> ids) {
+  Study study = newStudy();
+  study.cases.clear();
+  study.points.front().stress.clear();
+  for (const char* id : ids)
+    study.cases.push_back({id, "", Nature::variable, Duration::medium, {}});
+  return study;
+}
+
+TEST(CombinationText, readsTermsAsPeopleWriteThem) {
+  const Study study = withCases({"G", "S", "W", "W2"});
+  const auto factors = factorsIn(study, "1.35 G + 1.5*0.7 S - W + (1+0.5)*W2");
+  ASSERT_TRUE(factors) << plain(factors.error());
+  EXPECT_EQ(*factors, (std::vector<Factor>{{"G", "1.35"}, {"S", "1.5*0.7"}, {"W", "-1"}, {"W2", "(1+0.5)"}}));
+  EXPECT_EQ(*factorsIn(study, "G"), (std::vector<Factor>{{"G", "1"}}));
+  EXPECT_EQ(*factorsIn(study, "-0.5 G"), (std::vector<Factor>{{"G", "-0.5"}}));
+  EXPECT_EQ(*factorsIn(study, "1e-1 G + 2*-3 S"), (std::vector<Factor>{{"G", "1e-1"}, {"S", "2*-3"}}));
+}
+
+TEST(CombinationText, theLongestIdEndsATerm) {
+  const Study study = withCases({"G", "crane G"});
+  EXPECT_EQ(factorsIn(study, "1.2 crane G")->front().caseId, "crane G");
+}
+
+TEST(CombinationText, wrongTermsAreToldWithTheirColumn) {
+  const Study study = withCases({"G", "S"});
+  struct Wrong {
+    const char* text;
+    int column;
+    const char* piece;
+  };
+  for (const Wrong& wrong :
+       {Wrong{"1.35 G + 1.5 X", 10, "names no case"}, Wrong{"1.35 G + 1,5 S", 10, "comma"},
+        Wrong{"G + S + 2 G", 9, "stands twice"}, Wrong{"", 1, "names no case"},
+        Wrong{"G + ", 4, "names no case"}, Wrong{"2 kN G", 1, "plain number"}}) {
+    const auto factors = factorsIn(study, wrong.text);
+    ASSERT_FALSE(factors) << wrong.text;
+    EXPECT_EQ(factors.error().column, wrong.column) << wrong.text;
+    EXPECT_NE(plain(factors.error()).find(wrong.piece), std::string::npos) << plain(factors.error());
+  }
+}
+
+TEST(CombinationText, addedAndSetCombinationsGoByTheirExpression) {
+  Study study = withCases({"G", "S"});
+  study = *edited(study, *editsThatAdd(study, "1.35 G + 1.5 S"));
+  ASSERT_EQ(study.combinations.size(), 1u);
+  EXPECT_EQ(study.combinations[0].name, "1.35 G + 1.5 S");
+  EXPECT_EQ(textOf(study.combinations[0]), "1.35 G + 1.5 S");
+  study = *edited(study, *editsThatSet(study, "1.35 G + 1.5 S", "1.5 S - 0.9 G"));
+  EXPECT_EQ(study.combinations[0].name, "1.5 S - 0.9 G");
+  EXPECT_EQ(study.combinations[0].factors, (std::vector<Factor>{{"S", "1.5"}, {"G", "-0.9"}}));
+  study = *edited(study, Edit{Rename{{Spot::combination, "1.5 S - 0.9 G", {}}, "uplift"}});
+  study = *edited(study, *editsThatSet(study, "uplift", "1.5 S"));
+  EXPECT_EQ(study.combinations[0].name, "uplift") << "a name of its own stays";
+}
+
+TEST(CopiedPoint, hasEverythingThatWasSaidOfIt) {
+  Study study = newStudy();
+  Point& point = study.points.front();
+  point.note = "heel";
+  point.line = Line{"bond", LineKind::bond, "1 in 12", "3 deg"};
+  point.planes = {{"scarf", "55 deg", "2 deg"}};
+  point.reading = "30 deg";
+  study = *edited(study, editsThatCopyPoint(study, "P1", freshPointName(study, "P1")));
+  ASSERT_EQ(study.points.size(), 2u);
+  EXPECT_EQ(study.points[1].name, "P2");
+  Point same = study.points[1];
+  same.name = "P1";
+  EXPECT_EQ(same, study.points[0]);
+}
+
+TEST(CopiedPoint, freshNamesCountOn) {
+  Study study = newStudy();
+  EXPECT_EQ(freshPointName(study, "P1"), "P2");
+  EXPECT_EQ(freshPointName(study, "heel"), "heel 2");
+  EXPECT_EQ(freshPointName(study, "P0"), "P2") << "P1 is taken";
+  EXPECT_EQ(freshPointName(study, "P123456789012"), "P123456789012 2");
+}
+
+} // namespace
+} // namespace planewright

@@ -1,0 +1,135 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "shell_test.h"
+#include "ui/entry/draft_edit.h"
+#include "ui/shell/build_dialog.h"
+#include "ui/shell/things_dialog.h"
+
+#include <QComboBox>
+#include <QPushButton>
+#include <QTableView>
+#include <QTest>
+
+namespace planewright {
+namespace {
+
+class ThingsTest : public ShellTest {
+protected:
+  static QString cell(const ThingsDialog& dialog, int row, int column) {
+    return dialog.table().model()->index(row, column).data().toString();
+  }
+  static bool put(const ThingsDialog& dialog, int row, int column, const char* text) {
+    QAbstractItemModel& model = *dialog.table().model();
+    return model.setData(model.index(row, column), QString::fromUtf8(text), Qt::EditRole);
+  }
+
+  Desk m_desk{newStudy()};
+};
+
+TEST_F(ThingsTest, casesAreAddedNamedAndExcludedEachAsOneStep) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  EXPECT_EQ(cell(dialog, 0, 0), "G");
+  dialog.add();
+  dialog.add();
+  ASSERT_EQ(m_desk.study().cases.size(), 3u);
+  EXPECT_EQ(m_desk.study().cases[1].id, "Q");
+  EXPECT_EQ(m_desk.study().cases[1].nature, Nature::variable);
+  EXPECT_EQ(m_desk.undoStack()->count(), 2);
+  EXPECT_TRUE(put(dialog, 1, 0, "W"));
+  EXPECT_TRUE(put(dialog, 2, 4, "W"));
+  EXPECT_TRUE(put(dialog, 2, 3, "short term"));
+  EXPECT_EQ(m_desk.study().cases[2].excludes, std::vector<std::string>{"W"});
+  EXPECT_EQ(m_desk.study().cases[2].duration, Duration::shortTerm);
+  m_desk.undoStack()->undo();
+  EXPECT_EQ(m_desk.study().cases[2].duration, Duration::medium);
+}
+
+TEST_F(ThingsTest, whatIsNotTakenIsToldInTheWindow) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  dialog.show();
+  dialog.add();
+  EXPECT_FALSE(put(dialog, 1, 0, "G"));
+  EXPECT_TRUE(dialog.complaint().contains("taken")) << dialog.complaint().toStdString();
+  EXPECT_FALSE(put(dialog, 1, 4, "X"));
+  EXPECT_TRUE(put(dialog, 1, 1, "Snow"));
+  EXPECT_TRUE(dialog.complaint().isEmpty());
+}
+
+TEST_F(ThingsTest, theLastCaseCannotGo) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  dialog.show();
+  dialog.remove();
+  EXPECT_EQ(m_desk.study().cases.size(), 1u);
+  EXPECT_FALSE(dialog.complaint().isEmpty());
+}
+
+TEST_F(ThingsTest, combinationsAreTypedAsPeopleWriteThem) {
+  ThingsDialog cases(m_desk, loadCases(), nullptr);
+  cases.add();
+  ThingsDialog dialog(m_desk, combinations(), nullptr);
+  dialog.add();
+  EXPECT_EQ(cell(dialog, 0, 0), "1 G + 1 Q");
+  EXPECT_TRUE(put(dialog, 0, 1, "1.35 G + 1.5*0.7 Q"));
+  EXPECT_EQ(cell(dialog, 0, 0), "1.35 G + 1.5*0.7 Q");
+  EXPECT_TRUE(put(dialog, 0, 0, "snow leads"));
+  EXPECT_FALSE(put(dialog, 0, 1, "1.35 G + 1.5 X"));
+  EXPECT_EQ(m_desk.study().combinations[0].factors, (std::vector<Factor>{{"G", "1.35"}, {"Q", "1.5*0.7"}}));
+}
+
+TEST_F(ThingsTest, pointsAreDuplicatedAndMoved) {
+  type(m_desk, Spot::sx, "8 MPa");
+  ThingsDialog dialog(m_desk, points(), nullptr);
+  dialog.copy();
+  ASSERT_EQ(m_desk.study().points.size(), 2u);
+  EXPECT_EQ(m_desk.study().points[1].name, "P2");
+  EXPECT_EQ(m_desk.study().points[1].stress, m_desk.study().points[0].stress);
+  EXPECT_TRUE(put(dialog, 1, 0, "heel"));
+  dialog.moveUp();
+  EXPECT_EQ(m_desk.study().points[0].name, "heel");
+  EXPECT_EQ(dialog.table().currentIndex().row(), 0);
+  dialog.remove();
+  EXPECT_EQ(m_desk.study().points.size(), 1u);
+  m_desk.undoStack()->undo();
+  EXPECT_EQ(cell(dialog, 0, 0), "heel");
+}
+
+TEST_F(ThingsTest, choicesAreMadeWithTheKeyboard) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  dialog.show();
+  dialog.table().setCurrentIndex(dialog.table().model()->index(0, 2));
+  dialog.table().edit(dialog.table().currentIndex());
+  auto* list = dialog.table().findChild<QComboBox*>();
+  ASSERT_NE(list, nullptr);
+  EXPECT_EQ(list->currentText(), "permanent");
+  QTest::keyClick(list, Qt::Key_Down);
+  QTest::keyClick(list, Qt::Key_Return);
+  EXPECT_EQ(m_desk.study().cases[0].nature, Nature::variable);
+}
+
+TEST_F(ThingsTest, builtCombinationsAreListedBeforeTheyAreTaken) {
+  ThingsDialog cases(m_desk, loadCases(), nullptr);
+  cases.add();
+  BuildDialog dialog(m_desk, nullptr);
+  EXPECT_EQ(dialog.count(), "4 combinations");
+  EXPECT_EQ(dialog.listed(), "1.35 G\n1 G\n1.35 G + 1.5 Q\n1 G + 1.5 Q");
+  EXPECT_TRUE(m_desk.study().combinations.empty());
+  dialog.factor("variable").selectAll();
+  QTest::keyClicks(&dialog.factor("variable"), "1.6");
+  EXPECT_TRUE(dialog.listed().endsWith("1 G + 1.6 Q"));
+  const int steps = m_desk.undoStack()->count();
+  dialog.takeButton().click();
+  EXPECT_EQ(m_desk.study().combinations.size(), 4u);
+  EXPECT_EQ(m_desk.undoStack()->count(), steps + 1);
+  EXPECT_FALSE(dialog.takeButton().isEnabled());
+  EXPECT_EQ(dialog.count(), "4 combinations, 4 of them in the study already");
+}
+
+TEST_F(ThingsTest, aFactorThatDoesNotReadBuildsNothing) {
+  BuildDialog dialog(m_desk, nullptr);
+  dialog.factor("upper").selectAll();
+  QTest::keyClicks(&dialog.factor("upper"), "1,35");
+  EXPECT_EQ(dialog.count(), "Nothing is built.");
+  EXPECT_FALSE(dialog.takeButton().isEnabled());
+}
+
+} // namespace
+} // namespace planewright

@@ -1,0 +1,151 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/shell/things.h"
+
+#include "core/study/combination_text.h"
+#include "core/study/copied_point.h"
+#include "ui/look/look.h"
+
+#include <QCoreApplication>
+
+namespace planewright {
+
+namespace {
+
+QString words(const char* source) {
+  return QCoreApplication::translate("Things", source);
+}
+
+/// A column over a typed spot of the thing at the row's place.
+ThingColumn typedColumn(const QString& heading, Spot spot,
+                        std::function<Place(const Study&, std::size_t)> place) {
+  const auto spotOf = [spot, place](const Study& study, std::size_t row) {
+    return Place{spot, place(study, row).owner, {}};
+  };
+  return {heading,
+          [spotOf](const Study& study, std::size_t row) {
+            return fromUtf8(textAt(study, spotOf(study, row)).value_or(std::string()));
+          },
+          [spotOf](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
+            return Edits{Type{spotOf(study, row), typed}};
+          }};
+}
+
+/// A column over a word, shown and chosen by its label.
+template <class Enum>
+ThingColumn wordColumn(const QString& heading, Spot spot,
+                       std::function<Place(const Study&, std::size_t)> place) {
+  ThingColumn column = typedColumn(heading, spot, std::move(place));
+  const auto wordText = column.text;
+  column.text = [wordText](const Study& study, std::size_t row) {
+    const auto value = fromWord<Enum>(wordText(study, row).toStdString());
+    return value ? shown(labelOf(*value)) : QString();
+  };
+  const auto typeWord = column.edits;
+  column.edits = [typeWord](const Study& study, std::size_t row, const std::string& typed) {
+    for (const Named<Enum>& name : namesOf<Enum>())
+      if (shown(name.label).toStdString() == typed)
+        return typeWord(study, row, std::string(name.word));
+    return typeWord(study, row, typed);
+  };
+  for (const Named<Enum>& name : namesOf<Enum>())
+    column.choices << shown(name.label);
+  return column;
+}
+
+/// The column of the key: typing in it renames the thing and what refers to it.
+ThingColumn keyColumn(const QString& heading, std::function<Place(const Study&, std::size_t)> place) {
+  return {heading, [place](const Study& study, std::size_t row) { return fromUtf8(place(study, row).owner); },
+          [place](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
+            return Edits{Rename{place(study, row), typed}};
+          }};
+}
+
+/// The next letter of an action that is free: G, Q, S, W, then Q2.
+std::string freshCaseId(const Study& study) {
+  for (const char* id : {"G", "Q", "S", "W"})
+    if (!findCase(study, id))
+      return id;
+  for (int number = 2;; ++number)
+    if (std::string id = QStringLiteral("Q%1").arg(number).toStdString(); !findCase(study, id))
+      return id;
+}
+
+Edits newCase(const Study& study) {
+  const std::string id = freshCaseId(study);
+  Edits edits = {Insert{{Spot::loadCase, id, {}}, std::nullopt}};
+  if (id != "G")
+    edits.push_back(Type{{Spot::caseNature, id, {}}, std::string(wordOf(Nature::variable))});
+  if (id != "G")
+    edits.push_back(Type{{Spot::caseDuration, id, {}}, std::string(wordOf(Duration::medium))});
+  return edits;
+}
+
+/// All cases once, or the first free multiple of it.
+Edits newCombination(const Study& study) {
+  for (int factor = 1;; ++factor) {
+    std::string text;
+    for (const LoadCase& one : study.cases)
+      text += (text.empty() ? "" : " + ") + std::to_string(factor) + " " + one.id;
+    if (const Result<Edits> edits = editsThatAdd(study, text); edits && edited(study, *edits))
+      return *edits;
+  }
+}
+
+} // namespace
+
+Things loadCases() {
+  const auto place = [](const Study& study, std::size_t row) {
+    return Place{Spot::loadCase, study.cases[row].id, {}};
+  };
+  return {words("Load cases"),
+          words("load case"),
+          [](const Study& study) { return study.cases.size(); },
+          {keyColumn(words("Case"), place), typedColumn(words("Name"), Spot::caseName, place),
+           wordColumn<Nature>(words("Nature"), Spot::caseNature, place),
+           wordColumn<Duration>(words("Duration"), Spot::caseDuration, place),
+           typedColumn(words("Never together with"), Spot::caseExcludes, place)},
+          newCase,
+          place};
+}
+
+Things combinations() {
+  const auto place = [](const Study& study, std::size_t row) {
+    return Place{Spot::combination, study.combinations[row].name, {}};
+  };
+  const ThingColumn terms{
+      words("Factors"),
+      [](const Study& study, std::size_t row) { return fromUtf8(textOf(study.combinations[row])); },
+      [](const Study& study, std::size_t row, const std::string& typed) {
+        return editsThatSet(study, study.combinations[row].name, typed);
+      }};
+  return {words("Combinations"),
+          words("combination"),
+          [](const Study& study) { return study.combinations.size(); },
+          {keyColumn(words("Name"), place), terms,
+           wordColumn<Basis>(words("Basis"), Spot::combinationBasis, place)},
+          newCombination,
+          place};
+}
+
+Things points() {
+  const auto place = [](const Study& study, std::size_t row) {
+    return Place{Spot::point, study.points[row].name, {}};
+  };
+  return {words("Points"),
+          words("point"),
+          [](const Study& study) { return study.points.size(); },
+          {keyColumn(words("Point"), place), typedColumn(words("Note"), Spot::pointNote, place)},
+          [](const Study& study) {
+            const std::string name = freshPointName(study, study.points.back().name);
+            Edits edits = {Insert{{Spot::point, name, {}}, std::nullopt}};
+            edits.push_back(Insert{{Spot::line, name, {}}, std::nullopt});
+            return edits;
+          },
+          place,
+          [](const Study& study, std::size_t row) {
+            const std::string& name = study.points[row].name;
+            return editsThatCopyPoint(study, name, freshPointName(study, name));
+          }};
+}
+
+} // namespace planewright
