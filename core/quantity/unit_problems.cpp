@@ -50,6 +50,10 @@ Text mendOf(const Value& value, const EntryKind& kind) {
   if (value.dimension == dimension::none && kind.dimension != dimension::angle)
     return PW_TEXT("Expression", "It has no unit of its own; to give it one write %1.")
         .with(joined("(" + std::string(value.piece.text), ") ", kind.unit.name));
+  if (value.dimension == -1 * kind.dimension)
+    return PW_TEXT("Expression",
+                   "A unit belongs to the number right before it; for a quotient write (1/2) %1.")
+        .with(kind.unit.name);
   if (kind.slopes != Slopes::none)
     return PW_TEXT("Expression", "Type for example 4.8 deg or 1 in 12.");
   return PW_TEXT("Expression", "Type for example %1.").with(exampleOf(kind.dimension));

@@ -2,6 +2,7 @@
 #include "ui/shell/areas.h"
 
 #include <QApplication>
+#include <QEvent>
 #include <QVariant>
 #include <QWidget>
 
@@ -14,12 +15,21 @@ bool takesFocus(const QWidget& widget, const QWidget& area) {
          (widget.focusPolicy() & Qt::TabFocus);
 }
 
-/// Where the focus was in the area, else the first widget of its tab order that takes it.
+QWidget* lastProxyOf(QWidget& area) {
+  QWidget* proxy = area.focusProxy();
+  while (proxy && proxy->focusProxy())
+    proxy = proxy->focusProxy();
+  return proxy;
+}
+
+/// Where the focus was in the area, else what the area hands it to, else the first widget of its tab order
+/// that takes it.
 QWidget* entryOf(QWidget& area) {
   if (area.focusPolicy() & Qt::TabFocus)
     return &area;
-  if (QWidget* last = area.focusWidget(); last && takesFocus(*last, area))
-    return last;
+  for (QWidget* wanted : {area.focusWidget(), lastProxyOf(area)})
+    if (wanted && takesFocus(*wanted, area))
+      return wanted;
   for (QWidget* widget = area.nextInFocusChain(); widget != &area; widget = widget->nextInFocusChain())
     if (takesFocus(*widget, area))
       return widget;
@@ -30,6 +40,15 @@ QWidget* entryOf(QWidget& area) {
 
 Areas::Areas(const QList<QWidget*>& areas, QObject* parent) : QObject(parent), m_areas(areas) {
   connect(qApp, &QApplication::focusChanged, this, [this](QWidget*, QWidget* now) { follow(now); });
+  for (QWidget* area : m_areas)
+    area->installEventFilter(this);
+}
+
+// An area whose page has changed has other keys.
+bool Areas::eventFilter(QObject* watched, QEvent* event) {
+  if (event->type() == QEvent::DynamicPropertyChange)
+    Q_EMIT focusMoved();
+  return QObject::eventFilter(watched, event);
 }
 
 QString Areas::keys() const {

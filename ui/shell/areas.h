@@ -31,6 +31,9 @@ public slots:
 signals:
   void focusMoved();
 
+protected:
+  bool eventFilter(QObject* watched, QEvent* event) override;
+
 private:
   void follow(QWidget* focused);
   void step(int by);

@@ -154,6 +154,12 @@ TEST(Expression, twoHundredLevelsAreRead) {
   EXPECT_FALSE(readEntry("1+" + repeated("(", 200) + "1" + repeated(")", 200), *fieldOf("stress")));
 }
 
+TEST(Expression, aUnitThatWentIntoTheDivisorIsExplained) {
+  const auto entry = readEntry("pi/6 rad", {dimension::angle, *findUnit("deg"), Slopes::none});
+  ASSERT_FALSE(entry);
+  EXPECT_NE(plain(entry.error()).find("write (1/2) deg"), std::string::npos) << plain(entry.error());
+}
+
 TEST(Expression, aCompletedTextThatOverflowsPointsAtWhatWasTyped) {
   const EntryKind giga{dimension::stress, *findUnit("GPa"), Slopes::none};
   const auto entry = readEntry(" 1e308", giga);

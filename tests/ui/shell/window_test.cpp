@@ -16,6 +16,7 @@
 #include "ui/shell/strip.h"
 #include "ui/shell/worked_example.h"
 
+#include <QAbstractItemView>
 #include <QApplication>
 #include <QDropEvent>
 #include <QFile>
@@ -248,6 +249,9 @@ TEST_F(WindowTest, f6GoesRoundTheAreasAndComesBackToWhereItWas) {
     QWidget* focused = QApplication::focusWidget();
     EXPECT_TRUE(focused && (focused == area || area->isAncestorOf(focused)))
         << area->metaObject()->className();
+    if (area == &window.planes()) {
+      EXPECT_NE(qobject_cast<QAbstractItemView*>(focused), nullptr) << "the rows, not the tabs over them";
+    }
   }
   EXPECT_EQ(QApplication::focusWidget(), start);
   QTest::keyClick(QApplication::focusWidget(), Qt::Key_F6, Qt::ShiftModifier);
