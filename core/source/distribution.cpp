@@ -6,6 +6,7 @@
 #include <algorithm>
 #include <array>
 #include <cmath>
+#include <limits>
 
 namespace planewright {
 
@@ -123,7 +124,6 @@ public:
       judge((stretches.front().from + stretches.front().to) / 2);
     if (!m_best)
       return tl::unexpected(std::move(*m_problem));
-    narrow();
     m_best->isPartial = m_problem.has_value();
     return std::move(*m_best);
   }
@@ -139,27 +139,32 @@ private:
     const double measure = m_measure(stress->stress);
     if (!m_best || measure > m_best->measure + 1e-12 * std::abs(m_best->measure)) {
       m_best = WorstFibre{m_line.fibreAt(at), *std::move(stress), measure, false};
-      m_at = at;
     }
     return measure;
   }
 
+  /// Every place that is no less bad than its neighbours is looked at closely: two peaks may be nearly equal.
   void scan(const Band& band) {
     constexpr int parts = 64;
-    for (int i = parts; i >= 0; --i) {
-      const double at = i == parts ? band.high : band.low + (band.high - band.low) * i / parts;
-      const std::optional<double> before = m_best ? std::optional(m_at) : std::nullopt;
-      judge(at);
-      if (!before || m_at != *before)
-        m_around = {std::max(band.low, at - (band.high - band.low) / parts),
-                    std::min(band.high, at + (band.high - band.low) / parts)};
+    const auto place = [&band](int i) {
+      return i == parts ? band.high : band.low + (band.high - band.low) * i / parts;
+    };
+    std::vector<double> measures;
+    for (int i = parts; i >= 0; --i)
+      measures.push_back(judge(place(i)).value_or(-std::numeric_limits<double>::infinity()));
+    std::ranges::reverse(measures);
+    for (int i = 0; i <= parts; ++i) {
+      const int below = std::max(0, i - 1);
+      const int above = std::min(parts, i + 1);
+      const auto at = [&measures](int k) { return measures[static_cast<std::size_t>(k)]; };
+      if (at(i) >= at(below) && at(i) >= at(above))
+        narrow({place(below), place(above)});
     }
   }
 
-  /// Golden section between the neighbours of the best place of the scan.
-  void narrow() {
+  /// Golden section.
+  void narrow(Band around) {
     const double ratio = (std::sqrt(5.0) - 1) / 2;
-    Band around = m_around;
     while (around.high - around.low > 2 * m_line.slack()) {
       const double length = ratio * (around.high - around.low);
       const std::optional<double> lower = judge(around.high - length);
@@ -176,8 +181,6 @@ private:
   const Line& m_line;
   const Measure& m_measure;
   std::optional<WorstFibre> m_best;
-  double m_at = 0;
-  Band m_around;
   std::optional<Problem> m_problem;
 };
 
