@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/source/free_edge.h"
 
+#include "core/stress/circle.h"
+
 #include <algorithm>
 #include <cmath>
 
@@ -11,9 +13,8 @@ double FreeEdge::share() const {
 }
 
 FreeEdge freeEdgeOf(const PlaneStress& stress, LineAngle edge) {
-  const double mean = (stress.sx + stress.sy) / 2;
-  const double radius = std::hypot((stress.sx - stress.sy) / 2, stress.txy);
-  return {tractionOn(stress, following(edge)), std::max(std::abs(mean + radius), std::abs(mean - radius))};
+  const Circle circle = circleOf(stress);
+  return {tractionOn(stress, following(edge)), std::max(std::abs(circle.s1), std::abs(circle.s2))};
 }
 
 } // namespace planewright

@@ -3,7 +3,6 @@
 
 #include "core/quantity/format.h"
 
-#include <algorithm>
 #include <array>
 #include <cassert>
 #include <cmath>
@@ -71,11 +70,6 @@ int decimalsPutIn(double value) {
   return decimals;
 }
 
-bool names(const Formula& formula, const std::string& symbol) {
-  return formula.symbol() == symbol ||
-         std::ranges::any_of(formula.parts(), [&](const Formula& part) { return names(part, symbol); });
-}
-
 } // namespace
 
 NumberPutIn WrittenUnits::put(std::string_view symbol, double value, Dimension dimension) const {
@@ -98,7 +92,7 @@ NumberPutIn WrittenUnits::pi() {
 Step WrittenUnits::step(Text name, std::string_view symbolOf, Formula formula, NumbersPutIn numbers,
                         double result, Dimension dimension, Text source) const {
   const WrittenUnit unit = unitFor(*this, result, dimension);
-  std::erase_if(numbers, [&](const NumberPutIn& number) { return !names(formula, number.symbol); });
+  numbers = namedBy(formula, std::move(numbers));
   return {std::move(name),
           symbol(symbolOf),
           std::move(formula),

@@ -196,7 +196,7 @@ std::vector<Text> notesOn(const Study& study) {
   std::vector<Text> notes = {
       PW_TEXT("Combination",
               "Recommended factors are those of EN 1990:2002, Tables A1.1 and A1.2(B), from memory; "
-              "they are nationally determined."),
+              "they are nationally determined: check them against the code in force."),
       PW_TEXT("Combination", "Accidental and seismic combinations are not built.")};
   std::string left;
   for (const LoadCase& one : study.cases)

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/combination_text.h"
 
+#include "core/quantity/lexer.h"
 #include "core/words/utf8.h"
 
 #include <algorithm>
@@ -18,14 +19,6 @@ struct Term {
 
 bool isBlank(char c) {
   return c == ' ' || c == '\t';
-}
-
-std::string_view trimmed(std::string_view words) {
-  while (!words.empty() && isBlank(words.front()))
-    words.remove_prefix(1);
-  while (!words.empty() && isBlank(words.back()))
-    words.remove_suffix(1);
-  return words;
 }
 
 Problem fault(std::string_view text, const Term& term, Text what, Text mend) {

@@ -3,8 +3,6 @@
 
 #include "core/study/stress_form.h"
 
-#include <algorithm>
-
 namespace planewright {
 
 namespace {
@@ -76,28 +74,14 @@ private:
 
   void addStress(Text name, const char* symbolOf, const Formula& formula, const NumbersPutIn& numbers,
                  double result) {
-    m_steps.push_back({std::move(name), symbol(symbolOf), formula, used(formula, numbers),
+    m_steps.push_back({std::move(name), symbol(symbolOf), formula, namedBy(formula, numbers),
                        m_form.inUnit(result), m_form.decimals, m_form.unit.name, source});
   }
 
   void addAngle(Text name, const char* symbolOf, const Formula& formula, const NumbersPutIn& numbers,
                 Angle result) {
-    m_steps.push_back({std::move(name), symbol(symbolOf), formula, used(formula, numbers), result.degrees(),
-                       angleDecimals, "°", source});
-  }
-
-  /// The numbers that the formula names, in their order.
-  static NumbersPutIn used(const Formula& formula, const NumbersPutIn& numbers) {
-    NumbersPutIn result;
-    for (const NumberPutIn& number : numbers)
-      if (names(formula, number.symbol))
-        result.push_back(number);
-    return result;
-  }
-
-  static bool names(const Formula& formula, const std::string& symbol) {
-    return formula.symbol() == symbol ||
-           std::ranges::any_of(formula.parts(), [&](const Formula& part) { return names(part, symbol); });
+    m_steps.push_back({std::move(name), symbol(symbolOf), formula, namedBy(formula, numbers),
+                       result.degrees(), angleDecimals, "°", source});
   }
 
   void addCircle() {

@@ -111,6 +111,20 @@ double Formula::valueWith(const NumbersPutIn& numbers) const {
   return evaluated(operation(), values);
 }
 
+namespace {
+
+bool names(const Formula& formula, const std::string& symbol) {
+  return formula.symbol() == symbol ||
+         std::ranges::any_of(formula.parts(), [&](const Formula& part) { return names(part, symbol); });
+}
+
+} // namespace
+
+NumbersPutIn namedBy(const Formula& formula, NumbersPutIn numbers) {
+  std::erase_if(numbers, [&](const NumberPutIn& number) { return !names(formula, number.symbol); });
+  return numbers;
+}
+
 Formula operator-(const Formula& a) {
   return Formula::of(Formula::Operation::negative, {a});
 }

@@ -67,6 +67,9 @@ private:
   std::shared_ptr<const Node> m_node;
 };
 
+/// Those of the numbers whose symbols the formula names, in their order.
+NumbersPutIn namedBy(const Formula& formula, NumbersPutIn numbers);
+
 Formula operator-(const Formula& a);
 Formula operator+(const Formula& a, const Formula& b);
 Formula operator-(const Formula& a, const Formula& b);

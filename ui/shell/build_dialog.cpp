@@ -18,7 +18,8 @@ namespace planewright {
 
 BuildDialog::BuildDialog(Desk& desk, QWidget* parent)
     : QDialog(parent), m_desk(desk), m_rule(new QComboBox(this)), m_complaint(new Complaint(this)),
-      m_count(new QLabel(this)), m_list(new QPlainTextEdit(this)), m_take(new QPushButton(this)) {
+      m_count(new QLabel(this)), m_list(new QPlainTextEdit(this)), m_notes(new QLabel(this)),
+      m_take(new QPushButton(this)) {
   build();
   connect(m_rule, &QComboBox::activated, this, &BuildDialog::preview);
   connect(m_take, &QPushButton::clicked, this, &BuildDialog::take);
@@ -63,12 +64,8 @@ void BuildDialog::build() {
   auto* columns = new QHBoxLayout;
   columns->addLayout(form);
   columns->addLayout(right, 1);
-  auto* notes = new QLabel(this);
-  notes->setWordWrap(true);
-  notes->setForegroundRole(QPalette::PlaceholderText);
-  notes->setText(
-      tr("The factors filled in are recommended values, nationally determined: check them against the "
-         "code in force. Accidental and seismic combinations are not built."));
+  m_notes->setWordWrap(true);
+  m_notes->setForegroundRole(QPalette::PlaceholderText);
   auto* buttons = new QDialogButtonBox(QDialogButtonBox::Close, this);
   buttons->addButton(m_take, QDialogButtonBox::ActionRole);
   buttons->button(QDialogButtonBox::Close)->setAutoDefault(false);
@@ -77,7 +74,7 @@ void BuildDialog::build() {
   auto* rows = new QVBoxLayout(this);
   rows->addLayout(columns, 1);
   rows->addWidget(m_complaint);
-  rows->addWidget(notes);
+  rows->addWidget(m_notes);
   rows->addWidget(buttons);
 }
 
@@ -87,6 +84,10 @@ QString BuildDialog::listed() const {
 
 QString BuildDialog::count() const {
   return m_count->text();
+}
+
+QString BuildDialog::notes() const {
+  return m_notes->text();
 }
 
 CombinationFactors BuildDialog::typed() const {
@@ -129,6 +130,10 @@ void BuildDialog::preview() {
   m_count->setText(there == 0
                        ? tr("%1 combinations").arg(names.size())
                        : tr("%1 combinations, %2 of them in the study already").arg(names.size()).arg(there));
+  QStringList notes;
+  for (const Text& note : built->notes)
+    notes << shown(note);
+  m_notes->setText(notes.join(QLatin1Char(' ')));
   m_list->setPlainText(names.join(QLatin1Char('\n')));
   m_take->setText(tr("Add %1").arg(fresh));
   m_take->setEnabled(fresh > 0);

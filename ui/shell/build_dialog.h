@@ -33,6 +33,7 @@ public:
   DraftEdit& factor(const std::string& key) const { return *m_factors.at(key); }
   QString listed() const;
   QString count() const;
+  QString notes() const;
   QPushButton& takeButton() const { return *m_take; }
 
 private:
@@ -50,6 +51,7 @@ private:
   Complaint* m_complaint;
   QLabel* m_count;
   QPlainTextEdit* m_list;
+  QLabel* m_notes;
   QPushButton* m_take;
 };
 

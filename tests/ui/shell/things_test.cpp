@@ -112,6 +112,11 @@ TEST_F(ThingsTest, builtCombinationsAreListedBeforeTheyAreTaken) {
   EXPECT_EQ(dialog.count(), "4 combinations");
   EXPECT_EQ(dialog.listed(), "1.35 G\n1 G\n1.35 G + 1.5 Q\n1 G + 1.5 Q");
   EXPECT_TRUE(m_desk.study().combinations.empty());
+  EXPECT_TRUE(dialog.notes().contains("nationally determined"));
+  EXPECT_FALSE(dialog.notes().contains("in none of them"));
+  EXPECT_TRUE(put(cases, 0, 2, "accidental"));
+  EXPECT_TRUE(dialog.notes().endsWith("in none of them: G."));
+  EXPECT_TRUE(put(cases, 0, 2, "permanent"));
   dialog.factor("variable").selectAll();
   QTest::keyClicks(&dialog.factor("variable"), "1.6");
   EXPECT_TRUE(dialog.listed().endsWith("1 G + 1.6 Q"));
