@@ -26,7 +26,7 @@ Study bareStudy() {
   Point& point = study.points.front();
   point.name = pointName;
   point.stress = {CaseStress{caseName}};
-  point.line.reset();
+  point.lines.clear();
   return study;
 }
 
@@ -42,10 +42,9 @@ Result<Study> typedAt(const Study& study, const Place& place, const std::string&
 /// The angle or tolerance as a study would keep it at such a place.
 Result<std::string> keptAngle(Spot spot, const GivenOption& option) {
   Study study = bareStudy();
-  study.points.front().line = Line{};
+  study.points.front().lines = {Line{pointName}};
   study.points.front().planes = {WatchedPlane{pointName, "0 deg", ""}};
-  const bool isPlane = spot == Spot::planeNormal;
-  const Place place{spot, pointName, isPlane ? pointName : ""};
+  const Place place{spot, pointName, pointName};
   const Result<Study> after = typedAt(study, place, option.value, option.name);
   if (!after)
     return tl::unexpected(after.error());

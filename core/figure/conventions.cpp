@@ -48,9 +48,9 @@ Text thirdStressOf(const Study& study, const StateReading& state) {
       .with(stresses.withUnit(state.circle.tauAbsMax));
 }
 
-Text missingOf(const StateReading& state) {
+Text missingOf(const std::vector<std::string>& ids) {
   std::string cases;
-  for (const std::string& id : state.missing)
+  for (const std::string& id : ids)
     cases += (cases.empty() ? "" : ", ") + id;
   return PW_TEXT("Figure", "No stresses are given for %1: counted as 0.").with(cases);
 }
@@ -65,8 +65,8 @@ std::vector<Text> conventionsOf(const Study& study, const Readout& readout) {
   if (!state.circle.theta1)
     sentences.push_back(PW_TEXT("Figure", "The circle is a point: every direction is principal."));
   sentences.push_back(thirdStressOf(study, state));
-  if (!state.missing.empty())
-    sentences.push_back(missingOf(state));
+  if (const std::vector<std::string> missing = missingCases(readout, state); !missing.empty())
+    sentences.push_back(missingOf(missing));
   sentences.push_back(senseOf(study));
   sentences.push_back(PW_TEXT("Figure", "Angles counter-clockwise from +x, seen from +z."));
   if (readout.axes != Angle())

@@ -42,13 +42,13 @@ ObjectReader::ObjectReader(const Json& json, std::string path, Reading& reading)
   isOf(Json::Kind::object, json, m_path, m_reading);
 }
 
-void ObjectReader::text(const char* key, std::string& target) {
+void ObjectReader::text(std::string_view key, std::string& target) {
   const JsonMember* found = asked(key);
   if (found && isOf(Json::Kind::text, found->value, below(key), m_reading))
     target = found->value.text;
 }
 
-void ObjectReader::neededText(const char* key, std::string& target) {
+void ObjectReader::neededText(std::string_view key, std::string& target) {
   text(key, target);
   if (m_json.kind != Json::Kind::object || member(m_json, key))
     return;
@@ -57,7 +57,7 @@ void ObjectReader::neededText(const char* key, std::string& target) {
                          PW_TEXT("File", "“%1” is missing in this object.").with(key));
 }
 
-void ObjectReader::texts(const char* key, std::vector<std::string>& target) {
+void ObjectReader::texts(std::string_view key, std::vector<std::string>& target) {
   const auto* items = list(key);
   if (!items)
     return;
@@ -66,7 +66,7 @@ void ObjectReader::texts(const char* key, std::vector<std::string>& target) {
       target.push_back(item.value.text);
 }
 
-const Json* ObjectReader::value(const char* key) {
+const Json* ObjectReader::value(std::string_view key) {
   const JsonMember* found = asked(key);
   return found ? &found->value : nullptr;
 }
@@ -86,12 +86,12 @@ void ObjectReader::refuseUnread() {
   }
 }
 
-const JsonMember* ObjectReader::asked(const char* key) {
+const JsonMember* ObjectReader::asked(std::string_view key) {
   m_asked.emplace_back(key);
   return m_json.kind == Json::Kind::object ? member(m_json, key) : nullptr;
 }
 
-const std::vector<JsonMember>* ObjectReader::membersOf(const char* key, Json::Kind kind) {
+const std::vector<JsonMember>* ObjectReader::membersOf(std::string_view key, Json::Kind kind) {
   const JsonMember* found = asked(key);
   return found && isOf(kind, found->value, below(key), m_reading) ? &found->value.members : nullptr;
 }

@@ -21,24 +21,24 @@ class ObjectReader {
 public:
   ObjectReader(const Json& json, std::string path, Reading& reading);
 
-  void text(const char* key, std::string& target);
+  void text(std::string_view key, std::string& target);
   /// A text that must be there.
-  void neededText(const char* key, std::string& target);
-  void texts(const char* key, std::vector<std::string>& target);
+  void neededText(std::string_view key, std::string& target);
+  void texts(std::string_view key, std::vector<std::string>& target);
   template <class Enum>
-  void word(const char* key, Enum& target);
+  void word(std::string_view key, Enum& target);
 
   /// The items of a list or the members of an object behind a key; null when it is not there or no such.
-  const std::vector<JsonMember>* list(const char* key) { return membersOf(key, Json::Kind::list); }
-  const std::vector<JsonMember>* object(const char* key) { return membersOf(key, Json::Kind::object); }
+  const std::vector<JsonMember>* list(std::string_view key) { return membersOf(key, Json::Kind::list); }
+  const std::vector<JsonMember>* object(std::string_view key) { return membersOf(key, Json::Kind::object); }
   /// The value behind a key that something else reads.
-  const Json* value(const char* key);
+  const Json* value(std::string_view key);
 
   void refuseUnread();
 
 private:
-  const JsonMember* asked(const char* key);
-  const std::vector<JsonMember>* membersOf(const char* key, Json::Kind kind);
+  const JsonMember* asked(std::string_view key);
+  const std::vector<JsonMember>* membersOf(std::string_view key, Json::Kind kind);
   void refuseWord(const JsonMember& found, const std::vector<std::string_view>& words);
   std::string below(std::string_view key) const;
 
@@ -49,7 +49,7 @@ private:
 };
 
 template <class Enum>
-void ObjectReader::word(const char* key, Enum& target) {
+void ObjectReader::word(std::string_view key, Enum& target) {
   const JsonMember* found = asked(key);
   if (!found || !isOf(Json::Kind::text, found->value, below(key), m_reading))
     return;

@@ -12,14 +12,42 @@ namespace {
 using Fields = std::vector<std::string>;
 
 const Fields& heading() {
-  static const Fields names = {"point",       "combination", "judged",  "stress_unit",
-                               "positive",    "sx",          "sy",      "txy",
-                               "sz",          "mean",        "radius",  "s1",
-                               "s2",          "theta1",      "tau_max", "theta_tau_max",
-                               "tau_abs_max", "row",         "name",    "normal",
-                               "cut",         "sn",          "tnt",     "kind",
-                               "angle",       "tolerance",   "along",   "across",
-                               "shear",       "cautions"};
+  static const Fields names = {"point",
+                               "combination",
+                               "judged",
+                               "stress_unit",
+                               "positive",
+                               "sx",
+                               "sy",
+                               "txy",
+                               "sz",
+                               "mean",
+                               "radius",
+                               "s1",
+                               "s2",
+                               "theta1",
+                               "tau_max",
+                               "theta_tau_max",
+                               "tau_abs_max",
+                               "row",
+                               "name",
+                               "normal",
+                               "cut",
+                               "sn",
+                               "tnt",
+                               "kind",
+                               "angle",
+                               "tolerance",
+                               "along",
+                               "across",
+                               "shear",
+                               "along_axial",
+                               "along_bending",
+                               "sx_axial",
+                               "sx_bending",
+                               "edge_sn",
+                               "edge_tnt",
+                               "cautions"};
   return names;
 }
 
@@ -32,11 +60,11 @@ public:
   std::string written() const {
     std::string rows;
     for (std::size_t i = 0; i < m_readout.watched.size(); ++i)
-      rows += row("plane", m_readout.watched[i].name, planeFields(i), Fields(6));
+      rows += row("plane", m_readout.watched[i].name, planeFields(i), Fields(8));
     for (std::size_t i = 0; i < m_readout.lines.size(); ++i)
       rows += row("line", m_readout.lines[i].name, Fields(4), lineFields(i));
     // A state without planes and lines is not lost.
-    return rows.empty() ? row("state", "", Fields(4), Fields(6)) : rows;
+    return rows.empty() ? row("state", "", Fields(4), Fields(8)) : rows;
   }
 
 private:
@@ -77,13 +105,26 @@ private:
   Fields lineFields(std::size_t i) const {
     const LineReading& line = m_readout.lines[i];
     const LineStress& stresses = m_state.lines[i];
-    return {std::string(wordOf(line.kind)), angle(line.angle.value), angle(line.tolerance),
-            stress(stresses.along),         stress(stresses.across), stress(stresses.shear)};
+    const AlongParts parts = alongPartsOf(m_state, line.angle);
+    return {std::string(wordOf(line.kind)),
+            angle(line.angle.value),
+            angle(line.tolerance),
+            stress(stresses.along),
+            stress(stresses.across),
+            stress(stresses.shear),
+            stress(parts.axial),
+            stress(parts.bending)};
+  }
+
+  Fields sourceFields() const {
+    const std::optional<FreeEdge>& edge = m_state.edge;
+    return {stress(m_state.axial), stress(m_state.bending), edge ? stress(edge->traction.sn) : "",
+            edge ? stress(edge->traction.tnt) : ""};
   }
 
   std::string cautions() const {
     std::string words;
-    for (const Text& caution : cautionsOf(m_state))
+    for (const Text& caution : cautionsOf(m_readout, m_state))
       words += (words.empty() ? "" : " ") + plain(caution);
     return words;
   }
@@ -93,6 +134,8 @@ private:
     fields.insert(fields.end(), {kind, name});
     fields.insert(fields.end(), plane.begin(), plane.end());
     fields.insert(fields.end(), line.begin(), line.end());
+    const Fields sources = sourceFields();
+    fields.insert(fields.end(), sources.begin(), sources.end());
     fields.push_back(cautions());
     return csvRow(fields);
   }

@@ -72,6 +72,8 @@ private:
     stress("sy", state.stress.sy);
     stress("txy", state.stress.txy);
     stress("sz", state.sz);
+    stress("sx_axial", state.axial);
+    stress("sx_bending", state.bending);
     circle(state.circle);
     m_json.key("planes").beginList();
     for (std::size_t i = 0; i < readout.watched.size(); ++i)
@@ -79,8 +81,9 @@ private:
     m_json.endList();
     m_json.key("lines").beginList();
     for (std::size_t i = 0; i < readout.lines.size(); ++i)
-      line(readout.lines[i], state.lines[i]);
+      line(readout.lines[i], state, state.lines[i]);
     m_json.endList();
+    freeEdge(readout, state);
     m_json.key("checks").beginList();
     m_json.endList();
     m_json.endObject();
@@ -107,7 +110,19 @@ private:
     m_json.endObject();
   }
 
-  void line(const LineReading& line, const LineStress& stresses) {
+  void freeEdge(const Readout& readout, const StateReading& state) {
+    m_json.key("free_edge");
+    if (!state.edge)
+      return m_json.null();
+    m_json.beginObject();
+    angle("edge", readout.edge->value);
+    stress("sn", state.edge->traction.sn);
+    stress("tnt", state.edge->traction.tnt);
+    m_json.endObject();
+  }
+
+  void line(const LineReading& line, const StateReading& state, const LineStress& stresses) {
+    const AlongParts parts = alongPartsOf(state, line.angle);
     m_json.beginObject();
     text("name", line.name);
     text("kind", wordOf(line.kind));
@@ -116,6 +131,8 @@ private:
     stress("along", stresses.along);
     stress("across", stresses.across);
     stress("shear", stresses.shear);
+    stress("along_axial", parts.axial);
+    stress("along_bending", parts.bending);
     m_json.endObject();
   }
 

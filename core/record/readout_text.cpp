@@ -1,6 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
 #include "core/record/readout_file.h"
+#include "core/study/case_sources.h"
+#include "core/study/envelope.h"
+#include "core/study/governing.h"
 #include "core/study/working_of_state.h"
 #include "core/table/cautions.h"
 #include "core/table/table.h"
@@ -43,6 +46,7 @@ public:
     line("", PW_TEXT("Readout", "Stresses in %1, %2. Angles from +x, counter-clockwise, seen from +z.")
                  .with(m_study.units.stress)
                  .with(labelOf(m_study.convention.positive)));
+    governing(points);
     for (const Readout& readout : points)
       point(readout);
     m_out += '\n';
@@ -54,6 +58,24 @@ public:
 private:
   std::string words(const Text& text) const { return plain(text, m_translate); }
   void line(std::string_view indent, const Text& text) { m_out += std::string(indent) + words(text) + "\n"; }
+
+  /// Without strengths the greatest stresses govern.
+  void governing(const std::vector<Readout>& points) {
+    const std::optional<GoverningStates> worst = governingOf(points);
+    if (!worst)
+      return;
+    const auto told = [&](const Text& name, const Governing& one) {
+      const auto readout = std::ranges::find(points, one.point, &Readout::point);
+      line("", PW_TEXT("Readout", "Greatest %1: %2, point %3, %4")
+                   .with(name)
+                   .with(stressFormOf(m_study, readout->states[one.state]).withUnit(one.stress))
+                   .with(one.point)
+                   .with(one.combination));
+    };
+    told(symbol("σ_{1}"), worst->principal);
+    told(PW_TEXT("Readout", "shear in the plane"), worst->shear);
+    line("", PW_TEXT("Readout", "No strengths are given: nothing is judged against any."));
+  }
 
   /// The name, with the kind where it says more, the angle both ways and the tolerance.
   static Text described(const LineReading& line) {
@@ -80,8 +102,30 @@ private:
       line("  ", described(one));
     for (const Text& caution : cautionsOf(readout))
       line("  ", PW_TEXT("Readout", "Caution: %1").with(caution));
+    if (readout.edge)
+      line("  ",
+           PW_TEXT("Readout", "Free edge at %1").with(shownDegrees(readout.edge->value, angleDecimals)));
+    sources(*findPoint(m_study, readout.point));
+    if (judgedStates(readout) > 1) {
+      m_out += '\n';
+      line("  ", PW_TEXT("Readout", "Over all combinations"));
+      m_out += '\n';
+      planes(envelopeTable(m_study, readout));
+    }
     for (std::size_t i = 0; i < readout.states.size(); ++i)
       state(readout, readout.states[i], i < m_study.combinations.size());
+  }
+
+  /// Where the stresses of the cases come from, with the working.
+  void sources(const Point& point) {
+    for (const CaseStress& stress : point.stress)
+      for (const NamedContribution& made : contributionsOf(m_study, point, stress)) {
+        m_out += '\n';
+        line("  ", PW_TEXT("Readout", "Case %1: %2").with(stress.caseId).with(made.name));
+        for (const Text& rule : made.contribution.signRules)
+          line("    ", rule);
+        steps(made.contribution.steps);
+      }
   }
 
   Text nameOf(const StateReading& state, bool isCombination) const {
@@ -100,10 +144,18 @@ private:
                      .with(stresses.withUnit(state.stress.sy))
                      .with(stresses.withUnit(state.stress.txy))
                      .with(stresses.withUnit(state.sz)));
+    if (state.axial != 0 || state.bending != 0)
+      line("    ", PW_TEXT("Readout", "of σ_{x} from normal force %1, from bending %2")
+                       .with(stresses.withUnit(state.axial))
+                       .with(stresses.withUnit(state.bending)));
+    if (state.edge)
+      line("    ", PW_TEXT("Readout", "left on the free edge: σ_{n} = %1, τ_{nt} = %2")
+                       .with(stresses.withUnit(state.edge->traction.sn))
+                       .with(stresses.withUnit(state.edge->traction.tnt)));
     m_out += '\n';
     planes(planesTable(m_study, readout, state));
     m_out += '\n';
-    working(readout, state);
+    steps(workingOf(m_study, readout, state));
   }
 
   void planes(const Table& table) {
@@ -118,8 +170,9 @@ private:
     m_out += aligned(rows, "    ");
   }
 
-  void working(const Readout& readout, const StateReading& state) {
-    const std::vector<Step> steps = workingOf(m_study, readout, state);
+  void steps(const std::vector<Step>& steps) {
+    if (steps.empty())
+      return;
     const bool oneSource =
         std::ranges::all_of(steps, [&](const Step& step) { return step.source == steps.front().source; });
     if (oneSource)

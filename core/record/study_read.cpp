@@ -3,6 +3,7 @@
 #include "core/record/study_file.h"
 #include "core/record/study_spots.h"
 #include "core/study/edit.h"
+#include "core/study/text_fields.h"
 
 #include <charconv>
 
@@ -16,39 +17,38 @@ std::string nameIn(const Json& json, const char* key) {
   return name && name->value.kind == Json::Kind::text ? name->value.text : "";
 }
 
-void read(const Json& json, Reading& reading, Title& title) {
-  ObjectReader object(json, "title", reading);
-  object.text("project", title.project);
-  object.text("subject", title.subject);
-  object.text("number", title.number);
-  object.text("revision", title.revision);
-  object.text("prepared", title.prepared);
-  object.text("checked", title.checked);
-  object.text("date", title.date);
-  object.text("notes", title.notes);
+/// The texts of a thing by the keys of their spots.
+template <class Thing>
+void readTexts(ObjectReader& object, Thing& thing) {
+  for (const TextField<Thing>& field : textFieldsOf<Thing>())
+    object.text(rowOf(field.spot).key(), thing.*field.text);
+}
+
+/// An object that holds nothing but texts.
+template <class Thing>
+void readAllTexts(const Json& json, std::string path, Reading& reading, Thing& thing) {
+  ObjectReader object(json, std::move(path), reading);
+  readTexts(object, thing);
   object.refuseUnread();
 }
 
+void read(const Json& json, Reading& reading, Title& title) {
+  readAllTexts(json, "title", reading, title);
+}
+
 void read(const Json& json, Reading& reading, Units& units) {
-  ObjectReader object(json, "units", reading);
-  object.text("stress", units.stress);
-  object.text("force", units.force);
-  object.text("length", units.length);
-  object.text("moment", units.moment);
-  object.refuseUnread();
+  readAllTexts(json, "units", reading, units);
+}
+
+void read(const Json& json, Reading& reading, Shown& shown) {
+  readAllTexts(json, "shown", reading, shown);
 }
 
 void read(const Json& json, Reading& reading, Convention& convention) {
   ObjectReader object(json, "convention", reading);
   object.word("positive", convention.positive);
   object.word("shear_axis", convention.shearAxis);
-  object.refuseUnread();
-}
-
-void read(const Json& json, Reading& reading, Shown& shown) {
-  ObjectReader object(json, "shown", reading);
-  object.text("point", shown.point);
-  object.text("combination", shown.combination);
+  object.word("shear_force", convention.shearForce);
   object.refuseUnread();
 }
 
@@ -74,22 +74,68 @@ void read(const Json& json, Reading& reading, Combination& one) {
   object.refuseUnread();
 }
 
+void read(const Json& json, Reading& reading, TypedSection& section) {
+  ObjectReader object(json, pathOf({Spot::section, nameIn(json, "name"), {}}), reading);
+  object.neededText("name", section.name);
+  object.word("shape", section.shape);
+  if (const auto* sizes = object.object("sizes")) {
+    section.sizes.clear();
+    for (const JsonMember& size : *sizes) {
+      isOf(Json::Kind::text, size.value, pathOf({Spot::size, section.name, size.key}), reading);
+      section.sizes.push_back({size.key, size.value.text});
+    }
+  }
+  object.refuseUnread();
+}
+
+void read(const Json& json, const std::string& point, Reading& reading, FibreTexts& fibre) {
+  ObjectReader object(json, pathOf({Spot::fibre, point, {}}), reading);
+  object.neededText("section", fibre.section);
+  readTexts(object, fibre);
+  object.word("view", fibre.view);
+  object.refuseUnread();
+}
+
+void read(const Json& json, const Place& place, Reading& reading, ForceTexts& forces) {
+  readAllTexts(json, pathOf(place), reading, forces);
+}
+
+void read(const Json& json, const Place& place, Reading& reading, PressureTexts& pressure) {
+  ObjectReader object(json, pathOf(place), reading);
+  readTexts(object, pressure);
+  object.word("ends", pressure.ends);
+  object.refuseUnread();
+}
+
+void read(const Json& json, const Place& place, Reading& reading, RosetteTexts& rosette) {
+  ObjectReader object(json, pathOf(place), reading);
+  readTexts(object, rosette);
+  object.word("material", rosette.material);
+  object.refuseUnread();
+}
+
+/// A source of a case, where the file has it.
+template <class Source>
+void readSource(ObjectReader& object, const Place& place, Reading& reading, std::optional<Source>& source) {
+  if (const Json* json = object.value(rowOf(place.spot).key()))
+    read(*json, place, reading, source.emplace());
+}
+
 void read(const JsonMember& from, const std::string& point, Reading& reading, CaseStress& stress) {
   stress.caseId = from.key;
   ObjectReader object(from.value, pathOf({Spot::caseStress, point, from.key}), reading);
-  object.text("sx", stress.sx);
-  object.text("sy", stress.sy);
-  object.text("txy", stress.txy);
-  object.text("sz", stress.sz);
+  readTexts(object, stress);
+  readSource(object, {Spot::forces, point, from.key}, reading, stress.forces);
+  readSource(object, {Spot::pressure, point, from.key}, reading, stress.pressure);
+  readSource(object, {Spot::rosette, point, from.key}, reading, stress.rosette);
   object.refuseUnread();
 }
 
 void read(const Json& json, const std::string& point, Reading& reading, Line& line) {
-  ObjectReader object(json, pathOf({Spot::line, point, {}}), reading);
+  ObjectReader object(json, pathOf({Spot::line, point, nameIn(json, "name")}), reading);
   object.text("name", line.name);
   object.word("kind", line.kind);
-  object.text("angle", line.angle);
-  object.text("tolerance", line.tolerance);
+  readTexts(object, line);
   object.refuseUnread();
 }
 
@@ -101,16 +147,27 @@ void read(const Json& json, const std::string& point, Reading& reading, WatchedP
   object.refuseUnread();
 }
 
+/// One line under "line", several under "lines"; both at once are read as one list.
+void readLines(ObjectReader& object, Reading& reading, Point& point) {
+  if (const Json* line = object.value("line"))
+    read(*line, point.name, reading, point.lines.emplace_back());
+  if (const auto* lines = object.list("lines"))
+    for (const JsonMember& one : *lines)
+      read(one.value, point.name, reading, point.lines.emplace_back());
+}
+
 void read(const Json& json, Reading& reading, Point& point) {
   ObjectReader object(json, pathOf({Spot::point, nameIn(json, "name"), {}}), reading);
   object.neededText("name", point.name);
   object.text("note", point.note);
   object.text("axes", point.axes);
+  if (const Json* fibre = object.value("fibre"))
+    read(*fibre, point.name, reading, point.fibre.emplace());
+  object.text("free_edge", point.freeEdge);
   if (const auto* cases = object.object("stress"))
     for (const JsonMember& one : *cases)
       read(one, point.name, reading, point.stress.emplace_back());
-  if (const Json* line = object.value("line"))
-    read(*line, point.name, reading, point.line.emplace());
+  readLines(object, reading, point);
   if (const auto* planes = object.list("planes"))
     for (const JsonMember& one : *planes)
       read(one.value, point.name, reading, point.planes.emplace_back());
@@ -146,6 +203,7 @@ Study readParts(const Json& root, Reading& reading) {
   readPart(object, "convention", reading, study.convention);
   readItems(object, "cases", reading, study.cases);
   readItems(object, "combinations", reading, study.combinations);
+  readItems(object, "sections", reading, study.sections);
   // The point of a new study has stresses of that study's own case.
   if (!readItems(object, "points", reading, study.points))
     std::erase_if(study.points.front().stress,

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/record/json_writer.h"
 #include "core/record/study_file.h"
+#include "core/study/text_fields.h"
 
 namespace planewright {
 
@@ -10,25 +11,18 @@ void put(JsonWriter& json, const char* key, std::string_view text) {
   json.key(key).text(text);
 }
 
-void put(JsonWriter& json, const Title& title) {
-  json.key("title").beginObject();
-  put(json, "project", title.project);
-  put(json, "subject", title.subject);
-  put(json, "number", title.number);
-  put(json, "revision", title.revision);
-  put(json, "prepared", title.prepared);
-  put(json, "checked", title.checked);
-  put(json, "date", title.date);
-  put(json, "notes", title.notes);
-  json.endObject();
+/// The texts of a thing by the keys of their spots.
+template <class Thing>
+void putTexts(JsonWriter& json, const Thing& thing) {
+  for (const TextField<Thing>& field : textFieldsOf<Thing>())
+    json.key(rowOf(field.spot).key()).text(thing.*field.text);
 }
 
-void put(JsonWriter& json, const Units& units) {
-  json.key("units").beginObject();
-  put(json, "stress", units.stress);
-  put(json, "force", units.force);
-  put(json, "length", units.length);
-  put(json, "moment", units.moment);
+/// An object that holds nothing but texts.
+template <class Thing>
+void putTextsAs(JsonWriter& json, std::string_view key, const Thing& thing) {
+  json.key(key).beginObject();
+  putTexts(json, thing);
   json.endObject();
 }
 
@@ -36,6 +30,7 @@ void put(JsonWriter& json, const Convention& convention) {
   json.key("convention").beginObject();
   put(json, "positive", wordOf(convention.positive));
   put(json, "shear_axis", wordOf(convention.shearAxis));
+  put(json, "shear_force", wordOf(convention.shearForce));
   json.endObject();
 }
 
@@ -63,50 +58,66 @@ void put(JsonWriter& json, const Combination& one) {
   json.endObject();
 }
 
+void put(JsonWriter& json, const TypedSection& section) {
+  json.beginObject();
+  put(json, "name", section.name);
+  put(json, "shape", wordOf(section.shape));
+  json.key("sizes").beginObject();
+  for (const TypedSize& size : section.sizes)
+    json.key(size.key).text(size.text);
+  json.endObject();
+  json.endObject();
+}
+
+void put(JsonWriter& json, const FibreTexts& fibre) {
+  json.key("fibre").beginObject();
+  putTexts(json, fibre);
+  put(json, "view", wordOf(fibre.view));
+  json.endObject();
+}
+
+void put(JsonWriter& json, const PressureTexts& pressure) {
+  json.key("pressure").beginObject();
+  putTexts(json, pressure);
+  put(json, "ends", wordOf(pressure.ends));
+  json.endObject();
+}
+
+void put(JsonWriter& json, const RosetteTexts& rosette) {
+  json.key("rosette").beginObject();
+  put(json, "material", wordOf(rosette.material));
+  putTexts(json, rosette);
+  json.endObject();
+}
+
 void put(JsonWriter& json, const CaseStress& stress) {
   json.key(stress.caseId).beginObject();
-  put(json, "sx", stress.sx);
-  put(json, "sy", stress.sy);
-  put(json, "txy", stress.txy);
-  put(json, "sz", stress.sz);
+  putTexts(json, stress);
+  if (stress.forces)
+    putTextsAs(json, "forces", *stress.forces);
+  if (stress.pressure)
+    put(json, *stress.pressure);
+  if (stress.rosette)
+    put(json, *stress.rosette);
   json.endObject();
 }
 
 void put(JsonWriter& json, const Line& line) {
-  json.key("line").beginObject();
+  json.beginObject();
   put(json, "name", line.name);
   put(json, "kind", wordOf(line.kind));
-  put(json, "angle", line.angle);
-  put(json, "tolerance", line.tolerance);
+  putTexts(json, line);
   json.endObject();
 }
 
 void put(JsonWriter& json, const WatchedPlane& plane) {
   json.beginObject();
   put(json, "name", plane.name);
-  put(json, "normal", plane.normal);
-  put(json, "tolerance", plane.tolerance);
+  putTexts(json, plane);
   json.endObject();
 }
 
-void put(JsonWriter& json, const Point& point) {
-  json.beginObject();
-  put(json, "name", point.name);
-  put(json, "note", point.note);
-  put(json, "axes", point.axes);
-  json.key("stress").beginObject();
-  for (const CaseStress& stress : point.stress)
-    put(json, stress);
-  json.endObject();
-  if (point.line)
-    put(json, *point.line);
-  json.key("planes").beginList();
-  for (const WatchedPlane& plane : point.planes)
-    put(json, plane);
-  json.endList();
-  put(json, "reading", point.reading);
-  json.endObject();
-}
+void put(JsonWriter& json, const Point& point);
 
 template <class Item>
 void put(JsonWriter& json, const char* key, const std::vector<Item>& items) {
@@ -116,6 +127,35 @@ void put(JsonWriter& json, const char* key, const std::vector<Item>& items) {
   json.endList();
 }
 
+/// Most points have one line, or none.
+void putLines(JsonWriter& json, const std::vector<Line>& lines) {
+  if (lines.size() > 1)
+    return put(json, "lines", lines);
+  if (lines.empty())
+    return;
+  json.key("line");
+  put(json, lines.front());
+}
+
+void put(JsonWriter& json, const Point& point) {
+  json.beginObject();
+  put(json, "name", point.name);
+  put(json, "note", point.note);
+  put(json, "axes", point.axes);
+  if (point.fibre)
+    put(json, *point.fibre);
+  if (!point.freeEdge.empty())
+    put(json, "free_edge", point.freeEdge);
+  json.key("stress").beginObject();
+  for (const CaseStress& stress : point.stress)
+    put(json, stress);
+  json.endObject();
+  putLines(json, point.lines);
+  put(json, "planes", point.planes);
+  put(json, "reading", point.reading);
+  json.endObject();
+}
+
 } // namespace
 
 std::string writeStudy(const Study& study) {
@@ -123,16 +163,14 @@ std::string writeStudy(const Study& study) {
   json.beginObject();
   put(json, "format", studyFormat);
   json.key("version").whole(studyFileVersion);
-  put(json, study.title);
-  put(json, study.units);
+  putTextsAs(json, "title", study.title);
+  putTextsAs(json, "units", study.units);
   put(json, study.convention);
   put(json, "cases", study.cases);
   put(json, "combinations", study.combinations);
+  put(json, "sections", study.sections);
   put(json, "points", study.points);
-  json.key("shown").beginObject();
-  put(json, "point", study.shown.point);
-  put(json, "combination", study.shown.combination);
-  json.endObject();
+  putTextsAs(json, "shown", study.shown);
   json.endObject();
   return json.taken();
 }

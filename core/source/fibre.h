@@ -2,23 +2,9 @@
 #pragma once
 
 #include "core/source/section_model.h"
+#include "core/source/view.h"
 
 namespace planewright {
-
-/// From where the plane of stress at a fibre is seen. From the side: the x-y plane, seen from +z. From the
-/// top: the x-z plane, seen from +y, with x to the right and -z as its second axis, so that counter-clockwise
-/// angles stay counter-clockwise.
-enum class View { side, top };
-
-/// The sense of V. Upward: V_y is positive in +y on the +x face, so txy = +V S/(I b) and dM_z/dx = -V_y.
-/// Slope: V_y = dM_z/dx, so txy = -V S/(I b). V_z is positive in +z on the +x face by either rule, since
-/// with the signs of M_y that is dM_y/dx already.
-enum class ShearRule { upward, slope };
-
-template <>
-const std::vector<Named<View>>& namesOf<View>();
-template <>
-const std::vector<Named<ShearRule>>& namesOf<ShearRule>();
 
 /// A place in a section relative to its centroid, in mm, and the face that is looked at.
 struct Fibre {

@@ -13,6 +13,7 @@ struct FreeEdge {
   double scale = 0;  ///< greatest |stress| on any plane of the state, to measure the traction by
   /// The traction over the scale, as parts of 1; 0 for a state of zero.
   double share() const;
+  bool operator==(const FreeEdge&) const = default;
 };
 
 /// `edge` is the direction of the edge in the plane of stress.

@@ -4,6 +4,7 @@
 #include "core/quantity/format.h"
 #include "core/source/written_units.h"
 
+#include <algorithm>
 #include <array>
 
 namespace planewright {
@@ -108,6 +109,18 @@ const std::vector<SizeKind>& sizesOf(SectionShape shape) {
       ofBlock(),
       ofTable()};
   return sizes[static_cast<std::size_t>(shape)];
+}
+
+const SizeKind* sizeOfKey(SectionShape shape, std::string_view key) {
+  if (shape == SectionShape::built) {
+    const std::size_t digits = std::min(key.find_first_not_of("0123456789"), key.size());
+    if (digits == 0 || key.substr(digits, 1) != ".")
+      return nullptr;
+    key.remove_prefix(digits + 1);
+  }
+  const Sizes& sizes = sizesOf(shape);
+  const auto row = std::ranges::find(sizes, key, &SizeKind::key);
+  return row == sizes.end() ? nullptr : &*row;
 }
 
 std::string blockKey(int number, std::string_view key) {

@@ -38,6 +38,10 @@ struct SizeKind {
 /// The sizes of a shape in the order of their fields; of `built` those of one of its blocks.
 const std::vector<SizeKind>& sizesOf(SectionShape shape);
 
+/// The row of a size by its key, of a block's size with the number in front; null where the shape has no
+/// such.
+const SizeKind* sizeOfKey(SectionShape shape, std::string_view key);
+
 /// The key of a size of a block of a built section, numbered from 1: "2.turn".
 std::string blockKey(int number, std::string_view key);
 

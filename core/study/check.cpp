@@ -2,6 +2,7 @@
 #include "core/study/edit.h"
 #include "core/study/place_list.h"
 #include "core/study/rules.h"
+#include "core/study/source_rules.h"
 #include "core/study/typed.h"
 
 namespace planewright {
@@ -53,9 +54,11 @@ Problems problemsIn(const Study& study) {
   addFaults(problems, ends, typedPlacesInHead());
   addFaults(problems, study, &Study::cases);
   addFaults(problems, study, &Study::combinations);
+  addFaults(problems, study, &Study::sections);
   addFaults(problems, study, &Study::points);
   addFaults(problems, ends, typedPlacesInFoot());
-  return problems;
+  // Sources are worked out only where all that they are made of is sound.
+  return problems.empty() ? brokenSources(study) : problems;
 }
 
 } // namespace planewright

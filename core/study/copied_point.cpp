@@ -14,10 +14,19 @@ namespace {
 /// The things inside a point that have to be there before texts are typed into them.
 std::vector<Place> thingsIn(const Point& point) {
   std::vector<Place> places;
-  for (const CaseStress& stress : point.stress)
+  if (point.fibre)
+    places.push_back({Spot::fibre, point.name, {}});
+  for (const CaseStress& stress : point.stress) {
     places.push_back({Spot::caseStress, point.name, stress.caseId});
-  if (point.line)
-    places.push_back({Spot::line, point.name, {}});
+    if (stress.forces)
+      places.push_back({Spot::forces, point.name, stress.caseId});
+    if (stress.pressure)
+      places.push_back({Spot::pressure, point.name, stress.caseId});
+    if (stress.rosette)
+      places.push_back({Spot::rosette, point.name, stress.caseId});
+  }
+  for (const Line& line : point.lines)
+    places.push_back({Spot::line, point.name, line.name});
   for (const WatchedPlane& plane : point.planes)
     places.push_back({Spot::plane, point.name, plane.name});
   return places;

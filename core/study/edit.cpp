@@ -4,6 +4,7 @@
 #include "core/study/list_of.h"
 #include "core/study/references.h"
 #include "core/study/rules.h"
+#include "core/study/source_rules.h"
 #include "core/study/typed.h"
 
 namespace planewright {
@@ -21,10 +22,7 @@ std::optional<Problem> takes(Study& study, const Type& type) {
   Result<std::string> kept = keptText(study, type.place, slot, type.text);
   if (!kept)
     return std::move(kept).error();
-  if (slot.text)
-    *slot.text = *std::move(kept);
-  else
-    putWord(slot, *kept);
+  put(slot, *kept);
   return std::nullopt;
 }
 
@@ -63,12 +61,11 @@ std::optional<Problem> takes(Study& study, const Rename& rename) {
   if (Text fault = faultOfKey(rename.place.spot, rename.name); !fault.empty())
     return problemAt(rename.place, rename.name, std::move(fault));
   const std::string& key = keyOf(rename.place);
-  bool same = false;
+  const bool same = key == rename.name;
   bool taken = false;
   const bool done = withList(study, rename.place, [&](auto& list) {
-    same = list.nameOf(key) == rename.name;
-    taken = !same && list.isTaken(rename.name);
-    return same || (!taken && list.rename(key, rename.name));
+    taken = !same && list.holds(key) && list.holds(rename.name);
+    return list.holds(key) && !taken && list.rename(key, rename.name);
   });
   if (taken)
     return problemAt(rename.place, rename.name, PW_TEXT("Study", "The name “%1” is taken.").with(rename.name),
@@ -89,6 +86,8 @@ Result<Study> edited(const Study& study, const Edits& edits) {
       return tl::unexpected(*std::move(problem));
   // Each text was read when it was typed; what is left are the rules between places.
   if (Problems problems = brokenRules(after); !problems.empty())
+    return tl::unexpected(std::move(problems.front()));
+  if (Problems problems = brokenSources(after, study); !problems.empty())
     return tl::unexpected(std::move(problems.front()));
   return after;
 }

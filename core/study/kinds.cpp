@@ -59,4 +59,19 @@ const std::vector<Named<Basis>>& namesOf() {
   return names;
 }
 
+template <>
+const std::vector<Named<Ends>>& namesOf() {
+  static const std::vector<Named<Ends>> names = {{Ends::closed, "closed", PW_TEXT("Vessel", "closed ends")},
+                                                 {Ends::open, "open", PW_TEXT("Vessel", "open ends")}};
+  return names;
+}
+
+template <>
+const std::vector<Named<Elasticity>>& namesOf() {
+  static const std::vector<Named<Elasticity>> names = {
+      {Elasticity::isotropic, "isotropic", PW_TEXT("Rosette", "the same in all directions")},
+      {Elasticity::orthotropic, "orthotropic", PW_TEXT("Rosette", "with a line")}};
+  return names;
+}
+
 } // namespace planewright

@@ -18,6 +18,10 @@ enum class Nature { permanent, variable, accidental, measured };
 enum class Duration { permanent, longTerm, medium, shortTerm, instantaneous };
 /// What the factors of a combination make of the actions.
 enum class Basis { design, characteristic, allowable };
+/// Whether the ends of a vessel are closed, so that its wall carries their pressure along the axis.
+enum class Ends { closed, open };
+/// What the material under a rosette is.
+enum class Elasticity { isotropic, orthotropic };
 
 template <>
 const std::vector<Named<Positive>>& namesOf<Positive>();
@@ -31,5 +35,9 @@ template <>
 const std::vector<Named<Duration>>& namesOf<Duration>();
 template <>
 const std::vector<Named<Basis>>& namesOf<Basis>();
+template <>
+const std::vector<Named<Ends>>& namesOf<Ends>();
+template <>
+const std::vector<Named<Elasticity>>& namesOf<Elasticity>();
 
 } // namespace planewright

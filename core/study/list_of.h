@@ -18,11 +18,6 @@ struct KeyedList {
     return at == items.end() ? std::nullopt : std::optional(static_cast<std::size_t>(at - items.begin()));
   }
   bool holds(const std::string& name) const { return indexOf(name).has_value(); }
-  /// The name of the item with this key, its key itself; none when there is no such item.
-  std::optional<std::string> nameOf(const std::string& name) const {
-    return holds(name) ? std::optional(name) : std::nullopt;
-  }
-  bool isTaken(const std::string& name) const { return holds(name); }
   void insert(std::optional<std::size_t> index, const std::string& name) {
     Item item;
     item.*key = name;
@@ -49,28 +44,31 @@ struct KeyedList {
   }
 };
 
-/// The one line of a point seen as a list of at most one: its place needs no key, and any name is free.
-struct LineList {
-  std::optional<Line>& line;
+/// A thing that stands once or not at all, seen as a list of at most one that needs no key and has no name.
+template <class Thing>
+struct SingleThing {
+  std::optional<Thing>& thing;
 
-  bool holds(const std::string&) const { return line.has_value(); }
-  std::optional<std::string> nameOf(const std::string&) const {
-    return line ? std::optional(line->name) : std::nullopt;
-  }
-  bool isTaken(const std::string&) const { return false; }
-  void insert(std::optional<std::size_t>, const std::string&) { line = Line{}; }
+  bool holds(const std::string&) const { return thing.has_value(); }
+  void insert(std::optional<std::size_t>, const std::string&) { thing.emplace(); }
   bool erase(const std::string&) {
-    const bool was = line.has_value();
-    line.reset();
+    const bool was = thing.has_value();
+    thing.reset();
     return was;
   }
-  bool move(const std::string&, std::size_t index) const { return line && index == 0; }
-  bool rename(const std::string&, const std::string& to) {
-    if (line)
-      line->name = to;
-    return line.has_value();
-  }
+  bool move(const std::string&, std::size_t index) const { return thing && index == 0; }
+  bool rename(const std::string&, const std::string&) const { return false; }
 };
+
+/// One of the sources in the stresses of a case at a point.
+template <class Source, class Visit>
+bool withSource(Point* point, const Place& place, std::optional<Source> CaseStress::*source, Visit visit) {
+  CaseStress* stress = point ? itemIn(point->stress, &CaseStress::caseId, place.item) : nullptr;
+  if (!stress)
+    return false;
+  SingleThing<Source> list{stress->*source};
+  return visit(list);
+}
 
 /// The key of the thing that a place names.
 inline const std::string& keyOf(const Place& place) {
@@ -87,6 +85,8 @@ bool withList(Study& study, const Place& place, Visit visit) {
     return in(KeyedList<LoadCase>{study.cases, &LoadCase::id});
   case Spot::combination:
     return in(KeyedList<Combination>{study.combinations, &Combination::name});
+  case Spot::section:
+    return in(KeyedList<TypedSection>{study.sections, &TypedSection::name});
   case Spot::point:
     return in(KeyedList<Point>{study.points, &Point::name});
   case Spot::caseStress:
@@ -94,7 +94,19 @@ bool withList(Study& study, const Place& place, Visit visit) {
   case Spot::plane:
     return point && in(KeyedList<WatchedPlane>{point->planes, &WatchedPlane::name});
   case Spot::line:
-    return point && in(LineList{point->line});
+    return point && in(KeyedList<Line>{point->lines, &Line::name});
+  case Spot::fibre:
+    return point && in(SingleThing<FibreTexts>{point->fibre});
+  case Spot::forces:
+    return withSource(point, place, &CaseStress::forces, visit);
+  case Spot::pressure:
+    return withSource(point, place, &CaseStress::pressure, visit);
+  case Spot::rosette:
+    return withSource(point, place, &CaseStress::rosette, visit);
+  case Spot::size: {
+    TypedSection* section = itemIn(study.sections, &TypedSection::name, place.owner);
+    return section && in(KeyedList<TypedSize>{section->sizes, &TypedSize::key});
+  }
   case Spot::factor: {
     Combination* combination = itemIn(study.combinations, &Combination::name, place.owner);
     return combination && in(KeyedList<Factor>{combination->factors, &Factor::caseId});

@@ -13,19 +13,34 @@ using std::string;
 using std::string_view;
 using std::vector;
 
+SpotRow strain(Spot spot, const char* path, Text label) {
+  SpotRow row{spot, path, std::move(label), Holds::expression};
+  row.ownUnit = "ustrain";
+  return row;
+}
+
 /// In the order of Spot.
 const vector<SpotRow>& spotTable() {
   using enum Holds;
   const auto& stress = dimension::stress;
   const auto& angle = dimension::angle;
+  const auto& force = dimension::force;
+  const auto& length = dimension::length;
+  const auto& moment = dimension::moment;
   static const vector<SpotRow> table = {
       {Spot::loadCase, "cases/*", PW_TEXT("Place", "load case")},
       {Spot::combination, "combinations/*", PW_TEXT("Place", "combination")},
+      {Spot::section, "sections/*", PW_TEXT("Place", "section")},
       {Spot::point, "points/*", PW_TEXT("Place", "point")},
+      {Spot::fibre, "points/*/fibre", PW_TEXT("Place", "fibre")},
       {Spot::caseStress, "points/*/stress/*", PW_TEXT("Place", "stresses of a case")},
-      {Spot::line, "points/*/line", PW_TEXT("Place", "line")},
+      {Spot::forces, "points/*/stress/*/forces", PW_TEXT("Place", "section forces")},
+      {Spot::pressure, "points/*/stress/*/pressure", PW_TEXT("Place", "pressure in a thin wall")},
+      {Spot::rosette, "points/*/stress/*/rosette", PW_TEXT("Place", "strain rosette")},
+      {Spot::line, "points/*/lines/*", PW_TEXT("Place", "line")},
       {Spot::plane, "points/*/planes/*", PW_TEXT("Place", "watched plane")},
       {Spot::factor, "combinations/*/factors/*", PW_TEXT("Place", "factor"), expression},
+      {Spot::size, "sections/*/sizes/*", PW_TEXT("Place", "size of the section"), expression},
       {Spot::titleProject, "title/project", PW_TEXT("Place", "project"), freeText},
       {Spot::titleSubject, "title/subject", PW_TEXT("Place", "subject"), freeText},
       {Spot::titleNumber, "title/number", PW_TEXT("Place", "number"), freeText},
@@ -35,27 +50,58 @@ const vector<SpotRow>& spotTable() {
       {Spot::titleDate, "title/date", PW_TEXT("Place", "date"), freeText},
       {Spot::titleNotes, "title/notes", PW_TEXT("Place", "notes"), freeText},
       {Spot::unitStress, "units/stress", PW_TEXT("Place", "unit of stress"), unit, stress},
-      {Spot::unitForce, "units/force", PW_TEXT("Place", "unit of force"), unit, dimension::force},
-      {Spot::unitLength, "units/length", PW_TEXT("Place", "unit of length"), unit, dimension::length},
-      {Spot::unitMoment, "units/moment", PW_TEXT("Place", "unit of moment"), unit, dimension::moment},
+      {Spot::unitForce, "units/force", PW_TEXT("Place", "unit of force"), unit, force},
+      {Spot::unitLength, "units/length", PW_TEXT("Place", "unit of length"), unit, length},
+      {Spot::unitMoment, "units/moment", PW_TEXT("Place", "unit of moment"), unit, moment},
       {Spot::positive, "convention/positive", PW_TEXT("Place", "positive normal stress"), word},
       {Spot::shearAxis, "convention/shear_axis", PW_TEXT("Place", "shear axis of the circle"), word},
+      {Spot::shearForce, "convention/shear_force", PW_TEXT("Place", "sense of V_{y}"), word},
       {Spot::caseName, "cases/*/name", PW_TEXT("Place", "name of the case"), freeText},
       {Spot::caseNature, "cases/*/nature", PW_TEXT("Place", "nature of the action"), word},
       {Spot::caseDuration, "cases/*/duration", PW_TEXT("Place", "duration of the action"), word},
       {Spot::caseExcludes, "cases/*/excludes", PW_TEXT("Place", "cases never together with this"), ids},
       {Spot::combinationBasis, "combinations/*/basis", PW_TEXT("Place", "basis of the combination"), word},
+      {Spot::sectionShape, "sections/*/shape", PW_TEXT("Place", "shape of the section"), word},
       {Spot::pointNote, "points/*/note", PW_TEXT("Place", "note"), freeText},
       {Spot::axes, "points/*/axes", PW_TEXT("Place", "inclination of the member"), expression, angle},
+      {Spot::fibreSection, "points/*/fibre/section", PW_TEXT("Place", "section of the fibre"), name},
+      {Spot::fibreY, "points/*/fibre/y", symbol("y"), expression, length},
+      {Spot::fibreZ, "points/*/fibre/z", symbol("z"), expression, length},
+      {Spot::fibreView, "points/*/fibre/view", PW_TEXT("Place", "face that is looked at"), word},
+      {Spot::freeEdge, "points/*/free_edge", PW_TEXT("Place", "direction of a free edge"), expression, angle,
+       Slopes::line, true},
       {Spot::sx, "points/*/stress/*/sx", symbol("σ_{x}"), expression, stress},
       {Spot::sy, "points/*/stress/*/sy", symbol("σ_{y}"), expression, stress},
       {Spot::txy, "points/*/stress/*/txy", symbol("τ_{xy}"), expression, stress},
       {Spot::sz, "points/*/stress/*/sz", symbol("σ_{z}"), expression, stress},
-      {Spot::lineName, "points/*/line/name", PW_TEXT("Place", "name of the line"), name},
-      {Spot::lineKind, "points/*/line/kind", PW_TEXT("Place", "kind of line"), word},
-      {Spot::lineAngle, "points/*/line/angle", PW_TEXT("Place", "angle of the line"), expression, angle,
+      {Spot::forceN, "points/*/stress/*/forces/N", symbol("N"), expression, force},
+      {Spot::forceVy, "points/*/stress/*/forces/V_y", symbol("V_{y}"), expression, force},
+      {Spot::forceVz, "points/*/stress/*/forces/V_z", symbol("V_{z}"), expression, force},
+      {Spot::forceT, "points/*/stress/*/forces/T", symbol("T"), expression, moment},
+      {Spot::forceMy, "points/*/stress/*/forces/M_y", symbol("M_{y}"), expression, moment},
+      {Spot::forceMz, "points/*/stress/*/forces/M_z", symbol("M_{z}"), expression, moment},
+      {Spot::pressureP, "points/*/stress/*/pressure/p", symbol("p"), expression, stress},
+      {Spot::pressureR, "points/*/stress/*/pressure/r", symbol("r"), expression, length},
+      {Spot::pressureT, "points/*/stress/*/pressure/t", symbol("t"), expression, length},
+      {Spot::pressureEnds, "points/*/stress/*/pressure/ends", PW_TEXT("Place", "ends of the vessel"), word},
+      {Spot::gaugeAngleA, "points/*/stress/*/rosette/angle_a", symbol("α_{a}"), expression, angle},
+      {Spot::gaugeAngleB, "points/*/stress/*/rosette/angle_b", symbol("α_{b}"), expression, angle},
+      {Spot::gaugeAngleC, "points/*/stress/*/rosette/angle_c", symbol("α_{c}"), expression, angle},
+      strain(Spot::gaugeStrainA, "points/*/stress/*/rosette/strain_a", symbol("ε_{a}")),
+      strain(Spot::gaugeStrainB, "points/*/stress/*/rosette/strain_b", symbol("ε_{b}")),
+      strain(Spot::gaugeStrainC, "points/*/stress/*/rosette/strain_c", symbol("ε_{c}")),
+      {Spot::rosetteMaterial, "points/*/stress/*/rosette/material",
+       PW_TEXT("Place", "material under the gauges"), word},
+      {Spot::rosetteE, "points/*/stress/*/rosette/E", symbol("E"), expression, stress},
+      {Spot::rosetteNu, "points/*/stress/*/rosette/nu", symbol("ν"), expression},
+      {Spot::rosetteAlong, "points/*/stress/*/rosette/E_along", symbol("E_{φ}"), expression, stress},
+      {Spot::rosetteAcross, "points/*/stress/*/rosette/E_across", symbol("E_{φ+90°}"), expression, stress},
+      {Spot::rosetteNu12, "points/*/stress/*/rosette/nu12", symbol("ν_{12}"), expression},
+      {Spot::rosetteG, "points/*/stress/*/rosette/G", symbol("G"), expression, stress},
+      {Spot::lineKind, "points/*/lines/*/kind", PW_TEXT("Place", "kind of line"), word},
+      {Spot::lineAngle, "points/*/lines/*/angle", PW_TEXT("Place", "angle of the line"), expression, angle,
        Slopes::line},
-      {Spot::lineTolerance, "points/*/line/tolerance", PW_TEXT("Place", "tolerance of the line's angle"),
+      {Spot::lineTolerance, "points/*/lines/*/tolerance", PW_TEXT("Place", "tolerance of the line's angle"),
        expression, angle, Slopes::tolerance, true},
       {Spot::planeNormal, "points/*/planes/*/normal", PW_TEXT("Place", "normal of the plane"), expression,
        angle},
@@ -166,11 +212,20 @@ UnitWord unitWord(const Units& units, Dimension wanted) {
   return {units.moment, "N*mm"};
 }
 
+/// Area, first and second moment of area: the unit of length to a power.
+Unit powerOfLength(const Study& study, Dimension wanted) {
+  const char digit = static_cast<char>('0' + wanted.length);
+  const string power = {'^', digit};
+  return readUnit(study.units.length + power, wanted).value_or(Unit{"mm" + power, wanted, 1, 1});
+}
+
 Unit unitOf(const Study& study, Dimension wanted) {
   if (wanted == dimension::none)
     return {};
   if (wanted == dimension::angle)
     return degreeUnit();
+  if (wanted.force == 0 && wanted.length > 1)
+    return powerOfLength(study, wanted);
   const auto [word, base] = unitWord(study.units, wanted);
   // A study whose unit does not read is refused for that; until then its texts are read in the base unit.
   return readUnit(word, wanted).value_or(Unit{base, wanted, 1, 1});
@@ -178,9 +233,25 @@ Unit unitOf(const Study& study, Dimension wanted) {
 
 } // namespace
 
+std::string_view SpotRow::key() const {
+  const string_view whole = path;
+  return whole.substr(whole.rfind('/') + 1);
+}
+
 EntryKind entryKindOf(const Study& study, Spot spot) {
   const SpotRow& row = rowOf(spot);
+  if (row.ownUnit)
+    return {row.dimension, *findUnit(row.ownUnit), row.slopes};
   return {row.dimension, unitOf(study, row.dimension), row.slopes};
+}
+
+EntryKind entryKindOf(const Study& study, const Place& place) {
+  const TypedSection* section = place.spot == Spot::size ? findSection(study, place.owner) : nullptr;
+  if (!section)
+    return entryKindOf(study, place.spot);
+  const SizeKind* kind = sizeOfKey(section->shape, place.item);
+  const Dimension wanted = kind ? kind->dimension : dimension::length;
+  return {wanted, unitOf(study, wanted)};
 }
 
 } // namespace planewright

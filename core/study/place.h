@@ -7,15 +7,21 @@
 namespace planewright {
 
 /// Every kind of spot in a study. The first group holds things that are inserted, removed, moved and renamed;
-/// the second holds single texts that are typed (a factor is both).
+/// the second holds single texts that are typed (a factor and a size are both).
 enum class Spot {
   loadCase,
   combination,
+  section,
   point,
+  fibre,
   caseStress,
+  forces,
+  pressure,
+  rosette,
   line,
   plane,
   factor,
+  size,
   // typed texts
   titleProject,
   titleSubject,
@@ -31,18 +37,47 @@ enum class Spot {
   unitMoment,
   positive,
   shearAxis,
+  shearForce,
   caseName,
   caseNature,
   caseDuration,
   caseExcludes, ///< ids joined by ", "
   combinationBasis,
+  sectionShape,
   pointNote,
   axes,
+  fibreSection,
+  fibreY,
+  fibreZ,
+  fibreView,
+  freeEdge,
   sx,
   sy,
   txy,
   sz,
-  lineName,
+  forceN,
+  forceVy,
+  forceVz,
+  forceT,
+  forceMy,
+  forceMz,
+  pressureP,
+  pressureR,
+  pressureT,
+  pressureEnds,
+  gaugeAngleA,
+  gaugeAngleB,
+  gaugeAngleC,
+  gaugeStrainA,
+  gaugeStrainB,
+  gaugeStrainC,
+  rosetteMaterial,
+  rosetteE,
+  rosetteNu,
+  rosetteAlong,
+  rosetteAcross,
+  rosetteNu12,
+  rosetteG,
   lineKind,
   lineAngle,
   lineTolerance,
@@ -53,8 +88,8 @@ enum class Spot {
   shownCombination
 };
 
-/// One spot in a study: `owner` is the case id, combination or point it belongs to, `item` the case id or
-/// plane inside that; both empty where the spot needs none.
+/// One spot in a study: `owner` is the case id, combination, section or point it belongs to, `item` the case
+/// id, size, line or plane inside that; both empty where the spot needs none.
 struct Place {
   Spot spot = Spot::titleProject;
   std::string owner;
@@ -71,9 +106,12 @@ struct SpotRow {
   const char* path; ///< with * for owner and item: "points/*/stress/*/sx"
   Text label;       ///< "σ_{x}", "angle of the line"
   Holds holds = Holds::thing;
-  Dimension dimension = dimension::none; ///< of an expression or a unit
+  Dimension dimension = dimension::none; ///< of an expression or a unit; that of a size goes by its key
   Slopes slopes = Slopes::none;
   bool mayBeEmpty = false;
+  const char* ownUnit = nullptr; ///< of bare numbers, where it is not the study's unit of the dimension
+  /// The last part of the path: the key of a text in files.
+  std::string_view key() const;
 };
 const SpotRow& rowOf(Spot spot);
 
@@ -85,6 +123,8 @@ std::optional<Place> placeOf(std::string_view path);
 /// The typed text at a place, none when the place does not exist in this study.
 std::optional<std::string> textAt(const Study& study, const Place& place);
 /// What an expression at this place reads: dimension and the study's unit for it.
+EntryKind entryKindOf(const Study& study, const Place& place);
+/// The same where the spot alone tells, which it does of all but sizes.
 EntryKind entryKindOf(const Study& study, Spot spot);
 
 } // namespace planewright

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/place_list.h"
 
+#include "core/study/text_fields.h"
+
 #include <iterator>
 
 namespace planewright {
@@ -15,6 +17,20 @@ void add(Places& places, std::initializer_list<Spot> spots, const std::string& o
     places.push_back({spot, owner, item});
 }
 
+/// The typed texts of a thing that may be absent.
+template <class Thing>
+void addTexts(Places& places, const Thing* thing, const std::string& owner = {},
+              const std::string& item = {}) {
+  if (thing)
+    for (const TextField<Thing>& field : textFieldsOf<Thing>())
+      places.push_back({field.spot, owner, item});
+}
+
+template <class Thing>
+const Thing* inside(const std::optional<Thing>& thing) {
+  return thing ? &*thing : nullptr;
+}
+
 void append(Places& places, Places more) {
   places.insert(places.end(), std::move_iterator(more.begin()), std::move_iterator(more.end()));
 }
@@ -23,16 +39,17 @@ void append(Places& places, Places more) {
 
 std::vector<Place> typedPlacesInHead() {
   Places places;
-  add(places, {Spot::titleProject, Spot::titleSubject, Spot::titleNumber, Spot::titleRevision,
-               Spot::titlePrepared, Spot::titleChecked, Spot::titleDate, Spot::titleNotes});
-  add(places, {Spot::unitStress, Spot::unitForce, Spot::unitLength, Spot::unitMoment});
-  add(places, {Spot::positive, Spot::shearAxis});
+  const Study none;
+  addTexts(places, &none.title);
+  addTexts(places, &none.units);
+  add(places, {Spot::positive, Spot::shearAxis, Spot::shearForce});
   return places;
 }
 
 std::vector<Place> typedPlacesInFoot() {
   Places places;
-  add(places, {Spot::shownPoint, Spot::shownCombination});
+  const Shown none;
+  addTexts(places, &none);
   return places;
 }
 
@@ -50,15 +67,37 @@ std::vector<Place> typedPlacesIn(const Combination& combination) {
   return places;
 }
 
+std::vector<Place> typedPlacesIn(const TypedSection& section) {
+  Places places;
+  add(places, {Spot::sectionShape}, section.name);
+  for (const TypedSize& size : section.sizes)
+    add(places, {Spot::size}, section.name, size.key);
+  return places;
+}
+
 std::vector<Place> typedPlacesIn(const Point& point) {
   Places places;
   add(places, {Spot::pointNote, Spot::axes}, point.name);
-  for (const CaseStress& stress : point.stress)
-    add(places, {Spot::sx, Spot::sy, Spot::txy, Spot::sz}, point.name, stress.caseId);
-  if (point.line)
-    add(places, {Spot::lineName, Spot::lineKind, Spot::lineAngle, Spot::lineTolerance}, point.name);
+  addTexts(places, inside(point.fibre), point.name);
+  if (point.fibre)
+    add(places, {Spot::fibreView}, point.name);
+  add(places, {Spot::freeEdge}, point.name);
+  for (const CaseStress& stress : point.stress) {
+    addTexts(places, &stress, point.name, stress.caseId);
+    addTexts(places, inside(stress.forces), point.name, stress.caseId);
+    addTexts(places, inside(stress.pressure), point.name, stress.caseId);
+    if (stress.pressure)
+      add(places, {Spot::pressureEnds}, point.name, stress.caseId);
+    addTexts(places, inside(stress.rosette), point.name, stress.caseId);
+    if (stress.rosette)
+      add(places, {Spot::rosetteMaterial}, point.name, stress.caseId);
+  }
+  for (const Line& line : point.lines) {
+    add(places, {Spot::lineKind}, point.name, line.name);
+    addTexts(places, &line, point.name, line.name);
+  }
   for (const WatchedPlane& plane : point.planes)
-    add(places, {Spot::planeNormal, Spot::planeTolerance}, point.name, plane.name);
+    addTexts(places, &plane, point.name, plane.name);
   add(places, {Spot::reading}, point.name);
   return places;
 }
@@ -69,6 +108,8 @@ std::vector<Place> typedPlacesIn(const Study& study) {
     append(places, typedPlacesIn(loadCase));
   for (const Combination& combination : study.combinations)
     append(places, typedPlacesIn(combination));
+  for (const TypedSection& section : study.sections)
+    append(places, typedPlacesIn(section));
   for (const Point& point : study.points)
     append(places, typedPlacesIn(point));
   append(places, typedPlacesInFoot());

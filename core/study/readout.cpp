@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/readout.h"
 
-#include "core/study/place.h"
+#include "core/study/case_sources.h"
 
 #include <algorithm>
 #include <cassert>
@@ -26,49 +26,69 @@ Angle angleOf(const Study& study, Spot spot, const std::string& text) {
   return Angle::fromDegrees(valueOf(study, spot, text));
 }
 
-/// The components of one case at a point, evaluated.
-struct CaseValues {
-  std::string id;
-  PlaneStress stress;
-  double sz = 0;
-  bool listed = false;
-};
+constexpr double roundingShare = 8 * std::numeric_limits<double>::epsilon();
 
-std::vector<CaseValues> caseValues(const Study& study, const Point& point) {
-  std::vector<CaseValues> values;
-  for (const LoadCase& loadCase : study.cases) {
-    CaseValues one{loadCase.id, {}, 0, false};
-    if (const CaseStress* stress = findStress(point, loadCase.id)) {
-      one.stress = {valueOf(study, Spot::sx, stress->sx), valueOf(study, Spot::sy, stress->sy),
-                    valueOf(study, Spot::txy, stress->txy)};
-      one.sz = valueOf(study, Spot::sz, stress->sz);
-      one.listed = true;
-    }
-    values.push_back(one);
-  }
-  return values;
+/// Of parts that cancel only rounding is left: it is not shown as a stress.
+void dropRounding(PlaneStress& stress, double scale) {
+  for (double* component : {&stress.sx, &stress.sy, &stress.txy})
+    if (std::abs(*component) <= roundingShare * scale)
+      *component = 0;
 }
 
-void addTerm(StateReading& state, double factor, const CaseValues& values) {
+/// Sources speak with tension positive.
+void addSources(CaseReading& reading, SourceStress made, Positive positive) {
+  const double sense = positive == Positive::tension ? 1 : -1;
+  reading.stress = reading.stress + sense * made.stress;
+  reading.axial = sense * made.axial;
+  reading.bending = sense * made.bending;
+  reading.scale += made.scale;
+  reading.isDirect = false;
+  reading.cautions = std::move(made.cautions);
+  dropRounding(reading.stress, reading.scale);
+}
+
+std::vector<CaseReading> caseReadings(const Study& study, const Point& point) {
+  const Results<PointSources> sources = PointSources::of(study, point);
+  assert(sources && "a valid study has only sources that can be worked out");
+  std::vector<CaseReading> readings;
+  for (const LoadCase& loadCase : study.cases) {
+    CaseReading& one = readings.emplace_back();
+    one.id = loadCase.id;
+    const CaseStress* stress = findStress(point, loadCase.id);
+    if (!stress)
+      continue;
+    one.isListed = true;
+    one.stress = {valueOf(study, Spot::sx, stress->sx), valueOf(study, Spot::sy, stress->sy),
+                  valueOf(study, Spot::txy, stress->txy)};
+    one.sz = valueOf(study, Spot::sz, stress->sz);
+    one.scale = scaleOf(one.stress);
+    if (stress->isDirect())
+      continue;
+    Results<SourceStress> made = sources->stressOf(*stress);
+    assert(made);
+    addSources(one, *std::move(made), study.convention.positive);
+  }
+  return readings;
+}
+
+void addTerm(StateReading& state, double factor, const std::vector<CaseReading>& cases, std::size_t index) {
   if (factor == 0)
     return;
-  state.stress = state.stress + factor * values.stress;
-  state.sz += factor * values.sz;
-  state.scale += std::abs(factor) * scaleOf(values.stress);
-  if (!values.listed)
-    state.missing.push_back(values.id);
+  const CaseReading& one = cases[index];
+  state.stress = state.stress + factor * one.stress;
+  state.sz += factor * one.sz;
+  state.axial += factor * one.axial;
+  state.bending += factor * one.bending;
+  state.scale += std::abs(factor) * one.scale;
+  state.acting.push_back(index);
 }
 
 /// Of several terms that cancel only rounding is left: it is not shown as a stress, nor as a direction.
 /// `scaleOfThird` is to σz what the state's scale is to the components in the plane.
 void dropRounding(StateReading& state, double scaleOfThird) {
-  constexpr double relative = 8 * std::numeric_limits<double>::epsilon();
-  if (std::abs(state.sz) <= relative * scaleOfThird)
+  if (std::abs(state.sz) <= roundingShare * scaleOfThird)
     state.sz = 0;
-  const double noise = relative * state.scale;
-  for (double* component : {&state.stress.sx, &state.stress.sy, &state.stress.txy})
-    if (std::abs(*component) <= noise)
-      *component = 0;
+  dropRounding(state.stress, state.scale);
   if (circleOf(state.stress, state.scale).theta1)
     return;
   const double mean = state.stress.sx / 2 + state.stress.sy / 2;
@@ -82,30 +102,32 @@ void resolve(StateReading& state, const Readout& readout) {
     state.lines.push_back(inAxesOf(state.stress, line.angle));
   for (const WatchedReading& plane : readout.watched)
     state.watched.push_back(tractionOn(state.stress, plane.normal));
+  if (readout.edge)
+    state.edge = freeEdgeOf(state.stress, *readout.edge);
 }
 
 StateReading combinedState(const Study& study, const Combination& combination,
-                           const std::vector<CaseValues>& cases) {
+                           const std::vector<CaseReading>& cases) {
   StateReading state;
   state.combination = combination.name;
   double scaleOfThird = 0;
   for (const Factor& factor : combination.factors) {
-    const auto values = std::ranges::find(cases, factor.caseId, &CaseValues::id);
-    assert(values != cases.end());
+    const auto one = std::ranges::find(cases, factor.caseId, &CaseReading::id);
+    assert(one != cases.end());
     const double value = valueOf(study, Spot::factor, factor.factor);
-    addTerm(state, value, *values);
-    scaleOfThird += std::abs(value * values->sz);
+    addTerm(state, value, cases, static_cast<std::size_t>(one - cases.begin()));
+    scaleOfThird += std::abs(value * one->sz);
   }
   if (combination.factors.size() > 1)
     dropRounding(state, scaleOfThird);
   return state;
 }
 
-StateReading singleState(const CaseValues& values, bool judged) {
+StateReading singleState(const std::vector<CaseReading>& cases, std::size_t index, bool judged) {
   StateReading state;
-  state.combination = values.id;
+  state.combination = cases[index].id;
   state.judged = judged;
-  addTerm(state, 1, values);
+  addTerm(state, 1, cases, index);
   return state;
 }
 
@@ -127,8 +149,10 @@ WatchedReading readingOf(const Study& study, const WatchedPlane& plane) {
 void readDirections(Readout& readout, const Study& study, const Point& point, const Extras& extras) {
   readout.reading = {folded(angleOf(study, Spot::reading, point.reading))};
   readout.axes = angleOf(study, Spot::axes, point.axes);
-  if (point.line)
-    readout.lines.push_back(readingOf(study, *point.line));
+  if (!point.freeEdge.empty())
+    readout.edge = LineAngle{folded(angleOf(study, Spot::freeEdge, point.freeEdge))};
+  for (const Line& line : point.lines)
+    readout.lines.push_back(readingOf(study, line));
   for (const Line& line : extras.lines)
     readout.lines.push_back(readingOf(study, line));
   for (const WatchedPlane& plane : point.planes)
@@ -138,6 +162,19 @@ void readDirections(Readout& readout, const Study& study, const Point& point, co
 }
 
 } // namespace
+
+AlongParts alongPartsOf(const StateReading& state, LineAngle line) {
+  const double cos = cosSin(line.value).cos;
+  return {state.axial * cos * cos, state.bending * cos * cos};
+}
+
+std::vector<std::string> missingCases(const Readout& readout, const StateReading& state) {
+  std::vector<std::string> ids;
+  for (const std::size_t index : state.acting)
+    if (!readout.cases[index].isListed)
+      ids.push_back(readout.cases[index].id);
+  return ids;
+}
 
 std::optional<LineAngle> PlaneReading::cut() const {
   if (!normal)
@@ -151,11 +188,11 @@ Readout evaluate(const Study& study, std::string_view name, const Extras& extras
   Readout readout;
   readout.point = point->name;
   readDirections(readout, study, *point, extras);
-  const std::vector<CaseValues> cases = caseValues(study, *point);
+  readout.cases = caseReadings(study, *point);
   for (const Combination& combination : study.combinations)
-    readout.states.push_back(combinedState(study, combination, cases));
-  for (const CaseValues& values : cases)
-    readout.states.push_back(singleState(values, study.combinations.empty()));
+    readout.states.push_back(combinedState(study, combination, readout.cases));
+  for (std::size_t i = 0; i < readout.cases.size(); ++i)
+    readout.states.push_back(singleState(readout.cases, i, study.combinations.empty()));
   for (StateReading& state : readout.states)
     resolve(state, readout);
   const auto shown = std::ranges::find(readout.states, study.shown.combination, &StateReading::combination);
@@ -183,7 +220,8 @@ std::optional<std::string> draggableCase(const Study& study, const Readout& read
     }
   }
   const Point* point = findPoint(study, readout.point);
-  return point && findStress(*point, only) ? std::optional(only) : std::nullopt;
+  const CaseStress* stress = point ? findStress(*point, only) : nullptr;
+  return stress && stress->isDirect() ? std::optional(only) : std::nullopt;
 }
 
 } // namespace planewright

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/source/free_edge.h"
 #include "core/stress/circle.h"
 #include "core/study/study.h"
 
@@ -38,6 +39,20 @@ struct WatchedReading {
   bool operator==(const WatchedReading&) const = default;
 };
 
+/// One case at a point, evaluated; stresses in N/mm2, in the study's sign convention.
+struct CaseReading {
+  std::string id;
+  PlaneStress stress;
+  double sz = 0;
+  double axial = 0;           ///< part of sx from normal forces; a typed sx is in neither part
+  double bending = 0;         ///< part of sx from bending moments
+  double scale = 0;           ///< sum of the greatest |component| of each part, before parts cancel
+  bool isListed = false;      ///< false: the point does not list the case, which counts as zero
+  bool isDirect = true;       ///< all of it is typed as stresses
+  std::vector<Text> cautions; ///< where the theory of its sources ends
+  bool operator==(const CaseReading&) const = default;
+};
+
 /// What follows from one combination (or from a single case) at a point. Stresses in N/mm2, in the study's
 /// sign convention.
 struct StateReading {
@@ -45,12 +60,15 @@ struct StateReading {
   bool judged = true;
   PlaneStress stress;
   double sz = 0;
-  double scale = 0; ///< sum |factor_i| max |component_i|, before cancellation
+  double axial = 0;   ///< part of sx from normal forces
+  double bending = 0; ///< part of sx from bending moments
+  double scale = 0;   ///< sum |factor_i| max |component_i|, before cancellation
   Circle circle;
   std::vector<LineStress> lines; ///< one for each line of the Readout
   std::vector<Traction> watched; ///< one for each watched plane of the Readout
   Traction reading;
-  std::vector<std::string> missing; ///< cases with a non-zero factor that the point does not list
+  std::optional<FreeEdge> edge;    ///< where the point has a free edge
+  std::vector<std::size_t> acting; ///< the cases of the Readout with a non-zero factor
   bool operator==(const StateReading&) const = default;
 };
 
@@ -61,6 +79,8 @@ struct Readout {
   Angle axes;
   std::vector<LineReading> lines;
   std::vector<WatchedReading> watched;
+  std::optional<LineAngle> edge;    ///< direction of a free edge, folded
+  std::vector<CaseReading> cases;   ///< all cases of the study
   std::vector<StateReading> states; ///< combinations in their order, then the single cases
   std::size_t shown = 0;            ///< the state that is shown
   const StateReading& state() const { return states[shown]; }
@@ -82,6 +102,17 @@ Readout evaluate(const Study& study, std::string_view point, const Extras& extra
 /// All planes of a state in the fixed order of the table: reading; x, y; s1, s2; greatest shear + and -;
 /// crossing and following for each line; watched.
 std::vector<PlaneReading> planesOf(const Readout& readout, const StateReading& state);
+/// The parts of the stress along a line that normal forces and bending moments make: those of sx times cos^2
+/// of the line's angle.
+struct AlongParts {
+  double axial = 0;
+  double bending = 0;
+};
+AlongParts alongPartsOf(const StateReading& state, LineAngle line);
+
+/// The ids of the cases that act in a state though the point does not list them.
+std::vector<std::string> missingCases(const Readout& readout, const StateReading& state);
+
 /// Any other plane, for a sweep.
 PlaneReading planeAt(const StateReading& state, NormalAngle normal);
 

@@ -29,6 +29,12 @@ void renameCase(Study& study, const std::string& from, const std::string& to) {
         stress.caseId = to;
 }
 
+void renameSection(Study& study, const std::string& from, const std::string& to) {
+  for (Point& point : study.points)
+    if (point.fibre && point.fibre->section == from)
+      point.fibre->section = to;
+}
+
 /// What is shown may be a combination or, under its id, a single case.
 void follow(std::string& shown, const std::string& from, const std::string& to) {
   if (shown == from)
@@ -47,6 +53,8 @@ void dropReferences(Study& study, const Place& place) {
 }
 
 void renameReferences(Study& study, const Place& place, const std::string& name) {
+  if (place.spot == Spot::section)
+    renameSection(study, place.owner, name);
   if (place.spot == Spot::loadCase)
     renameCase(study, place.owner, name);
   if (place.spot == Spot::loadCase || place.spot == Spot::combination)

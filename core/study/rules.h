@@ -12,8 +12,9 @@ Problems excessIn(const Study& study);
 
 /// The rules between the places of a study: at least one case and one point, at most so many of each; keys
 /// that can be names, each once in its list; no combination goes by the id of a case, so that a state has a
-/// name of its own; every name that is referred to exists, and none is excluded twice. No more than the first
-/// 100.
+/// name of its own; every name that is referred to exists, and none is excluded twice; no combination has two
+/// cases that exclude each other, or a measured one with another factor than 1; section forces have a fibre,
+/// and rosettes stand in measured cases. No more than the first 100.
 Problems brokenRules(const Study& study);
 
 } // namespace planewright

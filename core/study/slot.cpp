@@ -1,67 +1,59 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/slot.h"
 
+#include "core/study/text_fields.h"
+
 namespace planewright {
 
 namespace {
 
-Slot slotInTitle(Study& study, Spot spot) {
-  Title& title = study.title;
-  switch (spot) {
-  case Spot::titleProject:
-    return {.text = &title.project};
-  case Spot::titleSubject:
-    return {.text = &title.subject};
-  case Spot::titleNumber:
-    return {.text = &title.number};
-  case Spot::titleRevision:
-    return {.text = &title.revision};
-  case Spot::titlePrepared:
-    return {.text = &title.prepared};
-  case Spot::titleChecked:
-    return {.text = &title.checked};
-  case Spot::titleDate:
-    return {.text = &title.date};
-  case Spot::titleNotes:
-    return {.text = &title.notes};
-  default:
-    return {};
-  }
+/// The text of this spot in a thing that may be absent.
+template <class Thing>
+Slot textIn(Thing* thing, Spot spot) {
+  if (thing)
+    for (const TextField<Thing>& field : textFieldsOf<Thing>())
+      if (field.spot == spot)
+        return &(thing->*field.text);
+  return {};
+}
+
+template <class Thing>
+Thing* inside(std::optional<Thing>& thing) {
+  return thing ? &*thing : nullptr;
+}
+
+bool isSet(const Slot& slot) {
+  return !std::holds_alternative<std::monostate>(slot);
 }
 
 Slot slotOfStudy(Study& study, Spot spot) {
   switch (spot) {
-  case Spot::unitStress:
-    return {.text = &study.units.stress};
-  case Spot::unitForce:
-    return {.text = &study.units.force};
-  case Spot::unitLength:
-    return {.text = &study.units.length};
-  case Spot::unitMoment:
-    return {.text = &study.units.moment};
   case Spot::positive:
-    return {.positive = &study.convention.positive};
+    return &study.convention.positive;
   case Spot::shearAxis:
-    return {.shearAxis = &study.convention.shearAxis};
-  case Spot::shownPoint:
-    return {.text = &study.shown.point};
-  case Spot::shownCombination:
-    return {.text = &study.shown.combination};
+    return &study.convention.shearAxis;
+  case Spot::shearForce:
+    return &study.convention.shearForce;
   default:
-    return slotInTitle(study, spot);
+    break;
   }
+  if (const Slot slot = textIn(&study.title, spot); isSet(slot))
+    return slot;
+  if (const Slot slot = textIn(&study.units, spot); isSet(slot))
+    return slot;
+  return textIn(&study.shown, spot);
 }
 
 Slot slotInCase(LoadCase& loadCase, Spot spot) {
   switch (spot) {
   case Spot::caseName:
-    return {.text = &loadCase.name};
+    return &loadCase.name;
   case Spot::caseNature:
-    return {.nature = &loadCase.nature};
+    return &loadCase.nature;
   case Spot::caseDuration:
-    return {.duration = &loadCase.duration};
+    return &loadCase.duration;
   case Spot::caseExcludes:
-    return {.ids = &loadCase.excludes};
+    return &loadCase.excludes;
   default:
     return {};
   }
@@ -69,88 +61,76 @@ Slot slotInCase(LoadCase& loadCase, Spot spot) {
 
 Slot slotInCombination(Combination& combination, const Place& place) {
   if (place.spot == Spot::combinationBasis)
-    return {.basis = &combination.basis};
+    return &combination.basis;
   if (place.spot == Spot::factor)
     if (Factor* factor = itemIn(combination.factors, &Factor::caseId, place.item))
-      return {.text = &factor->factor};
+      return &factor->factor;
+  return {};
+}
+
+Slot slotInSection(TypedSection& section, const Place& place) {
+  if (place.spot == Spot::sectionShape)
+    return &section.shape;
+  if (place.spot == Spot::size)
+    if (TypedSize* size = itemIn(section.sizes, &TypedSize::key, place.item))
+      return &size->text;
   return {};
 }
 
 Slot slotInStress(CaseStress& stress, Spot spot) {
-  switch (spot) {
-  case Spot::sx:
-    return {.text = &stress.sx};
-  case Spot::sy:
-    return {.text = &stress.sy};
-  case Spot::txy:
-    return {.text = &stress.txy};
-  default:
-    return {.text = &stress.sz};
-  }
+  PressureTexts* pressure = inside(stress.pressure);
+  RosetteTexts* rosette = inside(stress.rosette);
+  if (spot == Spot::pressureEnds && pressure)
+    return &pressure->ends;
+  if (spot == Spot::rosetteMaterial && rosette)
+    return &rosette->material;
+  if (const Slot slot = textIn(&stress, spot); isSet(slot))
+    return slot;
+  if (const Slot slot = textIn(inside(stress.forces), spot); isSet(slot))
+    return slot;
+  if (const Slot slot = textIn(pressure, spot); isSet(slot))
+    return slot;
+  return textIn(rosette, spot);
 }
 
 Slot slotInLine(Line& line, Spot spot) {
-  switch (spot) {
-  case Spot::lineName:
-    return {.text = &line.name};
-  case Spot::lineKind:
-    return {.lineKind = &line.kind};
-  case Spot::lineAngle:
-    return {.text = &line.angle};
-  default:
-    return {.text = &line.tolerance};
-  }
-}
-
-Slot slotInPlanes(Point& point, const Place& place) {
-  WatchedPlane* plane = itemIn(point.planes, &WatchedPlane::name, place.item);
-  if (!plane)
-    return {};
-  return {.text = place.spot == Spot::planeNormal ? &plane->normal : &plane->tolerance};
+  return spot == Spot::lineKind ? Slot(&line.kind) : textIn(&line, spot);
 }
 
 Slot slotInPoint(Point& point, const Place& place) {
   switch (place.spot) {
   case Spot::pointNote:
-    return {.text = &point.note};
+    return &point.note;
   case Spot::axes:
-    return {.text = &point.axes};
+    return &point.axes;
+  case Spot::freeEdge:
+    return &point.freeEdge;
   case Spot::reading:
-    return {.text = &point.reading};
-  case Spot::planeNormal:
-  case Spot::planeTolerance:
-    return slotInPlanes(point, place);
-  case Spot::lineName:
-  case Spot::lineKind:
-  case Spot::lineAngle:
-  case Spot::lineTolerance:
-    return point.line ? slotInLine(*point.line, place.spot) : Slot{};
-  case Spot::sx:
-  case Spot::sy:
-  case Spot::txy:
-  case Spot::sz:
-    break;
+    return &point.reading;
+  case Spot::fibreView:
+    return point.fibre ? Slot(&point.fibre->view) : Slot();
   default:
-    return {};
+    break;
   }
+  if (const Slot slot = textIn(inside(point.fibre), place.spot); isSet(slot))
+    return slot;
+  const std::string_view path = rowOf(place.spot).path;
+  if (path.starts_with("points/*/lines/")) {
+    Line* line = itemIn(point.lines, &Line::name, place.item);
+    return line ? slotInLine(*line, place.spot) : Slot();
+  }
+  if (path.starts_with("points/*/planes/"))
+    return textIn(itemIn(point.planes, &WatchedPlane::name, place.item), place.spot);
   CaseStress* stress = itemIn(point.stress, &CaseStress::caseId, place.item);
-  return stress ? slotInStress(*stress, place.spot) : Slot{};
+  return stress ? slotInStress(*stress, place.spot) : Slot();
 }
 
 template <class Enum>
-bool put(Enum* target, std::string_view word) {
+bool putWord(Enum& target, std::string_view word) {
   const std::optional<Enum> value = fromWord<Enum>(word);
   if (value)
-    *target = *value;
+    target = *value;
   return value.has_value();
-}
-
-template <class Enum>
-std::string joinedWords() {
-  std::string words;
-  for (const Named<Enum>& row : namesOf<Enum>())
-    words += (words.empty() ? "" : ", ") + std::string(row.word);
-  return words;
 }
 
 std::vector<std::string> idsIn(std::string_view text) {
@@ -168,23 +148,63 @@ std::vector<std::string> idsIn(std::string_view text) {
   return ids;
 }
 
-/// Calls `visit` with the enum pointer that is set.
-template <class Visit>
-auto withWord(const Slot& slot, Visit visit) -> decltype(visit(slot.positive)) {
-  if (slot.positive)
-    return visit(slot.positive);
-  if (slot.shearAxis)
-    return visit(slot.shearAxis);
-  if (slot.lineKind)
-    return visit(slot.lineKind);
-  if (slot.nature)
-    return visit(slot.nature);
-  if (slot.duration)
-    return visit(slot.duration);
-  if (slot.basis)
-    return visit(slot.basis);
-  return {};
+std::string joined(const std::vector<std::string>& ids) {
+  std::string words;
+  for (const std::string& id : ids)
+    words += (words.empty() ? "" : ", ") + id;
+  return words;
 }
+
+struct Write {
+  std::optional<std::string> operator()(std::monostate) const { return std::nullopt; }
+  std::optional<std::string> operator()(const std::string* text) const { return *text; }
+  std::optional<std::string> operator()(const std::vector<std::string>* ids) const { return joined(*ids); }
+  template <class Enum>
+  std::optional<std::string> operator()(const Enum* value) const {
+    return std::string(wordOf(*value));
+  }
+};
+
+struct Put {
+  std::string_view text;
+  bool operator()(std::monostate) const { return false; }
+  bool operator()(std::string* target) const {
+    *target = text;
+    return true;
+  }
+  bool operator()(std::vector<std::string>* ids) const {
+    *ids = idsIn(text);
+    return true;
+  }
+  template <class Enum>
+  bool operator()(Enum* target) const {
+    return putWord(*target, text);
+  }
+};
+
+struct Fit {
+  std::string_view text;
+  bool operator()(std::monostate) const { return false; }
+  bool operator()(const std::string*) const { return true; }
+  bool operator()(const std::vector<std::string>*) const { return true; }
+  template <class Enum>
+  bool operator()(const Enum*) const {
+    return fromWord<Enum>(text).has_value();
+  }
+};
+
+struct Words {
+  std::string operator()(std::monostate) const { return {}; }
+  std::string operator()(const std::string*) const { return {}; }
+  std::string operator()(const std::vector<std::string>*) const { return {}; }
+  template <class Enum>
+  std::string operator()(const Enum*) const {
+    std::vector<std::string> words;
+    for (const Named<Enum>& row : namesOf<Enum>())
+      words.emplace_back(row.word);
+    return joined(words);
+  }
+};
 
 } // namespace
 
@@ -202,32 +222,27 @@ Slot slotOf(Study& study, const Place& place) {
     Combination* combination = itemIn(study.combinations, &Combination::name, place.owner);
     return combination ? slotInCombination(*combination, place) : Slot{};
   }
+  if (path.starts_with("sections/")) {
+    TypedSection* section = itemIn(study.sections, &TypedSection::name, place.owner);
+    return section ? slotInSection(*section, place) : Slot{};
+  }
   return slotOfStudy(study, place.spot);
 }
 
 std::optional<std::string> written(const Slot& slot) {
-  if (slot.text)
-    return *slot.text;
-  if (slot.ids) {
-    std::string joined;
-    for (const std::string& id : *slot.ids)
-      joined += (joined.empty() ? "" : ", ") + id;
-    return joined;
-  }
-  const std::string word = withWord(slot, [](auto* value) { return std::string(wordOf(*value)); });
-  return word.empty() ? std::nullopt : std::optional(word);
+  return std::visit(Write{}, slot);
 }
 
-bool putWord(const Slot& slot, std::string_view text) {
-  if (slot.ids) {
-    *slot.ids = idsIn(text);
-    return true;
-  }
-  return withWord(slot, [text](auto* value) { return put(value, text); });
+bool put(const Slot& slot, std::string_view text) {
+  return std::visit(Put{text}, slot);
+}
+
+bool fits(const Slot& slot, std::string_view text) {
+  return std::visit(Fit{text}, slot);
 }
 
 std::string wordsOf(const Slot& slot) {
-  return withWord(slot, [](auto* value) { return joinedWords<std::remove_pointer_t<decltype(value)>>(); });
+  return std::visit(Words{}, slot);
 }
 
 std::optional<std::string> textAt(const Study& study, const Place& place) {

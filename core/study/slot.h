@@ -3,28 +3,26 @@
 
 #include "core/study/place.h"
 
+#include <variant>
+
 namespace planewright {
 
-/// Where a place lives inside a study: the text itself, or the word of an enum, or a list of ids. For the
-/// edits and the reader of texts only; none of the members is set when the place does not exist.
-struct Slot {
-  std::string* text = nullptr;
-  Positive* positive = nullptr;
-  ShearAxis* shearAxis = nullptr;
-  LineKind* lineKind = nullptr;
-  Nature* nature = nullptr;
-  Duration* duration = nullptr;
-  Basis* basis = nullptr;
-  std::vector<std::string>* ids = nullptr;
-};
+/// Where a place lives inside a study: the text itself, or a list of ids, or the word of an enum. For the
+/// edits and the reader of texts only; monostate when the place does not exist or holds no text.
+using Slot =
+    std::variant<std::monostate, std::string*, std::vector<std::string>*, Positive*, ShearAxis*, ShearRule*,
+                 LineKind*, Nature*, Duration*, Basis*, SectionShape*, View*, Ends*, Elasticity*>;
 
 Slot slotOf(Study& study, const Place& place);
 
 /// The written form of what the slot holds; none for an empty slot.
 std::optional<std::string> written(const Slot& slot);
-/// Puts the word or ids of `text` into a slot that holds such; false when the word is none of its kind's.
-bool putWord(const Slot& slot, std::string_view text);
-/// The words that such a slot takes, joined by ", ".
+/// Puts a text into a slot as it is, or the word or ids that it names; false when the word is none of its
+/// kind's, or the slot is empty.
+bool put(const Slot& slot, std::string_view text);
+/// Whether `put` would take the text.
+bool fits(const Slot& slot, std::string_view text);
+/// The words that a slot of an enum takes, joined by ", ".
 std::string wordsOf(const Slot& slot);
 
 /// The item of a list with this key, or null.

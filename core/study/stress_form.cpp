@@ -17,12 +17,30 @@ std::string StressForm::shown(double stress) const {
   return shownNumber(inUnit(stress), decimals);
 }
 
+namespace {
+
 // A radius lost in cancellation shows no digits that mean nothing.
-StressForm stressFormOf(const Study& study, const StateReading& state) {
-  const Circle& circle = state.circle;
-  const double largest = std::max({std::abs(circle.s1), std::abs(circle.s2), std::abs(state.sz)});
+double largestIn(const StateReading& state) {
+  return std::max({std::abs(state.circle.s1), std::abs(state.circle.s2), std::abs(state.sz)});
+}
+
+StressForm formFor(const Study& study, double largest) {
   const Unit unit = stressUnitOf(study);
   return {unit, decimalsFor(unit.fromBase(largest))};
+}
+
+} // namespace
+
+StressForm stressFormOf(const Study& study, const StateReading& state) {
+  return formFor(study, largestIn(state));
+}
+
+StressForm stressFormOf(const Study& study, const Readout& readout) {
+  double largest = 0;
+  for (const StateReading& state : readout.states)
+    if (state.judged)
+      largest = std::max(largest, largestIn(state));
+  return formFor(study, largest);
 }
 
 std::string shownStress(const Study& study, const StateReading& state, double stress) {

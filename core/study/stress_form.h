@@ -25,6 +25,8 @@ struct StressForm {
   std::string withUnit(double stress) const { return shown(stress) + " " + unit.name; }
 };
 StressForm stressFormOf(const Study& study, const StateReading& state);
+/// The same for values of all judged states beside each other.
+StressForm stressFormOf(const Study& study, const Readout& readout);
 
 /// One stress of a state, written so.
 std::string shownStress(const Study& study, const StateReading& state, double stress);

@@ -21,8 +21,8 @@ Study newStudy() {
   study.cases = {{"G", "Permanent", Nature::permanent, Duration::permanent, {}}};
   Point point;
   point.name = "P1";
-  point.stress = {{"G", "0 MPa", "0 MPa", "0 MPa", "0 MPa"}};
-  point.line = Line{};
+  point.stress = {CaseStress{"G"}};
+  point.lines = {Line{}};
   study.points = {point};
   return study;
 }
@@ -33,6 +33,10 @@ const LoadCase* findCase(const Study& study, std::string_view id) {
 
 const Combination* findCombination(const Study& study, std::string_view name) {
   return found(study.combinations, &Combination::name, name);
+}
+
+const TypedSection* findSection(const Study& study, std::string_view name) {
+  return found(study.sections, &TypedSection::name, name);
 }
 
 const Point* findPoint(const Study& study, std::string_view name) {
@@ -47,6 +51,10 @@ const Point& shownPoint(const Study& study) {
 
 const CaseStress* findStress(const Point& point, std::string_view caseId) {
   return found(point.stress, &CaseStress::caseId, caseId);
+}
+
+const Line* findLine(const Point& point, std::string_view name) {
+  return found(point.lines, &Line::name, name);
 }
 
 const WatchedPlane* findPlane(const Point& point, std::string_view name) {

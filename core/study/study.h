@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/source/section_shape.h"
 #include "core/study/point.h"
 
 namespace planewright {
@@ -23,6 +24,7 @@ struct Units {
 struct Convention {
   Positive positive = Positive::tension;
   ShearAxis shearAxis = ShearAxis::tensorDown;
+  ShearRule shearForce = ShearRule::upward; ///< sense of V_y in section forces
   bool operator==(const Convention&) const = default;
 };
 
@@ -51,6 +53,22 @@ struct Combination {
   bool operator==(const Combination&) const = default;
 };
 
+/// One size of a section; `key` is that of the shape's SizeKind, with the number of the block in a built
+/// section ("2.turn").
+struct TypedSize {
+  std::string key;
+  std::string text;
+  bool operator==(const TypedSize&) const = default;
+};
+
+/// A cross section of the member; `name` is its key.
+struct TypedSection {
+  std::string name;
+  SectionShape shape = SectionShape::rectangle;
+  std::vector<TypedSize> sizes = {{"b", "100 mm"}, {"h", "200 mm"}};
+  bool operator==(const TypedSection&) const = default;
+};
+
 /// The point and combination that the window shows; empty: the first.
 struct Shown {
   std::string point;
@@ -67,6 +85,7 @@ struct Study {
   Convention convention;
   std::vector<LoadCase> cases;
   std::vector<Combination> combinations;
+  std::vector<TypedSection> sections;
   std::vector<Point> points;
   Shown shown;
   bool operator==(const Study&) const = default;
@@ -78,6 +97,7 @@ Study newStudy();
 
 const LoadCase* findCase(const Study& study, std::string_view id);
 const Combination* findCombination(const Study& study, std::string_view name);
+const TypedSection* findSection(const Study& study, std::string_view name);
 const Point* findPoint(const Study& study, std::string_view name);
 /// The shown point, or the first.
 const Point& shownPoint(const Study& study);

@@ -54,7 +54,8 @@ Result<std::string> keptExpression(const Study& study, const Place& place, std::
   const SpotRow& row = rowOf(place.spot);
   if (row.mayBeEmpty && trimmed(text).empty())
     return std::string();
-  Result<Entry> entry = readEntry(text, entryKindOf(study, place.spot));
+  const EntryKind kind = entryKindOf(study, place);
+  Result<Entry> entry = readEntry(text, kind);
   if (!entry) {
     Problem problem = std::move(entry).error();
     problem.place = pathOf(place);
@@ -64,7 +65,7 @@ Result<std::string> keptExpression(const Study& study, const Place& place, std::
   if (isTolerance && entry->value < 0)
     return tl::unexpected(problemAt(place, text, PW_TEXT("Study", "A tolerance cannot be negative."),
                                     PW_TEXT("Study", "Give the greatest deviation to either side.")));
-  const double greatest = row.dimension == dimension::angle ? greatestAngle : greatestValue;
+  const double greatest = kind.dimension == dimension::angle ? greatestAngle : greatestValue;
   if (std::abs(entry->value) > greatest)
     return tl::unexpected(problemAt(place, text, PW_TEXT("Study", "This is too large to be meant."),
                                     PW_TEXT("Study", "Check the exponent and the unit.")));
@@ -80,13 +81,8 @@ Result<std::string> keptUnit(const Place& place, std::string_view text) {
   return tl::unexpected(std::move(problem));
 }
 
-/// Words are tried on a scratch slot, so that nothing changes when one does not fit.
 Result<std::string> keptWord(const Place& place, const Slot& slot, std::string_view text) {
-  Study scratch = newStudy();
-  scratch.cases.front().id = place.owner;
-  scratch.combinations = {{place.owner, {}, {}}};
-  scratch.points.front().name = place.owner;
-  if (putWord(slotOf(scratch, place), text))
+  if (fits(slot, text))
     return std::string(text);
   return tl::unexpected(problemAt(place, text,
                                   PW_TEXT("Study", "“%1” is not one of the words for this.").with(text),

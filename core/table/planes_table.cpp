@@ -2,6 +2,7 @@
 #include "core/table/table.h"
 
 #include "core/quantity/format.h"
+#include "core/study/envelope.h"
 #include "core/table/cautions.h"
 
 #include <cassert>
@@ -91,6 +92,20 @@ void addAngles(Row& row, const PlaneReading& plane) {
   }
 }
 
+void addEnvelope(Row& row, const StressForm& stresses, const Readout& readout) {
+  const std::optional<double> normal = row.cells[1].exact;
+  if (!normal) {
+    row.cells.resize(row.cells.size() + 3);
+    return;
+  }
+  const Envelope envelope = *envelopeOn(readout, {Angle::fromDegrees(*normal)});
+  for (const Extreme& extreme : {envelope.leastNormal, envelope.greatestNormal, envelope.greatestShear}) {
+    Cell cell = stressCell(stresses, extreme.stress);
+    cell.combination = readout.states[extreme.state].combination;
+    row.cells.push_back(std::move(cell));
+  }
+}
+
 Row rowOfPlane(const StressForm& stresses, const PlaneReading& plane, Text name) {
   Row row{plane.kind, plane.name, groupOf(plane.kind), {}};
   row.cells.push_back({std::move(name), std::nullopt});
@@ -103,16 +118,43 @@ Row rowOfPlane(const StressForm& stresses, const PlaneReading& plane, Text name)
 } // namespace
 
 Table planesTable(const Study& study, const Readout& readout, const StateReading& state) {
-  Table table{columnsOf(study), {}, cautionsOf(state)};
+  Table table{columnsOf(study), {}, cautionsOf(readout, state)};
   const StressForm stresses = stressFormOf(study, state);
   for (const PlaneReading& plane : planesOf(readout, state))
     table.rows.push_back(rowOfPlane(stresses, plane, nameOf(plane)));
   return table;
 }
 
-Table sweepTable(const Study& study, const StateReading& state, Angle step) {
+Table withEnvelope(Table table, const Study& study, const Readout& readout) {
+  if (judgedStates(readout) < 2)
+    return table;
+  const std::string& unit = study.units.stress;
+  table.columns.push_back({"least_sn", PW_TEXT("Table", "least σ_{n}"), unit, true});
+  table.columns.push_back({"greatest_sn", PW_TEXT("Table", "greatest σ_{n}"), unit, true});
+  table.columns.push_back({"greatest_tnt", PW_TEXT("Table", "greatest |τ_{nt}|"), unit, true});
+  const StressForm stresses = stressFormOf(study, readout);
+  for (Row& row : table.rows)
+    addEnvelope(row, stresses, readout);
+  return table;
+}
+
+Table envelopeTable(const Study& study, const Readout& readout) {
+  Table table = withEnvelope(planesTable(study, readout, readout.state()), study, readout);
+  const auto isOfState = [](const Row& row) {
+    return row.kind == PlaneKind::s1 || row.kind == PlaneKind::s2 || row.kind == PlaneKind::shearMax ||
+           row.kind == PlaneKind::shearMin;
+  };
+  std::erase_if(table.rows, isOfState);
+  const auto dropState = [](auto& cells) { cells.erase(cells.begin() + 3, cells.begin() + 5); };
+  dropState(table.columns);
+  for (Row& row : table.rows)
+    dropState(row.cells);
+  return table;
+}
+
+Table sweepTable(const Study& study, const Readout& readout, const StateReading& state, Angle step) {
   assert(step.degrees() >= 0.1 && step.degrees() <= 90);
-  Table table{columnsOf(study), {}, cautionsOf(state)};
+  Table table{columnsOf(study), {}, cautionsOf(readout, state)};
   const StressForm stresses = stressFormOf(study, state);
   const int most = static_cast<int>(std::floor(90 / step.degrees() + 1e-9));
   for (int i = -most; i <= most; ++i) {

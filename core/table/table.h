@@ -17,6 +17,7 @@ struct Column {
 struct Cell {
   Text shown;
   std::optional<double> exact;
+  std::string combination = {}; ///< of a value that another combination gives: its name
 };
 
 /// A row; `kind` gives its mark. `group` changes where a hair rule stands.
@@ -36,8 +37,14 @@ struct Table {
 
 /// plane | normal at | cut at | sn | tnt for one state, in the study's unit.
 Table planesTable(const Study& study, const Readout& readout, const StateReading& state);
-/// The same columns for normals from -90 (excluded) to 90 deg by `step` degrees (0.1 to 90).
-Table sweepTable(const Study& study, const StateReading& state, Angle step);
+/// Puts least sn | greatest sn | greatest |tnt| over all judged states behind the columns of such a table,
+/// each with the combination that gives it; the table as it is where there is one state only. The planes of
+/// principal values and greatest shear are those of the shown state.
+Table withEnvelope(Table table, const Study& study, const Readout& readout);
+/// The envelope of the planes that are the same in every state: name | angles | the three values.
+Table envelopeTable(const Study& study, const Readout& readout);
+/// The columns of planesTable for normals from -90 (excluded) to 90 deg by `step` degrees (0.1 to 90).
+Table sweepTable(const Study& study, const Readout& readout, const StateReading& state, Angle step);
 
 /// Tab separated, a heading line first, numbers at full precision with ASCII minus; then a line for each
 /// caution.

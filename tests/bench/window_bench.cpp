@@ -31,8 +31,8 @@ Study studyWith(int combinations) {
   Study study = newStudy();
   Point& point = study.points.front();
   point.stress = {{study.cases.front().id, "5 MPa", "-1 MPa", "2 MPa", "0 MPa"}};
-  point.line->angle = "1 in 10";
-  point.line->tolerance = "3 deg";
+  point.lines.front().angle = "1 in 10";
+  point.lines.front().tolerance = "3 deg";
   point.reading = "30 deg";
   if (combinations == 1)
     return study;

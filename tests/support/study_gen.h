@@ -3,6 +3,7 @@
 
 #include "core/record/study_file.h"
 
+#include <algorithm>
 #include <rapidcheck.h>
 
 namespace planewright {
@@ -97,6 +98,14 @@ inline std::vector<LoadCase> anyCases() {
   return cases;
 }
 
+/// Cases exclude earlier ones only.
+inline bool excludesAny(const LoadCase& loadCase, const Combination& combination) {
+  for (const Factor& factor : combination.factors)
+    if (std::ranges::find(loadCase.excludes, factor.caseId) != loadCase.excludes.end())
+      return true;
+  return false;
+}
+
 /// Their numbers keep their names apart from those of the cases.
 inline std::vector<Combination> anyCombinations(const std::vector<LoadCase>& cases) {
   std::vector<Combination> combinations;
@@ -104,24 +113,96 @@ inline std::vector<Combination> anyCombinations(const std::vector<LoadCase>& cas
   for (int i = 0; i < count; ++i) {
     Combination one{anyName(90 + i), {}, anyWord<Basis>()};
     for (const LoadCase& loadCase : cases)
-      if (upTo(3) > 0)
-        one.factors.push_back({loadCase.id, oneOf({"1", "1.35", "1.5", "0", "-1", "1.5*0.7", "0.9"})});
+      if (upTo(3) > 0 && !excludesAny(loadCase, one))
+        one.factors.push_back({loadCase.id, loadCase.nature == Nature::measured
+                                                ? "1"
+                                                : oneOf({"1", "1.35", "1.5", "0", "-1", "1.5*0.7", "0.9"})});
     combinations.push_back(one);
   }
   return combinations;
 }
 
-inline Point anyPoint(int number, const std::vector<LoadCase>& cases) {
+inline std::vector<TypedSection> anySections() {
+  const std::vector<TypedSection> known = {
+      {"", SectionShape::rectangle, {{"b", "140 mm"}, {"h", "0.6 m"}}},
+      {"", SectionShape::circle, {{"d", "12 in"}}},
+      {"", SectionShape::tube, {{"d", "200 mm"}, {"t", "(200/25) mm"}}},
+      {"", SectionShape::box, {{"b", "100 mm"}, {"h", "200 mm"}, {"t_w", "6 mm"}, {"t_f", "8 mm"}}},
+      {"", SectionShape::tabled, {{"A", "84000 mm^2"}, {"I_z", "2.52e9 mm^4"}, {"W_z", "8.4e6 mm^3"}}}};
+  std::vector<TypedSection> sections;
+  const int count = upTo(2);
+  for (int i = 0; i < count; ++i) {
+    sections.push_back(*rc::gen::elementOf(known));
+    sections.back().name = anyName(i);
+  }
+  return sections;
+}
+
+inline std::string anyForceText() {
+  return oneOf({"0 kN", "-18.6 kN", "1.5*12 kN", "4 kip", "-2500 N", "12.5 kN*m/2 m"});
+}
+
+inline std::string anyMomentText() {
+  return oneOf({"0 kN*m", "24.5 kN*m", "-12 kN * 1.3 m", "30 kip*ft", "1e6 N*mm"});
+}
+
+/// Of a shape that theory covers whole, or without shear where it does not.
+inline ForceTexts anyForces(const TypedSection& section) {
+  ForceTexts forces;
+  forces.N = anyForceText();
+  forces.Mz = anyMomentText();
+  if (section.shape == SectionShape::tabled)
+    return forces;
+  forces.My = anyMomentText();
+  forces.Vy = anyForceText();
+  if (section.shape == SectionShape::circle || section.shape == SectionShape::tube)
+    forces.T = anyMomentText();
+  return forces;
+}
+
+inline RosetteTexts anyRosette(bool hasLine) {
+  RosetteTexts rosette;
+  rosette.strainA = oneOf({"0 ustrain", "412 ustrain", "-0.02 %", "150e-6*1e6 ustrain"});
+  rosette.strainB = oneOf({"0 ustrain", "-87 ustrain", "(120+3) ustrain"});
+  rosette.strainC = oneOf({"0 ustrain", "655 ustrain"});
+  rosette.angleB = oneOf({"45 deg", "60 deg", "-30 deg"});
+  if (hasLine && upTo(1) == 0)
+    rosette.material = Elasticity::orthotropic;
+  return rosette;
+}
+
+inline CaseStress anyStress(const LoadCase& loadCase, const Point& point, const Study& study) {
+  CaseStress stress{loadCase.id, anyStressText(), anyStressText(), anyStressText(),
+                    upTo(3) == 0 ? anyStressText() : "0 MPa"};
+  if (point.fibre && upTo(1) == 0)
+    stress.forces = anyForces(*findSection(study, point.fibre->section));
+  if (upTo(5) == 0)
+    stress.pressure = PressureTexts{anyStressText(), oneOf({"500 mm", "20 in"}), oneOf({"8 mm", "0.25 in"}),
+                                    anyWord<Ends>()};
+  if (loadCase.nature == Nature::measured && upTo(1) == 0)
+    stress.rosette = anyRosette(!point.lines.empty());
+  return stress;
+}
+
+inline Point anyPoint(int number, const Study& study) {
   Point point;
   point.name = anyName(number);
   point.note = anyFreeText();
   point.axes = anyAngleText();
-  for (const LoadCase& loadCase : cases)
+  if (!study.sections.empty() && upTo(1) == 0) {
+    const TypedSection section = *rc::gen::elementOf(study.sections);
+    const bool isHollow = section.shape == SectionShape::tube || section.shape == SectionShape::box;
+    // Inside the wall at mid-height, in the axis of solid ones.
+    const char* z = section.shape == SectionShape::tube ? "96 mm" : "47 mm";
+    point.fibre = FibreTexts{section.name, "0 mm", isHollow ? z : "0 mm", View::side};
+  }
+  point.freeEdge = oneOf({"", "", "0 deg", "1 in 8", "(pi/4) rad"});
+  const int lines = upTo(2);
+  for (int i = 0; i < lines; ++i)
+    point.lines.push_back({anyName(i), anyWord<LineKind>(), anyLineAngleText(), anyToleranceText(true)});
+  for (const LoadCase& loadCase : study.cases)
     if (upTo(4) > 0)
-      point.stress.push_back({loadCase.id, anyStressText(), anyStressText(), anyStressText(),
-                              upTo(3) == 0 ? anyStressText() : "0 MPa"});
-  if (upTo(3) > 0)
-    point.line = Line{anyName(0), anyWord<LineKind>(), anyLineAngleText(), anyToleranceText(true)};
+      point.stress.push_back(anyStress(loadCase, point, study));
   const int planes = upTo(3);
   for (int i = 0; i < planes; ++i)
     point.planes.push_back({anyName(i), anyAngleText(), anyToleranceText(false)});
@@ -151,12 +232,13 @@ inline rc::Gen<Study> anyStudy() {
     Study study;
     study.title = anyTitle();
     study.units = anyUnits();
-    study.convention = {anyWord<Positive>(), anyWord<ShearAxis>()};
+    study.convention = {anyWord<Positive>(), anyWord<ShearAxis>(), anyWord<ShearRule>()};
     study.cases = anyCases();
     study.combinations = anyCombinations(study.cases);
+    study.sections = anySections();
     const int points = 1 + upTo(3);
     for (int i = 0; i < points; ++i)
-      study.points.push_back(anyPoint(i, study.cases));
+      study.points.push_back(anyPoint(i, study));
     study.shown = anyShown(study);
     return study;
   });

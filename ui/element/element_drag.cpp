@@ -19,7 +19,7 @@ std::optional<ElementHold> holdOf(const Readout& readout, ElementHandle handle) 
         handle, {Spot::reading, readout.point, {}}, readout.reading.value, directionsForNormal(readout)};
   if (handle == ElementHandle::line && !readout.lines.empty())
     return ElementHold{handle,
-                       {Spot::lineAngle, readout.point, {}},
+                       {Spot::lineAngle, readout.point, readout.lines.front().name},
                        readout.lines.front().angle.value,
                        directionsForLine(readout)};
   return std::nullopt;

@@ -36,10 +36,10 @@ QString echoOfThird(const Study& study, const Readout& readout, const std::strin
   return state ? stressWithUnit(study, *state, state->sz) : QString();
 }
 
-QString echoOfLine(const Readout& readout) {
-  if (readout.lines.empty())
+QString echoOfLine(const Readout& readout, std::size_t index) {
+  if (index >= readout.lines.size())
     return {};
-  const Angle angle = readout.lines.front().angle.value;
+  const Angle angle = readout.lines[index].angle.value;
   const QString degrees = fromUtf8(shownDegrees(angle, angleDecimals));
   const QString slope = fromUtf8(shownSlope(angle));
   if (slope.isEmpty())
@@ -47,11 +47,11 @@ QString echoOfLine(const Readout& readout) {
   return QCoreApplication::translate("Echo", "%1 from +x, %2").arg(degrees, slope);
 }
 
-QString echoOfTolerance(const Study& study, const Readout& readout) {
-  const Point& point = shownPoint(study);
-  if (!point.line || point.line->tolerance.empty() || readout.lines.empty())
+QString echoOfTolerance(const Study& study, const Readout& readout, std::size_t index) {
+  const std::vector<Line>& lines = shownPoint(study).lines;
+  if (index >= lines.size() || lines[index].tolerance.empty())
     return {};
-  return echoOfDirection(point.line->tolerance, readout.lines.front().tolerance);
+  return echoOfDirection(lines[index].tolerance, readout.lines[index].tolerance);
 }
 
 QString echoOfDirection(const std::string& typed, Angle angle) {

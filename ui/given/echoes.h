@@ -16,9 +16,9 @@ QString echoOfStress(const Study& study, const Readout& readout, const std::stri
 /// The third normal stress of a case.
 QString echoOfThird(const Study& study, const Readout& readout, const std::string& caseId);
 /// "5.71° from +x, 1 in 10": an angle both ways, so that 10 for 1 in 10 is seen at once.
-QString echoOfLine(const Readout& readout);
+QString echoOfLine(const Readout& readout, std::size_t index);
 /// "4.76°" of a tolerance that is not typed in plain degrees.
-QString echoOfTolerance(const Study& study, const Readout& readout);
+QString echoOfTolerance(const Study& study, const Readout& readout, std::size_t index);
 /// "22.50°" of a direction that is not typed in plain, folded degrees.
 QString echoOfDirection(const std::string& typed, Angle angle);
 

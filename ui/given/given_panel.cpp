@@ -74,7 +74,8 @@ void GivenPanel::buildHeading(QWidget* content) {
 void GivenPanel::buildGroups(QWidget* content) {
   auto* rows = static_cast<QVBoxLayout*>(content->layout());
   m_stress = new StressGroup(m_desk, content);
-  m_line = new LineGroup(m_desk, content);
+  m_line = new LineGroup(m_desk, 0, content);
+  m_secondLine = new LineGroup(m_desk, 1, content);
   m_reading = new ReadingGroup(m_desk, content);
   m_conventions = new ConventionGroup(m_desk, content);
   m_notes = new FoldGroup(tr("Notes"), Role::ink, content);
@@ -82,9 +83,13 @@ void GivenPanel::buildGroups(QWidget* content) {
   m_notes->body().addWidget(m_note);
   m_notes->setFolded(true);
   for (FoldGroup* group :
-       std::initializer_list<FoldGroup*>{m_stress, m_line, m_reading, m_conventions, m_notes}) {
-    if (group != m_stress)
-      rows->addWidget(rule(content));
+       std::initializer_list<FoldGroup*>{m_stress, m_line, m_secondLine, m_reading, m_conventions, m_notes}) {
+    if (group != m_stress) {
+      QFrame* above = rule(content);
+      rows->addWidget(above);
+      if (group == m_secondLine)
+        m_secondRule = above;
+    }
     rows->addWidget(group);
   }
   rows->addStretch(1);
@@ -99,11 +104,14 @@ void GivenPanel::orderTabs() {
   };
   add(m_stress->fields());
   add(m_line->fields().mid(0, 2));
+  add(m_secondLine->fields().mid(0, 2));
   add(m_reading->fields());
   order += m_reading->buttons();
   order += QList<QWidget*>{&m_stress->heading()} + m_stress->buttons();
   order += QList<QWidget*>{&m_line->heading()} + m_line->buttons();
   add(m_line->fields().mid(2));
+  order += QList<QWidget*>{&m_secondLine->heading()} + m_secondLine->buttons();
+  add(m_secondLine->fields().mid(2));
   order += QList<QWidget*>{&m_reading->heading(), &m_conventions->heading()} + m_conventions->buttons();
   add(m_conventions->fields());
   order += QList<QWidget*>{&m_notes->heading(), m_note};
@@ -112,12 +120,16 @@ void GivenPanel::orderTabs() {
 }
 
 QList<EntryField*> GivenPanel::fields() const {
-  return m_stress->fields() + m_line->fields() + m_reading->fields() + m_conventions->fields();
+  return m_stress->fields() + m_line->fields() + m_secondLine->fields() + m_reading->fields() +
+         m_conventions->fields();
 }
 
 void GivenPanel::refresh() {
   m_fact->setText(tr("bare numbers in %1").arg(fromUtf8(m_desk.study().units.stress)));
   const QString note = fromUtf8(shownPoint(m_desk.study()).note);
+  const bool hasSecond = shownPoint(m_desk.study()).lines.size() > 1;
+  m_secondLine->setVisible(hasSecond);
+  m_secondRule->setVisible(hasSecond);
   m_notes->setSummary(note.isEmpty() ? tr("none") : note.section(QLatin1Char('\n'), 0, 0));
   countProblems();
 }

@@ -58,6 +58,8 @@ private:
   QLabel* m_fact;
   StressGroup* m_stress;
   LineGroup* m_line;
+  LineGroup* m_secondLine;
+  QWidget* m_secondRule = nullptr;
   ReadingGroup* m_reading;
   ConventionGroup* m_conventions;
   FoldGroup* m_notes;

@@ -8,6 +8,7 @@
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 
+#include <QHBoxLayout>
 #include <QLabel>
 #include <QMenu>
 #include <QVBoxLayout>
@@ -16,19 +17,21 @@ namespace planewright {
 
 namespace {
 
-Place lineSpot(const Study& study, Spot spot) {
-  return {spot, shownPoint(study).name, {}};
-}
-
-EntryBinding boundToLine(Spot spot) {
-  return boundTo([spot](const Study& study) { return lineSpot(study, spot); });
+/// A name for a line of this kind that no other line of the point has.
+std::string freeName(const Point& point, LineKind kind) {
+  const std::string word = plain(labelOf(kind), translation());
+  std::string name = word;
+  for (int number = 2; findLine(point, name); ++number)
+    name = word + " " + std::to_string(number);
+  return name;
 }
 
 } // namespace
 
-LineGroup::LineGroup(Desk& desk, QWidget* parent)
-    : FoldGroup(tr("Line"), Role::ink, parent), m_desk(desk), m_kind(new QuietButton({}, Role::line, this)),
-      m_sentence(new QLabel(this)) {
+LineGroup::LineGroup(Desk& desk, std::size_t index, QWidget* parent)
+    : FoldGroup(index == 0 ? tr("Line") : tr("Second line"), Role::ink, parent), m_desk(desk), m_index(index),
+      m_kind(new QuietButton({}, Role::line, this)),
+      m_second(new QuietButton(tr("Second line"), Role::focus, this)), m_sentence(new QLabel(this)) {
   buildKinds();
   addName();
   addAngle();
@@ -37,8 +40,33 @@ LineGroup::LineGroup(Desk& desk, QWidget* parent)
   m_sentence->setWordWrap(true);
   m_sentence->setForegroundRole(QPalette::PlaceholderText);
   body().addWidget(m_sentence);
+  buildSecond();
   connect(&m_desk, &Desk::changed, this, &LineGroup::refresh);
   refresh();
+}
+
+const Line* LineGroup::line(const Study& study) const {
+  const std::vector<Line>& lines = shownPoint(study).lines;
+  return m_index < lines.size() ? &lines[m_index] : nullptr;
+}
+
+Place LineGroup::spot(const Study& study, Spot spot) const {
+  const Line* own = line(study);
+  return {spot, shownPoint(study).name, own ? own->name : std::string()};
+}
+
+EntryBinding LineGroup::boundToLine(Spot spotOf) const {
+  return boundTo([this, spotOf](const Study& study) { return spot(study, spotOf); });
+}
+
+void LineGroup::buildSecond() {
+  m_second->setToolTip(
+      tr("A second direction of the material at this point, such as the bond beside the grain"));
+  auto* row = new QHBoxLayout;
+  row->addWidget(m_second);
+  row->addStretch();
+  body().addLayout(row);
+  connect(m_second, &QAbstractButton::clicked, this, [this] { addLine(LineKind::bond); });
 }
 
 void LineGroup::buildKinds() {
@@ -61,49 +89,57 @@ void LineGroup::addField(EntryBinding binding, EntryWords words) {
 }
 
 void LineGroup::addName() {
-  EntryBinding binding = boundToLine(Spot::lineName);
-  binding.edits = [](const Study& study, const std::string& typed) -> Result<Edits> {
-    return Edits{Rename{lineSpot(study, Spot::line), typed}};
+  EntryBinding binding = boundToLine(Spot::line);
+  binding.text = [this](const Study& study) { return line(study) ? line(study)->name : std::string(); };
+  binding.edits = [this](const Study& study, const std::string& typed) -> Result<Edits> {
+    return Edits{Rename{spot(study, Spot::line), typed}};
   };
   addField(std::move(binding), {PW_TEXT("Given", "name"), tr("name of the line")});
 }
 
 void LineGroup::addAngle() {
   EntryBinding binding = boundToLine(Spot::lineAngle);
-  binding.echo = [](const Study&, const Readout& readout, const std::string&) { return echoOfLine(readout); };
+  binding.echo = [this](const Study&, const Readout& readout, const std::string&) {
+    return echoOfLine(readout, m_index);
+  };
   addField(std::move(binding),
            {PW_TEXT("Given", "angle φ"), tr("angle of the line from +x, or a slope"), true});
 }
 
 void LineGroup::addTolerance() {
   EntryBinding binding = boundToLine(Spot::lineTolerance);
-  binding.echo = [](const Study& study, const Readout& readout, const std::string&) {
-    return echoOfTolerance(study, readout);
+  binding.echo = [this](const Study& study, const Readout& readout, const std::string&) {
+    return echoOfTolerance(study, readout, m_index);
   };
   addField(std::move(binding), {PW_TEXT("Given", "± within"), tr("tolerance of the line's angle")});
 }
 
 QList<QWidget*> LineGroup::buttons() const {
-  return {m_kind};
+  return {m_kind, m_second};
+}
+
+void LineGroup::addLine(LineKind kind) {
+  const Point& point = shownPoint(m_desk.study());
+  const std::string name = freeName(point, kind);
+  m_desk.request({Insert{{Spot::line, point.name, name}, std::nullopt},
+                  Type{{Spot::lineKind, point.name, name}, std::string(wordOf(kind))}},
+                 m_desk.newGesture(), tr("new line"));
 }
 
 // A name that only repeats the kind follows it.
 void LineGroup::chooseKind(LineKind kind) {
   const Study& study = m_desk.study();
-  const std::optional<Line>& line = shownPoint(study).line;
-  const Place place = lineSpot(study, Spot::line);
-  Edits edits;
-  if (!line)
-    edits.push_back(Insert{place, std::nullopt});
-  edits.push_back(Type{lineSpot(study, Spot::lineKind), std::string(wordOf(kind))});
-  if (!line || isNamedByKind())
-    edits.push_back(Rename{place, plain(labelOf(kind), translation())});
+  if (!line(study))
+    return addLine(kind);
+  Edits edits = {Type{spot(study, Spot::lineKind), std::string(wordOf(kind))}};
+  if (isNamedByKind() && line(study)->kind != kind)
+    edits.push_back(Rename{spot(study, Spot::line), freeName(shownPoint(study), kind)});
   m_desk.request(edits, m_desk.newGesture(), tr("kind of line"));
 }
 
 bool LineGroup::isNamedByKind() const {
-  const std::optional<Line>& line = shownPoint(m_desk.study()).line;
-  return line && line->name == plain(labelOf(line->kind), translation());
+  const Line* own = line(m_desk.study());
+  return own && own->name == plain(labelOf(own->kind), translation());
 }
 
 void LineGroup::editName() {
@@ -114,37 +150,37 @@ void LineGroup::editName() {
 
 void LineGroup::removeLine() {
   m_nameWanted = false;
-  m_desk.request({Remove{lineSpot(m_desk.study(), Spot::line)}}, m_desk.newGesture(),
-                 tr("removal of the line"));
+  m_desk.request({Remove{spot(m_desk.study(), Spot::line)}}, m_desk.newGesture(), tr("removal of the line"));
 }
 
 void LineGroup::refresh() {
-  const std::optional<Line>& line = shownPoint(m_desk.study()).line;
-  m_kind->setText(line ? shown(labelOf(line->kind)) : tr("no line"));
+  const Line* own = line(m_desk.study());
+  m_kind->setText(own ? shown(labelOf(own->kind)) : tr("no line"));
   m_kind->updateGeometry();
   for (EntryField* field : m_fields)
-    field->setVisible(line.has_value());
-  m_fields.back()->setVisible(line && (m_nameWanted || !isNamedByKind()));
-  m_kind->menu()->actions().at(m_kind->menu()->actions().size() - 2)->setEnabled(line.has_value());
+    field->setVisible(own);
+  m_fields.back()->setVisible(own && (m_nameWanted || !isNamedByKind()));
+  m_kind->menu()->actions().at(m_kind->menu()->actions().size() - 2)->setEnabled(own);
+  m_second->setVisible(m_index == 0 && shownPoint(m_desk.study()).lines.size() == 1);
   m_sentence->setText(sentence());
   setSummary(summary());
 }
 
 QString LineGroup::sentence() const {
-  if (m_desk.readout().lines.empty())
+  if (!line(m_desk.study()))
     return tr("Without a line, only planes are read.");
-  const NormalAngle normal = following(m_desk.readout().lines.front().angle);
+  const NormalAngle normal = following(m_desk.readout().lines[m_index].angle);
   return tr("The cut following it has its normal at %1.")
       .arg(fromUtf8(shownDegrees(normal.value, angleDecimals)));
 }
 
 QString LineGroup::summary() const {
-  const std::optional<Line>& line = shownPoint(m_desk.study()).line;
-  if (!line)
+  const Line* own = line(m_desk.study());
+  if (!own)
     return tr("no line");
-  if (line->tolerance.empty())
-    return fromUtf8(line->name + ", " + line->angle);
-  return fromUtf8(line->name + ", " + line->angle + " ± " + line->tolerance);
+  if (own->tolerance.empty())
+    return fromUtf8(own->name + ", " + own->angle);
+  return fromUtf8(own->name + ", " + own->angle + " ± " + own->tolerance);
 }
 
 } // namespace planewright

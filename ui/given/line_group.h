@@ -11,20 +11,24 @@ namespace planewright {
 
 class QuietButton;
 
-/// The physical line in the plane of stress: its kind and name, its angle and tolerance, and where the
-/// normal of the cut that follows it stands.
+/// One physical line in the plane of stress, the first or the second of a point: its kind and name, its angle
+/// and tolerance, and where the normal of the cut that follows it stands.
 class LineGroup : public FoldGroup {
   Q_OBJECT
 
 public:
-  explicit LineGroup(Desk& desk, QWidget* parent = nullptr);
+  LineGroup(Desk& desk, std::size_t index, QWidget* parent = nullptr);
 
   /// In the order of Tab: angle, tolerance; then the name.
   const QList<EntryField*>& fields() const { return m_fields; }
   QList<QWidget*> buttons() const;
 
 private:
+  Place spot(const Study& study, Spot spot) const;
+  const Line* line(const Study& study) const;
+  EntryBinding boundToLine(Spot spot) const;
   void buildKinds();
+  void buildSecond();
   void addField(EntryBinding binding, EntryWords words);
   void addName();
   void editName();
@@ -33,12 +37,15 @@ private:
   void addTolerance();
   void chooseKind(LineKind kind);
   void removeLine();
+  void addLine(LineKind kind);
   void refresh();
   QString sentence() const;
   QString summary() const;
 
   Desk& m_desk;
+  std::size_t m_index;
   QuietButton* m_kind;
+  QuietButton* m_second;
   bool m_nameWanted = false;
   QList<EntryField*> m_fields;
   QLabel* m_sentence;

@@ -148,7 +148,7 @@ QString StressGroup::sumLine() const {
 
 QString StressGroup::cautionLine() const {
   QStringList sentences;
-  for (const Text& caution : cautionsOf(m_desk.readout().state()))
+  for (const Text& caution : cautionsOf(m_desk.readout(), m_desk.readout().state()))
     sentences << shown(caution);
   return sentences.join(QLatin1Char(' '));
 }

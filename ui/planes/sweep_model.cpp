@@ -13,11 +13,11 @@ SweepModel::SweepModel(Desk& desk, QObject* parent) : TableModel(parent), m_desk
 void SweepModel::setStep(Angle step) {
   assert(step.degrees() >= leastStep && step.degrees() <= greatestStep);
   m_step = step;
-  resetTable(sweepTable(m_desk.study(), m_desk.readout().state(), m_step));
+  resetTable(sweepTable(m_desk.study(), m_desk.readout(), m_desk.readout().state(), m_step));
 }
 
 void SweepModel::refresh() {
-  setTable(sweepTable(m_desk.study(), m_desk.readout().state(), m_step));
+  setTable(sweepTable(m_desk.study(), m_desk.readout(), m_desk.readout().state(), m_step));
 }
 
 int SweepModel::tintedRow() const {

@@ -31,9 +31,8 @@ std::vector<Place> changedPlaces(const Study& before, const Study& after) {
 }
 
 /// A line goes by its own name.
-QString nameOf(const Study& study, const Place& place) {
-  const Point* point = place.spot == Spot::lineAngle ? findPoint(study, place.owner) : nullptr;
-  return point && point->line ? fromUtf8(point->line->name) : shown(rowOf(place.spot).label);
+QString nameOf(const Place& place) {
+  return place.spot == Spot::lineAngle ? fromUtf8(place.item) : shown(rowOf(place.spot).label);
 }
 
 QString cut(const std::string& text) {
@@ -53,7 +52,7 @@ QString told(const Study& study, const Place& place) {
   const std::string text = textAt(study, place).value_or(std::string());
   if (text.empty())
     return QCoreApplication::translate("ChangeWords", "none");
-  const EntryKind kind = entryKindOf(study, place.spot);
+  const EntryKind kind = entryKindOf(study, place);
   const bool isAngle = rowOf(place.spot).holds == Holds::expression && kind.dimension == dimension::angle;
   constexpr std::size_t readable = 14;
   if (isAngle && text.size() > readable)
@@ -72,12 +71,12 @@ QString changeInWords(const Study& before, const Study& after) {
       std::ranges::any_of(changed, isNew))
     return {};
   if (changed.size() == 2)
-    return capital(QCoreApplication::translate("ChangeWords", "%1 now %2, %3 now %4")
-                       .arg(nameOf(after, changed[0]), told(after, changed[0]), nameOf(after, changed[1]),
-                            told(after, changed[1])));
+    return capital(
+        QCoreApplication::translate("ChangeWords", "%1 now %2, %3 now %4")
+            .arg(nameOf(changed[0]), told(after, changed[0]), nameOf(changed[1]), told(after, changed[1])));
   const Place& place = changed.front();
   return capital(QCoreApplication::translate("ChangeWords", "%1 now %2, was %3")
-                     .arg(nameOf(after, place), told(after, place), told(before, place)));
+                     .arg(nameOf(place), told(after, place), told(before, place)));
 }
 
 } // namespace planewright

@@ -19,10 +19,11 @@ Study exampleOfSigns() {
   const Study plain = newStudy();
   const std::string point = plain.points.front().name;
   const std::string loadCase = plain.cases.front().id;
-  const Result<Study> study = edited(
-      plain, Edits{Type{{Spot::sx, point, loadCase}, "8 MPa"}, Type{{Spot::sy, point, loadCase}, "5 MPa"},
-                   Type{{Spot::txy, point, loadCase}, "3 MPa"}, Type{{Spot::lineAngle, point, {}}, "1 in 10"},
-                   Type{{Spot::reading, point, {}}, "30 deg"}});
+  const Result<Study> study = edited(plain, Edits{Type{{Spot::sx, point, loadCase}, "8 MPa"},
+                                                  Type{{Spot::sy, point, loadCase}, "5 MPa"},
+                                                  Type{{Spot::txy, point, loadCase}, "3 MPa"},
+                                                  Type{{Spot::lineAngle, point, "grain"}, "1 in 10"},
+                                                  Type{{Spot::reading, point, {}}, "30 deg"}});
   assert(study);
   return *study;
 }

@@ -138,7 +138,7 @@ Things points() {
           [](const Study& study) {
             const std::string name = freshPointName(study, study.points.back().name);
             Edits edits = {Insert{{Spot::point, name, {}}, std::nullopt}};
-            edits.push_back(Insert{{Spot::line, name, {}}, std::nullopt});
+            edits.push_back(Insert{{Spot::line, name, "grain"}, std::nullopt});
             return edits;
           },
           place,

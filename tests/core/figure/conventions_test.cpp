@@ -31,11 +31,11 @@ TEST(Conventions, nameSignsAnglesAndTheSenseOfTheCircle) {
 
 TEST(Conventions, sayTheLineAsTyped) {
   Study study = studyOf({8.4, -0.6, 2.1, 0, 3, 30, 0, true});
-  study.points.front().line->angle = "1 in 10";
+  study.points.front().lines.front().angle = "1 in 10";
   EXPECT_TRUE(says(study, "Line “grain”: φ = 5.71°, given as 1 in 10, ± 3.00°.\n"));
-  study.points.front().line = Line{"seam", LineKind::weld, "40 deg", ""};
+  study.points.front().lines = {Line{"seam", LineKind::weld, "40 deg", ""}};
   EXPECT_TRUE(says(study, "Line “seam” (weld): φ = 40.00°, given as 40 deg, without tolerance.\n"));
-  study.points.front().line.reset();
+  study.points.front().lines.clear();
   EXPECT_FALSE(says(study, "φ"));
 }
 

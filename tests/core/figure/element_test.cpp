@@ -38,8 +38,8 @@ Study studyOf(const Given& given) {
                    with(given.stress.txy, "MPa"), "0 MPa"}};
   point.reading = with(given.reading, "deg");
   point.axes = with(given.axes, "deg");
-  point.line = Line{"seam", given.kind, with(given.line, "deg"),
-                    given.tolerance == 0 ? "" : with(given.tolerance, "deg")};
+  point.lines = {Line{"seam", given.kind, with(given.line, "deg"),
+                      given.tolerance == 0 ? "" : with(given.tolerance, "deg")}};
   return study;
 }
 
@@ -432,7 +432,7 @@ TEST(ElementLabels, standAtTheirArrows) {
 
 TEST(Element, withoutALineThereIsNeitherBandNorTexture) {
   Study study = studyOf({});
-  study.points.front().line.reset();
+  study.points.front().lines.clear();
   Picture picture;
   const std::vector<LabelWish> wishes = drawElement(picture, study, evaluate(study), withHandles());
   EXPECT_EQ(std::ranges::count(wishes, "phi", &LabelWish::key), 0);

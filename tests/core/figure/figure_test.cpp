@@ -91,7 +91,7 @@ TEST(Figure, isSoundInEveryWidthTextAndChoiceOfParts) {
 TEST(Figure, longNamesAndManyPlanesComeOutWell) {
   Study study = studyOf(notch());
   study.points.front().note = std::string(120, 'W') + " & <σ> " + std::string(80, 'i');
-  study.points.front().line->name = "a line with a very long name, & <Ω>, and more of it";
+  study.points.front().lines.front().name = "a line with a very long name, & <Ω>, and more of it";
   for (int i = 0; i < 24; ++i)
     study.points.front().planes.push_back(
         {"a watched plane with a long name, number " + exactNumber(i), exactNumber(7.0 * i) + " deg", ""});

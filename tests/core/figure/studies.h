@@ -30,10 +30,10 @@ inline Study studyOf(const Given& given) {
   point.axes = angle(given.axes);
   point.reading = angle(given.theta);
   if (given.line)
-    point.line =
-        Line{"grain", LineKind::grain, angle(given.phi), given.tolerance > 0 ? angle(given.tolerance) : ""};
+    point.lines = {
+        Line{"grain", LineKind::grain, angle(given.phi), given.tolerance > 0 ? angle(given.tolerance) : ""}};
   else
-    point.line.reset();
+    point.lines.clear();
   for (const Problem& problem : problemsIn(study))
     ADD_FAILURE() << plain(problem);
   return study;

@@ -20,7 +20,7 @@ Study goldenStudy() {
   Study study = newStudy();
   Point& point = study.points.front();
   point.stress = {{"G", "80 MPa", "20 MPa", "-30 MPa", "0 MPa"}};
-  point.line = Line{"grain", LineKind::grain, "1 in 10", "2 deg"};
+  point.lines = {Line{"grain", LineKind::grain, "1 in 10", "2 deg"}};
   point.planes = {{"cut at 25", "25 deg", ""}};
   return study;
 }
@@ -39,7 +39,7 @@ Study combinedStudy() {
   weld.name = "weld, \"left\"";
   weld.stress = {{"G", "1.2 ksi", "-0.4 ksi", "12 kip/(4 in*2 in)", "0.3 ksi"},
                  {"S", "1.2 ksi", "-0.4 ksi", "12 kip/(4 in*2 in)", "0 ksi"}};
-  weld.line = Line{"seam", LineKind::weld, "-35 deg", ""};
+  weld.lines = {Line{"seam", LineKind::weld, "-35 deg", ""}};
   weld.planes = {{"=throat", "10 deg", "2 deg"}, {"leg", "55 deg", ""}};
   Point bare;
   bare.name = "bare";

@@ -50,7 +50,7 @@ TEST(StudyFile, keysMayStandInAnyOrderAndWhatIsNaturalMayBeLeftOut) {
   ASSERT_EQ(study->points.size(), 1u);
   const Point& point = study->points.front();
   EXPECT_EQ(point.stress, (std::vector<CaseStress>{{"S", "0 MPa", "0 MPa", "3 MPa", "0 MPa"}}));
-  EXPECT_FALSE(point.line);
+  EXPECT_TRUE(point.lines.empty());
   EXPECT_EQ(study->cases.front().nature, Nature::variable);
   EXPECT_EQ(study->units, Units{});
 }

@@ -67,7 +67,7 @@ TEST(CopiedPoint, hasEverythingThatWasSaidOfIt) {
   Study study = newStudy();
   Point& point = study.points.front();
   point.note = "heel";
-  point.line = Line{"bond", LineKind::bond, "1 in 12", "3 deg"};
+  point.lines = {Line{"bond", LineKind::bond, "1 in 12", "3 deg"}};
   point.planes = {{"scarf", "55 deg", "2 deg"}};
   point.reading = "30 deg";
   study = *edited(study, editsThatCopyPoint(study, "P1", freshPointName(study, "P1")));

@@ -5,7 +5,7 @@ namespace planewright {
 namespace {
 
 const Place sx{Spot::sx, "P1", "G"};
-const Place angle{Spot::lineAngle, "P1", {}};
+const Place angle{Spot::lineAngle, "P1", "grain"};
 
 Problem refused(const Study& study, const Edits& edits) {
   const Result<Study> after = edited(study, edits);
@@ -36,10 +36,10 @@ TEST(Edit, aTextThatDoesNotReadIsRefusedWithItsPlace) {
 TEST(Edit, whatCannotBeMeantIsRefused) {
   EXPECT_FALSE(refused(newStudy(), {Type{sx, "1e101 MPa"}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{angle, "1e7 deg"}}).what.empty());
-  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineTolerance, "P1", {}}, "-3 deg"}}).what.empty());
-  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineKind, "P1", {}}, "Grain"}}).mend.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineTolerance, "P1", "grain"}, "-3 deg"}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineKind, "P1", "grain"}, "Grain"}}).mend.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::unitStress, {}, {}}, "kN"}}).what.empty());
-  EXPECT_FALSE(refused(newStudy(), {Type{{Spot::lineName, "P1", {}}, "  "}}).what.empty());
+  EXPECT_FALSE(refused(newStudy(), {Rename{{Spot::line, "P1", "grain"}, "  "}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::pointNote, "P1", {}}, "\xC3\x28"}}).what.empty());
   EXPECT_FALSE(refused(newStudy(), {Type{{Spot::pointNote, "P1", {}},
                                          "a\xC2\x9B"
@@ -54,7 +54,7 @@ TEST(Edit, ofSeveralEditsAllAreTakenOrNone) {
 }
 
 TEST(Edit, anEmptyToleranceMeansNone) {
-  const Place tolerance{Spot::lineTolerance, "P1", {}};
+  const Place tolerance{Spot::lineTolerance, "P1", "grain"};
   const Study study = with(newStudy(), {Type{tolerance, "3"}});
   EXPECT_EQ(textAt(study, tolerance), "3 deg");
   EXPECT_EQ(textAt(with(study, {Type{tolerance, " "}}), tolerance), "");
@@ -62,7 +62,7 @@ TEST(Edit, anEmptyToleranceMeansNone) {
 
 TEST(Edit, aCaseTakesItsFactorsAndStressesAlongWhenItGoes) {
   const Study study = with(richStudy(), {Remove{{Spot::loadCase, "S", {}}}});
-  EXPECT_EQ(study.cases.size(), 1U);
+  EXPECT_EQ(study.cases.size(), 2U);
   EXPECT_EQ(study.combinations.front().factors.size(), 1U);
   EXPECT_EQ(study.points.front().stress.size(), 1U);
   EXPECT_TRUE(problemsIn(study).empty());
@@ -74,7 +74,7 @@ TEST(Edit, aRenamedThingIsFollowedEverywhere) {
                     Rename{{Spot::point, "P2", {}}, "heel"}, Rename{{Spot::combination, sum, {}}, "ULS"}});
   EXPECT_EQ(study.combinations.front().factors.front().caseId, "A");
   EXPECT_EQ(study.points.front().stress.back().caseId, "W");
-  EXPECT_EQ(study.cases.back().excludes, std::vector<std::string>{"A"});
+  EXPECT_EQ(study.cases.front().excludes, std::vector<std::string>{"A"});
   EXPECT_EQ(study.shown, (Shown{"heel", "ULS"}));
   EXPECT_TRUE(problemsIn(study).empty());
 }
@@ -103,8 +103,8 @@ TEST(Edit, aCombinationCannotHaveTheIdOfACase) {
 }
 
 TEST(Edit, aLineMayBeRenamedToTheNameOfItsPoint) {
-  const Place line{Spot::line, "P1", {}};
-  EXPECT_EQ(with(newStudy(), {Rename{line, "P1"}}).points.front().line->name, "P1");
+  const Place line{Spot::line, "P1", "grain"};
+  EXPECT_EQ(with(newStudy(), {Rename{line, "P1"}}).points.front().lines.front().name, "P1");
   EXPECT_EQ(with(newStudy(), {Rename{line, "grain"}}), newStudy());
 }
 
@@ -150,19 +150,19 @@ TEST(Edit, movingChangesTheOrderOnly) {
   const Study study = with(richStudy(), {Move{{Spot::loadCase, "S", {}}, 0}});
   EXPECT_EQ(study.cases.front().id, "S");
   EXPECT_EQ(study.cases.back().id, "G");
-  EXPECT_FALSE(edited(study, Edit{Move{{Spot::loadCase, "S", {}}, 2}}));
+  EXPECT_FALSE(edited(study, Edit{Move{{Spot::loadCase, "S", {}}, 3}}));
 }
 
 TEST(Edit, theLineComesAndGoes) {
-  const Place line{Spot::line, "P1", {}};
+  const Place line{Spot::line, "P1", "grain"};
   const Study without = with(newStudy(), {Remove{line}});
-  EXPECT_FALSE(without.points.front().line);
+  EXPECT_TRUE(without.points.front().lines.empty());
   EXPECT_FALSE(textAt(without, angle));
   EXPECT_FALSE(edited(without, Edit{Type{angle, "5"}}));
   const Study again = with(without, {Insert{line, {}}, Type{angle, "5"}});
   EXPECT_EQ(textAt(again, angle), "5 deg");
   EXPECT_FALSE(edited(again, Edit{Insert{line, {}}}));
-  EXPECT_EQ(with(again, {Rename{line, "seam"}}).points.front().line->name, "seam");
+  EXPECT_EQ(with(again, {Rename{line, "seam"}}).points.front().lines.front().name, "seam");
 }
 
 TEST(Study, aTextWithoutItsUnitIsAProblemOfTheStudy) {

@@ -43,7 +43,7 @@ TEST(Place, everyTypedPlaceOfANewStudyHoldsItsText) {
   for (const Place& place : typedPlacesIn(study))
     EXPECT_TRUE(textAt(study, place)) << pathOf(place);
   EXPECT_EQ(textAt(study, {Spot::sx, "P1", "G"}), "0 MPa");
-  EXPECT_EQ(textAt(study, {Spot::lineKind, "P1", {}}), "grain");
+  EXPECT_EQ(textAt(study, {Spot::lineKind, "P1", "grain"}), "grain");
   EXPECT_EQ(textAt(study, {Spot::positive, {}, {}}), "tension");
   EXPECT_EQ(textAt(study, {Spot::caseExcludes, "G", {}}), "");
   EXPECT_FALSE(textAt(study, {Spot::sx, "P1", "Q"}));

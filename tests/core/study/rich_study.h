@@ -16,15 +16,16 @@ inline Study with(const Study& study, const Edits& edits) {
 
 inline const std::string sum = "1.35 G + 1.5 S";
 
-/// Two cases, a combination of both, two points, a watched plane.
+/// Three cases, a combination of two of them that the third excludes, two points, a watched plane.
 inline Study richStudy() {
   return with(newStudy(),
-              {Insert{{Spot::loadCase, "S", {}}, {}}, Insert{{Spot::combination, sum, {}}, {}},
-               Insert{{Spot::factor, sum, "G"}, {}}, Type{{Spot::factor, sum, "G"}, "1.35"},
-               Insert{{Spot::factor, sum, "S"}, {}}, Type{{Spot::factor, sum, "S"}, "1.5"},
-               Insert{{Spot::caseStress, "P1", "S"}, {}}, Insert{{Spot::point, "P2", {}}, {}},
-               Insert{{Spot::plane, "P1", "scarf"}, {}}, Type{{Spot::shownPoint, {}, {}}, "P2"},
-               Type{{Spot::shownCombination, {}, {}}, sum}, Type{{Spot::caseExcludes, "S", {}}, "G"}});
+              {Insert{{Spot::loadCase, "Q", {}}, 0}, Insert{{Spot::loadCase, "S", {}}, {}},
+               Insert{{Spot::combination, sum, {}}, {}}, Insert{{Spot::factor, sum, "G"}, {}},
+               Type{{Spot::factor, sum, "G"}, "1.35"}, Insert{{Spot::factor, sum, "S"}, {}},
+               Type{{Spot::factor, sum, "S"}, "1.5"}, Insert{{Spot::caseStress, "P1", "S"}, {}},
+               Insert{{Spot::point, "P2", {}}, {}}, Insert{{Spot::plane, "P1", "scarf"}, {}},
+               Type{{Spot::shownPoint, {}, {}}, "P2"}, Type{{Spot::shownCombination, {}, {}}, sum},
+               Type{{Spot::caseExcludes, "Q", {}}, "G"}});
 }
 
 } // namespace planewright

@@ -13,7 +13,7 @@ Study studyOf(const char* sx, const char* sy, const char* txy, const char* readi
   Study study = newStudy();
   study.points.front().stress = {{"G", sx, sy, txy, "0 MPa"}};
   study.points.front().reading = reading;
-  study.points.front().line->angle = line;
+  study.points.front().lines.front().angle = line;
   return study;
 }
 
@@ -95,7 +95,7 @@ TEST(Slips, aNumberOfNoKnownSlipNamesNone) {
 
 TEST(Slips, aPointWithoutALineIsToldSo) {
   Study study = golden();
-  study.points.front().line.reset();
+  study.points.front().lines.clear();
   const auto result = compared(study, evaluate(study), Asked::along, "3");
   ASSERT_FALSE(result);
   EXPECT_EQ(plain(result.error().what), "This point has no line.");

@@ -19,7 +19,7 @@ Study studyOf(const PlaneStress& stress, double sz, const std::string& unit) {
   Point& point = study.points[0];
   point.stress = {{"G", exactNumber(stress.sx) + " " + unit, exactNumber(stress.sy) + " " + unit,
                    exactNumber(stress.txy) + " " + unit, exactNumber(sz) + " " + unit}};
-  point.line = Line{"grain", LineKind::grain, "1 in 10", ""};
+  point.lines = {Line{"grain", LineKind::grain, "1 in 10", ""}};
   point.planes = {{"scarf", "55 deg", ""}};
   point.reading = "25 deg";
   return study;
@@ -43,7 +43,7 @@ RC_GTEST_PROP(Working, everyFormulaConfirmsTheFastCode, ()) {
   const double sz = component();
   Study study = studyOf(stress, sz, *rc::gen::element<std::string>("MPa", "psi", "kN/m^2"));
   study.points[0].reading = exactNumber(*rc::gen::inRange(-3600, 3600) / 10.0) + " deg";
-  study.points[0].line->angle = exactNumber(*rc::gen::inRange(-1800, 1800) / 10.0) + " deg";
+  study.points[0].lines.front().angle = exactNumber(*rc::gen::inRange(-1800, 1800) / 10.0) + " deg";
   const double scale = std::max(scaleOf(stress), std::abs(sz));
   for (const Step& step : steps(study))
     RC_ASSERT(distance(step) <= 1e-12 * (step.unit == "°" ? 180 : scale));

@@ -11,7 +11,7 @@ namespace {
 Study goldenStudy() {
   return *edited(newStudy(),
                  Edits{Type{{Spot::sx, "P1", "G"}, "80"}, Type{{Spot::sy, "P1", "G"}, "20"},
-                       Type{{Spot::txy, "P1", "G"}, "-30"}, Type{{Spot::lineAngle, "P1", {}}, "1 in 10"},
+                       Type{{Spot::txy, "P1", "G"}, "-30"}, Type{{Spot::lineAngle, "P1", "grain"}, "1 in 10"},
                        Type{{Spot::reading, "P1", {}}, "25"}});
 }
 
@@ -55,13 +55,14 @@ TEST(Table, aDegenerateStateHasNoFalseAngle) {
 
 TEST(Table, sweepsTheHalfTurnOnce) {
   const Study study = goldenStudy();
-  const StateReading state = evaluate(study).state();
-  const Table table = sweepTable(study, state, Angle::fromDegrees(5));
+  const Readout readout = evaluate(study);
+  const StateReading& state = readout.state();
+  const Table table = sweepTable(study, readout, state, Angle::fromDegrees(5));
   ASSERT_EQ(table.rows.size(), 36U);
   EXPECT_EQ(plain(table.rows.front().cells[1].shown), "−85.00°");
   EXPECT_EQ(plain(table.rows.back().cells[1].shown), "90.00°");
-  EXPECT_EQ(sweepTable(study, state, Angle::fromDegrees(0.1)).rows.size(), 1800U);
-  EXPECT_EQ(sweepTable(study, state, Angle::fromDegrees(90)).rows.size(), 2U);
+  EXPECT_EQ(sweepTable(study, readout, state, Angle::fromDegrees(0.1)).rows.size(), 1800U);
+  EXPECT_EQ(sweepTable(study, readout, state, Angle::fromDegrees(90)).rows.size(), 2U);
 }
 
 TEST(Clipboard, tabSeparatedHasFullDigitsAndAsciiMinus) {
@@ -95,7 +96,7 @@ TEST(Table, aCaseThatCountsAsZeroIsCopiedAsACaution) {
   const Readout readout = evaluate(study);
   const std::string caution = "No stresses are given for case S: it counts as 0.";
   for (const Table& table : {planesTable(study, readout, readout.state()),
-                             sweepTable(study, readout.state(), Angle::fromDegrees(45))}) {
+                             sweepTable(study, readout, readout.state(), Angle::fromDegrees(45))}) {
     EXPECT_TRUE(tabSeparated(table).ends_with("\n" + caution + "\n")) << tabSeparated(table);
     EXPECT_TRUE(html(table).ends_with("</table>\n<p>" + caution + "</p>\n")) << html(table);
   }

@@ -20,8 +20,8 @@ inline Study studyOf(const std::string& sx = "80 MPa", const std::string& sy = "
   stress.sy = sy;
   stress.txy = txy;
   point.reading = reading;
-  point.line->angle = "1 in 10";
-  point.line->tolerance = "3 deg";
+  point.lines.front().angle = "1 in 10";
+  point.lines.front().tolerance = "3 deg";
   return study;
 }
 

@@ -50,8 +50,8 @@ struct Model {
 
 Place anyPlace() {
   return *rc::gen::element(Place{Spot::sx, "P1", "G"}, Place{Spot::txy, "P1", "G"},
-                           Place{Spot::reading, "P1", {}}, Place{Spot::lineAngle, "P1", {}},
-                           Place{Spot::lineTolerance, "P1", {}});
+                           Place{Spot::reading, "P1", {}}, Place{Spot::lineAngle, "P1", "grain"},
+                           Place{Spot::lineTolerance, "P1", "grain"});
 }
 
 RC_GTEST_PROP(DeskModel, agreesWithAListOfStudies, ()) {

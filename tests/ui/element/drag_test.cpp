@@ -189,7 +189,7 @@ TEST(ElementDrag, inclinedAxesTurnTheHandlesWithThem) {
 
 TEST(ElementDrag, withoutALineThereIsNoBarToTake) {
   ElementRig rig;
-  rig.desk.request({Remove{{Spot::line, rig.desk.readout().point, {}}}}, rig.desk.newGesture(), {});
+  rig.desk.request({Remove{{Spot::line, rig.desk.readout().point, "grain"}}}, rig.desk.newGesture(), {});
   const int steps = rig.steps();
   rig.drag(rig.at(5.7, 0.8), rig.at(40, 0.8));
   EXPECT_EQ(rig.steps(), steps);

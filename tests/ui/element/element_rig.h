@@ -29,7 +29,7 @@ inline Study studyOf(const Typed& typed) {
   point.stress = {{study.cases.front().id, typed.sx, typed.sy, typed.txy, "0 MPa"}};
   point.reading = typed.reading;
   point.axes = typed.axes;
-  point.line = Line{"grain", LineKind::grain, typed.line, typed.tolerance};
+  point.lines = {Line{"grain", LineKind::grain, typed.line, typed.tolerance}};
   return study;
 }
 
@@ -44,7 +44,7 @@ struct ElementRig {
   }
 
   const std::string& reading() const { return desk.study().points.front().reading; }
-  const std::string& line() const { return desk.study().points.front().line->angle; }
+  const std::string& line() const { return desk.study().points.front().lines.front().angle; }
   double readingDegrees() const { return desk.readout().reading.value.degrees(); }
   double lineDegrees() const { return desk.readout().lines.front().angle.value.degrees(); }
   int steps() { return desk.undoStack()->index(); }

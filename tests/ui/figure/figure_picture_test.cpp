@@ -19,8 +19,8 @@ Study study() {
   const Edits edits = {Type{{Spot::sx, point, "G"}, "8.4 MPa"},
                        Type{{Spot::sy, point, "G"}, "-0.6 MPa"},
                        Type{{Spot::txy, point, "G"}, "2.1 MPa"},
-                       Type{{Spot::lineAngle, point, ""}, "1 in 10"},
-                       Type{{Spot::lineTolerance, point, ""}, "3 deg"},
+                       Type{{Spot::lineAngle, point, "grain"}, "1 in 10"},
+                       Type{{Spot::lineTolerance, point, "grain"}, "3 deg"},
                        Type{{Spot::pointNote, point, ""}, "chord & strut <invented>"},
                        Type{{Spot::reading, point, ""}, "30 deg"}};
   return *edited(newStudy(), edits);

@@ -51,6 +51,7 @@ struct GivenTest : testing::Test {
   std::string kept(Spot spot, const std::string& owner = "P1", const std::string& item = {}) const {
     return textAt(desk.study(), {spot, owner, item}).value_or("nothing");
   }
+  const Line& firstLine() const { return desk.study().points.front().lines.front(); }
   bool says(const QString& words) {
     for (auto* label : panel.findChildren<QLabel*>())
       if (label->isVisible() && label->text().contains(words))

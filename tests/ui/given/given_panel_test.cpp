@@ -48,8 +48,8 @@ TEST_F(GivenTest, aDayOfTypingByKeyboardAlone) {
     keys(text);
   EXPECT_EQ(kept(Spot::sx, "P1", "G"), "-18.6 kN/(90 mm*240 mm)");
   EXPECT_EQ(kept(Spot::txy, "P1", "G"), "1.5*12 kN/(90 mm*240 mm)");
-  EXPECT_EQ(kept(Spot::lineAngle), "1 in 10");
-  EXPECT_EQ(kept(Spot::lineTolerance), "3 deg");
+  EXPECT_EQ(firstLine().angle, "1 in 10");
+  EXPECT_EQ(firstLine().tolerance, "3 deg");
   EXPECT_EQ(kept(Spot::reading), "30 deg");
   EXPECT_EQ(desk.undoStack()->count(), 5) << "0 over 0 MPa changes nothing";
 }
@@ -92,22 +92,31 @@ TEST_F(GivenTest, goToTurnsTheReadingPlane) {
 
 TEST_F(GivenTest, aNameThatRepeatsTheKindFollowsIt) {
   actionOf(button("kind of line"), "weld")->trigger();
-  EXPECT_EQ(kept(Spot::lineKind), "weld");
-  EXPECT_EQ(kept(Spot::lineName), "weld");
+  EXPECT_EQ(firstLine().kind, LineKind::weld);
+  EXPECT_EQ(firstLine().name, "weld");
   actionOf(button("kind of line"), QString::fromUtf8("another name…"))->trigger();
   type("name", "seam A");
-  EXPECT_EQ(kept(Spot::lineName), "seam A");
+  EXPECT_EQ(firstLine().name, "seam A");
   actionOf(button("kind of line"), "bond")->trigger();
-  EXPECT_EQ(kept(Spot::lineName), "seam A");
+  EXPECT_EQ(firstLine().name, "seam A");
+}
+
+TEST_F(GivenTest, aSecondLineHasFieldsOfItsOwn) {
+  button("Second line").click();
+  ASSERT_EQ(desk.study().points.front().lines.size(), 2U);
+  EXPECT_EQ(desk.study().points.front().lines.back().kind, LineKind::bond);
+  EXPECT_EQ(desk.readout().lines.size(), 2U);
+  desk.undoStack()->undo();
+  EXPECT_EQ(desk.study().points.front().lines.size(), 1U);
 }
 
 TEST_F(GivenTest, aPointCanBeWithoutALine) {
   type("angle φ", "1 in 10");
   actionOf(button("kind of line"), "no line")->trigger();
-  EXPECT_FALSE(desk.study().points.front().line);
+  EXPECT_TRUE(desk.study().points.front().lines.empty());
   EXPECT_FALSE(field("angle φ").isVisible());
   actionOf(button("kind of line"), "fibre")->trigger();
-  EXPECT_EQ(kept(Spot::lineName), "fibre");
+  EXPECT_EQ(firstLine().name, "fibre");
   EXPECT_TRUE(field("angle φ").isVisible());
   EXPECT_EQ(field("angle φ").edit().text(), "0 deg");
   EXPECT_EQ(field("angle φ").edit().toolTip(), "") << "nothing was dragged";

@@ -9,7 +9,7 @@ namespace planewright {
 inline Study planesStudy() {
   return *edited(newStudy(),
                  Edits{Type{{Spot::sx, "P1", "G"}, "80"}, Type{{Spot::sy, "P1", "G"}, "20"},
-                       Type{{Spot::txy, "P1", "G"}, "-30"}, Type{{Spot::lineAngle, "P1", {}}, "1 in 10"},
+                       Type{{Spot::txy, "P1", "G"}, "-30"}, Type{{Spot::lineAngle, "P1", "grain"}, "1 in 10"},
                        Insert{{Spot::plane, "P1", "scarf"}, {}},
                        Type{{Spot::planeNormal, "P1", "scarf"}, "55"},
                        Type{{Spot::reading, "P1", {}}, "30"}});

@@ -180,7 +180,7 @@ TEST_F(PlanesModelTest, aTurnChangesDataAndNoRows) {
 
 TEST_F(PlanesModelTest, rowsComeAndGoWhereTheyBelong) {
   const QPersistentModelIndex last = at(scarf, PlaneColumn::plane);
-  desk.request({Remove{{Spot::line, "P1", {}}}}, desk.newGesture(), {});
+  desk.request({Remove{{Spot::line, "P1", "grain"}}}, desk.newGesture(), {});
   EXPECT_EQ(model.rowCount(), 9);
   EXPECT_EQ(last.data().toString(), "scarf");
   desk.undoStack()->undo();

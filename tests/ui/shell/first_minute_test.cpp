@@ -47,7 +47,7 @@ TEST_F(FirstMinute, fromThreeExpressionsToAFigureOnTheKeyboardAlone) {
   EXPECT_EQ(point.stress[0].sx, "-18.6 kN/(90 mm*240 mm)");
   EXPECT_EQ(point.stress[0].sy, "0 MPa");
   EXPECT_EQ(point.stress[0].txy, "1.5*12 kN/(90 mm*240 mm)");
-  EXPECT_EQ(point.line->angle, "1 in 10");
+  EXPECT_EQ(point.lines.front().angle, "1 in 10");
   EXPECT_NEAR(window.desk().readout().state().stress.sx, -18600.0 / (90 * 240), 1e-12);
   EXPECT_NEAR(window.desk().readout().state().stress.txy, 1.5 * 12000.0 / (90 * 240), 1e-12);
 

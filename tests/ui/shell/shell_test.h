@@ -35,8 +35,9 @@ protected:
 
   static void type(Desk& desk, Spot spot, const std::string& text) {
     const Point& point = shownPoint(desk.study());
-    const std::string item =
-        spot == Spot::sx || spot == Spot::sy || spot == Spot::txy ? point.stress[0].caseId : "";
+    const bool isOfLine = spot == Spot::lineAngle || spot == Spot::lineTolerance;
+    const bool isOfCase = spot == Spot::sx || spot == Spot::sy || spot == Spot::txy;
+    const std::string item = isOfLine ? point.lines[0].name : isOfCase ? point.stress[0].caseId : "";
     ASSERT_FALSE(
         desk.request({Type{{spot, point.name, item}, text}}, desk.newGesture(), QStringLiteral("typing")));
   }

@@ -203,7 +203,7 @@ TEST_F(WindowTest, theStatusLineTellsAStepAndTakesItBack) {
   type(window.desk(), Spot::lineAngle, "7.4 deg");
   EXPECT_EQ(window.statusLine().words(), "Grain now 7.4 deg, was 1 in 10. Undo");
   Q_EMIT window.statusLine().actionClicked();
-  EXPECT_EQ(window.desk().study().points[0].line->angle, "1 in 10");
+  EXPECT_EQ(window.desk().study().points[0].lines.front().angle, "1 in 10");
   EXPECT_TRUE(window.statusLine().words().startsWith(QStringLiteral("Undone")));
 }
 
@@ -224,7 +224,7 @@ TEST_F(WindowTest, aDraggedLineIsToldWithTheWayBack) {
   MainWindow& window = shown();
   type(window.desk(), Spot::lineAngle, "1 in 10");
   dragBar(window, {QPoint(0, -40)});
-  const std::string now = window.desk().study().points[0].line->angle;
+  const std::string now = window.desk().study().points[0].lines.front().angle;
   EXPECT_NE(now, "1 in 10");
   EXPECT_EQ(window.statusLine().words().toStdString(), "Grain now " + now + ", was 1 in 10. Undo");
   QTest::keyClick(&window.element(), Qt::Key_Right);
@@ -235,7 +235,7 @@ TEST_F(WindowTest, aDragThatEndsWhereItBeganSaysNothing) {
   MainWindow& window = shown();
   type(window.desk(), Spot::lineAngle, "1 in 10");
   dragBar(window, {QPoint(0, -40), QPoint()});
-  EXPECT_EQ(window.desk().study().points[0].line->angle, "1 in 10");
+  EXPECT_EQ(window.desk().study().points[0].lines.front().angle, "1 in 10");
   EXPECT_EQ(window.statusLine().words(), "");
 }
 
