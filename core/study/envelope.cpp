@@ -20,11 +20,15 @@ std::optional<Envelope> envelopeOn(const Readout& readout, NormalAngle normal) {
     const Traction traction = tractionOn(readout.states[i].stress, normal);
     const double shear = std::abs(traction.tnt);
     if (!envelope)
-      envelope = {{traction.sn, i}, {traction.sn, i}, {shear, i}};
+      envelope = {{traction.sn, i}, {traction.sn, i}, {traction.tnt, i}, {traction.tnt, i}, {shear, i}};
     if (traction.sn < envelope->leastNormal.stress)
       envelope->leastNormal = {traction.sn, i};
     if (traction.sn > envelope->greatestNormal.stress)
       envelope->greatestNormal = {traction.sn, i};
+    if (traction.tnt < envelope->leastTnt.stress)
+      envelope->leastTnt = {traction.tnt, i};
+    if (traction.tnt > envelope->greatestTnt.stress)
+      envelope->greatestTnt = {traction.tnt, i};
     if (shear > envelope->greatestShear.stress)
       envelope->greatestShear = {shear, i};
   }

@@ -16,6 +16,8 @@ struct Extreme {
 struct Envelope {
   Extreme leastNormal;
   Extreme greatestNormal;
+  Extreme leastTnt;      ///< tnt with its sign
+  Extreme greatestTnt;   ///< tnt with its sign
   Extreme greatestShear; ///< |tnt|
   bool operator==(const Envelope&) const = default;
 };

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/governing.h"
 
+#include "core/study/envelope.h"
+
 namespace planewright {
 
 namespace {
@@ -41,6 +43,13 @@ std::optional<GoverningStates> governingOf(const std::vector<Readout>& points) {
       worst->shear = here->shear;
   }
   return worst;
+}
+
+Governs governs(const Readout& readout, const StateReading& state) {
+  const std::optional<GoverningStates> worst = governingOf(readout);
+  if (!worst || !state.judged || judgedStates(readout) < 2)
+    return {};
+  return {state.circle.s1 == worst->principal.stress, state.circle.radius == worst->shear.stress};
 }
 
 } // namespace planewright

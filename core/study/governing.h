@@ -26,4 +26,14 @@ struct GoverningStates {
 std::optional<GoverningStates> governingOf(const Readout& readout);
 std::optional<GoverningStates> governingOf(const std::vector<Readout>& points);
 
+/// Whether a judged state governs its point by either measure; one that only equals the state named does too.
+/// Never where fewer than two states are judged.
+struct Governs {
+  bool principal = false;
+  bool shear = false;
+  explicit operator bool() const { return principal || shear; }
+  bool operator==(const Governs&) const = default;
+};
+Governs governs(const Readout& readout, const StateReading& state);
+
 } // namespace planewright
