@@ -20,4 +20,8 @@ void bringReadingTo(Desk& desk, const Table& table, int row) {
                QCoreApplication::translate("Planes", "turn of the reading plane"));
 }
 
+void showCombination(Desk& desk, const QString& combination) {
+  desk.show(shownPoint(desk.study()).name, combination.toStdString());
+}
+
 } // namespace planewright

@@ -12,10 +12,23 @@ namespace planewright {
 
 namespace {
 
-Runs headingOf(const Column& column) {
-  Runs heading = runs(column.heading, translation());
-  if (!column.unit.empty())
-    heading.push_back({" " + column.unit, false});
+/// A heading in one line, or in two: `over` is empty then where nothing is to be broken.
+struct Heading {
+  Runs over;
+  Runs line;
+};
+
+Heading headingOf(const Column& column, bool broken) {
+  Heading heading{{}, runs(column.heading, translation())};
+  if (column.unit.empty())
+    return heading;
+  heading.line.push_back({" " + column.unit, false});
+  Run& first = heading.line.front();
+  const std::size_t space = first.text.find(' ');
+  if (broken && space != std::string::npos) {
+    heading.over.push_back({first.text.substr(0, space), false});
+    first.text.erase(0, space + 1);
+  }
   return heading;
 }
 
@@ -27,13 +40,25 @@ PlaneHeader::PlaneHeader(QWidget* parent) : QHeaderView(Qt::Horizontal, parent) 
   setMinimumSectionSize(20);
 }
 
-int PlaneHeader::headingWidth(int section) const {
-  const auto& columns = static_cast<TableModel*>(model())->table().columns;
-  return qCeil(runsWidth(headingOf(columns[static_cast<std::size_t>(section)]), font()));
+const Column& PlaneHeader::columnAt(int section) const {
+  return static_cast<TableModel*>(model())->table().columns[static_cast<std::size_t>(section)];
+}
+
+int PlaneHeader::headingWidth(int section, bool broken) const {
+  const Heading heading = headingOf(columnAt(section), broken);
+  return qCeil(qMax(runsWidth(heading.over, font()), runsWidth(heading.line, font())));
+}
+
+void PlaneHeader::setBroken(bool broken) {
+  if (m_isBroken == broken)
+    return;
+  m_isBroken = broken;
+  Q_EMIT geometriesChanged();
+  viewport()->update();
 }
 
 QSize PlaneHeader::sizeHint() const {
-  return {100, fontMetrics().height() + 8};
+  return {100, (m_isBroken ? 2 : 1) * fontMetrics().height() + 8};
 }
 
 // The style would paint the room beside the last heading in the colour of buttons.
@@ -45,15 +70,19 @@ void PlaneHeader::paintEvent(QPaintEvent* event) {
 
 void PlaneHeader::paintSection(QPainter* painter, const QRect& rect, int section) const {
   const Look look = lookOf(*this);
-  const auto& columns = static_cast<TableModel*>(model())->table().columns;
-  const Column& column = columns[static_cast<std::size_t>(section)];
+  const Column& column = columnAt(section);
+  const Heading heading = headingOf(column, m_isBroken);
   painter->save();
   painter->fillRect(rect, look.colour(Role::canvas));
   painter->fillRect(QRect(rect.left(), rect.bottom(), rect.width(), 1), look.colour(Role::rule));
   painter->setFont(font());
   painter->setPen(look.colour(Role::soft));
-  drawRuns(*painter, PlaneDelegate::textBox(rect, section), headingOf(column),
-           column.isNumber ? Qt::AlignRight : Qt::AlignLeft);
+  const Qt::Alignment side = column.isNumber ? Qt::AlignRight : Qt::AlignLeft;
+  const QRectF box = PlaneDelegate::textBox(rect, section);
+  const qreal upper = m_isBroken ? fontMetrics().height() : 0; // the heading itself stands on the lower line
+  drawRuns(*painter, box.adjusted(0, upper, 0, 0), heading.line, side);
+  if (!heading.over.empty())
+    drawRuns(*painter, box.adjusted(0, 0, 0, -upper), heading.over, side);
   painter->restore();
 }
 

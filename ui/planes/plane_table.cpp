@@ -21,6 +21,7 @@ namespace {
 constexpr int headingPadding = 18;
 constexpr int namesWithNote = 400;
 constexpr int mostAir = 32;
+constexpr int mostTight = 8; ///< of the space before a number, which stands at the right of its cell
 
 void putOnClipboard(const Table& table) {
   auto* data = new QMimeData;
@@ -52,6 +53,8 @@ PlaneTable::PlaneTable(TableModel& model, QWidget* parent)
   viewport()->setBackgroundRole(QPalette::AlternateBase);
   connect(&m_model, &QAbstractItemModel::dataChanged, this, &PlaneTable::growColumns);
   connect(&m_model, &QAbstractItemModel::modelReset, this, &PlaneTable::measure);
+  connect(&m_model, &QAbstractItemModel::columnsInserted, this, &PlaneTable::measure);
+  connect(&m_model, &QAbstractItemModel::columnsRemoved, this, &PlaneTable::measure);
   connect(m_delegate, &QAbstractItemDelegate::closeEditor, this,
           [this](QWidget*, QAbstractItemDelegate::EndEditHint hint) {
             if (hint == QAbstractItemDelegate::RevertModelCache)
@@ -68,26 +71,37 @@ void PlaneTable::measure() {
 }
 
 void PlaneTable::growColumns() {
-  const QList<int> before = m_needed;
   for (int column = 0; column < m_model.columnCount(); ++column) {
     int& needed = m_needed[column];
-    needed = qMax(needed, m_header->headingWidth(column) + headingPadding);
     for (int row = 0; row < m_model.rowCount(); ++row)
       needed = qMax(needed, PlaneDelegate::cellWidth(font(), m_model.index(row, column)));
   }
-  if (m_needed != before)
-    spreadColumns();
+  spreadColumns();
 }
 
-// First the names get room for a note behind them, then the numbers some air, then the names the rest.
+QList<int> PlaneTable::widthsOfNumbers(bool brokenHeadings) const {
+  QList<int> widths;
+  for (int column = 1; column < m_needed.size(); ++column)
+    widths << qMax(m_needed.at(column), m_header->headingWidth(column, brokenHeadings) + headingPadding);
+  return widths;
+}
+
+// First the names get room for a note behind them, then the numbers some air, then the names the rest. Where
+// the numbers do not fit beside the names their headings are broken, then they stand closer.
 void PlaneTable::spreadColumns() {
-  const int count = static_cast<int>(m_needed.size()) - 1;
-  const int numbers = std::accumulate(m_needed.begin() + 1, m_needed.end(), 0);
-  const int names = isColumnHidden(0) ? 0 : qMax(m_needed.front(), namesWithNote);
-  const int air = qBound(0, (viewport()->width() - numbers - names) / count, mostAir);
+  const int least = isColumnHidden(0) ? 0 : m_needed.front();
+  const auto sum = [](const QList<int>& widths) { return std::accumulate(widths.begin(), widths.end(), 0); };
+  m_header->setBroken(sum(widthsOfNumbers(false)) + least > viewport()->width());
+  const int room = viewport()->width(); // less where the higher headings bring a scroll bar
+  const QList<int> widths = widthsOfNumbers(m_header->isBroken());
+  const auto count = static_cast<int>(widths.size());
+  const int numbers = sum(widths);
+  const int withNote = isColumnHidden(0) ? 0 : qMax(least, namesWithNote);
+  const int tight = qBound(-mostTight, (room - numbers - least - count + 1) / count, 0);
+  const int air = tight < 0 ? tight : qBound(0, (room - numbers - withNote) / count, mostAir);
   for (int column = 1; column <= count; ++column)
-    setColumnWidth(column, m_needed.at(column) + air);
-  setColumnWidth(0, qMax(m_needed.front(), viewport()->width() - numbers - count * air));
+    setColumnWidth(column, widths.at(column - 1) + air);
+  setColumnWidth(0, qMax(m_needed.front(), room - numbers - count * air));
 }
 
 void PlaneTable::resizeEvent(QResizeEvent* event) {
@@ -122,7 +136,7 @@ void PlaneTable::keyPressEvent(QKeyEvent* event) {
   else if (isEnter(*event) && event->modifiers() & Qt::ControlModifier)
     Q_EMIT otherPressed();
   else if (isEnter(*event))
-    Q_EMIT goTo(currentIndex().row());
+    goFrom(currentIndex());
   else if (event->key() == Qt::Key_Insert)
     Q_EMIT insertPressed();
   else if (event->key() == Qt::Key_Delete)
@@ -134,6 +148,14 @@ void PlaneTable::keyPressEvent(QKeyEvent* event) {
 void PlaneTable::mouseDoubleClickEvent(QMouseEvent* event) {
   QTableView::mouseDoubleClickEvent(event);
   if (const QModelIndex index = indexAt(event->pos()); index.isValid())
+    goFrom(index);
+}
+
+// From a value of another combination to that combination, else to the plane of the row.
+void PlaneTable::goFrom(const QModelIndex& index) {
+  if (const QString combination = m_model.combinationIn(index); !combination.isEmpty())
+    Q_EMIT combinationWanted(combination);
+  else
     Q_EMIT goTo(index.row());
 }
 

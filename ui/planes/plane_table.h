@@ -25,6 +25,8 @@ public slots:
 
 signals:
   void goTo(int row);
+  /// Enter or a double click on a value that a combination gives.
+  void combinationWanted(const QString& combination);
   void insertPressed();
   void deletePressed(int row);
   void otherPressed();
@@ -37,15 +39,16 @@ protected:
   void changeEvent(QEvent* event) override;
 
 private:
+  void goFrom(const QModelIndex& index);
   void growColumns();
   void spreadColumns();
+  QList<int> widthsOfNumbers(bool brokenHeadings) const;
   void measure();
 
   TableModel& m_model;
   PlaneDelegate* m_delegate;
   PlaneHeader* m_header;
-  QList<int>
-      m_needed; ///< widest content so far of each column; grows only, so that nothing jitters in a drag
+  QList<int> m_needed; ///< widest cell so far of each column; grows only, so that nothing jitters in a drag
 };
 
 } // namespace planewright

@@ -31,7 +31,8 @@ void PlanesModel::refresh() {
   if (m_asked && !solution())
     m_asked.reset();
   const Readout& readout = m_desk.readout();
-  setTable(planesTable(m_desk.study(), readout, readout.state()));
+  const Study& study = m_desk.study();
+  setTable(withEnvelope(planesTable(study, readout, readout.state()), study, readout));
 }
 
 int PlanesModel::rowCount(const QModelIndex& parent) const {
@@ -62,8 +63,8 @@ Qt::ItemFlags PlanesModel::flags(const QModelIndex& index) const {
   const PlaneColumn column = columnOf(index);
   const bool angle = column == PlaneColumn::normal || column == PlaneColumn::cut;
   const bool named = isWatchRow(index.row()) || !watchedIn(index.row()).empty();
-  const bool editable =
-      index.row() == 0 ? column != PlaneColumn::plane : named && (angle || column == PlaneColumn::plane);
+  const bool ofReading = angle || column == PlaneColumn::sn || column == PlaneColumn::tnt;
+  const bool editable = index.row() == 0 ? ofReading : named && (angle || column == PlaneColumn::plane);
   return editable ? flags | Qt::ItemIsEditable : flags;
 }
 
@@ -86,6 +87,9 @@ QString PlanesModel::editText(const QModelIndex& index) const {
     return cell.exact ? fromUtf8(angleText(Angle::fromDegrees(*cell.exact))) : QString();
   case PlaneColumn::sn:
   case PlaneColumn::tnt:
+  case PlaneColumn::leastSn:
+  case PlaneColumn::greatestSn:
+  case PlaneColumn::greatestShear:
     break;
   }
   return cell.exact ? fromUtf8(exactNumber(*cell.exact)) : QString();

@@ -21,6 +21,8 @@ PlanesPage::PlanesPage(Desk& desk, QWidget* parent)
   setFocusProxy(m_table);
   m_table->setAccessibleName(tr("Planes"));
   connect(m_table, &PlaneTable::goTo, this, &PlanesPage::goTo);
+  connect(m_table, &PlaneTable::combinationWanted, this,
+          [this](const QString& combination) { showCombination(m_desk, combination); });
   connect(m_table, &PlaneTable::insertPressed, this, &PlanesPage::watch);
   connect(m_table, &PlaneTable::deletePressed, this, &PlanesPage::remove);
   connect(m_table, &PlaneTable::otherPressed, m_model, &PlanesModel::swapSolution);
@@ -36,9 +38,18 @@ void PlanesPage::buildMenu() {
     auto* action = new QAction(key.isEmpty() ? words : words + QLatin1Char('\t') + key, m_table);
     connect(action, &QAction::triggered, this, slot);
     m_table->addAction(action);
+    return action;
   };
   m_table->setContextMenuPolicy(Qt::ActionsContextMenu);
   add(tr("Bring the reading plane here"), tr("Enter"), [this] { goTo(m_table->currentIndex().row()); });
+  QAction* combination = add(tr("Show the combination of this value"), tr("Enter"), [this] {
+    showCombination(m_desk, m_model->combinationIn(m_table->currentIndex()));
+  });
+  combination->setVisible(false);
+  connect(m_table->selectionModel(), &QItemSelectionModel::currentChanged, combination,
+          [this, combination](const QModelIndex& current) {
+            combination->setVisible(!m_model->combinationIn(current).isEmpty());
+          });
   add(tr("Watch the reading plane"), tr("Ins"), [this] { watch(); });
   add(tr("Rename"), tr("F2"), [this] { edit(m_table->currentIndex().row(), 0); });
   add(tr("Remove"), tr("Del"), [this] { remove(m_table->currentIndex().row()); });

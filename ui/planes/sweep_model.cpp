@@ -13,11 +13,16 @@ SweepModel::SweepModel(Desk& desk, QObject* parent) : TableModel(parent), m_desk
 void SweepModel::setStep(Angle step) {
   assert(step.degrees() >= leastStep && step.degrees() <= greatestStep);
   m_step = step;
-  resetTable(sweepTable(m_desk.study(), m_desk.readout(), m_desk.readout().state(), m_step));
+  resetTable(swept());
 }
 
 void SweepModel::refresh() {
-  setTable(sweepTable(m_desk.study(), m_desk.readout(), m_desk.readout().state(), m_step));
+  setTable(swept());
+}
+
+Table SweepModel::swept() const {
+  const Readout& readout = m_desk.readout();
+  return withEnvelope(sweepTable(m_desk.study(), readout, readout.state(), m_step), m_desk.study(), readout);
 }
 
 int SweepModel::tintedRow() const {

@@ -30,6 +30,8 @@ public:
   void refresh();
 
 private:
+  Table swept() const;
+
   Desk& m_desk;
   Angle m_step = Angle::fromDegrees(5);
 };

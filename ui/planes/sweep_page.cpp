@@ -62,6 +62,8 @@ SweepPage::SweepPage(Desk& desk, QWidget* parent)
   connect(m_step, &DraftEdit::left, this, &SweepPage::takeStep);
   connect(m_table, &PlaneTable::goTo, this,
           [this](int row) { bringReadingTo(m_desk, m_model->table(), row); });
+  connect(m_table, &PlaneTable::combinationWanted, this,
+          [this](const QString& combination) { showCombination(m_desk, combination); });
   m_step->setPutBack([this] {
     const bool typed = m_step->isModified();
     showStep();

@@ -31,6 +31,13 @@ int TableModel::columnCount(const QModelIndex& parent) const {
   return parent.isValid() ? 0 : static_cast<int>(m_table.columns.size());
 }
 
+QString TableModel::combinationIn(const QModelIndex& index) const {
+  const auto row = static_cast<std::size_t>(index.row());
+  if (!index.isValid() || row >= m_table.rows.size())
+    return {};
+  return fromUtf8(m_table.rows[row].cells[static_cast<std::size_t>(index.column())].combination);
+}
+
 QVariant TableModel::data(const QModelIndex& index, int role) const {
   const auto row = static_cast<std::size_t>(index.row());
   if (!index.isValid() || row >= m_table.rows.size())
@@ -42,9 +49,15 @@ QVariant TableModel::data(const QModelIndex& index, int role) const {
   case Qt::DisplayRole:
     return shown(cell.shown);
   case Qt::ToolTipRole:
+    if (!cell.combination.empty())
+      return tr("%1 in %2\nEnter shows this combination")
+          .arg(fullDigits(*cell.exact, column), combinationIn(index));
     if (cell.exact)
       return fullDigits(*cell.exact, column);
     return shown(noteOf(index.row()).words);
+  case Qt::AccessibleTextRole:
+    return cell.combination.empty() ? shown(cell.shown)
+                                    : tr("%1 in %2").arg(shown(cell.shown), combinationIn(index));
   case Qt::AccessibleDescriptionRole:
     return index.column() == 0 ? shown(noteOf(index.row()).words) : QString();
   case Qt::TextAlignmentRole:
@@ -66,6 +79,23 @@ QVariant TableModel::headerData(int section, Qt::Orientation orientation, int ro
   return column.unit.empty() ? heading : heading + QLatin1Char(' ') + fromUtf8(column.unit);
 }
 
+// Columns come and go at the end, before the rows change.
+void TableModel::setColumns(const std::vector<Column>& columns) {
+  const int before = columnCount();
+  const int now = static_cast<int>(columns.size());
+  if (now > before)
+    beginInsertColumns({}, before, now - 1);
+  else
+    beginRemoveColumns({}, now, before - 1);
+  m_table.columns = columns;
+  for (Row& row : m_table.rows)
+    row.cells.resize(columns.size());
+  if (now > before)
+    endInsertColumns();
+  else
+    endRemoveColumns();
+}
+
 // One block of rows may come or go; what stands above and below it stays. Any other change of rows is a
 // table anew.
 void TableModel::setTable(Table table) {
@@ -80,10 +110,14 @@ void TableModel::setTable(Table table) {
                                 now.rbegin(), isSameRow);
   const int first = static_cast<int>(above);
   const int come = static_cast<int>(now.size()) - static_cast<int>(old.size());
-  if (m_table.columns.size() != table.columns.size() || (come != 0 && !below)) {
+  if (m_table.columns.empty() || (come != 0 && !below)) {
     resetTable(std::move(table));
     return;
   }
+  if (m_table.columns.size() != table.columns.size())
+    setColumns(table.columns);
+  const bool otherUnits =
+      !std::ranges::equal(m_table.columns, table.columns, {}, &Column::unit, &Column::unit);
   if (come < 0)
     beginRemoveRows({}, first, first - come - 1);
   else if (come > 0)
@@ -93,6 +127,8 @@ void TableModel::setTable(Table table) {
     endRemoveRows();
   else if (come > 0)
     endInsertRows();
+  if (otherUnits)
+    Q_EMIT headerDataChanged(Qt::Horizontal, 0, columnCount() - 1);
   tellChanged();
 }
 

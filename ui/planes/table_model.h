@@ -9,8 +9,8 @@
 
 namespace planewright {
 
-/// The columns of the tables of planes.
-enum class PlaneColumn { plane, normal, cut, sn, tnt };
+/// The columns of the tables of planes; the last three stand where several combinations are judged.
+enum class PlaneColumn { plane, normal, cut, sn, tnt, leastSn, greatestSn, greatestShear };
 
 /// What stands at the right end of the first cell of a row: a fact, a choice to click, or what is wrong.
 struct RowNote {
@@ -19,8 +19,8 @@ struct RowNote {
   Text words;
 };
 
-/// A Table of core as an item model. A new Table of the same shape only changes data, so that cursor,
-/// selection and an open editor stay.
+/// A Table of core as an item model. A new Table only changes data where it has the same shape, and lets
+/// columns come and go at the end, so that cursor, selection and an open editor stay.
 class TableModel : public QAbstractTableModel {
   Q_OBJECT
 
@@ -28,6 +28,8 @@ public:
   using QAbstractTableModel::QAbstractTableModel;
 
   const Table& table() const { return m_table; }
+  /// The combination that gives the value of a cell; empty for one of the shown state.
+  QString combinationIn(const QModelIndex& index) const;
   /// The row on the selection ground, -1 for none; bold where it is the reading plane itself.
   virtual int tintedRow() const = 0;
   virtual bool tintIsBold() const = 0;
@@ -50,6 +52,8 @@ protected:
   void tellChanged();
 
 private:
+  void setColumns(const std::vector<Column>& columns);
+
   Table m_table;
 };
 
