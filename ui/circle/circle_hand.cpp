@@ -4,6 +4,7 @@
 
 #include "core/study/cut_text.h"
 #include "ui/circle/others.h"
+#include "ui/circle/ranges.h"
 
 #include <QCoreApplication>
 #include <QFocusEvent>
@@ -79,7 +80,7 @@ QString CirclePlot::tipAt(QPointF pixel) const {
     return tr("The x face cannot be drawn here: %1 is not one case with factor 1,\n"
               "so a drag would not say which case to change.")
         .arg(fromUtf8(now.readout.state().combination));
-  return m_hovered;
+  return m_hovered.isEmpty() ? shown(rangeWords(now, pixel)) : m_hovered;
 }
 
 bool CirclePlot::viewportEvent(QEvent* event) {
