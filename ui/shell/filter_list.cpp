@@ -2,15 +2,17 @@
 #include "ui/shell/filter_list.h"
 
 #include <QCoreApplication>
+#include <QHeaderView>
 #include <QKeyEvent>
 #include <QLineEdit>
-#include <QListWidget>
+#include <QTreeWidget>
 #include <QVBoxLayout>
 
 namespace planewright {
 
-FilterList::FilterList(const QStringList& names, const QString& current, QWidget* parent)
-    : QFrame(parent, Qt::Popup), m_filter(new QLineEdit(this)), m_list(new QListWidget(this)) {
+FilterList::FilterList(const QStringList& names, const ListDetails& details, const QString& current,
+                       QWidget* parent)
+    : QFrame(parent, Qt::Popup), m_filter(new QLineEdit(this)), m_list(new QTreeWidget(this)) {
   setAttribute(Qt::WA_DeleteOnClose);
   setFrameShape(QFrame::StyledPanel);
   resize(420, 360);
@@ -22,13 +24,38 @@ FilterList::FilterList(const QStringList& names, const QString& current, QWidget
   m_filter->setAccessibleName(tr("Filter"));
   m_filter->installEventFilter(this);
   m_list->setFocusPolicy(Qt::NoFocus);
-  m_list->addItems(names);
-  const QList<QListWidgetItem*> found = m_list->findItems(current, Qt::MatchExactly);
-  m_list->setCurrentItem(found.value(0, m_list->item(0)));
+  fill(names, details);
+  const QList<QTreeWidgetItem*> found = m_list->findItems(current, Qt::MatchExactly);
+  m_list->setCurrentItem(found.value(0, m_list->topLevelItem(0)));
   connect(m_filter, &QLineEdit::textEdited, this, &FilterList::narrow);
   connect(m_filter, &QLineEdit::returnPressed, this, &FilterList::choose);
-  connect(m_list, &QListWidget::itemClicked, this, &FilterList::choose);
+  connect(m_list, &QTreeWidget::itemClicked, this, &FilterList::choose);
   m_filter->setFocus();
+}
+
+// The names take the room that values and remarks leave; a longer one is told by its tooltip.
+void FilterList::fill(const QStringList& names, const ListDetails& details) {
+  m_list->setRootIsDecorated(false);
+  m_list->setUniformRowHeights(true);
+  m_list->setStyleSheet(QStringLiteral(
+      "QTreeView::item { padding: 3px 6px; } QHeaderView::section { background: palette(base); border: none; "
+      "border-bottom: 1px solid palette(mid); padding: 3px 6px; }"));
+  for (qsizetype i = 0; i < names.size(); ++i) {
+    auto* item = new QTreeWidgetItem(m_list, {names[i], details.values.value(i), details.remarks.value(i)});
+    item->setToolTip(0, names[i]);
+    item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
+  }
+  const bool plain = details.valueHeading.isEmpty();
+  m_list->setHeaderHidden(plain);
+  if (plain)
+    return;
+  m_list->setHeaderLabels({details.nameHeading, details.valueHeading, QString()});
+  m_list->headerItem()->setToolTip(1, details.valueMeaning);
+  m_list->headerItem()->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
+  m_list->header()->setStretchLastSection(false);
+  m_list->header()->setSectionsClickable(false);
+  m_list->header()->setSectionResizeMode(QHeaderView::ResizeToContents);
+  m_list->header()->setSectionResizeMode(0, QHeaderView::Stretch);
 }
 
 bool FilterList::eventFilter(QObject* watched, QEvent* event) {
@@ -41,10 +68,10 @@ bool FilterList::eventFilter(QObject* watched, QEvent* event) {
 }
 
 void FilterList::narrow(const QString& typed) {
-  QListWidgetItem* first = nullptr;
-  for (int row = 0; row < m_list->count(); ++row) {
-    QListWidgetItem* item = m_list->item(row);
-    item->setHidden(!item->text().contains(typed, Qt::CaseInsensitive));
+  QTreeWidgetItem* first = nullptr;
+  for (int row = 0; row < m_list->topLevelItemCount(); ++row) {
+    QTreeWidgetItem* item = m_list->topLevelItem(row);
+    item->setHidden(!item->text(0).contains(typed, Qt::CaseInsensitive));
     if (!first && !item->isHidden())
       first = item;
   }
@@ -52,8 +79,8 @@ void FilterList::narrow(const QString& typed) {
 }
 
 void FilterList::choose() {
-  if (const QListWidgetItem* item = m_list->currentItem()) {
-    Q_EMIT chosen(item->text());
+  if (const QTreeWidgetItem* item = m_list->currentItem()) {
+    Q_EMIT chosen(item->text(0));
     close();
   }
 }

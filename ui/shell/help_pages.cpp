@@ -64,11 +64,13 @@ QString keys() {
 <tr><td><b>PageUp, PageDown</b></td><td>on a handle: next, previous named direction</td></tr>
 <tr><td><b>Home, Enter, Esc</b></td><td>on a handle: to 0°; type an angle; a drag back to its start</td></tr>
 <tr><td><b>Ctrl, Shift</b></td><td>in a drag: turn freely; turn at a tenth</td></tr>
-<tr><td><b>F2, Enter</b></td><td>in Planes: edit; bring the reading plane there</td></tr>
+<tr><td><b>F2, Enter</b></td><td>in Planes: edit; bring the reading plane there, or show the combination of a least or greatest value</td></tr>
 <tr><td><b>Ctrl+Enter</b></td><td>in Planes: the other plane with the same stress</td></tr>
 <tr><td><b>Insert, Delete</b></td><td>in Planes: watch the reading plane; remove</td></tr>
 <tr><td><b>Ctrl+PageUp, Ctrl+PageDown</b></td><td>previous, next point</td></tr>
 <tr><td><b>Alt+PageUp, Alt+PageDown</b></td><td>previous, next combination</td></tr>
+<tr><td><b>Ctrl+G</b></td><td>the combination with the greatest σ<sub>1</sub> at this point; again: the greatest shear in the plane</td></tr>
+<tr><td><b>Ctrl+Shift+G</b></td><td>the same over all points of the study</td></tr>
 <tr><td><b>Ctrl+E, Ctrl+0</b></td><td>arrange the figure; fit the circle</td></tr>
 <tr><td><b>Ctrl+N, O, S, P, Q, Z, C; F11</b></td><td>as everywhere</td></tr>
 </table>

@@ -9,6 +9,7 @@
 #include "ui/shell/areas.h"
 #include "ui/shell/body.h"
 #include "ui/shell/build_dialog.h"
+#include "ui/shell/governing_words.h"
 #include "ui/shell/help_window.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/picker.h"
@@ -119,6 +120,12 @@ void MainWindow::addStudyMenu() {
   add(menu, tr("Previous combination"), Qt::ALT | Qt::Key_PageUp,
       [combinations] { combinations->previous(); });
   add(menu, tr("Next combination"), Qt::ALT | Qt::Key_PageDown, [combinations] { combinations->next(); });
+  add(menu, tr("&Governing combination here"), Qt::CTRL | Qt::Key_G,
+      [this] { showGoverningCombination(m_desk); });
+  add(menu, tr("Governing point and combination"), Qt::CTRL | Qt::SHIFT | Qt::Key_G, [this] {
+    settleDrafts();
+    showGoverningPoint(m_desk);
+  });
 }
 
 void MainWindow::addListsOfStudy(QMenu& menu) {

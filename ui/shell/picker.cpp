@@ -1,8 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/picker.h"
 
-#include "ui/shell/filter_list.h"
-
 #include <QEvent>
 #include <QHBoxLayout>
 #include <QLabel>
@@ -97,7 +95,8 @@ void Picker::writeName() {
 }
 
 FilterList* Picker::openList() {
-  auto* list = new FilterList(m_names, m_names.value(m_current), this);
+  auto* list =
+      new FilterList(m_names, m_details ? m_details() : ListDetails(), m_names.value(m_current), this);
   connect(list, &FilterList::chosen, this, &Picker::chosen);
   list->move(m_name->mapToGlobal(QPoint(0, m_name->height() + 2)));
   list->QWidget::show();

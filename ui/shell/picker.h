@@ -1,16 +1,17 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include <QStringList>
+#include "ui/shell/filter_list.h"
+
 #include <QWidget>
+
+#include <functional>
 
 class QLabel;
 class QPushButton;
 class QToolButton;
 
 namespace planewright {
-
-class FilterList;
 
 /// "Point [P1 chord notch] < > 3 of 24": says which of several things is shown and lets another be taken.
 class Picker : public QWidget {
@@ -22,6 +23,8 @@ public:
   void show(const QStringList& names, qsizetype current);
   /// The width of the button that carries the name.
   void setNameWidth(int width);
+  /// Asked when the list opens, for what stands behind the names that were shown last.
+  void setDetails(std::function<ListDetails()> details) { m_details = std::move(details); }
   /// Opens the list of names.
   FilterList* openList();
 
@@ -48,6 +51,7 @@ private:
   QLabel* m_count;
   QStringList m_names; ///< what the buttons offer; the study has them
   qsizetype m_current = 0;
+  std::function<ListDetails()> m_details;
 };
 
 } // namespace planewright

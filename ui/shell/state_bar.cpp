@@ -2,22 +2,32 @@
 #include "ui/shell/state_bar.h"
 
 #include "ui/look/look.h"
+#include "ui/shell/governing_words.h"
 #include "ui/shell/picker.h"
 
 #include <QHBoxLayout>
+#include <QLabel>
 #include <QPushButton>
 
 namespace planewright {
 
+namespace {
+
+/// A narrower bar has shorter names and does not say what governs.
+constexpr int roomy = 1100;
+
+} // namespace
+
 StateBar::StateBar(Desk& desk, QWidget* parent)
     : QWidget(parent), m_desk(desk), m_points(new Picker(tr("Point"), tr("Ctrl"), this)),
       m_combinations(new Picker(tr("Combination"), tr("Alt"), this)),
-      m_figure(new QPushButton(tr("Figure…"), this)) {
+      m_governs(new QLabel(tr("governs here"), this)), m_figure(new QPushButton(tr("Figure…"), this)) {
   auto* row = new QHBoxLayout(this);
   row->setContentsMargins(12, 0, 12, 0);
   row->setSpacing(20);
   row->addWidget(m_points);
   row->addWidget(m_combinations);
+  row->addWidget(m_governs);
   row->addStretch();
   row->addWidget(m_figure);
   setFixedHeight(barHeight);
@@ -29,6 +39,7 @@ StateBar::StateBar(Desk& desk, QWidget* parent)
           [this](const QString& name) { m_desk.show(name.toStdString(), m_desk.study().shown.combination); });
   connect(m_combinations, &Picker::chosen, this,
           [this](const QString& name) { m_desk.show(m_desk.study().shown.point, name.toStdString()); });
+  m_combinations->setDetails([this] { return combinationDetails(m_desk.study(), m_desk.readout()); });
   connect(&m_desk, &Desk::changed, this, &StateBar::refresh);
   refresh();
 }
@@ -42,14 +53,22 @@ void StateBar::refresh() {
   for (const StateReading& state : m_desk.readout().states)
     states << fromUtf8(state.combination);
   m_combinations->show(states, static_cast<qsizetype>(m_desk.readout().shown));
+  refreshGoverns();
+}
+
+void StateBar::refreshGoverns() {
+  const Governs how = governs(m_desk.readout(), m_desk.readout().state());
+  m_governs->setToolTip(governsInWords(how));
+  m_governs->setAccessibleDescription(governsInWords(how));
+  m_governs->setVisible(how && width() >= roomy);
 }
 
 void StateBar::resizeEvent(QResizeEvent* event) {
   QWidget::resizeEvent(event);
-  constexpr int roomy = 1100;
   const int name = width() < roomy ? 128 : 200;
   m_points->setNameWidth(name);
   m_combinations->setNameWidth(name);
+  refreshGoverns();
 }
 
 } // namespace planewright

@@ -5,13 +5,14 @@
 
 #include <QWidget>
 
+class QLabel;
 class QPushButton;
 
 namespace planewright {
 
 class Picker;
 
-/// Says what one looks at: point and combination; and leads to the figure.
+/// Says what one looks at: point and combination, and whether that governs; leads to the figure.
 class StateBar : public QWidget {
   Q_OBJECT
 
@@ -22,6 +23,8 @@ public:
 
   Picker& points() const { return *m_points; }
   Picker& combinations() const { return *m_combinations; }
+  /// "governs here", while the shown combination does and the window is wide enough.
+  QLabel& governsHere() const { return *m_governs; }
   QPushButton& figureButton() const { return *m_figure; }
 
 protected:
@@ -29,10 +32,12 @@ protected:
 
 private:
   void refresh();
+  void refreshGoverns();
 
   Desk& m_desk;
   Picker* m_points;
   Picker* m_combinations;
+  QLabel* m_governs;
   QPushButton* m_figure;
 };
 
