@@ -42,7 +42,7 @@ Result<Study> typedAt(const Study& study, const Place& place, const std::string&
 /// The angle or tolerance as a study would keep it at such a place.
 Result<std::string> keptAngle(Spot spot, const GivenOption& option) {
   Study study = bareStudy();
-  study.points.front().lines = {Line{pointName}};
+  study.points.front().lines = {Line{pointName, LineKind::other, "0 deg", ""}};
   study.points.front().planes = {WatchedPlane{pointName, "0 deg", ""}};
   const Place place{spot, pointName, pointName};
   const Result<Study> after = typedAt(study, place, option.value, option.name);

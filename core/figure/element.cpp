@@ -167,6 +167,18 @@ LabelWish lineWish(const Drawing& drawing) {
   return wish(drawing, "phi", drawing.frame.at(end, radius), words, "φ", Role::line, 2);
 }
 
+/// A further line goes by its name; nothing turns it here.
+LabelWish furtherLineWish(const Drawing& drawing, const LineReading& line) {
+  const Text words = PW_TEXT("Figure", "%1 %2").with(line.name).with(shownDegrees(line.angle.value, 1));
+  return {drawing.frame.at(line.angle.value + halfTurn, part::lineEnd),
+          runs(words, drawing.order.translate),
+          runs(verbatim(line.name), drawing.order.translate),
+          Role::line,
+          true,
+          4,
+          "line"};
+}
+
 /// The tip of the shear arrow on a face.
 Vec shearTip(const Drawing& drawing, Angle face, const FaceArrows& acts) {
   return drawing.frame.in(face, part::shear, acts.shear / 2);
@@ -244,6 +256,11 @@ std::vector<LabelWish> drawElement(Picture& picture, const Study& study, const R
     drawTexture(picture, frame, line->kind, line->angle.value, normal, solid(Role::grain, order.hair));
     drawLine(picture, frame, *line, order);
   }
+  for (std::size_t i = 1; i < readout.lines.size(); ++i) {
+    const Angle phi = readout.lines[i].angle.value;
+    drawing.stroke({frame.at(phi + halfTurn, part::lineEnd), frame.at(phi, part::lineEnd)},
+                   Pen{Role::line, order.hair, Dash::longDashDot});
+  }
   std::vector<LabelWish> wishes = order.turned ? drawTurned(drawing) : drawGiven(drawing);
   if (line) {
     wishes.push_back(lineWish(drawing));
@@ -253,6 +270,8 @@ std::vector<LabelWish> drawElement(Picture& picture, const Study& study, const R
     if (order.handles)
       drawBars(picture, frame, line->angle.value, order);
   }
+  for (std::size_t i = 1; i < readout.lines.size(); ++i)
+    wishes.push_back(furtherLineWish(drawing, readout.lines[i]));
   if (order.handles && order.knob)
     drawKnob(picture, frame, normal, order);
   return wishes;

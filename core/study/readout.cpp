@@ -80,7 +80,7 @@ void addTerm(StateReading& state, double factor, const std::vector<CaseReading>&
   state.axial += factor * one.axial;
   state.bending += factor * one.bending;
   state.scale += std::abs(factor) * one.scale;
-  state.acting.push_back(index);
+  state.acting.push_back({index, factor});
 }
 
 /// Of several terms that cancel only rounding is left: it is not shown as a stress, nor as a direction.
@@ -170,9 +170,9 @@ AlongParts alongPartsOf(const StateReading& state, LineAngle line) {
 
 std::vector<std::string> missingCases(const Readout& readout, const StateReading& state) {
   std::vector<std::string> ids;
-  for (const std::size_t index : state.acting)
-    if (!readout.cases[index].isListed)
-      ids.push_back(readout.cases[index].id);
+  for (const ActingCase& acting : state.acting)
+    if (!readout.cases[acting.index].isListed)
+      ids.push_back(readout.cases[acting.index].id);
   return ids;
 }
 

@@ -53,6 +53,13 @@ struct CaseReading {
   bool operator==(const CaseReading&) const = default;
 };
 
+/// A case that acts in a state, with its factor, which is not 0.
+struct ActingCase {
+  std::size_t index = 0; ///< in the cases of the Readout
+  double factor = 1;
+  bool operator==(const ActingCase&) const = default;
+};
+
 /// What follows from one combination (or from a single case) at a point. Stresses in N/mm2, in the study's
 /// sign convention.
 struct StateReading {
@@ -67,8 +74,8 @@ struct StateReading {
   std::vector<LineStress> lines; ///< one for each line of the Readout
   std::vector<Traction> watched; ///< one for each watched plane of the Readout
   Traction reading;
-  std::optional<FreeEdge> edge;    ///< where the point has a free edge
-  std::vector<std::size_t> acting; ///< the cases of the Readout with a non-zero factor
+  std::optional<FreeEdge> edge; ///< where the point has a free edge
+  std::vector<ActingCase> acting;
   bool operator==(const StateReading&) const = default;
 };
 

@@ -19,8 +19,8 @@ std::vector<Text> cautionsOf(const Readout& readout, const StateReading& state) 
   std::vector<Text> cautions;
   for (const std::string& id : missingCases(readout, state))
     cautions.push_back(PW_TEXT("Readout", "No stresses are given for case %1: it counts as 0.").with(id));
-  for (const std::size_t index : state.acting)
-    addNew(cautions, readout.cases[index].cautions);
+  for (const ActingCase& acting : state.acting)
+    addNew(cautions, readout.cases[acting.index].cautions);
   return cautions;
 }
 

@@ -4,10 +4,13 @@
 #include "ui/given/choice_button.h"
 #include "ui/given/sense_picture.h"
 #include "ui/look/look.h"
+#include "ui/look/quiet_button.h"
 
 #include <QButtonGroup>
 #include <QGridLayout>
+#include <QHBoxLayout>
 #include <QLabel>
+#include <QMenu>
 #include <QVBoxLayout>
 
 namespace planewright {
@@ -49,6 +52,7 @@ ConventionGroup::ConventionGroup(Desk& desk, QWidget* parent)
   addChoices<Positive>(*grid, m_positive);
   addChoices<ShearAxis>(*grid, m_shearAxis);
   body().addLayout(grid);
+  addShearForce();
   addUnits();
   setFolded(true);
   connect(&m_desk, &Desk::changed, this, &ConventionGroup::refresh);
@@ -87,8 +91,25 @@ void ConventionGroup::addUnits() {
   }
 }
 
+// It counts only in section forces, but whoever types them must see it.
+void ConventionGroup::addShearForce() {
+  m_shearForce = new QuietButton({}, Role::focus, this);
+  m_shearForce->setAccessibleName(shown(rowOf(Spot::shearForce).label));
+  auto* menu = new QMenu(m_shearForce);
+  for (const Named<ShearRule>& row : namesOf<ShearRule>())
+    menu->addAction(shown(row.label), this, [this, word = std::string(row.word)] {
+      m_desk.request({Type{{Spot::shearForce, {}, {}}, word}}, m_desk.newGesture(),
+                     tr("sense of the shear force"));
+    });
+  m_shearForce->setMenu(menu);
+  auto* line = new QHBoxLayout;
+  line->addWidget(m_shearForce);
+  line->addStretch();
+  body().addLayout(line);
+}
+
 QList<QWidget*> ConventionGroup::buttons() const {
-  return {m_positive.at(0), m_positive.at(1), m_shearAxis.at(0), m_shearAxis.at(1)};
+  return {m_positive.at(0), m_positive.at(1), m_shearAxis.at(0), m_shearAxis.at(1), m_shearForce};
 }
 
 void ConventionGroup::choose(Positive positive) {
@@ -112,6 +133,8 @@ void ConventionGroup::refresh() {
   const Convention& convention = m_desk.study().convention;
   check(m_positive, static_cast<int>(convention.positive));
   check(m_shearAxis, static_cast<int>(convention.shearAxis));
+  m_shearForce->setText(shown(labelOf(convention.shearForce)));
+  m_shearForce->updateGeometry();
   setSummary(
       tr("%1, %2").arg(shown(shortLabel(convention.positive)), shown(shortLabel(convention.shearAxis))));
 }

@@ -10,6 +10,7 @@ class QGridLayout;
 namespace planewright {
 
 class ChoiceButton;
+class QuietButton;
 
 /// What counts positive, how the shear axis is drawn, and the units of bare numbers and results.
 class ConventionGroup : public FoldGroup {
@@ -24,6 +25,7 @@ public:
 private:
   template <class Enum>
   void addChoices(QGridLayout& grid, QList<ChoiceButton*>& buttons);
+  void addShearForce();
   void addUnits();
   void choose(Positive positive);
   void choose(ShearAxis axis);
@@ -32,6 +34,7 @@ private:
   Desk& m_desk;
   QList<ChoiceButton*> m_positive;
   QList<ChoiceButton*> m_shearAxis;
+  QuietButton* m_shearForce;
   QList<EntryField*> m_fields;
 };
 

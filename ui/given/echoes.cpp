@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/study/cut_text.h"
+#include "core/study/place.h"
 #include "core/table/table.h"
 #include "ui/look/look.h"
 
@@ -26,9 +27,10 @@ const StateReading* stateOfCase(const Readout& readout, const std::string& caseI
 }
 
 QString echoOfStress(const Study& study, const Readout& readout, const std::string& caseId,
-                     double PlaneStress::*component) {
+                     const std::string& typed) {
   const StateReading* state = stateOfCase(readout, caseId);
-  return state ? stressWithUnit(study, *state, state->stress.*component) : QString();
+  const Result<Entry> entry = readEntry(typed, entryKindOf(study, Spot::sx));
+  return state && entry ? stressWithUnit(study, *state, entry->value) : QString();
 }
 
 QString echoOfThird(const Study& study, const Readout& readout, const std::string& caseId) {

@@ -10,9 +10,10 @@ namespace planewright {
 /// The state of a single case, which stands among the states under the case's id.
 const StateReading* stateOfCase(const Readout& readout, const std::string& caseId);
 
-/// "8.611 MPa": one component of a case, with the decimals of that case's state.
+/// "8.611 MPa": a component as it is typed, without what sources of the case add to it, with the decimals of
+/// that case's state.
 QString echoOfStress(const Study& study, const Readout& readout, const std::string& caseId,
-                     double PlaneStress::*component);
+                     const std::string& typed);
 /// The third normal stress of a case.
 QString echoOfThird(const Study& study, const Readout& readout, const std::string& caseId);
 /// "5.71° from +x, 1 in 10": an angle both ways, so that 10 for 1 in 10 is seen at once.

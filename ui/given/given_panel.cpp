@@ -7,6 +7,8 @@
 #include "ui/given/line_group.h"
 #include "ui/given/note_field.h"
 #include "ui/given/reading_group.h"
+#include "ui/given/section_group.h"
+#include "ui/given/section_view.h"
 #include "ui/given/sense_key.h"
 #include "ui/given/stress_group.h"
 #include "ui/look/look.h"
@@ -46,10 +48,18 @@ GivenPanel::GivenPanel(Desk& desk, QWidget* parent) : QScrollArea(parent), m_des
   buildGroups(content);
   setWidget(content);
   orderTabs();
-  for (EntryField* field : fields())
-    connect(field, &EntryField::takenChanged, this, &GivenPanel::countProblems);
+  watchFields();
+  connect(m_section, &SectionGroup::fieldsChanged, this, [this] {
+    watchFields();
+    orderTabs();
+  });
   connect(&m_desk, &Desk::changed, this, &GivenPanel::refresh);
   refresh();
+}
+
+void GivenPanel::watchFields() {
+  for (EntryField* field : fields())
+    connect(field, &EntryField::takenChanged, this, &GivenPanel::countProblems, Qt::UniqueConnection);
 }
 
 void GivenPanel::buildHeading(QWidget* content) {
@@ -74,6 +84,7 @@ void GivenPanel::buildHeading(QWidget* content) {
 void GivenPanel::buildGroups(QWidget* content) {
   auto* rows = static_cast<QVBoxLayout*>(content->layout());
   m_stress = new StressGroup(m_desk, content);
+  m_section = new SectionGroup(m_desk, content);
   m_line = new LineGroup(m_desk, 0, content);
   m_secondLine = new LineGroup(m_desk, 1, content);
   m_reading = new ReadingGroup(m_desk, content);
@@ -82,8 +93,8 @@ void GivenPanel::buildGroups(QWidget* content) {
   m_note = new NoteField(m_desk, m_notes);
   m_notes->body().addWidget(m_note);
   m_notes->setFolded(true);
-  for (FoldGroup* group :
-       std::initializer_list<FoldGroup*>{m_stress, m_line, m_secondLine, m_reading, m_conventions, m_notes}) {
+  for (FoldGroup* group : std::initializer_list<FoldGroup*>{m_stress, m_section, m_line, m_secondLine,
+                                                            m_reading, m_conventions, m_notes}) {
     if (group != m_stress) {
       QFrame* above = rule(content);
       rows->addWidget(above);
@@ -107,6 +118,8 @@ void GivenPanel::orderTabs() {
   add(m_secondLine->fields().mid(0, 2));
   add(m_reading->fields());
   order += m_reading->buttons();
+  order += QList<QWidget*>{&m_section->heading()} + m_section->buttons();
+  add(m_section->fields());
   order += QList<QWidget*>{&m_stress->heading()} + m_stress->buttons();
   order += QList<QWidget*>{&m_line->heading()} + m_line->buttons();
   add(m_line->fields().mid(2));
@@ -120,8 +133,8 @@ void GivenPanel::orderTabs() {
 }
 
 QList<EntryField*> GivenPanel::fields() const {
-  return m_stress->fields() + m_line->fields() + m_secondLine->fields() + m_reading->fields() +
-         m_conventions->fields();
+  return m_stress->fields() + m_section->fields() + m_line->fields() + m_secondLine->fields() +
+         m_reading->fields() + m_conventions->fields();
 }
 
 void GivenPanel::refresh() {

@@ -15,6 +15,7 @@ class FoldGroup;
 class LineGroup;
 class NoteField;
 class ReadingGroup;
+class SectionGroup;
 class StressGroup;
 
 /// Everything that is given, in groups that fold: what counts positive, stress, line, reading plane,
@@ -47,6 +48,7 @@ signals:
 private:
   void buildGroups(QWidget* content);
   void buildHeading(QWidget* content);
+  void watchFields();
   void orderTabs();
   void refresh();
   void countProblems();
@@ -57,6 +59,7 @@ private:
   Desk& m_desk;
   QLabel* m_fact;
   StressGroup* m_stress;
+  SectionGroup* m_section;
   LineGroup* m_line;
   LineGroup* m_secondLine;
   QWidget* m_secondRule = nullptr;

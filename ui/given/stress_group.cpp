@@ -6,30 +6,37 @@
 #include "ui/entry/draft_edit.h"
 #include "ui/given/case_strip.h"
 #include "ui/given/echoes.h"
+#include "ui/given/source_fields.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 
 #include <QHBoxLayout>
 #include <QLabel>
+#include <QMenu>
 #include <QVBoxLayout>
+
+#include <algorithm>
 
 namespace planewright {
 
 namespace {
 
-enum Field { sx, sy, txy, sz, axes };
+enum Field { sx, sy, txy, sz, axes, edge };
 
 } // namespace
 
 StressGroup::StressGroup(Desk& desk, QWidget* parent)
     : FoldGroup(tr("Stress"), Role::ink, parent), m_desk(desk), m_strip(new CaseStrip(this)),
-      m_sum(new QLabel(this)), m_caution(new QLabel(this)),
+      m_whole(new QLabel(this)), m_sum(new QLabel(this)), m_caution(new QLabel(this)),
+      m_addSource(new QuietButton(tr("Add a source"), Role::focus, this)),
       m_addThird(new QuietButton(tr("Third direction"), Role::focus, this)),
-      m_addAxes(new QuietButton(tr("Inclined axes"), Role::focus, this)) {
+      m_addAxes(new QuietButton(tr("Inclined axes"), Role::focus, this)),
+      m_addEdge(new QuietButton(tr("Free edge"), Role::focus, this)) {
   body().addWidget(m_strip);
-  addComponent(Spot::sx, tr("normal stress on the x face"), &PlaneStress::sx);
-  addComponent(Spot::sy, tr("normal stress on the y face"), &PlaneStress::sy);
-  addComponent(Spot::txy, tr("shear stress on the x face"), &PlaneStress::txy);
+  addComponent(Spot::sx, tr("normal stress on the x face"));
+  addComponent(Spot::sy, tr("normal stress on the y face"));
+  addComponent(Spot::txy, tr("shear stress on the x face"));
+  addSources();
   addStress(Spot::sz, tr("normal stress in the third direction"),
             [this](const Study& study, const Readout& readout, const std::string&) {
               return echoOfThird(study, readout, caseId(study));
@@ -54,25 +61,57 @@ void StressGroup::addStress(Spot spot, const QString& meaning, decltype(EntryBin
   m_fields += field;
 }
 
-void StressGroup::addComponent(Spot spot, const QString& meaning, double PlaneStress::*component) {
-  addStress(spot, meaning, [this, component](const Study& study, const Readout& readout, const std::string&) {
-    return echoOfStress(study, readout, caseId(study), component);
+void StressGroup::addComponent(Spot spot, const QString& meaning) {
+  addStress(spot, meaning, [this](const Study& study, const Readout& readout, const std::string& typed) {
+    return echoOfStress(study, readout, caseId(study), typed);
   });
 }
 
-void StressGroup::addAxes() {
-  EntryBinding binding = boundTo([](const Study& study) {
-    return Place{Spot::axes, shownPoint(study).name, {}};
+void StressGroup::addSources() {
+  auto* menu = new QMenu(m_addSource);
+  for (const Spot spot : {Spot::forces, Spot::pressure, Spot::rosette}) {
+    auto* source = new SourceFields(
+        m_desk, spot, [this](const Study& study) { return caseId(study); }, this);
+    body().addWidget(source);
+    m_sources += source;
+    menu->addAction(shown(rowOf(spot).label), source, &SourceFields::add);
+  }
+  m_addSource->setMenu(menu);
+  m_addSource->setToolTip(
+      tr("Section forces, pressure in a thin wall or measured strains: they add to the typed stresses"));
+  m_whole->setWordWrap(true);
+  body().addWidget(m_whole);
+}
+
+void StressGroup::addDirection(Spot spot, const Text& caption, const QString& meaning,
+                               decltype(EntryBinding::echo) echo) {
+  EntryBinding binding = boundTo([spot](const Study& study) {
+    return Place{spot, shownPoint(study).name, {}};
   });
-  binding.echo = [](const Study& study, const Readout& readout, const std::string&) {
-    return echoOfDirection(shownPoint(study).axes, readout.axes);
-  };
-  auto* field = new EntryField(
-      m_desk, std::move(binding),
-      {PW_TEXT("Given", "x axis at"), tr("inclination of the member; it turns only the drawing"), false},
-      this);
+  binding.echo = std::move(echo);
+  auto* field = new EntryField(m_desk, std::move(binding), {caption, meaning, false}, this);
   body().addWidget(field);
   m_fields += field;
+}
+
+void StressGroup::addAxes() {
+  addDirection(Spot::axes, PW_TEXT("Given", "x axis at"),
+               tr("inclination of the member; it turns only the drawing"),
+               [](const Study& study, const Readout& readout, const std::string&) {
+                 return echoOfDirection(shownPoint(study).axes, readout.axes);
+               });
+  addDirection(
+      Spot::freeEdge, PW_TEXT("Given", "free edge at"), tr("direction of an edge that carries nothing"),
+      [](const Study& study, const Readout& readout, const std::string&) {
+        return readout.edge ? echoOfDirection(shownPoint(study).freeEdge, readout.edge->value) : QString();
+      });
+}
+
+QList<EntryField*> StressGroup::fields() const {
+  QList<EntryField*> fields = m_fields.mid(0, sz);
+  for (const SourceFields* source : m_sources)
+    fields += source->fields();
+  return fields + m_fields.mid(sz);
 }
 
 void StressGroup::buildMore() {
@@ -87,8 +126,20 @@ void StressGroup::buildMore() {
   auto* line = new QHBoxLayout;
   line->addWidget(m_addThird);
   line->addWidget(m_addAxes);
+  line->addWidget(m_addEdge);
   line->addStretch();
+  auto* sources = new QHBoxLayout;
+  sources->addWidget(m_addSource);
+  sources->addStretch();
+  body().addLayout(sources);
   body().addLayout(line);
+  m_addEdge->setToolTip(
+      tr("An edge that carries nothing: what the stresses leave there finds wrong signs and wrong fibres"));
+  connect(m_addEdge, &QAbstractButton::clicked, this, [this] {
+    m_edgeWanted = true;
+    refresh();
+    m_fields[edge]->edit().setFocus();
+  });
   connect(m_addThird, &QAbstractButton::clicked, this, [this] {
     m_thirdWanted = true;
     refresh();
@@ -102,11 +153,14 @@ void StressGroup::buildMore() {
 }
 
 bool StressGroup::isOfCase(const EntryField& field) const {
-  return isAncestorOf(&field) && &field != m_fields[axes];
+  return isAncestorOf(&field) && &field != m_fields[axes] && &field != m_fields[edge];
 }
 
 QList<QWidget*> StressGroup::buttons() const {
-  return {m_addThird, m_addAxes};
+  QList<QWidget*> buttons = {m_addSource};
+  for (const SourceFields* source : m_sources)
+    buttons += source->buttons();
+  return buttons + QList<QWidget*>{m_addThird, m_addAxes, m_addEdge};
 }
 
 std::string StressGroup::caseId(const Study& study) const {
@@ -125,6 +179,16 @@ void StressGroup::refresh() {
   const StateReading* state = stateOfCase(m_desk.readout(), caseId(m_desk.study()));
   const bool third = state && state->sz != 0;
   const bool inclined = m_desk.readout().axes != Angle();
+  for (SourceFields* source : m_sources)
+    source->refresh();
+  for (qsizetype i = 0; i < m_sources.size(); ++i)
+    m_addSource->menu()->actions().at(i)->setEnabled(!m_sources.at(i)->isPresent());
+  const QString whole = caseLine();
+  m_whole->setText(whole);
+  m_whole->setVisible(!whole.isEmpty());
+  const bool hasEdge = m_desk.readout().edge.has_value();
+  m_fields[edge]->setVisible(hasEdge || m_edgeWanted);
+  m_addEdge->setVisible(!hasEdge && !m_edgeWanted);
   m_fields[sz]->setVisible(third || m_thirdWanted);
   m_addThird->setVisible(!third && !m_thirdWanted);
   m_fields[axes]->setVisible(inclined || m_axesWanted);
@@ -136,6 +200,35 @@ void StressGroup::refresh() {
   m_caution->setText(caution);
   m_caution->setVisible(!caution.isEmpty());
   setSummary(summary());
+}
+
+// The typed stresses and the sources together, where there are both.
+QString StressGroup::caseLine() const {
+  const std::string id = caseId(m_desk.study());
+  const auto& cases = m_desk.readout().cases;
+  const auto one = std::ranges::find(cases, id, &CaseReading::id);
+  const StateReading* state = stateOfCase(m_desk.readout(), id);
+  if (one == cases.end() || one->isDirect || !state)
+    return {};
+  const QString sum = tr("%1 in all: %2").arg(fromUtf8(id), componentsOf(*state));
+  if (one->bending == 0 && one->axial == 0)
+    return sum;
+  const auto part = [&](double stress) { return fromUtf8(shownStress(m_desk.study(), *state, stress)); };
+  return sum + QLatin1Char('\n') +
+         tr("of σx from normal force %1, from bending %2").arg(part(one->axial), part(one->bending));
+}
+
+QString StressGroup::edgeLine() const {
+  const StateReading& state = m_desk.readout().state();
+  if (!state.edge)
+    return {};
+  const auto part = [&](double stress) { return fromUtf8(shownStress(m_desk.study(), state, stress)); };
+  constexpr double noticed = 0.005;
+  if (state.edge->share() < noticed)
+    return tr("The free edge carries nothing, as it should.");
+  return tr("On the free edge are left σn = %1 and τnt = %2 %3: look for a wrong sign or fibre.")
+      .arg(part(state.edge->traction.sn), part(state.edge->traction.tnt),
+           fromUtf8(m_desk.study().units.stress));
 }
 
 // Only where the shown state is not just the case that is typed here.
@@ -150,6 +243,8 @@ QString StressGroup::cautionLine() const {
   QStringList sentences;
   for (const Text& caution : cautionsOf(m_desk.readout(), m_desk.readout().state()))
     sentences << shown(caution);
+  if (const QString left = edgeLine(); !left.isEmpty())
+    sentences.prepend(left);
   return sentences.join(QLatin1Char(' '));
 }
 

@@ -11,6 +11,7 @@ namespace planewright {
 
 class CaseStrip;
 class QuietButton;
+class SourceFields;
 
 /// The components of one load case at the shown point, its third direction and the member's axes.
 class StressGroup : public FoldGroup {
@@ -19,8 +20,8 @@ class StressGroup : public FoldGroup {
 public:
   explicit StressGroup(Desk& desk, QWidget* parent = nullptr);
 
-  /// In the order of Tab: sx, sy, txy; then sz and the axes.
-  const QList<EntryField*>& fields() const { return m_fields; }
+  /// In the order of Tab: sx, sy, txy; the sources; then sz, the axes and the free edge.
+  QList<EntryField*> fields() const;
   /// The case whose stresses are typed here.
   std::string caseId(const Study& study) const;
   /// Whether a field holds a stress of the case, and not the axes.
@@ -29,11 +30,16 @@ public:
 
 private:
   void addStress(Spot spot, const QString& meaning, decltype(EntryBinding::echo) echo);
-  void addComponent(Spot spot, const QString& meaning, double PlaneStress::*component);
+  void addComponent(Spot spot, const QString& meaning);
+  void addDirection(Spot spot, const Text& caption, const QString& meaning,
+                    decltype(EntryBinding::echo) echo);
+  void addSources();
   void addAxes();
   void buildMore();
   void chooseCase(const std::string& id);
   void refresh();
+  QString caseLine() const;
+  QString edgeLine() const;
   QString sumLine() const;
   QString cautionLine() const;
   QString summary() const;
@@ -43,12 +49,17 @@ private:
   std::string m_case; ///< as chosen in the strip; the first where the study has it no more
   bool m_thirdWanted = false;
   bool m_axesWanted = false;
+  bool m_edgeWanted = false;
   QList<EntryField*> m_fields;
   CaseStrip* m_strip;
+  QLabel* m_whole; ///< what sources make of the case
   QLabel* m_sum;
   QLabel* m_caution;
+  QList<SourceFields*> m_sources;
+  QuietButton* m_addSource;
   QuietButton* m_addThird;
   QuietButton* m_addAxes;
+  QuietButton* m_addEdge;
 };
 
 } // namespace planewright

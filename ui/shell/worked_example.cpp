@@ -11,7 +11,7 @@ namespace planewright {
 
 const Study& workedExample() {
   static const Study example = [] {
-    QFile file(QStringLiteral(":/planewright/demo/rafter-foot.planewright"));
+    QFile file(QStringLiteral(":/planewright/demo/boat-shed-beam.planewright"));
     const bool opened = file.open(QIODevice::ReadOnly);
     assert(opened);
     Results<Study> study = readStudy(opened ? file.readAll().toStdString() : std::string());

@@ -327,6 +327,7 @@ TEST_F(WindowTest, theKeysOfTheWindowWorkFromEveryField) {
 TEST_F(WindowTest, pickersShowAnotherPointWithoutAStep) {
   MainWindow& window = shown();
   Study study = workedExample();
+  study.points.resize(1);
   study.points.push_back(study.points[0]);
   study.points[1].name = "P2";
   ASSERT_TRUE(window.filing().openUnnamed(study));

@@ -1,0 +1,48 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/fibre_of_state.h"
+
+#include "core/study/case_sources.h"
+
+#include <cassert>
+
+namespace planewright {
+
+std::optional<LoadedSection> loadedSectionOf(const Study& study, const Readout& readout,
+                                             const StateReading& state) {
+  const Point* point = findPoint(study, readout.point);
+  assert(point);
+  if (!point->fibre)
+    return std::nullopt;
+  const Results<PointSources> sources = PointSources::of(study, *point);
+  assert(sources && "a valid study has only sources that can be worked out");
+  LoadedSection loaded{*sources->model(), sources->fibre(), study.convention.shearForce, {}, {}};
+  loaded.sense = study.convention.positive == Positive::tension ? 1 : -1;
+  for (const ActingCase& acting : state.acting) {
+    const CaseStress* stress = findStress(*point, readout.cases[acting.index].id);
+    if (stress && stress->forces)
+      loaded.forces = loaded.forces + acting.factor * forcesOf(study, *stress->forces);
+  }
+  const Result<FibreStress> here = stressAt(loaded.model, loaded.forces, loaded.fibre, loaded.rule);
+  assert(here);
+  loaded.rest = loaded.sense * state.stress + -1.0 * here->stress;
+  return loaded;
+}
+
+Result<WorstFibres> worstFibresOf(const LoadedSection& section) {
+  const auto worstBy = [&](double Circle::*measure) {
+    return worstFibre(section.model, section.forces, section.fibre, section.rule,
+                      [&section, measure](const PlaneStress& stress) {
+                        return circleOf(stress + section.rest, scaleOf(stress) + scaleOf(section.rest)).*
+                               measure;
+                      });
+  };
+  Result<WorstFibre> principal = worstBy(&Circle::s1);
+  if (!principal)
+    return tl::unexpected(std::move(principal).error());
+  Result<WorstFibre> shear = worstBy(&Circle::radius);
+  if (!shear)
+    return tl::unexpected(std::move(shear).error());
+  return WorstFibres{*std::move(principal), *std::move(shear)};
+}
+
+} // namespace planewright

@@ -1,0 +1,148 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "tests/ui/given/given_fixture.h"
+
+#include "core/study/fibre_of_state.h"
+#include "ui/given/section_group.h"
+#include "ui/given/section_view.h"
+
+#include <QMenu>
+#include <QToolButton>
+
+namespace planewright {
+namespace {
+
+struct SourcesTest : GivenTest {
+  void choose(const QString& menuOf, const QString& words) {
+    QMenu* menu = dynamic_cast<QToolButton&>(button(menuOf)).menu();
+    Q_EMIT menu->aboutToShow();
+    for (QAction* action : menu->actions())
+      if (action->text().startsWith(words))
+        return action->trigger();
+    ADD_FAILURE() << words.toStdString() << " is not in the menu";
+  }
+  const Point& point() const { return desk.study().points.front(); }
+  const ForceTexts& forces() const { return *point().stress.front().forces; }
+  SectionView& view() { return *panel.findChild<SectionView*>(); }
+  QPoint at(double y, double z) { return view().pointAt(y, z).value().toPoint(); }
+};
+
+TEST_F(SourcesTest, sectionForcesBringASectionAndAddToTheStresses) {
+  choose("Add a source", "section forces");
+  ASSERT_TRUE(point().fibre);
+  ASSERT_TRUE(point().stress.front().forces);
+  EXPECT_EQ(point().fibre->section, "section 1");
+  EXPECT_EQ(point().fibre->y, "-100 mm");
+  type("N", "40");
+  type("Mz", "10");
+  EXPECT_EQ(forces().N, "40 kN");
+  EXPECT_EQ(forces().Mz, "10 kN*m");
+  const double inertia = 100.0 * 200 * 200 * 200 / 12;
+  EXPECT_NEAR(desk.readout().state().stress.sx, 40e3 / 20000 + 10e6 * 100 / inertia, 1e-9);
+  EXPECT_TRUE(says("in all"));
+  EXPECT_TRUE(says("from bending"));
+  EXPECT_EQ(field("σx").echoText(), "= 0.00 MPa");
+  desk.undoStack()->undo();
+  desk.undoStack()->undo();
+  desk.undoStack()->undo();
+  EXPECT_FALSE(point().fibre) << "section, fibre and forces came as one step";
+}
+
+TEST_F(SourcesTest, aSizeKeepsTheFibreAtItsReadyPlace) {
+  choose("Add a source", "section forces");
+  type("h", "600");
+  EXPECT_EQ(desk.study().sections.front().sizes.back().text, "600 mm");
+  EXPECT_EQ(point().fibre->y, "-300 mm");
+  type("h", "-5");
+  EXPECT_FALSE(field("h").complaintText().isEmpty());
+  EXPECT_EQ(desk.study().sections.front().sizes.back().text, "600 mm");
+}
+
+TEST_F(SourcesTest, aShapeBringsItsOwnSizes) {
+  choose("Add a source", "section forces");
+  choose("shape of the section", "round tube");
+  EXPECT_EQ(desk.study().sections.front().shape, SectionShape::tube);
+  type("d", "300");
+  EXPECT_EQ(desk.study().sections.front().sizes.front().text, "300 mm");
+  EXPECT_EQ(point().fibre->y, "-150 mm");
+  choose("shape of the section", "built of rectangles");
+  button("Add a block").click();
+  EXPECT_EQ(desk.study().sections.front().sizes.size(), 10U);
+  button("Remove the last").click();
+  EXPECT_EQ(desk.study().sections.front().sizes.size(), 5U);
+}
+
+TEST_F(SourcesTest, theMarkIsPulledThroughTheSectionAsOneStep) {
+  choose("Add a source", "section forces");
+  QCoreApplication::processEvents(); // the drawing gets its room
+  const int steps = desk.undoStack()->count();
+  QTest::mousePress(&view(), Qt::LeftButton, Qt::NoModifier, at(-100, 0));
+  QTest::mouseMove(&view(), at(-60, 20));
+  QTest::mouseMove(&view(), at(30, 10));
+  QTest::mouseRelease(&view(), Qt::LeftButton, Qt::NoModifier, at(30, 10));
+  EXPECT_EQ(desk.undoStack()->count(), steps + 1);
+  const LoadedSection loaded = *loadedSectionOf(desk.study(), desk.readout(), desk.readout().state());
+  EXPECT_NEAR(loaded.fibre.y, 30, 3);
+  EXPECT_NEAR(loaded.fibre.z, 10, 3);
+}
+
+TEST_F(SourcesTest, theMarkMovesByKeysAndGoesToReadyPlaces) {
+  choose("Add a source", "section forces");
+  view().setFocus();
+  QTest::keyClick(&view(), Qt::Key_Up);
+  EXPECT_EQ(point().fibre->y, "-99 mm");
+  QTest::keyClick(&view(), Qt::Key_Up, Qt::ControlModifier);
+  EXPECT_EQ(point().fibre->y, "-89 mm");
+  QTest::keyClick(&view(), Qt::Key_PageDown);
+  EXPECT_EQ(point().fibre->y, "100 mm") << "the first ready place";
+  choose("Ready places", "axis, middle");
+  EXPECT_EQ(point().fibre->y, "0 mm");
+}
+
+TEST_F(SourcesTest, theWorstFibreIsNamedAndGoneTo) {
+  choose("Add a source", "section forces");
+  type("Mz", "10");
+  choose("Ready places", "axis, middle");
+  choose("Worst fibre", "greatest tension");
+  EXPECT_EQ(point().fibre->y, "-100 mm");
+}
+
+TEST_F(SourcesTest, whatTheoryDoesNotGiveIsSaidInPlace) {
+  choose("Add a source", "section forces");
+  type("T", "2");
+  EXPECT_FALSE(field("T").complaintText().isEmpty());
+  EXPECT_EQ(forces().T, "0 kN*m");
+}
+
+TEST_F(SourcesTest, aRosetteMakesItsCaseAMeasuredOne) {
+  choose("Add a source", "strain rosette");
+  EXPECT_EQ(desk.study().cases.front().nature, Nature::measured);
+  type("εa", "100");
+  EXPECT_EQ(point().stress.front().rosette->strainA, "100 ustrain");
+  EXPECT_NE(desk.readout().state().stress.sx, 0);
+  EXPECT_TRUE(field("E").isVisible());
+  choose("material under the gauges", "with a line");
+  EXPECT_FALSE(field("E").isVisible());
+  EXPECT_TRUE(field("G").isVisible());
+  button("remove strain rosette").click();
+  EXPECT_FALSE(point().stress.front().rosette);
+}
+
+TEST_F(SourcesTest, pressureHasItsEndsAsAChoice) {
+  choose("Add a source", "pressure in a thin wall");
+  type("p", "2");
+  EXPECT_NEAR(desk.readout().state().stress.sy, 2 * 500 / 10.0, 1e-9);
+  choose("ends of the vessel", "open ends");
+  EXPECT_EQ(desk.readout().state().stress.sx, 0);
+}
+
+TEST_F(SourcesTest, aFreeEdgeSaysWhatIsLeftThere) {
+  type("σx", "10");
+  button("Free edge").click();
+  type("free edge at", "0");
+  EXPECT_TRUE(says("carries nothing"));
+  type("τxy", "2");
+  EXPECT_TRUE(says("are left"));
+}
+
+} // namespace
+} // namespace planewright

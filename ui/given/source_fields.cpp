@@ -1,0 +1,189 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/given/source_fields.h"
+
+#include "core/quantity/format.h"
+#include "core/study/section_edits.h"
+#include "ui/entry/draft_edit.h"
+#include "ui/look/look.h"
+#include "ui/look/quiet_button.h"
+
+#include <QHBoxLayout>
+#include <QLabel>
+#include <QMenu>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+namespace {
+
+/// The value of an expression in its field's own unit; nothing where the text says it already.
+QString echoOfValue(const Study& study, const Place& place, const std::string& typed) {
+  const EntryKind kind = entryKindOf(study, place);
+  const Result<Entry> entry = readEntry(typed, kind);
+  if (!entry || kind.dimension == dimension::angle)
+    return {};
+  const double value = kind.unit.fromBase(entry->value);
+  const std::string unit = kind.unit.name.empty() ? "" : " " + kind.unit.name;
+  if (typed == exactNumber(value) + unit)
+    return {};
+  return fromUtf8(shownNumber(value, decimalsFor(std::abs(value))) + unit);
+}
+
+bool isOfOrthotropic(Spot spot) {
+  return spot == Spot::rosetteAlong || spot == Spot::rosetteAcross || spot == Spot::rosetteNu12 ||
+         spot == Spot::rosetteG;
+}
+
+bool isOfIsotropic(Spot spot) {
+  return spot == Spot::rosetteE || spot == Spot::rosetteNu;
+}
+
+} // namespace
+
+SourceFields::SourceFields(Desk& desk, Spot source, CaseId caseId, QWidget* parent)
+    : QWidget(parent), m_desk(desk), m_source(source), m_caseId(std::move(caseId)),
+      m_remove(new QuietButton(tr("remove"), Role::focus, this)) {
+  auto* rows = new QVBoxLayout(this);
+  rows->setContentsMargins(0, 4, 0, 0);
+  rows->setSpacing(4);
+  auto* head = new QHBoxLayout;
+  auto* title = new QLabel(shown(rowOf(source).label), this);
+  title->setForegroundRole(QPalette::PlaceholderText);
+  head->addWidget(title);
+  head->addStretch();
+  head->addWidget(m_remove);
+  rows->addLayout(head);
+  m_remove->setAccessibleName(tr("remove %1").arg(shown(rowOf(source).label)));
+  connect(m_remove, &QAbstractButton::clicked, this, [this] {
+    ask({Remove{place(m_desk.study(), m_source)}}, tr("removal of %1").arg(shown(rowOf(m_source).label)));
+  });
+  if (source == Spot::forces)
+    addForces();
+  else if (source == Spot::pressure)
+    addPressure();
+  else
+    addRosette();
+}
+
+Place SourceFields::place(const Study& study, Spot spot) const {
+  return {spot, shownPoint(study).name, m_caseId(study)};
+}
+
+void SourceFields::addField(Spot spot, const QString& meaning) {
+  EntryBinding binding = boundTo([this, spot](const Study& study) { return place(study, spot); });
+  binding.echo = [this, spot](const Study& study, const Readout&, const std::string& typed) {
+    return echoOfValue(study, place(study, spot), typed);
+  };
+  auto* field = new EntryField(m_desk, std::move(binding), {rowOf(spot).label, meaning}, this);
+  field->caption().setFixedWidth(fontMetrics().horizontalAdvance(QStringLiteral("Eφ+90°")));
+  layout()->addWidget(field);
+  m_fields += field;
+  m_spots += spot;
+}
+
+void SourceFields::addForces() {
+  addField(Spot::forceN, tr("normal force, tension positive"));
+  addField(Spot::forceVy, tr("shear force in y"));
+  addField(Spot::forceVz, tr("shear force in z"));
+  addField(Spot::forceT, tr("torsional moment, right-handed about +x"));
+  addField(Spot::forceMy, tr("bending moment about y, positive when it pulls at z > 0"));
+  addField(Spot::forceMz, tr("bending moment about z, sagging positive"));
+}
+
+void SourceFields::addPressure() {
+  addField(Spot::pressureP, tr("pressure inside over that outside"));
+  addField(Spot::pressureR, tr("inner radius"));
+  addField(Spot::pressureT, tr("thickness of the wall"));
+  addChoice<Ends>(Spot::pressureEnds, tr("ends of the vessel"));
+}
+
+void SourceFields::addRosette() {
+  addField(Spot::gaugeStrainA, tr("strain of gauge a"));
+  addField(Spot::gaugeAngleA, tr("direction of gauge a from +x"));
+  addField(Spot::gaugeStrainB, tr("strain of gauge b"));
+  addField(Spot::gaugeAngleB, tr("direction of gauge b from +x"));
+  addField(Spot::gaugeStrainC, tr("strain of gauge c"));
+  addField(Spot::gaugeAngleC, tr("direction of gauge c from +x"));
+  addChoice<Elasticity>(Spot::rosetteMaterial, tr("material under the gauges"));
+  addField(Spot::rosetteE, tr("modulus of elasticity"));
+  addField(Spot::rosetteNu, tr("Poisson's ratio"));
+  addField(Spot::rosetteAlong, tr("modulus of elasticity along the line"));
+  addField(Spot::rosetteAcross, tr("modulus of elasticity across the line"));
+  addField(Spot::rosetteNu12, tr("Poisson's ratio: contraction across the line when stressed along it"));
+  addField(Spot::rosetteG, tr("shear modulus"));
+}
+
+template <class Enum>
+void SourceFields::addChoice(Spot spot, const QString& meaning) {
+  m_choice = new QuietButton({}, Role::focus, this);
+  m_choice->setAccessibleName(meaning);
+  auto* menu = new QMenu(m_choice);
+  for (const Named<Enum>& row : namesOf<Enum>())
+    menu->addAction(shown(row.label), this, [this, spot, word = std::string(row.word), meaning] {
+      ask({Type{place(m_desk.study(), spot), word}}, meaning);
+    });
+  m_choice->setMenu(menu);
+  auto* line = new QHBoxLayout;
+  line->addWidget(m_choice);
+  line->addStretch();
+  static_cast<QVBoxLayout*>(layout())->addLayout(line);
+}
+
+QList<QWidget*> SourceFields::buttons() const {
+  return m_choice ? QList<QWidget*>{m_choice, m_remove} : QList<QWidget*>{m_remove};
+}
+
+bool SourceFields::isPresent() const {
+  return textAt(m_desk.study(), place(m_desk.study(), m_spots.front())).has_value();
+}
+
+// Section forces need a section, and measured strains a case that is measured.
+Edits SourceFields::editsThatAdd() const {
+  const Study& study = m_desk.study();
+  const Point& point = shownPoint(study);
+  Edits edits;
+  if (m_source == Spot::forces && !point.fibre)
+    edits = editsThatGiveFibre(
+        study, point.name, study.sections.empty() ? freshSectionName(study) : study.sections.front().name);
+  if (m_source == Spot::rosette)
+    edits.push_back(Type{{Spot::caseNature, m_caseId(study), {}}, std::string(wordOf(Nature::measured))});
+  if (!findStress(point, m_caseId(study)))
+    edits.push_back(Insert{place(study, Spot::caseStress), std::nullopt});
+  edits.push_back(Insert{place(study, m_source), std::nullopt});
+  return edits;
+}
+
+void SourceFields::ask(const Edits& edits, const QString& what) {
+  if (const auto problem = m_desk.request(edits, m_desk.newGesture(), what))
+    m_desk.say(shown(*problem));
+}
+
+void SourceFields::add() {
+  ask(editsThatAdd(), tr("new: %1").arg(shown(rowOf(m_source).label)));
+  if (!isPresent())
+    return;
+  m_fields.front()->edit().setFocus(Qt::OtherFocusReason);
+  m_fields.front()->edit().selectAll();
+}
+
+void SourceFields::refresh() {
+  const bool present = isPresent();
+  setVisible(present);
+  if (!present)
+    return;
+  for (EntryField* field : m_fields)
+    field->refresh();
+  const CaseStress* stress = findStress(shownPoint(m_desk.study()), m_caseId(m_desk.study()));
+  if (m_choice) {
+    m_choice->setText(m_source == Spot::pressure ? shown(labelOf(stress->pressure->ends))
+                                                 : shown(labelOf(stress->rosette->material)));
+    m_choice->updateGeometry();
+  }
+  if (m_source == Spot::rosette)
+    for (qsizetype i = 0; i < m_fields.size(); ++i) {
+      const bool isotropic = stress->rosette->material == Elasticity::isotropic;
+      m_fields.at(i)->setVisible(isotropic ? !isOfOrthotropic(m_spots.at(i)) : !isOfIsotropic(m_spots.at(i)));
+    }
+}
+
+} // namespace planewright
