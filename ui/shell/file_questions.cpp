@@ -46,14 +46,33 @@ QString askPathToOpen(QWidget& window) {
                                       folder(), filter());
 }
 
-QString askPathToSave(QWidget& window, const QString& proposed) {
+QString tableFilter() {
+  return words(QT_TRANSLATE_NOOP("FileQuestions", "Tables (*.csv *.tsv *.txt);;All files (*)"));
+}
+
+QString askPathToImport(QWidget& window) {
+  return QFileDialog::getOpenFileName(&window, words(QT_TRANSLATE_NOOP("FileQuestions", "Import points")),
+                                      folder(), tableFilter());
+}
+
+QString askPathToWrite(QWidget& window, const QString& title, const QString& filters, const QString& suffix,
+                       const QString& proposed) {
   const QString start = QFileInfo(proposed).isAbsolute() ? proposed : QDir(folder()).filePath(proposed);
-  QFileDialog dialog(&window, words(QT_TRANSLATE_NOOP("FileQuestions", "Save the study as")),
-                     QFileInfo(start).absolutePath(), filter());
+  QFileDialog dialog(&window, title, QFileInfo(start).absolutePath(), filters);
   dialog.setAcceptMode(QFileDialog::AcceptSave);
-  dialog.setDefaultSuffix(QStringLiteral("planewright"));
+  dialog.setDefaultSuffix(suffix);
   dialog.selectFile(QFileInfo(start).fileName());
   return dialog.exec() == QDialog::Accepted ? dialog.selectedFiles().value(0) : QString();
+}
+
+QString askPathToSave(QWidget& window, const QString& proposed) {
+  return askPathToWrite(window, words(QT_TRANSLATE_NOOP("FileQuestions", "Save the study as")), filter(),
+                        QStringLiteral("planewright"), proposed);
+}
+
+QString askPathToExport(QWidget& window, const QString& proposed) {
+  return askPathToWrite(window, words(QT_TRANSLATE_NOOP("FileQuestions", "Export the points")), tableFilter(),
+                        QStringLiteral("csv"), proposed);
 }
 
 } // namespace
@@ -61,7 +80,9 @@ QString askPathToSave(QWidget& window, const QString& proposed) {
 FileQuestions askedOver(QWidget& window) {
   return {[&window](const QString& name) { return askAboutUnsaved(window, name); },
           [&window] { return askPathToOpen(window); },
-          [&window](const QString& proposed) { return askPathToSave(window, proposed); }};
+          [&window](const QString& proposed) { return askPathToSave(window, proposed); },
+          [&window] { return askPathToImport(window); },
+          [&window](const QString& proposed) { return askPathToExport(window, proposed); }};
 }
 
 } // namespace planewright

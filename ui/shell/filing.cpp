@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/filing.h"
 
+#include "core/record/copied_points.h"
+#include "core/record/pasted_cells.h"
 #include "core/record/study_file.h"
 #include "ui/files/file_bytes.h"
 
@@ -89,11 +91,36 @@ void Filing::put(Study study, const QString& path) {
   Q_EMIT begun();
 }
 
-bool Filing::writeTo(const QString& path) {
-  if (const Result<void> written = writeAside(path.toStdString(), writeStudy(m_desk.study())); !written) {
-    Q_EMIT refused(path, {written.error()});
+std::optional<TableFile> Filing::readTable() {
+  const QString path = m_questions.pathToImport();
+  if (path.isEmpty())
+    return std::nullopt;
+  Result<std::string> bytes = bytesOf(path.toStdString(), greatestTable);
+  if (bytes)
+    return TableFile{QFileInfo(path).fileName(), *std::move(bytes)};
+  Q_EMIT refused(path, {bytes.error()});
+  return std::nullopt;
+}
+
+bool Filing::writeTable() {
+  const QString beside = m_path.isEmpty() ? QString() : QFileInfo(m_path).path() + QLatin1Char('/');
+  const QString path = m_questions.pathToExport(beside + tr("%1 points.csv").arg(name()));
+  if (path.isEmpty() || !writeBytes(path, copiedPoints(m_desk.study().points, ',')))
     return false;
-  }
+  m_desk.say(tr("The points are in %1.").arg(QFileInfo(path).fileName()));
+  return true;
+}
+
+bool Filing::writeBytes(const QString& path, const std::string& bytes) {
+  const Result<void> written = writeAside(path.toStdString(), bytes);
+  if (!written)
+    Q_EMIT refused(path, {written.error()});
+  return written.has_value();
+}
+
+bool Filing::writeTo(const QString& path) {
+  if (!writeBytes(path, writeStudy(m_desk.study())))
+    return false;
   m_path = path;
   m_desk.undoStack()->setClean();
   Q_EMIT fileChanged(m_path);

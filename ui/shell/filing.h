@@ -15,6 +15,14 @@ struct FileQuestions {
   std::function<Unsaved(const QString& name)> aboutUnsaved;
   std::function<QString()> pathToOpen;
   std::function<QString(const QString& proposed)> pathToSave;
+  std::function<QString()> pathToImport;
+  std::function<QString(const QString& proposed)> pathToExport;
+};
+
+/// A file that holds a table: its name, and what is in it.
+struct TableFile {
+  QString name;
+  std::string bytes;
 };
 
 /// Brings studies from files to the desk and back. Whether there is something to save is what the undo stack
@@ -40,6 +48,10 @@ public:
   bool openUnnamed(Study study);
   bool save();
   bool saveAs();
+  /// A table of points that the person chooses; none when they thought better of it, or it was refused.
+  std::optional<TableFile> readTable();
+  /// Writes the stresses of all points as CSV.
+  bool writeTable();
   /// Asks about unsaved changes; true when the study may go.
   bool mayLeave();
 
@@ -54,6 +66,7 @@ signals:
 private:
   void put(Study study, const QString& path);
   bool writeTo(const QString& path);
+  bool writeBytes(const QString& path, const std::string& bytes);
 
   Desk& m_desk;
   FileQuestions m_questions;

@@ -27,7 +27,10 @@ millimetres. A number without a unit takes the study's unit and is completed wit
 changes a stress.</p>
 <p>The angle and the tolerance of a line also read slopes: <code>1 in 12</code>, <code>1:12</code>, the angle <code>8 %</code> too.
 The echo gives both, 5.71° and 1 in 10, so that 10 for 1 in 10 is seen at once. The normal of a plane takes no slope.</p>
-<p>A decimal comma is not read; write 1.5. A text that does not read stays in its field, marked, with what is wrong and
+<p>Edit, Paste table reads a table from a spreadsheet: a row for each case, with headings such as <code>point</code>,
+<code>case</code>, <code>sx [MPa]</code>, <code>sy</code>, <code>txy</code> or <code>N</code>, <code>V</code>, <code>M</code>. It shows
+what would be kept and takes all of it or nothing.</p>
+<p>A decimal comma is not read in a field; write 1.5. In a table it is, where it can mean nothing else. A text that does not read stays in its field, marked, with what is wrong and
 how to mend it; the study keeps the last text that did.</p>
 )help"));
 }
@@ -71,6 +74,7 @@ QString keys() {
 <tr><td><b>Alt+PageUp, Alt+PageDown</b></td><td>previous, next combination</td></tr>
 <tr><td><b>Ctrl+G</b></td><td>the combination with the greatest σ<sub>1</sub> at this point; again: the greatest shear in the plane</td></tr>
 <tr><td><b>Ctrl+Shift+G</b></td><td>the same over all points of the study</td></tr>
+<tr><td><b>Ctrl+Shift+V</b></td><td>paste a table of stresses or section forces</td></tr>
 <tr><td><b>Ctrl+E, Ctrl+0</b></td><td>arrange the figure; fit the circle</td></tr>
 <tr><td><b>Ctrl+N, O, S, P, Q, Z, C; F11</b></td><td>as everywhere</td></tr>
 </table>

@@ -85,6 +85,10 @@ private:
   void showRefusal(const QString& path, const Problems& problems);
   void tellStep(int index);
   void copyFromFocus();
+  void pasteTable();
+  void importPoints();
+  void showTable(std::string table, const QString& title);
+  void copyStresses(const std::vector<Point>& points, const QString& said);
   void copyFigureNow();
   void printFigureNow();
   void helpOnFocus();

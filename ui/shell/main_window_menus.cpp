@@ -56,6 +56,12 @@ void MainWindow::addFileMenu() {
     m_filing->saveAs();
   });
   menu.addSeparator();
+  add(menu, tr("&Import points…"), {}, [this] { importPoints(); });
+  add(menu, tr("Export p&oints…"), {}, [this] {
+    settleDrafts();
+    m_filing->writeTable();
+  });
+  menu.addSeparator();
   add(menu, tr("&Export figure…"), Qt::CTRL | Qt::Key_E, [this] { arrangeFigure(); });
   add(menu, tr("&Copy figure"), {}, [this] { copyFigureNow(); });
   add(menu, tr("&Print figure…"), QKeySequence::Print, [this] { printFigureNow(); });
@@ -81,6 +87,17 @@ void MainWindow::addEditMenu() {
   menu.addAction(redo);
   menu.addSeparator();
   add(menu, tr("&Copy"), QKeySequence::Copy, [this] { copyFromFocus(); });
+  menu.addSeparator();
+  add(menu, tr("Copy stresses of &this point"), {}, [this] {
+    settleDrafts();
+    const Point& point = shownPoint(m_desk.study());
+    copyStresses({point}, tr("The stresses of %1 are on the clipboard.").arg(fromUtf8(point.name)));
+  });
+  add(menu, tr("Copy stresses of &all points"), {}, [this] {
+    settleDrafts();
+    copyStresses(m_desk.study().points, tr("The stresses of all points are on the clipboard."));
+  });
+  add(menu, tr("Paste ta&ble…"), Qt::CTRL | Qt::SHIFT | Qt::Key_V, [this] { pasteTable(); });
 }
 
 void MainWindow::addStudyMenu() {

@@ -30,7 +30,8 @@ protected:
               ++m_askedUnsaved;
               return m_unsaved;
             },
-            [this] { return m_openPath; }, [this](const QString&) { return m_savePath; }};
+            [this] { return m_openPath; }, [this](const QString&) { return m_savePath; },
+            [this] { return m_importPath; }, [this](const QString&) { return m_exportPath; }};
   }
 
   static void type(Desk& desk, Spot spot, const std::string& text) {
@@ -45,6 +46,8 @@ protected:
   Unsaved m_unsaved = Unsaved::stay;
   QString m_openPath;
   QString m_savePath;
+  QString m_importPath;
+  QString m_exportPath;
   int m_askedUnsaved = 0;
 
 private:
