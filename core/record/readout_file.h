@@ -16,4 +16,8 @@ std::string readoutCsv(const Study& study, const std::vector<Readout>& points);
 std::string readoutText(const Study& study, const std::vector<Readout>& points,
                         const Translate& translate = {});
 
+/// How the shown state of a point comes about, for people: where the stresses of its cases come from, with
+/// the signs and limits of each source, and the working of the state.
+std::string workingText(const Study& study, const Readout& readout, const Translate& translate = {});
+
 } // namespace planewright

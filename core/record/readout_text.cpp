@@ -55,6 +55,17 @@ public:
     return std::move(m_out);
   }
 
+  std::string working(const Readout& readout) {
+    const StateReading& shown = readout.state();
+    line("", PW_TEXT("Readout", "Point %1").with(readout.point));
+    sources(*findPoint(m_study, readout.point));
+    m_out += '\n';
+    line("  ", nameOf(shown, readout.shown < m_study.combinations.size()));
+    components(stressFormOf(m_study, shown), shown);
+    steps(workingOf(m_study, readout, shown));
+    return std::move(m_out);
+  }
+
 private:
   std::string words(const Text& text) const { return plain(text, m_translate); }
   void line(std::string_view indent, const Text& text) { m_out += std::string(indent) + words(text) + "\n"; }
@@ -124,6 +135,8 @@ private:
         line("  ", PW_TEXT("Readout", "Case %1: %2").with(stress.caseId).with(made.name));
         for (const Text& rule : made.contribution.signRules)
           line("    ", rule);
+        for (const Text& caution : made.contribution.cautions)
+          line("    ", PW_TEXT("Readout", "Limit: %1").with(caution));
         steps(made.contribution.steps);
       }
   }
@@ -139,6 +152,14 @@ private:
     const StressForm stresses = stressFormOf(m_study, state);
     m_out += '\n';
     line("  ", nameOf(state, isCombination));
+    components(stresses, state);
+    m_out += '\n';
+    planes(planesTable(m_study, readout, state));
+    m_out += '\n';
+    steps(workingOf(m_study, readout, state));
+  }
+
+  void components(const StressForm& stresses, const StateReading& state) {
     line("    ", symbol("σ_{x} = %1, σ_{y} = %2, τ_{xy} = %3, σ_{z} = %4")
                      .with(stresses.withUnit(state.stress.sx))
                      .with(stresses.withUnit(state.stress.sy))
@@ -152,10 +173,6 @@ private:
       line("    ", PW_TEXT("Readout", "left on the free edge: σ_{n} = %1, τ_{nt} = %2")
                        .with(stresses.withUnit(state.edge->traction.sn))
                        .with(stresses.withUnit(state.edge->traction.tnt)));
-    m_out += '\n';
-    planes(planesTable(m_study, readout, state));
-    m_out += '\n';
-    steps(workingOf(m_study, readout, state));
   }
 
   void planes(const Table& table) {
@@ -189,6 +206,10 @@ private:
 };
 
 } // namespace
+
+std::string workingText(const Study& study, const Readout& readout, const Translate& translate) {
+  return TextWriter(study, translate).working(readout);
+}
 
 std::string readoutText(const Study& study, const std::vector<Readout>& points, const Translate& translate) {
   return TextWriter(study, translate).written(points);

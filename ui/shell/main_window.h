@@ -20,6 +20,7 @@ class GivenPanel;
 class HelpWindow;
 class PlanesPanel;
 class SlipDialog;
+class WorkingDialog;
 class StateBar;
 class StatusLine;
 class Strip;
@@ -63,6 +64,9 @@ protected:
   void closeEvent(QCloseEvent* event) override;
 
 private:
+  /// Makes a dialog that follows the study when it is first asked for, and shows it.
+  template <class Dialog>
+  void bringUp(QPointer<Dialog>& dialog);
   void build();
   void connectViews();
   void restoreGeometryAndSizes();
@@ -113,6 +117,7 @@ private:
   QPointer<HelpWindow> m_help;
   QPointer<TitleDialog> m_title;
   QPointer<SlipDialog> m_slips;
+  QPointer<WorkingDialog> m_working;
   QPointer<ThingsDialog> m_cases;
   QPointer<ThingsDialog> m_combinations;
   QPointer<ThingsDialog> m_points;

@@ -19,6 +19,7 @@
 #include "ui/shell/strip.h"
 #include "ui/shell/things_dialog.h"
 #include "ui/shell/title_dialog.h"
+#include "ui/shell/working_dialog.h"
 
 #include <QActionGroup>
 #include <QApplication>
@@ -34,6 +35,15 @@ QAction* MainWindow::add(QMenu& menu, const QString& words, const QKeySequence& 
   QAction* action = menu.addAction(words, this, act);
   action->setShortcut(keys);
   return action;
+}
+
+template <class Dialog>
+void MainWindow::bringUp(QPointer<Dialog>& dialog) {
+  if (!dialog)
+    dialog = new Dialog(m_desk, this);
+  dialog->show();
+  dialog->raise();
+  dialog->activateWindow();
 }
 
 void MainWindow::addFileMenu() {
@@ -116,13 +126,8 @@ void MainWindow::addStudyMenu() {
       [this] { m_given->focusPreviousProblem(); });
   menu.addSeparator();
   addListsOfStudy(menu);
-  add(menu, tr("Co&mpare somebody else's number…"), {}, [this] {
-    if (!m_slips)
-      m_slips = new SlipDialog(m_desk, this);
-    m_slips->show();
-    m_slips->raise();
-    m_slips->activateWindow();
-  });
+  add(menu, tr("Co&mpare somebody else's number…"), {}, [this] { bringUp(m_slips); });
+  add(menu, tr("&Working of the shown stresses…"), {}, [this] { bringUp(m_working); });
   menu.addSeparator();
   Picker* points = &m_stateBar->points();
   Picker* combinations = &m_stateBar->combinations();

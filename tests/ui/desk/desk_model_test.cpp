@@ -54,6 +54,35 @@ Place anyPlace() {
                            Place{Spot::lineTolerance, "P1", "grain"});
 }
 
+/// Few names, so that edits often meet what is there.
+std::string anyKey() {
+  return *rc::gen::element<std::string>("P1", "P2", "G", "S", "W");
+}
+
+Place anyThing() {
+  const std::string owner = anyKey();
+  return *rc::gen::element(Place{Spot::point, owner, {}}, Place{Spot::loadCase, owner, {}},
+                           Place{Spot::caseStress, owner, anyKey()},
+                           Place{Spot::combination, owner + " sum", {}},
+                           Place{Spot::factor, owner + " sum", anyKey()}, Place{Spot::line, owner, "seam"},
+                           Place{Spot::section, "beam", {}}, Place{Spot::pressure, owner, anyKey()});
+}
+
+/// Texts typed and whole points, cases and combinations that come, go and move.
+Edit anyEdit() {
+  const int what = *rc::gen::inRange(0, 8);
+  if (what == 0)
+    return Remove{anyThing()};
+  if (what == 1)
+    return Move{anyThing(), *rc::gen::inRange<std::size_t>(0, 2)};
+  if (what == 2)
+    return Rename{anyThing(), anyKey()};
+  if (what < 5)
+    return Insert{anyThing(), std::nullopt};
+  // Few values, so that drags often come back to where they began.
+  return Type{anyPlace(), *rc::gen::element<std::string>("0", "1", "2", "no number", "3 deg", "4 MPa")};
+}
+
 RC_GTEST_PROP(DeskModel, agreesWithAListOfStudies, ()) {
   Desk desk(newStudy());
   Model model;
@@ -73,9 +102,7 @@ RC_GTEST_PROP(DeskModel, agreesWithAListOfStudies, ()) {
       const bool fresh = what < 5;
       if (fresh)
         gesture = desk.newGesture();
-      // Few values, so that drags often come back to where they began.
-      const Type edit{anyPlace(),
-                      *rc::gen::element<std::string>("0", "1", "2", "no number", "3 deg", "4 MPa")};
+      const Edit edit = anyEdit();
       const Result<Study> after = edited(model.now, Edit{edit});
       RC_ASSERT(desk.request({edit}, gesture, QStringLiteral("Type")).has_value() == !after.has_value());
       model.take(after.value_or(model.now), fresh);
