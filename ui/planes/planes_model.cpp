@@ -6,6 +6,8 @@
 #include "core/table/reading_by_value.h"
 #include "ui/look/look.h"
 
+#include <utility>
+
 namespace planewright {
 
 namespace {
@@ -17,6 +19,21 @@ PlaneColumn columnOf(const QModelIndex& index) {
 /// A normal as it was typed, by itself or by its cut.
 Result<std::string> normalTyped(PlaneColumn column, const std::string& typed) {
   return column == PlaneColumn::cut ? normalTextForCut(typed) : Result<std::string>(typed);
+}
+
+/// The normal as it is typed, with its tolerance behind.
+QString watchedText(const Study& study, const std::string& point, const std::string& name) {
+  const QString normal = fromUtf8(textAt(study, {Spot::planeNormal, point, name}).value_or(""));
+  const QString tolerance = fromUtf8(textAt(study, {Spot::planeTolerance, point, name}).value_or(""));
+  return tolerance.isEmpty() ? normal : normal + QStringLiteral(" ± ") + tolerance;
+}
+
+/// "55 deg ± 2 deg" in its two parts, also with "+/-"; the second is empty without a sign.
+std::pair<std::string, std::string> splitTolerance(const std::string& typed) {
+  for (const std::string_view sign : {"±", "+/-"})
+    if (const std::size_t at = typed.find(sign); at != std::string::npos)
+      return {typed.substr(0, at), typed.substr(at + sign.size())};
+  return {typed, {}};
 }
 
 } // namespace
@@ -81,7 +98,7 @@ QString PlanesModel::editText(const QModelIndex& index) const {
     if (row.kind == PlaneKind::reading)
       return fromUtf8(textAt(study, {Spot::reading, owner(), {}}).value_or(""));
     if (row.kind == PlaneKind::watched)
-      return fromUtf8(textAt(study, {Spot::planeNormal, owner(), row.name}).value_or(""));
+      return watchedText(study, owner(), row.name);
     break;
   case PlaneColumn::cut:
     return cell.exact ? fromUtf8(angleText(Angle::fromDegrees(*cell.exact))) : QString();
@@ -102,6 +119,8 @@ RowNote PlanesModel::noteOf(int row) const {
         problem.mend.empty() ? problem.what : symbol("%1 %2").with(problem.what).with(problem.mend);
     return {RowNote::Kind::wrong, words};
   }
+  if (const std::string tolerance = toleranceIn(row); !tolerance.empty())
+    return {RowNote::Kind::fact, symbol("± %1").with(tolerance)};
   if (row != 0 || !m_asked)
     return {};
   const std::optional<ReadingByValue> found = solution();
@@ -171,11 +190,14 @@ std::optional<Problem> PlanesModel::enterWatched(const std::string& name, PlaneC
   const Place place{Spot::plane, owner(), name};
   if (column == PlaneColumn::plane)
     return m_desk.request({Rename{place, typed}}, m_desk.newGesture(), tr("name of a watched plane"));
-  Result<std::string> normal = normalTyped(column, typed);
+  const auto [angle, tolerance] = splitTolerance(typed);
+  Result<std::string> normal = normalTyped(column, angle);
   if (!normal)
     return std::move(normal).error();
-  return m_desk.request({Type{{Spot::planeNormal, owner(), name}, *normal}}, m_desk.newGesture(),
-                        tr("normal of a watched plane"));
+  Edits edits = {Type{{Spot::planeNormal, owner(), name}, *normal}};
+  if (column == PlaneColumn::normal || !tolerance.empty())
+    edits.push_back(Type{{Spot::planeTolerance, owner(), name}, tolerance});
+  return m_desk.request(edits, m_desk.newGesture(), tr("normal of a watched plane"));
 }
 
 std::optional<Problem> PlanesModel::enterNew(PlaneColumn column, const std::string& typed) {
@@ -210,6 +232,12 @@ void PlanesModel::removeWatched(int row) {
   if (const std::string name = watchedIn(row); !name.empty())
     m_desk.request({Remove{{Spot::plane, owner(), name}}}, m_desk.newGesture(),
                    tr("removal of a watched plane"));
+}
+
+std::string PlanesModel::toleranceIn(int row) const {
+  const std::string name = row < TableModel::rowCount() ? watchedIn(row) : std::string();
+  return name.empty() ? name
+                      : textAt(m_desk.study(), {Spot::planeTolerance, owner(), name}).value_or(std::string());
 }
 
 std::string PlanesModel::owner() const {

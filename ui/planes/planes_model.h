@@ -56,6 +56,7 @@ private:
   std::optional<Problem> enterNew(PlaneColumn column, const std::string& typed);
   std::optional<Problem> enterReading(PlaneColumn column, const std::string& typed);
   std::optional<Problem> turn(const std::string& normal);
+  std::string toleranceIn(int row) const;
   std::string owner() const;
   std::string freshName() const;
   QString editText(const QModelIndex& index) const;

@@ -162,6 +162,20 @@ TEST_F(PlanesModelTest, theLastRowWatchesAnotherPlane) {
   EXPECT_EQ(model.noteOf(watch + 3).kind, RowNote::Kind::wrong);
 }
 
+TEST_F(PlanesModelTest, aWatchedNormalTakesItsToleranceBehindASign) {
+  EXPECT_TRUE(enter(scarf, PlaneColumn::normal, "55 ± 2"));
+  EXPECT_EQ(kept(Spot::planeNormal, "scarf"), "55 deg");
+  EXPECT_EQ(kept(Spot::planeTolerance, "scarf"), "2 deg");
+  EXPECT_EQ(plain(model.noteOf(scarf).words), "± 2 deg");
+  EXPECT_EQ(at(scarf, PlaneColumn::normal).data(Qt::EditRole).toString(),
+            QString::fromUtf8("55 deg ± 2 deg"));
+  EXPECT_TRUE(enter(scarf, PlaneColumn::cut, "10")) << "the cut alone keeps it";
+  EXPECT_EQ(kept(Spot::planeTolerance, "scarf"), "2 deg");
+  EXPECT_FALSE(enter(scarf, PlaneColumn::normal, "55 +/- -2"));
+  EXPECT_TRUE(enter(scarf, PlaneColumn::normal, "55"));
+  EXPECT_EQ(kept(Spot::planeTolerance, "scarf"), "");
+}
+
 TEST_F(PlanesModelTest, insertWatchesTheReadingPlane) {
   const int row = model.watchReading();
   EXPECT_EQ(row, scarf + 1);
