@@ -133,7 +133,9 @@ void ConventionGroup::refresh() {
   const Convention& convention = m_desk.study().convention;
   check(m_positive, static_cast<int>(convention.positive));
   check(m_shearAxis, static_cast<int>(convention.shearAxis));
-  m_shearForce->setText(shown(labelOf(convention.shearForce)));
+  m_shearForce->setText(convention.shearForce == ShearRule::upward ? tr("Vy positive upwards")
+                                                                   : tr("Vy = dMz/dx"));
+  m_shearForce->setToolTip(shown(labelOf(convention.shearForce)));
   m_shearForce->updateGeometry();
   setSummary(
       tr("%1, %2").arg(shown(shortLabel(convention.positive)), shown(shortLabel(convention.shearAxis))));

@@ -19,6 +19,8 @@ namespace planewright {
 
 namespace {
 
+constexpr int longestName = 120; ///< px of a section's name beside the heading
+
 QHBoxLayout* rowOf(std::initializer_list<QWidget*> widgets) {
   auto* row = new QHBoxLayout;
   row->setSpacing(8);
@@ -274,7 +276,9 @@ void SectionGroup::refresh() {
   const TypedSection* own = section();
   const Point& point = shownPoint(m_desk.study());
   rebuildSizes();
-  m_choice->setText(own ? fromUtf8(own->name) : tr("no section"));
+  const QString name = own ? fromUtf8(own->name) : tr("no section");
+  m_choice->setText(m_choice->fontMetrics().elidedText(name, Qt::ElideRight, longestName));
+  m_choice->setToolTip(name);
   m_choice->updateGeometry();
   m_shape->setVisible(own);
   m_sizeRows->setVisible(own);
@@ -288,7 +292,8 @@ void SectionGroup::refresh() {
   if (own) {
     m_shape->setText(shown(labelOf(own->shape)));
     m_shape->updateGeometry();
-    m_side->setText(shown(labelOf(point.fibre->view)));
+    m_side->setText(point.fibre->view == View::side ? tr("seen from the side") : tr("seen from the top"));
+    m_side->setToolTip(shown(labelOf(point.fibre->view)));
     m_side->updateGeometry();
   }
   const QString words = properties();

@@ -126,10 +126,10 @@ void StressGroup::buildMore() {
   auto* line = new QHBoxLayout;
   line->addWidget(m_addThird);
   line->addWidget(m_addAxes);
-  line->addWidget(m_addEdge);
   line->addStretch();
   auto* sources = new QHBoxLayout;
   sources->addWidget(m_addSource);
+  sources->addWidget(m_addEdge);
   sources->addStretch();
   body().addLayout(sources);
   body().addLayout(line);

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "given_fixture.h"
 
+#include "core/study/section_edits.h"
 #include "ui/entry/complaint.h"
 #include "ui/look/look.h"
 
@@ -57,6 +58,27 @@ struct GivenLayout : GivenTest {
   QList<EntryField*> fields() { return panel.findChildren<EntryField*>(); }
   int topOf(EntryField* field) { return field->mapTo(panel.widget(), QPoint()).y(); }
 };
+
+TEST_F(GivenLayout, sourcesAndSectionsFitTheNarrowPanel) {
+  const auto ask = [this](const Edits& edits) {
+    const auto problem = desk.request(edits, desk.newGesture(), {});
+    ASSERT_FALSE(problem) << plain(*problem);
+    settle();
+    EXPECT_LE(panel.widget()->width(), panel.viewport()->width());
+    expectDisjoint(panel);
+  };
+  ask(editsThatGiveFibre(desk.study(), "P1", "a beam with a long name"));
+  ask({Insert{{Spot::forces, "P1", "G"}, {}}, Type{{Spot::forceN, "P1", "G"}, "40"},
+       Type{{Spot::forceMz, "P1", "G"}, "10"}});
+  ask({Insert{{Spot::pressure, "P1", "G"}, {}}});
+  ask({Type{{Spot::caseNature, "G", {}}, "measured"}, Insert{{Spot::rosette, "P1", "G"}, {}}});
+  ask({Type{{Spot::rosetteMaterial, "P1", "G"}, "orthotropic"}});
+  ask({Insert{{Spot::line, "P1", "scarf"}, {}}, Type{{Spot::freeEdge, "P1", {}}, "1 in 10"},
+       Type{{Spot::shearForce, {}, {}}, "slope"}});
+  for (const Named<SectionShape>& shape : namesOf<SectionShape>())
+    if (shape.value != SectionShape::tabled) // it has no second moments to bend by
+      ask(editsThatReshape(desk.study(), "a beam with a long name", shape.value));
+}
 
 TEST_F(GivenLayout, aWrongEntryCoversNothingAndMovesNothingAboveIt) {
   const char* longWrong = "12 kN*1,5/(90 mm*240 mm) + 17 furlongs";
