@@ -57,6 +57,13 @@ GivenPanel::GivenPanel(Desk& desk, QWidget* parent) : QScrollArea(parent), m_des
   refresh();
 }
 
+// While a window goes the focus leaves its fields, and they take what was typed: by then this is no panel.
+GivenPanel::~GivenPanel() {
+  m_desk.disconnect(this);
+  for (EntryField* field : fields())
+    field->disconnect(this);
+}
+
 void GivenPanel::watchFields() {
   for (EntryField* field : fields())
     connect(field, &EntryField::takenChanged, this, &GivenPanel::countProblems, Qt::UniqueConnection);

@@ -25,6 +25,7 @@ class GivenPanel : public QScrollArea {
 
 public:
   explicit GivenPanel(Desk& desk, QWidget* parent = nullptr);
+  ~GivenPanel() override;
 
   QSize sizeHint() const override { return {300, 600}; }
   QSize minimumSizeHint() const override { return {264, 200}; }
