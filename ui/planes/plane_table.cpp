@@ -81,7 +81,9 @@ void PlaneTable::growColumns() {
 
 QList<int> PlaneTable::widthsOfNumbers(bool brokenHeadings) const {
   QList<int> widths;
-  for (int column = 1; column < m_needed.size(); ++column)
+  // While columns go the view may be laid out before it has measured those that stay.
+  const int count = qMin(static_cast<int>(m_needed.size()), m_model.columnCount());
+  for (int column = 1; column < count; ++column)
     widths << qMax(m_needed.at(column), m_header->headingWidth(column, brokenHeadings) + headingPadding);
   return widths;
 }
