@@ -60,6 +60,7 @@ Text missingOf(const std::vector<std::string>& ids) {
 std::vector<Text> conventionsOf(const Study& study, const Readout& readout) {
   const StateReading& state = readout.state();
   std::vector<Text> sentences;
+  sentences.reserve(readout.lines.size() + 9);
   for (const LineReading& line : readout.lines)
     sentences.push_back(lineOf(line));
   if (!state.circle.theta1)
