@@ -52,8 +52,11 @@ Found found(const Place& place, std::string_view quoted, const Json& root) {
     path.remove_prefix(std::min(slash + 1, path.size()));
     assert(segment != "*" || next < names.size());
     const JsonMember* inner = step(*at.value, segment == "*" ? names[next++] : segment);
-    if (!inner && segment == "lines" && (inner = step(*at.value, "line")))
-      path.remove_prefix(std::min(std::string_view("*/").size(), path.size())); // a single line has no list
+    if (!inner && segment == "lines") {
+      inner = step(*at.value, "line"); // a single line has no list
+      if (inner)
+        path.remove_prefix(std::min(std::string_view("*/").size(), path.size()));
+    }
     if (!inner)
       return at;
     const bool isKey = at.value->kind == Json::Kind::object && inner->key == quoted;

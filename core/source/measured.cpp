@@ -183,7 +183,7 @@ Results<Measured> measuredBy(const Rosette& rosette, const Elastic& elastic, con
   Problems problems = problemsOf(elastic);
   Result<RosetteSolution> solution = solved(rosette);
   if (!solution)
-    problems.push_back(std::move(solution).error());
+    problems.push_back(solution.error());
   if (!problems.empty())
     return tl::unexpected(std::move(problems));
   Measured measured{*solution, principalOf(solution->strain), {}};
