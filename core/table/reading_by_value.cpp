@@ -38,7 +38,7 @@ Text touchedName(Component component, bool greatest) {
 
 Text touchingNote(Component component, const PlanesOfValue& planes, double value) {
   const bool greatest = planes.greatest - value < value - planes.least;
-  const Text at = PW_TEXT("Inverse", "touches the circle at %1").with(touchedName(component, greatest));
+  Text at = PW_TEXT("Inverse", "touches the circle at %1").with(touchedName(component, greatest));
   // Rounded up, for the target as typed is met nowhere outside the spread.
   const double spread = std::ceil(planes.spread.degrees() * 10 - 1e-9) / 10;
   if (planes.spread.degrees() < 1e-3)
