@@ -18,37 +18,31 @@ namespace {
 /// Beyond this a stress is a slip of typing, and what follows from it may not be finite.
 constexpr double greatestStress = 1e100;
 
-double read(const Study& study, Spot spot, const std::string& text) {
-  const Result<Entry> entry = readEntry(text, entryKindOf(study, spot));
-  assert(entry && "texts are read before what follows from them");
-  return entry->value;
-}
-
 Angle readAngle(const Study& study, Spot spot, const std::string& text) {
-  return Angle::fromDegrees(read(study, spot, text));
+  return Angle::fromDegrees(valueOf(study, spot, text));
 }
 
 Vessel vesselOf(const Study& study, const PressureTexts& typed) {
-  return {read(study, Spot::pressureP, typed.p), read(study, Spot::pressureR, typed.r),
-          read(study, Spot::pressureT, typed.t), typed.ends == Ends::closed};
+  return {valueOf(study, Spot::pressureP, typed.p), valueOf(study, Spot::pressureR, typed.r),
+          valueOf(study, Spot::pressureT, typed.t), typed.ends == Ends::closed};
 }
 
 Rosette rosetteOf(const Study& study, const RosetteTexts& typed) {
   return {Gauge{readAngle(study, Spot::gaugeAngleA, typed.angleA),
-                read(study, Spot::gaugeStrainA, typed.strainA)},
+                valueOf(study, Spot::gaugeStrainA, typed.strainA)},
           Gauge{readAngle(study, Spot::gaugeAngleB, typed.angleB),
-                read(study, Spot::gaugeStrainB, typed.strainB)},
+                valueOf(study, Spot::gaugeStrainB, typed.strainB)},
           Gauge{readAngle(study, Spot::gaugeAngleC, typed.angleC),
-                read(study, Spot::gaugeStrainC, typed.strainC)}};
+                valueOf(study, Spot::gaugeStrainC, typed.strainC)}};
 }
 
 Elastic elasticOf(const Study& study, const Point& point, const RosetteTexts& typed) {
   if (typed.material == Elasticity::isotropic)
-    return Isotropic{read(study, Spot::rosetteE, typed.E), read(study, Spot::rosetteNu, typed.nu)};
+    return Isotropic{valueOf(study, Spot::rosetteE, typed.E), valueOf(study, Spot::rosetteNu, typed.nu)};
   assert(!point.lines.empty());
-  return Orthotropic{read(study, Spot::rosetteAlong, typed.along),
-                     read(study, Spot::rosetteAcross, typed.across),
-                     read(study, Spot::rosetteNu12, typed.nu12), read(study, Spot::rosetteG, typed.G),
+  return Orthotropic{valueOf(study, Spot::rosetteAlong, typed.along),
+                     valueOf(study, Spot::rosetteAcross, typed.across),
+                     valueOf(study, Spot::rosetteNu12, typed.nu12), valueOf(study, Spot::rosetteG, typed.G),
                      readAngle(study, Spot::lineAngle, point.lines.front().angle)};
 }
 
@@ -128,9 +122,9 @@ Results<SectionModel> modelOf(const Study& study, const TypedSection& section) {
 }
 
 SectionForces forcesOf(const Study& study, const ForceTexts& typed) {
-  return {read(study, Spot::forceN, typed.N),   read(study, Spot::forceVy, typed.Vy),
-          read(study, Spot::forceVz, typed.Vz), read(study, Spot::forceT, typed.T),
-          read(study, Spot::forceMy, typed.My), read(study, Spot::forceMz, typed.Mz)};
+  return {valueOf(study, Spot::forceN, typed.N),   valueOf(study, Spot::forceVy, typed.Vy),
+          valueOf(study, Spot::forceVz, typed.Vz), valueOf(study, Spot::forceT, typed.T),
+          valueOf(study, Spot::forceMy, typed.My), valueOf(study, Spot::forceMz, typed.Mz)};
 }
 
 WrittenUnits writtenUnitsOf(const Study& study) {
@@ -148,8 +142,8 @@ Results<PointSources> PointSources::of(const Study& study, const Point& point) {
   if (!model)
     return tl::unexpected(std::move(model).error());
   sources.m_model = *std::move(model);
-  sources.m_fibre = {read(study, Spot::fibreY, point.fibre->y), read(study, Spot::fibreZ, point.fibre->z),
-                     point.fibre->view};
+  sources.m_fibre = {valueOf(study, Spot::fibreY, point.fibre->y),
+                     valueOf(study, Spot::fibreZ, point.fibre->z), point.fibre->view};
   const Result<FibreStress> unloaded =
       planewright::stressAt(*sources.m_model, {}, sources.m_fibre, study.convention.shearForce);
   if (!unloaded)

@@ -2,6 +2,7 @@
 #include "core/study/readout.h"
 
 #include "core/study/case_sources.h"
+#include "core/study/typed.h"
 
 #include <algorithm>
 #include <cassert>
@@ -11,16 +12,6 @@
 namespace planewright {
 
 namespace {
-
-double valueOf(const Study& study, Spot spot, const std::string& text) {
-  if (text.empty()) {
-    assert(rowOf(spot).mayBeEmpty);
-    return 0;
-  }
-  const Result<Entry> entry = readEntry(text, entryKindOf(study, spot));
-  assert(entry && "a valid study holds only texts that read");
-  return entry->value;
-}
 
 Angle angleOf(const Study& study, Spot spot, const std::string& text) {
   return Angle::fromDegrees(valueOf(study, spot, text));

@@ -3,6 +3,7 @@
 
 #include "core/words/utf8.h"
 
+#include <cassert>
 #include <cmath>
 
 namespace planewright {
@@ -93,6 +94,16 @@ Result<std::string> keptWord(const Place& place, const Slot& slot, std::string_v
 
 Problem problemAt(const Place& place, std::string_view quoted, Text what, Text mend) {
   return {pathOf(place), 0, 0, std::string(quoted), std::move(what), std::move(mend)};
+}
+
+double valueOf(const Study& study, Spot spot, const std::string& text) {
+  if (text.empty()) {
+    assert(rowOf(spot).mayBeEmpty);
+    return 0;
+  }
+  const Result<Entry> entry = readEntry(text, entryKindOf(study, spot));
+  assert(entry && "texts are read before what follows from them");
+  return entry->value;
 }
 
 Text faultOfName(std::string_view name) {

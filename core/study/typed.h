@@ -9,6 +9,10 @@ namespace planewright {
 /// the Problem, with the place's path.
 Result<std::string> keptText(const Study& study, const Place& place, const Slot& slot, std::string_view text);
 
+/// The value, in the base, of a text that stands at such a spot of a study whose texts read; 0 of an empty
+/// text where it may be empty. Not of sizes, whose dimension goes by their key.
+double valueOf(const Study& study, Spot spot, const std::string& text);
+
 /// Why a name cannot be a key: empty, blank at an end, control characters, longer than 200 bytes, broken
 /// UTF-8. Empty for a good name.
 Text faultOfName(std::string_view name);

@@ -109,14 +109,13 @@ void SectionGroup::buildButtons() {
 }
 
 void SectionGroup::buildPlaces() {
-  const auto add = [this](Spot spot, double Fibre::*place, const QString& meaning) {
+  const auto add = [this](Spot spot, const QString& meaning) {
     EntryBinding binding = boundTo([spot](const Study& study) {
       return Place{spot, shownPoint(study).name, {}};
     });
-    binding.echo = [place](const Study& study, const Readout&, const std::string& typed) {
-      const Point& point = shownPoint(study);
-      const Results<PointSources> sources = PointSources::of(study, point);
-      return point.fibre && sources ? echoOfLength(study, sources->fibre().*place, typed) : QString();
+    binding.echo = [spot](const Study& study, const Readout&, const std::string& typed) {
+      const Result<Entry> entry = readEntry(typed, entryKindOf(study, spot));
+      return entry ? echoOfLength(study, entry->value, typed) : QString();
     };
     auto* field =
         new EntryField(m_desk, std::move(binding), {planewright::rowOf(spot).label, meaning}, m_rest);
@@ -124,8 +123,8 @@ void SectionGroup::buildPlaces() {
     m_rest->layout()->addWidget(field);
     m_places += field;
   };
-  add(Spot::fibreY, &Fibre::y, tr("height of the fibre over the centroid"));
-  add(Spot::fibreZ, &Fibre::z, tr("place of the fibre beside the centroid, towards the near face"));
+  add(Spot::fibreY, tr("height of the fibre over the centroid"));
+  add(Spot::fibreZ, tr("place of the fibre beside the centroid, towards the near face"));
 }
 
 void SectionGroup::buildView() {
