@@ -1,0 +1,74 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/strength/demand.h"
+
+#include <array>
+#include <variant>
+#include <vector>
+
+namespace planewright {
+
+/// The state of a demand as seen from a direction that turns: along = mean + X, across = mean - X, shear^2 =
+/// r^2 - X^2 with X = r cos 2(angle - theta1).
+struct TurningState {
+  PlaneStress stress;
+  Circle circle;
+  double scale = 0;
+
+  /// Components at a direction; what is only rounding of terms that cancel is 0.
+  LineStress at(Angle direction) const;
+  /// The directions, folded, where along - mean = X; none where |X| > r, or r is 0.
+  void directionsOf(double X, std::vector<Angle>& directions) const;
+};
+
+/// Coefficients of the polynomial of degree 2 in the load: a = a11 s1^2 + a12 s1 s2 + a22 s2^2 + a66 t^2,
+/// b = b1 s1 + b2 s2 + b6 |t|.
+struct Interaction {
+  double a11 = 0, a12 = 0, a22 = 0, a66 = 0;
+  double b1 = 0, b2 = 0, b6 = 0; ///< b6 only where all of a is 0
+};
+
+/// A form with coefficients by the signs of s1 and s2: [s1 < 0][s2 < 0]. Its utilisation 1/R, where
+/// a R^2 + b R = 1, is (b + sqrt(b^2 + 4a))/2: stable for b >= 0, and 2a/(sqrt(b^2 + 4a) - b) for b < 0.
+struct SignedForm {
+  std::array<std::array<Interaction, 2>, 2> pieces;
+};
+
+/// |s| (sin^n/Q + cos^n/P) of a uniaxial stress s at an angle to the line; s along `axis`.
+struct PowerOfAngle {
+  double size = 0;
+  Angle axis;
+  double P = 1, Q = 1, n = 2;
+};
+
+/// |t| / (cohesion - s1 tan(phi)); infinite where the denominator is not positive.
+struct Mobilised {
+  double cohesion = 0;
+  double tanPhi = 0;
+};
+
+/// s1 / limit in tension, 0 in compression; infinite in any tension where the limit is 0.
+struct CutOff {
+  double limit = 0;
+};
+
+/// The same in every direction.
+struct Fixed {
+  double utilisation = 0;
+  std::optional<double> multiplier;
+};
+
+/// One smooth part of a criterion; a criterion is the greatest of its parts.
+using Branch = std::variant<SignedForm, PowerOfAngle, Mobilised, CutOff, Fixed>;
+
+double utilisationOf(const Branch& branch, const TurningState& state, Angle direction);
+/// The multiplier on all loads that takes this part to 1; none where none does.
+std::optional<double> multiplierOf(const Branch& branch, const TurningState& state, Angle direction);
+/// Directions, folded, between which the utilisation of the part is monotone.
+std::vector<Angle> turningPointsOf(const Branch& branch, const TurningState& state);
+
+/// (b + sqrt(b^2 + 4a))/2 for a >= 0, by the form that loses no digits.
+double utilisationOfQuadratic(double a, double b);
+
+} // namespace planewright

@@ -1,0 +1,89 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/strength/cautions.h"
+
+namespace planewright {
+
+namespace {
+
+constexpr double steepTaper = 10; // deg
+
+std::optional<Text> ofTimber(Criterion criterion) {
+  switch (criterion) {
+  case Criterion::maximumStress:
+  case Criterion::norrisPlane:
+  case Criterion::norrisThreePlane:
+    return PW_TEXT("Strength", "For timber pulled at a small angle to the grain this criterion promises more "
+                               "than tests show: C24 at 1 in 10 keeps all of f_{t,0} by it, 0.61 to 0.81 by "
+                               "published tests and rules. See the other criteria beside it.");
+  case Criterion::tsaiWu:
+  case Criterion::hoffman:
+    return PW_TEXT("Strength",
+                   "With characteristic strengths of timber this criterion can promise more than f_{c,0}: "
+                   "C24 pressed at 15° takes 25.96 MPa by Tsai and Wu against f_{c,0} = 21 MPa, because "
+                   "f_{t,90} is far below f_{c,90}. See the other criteria beside it.");
+  default:
+    return std::nullopt;
+  }
+}
+
+} // namespace
+
+std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, const Parameters& parameters,
+                             std::optional<Angle> line) {
+  std::vector<Text> cautions;
+  if (strengths.kind == MaterialKind::timber)
+    if (auto caution = ofTimber(criterion))
+      cautions.push_back(*std::move(caution));
+  if (criterion == Criterion::hankinson && parameters.n.value_or(2) > 2)
+    cautions.push_back(PW_TEXT("Strength",
+                               "With an exponent above 2 Hankinson's formula exceeds the strength "
+                               "along the line at small angles."));
+  if (criterion == Criterion::linearSum)
+    cautions.push_back(PW_TEXT("Strength",
+                               "The linear sum is published for uniaxial tension and bending at an "
+                               "angle; for other states it is an extension of this program."));
+  if (criterion == Criterion::taperedEdge && parameters.edge && line &&
+      apart(*parameters.edge, *line).degrees() > steepTaper)
+    cautions.push_back(PW_TEXT("Strength",
+                               "The taper is over 10°: the formula is stated for less (Swedish Wood, "
+                               "Design of timber structures, vol. 1; not in the clause)."));
+  if (criterion == Criterion::coulomb && !strengths[StrengthKey::cutoff])
+    cautions.push_back(
+        PW_TEXT("Strength", "No cut-off is given: it counts as 0, so the plane takes no tension."));
+  return cautions;
+}
+
+std::optional<Text> cautionOfMode(const Strengths& strengths, Mode mode) {
+  if (strengths.kind != MaterialKind::timber ||
+      (mode != Mode::tensionAcross && mode != Mode::interaction && mode != Mode::tensionAtAngle))
+    return std::nullopt;
+  return PW_TEXT("Strength", "k_{vol} = 1 in tension across the grain: f_{t,90} is for 0.01 m³, and "
+                             "(0.01/V)^0.2 is 0.46 at 0.5 m³ (exponent from memory).");
+}
+
+std::vector<Text> limitsOfPointChecks(MaterialKind kind) {
+  std::vector<Text> limits = {
+      PW_TEXT("Strength", "Stress at this point only; local codes and a licensed engineer decide."),
+      PW_TEXT("Strength", "Near free edges, notches, holes, ends of plies, curved apexes and in welds, "
+                          "stresses out of the plane are not seen (common practice, no source)."),
+      PW_TEXT("Strength", "Criteria agree on the axes of the material and disagree in between; tests under "
+                          "combined stresses are scarce (FHWA-HRT-04-097, 1.4 and appendix D)."),
+      PW_TEXT("Strength", "Characteristic values are not design values; the national annex decides (common "
+                          "practice, no source).")};
+  if (kind != MaterialKind::timber)
+    return limits;
+  limits.insert(
+      limits.end(),
+      {PW_TEXT("Strength",
+               "Rolling shear, tension in the third direction, the volume under tension across the "
+               "grain, and cracks are outside this check."),
+       PW_TEXT("Strength", "About 60 % of the load of a short test is carried for ten years (FPL-GTR-282, "
+                           "pages 5-38 to 5-40): use the factor of the duration."),
+       PW_TEXT("Strength", "Clear wood scatters: coefficient of variation 25 % in tension and 28 % in "
+                           "compression across the grain, 14 % in shear (FPL-GTR-282, table 5-6)."),
+       PW_TEXT("Strength", "Across the grain strengths can be 40 to 60 % lower at 45° to the rings in some "
+                           "species (FPL-GTR-282, page 5-31).")});
+  return limits;
+}
+
+} // namespace planewright

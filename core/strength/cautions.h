@@ -1,0 +1,20 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/strength/judge.h"
+
+namespace planewright {
+
+/// What must be said beside a verdict of this criterion on this material: where the criterion is known to
+/// reassure, what was assumed. `line` is the direction of the line, for the taper of an edge.
+std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, const Parameters& parameters,
+                             std::optional<Angle> line);
+
+/// What the mode asks to be said: the volume factor with tension across the grain of timber.
+std::optional<Text> cautionOfMode(const Strengths& strengths, Mode mode);
+
+/// What a check of the stress at a point does not see, for materials of this kind; the first is the shortest
+/// and stands with every verdict. Each names its source.
+std::vector<Text> limitsOfPointChecks(MaterialKind kind);
+
+} // namespace planewright

@@ -1,0 +1,17 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/strength/demand.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+double bendingShareOf(double sx, double axial, double bending) {
+  const double sense = sx < 0 ? -1 : 1;
+  const double bends = std::max(sense * bending, 0.0);
+  if (sx == 0 || bends == 0)
+    return 0;
+  const double pulls = std::max(sense * axial, 0.0) + std::max(sense * (sx - axial - bending), 0.0);
+  return bends / (bends + pulls);
+}
+
+} // namespace planewright

@@ -1,0 +1,121 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/strength/judge.h"
+
+#include "core/strength/line_criteria.h"
+
+#include <algorithm>
+#include <cmath>
+
+namespace planewright {
+
+namespace {
+
+constexpr double singleShare = 0.9;
+
+struct Ratio {
+  Mode mode;
+  double value;
+};
+
+Ratio ratioOf(double stress, double tension, double compression, Mode pulls, Mode presses) {
+  return stress >= 0 ? Ratio{pulls, stress / tension} : Ratio{presses, -stress / compression};
+}
+
+Mode governing(std::initializer_list<Ratio> ratios, double utilisation) {
+  const Ratio& greatest = *std::ranges::max_element(ratios, {}, &Ratio::value);
+  return greatest.value > singleShare * utilisation ? greatest.mode : Mode::interaction;
+}
+
+} // namespace
+
+Result<Judge> Judge::of(Criterion criterion, const Strengths& strengths, const Parameters& parameters,
+                        const Demand& demand) {
+  Judge judge;
+  judge.m_criterion = criterion;
+  judge.m_strengths = strengths;
+  judge.m_state = {demand.stress, circleOf(demand.stress, demand.scale, demand.sz), demand.scale};
+  const ActsOn actsOn = rowOf(criterion).actsOn;
+  if (actsOn == ActsOn::principal) {
+    Result<Outcome> outcome = outcomeOfPrincipals(criterion, strengths, demand);
+    if (!outcome)
+      return tl::unexpected(std::move(outcome).error());
+    judge.m_hasDirection = false;
+    judge.m_fixedMode = outcome->mode;
+    judge.m_branches = {Fixed{outcome->utilisation, outcome->multiplier}};
+    return judge;
+  }
+  Result<std::vector<Branch>> branches = actsOn == ActsOn::plane
+                                             ? planeBranchesOf(criterion, strengths)
+                                             : lineBranchesOf(criterion, strengths, parameters, demand);
+  if (!branches)
+    return tl::unexpected(std::move(branches).error());
+  judge.m_branches = *std::move(branches);
+  if (actsOn == ActsOn::line && demand.bendingShare != 0)
+    if (const Result<LineStrengths> mixed = lineStrengthsOf(strengths, demand)) {
+      judge.m_strengths[StrengthKey::alongTension] = mixed->Xt;
+      judge.m_strengths[StrengthKey::alongCompression] = mixed->Xc;
+    }
+  return judge;
+}
+
+double Judge::utilisation(Angle direction) const {
+  double greatest = 0;
+  for (const Branch& branch : m_branches)
+    greatest = std::max(greatest, utilisationOf(branch, m_state, direction));
+  return greatest;
+}
+
+Outcome Judge::at(Angle direction) const {
+  Outcome outcome;
+  outcome.utilisation = utilisation(direction);
+  for (const Branch& branch : m_branches) {
+    const std::optional<double> multiplier = multiplierOf(branch, m_state, direction);
+    if (multiplier && (!outcome.multiplier || *multiplier < *outcome.multiplier))
+      outcome.multiplier = multiplier;
+  }
+  if (outcome.utilisation > 0)
+    outcome.mode = modeAt(direction, outcome.utilisation);
+  return outcome;
+}
+
+std::optional<Mode> Judge::modeAt(Angle direction, double utilisation) const {
+  using enum StrengthKey;
+  const LineStress s = m_state.at(direction);
+  const auto f = [this](StrengthKey key) { return m_strengths[key].value_or(0); };
+  switch (m_criterion) {
+  case Criterion::vonMises:
+  case Criterion::tresca:
+  case Criterion::rankine:
+  case Criterion::mohrCoulomb:
+    return m_fixedMode;
+  case Criterion::hankinson:
+  case Criterion::compressionAtAngle:
+    return m_state.circle.mean >= 0 ? Mode::tensionAtAngle : Mode::compressionAtAngle;
+  case Criterion::coulomb:
+    return utilisationOf(m_branches[1], m_state, direction) >= utilisation ? Mode::separation : Mode::slip;
+  case Criterion::throat:
+    return utilisationOf(m_branches[1], m_state, direction) >= utilisation ? Mode::normal : Mode::throat;
+  case Criterion::bond:
+    return governing({{Mode::separation, std::max(s.along, 0.0) / f(tension)},
+                      {Mode::shear, std::abs(s.shear) / f(StrengthKey::shear)}},
+                     utilisation);
+  case Criterion::taperedEdge: {
+    const bool pulls = m_state.circle.mean >= 0;
+    return governing(
+        {ratioOf(s.along, f(alongBending), f(alongBending), Mode::tensionAlong, Mode::compressionAlong),
+         ratioOf(s.across, f(acrossTension), f(acrossCompression), Mode::tensionAcross,
+                 Mode::compressionAcross),
+         {Mode::shear, std::abs(s.shear) / ((pulls ? 0.75 : 1.5) * f(StrengthKey::shear))}},
+        utilisation);
+  }
+  default:
+    return governing(
+        {ratioOf(s.along, f(alongTension), f(alongCompression), Mode::tensionAlong, Mode::compressionAlong),
+         ratioOf(s.across, f(acrossTension), f(acrossCompression), Mode::tensionAcross,
+                 Mode::compressionAcross),
+         {Mode::shear, std::abs(s.shear) / f(StrengthKey::shear)}},
+        utilisation);
+  }
+}
+
+} // namespace planewright

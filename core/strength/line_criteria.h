@@ -1,0 +1,27 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/strength/judge.h"
+
+namespace planewright {
+
+/// The strength along the line in tension (`pulls`) or compression: of timber that of the mix of axial and
+/// bending parts of the demand.
+Result<double> alongStrengthOf(const Strengths& strengths, const Demand& demand, bool pulls);
+/// The strengths of a body with a line, or the Problem that names what is missing.
+Result<LineStrengths> lineStrengthsOf(const Strengths& strengths, const Demand& demand);
+
+/// The parts of a criterion of the stresses in the line's axes.
+Result<std::vector<Branch>> lineBranchesOf(Criterion criterion, const Strengths& strengths,
+                                           const Parameters& parameters, const Demand& demand);
+
+/// The parts of a criterion of the normal and shear stress on a plane.
+Result<std::vector<Branch>> planeBranchesOf(Criterion criterion, const Strengths& strengths);
+
+/// A criterion of the three principal stresses, which knows no direction.
+Result<Outcome> outcomeOfPrincipals(Criterion criterion, const Strengths& strengths, const Demand& demand);
+
+/// The strength, or the Problem that says which one the criterion needs.
+Result<double> needed(const Strengths& strengths, StrengthKey key);
+
+} // namespace planewright

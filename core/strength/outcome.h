@@ -1,0 +1,43 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/words/names.h"
+
+namespace planewright {
+
+/// What a state at its limit would do.
+enum class Mode {
+  tensionAlong,
+  compressionAlong,
+  tensionAcross,
+  compressionAcross,
+  shear,
+  interaction, ///< no single ratio exceeds 0.9 of the utilisation
+  tensionAtAngle,
+  compressionAtAngle,
+  yield,
+  tension,
+  compression,
+  slip,
+  separation,
+  throat,
+  normal
+};
+template <>
+const std::vector<Named<Mode>>& namesOf<Mode>();
+
+/// How a state stands against strengths.
+struct Outcome {
+  /// Demand over capacity; infinite where no finite number exists, as for tension across a plane that takes
+  /// none.
+  double utilisation = 0;
+  /// The multiplier on all actions that brings the point to its limit; none where no multiple does.
+  std::optional<double> multiplier = std::nullopt;
+  std::optional<Mode> mode = std::nullopt; ///< none for a state of zero
+  bool operator==(const Outcome&) const = default;
+};
+
+/// A utilisation may exceed 1 by this much for the rounding of its inputs.
+inline constexpr double exceedingFrom = 1 + 1e-9;
+
+} // namespace planewright

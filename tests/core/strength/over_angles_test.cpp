@@ -1,0 +1,127 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/strength/band.h"
+#include "core/strength/over_angles.h"
+#include "tests/support/strength_gen.h"
+
+#include <gtest/gtest.h>
+#include <rapidcheck/gtest.h>
+
+#include <cmath>
+
+namespace planewright {
+namespace {
+
+Angle degrees(double value) {
+  return Angle::fromDegrees(value);
+}
+
+std::vector<Judge> anyJudges() {
+  const Criterion criterion = *anyLineCriterion();
+  const Strengths f = *anyLineStrengths();
+  const int count = *rc::gen::inRange(1, 5);
+  std::vector<Judge> judges;
+  for (int i = 0; i < count; ++i)
+    judges.push_back(*Judge::of(criterion, f, {}, demandOf(0.02 * *anyStress())));
+  return judges;
+}
+
+bool isWithin(std::span<const Within> within, Angle direction) {
+  return allowedTolerance(within, direction).has_value();
+}
+
+RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithAScan, ()) {
+  const std::vector<Judge> judges = anyJudges();
+  const std::vector<Within> within = withinLimit(judges);
+  constexpr double step = 0.25;
+  for (double at = -90; at <= 90; at += step) {
+    const double utilisation = greatestUtilisation(judges, degrees(at));
+    if (isWithin(within, degrees(at)) == (utilisation <= 1))
+      continue;
+    // Only within rounding of an end may the two differ.
+    RC_ASSERT(std::abs(utilisation - 1) <= 1e-9);
+  }
+}
+
+RC_GTEST_PROP(AnglesWithinTheLimit, endWhereTheUtilisationIsOne, ()) {
+  const std::vector<Judge> judges = anyJudges();
+  for (const Within& one : withinLimit(judges)) {
+    RC_ASSERT(one.from > degrees(-90.001));
+    if ((one.to - one.from).degrees() >= 180)
+      continue;
+    for (const Angle end : {one.from, one.to})
+      RC_ASSERT(std::abs(greatestUtilisation(judges, end) - 1) <= 1e-9);
+  }
+}
+
+RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithTheBand, ()) {
+  const std::vector<Judge> judges = anyJudges();
+  const Angle nominal = *anyAngle();
+  const std::optional<Angle> allowed = allowedTolerance(withinLimit(judges), nominal);
+  if (!allowed)
+    return;
+  double worst = 0;
+  for (const Judge& judge : judges)
+    worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed)).outcome.utilisation);
+  RC_ASSERT(worst <= 1 + 1e-9);
+  if (allowed->degrees() > 89.9)
+    return;
+  for (const Judge& judge : judges)
+    worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed + degrees(0.1))).outcome.utilisation);
+  RC_ASSERT(worst > 1 - 1e-9);
+}
+
+RC_GTEST_PROP(BestDirection, noScanFindsABetterOne, ()) {
+  const std::vector<Judge> judges = anyJudges();
+  const BestDirection best = bestDirection(judges);
+  RC_ASSERT(std::abs(greatestUtilisation(judges, best.angle) - best.utilisation) <=
+            1e-9 * (1 + best.utilisation));
+  for (double at = -90; at < 90; at += 0.1)
+    RC_ASSERT(greatestUtilisation(judges, degrees(at)) >= best.utilisation * (1 - 1e-9));
+}
+
+TEST(AnglesWithinTheLimit, areTheHalfTurnOrNone) {
+  const auto small = Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf({0.1, 0, 0}));
+  const std::vector<Within> all = withinLimit({&*small, 1});
+  ASSERT_EQ(all.size(), 1);
+  EXPECT_EQ(all.front(), (Within{degrees(-90), degrees(90)}));
+  EXPECT_EQ(allowedTolerance(all, degrees(20)), degrees(90));
+  const auto large = Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf({100, 0, 0}));
+  EXPECT_TRUE(withinLimit({&*large, 1}).empty());
+}
+
+TEST(AnglesWithinTheLimit, areJoinedAcrossTheUpright) {
+  const auto judge = Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf({0, 10, 0}));
+  const std::vector<Within> within = withinLimit({&*judge, 1});
+  ASSERT_EQ(within.size(), 1);
+  EXPECT_NEAR((within[0].from + within[0].to).degrees(), 180, 1e-9);
+  EXPECT_TRUE(allowedTolerance(within, degrees(-89)));
+  EXPECT_FALSE(allowedTolerance(within, degrees(0)));
+}
+
+TEST(AnglesWithinTheLimit, endWhereAPlaneWithoutCutOffIsPulled) {
+  using enum StrengthKey;
+  Strengths f;
+  f.kind = MaterialKind::coulomb;
+  f[cohesion] = 100;
+  f[friction] = 30;
+  const auto judge = Judge::of(Criterion::coulomb, f, {}, demandOf({5, -5, 0}));
+  EXPECT_TRUE(std::isinf(judge->utilisation({})));
+  const std::vector<Within> within = withinLimit({&*judge, 1});
+  ASSERT_EQ(within.size(), 1);
+  EXPECT_NEAR(within[0].from.degrees(), 45, 1e-9);
+  EXPECT_NEAR(within[0].to.degrees(), 135, 1e-9);
+}
+
+TEST(SlopePerDegree, isThatOfTheSteeperSideAtACorner) {
+  // Two uniaxial states at +-20 deg: the greater of two mirrored curves has a corner at 0.
+  const std::vector<Judge> judges = {
+      *Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf(uniaxial(5, degrees(20)))),
+      *Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf(uniaxial(5, degrees(-20))))};
+  const double one = *slopePerDegree({&judges[0], 1}, {});
+  EXPECT_NEAR(std::abs(*slopePerDegree(judges, {})), std::abs(one), 1e-6);
+  EXPECT_NEAR(one, (judges[0].utilisation(degrees(1e-4)) - judges[0].utilisation(degrees(-1e-4))) / 2e-4,
+              1e-6);
+}
+
+} // namespace
+} // namespace planewright

@@ -1,0 +1,170 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+// Each criterion of the line's axes beside an evaluation of its published equation in long double: the load
+// multiplier is found by halving, from the index alone.
+#include "tests/support/strength_gen.h"
+
+#include <gtest/gtest.h>
+#include <rapidcheck/gtest.h>
+
+#include <cmath>
+
+namespace planewright {
+namespace {
+
+using Real = long double;
+
+struct Published {
+  Criterion criterion;
+  Real Xt, Xc, Yt, Yc, S;
+
+  /// Left side of the published limit; 1 at the limit.
+  Real index(Real s1, Real s2, Real t) const {
+    const Real X = s1 >= 0 ? Xt : Xc;
+    const Real Y = s2 >= 0 ? Yt : Yc;
+    const Real squares = (s1 / X) * (s1 / X) + (s2 / Y) * (s2 / Y) + (t / S) * (t / S);
+    switch (criterion) {
+    case Criterion::maximumStress:
+      return std::max({std::abs(s1) / X, std::abs(s2) / Y, std::abs(t) / S});
+    case Criterion::sumOfSquares:
+      return squares;
+    case Criterion::norrisPlane:
+      return squares - s1 * s2 / (X * Y);
+    case Criterion::norrisThreePlane:
+      return std::max({squares - s1 * s2 / (X * Y), std::abs(s1) / X, std::abs(s2) / Y});
+    case Criterion::azziTsai:
+      return squares - s1 * s2 / (X * X);
+    case Criterion::azziTsaiTwoSign: {
+      const Real X2 = s2 >= 0 ? Xt : Xc;
+      return squares - s1 * s2 / (X2 * X2);
+    }
+    case Criterion::hoffman:
+      return s1 * s1 / (Xt * Xc) - s1 * s2 / (Xt * Xc) + s2 * s2 / (Yt * Yc) + (1 / Xt - 1 / Xc) * s1 +
+             (1 / Yt - 1 / Yc) * s2 + (t / S) * (t / S);
+    case Criterion::tsaiWu: {
+      const Real F11 = 1 / (Xt * Xc);
+      const Real F22 = 1 / (Yt * Yc);
+      return (1 / Xt - 1 / Xc) * s1 + (1 / Yt - 1 / Yc) * s2 + F11 * s1 * s1 + F22 * s2 * s2 +
+             t * t / (S * S) + 2 * (-0.5L * std::sqrt(F11 * F22)) * s1 * s2;
+    }
+    default:
+      return std::abs(s1) / X + std::abs(s2) / Y + std::abs(t) / S;
+    }
+  }
+
+  Real multiplier(const LineStress& s) const {
+    Real low = 0;
+    Real high = 1;
+    while (index(high * s.along, high * s.across, high * s.shear) < 1)
+      high *= 2;
+    for (int i = 0; i < 200; ++i) {
+      const Real middle = (low + high) / 2;
+      (index(middle * s.along, middle * s.across, middle * s.shear) < 1 ? low : high) = middle;
+    }
+    return (low + high) / 2;
+  }
+};
+
+Published published(Criterion criterion, const Strengths& f) {
+  using enum StrengthKey;
+  return {criterion,         *f[alongTension],      *f[alongCompression],
+          *f[acrossTension], *f[acrossCompression], *f[shear]};
+}
+
+RC_GTEST_PROP(LineCriteria, areTheirPublishedEquations, ()) {
+  const Criterion criterion = *anyLineCriterion();
+  const Strengths f = *anyLineStrengths();
+  const PlaneStress stress = *anyStress();
+  const Angle angle = *anyAngle();
+  RC_PRE(scaleOf(stress) > 0);
+  const auto judge = Judge::of(criterion, f, {}, demandOf(stress));
+  RC_ASSERT(judge.has_value());
+  const LineStress s = judge->state().at(angle);
+  RC_PRE(s.along != 0 || s.across != 0 || s.shear != 0);
+  const Outcome outcome = judge->at(angle);
+  RC_ASSERT(outcome.multiplier.has_value());
+  const auto expected = static_cast<double>(published(criterion, f).multiplier(s));
+  RC_ASSERT(std::abs(*outcome.multiplier - expected) <= 1e-12 * expected);
+  RC_ASSERT(std::abs(outcome.utilisation * *outcome.multiplier - 1) <= 1e-14);
+}
+
+RC_GTEST_PROP(LineCriteria, areProportionalToTheLoad, (bool doubled)) {
+  const Criterion criterion = *anyLineCriterion();
+  const Strengths f = *anyLineStrengths();
+  const PlaneStress stress = *anyStress();
+  const Angle angle = *anyAngle();
+  const double factor = doubled ? 2 : 0.7;
+  const auto one = Judge::of(criterion, f, {}, demandOf(stress));
+  const auto more = Judge::of(criterion, f, {}, demandOf(factor * stress));
+  RC_ASSERT(one && more);
+  RC_ASSERT(std::abs(factor * one->utilisation(angle) - more->utilisation(angle)) <=
+            1e-12 * more->utilisation(angle));
+}
+
+RC_GTEST_PROP(LineCriteria, theMultiplierTakesTheLoadOntoTheLimit, ()) {
+  const Criterion criterion = *anyLineCriterion();
+  const Strengths f = *anyLineStrengths();
+  const PlaneStress stress = *anyStress();
+  const Angle angle = *anyAngle();
+  const auto judge = Judge::of(criterion, f, {}, demandOf(stress));
+  const std::optional<double> multiplier = judge->at(angle).multiplier;
+  RC_PRE(multiplier.has_value());
+  const auto atLimit = Judge::of(criterion, f, {}, demandOf(*multiplier * stress));
+  RC_ASSERT(std::abs(atLimit->utilisation(angle) - 1) <= 1e-11);
+}
+
+RC_GTEST_PROP(LineCriteria, turningStateAndLineTogetherChangesNothing, ()) {
+  const Criterion criterion = *anyLineCriterion();
+  const Strengths f = *anyLineStrengths();
+  const PlaneStress stress = *anyStress();
+  const Angle angle = *anyAngle();
+  const Angle turn = *anyAngle();
+  const auto judge = Judge::of(criterion, f, {}, demandOf(stress));
+  const auto turned = Judge::of(criterion, f, {}, demandOf(inTurnedAxes(stress, turn)));
+  RC_ASSERT(std::abs(judge->utilisation(angle) - turned->utilisation(angle - turn)) <=
+            1e-11 * (1 + scaleOf(stress) / 0.01));
+}
+
+RC_GTEST_PROP(LineCriteria, areMirrored, ()) {
+  const Criterion criterion = *anyLineCriterion();
+  const Strengths f = *anyLineStrengths();
+  const PlaneStress stress = *anyStress();
+  const Angle angle = *anyAngle();
+  const auto judge = Judge::of(criterion, f, {}, demandOf(stress));
+  const auto mirrored = Judge::of(criterion, f, {}, demandOf({stress.sx, stress.sy, -stress.txy}));
+  RC_ASSERT(std::abs(judge->utilisation(angle) - mirrored->utilisation(-angle)) <=
+            1e-12 * judge->utilisation(angle));
+}
+
+TEST(QuadraticUtilisation, losesNoDigitsOnEitherSide) {
+  for (const double b : {-1.0, -1e-3, -1e-10, 1e-10, 1e-3, 1.0})
+    for (double a = 1e-20; a < 1e3; a *= 10) {
+      const long double root = std::sqrt(static_cast<long double>(b) * b + 4.0L * a);
+      const long double exact = b >= 0 ? (b + root) / 2 : 2.0L * a / (root - b);
+      EXPECT_NEAR(utilisationOfQuadratic(a, b), static_cast<double>(exact),
+                  1e-15 * static_cast<double>(exact))
+          << a << ' ' << b;
+    }
+}
+
+TEST(LineCriteria, aStateOfZeroHasNoMultiplierAndNoMode) {
+  for (const Criterion criterion : criteriaFor(MaterialKind::generic)) {
+    const auto judge = Judge::of(criterion, c24(), {}, demandOf({}));
+    ASSERT_TRUE(judge) << wordOf(criterion);
+    EXPECT_EQ(judge->at(Angle::fromDegrees(20)), Outcome{}) << wordOf(criterion);
+  }
+}
+
+TEST(LineCriteria, nameTheModeByTheGreatestSingleRatio) {
+  const auto mode = [](const PlaneStress& stress) {
+    return *Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf(stress))->at(Angle()).mode;
+  };
+  EXPECT_EQ(mode({10, 0, 0.1}), Mode::tensionAlong);
+  EXPECT_EQ(mode({-10, 0, 0.1}), Mode::compressionAlong);
+  EXPECT_EQ(mode({1, 0.3, 0.1}), Mode::tensionAcross);
+  EXPECT_EQ(mode({1, -2, 0.1}), Mode::compressionAcross);
+  EXPECT_EQ(mode({1, 0, -3}), Mode::shear);
+  EXPECT_EQ(mode({0, 0.2, 2}), Mode::interaction);
+}
+
+} // namespace
+} // namespace planewright
