@@ -10,6 +10,8 @@ namespace planewright {
 struct Delivery {
   std::string bytes;
   std::string file = "-";
+  Exit exit = Exit::done;       ///< once it is delivered
+  std::vector<Text> facts = {}; ///< what is said on standard error beside it
 };
 
 /// Where -o sends the output: "-" without it. A Problem when that is the study that is read.

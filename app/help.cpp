@@ -18,7 +18,7 @@ planewright --version          prints the version
 A first word that is a command is a command: write ./figure for a file of that name.
 Commands need no display. “-” is standard input or output.
 
-Exit codes: 0 done; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font).
+Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font).
 
 An aid to a licensed engineer: it looks at one point in plane stress. It sees no volume, size, moisture,
 duration, edge, notch or third-direction effects. Local codes govern.

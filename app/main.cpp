@@ -62,10 +62,23 @@ int reported(const Failure& failure) {
   return static_cast<int>(failure.exit);
 }
 
+/// What a command that came to its end says beside its output.
+int told(const Delivery& delivery) {
+  std::string lines;
+  for (const Text& fact : delivery.facts)
+    lines += "planewright: " + plain(fact) + "\n";
+  static_cast<void>(writeTo(STDERR_FILENO, lines, ""));
+  return static_cast<int>(delivery.exit);
+}
+
 int run(Words words) {
   std::signal(SIGPIPE, SIG_IGN);
-  const Outcome<void> outcome = commanded(words).and_then(delivered);
-  return outcome ? static_cast<int>(Exit::done) : reported(outcome.error());
+  const Outcome<Delivery> delivery = commanded(words);
+  if (!delivery)
+    return reported(delivery.error());
+  if (const Outcome<void> outcome = delivered(*delivery); !outcome)
+    return reported(outcome.error());
+  return told(*delivery);
 }
 
 } // namespace

@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
+#include "core/record/check_values.h"
 #include "core/record/csv.h"
 #include "core/record/readout_file.h"
 #include "core/table/cautions.h"
@@ -47,6 +48,25 @@ const Fields& heading() {
                                "sx_bending",
                                "edge_sn",
                                "edge_tnt",
+                               "material",
+                               "criterion",
+                               "check_line",
+                               "check_plane",
+                               "parameters",
+                               "basis",
+                               "factor",
+                               "utilisation",
+                               "load_multiplier",
+                               "mode",
+                               "band_from",
+                               "band_to",
+                               "worst_angle",
+                               "worst_utilisation",
+                               "worst_load_multiplier",
+                               "worst_mode",
+                               "exceeds",
+                               "pairing",
+                               "problem",
                                "cautions"};
   return names;
 }
@@ -60,14 +80,23 @@ public:
   std::string written() const {
     std::string rows;
     for (std::size_t i = 0; i < m_readout.watched.size(); ++i)
-      rows += row("plane", m_readout.watched[i].name, planeFields(i), Fields(8));
+      rows += row("plane", m_readout.watched[i].name, {planeFields(i), {}, {}});
     for (std::size_t i = 0; i < m_readout.lines.size(); ++i)
-      rows += row("line", m_readout.lines[i].name, Fields(4), lineFields(i));
-    // A state without planes and lines is not lost.
-    return rows.empty() ? row("state", "", Fields(4), Fields(8)) : rows;
+      rows += row("line", m_readout.lines[i].name, {{}, lineFields(i), {}});
+    for (std::size_t i = 0; i < m_state.checks.size(); ++i)
+      rows += row("check", m_readout.checks[i].id, {{}, {}, checkFields(i)});
+    // A state without planes, lines and checks is not lost.
+    return rows.empty() ? row("state", "", {}) : rows;
   }
 
 private:
+  /// What only rows of one kind have; empty in the others.
+  struct Own {
+    Fields plane{};
+    Fields line{};
+    Fields check{};
+  };
+
   std::string stress(double value) const { return exactNumber(m_unit.fromBase(value)); }
   static std::string angle(Angle value) { return exactNumber(value.degrees()); }
   static std::string angle(const std::optional<NormalAngle>& normal) {
@@ -129,13 +158,52 @@ private:
     return words;
   }
 
-  std::string row(const char* kind, const std::string& name, const Fields& plane, const Fields& line) const {
+  static std::string written(const CheckValue& value) {
+    switch (value.is) {
+    case CheckValue::Is::text:
+      return value.text;
+    case CheckValue::Is::number:
+      return exactNumber(value.number);
+    case CheckValue::Is::truth:
+      return value.truth ? "true" : "false";
+    case CheckValue::Is::nothing:
+      break;
+    }
+    return "";
+  }
+
+  static void append(Fields& fields, const std::vector<CheckField>& more) {
+    for (const CheckField& field : more)
+      fields.push_back(written(field.value));
+  }
+
+  Fields checkFields(std::size_t i) const {
+    const CheckSetup& check = m_readout.checks[i];
+    Fields fields;
+    append(fields, subjectOf(check));
+    std::string parameters;
+    for (const CheckField& field : parametersOf(check, m_unit))
+      parameters += std::string(parameters.empty() ? "" : "; ") + field.key + "=" + written(field.value);
+    fields.push_back(parameters);
+    append(fields, nominalOf(check, m_state.checks[i]));
+    fields.push_back(check.band ? angle(check.band->from()) : "");
+    fields.push_back(check.band ? angle(check.band->to()) : "");
+    append(fields, worstOf(m_state.checks[i]));
+    return fields;
+  }
+
+  static void append(Fields& fields, const Fields& more, std::size_t columns) {
+    fields.insert(fields.end(), more.begin(), more.end());
+    fields.resize(fields.size() + columns - more.size());
+  }
+
+  std::string row(const char* kind, const std::string& name, const Own& own) const {
     Fields fields = stateFields();
     fields.insert(fields.end(), {kind, name});
-    fields.insert(fields.end(), plane.begin(), plane.end());
-    fields.insert(fields.end(), line.begin(), line.end());
-    const Fields sources = sourceFields();
-    fields.insert(fields.end(), sources.begin(), sources.end());
+    append(fields, own.plane, 4);
+    append(fields, own.line, 8);
+    append(fields, sourceFields(), 4);
+    append(fields, own.check, 19);
     fields.push_back(cautions());
     return csvRow(fields);
   }

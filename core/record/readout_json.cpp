@@ -1,8 +1,11 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/record/check_values.h"
 #include "core/record/json_writer.h"
 #include "core/record/readout_file.h"
 #include "core/table/cautions.h"
 #include "core/table/table.h"
+
+#include <algorithm>
 
 namespace planewright {
 
@@ -20,7 +23,7 @@ public:
     text("format", "planewright-readout");
     m_json.key("version").whole(readoutVersion);
     head();
-    m_json.key("governing").null();
+    governing(points);
     m_json.key("points").beginList();
     for (const Readout& readout : points)
       point(readout);
@@ -47,6 +50,24 @@ private:
     m_json.endObject();
     m_json.key("convention").beginObject();
     text("positive", wordOf(m_study.convention.positive));
+    m_json.endObject();
+  }
+
+  void governing(const std::vector<Readout>& points) {
+    m_json.key("governing");
+    const std::optional<JudgedCheck> worst = verdictOf(points).governing;
+    if (!worst)
+      return m_json.null();
+    const Readout& readout = *std::ranges::find(points, worst->point, &Readout::point);
+    const CheckReading& reading = readingOf(readout, *worst);
+    m_json.beginObject();
+    text("point", worst->point);
+    text("combination", readout.states[worst->state].combination);
+    text("check", readout.checks[worst->check].id);
+    value({"utilisation", finite(reading.worst.utilisation)});
+    value({"load_multiplier", finite(reading.worst.multiplier)});
+    value({"angle", reading.worstAngle ? CheckValue(reading.worstAngle->degrees()) : CheckValue()});
+    value({"mode", modeOf(reading.worst)});
     m_json.endObject();
   }
 
@@ -85,6 +106,8 @@ private:
     m_json.endList();
     freeEdge(readout, state);
     m_json.key("checks").beginList();
+    for (std::size_t i = 0; i < state.checks.size(); ++i)
+      check(readout.checks[i], state.checks[i]);
     m_json.endList();
     m_json.endObject();
   }
@@ -133,6 +156,45 @@ private:
     stress("shear", stresses.shear);
     stress("along_axial", parts.axial);
     stress("along_bending", parts.bending);
+    m_json.endObject();
+  }
+
+  void value(const CheckField& field) {
+    m_json.key(field.key);
+    switch (field.value.is) {
+    case CheckValue::Is::text:
+      return m_json.text(field.value.text);
+    case CheckValue::Is::number:
+      return m_json.number(field.value.number);
+    case CheckValue::Is::truth:
+      return m_json.boolean(field.value.truth);
+    case CheckValue::Is::nothing:
+      return m_json.null();
+    }
+  }
+
+  void values(const std::vector<CheckField>& fields) {
+    for (const CheckField& field : fields)
+      value(field);
+  }
+
+  void check(const CheckSetup& setup, const CheckReading& reading) {
+    m_json.beginObject();
+    text("id", setup.id);
+    values(subjectOf(setup));
+    m_json.key("parameters").beginObject();
+    values(parametersOf(setup, m_unit));
+    m_json.endObject();
+    values(nominalOf(setup, reading));
+    m_json.key("band");
+    if (setup.band) {
+      m_json.beginList();
+      m_json.number(setup.band->from().degrees());
+      m_json.number(setup.band->to().degrees());
+      m_json.endList();
+    } else
+      m_json.null();
+    values(worstOf(reading));
     m_json.endObject();
   }
 

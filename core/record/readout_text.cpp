@@ -6,6 +6,7 @@
 #include "core/study/governing.h"
 #include "core/study/working_of_state.h"
 #include "core/table/cautions.h"
+#include "core/table/check_words.h"
 #include "core/table/table.h"
 #include "core/words/utf8.h"
 
@@ -70,6 +71,57 @@ private:
   std::string words(const Text& text) const { return plain(text, m_translate); }
   void line(std::string_view indent, const Text& text) { m_out += std::string(indent) + words(text) + "\n"; }
 
+  void verdict(const std::vector<Readout>& points) {
+    const Verdict verdict = verdictOf(points);
+    line("", verdictSentence(verdict));
+    if (!verdict.governing)
+      return;
+    const Readout& readout = *std::ranges::find(points, verdict.governing->point, &Readout::point);
+    line("", PW_TEXT("Readout", "Governing: %1, point %2, check %3, %4")
+                 .with(shownWorst(readingOf(readout, *verdict.governing)))
+                 .with(readout.point)
+                 .with(readout.checks[verdict.governing->check].id)
+                 .with(readout.states[verdict.governing->state].combination));
+  }
+
+  /// A check of a point over all combinations, and what follows for other directions.
+  void check(const Readout& readout, std::size_t index) {
+    const CheckSetup& setup = readout.checks[index];
+    const Verdict verdict = verdictOfCheck(readout, index);
+    m_out += '\n';
+    line("  ", PW_TEXT("Readout", "Check %1: %2").with(setup.id).with(checkName(setup)));
+    line("    ", PW_TEXT("Readout", "Limit: %1 (%2)")
+                     .with(rowOf(setup.criterion).equation)
+                     .with(rowOf(setup.criterion).source));
+    const std::optional<JudgedCheck>& told = verdict.governing ? verdict.governing : verdict.unjudged;
+    if (!told)
+      return;
+    const CheckReading& reading = readingOf(readout, *told);
+    line("    ", PW_TEXT("Readout", "%1: %2")
+                     .with(readout.states[told->state].combination)
+                     .with(shortVerdict(verdict)));
+    judged(setup, reading);
+    if (const auto directions = directionsOf(readout, index))
+      for (const Text& sentence : sentencesOf(setup, *directions))
+        line("    ", sentence);
+    for (const Text& caution : cautionsOf(setup, reading))
+      line("    ", PW_TEXT("Readout", "Caution: %1").with(caution));
+  }
+
+  void judged(const CheckSetup& setup, const CheckReading& reading) {
+    if (reading.problem) {
+      line("    ",
+           PW_TEXT("Readout", "Not judged: %1 %2").with(reading.problem->what).with(reading.problem->mend));
+      return;
+    }
+    line("    ", factorSentence(reading.factor));
+    line("    ", multiplierSentence(reading.worst));
+    if (const Text worst = worstSentence(setup, reading); !worst.empty())
+      line("    ", worst);
+    if (reading.worst.mode)
+      line("    ", PW_TEXT("Readout", "Mode: %1").with(labelOf(*reading.worst.mode)));
+  }
+
   /// Without strengths the greatest stresses govern.
   void governing(const std::vector<Readout>& points) {
     const std::optional<GoverningStates> worst = governingOf(points);
@@ -85,7 +137,7 @@ private:
     };
     told(symbol("σ_{1}"), worst->principal);
     told(PW_TEXT("Readout", "shear in the plane"), worst->shear);
-    line("", PW_TEXT("Readout", "No strengths are given: nothing is judged against any."));
+    verdict(points);
   }
 
   /// The name, with the kind where it says more, the angle both ways and the tolerance.
@@ -123,6 +175,8 @@ private:
       m_out += '\n';
       planes(envelopeTable(m_study, readout));
     }
+    for (std::size_t i = 0; i < readout.checks.size(); ++i)
+      check(readout, i);
     for (std::size_t i = 0; i < readout.states.size(); ++i)
       state(readout, readout.states[i], i < m_study.combinations.size());
   }
@@ -155,6 +209,10 @@ private:
     components(stresses, state);
     m_out += '\n';
     planes(planesTable(m_study, readout, state));
+    for (std::size_t i = 0; i < state.checks.size(); ++i) {
+      const CheckReading& reading = state.checks[i];
+      line("    ", PW_TEXT("Readout", "Check %1: %2").with(readout.checks[i].id).with(shownWorst(reading)));
+    }
     m_out += '\n';
     steps(workingOf(m_study, readout, state));
   }

@@ -74,6 +74,19 @@ void read(const Json& json, Reading& reading, Combination& one) {
   object.refuseUnread();
 }
 
+void read(const Json& json, Reading& reading, Material& material) {
+  ObjectReader object(json, pathOf({Spot::material, nameIn(json, "name"), {}}), reading);
+  object.neededText("name", material.name);
+  object.word("kind", material.kind);
+  object.word("basis", material.basis);
+  readTexts(object, material);
+  object.word("seam", material.seam);
+  if (const Json* durations = object.value("duration_factors"))
+    readAllTexts(*durations, pathOf({Spot::material, material.name, {}}) + "/duration_factors", reading,
+                 material.durations);
+  object.refuseUnread();
+}
+
 void read(const Json& json, Reading& reading, TypedSection& section) {
   ObjectReader object(json, pathOf({Spot::section, nameIn(json, "name"), {}}), reading);
   object.neededText("name", section.name);
@@ -147,6 +160,18 @@ void read(const Json& json, const std::string& point, Reading& reading, WatchedP
   object.refuseUnread();
 }
 
+void read(const Json& json, const std::string& point, Reading& reading, Check& check) {
+  const std::string path = pathOf({Spot::check, point, nameIn(json, "id")});
+  ObjectReader object(json, path, reading);
+  object.neededText("id", check.id);
+  object.neededText("material", check.material);
+  object.word("criterion", check.criterion);
+  readTexts(object, check);
+  if (const Json* parameters = object.value("parameters"))
+    readAllTexts(*parameters, path + "/parameters", reading, check.parameters);
+  object.refuseUnread();
+}
+
 /// One line under "line", several under "lines"; both at once are read as one list.
 void readLines(ObjectReader& object, Reading& reading, Point& point) {
   if (const Json* line = object.value("line"))
@@ -171,6 +196,9 @@ void read(const Json& json, Reading& reading, Point& point) {
   if (const auto* planes = object.list("planes"))
     for (const JsonMember& one : *planes)
       read(one.value, point.name, reading, point.planes.emplace_back());
+  if (const auto* checks = object.list("checks"))
+    for (const JsonMember& one : *checks)
+      read(one.value, point.name, reading, point.checks.emplace_back());
   object.text("reading", point.reading);
   object.refuseUnread();
 }
@@ -203,6 +231,7 @@ Study readParts(const Json& root, Reading& reading) {
   readPart(object, "convention", reading, study.convention);
   readItems(object, "cases", reading, study.cases);
   readItems(object, "combinations", reading, study.combinations);
+  readItems(object, "materials", reading, study.materials);
   readItems(object, "sections", reading, study.sections);
   // The point of a new study has stresses of that study's own case.
   if (!readItems(object, "points", reading, study.points))

@@ -58,6 +58,30 @@ void put(JsonWriter& json, const Combination& one) {
   json.endObject();
 }
 
+/// The texts that are not empty.
+template <class Thing>
+void putGivenTexts(JsonWriter& json, const Thing& thing) {
+  for (const TextField<Thing>& field : textFieldsOf<Thing>())
+    if (!(thing.*field.text).empty())
+      json.key(rowOf(field.spot).key()).text(thing.*field.text);
+}
+
+void put(JsonWriter& json, const Material& material) {
+  json.beginObject();
+  put(json, "name", material.name);
+  put(json, "kind", wordOf(material.kind));
+  put(json, "basis", wordOf(material.basis));
+  putGivenTexts(json, material);
+  if (material.kind == MaterialKind::throat)
+    put(json, "seam", wordOf(material.seam));
+  if (material.durations != DurationTexts{}) {
+    json.key("duration_factors").beginObject();
+    putGivenTexts(json, material.durations);
+    json.endObject();
+  }
+  json.endObject();
+}
+
 void put(JsonWriter& json, const TypedSection& section) {
   json.beginObject();
   put(json, "name", section.name);
@@ -117,6 +141,17 @@ void put(JsonWriter& json, const WatchedPlane& plane) {
   json.endObject();
 }
 
+void put(JsonWriter& json, const Check& check) {
+  json.beginObject();
+  put(json, "id", check.id);
+  put(json, "criterion", wordOf(check.criterion));
+  putGivenTexts(json, check);
+  json.key("parameters").beginObject();
+  putGivenTexts(json, check.parameters);
+  json.endObject();
+  json.endObject();
+}
+
 void put(JsonWriter& json, const Point& point);
 
 template <class Item>
@@ -152,6 +187,7 @@ void put(JsonWriter& json, const Point& point) {
   json.endObject();
   putLines(json, point.lines);
   put(json, "planes", point.planes);
+  put(json, "checks", point.checks);
   put(json, "reading", point.reading);
   json.endObject();
 }
@@ -168,6 +204,7 @@ std::string writeStudy(const Study& study) {
   put(json, study.convention);
   put(json, "cases", study.cases);
   put(json, "combinations", study.combinations);
+  put(json, "materials", study.materials);
   put(json, "sections", study.sections);
   put(json, "points", study.points);
   putTextsAs(json, "shown", study.shown);

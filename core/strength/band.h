@@ -20,7 +20,7 @@ Band bandOf(Angle nominal, Angle tolerance);
 /// points of the criterion inside it. `angle` is unfolded, inside the band; of utilisations within 1e-12 of
 /// each other the one nearest to the nominal direction counts, then the smaller angle.
 struct WorstInBand {
-  Outcome outcome;
+  Judgement judgement;
   Angle angle;
 };
 WorstInBand worstIn(const Judge& judge, const Band& band);

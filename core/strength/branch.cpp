@@ -81,7 +81,7 @@ struct Utilise {
   double operator()(const Mobilised& plane) const {
     const LineStress s = state.at(direction);
     if (s.shear == 0 && s.along == 0)
-      return 0;
+      return plane.cohesion > 0 || state.scale == 0 ? 0 : infinity;
     const double resists = plane.cohesion - s.along * plane.tanPhi;
     return resists > 0 ? std::abs(s.shear) / resists : infinity;
   }

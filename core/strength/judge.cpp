@@ -36,12 +36,12 @@ Result<Judge> Judge::of(Criterion criterion, const Strengths& strengths, const P
   judge.m_state = {demand.stress, circleOf(demand.stress, demand.scale, demand.sz), demand.scale};
   const ActsOn actsOn = rowOf(criterion).actsOn;
   if (actsOn == ActsOn::principal) {
-    Result<Outcome> outcome = outcomeOfPrincipals(criterion, strengths, demand);
-    if (!outcome)
-      return tl::unexpected(std::move(outcome).error());
+    Result<Judgement> judgement = judgementOfPrincipals(criterion, strengths, demand);
+    if (!judgement)
+      return tl::unexpected(std::move(judgement).error());
     judge.m_hasDirection = false;
-    judge.m_fixedMode = outcome->mode;
-    judge.m_branches = {Fixed{outcome->utilisation, outcome->multiplier}};
+    judge.m_fixedMode = judgement->mode;
+    judge.m_branches = {Fixed{judgement->utilisation, judgement->multiplier}};
     return judge;
   }
   Result<std::vector<Branch>> branches = actsOn == ActsOn::plane
@@ -65,17 +65,17 @@ double Judge::utilisation(Angle direction) const {
   return greatest;
 }
 
-Outcome Judge::at(Angle direction) const {
-  Outcome outcome;
-  outcome.utilisation = utilisation(direction);
+Judgement Judge::at(Angle direction) const {
+  Judgement judgement;
+  judgement.utilisation = utilisation(direction);
   for (const Branch& branch : m_branches) {
     const std::optional<double> multiplier = multiplierOf(branch, m_state, direction);
-    if (multiplier && (!outcome.multiplier || *multiplier < *outcome.multiplier))
-      outcome.multiplier = multiplier;
+    if (multiplier && (!judgement.multiplier || *multiplier < *judgement.multiplier))
+      judgement.multiplier = multiplier;
   }
-  if (outcome.utilisation > 0)
-    outcome.mode = modeAt(direction, outcome.utilisation);
-  return outcome;
+  if (judgement.utilisation > 0)
+    judgement.mode = modeAt(direction, judgement.utilisation);
+  return judgement;
 }
 
 std::optional<Mode> Judge::modeAt(Angle direction, double utilisation) const {

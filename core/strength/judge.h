@@ -3,7 +3,7 @@
 
 #include "core/strength/branch.h"
 #include "core/strength/criterion.h"
-#include "core/strength/outcome.h"
+#include "core/strength/judgement.h"
 #include "core/strength/strengths.h"
 #include "core/words/problem.h"
 
@@ -29,7 +29,7 @@ public:
 
   /// The greatest of the criterion's parts at a direction.
   double utilisation(Angle direction) const;
-  Outcome at(Angle direction) const;
+  Judgement at(Angle direction) const;
   /// False for criteria that know no direction.
   bool hasDirection() const { return m_hasDirection; }
 

@@ -19,7 +19,8 @@ Result<std::vector<Branch>> lineBranchesOf(Criterion criterion, const Strengths&
 Result<std::vector<Branch>> planeBranchesOf(Criterion criterion, const Strengths& strengths);
 
 /// A criterion of the three principal stresses, which knows no direction.
-Result<Outcome> outcomeOfPrincipals(Criterion criterion, const Strengths& strengths, const Demand& demand);
+Result<Judgement> judgementOfPrincipals(Criterion criterion, const Strengths& strengths,
+                                        const Demand& demand);
 
 /// The strength, or the Problem that says which one the criterion needs.
 Result<double> needed(const Strengths& strengths, StrengthKey key);

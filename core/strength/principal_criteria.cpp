@@ -17,7 +17,7 @@ std::array<double, 3> principalsOf(const Demand& demand) {
   return s;
 }
 
-Outcome proportional(double utilisation, Mode mode) {
+Judgement proportional(double utilisation, Mode mode) {
   if (utilisation == 0)
     return {};
   return {utilisation, 1 / utilisation, mode};
@@ -27,7 +27,7 @@ double misesOf(const std::array<double, 3>& s) {
   return std::hypot(s[0] - s[1], s[1] - s[2], s[2] - s[0]) / std::sqrt(2.0);
 }
 
-Result<Outcome> rankine(const Strengths& strengths, const std::array<double, 3>& s) {
+Result<Judgement> rankine(const Strengths& strengths, const std::array<double, 3>& s) {
   const Result<double> tension = needed(strengths, StrengthKey::tension);
   const Result<double> compression = needed(strengths, StrengthKey::compression);
   for (const Result<double>* one : {&tension, &compression})
@@ -38,30 +38,31 @@ Result<Outcome> rankine(const Strengths& strengths, const std::array<double, 3>&
   return pulls >= presses ? proportional(pulls, Mode::tension) : proportional(presses, Mode::compression);
 }
 
-Result<Outcome> mohrCoulomb(const Strengths& strengths, const std::array<double, 3>& s) {
+Result<Judgement> mohrCoulomb(const Strengths& strengths, const std::array<double, 3>& s) {
   const Result<double> cohesion = needed(strengths, StrengthKey::cohesion);
   const Result<double> friction = needed(strengths, StrengthKey::friction);
   for (const Result<double>* one : {&cohesion, &friction})
     if (!*one)
       return tl::unexpected(one->error());
   if (s[0] == 0 && s[2] == 0)
-    return Outcome{};
+    return Judgement{};
   const CosSin phi = cosSin(Angle::fromDegrees(*friction));
   const double radius = s[0] / 2 - s[2] / 2;
   const double mean = s[0] / 2 + s[2] / 2;
   const double resists = *cohesion * phi.cos - mean * phi.sin;
-  Outcome outcome;
-  outcome.utilisation = resists > 0 ? radius / resists : std::numeric_limits<double>::infinity();
+  Judgement judgement;
+  judgement.utilisation = resists > 0 ? radius / resists : std::numeric_limits<double>::infinity();
   const double grows = radius + mean * phi.sin;
   if (grows > 0)
-    outcome.multiplier = *cohesion * phi.cos / grows;
-  outcome.mode = Mode::shear;
-  return outcome;
+    judgement.multiplier = *cohesion * phi.cos / grows;
+  judgement.mode = Mode::shear;
+  return judgement;
 }
 
 } // namespace
 
-Result<Outcome> outcomeOfPrincipals(Criterion criterion, const Strengths& strengths, const Demand& demand) {
+Result<Judgement> judgementOfPrincipals(Criterion criterion, const Strengths& strengths,
+                                        const Demand& demand) {
   const std::array<double, 3> s = principalsOf(demand);
   if (criterion == Criterion::rankine)
     return rankine(strengths, s);

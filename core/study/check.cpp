@@ -54,6 +54,7 @@ Problems problemsIn(const Study& study) {
   addFaults(problems, ends, typedPlacesInHead());
   addFaults(problems, study, &Study::cases);
   addFaults(problems, study, &Study::combinations);
+  addFaults(problems, study, &Study::materials);
   addFaults(problems, study, &Study::sections);
   addFaults(problems, study, &Study::points);
   addFaults(problems, ends, typedPlacesInFoot());

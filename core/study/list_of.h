@@ -85,6 +85,8 @@ bool withList(Study& study, const Place& place, Visit visit) {
     return in(KeyedList<LoadCase>{study.cases, &LoadCase::id});
   case Spot::combination:
     return in(KeyedList<Combination>{study.combinations, &Combination::name});
+  case Spot::material:
+    return in(KeyedList<Material>{study.materials, &Material::name});
   case Spot::section:
     return in(KeyedList<TypedSection>{study.sections, &TypedSection::name});
   case Spot::point:
@@ -93,6 +95,8 @@ bool withList(Study& study, const Place& place, Visit visit) {
     return point && in(KeyedList<CaseStress>{point->stress, &CaseStress::caseId});
   case Spot::plane:
     return point && in(KeyedList<WatchedPlane>{point->planes, &WatchedPlane::name});
+  case Spot::check:
+    return point && in(KeyedList<Check>{point->checks, &Check::id});
   case Spot::line:
     return point && in(KeyedList<Line>{point->lines, &Line::name});
   case Spot::fibre:

@@ -30,6 +30,7 @@ const vector<SpotRow>& spotTable() {
   static const vector<SpotRow> table = {
       {Spot::loadCase, "cases/*", PW_TEXT("Place", "load case")},
       {Spot::combination, "combinations/*", PW_TEXT("Place", "combination")},
+      {Spot::material, "materials/*", PW_TEXT("Place", "material")},
       {Spot::section, "sections/*", PW_TEXT("Place", "section")},
       {Spot::point, "points/*", PW_TEXT("Place", "point")},
       {Spot::fibre, "points/*/fibre", PW_TEXT("Place", "fibre")},
@@ -39,6 +40,7 @@ const vector<SpotRow>& spotTable() {
       {Spot::rosette, "points/*/stress/*/rosette", PW_TEXT("Place", "strain rosette")},
       {Spot::line, "points/*/lines/*", PW_TEXT("Place", "line")},
       {Spot::plane, "points/*/planes/*", PW_TEXT("Place", "watched plane")},
+      {Spot::check, "points/*/checks/*", PW_TEXT("Place", "check")},
       {Spot::factor, "combinations/*/factors/*", PW_TEXT("Place", "factor"), expression},
       {Spot::size, "sections/*/sizes/*", PW_TEXT("Place", "size of the section"), expression},
       {Spot::titleProject, "title/project", PW_TEXT("Place", "project"), freeText},
@@ -61,6 +63,53 @@ const vector<SpotRow>& spotTable() {
       {Spot::caseDuration, "cases/*/duration", PW_TEXT("Place", "duration of the action"), word},
       {Spot::caseExcludes, "cases/*/excludes", PW_TEXT("Place", "cases never together with this"), ids},
       {Spot::combinationBasis, "combinations/*/basis", PW_TEXT("Place", "basis of the combination"), word},
+      {Spot::materialKind, "materials/*/kind", PW_TEXT("Place", "kind of material"), word},
+      {Spot::materialSource, "materials/*/source", PW_TEXT("Place", "source of the strengths"), freeText},
+      {Spot::materialEdition, "materials/*/edition", PW_TEXT("Place", "edition of the source"), freeText},
+      {Spot::materialTrust, "materials/*/trust", PW_TEXT("Place", "how the strengths were read"), freeText},
+      {Spot::materialBasis, "materials/*/basis", PW_TEXT("Place", "basis of the strengths"), word},
+      {Spot::alongTension, "materials/*/along_tension",
+       PW_TEXT("Place", "strength along the line in tension"), expression, stress, Slopes::none, true},
+      {Spot::alongCompression, "materials/*/along_compression",
+       PW_TEXT("Place", "strength along the line in compression"), expression, stress, Slopes::none, true},
+      {Spot::alongBending, "materials/*/along_bending",
+       PW_TEXT("Place", "strength along the line in bending"), expression, stress, Slopes::none, true},
+      {Spot::acrossTension, "materials/*/across_tension",
+       PW_TEXT("Place", "strength across the line in tension"), expression, stress, Slopes::none, true},
+      {Spot::acrossCompression, "materials/*/across_compression",
+       PW_TEXT("Place", "strength across the line in compression"), expression, stress, Slopes::none, true},
+      {Spot::strengthShear, "materials/*/shear", PW_TEXT("Place", "strength in shear"), expression, stress,
+       Slopes::none, true},
+      {Spot::strengthTension, "materials/*/tension", PW_TEXT("Place", "strength in tension"), expression,
+       stress, Slopes::none, true},
+      {Spot::strengthCompression, "materials/*/compression", PW_TEXT("Place", "strength in compression"),
+       expression, stress, Slopes::none, true},
+      {Spot::cohesion, "materials/*/cohesion", PW_TEXT("Place", "cohesion"), expression, stress, Slopes::none,
+       true},
+      {Spot::friction, "materials/*/friction", PW_TEXT("Place", "angle of friction"), expression, angle,
+       Slopes::none, true},
+      {Spot::cutoff, "materials/*/cutoff", PW_TEXT("Place", "greatest tension across the plane"), expression,
+       stress, Slopes::none, true},
+      {Spot::fu, "materials/*/fu", symbol("f_{u}"), expression, stress, Slopes::none, true},
+      {Spot::betaW, "materials/*/beta_w", symbol("β_{w}"), expression, dimension::none, Slopes::none, true},
+      {Spot::gammaM2, "materials/*/gamma_M2", symbol("γ_{M2}"), expression, dimension::none, Slopes::none,
+       true},
+      {Spot::seam, "materials/*/seam", PW_TEXT("Place", "seam"), word},
+      {Spot::partialFactor, "materials/*/partial_factor", PW_TEXT("Place", "partial factor"), expression,
+       dimension::none, Slopes::none, true},
+      {Spot::strengthFactor, "materials/*/factor", PW_TEXT("Place", "factor of the strengths"), expression,
+       dimension::none, Slopes::none, true},
+      {Spot::serviceClass, "materials/*/service_class", PW_TEXT("Place", "service class"), freeText},
+      {Spot::durationPermanent, "materials/*/duration_factors/permanent",
+       PW_TEXT("Place", "factor of permanent loads"), expression, dimension::none, Slopes::none, true},
+      {Spot::durationLong, "materials/*/duration_factors/long", PW_TEXT("Place", "factor of long loads"),
+       expression, dimension::none, Slopes::none, true},
+      {Spot::durationMedium, "materials/*/duration_factors/medium",
+       PW_TEXT("Place", "factor of medium loads"), expression, dimension::none, Slopes::none, true},
+      {Spot::durationShort, "materials/*/duration_factors/short", PW_TEXT("Place", "factor of short loads"),
+       expression, dimension::none, Slopes::none, true},
+      {Spot::durationInstantaneous, "materials/*/duration_factors/instantaneous",
+       PW_TEXT("Place", "factor of instantaneous loads"), expression, dimension::none, Slopes::none, true},
       {Spot::sectionShape, "sections/*/shape", PW_TEXT("Place", "shape of the section"), word},
       {Spot::pointNote, "points/*/note", PW_TEXT("Place", "note"), freeText},
       {Spot::axes, "points/*/axes", PW_TEXT("Place", "inclination of the member"), expression, angle},
@@ -107,6 +156,30 @@ const vector<SpotRow>& spotTable() {
        angle},
       {Spot::planeTolerance, "points/*/planes/*/tolerance", PW_TEXT("Place", "tolerance of the normal"),
        expression, angle, Slopes::none, true},
+      {Spot::checkMaterial, "points/*/checks/*/material", PW_TEXT("Place", "material of the check"), name},
+      {Spot::checkCriterion, "points/*/checks/*/criterion", PW_TEXT("Place", "criterion"), word},
+      {Spot::checkLine,
+       "points/*/checks/*/line",
+       PW_TEXT("Place", "line of the check"),
+       name,
+       {},
+       Slopes::none,
+       true},
+      {Spot::checkPlane,
+       "points/*/checks/*/plane",
+       PW_TEXT("Place", "plane of the check"),
+       name,
+       {},
+       Slopes::none,
+       true},
+      {Spot::checkN, "points/*/checks/*/parameters/n", symbol("n"), expression, dimension::none, Slopes::none,
+       true},
+      {Spot::checkF12, "points/*/checks/*/parameters/F12", symbol("F_{12}"), expression,
+       -2 * dimension::stress, Slopes::none, true},
+      {Spot::checkKc90, "points/*/checks/*/parameters/k_c90", symbol("k_{c,90}"), expression, dimension::none,
+       Slopes::none, true},
+      {Spot::checkEdge, "points/*/checks/*/parameters/edge", PW_TEXT("Place", "direction of the edge"),
+       expression, angle, Slopes::line, true},
       {Spot::reading, "points/*/reading", PW_TEXT("Place", "normal of the reading plane"), expression, angle},
       {Spot::shownPoint, "shown/point", PW_TEXT("Place", "shown point"), freeText},
       {Spot::shownCombination, "shown/combination", PW_TEXT("Place", "shown combination"), freeText}};
@@ -161,6 +234,10 @@ std::optional<Place> matched(const SpotRow& row, const vector<string_view>& path
 }
 
 } // namespace
+
+Spot spotOf(StrengthKey key) {
+  return static_cast<Spot>(static_cast<int>(Spot::alongTension) + static_cast<int>(key));
+}
 
 const SpotRow& rowOf(Spot spot) {
   const SpotRow& row = spotTable()[static_cast<std::size_t>(spot)];
@@ -219,6 +296,11 @@ Unit powerOfLength(const Study& study, Dimension wanted) {
   return readUnit(study.units.length + power, wanted).value_or(Unit{"mm" + power, wanted, 1, 1});
 }
 
+/// Of a coefficient of squared stresses: the unit of stress to the power -2.
+Unit inverseSquareOfStress(const Study& study, Dimension wanted) {
+  return readUnit(study.units.stress + "^-2", wanted).value_or(Unit{"MPa^-2", wanted, 1, 1});
+}
+
 Unit unitOf(const Study& study, Dimension wanted) {
   if (wanted == dimension::none)
     return {};
@@ -226,6 +308,8 @@ Unit unitOf(const Study& study, Dimension wanted) {
     return degreeUnit();
   if (wanted.force == 0 && wanted.length > 1)
     return powerOfLength(study, wanted);
+  if (wanted == -2 * dimension::stress)
+    return inverseSquareOfStress(study, wanted);
   const auto [word, base] = unitWord(study.units, wanted);
   // A study whose unit does not read is refused for that; until then its texts are read in the base unit.
   return readUnit(word, wanted).value_or(Unit{base, wanted, 1, 1});

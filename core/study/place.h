@@ -11,6 +11,7 @@ namespace planewright {
 enum class Spot {
   loadCase,
   combination,
+  material,
   section,
   point,
   fibre,
@@ -20,6 +21,7 @@ enum class Spot {
   rosette,
   line,
   plane,
+  check,
   factor,
   size,
   // typed texts
@@ -43,6 +45,34 @@ enum class Spot {
   caseDuration,
   caseExcludes, ///< ids joined by ", "
   combinationBasis,
+  materialKind,
+  materialSource,
+  materialEdition,
+  materialTrust,
+  materialBasis,
+  alongTension, ///< these in the order of StrengthKey
+  alongCompression,
+  alongBending,
+  acrossTension,
+  acrossCompression,
+  strengthShear,
+  strengthTension,
+  strengthCompression,
+  cohesion,
+  friction,
+  cutoff,
+  fu,
+  betaW,
+  gammaM2,
+  seam,
+  partialFactor,
+  strengthFactor,
+  serviceClass,
+  durationPermanent,
+  durationLong,
+  durationMedium,
+  durationShort,
+  durationInstantaneous,
   sectionShape,
   pointNote,
   axes,
@@ -83,13 +113,24 @@ enum class Spot {
   lineTolerance,
   planeNormal,
   planeTolerance,
+  checkMaterial,
+  checkCriterion,
+  checkLine,
+  checkPlane,
+  checkN,
+  checkF12,
+  checkKc90,
+  checkEdge,
   reading,
   shownPoint,
   shownCombination
 };
 
-/// One spot in a study: `owner` is the case id, combination, section or point it belongs to, `item` the case
-/// id, size, line or plane inside that; both empty where the spot needs none.
+/// The spot of a strength in a material.
+Spot spotOf(StrengthKey key);
+
+/// One spot in a study: `owner` is the case id, combination, material, section or point it belongs to, `item`
+/// the case id, size, line, plane or check inside that; both empty where the spot needs none.
 struct Place {
   Spot spot = Spot::titleProject;
   std::string owner;

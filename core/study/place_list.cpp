@@ -67,6 +67,15 @@ std::vector<Place> typedPlacesIn(const Combination& combination) {
   return places;
 }
 
+std::vector<Place> typedPlacesIn(const Material& material) {
+  Places places;
+  add(places, {Spot::materialKind, Spot::materialBasis}, material.name);
+  addTexts(places, &material, material.name);
+  add(places, {Spot::seam}, material.name);
+  addTexts(places, &material.durations, material.name);
+  return places;
+}
+
 std::vector<Place> typedPlacesIn(const TypedSection& section) {
   Places places;
   add(places, {Spot::sectionShape}, section.name);
@@ -98,6 +107,11 @@ std::vector<Place> typedPlacesIn(const Point& point) {
   }
   for (const WatchedPlane& plane : point.planes)
     addTexts(places, &plane, point.name, plane.name);
+  for (const Check& check : point.checks) {
+    add(places, {Spot::checkCriterion}, point.name, check.id);
+    addTexts(places, &check, point.name, check.id);
+    addTexts(places, &check.parameters, point.name, check.id);
+  }
   add(places, {Spot::reading}, point.name);
   return places;
 }
@@ -108,6 +122,8 @@ std::vector<Place> typedPlacesIn(const Study& study) {
     append(places, typedPlacesIn(loadCase));
   for (const Combination& combination : study.combinations)
     append(places, typedPlacesIn(combination));
+  for (const Material& material : study.materials)
+    append(places, typedPlacesIn(material));
   for (const TypedSection& section : study.sections)
     append(places, typedPlacesIn(section));
   for (const Point& point : study.points)

@@ -7,9 +7,10 @@ namespace planewright {
 
 /// Every place of a study that holds a typed text, in the order of the file.
 std::vector<Place> typedPlacesIn(const Study& study);
-/// Those of one case, combination, section or point alone.
+/// Those of one case, combination, material, section or point alone.
 std::vector<Place> typedPlacesIn(const LoadCase& loadCase);
 std::vector<Place> typedPlacesIn(const Combination& combination);
+std::vector<Place> typedPlacesIn(const Material& material);
 std::vector<Place> typedPlacesIn(const TypedSection& section);
 std::vector<Place> typedPlacesIn(const Point& point);
 /// Those before and behind the lists.

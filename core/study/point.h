@@ -2,6 +2,7 @@
 #pragma once
 
 #include "core/source/view.h"
+#include "core/strength/criterion.h"
 #include "core/study/kinds.h"
 
 #include <optional>
@@ -94,6 +95,28 @@ struct WatchedPlane {
   bool operator==(const WatchedPlane&) const = default;
 };
 
+/// What a check adds to its criterion, typed texts that may be empty: exponent of Hankinson, product
+/// coefficient of Tsai and Wu, factor across the grain, direction of a tapered edge.
+struct ParameterTexts {
+  std::string n;
+  std::string F12;
+  std::string kc90;
+  std::string edge;
+  bool operator==(const ParameterTexts&) const = default;
+};
+
+/// A question about the point: is a line or a watched plane within the strengths of a material? `id` is its
+/// key. Criteria that know no direction have neither line nor plane.
+struct Check {
+  std::string id;
+  std::string material;
+  Criterion criterion = Criterion::sumOfSquares;
+  std::string line;
+  std::string plane;
+  ParameterTexts parameters;
+  bool operator==(const Check&) const = default;
+};
+
 /// One place in a member. A case that `stress` does not list counts as zero, and outputs say so.
 struct Point {
   std::string name;
@@ -104,6 +127,7 @@ struct Point {
   std::vector<CaseStress> stress;
   std::vector<Line> lines; ///< the first is the one that drawings turn
   std::vector<WatchedPlane> planes;
+  std::vector<Check> checks;
   std::string reading = "0 deg";
   bool operator==(const Point&) const = default;
 };
@@ -111,5 +135,6 @@ struct Point {
 const CaseStress* findStress(const Point& point, std::string_view caseId);
 const Line* findLine(const Point& point, std::string_view name);
 const WatchedPlane* findPlane(const Point& point, std::string_view name);
+const Check* findCheck(const Point& point, std::string_view id);
 
 } // namespace planewright

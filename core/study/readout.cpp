@@ -2,6 +2,7 @@
 #include "core/study/readout.h"
 
 #include "core/study/case_sources.h"
+#include "core/study/judge_checks.h"
 #include "core/study/typed.h"
 
 #include <algorithm>
@@ -45,6 +46,7 @@ std::vector<CaseReading> caseReadings(const Study& study, const Point& point) {
   for (const LoadCase& loadCase : study.cases) {
     CaseReading& one = readings.emplace_back();
     one.id = loadCase.id;
+    one.duration = loadCase.duration;
     const CaseStress* stress = findStress(point, loadCase.id);
     if (!stress)
       continue;
@@ -101,6 +103,7 @@ StateReading combinedState(const Study& study, const Combination& combination,
                            const std::vector<CaseReading>& cases) {
   StateReading state;
   state.combination = combination.name;
+  state.basis = combination.basis;
   double scaleOfThird = 0;
   for (const Factor& factor : combination.factors) {
     const auto one = std::ranges::find(cases, factor.caseId, &CaseReading::id);
@@ -178,6 +181,7 @@ Readout evaluate(const Study& study, std::string_view name, const Extras& extras
   assert(point);
   Readout readout;
   readout.point = point->name;
+  readout.positive = study.convention.positive;
   readDirections(readout, study, *point, extras);
   readout.cases = caseReadings(study, *point);
   for (const Combination& combination : study.combinations)
@@ -186,6 +190,7 @@ Readout evaluate(const Study& study, std::string_view name, const Extras& extras
     readout.states.push_back(singleState(readout.cases, i, study.combinations.empty()));
   for (StateReading& state : readout.states)
     resolve(state, readout);
+  judgeChecks(readout, study, *point);
   const auto shown = std::ranges::find(readout.states, study.shown.combination, &StateReading::combination);
   readout.shown =
       shown == readout.states.end() ? 0 : static_cast<std::size_t>(shown - readout.states.begin());

@@ -3,7 +3,7 @@
 
 #include "core/source/free_edge.h"
 #include "core/stress/circle.h"
-#include "core/study/study.h"
+#include "core/study/check_reading.h"
 
 namespace planewright {
 
@@ -42,6 +42,7 @@ struct WatchedReading {
 /// One case at a point, evaluated; stresses in N/mm2, in the study's sign convention.
 struct CaseReading {
   std::string id;
+  Duration duration = Duration::permanent;
   PlaneStress stress;
   double sz = 0;
   double axial = 0;           ///< part of sx from normal forces; a typed sx is in neither part
@@ -76,17 +77,21 @@ struct StateReading {
   Traction reading;
   std::optional<FreeEdge> edge; ///< where the point has a free edge
   std::vector<ActingCase> acting;
+  Basis basis = Basis::characteristic; ///< of the combination; a single case is not factored
+  std::vector<CheckReading> checks;    ///< one for each check of the Readout, where the state is judged
   bool operator==(const StateReading&) const = default;
 };
 
 /// What follows from a study for one point over all combinations. Computed, never stored, never edited.
 struct Readout {
   std::string point;
+  Positive positive = Positive::tension;
   NormalAngle reading; ///< folded
   Angle axes;
   std::vector<LineReading> lines;
   std::vector<WatchedReading> watched;
-  std::optional<LineAngle> edge;    ///< direction of a free edge, folded
+  std::optional<LineAngle> edge; ///< direction of a free edge, folded
+  std::vector<CheckSetup> checks;
   std::vector<CaseReading> cases;   ///< all cases of the study
   std::vector<StateReading> states; ///< combinations in their order, then the single cases
   std::size_t shown = 0;            ///< the state that is shown

@@ -35,10 +35,39 @@ void renameSection(Study& study, const std::string& from, const std::string& to)
       point.fibre->section = to;
 }
 
-/// What is shown may be a combination or, under its id, a single case.
+/// A name that was the one given.
 void follow(std::string& shown, const std::string& from, const std::string& to) {
   if (shown == from)
     shown = to;
+}
+
+/// A check cannot stand without its material, line or plane.
+template <class Meets>
+void dropChecks(Point& point, Meets meets) {
+  std::erase_if(point.checks, meets);
+}
+
+void dropChecksOf(Study& study, const Place& place) {
+  for (Point& point : study.points) {
+    if (place.spot == Spot::material)
+      dropChecks(point, [&](const Check& check) { return check.material == place.owner; });
+    if (place.spot == Spot::line && point.name == place.owner)
+      dropChecks(point, [&](const Check& check) { return check.line == place.item; });
+    if (place.spot == Spot::plane && point.name == place.owner)
+      dropChecks(point, [&](const Check& check) { return check.plane == place.item; });
+  }
+}
+
+void renameInChecks(Study& study, const Place& place, const std::string& name) {
+  for (Point& point : study.points)
+    for (Check& check : point.checks) {
+      if (place.spot == Spot::material)
+        follow(check.material, place.owner, name);
+      if (place.spot == Spot::line && point.name == place.owner)
+        follow(check.line, place.item, name);
+      if (place.spot == Spot::plane && point.name == place.owner)
+        follow(check.plane, place.item, name);
+    }
 }
 
 } // namespace
@@ -46,6 +75,7 @@ void follow(std::string& shown, const std::string& from, const std::string& to) 
 void dropReferences(Study& study, const Place& place) {
   if (place.spot == Spot::loadCase)
     dropCase(study, place.owner);
+  dropChecksOf(study, place);
   if (place.spot == Spot::loadCase || place.spot == Spot::combination)
     follow(study.shown.combination, place.owner, "");
   if (place.spot == Spot::point)
@@ -53,6 +83,7 @@ void dropReferences(Study& study, const Place& place) {
 }
 
 void renameReferences(Study& study, const Place& place, const std::string& name) {
+  renameInChecks(study, place, name);
   if (place.spot == Spot::section)
     renameSection(study, place.owner, name);
   if (place.spot == Spot::loadCase)

@@ -2,6 +2,7 @@
 #include "core/study/rules.h"
 
 #include "core/study/edit.h"
+#include "core/study/strength_rules.h"
 #include "core/study/typed.h"
 
 #include <algorithm>
@@ -17,6 +18,8 @@ constexpr std::size_t mostCases = 1000;
 constexpr std::size_t mostCombinations = 10000;
 constexpr std::size_t mostPoints = 10000;
 constexpr std::size_t mostPlanes = 1000;
+constexpr std::size_t mostMaterials = 1000;
+constexpr std::size_t mostChecks = 100;
 constexpr std::size_t mostSections = 1000;
 constexpr std::size_t mostSizes = 1000;
 constexpr std::size_t mostLines = 10;
@@ -46,6 +49,9 @@ public:
       key(m_cases, {Spot::loadCase, one.id, {}}, one.id);
     for (const TypedSection& one : m_study.sections)
       section(one);
+    Names materials;
+    for (const Material& one : m_study.materials)
+      material(materials, one);
     needed(m_study.cases.size(), Spot::loadCase);
     for (const LoadCase& one : m_study.cases)
       excludes(one);
@@ -136,6 +142,17 @@ private:
             PW_TEXT("Study", "Take one of them out of the combination."));
   }
 
+  void material(Names& names, const Material& one) {
+    key(names, {Spot::material, one.name, {}}, one.name);
+    append(brokenStrengths(m_study, one));
+  }
+
+  void append(Problems problems) {
+    for (Problem& problem : problems)
+      if (m_problems.size() < mostProblems)
+        m_problems.push_back(std::move(problem));
+  }
+
   void section(const TypedSection& one) {
     key(m_sections, {Spot::section, one.name, {}}, one.name);
     Names sizes;
@@ -164,6 +181,11 @@ private:
     Names planes;
     for (const WatchedPlane& plane : one.planes)
       key(planes, {Spot::plane, one.name, plane.name}, plane.name);
+    Names checks;
+    for (const Check& check : one.checks) {
+      key(checks, {Spot::check, one.name, check.id}, check.id);
+      append(brokenCheck(m_study, one, check));
+    }
   }
 
   void sources(const Point& one, const CaseStress& stress) {
@@ -208,6 +230,7 @@ Problems excessIn(const Study& study) {
   limit(problems, study.combinations.size(), mostCombinations, listPlace(Spot::combination));
   for (const Combination& one : study.combinations)
     limit(problems, one.factors.size(), mostCases, listPlace(Spot::factor, one.name));
+  limit(problems, study.materials.size(), mostMaterials, listPlace(Spot::material));
   limit(problems, study.sections.size(), mostSections, listPlace(Spot::section));
   for (const TypedSection& one : study.sections)
     limit(problems, one.sizes.size(), mostSizes, listPlace(Spot::size, one.name));
@@ -216,6 +239,7 @@ Problems excessIn(const Study& study) {
     limit(problems, one.stress.size(), mostCases, listPlace(Spot::caseStress, one.name));
     limit(problems, one.lines.size(), mostLines, listPlace(Spot::line, one.name));
     limit(problems, one.planes.size(), mostPlanes, listPlace(Spot::plane, one.name));
+    limit(problems, one.checks.size(), mostChecks, listPlace(Spot::check, one.name));
   }
   return problems;
 }

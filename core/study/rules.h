@@ -14,7 +14,8 @@ Problems excessIn(const Study& study);
 /// that can be names, each once in its list; no combination goes by the id of a case, so that a state has a
 /// name of its own; every name that is referred to exists, and none is excluded twice; no combination has two
 /// cases that exclude each other, or a measured one with another factor than 1; section forces have a fibre,
-/// and rosettes stand in measured cases. No more than the first 100.
+/// and rosettes stand in measured cases; strengths and checks as strength_rules.h has them. No more than the
+/// first 100.
 Problems brokenRules(const Study& study);
 
 } // namespace planewright

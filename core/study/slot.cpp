@@ -68,6 +68,22 @@ Slot slotInCombination(Combination& combination, const Place& place) {
   return {};
 }
 
+Slot slotInMaterial(Material& material, Spot spot) {
+  switch (spot) {
+  case Spot::materialKind:
+    return &material.kind;
+  case Spot::materialBasis:
+    return &material.basis;
+  case Spot::seam:
+    return &material.seam;
+  default:
+    break;
+  }
+  if (const Slot slot = textIn(&material, spot); isSet(slot))
+    return slot;
+  return textIn(&material.durations, spot);
+}
+
 Slot slotInSection(TypedSection& section, const Place& place) {
   if (place.spot == Spot::sectionShape)
     return &section.shape;
@@ -97,6 +113,14 @@ Slot slotInLine(Line& line, Spot spot) {
   return spot == Spot::lineKind ? Slot(&line.kind) : textIn(&line, spot);
 }
 
+Slot slotInCheck(Check& check, Spot spot) {
+  if (spot == Spot::checkCriterion)
+    return &check.criterion;
+  if (const Slot slot = textIn(&check, spot); isSet(slot))
+    return slot;
+  return textIn(&check.parameters, spot);
+}
+
 Slot slotInPoint(Point& point, const Place& place) {
   switch (place.spot) {
   case Spot::pointNote:
@@ -121,6 +145,10 @@ Slot slotInPoint(Point& point, const Place& place) {
   }
   if (path.starts_with("points/*/planes/"))
     return textIn(itemIn(point.planes, &WatchedPlane::name, place.item), place.spot);
+  if (path.starts_with("points/*/checks/")) {
+    Check* check = itemIn(point.checks, &Check::id, place.item);
+    return check ? slotInCheck(*check, place.spot) : Slot();
+  }
   CaseStress* stress = itemIn(point.stress, &CaseStress::caseId, place.item);
   return stress ? slotInStress(*stress, place.spot) : Slot();
 }
@@ -221,6 +249,10 @@ Slot slotOf(Study& study, const Place& place) {
   if (path.starts_with("combinations/")) {
     Combination* combination = itemIn(study.combinations, &Combination::name, place.owner);
     return combination ? slotInCombination(*combination, place) : Slot{};
+  }
+  if (path.starts_with("materials/")) {
+    Material* material = itemIn(study.materials, &Material::name, place.owner);
+    return material ? slotInMaterial(*material, place.spot) : Slot{};
   }
   if (path.starts_with("sections/")) {
     TypedSection* section = itemIn(study.sections, &TypedSection::name, place.owner);

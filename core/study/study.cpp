@@ -35,6 +35,10 @@ const Combination* findCombination(const Study& study, std::string_view name) {
   return found(study.combinations, &Combination::name, name);
 }
 
+const Material* findMaterial(const Study& study, std::string_view name) {
+  return found(study.materials, &Material::name, name);
+}
+
 const TypedSection* findSection(const Study& study, std::string_view name) {
   return found(study.sections, &TypedSection::name, name);
 }
@@ -51,6 +55,10 @@ const Point& shownPoint(const Study& study) {
 
 const CaseStress* findStress(const Point& point, std::string_view caseId) {
   return found(point.stress, &CaseStress::caseId, caseId);
+}
+
+const Check* findCheck(const Point& point, std::string_view id) {
+  return found(point.checks, &Check::id, id);
 }
 
 const Line* findLine(const Point& point, std::string_view name) {

@@ -2,6 +2,7 @@
 #pragma once
 
 #include "core/source/section_shape.h"
+#include "core/study/material.h"
 #include "core/study/point.h"
 
 namespace planewright {
@@ -85,6 +86,7 @@ struct Study {
   Convention convention;
   std::vector<LoadCase> cases;
   std::vector<Combination> combinations;
+  std::vector<Material> materials;
   std::vector<TypedSection> sections;
   std::vector<Point> points;
   Shown shown;
@@ -97,6 +99,7 @@ Study newStudy();
 
 const LoadCase* findCase(const Study& study, std::string_view id);
 const Combination* findCombination(const Study& study, std::string_view name);
+const Material* findMaterial(const Study& study, std::string_view name);
 const TypedSection* findSection(const Study& study, std::string_view name);
 const Point* findPoint(const Study& study, std::string_view name);
 /// The shown point, or the first.

@@ -88,4 +88,58 @@ const std::vector<TextField<WatchedPlane>>& textFieldsOf() {
   return fields;
 }
 
+template <>
+const std::vector<TextField<Material>>& textFieldsOf() {
+  static const std::vector<TextField<Material>> fields = {
+      {Spot::materialSource, &Material::source},
+      {Spot::materialEdition, &Material::edition},
+      {Spot::materialTrust, &Material::trust},
+      {Spot::alongTension, &Material::alongTension},
+      {Spot::alongCompression, &Material::alongCompression},
+      {Spot::alongBending, &Material::alongBending},
+      {Spot::acrossTension, &Material::acrossTension},
+      {Spot::acrossCompression, &Material::acrossCompression},
+      {Spot::strengthShear, &Material::shear},
+      {Spot::strengthTension, &Material::tension},
+      {Spot::strengthCompression, &Material::compression},
+      {Spot::cohesion, &Material::cohesion},
+      {Spot::friction, &Material::friction},
+      {Spot::cutoff, &Material::cutoff},
+      {Spot::fu, &Material::fu},
+      {Spot::betaW, &Material::betaW},
+      {Spot::gammaM2, &Material::gammaM2},
+      {Spot::partialFactor, &Material::partialFactor},
+      {Spot::strengthFactor, &Material::factor},
+      {Spot::serviceClass, &Material::serviceClass}};
+  return fields;
+}
+
+template <>
+const std::vector<TextField<DurationTexts>>& textFieldsOf() {
+  static const std::vector<TextField<DurationTexts>> fields = {
+      {Spot::durationPermanent, &DurationTexts::permanent},
+      {Spot::durationLong, &DurationTexts::longTerm},
+      {Spot::durationMedium, &DurationTexts::medium},
+      {Spot::durationShort, &DurationTexts::shortTerm},
+      {Spot::durationInstantaneous, &DurationTexts::instantaneous}};
+  return fields;
+}
+
+template <>
+const std::vector<TextField<Check>>& textFieldsOf() {
+  static const std::vector<TextField<Check>> fields = {{Spot::checkMaterial, &Check::material},
+                                                       {Spot::checkLine, &Check::line},
+                                                       {Spot::checkPlane, &Check::plane}};
+  return fields;
+}
+
+template <>
+const std::vector<TextField<ParameterTexts>>& textFieldsOf() {
+  static const std::vector<TextField<ParameterTexts>> fields = {{Spot::checkN, &ParameterTexts::n},
+                                                                {Spot::checkF12, &ParameterTexts::F12},
+                                                                {Spot::checkKc90, &ParameterTexts::kc90},
+                                                                {Spot::checkEdge, &ParameterTexts::edge}};
+  return fields;
+}
+
 } // namespace planewright

@@ -36,5 +36,13 @@ template <>
 const std::vector<TextField<Line>>& textFieldsOf();
 template <>
 const std::vector<TextField<WatchedPlane>>& textFieldsOf();
+template <>
+const std::vector<TextField<Material>>& textFieldsOf();
+template <>
+const std::vector<TextField<DurationTexts>>& textFieldsOf();
+template <>
+const std::vector<TextField<Check>>& textFieldsOf();
+template <>
+const std::vector<TextField<ParameterTexts>>& textFieldsOf();
 
 } // namespace planewright

@@ -138,6 +138,8 @@ Result<std::string> keptText(const Study& study, const Place& place, const Slot&
   case Holds::word:
     return keptWord(place, slot, text);
   case Holds::name:
+    if (rowOf(place.spot).mayBeEmpty && text.empty())
+      return std::string();
     if (Text fault = faultOfName(text); !fault.empty())
       return tl::unexpected(problemAt(place, text, std::move(fault)));
     return std::string(text);

@@ -2,6 +2,7 @@
 #pragma once
 
 #include "core/record/study_file.h"
+#include "core/study/text_fields.h"
 
 #include <algorithm>
 #include <rapidcheck.h>
@@ -122,6 +123,72 @@ inline std::vector<Combination> anyCombinations(const std::vector<LoadCase>& cas
   return combinations;
 }
 
+inline string maybe(std::initializer_list<const char*> words) {
+  return upTo(2) == 0 ? "" : oneOf(words);
+}
+
+/// Strengths of a kind, some of them left out.
+inline void giveStrengths(Material& material) {
+  for (const TextField<Material>& field : textFieldsOf<Material>())
+    for (const StrengthKey key : keysOf(material.kind))
+      if (field.spot == spotOf(key))
+        material.*field.text = key == StrengthKey::friction ? maybe({"30 deg", "0.6 rad"})
+                               : rowOf(key).dimension.force == 0
+                                   ? maybe({"1.25", "0.8"})
+                                   : maybe({"14.5 MPa", "2 ksi", "0.4*sqrt(3) MPa"});
+}
+
+inline std::vector<Material> anyMaterials() {
+  std::vector<Material> materials;
+  const int count = upTo(3);
+  for (int i = 0; i < count; ++i) {
+    Material one;
+    one.name = anyName(i);
+    one.kind = anyWord<MaterialKind>();
+    one.source = anyFreeText();
+    one.edition = anyFreeText();
+    one.trust = anyFreeText();
+    one.basis = anyWord<StrengthBasis>();
+    giveStrengths(one);
+    if (one.kind == MaterialKind::throat)
+      one.seam = anyWord<Seam>();
+    one.partialFactor = maybe({"1.3", "1.25"});
+    one.factor = upTo(3) == 0 ? "0.5" : "";
+    one.serviceClass = anyFreeText();
+    one.durations = {maybe({"0.6"}), maybe({"0.7"}), maybe({"0.8"}), maybe({"0.9", "1.1*0.8"}),
+                     maybe({"1.1"})};
+    materials.push_back(one);
+  }
+  return materials;
+}
+
+/// A check of any criterion that the point and the material have what it needs for.
+inline std::optional<Check> anyCheck(int number, const Point& point, const Study& study) {
+  if (study.materials.empty())
+    return std::nullopt;
+  const Material material = *rc::gen::elementOf(study.materials);
+  Check check;
+  check.id = anyName(number);
+  check.material = material.name;
+  check.criterion = *rc::gen::elementOf(criteriaFor(material.kind));
+  const ActsOn actsOn = rowOf(check.criterion).actsOn;
+  if ((actsOn == ActsOn::line && point.lines.empty()) || (actsOn == ActsOn::plane && point.planes.empty()))
+    return std::nullopt;
+  if (actsOn == ActsOn::line)
+    check.line = (*rc::gen::elementOf(point.lines)).name;
+  if (actsOn == ActsOn::plane)
+    check.plane = (*rc::gen::elementOf(point.planes)).name;
+  if (check.criterion == Criterion::hankinson)
+    check.parameters.n = maybe({"1.5", "2.5"});
+  if (check.criterion == Criterion::tsaiWu)
+    check.parameters.F12 = maybe({"-0.0008 MPa^-2", "1e-9 psi^-2"});
+  if (check.criterion == Criterion::compressionAtAngle)
+    check.parameters.kc90 = maybe({"1.5"});
+  if (check.criterion == Criterion::taperedEdge)
+    check.parameters.edge = maybe({"0 deg", "1 in 8"});
+  return check;
+}
+
 inline std::vector<TypedSection> anySections() {
   const std::vector<TypedSection> known = {
       {"", SectionShape::rectangle, {{"b", "140 mm"}, {"h", "0.6 m"}}},
@@ -206,6 +273,10 @@ inline Point anyPoint(int number, const Study& study) {
   const int planes = upTo(3);
   for (int i = 0; i < planes; ++i)
     point.planes.push_back({anyName(i), anyAngleText(), anyToleranceText(false)});
+  const int checks = upTo(2);
+  for (int i = 0; i < checks; ++i)
+    if (auto check = anyCheck(i, point, study))
+      point.checks.push_back(*check);
   point.reading = anyAngleText();
   return point;
 }
@@ -235,6 +306,7 @@ inline rc::Gen<Study> anyStudy() {
     study.convention = {anyWord<Positive>(), anyWord<ShearAxis>(), anyWord<ShearRule>()};
     study.cases = anyCases();
     study.combinations = anyCombinations(study.cases);
+    study.materials = anyMaterials();
     study.sections = anySections();
     const int points = 1 + upTo(3);
     for (int i = 0; i < points; ++i)

@@ -54,11 +54,11 @@ RC_GTEST_PROP(Band, noScanFindsAWorseDirection, ()) {
   const WorstInBand worst = worstIn(judge, band);
   RC_ASSERT(worst.angle >= band.from());
   RC_ASSERT(worst.angle <= band.to());
-  RC_ASSERT(judge.utilisation(worst.angle) == worst.outcome.utilisation);
+  RC_ASSERT(judge.utilisation(worst.angle) == worst.judgement.utilisation);
   const double width = (band.to() - band.from()).degrees();
   for (int i = 0; i <= 400; ++i) {
     const Angle at = band.from() + degrees(width * i / 400);
-    if (!isNoWorse(judge.utilisation(at), worst.outcome.utilisation))
+    if (!isNoWorse(judge.utilisation(at), worst.judgement.utilisation))
       RC_FAIL("worse at " + std::to_string(at.degrees()));
   }
 }
@@ -68,8 +68,13 @@ RC_GTEST_PROP(Band, wideningNeverLowersTheWorst, ()) {
   const Angle nominal = *anyAngle();
   double last = 0;
   for (const double tolerance : {0.0, 0.5, 3.0, 20.0, 60.0, 90.0, 120.0}) {
-    const double worst = worstIn(judge, bandOf(nominal, degrees(tolerance))).outcome.utilisation;
-    RC_ASSERT(isNoWorse(last, worst));
+    const double worst = worstIn(judge, bandOf(nominal, degrees(tolerance))).judgement.utilisation;
+    if (!isNoWorse(last, worst))
+      RC_FAIL(std::to_string(last) + " to " + std::to_string(worst) + " at " + std::to_string(tolerance) +
+              " round " + std::to_string(nominal.degrees()) + " in " +
+              std::to_string(judge.state().stress.sx) + ", " + std::to_string(judge.state().stress.sy) + ", " +
+              std::to_string(judge.state().stress.txy) + ", part " +
+              std::to_string(judge.branches().front().index()));
     last = worst;
   }
 }
@@ -78,7 +83,7 @@ TEST(Band, ofNoToleranceIsTheNominalDirection) {
   const auto judge = Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf({3, 0.1, 0.5}));
   const WorstInBand worst = worstIn(*judge, bandOf(degrees(30), {}));
   EXPECT_EQ(worst.angle, degrees(30));
-  EXPECT_EQ(worst.outcome, judge->at(degrees(30)));
+  EXPECT_EQ(worst.judgement, judge->at(degrees(30)));
 }
 
 TEST(Band, from90OnIsTheHalfTurnRoundTheNominalDirection) {

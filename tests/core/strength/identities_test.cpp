@@ -164,7 +164,7 @@ TEST(Golden, theCornerOfNorrisIsFoundInsideTheBand) {
   EXPECT_EQ(band.from(), degrees(-91));
   EXPECT_NEAR(judge->utilisation(band.nominal), 0.323415, 5e-7);
   const WorstInBand worst = worstIn(*judge, band);
-  EXPECT_NEAR(worst.outcome.utilisation, 0.330724, 5e-7);
+  EXPECT_NEAR(worst.judgement.utilisation, 0.330724, 5e-7);
   EXPECT_NEAR(worst.angle.degrees(), -83.3065, 5e-5);
   EXPECT_NEAR(std::max(judge->utilisation(band.from()), judge->utilisation(band.to())), 0.318387, 5e-7);
 }

@@ -61,12 +61,12 @@ RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithTheBand, ()) {
     return;
   double worst = 0;
   for (const Judge& judge : judges)
-    worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed)).outcome.utilisation);
+    worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed)).judgement.utilisation);
   RC_ASSERT(worst <= 1 + 1e-9);
   if (allowed->degrees() > 89.9)
     return;
   for (const Judge& judge : judges)
-    worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed + degrees(0.1))).outcome.utilisation);
+    worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed + degrees(0.1))).judgement.utilisation);
   RC_ASSERT(worst > 1 - 1e-9);
 }
 

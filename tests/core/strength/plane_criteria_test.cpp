@@ -29,27 +29,37 @@ Strengths filletThroat(double fu_, double beta, double gamma) {
   return f;
 }
 
-Outcome onPlane(Criterion criterion, const Strengths& f, double sn, double tnt) {
+Judgement onPlane(Criterion criterion, const Strengths& f, double sn, double tnt) {
   return Judge::of(criterion, f, {}, demandOf({sn, 0, tnt}))->at({});
 }
 
 TEST(CoulombPlane, mobilisesFrictionAndCohesion) {
-  const Outcome slips = onPlane(Criterion::coulomb, coulombPlane(2, 30), -10, 4);
+  const Judgement slips = onPlane(Criterion::coulomb, coulombPlane(2, 30), -10, 4);
   EXPECT_NEAR(slips.utilisation, 4 / (2 + 10 / std::sqrt(3.0)), 1e-14);
   EXPECT_EQ(slips.mode, Mode::slip);
   EXPECT_FALSE(slips.multiplier) << "clamping grows faster than the shear";
-  const Outcome steep = onPlane(Criterion::coulomb, coulombPlane(2, 30), -10, 6);
+  const Judgement steep = onPlane(Criterion::coulomb, coulombPlane(2, 30), -10, 6);
   EXPECT_NEAR(*steep.multiplier, 2 / (6 - 10 / std::sqrt(3.0)), 1e-12);
 }
 
 TEST(CoulombPlane, hasNoFiniteNumberForTensionWithoutACutOff) {
-  const Outcome pulled = onPlane(Criterion::coulomb, coulombPlane(2, 30), 0.1, 1);
+  const Judgement pulled = onPlane(Criterion::coulomb, coulombPlane(2, 30), 0.1, 1);
   EXPECT_TRUE(std::isinf(pulled.utilisation));
   EXPECT_EQ(pulled.mode, Mode::separation);
-  const Outcome cut = onPlane(Criterion::coulomb, coulombPlane(2, 30, 0.5), 0.4, 0);
+  const Judgement cut = onPlane(Criterion::coulomb, coulombPlane(2, 30, 0.5), 0.4, 0);
   EXPECT_NEAR(cut.utilisation, 0.8, 1e-15);
   EXPECT_EQ(cut.mode, Mode::separation);
   EXPECT_NEAR(*cut.multiplier, 1.25, 1e-15);
+}
+
+TEST(CoulombPlane, withoutCohesionAnUnloadedPlaneOfAStressedBodyHasNoBound) {
+  const auto upright = Angle::fromDegrees(90);
+  const auto loose = Judge::of(Criterion::coulomb, coulombPlane(0, 30), {}, demandOf({-80, 0, 0}));
+  EXPECT_TRUE(std::isinf(loose->utilisation(upright)));
+  EXPECT_GT(loose->utilisation(Angle::fromDegrees(89.99)), 1000);
+  const auto bound = Judge::of(Criterion::coulomb, coulombPlane(1, 30), {}, demandOf({-80, 0, 0}));
+  EXPECT_EQ(bound->utilisation(upright), 0);
+  EXPECT_EQ(Judge::of(Criterion::coulomb, coulombPlane(0, 30), {}, demandOf({}))->utilisation({}), 0);
 }
 
 RC_GTEST_PROP(CoulombPlane, theMultiplierTakesTheLoadOntoTheLimit, ()) {
@@ -57,10 +67,10 @@ RC_GTEST_PROP(CoulombPlane, theMultiplierTakesTheLoadOntoTheLimit, ()) {
                                    *rc::gen::inRange(1, 100) / 10.0);
   const double sn = *anyComponent();
   const double tnt = *anyComponent();
-  const Outcome outcome = onPlane(Criterion::coulomb, f, sn, tnt);
+  const Judgement judgement = onPlane(Criterion::coulomb, f, sn, tnt);
   // Without shear the ratio jumps at the apex of the line.
-  RC_PRE(outcome.multiplier.has_value() && tnt != 0);
-  const double R = *outcome.multiplier;
+  RC_PRE(judgement.multiplier.has_value() && tnt != 0);
+  const double R = *judgement.multiplier;
   RC_ASSERT(std::abs(onPlane(Criterion::coulomb, f, R * sn, R * tnt).utilisation - 1) <= 1e-9);
 }
 

@@ -22,7 +22,7 @@ Strengths isotropic(std::optional<double> ft, std::optional<double> fc = {}, std
   return f;
 }
 
-Outcome judged(Criterion criterion, const Strengths& f, const PlaneStress& stress, double sz = 0) {
+Judgement judged(Criterion criterion, const Strengths& f, const PlaneStress& stress, double sz = 0) {
   return Judge::of(criterion, f, {}, {stress, sz, scaleOf(stress), 0})->at({});
 }
 
@@ -42,10 +42,10 @@ TEST(PrincipalCriteria, trescaSortsTheThirdStressIn) {
 }
 
 TEST(PrincipalCriteria, rankineTakesTheWorseOfBothSenses) {
-  const Outcome pulls = judged(Criterion::rankine, isotropic(10, 100), {5, -40, 0});
+  const Judgement pulls = judged(Criterion::rankine, isotropic(10, 100), {5, -40, 0});
   EXPECT_NEAR(pulls.utilisation, 0.5, 1e-15);
   EXPECT_EQ(pulls.mode, Mode::tension);
-  const Outcome presses = judged(Criterion::rankine, isotropic(10, 100), {4, -80, 0});
+  const Judgement presses = judged(Criterion::rankine, isotropic(10, 100), {4, -80, 0});
   EXPECT_NEAR(presses.utilisation, 0.8, 1e-15);
   EXPECT_EQ(presses.mode, Mode::compression);
 }

@@ -80,11 +80,11 @@ RC_GTEST_PROP(LineCriteria, areTheirPublishedEquations, ()) {
   RC_ASSERT(judge.has_value());
   const LineStress s = judge->state().at(angle);
   RC_PRE(s.along != 0 || s.across != 0 || s.shear != 0);
-  const Outcome outcome = judge->at(angle);
-  RC_ASSERT(outcome.multiplier.has_value());
+  const Judgement judgement = judge->at(angle);
+  RC_ASSERT(judgement.multiplier.has_value());
   const auto expected = static_cast<double>(published(criterion, f).multiplier(s));
-  RC_ASSERT(std::abs(*outcome.multiplier - expected) <= 1e-12 * expected);
-  RC_ASSERT(std::abs(outcome.utilisation * *outcome.multiplier - 1) <= 1e-14);
+  RC_ASSERT(std::abs(*judgement.multiplier - expected) <= 1e-12 * expected);
+  RC_ASSERT(std::abs(judgement.utilisation * *judgement.multiplier - 1) <= 1e-14);
 }
 
 RC_GTEST_PROP(LineCriteria, areProportionalToTheLoad, (bool doubled)) {
@@ -150,7 +150,7 @@ TEST(LineCriteria, aStateOfZeroHasNoMultiplierAndNoMode) {
   for (const Criterion criterion : criteriaFor(MaterialKind::generic)) {
     const auto judge = Judge::of(criterion, c24(), {}, demandOf({}));
     ASSERT_TRUE(judge) << wordOf(criterion);
-    EXPECT_EQ(judge->at(Angle::fromDegrees(20)), Outcome{}) << wordOf(criterion);
+    EXPECT_EQ(judge->at(Angle::fromDegrees(20)), Judgement{}) << wordOf(criterion);
   }
 }
 

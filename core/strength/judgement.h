@@ -27,14 +27,14 @@ template <>
 const std::vector<Named<Mode>>& namesOf<Mode>();
 
 /// How a state stands against strengths.
-struct Outcome {
+struct Judgement {
   /// Demand over capacity; infinite where no finite number exists, as for tension across a plane that takes
   /// none.
   double utilisation = 0;
   /// The multiplier on all actions that brings the point to its limit; none where no multiple does.
   std::optional<double> multiplier = std::nullopt;
   std::optional<Mode> mode = std::nullopt; ///< none for a state of zero
-  bool operator==(const Outcome&) const = default;
+  bool operator==(const Judgement&) const = default;
 };
 
 /// A utilisation may exceed 1 by this much for the rounding of its inputs.

@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/strength/outcome.h"
+#include "core/strength/judgement.h"
 
 namespace planewright {
 

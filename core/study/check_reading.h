@@ -1,0 +1,55 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/strength/band.h"
+#include "core/study/study.h"
+
+namespace planewright {
+
+/// Where the factor of a strength comes from.
+enum class FactorOrigin {
+  none,     ///< neither durations nor a partial factor are given: 1
+  given,    ///< typed as it is
+  quotient, ///< duration factor over partial factor
+};
+
+/// What strengths of a material are multiplied by in one combination.
+struct StrengthFactor {
+  double value = 1;
+  FactorOrigin origin = FactorOrigin::none;
+  std::optional<Duration> duration; ///< the shortest of the combination, where durations count
+  double durationFactor = 1;
+  double partialFactor = 1;
+  bool operator==(const StrengthFactor&) const = default;
+};
+
+/// A check of a point with its texts evaluated; the same for all combinations.
+struct CheckSetup {
+  std::string id;
+  std::string material;
+  Criterion criterion = Criterion::sumOfSquares;
+  std::string line;         ///< empty without one
+  std::string plane;        ///< empty without one
+  std::optional<Band> band; ///< of the line's angle or the plane's normal; none without either
+  Parameters parameters;
+  Strengths strengths; ///< as given, before any factor
+  StrengthBasis basis = StrengthBasis::characteristic;
+  std::vector<Text> cautions;
+  bool operator==(const CheckSetup&) const = default;
+};
+
+/// What one check says of one combination. Without a problem `nominal` is the judgement at the nominal
+/// direction and `worst` that at the worst of the band; both are the same for a criterion that knows no
+/// direction.
+struct CheckReading {
+  StrengthFactor factor;
+  std::optional<Problem> problem; ///< why the combination could not be judged
+  Judgement nominal;
+  Judgement worst;
+  std::optional<Angle> worstAngle; ///< unfolded, inside the band
+  Text pairing;                    ///< how the basis of loads and strengths do not match; empty where they do
+  bool exceeds() const { return !problem && worst.utilisation > exceedingFrom; }
+  bool operator==(const CheckReading&) const = default;
+};
+
+} // namespace planewright

@@ -1,0 +1,210 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/judge_checks.h"
+
+#include "core/strength/cautions.h"
+#include "core/study/text_fields.h"
+#include "core/study/typed.h"
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+/// The factors of a material, read; an empty text is none.
+struct Factors {
+  std::optional<double> given;
+  std::optional<double> partial;
+  std::vector<std::optional<double>> durations; ///< in the order of Duration
+  bool hasDurations() const {
+    return std::ranges::any_of(durations, [](const auto& one) { return one.has_value(); });
+  }
+};
+
+std::optional<double> read(const Study& study, Spot spot, const std::string& text) {
+  return text.empty() ? std::nullopt : std::optional(valueOf(study, spot, text));
+}
+
+Factors factorsOf(const Study& study, const Material& material) {
+  Factors factors;
+  factors.given = read(study, Spot::strengthFactor, material.factor);
+  factors.partial = read(study, Spot::partialFactor, material.partialFactor);
+  for (const TextField<DurationTexts>& field : textFieldsOf<DurationTexts>())
+    factors.durations.push_back(read(study, field.spot, material.durations.*field.text));
+  return factors;
+}
+
+Strengths strengthsOf(const Study& study, const Material& material) {
+  Strengths strengths;
+  strengths.kind = material.kind;
+  strengths.seam = material.seam;
+  const auto& fields = textFieldsOf<Material>();
+  for (const StrengthKey key : keysOf(material.kind)) {
+    const Spot spot = spotOf(key);
+    const auto field = std::ranges::find(fields, spot, &TextField<Material>::spot);
+    strengths[key] = read(study, spot, material.*field->text);
+  }
+  return strengths;
+}
+
+Parameters parametersOf(const Study& study, const ParameterTexts& texts) {
+  Parameters parameters;
+  parameters.n = read(study, Spot::checkN, texts.n);
+  parameters.F12 = read(study, Spot::checkF12, texts.F12);
+  parameters.kc90 = read(study, Spot::checkKc90, texts.kc90);
+  if (const auto edge = read(study, Spot::checkEdge, texts.edge))
+    parameters.edge = Angle::fromDegrees(*edge);
+  return parameters;
+}
+
+std::optional<Band> bandOf(const Readout& readout, const Check& check) {
+  const auto line = std::ranges::find(readout.lines, check.line, &LineReading::name);
+  if (!check.line.empty() && line != readout.lines.end())
+    return bandOf(line->angle.value, line->tolerance);
+  const auto plane = std::ranges::find(readout.watched, check.plane, &WatchedReading::name);
+  if (!check.plane.empty() && plane != readout.watched.end())
+    return bandOf(plane->normal.value, plane->tolerance);
+  return std::nullopt;
+}
+
+CheckSetup setupOf(const Study& study, const Readout& readout, const Check& check, const Material& material) {
+  CheckSetup setup;
+  setup.id = check.id;
+  setup.material = material.name;
+  setup.criterion = check.criterion;
+  setup.line = check.line;
+  setup.plane = check.plane;
+  setup.band = bandOf(readout, check);
+  setup.parameters = parametersOf(study, check.parameters);
+  setup.strengths = strengthsOf(study, material);
+  setup.basis = material.basis;
+  const std::optional<Angle> direction = setup.band ? std::optional(setup.band->nominal) : std::nullopt;
+  setup.cautions = cautionsOf(check.criterion, setup.strengths, setup.parameters, direction);
+  return setup;
+}
+
+/// The shortest duration that acts; that of permanent loads where nothing does.
+Duration shortestOf(const Readout& readout, const StateReading& state) {
+  Duration shortest = Duration::permanent;
+  for (const ActingCase& acting : state.acting)
+    shortest = std::max(shortest, readout.cases[acting.index].duration);
+  return shortest;
+}
+
+Result<StrengthFactor> factorOf(const Factors& factors, Duration duration) {
+  StrengthFactor factor;
+  if (factors.given) {
+    factor.value = *factors.given;
+    factor.origin = FactorOrigin::given;
+    return factor;
+  }
+  if (!factors.partial && !factors.hasDurations())
+    return factor;
+  factor.origin = FactorOrigin::quotient;
+  factor.partialFactor = factors.partial.value_or(1);
+  if (factors.hasDurations()) {
+    const std::optional<double>& own = factors.durations[static_cast<std::size_t>(duration)];
+    if (!own)
+      return tl::unexpected(
+          Problem{{},
+                  0,
+                  0,
+                  {},
+                  PW_TEXT("Strength", "The material has no factor for loads of the duration “%1”.")
+                      .with(labelOf(duration)),
+                  PW_TEXT("Strength", "Give it among the factors of the material.")});
+    factor.duration = duration;
+    factor.durationFactor = *own;
+  }
+  factor.value = factor.durationFactor / factor.partialFactor;
+  return factor;
+}
+
+/// Whether strengths are at design level: given so, or characteristic ones with a partial or typed factor.
+bool isDesign(StrengthBasis basis, const Factors& factors) {
+  return basis == StrengthBasis::design ||
+         (basis == StrengthBasis::characteristic && (factors.given || factors.partial));
+}
+
+Text pairingOf(StrengthBasis basis, const Factors& factors, MaterialKind kind, Basis loads) {
+  if (basis == StrengthBasis::testMean)
+    return PW_TEXT("Strength", "against means of tests: not a design check");
+  if (kind == MaterialKind::throat) // carries its own partial factor
+    return loads == Basis::design
+               ? Text{}
+               : PW_TEXT("Strength", "design strengths of the weld against loads that are not design loads");
+  if (basis == StrengthBasis::allowable)
+    return loads == Basis::design ? PW_TEXT("Strength", "allowable strengths against factored design loads")
+                                  : Text{};
+  if (!isDesign(basis, factors))
+    return PW_TEXT("Strength", "against characteristic strengths: not a design check");
+  return loads == Basis::design
+             ? Text{}
+             : PW_TEXT("Strength", "design strengths against loads that are not design loads");
+}
+
+CheckReading judged(const Readout& readout, const StateReading& state, const CheckSetup& setup,
+                    const Factors& factors) {
+  CheckReading reading;
+  reading.pairing = pairingOf(setup.basis, factors, setup.strengths.kind, state.basis);
+  const Result<StrengthFactor> factor = factorOf(factors, shortestOf(readout, state));
+  if (!factor) {
+    reading.problem = factor.error();
+    return reading;
+  }
+  reading.factor = *factor;
+  const Result<Judge> judge =
+      Judge::of(setup.criterion, factor->value * setup.strengths, setup.parameters, demandOf(readout, state));
+  if (!judge) {
+    reading.problem = judge.error();
+    return reading;
+  }
+  if (!setup.band) {
+    reading.nominal = reading.worst = judge->at({});
+    return reading;
+  }
+  reading.nominal = judge->at(setup.band->nominal);
+  const WorstInBand worst = worstIn(*judge, *setup.band);
+  reading.worst = worst.judgement;
+  reading.worstAngle = worst.angle;
+  return reading;
+}
+
+} // namespace
+
+Demand demandOf(const Readout& readout, const StateReading& state) {
+  const double sense = readout.positive == Positive::tension ? 1 : -1;
+  return {sense * state.stress, sense * state.sz, state.scale,
+          bendingShareOf(state.stress.sx, state.axial, state.bending)};
+}
+
+void judgeChecks(Readout& readout, const Study& study, const Point& point) {
+  for (const Check& check : point.checks) {
+    const Material& material = *findMaterial(study, check.material);
+    const CheckSetup& setup = readout.checks.emplace_back(setupOf(study, readout, check, material));
+    const Factors factors = factorsOf(study, material);
+    for (StateReading& state : readout.states)
+      if (state.judged)
+        state.checks.push_back(judged(readout, state, setup, factors));
+  }
+}
+
+Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::size_t check) {
+  const CheckSetup& setup = readout.checks[check];
+  const CheckReading& reading = state.checks[check];
+  if (reading.problem)
+    return tl::unexpected(*reading.problem);
+  return Judge::of(setup.criterion, reading.factor.value * setup.strengths, setup.parameters,
+                   demandOf(readout, state));
+}
+
+std::vector<Judge> judgesOf(const Readout& readout, std::size_t check) {
+  std::vector<Judge> judges;
+  for (const StateReading& state : readout.states)
+    if (state.judged)
+      if (Result<Judge> judge = judgeOf(readout, state, check))
+        judges.push_back(*std::move(judge));
+  return judges;
+}
+
+} // namespace planewright

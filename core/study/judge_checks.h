@@ -1,0 +1,20 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/readout.h"
+
+namespace planewright {
+
+/// Reads the checks of a point and judges every judged state of its Readout. Strength belongs to the
+/// combination: its factor is that of the shortest duration among the acting cases over the partial factor.
+void judgeChecks(Readout& readout, const Study& study, const Point& point);
+
+/// The judge of one check and state: for what a check says of other directions.
+Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::size_t check);
+/// Those of all judged states that can be judged, for one check.
+std::vector<Judge> judgesOf(const Readout& readout, std::size_t check);
+
+/// What a state asks of strengths, with tension positive.
+Demand demandOf(const Readout& readout, const StateReading& state);
+
+} // namespace planewright
