@@ -2,13 +2,18 @@
 #pragma once
 
 #include "core/study/study.h"
+#include "core/words/text.h"
 
 namespace planewright {
 
-/// The stresses of points as a table: point, note, case, sx, sy, txy, sz and, where a case of theirs has
-/// section forces, N to M_z; texts as they are typed, cells parted by tabs for the clipboard or commas for a
-/// file. A point without stresses has a row of its own. What is pasted from it is what was copied; pressure
-/// and measured strains are not in it.
+/// Points as a table: point, note, case, sx, sy, txy, sz and, where one of them has any, the columns of
+/// fibres, section forces, pressure, measured strains and of the first line, where it is not the one that a
+/// new point gets; texts as they are typed, cells parted by tabs for the clipboard or commas for a file. A
+/// point without stresses has a row of its own. What is pasted from it is what was copied, into a study that
+/// has the sections.
 std::string copiedPoints(const std::vector<Point>& points, char separator);
+
+/// What these points have and their table does not, each as a name: "watched planes".
+std::vector<Text> leftOutOf(const std::vector<Point>& points);
 
 } // namespace planewright

@@ -15,28 +15,61 @@ using std::string_view;
 
 struct KindRow {
   ColumnKind kind;
+  const char* word; ///< as it is written
+  std::optional<Spot> thing;
   std::optional<Spot> spot;
   std::vector<string_view> headings; ///< as `plainHeading` leaves them
 };
 
 /// In the order of ColumnKind.
 const std::vector<KindRow>& kindTable() {
+  using enum ColumnKind;
+  constexpr auto none = std::nullopt;
   static const std::vector<KindRow> table = {
-      {ColumnKind::unused, std::nullopt, {}},
-      {ColumnKind::point, std::nullopt, {"point", "pt"}},
-      {ColumnKind::note, std::nullopt, {"note", "notes", "remark", "remarks", "comment"}},
-      {ColumnKind::loadCase, std::nullopt, {"case", "loadcase", "lc"}},
-      {ColumnKind::sx, Spot::sx, {"sx", "sigmax", "sxx", "sigmaxx"}},
-      {ColumnKind::sy, Spot::sy, {"sy", "sigmay", "syy", "sigmayy"}},
-      {ColumnKind::txy, Spot::txy, {"txy", "tauxy"}},
-      {ColumnKind::sz, Spot::sz, {"sz", "sigmaz", "szz", "sigmazz"}},
-      {ColumnKind::N, Spot::forceN, {"n"}},
-      {ColumnKind::Vy, Spot::forceVy, {"vy", "v"}},
-      {ColumnKind::Vz, Spot::forceVz, {"vz"}},
-      {ColumnKind::T, Spot::forceT, {"t"}},
-      {ColumnKind::My, Spot::forceMy, {"my"}},
-      {ColumnKind::Mz, Spot::forceMz, {"mz", "m"}}};
+      {unused, "unused", none, none, {}},
+      {point, "point", none, none, {"point", "pt"}},
+      {note, "note", Spot::point, Spot::pointNote, {"note", "notes", "remark", "remarks", "comment"}},
+      {section, "section", Spot::fibre, Spot::fibreSection, {"section", "crosssection"}},
+      {y, "y", Spot::fibre, Spot::fibreY, {"y"}},
+      {z, "z", Spot::fibre, Spot::fibreZ, {"z"}},
+      {view, "view", Spot::fibre, Spot::fibreView, {"view"}},
+      {line, "line", none, none, {"line"}},
+      {lineKind, "line kind", Spot::line, Spot::lineKind, {"linekind"}},
+      {lineAngle, "line angle", Spot::line, Spot::lineAngle, {"lineangle", "angleofline"}},
+      {lineTolerance, "line tolerance", Spot::line, Spot::lineTolerance, {"linetolerance"}},
+      {loadCase, "case", none, none, {"case", "loadcase", "lc"}},
+      {sx, "sx", Spot::caseStress, Spot::sx, {"sx", "sigmax", "sxx", "sigmaxx"}},
+      {sy, "sy", Spot::caseStress, Spot::sy, {"sy", "sigmay", "syy", "sigmayy"}},
+      {txy, "txy", Spot::caseStress, Spot::txy, {"txy", "tauxy"}},
+      {sz, "sz", Spot::caseStress, Spot::sz, {"sz", "sigmaz", "szz", "sigmazz"}},
+      {N, "N", Spot::forces, Spot::forceN, {"n"}},
+      {Vy, "V_y", Spot::forces, Spot::forceVy, {"vy", "v"}},
+      {Vz, "V_z", Spot::forces, Spot::forceVz, {"vz"}},
+      {T, "T", Spot::forces, Spot::forceT, {"t"}},
+      {My, "M_y", Spot::forces, Spot::forceMy, {"my"}},
+      {Mz, "M_z", Spot::forces, Spot::forceMz, {"mz", "m"}},
+      {pressure, "pressure", Spot::pressure, Spot::pressureP, {"pressure", "p"}},
+      {radius, "inner radius", Spot::pressure, Spot::pressureR, {"innerradius", "ri"}},
+      {wall, "wall", Spot::pressure, Spot::pressureT, {"wall", "wallthickness"}},
+      {ends, "ends", Spot::pressure, Spot::pressureEnds, {"ends"}},
+      {strainA, "strain_a", Spot::rosette, Spot::gaugeStrainA, {"straina"}},
+      {angleA, "angle_a", Spot::rosette, Spot::gaugeAngleA, {"anglea"}},
+      {strainB, "strain_b", Spot::rosette, Spot::gaugeStrainB, {"strainb"}},
+      {angleB, "angle_b", Spot::rosette, Spot::gaugeAngleB, {"angleb"}},
+      {strainC, "strain_c", Spot::rosette, Spot::gaugeStrainC, {"strainc"}},
+      {angleC, "angle_c", Spot::rosette, Spot::gaugeAngleC, {"anglec"}},
+      {material, "material", Spot::rosette, Spot::rosetteMaterial, {"material"}},
+      {E, "E", Spot::rosette, Spot::rosetteE, {"e"}},
+      {nu, "nu", Spot::rosette, Spot::rosetteNu, {"nu"}},
+      {along, "E_along", Spot::rosette, Spot::rosetteAlong, {"ealong"}},
+      {across, "E_across", Spot::rosette, Spot::rosetteAcross, {"eacross"}},
+      {nu12, "nu12", Spot::rosette, Spot::rosetteNu12, {"nu12"}},
+      {G, "G12", Spot::rosette, Spot::rosetteG, {"g12"}}};
   return table;
+}
+
+const KindRow& rowOf(ColumnKind kind) {
+  return kindTable()[static_cast<std::size_t>(kind)];
 }
 
 /// Without blanks, index signs and capitals, Greek letters by name: "σ_{x}" gives "sigmax".
@@ -207,9 +240,9 @@ private:
 
   void notTold(std::size_t i) {
     const string& heading = m_result.columns[i].heading;
-    const Text mend =
-        PW_TEXT("Paste", "Choose what it is, or head it with one of: point, note, case, sx, sy, "
-                         "txy, sz, N, V_y, V_z, T, M_y, M_z.");
+    const Text mend = PW_TEXT(
+        "Paste", "Choose what it is, or head it with its name: point, note, case, sx, sy, txy, sz, N, "
+                 "V_y, V_z, T, M_y, M_z, section, y, z.");
     if (heading.empty())
       add(i + 1, {}, PW_TEXT("Paste", "It is not told what this column is."), mend);
     else
@@ -220,9 +253,9 @@ private:
     PastedColumn& column = m_result.columns[i];
     const std::optional<string_view> unit = headingOf(column.heading).unit;
     const std::optional<Spot> spot = spotOf(*column.kind);
-    if (!unit || !spot)
+    if (!unit || !spot || !isExpression(*column.kind))
       return;
-    const Result<Unit> read = readUnit(*unit, rowOf(*spot).dimension);
+    const Result<Unit> read = readUnit(*unit, planewright::rowOf(*spot).dimension);
     if (read)
       column.unit = *read;
     else
@@ -236,7 +269,7 @@ private:
     if (!has([](ColumnKind kind) { return kind == ColumnKind::loadCase; }))
       add(0, {}, PW_TEXT("Paste", "The table has no column with the load case."),
           PW_TEXT("Paste", "Add a column headed “case”; of one case alone, with its id in each row."));
-    else if (!has([](ColumnKind kind) { return spotOf(kind).has_value(); }))
+    else if (!has(isOfCase))
       add(0, {}, PW_TEXT("Paste", "The table has no column with a stress or a section force."),
           PW_TEXT("Paste", "Head the columns sx, sy, txy or N, V_y, M_z."));
   }
@@ -252,30 +285,55 @@ private:
 template <>
 const std::vector<Named<ColumnKind>>& namesOf() {
   static const std::vector<Named<ColumnKind>> rows = [] {
-    std::vector<Named<ColumnKind>> names = {{ColumnKind::unused, "unused", PW_TEXT("Paste", "not used")},
-                                            {ColumnKind::point, "point", PW_TEXT("Paste", "point")},
-                                            {ColumnKind::note, "note", PW_TEXT("Paste", "note of the point")},
-                                            {ColumnKind::loadCase, "case", PW_TEXT("Paste", "load case")}};
+    const auto labelOfColumn = [](const KindRow& row) {
+      switch (row.kind) {
+      case ColumnKind::unused:
+        return PW_TEXT("Paste", "not used");
+      case ColumnKind::point:
+        return PW_TEXT("Paste", "point");
+      case ColumnKind::note:
+        return PW_TEXT("Paste", "note of the point");
+      case ColumnKind::line:
+        return PW_TEXT("Paste", "name of the line");
+      case ColumnKind::loadCase:
+        return PW_TEXT("Paste", "load case");
+      default:
+        return planewright::rowOf(*row.spot).label;
+      }
+    };
+    std::vector<Named<ColumnKind>> names;
     for (const KindRow& row : kindTable())
-      if (row.spot)
-        names.push_back({row.kind, rowOf(*row.spot).key().data(), rowOf(*row.spot).label});
+      names.push_back({row.kind, row.word, labelOfColumn(row)});
     return names;
   }();
   return rows;
 }
 
 std::optional<Spot> spotOf(ColumnKind kind) {
-  return kindTable()[static_cast<std::size_t>(kind)].spot;
+  return rowOf(kind).spot;
 }
 
-bool isForce(ColumnKind kind) {
-  return kind >= ColumnKind::N;
+std::optional<Spot> thingOf(ColumnKind kind) {
+  return rowOf(kind).thing;
 }
 
-std::vector<ColumnKind> numberColumns(bool withForces) {
+bool isOfCase(ColumnKind kind) {
+  return kind > ColumnKind::loadCase;
+}
+
+bool isOfPoint(ColumnKind kind) {
+  return kind > ColumnKind::point && kind < ColumnKind::loadCase;
+}
+
+bool isExpression(ColumnKind kind) {
+  const std::optional<Spot> spot = spotOf(kind);
+  return spot && planewright::rowOf(*spot).holds == Holds::expression;
+}
+
+std::vector<ColumnKind> columnsThatFill(Spot thing) {
   std::vector<ColumnKind> kinds;
   for (const KindRow& row : kindTable())
-    if (row.spot && (withForces || !isForce(row.kind)))
+    if (row.thing == thing)
       kinds.push_back(row.kind);
   return kinds;
 }

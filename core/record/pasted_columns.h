@@ -6,17 +6,66 @@
 
 namespace planewright {
 
-/// What a column of a table of points holds.
-enum class ColumnKind { unused, point, note, loadCase, sx, sy, txy, sz, N, Vy, Vz, T, My, Mz };
+/// What a column of a table of points holds: names, texts of the point, of its fibre and its line; then texts
+/// of one case at the point.
+enum class ColumnKind {
+  unused,
+  point,
+  note,
+  section,
+  y,
+  z,
+  view,
+  line, ///< its name
+  lineKind,
+  lineAngle,
+  lineTolerance,
+  loadCase,
+  sx,
+  sy,
+  txy,
+  sz,
+  N,
+  Vy,
+  Vz,
+  T,
+  My,
+  Mz,
+  pressure,
+  radius,
+  wall,
+  ends,
+  strainA,
+  angleA,
+  strainB,
+  angleB,
+  strainC,
+  angleC,
+  material,
+  E,
+  nu,
+  along,
+  across,
+  nu12,
+  G
+};
 
 template <>
 const std::vector<Named<ColumnKind>>& namesOf<ColumnKind>();
 
-/// The spot that a column of numbers fills; none for the others.
+/// The spot whose text a column fills; none for names.
 std::optional<Spot> spotOf(ColumnKind kind);
-bool isForce(ColumnKind kind);
-/// The kinds of numbers, in the order of the file.
-std::vector<ColumnKind> numberColumns(bool withForces);
+/// The thing that the text belongs to: point, fibre, line, caseStress, forces, pressure or rosette; none
+/// where there is no spot.
+std::optional<Spot> thingOf(ColumnKind kind);
+/// Whether it says something of one case at a point.
+bool isOfCase(ColumnKind kind);
+/// Whether it says something of the point, in any of its rows.
+bool isOfPoint(ColumnKind kind);
+/// Whether it holds expressions.
+bool isExpression(ColumnKind kind);
+/// The kinds that fill the texts of a thing, in their order.
+std::vector<ColumnKind> columnsThatFill(Spot thing);
 
 /// The kind that a heading names ("σx", "V_y", "load case"), with or without capitals; none for other words.
 std::optional<ColumnKind> kindOfHeading(std::string_view heading);

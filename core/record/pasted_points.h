@@ -22,8 +22,9 @@ struct PastedPoints {
   std::vector<PastedRow> rows;
   Problems problems; ///< of the table as a whole
   std::vector<std::string> newPoints;
-  std::vector<std::string> newCases;
-  std::size_t replaced = 0; ///< texts of the study that others take the place of
+  std::vector<std::string> newCases;    ///< made as variable
+  std::vector<std::string> newMeasured; ///< cases made as measured, for their strains
+  std::size_t replaced = 0;             ///< texts of the study that others take the place of
   std::vector<Text> cautions;
   Edits edits;
 
@@ -32,11 +33,12 @@ struct PastedPoints {
   Problems allProblems() const;
 };
 
-/// Reads a table of stresses and section forces, a row for one case at one point: without a column of points
-/// into the shown one. Numbers are entries as in the fields, bare ones in the unit of their heading or the
-/// study's; an empty cell leaves what the study has. Points and cases that the study does not have are made
-/// (the cases variable); a row with a point alone makes the point. What `edited` says against the whole
-/// stands at the row that it is about.
+/// Reads a table of stresses, section forces, pressure and measured strains, a row for one case at one point:
+/// without a column of points into the shown one. Numbers are entries as in the fields, bare ones in the unit
+/// of their heading or the study's; an empty cell leaves what the study has. Points and cases that the study
+/// does not have are made; a row with a point alone makes the point. Fibres lie in sections that the study
+/// has; a fibre, a pressure or a rosette that is new has to be given whole. What `edited` says against the
+/// whole stands at the row that it is about.
 PastedPoints pastedPoints(const Study& study, std::string_view text, const ColumnChoices& choices = {});
 
 } // namespace planewright

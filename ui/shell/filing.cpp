@@ -5,6 +5,7 @@
 #include "core/record/pasted_cells.h"
 #include "core/record/study_file.h"
 #include "ui/files/file_bytes.h"
+#include "ui/shell/table_words.h"
 
 #include <QFileInfo>
 
@@ -107,7 +108,8 @@ bool Filing::writeTable() {
   const QString path = m_questions.pathToExport(beside + tr("%1 points.csv").arg(name()));
   if (path.isEmpty() || !writeBytes(path, copiedPoints(m_desk.study().points, ',')))
     return false;
-  m_desk.say(tr("The points are in %1.").arg(QFileInfo(path).fileName()));
+  m_desk.say(tr("The points are in %1.").arg(QFileInfo(path).fileName()) +
+             leftOutInWords(m_desk.study().points));
   return true;
 }
 

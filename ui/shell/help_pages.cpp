@@ -28,7 +28,8 @@ changes a stress.</p>
 <p>The angle and the tolerance of a line also read slopes: <code>1 in 12</code>, <code>1:12</code>, the angle <code>8 %</code> too.
 The echo gives both, 5.71° and 1 in 10, so that 10 for 1 in 10 is seen at once. The normal of a plane takes no slope.</p>
 <p>Edit, Paste table reads a table from a spreadsheet: a row for each case, with headings such as <code>point</code>,
-<code>case</code>, <code>sx [MPa]</code>, <code>sy</code>, <code>txy</code> or <code>N</code>, <code>V</code>, <code>M</code>. It shows
+<code>case</code>, <code>sx [MPa]</code>, <code>sy</code>, <code>txy</code> or <code>N</code>, <code>V</code>, <code>M</code>;
+a new point lies in a section of the study by <code>section</code>, <code>y</code>, <code>z</code>, <code>view</code>. It shows
 what would be kept and takes all of it or nothing.</p>
 <p>A decimal comma is not read in a field; write 1.5. In a table it is, where it can mean nothing else. A text that does not read stays in its field, marked, with what is wrong and
 how to mend it; the study keeps the last text that did.</p>

@@ -2,11 +2,10 @@
 #include "core/record/copied_points.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/paste_dialog.h"
+#include "ui/shell/table_words.h"
 
 #include <QClipboard>
 #include <QGuiApplication>
-
-#include <algorithm>
 
 namespace planewright {
 
@@ -28,13 +27,7 @@ void MainWindow::showTable(std::string table, const QString& title) {
 
 void MainWindow::copyStresses(const std::vector<Point>& points, const QString& said) {
   QGuiApplication::clipboard()->setText(QString::fromStdString(copiedPoints(points, '\t')));
-  const auto hasMore = [](const Point& point) {
-    return std::ranges::any_of(point.stress,
-                               [](const CaseStress& one) { return one.pressure || one.rosette; });
-  };
-  m_desk.say(std::ranges::any_of(points, hasMore)
-                 ? said + QLatin1Char(' ') + tr("Pressure and measured strains are not in the table.")
-                 : said);
+  m_desk.say(said + leftOutInWords(points));
 }
 
 } // namespace planewright

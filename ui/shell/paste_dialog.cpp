@@ -50,6 +50,8 @@ QStringList whatIsAdded(const Study& study, const PastedPoints& pasted) {
     lines << PasteDialog::tr("Points that are added: %1.").arg(listed(pasted.newPoints));
   if (!pasted.newCases.empty())
     lines << PasteDialog::tr("Load cases that are added, as variable: %1.").arg(listed(pasted.newCases));
+  if (!pasted.newMeasured.empty())
+    lines << PasteDialog::tr("Load cases that are added, as measured: %1.").arg(listed(pasted.newMeasured));
   if (pasted.replaced > 0)
     lines << PasteDialog::tr("Texts of the study that are replaced: %1.").arg(pasted.replaced);
   if (pasted.edits.empty())

@@ -151,6 +151,90 @@ TEST(PastedPoints, forcesNeedAFibre) {
   EXPECT_FALSE(pastedPoints(beam(), "point\tcase\tN\nP9\tG\t1\n").isSound());
 }
 
+TEST(PastedPoints, makesPointsInSectionsThatTheStudyHas) {
+  const Study study = beam();
+  const PastedPoints pasted = pastedPoints(study, "point,section,y [cm],z,view,case,N,M_z\n"
+                                                  "P2,beam,12,45,side,G,1,2\n"
+                                                  "P2,,,,,Q,3,4\n"
+                                                  "P3,beam,-12,0,top,,,\n");
+  const Study done = after(study, pasted);
+  ASSERT_EQ(done.points.size(), 3U);
+  EXPECT_EQ(done.points[1].fibre, (FibreTexts{"beam", "12 cm", "45 mm", View::side}));
+  EXPECT_EQ(done.points[1].stress[1].forces->Mz, "4 kN*m");
+  EXPECT_EQ(done.points[2].fibre->view, View::top);
+  EXPECT_EQ(pasted.rows[1].cells[1], "beam") << "what the study keeps";
+}
+
+TEST(PastedPoints, aSectionThatIsMissingIsNamedAtItsRow) {
+  const PastedPoints pasted = pastedPoints(newStudy(), "point\tsection\ty\tz\tcase\tN\n"
+                                                       "P2\tpurlin\t0\t0\tG\t1\n"
+                                                       "P3\t\t\t\tG\t1\n");
+  EXPECT_TRUE(contains(firstWords(pasted), "line 2, column 2: This study has no section “purlin”"))
+      << firstWords(pasted);
+  EXPECT_TRUE(contains(plain(pasted.allProblems().back()), "line 3, column 6: Point P3 has no section"));
+  EXPECT_TRUE(pasted.edits.empty());
+}
+
+TEST(PastedPoints, aFibreIsGivenWhole) {
+  const auto words = [](const char* text) { return firstWords(pastedPoints(beam(), text)); };
+  EXPECT_TRUE(contains(words("point\tsection\ty\tcase\tN\nP2\tbeam\t0\tG\t1\n"),
+                       "Where point P2 lies in section “beam” is not given."));
+  EXPECT_TRUE(contains(words("point\ty\tz\tcase\tsx\nP2\t0\t0\tG\t1\n"), "Point P2 has no section"));
+  EXPECT_TRUE(contains(words("case\ty\tsx\nG\t0\t1\nQ\t1\t1\n"), "line 3, column 2: Point P1 has another"));
+  EXPECT_TRUE(contains(words("case\ty\tsx\nG\t121\t1\n"), "line 2"));
+  EXPECT_TRUE(contains(words("case\tview\tsx\nG\tbelow\t1\n"), "line 2, column 2: “below” is not one"));
+  EXPECT_EQ(after(beam(), pastedPoints(beam(), "case\ty\tsx\nG\t60\t1\n")).points[0].fibre->y, "60 mm");
+}
+
+TEST(PastedPoints, pressureIsGivenWholeWhereItIsNew) {
+  const Study study = newStudy();
+  const Study done = after(study, pastedPoints(study, "case\tpressure [bar]\tinner radius\twall\tends\n"
+                                                      "G\t12\t600\t8\topen\n"));
+  EXPECT_EQ(done.points[0].stress[0].pressure, (PressureTexts{"12 bar", "600 mm", "8 mm", Ends::open}));
+  const PastedPoints half = pastedPoints(study, "case\tpressure\tinner radius\tends\nG\t1\t600\topen\n");
+  EXPECT_TRUE(contains(firstWords(half), "of case G is not whole: t is not given")) << firstWords(half);
+  EXPECT_TRUE(contains(firstWords(half), "“wall”"));
+  EXPECT_EQ(after(done, pastedPoints(done, "case\tpressure\nG\t2\n")).points[0].stress[0].pressure->p,
+            "2 MPa");
+  EXPECT_FALSE(pastedPoints(study, "case\tpressure\tri\twall\tends\nG\t1\t600\t8\tshut\n").isSound());
+}
+
+TEST(PastedPoints, aCaseWithStrainsIsMadeAsMeasured) {
+  const std::string head = "case\tstrain_a\tangle_a\tstrain_b\tangle_b\tstrain_c\tangle_c\tmaterial\tE\tnu\n";
+  const Study study = newStudy();
+  const PastedPoints pasted =
+      pastedPoints(study, head + "M\t412\t0\t-87\t45\t120\t90\tisotropic\t210 GPa\t0.3\n");
+  const Study done = after(study, pasted);
+  EXPECT_EQ(findCase(done, "M")->nature, Nature::measured);
+  EXPECT_EQ(pasted.newMeasured, std::vector<std::string>{"M"});
+  EXPECT_TRUE(pasted.newCases.empty());
+  EXPECT_EQ(done.points[0].stress[1].rosette->strainB, "-87 ustrain");
+
+  const PastedPoints noModulus = pastedPoints(study, head + "M\t1\t0\t2\t45\t3\t90\tisotropic\t\t0.3\n");
+  EXPECT_TRUE(contains(firstWords(noModulus), "line 2, column 9")) << firstWords(noModulus);
+  const PastedPoints noGrain = pastedPoints(study, head + "M\t1\t0\t2\t45\t3\t90\torthotropic\t\t\n");
+  EXPECT_TRUE(contains(firstWords(noGrain), "“E_along”")) << firstWords(noGrain);
+  const PastedPoints permanent =
+      pastedPoints(study, head + "G\t1\t0\t2\t45\t3\t90\tisotropic\t210 GPa\t0.3\n");
+  EXPECT_TRUE(contains(firstWords(permanent), "line 2: Case G has measured strains"))
+      << firstWords(permanent);
+}
+
+TEST(PastedPoints, theLineOfAPointIsTypedOrMade) {
+  const Study study = newStudy();
+  const auto lines = [&](const char* text, std::size_t point) {
+    return after(study, pastedPoints(study, text)).points.at(point).lines;
+  };
+  EXPECT_EQ(lines("case\tsx\tline angle\nG\t1\t1 in 10\n", 0),
+            (std::vector<Line>{{"grain", LineKind::grain, "1 in 10", ""}}));
+  EXPECT_EQ(lines("point\tcase\tsx\tline\tline kind\tline tolerance\nP2\tG\t1\tthroat\tweld\t2\n", 1),
+            (std::vector<Line>{{"throat", LineKind::weld, "0 deg", "2 deg"}}));
+  EXPECT_TRUE(lines("point\tcase\tsx\tline\nP2\tG\t1\t\n", 1).empty());
+  EXPECT_EQ(lines("case\tsx\tline\nG\t1\tbed\n", 0).size(), 2U);
+  EXPECT_TRUE(contains(firstWords(pastedPoints(study, "case\tsx\tline tolerance\nG\t1\t-2\n")),
+                       "line 2, column 3: “-2” is negative"));
+}
+
 TEST(PastedPoints, whatEditedRefusesStandsAtItsRow) {
   Study study = newStudy();
   study.combinations = {{"Q", {{"G", "1"}}}};
@@ -218,10 +302,24 @@ TEST(CopiedPoints, typedTextsAsTheyAreAndForcesOnlyWhereThereAreAny) {
   study = beam();
   study.points[0].stress[0].forces = ForceTexts{};
   study.points.emplace_back().name = "P2";
+  study.points.back().lines = {Line{}};
   EXPECT_EQ(copiedPoints(study.points, '\t'),
-            "point\tnote\tcase\tsx\tsy\ttxy\tsz\tN\tV_y\tV_z\tT\tM_y\tM_z\n"
-            "P1\t\tG\t0 MPa\t0 MPa\t0 MPa\t0 MPa\t0 kN\t0 kN\t0 kN\t0 kN*m\t0 kN*m\t0 kN*m\n"
-            "P2\t\t\t\t\t\t\t\t\t\t\t\t\n");
+            "point\tnote\tsection\ty\tz\tview\tcase\tsx\tsy\ttxy\tsz\tN\tV_y\tV_z\tT\tM_y\tM_z\n"
+            "P1\t\tbeam\t0 mm\t0 mm\tside\tG\t0 MPa\t0 MPa\t0 MPa\t0 MPa\t0 kN\t0 kN\t0 kN\t0 kN*m\t0 kN*m\t"
+            "0 kN*m\n"
+            "P2\t\t\t\t\t\t\t\t\t\t\t\t\t\t\t\t\n");
+}
+
+TEST(CopiedPoints, whatTheTableHasNotIsNamed) {
+  Study study = newStudy();
+  EXPECT_TRUE(leftOutOf(study.points).empty());
+  study = beam();
+  study.points[0].planes.emplace_back().name = "scarf";
+  study.points[0].reading = "30 deg";
+  std::vector<std::string> names;
+  for (const Text& name : leftOutOf(study.points))
+    names.push_back(plain(name));
+  EXPECT_EQ(names, (std::vector<std::string>{"sizes of sections", "watched planes", "reading planes"}));
 }
 
 } // namespace

@@ -2,6 +2,7 @@
 #include "shell_test.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/paste_dialog.h"
+#include "ui/shell/status_line.h"
 #include "ui/shell/strip.h"
 
 #include <QApplication>
@@ -162,7 +163,9 @@ TEST_F(TablesOfWindow, whatIsCopiedIsPastedByItsKeys) {
   window.activateWindow();
   ASSERT_TRUE(QTest::qWaitForWindowActive(&window));
   action(window, "Copy stresses of all points")->trigger();
-  EXPECT_TRUE(QApplication::clipboard()->text().startsWith("point\tnote\tcase\tsx"));
+  EXPECT_TRUE(QApplication::clipboard()->text().startsWith("point\tnote\tsection\ty\tz\tview\tline"));
+  EXPECT_TRUE(window.statusLine().words().contains("Not in the table: sizes of sections, second lines"))
+      << window.statusLine().words().toStdString();
   const Study study = window.desk().study();
 
   QTest::keyClick(QApplication::focusWidget(), Qt::Key_V, Qt::ControlModifier | Qt::ShiftModifier);
@@ -181,6 +184,7 @@ TEST_F(TablesOfWindow, pointsGoToAFileAndComeBack) {
   m_exportPath = m_importPath = file("points.csv");
   action(window, "Export points…")->trigger();
   ASSERT_TRUE(QFile::exists(m_exportPath));
+  EXPECT_TRUE(window.statusLine().words().contains("Not in the table"));
 
   type(window.desk(), Spot::sx, "99 MPa");
   type(window.desk(), Spot::pointNote, "another");
@@ -192,6 +196,34 @@ TEST_F(TablesOfWindow, pointsGoToAFileAndComeBack) {
   ASSERT_TRUE(dialog->takeButton().isEnabled()) << dialog->complaint().toStdString();
   dialog->takeButton().click();
   EXPECT_EQ(window.desk().study(), study);
+}
+
+TEST_F(TablesOfWindow, aNewStudyTakesThePointsAsSoonAsItHasTheirSection) {
+  MainWindow window(answers());
+  window.openWorkedExample();
+  const Study example = window.desk().study();
+  m_exportPath = m_importPath = file("points.csv");
+  action(window, "Export points…")->trigger();
+
+  window.desk().replace(newStudy());
+  action(window, "Import points…")->trigger();
+  QPointer<PasteDialog> dialog = window.findChild<PasteDialog*>();
+  ASSERT_NE(dialog, nullptr);
+  EXPECT_TRUE(dialog->complaint().contains("This study has no section “ridge beam”"))
+      << dialog->complaint().toStdString();
+  ASSERT_FALSE(window.desk().request({Insert{{Spot::section, "ridge beam", {}}, std::nullopt},
+                                      Type{{Spot::size, "ridge beam", "b"}, "140 mm"},
+                                      Type{{Spot::size, "ridge beam", "h"}, "600 mm"}},
+                                     window.desk().newGesture(), "section"));
+  EXPECT_TRUE(dialog->additions().contains("as measured: M")) << dialog->complaint().toStdString();
+  ASSERT_TRUE(dialog->takeButton().isEnabled());
+  dialog->takeButton().click();
+  for (const Point& point : example.points) {
+    const Point* taken = findPoint(window.desk().study(), point.name);
+    ASSERT_NE(taken, nullptr);
+    EXPECT_EQ(taken->stress, point.stress);
+    EXPECT_EQ(taken->fibre, point.fibre);
+  }
 }
 
 TEST_F(TablesOfWindow, aFileThatIsNotThereIsToldInTheWindow) {
