@@ -23,6 +23,26 @@ namespace {
 
 enum Field { sx, sy, txy, sz, axes, edge };
 
+/// The case to type in: the current one where it acts in the shown state and the point lists it, else the
+/// first that does; of cases that are not listed likewise.
+std::string caseToOpen(const Readout& readout, const std::string& current) {
+  for (const bool listed : {true, false}) {
+    const std::string* first = nullptr;
+    for (const ActingCase& acting : readout.state().acting) {
+      const CaseReading& one = readout.cases[acting.index];
+      if (one.isListed != listed)
+        continue;
+      if (one.id == current)
+        return current;
+      first = first ? first : &one.id;
+    }
+    if (first)
+      return *first;
+  }
+  const bool isThere = std::ranges::count(readout.cases, current, &CaseReading::id) > 0;
+  return isThere ? current : readout.cases.front().id;
+}
+
 } // namespace
 
 StressGroup::StressGroup(Desk& desk, QWidget* parent)
@@ -32,6 +52,9 @@ StressGroup::StressGroup(Desk& desk, QWidget* parent)
       m_addThird(new QuietButton(tr("Third direction"), Role::focus, this)),
       m_addAxes(new QuietButton(tr("Inclined axes"), Role::focus, this)),
       m_addEdge(new QuietButton(tr("Free edge"), Role::focus, this)) {
+  // Before the fields, so that they ask for the case that is to be seen.
+  connect(&m_desk, &Desk::changed, this, &StressGroup::followShown);
+  followShown();
   body().addWidget(m_strip);
   addComponent(Spot::sx, tr("normal stress on the x face"));
   addComponent(Spot::sy, tr("normal stress on the y face"));
@@ -165,6 +188,15 @@ QList<QWidget*> StressGroup::buttons() const {
 
 std::string StressGroup::caseId(const Study& study) const {
   return findCase(study, m_case) ? m_case : study.cases.front().id;
+}
+
+void StressGroup::followShown() {
+  const Readout& readout = m_desk.readout();
+  const Shown now{readout.point, readout.state().combination};
+  if (now == m_chosenAt && findCase(m_desk.study(), m_case))
+    return;
+  m_chosenAt = now;
+  m_case = caseToOpen(readout, m_case);
 }
 
 void StressGroup::chooseCase(const std::string& id) {

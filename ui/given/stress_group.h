@@ -22,7 +22,8 @@ public:
 
   /// In the order of Tab: sx, sy, txy; the sources; then sz, the axes and the free edge.
   QList<EntryField*> fields() const;
-  /// The case whose stresses are typed here.
+  /// The case whose stresses are typed here: one that acts in the shown state at the shown point, until
+  /// another is chosen.
   std::string caseId(const Study& study) const;
   /// Whether a field holds a stress of the case, and not the axes.
   bool isOfCase(const EntryField& field) const;
@@ -36,6 +37,7 @@ private:
   void addSources();
   void addAxes();
   void buildMore();
+  void followShown();
   void chooseCase(const std::string& id);
   void refresh();
   QString caseLine() const;
@@ -46,7 +48,8 @@ private:
   QString componentsOf(const StateReading& state) const;
 
   Desk& m_desk;
-  std::string m_case; ///< as chosen in the strip; the first where the study has it no more
+  Shown m_chosenAt;   ///< the point and combination for which the case was chosen
+  std::string m_case; ///< as chosen in the strip, else one that acts there
   bool m_thirdWanted = false;
   bool m_axesWanted = false;
   bool m_edgeWanted = false;

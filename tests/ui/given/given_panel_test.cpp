@@ -222,6 +222,32 @@ TEST_F(GivenTest, severalCasesAreChosenInAStrip) {
   EXPECT_EQ(field("σx").edit().text(), "2 MPa");
 }
 
+TEST_F(GivenTest, theStripOpensOnACaseThatActsWhereItIsShown) {
+  const Study study =
+      *edited(twoCases(), Edits{Insert{{Spot::combination, "1 S", {}}, {}},
+                                Insert{{Spot::factor, "1 S", "S"}, {}}, Insert{{Spot::point, "P2", {}}, {}},
+                                Insert{{Spot::caseStress, "P2", "S"}, {}}, Type{{Spot::sx, "P2", "S"}, "7"}});
+  desk.replace(study);
+  EXPECT_EQ(field("σx").edit().text(), "2 MPa") << "G, which P1 lists";
+  desk.show("P2", "1.35 G + 1.5 S");
+  EXPECT_EQ(field("σx").edit().text(), "7 MPa") << "S, which P2 lists";
+  desk.show("P1", "1 S");
+  EXPECT_EQ(field("σx").edit().text(), "") << "S, which alone acts";
+  desk.show("P1", "1.35 G + 1.5 S");
+  EXPECT_EQ(field("σx").edit().text(), "2 MPa");
+
+  button("case S").click();
+  EXPECT_EQ(field("σx").edit().text(), "") << "a choice stays";
+  type("σy", "1");
+  EXPECT_EQ(kept(Spot::sy, "P1", "S"), "1 MPa");
+  desk.undoStack()->undo();
+  EXPECT_TRUE(button("case S").isChecked());
+  desk.show("P2", "1.35 G + 1.5 S");
+  button("case G").click();
+  desk.show("P2", "1 S");
+  EXPECT_TRUE(button("case S").isChecked());
+}
+
 TEST_F(GivenTest, aCaseThatThePointLacksIsSaidToCountAsZero) {
   const QString caution = QStringLiteral("No stresses are given for case S: it counts as 0.");
   EXPECT_FALSE(says(caution));
