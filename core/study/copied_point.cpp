@@ -1,11 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/copied_point.h"
 
+#include "core/study/fresh_name.h"
 #include "core/study/place_list.h"
 
-#include <array>
 #include <cassert>
-#include <charconv>
 
 namespace planewright {
 
@@ -51,18 +50,7 @@ Edits editsThatCopyPoint(const Study& study, const std::string& from, const std:
 }
 
 std::string freshPointName(const Study& study, const std::string& like) {
-  const std::size_t stem = like.find_last_not_of("0123456789") + 1;
-  int number = 1;
-  std::from_chars(like.data() + stem, like.data() + like.size(), number);
-  // A number too long to count with stays part of the name.
-  const std::string base = stem == like.size() || like.size() - stem > 8 ? like + " " : like.substr(0, stem);
-  for (++number;; ++number) {
-    std::array<char, 16> digits{};
-    const auto end = std::to_chars(digits.data(), digits.data() + digits.size(), number).ptr;
-    std::string name = base + std::string(digits.data(), end);
-    if (!findPoint(study, name))
-      return name;
-  }
+  return freshNameLike(like, [&](const std::string& name) { return findPoint(study, name); });
 }
 
 } // namespace planewright

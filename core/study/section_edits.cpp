@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/study/case_sources.h"
+#include "core/study/fresh_name.h"
 
 #include <algorithm>
 #include <cassert>
@@ -207,11 +208,9 @@ Edits editsThatGiveFibre(const Study& study, const std::string& point, const std
 }
 
 std::string freshSectionName(const Study& study) {
-  for (int number = 1;; ++number) {
-    std::string name = "section " + exactNumber(number);
-    if (!findSection(study, name))
-      return name;
-  }
+  return freshName(
+      1, [](const std::string& number) { return "section " + number; },
+      [&](const std::string& name) { return findSection(study, name); });
 }
 
 } // namespace planewright

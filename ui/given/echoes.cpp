@@ -10,6 +10,7 @@
 #include <QCoreApplication>
 
 #include <algorithm>
+#include <cmath>
 
 namespace planewright {
 
@@ -54,6 +55,17 @@ QString echoOfTolerance(const Study& study, const Readout& readout, std::size_t 
   if (index >= lines.size() || lines[index].tolerance.empty())
     return {};
   return echoOfDirection(lines[index].tolerance, readout.lines[index].tolerance);
+}
+
+QString echoOfValue(const EntryKind& kind, const std::string& typed) {
+  const Result<Entry> entry = readEntry(typed, kind);
+  if (!entry || kind.dimension == dimension::angle)
+    return {};
+  const double value = kind.unit.fromBase(entry->value);
+  const std::string unit = kind.unit.name.empty() ? "" : " " + kind.unit.name;
+  if (typed == exactNumber(value) + unit)
+    return {};
+  return fromUtf8(shownNumber(value, decimalsFor(std::abs(value))) + unit);
 }
 
 QString echoOfDirection(const std::string& typed, Angle angle) {

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/quantity/expression.h"
 #include "core/study/readout.h"
 
 #include <QString>
@@ -20,6 +21,8 @@ QString echoOfThird(const Study& study, const Readout& readout, const std::strin
 QString echoOfLine(const Readout& readout, std::size_t index);
 /// "4.76°" of a tolerance that is not typed in plain degrees.
 QString echoOfTolerance(const Study& study, const Readout& readout, std::size_t index);
+/// "12.50 mm" of an expression of any other dimension; nothing where the text says it already.
+QString echoOfValue(const EntryKind& kind, const std::string& typed);
 /// "22.50°" of a direction that is not typed in plain, folded degrees.
 QString echoOfDirection(const std::string& typed, Angle angle);
 

@@ -2,6 +2,7 @@
 #include "ui/given/line_group.h"
 
 #include "core/quantity/format.h"
+#include "core/study/fresh_name.h"
 #include "core/table/table.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/given/echoes.h"
@@ -20,10 +21,9 @@ namespace {
 /// A name for a line of this kind that no other line of the point has.
 std::string freeName(const Point& point, LineKind kind) {
   const std::string word = plain(labelOf(kind), translation());
-  std::string name = word;
-  for (int number = 2; findLine(point, name); ++number)
-    name = word + " " + std::to_string(number);
-  return name;
+  return freshName(
+      1, [&](const std::string& number) { return number == "1" ? word : word + " " + number; },
+      [&](const std::string& name) { return findLine(point, name); });
 }
 
 } // namespace

@@ -1,11 +1,11 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/given/section_group.h"
 
-#include "core/quantity/format.h"
 #include "core/study/case_sources.h"
 #include "core/study/fibre_of_state.h"
 #include "core/study/section_edits.h"
 #include "ui/entry/draft_edit.h"
+#include "ui/given/echoes.h"
 #include "ui/given/section_view.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
@@ -38,14 +38,6 @@ Text captionOf(SectionShape shape, const std::string& key) {
   if (shape != SectionShape::built)
     return kind->symbol;
   return symbol("%1_{%2}").with(kind->symbol).with(key.substr(0, key.find('.')));
-}
-
-QString echoOfLength(const Study& study, double length, const std::string& typed) {
-  const Unit unit = entryKindOf(study, Spot::fibreY).unit;
-  const std::string words = exactNumber(unit.fromBase(length)) + " " + unit.name;
-  if (words == typed)
-    return {};
-  return fromUtf8(shownNumber(unit.fromBase(length), 2) + " " + unit.name);
 }
 
 } // namespace
@@ -114,8 +106,7 @@ void SectionGroup::buildPlaces() {
       return Place{spot, shownPoint(study).name, {}};
     });
     binding.echo = [spot](const Study& study, const Readout&, const std::string& typed) {
-      const Result<Entry> entry = readEntry(typed, entryKindOf(study, spot));
-      return entry ? echoOfLength(study, entry->value, typed) : QString();
+      return echoOfValue(entryKindOf(study, spot), typed);
     };
     auto* field =
         new EntryField(m_desk, std::move(binding), {planewright::rowOf(spot).label, meaning}, m_rest);
@@ -194,8 +185,11 @@ void SectionGroup::listWorst() {
     menu->addAction(loaded ? shown(worst.error().what) : tr("The point has no section."))->setEnabled(false);
     return;
   }
+  const auto length = [units = writtenUnitsOf(study)](double value) {
+    return fromUtf8(units.shown(value, dimension::length));
+  };
   const auto add = [&](const QString& words, const WorstFibre& one) {
-    menu->addAction(words.arg(echoOfLength(study, one.fibre.y, {}), echoOfLength(study, one.fibre.z, {}),
+    menu->addAction(words.arg(length(one.fibre.y), length(one.fibre.z),
                               fromUtf8(stressFormOf(study, state).withUnit(one.measure))) +
                         (one.isPartial ? tr(" (where theory gives the shear)") : QString()),
                     this, [this, fibre = one.fibre] {
@@ -220,10 +214,7 @@ void SectionGroup::addSize(const std::string& key) {
     return editsThatResize(study, {Spot::size, name, key}, typed);
   };
   binding.echo = [name, key](const Study& study, const Readout&, const std::string& typed) {
-    const EntryKind kind = entryKindOf(study, Place{Spot::size, name, key});
-    const Result<Entry> entry = readEntry(typed, kind);
-    const bool isLength = kind.dimension == dimension::length;
-    return entry && isLength ? echoOfLength(study, entry->value, typed) : QString();
+    return echoOfValue(entryKindOf(study, Place{Spot::size, name, key}), typed);
   };
   const SizeKind* kind = sizeOfKey(shape, key);
   auto* field =

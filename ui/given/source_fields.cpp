@@ -1,9 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/given/source_fields.h"
 
-#include "core/quantity/format.h"
 #include "core/study/section_edits.h"
 #include "ui/entry/draft_edit.h"
+#include "ui/given/echoes.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 
@@ -15,19 +15,6 @@
 namespace planewright {
 
 namespace {
-
-/// The value of an expression in its field's own unit; nothing where the text says it already.
-QString echoOfValue(const Study& study, const Place& place, const std::string& typed) {
-  const EntryKind kind = entryKindOf(study, place);
-  const Result<Entry> entry = readEntry(typed, kind);
-  if (!entry || kind.dimension == dimension::angle)
-    return {};
-  const double value = kind.unit.fromBase(entry->value);
-  const std::string unit = kind.unit.name.empty() ? "" : " " + kind.unit.name;
-  if (typed == exactNumber(value) + unit)
-    return {};
-  return fromUtf8(shownNumber(value, decimalsFor(std::abs(value))) + unit);
-}
 
 bool isOfOrthotropic(Spot spot) {
   return spot == Spot::rosetteAlong || spot == Spot::rosetteAcross || spot == Spot::rosetteNu12 ||
@@ -72,7 +59,7 @@ Place SourceFields::place(const Study& study, Spot spot) const {
 void SourceFields::addField(Spot spot, const QString& meaning) {
   EntryBinding binding = boundTo([this, spot](const Study& study) { return place(study, spot); });
   binding.echo = [this, spot](const Study& study, const Readout&, const std::string& typed) {
-    return echoOfValue(study, place(study, spot), typed);
+    return echoOfValue(entryKindOf(study, place(study, spot)), typed);
   };
   auto* field = new EntryField(m_desk, std::move(binding), {rowOf(spot).label, meaning}, this);
   field->caption().setFixedWidth(fontMetrics().horizontalAdvance(QStringLiteral("Eφ+90°")));

@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/study/cut_text.h"
+#include "core/study/fresh_name.h"
 #include "core/table/reading_by_value.h"
 #include "ui/look/look.h"
 
@@ -246,9 +247,9 @@ std::string PlanesModel::owner() const {
 
 std::string PlanesModel::freshName() const {
   const Point& point = shownPoint(m_desk.study());
-  for (int number = 1;; ++number)
-    if (const std::string name = tr("plane %1").arg(number).toStdString(); !findPlane(point, name))
-      return name;
+  return planewright::freshName(
+      1, [](const std::string& number) { return tr("plane %1").arg(fromUtf8(number)).toStdString(); },
+      [&](const std::string& name) { return findPlane(point, name); });
 }
 
 } // namespace planewright

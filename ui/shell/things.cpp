@@ -3,6 +3,7 @@
 
 #include "core/study/combination_text.h"
 #include "core/study/copied_point.h"
+#include "core/study/fresh_name.h"
 #include "ui/look/look.h"
 
 #include <QCoreApplication>
@@ -65,9 +66,9 @@ std::string freshCaseId(const Study& study) {
   for (const char* id : {"G", "Q", "S", "W"})
     if (!findCase(study, id))
       return id;
-  for (int number = 2;; ++number)
-    if (std::string id = QStringLiteral("Q%1").arg(number).toStdString(); !findCase(study, id))
-      return id;
+  return freshName(
+      2, [](const std::string& number) { return "Q" + number; },
+      [&](const std::string& id) { return findCase(study, id); });
 }
 
 Edits newCase(const Study& study) {

@@ -3,30 +3,16 @@
 // line for each expected Problem, "LINE:COLUMN PLACE QUOTED", or no line for a file that must be read.
 #include "core/record/study_file.h"
 
-#include "tests/support/approved.h"
+#include "tests/support/corpus.h"
 
 #include <gtest/gtest.h>
-
-#include <set>
 
 namespace planewright {
 namespace {
 
-std::filesystem::path corpus() {
-  return std::filesystem::path(PLANEWRIGHT_TESTS_DIR) / "corpus/study";
-}
-
-std::set<std::string> names() {
-  std::set<std::string> names;
-  for (const auto& entry : std::filesystem::directory_iterator(corpus()))
-    if (entry.path().extension() == ".planewright")
-      names.insert(entry.path().stem().string());
-  return names;
-}
-
-std::string bytesOf(const std::string& file) {
-  std::ifstream stream(corpus() / file, std::ios::binary);
-  return {std::istreambuf_iterator<char>(stream), {}};
+const Corpus& corpus() {
+  static const Corpus studies("study", ".planewright");
+  return studies;
 }
 
 std::string listed(const Problems& problems) {
@@ -40,9 +26,8 @@ std::string listed(const Problems& problems) {
 class StudyCorpus : public testing::TestWithParam<std::string> {};
 
 TEST_P(StudyCorpus, hasTheExpectedProblems) {
-  const Results<Study> study = readStudy(bytesOf(GetParam() + ".planewright"));
-  EXPECT_TRUE(matchesApproved("../corpus/study/" + GetParam() + ".problems",
-                              study ? std::string() : listed(study.error())));
+  const Results<Study> study = readStudy(corpus().bytesOf(GetParam()));
+  EXPECT_TRUE(corpus().matches(GetParam(), study ? std::string() : listed(study.error())));
   if (study) {
     EXPECT_EQ(readStudy(writeStudy(*study)), study);
     return;
@@ -51,17 +36,12 @@ TEST_P(StudyCorpus, hasTheExpectedProblems) {
     EXPECT_FALSE(problem.what.empty());
 }
 
-INSTANTIATE_TEST_SUITE_P(Files, StudyCorpus, testing::ValuesIn(names()), [](const auto& file) {
-  std::string name = file.param;
-  std::erase(name, '-');
-  return name;
-});
+INSTANTIATE_TEST_SUITE_P(Files, StudyCorpus, testing::ValuesIn(corpus().names()),
+                         [](const auto& file) { return testName(file.param); });
 
 TEST(StudyCorpusFolder, hasAFileForEachListOfProblems) {
-  const std::set<std::string> files = names();
-  EXPECT_GE(files.size(), 70u);
-  for (const auto& entry : std::filesystem::directory_iterator(corpus()))
-    EXPECT_TRUE(files.contains(entry.path().stem().string())) << entry.path();
+  EXPECT_GE(corpus().names().size(), 70u);
+  EXPECT_EQ(corpus().strays(), std::set<std::string>());
 }
 
 } // namespace

@@ -71,6 +71,17 @@ TEST_F(SourcesTest, aShapeBringsItsOwnSizes) {
   EXPECT_EQ(desk.study().sections.front().sizes.size(), 5U);
 }
 
+TEST_F(SourcesTest, sizesAndPlacesSayWhatTheyComeTo) {
+  choose("Add a source", "section forces");
+  type("h", "2*120 mm");
+  EXPECT_EQ(field("h").echoText(), "= 240.0 mm");
+  type("h", "240");
+  EXPECT_EQ(field("h").echoText(), "");
+  choose("shape of the section", "tabled values");
+  type("A", "2*1e4 mm^2");
+  EXPECT_EQ(field("A").echoText(), "= 20000 mm^2");
+}
+
 TEST_F(SourcesTest, theMarkIsPulledThroughTheSectionAsOneStep) {
   choose("Add a source", "section forces");
   QCoreApplication::processEvents(); // the drawing gets its room
