@@ -207,6 +207,33 @@ Edits editsThatGiveFibre(const Study& study, const std::string& point, const std
   return edits;
 }
 
+Edits editsThatCopySection(const Study& study, const std::string& from, const std::string& to) {
+  const TypedSection* section = findSection(study, from);
+  assert(section);
+  const auto index = static_cast<std::size_t>(section - study.sections.data()) + 1;
+  Edits edits = {Insert{{Spot::section, to, {}}, index}};
+  for (const TypedSize& size : TypedSection().sizes)
+    edits.push_back(Remove{placeOf(to, size.key)});
+  edits.push_back(Type{{Spot::sectionShape, to, {}}, std::string(wordOf(section->shape))});
+  for (const TypedSize& size : section->sizes) {
+    edits.push_back(Insert{placeOf(to, size.key), std::nullopt});
+    edits.push_back(Type{placeOf(to, size.key), size.text});
+  }
+  return edits;
+}
+
+std::string freshSectionName(const Study& study, const std::string& like) {
+  return freshNameLike(like, [&](const std::string& name) { return findSection(study, name); });
+}
+
+std::vector<std::string> pointsIn(const Study& study, const std::string& section) {
+  std::vector<std::string> names;
+  for (const Point& point : study.points)
+    if (point.fibre && point.fibre->section == section)
+      names.push_back(point.name);
+  return names;
+}
+
 std::string freshSectionName(const Study& study) {
   return freshName(
       1, [](const std::string& number) { return "section " + number; },

@@ -27,7 +27,14 @@ Edits editsThatPlaceFibre(const Study& study, const std::string& point, const Fi
 /// Gives a point a fibre in a section, a new rectangle where the name is new.
 Edits editsThatGiveFibre(const Study& study, const std::string& point, const std::string& section);
 
-/// A name for a section that the study does not have: "section 2".
+/// What makes a section `to` right behind `from` with its shape and sizes.
+Edits editsThatCopySection(const Study& study, const std::string& from, const std::string& to);
+
+/// A name for a section that the study does not have: "section 2"; like another one "beam 2".
 std::string freshSectionName(const Study& study);
+std::string freshSectionName(const Study& study, const std::string& like);
+
+/// The names of the points that lie in a section.
+std::vector<std::string> pointsIn(const Study& study, const std::string& section);
 
 } // namespace planewright

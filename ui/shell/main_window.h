@@ -121,6 +121,7 @@ private:
   QPointer<ThingsDialog> m_cases;
   QPointer<ThingsDialog> m_combinations;
   QPointer<ThingsDialog> m_points;
+  QPointer<ThingsDialog> m_sections;
 };
 
 } // namespace planewright

@@ -160,6 +160,7 @@ void MainWindow::addListsOfStudy(QMenu& menu) {
     dialog->activateWindow();
   };
   add(menu, tr("P&oints…"), {}, [this, open] { open(m_points, points); });
+  add(menu, tr("S&ections…"), {}, [this, open] { open(m_sections, sections); });
   add(menu, tr("&Load cases…"), {}, [this, open] { open(m_cases, loadCases); });
   add(menu, tr("&Combinations…"), {}, [this, open] { open(m_combinations, combinations); });
   add(menu, tr("&Build combinations…"), {}, [this] {

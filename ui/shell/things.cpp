@@ -4,6 +4,7 @@
 #include "core/study/combination_text.h"
 #include "core/study/copied_point.h"
 #include "core/study/fresh_name.h"
+#include "core/study/section_edits.h"
 #include "ui/look/look.h"
 
 #include <QCoreApplication>
@@ -92,6 +93,21 @@ Edits newCombination(const Study& study) {
   }
 }
 
+/// "b = 140 mm, h = 600 mm"
+QString sizesOf(const TypedSection& section) {
+  QStringList sizes;
+  for (const TypedSize& size : section.sizes)
+    sizes << fromUtf8(size.key + " = " + size.text);
+  return sizes.join(QStringLiteral(", "));
+}
+
+QString joined(const std::vector<std::string>& names) {
+  QStringList words;
+  for (const std::string& name : names)
+    words << fromUtf8(name);
+  return words.join(QStringLiteral(", "));
+}
+
 } // namespace
 
 Things loadCases() {
@@ -146,6 +162,38 @@ Things points() {
           [](const Study& study, std::size_t row) {
             const std::string& name = study.points[row].name;
             return editsThatCopyPoint(study, name, freshPointName(study, name));
+          }};
+}
+
+Things sections() {
+  const auto place = [](const Study& study, std::size_t row) {
+    return Place{Spot::section, study.sections[row].name, {}};
+  };
+  ThingColumn shape = wordColumn<SectionShape>(words("Shape"), Spot::sectionShape, place);
+  shape.edits = [](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
+    const std::string& name = study.sections[row].name;
+    for (const Named<SectionShape>& one : namesOf<SectionShape>())
+      if (shown(one.label).toStdString() == typed)
+        return editsThatReshape(study, name, one.value);
+    return Edits{Type{{Spot::sectionShape, name, {}}, typed}};
+  };
+  return {words("Sections"),
+          words("section"),
+          [](const Study& study) { return study.sections.size(); },
+          {keyColumn(words("Section"), place),
+           shape,
+           {words("Sizes"), [](const Study& study, std::size_t row) { return sizesOf(study.sections[row]); }},
+           {words("Points in it"),
+            [](const Study& study, std::size_t row) {
+              return joined(pointsIn(study, study.sections[row].name));
+            }}},
+          [](const Study& study) {
+            return Edits{Insert{{Spot::section, freshSectionName(study), {}}, std::nullopt}};
+          },
+          place,
+          [](const Study& study, std::size_t row) {
+            const std::string& name = study.sections[row].name;
+            return editsThatCopySection(study, name, freshSectionName(study, name));
           }};
 }
 

@@ -14,11 +14,12 @@ namespace planewright {
 struct ThingColumn {
   QString heading;
   std::function<QString(const Study&, std::size_t row)> text;
-  std::function<Result<Edits>(const Study&, std::size_t row, const std::string& typed)> edits;
+  /// None of a column that is only read.
+  std::function<Result<Edits>(const Study&, std::size_t row, const std::string& typed)> edits = {};
   QStringList choices = {}; ///< the texts to choose from; empty where anything is typed
 };
 
-/// A list of a study as a table to edit: cases, combinations, points.
+/// A list of a study as a table to edit: cases, combinations, points, sections.
 struct Things {
   QString title;
   QString one; ///< "load case", for the words of undo
@@ -33,5 +34,6 @@ struct Things {
 Things loadCases();
 Things combinations();
 Things points();
+Things sections();
 
 } // namespace planewright

@@ -117,6 +117,10 @@ int ThingsDialog::row() const {
   return m_table->currentIndex().row();
 }
 
+bool ThingsDialog::hasRow() const {
+  return row() >= 0 && row() < m_model->rowCount();
+}
+
 void ThingsDialog::select(int row) {
   if (row >= 0 && row < m_model->rowCount())
     m_table->setCurrentIndex(m_model->index(row, 0));
@@ -128,13 +132,12 @@ void ThingsDialog::complain(const Problem& problem) {
 }
 
 void ThingsDialog::offer() {
-  const int count = m_model->rowCount();
-  const bool some = row() >= 0 && row() < count;
+  const bool some = hasRow();
   if (m_copy)
     m_copy->setEnabled(some);
   m_remove->setEnabled(some);
   m_up->setEnabled(some && row() > 0);
-  m_down->setEnabled(some && row() + 1 < count);
+  m_down->setEnabled(some && row() + 1 < m_model->rowCount());
 }
 
 void ThingsDialog::add() {
@@ -143,6 +146,8 @@ void ThingsDialog::add() {
 }
 
 void ThingsDialog::copy() {
+  if (!hasRow())
+    return;
   const int from = row();
   const Edits edits = m_model->things().copy(m_desk.study(), static_cast<std::size_t>(from));
   if (m_model->ask(edits, tr("copy of a %1").arg(m_model->things().one)))
@@ -150,6 +155,8 @@ void ThingsDialog::copy() {
 }
 
 void ThingsDialog::remove() {
+  if (!hasRow())
+    return;
   const int from = row();
   const Place place = m_model->things().place(m_desk.study(), static_cast<std::size_t>(from));
   if (m_model->ask({Remove{place}}, tr("removal of a %1").arg(m_model->things().one)))
@@ -157,6 +164,8 @@ void ThingsDialog::remove() {
 }
 
 void ThingsDialog::move(int by) {
+  if (!hasRow())
+    return;
   const int from = row();
   const Place place = m_model->things().place(m_desk.study(), static_cast<std::size_t>(from));
   if (m_model->ask({Move{place, static_cast<std::size_t>(from + by)}},

@@ -39,6 +39,7 @@ private:
   void build();
   void move(int by);
   int row() const;
+  bool hasRow() const;
   void select(int row);
   void complain(const Problem& problem);
   void offer();

@@ -31,11 +31,13 @@ QVariant ThingsModel::headerData(int section, Qt::Orientation orientation, int r
 }
 
 Qt::ItemFlags ThingsModel::flags(const QModelIndex& index) const {
-  return QAbstractTableModel::flags(index) | Qt::ItemIsEditable;
+  const bool isTyped = index.isValid() && m_things.columns[static_cast<std::size_t>(index.column())].edits;
+  return QAbstractTableModel::flags(index).setFlag(Qt::ItemIsEditable, isTyped);
 }
 
 bool ThingsModel::setData(const QModelIndex& index, const QVariant& value, int role) {
-  if (role != Qt::EditRole || value == data(index, Qt::EditRole))
+  if (role != Qt::EditRole || !flags(index).testFlag(Qt::ItemIsEditable) ||
+      value == data(index, Qt::EditRole))
     return false;
   const ThingColumn& column = m_things.columns[static_cast<std::size_t>(index.column())];
   const Result<Edits> edits =

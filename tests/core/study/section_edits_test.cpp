@@ -40,6 +40,19 @@ TEST(SectionEdits, everyShapeBecomesEveryOther) {
     }
 }
 
+TEST(SectionEdits, aCopyHasShapeAndSizesAndNoPoints) {
+  for (const Named<SectionShape>& shape : namesOf<SectionShape>()) {
+    const Study study = with(beam(), editsThatReshape(beam(), "beam", shape.value));
+    const Study copied = with(study, editsThatCopySection(study, "beam", freshSectionName(study, "beam")));
+    ASSERT_EQ(copied.sections.size(), 2U);
+    EXPECT_EQ(copied.sections[1].name, "beam 2");
+    EXPECT_EQ(copied.sections[1].shape, shape.value);
+    EXPECT_EQ(copied.sections[1].sizes, study.sections[0].sizes);
+    EXPECT_EQ(pointsIn(copied, "beam"), std::vector<std::string>{"P1"});
+    EXPECT_TRUE(pointsIn(copied, "beam 2").empty());
+  }
+}
+
 TEST(SectionEdits, sizesThatBothShapesHaveStay) {
   const Study wide = with(beam(), {Type{{Spot::size, "beam", "b"}, "140"}});
   const Study box = with(wide, editsThatReshape(wide, "beam", SectionShape::box));

@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/section_edits.h"
 #include "shell_test.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/shell/build_dialog.h"
@@ -90,6 +91,49 @@ TEST_F(ThingsTest, pointsAreDuplicatedAndMoved) {
   EXPECT_EQ(m_desk.study().points.size(), 1u);
   m_desk.undoStack()->undo();
   EXPECT_EQ(cell(dialog, 0, 0), "heel");
+}
+
+TEST_F(ThingsTest, sectionsAreNamedShapedCopiedAndKeptWhileAPointLiesInThem) {
+  ThingsDialog dialog(m_desk, sections(), nullptr);
+  dialog.show();
+  dialog.add();
+  ASSERT_EQ(m_desk.study().sections.size(), 1u);
+  ASSERT_FALSE(
+      m_desk.request(editsThatGiveFibre(m_desk.study(), "P1", "section 1"), m_desk.newGesture(), "fibre"));
+  EXPECT_TRUE(put(dialog, 0, 0, "beam"));
+  EXPECT_EQ(m_desk.study().points[0].fibre->section, "beam") << "its points follow";
+  EXPECT_TRUE(put(dialog, 0, 1, "round tube"));
+  EXPECT_EQ(m_desk.study().sections[0].shape, SectionShape::tube);
+  EXPECT_EQ(cell(dialog, 0, 2), "d = 200 mm, t = 10 mm");
+  EXPECT_EQ(cell(dialog, 0, 3), "P1");
+  EXPECT_FALSE(put(dialog, 0, 3, "P2"));
+  EXPECT_FALSE(
+      dialog.table().model()->flags(dialog.table().model()->index(0, 2)).testFlag(Qt::ItemIsEditable));
+
+  dialog.copy();
+  ASSERT_EQ(m_desk.study().sections.size(), 2u);
+  EXPECT_EQ(m_desk.study().sections[1].name, "beam 2");
+  EXPECT_EQ(m_desk.study().sections[1].sizes, m_desk.study().sections[0].sizes);
+  EXPECT_FALSE(put(dialog, 1, 0, "beam"));
+  EXPECT_TRUE(dialog.complaint().contains("taken")) << dialog.complaint().toStdString();
+
+  dialog.moveUp();
+  EXPECT_EQ(m_desk.study().sections[1].name, "beam");
+  dialog.moveDown();
+  dialog.remove();
+  EXPECT_EQ(m_desk.study().sections.size(), 1u) << "the copy holds no point";
+  dialog.remove();
+  EXPECT_EQ(m_desk.study().sections.size(), 1u);
+  EXPECT_TRUE(dialog.complaint().contains("Point P1 lies in section")) << dialog.complaint().toStdString();
+}
+
+TEST_F(ThingsTest, anEmptyListOfSectionsOffersOnlyANewOne) {
+  ThingsDialog dialog(m_desk, sections(), nullptr);
+  dialog.show();
+  dialog.remove();
+  dialog.copy();
+  dialog.moveUp();
+  EXPECT_EQ(m_desk.study(), newStudy());
 }
 
 TEST_F(ThingsTest, choicesAreMadeWithTheKeyboard) {
