@@ -71,10 +71,6 @@ std::vector<const LoadCase*> casesOf(const Study& study, Nature nature) {
   return cases;
 }
 
-bool exclude(const LoadCase& a, const LoadCase& b) {
-  return std::ranges::count(a.excludes, b.id) > 0 || std::ranges::count(b.excludes, a.id) > 0;
-}
-
 using Cases = std::vector<const LoadCase*>;
 
 /// All subsets in which no two exclude each other, small ones first; none when there are more than `most`.
@@ -83,7 +79,7 @@ std::vector<Cases> subsetsOf(const Cases& cases, std::size_t most) {
   for (const LoadCase* one : cases) {
     const std::size_t before = subsets.size();
     for (std::size_t i = 0; i < before; ++i) {
-      if (std::ranges::any_of(subsets[i], [&](const LoadCase* other) { return exclude(*one, *other); }))
+      if (std::ranges::any_of(subsets[i], [&](const LoadCase* other) { return areExclusive(*one, *other); }))
         continue;
       subsets.push_back(subsets[i]);
       subsets.back().push_back(one);
@@ -222,6 +218,10 @@ std::string recommendedAccompanying(const std::string& id) {
 }
 
 } // namespace
+
+bool areExclusive(const LoadCase& one, const LoadCase& other) {
+  return std::ranges::count(one.excludes, other.id) > 0 || std::ranges::count(other.excludes, one.id) > 0;
+}
 
 CombinationFactors recommendedFactors(const Study& study) {
   CombinationFactors factors{CombinationRule::one, "1.35", "1.00", "1.5", "0.85", {}};

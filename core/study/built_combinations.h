@@ -51,6 +51,9 @@ inline constexpr std::size_t mostBuilt = 5000;
 /// Problems: a factor that does not read, is negative, or makes more than mostBuilt combinations.
 Results<BuiltCombinations> builtCombinations(const Study& study, const CombinationFactors& factors);
 
+/// Whether two cases never act together, whichever of them says so.
+bool areExclusive(const LoadCase& one, const LoadCase& other);
+
 /// What takes combinations into a study that has none of these names yet; those that it has are left as they
 /// are.
 Edits editsThatAdd(const Study& study, const std::vector<Combination>& combinations);

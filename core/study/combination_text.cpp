@@ -2,6 +2,8 @@
 #include "core/study/combination_text.h"
 
 #include "core/quantity/lexer.h"
+#include "core/study/built_combinations.h"
+#include "core/study/fresh_name.h"
 #include "core/words/utf8.h"
 
 #include <algorithm>
@@ -158,6 +160,35 @@ Result<Edits> editsThatAdd(const Study& study, std::string_view text) {
   if (!terms)
     return tl::unexpected(terms.error());
   edits.insert(edits.end(), terms->begin(), terms->end());
+  return edits;
+}
+
+Edits editsThatAddNext(const Study& study) {
+  std::vector<const LoadCase*> together;
+  for (const LoadCase& one : study.cases)
+    if (one.nature != Nature::measured &&
+        std::ranges::none_of(together, [&](const LoadCase* other) { return areExclusive(one, *other); }))
+      together.push_back(&one);
+  const bool isMeasured = together.empty();
+  if (isMeasured)
+    together.push_back(&study.cases.front());
+  std::string factor;
+  const auto nameOf = [&](const std::string& number) {
+    factor = isMeasured ? "1" : number;
+    std::string sum;
+    for (const LoadCase* one : together)
+      sum += (sum.empty() ? "" : " + ") + factor + " " + one->id;
+    return factor == number ? sum : sum + ", " + number;
+  };
+  const std::string name = freshName(1, nameOf, [&](const std::string& taken) {
+    return findCombination(study, taken) || findCase(study, taken);
+  });
+  Edits edits = {Insert{{Spot::combination, name, {}}, std::nullopt}};
+  for (const LoadCase* one : together) {
+    const Place place{Spot::factor, name, one->id};
+    edits.push_back(Insert{place, std::nullopt});
+    edits.push_back(Type{place, factor});
+  }
   return edits;
 }
 

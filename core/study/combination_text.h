@@ -19,5 +19,8 @@ std::string textOf(const Combination& combination);
 Result<Edits> editsThatSet(const Study& study, const std::string& combination, std::string_view text);
 /// What adds a combination that goes by its expression.
 Result<Edits> editsThatAdd(const Study& study, std::string_view text);
+/// What adds a combination to begin with: all cases that may act together once, or the first multiple of them
+/// that there is not yet. Measured cases, which take factor 1 only, stand in it where there are no others.
+Edits editsThatAddNext(const Study& study);
 
 } // namespace planewright

@@ -82,17 +82,6 @@ Edits newCase(const Study& study) {
   return edits;
 }
 
-/// All cases once, or the first free multiple of it.
-Edits newCombination(const Study& study) {
-  for (int factor = 1;; ++factor) {
-    std::string text;
-    for (const LoadCase& one : study.cases)
-      text += (text.empty() ? "" : " + ") + std::to_string(factor) + " " + one.id;
-    if (const Result<Edits> edits = editsThatAdd(study, text); edits && edited(study, *edits))
-      return *edits;
-  }
-}
-
 /// "b = 140 mm, h = 600 mm"
 QString sizesOf(const TypedSection& section) {
   QStringList sizes;
@@ -140,7 +129,7 @@ Things combinations() {
           [](const Study& study) { return study.combinations.size(); },
           {keyColumn(words("Name"), place), terms,
            wordColumn<Basis>(words("Basis"), Spot::combinationBasis, place)},
-          newCombination,
+          editsThatAddNext,
           place};
 }
 

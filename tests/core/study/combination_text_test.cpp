@@ -63,6 +63,27 @@ TEST(CombinationText, addedAndSetCombinationsGoByTheirExpression) {
   EXPECT_EQ(study.combinations[0].name, "uplift") << "a name of its own stays";
 }
 
+TEST(CombinationText, theNextOneHasOnlyCasesThatMeet) {
+  const auto next = [](const Study& study) {
+    const Study after = edited(study, editsThatAddNext(study)).value();
+    return after.combinations.back().name + ": " + textOf(after.combinations.back());
+  };
+  Study study = newStudy();
+  EXPECT_EQ(next(study), "1 G: 1 G");
+  study.combinations = {{"1 G", {{"G", "1"}}}};
+  EXPECT_EQ(next(study), "2 G: 2 G");
+  study.cases.push_back({"W", "", Nature::variable, Duration::medium, {}});
+  study.cases.push_back({"X", "", Nature::variable, Duration::medium, {"W"}});
+  study.cases.push_back({"M", "", Nature::measured, Duration::medium, {}});
+  EXPECT_EQ(next(study), "1 G + 1 W: 1 G + 1 W");
+  study.cases = {{"M", "", Nature::measured, Duration::medium, {}}};
+  study.points.front().stress.front().caseId = "M";
+  study.combinations.clear();
+  EXPECT_EQ(next(study), "1 M: 1 M");
+  study.combinations = {{"1 M", {{"M", "1"}}}};
+  EXPECT_EQ(next(study), "1 M, 2: 1 M");
+}
+
 TEST(CopiedPoint, hasEverythingThatWasSaidOfIt) {
   Study study = newStudy();
   Point& point = study.points.front();

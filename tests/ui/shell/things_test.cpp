@@ -76,6 +76,19 @@ TEST_F(ThingsTest, combinationsAreTypedAsPeopleWriteThem) {
   EXPECT_EQ(m_desk.study().combinations[0].factors, (std::vector<Factor>{{"G", "1.35"}, {"Q", "1.5*0.7"}}));
 }
 
+TEST_F(ThingsTest, aNewCombinationLeavesOutWhatCannotBeInIt) {
+  ThingsDialog cases(m_desk, loadCases(), nullptr);
+  cases.add();
+  cases.add();
+  EXPECT_TRUE(put(cases, 2, 2, "measured"));
+  EXPECT_TRUE(put(cases, 2, 4, "G, Q"));
+  ThingsDialog dialog(m_desk, combinations(), nullptr);
+  dialog.add();
+  EXPECT_EQ(cell(dialog, 0, 0), "1 G + 1 Q");
+  dialog.add();
+  EXPECT_EQ(cell(dialog, 1, 0), "2 G + 2 Q");
+}
+
 TEST_F(ThingsTest, pointsAreDuplicatedAndMoved) {
   type(m_desk, Spot::sx, "8 MPa");
   ThingsDialog dialog(m_desk, points(), nullptr);
