@@ -16,26 +16,48 @@
 
 namespace planewright {
 
+namespace {
+
+constexpr std::string_view ofCase = "of "; ///< begins the key of a psi_0
+
+} // namespace
+
 BuildDialog::BuildDialog(Desk& desk, QWidget* parent)
-    : QDialog(parent), m_desk(desk), m_rule(new QComboBox(this)), m_complaint(new Complaint(this)),
-      m_count(new QLabel(this)), m_list(new QPlainTextEdit(this)), m_notes(new QLabel(this)),
-      m_take(new QPushButton(this)) {
+    : QDialog(parent), m_desk(desk), m_rule(new QComboBox(this)), m_form(new QFormLayout),
+      m_complaint(new Complaint(this)), m_count(new QLabel(this)), m_list(new QPlainTextEdit(this)),
+      m_notes(new QLabel(this)), m_take(new QPushButton(this)) {
   build();
   connect(m_rule, &QComboBox::activated, this, &BuildDialog::preview);
   connect(m_take, &QPushButton::clicked, this, &BuildDialog::take);
-  connect(&m_desk, &Desk::changed, this, &BuildDialog::preview);
-  preview();
+  connect(&m_desk, &Desk::changed, this, &BuildDialog::followCases);
+  followCases();
 }
 
-DraftEdit* BuildDialog::addFactor(QFormLayout& form, const std::string& key, const QString& caption,
-                                  const std::string& text) {
+void BuildDialog::addFactor(const std::string& key, const QString& caption, const std::string& text) {
   auto* edit = new DraftEdit(this);
   edit->setText(fromUtf8(text));
   edit->setAccessibleName(caption);
   connect(edit, &QLineEdit::textEdited, this, &BuildDialog::preview);
-  form.addRow(caption, edit);
+  m_form->addRow(caption, edit);
   m_factors[key] = edit;
-  return edit;
+}
+
+// Cases come, go and change their nature while this window is open; what was typed for the others stays.
+void BuildDialog::followCases() {
+  const CombinationFactors recommended = recommendedFactors(m_desk.study());
+  for (auto field = m_factors.begin(); field != m_factors.end();) {
+    if (!field->first.starts_with(ofCase) ||
+        recommended.accompanying.contains(field->first.substr(ofCase.size()))) {
+      ++field;
+      continue;
+    }
+    m_form->removeRow(field->second);
+    field = m_factors.erase(field);
+  }
+  for (const auto& [id, text] : recommended.accompanying)
+    if (const std::string key = std::string(ofCase) + id; !m_factors.contains(key))
+      addFactor(key, tr("ψ₀ of %1").arg(fromUtf8(id)), text);
+  preview();
 }
 
 void BuildDialog::build() {
@@ -46,14 +68,11 @@ void BuildDialog::build() {
   for (const Named<CombinationRule>& row : namesOf<CombinationRule>())
     m_rule->addItem(shown(row.label));
   m_rule->setAccessibleName(tr("rule"));
-  auto* form = new QFormLayout;
-  form->addRow(tr("by"), m_rule);
-  addFactor(*form, "upper", tr("γ of permanent, unfavourable"), start.permanentUpper);
-  addFactor(*form, "lower", tr("γ of permanent, favourable"), start.permanentLower);
-  addFactor(*form, "variable", tr("γ of variable"), start.variable);
-  addFactor(*form, "reduction", tr("ξ, of (6.10b) only"), start.reduction);
-  for (const auto& [id, text] : start.accompanying)
-    addFactor(*form, "of " + id, tr("ψ₀ of %1").arg(fromUtf8(id)), text);
+  m_form->addRow(tr("by"), m_rule);
+  addFactor("upper", tr("γ of permanent, unfavourable"), start.permanentUpper);
+  addFactor("lower", tr("γ of permanent, favourable"), start.permanentLower);
+  addFactor("variable", tr("γ of variable"), start.variable);
+  addFactor("reduction", tr("ξ, of (6.10b) only"), start.reduction);
   m_complaint->hide();
   m_list->setReadOnly(true);
   m_list->setTabChangesFocus(true);
@@ -62,7 +81,7 @@ void BuildDialog::build() {
   right->addWidget(m_count);
   right->addWidget(m_list, 1);
   auto* columns = new QHBoxLayout;
-  columns->addLayout(form);
+  columns->addLayout(m_form);
   columns->addLayout(right, 1);
   m_notes->setWordWrap(true);
   m_notes->setForegroundRole(QPalette::PlaceholderText);
@@ -80,6 +99,10 @@ void BuildDialog::build() {
 
 QString BuildDialog::listed() const {
   return m_list->toPlainText();
+}
+
+QString BuildDialog::complaint() const {
+  return m_complaint->isHidden() ? QString() : m_complaint->words();
 }
 
 QString BuildDialog::count() const {
@@ -100,13 +123,22 @@ CombinationFactors BuildDialog::typed() const {
       text("reduction"),
       {}};
   for (const auto& [key, edit] : m_factors)
-    if (key.starts_with("of "))
-      factors.accompanying[key.substr(3)] = edit->text().toStdString();
+    if (key.starts_with(ofCase))
+      factors.accompanying[key.substr(ofCase.size())] = edit->text().toStdString();
   return factors;
 }
 
+/// What the field of a factor is called, by the place of a Problem with it.
+QString BuildDialog::captionOf(const std::string& place) const {
+  const std::string key = place == "permanent upper" ? "upper" : place == "permanent lower" ? "lower" : place;
+  for (const std::string& one : {key, std::string(ofCase) + place})
+    if (const auto field = m_factors.find(one); field != m_factors.end())
+      return tr("%1: ").arg(field->second->accessibleName());
+  return {};
+}
+
 void BuildDialog::complain(const Problem& problem) {
-  m_complaint->say(shown(problem.what), shown(problem.mend));
+  m_complaint->say(captionOf(problem.place) + shown(problem.what), shown(problem.mend));
   m_complaint->show();
 }
 

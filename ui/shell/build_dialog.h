@@ -32,14 +32,16 @@ public:
   /// psi_0.
   DraftEdit& factor(const std::string& key) const { return *m_factors.at(key); }
   QString listed() const;
+  QString complaint() const;
   QString count() const;
   QString notes() const;
   QPushButton& takeButton() const { return *m_take; }
 
 private:
   void build();
-  DraftEdit* addFactor(QFormLayout& form, const std::string& key, const QString& caption,
-                       const std::string& text);
+  void addFactor(const std::string& key, const QString& caption, const std::string& text);
+  void followCases();
+  QString captionOf(const std::string& place) const;
   CombinationFactors typed() const;
   void preview();
   void take();
@@ -47,6 +49,7 @@ private:
 
   Desk& m_desk;
   QComboBox* m_rule;
+  QFormLayout* m_form;
   std::map<std::string, DraftEdit*> m_factors;
   Complaint* m_complaint;
   QLabel* m_count;

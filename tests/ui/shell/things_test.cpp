@@ -185,11 +185,30 @@ TEST_F(ThingsTest, builtCombinationsAreListedBeforeTheyAreTaken) {
   EXPECT_EQ(dialog.count(), "4 combinations, 4 of them in the study already");
 }
 
+TEST_F(ThingsTest, buildingFollowsTheCasesWhileItsWindowIsOpen) {
+  ThingsDialog cases(m_desk, loadCases(), nullptr);
+  cases.add();
+  BuildDialog dialog(m_desk, nullptr);
+  dialog.factor("of Q").selectAll();
+  QTest::keyClicks(&dialog.factor("of Q"), "0.8");
+  cases.add();
+  EXPECT_EQ(dialog.factor("of S").text(), "0.5");
+  EXPECT_EQ(dialog.count(), "10 combinations") << dialog.complaint().toStdString();
+  EXPECT_TRUE(dialog.listed().contains("1.2 Q + 1.5 S")) << "what was typed stays";
+  EXPECT_TRUE(put(cases, 1, 0, "W"));
+  EXPECT_EQ(dialog.factor("of W").text(), "0.6");
+  EXPECT_THROW(dialog.factor("of Q"), std::out_of_range);
+  EXPECT_TRUE(put(cases, 1, 2, "accidental"));
+  EXPECT_EQ(dialog.count(), "4 combinations");
+}
+
 TEST_F(ThingsTest, aFactorThatDoesNotReadBuildsNothing) {
   BuildDialog dialog(m_desk, nullptr);
   dialog.factor("upper").selectAll();
   QTest::keyClicks(&dialog.factor("upper"), "1,35");
   EXPECT_EQ(dialog.count(), "Nothing is built.");
+  EXPECT_TRUE(dialog.complaint().startsWith(QString::fromUtf8("γ of permanent, unfavourable: ")))
+      << dialog.complaint().toStdString();
   EXPECT_FALSE(dialog.takeButton().isEnabled());
 }
 
