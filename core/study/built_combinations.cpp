@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/built_combinations.h"
 
+#include "core/study/combination_text.h"
+
 #include "core/quantity/format.h"
 
 #include <algorithm>
@@ -119,7 +121,7 @@ private:
   static void addTerm(Combination& combination, const std::string& id, const Typed& factor) {
     if (factor.value == 0)
       return;
-    combination.name += (combination.name.empty() ? "" : " + ") + exactNumber(factor.value) + " " + id;
+    planewright::addTerm(combination.name, factor.value, id);
     combination.factors.push_back({id, factor.text});
   }
 

@@ -1,12 +1,14 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/combination_text.h"
 
+#include "core/quantity/format.h"
 #include "core/quantity/lexer.h"
 #include "core/study/built_combinations.h"
 #include "core/study/fresh_name.h"
 #include "core/words/utf8.h"
 
 #include <algorithm>
+#include <unordered_set>
 
 namespace planewright {
 
@@ -103,6 +105,39 @@ Result<Factor> factorOf(const Study& study, std::string_view text, const Term& t
   return Factor{one->id, isOne ? "-" + factor : "-(" + factor + ")"};
 }
 
+/// The expression by which a combination goes; null where it has a name of its own.
+std::string (*expressionOf(const Combination& combination))(const Combination&) {
+  for (auto* expression : {textOf, valuesOf})
+    if (combination.name == expression(combination))
+      return expression;
+  return nullptr;
+}
+
+/// Names of combinations while they change.
+class Names {
+public:
+  explicit Names(const Study& study) : m_study(study) {
+    for (const Combination& one : study.combinations)
+      m_names.insert(one.name);
+  }
+  bool isFree(const std::string& name) const {
+    return !name.empty() && !m_names.contains(name) && !findCase(m_study, name);
+  }
+  Rename rename(const std::string& from, const std::string& to) {
+    m_names.erase(from);
+    m_names.insert(to);
+    return {{Spot::combination, from, {}}, to};
+  }
+  Remove remove(const std::string& name) {
+    m_names.erase(name);
+    return {{Spot::combination, name, {}}};
+  }
+
+private:
+  const Study& m_study;
+  std::unordered_set<std::string> m_names;
+};
+
 } // namespace
 
 Result<std::vector<Factor>> factorsIn(const Study& study, std::string_view text) {
@@ -130,6 +165,53 @@ std::string textOf(const Combination& combination) {
   return text;
 }
 
+void addTerm(std::string& values, double factor, const std::string& caseId) {
+  values += (values.empty() ? "" : " + ") + exactNumber(factor) + " " + caseId;
+}
+
+std::string valuesOf(const Combination& combination) {
+  std::string values;
+  for (const Factor& factor : combination.factors) {
+    const Result<Entry> entry = readEntry(factor.factor, {});
+    if (entry && entry->value != 0)
+      addTerm(values, entry->value, factor.caseId);
+  }
+  return values;
+}
+
+Edits editsThatRenameCase(const Study& study, const std::string& id, const std::string& to) {
+  Edits edits = {Rename{{Spot::loadCase, id, {}}, to}};
+  Names names(study);
+  for (const Combination& one : study.combinations) {
+    Combination renamed = one;
+    for (Factor& factor : renamed.factors)
+      if (factor.caseId == id)
+        factor.caseId = to;
+    auto* expression = expressionOf(one);
+    if (expression && renamed != one && names.isFree(expression(renamed)))
+      edits.push_back(names.rename(one.name, expression(renamed)));
+  }
+  return edits;
+}
+
+Edits editsThatRemoveCase(const Study& study, const std::string& id) {
+  Edits edits = {Remove{{Spot::loadCase, id, {}}}};
+  Names names(study);
+  for (const Combination& one : study.combinations) {
+    Combination rest = one;
+    auto* expression = expressionOf(one);
+    if (!expression || std::erase_if(rest.factors, [&](const Factor& f) { return f.caseId == id; }) == 0)
+      continue;
+    const std::string name = expression(rest);
+    const Combination* same = findCombination(study, name);
+    if (names.isFree(name))
+      edits.push_back(names.rename(one.name, name));
+    else if (name.empty() || (same && same->factors == rest.factors && same->basis == rest.basis))
+      edits.push_back(names.remove(one.name));
+  }
+  return edits;
+}
+
 Result<Edits> editsThatSet(const Study& study, const std::string& name, std::string_view text) {
   const Combination* old = findCombination(study, name);
   const Result<std::vector<Factor>> factors = factorsIn(study, text);
@@ -145,7 +227,7 @@ Result<Edits> editsThatSet(const Study& study, const std::string& name, std::str
     edits.push_back(Insert{place, std::nullopt});
     edits.push_back(Type{place, factor.factor});
   }
-  if (old && name == textOf(*old))
+  if (old && expressionOf(*old))
     edits.push_back(Rename{{Spot::combination, name, {}}, textOf({name, *factors, {}})});
   return edits;
 }

@@ -14,9 +14,21 @@ Result<std::vector<Factor>> factorsIn(const Study& study, std::string_view text)
 /// The same the other way: factors as they were typed, "1.35 G + 1.5*0.7 S".
 std::string textOf(const Combination& combination);
 
+/// The same with each factor as its value and without those that are 0, as built combinations are named:
+/// "1.35 G + 1.05 S".
+std::string valuesOf(const Combination& combination);
+/// One more term of such a text.
+void addTerm(std::string& values, double factor, const std::string& caseId);
+
 /// What gives the combination of this name the factors of the text. One that goes by its own expression is
 /// renamed to the new one.
 Result<Edits> editsThatSet(const Study& study, const std::string& combination, std::string_view text);
+/// What renames a case, and the combinations that go by their expression with it.
+Edits editsThatRenameCase(const Study& study, const std::string& id, const std::string& to);
+/// What takes a case away. A combination that goes by its expression goes by what is left of it; where that
+/// is nothing, or stands already, it goes too.
+Edits editsThatRemoveCase(const Study& study, const std::string& id);
+
 /// What adds a combination that goes by its expression.
 Result<Edits> editsThatAdd(const Study& study, std::string_view text);
 /// What adds a combination to begin with: all cases that may act together once, or the first multiple of them

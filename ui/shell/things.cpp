@@ -103,15 +103,22 @@ Things loadCases() {
   const auto place = [](const Study& study, std::size_t row) {
     return Place{Spot::loadCase, study.cases[row].id, {}};
   };
-  return {words("Load cases"),
-          words("load case"),
-          [](const Study& study) { return study.cases.size(); },
-          {keyColumn(words("Case"), place), typedColumn(words("Name"), Spot::caseName, place),
-           wordColumn<Nature>(words("Nature"), Spot::caseNature, place),
-           wordColumn<Duration>(words("Duration"), Spot::caseDuration, place),
-           typedColumn(words("Never together with"), Spot::caseExcludes, place)},
-          newCase,
-          place};
+  ThingColumn id = keyColumn(words("Case"), place);
+  id.edits = [](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
+    return editsThatRenameCase(study, study.cases[row].id, typed);
+  };
+  return {
+      words("Load cases"),
+      words("load case"),
+      [](const Study& study) { return study.cases.size(); },
+      {id, typedColumn(words("Name"), Spot::caseName, place),
+       wordColumn<Nature>(words("Nature"), Spot::caseNature, place),
+       wordColumn<Duration>(words("Duration"), Spot::caseDuration, place),
+       typedColumn(words("Never together with"), Spot::caseExcludes, place)},
+      newCase,
+      place,
+      {},
+      [](const Study& study, std::size_t row) { return editsThatRemoveCase(study, study.cases[row].id); }};
 }
 
 Things combinations() {

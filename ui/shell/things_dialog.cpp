@@ -158,8 +158,11 @@ void ThingsDialog::remove() {
   if (!hasRow())
     return;
   const int from = row();
-  const Place place = m_model->things().place(m_desk.study(), static_cast<std::size_t>(from));
-  if (m_model->ask({Remove{place}}, tr("removal of a %1").arg(m_model->things().one)))
+  const Things& things = m_model->things();
+  const auto index = static_cast<std::size_t>(from);
+  const Edits edits = things.remove ? things.remove(m_desk.study(), index)
+                                    : Edits{Remove{things.place(m_desk.study(), index)}};
+  if (m_model->ask(edits, tr("removal of a %1").arg(things.one)))
     select(qMin(from, m_model->rowCount() - 1));
 }
 

@@ -63,6 +63,60 @@ TEST(CombinationText, addedAndSetCombinationsGoByTheirExpression) {
   EXPECT_EQ(study.combinations[0].name, "uplift") << "a name of its own stays";
 }
 
+class CombinationNames : public testing::Test {
+protected:
+  Study take(const Edits& edits) {
+    const Result<Study> after = edited(study, edits);
+    EXPECT_TRUE(after) << plain(after.error());
+    return after.value_or(study);
+  }
+  static std::vector<std::string> namesIn(const Study& study) {
+    std::vector<std::string> names;
+    for (const Combination& one : study.combinations)
+      names.push_back(one.name);
+    return names;
+  }
+
+  Study study = [] {
+    Study made = withCases({"G", "S", "W"});
+    made.combinations = {{"1.35 G", {{"G", "1.35"}}},
+                         {"1.35 G + 1.5*0.7 S", {{"G", "1.35"}, {"S", "1.5*0.7"}}},
+                         {"1.35 G + 1.05 S", {{"G", "1.35"}, {"S", "1.5*0.7"}}},
+                         {"1.5 S", {{"S", "1.5"}}},
+                         {"1.35 G + 1.5 S + 0.9 W", {{"G", "1.35"}, {"S", "1.5"}, {"W", "1.5*0.6"}}},
+                         {"snow", {{"S", "1.5"}}}};
+    made.shown.combination = "1.35 G + 1.05 S";
+    return made;
+  }();
+};
+
+TEST_F(CombinationNames, expressionsFollowACaseThatIsRenamed) {
+  const Study after = take(editsThatRenameCase(study, "S", "Q"));
+  EXPECT_EQ(namesIn(after), (std::vector<std::string>{"1.35 G", "1.35 G + 1.5*0.7 Q", "1.35 G + 1.05 Q",
+                                                      "1.5 Q", "1.35 G + 1.5 Q + 0.9 W", "snow"}));
+  EXPECT_EQ(after.shown.combination, "1.35 G + 1.05 Q");
+  EXPECT_EQ(edited(after, editsThatRenameCase(after, "Q", "S")), study) << "and back";
+}
+
+TEST_F(CombinationNames, aNameThatIsTakenStays) {
+  study.combinations.push_back({"1.5 Q", {{"G", "1"}}});
+  const Study after = take(editsThatRenameCase(study, "S", "Q"));
+  EXPECT_EQ(after.combinations[3].name, "1.5 S");
+  EXPECT_FALSE(edited(study, editsThatRenameCase(study, "S", "W")));
+}
+
+TEST_F(CombinationNames, whatIsLeftWithoutACaseStandsOnce) {
+  const Study after = take(editsThatRemoveCase(study, "S"));
+  EXPECT_EQ(namesIn(after), (std::vector<std::string>{"1.35 G", "1.35 G + 0.9 W", "snow"}));
+  EXPECT_TRUE(after.combinations[2].factors.empty());
+  EXPECT_EQ(after.shown.combination, "");
+}
+
+TEST_F(CombinationNames, aBuiltOneIsRenamedByItsNewFactors) {
+  const Study after = take(*editsThatSet(study, "1.35 G + 1.05 S", "1.35 G + 1.5 W"));
+  EXPECT_EQ(after.combinations[2].name, "1.35 G + 1.5 W");
+}
+
 TEST(CombinationText, theNextOneHasOnlyCasesThatMeet) {
   const auto next = [](const Study& study) {
     const Study after = edited(study, editsThatAddNext(study)).value();

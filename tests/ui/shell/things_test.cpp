@@ -76,6 +76,18 @@ TEST_F(ThingsTest, combinationsAreTypedAsPeopleWriteThem) {
   EXPECT_EQ(m_desk.study().combinations[0].factors, (std::vector<Factor>{{"G", "1.35"}, {"Q", "1.5*0.7"}}));
 }
 
+TEST_F(ThingsTest, combinationsGoByTheCasesThatAreThere) {
+  ThingsDialog cases(m_desk, loadCases(), nullptr);
+  cases.add();
+  ThingsDialog dialog(m_desk, combinations(), nullptr);
+  dialog.add();
+  EXPECT_TRUE(put(cases, 1, 0, "W"));
+  EXPECT_EQ(cell(dialog, 0, 0), "1 G + 1 W");
+  cases.remove();
+  EXPECT_EQ(cell(dialog, 0, 0), "1 G");
+  EXPECT_EQ(m_desk.undoStack()->count(), 4);
+}
+
 TEST_F(ThingsTest, aNewCombinationLeavesOutWhatCannotBeInIt) {
   ThingsDialog cases(m_desk, loadCases(), nullptr);
   cases.add();
