@@ -11,7 +11,7 @@ namespace planewright {
 struct Contribution {
   PlaneStress stress;
   double axial = 0;   ///< part of sx from a normal force: kept apart from bending, since strengths differ
-  double bending = 0; ///< part of sx from bending moments
+  double bending = 0; ///< part of sx from bending moments; what is measured is in neither
   std::vector<Step> steps;
   std::vector<Text> signRules; ///< what the signs of the typed values mean
   std::vector<Text> cautions;  ///< where the theory ends

@@ -189,7 +189,7 @@ Results<Measured> measuredBy(const Rosette& rosette, const Elastic& elastic, con
   Measured measured{*solution, principalOf(solution->strain), {}};
   Contribution& contribution = measured.contribution;
   contribution.stress = stressOf(solution->strain, elastic);
-  contribution.axial = contribution.stress.sx;
+  // Strains at one place do not tell a normal force from bending, so sx is in neither part.
   contribution.steps =
       Working(measured.solution, elastic, units).steps(rosette, measured.principal, contribution.stress);
   contribution.signRules = {PW_TEXT("Source",

@@ -128,6 +128,16 @@ TEST(Sources, aMeasuredCaseTakesFactorOneOnly) {
             "points/P1/stress/G/rosette");
 }
 
+TEST(Sources, whatIsMeasuredIsNeitherAxialNorBending) {
+  const Study study = with(
+      measuredStudy(), {Insert{{Spot::pressure, "P1", "G"}, {}}, Type{{Spot::pressureP, "P1", "G"}, "1"}});
+  const StateReading state = evaluate(study).state();
+  EXPECT_NE(evaluate(measuredStudy()).state().stress.sx, 0);
+  EXPECT_EQ(evaluate(measuredStudy()).state().axial, 0);
+  EXPECT_NEAR(state.axial, 25, 1e-12) << "of the closed ends alone: 1 MPa * 500 mm/(2 * 10 mm)";
+  EXPECT_EQ(state.bending, 0);
+}
+
 TEST(Sources, aMaterialWithALineNeedsOne) {
   const Edits orthotropic = {Type{{Spot::rosetteMaterial, "P1", "G"}, "orthotropic"}};
   const Study study = with(measuredStudy(), orthotropic);
