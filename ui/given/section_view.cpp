@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/given/section_view.h"
 
-#include "core/quantity/format.h"
+#include "core/study/case_sources.h"
 #include "core/study/section_edits.h"
 #include "ui/desk/turning.h"
 #include "ui/look/look.h"
@@ -41,6 +41,12 @@ std::optional<Fibre> snapped(const LoadedSection& section, const SectionFrame& f
     }
   }
   return nearest;
+}
+
+/// The greatest power of ten of the unit of length that is no longer than so many mm; in mm.
+double decadeOf(const Study& study, double length) {
+  const Unit unit = entryKindOf(study, Spot::fibreY).unit;
+  return unit.toBase(decadeBelow(unit.fromBase(length)));
 }
 
 double clamped(double value, double low, double high) {
@@ -120,7 +126,7 @@ void SectionView::drag(QPointF to, Qt::KeyboardModifiers held) {
   if (const std::optional<Fibre> ready = isFree ? std::nullopt : snapped(*section, drawn->frame, to))
     return place(*ready, *m_drag);
   const SectionPoint at = drawn->frame.placeAt({to.x(), to.y()});
-  const double decade = decadeBelow(1 / drawn->frame.scale);
+  const double decade = decadeOf(m_desk.study(), 1 / drawn->frame.scale);
   const Region& region = section->model.region;
   place({clamped(roundedTo(at.y, decade), region.yLow, region.yHigh),
          clamped(roundedTo(at.z, decade), region.zLow, region.zHigh), section->fibre.view},
@@ -143,9 +149,9 @@ void SectionView::keyPressEvent(QKeyEvent* event) {
     return;
   }
   Fibre fibre = section->fibre;
-  const double step = event->modifiers().testFlag(Qt::ShiftModifier)     ? 0.1
-                      : event->modifiers().testFlag(Qt::ControlModifier) ? 10
-                                                                         : 1;
+  const double step = decadeOf(m_desk.study(), 1) * (event->modifiers().testFlag(Qt::ShiftModifier)     ? 0.1
+                                                     : event->modifiers().testFlag(Qt::ControlModifier) ? 10
+                                                                                                        : 1);
   const int key = event->key();
   if (key == Qt::Key_Up || key == Qt::Key_Down) {
     fibre.y += key == Qt::Key_Up ? step : -step;
@@ -171,10 +177,12 @@ void SectionView::keyPressEvent(QKeyEvent* event) {
 }
 
 void SectionView::refresh() {
+  const auto length = [units = writtenUnitsOf(m_desk.study())](double value) {
+    return fromUtf8(units.shown(value, dimension::length));
+  };
   if (const std::optional<LoadedSection> section = loaded())
     setAccessibleDescription(
-        tr("fibre at y = %1 mm, z = %2 mm")
-            .arg(fromUtf8(exactNumber(section->fibre.y)), fromUtf8(exactNumber(section->fibre.z))));
+        tr("fibre at y = %1, z = %2").arg(length(section->fibre.y), length(section->fibre.z)));
   update();
 }
 

@@ -109,6 +109,20 @@ TEST_F(SourcesTest, theMarkMovesByKeysAndGoesToReadyPlaces) {
   EXPECT_EQ(point().fibre->y, "0 mm");
 }
 
+TEST_F(SourcesTest, theMarkMovesInTheUnitOfTheStudy) {
+  ASSERT_FALSE(desk.request({Type{{Spot::unitLength, {}, {}}, "in"}}, desk.newGesture(), "unit"));
+  choose("Add a source", "section forces");
+  type("h", "8 in");
+  view().setFocus();
+  EXPECT_EQ(point().fibre->y, "-4 in");
+  QTest::keyClick(&view(), Qt::Key_Up);
+  EXPECT_EQ(point().fibre->y, "-3.99 in");
+  QTest::keyClick(&view(), Qt::Key_Up, Qt::ControlModifier);
+  EXPECT_EQ(point().fibre->y, "-3.89 in");
+  EXPECT_TRUE(view().accessibleDescription().startsWith(QString::fromUtf8("fibre at y = −3.890 in")))
+      << view().accessibleDescription().toStdString();
+}
+
 TEST_F(SourcesTest, theWorstFibreIsNamedAndGoneTo) {
   choose("Add a source", "section forces");
   type("Mz", "10");
