@@ -158,9 +158,12 @@ Result<std::vector<Factor>> factorsIn(const Study& study, std::string_view text)
 std::string textOf(const Combination& combination) {
   std::string text;
   for (const Factor& factor : combination.factors) {
-    const bool negative = factor.factor.starts_with('-');
+    // A sum would be read as terms of its own.
+    const bool isSum = termsIn(factor.factor).size() > 1;
+    const bool negative = !isSum && factor.factor.starts_with('-');
     text += text.empty() ? (negative ? "-" : "") : negative ? " - " : " + ";
-    text += factor.factor.substr(negative ? 1 : 0) + " " + factor.caseId;
+    text +=
+        (isSum ? "(" + factor.factor + ")" : factor.factor.substr(negative ? 1 : 0)) + " " + factor.caseId;
   }
   return text;
 }

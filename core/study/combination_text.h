@@ -11,7 +11,7 @@ namespace planewright {
 /// empty text.
 Result<std::vector<Factor>> factorsIn(const Study& study, std::string_view text);
 
-/// The same the other way: factors as they were typed, "1.35 G + 1.5*0.7 S".
+/// The same the other way: factors as they were typed, sums in parentheses, "1.35 G + 1.5*0.7 S".
 std::string textOf(const Combination& combination);
 
 /// The same with each factor as its value and without those that are 0, as built combinations are named:

@@ -63,6 +63,22 @@ TEST(CombinationText, addedAndSetCombinationsGoByTheirExpression) {
   EXPECT_EQ(study.combinations[0].name, "uplift") << "a name of its own stays";
 }
 
+TEST(CombinationText, whatIsWrittenReadsBackWithItsValues) {
+  const Study study = withCases({"G", "S", "W+x"});
+  for (const char* factor : {"1.35", "-1", "1 - 0.5", "1-0.5", "-1 + 2", "- 0.5", "-(1 + 2)*3", "1.5*0.7",
+                             "2^-1", "1e-3", "min(1, 2 - 0.5)", "+2"})
+    for (const char* id : {"S", "W+x"}) {
+      const Combination one{"any", {{"G", factor}, {id, factor}}, Basis::design};
+      const Result<std::vector<Factor>> read = factorsIn(study, textOf(one));
+      ASSERT_TRUE(read) << textOf(one) << ": " << plain(read.error());
+      ASSERT_EQ(read->size(), 2U) << textOf(one);
+      for (std::size_t i = 0; i < 2; ++i) {
+        EXPECT_EQ((*read)[i].caseId, one.factors[i].caseId);
+        EXPECT_EQ(readEntry((*read)[i].factor, {})->value, readEntry(factor, {})->value) << textOf(one);
+      }
+    }
+}
+
 class CombinationNames : public testing::Test {
 protected:
   Study take(const Edits& edits) {
