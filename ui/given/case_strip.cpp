@@ -91,7 +91,7 @@ void CaseStrip::addList(const std::vector<LoadCase>& cases) {
   auto* list = new QuietButton({}, Role::ink, this);
   auto* menu = new QMenu(list);
   for (const LoadCase& one : cases)
-    menu->addAction(fromUtf8(one.name.empty() ? one.id : one.id + "  " + one.name), this,
+    menu->addAction(nameForMenu(fromUtf8(one.name.empty() ? one.id : one.id + "  " + one.name)), this,
                     [this, id = one.id] { Q_EMIT chosen(id); });
   list->setMenu(menu);
   list->setAccessibleName(tr("case"));

@@ -150,7 +150,7 @@ void SectionGroup::listSections() {
         tr("section of the point"));
   };
   for (const TypedSection& one : m_desk.study().sections)
-    menu->addAction(fromUtf8(one.name), this, [give, name = one.name] { give(name); });
+    menu->addAction(nameForMenu(fromUtf8(one.name)), this, [give, name = one.name] { give(name); });
   menu->addSeparator();
   menu->addAction(tr("new section"), this, [this, give] { give(freshSectionName(m_desk.study())); });
   QAction* none = menu->addAction(tr("no section"), this, [this] {

@@ -69,4 +69,8 @@ QString shown(const Problem& problem) {
   return QString::fromStdString(plain(problem, translation()));
 }
 
+QString nameForMenu(QString name) {
+  return name.replace(QLatin1Char('&'), QStringLiteral("&&"));
+}
+
 } // namespace planewright

@@ -31,6 +31,9 @@ QString shown(const Problem& problem);
 /// The translation that core's figures and outputs take.
 Translate translation();
 
+/// A name for a menu or a standard button, in which a single & marks a key: "R&D" is written "R&&D".
+QString nameForMenu(QString name);
+
 inline QString fromUtf8(const std::string& words) {
   return QString::fromStdString(words);
 }

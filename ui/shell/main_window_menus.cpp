@@ -82,7 +82,8 @@ void MainWindow::addFileMenu() {
 void MainWindow::listRecent() {
   m_recent->clear();
   for (const QString& file : recentFiles())
-    m_recent->addAction(QFileInfo(file).fileName(), this, [this, file] { open(file); })->setToolTip(file);
+    m_recent->addAction(nameForMenu(QFileInfo(file).fileName()), this, [this, file] { open(file); })
+        ->setToolTip(file);
   m_recent->setToolTipsVisible(true);
   m_recent->setEnabled(!m_recent->isEmpty());
 }

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/picker.h"
 
+#include "ui/look/look.h"
+
 #include <QEvent>
 #include <QHBoxLayout>
 #include <QLabel>
@@ -90,7 +92,8 @@ void Picker::resizeEvent(QResizeEvent* event) {
 
 void Picker::writeName() {
   const QString name = m_names.value(m_current);
-  m_name->setText(m_name->fontMetrics().elidedText(name, Qt::ElideRight, std::max(0, m_name->width() - 20)));
+  const int room = std::max(0, m_name->width() - 20);
+  m_name->setText(nameForMenu(m_name->fontMetrics().elidedText(name, Qt::ElideRight, room)));
   m_name->setToolTip(name);
 }
 

@@ -9,6 +9,7 @@
 
 #include <QLabel>
 #include <QLineEdit>
+#include <QPushButton>
 #include <QSignalSpy>
 #include <QTest>
 #include <QTreeWidget>
@@ -95,6 +96,14 @@ TEST_F(ShellWords, aStripFollowsOnlyTheLinksOfItsSentence) {
   EXPECT_EQ(first, 1);
   EXPECT_EQ(second, 1);
   EXPECT_EQ(strip.offers().size(), 2);
+}
+
+TEST_F(ShellWords, aPickerShowsAnAmpersandOfAName) {
+  Picker picker(QStringLiteral("Point"), QStringLiteral("Ctrl"), nullptr);
+  picker.setNameWidth(200);
+  picker.show({"P1 R&D hall"}, 0);
+  EXPECT_EQ(picker.findChild<QPushButton*>()->text(), "P1 R&&D hall");
+  EXPECT_TRUE(picker.findChild<QPushButton*>()->shortcut().isEmpty());
 }
 
 TEST_F(ShellWords, aPickerStepsInsideItsNamesAndCounts) {
