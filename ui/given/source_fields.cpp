@@ -140,15 +140,23 @@ Edits SourceFields::editsThatAdd() const {
   return edits;
 }
 
+Nature SourceFields::nature() const {
+  return findCase(m_desk.study(), m_caseId(m_desk.study()))->nature;
+}
+
 void SourceFields::ask(const Edits& edits, const QString& what) {
   if (const auto problem = m_desk.request(edits, m_desk.newGesture(), what))
     m_desk.say(shown(*problem));
 }
 
 void SourceFields::add() {
+  const Nature before = nature();
   ask(editsThatAdd(), tr("new: %1").arg(shown(rowOf(m_source).label)));
   if (!isPresent())
     return;
+  if (nature() != before)
+    m_desk.say(tr("Case %1 is a measured one now, at all points: it takes factor 1 only.")
+                   .arg(fromUtf8(m_caseId(m_desk.study()))));
   m_fields.front()->edit().setFocus(Qt::OtherFocusReason);
   m_fields.front()->edit().selectAll();
 }

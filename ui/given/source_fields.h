@@ -38,6 +38,7 @@ private:
   void addChoice(Spot spot, const QString& meaning);
   Place place(const Study& study, Spot spot) const;
   Edits editsThatAdd() const;
+  Nature nature() const;
   void ask(const Edits& edits, const QString& what);
 
   Desk& m_desk;

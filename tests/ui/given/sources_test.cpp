@@ -6,6 +6,7 @@
 #include "ui/given/section_view.h"
 
 #include <QMenu>
+#include <QSignalSpy>
 #include <QToolButton>
 
 namespace planewright {
@@ -139,7 +140,10 @@ TEST_F(SourcesTest, whatTheoryDoesNotGiveIsSaidInPlace) {
 }
 
 TEST_F(SourcesTest, aRosetteMakesItsCaseAMeasuredOne) {
+  QSignalSpy said(&desk, &Desk::said);
   choose("Add a source", "strain rosette");
+  EXPECT_EQ(said.count(), 1);
+  EXPECT_TRUE(said.back().front().toString().startsWith("Case G is a measured one now"));
   EXPECT_EQ(desk.study().cases.front().nature, Nature::measured);
   type("εa", "100");
   EXPECT_EQ(point().stress.front().rosette->strainA, "100 ustrain");
