@@ -248,6 +248,53 @@ Result<Edits> editsThatAdd(const Study& study, std::string_view text) {
   return edits;
 }
 
+Result<Edits> editsThatAddLines(const Study& study, std::string_view text) {
+  Edits edits;
+  std::unordered_set<std::string> added;
+  bool isEmpty = true;
+  for (int number = 1; !text.empty(); ++number) {
+    const std::size_t end = std::min(text.find('\n'), text.size());
+    const std::string_view line = trimmed(text.substr(0, end));
+    text.remove_prefix(std::min(end + 1, text.size()));
+    if (line.empty())
+      continue;
+    isEmpty = false;
+    const std::size_t tab = line.find('\t');
+    const std::string_view expression = tab == std::string_view::npos ? line : trimmed(line.substr(tab + 1));
+    Result<std::vector<Factor>> factors = factorsIn(study, expression);
+    Combination one;
+    if (factors) {
+      one.factors = *std::move(factors);
+      one.name = tab == std::string_view::npos ? textOf(one) : std::string(trimmed(line.substr(0, tab)));
+      const Combination* same = findCombination(study, one.name);
+      if (same && same->factors == one.factors)
+        continue;
+      if (same || !added.insert(one.name).second)
+        factors = tl::unexpected(Problem{{},
+                                         0,
+                                         0,
+                                         one.name,
+                                         PW_TEXT("Combination", "The name “%1” is taken.").with(one.name),
+                                         PW_TEXT("Combination", "Give this combination a name of its own.")});
+    }
+    if (!factors) {
+      Problem problem = std::move(factors).error();
+      problem.line = number;
+      return tl::unexpected(std::move(problem));
+    }
+    const Edits more = editsThatAdd(study, std::vector<Combination>{one});
+    edits.insert(edits.end(), more.begin(), more.end());
+  }
+  if (isEmpty)
+    return tl::unexpected(Problem{{},
+                                  0,
+                                  0,
+                                  {},
+                                  PW_TEXT("Combination", "There is no combination in this text."),
+                                  PW_TEXT("Combination", "Copy one a line, such as 1.35 G + 1.5 S.")});
+  return edits;
+}
+
 Edits editsThatAddNext(const Study& study) {
   std::vector<const LoadCase*> together;
   for (const LoadCase& one : study.cases)

@@ -31,6 +31,10 @@ Edits editsThatRemoveCase(const Study& study, const std::string& id);
 
 /// What adds a combination that goes by its expression.
 Result<Edits> editsThatAdd(const Study& study, std::string_view text);
+/// What adds the combinations of a text, one a line: its expression, or its name, a tab and its expression.
+/// Those that the study has already are left as they are. All are added or none: the first Problem with its
+/// line.
+Result<Edits> editsThatAddLines(const Study& study, std::string_view text);
 /// What adds a combination to begin with: all cases that may act together once, or the first multiple of them
 /// that there is not yet. Measured cases, which take factor 1 only, stand in it where there are no others.
 Edits editsThatAddNext(const Study& study);

@@ -118,6 +118,7 @@ Things loadCases() {
       newCase,
       place,
       {},
+      {},
       [](const Study& study, std::size_t row) { return editsThatRemoveCase(study, study.cases[row].id); }};
 }
 
@@ -137,7 +138,9 @@ Things combinations() {
           {keyColumn(words("Name"), place), terms,
            wordColumn<Basis>(words("Basis"), Spot::combinationBasis, place)},
           editsThatAddNext,
-          place};
+          place,
+          {},
+          editsThatAddLines};
 }
 
 Things points() {

@@ -29,6 +29,8 @@ struct Things {
   std::function<Place(const Study&, std::size_t row)> place;
   /// A copy of a row; none where copying has no sense.
   std::function<Edits(const Study&, std::size_t row)> copy = {};
+  /// What adds the rows of a pasted text; none where nothing is pasted.
+  std::function<Result<Edits>(const Study&, const std::string& text)> paste = {};
   /// What takes a row away, where that is more than its thing.
   std::function<Edits(const Study&, std::size_t row)> remove = {};
 };

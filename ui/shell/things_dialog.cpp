@@ -5,8 +5,10 @@
 #include "ui/look/look.h"
 #include "ui/shell/things_model.h"
 
+#include <QClipboard>
 #include <QComboBox>
 #include <QDialogButtonBox>
+#include <QGuiApplication>
 #include <QHeaderView>
 #include <QPushButton>
 #include <QStyledItemDelegate>
@@ -89,6 +91,11 @@ void ThingsDialog::build() {
     m_copy = addButton(tr("&Duplicate"));
     connect(m_copy, &QPushButton::clicked, this, &ThingsDialog::copy);
   }
+  if (things.paste) {
+    QPushButton* paste = addButton(tr("&Paste"));
+    paste->setToolTip(tr("Adds what is on the clipboard, one a line: 1.35 G + 1.5 S"));
+    connect(paste, &QPushButton::clicked, this, &ThingsDialog::paste);
+  }
   m_remove = addButton(tr("&Remove"));
   connect(m_remove, &QPushButton::clicked, this, &ThingsDialog::remove);
   m_up = addButton(tr("&Up"));
@@ -127,7 +134,8 @@ void ThingsDialog::select(int row) {
 }
 
 void ThingsDialog::complain(const Problem& problem) {
-  m_complaint->say(shown(problem.what), shown(problem.mend));
+  const QString where = problem.line > 0 ? tr("Line %1: ").arg(problem.line) : QString();
+  m_complaint->say(where + shown(problem.what), shown(problem.mend));
   m_complaint->show();
 }
 
@@ -152,6 +160,15 @@ void ThingsDialog::copy() {
   const Edits edits = m_model->things().copy(m_desk.study(), static_cast<std::size_t>(from));
   if (m_model->ask(edits, tr("copy of a %1").arg(m_model->things().one)))
     select(from + 1);
+}
+
+void ThingsDialog::paste() {
+  const std::string text = QGuiApplication::clipboard()->text().toStdString();
+  const Result<Edits> edits = m_model->things().paste(m_desk.study(), text);
+  if (!edits)
+    return complain(edits.error());
+  if (m_model->ask(*edits, tr("pasted list")))
+    select(m_model->rowCount() - 1);
 }
 
 void ThingsDialog::remove() {

@@ -31,6 +31,8 @@ public:
 public slots:
   void add();
   void copy();
+  /// Adds what is on the clipboard.
+  void paste();
   void remove();
   void moveUp() { move(-1); }
   void moveDown() { move(1); }

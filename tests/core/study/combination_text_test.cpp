@@ -128,6 +128,22 @@ TEST_F(CombinationNames, whatIsLeftWithoutACaseStandsOnce) {
   EXPECT_EQ(after.shown.combination, "");
 }
 
+TEST_F(CombinationNames, linesAreAddedAllOrNone) {
+  const Study after = take(*editsThatAddLines(study, "1.35 G\r\n\n 1 G + 1.5 W \nwind\t1.5 W\r\n"));
+  ASSERT_EQ(after.combinations.size(), study.combinations.size() + 2) << "1.35 G is there already";
+  EXPECT_EQ(after.combinations[6].name, "1 G + 1.5 W");
+  EXPECT_EQ(after.combinations[7], (Combination{"wind", {{"W", "1.5"}}, Basis::design}));
+  const auto wrong = [&](const char* text) {
+    const Result<Edits> edits = editsThatAddLines(study, text);
+    return edits ? "taken" : std::to_string(edits.error().line) + ": " + plain(edits.error().what);
+  };
+  EXPECT_EQ(wrong("1 G\n1 X"), "2: “1 X” names no case.");
+  EXPECT_EQ(wrong("snow\t1 G"), "1: The name “snow” is taken.");
+  EXPECT_EQ(wrong("a\t1 G\na\t1 W"), "2: The name “a” is taken.");
+  EXPECT_EQ(wrong(" \n"), "0: There is no combination in this text.");
+  EXPECT_TRUE(editsThatAddLines(study, "1.35 G")->empty());
+}
+
 TEST_F(CombinationNames, aBuiltOneIsRenamedByItsNewFactors) {
   const Study after = take(*editsThatSet(study, "1.35 G + 1.05 S", "1.35 G + 1.5 W"));
   EXPECT_EQ(after.combinations[2].name, "1.35 G + 1.5 W");

@@ -5,7 +5,9 @@
 #include "ui/shell/build_dialog.h"
 #include "ui/shell/things_dialog.h"
 
+#include <QClipboard>
 #include <QComboBox>
+#include <QGuiApplication>
 #include <QPushButton>
 #include <QTableView>
 #include <QTest>
@@ -74,6 +76,25 @@ TEST_F(ThingsTest, combinationsAreTypedAsPeopleWriteThem) {
   EXPECT_TRUE(put(dialog, 0, 0, "snow leads"));
   EXPECT_FALSE(put(dialog, 0, 1, "1.35 G + 1.5 X"));
   EXPECT_EQ(m_desk.study().combinations[0].factors, (std::vector<Factor>{{"G", "1.35"}, {"Q", "1.5*0.7"}}));
+}
+
+TEST_F(ThingsTest, combinationsArePastedWholeOrNotAtAll) {
+  ThingsDialog cases(m_desk, loadCases(), nullptr);
+  cases.add();
+  ThingsDialog dialog(m_desk, combinations(), nullptr);
+  dialog.show();
+  const int steps = m_desk.undoStack()->count();
+  QGuiApplication::clipboard()->setText("1.35 G\r\n1.35 G + 1,5 Q\r\n");
+  dialog.paste();
+  EXPECT_TRUE(m_desk.study().combinations.empty());
+  EXPECT_TRUE(dialog.complaint().startsWith("Line 2: ")) << dialog.complaint().toStdString();
+  QGuiApplication::clipboard()->setText("1.35 G\r\nleading Q\t1.35 G + 1.5 Q\r\n");
+  dialog.paste();
+  EXPECT_EQ(cell(dialog, 0, 0), "1.35 G");
+  EXPECT_EQ(cell(dialog, 1, 0), "leading Q");
+  EXPECT_EQ(cell(dialog, 1, 1), "1.35 G + 1.5 Q");
+  EXPECT_EQ(m_desk.undoStack()->count(), steps + 1);
+  EXPECT_TRUE(dialog.complaint().isEmpty());
 }
 
 TEST_F(ThingsTest, combinationsGoByTheCasesThatAreThere) {
