@@ -80,6 +80,7 @@ std::vector<Text> leftOutOf(const std::vector<Point>& points) {
   add(PW_TEXT("Paste", "sizes of sections"), [](const Point& one) { return one.fibre.has_value(); });
   add(PW_TEXT("Paste", "second lines"), [](const Point& one) { return one.lines.size() > 1; });
   add(PW_TEXT("Paste", "watched planes"), [](const Point& one) { return !one.planes.empty(); });
+  add(PW_TEXT("Paste", "checks"), [](const Point& one) { return !one.checks.empty(); });
   add(PW_TEXT("Paste", "free edges"), [](const Point& one) { return !one.freeEdge.empty(); });
   add(PW_TEXT("Paste", "inclined axes"), [&](const Point& one) { return one.axes != usual.axes; });
   add(PW_TEXT("Paste", "reading planes"), [&](const Point& one) { return one.reading != usual.reading; });

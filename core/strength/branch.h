@@ -42,8 +42,8 @@ struct PowerOfAngle {
   double P = 1, Q = 1, n = 2;
 };
 
-/// |t| / (cohesion - s1 tan(phi)); infinite where the denominator is not positive. So it is, without cohesion,
-/// on a plane of a stressed body that carries nothing itself: the least turn of it has no bound.
+/// |t| / (cohesion - s1 tan(phi)); infinite where the denominator is not positive. So it is, without
+/// cohesion, on a plane of a stressed body that carries nothing itself: the least turn of it has no bound.
 struct Mobilised {
   double cohesion = 0;
   double tanPhi = 0;

@@ -28,6 +28,8 @@ std::vector<Place> thingsIn(const Point& point) {
     places.push_back({Spot::line, point.name, line.name});
   for (const WatchedPlane& plane : point.planes)
     places.push_back({Spot::plane, point.name, plane.name});
+  for (const Check& check : point.checks)
+    places.push_back({Spot::check, point.name, check.id});
   return places;
 }
 

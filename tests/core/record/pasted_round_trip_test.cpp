@@ -12,9 +12,11 @@ namespace {
 
 /// Without what no column has.
 Study carried(Study study) {
-  for (Point& point : study.points)
+  for (Point& point : study.points) {
+    point.checks.clear(); // of lines that go
     if (point.lines.size() > 1)
       point.lines.resize(1);
+  }
   return study;
 }
 

@@ -72,8 +72,8 @@ RC_GTEST_PROP(Band, wideningNeverLowersTheWorst, ()) {
     if (!isNoWorse(last, worst))
       RC_FAIL(std::to_string(last) + " to " + std::to_string(worst) + " at " + std::to_string(tolerance) +
               " round " + std::to_string(nominal.degrees()) + " in " +
-              std::to_string(judge.state().stress.sx) + ", " + std::to_string(judge.state().stress.sy) + ", " +
-              std::to_string(judge.state().stress.txy) + ", part " +
+              std::to_string(judge.state().stress.sx) + ", " + std::to_string(judge.state().stress.sy) +
+              ", " + std::to_string(judge.state().stress.txy) + ", part " +
               std::to_string(judge.branches().front().index()));
     last = worst;
   }

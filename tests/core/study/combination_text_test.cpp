@@ -176,6 +176,12 @@ TEST(CopiedPoint, hasEverythingThatWasSaidOfIt) {
   point.note = "heel";
   point.lines = {Line{"bond", LineKind::bond, "1 in 12", "3 deg"}};
   point.planes = {{"scarf", "55 deg", "2 deg"}};
+  study.materials.emplace_back().name = "oak";
+  point.checks.emplace_back();
+  point.checks.back().id = "1";
+  point.checks.back().material = "oak";
+  point.checks.back().line = "bond";
+  ASSERT_EQ(problemsIn(study), Problems());
   point.reading = "30 deg";
   study = *edited(study, editsThatCopyPoint(study, "P1", freshPointName(study, "P1")));
   ASSERT_EQ(study.points.size(), 2u);
