@@ -1,36 +1,14 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/record/object_reader.h"
+#include "core/record/file_head.h"
+#include "core/record/material_json.h"
 #include "core/record/study_file.h"
 #include "core/record/study_spots.h"
+#include "core/record/typed_texts.h"
 #include "core/study/edit.h"
-#include "core/study/text_fields.h"
-
-#include <charconv>
 
 namespace planewright {
 
 namespace {
-
-/// The name of an item, for the path of its Problems; empty as long as it has none.
-std::string nameIn(const Json& json, const char* key) {
-  const JsonMember* name = json.kind == Json::Kind::object ? member(json, key) : nullptr;
-  return name && name->value.kind == Json::Kind::text ? name->value.text : "";
-}
-
-/// The texts of a thing by the keys of their spots.
-template <class Thing>
-void readTexts(ObjectReader& object, Thing& thing) {
-  for (const TextField<Thing>& field : textFieldsOf<Thing>())
-    object.text(rowOf(field.spot).key(), thing.*field.text);
-}
-
-/// An object that holds nothing but texts.
-template <class Thing>
-void readAllTexts(const Json& json, std::string path, Reading& reading, Thing& thing) {
-  ObjectReader object(json, std::move(path), reading);
-  readTexts(object, thing);
-  object.refuseUnread();
-}
 
 void read(const Json& json, Reading& reading, Title& title) {
   readAllTexts(json, "title", reading, title);
@@ -71,19 +49,6 @@ void read(const Json& json, Reading& reading, Combination& one) {
       one.factors.push_back({factor.key, factor.value.text});
     }
   object.word("basis", one.basis);
-  object.refuseUnread();
-}
-
-void read(const Json& json, Reading& reading, Material& material) {
-  ObjectReader object(json, pathOf({Spot::material, nameIn(json, "name"), {}}), reading);
-  object.neededText("name", material.name);
-  object.word("kind", material.kind);
-  object.word("basis", material.basis);
-  readTexts(object, material);
-  object.word("seam", material.seam);
-  if (const Json* durations = object.value("duration_factors"))
-    readAllTexts(*durations, pathOf({Spot::material, material.name, {}}) + "/duration_factors", reading,
-                 material.durations);
   object.refuseUnread();
 }
 
@@ -242,39 +207,6 @@ Study readParts(const Json& root, Reading& reading) {
   return study;
 }
 
-Problem refused(std::string place, Text what, Text mend = {}) {
-  return {std::move(place), 0, 0, {}, std::move(what), std::move(mend)};
-}
-
-/// Why the file is not a study that this program reads, told by its first two keys.
-void checkHead(const Json& root, FileProblems& problems) {
-  if (nameIn(root, "format") != studyFormat) {
-    const JsonMember* format = root.kind == Json::Kind::object ? member(root, "format") : nullptr;
-    problems.add(format ? format->value.offset : root.offset,
-                 refused("format", PW_TEXT("File", "This is not a study of Planewright."),
-                         PW_TEXT("File", "A study begins with \"format\": \"%1\".").with(studyFormat)));
-    return;
-  }
-  const JsonMember* version = member(root, "version");
-  if (!version) {
-    problems.add(root.offset, refused("version", PW_TEXT("File", "The version of the file is missing."),
-                                      PW_TEXT("File", "Write \"version\": 1.")));
-    return;
-  }
-  const Json& value = version->value;
-  int number = 0;
-  const char* end = value.text.data() + value.text.size();
-  const auto [parsed, error] = std::from_chars(value.text.data(), end, number);
-  const bool isWhole = value.kind == Json::Kind::number && parsed == end;
-  if (isWhole && (error == std::errc::result_out_of_range || number > studyFileVersion))
-    problems.add(value.offset, "version",
-                 PW_TEXT("File", "This file has version %1; this program reads version 1.").with(value.text),
-                 PW_TEXT("File", "Open it with a newer Planewright; the file is left as it is."));
-  else if (!isWhole || number < 1)
-    problems.add(value.offset, "version", PW_TEXT("File", "The version of a file is a whole number from 1."),
-                 PW_TEXT("File", "Write \"version\": 1."));
-}
-
 } // namespace
 
 Results<Study> readStudy(std::string_view bytes) {
@@ -283,7 +215,10 @@ Results<Study> readStudy(std::string_view bytes) {
   if (!root)
     return tl::unexpected(problems.taken());
   FileProblems head(bytes);
-  checkHead(*root, head);
+  checkHead(*root,
+            {studyFormat, studyFileVersion, PW_TEXT("File", "This is not a study of Planewright."),
+             PW_TEXT("File", "A study begins with \"format\": \"%1\".")},
+            head);
   if (!head.empty())
     return tl::unexpected(head.taken());
   Reading reading{problems, problems.empty()};

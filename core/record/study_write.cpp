@@ -1,22 +1,11 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/record/json_writer.h"
+#include "core/record/material_json.h"
 #include "core/record/study_file.h"
-#include "core/study/text_fields.h"
+#include "core/record/typed_texts.h"
 
 namespace planewright {
 
 namespace {
-
-void put(JsonWriter& json, const char* key, std::string_view text) {
-  json.key(key).text(text);
-}
-
-/// The texts of a thing by the keys of their spots.
-template <class Thing>
-void putTexts(JsonWriter& json, const Thing& thing) {
-  for (const TextField<Thing>& field : textFieldsOf<Thing>())
-    json.key(rowOf(field.spot).key()).text(thing.*field.text);
-}
 
 /// An object that holds nothing but texts.
 template <class Thing>
@@ -55,30 +44,6 @@ void put(JsonWriter& json, const Combination& one) {
     json.key(factor.caseId).text(factor.factor);
   json.endObject();
   put(json, "basis", wordOf(one.basis));
-  json.endObject();
-}
-
-/// The texts that are not empty.
-template <class Thing>
-void putGivenTexts(JsonWriter& json, const Thing& thing) {
-  for (const TextField<Thing>& field : textFieldsOf<Thing>())
-    if (!(thing.*field.text).empty())
-      json.key(rowOf(field.spot).key()).text(thing.*field.text);
-}
-
-void put(JsonWriter& json, const Material& material) {
-  json.beginObject();
-  put(json, "name", material.name);
-  put(json, "kind", wordOf(material.kind));
-  put(json, "basis", wordOf(material.basis));
-  putGivenTexts(json, material);
-  if (material.kind == MaterialKind::throat)
-    put(json, "seam", wordOf(material.seam));
-  if (material.durations != DurationTexts{}) {
-    json.key("duration_factors").beginObject();
-    putGivenTexts(json, material.durations);
-    json.endObject();
-  }
   json.endObject();
 }
 
