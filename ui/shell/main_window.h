@@ -18,6 +18,7 @@ class ElementView;
 class FigureDialog;
 class GivenPanel;
 class HelpWindow;
+class MaterialsDialog;
 class PlanesPanel;
 class SlipDialog;
 class WorkingDialog;
@@ -64,9 +65,10 @@ protected:
   void closeEvent(QCloseEvent* event) override;
 
 private:
-  /// Makes a dialog that follows the study when it is first asked for, and shows it.
-  template <class Dialog>
-  void bringUp(QPointer<Dialog>& dialog);
+  /// Makes a dialog that follows the study when it is first asked for, and shows it; `more` is what it is
+  /// made of besides the study.
+  template <class Dialog, class... More>
+  void bringUp(QPointer<Dialog>& dialog, const More&... more);
   void build();
   void connectViews();
   void restoreGeometryAndSizes();
@@ -118,6 +120,7 @@ private:
   QPointer<TitleDialog> m_title;
   QPointer<SlipDialog> m_slips;
   QPointer<WorkingDialog> m_working;
+  QPointer<MaterialsDialog> m_materials;
   QPointer<ThingsDialog> m_cases;
   QPointer<ThingsDialog> m_combinations;
   QPointer<ThingsDialog> m_points;

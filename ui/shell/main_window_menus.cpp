@@ -12,6 +12,7 @@
 #include "ui/shell/governing_words.h"
 #include "ui/shell/help_window.h"
 #include "ui/shell/main_window.h"
+#include "ui/shell/materials_dialog.h"
 #include "ui/shell/picker.h"
 #include "ui/shell/recent_files.h"
 #include "ui/shell/slip_dialog.h"
@@ -37,10 +38,10 @@ QAction* MainWindow::add(QMenu& menu, const QString& words, const QKeySequence& 
   return action;
 }
 
-template <class Dialog>
-void MainWindow::bringUp(QPointer<Dialog>& dialog) {
+template <class Dialog, class... More>
+void MainWindow::bringUp(QPointer<Dialog>& dialog, const More&... more) {
   if (!dialog)
-    dialog = new Dialog(m_desk, this);
+    dialog = new Dialog(m_desk, more..., this);
   dialog->show();
   dialog->raise();
   dialog->activateWindow();
@@ -168,6 +169,10 @@ void MainWindow::addListsOfStudy(QMenu& menu) {
     settleDrafts();
     auto* dialog = new BuildDialog(m_desk, this);
     dialog->show();
+  });
+  add(menu, tr("Mate&rials…"), {}, [this] {
+    settleDrafts();
+    bringUp(m_materials, ownMaterialsPath());
   });
 }
 
