@@ -32,8 +32,9 @@ bool agreement(const CheckResult& result, const Quantity& quantity) {
 
 Result<CheckResult> judged(CheckResult result) {
   const CheckInputs inputs(result.inputs);
-  Result<Quantity> quantity = inputs.word("shape") ? quantityOfSection(inputs, result.quantity, result.unit)
-                                                   : quantityOfState(inputs, result.quantity);
+  Result<Quantity> quantity = inputs.word("criterion") ? quantityOfStrength(inputs, result.quantity)
+                              : inputs.word("shape") ? quantityOfSection(inputs, result.quantity, result.unit)
+                                                     : quantityOfState(inputs, result.quantity);
   if (!quantity)
     return tl::unexpected(std::move(quantity).error());
   result.computed = quantity->value;

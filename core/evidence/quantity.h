@@ -22,4 +22,9 @@ Result<Quantity> quantityOfState(const CheckInputs& inputs, std::string_view wor
 /// result, from which sizes in mm are known where it is another.
 Result<Quantity> quantityOfSection(const CheckInputs& inputs, std::string_view word, std::string_view unit);
 
+/// Of a state (or of sn and tnt on a plane) and strengths, by the inputs criterion, theta (of the line or the
+/// plane's normal) and Xt Xc Yt Yc S, f, cohesion friction cutoff, fu beta_w gamma_M2: u, factor (the load
+/// multiplier), sigma_eq (the utilisation times f). Any one unit of stress.
+Result<Quantity> quantityOfStrength(const CheckInputs& inputs, std::string_view word);
+
 } // namespace planewright

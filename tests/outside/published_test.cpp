@@ -31,7 +31,7 @@ std::vector<std::string> rowsOfAllFiles() {
   std::vector<std::string> rows;
   for (const ShippedChecks& file : shippedChecks()) {
     const std::vector<std::string> lines = linesOf(file.name);
-    EXPECT_GT(lines.size(), 40u) << file.name;
+    EXPECT_GE(lines.size(), 40u) << file.name;
     rows.insert(rows.end(), lines.begin() + 1, lines.end());
   }
   return rows;
