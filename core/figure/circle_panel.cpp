@@ -2,6 +2,7 @@
 #include "core/figure/circle_panel.h"
 
 #include "core/figure/circle_axes.h"
+#include "core/figure/failure_drawing.h"
 #include "core/figure/signs.h"
 #include "core/figure/strokes.h"
 #include "core/figure/text_lines.h"
@@ -222,6 +223,15 @@ void drawRound(const CircleDrawing& drawing) {
   drawCentre(drawing);
 }
 
+/// The strengths of checked planes, under marks and labels.
+void drawFailure(Picture& picture, const Setting& setting, const CircleFit& fit) {
+  const double reach = (fit.frame.right - fit.frame.left) / fit.scale + std::abs(fit.mean);
+  const FailureFrame frame{[&fit](const Traction& at) { return fit.at(at); }, fit.frame, setting.narrow,
+                           setting.small, setting.order.translate};
+  const Picture failure = failureDrawing(frame, failureLinesOf(setting.readout, reach));
+  picture.parts.insert(picture.parts.end(), failure.parts.begin(), failure.parts.end());
+}
+
 /// Labels are left out from the least wanted on: watched planes first.
 CircleLabels outcomeOf(const PlacedLabels& placed, const std::vector<Mark>& marks) {
   const std::size_t without = marks.size() - placed.labels.size();
@@ -249,6 +259,7 @@ CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box
     place(wishes[i], fit.at(marks[i].at), fit.columns);
   const PlacedLabels placed = placeLabels(wishes, fit.columns);
   drawCircleAxes(picture, setting, fit);
+  drawFailure(picture, setting, fit);
   picture.parts.insert(picture.parts.end(), placed.leaders.begin(), placed.leaders.end());
   const CircleDrawing drawing{picture, setting, fit, marks};
   if (fit.radius > 0)

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/figure.h"
 
+#include "core/figure/check_panel.h"
 #include "core/figure/circle_panel.h"
 #include "core/figure/element_panel.h"
 #include "core/figure/figure_words.h"
@@ -140,6 +141,8 @@ Result<Picture> figureOf(const Study& study, const Readout& readout, const Figur
   drawPictures(sheet);
   if (order.parts.planes)
     sheet.bottom = drawPlanes(picture, sheet.setting, sheet.left, sheet.right, sheet.bottom);
+  if (order.parts.check || order.parts.utilisation)
+    sheet.bottom = drawCheck(picture, sheet.setting, sheet.left, sheet.right, sheet.bottom);
   sheet.bottom = drawClosing(picture, sheet.setting, sheet.left, sheet.right, sheet.bottom, sheet.unnamed);
   if (!sheet.fits)
     return tl::unexpected(crowdedProblem(order));

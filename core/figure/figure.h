@@ -16,7 +16,9 @@ struct FigureParts {
   bool circle = true;
   bool planes = true;
   bool combination = true;
-  bool version = true; ///< of the program, in the last row
+  bool version = true;     ///< of the program, in the last row
+  bool check = true;       ///< what the checks of the point come to, where it has any
+  bool utilisation = true; ///< over the angle of the governing check
   bool operator==(const FigureParts&) const = default;
 };
 

@@ -24,7 +24,7 @@ void put(JsonWriter& json, const Material& material) {
   put(json, "kind", wordOf(material.kind));
   put(json, "basis", wordOf(material.basis));
   putGivenTexts(json, material);
-  if (material.kind == MaterialKind::throat)
+  if (material.kind == MaterialKind::throat || material.seam != Seam::fillet)
     put(json, "seam", wordOf(material.seam));
   if (material.durations != DurationTexts{}) {
     json.key("duration_factors").beginObject();

@@ -43,6 +43,7 @@ struct CheckSetup {
 /// direction.
 struct CheckReading {
   StrengthFactor factor;
+  bool hasFactor = true;          ///< false: the factors of the material do not give one for this combination
   std::optional<Problem> problem; ///< why the combination could not be judged
   Judgement nominal;
   Judgement worst;

@@ -147,8 +147,11 @@ CheckReading judged(const Readout& readout, const StateReading& state, const Che
                     const Factors& factors) {
   CheckReading reading;
   reading.pairing = pairingOf(setup.basis, factors, setup.strengths.kind, state.basis);
-  const Result<StrengthFactor> factor = factorOf(factors, shortestOf(readout, state));
+  const bool scales = setup.strengths.kind != MaterialKind::throat; // it carries its own partial factor
+  const Result<StrengthFactor> factor =
+      scales ? factorOf(factors, shortestOf(readout, state)) : Result<StrengthFactor>(StrengthFactor{});
   if (!factor) {
+    reading.hasFactor = false;
     reading.problem = factor.error();
     return reading;
   }

@@ -86,7 +86,7 @@ Text verdictSentence(const Verdict& verdict) {
 Text checkName(const CheckSetup& check) {
   const Text name = PW_TEXT("Check", "%1, %2").with(check.material).with(labelOf(check.criterion));
   const std::string& direction = check.line.empty() ? check.plane : check.line;
-  return direction.empty() ? name : PW_TEXT("Check", "%1, %2").with(name).with(direction);
+  return direction.empty() ? name : PW_TEXT("Check", "%1: %2").with(direction).with(name);
 }
 
 Text shownWorst(const CheckReading& reading) {
@@ -119,7 +119,11 @@ Text worstSentence(const CheckSetup& check, const CheckReading& reading) {
 }
 
 Text factorSentence(const StrengthFactor& factor) {
-  const auto number = [](double value) { return shownNumber(value, decimalsFor(value, 4)); };
+  // Factors are short decimals; their quotient is cut to four digits.
+  const auto number = [](double value) {
+    const double scale = std::pow(10.0, decimalsFor(value, 4));
+    return exactNumber(std::round(value * scale) / scale);
+  };
   if (factor.origin == FactorOrigin::none)
     return PW_TEXT("Check", "Strengths with factor 1.");
   if (factor.origin == FactorOrigin::given)

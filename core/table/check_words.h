@@ -16,7 +16,7 @@ Text shortVerdict(const Verdict& verdict);
 /// "Stress at this point within the stated strengths." and its kin.
 Text verdictSentence(const Verdict& verdict);
 
-/// "GL24h, sum of squares, grain".
+/// "grain: GL24h, sum of squares".
 Text checkName(const CheckSetup& check);
 /// The utilisation with its limit, or why there is none: "0.87", "no finite number", "not judged".
 Text shownWorst(const CheckReading& reading);

@@ -50,6 +50,44 @@ TEST_F(Resolve, givesTheGoldenNumbers) {
   EXPECT_THAT(ran.out, HasSubstr("\"typed\""));
 }
 
+// The corner of norris-plane inside a band: golden numbers, own arithmetic by two routes; C24 from memory.
+TEST_F(Resolve, judgesByTheGoldenCorner) {
+  put("corner.planewright", R"({"format":"planewright-study","version":1,
+ "materials":[{"name":"C24","kind":"timber","basis":"characteristic","source":"EN 338:2016","trust":"from memory",
+   "along_tension":"14.5 MPa","along_compression":"21 MPa","across_tension":"0.4 MPa","across_compression":"2.5 MPa",
+   "shear":"4 MPa"}],
+ "points":[{"name":"P1","stress":{"G":{"sx":"-0.08 MPa","sy":"4.36 MPa","txy":"0.085 MPa"}},
+   "line":{"name":"grain","kind":"grain","angle":"94 deg","tolerance":"5 deg"},
+   "checks":[{"id":"grain","material":"C24","criterion":"norris-plane","line":"grain","parameters":{}}]}]})");
+  const Ran ran = run("resolve corner.planewright --format json");
+  ASSERT_EQ(ran.exit, 0) << ran.err;
+  EXPECT_NEAR(numberAt(ran.out, "utilisation", "\"checks\""), 0.323415, 5e-7);
+  EXPECT_NEAR(numberAt(ran.out, "worst_utilisation"), 0.330724, 5e-7);
+  EXPECT_NEAR(numberAt(ran.out, "worst_angle"), -83.3065, 5e-5);
+  EXPECT_NEAR(numberAt(ran.out, "utilisation", "\"governing\""), 0.330724, 5e-7);
+  EXPECT_THAT(ran.out, HasSubstr("not a design check"));
+}
+
+TEST_F(Resolve, saysByItsExitThatSomethingExceedsOrCouldNotBeJudged) {
+  const auto judged = [this](const std::string& sx, const std::string& criterion) {
+    const std::string material =
+        R"({"name":"steel","kind":"isotropic","basis":"design","source":"invented","tension":"235 MPa"})";
+    const std::string check = R"({"id":"steel","material":"steel","criterion":")" + criterion + "\"}";
+    put("judged.planewright", R"({"format":"planewright-study","version":1,"materials":[)" + material +
+                                  R"(],"points":[{"name":"P1","stress":{"G":{"sx":")" + sx +
+                                  R"( MPa"}},"checks":[)" + check + "]}]}");
+    return run("resolve judged.planewright");
+  };
+  EXPECT_EQ(judged("235", "von-mises").exit, 0) << "exactly at the limit";
+  const Ran exceeds = judged("235.1", "von-mises");
+  EXPECT_EQ(exceeds.exit, 1);
+  EXPECT_THAT(exceeds.err, HasSubstr("exceeds, 1.01"));
+  EXPECT_THAT(exceeds.out, HasSubstr("exceeds the stated strengths"));
+  const Ran unjudged = judged("1", "rankine");
+  EXPECT_EQ(unjudged.exit, 1);
+  EXPECT_THAT(unjudged.err, HasSubstr("not judged"));
+}
+
 TEST_F(Resolve, takesCompressionAsPositive) {
   const Ran ran = run("resolve --sx=-80 --sy -20 --txy 30 --positive compression --format json");
   ASSERT_EQ(ran.exit, 0) << ran.err;
@@ -93,7 +131,7 @@ TEST_F(Resolve, writesEveryFormatToAFileOrStandardOutput) {
 
 TEST_F(Resolve, readsAStudyFromAFileAndFromStandardInput) {
   const Ran file = run("resolve \"$demo\" --format json --normal 12");
-  EXPECT_EQ(file.exit, 0) << file.err;
+  EXPECT_EQ(file.exit, 1) << "a check of the worked example exceeds";
   EXPECT_THAT(file.out, HasSubstr("\"normal 1\""));
   EXPECT_EQ(shell("\"$program\" resolve - --format json --normal 12 <\"$demo\"").out, file.out);
 }

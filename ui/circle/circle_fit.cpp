@@ -47,6 +47,27 @@ double scaleFor(const Needs& needs, const QRectF& plot) {
   return std::min(greatestScale(needs.x, plot.width()), greatestScale(needs.y, plot.height()));
 }
 
+/// The least multiple of the shown loads that brings a checked plane to its limit, so far as a circle of it
+/// can still be told from the shown one.
+std::optional<double> multiplierToLimit(const Readout& readout) {
+  constexpr double most = 20;
+  std::optional<double> least;
+  const StateReading& state = readout.state();
+  for (std::size_t i = 0; i < state.checks.size(); ++i)
+    if (!readout.checks[i].plane.empty() && !state.checks[i].problem)
+      if (const std::optional<double> one = state.checks[i].worst.multiplier;
+          one && *one > 0 && *one < most && (!least || *one < *least))
+        least = one;
+  return least;
+}
+
+Circle scaled(Circle circle, double factor) {
+  circle.s1 *= factor;
+  circle.s2 *= factor;
+  circle.radius *= factor;
+  return circle;
+}
+
 bool isZero(const Circle& circle) {
   return circle.radius == 0 && circle.mean == 0;
 }
@@ -92,6 +113,10 @@ EqualScale fittedCircle(const Study& study, const Readout& readout, Fit fit, con
   if (fit == Fit::allCombinations || isZero(circle))
     for (const StateReading* other : others)
       addCircle(needs, study, other->circle, {edgeGap, edgeGap}, edgeGap);
+
+  if (fit == Fit::withLimit)
+    if (const std::optional<double> multiplier = multiplierToLimit(readout))
+      addCircle(needs, study, scaled(circle, *multiplier), {edgeGap, edgeGap}, edgeGap);
 
   Needs withOrigin = needs;
   withOrigin.x.push_back({0, 0, edgeGap, edgeGap});

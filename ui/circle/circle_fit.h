@@ -7,7 +7,8 @@
 namespace planewright {
 
 /// Which circles the axes are fitted to.
-enum class Fit { thisCircle, allCombinations };
+/// `withLimit`: the shown circle and the circle of the load that would bring its worst plane to the limit.
+enum class Fit { thisCircle, allCombinations, withLimit };
 
 /// Sizes of the drawing in pixels.
 namespace circle_size {

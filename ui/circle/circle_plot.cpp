@@ -2,9 +2,10 @@
 #include "ui/circle/circle_plot.h"
 
 #include "ui/circle/circle_words.h"
+#include "ui/circle/failure_layer.h"
 #include "ui/circle/others.h"
-#include "ui/circle/picture_item.h"
 #include "ui/circle/ranges.h"
+#include "ui/paint/picture_item.h"
 
 #include <QChart>
 #include <QGraphicsPathItem>
@@ -18,6 +19,7 @@ namespace {
 
 // The order of the layers. The frame draws its grid and axes at 3, the chart its series at 4.
 constexpr double underFrame = 2.5;
+constexpr double failureDepth = 3.3;
 constexpr double rangesDepth = 3.4;
 constexpr double wordsDepth = 3.6;
 constexpr double leadersDepth = 3.8;
@@ -48,10 +50,11 @@ CirclePlot::CirclePlot(Desk& desk, QWidget* parent)
     : EqualScaleFrame(parent), m_desk(desk), m_circle(new QLineSeries(chart())), m_plotClip(newClip(chart())),
       m_shape(newPath(m_plotClip, 0)), m_hairlines(newPath(m_plotClip, 1)),
       m_extremes(newPath(m_plotClip, 2)), m_old(newPath(m_plotClip, 3)), m_near(newPath(m_plotClip, 4)),
-      m_ranges(new PictureItem(chart(), rangesDepth)), m_words(new PictureItem(chart(), wordsDepth)),
-      m_leaders(new PictureItem(chart(), leadersDepth)), m_still(new PictureItem(chart(), overSeries)),
-      m_reading(new PictureItem(chart(), overSeries + 1)), m_ear(new PictureItem(chart(), overSeries + 2)),
-      m_names(new PictureItem(chart(), overSeries + 3)), m_focus(new PictureItem(chart(), overSeries + 4)) {
+      m_failure(new PictureItem(chart(), failureDepth)), m_ranges(new PictureItem(chart(), rangesDepth)),
+      m_words(new PictureItem(chart(), wordsDepth)), m_leaders(new PictureItem(chart(), leadersDepth)),
+      m_still(new PictureItem(chart(), overSeries)), m_reading(new PictureItem(chart(), overSeries + 1)),
+      m_ear(new PictureItem(chart(), overSeries + 2)), m_names(new PictureItem(chart(), overSeries + 3)),
+      m_focus(new PictureItem(chart(), overSeries + 4)) {
   attach(m_circle);
   setFocusPolicy(Qt::StrongFocus);
   viewport()->setMouseTracking(true);
@@ -102,6 +105,7 @@ void CirclePlot::arrange() {
   arrangeCircle();
   arrangeOthers();
   arrangeLabels();
+  m_failure->show(failureLayer(now), look());
   m_ranges->show(rangesLayer(now), look());
   m_still->show(stillLayer(now), look());
   arrangeHandles();

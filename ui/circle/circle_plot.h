@@ -100,6 +100,7 @@ private:
   QGraphicsPathItem* m_extremes;
   QGraphicsPathItem* m_old; ///< the circle as it was before its ear was drawn
   QGraphicsPathItem* m_near;
+  PictureItem* m_failure;
   PictureItem* m_ranges;
   PictureItem* m_words;
   PictureItem* m_leaders;

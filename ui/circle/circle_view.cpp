@@ -33,12 +33,17 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
   auto* group = new QActionGroup(menu);
   m_this = group->addAction(tr("This circle"));
   m_all = group->addAction(tr("All combinations"));
+  m_limit = group->addAction(tr("With the limit of checked planes"));
   for (QAction* action : group->actions())
     action->setCheckable(true);
   menu->addActions(group->actions());
   connect(m_this, &QAction::triggered, this, &CircleView::fit);
   connect(m_all, &QAction::triggered, this, [this] {
     m_plot->setFit(Fit::allCombinations);
+    showFit();
+  });
+  connect(m_limit, &QAction::triggered, this, [this] {
+    m_plot->setFit(Fit::withLimit);
     showFit();
   });
   m_menu->setMenu(menu);
@@ -74,9 +79,11 @@ void CircleView::fit() {
 }
 
 void CircleView::showFit() {
-  const bool all = m_plot->fit() == Fit::allCombinations;
-  (all ? m_all : m_this)->setChecked(true);
-  m_menu->setText(all ? tr("fit: all combinations") : tr("fit: this circle"));
+  const Fit now = m_plot->fit();
+  (now == Fit::allCombinations ? m_all : now == Fit::withLimit ? m_limit : m_this)->setChecked(true);
+  m_menu->setText(now == Fit::allCombinations ? tr("fit: all combinations")
+                  : now == Fit::withLimit     ? tr("fit: with the limit")
+                                              : tr("fit: this circle"));
   m_menu->setAccessibleName(m_menu->text());
 }
 

@@ -38,6 +38,7 @@ private:
   QuietButton* m_menu;
   QAction* m_this;
   QAction* m_all;
+  QAction* m_limit;
 };
 
 } // namespace planewright

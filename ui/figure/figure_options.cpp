@@ -93,6 +93,8 @@ void FigureOptions::buildParts() {
   addSwitch(*rows, tr("Element at the reading plane"), &parts.turnedElement);
   addSwitch(*rows, tr("Circle"), &parts.circle);
   addSwitch(*rows, tr("Table of planes"), &parts.planes);
+  addSwitch(*rows, tr("Check"), &parts.check);
+  addSwitch(*rows, tr("Utilisation over the angle"), &parts.utilisation);
   auto* conventions = new QCheckBox(tr("Conventions"), this);
   conventions->setChecked(true);
   conventions->setEnabled(false);

@@ -17,10 +17,13 @@ struct PartKey {
   const char* key;
   bool FigureParts::*part;
 };
-constexpr std::array partKeys = {
-    PartKey{"figure/title", &FigureParts::title}, PartKey{"figure/given", &FigureParts::givenElement},
-    PartKey{"figure/turned", &FigureParts::turnedElement}, PartKey{"figure/circle", &FigureParts::circle},
-    PartKey{"figure/planes", &FigureParts::planes}};
+constexpr std::array partKeys = {PartKey{"figure/title", &FigureParts::title},
+                                 PartKey{"figure/given", &FigureParts::givenElement},
+                                 PartKey{"figure/turned", &FigureParts::turnedElement},
+                                 PartKey{"figure/circle", &FigureParts::circle},
+                                 PartKey{"figure/planes", &FigureParts::planes},
+                                 PartKey{"figure/check", &FigureParts::check},
+                                 PartKey{"figure/utilisation", &FigureParts::utilisation}};
 
 QString keyOf(const char* key) {
   return QString::fromLatin1(key);

@@ -3,9 +3,11 @@
 
 #include "core/quantity/format.h"
 #include "core/study/fresh_name.h"
+#include "core/study/slope_edits.h"
 #include "core/table/table.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/given/echoes.h"
+#include "ui/given/faces_dialog.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 
@@ -31,11 +33,13 @@ std::string freeName(const Point& point, LineKind kind) {
 LineGroup::LineGroup(Desk& desk, std::size_t index, QWidget* parent)
     : FoldGroup(index == 0 ? tr("Line") : tr("Second line"), Role::ink, parent), m_desk(desk), m_index(index),
       m_kind(new QuietButton({}, Role::line, this)),
+      m_slopes(new QuietButton(tr("Slope of unknown sense"), Role::focus, this)),
       m_second(new QuietButton(tr("Second line"), Role::focus, this)), m_sentence(new QLabel(this)) {
   buildKinds();
   addName();
   addAngle();
   addTolerance();
+  buildSlopes();
   m_fields.move(0, 2);
   m_sentence->setWordWrap(true);
   m_sentence->setForegroundRole(QPalette::PlaceholderText);
@@ -67,6 +71,36 @@ void LineGroup::buildSecond() {
   row->addStretch();
   body().addLayout(row);
   connect(m_second, &QAbstractButton::clicked, this, [this] { addLine(LineKind::bond); });
+}
+
+/// A slope whose sense is unknown comes first: taken to one side only it may hide the worse one.
+void LineGroup::buildSlopes() {
+  auto* menu = new QMenu(m_slopes);
+  for (const int run : {8, 10, 12, 15, 20})
+    menu->addAction(tr("within 1 in %1 either way").arg(run), this,
+                    [this, run] { takeEitherWay("1 in " + exactNumber(run)); });
+  menu->addSeparator();
+  menu->addAction(tr("true slope from two faces…"), this, [this] {
+    auto* dialog = new FacesDialog(this);
+    dialog->setAttribute(Qt::WA_DeleteOnClose);
+    connect(dialog, &QDialog::accepted, this, [this, dialog] { takeEitherWay(dialog->slope()); });
+    dialog->open();
+  });
+  m_slopes->setMenu(menu);
+  m_slopes->setToolTip(tr("The slope of a grain whose sense is not known: angle 0, the slope as tolerance"));
+  auto* row = new QHBoxLayout;
+  row->addWidget(m_slopes);
+  row->addStretch();
+  body().addLayout(row);
+}
+
+void LineGroup::takeEitherWay(const std::string& slope) {
+  const Line* own = line(m_desk.study());
+  if (!own)
+    return;
+  if (const auto problem = m_desk.request(withinEitherWay(shownPoint(m_desk.study()).name, own->name, slope),
+                                          m_desk.newGesture(), tr("slope of unknown sense")))
+    m_desk.say(shown(*problem));
 }
 
 void LineGroup::buildKinds() {
@@ -115,7 +149,7 @@ void LineGroup::addTolerance() {
 }
 
 QList<QWidget*> LineGroup::buttons() const {
-  return {m_kind, m_second};
+  return {m_kind, m_slopes, m_second};
 }
 
 void LineGroup::addLine(LineKind kind) {
@@ -161,6 +195,7 @@ void LineGroup::refresh() {
     field->setVisible(own);
   m_fields.back()->setVisible(own && (m_nameWanted || !isNamedByKind()));
   m_kind->menu()->actions().at(m_kind->menu()->actions().size() - 2)->setEnabled(own);
+  m_slopes->setVisible(own && own->kind == LineKind::grain);
   m_second->setVisible(m_index == 0 && shownPoint(m_desk.study()).lines.size() == 1);
   m_sentence->setText(sentence());
   setSummary(summary());

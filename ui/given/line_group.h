@@ -28,6 +28,8 @@ private:
   const Line* line(const Study& study) const;
   EntryBinding boundToLine(Spot spot) const;
   void buildKinds();
+  void buildSlopes();
+  void takeEitherWay(const std::string& slope);
   void buildSecond();
   void addField(EntryBinding binding, EntryWords words);
   void addName();
@@ -45,6 +47,7 @@ private:
   Desk& m_desk;
   std::size_t m_index;
   QuietButton* m_kind;
+  QuietButton* m_slopes;
   QuietButton* m_second;
   bool m_nameWanted = false;
   QList<EntryField*> m_fields;

@@ -15,7 +15,8 @@ namespace planewright {
 
 PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
     : QWidget(parent), m_tabs(new QuietTabs(this)), m_pages(new QStackedWidget(this)),
-      m_planes(new PlanesPage(desk, m_pages)), m_sweep(new SweepPage(desk, m_pages)) {
+      m_planes(new PlanesPage(desk, m_pages)), m_sweep(new SweepPage(desk, m_pages)),
+      m_copy(new QuietButton(tr("Copy table"), Role::focus, this)) {
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
   setAccessibleName(tr("Planes"));
@@ -23,13 +24,12 @@ PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
   m_tabs->addTab(tr("Sweep"));
   m_pages->addWidget(m_planes);
   m_pages->addWidget(m_sweep);
-  auto* copy = new QuietButton(tr("Copy table"), Role::focus, this);
-  copy->setToolTip(tr("Copies the table for a spreadsheet and for a document"));
+  m_copy->setToolTip(tr("Copies the table for a spreadsheet and for a document"));
   auto* line = new QHBoxLayout;
   line->setContentsMargins(4, 0, 8, 0);
   line->addWidget(m_tabs);
   line->addStretch();
-  line->addWidget(copy);
+  line->addWidget(m_copy);
   auto* rows = new QVBoxLayout(this);
   rows->setContentsMargins(0, 4, 0, 0);
   rows->setSpacing(2);
@@ -38,16 +38,36 @@ PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
   setFocusProxy(m_planes);
   connect(m_tabs, &QTabBar::tabBarClicked, this, &PlanesPanel::showPage);
   connect(m_tabs, &QTabBar::currentChanged, this, &PlanesPanel::showPage);
-  connect(copy, &QAbstractButton::clicked, this, &PlanesPanel::copyShown);
+  connect(m_copy, &QAbstractButton::clicked, this, &PlanesPanel::copyShown);
   showPage(0);
 }
 
 void PlanesPanel::showPage(int index) {
   m_pages->setCurrentIndex(index);
   setFocusProxy(m_pages->currentWidget());
+  m_copy->setVisible(index < 2);
   setProperty("areaKeys",
-              index == 0 ? tr("F2 edit, Enter go there, Ctrl+Enter other solution, Ins watch, Del remove")
-                         : tr("Enter brings the reading plane here, Ctrl+C copies"));
+              index == 2   ? m_pages->currentWidget()->property("areaKeys").toString()
+              : index == 0 ? tr("F2 edit, Enter go there, Ctrl+Enter other solution, Ins watch, Del remove")
+                           : tr("Enter brings the reading plane here, Ctrl+C copies"));
+}
+
+void PlanesPanel::adopt(QWidget* page, const QString& title) {
+  m_pages->addWidget(page);
+  m_tabs->addTab(title);
+}
+
+void PlanesPanel::release() {
+  constexpr int adopted = 2;
+  if (m_tabs->count() <= adopted)
+    return;
+  m_tabs->setCurrentIndex(0);
+  m_tabs->removeTab(adopted);
+  showPage(0);
+}
+
+void PlanesPanel::showAdopted() {
+  m_tabs->setCurrentIndex(m_tabs->count() - 1);
 }
 
 void PlanesPanel::copyShown() {

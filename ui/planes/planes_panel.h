@@ -10,6 +10,7 @@ class QStackedWidget;
 namespace planewright {
 
 class PlanesPage;
+class QuietButton;
 class QuietTabs;
 class SweepPage;
 
@@ -25,6 +26,12 @@ public:
   QuietTabs& tabs() const { return *m_tabs; }
   QSize sizeHint() const override { return {830, 300}; }
 
+  /// Takes another page behind its own, under a tab of this title, and gives it back.
+  void adopt(QWidget* page, const QString& title);
+  void release();
+  /// Shows the page that was adopted.
+  void showAdopted();
+
 private:
   void showPage(int index);
   void copyShown();
@@ -33,6 +40,7 @@ private:
   QStackedWidget* m_pages;
   PlanesPage* m_planes;
   SweepPage* m_sweep;
+  QuietButton* m_copy;
 };
 
 } // namespace planewright

@@ -9,12 +9,20 @@
 
 namespace planewright {
 
+namespace {
+
+constexpr int leastForStrength = 1280;
+constexpr int strengthWidth = 340;
+
+} // namespace
+
 BodySizes sizesIn(QSize body, int leastPlanes) {
   constexpr int roomy = 1100;
   constexpr int greatestDrawing = 900;
   BodySizes sizes;
   sizes.given = body.width() < roomy ? 264 : 300;
-  const int rest = std::max(0, body.width() - sizes.given);
+  sizes.strength = body.width() < leastForStrength ? 0 : strengthWidth;
+  const int rest = std::max(0, body.width() - sizes.given - sizes.strength);
   sizes.element = rest * 48 / 100;
   sizes.circle = rest - sizes.element;
   sizes.planes = std::max(body.height() * 35 / 100, leastPlanes);
@@ -26,7 +34,8 @@ BodySizes sizesIn(QSize body, int leastPlanes) {
 Body::Body(const Panels& panels, QWidget* parent)
     : QWidget(parent), m_columns(splitter(Qt::Horizontal, QStringLiteral("columns"))),
       m_rows(splitter(Qt::Vertical, QStringLiteral("rows"))),
-      m_drawings(splitter(Qt::Horizontal, QStringLiteral("drawings"))), m_planes(panels.planes) {
+      m_drawings(splitter(Qt::Horizontal, QStringLiteral("drawings"))), m_planes(panels.planes),
+      m_strength(panels.strength) {
   auto* layout = new QHBoxLayout(this);
   layout->setContentsMargins(0, 0, 0, 0);
   layout->addWidget(m_columns);
@@ -57,20 +66,23 @@ QSplitter* Body::splitter(Qt::Orientation orientation, const QString& name) {
   return made;
 }
 
+/// With and without a column of strengths the sizes are kept apart.
+QString Body::keyOf(const QSplitter& splitter) {
+  return QStringLiteral("splitters/%1%2").arg(splitter.objectName()).arg(splitter.count());
+}
+
 void Body::store(QSettings& settings) const {
-  for (const QSplitter* one : splitters()) {
-    const QString key = QStringLiteral("splitters/") + one->objectName();
+  for (const QSplitter* one : splitters())
     if (m_ownSizes)
-      settings.setValue(key, one->saveState());
+      settings.setValue(keyOf(*one), one->saveState());
     else
-      settings.remove(key);
-  }
+      settings.remove(keyOf(*one));
 }
 
 void Body::restore(const QSettings& settings) {
   for (QSplitter* one : splitters())
-    m_ownSizes |=
-        one->restoreState(settings.value(QStringLiteral("splitters/") + one->objectName()).toByteArray());
+    m_ownSizes |= one->restoreState(settings.value(keyOf(*one)).toByteArray());
+  m_threeColumns = settings.value(QStringLiteral("splitters/columns3")).toByteArray();
 }
 
 void Body::resetSizes() {
@@ -80,13 +92,36 @@ void Body::resetSizes() {
   const int leastPlanes =
       std::max(m_planes->minimumSizeHint().height(), leastRows * (fontMetrics().height() + 7));
   const BodySizes sizes = sizesIn(size(), leastPlanes);
-  m_columns->setSizes({sizes.given, sizes.element + sizes.circle});
-  m_drawings->setSizes({sizes.element, sizes.circle});
+  if (m_strength && m_columns->indexOf(m_strength) >= 0)
+    m_columns->setSizes({sizes.given, sizes.element + sizes.circle, sizes.strength});
+  else
+    m_columns->setSizes({sizes.given, sizes.element + sizes.circle + sizes.strength});
+  const int drawings = m_strength && m_columns->indexOf(m_strength) < 0 ? sizes.strength : 0;
+  m_drawings->setSizes({sizes.element + drawings * 48 / 100, sizes.circle + drawings * 52 / 100});
   m_rows->setSizes({sizes.drawings, sizes.planes});
+}
+
+bool Body::hasRoomForStrength() const {
+  return width() >= leastForStrength;
+}
+
+void Body::showStrength() {
+  m_columns->addWidget(m_strength);
+  m_columns->setStretchFactor(2, 0);
+  m_columns->handle(2)->setAutoFillBackground(true);
+  m_columns->handle(2)->setBackgroundRole(QPalette::Mid);
+  m_strength->show();
+  m_ownSizes = m_columns->restoreState(m_threeColumns);
 }
 
 void Body::resizeEvent(QResizeEvent* event) {
   QWidget::resizeEvent(event);
+  if (m_strength && m_hadRoom != hasRoomForStrength()) {
+    m_hadRoom = !m_hadRoom;
+    if (m_hadRoom)
+      showStrength();
+    emit roomForStrengthChanged(m_hadRoom);
+  }
   if (!m_ownSizes)
     resetSizes();
 }

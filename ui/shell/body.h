@@ -14,6 +14,7 @@ struct Panels {
   QWidget* element = nullptr;
   QWidget* circle = nullptr;
   QWidget* planes = nullptr;
+  QWidget* strength = nullptr; ///< stands beside the others only where there is room
 };
 
 /// The sizes that the body gives its panels until the user moves a splitter.
@@ -23,10 +24,12 @@ struct BodySizes {
   int circle = 0;   ///< width
   int drawings = 0; ///< height of element and circle
   int planes = 0;   ///< height
+  int strength = 0; ///< width; 0 where it has no column of its own
 };
 
-/// For a body of this size: Given 300 wide, 264 below 1100; element to circle as 48 to 52; the planes 35 % of
-/// the height, at least `leastPlanes`, and what the drawings do not need above 900.
+/// For a body of this size: Given 300 wide, 264 below 1100; Strength 340 from 1280 on; element to circle as
+/// 48 to 52; the planes 35 % of the height, at least `leastPlanes`, and what the drawings do not need above
+/// 900.
 BodySizes sizesIn(QSize body, int leastPlanes);
 
 /// Given at the left; element and circle over the planes at the right. Splitters between them, never at 0.
@@ -42,10 +45,18 @@ public:
   /// Gives the panels the sizes of the window again.
   void resetSizes();
 
+  /// Whether the body is wide enough for a column of strengths.
+  bool hasRoomForStrength() const;
+
+signals:
+  void roomForStrengthChanged(bool room);
+
 protected:
   void resizeEvent(QResizeEvent* event) override;
 
 private:
+  static QString keyOf(const QSplitter& splitter);
+  void showStrength();
   QSplitter* splitter(Qt::Orientation orientation, const QString& name);
   QList<QSplitter*> splitters() const { return {m_columns, m_rows, m_drawings}; }
 
@@ -53,7 +64,10 @@ private:
   QSplitter* m_rows;
   QSplitter* m_drawings;
   QWidget* m_planes;
-  bool m_ownSizes = false; ///< the user moved a splitter
+  QWidget* m_strength;
+  bool m_hadRoom = false;
+  QByteArray m_threeColumns; ///< sizes that the user chose with a column of strengths
+  bool m_ownSizes = false;   ///< the user moved a splitter
 };
 
 } // namespace planewright

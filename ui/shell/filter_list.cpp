@@ -8,6 +8,10 @@
 #include <QTreeWidget>
 #include <QVBoxLayout>
 
+#include <algorithm>
+#include <functional>
+#include <numeric>
+
 namespace planewright {
 
 FilterList::FilterList(const QStringList& names, const ListDetails& details, const QString& current,
@@ -40,7 +44,11 @@ void FilterList::fill(const QStringList& names, const ListDetails& details) {
   m_list->setStyleSheet(QStringLiteral(
       "QTreeView::item { padding: 3px 6px; } QHeaderView::section { background: palette(base); border: none; "
       "border-bottom: 1px solid palette(mid); padding: 3px 6px; }"));
-  for (qsizetype i = 0; i < names.size(); ++i) {
+  QList<qsizetype> order(names.size());
+  std::iota(order.begin(), order.end(), 0);
+  if (details.weights.size() == names.size())
+    std::ranges::stable_sort(order, std::greater(), [&](qsizetype i) { return details.weights[i]; });
+  for (const qsizetype i : order) {
     auto* item = new QTreeWidgetItem(m_list, {names[i], details.values.value(i), details.remarks.value(i)});
     item->setToolTip(0, names[i]);
     item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);

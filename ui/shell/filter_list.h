@@ -18,6 +18,7 @@ struct ListDetails {
   QString valueMeaning; ///< the heading's tooltip
   QStringList values;
   QStringList remarks;
+  QList<double> weights = {}; ///< the heaviest stands first; in the order of the names without them
 };
 
 /// A list that pops up under a picker: typing filters it, Enter or a click chooses, Escape leaves. It lives

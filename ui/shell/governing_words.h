@@ -7,16 +7,21 @@
 
 namespace planewright {
 
-/// By what a combination governs its point, in a few words and in a sentence; empty where it does not.
-QString governsBriefly(const Governs& governs);
-QString governsInWords(const Governs& governs);
+/// By what a state governs its point, in a few words and in a sentence; empty where it does not. Where
+/// something is checked that is the utilisation, else the greatest stresses.
+QString governsBriefly(const Readout& readout, std::size_t state);
+QString governsInWords(const Readout& readout, std::size_t state);
 
-/// What stands behind the names of the combinations: the normal stress on the reading plane, and which
-/// govern.
+/// What stands behind the names of the combinations: the utilisation where something is checked, else the
+/// normal stress on the reading plane, and which govern.
 ListDetails combinationDetails(const Study& study, const Readout& readout);
 
-/// Shows the combination that governs the shown point: by the greatest s1, or where that is shown already by
-/// the greatest shear in the plane.
+/// What stands behind the names of the points: the worst utilisation of each and its combination. Nothing
+/// where no point is checked.
+ListDetails pointDetails(const Study& study);
+
+/// Shows the combination that governs the shown point: by its utilisation, or where nothing is checked by the
+/// greatest s1 and, where that is shown already, by the greatest shear in the plane.
 void showGoverningCombination(Desk& desk);
 /// The same over all points of the study, with the point.
 void showGoverningPoint(Desk& desk);

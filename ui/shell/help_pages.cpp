@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/help_pages.h"
 
+#include "core/strength/criterion.h"
+
 #include <QCoreApplication>
 
 namespace planewright {
@@ -57,6 +59,42 @@ the element show what the body feels and do not change.</p>
 )help"));
 }
 
+/// One row of the table of criteria, from core's own.
+QString criterionRow(Criterion criterion) {
+  const CriterionRow& row = rowOf(criterion);
+  const QString domain = row.domain.empty() ? QString() : QStringLiteral("<br>") + shown(row.domain);
+  return QStringLiteral("<tr><td><b>%1</b></td><td>%2%3<br><i>%4</i></td></tr>")
+      .arg(shown(labelOf(criterion)), QString::fromUtf8(row.equation), domain, shown(row.source));
+}
+
+QString strength() {
+  QString rows;
+  for (const Named<Criterion>& one : namesOf<Criterion>())
+    rows += criterionRow(one.value);
+  return words(QT_TRANSLATE_NOOP("Help", R"help(
+<p>A check asks whether the stresses of a point are within the strengths of a material, along and across its line or on a
+watched plane, over all combinations and over the tolerance of the angle. Take a material into the study (Study,
+Materials), then Strength, Add a check.</p>
+<p><b>Utilisation</b> is 1 over the load multiplier: the factor on all loads together that brings the point to its limit.
+It is rounded upwards, the multiplier downwards. For planes with friction it is the mobilised ratio, since clamping grows
+with the loads too.</p>
+<p><b>Strength belongs to the combination:</b> characteristic strengths are multiplied by the factor of the shortest duration
+that acts and divided by the partial factor, or multiplied by a factor of your own. So a permanent combination can govern
+though its stresses are lower. Where stresses come from section forces, the strength along the line is that of the mix of
+axial and bending parts.</p>
+<p><b>The tolerance counts always:</b> the worst of the band is exact, not scanned. A slope of grain whose sense is not known is
+entered as angle 0 with the slope as tolerance (Line, Slope of unknown sense): the sense of τ<sub>xy</sub> decides whether
+the grain is pulled or pressed across.</p>
+<p>The plot shows utilisation over the angle: the shown combination as a full line, the greatest of all dashed, the others as
+hairs; the limit is hatched, the tolerance a strip, the worst a triangle, angles within the limit a bar on the base line.
+Drag the line's cursor to try other angles. "All criteria side by side" shows how much of the answer is the criterion.</p>
+<p>A combination outside what a criterion was published for is not judged, and then nothing is said of the point.</p>
+<p>1 = along the line, 2 = across it, τ = shear; X and Y by the sign of the stress.</p>
+<table cellpadding="4">%1</table>
+)help"))
+      .arg(rows);
+}
+
 QString keys() {
   return words(QT_TRANSLATE_NOOP("Help", R"help(
 <table cellpadding="4">
@@ -73,9 +111,10 @@ QString keys() {
 <tr><td><b>Insert, Delete</b></td><td>in Planes: watch the reading plane; remove</td></tr>
 <tr><td><b>Ctrl+PageUp, Ctrl+PageDown</b></td><td>previous, next point</td></tr>
 <tr><td><b>Alt+PageUp, Alt+PageDown</b></td><td>previous, next combination</td></tr>
-<tr><td><b>Ctrl+G</b></td><td>the combination with the greatest σ<sub>1</sub> at this point; again: the greatest shear in the plane</td></tr>
+<tr><td><b>Ctrl+G</b></td><td>the combination with the greatest utilisation at this point; without checks the greatest σ<sub>1</sub>, again: the greatest shear in the plane</td></tr>
 <tr><td><b>Ctrl+Shift+G</b></td><td>the same over all points of the study</td></tr>
 <tr><td><b>Ctrl+Shift+V</b></td><td>paste a table of stresses or section forces</td></tr>
+<tr><td><b>Ctrl+1, Ctrl+2</b></td><td>the point with its drawings; the summary of all points</td></tr>
 <tr><td><b>Ctrl+E, Ctrl+0</b></td><td>arrange the figure; fit the circle</td></tr>
 <tr><td><b>Ctrl+N, O, S, P, Q, Z, C; F11</b></td><td>as everywhere</td></tr>
 </table>
@@ -107,6 +146,8 @@ QString titleOf(HelpPage page) {
     return words(QT_TRANSLATE_NOOP("Help", "Entries and units"));
   case HelpPage::conventions:
     return words(QT_TRANSLATE_NOOP("Help", "Conventions"));
+  case HelpPage::strength:
+    return words(QT_TRANSLATE_NOOP("Help", "Strength"));
   case HelpPage::keys:
     return words(QT_TRANSLATE_NOOP("Help", "Keys"));
   case HelpPage::cautions:
@@ -118,6 +159,7 @@ QString titleOf(HelpPage page) {
 QString htmlOf(HelpPage page, const Look& look) {
   const QString body = page == HelpPage::entries       ? entries()
                        : page == HelpPage::conventions ? conventions()
+                       : page == HelpPage::strength    ? strength()
                        : page == HelpPage::keys        ? keys()
                                                        : cautions();
   return QStringLiteral("<body style=\"color:%1\"><h2>%2</h2>%3</body>")

@@ -8,8 +8,8 @@
 namespace planewright {
 
 /// The pages of Help, in their order.
-enum class HelpPage { entries, conventions, keys, cautions };
-inline constexpr int helpPageCount = 4;
+enum class HelpPage { entries, conventions, strength, keys, cautions };
+inline constexpr int helpPageCount = 5;
 
 QString titleOf(HelpPage page);
 /// The page as HTML; its pictures are named "picture:given" and "picture:turned".

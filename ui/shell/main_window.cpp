@@ -18,8 +18,11 @@
 #include "ui/shell/status_line.h"
 #include "ui/shell/strip.h"
 #include "ui/shell/title_dialog.h"
+#include "ui/shell/verdict_chip.h"
 #include "ui/shell/window_icon.h"
 #include "ui/shell/worked_example.h"
+#include "ui/strength/strength_panel.h"
+#include "ui/strength/summary_page.h"
 
 #include <QApplication>
 #include <QCloseEvent>
@@ -29,6 +32,7 @@
 #include <QMimeData>
 #include <QPushButton>
 #include <QSettings>
+#include <QStackedWidget>
 #include <QVBoxLayout>
 
 namespace planewright {
@@ -50,8 +54,10 @@ MainWindow::MainWindow(FileQuestions questions)
       m_stateBar(new StateBar(m_desk, this)), m_welcome(new Strip(this)), m_trouble(new Strip(this)),
       m_given(new GivenPanel(m_desk)), m_element(new ElementView(m_desk)),
       m_circle(new CircleView(m_desk, nullptr)), m_planes(new PlanesPanel(m_desk)),
-      m_body(new Body({m_given, m_element, m_circle, m_planes}, this)), m_status(new StatusLine(this)),
-      m_areas(new Areas({m_stateBar, m_given, m_element, m_circle, m_planes}, this)) {
+      m_strength(new StrengthPanel(m_desk)), m_summary(new SummaryPage(m_desk)),
+      m_body(new Body({m_given, m_element, m_circle, m_planes, m_strength}, this)),
+      m_pages(new QStackedWidget(this)), m_status(new StatusLine(this)),
+      m_areas(new Areas({m_stateBar, m_given, m_element, m_circle, m_planes, m_strength, m_summary}, this)) {
   build();
   addFileMenu();
   addEditMenu();
@@ -80,7 +86,10 @@ void MainWindow::build() {
   rows->addWidget(m_stateBar);
   rows->addWidget(m_trouble);
   rows->addWidget(m_welcome);
-  rows->addWidget(m_body, 1);
+  m_planes->adopt(m_strength, tr("Strength"));
+  m_pages->addWidget(m_body);
+  m_pages->addWidget(m_summary);
+  rows->addWidget(m_pages, 1);
   rows->addWidget(m_status);
   setCentralWidget(page);
   setWindowIcon(windowIcon());
@@ -95,6 +104,17 @@ void MainWindow::connectViews() {
   connect(m_desk.undoStack(), &QUndoStack::cleanChanged, this, [this] { showTitle(); });
   connect(m_given, &GivenPanel::entriesNotTaken, m_status, &StatusLine::setNotTaken);
   connect(m_circle, &CircleView::angleEntryWanted, m_given, &GivenPanel::focusReading);
+  connect(m_given, &GivenPanel::entriesNotTaken, this,
+          [this](int count, const QString&) { m_stateBar->verdict().setNotTaken(count); });
+  connect(&m_stateBar->verdict(), &QAbstractButton::clicked, this, &MainWindow::enterStrength);
+  connect(m_strength, &StrengthPanel::materialsWanted, this, &MainWindow::showMaterials);
+  connect(m_summary, &SummaryPage::opened, this, &MainWindow::showPointPage);
+  connect(m_body, &Body::roomForStrengthChanged, this, [this](bool room) {
+    if (room)
+      m_planes->release();
+    else
+      m_planes->adopt(m_strength, tr("Strength"));
+  });
   connect(m_status, &StatusLine::notTakenClicked, m_given, &GivenPanel::focusNextProblem);
   connect(m_status, &StatusLine::actionClicked, m_desk.undoStack(), &QUndoStack::undo);
   connect(m_areas, &Areas::focusMoved, this, [this] { m_status->setKeys(m_areas->keys()); });
@@ -180,6 +200,25 @@ void MainWindow::settleDrafts() {
   }
 }
 
+void MainWindow::showPointPage() {
+  m_pages->setCurrentWidget(m_body);
+  Areas::enter(*m_given);
+}
+
+void MainWindow::showSummary() {
+  settleDrafts();
+  m_pages->setCurrentWidget(m_summary);
+  m_summary->setFocus();
+}
+
+void MainWindow::enterStrength() {
+  if (m_pages->currentWidget() != m_body)
+    m_pages->setCurrentWidget(m_body);
+  if (!m_body->hasRoomForStrength())
+    m_planes->showAdopted();
+  Areas::enter(*m_strength);
+}
+
 void MainWindow::arrangeFigure() {
   settleDrafts();
   if (!m_figure) {
@@ -199,9 +238,10 @@ HelpWindow& MainWindow::help() {
 
 void MainWindow::helpOnFocus() {
   const QWidget* area = m_areas->current();
-  help().showPage(area == m_given                         ? HelpPage::entries
-                  : area == m_element || area == m_circle ? HelpPage::conventions
-                                                          : HelpPage::keys);
+  help().showPage(area == m_given                           ? HelpPage::entries
+                  : area == m_element || area == m_circle   ? HelpPage::conventions
+                  : area == m_strength || area == m_summary ? HelpPage::strength
+                                                            : HelpPage::keys);
 }
 
 bool MainWindow::event(QEvent* event) {

@@ -8,6 +8,7 @@
 #include <QPointer>
 
 class QMenu;
+class QStackedWidget;
 
 namespace planewright {
 
@@ -23,6 +24,8 @@ class PlanesPanel;
 class SlipDialog;
 class WorkingDialog;
 class StateBar;
+class StrengthPanel;
+class SummaryPage;
 class StatusLine;
 class Strip;
 class ThingsDialog;
@@ -51,12 +54,19 @@ public:
   ElementView& element() const { return *m_element; }
   CircleView& circle() const { return *m_circle; }
   PlanesPanel& planes() const { return *m_planes; }
+  StrengthPanel& strength() const { return *m_strength; }
+  SummaryPage& summary() const { return *m_summary; }
   /// The strip that greets, and the one that tells of files.
   Strip& welcome() const { return *m_welcome; }
   Strip& trouble() const { return *m_trouble; }
 
 public slots:
   void arrangeFigure();
+  /// The point with its drawings and tables; all points in one table.
+  void showPointPage();
+  void showSummary();
+  void enterStrength();
+  void showMaterials();
   void openWorkedExample();
 
 protected:
@@ -110,7 +120,10 @@ private:
   ElementView* m_element;
   CircleView* m_circle;
   PlanesPanel* m_planes;
+  StrengthPanel* m_strength;
+  SummaryPage* m_summary;
   Body* m_body;
+  QStackedWidget* m_pages;
   StatusLine* m_status;
   Areas* m_areas;
   QMenu* m_recent = nullptr;

@@ -170,10 +170,12 @@ void MainWindow::addListsOfStudy(QMenu& menu) {
     auto* dialog = new BuildDialog(m_desk, this);
     dialog->show();
   });
-  add(menu, tr("Mate&rials…"), {}, [this] {
-    settleDrafts();
-    bringUp(m_materials, ownMaterialsPath());
-  });
+  add(menu, tr("Mate&rials…"), {}, [this] { showMaterials(); });
+}
+
+void MainWindow::showMaterials() {
+  settleDrafts();
+  bringUp(m_materials, ownMaterialsPath());
 }
 
 void MainWindow::addViewMenu() {
@@ -185,6 +187,9 @@ void MainWindow::addViewMenu() {
       add(menu, tr("&Snap to named directions"), {}, [this](bool on) { m_element->setSnapping(on); });
   snapping->setCheckable(true);
   snapping->setChecked(m_element->snaps());
+  add(menu, tr("&Point"), Qt::CTRL | Qt::Key_1, [this] { showPointPage(); });
+  add(menu, tr("Su&mmary of all points"), Qt::CTRL | Qt::Key_2, [this] { showSummary(); });
+  menu.addSeparator();
   add(menu, tr("&Fit the circle"), Qt::CTRL | Qt::Key_0, [this] { m_circle->fit(); });
   menu.addSeparator();
   add(menu, tr("Next area"), Qt::Key_F6, [this] { m_areas->next(); });

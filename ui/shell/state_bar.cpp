@@ -4,6 +4,7 @@
 #include "ui/look/look.h"
 #include "ui/shell/governing_words.h"
 #include "ui/shell/picker.h"
+#include "ui/shell/verdict_chip.h"
 
 #include <QHBoxLayout>
 #include <QLabel>
@@ -21,13 +22,15 @@ constexpr int roomy = 1100;
 StateBar::StateBar(Desk& desk, QWidget* parent)
     : QWidget(parent), m_desk(desk), m_points(new Picker(tr("Point"), tr("Ctrl"), this)),
       m_combinations(new Picker(tr("Combination"), tr("Alt"), this)),
-      m_governs(new QLabel(tr("governs here"), this)), m_figure(new QPushButton(tr("Figure…"), this)) {
+      m_governs(new QLabel(tr("governs here"), this)), m_verdict(new VerdictChip(desk, this)),
+      m_figure(new QPushButton(tr("Figure…"), this)) {
   auto* row = new QHBoxLayout(this);
   row->setContentsMargins(12, 0, 12, 0);
   row->setSpacing(20);
   row->addWidget(m_points);
   row->addWidget(m_combinations);
   row->addWidget(m_governs);
+  row->addWidget(m_verdict);
   row->addStretch();
   row->addWidget(m_figure);
   setFixedHeight(barHeight);
@@ -39,6 +42,7 @@ StateBar::StateBar(Desk& desk, QWidget* parent)
           [this](const QString& name) { m_desk.show(name.toStdString(), m_desk.study().shown.combination); });
   connect(m_combinations, &Picker::chosen, this,
           [this](const QString& name) { m_desk.show(m_desk.study().shown.point, name.toStdString()); });
+  m_points->setDetails([this] { return pointDetails(m_desk.study()); });
   m_combinations->setDetails([this] { return combinationDetails(m_desk.study(), m_desk.readout()); });
   connect(&m_desk, &Desk::changed, this, &StateBar::refresh);
   refresh();
@@ -57,10 +61,10 @@ void StateBar::refresh() {
 }
 
 void StateBar::refreshGoverns() {
-  const Governs how = governs(m_desk.readout(), m_desk.readout().state());
-  m_governs->setToolTip(governsInWords(how));
-  m_governs->setAccessibleDescription(governsInWords(how));
-  m_governs->setVisible(how && width() >= roomy);
+  const QString how = governsInWords(m_desk.readout(), m_desk.readout().shown);
+  m_governs->setToolTip(how);
+  m_governs->setAccessibleDescription(how);
+  m_governs->setVisible(!how.isEmpty() && width() >= roomy);
 }
 
 void StateBar::resizeEvent(QResizeEvent* event) {

@@ -11,6 +11,7 @@ class QPushButton;
 namespace planewright {
 
 class Picker;
+class VerdictChip;
 
 /// Says what one looks at: point and combination, and whether that governs; leads to the figure.
 class StateBar : public QWidget {
@@ -25,6 +26,7 @@ public:
   Picker& combinations() const { return *m_combinations; }
   /// "governs here", while the shown combination does and the window is wide enough.
   QLabel& governsHere() const { return *m_governs; }
+  VerdictChip& verdict() const { return *m_verdict; }
   QPushButton& figureButton() const { return *m_figure; }
 
 protected:
@@ -38,6 +40,7 @@ private:
   Picker* m_points;
   Picker* m_combinations;
   QLabel* m_governs;
+  VerdictChip* m_verdict;
   QPushButton* m_figure;
 };
 

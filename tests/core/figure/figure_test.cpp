@@ -162,7 +162,7 @@ TEST(Figure, saysWhatItShows) {
 
 TEST(Figure, leavesOutWhatIsNotAsked) {
   FigureOrder order = wide(160);
-  order.parts = {false, false, false, false, false, false, false};
+  order.parts = {false, false, false, false, false, false, false, false, false};
   const std::string words = wordsOf(figure(studyOf(notch()), order));
   for (const char* left : {"P1", "case G", "Given axes", "Circle", "Plane\n", "Planewright"})
     EXPECT_EQ(words.find(left), std::string::npos) << left;

@@ -5,6 +5,7 @@
 #include "core/record/json.h"
 #include "core/study/edit.h"
 #include "tests/support/approved.h"
+#include "tests/support/judged_study.h"
 
 #include <gtest/gtest.h>
 
@@ -71,6 +72,15 @@ TEST(ReadoutFile, combinationsOfTwoPointsAsApproved) {
   EXPECT_TRUE(matchesApproved("record/combined.json", readoutJson(study, readouts)));
   EXPECT_TRUE(matchesApproved("record/combined.csv", readoutCsv(study, readouts)));
   EXPECT_TRUE(matchesApproved("record/combined.txt", readoutText(study, {readouts.back()})));
+}
+
+TEST(ReadoutFile, checksAsApproved) {
+  Study study = judgedStudy();
+  study.points[0].checks.push_back({"uniaxial", "C24", Criterion::hankinson, "grain", "", {}});
+  const auto readouts = readoutsOf(study);
+  EXPECT_TRUE(matchesApproved("record/judged.json", readoutJson(study, readouts)));
+  EXPECT_TRUE(matchesApproved("record/judged.csv", readoutCsv(study, readouts)));
+  EXPECT_TRUE(matchesApproved("record/judged.txt", readoutText(study, readouts)));
 }
 
 TEST(ReadoutFile, aNewStudyAsApproved) {

@@ -2,7 +2,7 @@
 #include "ui/circle/ranges.h"
 
 #include "tests/ui/circle/panel.h"
-#include "ui/circle/picture_item.h"
+#include "ui/paint/picture_item.h"
 
 #include <gtest/gtest.h>
 

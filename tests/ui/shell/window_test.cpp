@@ -15,6 +15,7 @@
 #include "ui/shell/status_line.h"
 #include "ui/shell/strip.h"
 #include "ui/shell/worked_example.h"
+#include "ui/strength/strength_panel.h"
 
 #include <QAbstractItemView>
 #include <QApplication>
@@ -242,8 +243,8 @@ TEST_F(WindowTest, aDragThatEndsWhereItBeganSaysNothing) {
 TEST_F(WindowTest, f6GoesRoundTheAreasAndComesBackToWhereItWas) {
   MainWindow& window = shown();
   QWidget* start = QApplication::focusWidget();
-  const QList<QWidget*> order{&window.element(), &window.circle(), &window.planes(), &window.stateBar(),
-                              &window.given()};
+  const QList<QWidget*> order{&window.element(),  &window.circle(),   &window.planes(),
+                              &window.strength(), &window.stateBar(), &window.given()};
   for (QWidget* area : order) {
     QTest::keyClick(QApplication::focusWidget(), Qt::Key_F6);
     QWidget* focused = QApplication::focusWidget();
@@ -260,8 +261,8 @@ TEST_F(WindowTest, f6GoesRoundTheAreasAndComesBackToWhereItWas) {
 
 TEST_F(WindowTest, tabGoesThroughEveryAreaAndComesBackToWhereItWas) {
   MainWindow& window = shown();
-  const QList<QWidget*> areas{&window.given(), &window.element(), &window.circle(), &window.planes(),
-                              &window.stateBar()};
+  const QList<QWidget*> areas{&window.given(),  &window.element(),  &window.circle(),
+                              &window.planes(), &window.strength(), &window.stateBar()};
   for (const bool forward : {true, false}) {
     QWidget* start = QApplication::focusWidget();
     QList<QWidget*> visited;

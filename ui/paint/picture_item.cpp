@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/circle/picture_item.h"
+#include "ui/paint/picture_item.h"
 
 #include "core/figure/metrics.h"
 #include "ui/paint/painter.h"

@@ -1,0 +1,24 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/study/judge_checks.h"
+
+namespace planewright {
+
+/// What the strengths of a plane look like on the circle, in N/mm2 and the sense of signs of the study.
+struct FailureLine {
+  std::string check;                ///< its id
+  std::vector<Traction> upper;      ///< from the side of compression to that of tension, tnt >= 0
+  std::optional<NormalAngle> touch; ///< the plane of the shown state that comes nearest to it, or is worst
+  Traction touchAt;
+  /// From the checked plane to its limit: at the same sn for a Coulomb plane, whose clamping resists, else
+  /// along the ray on which all loads grow. None where no multiple reaches the limit.
+  std::optional<Traction> marginEnd;
+  Traction planeAt; ///< the checked plane, at its nominal normal
+};
+
+/// Those of the checks on planes that the shown state is judged by; `reach` is how far from 0 the line is
+/// wanted, N/mm2, on the side of compression.
+std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach);
+
+} // namespace planewright

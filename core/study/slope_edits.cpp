@@ -1,0 +1,35 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/study/slope_edits.h"
+
+#include "core/strength/slope_of_faces.h"
+
+namespace planewright {
+
+namespace {
+
+Result<Angle> slopeIn(std::string_view text, const char* place) {
+  Result<Entry> entry = readEntry(text, {dimension::angle, degreeUnit(), Slopes::line});
+  if (entry)
+    return Angle::fromDegrees(entry->value);
+  Problem problem = std::move(entry).error();
+  problem.place = place;
+  return tl::unexpected(std::move(problem));
+}
+
+} // namespace
+
+Edits withinEitherWay(const std::string& point, const std::string& line, const std::string& slope) {
+  return {Type{{Spot::lineAngle, point, line}, "0 deg"}, Type{{Spot::lineTolerance, point, line}, slope}};
+}
+
+Result<Angle> trueSlopeOf(std::string_view a, std::string_view b) {
+  const Result<Angle> first = slopeIn(a, "a");
+  if (!first)
+    return first;
+  const Result<Angle> second = slopeIn(b, "b");
+  if (!second)
+    return second;
+  return slopeOfFaces(*first, *second);
+}
+
+} // namespace planewright

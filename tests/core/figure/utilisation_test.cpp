@@ -1,0 +1,138 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/figure/failure_line.h"
+#include "core/figure/figure.h"
+#include "core/figure/metrics.h"
+#include "core/figure/utilisation_drawing.h"
+#include "tests/support/judged_study.h"
+#include "tests/support/picture_parts.h"
+
+#include <gtest/gtest.h>
+
+#include <cmath>
+
+namespace planewright {
+namespace {
+
+Readout readout() {
+  return evaluate(judgedStudy());
+}
+
+TEST(UtilisationCurves, areTheJudgesAtEachDirection) {
+  const Readout now = readout();
+  const UtilisationCurves curves = utilisationCurvesOf(now, 0);
+  const Result<Judge> shown = judgeOf(now, now.state(), 0);
+  ASSERT_GE(curves.shown.size(), 181);
+  EXPECT_EQ(curves.shown.front().x, -90);
+  EXPECT_EQ(curves.shown.back().x, 90);
+  for (std::size_t i = 0; i < curves.shown.size(); ++i) {
+    EXPECT_EQ(curves.shown[i].y, shown->utilisation(Angle::fromDegrees(curves.shown[i].x)));
+    EXPECT_GE(curves.greatest[i].y, curves.shown[i].y);
+  }
+  EXPECT_EQ(curves.others.size(), 1);
+}
+
+TEST(UtilisationCurves, ofManyCombinationsLeaveTheOthersOut) {
+  Study study = judgedStudy();
+  for (int i = 0; i < 30; ++i)
+    study.combinations.push_back({"c" + std::to_string(i), {{"G", "1.1"}}, Basis::design});
+  const UtilisationCurves curves = utilisationCurvesOf(evaluate(study), 0);
+  EXPECT_TRUE(curves.others.empty());
+  EXPECT_FALSE(curves.greatest.empty());
+}
+
+TEST(UtilisationFrame, mapsBothWays) {
+  for (const bool logarithmic : {false, true}) {
+    const UtilisationFrame frame = utilisationFrameIn({0, 0, 300, 200}, 10, 1, 37, logarithmic, {});
+    EXPECT_EQ(frame.highest, logarithmic ? 100 : 2);
+    for (const double degrees : {-90.0, -12.5, 0.0, 90.0})
+      EXPECT_NEAR(frame.degreesAt(frame.xOf(degrees)), degrees, 1e-9);
+    EXPECT_NEAR(frame.yOf(1e9), frame.plot.top, 1e-9);
+    EXPECT_NEAR(frame.yOf(0), frame.plot.bottom, 1e-9);
+  }
+}
+
+TEST(UtilisationLines, endAtTheTopOfThePlot) {
+  const UtilisationFrame frame = utilisationFrameIn({0, 0, 300, 200}, 10, 1, 5, false, {});
+  const UtilisationCurve curve = {{-90, 1}, {-45, 3}, {0, 4}, {45, 1}, {90, beyondEveryLimit}};
+  const std::vector<Path> lines = utilisationLines(frame, curve, {});
+  ASSERT_EQ(lines.size(), 2);
+  EXPECT_NEAR(lines[0].points.back().y, frame.plot.top, 1e-9);
+  EXPECT_NEAR(lines[0].points.back().x, frame.xOf(-67.5), 1e-9);
+  EXPECT_NEAR(lines[1].points.front().y, frame.plot.top, 1e-9);
+  EXPECT_NEAR(lines[1].points.back().y, frame.plot.top, 1e-9);
+}
+
+TEST(UtilisationGround, labelsNeverOverlap) {
+  const Readout now = readout();
+  for (const double width : {200.0, 300.0, 500.0}) {
+    const UtilisationFrame frame = utilisationFrameIn({0, 0, width, 0.8 * width}, 11, 1, 2, false, {});
+    const Picture picture = utilisationGround(frame, now.checks[0], directionsOf(now, 0), {});
+    const std::vector<Label> labels = partsOf<Label>(picture);
+    for (std::size_t i = 0; i < labels.size(); ++i)
+      for (std::size_t j = 0; j < i; ++j)
+        EXPECT_FALSE(overlap(boxOf(labels[i]), boxOf(labels[j])))
+            << plain(labels[i].runs) << " and " << plain(labels[j].runs) << " at " << width;
+  }
+}
+
+TEST(FailureLine, isWhereTheUtilisationIsOne) {
+  using enum StrengthKey;
+  for (const MaterialKind kind : {MaterialKind::coulomb, MaterialKind::throat, MaterialKind::bond}) {
+    Study study = judgedStudy();
+    Material& material = study.materials[1];
+    material = Material{};
+    material.name = "glue";
+    material.kind = kind;
+    if (kind == MaterialKind::coulomb) {
+      material.cohesion = "2 MPa";
+      material.friction = "30 deg";
+      material.cutoff = "0.5 MPa";
+    } else if (kind == MaterialKind::throat) {
+      material.fu = "360 MPa";
+      material.betaW = "0.8";
+      material.gammaM2 = "1.25";
+    } else {
+      material.tension = "1 MPa";
+      material.shear = "3 MPa";
+    }
+    study.points[0].checks[1].criterion = criteriaFor(kind).front();
+    for (const Positive positive : {Positive::tension, Positive::compression}) {
+      study.convention.positive = positive;
+      const Readout now = evaluate(study);
+      const std::vector<FailureLine> lines = failureLinesOf(now, 50);
+      ASSERT_EQ(lines.size(), 1);
+      const double sense = positive == Positive::tension ? 1 : -1;
+      for (const Traction& at : lines.front().upper) {
+        Strengths strengths = now.checks[1].strengths;
+        const auto judge =
+            Judge::of(now.checks[1].criterion, strengths, {}, {{sense * at.sn, 0, at.tnt}, 0, 1e-9, 0});
+        const double utilisation = judge->utilisation({});
+        const bool isCorner = at.tnt == 0;
+        EXPECT_TRUE(isCorner || std::abs(utilisation - 1) < 1e-9)
+            << wordOf(kind) << ' ' << at.sn << ' ' << at.tnt;
+      }
+    }
+  }
+}
+
+TEST(Figure, carriesTheCheckAndItsPlot) {
+  const Study study = judgedStudy();
+  for (const double width : {90.0, 160.0}) {
+    FigureOrder order;
+    order.width = width;
+    const Result<Picture> with = figureOf(study, evaluate(study), order);
+    ASSERT_TRUE(with);
+    order.parts.check = order.parts.utilisation = false;
+    const Result<Picture> without = figureOf(study, evaluate(study), order);
+    ASSERT_TRUE(without);
+    EXPECT_GT(with->height, without->height + 30);
+    std::string words;
+    for (const Label& label : partsOf<Label>(*with))
+      words += plain(label.runs) + "\n";
+    EXPECT_NE(words.find("Stress at this point"), std::string::npos);
+    EXPECT_NE(words.find("licensed engineer"), std::string::npos);
+  }
+}
+
+} // namespace
+} // namespace planewright

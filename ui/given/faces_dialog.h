@@ -1,0 +1,37 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/words/problem.h"
+
+#include <QDialog>
+
+class QLabel;
+class QLineEdit;
+class QPushButton;
+
+namespace planewright {
+
+/// Asks for the slopes of a grain on two faces and tells the true one. It changes nothing itself.
+class FacesDialog : public QDialog {
+  Q_OBJECT
+
+public:
+  explicit FacesDialog(QWidget* parent);
+
+  QLineEdit& first() const { return *m_first; }
+  QLineEdit& second() const { return *m_second; }
+  QString told() const;
+  /// The true slope as a text of a tolerance, "5.71 deg".
+  std::string slope() const { return m_slope; }
+
+private:
+  void refresh();
+
+  QLineEdit* m_first;
+  QLineEdit* m_second;
+  QLabel* m_told;
+  QPushButton* m_take;
+  std::string m_slope;
+};
+
+} // namespace planewright

@@ -1,0 +1,95 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/strength/side_by_side.h"
+
+#include "core/strength/cautions.h"
+#include "core/strength/shown_ratio.h"
+#include "core/study/check_edits.h"
+#include "core/study/verdict.h"
+#include "core/table/check_words.h"
+#include "ui/look/look.h"
+
+#include <QDialogButtonBox>
+#include <QHeaderView>
+#include <QLabel>
+#include <QTreeWidget>
+#include <QVBoxLayout>
+
+#include <algorithm>
+
+namespace planewright {
+
+namespace {
+
+/// The shown state where it is judged, else the one that governs.
+std::size_t stateFor(const Readout& readout, std::size_t check) {
+  if (readout.state().judged)
+    return readout.shown;
+  const Verdict verdict = verdictOfCheck(readout, check);
+  return verdict.governing ? verdict.governing->state : verdict.unjudged->state;
+}
+
+QString remarkOf(const SideBySide& row, const CheckSetup& setup) {
+  if (row.problem)
+    return shown(row.problem->what);
+  const std::optional<Angle> line = setup.band ? std::optional(setup.band->nominal) : std::nullopt;
+  const std::vector<Text> cautions = cautionsOf(row.criterion, setup.strengths, setup.parameters, line);
+  return cautions.empty() ? QString() : shown(cautions.front());
+}
+
+} // namespace
+
+SideBySideDialog::SideBySideDialog(Desk& desk, std::string check, QWidget* parent)
+    : QDialog(parent), m_desk(desk), m_check(std::move(check)), m_heading(new QLabel(this)),
+      m_table(new QTreeWidget(this)) {
+  setWindowTitle(tr("All criteria side by side"));
+  setAttribute(Qt::WA_DeleteOnClose);
+  m_heading->setWordWrap(true);
+  m_table->setHeaderLabels({tr("criterion"), tr("nominal"), tr("worst"), tr("remark")});
+  m_table->headerItem()->setTextAlignment(1, Qt::AlignRight);
+  m_table->headerItem()->setTextAlignment(2, Qt::AlignRight);
+  m_table->setRootIsDecorated(false);
+  m_table->setUniformRowHeights(true);
+  m_table->header()->setSectionResizeMode(QHeaderView::ResizeToContents);
+  m_table->setAccessibleName(tr("Utilisation by every criterion"));
+  auto* buttons = new QDialogButtonBox(QDialogButtonBox::Close, this);
+  connect(buttons, &QDialogButtonBox::rejected, this, &QDialog::close);
+  auto* rows = new QVBoxLayout(this);
+  rows->addWidget(m_heading);
+  rows->addWidget(m_table, 1);
+  rows->addWidget(buttons);
+  resize(720, 420);
+  connect(&m_desk, &Desk::changed, this, &SideBySideDialog::refresh);
+  refresh();
+}
+
+void SideBySideDialog::refresh() {
+  const Readout& readout = m_desk.readout();
+  const auto at = std::ranges::find(readout.checks, m_check, &CheckSetup::id);
+  m_table->clear();
+  if (at == readout.checks.end()) {
+    m_heading->setText(tr("This point has no check “%1”.").arg(fromUtf8(m_check)));
+    return;
+  }
+  const auto check = static_cast<std::size_t>(at - readout.checks.begin());
+  const StateReading& state = readout.states[stateFor(readout, check)];
+  m_heading->setText(tr("%1 in %2. Which criterion suits the material is for the engineer to decide.")
+                         .arg(shown(checkName(*at)), fromUtf8(state.combination)));
+  for (const SideBySide& row : criteriaSideBySide(readout, state, check)) {
+    const bool judged = !row.problem;
+    auto* item = new QTreeWidgetItem(m_table);
+    item->setText(0, shown(labelOf(row.criterion)));
+    item->setText(1, judged ? fromUtf8(shownUtilisation(row.nominal.utilisation)) : QString());
+    item->setText(2, judged ? fromUtf8(shownUtilisation(row.worst.utilisation))
+                            : shown(wordOfStanding(Standing::unjudged)));
+    item->setText(3, remarkOf(row, *at));
+    item->setToolTip(3, item->text(3));
+    item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
+    item->setTextAlignment(2, Qt::AlignRight | Qt::AlignVCenter);
+    QFont font = m_table->font();
+    font.setBold(row.isChosen);
+    for (int column = 0; column < m_table->columnCount(); ++column)
+      item->setFont(column, font);
+  }
+}
+
+} // namespace planewright

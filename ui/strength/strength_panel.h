@@ -1,0 +1,71 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+
+#include <QWidget>
+
+class QLabel;
+class QScrollArea;
+
+namespace planewright {
+
+class CheckFields;
+class CheckList;
+class QuietButton;
+class UtilisationPlot;
+class VerdictBlock;
+
+/// Is the point within its strengths, by how much, by which combination and direction, and for which
+/// directions would it be: verdict, checks, what governs, utilisation over the angle, sentences, cautions.
+class StrengthPanel : public QWidget {
+  Q_OBJECT
+
+public:
+  explicit StrengthPanel(Desk& desk, QWidget* parent = nullptr);
+
+  VerdictBlock& verdict() const { return *m_verdict; }
+  CheckList& checks() const { return *m_checks; }
+  CheckFields& fields() const { return *m_fields; }
+  UtilisationPlot& plot() const { return *m_plot; }
+  QuietButton& addButton() const { return *m_add; }
+  QString sentences() const;
+  QString cautions() const;
+  QString governs() const;
+
+signals:
+  /// There is nothing to check against yet.
+  void materialsWanted();
+
+protected:
+  void paintEvent(QPaintEvent* event) override;
+
+private:
+  void build();
+  void listMaterials();
+  void addCheck(const std::string& material);
+  void removeCheck();
+  void refresh();
+  void refreshGoverns();
+  void showGoverning();
+  void showLimits();
+  void showSideBySide();
+
+  Desk& m_desk;
+  QScrollArea* m_scroll;
+  VerdictBlock* m_verdict;
+  CheckList* m_checks;
+  QuietButton* m_add;
+  QuietButton* m_remove;
+  QuietButton* m_side;
+  CheckFields* m_fields;
+  QLabel* m_mode;
+  QuietButton* m_governs;
+  QuietButton* m_scale;
+  UtilisationPlot* m_plot;
+  QLabel* m_sentences;
+  QLabel* m_cautions;
+  QuietButton* m_more;
+};
+
+} // namespace planewright
