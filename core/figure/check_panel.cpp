@@ -26,6 +26,7 @@ public:
         verdict.standing == Standing::unjudged ? verdict.unjudged : verdict.governing;
     if (!told)
       return top;
+    top += 0.6 * m_setting.text; // below the rule of the table
     const bool hasPlot = m_setting.order.parts.utilisation && readout.checks[told->check].band.has_value();
     const bool beside = hasPlot && !m_setting.isNarrow && m_setting.order.parts.check;
     const double middle = beside ? left + (right - left) * 75 / 160 : right;

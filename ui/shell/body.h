@@ -27,7 +27,7 @@ struct BodySizes {
   int strength = 0; ///< width; 0 where it has no column of its own
 };
 
-/// For a body of this size: Given 300 wide, 264 below 1100; Strength 340 from 1280 on; element to circle as
+/// For a body of this size: Given 300 wide, 264 below 1100; Strength 340 from 1380 on; element to circle as
 /// 48 to 52; the planes 35 % of the height, at least `leastPlanes`, and what the drawings do not need above
 /// 900.
 BodySizes sizesIn(QSize body, int leastPlanes);

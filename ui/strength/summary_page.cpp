@@ -39,6 +39,7 @@ SummaryPage::SummaryPage(Desk& desk, QWidget* parent)
   m_table->verticalHeader()->hide();
   m_table->horizontalHeader()->setStretchLastSection(false);
   m_table->horizontalHeader()->setSectionResizeMode(SummaryModel::check, QHeaderView::Stretch);
+  m_table->horizontalHeader()->setDefaultAlignment(Qt::AlignLeft | Qt::AlignVCenter);
   m_table->setTabKeyNavigation(false);
   m_table->setShowGrid(false);
   m_table->setAccessibleName(tr("Summary of all points"));
@@ -75,6 +76,8 @@ void SummaryPage::refresh() {
   m_model->show(m_desk.study());
   m_heading->setText(tr("All points, all checks: %1").arg(shown(wordOfStanding(m_model->standing()))));
   m_table->resizeColumnsToContents();
+  for (int column = 0; column < m_model->columnCount(); ++column)
+    m_table->setColumnWidth(column, m_table->columnWidth(column) + 16);
 }
 
 void SummaryPage::showEvent(QShowEvent* event) {
