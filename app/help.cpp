@@ -12,13 +12,14 @@ std::string programHelp() {
 planewright [STUDY]            opens the window, with a study
 planewright resolve ...        prints everything that follows from a study or from three components
 planewright figure STUDY ...   writes the labelled figure as SVG, PDF or PNG
+planewright validate           recomputes every published value that is shipped with it
 planewright COMMAND --help     explains a command
 planewright --version          prints the version
 
 A first word that is a command is a command: write ./figure for a file of that name.
 Commands need no display. “-” is standard input or output.
 
-Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font).
+Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font); 5 a self-check disagreed (validate).
 
 An aid to a licensed engineer: it looks at one point in plane stress. It sees no volume, size, moisture,
 duration, edge, notch or third-direction effects. Local codes govern.
@@ -52,6 +53,16 @@ The cut that crosses a line has its normal along the line; the cut that follows 
 Shear τxy is positive on the +x face in the +y direction.
 
 planewright resolve --sx "80 MPa" --sy "20 MPa" --txy "-30 MPa" --normal "25 deg" --line "1 in 10" --format json
+)help"));
+}
+
+std::string validateHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright validate [-o FILE]
+
+Recomputes every published value that the program carries and prints it beside the computed one, with its source,
+its place there and how far it can be trusted. Exit code 5 where one disagrees.
+
+-o FILE   writes there; "-" or nothing is standard output
 )help"));
 }
 

@@ -10,5 +10,6 @@ std::string programHelp();
 std::string programVersionLines();
 std::string resolveHelp();
 std::string figureHelp();
+std::string validateHelp();
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #include "app/figure_command.h"
 #include "app/help.h"
 #include "app/resolve_command.h"
+#include "app/validate_command.h"
 #include "app/window_command.h"
 #include "ui/files/file_bytes.h"
 
@@ -32,12 +33,13 @@ Outcome<Delivery> alone(std::string text, Words rest) {
 }
 
 Problem unknownWord(const std::string& word) {
-  return {"",
-          0,
-          0,
-          word,
-          PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
-          PW_TEXT("Command", "The commands are resolve and figure; planewright --help explains them.")};
+  return {
+      "",
+      0,
+      0,
+      word,
+      PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
+      PW_TEXT("Command", "The commands are resolve, figure and validate; planewright --help explains them.")};
 }
 
 Outcome<Delivery> commanded(Words words) {
@@ -47,6 +49,8 @@ Outcome<Delivery> commanded(Words words) {
     return resolved(rest);
   if (first == "figure")
     return drawnFigure(rest);
+  if (first == "validate")
+    return validated(rest);
   if (first == "--help")
     return alone(programHelp(), rest);
   if (first == "--version")

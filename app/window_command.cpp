@@ -20,7 +20,7 @@ bool hasDisplay() {
 }
 
 bool isCommand(const std::string& word) {
-  return word == "resolve" || word == "figure" || word.starts_with("-");
+  return word == "resolve" || word == "figure" || word == "validate" || word.starts_with("-");
 }
 
 } // namespace

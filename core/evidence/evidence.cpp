@@ -30,11 +30,18 @@ bool agreement(const CheckResult& result, const Quantity& quantity) {
   return difference(isAngle, result.computed, *result.printed) <= tolerance;
 }
 
+Result<Quantity> quantityOf(const CheckInputs& inputs, const CheckResult& asked) {
+  if (inputs.word("criterion"))
+    return quantityOfStrength(inputs, asked.quantity);
+  if (inputs.word("ea") || inputs.word("ex"))
+    return quantityOfStrain(inputs, asked.quantity);
+  if (inputs.word("shape"))
+    return quantityOfSection(inputs, asked.quantity, asked.unit);
+  return quantityOfState(inputs, asked.quantity);
+}
+
 Result<CheckResult> judged(CheckResult result) {
-  const CheckInputs inputs(result.inputs);
-  Result<Quantity> quantity = inputs.word("criterion") ? quantityOfStrength(inputs, result.quantity)
-                              : inputs.word("shape") ? quantityOfSection(inputs, result.quantity, result.unit)
-                                                     : quantityOfState(inputs, result.quantity);
+  Result<Quantity> quantity = quantityOf(CheckInputs(result.inputs), result);
   if (!quantity)
     return tl::unexpected(std::move(quantity).error());
   result.computed = quantity->value;

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/words/names.h"
 #include "core/words/problem.h"
 
 #include <optional>
@@ -15,6 +16,9 @@ enum class CheckStatus {
   sign,      ///< "SIGN": the source prints a magnitude or has another rule of signs; magnitudes are judged
   noPrintedValue ///< "NO_PRINTED_VALUE": only the inputs are published; no outside check of a number
 };
+
+template <>
+const std::vector<Named<CheckStatus>>& namesOf<CheckStatus>();
 
 /// One published value beside what the program computes from the published inputs, both in `unit`.
 struct CheckResult {

@@ -22,6 +22,10 @@ Result<Quantity> quantityOfState(const CheckInputs& inputs, std::string_view wor
 /// result, from which sizes in mm are known where it is another.
 Result<Quantity> quantityOfSection(const CheckInputs& inputs, std::string_view word, std::string_view unit);
 
+/// Of three gauges (a ea b eb c ec) or strains in axes (ex ey gxy, turned by theta), microstrain and degrees:
+/// ex ey gxy e1 e2 e3 gabs thp1 thp2 exp_x exp_y gxpyp; with E in GPa and nu the stresses s1 s2 tmax in MPa.
+Result<Quantity> quantityOfStrain(const CheckInputs& inputs, std::string_view word);
+
 /// Of a state (or of sn and tnt on a plane) and strengths, by the inputs criterion, theta (of the line or the
 /// plane's normal) and Xt Xc Yt Yc S, f, cohesion friction cutoff, fu beta_w gamma_M2: u, factor (the load
 /// multiplier), sigma_eq (the utilisation times f). Any one unit of stress.
