@@ -182,7 +182,9 @@ void TurningState::directionsOf(double X, std::vector<Angle>& directions) const 
 }
 
 double utilisationOf(const Branch& branch, const TurningState& state, Angle direction) {
-  return std::visit(Utilise{state, direction}, branch);
+  const double utilisation = std::visit(Utilise{state, direction}, branch);
+  // Of what overflows nothing reassuring may be said.
+  return std::isnan(utilisation) ? infinity : utilisation;
 }
 
 std::optional<double> multiplierOf(const Branch& branch, const TurningState& state, Angle direction) {

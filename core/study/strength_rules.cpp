@@ -10,6 +10,10 @@ namespace planewright {
 
 namespace {
 
+// In MPa or a plain number. Squares of what lies between, and of their inverses, are far from overflow.
+constexpr double leastValue = 1e-9;
+constexpr double greatestValue = 1e9;
+
 std::optional<double> valueIn(const Study& study, Spot spot, const std::string& text) {
   if (text.empty())
     return std::nullopt;
@@ -63,6 +67,10 @@ private:
       add(spot, text, PW_TEXT("Study", "The %1 is not greater than 0.").with(rowOf(spot).label),
           PW_TEXT("Study",
                   "Strengths and their factors are given as positive numbers, for compression too."));
+    else if (value && !(*value >= leastValue && *value <= greatestValue))
+      add(spot, text,
+          PW_TEXT("Study", "The %1 is out of every range that can be meant.").with(rowOf(spot).label),
+          PW_TEXT("Study", "Check the exponent and the unit."));
   }
 
   static std::string Material::*memberOf(Spot spot) {

@@ -50,6 +50,15 @@ TEST(Domain, surfacesThatAreNotClosedAreRefused) {
   EXPECT_NE(refused(Criterion::tsaiWu, wide, {1, 1, 0}, {{}, 1 / 200.0, {}, {}}), "");
 }
 
+TEST(Domain, whatOverflowsIsNeverWithin) {
+  const Strengths tiny = lineStrengths(MaterialKind::generic, 1e-200, 1e-200, 1e-200, 1e-200, 1e-200);
+  for (const Criterion criterion : {Criterion::sumOfSquares, Criterion::norrisPlane}) {
+    const auto judge = Judge::of(criterion, tiny, {}, demandOf({1, 0, 0}));
+    ASSERT_TRUE(judge);
+    EXPECT_GT(judge->utilisation({}), 1e100) << wordOf(criterion);
+  }
+}
+
 TEST(Domain, aMissingStrengthIsNamedByTheCriterionThatNeedsIt) {
   Strengths f = c24();
   f[StrengthKey::shear].reset();

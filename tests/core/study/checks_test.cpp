@@ -170,6 +170,8 @@ TEST(MaterialRules, refuseWhatIsNoStrength) {
   EXPECT_NE(type(Spot::partialFactor, "0"), "");
   EXPECT_NE(type(Spot::durationShort, "-1"), "");
   EXPECT_NE(type(Spot::materialKind, "bond"), "") << "its strengths are none of a bond";
+  EXPECT_NE(type(Spot::alongTension, "1e-30"), "");
+  EXPECT_NE(type(Spot::alongTension, "1e30"), "");
   EXPECT_EQ(type(Spot::alongTension, "2 ksi"), "");
   EXPECT_EQ(type(Spot::alongTension, ""), "") << "not given";
 }
