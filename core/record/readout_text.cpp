@@ -174,6 +174,8 @@ private:
       line("  ", PW_TEXT("Readout", "Over all combinations"));
       m_out += '\n';
       planes(envelopeTable(m_study, readout));
+      for (const Text& caution : cautionsOfEnvelope(readout))
+        line("    ", PW_TEXT("Readout", "Caution: %1").with(caution));
     }
     for (std::size_t i = 0; i < readout.checks.size(); ++i)
       check(readout, i);

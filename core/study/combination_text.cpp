@@ -8,6 +8,7 @@
 #include "core/words/utf8.h"
 
 #include <algorithm>
+#include <cmath>
 #include <unordered_set>
 
 namespace planewright {
@@ -180,6 +181,24 @@ std::string valuesOf(const Combination& combination) {
       addTerm(values, entry->value, factor.caseId);
   }
   return values;
+}
+
+bool isMisnamed(const Study& study, const Combination& combination) {
+  if (expressionOf(combination))
+    return false;
+  const Result<std::vector<Factor>> named = factorsIn(study, combination.name);
+  if (!named)
+    return false;
+  const auto entryOf = [](const std::vector<Factor>& factors, const std::string& id) {
+    const auto one = std::ranges::find(factors, id, &Factor::caseId);
+    return one == factors.end() ? Entry{} : readEntry(one->factor, {}).value_or(Entry{});
+  };
+  constexpr double roughest = 0.005; // "1 G" is not said of 1.35 G
+  return std::ranges::any_of(study.cases, [&](const LoadCase& one) {
+    const Entry said = entryOf(*named, one.id);
+    const double has = entryOf(combination.factors, one.id).value;
+    return std::abs(said.value - has) > std::min(said.halfWidth, roughest) + 1e-9 * std::abs(has);
+  });
 }
 
 Edits editsThatRenameCase(const Study& study, const std::string& id, const std::string& to) {

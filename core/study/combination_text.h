@@ -20,6 +20,10 @@ std::string valuesOf(const Combination& combination);
 /// One more term of such a text.
 void addTerm(std::string& values, double factor, const std::string& caseId);
 
+/// Whether the name of a combination reads as terms of the study's cases, but with other factors than it has.
+/// A number in the name stands for all that round to it, at least to two decimals.
+bool isMisnamed(const Study& study, const Combination& combination);
+
 /// What gives the combination of this name the factors of the text. One that goes by its own expression is
 /// renamed to the new one.
 Result<Edits> editsThatSet(const Study& study, const std::string& combination, std::string_view text);

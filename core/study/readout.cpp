@@ -2,6 +2,7 @@
 #include "core/study/readout.h"
 
 #include "core/study/case_sources.h"
+#include "core/study/combination_text.h"
 #include "core/study/judge_checks.h"
 #include "core/study/typed.h"
 
@@ -103,6 +104,8 @@ StateReading combinedState(const Study& study, const Combination& combination,
                            const std::vector<CaseReading>& cases) {
   StateReading state;
   state.combination = combination.name;
+  if (isMisnamed(study, combination))
+    state.factors = textOf(combination);
   state.basis = combination.basis;
   double scaleOfThird = 0;
   for (const Factor& factor : combination.factors) {

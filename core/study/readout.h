@@ -65,6 +65,7 @@ struct ActingCase {
 /// sign convention.
 struct StateReading {
   std::string combination;
+  std::string factors; ///< where the combination's name says others: those it has, "1.35 G + 1.5 Q"
   bool judged = true;
   PlaneStress stress;
   double sz = 0;

@@ -149,6 +149,23 @@ TEST_F(CombinationNames, aBuiltOneIsRenamedByItsNewFactors) {
   EXPECT_EQ(after.combinations[2].name, "1.35 G + 1.5 W");
 }
 
+TEST(CombinationText, aNameThatSaysOtherFactorsIsSeen) {
+  const Study study = withCases({"G", "Q"});
+  const auto lies = [&](const char* name, std::vector<Factor> factors) {
+    return isMisnamed(study, {name, std::move(factors), Basis::design});
+  };
+  EXPECT_TRUE(lies("1 G + 1 Q", {{"G", "1.35"}, {"Q", "1.5"}}));
+  EXPECT_TRUE(lies("G + Q", {{"G", "1"}}));
+  EXPECT_TRUE(lies("1.35 G", {{"G", "1.35"}, {"Q", "1.5"}}));
+  EXPECT_TRUE(lies("1.5*0.7 Q", {{"Q", "1.5*0.5"}}));
+  EXPECT_FALSE(lies("1.5 Q + 1.35 G", {{"G", "1.35"}, {"Q", "1.5"}})) << "the order does not matter";
+  EXPECT_FALSE(lies("1.05 Q", {{"Q", "1.5*0.7"}}));
+  EXPECT_FALSE(lies("0.93 Q", {{"Q", "1.4/1.5"}})) << "rounded";
+  EXPECT_FALSE(lies("1.35 G", {{"G", "1.35"}, {"Q", "0"}}));
+  EXPECT_FALSE(lies("fundamental", {{"G", "1.35"}})) << "no expression";
+  EXPECT_FALSE(lies("1.35 G, 2", {{"G", "1"}})) << "no expression";
+}
+
 TEST(CombinationText, theNextOneHasOnlyCasesThatMeet) {
   const auto next = [](const Study& study) {
     const Study after = edited(study, editsThatAddNext(study)).value();
