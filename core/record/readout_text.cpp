@@ -1,12 +1,13 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
 #include "core/record/readout_file.h"
-#include "core/study/case_sources.h"
 #include "core/study/envelope.h"
 #include "core/study/governing.h"
+#include "core/study/sum_of_case.h"
 #include "core/study/working_of_state.h"
 #include "core/table/cautions.h"
 #include "core/table/check_words.h"
+#include "core/table/parts_of_sx.h"
 #include "core/table/table.h"
 #include "core/words/utf8.h"
 
@@ -185,8 +186,9 @@ private:
 
   /// Where the stresses of the cases come from, with the working.
   void sources(const Point& point) {
-    for (const CaseStress& stress : point.stress)
-      for (const NamedContribution& made : contributionsOf(m_study, point, stress)) {
+    for (const CaseStress& stress : point.stress) {
+      const std::vector<NamedContribution> sources = contributionsOf(m_study, point, stress);
+      for (const NamedContribution& made : sources) {
         m_out += '\n';
         line("  ", PW_TEXT("Readout", "Case %1: %2").with(stress.caseId).with(made.name));
         for (const Text& rule : made.contribution.signRules)
@@ -195,6 +197,22 @@ private:
           line("    ", PW_TEXT("Readout", "Limit: %1").with(caution));
         steps(made.contribution.steps);
       }
+      sumOfSources(stress, sources);
+    }
+  }
+
+  void sumOfSources(const CaseStress& stress, const std::vector<NamedContribution>& sources) {
+    const std::vector<Step> sum = sumOfCase(m_study, stress, sources);
+    if (sum.empty())
+      return;
+    m_out += '\n';
+    line("  ", PW_TEXT("Readout", "Case %1 in all").with(stress.caseId));
+    if (m_study.convention.positive == Positive::compression)
+      line("    ", PW_TEXT("Readout", "Sources are worked out with tension positive; here the study counts "
+                                      "compression positive."));
+    for (std::size_t i = 0; i < sources.size() && sources.size() > 1; ++i)
+      line("    ", PW_TEXT("Readout", "%1: %2").with(std::to_string(i + 1)).with(sources[i].name));
+    steps(sum);
   }
 
   Text nameOf(const StateReading& state, bool isCombination) const {
@@ -225,10 +243,8 @@ private:
                      .with(stresses.withUnit(state.stress.sy))
                      .with(stresses.withUnit(state.stress.txy))
                      .with(stresses.withUnit(state.sz)));
-    if (state.axial != 0 || state.bending != 0)
-      line("    ", PW_TEXT("Readout", "of σ_{x} from normal force %1, from bending %2")
-                       .with(stresses.withUnit(state.axial))
-                       .with(stresses.withUnit(state.bending)));
+    if (const Text parts = partsOfSx(stresses, state); !parts.empty())
+      line("    ", parts);
     if (state.edge)
       line("    ", PW_TEXT("Readout", "left on the free edge: σ_{n} = %1, τ_{nt} = %2")
                        .with(stresses.withUnit(state.edge->traction.sn))

@@ -10,7 +10,8 @@ namespace planewright {
 /// with the working that a checker follows.
 struct Contribution {
   PlaneStress stress;
-  double axial = 0;   ///< part of sx from a normal force: kept apart from bending, since strengths differ
+  double axial = 0;   ///< axial part of sx, of a normal force or of closed ends: its strength is not that of
+                      ///< bending
   double bending = 0; ///< part of sx from bending moments; what is measured is in neither
   std::vector<Step> steps;
   std::vector<Text> signRules; ///< what the signs of the typed values mean

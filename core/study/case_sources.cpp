@@ -65,15 +65,17 @@ Problems placed(Problem problem, const Place& place) {
   return {std::move(problem)};
 }
 
-SourceStress summed(const Contribution& contribution) {
-  return {contribution.stress, contribution.axial, contribution.bending, scaleOf(contribution.stress),
-          contribution.cautions};
+SourceStress summed(const Contribution& contribution, bool isMeasured) {
+  return {contribution.stress,          contribution.axial,
+          contribution.bending,         isMeasured ? contribution.stress.sx : 0,
+          scaleOf(contribution.stress), contribution.cautions};
 }
 
 void add(SourceStress& sum, SourceStress more) {
   sum.stress = sum.stress + more.stress;
   sum.axial += more.axial;
   sum.bending += more.bending;
+  sum.measured += more.measured;
   sum.scale += more.scale;
   sum.cautions.insert(sum.cautions.end(), more.cautions.begin(), more.cautions.end());
 }
@@ -159,8 +161,9 @@ Results<SourceStress> PointSources::ofForces(const CaseStress& stress) const {
   if (!at)
     return tl::unexpected(placed(at.error(), place));
   const double shear = std::abs(at->shear) + std::abs(at->stress.txy - at->shear);
-  return SourceStress{at->stress, at->axial, at->bending,
-                      std::max(std::abs(at->axial) + std::abs(at->bending), shear), at->cautions};
+  return SourceStress{
+      at->stress,  at->axial, at->bending, 0, std::max(std::abs(at->axial) + std::abs(at->bending), shear),
+      at->cautions};
 }
 
 Results<SourceStress> PointSources::stressOf(const CaseStress& stress) const {
@@ -178,7 +181,7 @@ Results<SourceStress> PointSources::stressOf(const CaseStress& stress) const {
         rosette ? ofRosette(*m_study, *m_point, stress) : ofPressure(*m_study, *m_point, stress);
     if (!one)
       return tl::unexpected(one.error());
-    add(sum, summed(*one));
+    add(sum, summed(*one, rosette));
   }
   for (const double component : {sum.stress.sx, sum.stress.sy, sum.stress.txy})
     if (!(std::abs(component) <= greatestStress))

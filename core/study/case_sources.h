@@ -12,9 +12,10 @@ namespace planewright {
 /// positive, in the axes of the point. Stresses that are typed directly are not in it.
 struct SourceStress {
   PlaneStress stress;
-  double axial = 0;   ///< part of sx from normal forces
-  double bending = 0; ///< part of sx from bending moments
-  double scale = 0;   ///< sum of the greatest |component| of each part, before parts cancel
+  double axial = 0;    ///< part of sx from normal forces and closed ends
+  double bending = 0;  ///< part of sx from bending moments
+  double measured = 0; ///< part of sx from measured strains
+  double scale = 0;    ///< sum of the greatest |component| of each part, before parts cancel
   std::vector<Text> cautions;
 };
 

@@ -34,6 +34,7 @@ void addSources(CaseReading& reading, SourceStress made, Positive positive) {
   reading.stress = reading.stress + sense * made.stress;
   reading.axial = sense * made.axial;
   reading.bending = sense * made.bending;
+  reading.measured = sense * made.measured;
   reading.scale += made.scale;
   reading.isDirect = false;
   reading.cautions = std::move(made.cautions);
@@ -55,6 +56,7 @@ std::vector<CaseReading> caseReadings(const Study& study, const Point& point) {
     one.stress = {valueOf(study, Spot::sx, stress->sx), valueOf(study, Spot::sy, stress->sy),
                   valueOf(study, Spot::txy, stress->txy)};
     one.sz = valueOf(study, Spot::sz, stress->sz);
+    one.typed = one.stress.sx;
     one.scale = scaleOf(one.stress);
     if (stress->isDirect())
       continue;
@@ -71,8 +73,10 @@ void addTerm(StateReading& state, double factor, const std::vector<CaseReading>&
   const CaseReading& one = cases[index];
   state.stress = state.stress + factor * one.stress;
   state.sz += factor * one.sz;
+  state.typed += factor * one.typed;
   state.axial += factor * one.axial;
   state.bending += factor * one.bending;
+  state.measured += factor * one.measured;
   state.scale += std::abs(factor) * one.scale;
   state.acting.push_back({index, factor});
 }

@@ -45,8 +45,10 @@ struct CaseReading {
   Duration duration = Duration::permanent;
   PlaneStress stress;
   double sz = 0;
-  double axial = 0;           ///< part of sx from normal forces; a typed sx is in neither part
+  double typed = 0;           ///< part of sx that is typed as it is
+  double axial = 0;           ///< part of sx from normal forces and the closed ends of vessels
   double bending = 0;         ///< part of sx from bending moments
+  double measured = 0;        ///< part of sx from measured strains, which tell neither of the two
   double scale = 0;           ///< sum of the greatest |component| of each part, before parts cancel
   bool isListed = false;      ///< false: the point does not list the case, which counts as zero
   bool isDirect = true;       ///< all of it is typed as stresses
@@ -69,9 +71,11 @@ struct StateReading {
   bool judged = true;
   PlaneStress stress;
   double sz = 0;
-  double axial = 0;   ///< part of sx from normal forces
-  double bending = 0; ///< part of sx from bending moments
-  double scale = 0;   ///< sum |factor_i| max |component_i|, before cancellation
+  double typed = 0; ///< the parts of sx as in CaseReading
+  double axial = 0;
+  double bending = 0;
+  double measured = 0;
+  double scale = 0; ///< sum |factor_i| max |component_i|, before cancellation
   Circle circle;
   std::vector<LineStress> lines; ///< one for each line of the Readout
   std::vector<Traction> watched; ///< one for each watched plane of the Readout

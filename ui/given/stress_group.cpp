@@ -2,6 +2,7 @@
 #include "ui/given/stress_group.h"
 
 #include "core/table/cautions.h"
+#include "core/table/parts_of_sx.h"
 #include "core/table/table.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/given/case_strip.h"
@@ -243,11 +244,8 @@ QString StressGroup::caseLine() const {
   if (one == cases.end() || one->isDirect || !state)
     return {};
   const QString sum = tr("%1 in all: %2").arg(fromUtf8(id), componentsOf(*state));
-  if (one->bending == 0 && one->axial == 0)
-    return sum;
-  const auto part = [&](double stress) { return fromUtf8(shownStress(m_desk.study(), *state, stress)); };
-  return sum + QLatin1Char('\n') +
-         tr("of σx from normal force %1, from bending %2").arg(part(one->axial), part(one->bending));
+  const Text parts = partsOfSx(stressFormOf(m_desk.study(), *state), *one);
+  return parts.empty() ? sum : sum + QLatin1Char('\n') + shown(parts);
 }
 
 QString StressGroup::edgeLine() const {

@@ -2,6 +2,7 @@
 #include "core/study/case_sources.h"
 #include "core/study/edit.h"
 #include "core/study/readout.h"
+#include "core/study/sum_of_case.h"
 #include "tests/support/study_gen.h"
 
 #include <gtest/gtest.h>
@@ -225,6 +226,27 @@ TEST(Sources, contributionsCarryTheirWorking) {
                   .empty());
 }
 
+std::vector<std::string> sumAt(const Study& study) {
+  const Point& point = study.points.front();
+  const CaseStress& stress = point.stress.front();
+  std::vector<std::string> lines;
+  for (const Step& step : sumOfCase(study, stress, contributionsOf(study, point, stress)))
+    lines.push_back(plain(written(step)));
+  return lines;
+}
+
+TEST(Sources, theWorkingOfACaseEndsWithItsStresses) {
+  EXPECT_EQ(sumAt(beamStudy()), std::vector<std::string>{}) << "one source, nothing typed: it does already";
+  EXPECT_EQ(sumAt(with(beamStudy(), {Type{{Spot::sx, "P1", "G"}, "1"}})),
+            (std::vector<std::string>{"σx = σx,typed + σx,1 = 1 MPa + (−5.5 MPa) = −4.500 MPa"}));
+  const Study turned = with(beamStudy(), {Type{{Spot::positive, {}, {}}, "compression"}});
+  EXPECT_EQ(sumAt(turned).front(), "σx = −σx,1 = −(−5.5 MPa) = 5.500 MPa");
+  EXPECT_EQ(sumAt(turned).size(), 2U) << "and the shear";
+  const Study both = with(turned, {Type{{Spot::sx, "P1", "G"}, "1"}, Insert{{Spot::pressure, "P1", "G"}, {}},
+                                   Type{{Spot::pressureP, "P1", "G"}, "0.1"}});
+  EXPECT_EQ(sumAt(both).front(), "σx = σx,typed − (σx,1 + σx,2) = 1 MPa − (−5.5 MPa + 2.5 MPa) = 4.000 MPa");
+}
+
 // What the readout adds up is what the contributions say one by one.
 RC_GTEST_PROP(Sources, contributionsAddUpToTheStressOfTheCase, ()) {
   const Study study = *anyStudy();
@@ -246,6 +268,25 @@ RC_GTEST_PROP(Sources, contributionsAddUpToTheStressOfTheCase, ()) {
 }
 
 // A combination of one case with factor 1 is that case.
+// And so does the sum that is written below them; the parts of sx leave nothing out.
+RC_GTEST_PROP(Sources, theSumOfACaseIsItsStressAndItsPartsAddUp, ()) {
+  const Study study = *anyStudy();
+  for (const Point& point : study.points) {
+    const Readout readout = evaluate(study, point.name);
+    for (const CaseStress& stress : point.stress) {
+      const auto one = std::ranges::find(readout.cases, stress.caseId, &CaseReading::id);
+      const double parts = one->typed + one->axial + one->bending + one->measured;
+      RC_ASSERT(std::abs(parts - one->stress.sx) <= 1e-12 * one->scale);
+      for (const Step& step : sumOfCase(study, stress, contributionsOf(study, point, stress))) {
+        const double confirmed = step.formula.valueWith(step.putIn);
+        RC_ASSERT(std::abs(confirmed - step.result) <= 1e-9 * one->scale);
+        if (plain(step.symbol) == "σx")
+          RC_ASSERT(std::abs(confirmed - one->stress.sx) <= 1e-9 * one->scale);
+      }
+    }
+  }
+}
+
 RC_GTEST_PROP(Sources, oneCaseWithFactorOneIsThatCase, ()) {
   Study study = *anyStudy();
   const std::string id = (*rc::gen::elementOf(study.cases)).id;

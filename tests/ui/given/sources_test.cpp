@@ -40,7 +40,7 @@ TEST_F(SourcesTest, sectionForcesBringASectionAndAddToTheStresses) {
   const double inertia = 100.0 * 200 * 200 * 200 / 12;
   EXPECT_NEAR(desk.readout().state().stress.sx, 40e3 / 20000 + 10e6 * 100 / inertia, 1e-9);
   EXPECT_TRUE(says("in all"));
-  EXPECT_TRUE(says("from bending"));
+  EXPECT_TRUE(says("bending"));
   EXPECT_EQ(field("σx").echoText(), "= 0.00 MPa");
   desk.undoStack()->undo();
   desk.undoStack()->undo();
