@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/unit.h"
 
+#include "core/quantity/lexer.h"
 #include "core/quantity/nearest.h"
 
 #include <algorithm>
@@ -98,6 +99,50 @@ std::string_view nearestUnitName(std::string_view name) {
     if (const std::size_t at = typed.find(micro); at != std::string::npos)
       typed.replace(at, micro.size(), 1, 'u');
   return nearestOf(names, typed);
+}
+
+namespace {
+
+/// "mm2" is "mm^2", "kNm" is "kN*m"; a name of the table stays. Empty for anything else.
+std::string spelledAtom(std::string_view atom) {
+  if (findUnit(atom))
+    return std::string(atom);
+  if (atom.find('^') != std::string_view::npos) {
+    const std::string_view name = atom.substr(0, atom.find('^'));
+    return findUnit(name) ? std::string(atom) : std::string();
+  }
+  if (atom.size() > 1 && atom.back() >= '2' && atom.back() <= '4') {
+    const std::string_view name = atom.substr(0, atom.size() - 1);
+    return findUnit(name) ? std::string(name) + "^" + atom.back() : std::string();
+  }
+  for (std::size_t i = 1; i < atom.size(); ++i) {
+    const Unit* force = findUnit(atom.substr(0, i));
+    const Unit* length = findUnit(atom.substr(i));
+    if (force && length && force->dimension == dimension::force && length->dimension == dimension::length)
+      return force->name + "*" + length->name;
+  }
+  return {};
+}
+
+} // namespace
+
+std::string spelledUnit(std::string_view written) {
+  std::string spelled;
+  std::size_t start = 0;
+  for (std::size_t i = 0; i <= written.size(); ++i) {
+    const bool isEnd = i == written.size();
+    if (!isEnd && written[i] != '*' && written[i] != '/')
+      continue;
+    const std::string atom = spelledAtom(trimmed(written.substr(start, i - start)));
+    // Behind a stroke a product would need parentheses.
+    if (atom.empty() || (start > 0 && written[start - 1] == '/' && atom.find('*') != std::string::npos))
+      return {};
+    spelled += atom;
+    if (!isEnd)
+      spelled += written[i];
+    start = i + 1;
+  }
+  return spelled == written ? std::string() : spelled;
 }
 
 } // namespace planewright

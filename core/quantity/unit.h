@@ -68,6 +68,10 @@ const Unit* findUnit(std::string_view name);
 /// or surplus letter, then a wrong one. Empty when it is like none.
 std::string_view nearestUnitName(std::string_view name);
 
+/// The way in which expressions write a unit that tables head as "kNm" or "N/mm2": "kN*m", "N/mm^2". Empty
+/// where nothing is to be changed, or it is none.
+std::string spelledUnit(std::string_view written);
+
 /// Reads a unit as a study names it ("MPa", "kN*m", "N/mm^2"); a Problem when it is unknown or its dimension
 /// differs from `wanted`.
 Result<Unit> readUnit(std::string_view text, Dimension wanted);

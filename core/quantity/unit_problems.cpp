@@ -73,6 +73,9 @@ Problem emptyUnit() {
 }
 
 Problem unknownUnit(const Piece& name) {
+  if (const std::string spelled = spelledUnit(name.text); !spelled.empty())
+    return problemAt(name, PW_TEXT("Expression", "There is no unit “%1”.").with(shortened(name.text)),
+                     PW_TEXT("Expression", "Write %1.").with(spelled));
   const std::string_view meant = nearestUnitName(name.text);
   return problemAt(name, PW_TEXT("Expression", "There is no unit “%1”.").with(shortened(name.text)),
                    meant.empty() ? PW_TEXT("Expression", "Type for example MPa, psi, kN, mm or deg.")
@@ -115,10 +118,11 @@ Problem unitAfterQuantity(const Piece& unit, const Value& quantity) {
 }
 
 Problem unitThenNumber(const Piece& piece, std::string_view unit, std::string_view number) {
-  return problemAt(piece,
-                   PW_TEXT("Expression", "A number follows the unit in “%1”.").with(shortened(piece.text)),
-                   PW_TEXT("Expression", "Raise a unit with ^, as in %1, or put an operator between.")
-                       .with(joined(unit, "^", number)));
+  return problemAt(
+      piece, PW_TEXT("Expression", "A number follows the unit in “%1”.").with(shortened(piece.text)),
+      number == "2" || number == "3" || number == "4"
+          ? PW_TEXT("Expression", "Write %1: a unit is raised with ^.").with(joined(unit, "^", number))
+          : PW_TEXT("Expression", "Put an operator between."));
 }
 
 Problem unitOnExponent(const Piece& power, const Piece& plainPower, const Piece& unit) {

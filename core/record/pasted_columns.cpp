@@ -255,7 +255,15 @@ private:
     const std::optional<Spot> spot = spotOf(*column.kind);
     if (!unit || !spot || !isExpression(*column.kind))
       return;
-    const Result<Unit> read = readUnit(*unit, planewright::rowOf(*spot).dimension);
+    const Dimension wanted = planewright::rowOf(*spot).dimension;
+    const Result<Unit> read = readUnit(*unit, wanted);
+    // A unit that stands alone in a heading can mean nothing else.
+    if (const std::string spelled = read ? std::string() : spelledUnit(*unit); !spelled.empty())
+      if (const Result<Unit> meant = readUnit(spelled, wanted)) {
+        column.unit = *meant;
+        column.writtenUnit = *unit;
+        return;
+      }
     if (read)
       column.unit = *read;
     else

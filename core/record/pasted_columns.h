@@ -73,7 +73,8 @@ std::optional<ColumnKind> kindOfHeading(std::string_view heading);
 struct PastedColumn {
   std::string heading; ///< as it stands in the table; empty without a header
   std::optional<ColumnKind> kind;
-  std::optional<Unit> unit; ///< of bare numbers, where the heading names one
+  std::optional<Unit> unit;     ///< of bare numbers, where the heading names one
+  std::string writtenUnit = {}; ///< as the heading writes it, where that is not as expressions do: "kNm"
 };
 
 /// What the caller says about a table; what is left out is read from the table.

@@ -70,6 +70,12 @@ private:
                       "Envelope rows (greatest N with greatest M of different instants) cannot be told "
                       "from the data: forces of one row must act at the same time."));
     addCautionOfSources();
+    for (const PastedColumn& column : m_result.columns)
+      if (!column.writtenUnit.empty())
+        caution(PW_TEXT("Paste", "“%1” in the heading “%2” is read as %3.")
+                    .with(column.writtenUnit)
+                    .with(column.heading)
+                    .with(column.unit->name));
   }
 
   /// Stresses that the table does not show are added to those that it does.
@@ -82,8 +88,8 @@ private:
     const auto first = std::ranges::find_if(m_said.rows, isAddedTo);
     if (first != m_said.rows.end())
       caution(PW_TEXT("Paste",
-                      "%1 of these rows have section forces, pressure or measured strains in the study, "
-                      "the first is %2 at %3: they stay, and add to what is pasted.")
+                      "Rows whose case has section forces, pressure or measured strains in the study: %1, "
+                      "the first is %2 at %3. They stay, and add to what is pasted.")
                   .with(exactNumber(static_cast<double>(std::ranges::count_if(m_said.rows, isAddedTo))))
                   .with(first->loadCase)
                   .with(first->point));

@@ -16,6 +16,17 @@ double factorOf(std::string_view name) {
 
 // Inch and pound: international yard and pound agreement 1959; g_n: 3rd CGPM 1901. The long double products
 // are the outside values; the table holds quotients of whole numbers.
+TEST(Unit, spellingsOfTablesAreWrittenOut) {
+  EXPECT_EQ(spelledUnit("kNm"), "kN*m");
+  EXPECT_EQ(spelledUnit("Nmm"), "N*mm");
+  EXPECT_EQ(spelledUnit("kipft"), "kip*ft");
+  EXPECT_EQ(spelledUnit("N/mm2"), "N/mm^2");
+  EXPECT_EQ(spelledUnit("kN/m2"), "kN/m^2");
+  EXPECT_EQ(spelledUnit("mm4"), "mm^4");
+  for (const char* other : {"kN*m", "N/mm^2", "MPa", "", "kNs", "m2m", "mm5", "/", "1/kNm", "kg"})
+    EXPECT_EQ(spelledUnit(other), "") << other;
+}
+
 TEST(Unit, poundsAndInchesFollowTheAgreementOf1959) {
   const long double lbf = 0.45359237L * 9.80665L;
   EXPECT_EQ(factorOf("lbf"), static_cast<double>(lbf));

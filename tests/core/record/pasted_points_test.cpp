@@ -51,6 +51,18 @@ TEST(PastedPoints, stressesOfTheShownPointByHeadingsWithUnits) {
   EXPECT_EQ(pasted.replaced, 2U);
 }
 
+TEST(PastedPoints, unitsOfHeadingsAreReadAsFramesWriteThem) {
+  const Study study = beam();
+  const PastedPoints pasted = pastedPoints(study, "case\tN [kN]\tM (kNm)\tsx [N/mm2]\nG\t1\t2\t3\n");
+  const CaseStress g = after(study, pasted).points[0].stress[0];
+  EXPECT_EQ(g.forces->Mz, "2 kN*m");
+  EXPECT_EQ(g.sx, "3 N/mm^2");
+  std::string said;
+  for (const Text& caution : pasted.cautions)
+    said += plain(caution) + "\n";
+  EXPECT_NE(said.find("“kNm” in the heading “M (kNm)” is read as kN*m."), std::string::npos) << said;
+}
+
 TEST(PastedPoints, makesPointsWithALineAndTheirNotes) {
   const Study study = newStudy();
   const Study done = after(study, pastedPoints(study, "point,note,case,sx,sy,txy\n"
