@@ -63,15 +63,14 @@ public:
 private:
   Problem outside() const {
     const Region& region = m_model.region;
-    return problem(
-        PW_TEXT("Source", "The fibre y = %1 mm, z = %2 mm lies outside the material.")
-            .with(inMillimetres(m_fibre.y))
-            .with(inMillimetres(m_fibre.z)),
-        PW_TEXT("Source", "Measured from the centroid, y runs from %1 to %2 mm and z from %3 to %4 mm.")
-            .with(inMillimetres(region.yLow))
-            .with(inMillimetres(region.yHigh))
-            .with(inMillimetres(region.zLow))
-            .with(inMillimetres(region.zHigh)));
+    return problem(PW_TEXT("Source", "y = %1, z = %2 mm is outside the material.")
+                       .with(inMillimetres(m_fibre.y))
+                       .with(inMillimetres(m_fibre.z)),
+                   PW_TEXT("Source", "Stay in it: from the centroid y is %1 to %2, z %3 to %4 mm at most.")
+                       .with(inMillimetres(region.yLow))
+                       .with(inMillimetres(region.yHigh))
+                       .with(inMillimetres(region.zLow))
+                       .with(inMillimetres(region.zHigh)));
   }
 
   void caution(const std::vector<Text>& cautions) {

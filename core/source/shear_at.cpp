@@ -121,6 +121,13 @@ private:
     return inWall();
   }
 
+  /// Where a cut is balanced only rounding is left of its flow.
+  bool isRounding(double flow) const {
+    const Region& region = m_seen.region;
+    const double extent = std::max(region.yHigh - region.yLow, region.zHigh - region.zLow);
+    return std::abs(flow) <= 1e-8 * (std::abs(own()) + std::abs(other())) * extent * m_model.properties.A;
+  }
+
   /// About the axis along the shear, and about the one across it.
   bool isMirrored() const { return seesSide() ? m_model.isMirroredAboutY : m_model.isMirroredAboutZ; }
   bool isMirroredAcross() const { return seesSide() ? m_model.isMirroredAboutZ : m_model.isMirroredAboutY; }
@@ -175,7 +182,7 @@ private:
       return;
     }
     const double flow = other() * cut->S + own() * cut->across;
-    if (flow == 0 || cut->width <= slack)
+    if (isRounding(flow) || cut->width <= slack)
       return;
     const double value = flow / cut->width;
     m_result.cautions.push_back(
