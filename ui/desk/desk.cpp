@@ -50,6 +50,10 @@ Gesture Desk::newGesture() {
   return {++m_lastGesture};
 }
 
+Gesture Desk::newCommand() {
+  return {++m_lastGesture, true};
+}
+
 std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const QString& what) {
   Result<Study> after = edited(*m_study, edits);
   if (!after)

@@ -12,9 +12,10 @@
 
 namespace planewright {
 
-/// Names one drag or one stay in a field; edits of one gesture make one undo step. Never reused.
+/// Names one drag, one stay in a field or one command; edits of one gesture make one undo step. Never reused.
 struct Gesture {
   quint64 number = 0;
+  bool isCommand = false; ///< typed, chosen in a menu or a dialog, or by keys: nothing was drawn by hand
   bool operator==(const Gesture&) const = default;
 };
 
@@ -30,6 +31,7 @@ public:
   QUndoStack* undoStack() { return &m_undo; }
 
   Gesture newGesture();
+  Gesture newCommand();
   /// Applies the edits as one step of the gesture; the Problem when they are not taken. Edits that change
   /// nothing leave no step.
   std::optional<Problem> request(const Edits& edits, Gesture gesture, const QString& what);

@@ -12,7 +12,7 @@ public:
   /// The gesture of a key that changes this place.
   Gesture gestureOn(const Place& place, Desk& desk) {
     if (place != m_place || desk.undoStack()->index() != m_index)
-      m_gesture = desk.newGesture();
+      m_gesture = desk.newCommand();
     m_place = place;
     return m_gesture;
   }

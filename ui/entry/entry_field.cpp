@@ -99,16 +99,45 @@ void EntryField::refresh() {
     m_known = now;
     if (!m_hasDraft)
       showEcho(standingEcho(), false);
+    else if (m_problem && !isOwn)
+      judgeAgain();
     return;
   }
-  const bool byAnotherView = sameSpot && m_desk.cause() && !m_known.empty() && !now.empty();
-  if (byAnotherView && m_beforeDrag.empty())
+  const bool byDrag =
+      sameSpot && m_desk.cause() && !m_desk.cause()->isCommand && !m_known.empty() && !now.empty();
+  if (byDrag && m_beforeDrag.empty())
     m_beforeDrag = m_known;
-  if (!byAnotherView || now == m_beforeDrag)
+  if (!byDrag || now == m_beforeDrag)
     m_beforeDrag.clear();
-  if (!sameSpot && m_problem)
+  if (sameSpot && m_problem && m_desk.cause() && !byDrag && !judged(m_edit->text()).problem) {
+    m_known = now;
+    judgeAgain();
+    return;
+  }
+  if (m_problem)
     m_desk.say(tr("“%1” for %2 was not taken.").arg(m_edit->text(), name()));
   follow();
+}
+
+// What was refused may be right after a change elsewhere. It is not taken while its field is typed in, nor
+// after an undo, which another step would make final.
+void EntryField::judgeAgain() {
+  std::optional<Problem> problem = judged(m_edit->text()).problem;
+  if (problem || m_visit || !m_desk.cause()) {
+    if (!problem)
+      problem =
+          Problem{{}, 0, 0, {}, PW_TEXT("Entry", "This can be taken now."), PW_TEXT("Entry", "Press Enter.")};
+    complain(std::move(problem));
+    return;
+  }
+  // The step that made it right has to be on the history first.
+  QMetaObject::invokeMethod(
+      this,
+      [this] {
+        if (m_problem && m_hasDraft && !m_visit && !judged(m_edit->text()).problem && take())
+          dropDraft();
+      },
+      Qt::QueuedConnection);
 }
 
 void EntryField::follow() {
@@ -117,11 +146,11 @@ void EntryField::follow() {
   dropDraft();
   showDragNote();
   if (m_visit)
-    m_visit = {m_desk.newGesture(), m_known};
+    m_visit = {m_desk.newCommand(), m_known};
 }
 
 void EntryField::beginVisit(Qt::FocusReason reason) {
-  m_visit = {m_desk.newGesture(), m_known};
+  m_visit = {m_desk.newCommand(), m_known};
   if (m_problem && reason != Qt::MouseFocusReason)
     m_edit->selectPiece(m_problem->quoted, m_problem->column);
 }
@@ -159,6 +188,8 @@ void EntryField::accept() {
     m_edit->selectPiece(m_problem->quoted, m_problem->column);
     return;
   }
+  if (m_visit)
+    m_visit->textAtEntry = m_known;
   dropDraft();
   m_edit->selectAll();
 }
@@ -187,7 +218,7 @@ bool EntryField::take() {
   if (!edits)
     problem = std::move(edits).error();
   else
-    problem = m_desk.request(*edits, m_visit ? m_visit->gesture : m_desk.newGesture(),
+    problem = m_desk.request(*edits, m_visit ? m_visit->gesture : m_desk.newCommand(),
                              tr("typing of %1").arg(name()));
   complain(std::move(problem));
   return !m_problem;

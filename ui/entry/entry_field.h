@@ -25,7 +25,8 @@ struct EntryWords {
 /// read, what is wrong. The draft is its only state; everything else comes from the study.
 ///
 /// The echo follows each key. The study takes the text at Enter, on leaving, or after a pause when it reads
-/// well; one stay in the field is one gesture and so one undo step. Escape puts back the text at entry.
+/// well; one stay in the field is one gesture and so one undo step. Escape puts back the text at entry, or
+/// what Enter took last. A refused text stays, and is taken as soon as a change elsewhere makes it right.
 class EntryField : public QWidget {
   Q_OBJECT
 
@@ -69,6 +70,7 @@ private:
 
   void build();
   void follow();
+  void judgeAgain();
   void beginVisit(Qt::FocusReason reason);
   void endVisit();
   void typed();

@@ -98,7 +98,7 @@ void ConventionGroup::addShearForce() {
   auto* menu = new QMenu(m_shearForce);
   for (const Named<ShearRule>& row : namesOf<ShearRule>())
     menu->addAction(shown(row.label), this, [this, word = std::string(row.word)] {
-      m_desk.request({Type{{Spot::shearForce, {}, {}}, word}}, m_desk.newGesture(),
+      m_desk.request({Type{{Spot::shearForce, {}, {}}, word}}, m_desk.newCommand(),
                      tr("sense of the shear force"));
     });
   m_shearForce->setMenu(menu);
@@ -115,7 +115,7 @@ QList<QWidget*> ConventionGroup::buttons() const {
 void ConventionGroup::choose(Positive positive) {
   if (positive == m_desk.study().convention.positive)
     return;
-  m_desk.request({Type{{Spot::positive, {}, {}}, std::string(wordOf(positive))}}, m_desk.newGesture(),
+  m_desk.request({Type{{Spot::positive, {}, {}}, std::string(wordOf(positive))}}, m_desk.newCommand(),
                  tr("sign convention"));
   m_desk.say(positive == Positive::tension
                  ? tr("Tension now counts positive. Typed numbers keep their digits and now mean the "
@@ -125,7 +125,7 @@ void ConventionGroup::choose(Positive positive) {
 }
 
 void ConventionGroup::choose(ShearAxis axis) {
-  m_desk.request({Type{{Spot::shearAxis, {}, {}}, std::string(wordOf(axis))}}, m_desk.newGesture(),
+  m_desk.request({Type{{Spot::shearAxis, {}, {}}, std::string(wordOf(axis))}}, m_desk.newCommand(),
                  tr("direction of the shear axis"));
 }
 

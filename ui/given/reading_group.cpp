@@ -79,7 +79,7 @@ void ReadingGroup::listDirections() {
     if (direction.byName)
       words += QLatin1Char('\t') + fromUtf8(shownDegrees(direction.angle, angleDecimals));
     menu->addAction(words, this, [this, angle = direction.angle] {
-      m_desk.request({Type{readingSpot(m_desk.study()), angleText(angle)}}, m_desk.newGesture(),
+      m_desk.request({Type{readingSpot(m_desk.study()), angleText(angle)}}, m_desk.newCommand(),
                      tr("turn of the reading plane"));
     });
   }

@@ -173,7 +173,7 @@ void SectionView::keyPressEvent(QKeyEvent* event) {
   const Region& region = section->model.region;
   fibre.y = clamped(fibre.y, region.yLow, region.yHigh);
   fibre.z = clamped(fibre.z, region.zLow, region.zHigh);
-  place(fibre, m_desk.newGesture());
+  place(fibre, m_desk.newCommand());
 }
 
 void SectionView::refresh() {

@@ -16,7 +16,7 @@ void bringReadingTo(Desk& desk, const Table& table, int row) {
     return;
   }
   const Place place{Spot::reading, shownPoint(desk.study()).name, {}};
-  desk.request({Type{place, angleText(Angle::fromDegrees(*normal.exact))}}, desk.newGesture(),
+  desk.request({Type{place, angleText(Angle::fromDegrees(*normal.exact))}}, desk.newCommand(),
                QCoreApplication::translate("Planes", "turn of the reading plane"));
 }
 

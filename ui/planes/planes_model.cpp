@@ -190,7 +190,7 @@ std::optional<Problem> PlanesModel::enterWatched(const std::string& name, PlaneC
                                                  const std::string& typed) {
   const Place place{Spot::plane, owner(), name};
   if (column == PlaneColumn::plane)
-    return m_desk.request({Rename{place, typed}}, m_desk.newGesture(), tr("name of a watched plane"));
+    return m_desk.request({Rename{place, typed}}, m_desk.newCommand(), tr("name of a watched plane"));
   const auto [angle, tolerance] = splitTolerance(typed);
   Result<std::string> normal = normalTyped(column, angle);
   if (!normal)
@@ -198,7 +198,7 @@ std::optional<Problem> PlanesModel::enterWatched(const std::string& name, PlaneC
   Edits edits = {Type{{Spot::planeNormal, owner(), name}, *normal}};
   if (column == PlaneColumn::normal || !tolerance.empty())
     edits.push_back(Type{{Spot::planeTolerance, owner(), name}, tolerance});
-  return m_desk.request(edits, m_desk.newGesture(), tr("normal of a watched plane"));
+  return m_desk.request(edits, m_desk.newCommand(), tr("normal of a watched plane"));
 }
 
 std::optional<Problem> PlanesModel::enterNew(PlaneColumn column, const std::string& typed) {
@@ -210,11 +210,11 @@ std::optional<Problem> PlanesModel::enterNew(PlaneColumn column, const std::stri
   const std::string name = isName ? typed : freshName();
   return m_desk.request(
       {Insert{{Spot::plane, owner(), name}, std::nullopt}, Type{{Spot::planeNormal, owner(), name}, *normal}},
-      m_desk.newGesture(), tr("watched plane"));
+      m_desk.newCommand(), tr("watched plane"));
 }
 
 std::optional<Problem> PlanesModel::turn(const std::string& normal) {
-  return m_desk.request({Type{{Spot::reading, owner(), {}}, normal}}, m_desk.newGesture(),
+  return m_desk.request({Type{{Spot::reading, owner(), {}}, normal}}, m_desk.newCommand(),
                         tr("turn of the reading plane"));
 }
 
@@ -231,7 +231,7 @@ int PlanesModel::watchReading() {
 
 void PlanesModel::removeWatched(int row) {
   if (const std::string name = watchedIn(row); !name.empty())
-    m_desk.request({Remove{{Spot::plane, owner(), name}}}, m_desk.newGesture(),
+    m_desk.request({Remove{{Spot::plane, owner(), name}}}, m_desk.newCommand(),
                    tr("removal of a watched plane"));
 }
 

@@ -176,7 +176,7 @@ void BuildDialog::take() {
   if (!built)
     return complain(built.error().front());
   if (const auto problem = m_desk.request(editsThatAdd(m_desk.study(), built->combinations),
-                                          m_desk.newGesture(), tr("built combinations")))
+                                          m_desk.newCommand(), tr("built combinations")))
     complain(*problem);
 }
 

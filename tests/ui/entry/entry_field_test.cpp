@@ -147,7 +147,8 @@ TEST_F(EntryFieldTest, escapePutsBackTheTextAtEntry) {
   desk.request({Type{sx, "5"}}, desk.newGesture(), {});
   enter();
   type("7");
-  press(Qt::Key_Return);
+  QTest::qWait(2 * EntryField::settlePause);
+  EXPECT_EQ(kept(), "7 MPa");
   type("8,");
   press(Qt::Key_Escape);
   EXPECT_EQ(kept(), "5 MPa");
@@ -155,6 +156,20 @@ TEST_F(EntryFieldTest, escapePutsBackTheTextAtEntry) {
   EXPECT_EQ(field.echoText(), "= 5.000 MPa");
   leave();
   EXPECT_EQ(steps(), 1) << "only the step from before the stay";
+}
+
+TEST_F(EntryFieldTest, whatEnterTookIsNotPutBack) {
+  enter();
+  type("7");
+  press(Qt::Key_Return);
+  press(Qt::Key_Escape);
+  EXPECT_EQ(kept(), "7 MPa");
+  type("8,");
+  press(Qt::Key_Escape);
+  EXPECT_EQ(kept(), "7 MPa");
+  EXPECT_EQ(field.edit().text(), "7 MPa");
+  leave();
+  EXPECT_EQ(steps(), 1);
 }
 
 TEST_F(EntryFieldTest, escapeWithNothingToPutBackGoesOn) {
@@ -248,6 +263,12 @@ TEST_F(EntryFieldTest, aDragReplacesTheDraftAndSaysSo) {
   EXPECT_EQ(field.edit().toolTip(), "");
 }
 
+TEST_F(EntryFieldTest, onlyADragSaysThatItWasOne) {
+  desk.request({Type{sx, "5 MPa"}}, desk.newCommand(), {});
+  EXPECT_EQ(field.edit().text(), "5 MPa");
+  EXPECT_EQ(field.edit().toolTip(), "") << "pasted, or chosen in a menu";
+}
+
 TEST_F(EntryFieldTest, typingAfterADragTakesTheNoteAway) {
   desk.request({Type{sx, "5 MPa"}}, desk.newGesture(), {});
   EXPECT_NE(field.edit().toolTip(), "");
@@ -306,6 +327,61 @@ TEST(EntryFieldEnd, aFieldMayGoWhileItIsTypedInto) {
   QTest::keyClicks(&field->edit(), "1,5");
   delete field;
   EXPECT_EQ(textAt(desk.study(), sx), "0 MPa");
+}
+
+/// Where the fibre lies, which has to be in the section.
+struct RefusedPlace : testing::Test {
+  Desk desk{
+      *edited(newStudy(), Edits{Insert{{Spot::section, "beam", {}}, {}}, Insert{{Spot::fibre, "P1", {}}, {}},
+                                Type{{Spot::fibreSection, "P1", {}}, "beam"}})};
+  EntryField field{desk,
+                   boundTo([](const Study&) {
+                     return Place{Spot::fibreY, "P1", {}};
+                   }),
+                   {rowOf(Spot::fibreY).label, {}}};
+  RefusedPlace() {
+    field.edit().selectAll();
+    QTest::keyClicks(&field.edit(), "250");
+    QTest::keyClick(&field.edit(), Qt::Key_Return);
+    EXPECT_FALSE(field.isTaken());
+  }
+  void makeHeight(const char* text) {
+    EXPECT_FALSE(desk.request({Type{{Spot::size, "beam", "h"}, text}}, desk.newGesture(), {}));
+  }
+  std::string y() const { return *textAt(desk.study(), {Spot::fibreY, "P1", {}}); }
+};
+
+TEST_F(RefusedPlace, isTakenAsSoonAsAnotherEntryMakesItRight) {
+  makeHeight("400");
+  QCoreApplication::processEvents();
+  EXPECT_FALSE(field.isTaken()) << "not enough yet";
+  makeHeight("600");
+  QCoreApplication::processEvents();
+  EXPECT_TRUE(field.isTaken());
+  EXPECT_EQ(y(), "250 mm");
+  EXPECT_EQ(desk.undoStack()->count(), 3);
+  desk.undoStack()->undo();
+  EXPECT_EQ(y(), "0 mm") << "a step of its own";
+}
+
+TEST_F(RefusedPlace, isTakenAlsoWhereTheOtherEntryMovedTheFibre) {
+  EXPECT_FALSE(desk.request({Type{{Spot::size, "beam", "h"}, "600"}, Type{{Spot::fibreY, "P1", {}}, "-300"}},
+                            desk.newCommand(), {}));
+  QCoreApplication::processEvents();
+  EXPECT_TRUE(field.isTaken());
+  EXPECT_EQ(y(), "250 mm");
+}
+
+TEST_F(RefusedPlace, waitsForEnterWhereAnUndoMakesItRight) {
+  makeHeight("600");
+  makeHeight("200");
+  QCoreApplication::processEvents();
+  ASSERT_FALSE(field.isTaken());
+  desk.undoStack()->undo();
+  QCoreApplication::processEvents();
+  EXPECT_EQ(y(), "0 mm");
+  EXPECT_TRUE(desk.undoStack()->canRedo());
+  EXPECT_TRUE(field.complaintText().contains("can be taken")) << field.complaintText().toStdString();
 }
 
 /// A field that follows the shown point.
