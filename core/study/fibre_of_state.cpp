@@ -4,6 +4,7 @@
 #include "core/study/case_sources.h"
 
 #include <cassert>
+#include <cmath>
 
 namespace planewright {
 
@@ -26,6 +27,23 @@ std::optional<LoadedSection> loadedSectionOf(const Study& study, const Readout& 
   assert(here);
   loaded.rest = loaded.sense * state.stress + -1.0 * here->stress;
   return loaded;
+}
+
+Fibre readablePlace(const Study& study, const LoadedSection& section, const Fibre& fibre) {
+  const Unit unit = entryKindOf(study, Spot::fibreY).unit;
+  const double perUnit = std::pow(10, std::ceil(std::log10(unit.toBase(1) / 0.001) - 1e-9));
+  const auto read = [&](double length, double (*to)(double)) {
+    return unit.toBase(to(unit.fromBase(length) * perUnit) / perUnit);
+  };
+  const auto nearest = [](double value) { return std::round(value); };
+  const auto inwards = [](double value) { return std::trunc(value); };
+  for (double (*to)(double) : {+nearest, +inwards}) {
+    const Fibre place{read(fibre.y, to), read(fibre.z, to), fibre.view};
+    if (contains(section.model.region, place.y, place.z) &&
+        stressAt(section.model, section.forces, place, section.rule))
+      return place;
+  }
+  return fibre;
 }
 
 Result<WorstFibres> worstFibresOf(const LoadedSection& section) {

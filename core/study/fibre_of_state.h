@@ -27,4 +27,8 @@ struct WorstFibres {
 };
 Result<WorstFibres> worstFibresOf(const LoadedSection& section);
 
+/// The place with three decimals of a millimetre, or what is as fine in the study's unit of length, where
+/// that still lies in the material; else the place itself.
+Fibre readablePlace(const Study& study, const LoadedSection& section, const Fibre& fibre);
+
 } // namespace planewright

@@ -3,6 +3,7 @@
 
 #include "ui/look/look.h"
 
+#include <QApplication>
 #include <QHBoxLayout>
 #include <QLabel>
 #include <QPainter>
@@ -96,6 +97,12 @@ void FoldGroup::setSummary(const QString& summary) {
 void FoldGroup::setFolded(bool folded) {
   m_heading->setChecked(!folded);
   showFold();
+}
+
+void FoldGroup::keepKeys(const QWidget& going, QWidget& keeper) {
+  const QWidget* focused = QApplication::focusWidget();
+  if (focused && (focused == &going || going.isAncestorOf(focused)))
+    keeper.setFocus(Qt::OtherFocusReason);
 }
 
 bool FoldGroup::isFolded() const {

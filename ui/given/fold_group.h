@@ -40,6 +40,9 @@ public:
   void setCorner(QWidget* corner);
   void setSummary(const QString& summary);
   void setFolded(bool folded);
+  /// Before a part of the group goes that may have the keys: `keeper` of the same group gets them then, for
+  /// the next field in line would be one in which typing changes something else.
+  static void keepKeys(const QWidget& going, QWidget& keeper);
   bool isFolded() const;
 
 private:

@@ -113,20 +113,23 @@ void GivenPanel::buildGroups(QWidget* content) {
   rows->addStretch(1);
 }
 
-// Tab goes down what an engineer types first: components, line, reading plane; then everything else.
+// Tab goes down what an engineer types first: components and their sources, the section, line, reading plane;
+// then everything else.
 void GivenPanel::orderTabs() {
   QList<QWidget*> order;
   const auto add = [&order](const QList<EntryField*>& some) {
     for (EntryField* field : some)
       order += &field->edit();
   };
-  add(m_stress->fields());
+  const QList<EntryField*> ofStress = m_stress->fields();
+  add(ofStress.mid(0, ofStress.size() - 1));
+  add(m_section->fields());
+  add(ofStress.mid(ofStress.size() - 1)); // the free edge
   add(m_line->fields().mid(0, 2));
   add(m_secondLine->fields().mid(0, 2));
   add(m_reading->fields());
   order += m_reading->buttons();
   order += QList<QWidget*>{&m_section->heading()} + m_section->buttons();
-  add(m_section->fields());
   order += QList<QWidget*>{&m_stress->heading()} + m_stress->buttons();
   order += QList<QWidget*>{&m_line->heading()} + m_line->buttons();
   add(m_line->fields().mid(2));
@@ -148,6 +151,8 @@ void GivenPanel::refresh() {
   m_fact->setText(tr("bare numbers in %1").arg(fromUtf8(m_desk.study().units.stress)));
   const QString note = fromUtf8(shownPoint(m_desk.study()).note);
   const bool hasSecond = shownPoint(m_desk.study()).lines.size() > 1;
+  if (!hasSecond)
+    FoldGroup::keepKeys(*m_secondLine, m_line->heading());
   m_secondLine->setVisible(hasSecond);
   m_secondRule->setVisible(hasSecond);
   m_notes->setSummary(note.isEmpty() ? tr("none") : note.section(QLatin1Char('\n'), 0, 0));

@@ -157,7 +157,7 @@ void LineGroup::addLine(LineKind kind) {
   const std::string name = freeName(point, kind);
   m_desk.request({Insert{{Spot::line, point.name, name}, std::nullopt},
                   Type{{Spot::lineKind, point.name, name}, std::string(wordOf(kind))}},
-                 m_desk.newGesture(), tr("new line"));
+                 m_desk.newCommand(), tr("new line"));
 }
 
 // A name that only repeats the kind follows it.
@@ -168,7 +168,7 @@ void LineGroup::chooseKind(LineKind kind) {
   Edits edits = {Type{spot(study, Spot::lineKind), std::string(wordOf(kind))}};
   if (isNamedByKind() && line(study)->kind != kind)
     edits.push_back(Rename{spot(study, Spot::line), freeName(shownPoint(study), kind)});
-  m_desk.request(edits, m_desk.newGesture(), tr("kind of line"));
+  m_desk.request(edits, m_desk.newCommand(), tr("kind of line"));
 }
 
 bool LineGroup::isNamedByKind() const {
@@ -184,15 +184,18 @@ void LineGroup::editName() {
 
 void LineGroup::removeLine() {
   m_nameWanted = false;
-  m_desk.request({Remove{spot(m_desk.study(), Spot::line)}}, m_desk.newGesture(), tr("removal of the line"));
+  m_desk.request({Remove{spot(m_desk.study(), Spot::line)}}, m_desk.newCommand(), tr("removal of the line"));
 }
 
 void LineGroup::refresh() {
   const Line* own = line(m_desk.study());
   m_kind->setText(own ? shown(labelOf(own->kind)) : tr("no line"));
   m_kind->updateGeometry();
-  for (EntryField* field : m_fields)
+  for (EntryField* field : m_fields) {
+    if (!own)
+      keepKeys(*field, *m_kind);
     field->setVisible(own);
+  }
   m_fields.back()->setVisible(own && (m_nameWanted || !isNamedByKind()));
   m_kind->menu()->actions().at(m_kind->menu()->actions().size() - 2)->setEnabled(own);
   m_slopes->setVisible(own && own->kind == LineKind::grain);

@@ -40,6 +40,11 @@ Text captionOf(SectionShape shape, const std::string& key) {
   return symbol("%1_{%2}").with(kind->symbol).with(key.substr(0, key.find('.')));
 }
 
+/// A number does not part from its unit.
+std::string onOneLine(const std::string& quantity) {
+  return fromUtf8(quantity).replace(QLatin1Char(' '), QChar(QChar::Nbsp)).toStdString();
+}
+
 } // namespace
 
 SectionGroup::SectionGroup(Desk& desk, QWidget* parent)
@@ -50,7 +55,8 @@ SectionGroup::SectionGroup(Desk& desk, QWidget* parent)
       m_worst(new QuietButton(tr("Worst fibre"), Role::focus, this)),
       m_addBlock(new QuietButton(tr("Add a block"), Role::focus, this)),
       m_dropBlock(new QuietButton(tr("Remove the last"), Role::focus, this)), m_sizeRows(new QWidget(this)),
-      m_rest(new QWidget(this)), m_properties(new QLabel(m_rest)), m_view(new SectionView(desk, m_rest)) {
+      m_rest(new QWidget(this)), m_drawn(new QLabel(m_rest)), m_properties(new QLabel(m_rest)),
+      m_view(new SectionView(desk, m_rest)) {
   buildButtons();
   body().addLayout(rowOf({m_shape}));
   auto* sizes = new QVBoxLayout(m_sizeRows);
@@ -122,6 +128,10 @@ void SectionGroup::buildView() {
   auto* rest = static_cast<QVBoxLayout*>(m_rest->layout());
   rest->addLayout(rowOf({m_ready, m_worst}));
   rest->addLayout(rowOf({m_side}));
+  m_drawn->setWordWrap(true);
+  m_drawn->setTextFormat(Qt::PlainText);
+  m_drawn->setForegroundRole(QPalette::PlaceholderText);
+  rest->addWidget(m_drawn);
   rest->addWidget(m_view);
   m_properties->setWordWrap(true);
   m_properties->setForegroundRole(QPalette::PlaceholderText);
@@ -138,7 +148,7 @@ const TypedSection* SectionGroup::section() const {
 }
 
 void SectionGroup::ask(const Edits& edits, const QString& what) {
-  if (const auto problem = m_desk.request(edits, m_desk.newGesture(), what))
+  if (const auto problem = m_desk.request(edits, m_desk.newCommand(), what))
     m_desk.say(shown(*problem));
 }
 
@@ -192,7 +202,7 @@ void SectionGroup::listWorst() {
     menu->addAction(words.arg(length(one.fibre.y), length(one.fibre.z),
                               fromUtf8(stressFormOf(study, state).withUnit(one.measure))) +
                         (one.isPartial ? tr(" (where theory gives the shear)") : QString()),
-                    this, [this, fibre = one.fibre] {
+                    this, [this, fibre = readablePlace(study, *loaded, one.fibre)] {
                       ask(editsThatPlaceFibre(m_desk.study(), shownPoint(m_desk.study()).name, fibre),
                           tr("place of the fibre"));
                     });
@@ -239,6 +249,7 @@ void SectionGroup::rebuildSizes() {
     return;
   m_builtFor = wanted;
   for (EntryField* field : m_sizes) {
+    keepKeys(*field, *m_choice);
     field->hide();
     field->deleteLater();
   }
@@ -257,9 +268,9 @@ QString SectionGroup::properties() const {
     return {};
   const WrittenUnits units = writtenUnitsOf(m_desk.study());
   return shownRich(PW_TEXT("Given", "A = %1, I_{z} = %2, I_{y} = %3")
-                       .with(units.shown(model->properties.A, dimension::area))
-                       .with(units.shown(model->properties.Iz, dimension::secondMoment))
-                       .with(units.shown(model->properties.Iy, dimension::secondMoment)));
+                       .with(onOneLine(units.shown(model->properties.A, dimension::area)))
+                       .with(onOneLine(units.shown(model->properties.Iz, dimension::secondMoment)))
+                       .with(onOneLine(units.shown(model->properties.Iy, dimension::secondMoment))));
 }
 
 void SectionGroup::refresh() {
@@ -270,12 +281,17 @@ void SectionGroup::refresh() {
   m_choice->setText(m_choice->fontMetrics().elidedText(name, Qt::ElideRight, longestName));
   m_choice->setToolTip(name);
   m_choice->updateGeometry();
+  if (!own)
+    for (const QWidget* going : std::initializer_list<QWidget*>{m_shape, m_rest})
+      keepKeys(*going, *m_choice);
   m_shape->setVisible(own);
   m_sizeRows->setVisible(own);
   m_rest->setVisible(own);
   const bool isBuilt = own && own->shape == SectionShape::built;
   m_addBlock->setVisible(isBuilt);
   m_dropBlock->setVisible(isBuilt);
+  m_drawn->setText(tr("Drawn for %1, which is shown.").arg(fromUtf8(m_desk.readout().state().combination)));
+  m_drawn->setVisible(own && own->shape != SectionShape::tabled);
   m_view->setVisible(own && own->shape != SectionShape::tabled);
   m_worst->setVisible(own && own->shape != SectionShape::tabled);
   m_ready->setVisible(own && own->shape != SectionShape::tabled);

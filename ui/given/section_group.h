@@ -54,6 +54,7 @@ private:
   QuietButton* m_dropBlock;
   QWidget* m_sizeRows;
   QWidget* m_rest; ///< all below the sizes
+  QLabel* m_drawn; ///< whose stresses the drawing has
   QLabel* m_properties;
   SectionView* m_view;
   std::string m_builtFor; ///< the section and keys that the size fields stand for

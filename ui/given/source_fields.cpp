@@ -2,6 +2,7 @@
 #include "ui/given/source_fields.h"
 
 #include "core/study/section_edits.h"
+#include "core/study/typed.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/given/echoes.h"
 #include "ui/look/look.h"
@@ -12,6 +13,8 @@
 #include <QMenu>
 #include <QVBoxLayout>
 
+#include <algorithm>
+
 namespace planewright {
 
 namespace {
@@ -19,6 +22,14 @@ namespace {
 bool isOfOrthotropic(Spot spot) {
   return spot == Spot::rosetteAlong || spot == Spot::rosetteAcross || spot == Spot::rosetteNu12 ||
          spot == Spot::rosetteG;
+}
+
+/// "100 mm × 200 mm"
+QString sizesOf(const TypedSection& section) {
+  QStringList sizes;
+  for (const TypedSize& size : section.sizes)
+    sizes << fromUtf8(size.text);
+  return sizes.join(QStringLiteral(" × "));
 }
 
 bool isOfIsotropic(Spot spot) {
@@ -41,9 +52,7 @@ SourceFields::SourceFields(Desk& desk, Spot source, CaseId caseId, QWidget* pare
   head->addWidget(m_remove);
   rows->addLayout(head);
   m_remove->setAccessibleName(tr("remove %1").arg(shown(rowOf(source).label)));
-  connect(m_remove, &QAbstractButton::clicked, this, [this] {
-    ask({Remove{place(m_desk.study(), m_source)}}, tr("removal of %1").arg(shown(rowOf(m_source).label)));
-  });
+  connect(m_remove, &QAbstractButton::clicked, this, &SourceFields::remove);
   if (source == Spot::forces)
     addForces();
   else if (source == Spot::pressure)
@@ -145,18 +154,46 @@ Nature SourceFields::nature() const {
 }
 
 void SourceFields::ask(const Edits& edits, const QString& what) {
-  if (const auto problem = m_desk.request(edits, m_desk.newGesture(), what))
+  if (const auto problem = m_desk.request(edits, m_desk.newCommand(), what))
     m_desk.say(shown(*problem));
 }
 
+// What the case was before its rosette came is not known any more.
+void SourceFields::remove() {
+  ask({Remove{place(m_desk.study(), m_source)}}, tr("removal of %1").arg(shown(rowOf(m_source).label)));
+  if (m_source == Spot::rosette && !isPresent() && nature() == Nature::measured)
+    m_desk.say(tr("Case %1 is still a measured one; its nature is in the list of load cases.")
+                   .arg(fromUtf8(m_caseId(m_desk.study()))));
+}
+
+bool SourceFields::isFactored() const {
+  return std::ranges::any_of(m_desk.study().combinations, [this](const Combination& one) {
+    return std::ranges::any_of(one.factors, [this](const Factor& factor) {
+      return factor.caseId == m_caseId(m_desk.study()) &&
+             valueOf(m_desk.study(), Spot::factor, factor.factor) != 1;
+    });
+  });
+}
+
 void SourceFields::add() {
+  const QString id = fromUtf8(m_caseId(m_desk.study()));
+  if (m_source == Spot::rosette && nature() != Nature::measured && isFactored())
+    return m_desk.say(
+        tr("What is measured takes factor 1 only, and a combination has another one for case %1: give the "
+           "rosette a case of its own.")
+            .arg(id));
   const Nature before = nature();
+  const std::size_t sections = m_desk.study().sections.size();
   ask(editsThatAdd(), tr("new: %1").arg(shown(rowOf(m_source).label)));
   if (!isPresent())
     return;
   if (nature() != before)
-    m_desk.say(tr("Case %1 is a measured one now, at all points: it takes factor 1 only.")
-                   .arg(fromUtf8(m_caseId(m_desk.study()))));
+    m_desk.say(tr("Case %1 is a measured one now, at all points: it takes factor 1 only.").arg(id));
+  if (m_desk.study().sections.size() > sections)
+    m_desk.say(
+        tr("The forces need a section: “%1” was added, to begin with a rectangle %2. Give it its own shape "
+           "and sizes.")
+            .arg(fromUtf8(m_desk.study().sections.back().name), sizesOf(m_desk.study().sections.back())));
   m_fields.front()->edit().setFocus(Qt::OtherFocusReason);
   m_fields.front()->edit().selectAll();
 }

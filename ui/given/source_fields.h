@@ -38,7 +38,10 @@ private:
   void addChoice(Spot spot, const QString& meaning);
   Place place(const Study& study, Spot spot) const;
   Edits editsThatAdd() const;
+  void remove();
   Nature nature() const;
+  /// Whether a combination has the case with another factor than 1.
+  bool isFactored() const;
   void ask(const Edits& edits, const QString& what);
 
   Desk& m_desk;

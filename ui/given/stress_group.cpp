@@ -17,6 +17,7 @@
 #include <QVBoxLayout>
 
 #include <algorithm>
+#include <utility>
 
 namespace planewright {
 
@@ -212,14 +213,22 @@ void StressGroup::refresh() {
   const StateReading* state = stateOfCase(m_desk.readout(), caseId(m_desk.study()));
   const bool third = state && state->sz != 0;
   const bool inclined = m_desk.readout().axes != Angle();
-  for (SourceFields* source : m_sources)
+  for (SourceFields* source : m_sources) {
+    if (!source->isPresent())
+      keepKeys(*source, m_fields[sx]->edit());
     source->refresh();
+  }
   for (qsizetype i = 0; i < m_sources.size(); ++i)
     m_addSource->menu()->actions().at(i)->setEnabled(!m_sources.at(i)->isPresent());
   const QString whole = caseLine();
   m_whole->setText(whole);
   m_whole->setVisible(!whole.isEmpty());
   const bool hasEdge = m_desk.readout().edge.has_value();
+  for (const auto& [field, stays] : {std::pair{edge, hasEdge || m_edgeWanted},
+                                     {sz, third || m_thirdWanted},
+                                     {axes, inclined || m_axesWanted}})
+    if (!stays)
+      keepKeys(*m_fields[field], m_fields[sx]->edit());
   m_fields[edge]->setVisible(hasEdge || m_edgeWanted);
   m_addEdge->setVisible(!hasEdge && !m_edgeWanted);
   m_fields[sz]->setVisible(third || m_thirdWanted);
@@ -271,8 +280,15 @@ QString StressGroup::sumLine() const {
 
 QString StressGroup::cautionLine() const {
   QStringList sentences;
-  for (const Text& caution : cautionsOf(m_desk.readout(), m_desk.readout().state()))
+  const Readout& readout = m_desk.readout();
+  for (const Text& caution : cautionsOf(readout, readout.state()))
     sentences << shown(caution);
+  // What is typed here has its limits also where it does not act in what is shown.
+  const auto typed = std::ranges::find(readout.cases, caseId(m_desk.study()), &CaseReading::id);
+  if (typed != readout.cases.end())
+    for (const Text& caution : typed->cautions)
+      if (!sentences.contains(shown(caution)))
+        sentences << shown(caution);
   if (const QString left = edgeLine(); !left.isEmpty())
     sentences.prepend(left);
   return sentences.join(QLatin1Char(' '));

@@ -48,6 +48,36 @@ TEST_F(SourcesTest, sectionForcesBringASectionAndAddToTheStresses) {
   EXPECT_FALSE(point().fibre) << "section, fibre and forces came as one step";
 }
 
+TEST_F(SourcesTest, tabGoesFromTheSourcesThroughTheSectionToTheLine) {
+  choose("Add a source", "section forces");
+  QStringList names;
+  for (int i = 0; i < 11; ++i) {
+    names += QApplication::focusWidget()->accessibleName().section(',', 0, 0);
+    QTest::keyClick(QApplication::focusWidget(), Qt::Key_Tab);
+  }
+  EXPECT_EQ(names.join("; "), QString::fromUtf8("N; Vy; Vz; T; My; Mz; b; h; y; z; angle φ"));
+}
+
+TEST_F(SourcesTest, theKeysStayInTheGroupWhereAFieldGoes) {
+  choose("Add a source", "section forces");
+  desk.request({Insert{{Spot::point, "P2", {}}, {}}}, desk.newCommand(), {});
+  ASSERT_TRUE(field("N").edit().hasFocus());
+  desk.show("P2", {});
+  EXPECT_FALSE(field("N").isVisible());
+  EXPECT_TRUE(field("σx").edit().hasFocus());
+  desk.show("P1", {});
+  field("y").edit().setFocus(Qt::TabFocusReason);
+  desk.show("P2", {});
+  EXPECT_TRUE(button("section of the point").hasFocus()) << "no field of another thing";
+}
+
+TEST_F(SourcesTest, typedStressesAreAPartOfTheirOwn) {
+  choose("Add a source", "section forces");
+  type("σx", "1");
+  type("N", "40");
+  EXPECT_TRUE(says("typed 1.000, axial 2.000, bending 0.000"));
+}
+
 TEST_F(SourcesTest, aSizeKeepsTheFibreAtItsReadyPlace) {
   choose("Add a source", "section forces");
   type("h", "600");
@@ -130,6 +160,47 @@ TEST_F(SourcesTest, theWorstFibreIsNamedAndGoneTo) {
   choose("Ready places", "axis, middle");
   choose("Worst fibre", "greatest tension");
   EXPECT_EQ(point().fibre->y, "-100 mm");
+}
+
+TEST_F(SourcesTest, theWorstFibreIsWrittenAsItIsRead) {
+  choose("Add a source", "section forces");
+  choose("shape of the section", "T section");
+  type("Mz", "10");
+  type("Vy", "30");
+  choose("Worst fibre", "greatest shear");
+  EXPECT_LE(point().fibre->y.size(), std::string("-1234.567 mm").size()) << point().fibre->y;
+}
+
+TEST_F(SourcesTest, aSectionThatComesWithTheForcesIsTold) {
+  QSignalSpy said(&desk, &Desk::said);
+  choose("Add a source", "section forces");
+  ASSERT_FALSE(said.isEmpty());
+  EXPECT_TRUE(said.back().front().toString().contains("rectangle 100 mm × 200 mm"))
+      << said.back().front().toString().toStdString();
+}
+
+TEST_F(SourcesTest, aFactoredCaseTakesNoRosette) {
+  ASSERT_FALSE(
+      desk.request({Insert{{Spot::combination, "1.35 G", {}}, {}}, Insert{{Spot::factor, "1.35 G", "G"}, {}},
+                    Type{{Spot::factor, "1.35 G", "G"}, "1.35"}},
+                   desk.newCommand(), {}));
+  QSignalSpy said(&desk, &Desk::said);
+  choose("Add a source", "strain rosette");
+  ASSERT_EQ(said.count(), 1);
+  EXPECT_TRUE(said.back().front().toString().contains("a case of its own"));
+  EXPECT_FALSE(point().stress.front().rosette);
+}
+
+TEST_F(SourcesTest, theLimitsOfWhatIsTypedAreSaidWhereItDoesNotAct) {
+  desk.request({Insert{{Spot::loadCase, "Q", {}}, {}}, Insert{{Spot::caseStress, "P1", "Q"}, {}},
+                Insert{{Spot::pressure, "P1", "Q"}, {}}, Type{{Spot::pressureP, "P1", "Q"}, "1 MPa"},
+                Type{{Spot::pressureT, "P1", "Q"}, "100 mm"}, Insert{{Spot::combination, "1 G", {}}, {}},
+                Insert{{Spot::factor, "1 G", "G"}, {}}, Type{{Spot::factor, "1 G", "G"}, "1"}},
+               desk.newCommand(), {});
+  desk.show("P1", "1 G");
+  EXPECT_FALSE(says("is below 10"));
+  button("case Q").click();
+  EXPECT_TRUE(says("is below 10"));
 }
 
 TEST_F(SourcesTest, whatTheoryDoesNotGiveIsSaidInPlace) {
