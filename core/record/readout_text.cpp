@@ -174,8 +174,9 @@ private:
       m_out += '\n';
       line("  ", PW_TEXT("Readout", "Over all combinations"));
       m_out += '\n';
-      planes(envelopeTable(m_study, readout));
-      for (const Text& caution : cautionsOfEnvelope(readout))
+      const Table range = envelopeTable(m_study, readout);
+      planes(range);
+      for (const Text& caution : range.ofRange)
         line("    ", PW_TEXT("Readout", "Caution: %1").with(caution));
     }
     for (std::size_t i = 0; i < readout.checks.size(); ++i)

@@ -135,8 +135,8 @@ Table withEnvelope(Table table, const Study& study, const Readout& readout) {
   const StressForm stresses = stressFormOf(study, readout);
   for (Row& row : table.rows)
     addEnvelope(row, stresses, readout);
-  const std::vector<Text> cautions = cautionsOfEnvelope(readout);
-  table.cautions.insert(table.cautions.end(), cautions.begin(), cautions.end());
+  table.ofRange = cautionsOfEnvelope(readout);
+  table.cautions.insert(table.cautions.end(), table.ofRange.begin(), table.ofRange.end());
   return table;
 }
 

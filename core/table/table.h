@@ -32,7 +32,8 @@ struct Row {
 struct Table {
   std::vector<Column> columns;
   std::vector<Row> rows;
-  std::vector<Text> cautions; ///< what a reader of the rows must know, a sentence each
+  std::vector<Text> cautions;     ///< what a reader of the rows must know, a sentence each
+  std::vector<Text> ofRange = {}; ///< those of them that least and greatest values have
 };
 
 /// plane | normal at | cut at | sn | tnt for one state, in the study's unit.

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/planes/planes_panel.h"
 
+#include "core/table/cautions.h"
+#include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 #include "ui/planes/plane_table.h"
 #include "ui/planes/planes_page.h"
@@ -8,15 +10,20 @@
 #include "ui/planes/sweep_page.h"
 
 #include <QHBoxLayout>
+#include <QLabel>
 #include <QStackedWidget>
 #include <QVBoxLayout>
 
 namespace planewright {
 
+namespace {
+constexpr int ownPages = 2; ///< the tables; what is adopted comes behind them
+}
+
 PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
     : QWidget(parent), m_tabs(new QuietTabs(this)), m_pages(new QStackedWidget(this)),
       m_planes(new PlanesPage(desk, m_pages)), m_sweep(new SweepPage(desk, m_pages)),
-      m_copy(new QuietButton(tr("Copy table"), Role::focus, this)) {
+      m_copy(new QuietButton(tr("Copy table"), Role::focus, this)), m_range(new QLabel(this)) {
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
   setAccessibleName(tr("Planes"));
@@ -35,17 +42,31 @@ PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
   rows->setSpacing(2);
   rows->addLayout(line);
   rows->addWidget(m_pages, 1);
+  m_range->setWordWrap(true);
+  m_range->setTextFormat(Qt::PlainText);
+  m_range->setContentsMargins(10, 0, 10, 2);
+  rows->addWidget(m_range);
   setFocusProxy(m_planes);
   connect(m_tabs, &QTabBar::tabBarClicked, this, &PlanesPanel::showPage);
   connect(m_tabs, &QTabBar::currentChanged, this, &PlanesPanel::showPage);
   connect(m_copy, &QAbstractButton::clicked, this, &PlanesPanel::copyShown);
+  const auto tellRange = [this, &desk] {
+    QStringList sentences;
+    for (const Text& caution : cautionsOfEnvelope(desk.readout()))
+      sentences << shown(caution);
+    m_range->setText(sentences.join(QLatin1Char(' ')));
+    m_range->setVisible(m_pages->currentIndex() < ownPages && !sentences.isEmpty());
+  };
+  connect(&desk, &Desk::changed, this, tellRange);
+  tellRange();
   showPage(0);
 }
 
 void PlanesPanel::showPage(int index) {
   m_pages->setCurrentIndex(index);
   setFocusProxy(m_pages->currentWidget());
-  m_copy->setVisible(index < 2);
+  m_copy->setVisible(index < ownPages);
+  m_range->setVisible(index < ownPages && !m_range->text().isEmpty());
   setProperty("areaKeys",
               index == 2   ? m_pages->currentWidget()->property("areaKeys").toString()
               : index == 0 ? tr("F2 edit, Enter go there, Ctrl+Enter other solution, Ins watch, Del remove")
@@ -58,11 +79,10 @@ void PlanesPanel::adopt(QWidget* page, const QString& title) {
 }
 
 void PlanesPanel::release() {
-  constexpr int adopted = 2;
-  if (m_tabs->count() <= adopted)
+  if (m_tabs->count() <= ownPages)
     return;
   m_tabs->setCurrentIndex(0);
-  m_tabs->removeTab(adopted);
+  m_tabs->removeTab(ownPages);
   showPage(0);
 }
 

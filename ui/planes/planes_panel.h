@@ -5,6 +5,7 @@
 
 #include <QWidget>
 
+class QLabel;
 class QStackedWidget;
 
 namespace planewright {
@@ -41,6 +42,7 @@ private:
   PlanesPage* m_planes;
   SweepPage* m_sweep;
   QuietButton* m_copy;
+  QLabel* m_range; ///< what must stand with least and greatest values
 };
 
 } // namespace planewright

@@ -71,7 +71,17 @@ bool TableModel::setData(const QModelIndex& index, const QVariant& value, int ro
   return role == Qt::EditRole && !enter(index, value.toString());
 }
 
+QString TableModel::rangeTip() const {
+  QStringList sentences = {tr("Over all combinations that are judged; single cases are not part of it.")};
+  for (const Text& caution : m_table.ofRange)
+    sentences << shown(caution);
+  return sentences.join(QLatin1Char('\n'));
+}
+
 QVariant TableModel::headerData(int section, Qt::Orientation orientation, int role) const {
+  if (orientation == Qt::Horizontal && role == Qt::ToolTipRole &&
+      section >= static_cast<int>(PlaneColumn::leastSn) && section < columnCount())
+    return rangeTip();
   if (orientation != Qt::Horizontal || role != Qt::DisplayRole || section >= columnCount())
     return {};
   const Column& column = m_table.columns[static_cast<std::size_t>(section)];

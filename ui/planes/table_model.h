@@ -52,6 +52,7 @@ protected:
   void tellChanged();
 
 private:
+  QString rangeTip() const;
   void setColumns(const std::vector<Column>& columns);
 
   Table m_table;

@@ -14,6 +14,7 @@
 #include <QAbstractItemModelTester>
 #include <QApplication>
 #include <QClipboard>
+#include <QLabel>
 #include <QScrollBar>
 #include <QSignalSpy>
 #include <QTest>
@@ -54,6 +55,26 @@ struct EnvelopeTest : testing::Test {
   std::string shown() const { return desk.readout().state().combination; }
   DraftEdit* editor() { return qobject_cast<DraftEdit*>(QApplication::focusWidget()); }
 };
+
+TEST_F(EnvelopeTest, saysWhatARangeIsMadeOf) {
+  addTwo();
+  const auto tip = [&](PlaneColumn column) {
+    return model.headerData(static_cast<int>(column), Qt::Horizontal, Qt::ToolTipRole).toString();
+  };
+  const auto foot = [&] {
+    for (const QLabel* label : panel.findChildren<QLabel*>())
+      if (label->isVisible() && label->text().contains("count 0 for"))
+        return label->text();
+    return QString();
+  };
+  EXPECT_TRUE(tip(PlaneColumn::leastSn).contains("single cases are not part"));
+  EXPECT_EQ(tip(PlaneColumn::sn), "");
+  EXPECT_EQ(foot(), "");
+  ask({Insert{{Spot::loadCase, "M", {}}, {}}, Insert{{Spot::combination, "1 M", {}}, {}},
+       Insert{{Spot::factor, "1 M", "M"}, {}}});
+  EXPECT_TRUE(foot().contains("1 M"));
+  EXPECT_TRUE(tip(PlaneColumn::leastSn).contains(foot()));
+}
 
 TEST_F(EnvelopeTest, columnsComeAndGoWithTheSecondCombination) {
   QAbstractItemModelTester tester(&model, QAbstractItemModelTester::FailureReportingMode::Fatal);
