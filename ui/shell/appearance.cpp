@@ -3,11 +3,11 @@
 
 #include "ui/look/font.h"
 #include "ui/look/look.h"
+#include "ui/look/ring_style.h"
 
 #include <QApplication>
 #include <QScreen>
 #include <QSettings>
-#include <QStyleFactory>
 
 #include <array>
 
@@ -48,7 +48,7 @@ void chooseAppearance(Appearance appearance) {
 }
 
 void dressApplication() {
-  QApplication::setStyle(QStyleFactory::create(QStringLiteral("Fusion")));
+  QApplication::setStyle(new RingStyle);
   QApplication::setFont(programFont(textPixels()));
   const Appearance appearance = chosenAppearance();
   const bool dark = appearance == Appearance::dark || (appearance == Appearance::system && systemIsDark());

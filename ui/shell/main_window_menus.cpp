@@ -68,7 +68,7 @@ void MainWindow::addFileMenu() {
   });
   menu.addSeparator();
   add(menu, tr("&Import points…"), {}, [this] { importPoints(); });
-  add(menu, tr("Export p&oints…"), {}, [this] {
+  add(menu, tr("Export poin&ts…"), {}, [this] {
     settleDrafts();
     m_filing->writeTable();
   });
@@ -167,8 +167,11 @@ void MainWindow::addListsOfStudy(QMenu& menu) {
   add(menu, tr("&Combinations…"), {}, [this, open] { open(m_combinations, combinations); });
   add(menu, tr("&Build combinations…"), {}, [this] {
     settleDrafts();
-    auto* dialog = new BuildDialog(m_desk, this);
+    auto* dialog = findChild<BuildDialog*>();
+    if (!dialog)
+      dialog = new BuildDialog(m_desk, this);
     dialog->show();
+    dialog->activateWindow();
   });
   add(menu, tr("Mate&rials…"), {}, [this] { showMaterials(); });
 }

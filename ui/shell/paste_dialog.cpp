@@ -202,7 +202,11 @@ void PasteDialog::tell(const PastedPoints& pasted) {
   m_header->setChecked(pasted.hasHeader);
   m_header->setEnabled(!pasted.columns.empty());
   m_next->setEnabled(wrong > 0);
-  m_table->setColumnHidden(static_cast<int>(pasted.columns.size()), wrong == 0);
+  const int ofWords = static_cast<int>(pasted.columns.size());
+  m_table->setColumnHidden(ofWords, wrong == 0);
+  // First, so that it is seen in the widest table.
+  if (wrong > 0)
+    m_meanings->moveSection(m_meanings->visualIndex(ofWords), 0);
   m_additions->setText(whatIsAdded(m_desk.study(), pasted).join(QLatin1Char('\n')));
   QStringList cautions;
   for (const Text& caution : pasted.cautions)
@@ -251,7 +255,7 @@ void PasteDialog::take() {
     return;
   // The dialog follows the study, so its own change must not be read as a table once more.
   disconnect(&m_desk, &Desk::changed, this, nullptr);
-  if (const auto problem = m_desk.request(pasted.edits, m_desk.newGesture(), tr("pasted table"))) {
+  if (const auto problem = m_desk.request(pasted.edits, m_desk.newCommand(), tr("pasted table"))) {
     connect(&m_desk, &Desk::changed, this, &PasteDialog::preview);
     return complain(&*problem);
   }

@@ -5,6 +5,8 @@
 #include "core/study/copied_point.h"
 #include "core/study/fresh_name.h"
 #include "core/study/section_edits.h"
+#include "core/study/typed.h"
+#include "core/table/cautions.h"
 #include "ui/look/look.h"
 
 #include <QCoreApplication>
@@ -107,19 +109,20 @@ Things loadCases() {
   id.edits = [](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
     return editsThatRenameCase(study, study.cases[row].id, typed);
   };
-  return {
-      words("Load cases"),
-      words("load case"),
-      [](const Study& study) { return study.cases.size(); },
-      {id, typedColumn(words("Name"), Spot::caseName, place),
-       wordColumn<Nature>(words("Nature"), Spot::caseNature, place),
-       wordColumn<Duration>(words("Duration"), Spot::caseDuration, place),
-       typedColumn(words("Never together with"), Spot::caseExcludes, place)},
-      newCase,
-      place,
-      {},
-      {},
-      [](const Study& study, std::size_t row) { return editsThatRemoveCase(study, study.cases[row].id); }};
+  return {words("Load cases"),
+          words("load case"),
+          [](const Study& study) { return study.cases.size(); },
+          {id, typedColumn(words("Name"), Spot::caseName, place),
+           wordColumn<Nature>(words("Nature"), Spot::caseNature, place),
+           wordColumn<Duration>(words("Duration"), Spot::caseDuration, place),
+           typedColumn(words("Never together with"), Spot::caseExcludes, place)},
+          newCase,
+          place,
+          {},
+          {},
+          [](const Study& study, std::size_t row) -> Result<Edits> {
+            return editsThatRemoveCase(study, study.cases[row].id);
+          }};
 }
 
 Things combinations() {
@@ -140,7 +143,12 @@ Things combinations() {
           editsThatAddNext,
           place,
           {},
-          editsThatAddLines};
+          editsThatAddLines,
+          {},
+          [](const Study& study, std::size_t row) {
+            const Combination& one = study.combinations[row];
+            return isMisnamed(study, one) ? shown(misnamed(one.name, textOf(one))) : QString();
+          }};
 }
 
 Things points() {
@@ -193,6 +201,18 @@ Things sections() {
           [](const Study& study, std::size_t row) {
             const std::string& name = study.sections[row].name;
             return editsThatCopySection(study, name, freshSectionName(study, name));
+          },
+          {},
+          [](const Study& study, std::size_t row) -> Result<Edits> {
+            const std::string& name = study.sections[row].name;
+            const std::vector<std::string> inside = pointsIn(study, name);
+            if (inside.empty())
+              return Edits{Remove{{Spot::section, name, {}}}};
+            return tl::unexpected(problemAt({Spot::section, name, {}}, name,
+                                            PW_TEXT("Things", "Points lie in the section “%1”: %2.")
+                                                .with(name)
+                                                .with(joined(inside).toStdString()),
+                                            PW_TEXT("Things", "Give them another section, or none, first.")));
           }};
 }
 

@@ -32,7 +32,9 @@ struct Things {
   /// What adds the rows of a pasted text; none where nothing is pasted.
   std::function<Result<Edits>(const Study&, const std::string& text)> paste = {};
   /// What takes a row away, where that is more than its thing.
-  std::function<Edits(const Study&, std::size_t row)> remove = {};
+  std::function<Result<Edits>(const Study&, std::size_t row)> remove = {};
+  /// What must be known of a row; none where there is nothing.
+  std::function<QString(const Study&, std::size_t row)> caution = {};
 };
 
 Things loadCases();

@@ -10,6 +10,7 @@
 #include <QDialogButtonBox>
 #include <QGuiApplication>
 #include <QHeaderView>
+#include <QLabel>
 #include <QPushButton>
 #include <QStyledItemDelegate>
 #include <QTableView>
@@ -61,12 +62,13 @@ private:
 
 ThingsDialog::ThingsDialog(Desk& desk, Things things, QWidget* parent)
     : QDialog(parent), m_desk(desk), m_model(new ThingsModel(desk, std::move(things), this)),
-      m_table(new QTableView(this)), m_complaint(new Complaint(this)),
+      m_table(new QTableView(this)), m_complaint(new Complaint(this)), m_caution(new QLabel(this)),
       m_buttons(new QDialogButtonBox(QDialogButtonBox::Close, this)) {
   build();
   connect(m_model, &ThingsModel::refused, this, &ThingsDialog::complain);
   connect(m_model, &ThingsModel::taken, m_complaint, &QWidget::hide);
   connect(m_table->selectionModel(), &QItemSelectionModel::currentChanged, this, &ThingsDialog::offer);
+  connect(m_table->selectionModel(), &QItemSelectionModel::currentChanged, this, &ThingsDialog::moveOn);
   connect(&m_desk, &Desk::changed, this, &ThingsDialog::offer);
   select(0);
   offer();
@@ -86,6 +88,8 @@ void ThingsDialog::build() {
   m_table->horizontalHeader()->setSectionResizeMode(QHeaderView::Stretch);
   m_table->horizontalHeader()->setDefaultAlignment(Qt::AlignLeft | Qt::AlignVCenter);
   m_complaint->hide();
+  m_caution->setWordWrap(true);
+  m_caution->setTextFormat(Qt::PlainText);
   connect(addButton(tr("&Add")), &QPushButton::clicked, this, &ThingsDialog::add);
   if (things.copy) {
     m_copy = addButton(tr("&Duplicate"));
@@ -107,6 +111,7 @@ void ThingsDialog::build() {
   auto* rows = new QVBoxLayout(this);
   rows->addWidget(m_table, 1);
   rows->addWidget(m_complaint);
+  rows->addWidget(m_caution);
   rows->addWidget(m_buttons);
 }
 
@@ -133,10 +138,42 @@ void ThingsDialog::select(int row) {
     m_table->setCurrentIndex(m_model->index(row, 0));
 }
 
+void ThingsDialog::showEvent(QShowEvent* event) {
+  QDialog::showEvent(event);
+  m_table->setFocus(Qt::OtherFocusReason);
+}
+
+// What was refused when an editor closed is told while the keys go to another row: it stays for that.
+void ThingsDialog::moveOn() {
+  if (!m_isNewComplaint)
+    m_complaint->hide();
+}
+
 void ThingsDialog::complain(const Problem& problem) {
+  m_isNewComplaint = true;
+  QMetaObject::invokeMethod(
+      this, [this] { m_isNewComplaint = false; }, Qt::QueuedConnection);
   const QString where = problem.line > 0 ? tr("Line %1: ").arg(problem.line) : QString();
   m_complaint->say(where + shown(problem.what), shown(problem.mend));
   m_complaint->show();
+}
+
+// The first few; hundreds of rows may be wrong in the same way.
+QString ThingsDialog::cautions() const {
+  const Things& things = m_model->things();
+  constexpr int most = 3;
+  QStringList sentences;
+  int count = 0;
+  for (int i = 0; things.caution && i < m_model->rowCount(); ++i) {
+    const QString one = things.caution(m_desk.study(), static_cast<std::size_t>(i));
+    if (one.isEmpty())
+      continue;
+    if (count++ < most)
+      sentences << one;
+  }
+  if (count > most)
+    sentences << tr("So do %1 more.").arg(count - most);
+  return sentences.join(QLatin1Char('\n'));
 }
 
 void ThingsDialog::offer() {
@@ -146,6 +183,8 @@ void ThingsDialog::offer() {
   m_remove->setEnabled(some);
   m_up->setEnabled(some && row() > 0);
   m_down->setEnabled(some && row() + 1 < m_model->rowCount());
+  m_caution->setText(cautions());
+  m_caution->setVisible(!m_caution->text().isEmpty());
 }
 
 void ThingsDialog::add() {
@@ -177,9 +216,11 @@ void ThingsDialog::remove() {
   const int from = row();
   const Things& things = m_model->things();
   const auto index = static_cast<std::size_t>(from);
-  const Edits edits = things.remove ? things.remove(m_desk.study(), index)
-                                    : Edits{Remove{things.place(m_desk.study(), index)}};
-  if (m_model->ask(edits, tr("removal of a %1").arg(things.one)))
+  const Result<Edits> edits = things.remove ? things.remove(m_desk.study(), index)
+                                            : Edits{Remove{things.place(m_desk.study(), index)}};
+  if (!edits)
+    return complain(edits.error());
+  if (m_model->ask(*edits, tr("removal of a %1").arg(things.one)))
     select(qMin(from, m_model->rowCount() - 1));
 }
 

@@ -7,6 +7,7 @@
 #include <QDialog>
 
 class QDialogButtonBox;
+class QLabel;
 class QPushButton;
 class QTableView;
 
@@ -25,6 +26,7 @@ public:
 
   QTableView& table() const { return *m_table; }
   QString complaint() const;
+  QString cautions() const;
   /// A further button at the left of the row.
   QPushButton* addButton(const QString& words);
 
@@ -37,6 +39,9 @@ public slots:
   void moveUp() { move(-1); }
   void moveDown() { move(1); }
 
+protected:
+  void showEvent(QShowEvent* event) override;
+
 private:
   void build();
   void move(int by);
@@ -44,12 +49,15 @@ private:
   bool hasRow() const;
   void select(int row);
   void complain(const Problem& problem);
+  void moveOn();
   void offer();
 
   Desk& m_desk;
   ThingsModel* m_model;
   QTableView* m_table;
   Complaint* m_complaint;
+  bool m_isNewComplaint = false;
+  QLabel* m_caution;
   QDialogButtonBox* m_buttons;
   QPushButton* m_copy = nullptr;
   QPushButton* m_remove = nullptr;

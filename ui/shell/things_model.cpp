@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/things_model.h"
 
+#include "ui/look/look.h"
+
 namespace planewright {
 
 ThingsModel::ThingsModel(Desk& desk, Things things, QObject* parent)
@@ -43,13 +45,21 @@ bool ThingsModel::setData(const QModelIndex& index, const QVariant& value, int r
   const Result<Edits> edits =
       column.edits(m_desk.study(), static_cast<std::size_t>(index.row()), value.toString().toStdString());
   if (edits)
-    return ask(*edits, column.heading);
+    return ask(*edits, stepIn(index));
   Q_EMIT refused(edits.error());
   return false;
 }
 
+// "load case Q: nature"
+QString ThingsModel::stepIn(const QModelIndex& index) const {
+  const Place place = m_things.place(m_desk.study(), static_cast<std::size_t>(index.row()));
+  const QString heading = m_things.columns[static_cast<std::size_t>(index.column())].heading;
+  const bool isKey = index.column() == 0;
+  return tr("%1 %2: %3").arg(m_things.one, fromUtf8(place.owner), isKey ? tr("name") : heading.toLower());
+}
+
 bool ThingsModel::ask(const Edits& edits, const QString& what) {
-  if (const std::optional<Problem> problem = m_desk.request(edits, m_desk.newGesture(), what)) {
+  if (const std::optional<Problem> problem = m_desk.request(edits, m_desk.newCommand(), what)) {
     Q_EMIT refused(*problem);
     return false;
   }

@@ -32,6 +32,7 @@ signals:
   void taken();
 
 private:
+  QString stepIn(const QModelIndex& index) const;
   void refresh();
 
   Desk& m_desk;

@@ -74,6 +74,7 @@ TEST_F(PasteDialogTest, marksWrongRowsSaysWhyAndTakesNothing) {
   EXPECT_TRUE(dialog.complaint().startsWith("Line 3, column 2: This is a force"));
   EXPECT_TRUE(cell(dialog, 1, 3).startsWith(QString::fromUtf8("▲ This is a force")));
   EXPECT_TRUE(cell(dialog, 0, 3).isEmpty());
+  EXPECT_EQ(dialog.table().columnViewportPosition(3), 0) << "what is wrong stands first";
   const QModelIndex wrong = dialog.table().model()->index(1, 1);
   EXPECT_TRUE(wrong.data(Qt::BackgroundRole).isValid());
   EXPECT_FALSE(wrong.siblingAtColumn(2).data(Qt::BackgroundRole).isValid());

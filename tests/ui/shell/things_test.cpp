@@ -57,6 +57,47 @@ TEST_F(ThingsTest, whatIsNotTakenIsToldInTheWindow) {
   EXPECT_TRUE(dialog.complaint().isEmpty());
 }
 
+TEST_F(ThingsTest, whatWasRefusedIsForgottenWithTheNextRow) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  dialog.show();
+  dialog.add();
+  EXPECT_FALSE(put(dialog, 1, 0, "G"));
+  dialog.table().setCurrentIndex(dialog.table().model()->index(0, 0));
+  EXPECT_FALSE(dialog.complaint().isEmpty()) << "leaving the cell is what refused it";
+  QCoreApplication::processEvents();
+  dialog.table().setCurrentIndex(dialog.table().model()->index(1, 0));
+  EXPECT_TRUE(dialog.complaint().isEmpty());
+}
+
+TEST_F(ThingsTest, theKeysAreInTheTableEachTimeItIsShown) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  for (int i = 0; i < 2; ++i) {
+    dialog.show();
+    dialog.activateWindow();
+    ASSERT_TRUE(QTest::qWaitForWindowActive(&dialog));
+    EXPECT_TRUE(dialog.table().hasFocus());
+    dialog.findChildren<QPushButton*>().front()->setFocus();
+    dialog.close();
+  }
+}
+
+TEST_F(ThingsTest, aStepInAListNamesTheThing) {
+  ThingsDialog dialog(m_desk, loadCases(), nullptr);
+  EXPECT_TRUE(put(dialog, 0, 2, "variable"));
+  EXPECT_EQ(m_desk.undoStack()->undoText(), "load case G: nature");
+  EXPECT_TRUE(put(dialog, 0, 0, "D"));
+  EXPECT_EQ(m_desk.undoStack()->undoText(), "load case G: name");
+}
+
+TEST_F(ThingsTest, aNameThatSaysOtherFactorsIsTold) {
+  ThingsDialog dialog(m_desk, combinations(), nullptr);
+  dialog.add();
+  EXPECT_TRUE(put(dialog, 0, 1, "1.35 G"));
+  EXPECT_EQ(dialog.cautions(), "");
+  EXPECT_TRUE(put(dialog, 0, 0, "1.5 G"));
+  EXPECT_TRUE(dialog.cautions().contains("says other factors")) << dialog.cautions().toStdString();
+}
+
 TEST_F(ThingsTest, theLastCaseCannotGo) {
   ThingsDialog dialog(m_desk, loadCases(), nullptr);
   dialog.show();
@@ -170,7 +211,8 @@ TEST_F(ThingsTest, sectionsAreNamedShapedCopiedAndKeptWhileAPointLiesInThem) {
   EXPECT_EQ(m_desk.study().sections.size(), 1u) << "the copy holds no point";
   dialog.remove();
   EXPECT_EQ(m_desk.study().sections.size(), 1u);
-  EXPECT_TRUE(dialog.complaint().contains("Point P1 lies in section")) << dialog.complaint().toStdString();
+  EXPECT_TRUE(dialog.complaint().contains("Points lie in the section “beam”: P1."))
+      << dialog.complaint().toStdString();
 }
 
 TEST_F(ThingsTest, anEmptyListOfSectionsOffersOnlyANewOne) {
