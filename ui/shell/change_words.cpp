@@ -9,6 +9,7 @@
 #include <QCoreApplication>
 
 #include <algorithm>
+#include <cmath>
 
 namespace planewright {
 
@@ -41,8 +42,18 @@ QString cut(const std::string& text) {
   return line.size() > most ? line.left(most - 1) + QChar(0x2026) : line;
 }
 
+/// A number with or without a unit, no power of ten.
+bool isPlainNumber(const std::string& text) {
+  const std::size_t digits = text.find_first_not_of("-.0123456789");
+  const std::string_view unit =
+      digits == std::string::npos ? std::string_view() : std::string_view(text).substr(digits);
+  const bool hasSignInside = text.find('-', 1) != std::string::npos;
+  return digits != 0 && !hasSignInside && (unit.empty() || unit.starts_with(' '));
+}
+
+/// A symbol of one letter stays as it is written.
 QString capital(QString words) {
-  if (!words.isEmpty() && words[0].script() == QChar::Script_Latin)
+  if (words.size() > 1 && words[1].isLetter() && words[0].script() == QChar::Script_Latin)
     words[0] = words[0].toUpper();
   return words;
 }
@@ -52,13 +63,21 @@ QString told(const Study& study, const Place& place) {
   const std::string text = textAt(study, place).value_or(std::string());
   if (text.empty())
     return QCoreApplication::translate("ChangeWords", "none");
+  if (rowOf(place.spot).holds != Holds::expression)
+    return cut(text);
   const EntryKind kind = entryKindOf(study, place);
-  const bool isAngle = rowOf(place.spot).holds == Holds::expression && kind.dimension == dimension::angle;
   constexpr std::size_t readable = 14;
-  if (isAngle && text.size() > readable)
-    if (const Result<Entry> entry = readEntry(text, kind))
-      return fromUtf8(shownDegrees(Angle::fromDegrees(entry->value), angleDecimals));
-  return cut(text);
+  const bool isLong = text.size() > readable;
+  const Result<Entry> entry = isLong ? readEntry(text, kind) : Result<Entry>();
+  if (isLong && entry && kind.dimension == dimension::angle)
+    return fromUtf8(shownDegrees(Angle::fromDegrees(entry->value), angleDecimals));
+  if (!isPlainNumber(text))
+    return cut(text);
+  if (isLong && entry) {
+    const double value = kind.unit.fromBase(entry->value);
+    return fromUtf8(shownNumber(value, decimalsFor(std::abs(value))) + " " + kind.unit.name);
+  }
+  return cut(text).replace(QLatin1Char('-'), QChar(0x2212));
 }
 
 } // namespace

@@ -12,6 +12,19 @@
 
 namespace planewright {
 
+namespace {
+
+/// A sentence begins with a capital; a symbol, "y now 20 mm", is written as it is.
+QString capital(QString sentence) {
+  const bool isWord =
+      sentence.size() > 1 && sentence[1].isLetter() && sentence[0].script() == QChar::Script_Latin;
+  if (isWord)
+    sentence[0] = sentence[0].toUpper();
+  return sentence;
+}
+
+} // namespace
+
 StatusLine::StatusLine(QWidget* parent)
     : QWidget(parent), m_left(new QLabel(this)), m_right(new QLabel(this)) {
   auto* row = new QHBoxLayout(this);
@@ -35,12 +48,14 @@ StatusLine::StatusLine(QWidget* parent)
 }
 
 void StatusLine::say(const QString& message, const QString& action) {
-  m_message = message;
+  m_message = capital(message);
   m_action = action;
+  m_isNewMessage = true;
   write();
 }
 
 void StatusLine::setNotTaken(int count, const QString& first) {
+  m_isNewMessage = m_isNewMessage && count == m_notTaken && first == m_firstNotTaken;
   m_notTaken = count;
   m_firstNotTaken = first;
   write();
@@ -65,19 +80,19 @@ void StatusLine::write() {
   QPalette soft = palette();
   soft.setColor(QPalette::WindowText, look.colour(Role::soft));
   m_right->setPalette(soft);
+  QString text = m_message.toHtmlEscaped();
+  if (!m_action.isEmpty())
+    text += QStringLiteral(" <a href=\"action\" style=\"color:%1\">%2</a>")
+                .arg(look.colour(Role::focus).name(), m_action.toHtmlEscaped());
   if (m_notTaken > 0) {
     const QString words = m_notTaken == 1
                               ? tr("1 entry not taken: %1").arg(m_firstNotTaken)
                               : tr("%1 entries not taken, first %2").arg(m_notTaken).arg(m_firstNotTaken);
-    m_left->setText(QStringLiteral("<a href=\"entry\" style=\"color:%1; font-weight:bold\">%2</a>")
-                        .arg(look.colour(Role::wrong).name(), words.toHtmlEscaped()));
-  } else {
-    QString text = m_message.toHtmlEscaped();
-    if (!m_action.isEmpty())
-      text += QStringLiteral(" <a href=\"action\" style=\"color:%1\">%2</a>")
-                  .arg(look.colour(Role::focus).name(), m_action.toHtmlEscaped());
-    m_left->setText(text);
+    const QString entry = QStringLiteral("<a href=\"entry\" style=\"color:%1; font-weight:bold\">%2</a>")
+                              .arg(look.colour(Role::wrong).name(), words.toHtmlEscaped());
+    text = m_isNewMessage && !m_message.isEmpty() ? text + QLatin1Char(' ') + entry : entry;
   }
+  m_left->setText(text);
 }
 
 } // namespace planewright

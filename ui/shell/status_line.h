@@ -36,6 +36,7 @@ private:
   QLabel* m_left;
   QLabel* m_right;
   QString m_message;
+  bool m_isNewMessage = false; ///< said since the entries not taken are what they are
   QString m_action;
   int m_notTaken = 0;
   QString m_firstNotTaken;

@@ -63,17 +63,40 @@ TEST_F(ShellWords, longTextsAreCut) {
   EXPECT_TRUE(changeInWords(before, desk.study()).contains(QStringLiteral("…, was 0 MPa")));
 }
 
-TEST_F(ShellWords, entriesNotTakenStandBeforeEveryMessage) {
+TEST_F(ShellWords, entriesNotTakenStayBesideEveryMessage) {
   StatusLine line(nullptr);
   line.say(QStringLiteral("Angle now 7 deg."), QStringLiteral("Undo"));
   EXPECT_EQ(line.words(), "Angle now 7 deg. Undo");
   line.setNotTaken(1, QStringLiteral("τxy of case S"));
+  EXPECT_EQ(line.words(), "1 entry not taken: τxy of case S") << "it is newer";
   line.say(QStringLiteral("Saved."));
-  EXPECT_EQ(line.words(), "1 entry not taken: τxy of case S");
+  EXPECT_EQ(line.words(), "Saved. 1 entry not taken: τxy of case S");
   line.setNotTaken(2, QStringLiteral("τxy"));
   EXPECT_EQ(line.words(), "2 entries not taken, first τxy");
   line.setNotTaken(0, {});
   EXPECT_EQ(line.words(), "Saved.");
+}
+
+TEST_F(ShellWords, aSentenceBeginsWithACapitalAndASymbolAsItIsWritten) {
+  StatusLine line(nullptr);
+  line.say(QStringLiteral("shape of the section."));
+  EXPECT_EQ(line.words(), "Shape of the section.");
+  line.say(QStringLiteral("y now 20 mm."));
+  EXPECT_EQ(line.words(), "y now 20 mm.");
+}
+
+TEST_F(ShellWords, numbersAreToldWithTheDigitsThatAreRead) {
+  Desk desk(newStudy());
+  ASSERT_FALSE(
+      desk.request({Insert{{Spot::section, "beam", {}}, {}}, Insert{{Spot::fibre, "P1", {}}, {}},
+                    Type{{Spot::fibreSection, "P1", {}}, "beam"}, Type{{Spot::size, "beam", "h"}, "500 mm"},
+                    Type{{Spot::fibreY, "P1", {}}, "-173.257281553398 mm"}},
+                   desk.newGesture(), {}));
+  const Study before = desk.study();
+  type(desk, Spot::fibreY, "-100 mm");
+  EXPECT_EQ(changeInWords(before, desk.study()), QString::fromUtf8("y now −100 mm, was −173.3 mm"));
+  type(desk, Spot::fibreY, "-(50+50) mm");
+  EXPECT_EQ(changeInWords(before, desk.study()), QString::fromUtf8("y now -(50+50) mm, was −173.3 mm"));
 }
 
 TEST_F(ShellWords, wordsOfTheUserAreNoMarkup) {
