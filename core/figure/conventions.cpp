@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/study/stress_form.h"
+#include "core/table/cautions.h"
 
 namespace planewright {
 
@@ -60,7 +61,7 @@ Text missingOf(const std::vector<std::string>& ids) {
 std::vector<Text> conventionsOf(const Study& study, const Readout& readout) {
   const StateReading& state = readout.state();
   std::vector<Text> sentences;
-  sentences.reserve(readout.lines.size() + 9);
+  sentences.reserve(readout.lines.size() + 10);
   for (const LineReading& line : readout.lines)
     sentences.push_back(lineOf(line));
   if (!state.circle.theta1)
@@ -68,6 +69,8 @@ std::vector<Text> conventionsOf(const Study& study, const Readout& readout) {
   sentences.push_back(thirdStressOf(study, state));
   if (const std::vector<std::string> missing = missingCases(readout, state); !missing.empty())
     sentences.push_back(missingOf(missing));
+  if (!state.factors.empty())
+    sentences.push_back(misnamed(state.combination, state.factors));
   sentences.push_back(senseOf(study));
   sentences.push_back(PW_TEXT("Figure", "Angles counter-clockwise from +x, seen from +z."));
   if (readout.axes != Angle())

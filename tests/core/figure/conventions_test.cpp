@@ -55,6 +55,14 @@ TEST(Conventions, sayWhatCountsAsZeroWhatIsInclinedAndWhatIsDegenerate) {
   EXPECT_TRUE(says(study, "every direction is principal.\n"));
 }
 
+TEST(Conventions, sayThatANameSaysOtherFactors) {
+  Study study = studyOf({5, 2, 0, 0, 0, 30, 20, true});
+  study.combinations = {{"1 G", {{"G", "1.35"}}, Basis::design}};
+  EXPECT_TRUE(says(study, "The name “1 G” says other factors than the combination has: 1.35 G.\n"));
+  study.combinations.front().name = "1.35 G";
+  EXPECT_FALSE(says(study, "other factors"));
+}
+
 TEST(Conventions, endWithTheCaution) {
   const std::string words = wordsFor(studyOf({}));
   EXPECT_TRUE(words.ends_with("not a design check: the code in force and a licensed engineer decide.\n"))
