@@ -178,7 +178,7 @@ std::optional<Problem> ElementView::type(const ElementHold& hold, const std::str
 
 void ElementView::turn(ElementHandle handle, Angle to) {
   if (const std::optional<ElementHold> hold = holdOf(m_desk.readout(), handle))
-    type(*hold, angleText(folded(to)), m_desk.newGesture(), to);
+    type(*hold, angleText(folded(to)), m_desk.newCommand(), to);
 }
 
 // --- the keys
@@ -256,7 +256,7 @@ void ElementView::openField(const ElementHold& hold) {
 
 void ElementView::takeTyped(ElementHandle handle, const QString& text) {
   if (const std::optional<ElementHold> hold = holdOf(m_desk.readout(), handle)) {
-    if (const auto problem = type(*hold, text.toStdString(), m_desk.newGesture(), hold->folded))
+    if (const auto problem = type(*hold, text.toStdString(), m_desk.newCommand(), hold->folded))
       return m_field->refuse(shown(*problem));
   }
   setFocus(Qt::OtherFocusReason);

@@ -99,7 +99,7 @@ void LineGroup::takeEitherWay(const std::string& slope) {
   if (!own)
     return;
   if (const auto problem = m_desk.request(withinEitherWay(shownPoint(m_desk.study()).name, own->name, slope),
-                                          m_desk.newGesture(), tr("slope of unknown sense")))
+                                          m_desk.newCommand(), tr("slope of unknown sense")))
     m_desk.say(shown(*problem));
 }
 
