@@ -212,7 +212,8 @@ private:
       line("    ", PW_TEXT("Readout", "Sources are worked out with tension positive; here the study counts "
                                       "compression positive."));
     for (std::size_t i = 0; i < sources.size() && sources.size() > 1; ++i)
-      line("    ", PW_TEXT("Readout", "%1: %2").with(std::to_string(i + 1)).with(sources[i].name));
+      line("    ",
+           PW_TEXT("Readout", "%1: %2").with(exactNumber(static_cast<double>(i + 1))).with(sources[i].name));
     steps(sum);
   }
 

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/table/cautions.h"
 
+#include "core/quantity/format.h"
 #include "core/study/envelope.h"
 
 #include <algorithm>
@@ -81,10 +82,10 @@ std::vector<Text> cautionsOfEnvelope(const Readout& readout) {
   }
   if (count == 0)
     return {};
-  const Text named =
-      count <= mostNamed
-          ? verbatim(names)
-          : PW_TEXT("Readout", "%1 and %2 more").with(names).with(std::to_string(count - mostNamed));
+  const Text named = count <= mostNamed ? verbatim(names)
+                                        : PW_TEXT("Readout", "%1 and %2 more")
+                                              .with(names)
+                                              .with(exactNumber(static_cast<double>(count - mostNamed)));
   return {PW_TEXT("Readout", "Least and greatest values count 0 for %1: none of its cases is listed here.")
               .with(named)};
 }
