@@ -48,7 +48,8 @@ bool isPlainNumber(const std::string& text) {
   const std::string_view unit =
       digits == std::string::npos ? std::string_view() : std::string_view(text).substr(digits);
   const bool hasSignInside = text.find('-', 1) != std::string::npos;
-  return digits != 0 && !hasSignInside && (unit.empty() || unit.starts_with(' '));
+  return digits != 0 && !hasSignInside &&
+         (unit.empty() || (unit.starts_with(' ') && unit.find(' ', 1) == std::string_view::npos));
 }
 
 /// A symbol of one letter stays as it is written.
