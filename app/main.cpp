@@ -58,31 +58,24 @@ Outcome<Delivery> commanded(Words words) {
   return wrongUse(unknownWord(first));
 }
 
-int reported(const Failure& failure) {
+/// Says each on standard error; gives the number of the exit.
+template <class Said>
+int ended(Exit exit, const std::vector<Said>& said) {
   std::string lines;
-  for (const Problem& problem : failure.problems)
-    lines += "planewright: " + plain(problem) + "\n";
+  for (const Said& one : said)
+    lines += "planewright: " + plain(one) + "\n";
   static_cast<void>(writeTo(STDERR_FILENO, lines, ""));
-  return static_cast<int>(failure.exit);
-}
-
-/// What a command that came to its end says beside its output.
-int told(const Delivery& delivery) {
-  std::string lines;
-  for (const Text& fact : delivery.facts)
-    lines += "planewright: " + plain(fact) + "\n";
-  static_cast<void>(writeTo(STDERR_FILENO, lines, ""));
-  return static_cast<int>(delivery.exit);
+  return static_cast<int>(exit);
 }
 
 int run(Words words) {
   std::signal(SIGPIPE, SIG_IGN);
   const Outcome<Delivery> delivery = commanded(words);
   if (!delivery)
-    return reported(delivery.error());
+    return ended(delivery.error().exit, delivery.error().problems);
   if (const Outcome<void> outcome = delivered(*delivery); !outcome)
-    return reported(outcome.error());
-  return told(*delivery);
+    return ended(outcome.error().exit, outcome.error().problems);
+  return ended(delivery->exit, delivery->facts);
 }
 
 } // namespace
@@ -95,5 +88,5 @@ int main(int argc, char** argv) {
   if (!asksForWindow(words))
     return run(words);
   const Outcome<int> status = shownWindow(argc, argv, words);
-  return status ? *status : reported(status.error());
+  return status ? *status : ended(status.error().exit, status.error().problems);
 }

@@ -84,7 +84,7 @@ private:
     const CheckSetup& setup = readout.checks[check];
     const UtilisationFrame frame = utilisationFrameIn(room, m_setting.small, m_setting.narrow, curves.highest,
                                                       isFarBeyond(curves.highest), m_setting.order.translate);
-    append(utilisationGround(frame, setup, directionsOf(readout, check), m_setting.order.translate));
+    append(utilisationGround(frame, setup, directionsWithin(readout, check), m_setting.order.translate));
     for (const UtilisationCurve& other : curves.others)
       append(utilisationLines(frame, other, {Role::other, m_setting.hair, Dash::solid}));
     append(utilisationLines(frame, curves.greatest, {Role::state, m_setting.medium, Dash::shortDash}));

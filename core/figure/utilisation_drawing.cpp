@@ -45,9 +45,9 @@ std::string tickText(const UtilisationFrame& frame, double tick) {
 
 class Ground {
 public:
-  Ground(const UtilisationFrame& frame, const CheckSetup& check,
-         const std::optional<DirectionsOfCheck>& directions, const Translate& translate)
-      : m_frame(frame), m_check(check), m_directions(directions), m_translate(translate) {}
+  Ground(const UtilisationFrame& frame, const CheckSetup& check, const std::vector<Within>& within,
+         const Translate& translate)
+      : m_frame(frame), m_check(check), m_within(within), m_translate(translate) {}
 
   Picture drawn() {
     if (m_check.band && m_check.band->tolerance > Angle())
@@ -100,14 +100,12 @@ private:
   }
 
   void bars() {
-    if (!m_directions)
-      return;
     const double bottom = m_frame.plot.bottom;
-    for (const Within& within : m_directions->within)
+    for (const Within& within : m_within)
       for (const auto& [from, to] : foldedParts(within.from.degrees(), within.to.degrees()))
         fill(m_frame.xOf(from), bottom - em(barHeight), m_frame.xOf(to), bottom, Role::safeEdge);
     std::vector<Box> taken;
-    for (const Within& within : m_directions->within)
+    for (const Within& within : m_within)
       if ((within.to - within.from).degrees() < 2 * half) {
         barEnd(within.from, Align::end, taken);
         barEnd(within.to, Align::start, taken);
@@ -145,7 +143,7 @@ private:
 
   const UtilisationFrame& m_frame;
   const CheckSetup& m_check;
-  const std::optional<DirectionsOfCheck>& m_directions;
+  const std::vector<Within>& m_within;
   const Translate& m_translate;
   Picture m_picture;
 };
@@ -190,8 +188,8 @@ UtilisationFrame utilisationFrameIn(const Box& room, double size, double pen, do
 }
 
 Picture utilisationGround(const UtilisationFrame& frame, const CheckSetup& check,
-                          const std::optional<DirectionsOfCheck>& directions, const Translate& translate) {
-  return Ground(frame, check, directions, translate).drawn();
+                          const std::vector<Within>& within, const Translate& translate) {
+  return Ground(frame, check, within, translate).drawn();
 }
 
 std::vector<Path> utilisationLines(const UtilisationFrame& frame, const UtilisationCurve& curve,

@@ -34,7 +34,7 @@ bool isFarBeyond(double highest);
 /// Band, grid, ticks and their labels, titles, the limit with its hatch above, and the angles within the
 /// limit as bars on the base line.
 Picture utilisationGround(const UtilisationFrame& frame, const CheckSetup& check,
-                          const std::optional<DirectionsOfCheck>& directions, const Translate& translate);
+                          const std::vector<Within>& within, const Translate& translate);
 /// A curve cut off at the top of the plot.
 std::vector<Path> utilisationLines(const UtilisationFrame& frame, const UtilisationCurve& curve,
                                    const Pen& pen);

@@ -46,10 +46,7 @@ Results<std::vector<Material>> readMaterials(std::string_view bytes) {
       read(item.value, reading, study.materials.emplace_back());
   object.refuseUnread();
   if (reading.complete)
-    for (Problem& problem : problemsIn(study)) {
-      const std::size_t offset = offsetOf(problem, *root, bytes);
-      problems.add(offset, std::move(problem));
-    }
+    addProblemsOf(study, *root, bytes, problems);
   if (!problems.empty())
     return tl::unexpected(problems.taken());
   return std::move(study.materials);

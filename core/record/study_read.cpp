@@ -224,10 +224,7 @@ Results<Study> readStudy(std::string_view bytes) {
   Reading reading{problems, problems.empty()};
   Study study = readParts(*root, reading);
   if (reading.complete)
-    for (Problem& problem : problemsIn(study)) {
-      const std::size_t offset = offsetOf(problem, *root, bytes);
-      problems.add(offset, std::move(problem));
-    }
+    addProblemsOf(study, *root, bytes, problems);
   if (!problems.empty())
     return tl::unexpected(problems.taken());
   return study;

@@ -2,6 +2,7 @@
 #include "core/record/study_spots.h"
 
 #include "core/record/json_text.h"
+#include "core/study/edit.h"
 #include "core/study/place.h"
 
 #include <algorithm>
@@ -83,6 +84,13 @@ std::size_t offsetOf(const Problem& problem, const Json& root, std::string_view 
     return offsetInText(bytes, value->offset, static_cast<std::size_t>(problem.column) - 1);
   const Json* name = rowOf(place->spot).holds == Holds::thing ? nameOf(*value) : nullptr;
   return name && name->text == problem.quoted ? name->offset : offset;
+}
+
+void addProblemsOf(const Study& study, const Json& root, std::string_view bytes, FileProblems& problems) {
+  for (Problem& problem : problemsIn(study)) {
+    const std::size_t offset = offsetOf(problem, root, bytes);
+    problems.add(offset, std::move(problem));
+  }
 }
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #pragma once
 
 #include "core/record/json.h"
+#include "core/study/study.h"
 
 namespace planewright {
 
@@ -9,5 +10,8 @@ namespace planewright {
 /// character of the text that its column counts, the item of a list or the key that it quotes, the value at
 /// its place, or the nearest thing around it that the file has.
 std::size_t offsetOf(const Problem& problem, const Json& root, std::string_view bytes);
+
+/// Adds what keeps a study from being valid, each where it stands in the file.
+void addProblemsOf(const Study& study, const Json& root, std::string_view bytes, FileProblems& problems);
 
 } // namespace planewright

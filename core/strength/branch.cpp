@@ -12,7 +12,7 @@ namespace {
 constexpr double infinity = std::numeric_limits<double>::infinity();
 
 double clean(double component, double scale) {
-  return std::abs(component) <= 8 * std::numeric_limits<double>::epsilon() * scale ? 0 : component;
+  return isRounding(component, scale) ? 0 : component;
 }
 
 double quadraticOf(const Interaction& f, const LineStress& s) {

@@ -29,7 +29,7 @@ Circle circleOf(const PlaneStress& stress, double scale, double s3) {
   const double half = stress.sx / 2 - stress.sy / 2;
   circle.mean = stress.sx / 2 + stress.sy / 2;
   circle.radius = std::hypot(half, stress.txy);
-  if (circle.radius <= 8 * std::numeric_limits<double>::epsilon() * scale) {
+  if (isRounding(circle.radius, scale)) {
     circle.radius = 0;
   } else {
     const double twice = Angle::fromRadians(std::atan2(stress.txy, half)).degrees();
@@ -45,6 +45,10 @@ Circle circleOf(const PlaneStress& stress, double scale, double s3) {
 
 Circle circleOf(const PlaneStress& stress) {
   return circleOf(stress, scaleOf(stress));
+}
+
+bool isRounding(double value, double scale) {
+  return std::abs(value) <= 8 * std::numeric_limits<double>::epsilon() * scale;
 }
 
 double scaleOf(const PlaneStress& stress) {

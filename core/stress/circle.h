@@ -34,6 +34,9 @@ Circle circleOf(const PlaneStress& stress, double scale, double s3 = 0);
 /// The same for a state given as it is: the scale is that of its own components.
 Circle circleOf(const PlaneStress& stress);
 
+/// Whether a value is no more than the rounding of terms of this size that cancelled: |value| <= 8 eps scale.
+bool isRounding(double value, double scale);
+
 /// max(|sx|, |sy|, |txy|).
 double scaleOf(const PlaneStress& stress);
 

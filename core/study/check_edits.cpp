@@ -3,6 +3,7 @@
 
 #include "core/study/fresh_name.h"
 #include "core/study/judge_checks.h"
+#include "core/study/strength_rules.h"
 #include "core/study/text_fields.h"
 
 #include <algorithm>
@@ -51,21 +52,6 @@ void typeCriterion(Edits& edits, const Point& point, const Check& check, Criteri
 }
 
 } // namespace
-
-std::vector<Spot> parametersOf(Criterion criterion) {
-  switch (criterion) {
-  case Criterion::hankinson:
-    return {Spot::checkN};
-  case Criterion::tsaiWu:
-    return {Spot::checkF12};
-  case Criterion::compressionAtAngle:
-    return {Spot::checkKc90};
-  case Criterion::taperedEdge:
-    return {Spot::checkEdge};
-  default:
-    return {};
-  }
-}
 
 std::optional<Edits> insertionOfCheck(const Study& study, const Point& point, const std::string& material) {
   const Material& of = *findMaterial(study, material);

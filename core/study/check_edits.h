@@ -17,9 +17,6 @@ Edits withCriterion(const Point& point, const Check& check, Criterion criterion)
 /// Another line or plane, as the criterion acts on.
 Edits withDirection(const Point& point, const Check& check, const std::string& name);
 
-/// The spots of the parameters that a criterion may have.
-std::vector<Spot> parametersOf(Criterion criterion);
-
 /// What another criterion says of the same stresses, strengths and directions.
 struct SideBySide {
   Criterion criterion = Criterion::sumOfSquares;

@@ -38,12 +38,8 @@ Strengths strengthsOf(const Study& study, const Material& material) {
   Strengths strengths;
   strengths.kind = material.kind;
   strengths.seam = material.seam;
-  const auto& fields = textFieldsOf<Material>();
-  for (const StrengthKey key : keysOf(material.kind)) {
-    const Spot spot = spotOf(key);
-    const auto field = std::ranges::find(fields, spot, &TextField<Material>::spot);
-    strengths[key] = read(study, spot, material.*field->text);
-  }
+  for (const StrengthKey key : keysOf(material.kind))
+    strengths[key] = read(study, spotOf(key), strengthText(material, key));
   return strengths;
 }
 

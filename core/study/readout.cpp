@@ -9,7 +9,6 @@
 #include <algorithm>
 #include <cassert>
 #include <cmath>
-#include <limits>
 
 namespace planewright {
 
@@ -19,12 +18,10 @@ Angle angleOf(const Study& study, Spot spot, const std::string& text) {
   return Angle::fromDegrees(valueOf(study, spot, text));
 }
 
-constexpr double roundingShare = 8 * std::numeric_limits<double>::epsilon();
-
 /// Of parts that cancel only rounding is left: it is not shown as a stress.
 void dropRounding(PlaneStress& stress, double scale) {
   for (double* component : {&stress.sx, &stress.sy, &stress.txy})
-    if (std::abs(*component) <= roundingShare * scale)
+    if (isRounding(*component, scale))
       *component = 0;
 }
 
@@ -84,7 +81,7 @@ void addTerm(StateReading& state, double factor, const std::vector<CaseReading>&
 /// Of several terms that cancel only rounding is left: it is not shown as a stress, nor as a direction.
 /// `scaleOfThird` is to σz what the state's scale is to the components in the plane.
 void dropRounding(StateReading& state, double scaleOfThird) {
-  if (std::abs(state.sz) <= roundingShare * scaleOfThird)
+  if (isRounding(state.sz, scaleOfThird))
     state.sz = 0;
   dropRounding(state.stress, state.scale);
   if (circleOf(state.stress, state.scale).theta1)

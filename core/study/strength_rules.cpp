@@ -42,7 +42,7 @@ private:
 
   void strength(StrengthKey key) {
     const Spot spot = spotOf(key);
-    const std::string& text = m_material.*memberOf(spot);
+    const std::string& text = strengthText(m_material, key);
     if (text.empty())
       return;
     if (!has(m_material.kind, key))
@@ -73,28 +73,10 @@ private:
           PW_TEXT("Study", "Check the exponent and the unit."));
   }
 
-  static std::string Material::*memberOf(Spot spot) {
-    const auto& fields = textFieldsOf<Material>();
-    return std::ranges::find(fields, spot, &TextField<Material>::spot)->text;
-  }
-
   const Study& m_study;
   const Material& m_material;
   Problems m_problems;
 };
-
-bool knows(Criterion criterion, Spot parameter) {
-  switch (parameter) {
-  case Spot::checkN:
-    return criterion == Criterion::hankinson;
-  case Spot::checkF12:
-    return criterion == Criterion::tsaiWu;
-  case Spot::checkKc90:
-    return criterion == Criterion::compressionAtAngle;
-  default:
-    return criterion == Criterion::taperedEdge;
-  }
-}
 
 class CheckRules {
 public:
@@ -151,7 +133,8 @@ private:
   void parameter(Spot spot, const std::string& text) {
     if (text.empty())
       return;
-    if (!knows(m_check.criterion, spot))
+    const std::vector<Spot> known = parametersOf(m_check.criterion);
+    if (std::ranges::find(known, spot) == known.end())
       return add(spot, text,
                  PW_TEXT("Study", "The criterion “%1” takes no %2.")
                      .with(labelOf(m_check.criterion))
@@ -171,6 +154,21 @@ private:
 };
 
 } // namespace
+
+std::vector<Spot> parametersOf(Criterion criterion) {
+  switch (criterion) {
+  case Criterion::hankinson:
+    return {Spot::checkN};
+  case Criterion::tsaiWu:
+    return {Spot::checkF12};
+  case Criterion::compressionAtAngle:
+    return {Spot::checkKc90};
+  case Criterion::taperedEdge:
+    return {Spot::checkEdge};
+  default:
+    return {};
+  }
+}
 
 Problems brokenStrengths(const Study& study, const Material& material) {
   return MaterialRules(study, material).broken();

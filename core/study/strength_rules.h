@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/study/study.h"
+#include "core/study/place.h"
 #include "core/words/problem.h"
 
 namespace planewright {
@@ -14,5 +14,8 @@ Problems brokenStrengths(const Study& study, const Material& material);
 /// What keeps a check from being one: a material, line or plane that is not there, a criterion that is not
 /// for the kind of its material, a parameter that its criterion does not know or that is not greater than 0.
 Problems brokenCheck(const Study& study, const Point& point, const Check& check);
+
+/// The spots of the parameters that a criterion may have.
+std::vector<Spot> parametersOf(Criterion criterion);
 
 } // namespace planewright

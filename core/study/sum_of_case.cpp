@@ -2,10 +2,10 @@
 #include "core/study/sum_of_case.h"
 
 #include "core/quantity/format.h"
+#include "core/stress/circle.h"
 #include "core/study/typed.h"
 
 #include <cmath>
-#include <limits>
 
 namespace planewright {
 
@@ -64,9 +64,9 @@ std::vector<Step> sumOfCase(const Study& study, const CaseStress& stress,
     }
     const double result = typed + (isTurned ? -made : made);
     // Of parts that cancel only rounding is left.
-    const bool isRounding = std::abs(result) <= 8 * std::numeric_limits<double>::epsilon() * scale;
-    steps.push_back(units.step(one.name, one.letters + "}", whole, numbers, isRounding ? 0 : result,
-                               dimension::stress, PW_TEXT("Working", "the parts of a case add up")));
+    steps.push_back(units.step(one.name, one.letters + "}", whole, numbers,
+                               isRounding(result, scale) ? 0 : result, dimension::stress,
+                               PW_TEXT("Working", "the parts of a case add up")));
   }
   return steps;
 }

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/text_fields.h"
 
+#include <algorithm>
+
 namespace planewright {
 
 template <>
@@ -140,6 +142,10 @@ const std::vector<TextField<ParameterTexts>>& textFieldsOf() {
                                                                 {Spot::checkKc90, &ParameterTexts::kc90},
                                                                 {Spot::checkEdge, &ParameterTexts::edge}};
   return fields;
+}
+
+const std::string& strengthText(const Material& material, StrengthKey key) {
+  return material.*std::ranges::find(textFieldsOf<Material>(), spotOf(key), &TextField<Material>::spot)->text;
 }
 
 } // namespace planewright

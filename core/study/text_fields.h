@@ -45,4 +45,7 @@ const std::vector<TextField<Check>>& textFieldsOf();
 template <>
 const std::vector<TextField<ParameterTexts>>& textFieldsOf();
 
+/// The text of one strength of a material; empty where it is not given.
+const std::string& strengthText(const Material& material, StrengthKey key);
+
 } // namespace planewright

@@ -42,6 +42,11 @@ bool isHalfTurn(const std::vector<Within>& within) {
   return within.size() == 1 && (within.front().to - within.front().from).degrees() >= 180;
 }
 
+/// Whether a check has a direction and no combination was left unjudged.
+bool isJudgedAllRound(const Readout& readout, std::size_t check) {
+  return readout.checks[check].band && !verdictOfCheck(readout, check).unjudged;
+}
+
 Text signedSlope(double slope) {
   const std::string size = shownNumber(std::abs(slope), decimalsFor(std::abs(slope), 2));
   return verbatim((slope < 0 ? "−" : "+") + size);
@@ -151,9 +156,13 @@ std::vector<Text> cautionsOf(const CheckSetup& check, const CheckReading& readin
   return cautions;
 }
 
+std::vector<Within> directionsWithin(const Readout& readout, std::size_t check) {
+  return isJudgedAllRound(readout, check) ? withinLimit(judgesOf(readout, check)) : std::vector<Within>();
+}
+
 std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_t check) {
   const CheckSetup& setup = readout.checks[check];
-  if (!setup.band || verdictOfCheck(readout, check).unjudged)
+  if (!isJudgedAllRound(readout, check))
     return std::nullopt;
   const std::vector<Judge> judges = judgesOf(readout, check);
   DirectionsOfCheck directions;

@@ -39,6 +39,9 @@ struct DirectionsOfCheck {
   std::optional<double> slope;  ///< change of the utilisation per degree
   BestDirection best;
 };
+/// The directions within the limit alone; none for a check without a direction, or where a combination could
+/// not be judged.
+std::vector<Within> directionsWithin(const Readout& readout, std::size_t check);
 /// None for a check without a direction, or where a combination could not be judged.
 std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_t check);
 

@@ -211,7 +211,7 @@ void MaterialFields::choose(const Choice& choice, const std::string& word) {
                           ? editsThatChangeKind(study, m_material, *fromWord<MaterialKind>(word))
                           : Edits{Type{place(choice.spot), word}};
   const std::optional<Problem> problem = m_desk.request(
-      edits, m_desk.newGesture(), tr("%1 of %2").arg(shown(rowOf(choice.spot).label), fromUtf8(m_material)));
+      edits, m_desk.newCommand(), tr("%1 of %2").arg(shown(rowOf(choice.spot).label), fromUtf8(m_material)));
   refresh();
   if (problem)
     m_complaint->say(shown(problem->what), shown(problem->mend));

@@ -38,13 +38,11 @@ QString row(const QString& richSymbol, const std::string& value, const QString& 
 }
 
 QString strengthRows(const Material& material, const QString& soft) {
-  const auto& fields = textFieldsOf<Material>();
   QString rows;
   for (const StrengthKey key : keysOf(material.kind)) {
-    const Spot spot = spotOf(key);
-    const std::string& text = material.*std::ranges::find(fields, spot, &TextField<Material>::spot)->text;
+    const std::string& text = strengthText(material, key);
     const Text& symbol = labelOf(material.kind, key);
-    const Text& meaning = rowOf(spot).label;
+    const Text& meaning = rowOf(spotOf(key)).label;
     rows += row(shownRich(symbol), text.empty() ? words("not given").toStdString() : text,
                 symbol == meaning ? QString() : shown(meaning), soft);
   }

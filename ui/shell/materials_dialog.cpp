@@ -276,7 +276,7 @@ void MaterialsDialog::take() {
   if (!material)
     return;
   const std::string name = freshMaterialName(m_desk.study(), material->name);
-  if (const auto problem = m_desk.request(editsThatTake(*material, name), m_desk.newGesture(),
+  if (const auto problem = m_desk.request(editsThatTake(*material, name), m_desk.newCommand(),
                                           tr("%1 from the library").arg(fromUtf8(material->name))))
     return complain(*problem);
   choose({MaterialOrigin::study, name});
@@ -290,7 +290,7 @@ void MaterialsDialog::add(MaterialKind kind) {
   material.kind = kind;
   const std::string name = freshMaterialName(m_desk.study(), std::string(wordOf(kind)));
   if (const auto problem =
-          m_desk.request(editsThatTake(material, name), m_desk.newGesture(), tr("new material")))
+          m_desk.request(editsThatTake(material, name), m_desk.newCommand(), tr("new material")))
     return complain(*problem);
   m_list->filter().clear();
   choose({MaterialOrigin::study, name});
@@ -300,7 +300,7 @@ void MaterialsDialog::add(MaterialKind kind) {
 void MaterialsDialog::remove() {
   const QString name = fromUtf8(m_choice.name);
   const auto checks = checksBy(m_desk.study(), m_choice.name).size();
-  if (const auto problem = m_desk.request({Remove{{Spot::material, m_choice.name, {}}}}, m_desk.newGesture(),
+  if (const auto problem = m_desk.request({Remove{{Spot::material, m_choice.name, {}}}}, m_desk.newCommand(),
                                           tr("removal of %1").arg(name)))
     return complain(*problem);
   m_message->say(checks == 0   ? tr("%1 is removed.").arg(name)

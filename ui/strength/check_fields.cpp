@@ -2,6 +2,7 @@
 #include "ui/strength/check_fields.h"
 
 #include "core/study/check_edits.h"
+#include "core/study/strength_rules.h"
 #include "core/table/check_words.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
@@ -75,7 +76,7 @@ void CheckFields::addParameter(Spot spot, const QString& meaning) {
 }
 
 void CheckFields::ask(const Edits& edits, const QString& what) {
-  if (const auto problem = m_desk.request(edits, m_desk.newGesture(), what))
+  if (const auto problem = m_desk.request(edits, m_desk.newCommand(), what))
     m_desk.say(shown(*problem));
 }
 

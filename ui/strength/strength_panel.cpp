@@ -162,7 +162,7 @@ void StrengthPanel::addCheck(const std::string& material) {
                    : tr("Give the point a line first: %1 is checked along a line.").arg(fromUtf8(material)));
     return;
   }
-  if (const auto problem = m_desk.request(*edits, m_desk.newGesture(), tr("new check"))) {
+  if (const auto problem = m_desk.request(*edits, m_desk.newCommand(), tr("new check"))) {
     m_desk.say(shown(*problem));
     return;
   }
@@ -175,7 +175,7 @@ void StrengthPanel::removeCheck() {
     return;
   const Readout& readout = m_desk.readout();
   const Place place{Spot::check, readout.point, readout.checks[*index].id};
-  if (const auto problem = m_desk.request({Remove{place}}, m_desk.newGesture(), tr("removal of a check")))
+  if (const auto problem = m_desk.request({Remove{place}}, m_desk.newCommand(), tr("removal of a check")))
     m_desk.say(shown(*problem));
 }
 
@@ -210,7 +210,10 @@ void StrengthPanel::showGoverning() {
     m_desk.show(m_desk.readout().point, m_desk.readout().states[told->state].combination);
 }
 
+// The best direction over all combinations takes too long to be sought where nobody looks.
 void StrengthPanel::refresh() {
+  if (!isVisible())
+    return;
   const Readout& readout = m_desk.readout();
   const std::optional<std::size_t> check = m_checks->selected();
   const bool hasMaterials = !m_desk.study().materials.empty();
@@ -246,6 +249,11 @@ void StrengthPanel::showLimits() {
   box->setTextFormat(Qt::RichText);
   box->setAttribute(Qt::WA_DeleteOnClose);
   box->open();
+}
+
+void StrengthPanel::showEvent(QShowEvent* event) {
+  QWidget::showEvent(event);
+  refresh();
 }
 
 void StrengthPanel::paintEvent(QPaintEvent*) {

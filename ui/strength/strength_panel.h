@@ -38,6 +38,7 @@ signals:
   void materialsWanted();
 
 protected:
+  void showEvent(QShowEvent* event) override;
   void paintEvent(QPaintEvent* event) override;
 
 private:

@@ -87,7 +87,7 @@ void UtilisationPlot::refresh() {
   drawCurves(curves);
   const Readout& readout = m_desk.readout();
   const CheckSetup& setup = readout.checks[*check];
-  m_ground->show(utilisationGround(m_frame, setup, directionsOf(readout, *check), translation()),
+  m_ground->show(utilisationGround(m_frame, setup, directionsWithin(readout, *check), translation()),
                  lookOf(*this));
   std::optional<WorstInBand> worst;
   const Verdict verdict = verdictOfCheck(readout, *check);

@@ -66,7 +66,7 @@ TEST(UtilisationGround, labelsNeverOverlap) {
   const Readout now = readout();
   for (const double width : {200.0, 300.0, 500.0}) {
     const UtilisationFrame frame = utilisationFrameIn({0, 0, width, 0.8 * width}, 11, 1, 2, false, {});
-    const Picture picture = utilisationGround(frame, now.checks[0], directionsOf(now, 0), {});
+    const Picture picture = utilisationGround(frame, now.checks[0], directionsWithin(now, 0), {});
     const std::vector<Label> labels = partsOf<Label>(picture);
     for (std::size_t i = 0; i < labels.size(); ++i)
       for (std::size_t j = 0; j < i; ++j)
