@@ -59,6 +59,7 @@ std::string copiedPoints(const std::vector<Point>& points, char separator) {
   const std::vector<RowThings> rows = rowsOf(points);
   const std::vector<ColumnKind> kinds = kindsOf(rows);
   std::vector<std::string> cells;
+  cells.reserve(kinds.size());
   for (const ColumnKind kind : kinds)
     cells.emplace_back(wordOf(kind));
   std::string table = rowOfCells(cells, separator);

@@ -40,6 +40,7 @@ WorstInBand worstIn(const Judge& judge, const Band& band) {
     return toA != toB ? toA < toB : a < b;
   });
   std::vector<double> utilisations;
+  utilisations.reserve(candidates.size());
   for (const Angle angle : candidates)
     utilisations.push_back(judge.utilisation(angle));
   const double greatest = *std::ranges::max_element(utilisations);

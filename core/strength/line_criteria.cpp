@@ -212,7 +212,7 @@ Result<double> alongStrengthOf(const Strengths& strengths, const Demand& demand,
   const double w = demand.bendingShare;
   if (!axial || strengths.kind != MaterialKind::timber || w == 0)
     return axial;
-  const Result<double> bending = needed(strengths, alongBending);
+  Result<double> bending = needed(strengths, alongBending);
   if (!bending)
     return bending;
   return 1 / ((1 - w) / *axial + w / *bending);

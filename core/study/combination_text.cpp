@@ -267,6 +267,32 @@ Result<Edits> editsThatAdd(const Study& study, std::string_view text) {
   return edits;
 }
 
+namespace {
+
+/// "1.35 G + 1.5 S", with a name of its own before a tab or without one.
+Result<Combination> namedCombinationIn(const Study& study, std::string_view line) {
+  const std::size_t tab = line.find('\t');
+  const bool isNamed = tab != std::string_view::npos;
+  Result<std::vector<Factor>> factors = factorsIn(study, isNamed ? trimmed(line.substr(tab + 1)) : line);
+  if (!factors)
+    return tl::unexpected(std::move(factors).error());
+  Combination one;
+  one.factors = *std::move(factors);
+  one.name = isNamed ? std::string(trimmed(line.substr(0, tab))) : textOf(one);
+  return one;
+}
+
+Problem nameIsTaken(const std::string& name) {
+  return {{},
+          0,
+          0,
+          name,
+          PW_TEXT("Combination", "The name “%1” is taken.").with(name),
+          PW_TEXT("Combination", "Give this combination a name of its own.")};
+}
+
+} // namespace
+
 Result<Edits> editsThatAddLines(const Study& study, std::string_view text) {
   Edits edits;
   std::unordered_set<std::string> added;
@@ -278,30 +304,18 @@ Result<Edits> editsThatAddLines(const Study& study, std::string_view text) {
     if (line.empty())
       continue;
     isEmpty = false;
-    const std::size_t tab = line.find('\t');
-    const std::string_view expression = tab == std::string_view::npos ? line : trimmed(line.substr(tab + 1));
-    Result<std::vector<Factor>> factors = factorsIn(study, expression);
-    Combination one;
-    if (factors) {
-      one.factors = *std::move(factors);
-      one.name = tab == std::string_view::npos ? textOf(one) : std::string(trimmed(line.substr(0, tab)));
-      const Combination* same = findCombination(study, one.name);
-      if (same && same->factors == one.factors)
-        continue;
-      if (same || !added.insert(one.name).second)
-        factors = tl::unexpected(Problem{{},
-                                         0,
-                                         0,
-                                         one.name,
-                                         PW_TEXT("Combination", "The name “%1” is taken.").with(one.name),
-                                         PW_TEXT("Combination", "Give this combination a name of its own.")});
-    }
-    if (!factors) {
-      Problem problem = std::move(factors).error();
+    Result<Combination> one = namedCombinationIn(study, line);
+    const Combination* same = one ? findCombination(study, one->name) : nullptr;
+    if (same && same->factors == one->factors)
+      continue;
+    if (one && (same || !added.insert(one->name).second))
+      one = tl::unexpected(nameIsTaken(one->name));
+    if (!one) {
+      Problem problem = std::move(one).error();
       problem.line = number;
       return tl::unexpected(std::move(problem));
     }
-    const Edits more = editsThatAdd(study, std::vector<Combination>{one});
+    const Edits more = editsThatAdd(study, std::vector<Combination>{*one});
     edits.insert(edits.end(), more.begin(), more.end());
   }
   if (isEmpty)

@@ -23,10 +23,10 @@ Edits withinEitherWay(const std::string& point, const std::string& line, const s
 }
 
 Result<Angle> trueSlopeOf(std::string_view a, std::string_view b) {
-  const Result<Angle> first = slopeIn(a, "a");
+  Result<Angle> first = slopeIn(a, "a");
   if (!first)
     return first;
-  const Result<Angle> second = slopeIn(b, "b");
+  Result<Angle> second = slopeIn(b, "b");
   if (!second)
     return second;
   return slopeOfFaces(*first, *second);
