@@ -21,7 +21,7 @@ constexpr int ownPages = 2; ///< the tables; what is adopted comes behind them
 }
 
 PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
-    : QWidget(parent), m_tabs(new QuietTabs(this)), m_pages(new QStackedWidget(this)),
+    : QWidget(parent), m_desk(desk), m_tabs(new QuietTabs(this)), m_pages(new QStackedWidget(this)),
       m_planes(new PlanesPage(desk, m_pages)), m_sweep(new SweepPage(desk, m_pages)),
       m_copy(new QuietButton(tr("Copy table"), Role::focus, this)), m_range(new QLabel(this)) {
   setAutoFillBackground(true);
@@ -60,6 +60,11 @@ PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
   connect(&desk, &Desk::changed, this, tellRange);
   tellRange();
   showPage(0);
+}
+
+// While a window goes the focus leaves its cell, which takes what was typed: by then this is no panel.
+PlanesPanel::~PlanesPanel() {
+  m_desk.disconnect(this);
 }
 
 void PlanesPanel::showPage(int index) {

@@ -21,6 +21,7 @@ class PlanesPanel : public QWidget {
 
 public:
   explicit PlanesPanel(Desk& desk, QWidget* parent = nullptr);
+  ~PlanesPanel() override;
 
   PlanesPage& planes() const { return *m_planes; }
   SweepPage& sweep() const { return *m_sweep; }
@@ -37,6 +38,7 @@ private:
   void showPage(int index);
   void copyShown();
 
+  Desk& m_desk;
   QuietTabs* m_tabs;
   QStackedWidget* m_pages;
   PlanesPage* m_planes;
