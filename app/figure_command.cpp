@@ -7,6 +7,7 @@
 #include "core/figure/figure.h"
 #include "core/figure/svg.h"
 #include "core/quantity/expression.h"
+#include "core/record/embedded_study.h"
 #include "ui/paint/export.h"
 
 #include <algorithm>
@@ -19,9 +20,14 @@ namespace {
 
 using Takes = OptionRow::Takes;
 
-constexpr std::array known = {OptionRow{"-o"},      OptionRow{"--point"}, OptionRow{"--combination"},
-                              OptionRow{"--width"}, OptionRow{"--text"},  OptionRow{"--mono", Takes::nothing},
-                              OptionRow{"--dpi"}};
+constexpr std::array known = {OptionRow{"-o"},
+                              OptionRow{"--point"},
+                              OptionRow{"--combination"},
+                              OptionRow{"--width"},
+                              OptionRow{"--text"},
+                              OptionRow{"--mono", Takes::nothing},
+                              OptionRow{"--dpi"},
+                              OptionRow{"--without-study", Takes::nothing}};
 
 constexpr int usualDpi = 300;
 
@@ -32,6 +38,7 @@ struct Wanted {
   std::string file;
   PictureKind kind = PictureKind::svg;
   int dpi = usualDpi;
+  bool carriesStudy = true;
   FigureOrder order;
 };
 
@@ -110,6 +117,7 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   if (!kind)
     return tl::unexpected(kind.error());
   wanted.kind = *kind;
+  wanted.carriesStudy = !arguments.has("--without-study");
   wanted.order.mono = arguments.has("--mono");
   wanted.order.studyName = studyNameOf(arguments.operands.front());
   const Unit mm{"mm", dimension::length, 1, 1};
@@ -156,17 +164,24 @@ Result<Readout> readoutOf(const Study& study, const Arguments& arguments) {
   return readout;
 }
 
-Outcome<std::string> bytesOf(const Picture& picture, const Wanted& wanted) {
+Result<std::string> svgOf(const Picture& picture, Palette palette, const std::string& study) {
+  std::string svg = svgOf(picture, palette);
+  return study.empty() ? svg : svgWithStudy(std::move(svg), study);
+}
+
+/// The picture as a file, with a study inside unless its bytes are empty.
+Outcome<std::string> bytesOf(const Picture& picture, const Wanted& wanted, const std::string& study) {
   const Palette palette = paletteOf(wanted.order);
-  switch (wanted.kind) {
-  case PictureKind::pdf:
-    return paintedOffscreen([&] { return pdfOf(picture, palette); });
-  case PictureKind::png:
-    return paintedOffscreen([&] { return pngOf(picture, palette, wanted.dpi); });
-  case PictureKind::svg:
-    break;
+  if (wanted.kind == PictureKind::pdf)
+    return paintedOffscreen([&] { return pdfOf(picture, palette, study); });
+  if (wanted.kind == PictureKind::png)
+    return paintedOffscreen([&] { return pngOf(picture, palette, wanted.dpi, study); });
+  Result<std::string> svg = svgOf(picture, palette, study);
+  if (!svg) {
+    svg.error().place.insert(0, "--");
+    return wrongUse(std::move(svg).error());
   }
-  return svgOf(picture, palette);
+  return *std::move(svg);
 }
 
 } // namespace
@@ -191,7 +206,8 @@ Outcome<Delivery> drawnFigure(std::span<const std::string> words) {
     picture.error().place.insert(0, "--"); // its places are called like the options
     return wrongUse(std::move(picture).error());
   }
-  Outcome<std::string> bytes = bytesOf(*picture, *wanted);
+  const std::string carried = wanted->carriesStudy ? studyOfFigure(*study, *readout) : std::string();
+  Outcome<std::string> bytes = bytesOf(*picture, *wanted, carried);
   if (!bytes)
     return tl::unexpected(std::move(bytes).error());
   return Delivery{*std::move(bytes), wanted->file};

@@ -9,7 +9,7 @@ namespace planewright {
 std::string programHelp() {
   return plain(PW_TEXT("Help", R"help(Planewright: plane stress at a point, resolved to the line that matters.
 
-planewright [STUDY]            opens the window, with a study
+planewright [STUDY]            opens the window, with a study or with a figure that carries one
 planewright resolve ...        prints everything that follows from a study or from three components
 planewright figure STUDY ...   writes the labelled figure as SVG, PDF or PNG
 planewright validate           recomputes every published value that is shipped with it
@@ -78,6 +78,10 @@ Writes the labelled figure of one point and combination.
 --text PT            size of the text, 7 to 10 pt; 8 without it
 --mono               black and greys only
 --dpi N              resolution of a PNG; 300 without it
+--without-study      the figure alone, for sending outside
+
+Without that option the whole study, with all its points and notes, travels inside the file, and opening the
+figure brings it back. A STUDY may be such a figure, here and in resolve.
 
 planewright figure beam.planewright -o beam.pdf --width 90
 )help"));

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "app/study_source.h"
 
-#include "core/record/study_file.h"
+#include "core/record/embedded_study.h"
 #include "ui/files/file_bytes.h"
 
 #include <filesystem>
@@ -14,8 +14,8 @@ namespace {
 
 Outcome<std::string> bytesIn(const std::string& file) {
   const bool isInput = file == "-";
-  Result<std::string> bytes = isInput ? bytesFrom(STDIN_FILENO, greatestStudyFile, "standard input")
-                                      : bytesOf(file, greatestStudyFile);
+  Result<std::string> bytes =
+      isInput ? bytesFrom(STDIN_FILENO, greatestCarrier, "standard input") : bytesOf(file, greatestCarrier);
   if (bytes)
     return *std::move(bytes);
   // A file that is there and cannot be read is the machine's fault; one that is not there is the caller's.
@@ -31,10 +31,10 @@ Outcome<Study> studyIn(const std::string& file) {
   Outcome<std::string> bytes = bytesIn(file);
   if (!bytes)
     return tl::unexpected(std::move(bytes).error());
-  Results<Study> study = readStudy(*bytes);
-  if (study)
-    return *std::move(study);
-  Problems problems = std::move(study).error();
+  Results<OpenedStudy> opened = openedStudy(*bytes);
+  if (opened)
+    return std::move(opened->study);
+  Problems problems = std::move(opened).error();
   for (Problem& problem : problems)
     problem.place = problem.place.empty() ? file : file + ": " + problem.place;
   return tl::unexpected(Failure{Exit::wrongUse, std::move(problems)});

@@ -6,7 +6,7 @@
 
 namespace planewright {
 
-/// The study in a file, or ("-") on standard input.
+/// The study in a file, or ("-") on standard input; also the one that a figure carries.
 Outcome<Study> studyIn(const std::string& file);
 
 /// The name by which outputs call the study: the file's without folder and ending; empty for "-".

@@ -44,8 +44,12 @@ Problem studyTooNew(std::size_t version) {
 }
 
 Problem studyTooLarge() {
-  return told(PW_TEXT("File", "The study is too large to travel inside another file."),
-              PW_TEXT("File", "Leave the study out of it."));
+  return {"without-study",
+          0,
+          0,
+          "",
+          PW_TEXT("File", "The study is too large to travel inside another file."),
+          PW_TEXT("File", "Leave the study out of it.")};
 }
 
 } // namespace

@@ -66,7 +66,7 @@ Result<std::string> xmpWithStudy(std::string_view study) {
   return carriedText(study).map([](const std::string& text) { return xmpWithText(text); });
 }
 
-std::optional<Result<std::string>> studyIn(std::string_view bytes) {
+std::optional<Result<std::string>> carriedStudy(std::string_view bytes) {
   const std::optional<CarriedTexts> found = textsIn(bytes.substr(0, greatestCarrier));
   if (!found)
     return std::nullopt;
@@ -75,8 +75,13 @@ std::optional<Result<std::string>> studyIn(std::string_view bytes) {
   return oneStudyOf(*found);
 }
 
+std::string studyOfFigure(Study study, const Readout& readout) {
+  study.shown = {readout.point, readout.state().combination};
+  return writeStudy(study);
+}
+
 Results<OpenedStudy> openedStudy(std::string_view bytes) {
-  const std::optional<Result<std::string>> carried = studyIn(bytes);
+  const std::optional<Result<std::string>> carried = carriedStudy(bytes);
   if (carried && !*carried)
     return tl::unexpected(Problems{carried->error()});
   Results<Study> study = readStudy(carried ? **carried : bytes);

@@ -23,6 +23,32 @@ TEST_F(FigureCommand, writesTheKindThatTheNameEndsWith) {
   EXPECT_THAT(run("figure \"$demo\" -o -").out, StartsWith("<?xml"));
 }
 
+TEST_F(FigureCommand, carriesTheStudyUnlessToldNotTo) {
+  const std::string readings = run("resolve \"$demo\" --format json").out;
+  ASSERT_FALSE(readings.empty());
+  for (const std::string name : {"a.svg", "a.pdf", "a.png"}) {
+    ASSERT_EQ(run("figure \"$demo\" -o " + name).exit, 0);
+    const Ran again = run("resolve " + name + " --format json");
+    EXPECT_EQ(again.exit, 1) << "as for the study: " << again.err;
+    EXPECT_EQ(again.out, readings);
+    EXPECT_EQ(run("resolve - --format json < " + name).out, readings);
+    ASSERT_EQ(run("figure \"$demo\" --without-study -o " + name).exit, 0);
+    expectWrongUse(run("resolve " + name), "This file carries no study.");
+  }
+}
+
+TEST_F(FigureCommand, isDrawnAgainFromItsOwnFigure) {
+  const std::string options = " --point 'P2 above the post' -o -";
+  const std::string first = run("figure \"$demo\"" + options).out;
+  put("a.svg", first);
+  const std::string alone = run("figure a.svg --without-study -o b.svg && cat b.svg").out;
+  ASSERT_NE(alone, "");
+  EXPECT_THAT(alone, HasSubstr("P2 above the post")) << "it opens where the figure was";
+  EXPECT_EQ(run("figure a.svg -o c.svg").exit, 0);
+  const auto study = [](const std::string& svg) { return svg.substr(svg.find("<metadata>")); };
+  EXPECT_EQ(study(contents("c.svg")), study(first));
+}
+
 TEST_F(FigureCommand, givesTheSameSvgEveryTime) {
   const std::string first = run("figure \"$demo\" -o -").out;
   EXPECT_THAT(first, StartsWith("<?xml"));

@@ -27,7 +27,7 @@ void checkProblem(const Problem& problem) {
 }
 
 void checkRead(std::string_view bytes) {
-  const std::optional<Result<std::string>> carried = studyIn(bytes);
+  const std::optional<Result<std::string>> carried = carriedStudy(bytes);
   if (carried && *carried)
     require((*carried)->size() <= std::min(bytes.size(), greatestStudyFile));
   else if (carried)
@@ -50,7 +50,7 @@ void checkCarried(std::string_view study) {
         htmlWithStudy("<html><body></body></html>", study),
         xmpWithStudy(study).map([](const std::string& xmp) { return "%PDF-1.4\n" + xmp; })}) {
     require(bytes.has_value());
-    const std::optional<Result<std::string>> again = studyIn(*bytes);
+    const std::optional<Result<std::string>> again = carriedStudy(*bytes);
     require(again && *again && **again == study);
   }
 }

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/paint/export.h"
 
+#include "core/record/embedded_study.h"
 #include "core/words/version.h"
 #include "ui/look/look.h"
 #include "ui/paint/painter.h"
@@ -73,7 +74,7 @@ void trimPage(QByteArray& pdf, const Picture& picture) {
 
 } // namespace
 
-Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi) {
+Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi, std::string_view study) {
   if (dpi < leastDpi || dpi > greatestDpi)
     return tl::unexpected(resolutionProblem(dpi));
   const double scale = dpi / mmPerInch;
@@ -100,10 +101,15 @@ Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi) {
   QBuffer buffer(&bytes);
   if (!buffer.open(QIODevice::WriteOnly) || !image.save(&buffer, "PNG"))
     return tl::unexpected(paintProblem());
-  return bytes;
+  if (study.empty())
+    return bytes;
+  return pngWithStudy(bytes.toStdString(), study).map(&QByteArray::fromStdString);
 }
 
-Result<QByteArray> pdfOf(const Picture& picture, Palette palette) {
+Result<QByteArray> pdfOf(const Picture& picture, Palette palette, std::string_view study) {
+  const Result<std::string> metadata = study.empty() ? std::string() : xmpWithStudy(study);
+  if (!metadata)
+    return tl::unexpected(metadata.error());
   QByteArray bytes;
   QBuffer buffer(&bytes);
   if (!buffer.open(QIODevice::WriteOnly))
@@ -112,6 +118,7 @@ Result<QByteArray> pdfOf(const Picture& picture, Palette palette) {
     QPdfWriter writer(&buffer);
     writer.setTitle(fromUtf8(picture.title));
     writer.setCreator(creator());
+    writer.setDocumentXmpMetadata(QByteArray::fromStdString(*metadata));
     writer.setResolution(pdfResolution);
     const QPageSize page(pageOf(picture), QString(), QPageSize::ExactMatch);
     writer.setPageLayout(QPageLayout(page, QPageLayout::Portrait, QMarginsF()));

@@ -14,11 +14,13 @@ inline constexpr int leastDpi = 50;
 inline constexpr int greatestDpi = 2400;
 
 /// The picture, in mm, as a PNG on white with exactly this resolution stated; a Problem for a resolution out
-/// of range or a picture of more than 120 million pixels.
-Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi);
+/// of range or a picture of more than 120 million pixels. It carries the study whose bytes are given, none
+/// when they are empty.
+Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi, std::string_view study = {});
 
-/// The picture, in mm, as a PDF of one page of exactly its size, with real text in the embedded font.
-Result<QByteArray> pdfOf(const Picture& picture, Palette palette);
+/// The picture, in mm, as a PDF of one page of exactly its size, with real text in the embedded font. It
+/// carries a study likewise, in its metadata.
+Result<QByteArray> pdfOf(const Picture& picture, Palette palette, std::string_view study = {});
 
 /// Prints the picture at true size at the top left of the printable page, made smaller only when it does not
 /// fit: gives the part of its true size, 1 or less. A Problem when the printer does not start.

@@ -51,7 +51,7 @@ const std::vector<Carrier>& carriers() {
 
 /// The study that is carried, or why there is none.
 std::string found(std::string_view bytes) {
-  const auto study = studyIn(bytes);
+  const auto study = carriedStudy(bytes);
   return study ? *study ? **study : plain(study->error()) : "no carrier";
 }
 
@@ -119,7 +119,7 @@ RC_GTEST_PROP(EmbeddedStudy, isTheStudyThatWasPutIn, ()) {
 }
 
 TEST(EmbeddedStudy, aStudyFileIsReadAsItself) {
-  EXPECT_EQ(studyIn(writeStudy(newStudy())), std::nullopt);
+  EXPECT_EQ(carriedStudy(writeStudy(newStudy())), std::nullopt);
   const Results<OpenedStudy> opened = openedStudy(writeStudy(newStudy()));
   ASSERT_TRUE(opened);
   EXPECT_FALSE(opened->isRestored);

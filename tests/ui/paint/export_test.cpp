@@ -1,4 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/record/embedded_study.h"
+#include "core/record/study_file.h"
 #include "tests/ui/paint/sample.h"
 #include "ui/paint/export.h"
 
@@ -113,6 +115,44 @@ TEST(Pdf, LooksLikeThePng) {
     for (int x = 0; x < std::min(pdf.width(), png.width()); ++x)
       far += std::abs(qGray(pdf.pixel(x, y)) - qGray(png.pixel(x, y))) > 100 ? 1 : 0;
   EXPECT_LT(far, png.width() * png.height() / 500);
+}
+
+TEST(Png, CarriesAStudyAndLooksTheSame) {
+  const std::string study = writeStudy(newStudy());
+  const QByteArray png = *pngOf(samplePicture(), Palette::paper, 150, study);
+  EXPECT_EQ(carriedStudy(png.toStdString())->value(), study);
+  const QByteArray without = *pngOf(samplePicture(), Palette::paper, 150);
+  EXPECT_FALSE(*carriedStudy(without.toStdString()));
+  EXPECT_EQ(QImage::fromData(png, "PNG"), QImage::fromData(without, "PNG"));
+  EXPECT_EQ(QImage::fromData(png, "PNG").dotsPerMeterX(), QImage::fromData(without, "PNG").dotsPerMeterX());
+}
+
+TEST(Png, OpensAlsoWithAStudyThatReadersOfPicturesFindTooLong) {
+  constexpr std::size_t longest = 8000000; // bytes of one chunk of text that libpng takes
+  const QByteArray png = *pngOf(samplePicture(), Palette::paper, 96, std::string(longest, ' '));
+  EXPECT_GT(QImage::fromData(png, "PNG").width(), 300);
+  EXPECT_EQ(carriedStudy(png.toStdString())->value().size(), longest);
+}
+
+TEST(Pdf, CarriesAStudyInItsMetadataAndLooksTheSame) {
+  QTemporaryDir folder;
+  const std::string study = writeStudy(newStudy());
+  const QByteArray pdf = *pdfOf(samplePicture(), Palette::paper, study);
+  EXPECT_EQ(carriedStudy(pdf.toStdString())->value(), study);
+  const QByteArray without = *pdfOf(samplePicture(), Palette::paper);
+  EXPECT_FALSE(*carriedStudy(without.toStdString()));
+  const QString file = written(folder, QStringLiteral("with.pdf"), pdf);
+  const QString other = written(folder, QStringLiteral("without.pdf"), without);
+  EXPECT_TRUE(outputOf(QStringLiteral("pdfinfo"), {QStringLiteral("-meta"), file})
+                  .contains(QStringLiteral("planewright-study")));
+  for (const QString& program : {QStringLiteral("pdftotext"), QStringLiteral("pdftoppm")}) {
+    const auto seen = [&](const QString& name) {
+      return program == QStringLiteral("pdftotext") ? outputOf(program, {name, QStringLiteral("-")})
+                                                    : outputOf(program, {name});
+    };
+    EXPECT_EQ(seen(file), seen(other)) << program.toStdString();
+    EXPECT_FALSE(seen(file).isEmpty());
+  }
 }
 
 /// The width in mm of what is not white on the first page of a PDF.
