@@ -19,8 +19,10 @@
 #include <QMessageBox>
 #include <QMimeData>
 #include <QPushButton>
+#include <QScreen>
 #include <QScrollArea>
 #include <QSettings>
+#include <QShowEvent>
 #include <QStandardPaths>
 #include <QToolButton>
 #include <QVBoxLayout>
@@ -40,21 +42,27 @@ FigureDialog::FigureDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_des
 
 void FigureDialog::build() {
   constexpr QSize first(980, 760);
-  constexpr int optionsWidth = 230;
+  constexpr int optionsWidth = 250;
   m_options = new FigureOptions(rememberedFigure(QSettings()), this);
-  m_options->setFixedWidth(optionsWidth);
+  auto* options = new QScrollArea(this);
+  options->setWidget(m_options);
+  options->setWidgetResizable(true);
+  options->setFrameShape(QFrame::NoFrame);
+  options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
+  options->setFixedWidth(optionsWidth);
   m_sentence = new QLabel(this);
   m_sentence->setWordWrap(true);
   m_sentence->setTextInteractionFlags(Qt::TextSelectableByMouse);
   auto* middle = new QHBoxLayout;
   middle->setSpacing(14);
-  middle->addWidget(m_options);
+  middle->addWidget(options);
   middle->addLayout(previewColumn(), 1);
   auto* column = new QVBoxLayout(this);
   column->addLayout(middle, 1);
   column->addWidget(m_sentence);
   column->addLayout(footer());
-  resize(first);
+  const QSize frame(20, 50); // of the window manager
+  resize(first.boundedTo(screen()->availableSize() - frame));
 }
 
 QVBoxLayout* FigureDialog::previewColumn() {
@@ -116,13 +124,15 @@ void FigureDialog::setStudyFile(const QString& path) {
 
 void FigureDialog::showEvent(QShowEvent* event) {
   QDialog::showEvent(event);
+  if (!event->spontaneous())
+    m_options->endSendingOutside();
   refresh();
 }
 
 void FigureDialog::arrange() {
   QSettings settings;
   if (!m_options->problem())
-    rememberFigure(settings, m_options->settings());
+    rememberFigure(settings, m_options->remembered());
   refresh();
 }
 
@@ -182,7 +192,7 @@ Result<void> FigureDialog::saveTo(const QString& path) {
   const Result<Picture> made = picture();
   if (!made)
     return tl::unexpected(made.error());
-  const Result<QByteArray> bytes = fileBytes(*made, m_options->settings());
+  const Result<QByteArray> bytes = fileBytes(*made, m_options->settings(), m_desk.study(), m_desk.readout());
   if (!bytes)
     return tl::unexpected(bytes.error());
   return writeAside(path.toStdString(), bytes->toStdString());
@@ -194,7 +204,10 @@ void FigureDialog::saveAndTell(const QString& path) {
     say(shown(saved.error()), true);
     return;
   }
-  const QString sentence = tr("Saved as %1.").arg(QDir::toNativeSeparators(path));
+  const QString file = QDir::toNativeSeparators(path);
+  const QString sentence = m_options->settings().carriesStudy
+                               ? tr("Saved as %1, with the study inside.").arg(file)
+                               : tr("Saved as %1, without the study.").arg(file);
   say(sentence, false);
   m_desk.say(sentence);
 }

@@ -11,6 +11,7 @@
 #include <QHBoxLayout>
 #include <QLabel>
 #include <QLineEdit>
+#include <QPushButton>
 #include <QRadioButton>
 #include <QVBoxLayout>
 
@@ -39,7 +40,7 @@ QComboBox* boxOf(std::vector<Number> numbers, Number present, const QString& uni
 } // namespace
 
 FigureOptions::FigureOptions(const FigureSettings& settings, QWidget* parent)
-    : QWidget(parent), m_settings(settings) {
+    : QWidget(parent), m_settings(settings), m_carryingChosen(settings.carriesStudy) {
   auto* column = new QVBoxLayout(this);
   column->setContentsMargins(0, 0, 0, 0);
   column->setSpacing(10);
@@ -47,6 +48,7 @@ FigureOptions::FigureOptions(const FigureSettings& settings, QWidget* parent)
   buildWidth();
   buildText();
   buildFormat();
+  buildCarrying();
   column->addStretch();
 }
 
@@ -184,6 +186,47 @@ void FigureOptions::buildFormat() {
     m_settings.dpi = m_dpi->currentData().toInt();
     emit changed();
   });
+}
+
+void FigureOptions::buildCarrying() {
+  QVBoxLayout* rows = group(tr("Study"));
+  m_carrying = new QCheckBox(tr("Carry the study inside the file"), this);
+  m_carryingWords = new QLabel(this);
+  m_carryingWords->setWordWrap(true);
+  auto* outside = new QPushButton(tr("For sending outside"), this);
+  outside->setAutoDefault(false);
+  outside->setToolTip(tr("Leaves the study out until this window is closed."));
+  rows->addWidget(m_carrying);
+  rows->addWidget(m_carryingWords);
+  rows->addWidget(outside, 0, Qt::AlignLeft);
+  carry(m_carryingChosen);
+  connect(m_carrying, &QCheckBox::clicked, this, [this](bool on) {
+    m_carryingChosen = on;
+    carry(on);
+    emit changed();
+  });
+  connect(outside, &QPushButton::clicked, this, [this] {
+    carry(false);
+    emit changed();
+  });
+}
+
+void FigureOptions::carry(bool on) {
+  m_settings.carriesStudy = on;
+  m_carrying->setChecked(on);
+  m_carryingWords->setText(on ? tr("The whole study, with all points and notes, travels inside; opening the "
+                                   "figure brings it back.")
+                              : tr("The file holds the figure alone; no study comes back from it."));
+}
+
+FigureSettings FigureOptions::remembered() const {
+  FigureSettings settings = m_settings;
+  settings.carriesStudy = m_carryingChosen;
+  return settings;
+}
+
+void FigureOptions::endSendingOutside() {
+  carry(m_carryingChosen);
 }
 
 void FigureOptions::takeFormat(FigureFormat format) {

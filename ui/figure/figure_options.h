@@ -8,7 +8,9 @@
 #include <functional>
 #include <optional>
 
+class QCheckBox;
 class QComboBox;
+class QLabel;
 class QLineEdit;
 class QRadioButton;
 class QVBoxLayout;
@@ -22,10 +24,15 @@ class FigureOptions : public QWidget {
 public:
   explicit FigureOptions(const FigureSettings& settings, QWidget* parent = nullptr);
 
+  /// What the next file is made by.
   const FigureSettings& settings() const { return m_settings; }
+  /// The same without what holds only until the window is closed.
+  FigureSettings remembered() const;
   QString caption() const;
   /// Why the width that stands in its field does not read; none when it does.
   const std::optional<Problem>& problem() const { return m_problem; }
+  /// Goes back to the remembered choice of carrying the study.
+  void endSendingOutside();
 
 signals:
   void changed();
@@ -39,15 +46,20 @@ private:
   void buildWidth();
   void buildText();
   void buildFormat();
+  void buildCarrying();
+  void carry(bool on);
   void takeWidth(double width);
   void takeOwnWidth();
   void takeFormat(FigureFormat format);
 
   FigureSettings m_settings;
+  bool m_carryingChosen; ///< by the box; the preset for sending outside does not count
   std::optional<Problem> m_problem;
   QLineEdit* m_ownWidth = nullptr;
   QLineEdit* m_caption = nullptr;
   QComboBox* m_dpi = nullptr;
+  QCheckBox* m_carrying = nullptr;
+  QLabel* m_carryingWords = nullptr;
 };
 
 } // namespace planewright

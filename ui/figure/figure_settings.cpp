@@ -66,6 +66,7 @@ FigureSettings rememberedFigure(const QSettings& settings) {
     if (settings.value(keyOf("figure/format")).toString() == QLatin1String(endingOf(format)))
       figure.format = format;
   figure.dpi = static_cast<int>(numberIn(settings, "figure/dpi", figure.dpi, leastDpi, greatestDpi));
+  figure.carriesStudy = switchIn(settings, "figure/study", true);
   return figure;
 }
 
@@ -77,6 +78,7 @@ void rememberFigure(QSettings& settings, const FigureSettings& figure) {
   settings.setValue(keyOf("figure/mono"), figure.mono);
   settings.setValue(keyOf("figure/format"), QString::fromLatin1(endingOf(figure.format)));
   settings.setValue(keyOf("figure/dpi"), figure.dpi);
+  settings.setValue(keyOf("figure/study"), figure.carriesStudy);
 }
 
 } // namespace planewright

@@ -17,6 +17,7 @@ struct FigureSettings {
   bool mono = false;
   FigureFormat format = FigureFormat::svg;
   int dpi = 300; ///< of a PNG
+  bool carriesStudy = true;
   bool operator==(const FigureSettings&) const = default;
 };
 

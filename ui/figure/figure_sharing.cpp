@@ -2,6 +2,7 @@
 #include "ui/figure/figure_sharing.h"
 
 #include "core/figure/svg.h"
+#include "core/record/embedded_study.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
 
@@ -57,16 +58,21 @@ Result<Picture> figureFor(const Desk& desk, const FigureSettings& settings, cons
   return figureOf(desk.study(), desk.readout(), orderOf(settings, studyFile, caption));
 }
 
-Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings) {
+Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings, const Study& study,
+                             const Readout& readout) {
+  const std::string carried = settings.carriesStudy ? studyOfFigure(study, readout) : std::string();
   switch (settings.format) {
   case FigureFormat::pdf:
-    return pdfOf(picture, paletteOf(settings));
+    return pdfOf(picture, paletteOf(settings), carried);
   case FigureFormat::png:
-    return pngOf(picture, paletteOf(settings), settings.dpi);
+    return pngOf(picture, paletteOf(settings), settings.dpi, carried);
   case FigureFormat::svg:
     break;
   }
-  return QByteArray::fromStdString(svgOf(picture, paletteOf(settings)));
+  std::string svg = svgOf(picture, paletteOf(settings));
+  if (carried.empty())
+    return QByteArray::fromStdString(svg);
+  return svgWithStudy(std::move(svg), carried).map(&QByteArray::fromStdString);
 }
 
 Result<std::unique_ptr<QMimeData>> mimeOf(const Picture& picture, const FigureSettings& settings) {

@@ -15,8 +15,10 @@ namespace planewright {
 Result<Picture> figureFor(const Desk& desk, const FigureSettings& settings, const QString& studyFile,
                           const QString& caption = {});
 
-/// The picture as a file of the settings' format.
-Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings);
+/// The picture as a file of the settings' format. It carries the study, with the readout that it shows, where
+/// the settings say so; what goes to the clipboard or a printer never does.
+Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings, const Study& study,
+                             const Readout& readout);
 
 /// The picture for the clipboard: SVG, PDF and a pixel image, so that a document takes the best it knows.
 Result<std::unique_ptr<QMimeData>> mimeOf(const Picture& picture, const FigureSettings& settings);

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/figure/figure_dialog.h"
 
+#include "core/record/embedded_study.h"
 #include "core/study/edit.h"
 #include "ui/figure/figure_page.h"
 #include "ui/figure/figure_sharing.h"
@@ -184,6 +185,64 @@ TEST_F(Arrange, OffersTheResolutionOnlyForAPng) {
   EXPECT_TRUE((*dpi)->isEnabled());
 }
 
+/// The study that a saved file carries; none when it says that it carries none.
+std::optional<Study> restored(const QByteArray& bytes) {
+  const Results<OpenedStudy> opened = openedStudy(bytes.toStdString());
+  if (opened)
+    return opened->study;
+  EXPECT_EQ(plain(opened.error().front().what), "This file carries no study.");
+  return std::nullopt;
+}
+
+constexpr const char* carrying = "Carry the study inside the file";
+
+TEST_F(Arrange, CarriesTheStudyInEveryFormatWhenAskedTo) {
+  FigureDialog dialog(desk);
+  dialog.show();
+  EXPECT_TRUE(button<QCheckBox>(dialog, carrying).isChecked());
+  EXPECT_TRUE(says(dialog, "The whole study, with all points and notes, travels inside"));
+  Study shown = desk.study();
+  shown.shown = {"P1", "G"};
+  for (const auto& [format, name] : {std::pair{"SVG, lines and text", "a.svg"},
+                                     {"PDF, lines and text", "a.pdf"},
+                                     {"PNG, pixels", "a.png"}}) {
+    click(button<QRadioButton>(dialog, format));
+    ASSERT_TRUE(dialog.saveTo(path(name)));
+    EXPECT_EQ(restored(contents(name)), shown) << name;
+    click(button<QCheckBox>(dialog, carrying));
+    EXPECT_TRUE(says(dialog, "The file holds the figure alone"));
+    ASSERT_TRUE(dialog.saveTo(path(name)));
+    EXPECT_EQ(restored(contents(name)), std::nullopt) << name;
+    click(button<QCheckBox>(dialog, carrying));
+  }
+}
+
+TEST_F(Arrange, RemembersWhetherTheStudyIsCarried) {
+  {
+    FigureDialog dialog(desk);
+    dialog.show();
+    click(button<QCheckBox>(dialog, carrying));
+  }
+  FigureDialog dialog(desk);
+  dialog.show();
+  EXPECT_FALSE(button<QCheckBox>(dialog, carrying).isChecked());
+}
+
+TEST_F(Arrange, LeavesTheStudyOutForSendingOutsideThisTimeOnly) {
+  FigureDialog dialog(desk);
+  dialog.show();
+  button<QPushButton>(dialog, "For sending outside").click();
+  EXPECT_FALSE(button<QCheckBox>(dialog, carrying).isChecked());
+  click(button<QRadioButton>(dialog, "90 mm, half a page"));
+  ASSERT_TRUE(dialog.saveTo(path("a.svg")));
+  EXPECT_EQ(restored(contents("a.svg")), std::nullopt);
+  EXPECT_TRUE(rememberedFigure(QSettings()).carriesStudy);
+  dialog.hide();
+  dialog.show();
+  EXPECT_TRUE(button<QCheckBox>(dialog, carrying).isChecked());
+  EXPECT_TRUE(button<QRadioButton>(dialog, "90 mm, half a page").isChecked());
+}
+
 TEST_F(Arrange, SavesBesideTheStudyAndSaysWhere) {
   FigureDialog dialog(desk);
   dialog.setStudyFile(path("rafter foot.planewright"));
@@ -193,7 +252,7 @@ TEST_F(Arrange, SavesBesideTheStudyAndSaysWhere) {
   EXPECT_TRUE(button<QPushButton>(dialog, "Save").isDefault());
   button<QPushButton>(dialog, "Save").click();
   EXPECT_TRUE(QFile::exists(path("rafter-foot-P1-G.svg")));
-  EXPECT_TRUE(says(dialog, "rafter-foot-P1-G.svg"));
+  EXPECT_TRUE(says(dialog, "rafter-foot-P1-G.svg, with the study inside."));
   EXPECT_TRUE(said.contains(QStringLiteral("rafter-foot-P1-G.svg")));
 }
 
@@ -210,6 +269,8 @@ TEST_F(Arrange, CopiesLinesAndPixels) {
   EXPECT_TRUE(mime->data(QStringLiteral("image/svg+xml")).startsWith("<?xml"));
   EXPECT_TRUE(mime->data(QStringLiteral("application/pdf")).startsWith("%PDF-"));
   EXPECT_EQ(qvariant_cast<QImage>(mime->imageData()).width(), qRound(160 / 25.4 * 300));
+  for (const char* type : {"image/svg+xml", "application/pdf"})
+    EXPECT_EQ(restored(mime->data(QString::fromLatin1(type))), std::nullopt) << "nobody asked for it there";
 }
 
 TEST_F(Arrange, ShowsTheStartOfALongFileName) {

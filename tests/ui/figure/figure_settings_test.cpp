@@ -25,6 +25,7 @@ TEST_F(FigureSettingsFile, RemembersEveryChoice) {
   figure.mono = true;
   figure.format = FigureFormat::png;
   figure.dpi = 600;
+  figure.carriesStudy = false;
   {
     QSettings settings(path(), QSettings::IniFormat);
     rememberFigure(settings, figure);
