@@ -21,6 +21,13 @@ QString filter() {
   return words(QT_TRANSLATE_NOOP("FileQuestions", "Studies (*.planewright);;All files (*)"));
 }
 
+/// A figure or a sheet may carry its study.
+QString filterToOpen() {
+  return words(QT_TRANSLATE_NOOP("FileQuestions",
+                                 "Studies (*.planewright);;Figures and sheets with their study inside (*.svg "
+                                 "*.pdf *.png *.html);;All files (*)"));
+}
+
 /// The folder of the newest file, else that of documents.
 QString folder() {
   const QString newest = recentFiles().value(0);
@@ -43,7 +50,7 @@ Unsaved askAboutUnsaved(QWidget& window, const QString& name) {
 
 QString askPathToOpen(QWidget& window) {
   return QFileDialog::getOpenFileName(&window, words(QT_TRANSLATE_NOOP("FileQuestions", "Open a study")),
-                                      folder(), filter());
+                                      folder(), filterToOpen());
 }
 
 QString tableFilter() {

@@ -2,6 +2,7 @@
 #include "ui/shell/filing.h"
 
 #include "core/record/copied_points.h"
+#include "core/record/embedded_study.h"
 #include "core/record/pasted_cells.h"
 #include "core/record/study_file.h"
 #include "ui/files/file_bytes.h"
@@ -13,11 +14,11 @@ namespace planewright {
 
 namespace {
 
-Results<Study> studyIn(const QString& path) {
-  const Result<std::string> bytes = bytesOf(path.toStdString(), greatestStudyFile);
+Results<OpenedStudy> studyIn(const QString& path) {
+  const Result<std::string> bytes = bytesOf(path.toStdString(), greatestCarrier);
   if (!bytes)
     return tl::unexpected(Problems{bytes.error()});
-  return readStudy(*bytes);
+  return openedStudy(*bytes);
 }
 
 } // namespace
@@ -26,7 +27,10 @@ Filing::Filing(Desk& desk, FileQuestions questions, QObject* parent)
     : QObject(parent), m_desk(desk), m_questions(std::move(questions)) {}
 
 QString Filing::name() const {
-  return m_path.isEmpty() ? tr("New study") : QFileInfo(m_path).completeBaseName();
+  if (!m_path.isEmpty())
+    return QFileInfo(m_path).completeBaseName();
+  return m_restoredFrom.isEmpty() ? tr("New study")
+                                  : tr("Study from %1").arg(QFileInfo(m_restoredFrom).fileName());
 }
 
 bool Filing::begin() {
@@ -39,19 +43,23 @@ bool Filing::open() {
 }
 
 bool Filing::open(const QString& path) {
-  const auto refuse = [&](Problems problems) {
+  const auto refuse = [&](const Problems& problems) {
     Q_EMIT refused(path, problems);
     return false;
   };
-  if (Results<Study> early = studyIn(path); !early)
+  if (Results<OpenedStudy> early = studyIn(path); !early)
     return refuse(std::move(early).error());
   if (!mayLeave())
     return false;
   // Only now, for leaving may have saved to this very file.
-  Results<Study> study = studyIn(path);
-  if (!study)
-    return refuse(std::move(study).error());
-  put(*std::move(study), QFileInfo(path).absoluteFilePath());
+  Results<OpenedStudy> opened = studyIn(path);
+  if (!opened)
+    return refuse(std::move(opened).error());
+  const QString file = QFileInfo(path).absoluteFilePath();
+  if (opened->isRestored)
+    put(std::move(opened->study), {}, file);
+  else
+    put(std::move(opened->study), file);
   return true;
 }
 
@@ -67,8 +75,17 @@ bool Filing::save() {
 }
 
 bool Filing::saveAs() {
-  const QString path = m_questions.pathToSave(m_path.isEmpty() ? tr("study.planewright") : m_path);
+  const QString path = m_questions.pathToSave(proposedPath());
   return !path.isEmpty() && writeTo(QFileInfo(path).absoluteFilePath());
+}
+
+QString Filing::proposedPath() const {
+  if (!m_path.isEmpty())
+    return m_path;
+  if (m_restoredFrom.isEmpty())
+    return tr("study.planewright");
+  const QFileInfo figure(m_restoredFrom);
+  return figure.path() + QLatin1Char('/') + figure.completeBaseName() + QStringLiteral(".planewright");
 }
 
 bool Filing::mayLeave() {
@@ -85,9 +102,12 @@ bool Filing::mayLeave() {
   return false;
 }
 
-void Filing::put(Study study, const QString& path) {
+void Filing::put(Study study, const QString& path, const QString& restoredFrom) {
   m_path = path;
+  m_restoredFrom = restoredFrom;
   m_desk.replace(std::move(study));
+  if (!restoredFrom.isEmpty())
+    m_desk.undoStack()->resetClean();
   Q_EMIT fileChanged(m_path);
   Q_EMIT begun();
 }
@@ -124,6 +144,7 @@ bool Filing::writeTo(const QString& path) {
   if (!writeBytes(path, writeStudy(m_desk.study())))
     return false;
   m_path = path;
+  m_restoredFrom.clear();
   m_desk.undoStack()->setClean();
   Q_EMIT fileChanged(m_path);
   m_desk.say(tr("Saved as %1.").arg(QFileInfo(m_path).fileName()));

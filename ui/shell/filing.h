@@ -35,14 +35,18 @@ public:
 
   /// The file of the study; empty while it has none.
   const QString& path() const { return m_path; }
-  /// The file's name without folder and ending, or "New study".
+  /// The figure or sheet that the study was taken out of; empty when it came otherwise or was saved since.
+  const QString& restoredFrom() const { return m_restoredFrom; }
+  /// The file's name without folder and ending, "Study from" a figure, or "New study".
   QString name() const;
   bool hasChanges() const { return !m_desk.undoStack()->isClean(); }
 
   /// A new study, when nothing is lost by it.
   bool begin();
   bool open();
-  /// Also of a file that the person did not choose in a dialog: dropped, recent, named on the command line.
+  /// Also of a file that the person did not choose in a dialog: dropped, recent, named on the command line. A
+  /// study that a figure carries belongs to no file and counts as unsaved, so that saving it leaves the
+  /// figure as it is.
   bool open(const QString& path);
   /// Puts a study on the desk that belongs to no file.
   bool openUnnamed(Study study);
@@ -64,13 +68,15 @@ signals:
   void refused(const QString& path, const planewright::Problems& problems);
 
 private:
-  void put(Study study, const QString& path);
+  void put(Study study, const QString& path, const QString& restoredFrom = {});
+  QString proposedPath() const;
   bool writeTo(const QString& path);
   bool writeBytes(const QString& path, const std::string& bytes);
 
   Desk& m_desk;
   FileQuestions m_questions;
   QString m_path;
+  QString m_restoredFrom;
 };
 
 } // namespace planewright

@@ -154,7 +154,14 @@ void MainWindow::showFile(const QString& path) {
   showTitle();
   if (m_figure)
     m_figure->setStudyFile(path);
-  if (isWorkedExample(m_desk.study())) {
+  if (const QString figure = m_filing->restoredFrom(); !figure.isEmpty()) {
+    m_welcome->say(tr("Restored from the figure %1. The study is in no file of its own yet.")
+                       .arg(QFileInfo(figure).fileName()));
+    m_welcome->offer(tr("Save as…"), [this] {
+      settleDrafts();
+      m_filing->saveAs();
+    });
+  } else if (isWorkedExample(m_desk.study())) {
     m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
     m_welcome->offer(tr("New study"), [this] { beginStudy(); });
     m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });

@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/record/embedded_study.h"
 #include "core/record/study_file.h"
 #include "shell_test.h"
 #include "ui/shell/recent_files.h"
@@ -82,6 +83,40 @@ TEST_F(FilingTest, openingTheFileThatWasJustSavedShowsWhatWasSaved) {
   ASSERT_TRUE(m_filing.open(m_savePath));
   EXPECT_EQ(m_askedUnsaved, 1);
   EXPECT_EQ(m_desk.study(), typed);
+}
+
+TEST_F(FilingTest, aStudyThatAFigureCarriesBelongsToNoFileAndIsUnsaved) {
+  const QString figure = file("beam-P1-G.svg");
+  const std::string bytes = svgWithStudy("<svg></svg>", writeStudy(workedExample())).value();
+  write(figure, bytes);
+  ASSERT_TRUE(m_filing.open(figure));
+  EXPECT_EQ(m_desk.study(), workedExample());
+  EXPECT_TRUE(m_filing.path().isEmpty());
+  EXPECT_EQ(m_filing.restoredFrom(), figure);
+  EXPECT_EQ(m_filing.name(), "Study from beam-P1-G.svg");
+  EXPECT_TRUE(m_filing.hasChanges());
+  EXPECT_FALSE(m_filing.begin()) << "the answer was to stay";
+  EXPECT_EQ(m_askedUnsaved, 1);
+
+  type(m_desk, Spot::reading, "3 deg");
+  m_desk.undoStack()->undo();
+  EXPECT_TRUE(m_filing.hasChanges()) << "it is in no file yet";
+
+  m_savePath = file("again.planewright");
+  ASSERT_TRUE(m_filing.save());
+  EXPECT_EQ(m_proposedPath, file("beam-P1-G.planewright"));
+  EXPECT_FALSE(m_filing.hasChanges());
+  EXPECT_TRUE(m_filing.restoredFrom().isEmpty());
+  EXPECT_EQ(m_filing.name(), "again");
+  EXPECT_EQ(bytesIn(figure), bytes) << "the figure stays as it was";
+}
+
+TEST_F(FilingTest, aFigureWithoutAStudyLeavesTheStudyAndSaysSo) {
+  write(file("a.svg"), "<svg></svg>");
+  EXPECT_FALSE(m_filing.open(file("a.svg")));
+  ASSERT_EQ(m_problems.size(), 1U);
+  EXPECT_EQ(plain(m_problems.front().what), "This file carries no study.");
+  EXPECT_TRUE(m_filing.restoredFrom().isEmpty());
 }
 
 TEST_F(FilingTest, readsFilesUpToTheSizeThatCoreReads) {

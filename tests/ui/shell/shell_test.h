@@ -30,7 +30,11 @@ protected:
               ++m_askedUnsaved;
               return m_unsaved;
             },
-            [this] { return m_openPath; }, [this](const QString&) { return m_savePath; },
+            [this] { return m_openPath; },
+            [this](const QString& proposed) {
+              m_proposedPath = proposed;
+              return m_savePath;
+            },
             [this] { return m_importPath; }, [this](const QString&) { return m_exportPath; }};
   }
 
@@ -46,6 +50,7 @@ protected:
   Unsaved m_unsaved = Unsaved::stay;
   QString m_openPath;
   QString m_savePath;
+  QString m_proposedPath;
   QString m_importPath;
   QString m_exportPath;
   int m_askedUnsaved = 0;

@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/record/embedded_study.h"
 #include "core/record/study_file.h"
 #include "shell_test.h"
 #include "ui/circle/circle_plot.h"
@@ -141,6 +142,42 @@ TEST_F(WindowTest, aDroppedStudyIsOpenedWhereverItIsDropped) {
   window.filing().begin();
   drop(window.element(), path);
   EXPECT_EQ(window.desk().study(), study);
+}
+
+TEST_F(WindowTest, aDroppedFigureBringsItsStudyBackAndTheStripSaysSo) {
+  MainWindow& window = shown();
+  Study study = workedExample();
+  study.title.subject = "another";
+  const QString figure = file(QStringLiteral("beam.svg"));
+  QFile opened(figure);
+  ASSERT_TRUE(opened.open(QIODevice::WriteOnly));
+  opened.write(QByteArray::fromStdString(*svgWithStudy("<svg></svg>", writeStudy(study))));
+  opened.close();
+  drop(window.circle(), figure);
+  EXPECT_EQ(window.desk().study(), study);
+  EXPECT_TRUE(window.welcome().isVisible());
+  EXPECT_TRUE(window.welcome().sentence().startsWith(QStringLiteral("Restored from the figure beam.svg.")));
+  EXPECT_TRUE(window.windowTitle().startsWith(QStringLiteral("Study from beam.svg")));
+  EXPECT_TRUE(window.isWindowModified());
+  EXPECT_TRUE(recentFiles().isEmpty()) << "it is no study of its own";
+  m_savePath = file(QStringLiteral("beam.planewright"));
+  window.welcome().follow(QStringLiteral("Save as…"));
+  EXPECT_FALSE(window.isWindowModified());
+  EXPECT_FALSE(window.welcome().isVisible());
+  EXPECT_EQ(recentFiles(), QStringList{m_savePath});
+}
+
+TEST_F(WindowTest, aDroppedFigureThatWasHarmedIsRefused) {
+  MainWindow& window = shown();
+  const QString figure = file(QStringLiteral("beam.svg"));
+  QFile opened(figure);
+  ASSERT_TRUE(opened.open(QIODevice::WriteOnly));
+  QByteArray bytes = QByteArray::fromStdString(*svgWithStudy("<svg></svg>", writeStudy(workedExample())));
+  opened.write(bytes.replace("ewog", "evog"));
+  opened.close();
+  drop(window.element(), figure);
+  EXPECT_EQ(window.desk().study(), newStudy());
+  EXPECT_TRUE(window.trouble().sentence().contains(QStringLiteral("was changed after it was saved")));
 }
 
 TEST_F(WindowTest, anUnsavedStudyIsAskedAboutAtClosing) {
