@@ -83,6 +83,12 @@ double evaluated(Formula::Operation operation, const std::vector<double>& parts)
     return cosSin(Angle::fromDegrees(a)).cos;
   case Operation::sine:
     return cosSin(Angle::fromDegrees(a)).sin;
+  case Operation::tangent: {
+    const CosSin both = cosSin(Angle::fromDegrees(a));
+    return both.sin / both.cos;
+  }
+  case Operation::absolute:
+    return std::abs(a);
   case Operation::arcTangent:
     return Angle::fromRadians(std::atan2(a + 0.0, b)).degrees();
   case Operation::greatest:
@@ -154,6 +160,12 @@ Formula cosine(const Formula& degrees) {
 }
 Formula sine(const Formula& degrees) {
   return Formula::of(Formula::Operation::sine, {degrees});
+}
+Formula tangent(const Formula& degrees) {
+  return Formula::of(Formula::Operation::tangent, {degrees});
+}
+Formula absolute(const Formula& a) {
+  return Formula::of(Formula::Operation::absolute, {a});
 }
 Formula arcTangent(const Formula& y, const Formula& x) {
   return Formula::of(Formula::Operation::arcTangent, {y, x});

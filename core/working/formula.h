@@ -39,6 +39,8 @@ public:
     hypotenuse, ///< sqrt(a^2 + b^2) without overflow on the way
     cosine,     ///< of degrees
     sine,
+    tangent,
+    absolute,   ///< size without its sign
     arcTangent, ///< atan2(y, x) in degrees, (-180, 180]
     greatest,
     least
@@ -80,6 +82,8 @@ Formula root(const Formula& a);
 Formula hypotenuse(const Formula& a, const Formula& b);
 Formula cosine(const Formula& degrees);
 Formula sine(const Formula& degrees);
+Formula tangent(const Formula& degrees);
+Formula absolute(const Formula& a);
 Formula arcTangent(const Formula& y, const Formula& x);
 Formula greatest(std::vector<Formula> parts);
 Formula least(std::vector<Formula> parts);

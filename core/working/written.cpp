@@ -53,6 +53,8 @@ public:
     case Operation::hypotenuse:
       return {"√(" + ofPower(line(formula.parts()[0]), {"2"}).words + " + " +
               ofPower(line(formula.parts()[1]), {"2"}).words + ")"};
+    case Operation::absolute:
+      return {"|" + line(formula.parts()[0]).words + "|"};
     default:
       return formula.parts().size() == 2 ? ofTwo(formula) : ofCall(formula);
     }
@@ -120,6 +122,8 @@ private:
       return "cos";
     case Operation::sine:
       return "sin";
+    case Operation::tangent:
+      return "tan";
     case Operation::arcTangent:
       return "atan2";
     case Operation::greatest:

@@ -33,6 +33,11 @@ TEST(Formula, evaluatesEveryOperation) {
   EXPECT_EQ(value(hypotenuse(a, b)), 5);
   EXPECT_EQ(value(cosine(3 * angle)), 0);
   EXPECT_NEAR(value(sine(angle)), 0.5, 1e-15);
+  EXPECT_NEAR(value(tangent(angle)), 1 / std::sqrt(3.0), 1e-15);
+  EXPECT_EQ(value(tangent(1.5 * angle)), 1);
+  EXPECT_EQ(value(absolute(a)), 3);
+  EXPECT_EQ(value(absolute(b)), 4);
+  EXPECT_EQ(value(power(b, 1.5)), 8);
   EXPECT_EQ(value(arcTangent(b, -b)), 135);
   EXPECT_EQ(value(arcTangent(-0.0, -1)), 180);
   EXPECT_EQ(value(greatest({a, b, 7})), 7);
@@ -51,6 +56,9 @@ TEST(Formula, isWrittenInSymbols) {
   EXPECT_EQ(inSymbols(hypotenuse((a - b) / 2, b)), "√(((a − b1)/2)² + b1²)");
   EXPECT_EQ(inSymbols(power(power(a, 3), b)), "(a³)^b1");
   EXPECT_EQ(inSymbols(root(a + b)), "√(a + b1)");
+  EXPECT_EQ(inSymbols(power(absolute(a - b), 2)), "|a − b1|²");
+  EXPECT_EQ(inSymbols(a * power(sine(angle), b)), "a · sin(θ)^b1");
+  EXPECT_EQ(inSymbols(b / tangent(2 * angle)), "b1/tan(2θ)");
   EXPECT_EQ(inSymbols(arcTangent(2 * a, a - b) / 2), "atan2(2a, a − b1)/2");
   EXPECT_EQ(inSymbols((greatest({a, b}) - least({a, b})) / 2), "(max(a, b1) − min(a, b1))/2");
   EXPECT_EQ(inSymbols(a - Formula::degrees(45)), "a − 45°");
@@ -63,6 +71,8 @@ TEST(Formula, isWrittenWithNumbersPutIn) {
   EXPECT_EQ(inNumbers(a * b), "(−3.0) · 4.00");
   EXPECT_EQ(inNumbers(hypotenuse(a, b)), "√((−3.0)² + 4.00²)");
   EXPECT_EQ(inNumbers(cosine(2 * angle)), "cos(2 · 30.0°)");
+  EXPECT_EQ(inNumbers(absolute(a) / b), "|−3.0|/4.00");
+  EXPECT_EQ(inNumbers(power(sine(angle), 1.5)), "sin(30.0°)^1.5");
 }
 
 TEST(Formula, numbersOfSeveralKindsAreWrittenInUnitsOfTheirOwn) {
@@ -94,6 +104,28 @@ TEST(Step, theResultIsWrittenInItsUnit) {
   const Step step{
       PW_TEXT("Test", "second moment"), symbol("I_{z}"), a, numbers, 368.64e6, 1, "10⁶ mm⁴", {}, 1e6};
   EXPECT_EQ(shownResult(step), "368.6 10⁶ mm⁴");
+}
+
+Step difference(double first, double second) {
+  const NumbersPutIn close = {{"a", first, 1, false}, {"b_{1}", second, 1, false}};
+  return {PW_TEXT("Test", "difference"), symbol("d"), a - b, close, first - second, 3, "MPa", {}};
+}
+
+TEST(Step, numbersThatCancelAreWrittenWithMoreDecimals) {
+  EXPECT_EQ(plain(written(withEnoughDigits(difference(5.12345678, 5.11111111)))),
+            "d = a − b1 = 5.123 − 5.111 = 0.012 MPa");
+  EXPECT_EQ(plain(written(withEnoughDigits(difference(5.12345678, 5.1)))),
+            "d = a − b1 = 5.123 − 5.1 = 0.023 MPa");
+}
+
+TEST(Step, numbersThatAreEnoughStayAsTheyAre) {
+  EXPECT_EQ(withEnoughDigits(difference(5.5, 5.1)).putIn, difference(5.5, 5.1).putIn);
+}
+
+TEST(Step, aResultThatDigitsCannotGiveStopsAskingForThem) {
+  const NumbersPutIn third = {{"a", 1.0 / 3, 1, false}};
+  const Step wrong{PW_TEXT("Test", "wrong"), symbol("w"), a, third, 5, 3, "MPa", {}};
+  EXPECT_EQ(withEnoughDigits(wrong).putIn[0].decimals, 7);
 }
 
 TEST(Step, isWrittenAsOneLine) {
