@@ -47,9 +47,21 @@ WrittenUnit powerOf(const Unit& length, int power, double value) {
   return {(millions ? "10⁶ " : "10³ ") + unit.name, unit.scale * (millions ? 1e6 : 1e3)};
 }
 
+/// "MPa⁻²".
+WrittenUnit inverseSquareOf(const Unit& unit) {
+  const double scale = unit.toBase(1);
+  return {nameForPeople(unit.name) + "⁻²", 1 / (scale * scale)};
+}
+
 WrittenUnit unitFor(const WrittenUnits& units, double value, Dimension dimension) {
+  if (dimension == dimension::none)
+    return {};
+  if (dimension == dimension::angle)
+    return {"°"};
   if (dimension == dimension::stress)
     return ofUnit(units.stress);
+  if (dimension == dimension::inverseSquareStress)
+    return inverseSquareOf(units.stress);
   if (dimension == dimension::force)
     return ofUnit(units.force);
   if (dimension == dimension::moment)
@@ -73,6 +85,8 @@ int decimalsPutIn(double value) {
 } // namespace
 
 NumberPutIn WrittenUnits::put(std::string_view symbol, double value, Dimension dimension) const {
+  if (dimension == dimension::angle)
+    return angle(symbol, value);
   const WrittenUnit unit = unitFor(*this, value, dimension);
   return {std::string(symbol), value, decimalsPutIn(value / unit.scale), false, unit.name, unit.scale};
 }

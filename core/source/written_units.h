@@ -6,11 +6,12 @@
 
 namespace planewright {
 
-/// Powers of a length: area, first and second moment of area.
+/// Powers of a length: area, first and second moment of area; of a stress.
 namespace dimension {
 inline constexpr Dimension area{0, 2, 0};
 inline constexpr Dimension firstMoment{0, 3, 0};
 inline constexpr Dimension secondMoment{0, 4, 0};
+inline constexpr Dimension inverseSquareStress = -2 * stress;
 } // namespace dimension
 
 /// The units in which a working is written; it is evaluated in N, mm and MPa.

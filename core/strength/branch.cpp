@@ -69,9 +69,8 @@ struct Utilise {
   Angle direction;
 
   double operator()(const SignedForm& form) const {
-    const LineStress s = state.at(direction);
-    const Interaction& piece = pieceOf(form, s);
-    return utilisationOfQuadratic(quadraticOf(piece, s), linearOf(piece, s));
+    const LoadTerms terms = termsOf(form, state.at(direction));
+    return utilisationOfQuadratic(terms.a, terms.b);
   }
   double operator()(const PowerOfAngle& power) const {
     const CosSin turn = cosSin(direction - power.axis);
@@ -156,6 +155,11 @@ void addTurningPoints(const PowerOfAngle& power, std::vector<Angle>& directions)
 }
 
 } // namespace
+
+LoadTerms termsOf(const SignedForm& form, const LineStress& stresses) {
+  const Interaction& piece = pieceOf(form, stresses);
+  return {quadraticOf(piece, stresses), linearOf(piece, stresses)};
+}
 
 double utilisationOfQuadratic(double a, double b) {
   a = std::max(a, 0.0); // a closed surface has none below 0 but for rounding

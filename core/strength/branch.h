@@ -63,6 +63,12 @@ struct Fixed {
 /// One smooth part of a criterion; a criterion is the greatest of its parts.
 using Branch = std::variant<SignedForm, PowerOfAngle, Mobilised, CutOff, Fixed>;
 
+/// The polynomial of a form in the load at a direction: the quadratic sum a and the linear sum b.
+struct LoadTerms {
+  double a = 0, b = 0;
+};
+LoadTerms termsOf(const SignedForm& form, const LineStress& stresses);
+
 double utilisationOf(const Branch& branch, const TurningState& state, Angle direction);
 /// The multiplier on all loads that takes this part to 1; none where none does.
 std::optional<double> multiplierOf(const Branch& branch, const TurningState& state, Angle direction);

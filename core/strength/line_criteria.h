@@ -18,6 +18,10 @@ Result<std::vector<Branch>> lineBranchesOf(Criterion criterion, const Strengths&
 /// The parts of a criterion of the normal and shear stress on a plane.
 Result<std::vector<Branch>> planeBranchesOf(Criterion criterion, const Strengths& strengths);
 
+/// The three principal stresses of a demand, greatest first.
+std::array<double, 3> principalsOf(const Demand& demand);
+/// The equivalent stress of von Mises.
+double misesOf(const std::array<double, 3>& principals);
 /// A criterion of the three principal stresses, which knows no direction.
 Result<Judgement> judgementOfPrincipals(Criterion criterion, const Strengths& strengths,
                                         const Demand& demand);

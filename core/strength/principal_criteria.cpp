@@ -9,22 +9,10 @@ namespace planewright {
 
 namespace {
 
-/// Principal stresses, greatest first.
-std::array<double, 3> principalsOf(const Demand& demand) {
-  const Circle circle = circleOf(demand.stress, demand.scale, demand.sz);
-  std::array<double, 3> s{circle.s1, circle.s2, demand.sz};
-  std::ranges::sort(s, std::greater());
-  return s;
-}
-
 Judgement proportional(double utilisation, Mode mode) {
   if (utilisation == 0)
     return {};
   return {utilisation, 1 / utilisation, mode};
-}
-
-double misesOf(const std::array<double, 3>& s) {
-  return std::hypot(s[0] - s[1], s[1] - s[2], s[2] - s[0]) / std::sqrt(2.0);
 }
 
 Result<Judgement> rankine(const Strengths& strengths, const std::array<double, 3>& s) {
@@ -60,6 +48,17 @@ Result<Judgement> mohrCoulomb(const Strengths& strengths, const std::array<doubl
 }
 
 } // namespace
+
+std::array<double, 3> principalsOf(const Demand& demand) {
+  const Circle circle = circleOf(demand.stress, demand.scale, demand.sz);
+  std::array<double, 3> s{circle.s1, circle.s2, demand.sz};
+  std::ranges::sort(s, std::greater());
+  return s;
+}
+
+double misesOf(const std::array<double, 3>& s) {
+  return std::hypot(s[0] - s[1], s[1] - s[2], s[2] - s[0]) / std::sqrt(2.0);
+}
 
 Result<Judgement> judgementOfPrincipals(Criterion criterion, const Strengths& strengths,
                                         const Demand& demand) {

@@ -2,6 +2,7 @@
 #include "core/study/working_of_state.h"
 
 #include "core/study/stress_form.h"
+#include "core/study/stress_formulas.h"
 
 namespace planewright {
 
@@ -16,18 +17,6 @@ const Formula radius = Formula::symbol("r");
 const Formula s1 = Formula::symbol("σ_{1}");
 const Formula s2 = Formula::symbol("σ_{2}");
 const Formula theta1 = Formula::symbol("θ_{1}");
-
-/// sn on the plane with normal at `angle`; `turned` +1 for that plane, -1 for the one at right angles to it.
-Formula normalStress(const Formula& angle, int turned = 1) {
-  const Formula ofDifference = (sx - sy) / 2 * cosine(2 * angle);
-  const Formula ofShear = txy * sine(2 * angle);
-  const Formula half = (sx + sy) / 2;
-  return turned > 0 ? half + ofDifference + ofShear : half - ofDifference - ofShear;
-}
-
-Formula shearStress(const Formula& angle) {
-  return -((sx - sy) / 2 * sine(2 * angle)) + txy * cosine(2 * angle);
-}
 
 /// The same angle of a normal where the formula leaves (-90, 90] deg.
 Formula foldedOnce(const Formula& formula, const NumbersPutIn& numbers) {
@@ -118,19 +107,19 @@ private:
   void addPlane(Text normalName, Text shearName, NormalAngle normal, const Traction& traction) {
     const Formula theta = Formula::symbol("θ");
     const NumbersPutIn numbers = givenWith(theta, normal.value);
-    addStress(std::move(normalName), "σ_{n}", normalStress(theta), numbers, traction.sn);
-    addStress(std::move(shearName), "τ_{nt}", shearStress(theta), numbers, traction.tnt);
+    addStress(std::move(normalName), "σ_{n}", normalStressAt(theta), numbers, traction.sn);
+    addStress(std::move(shearName), "τ_{nt}", shearStressAt(theta), numbers, traction.tnt);
   }
 
   void addLine(const LineReading& line, const LineStress& stresses) {
     const Formula phi = Formula::symbol("φ");
     const NumbersPutIn numbers = givenWith(phi, line.angle.value);
-    addStress(PW_TEXT("Working", "stress along the %1").with(line.name), "σ_{φ}", normalStress(phi), numbers,
-              stresses.along);
-    addStress(PW_TEXT("Working", "stress across the %1").with(line.name), "σ_{φ+90°}", normalStress(phi, -1),
-              numbers, stresses.across);
+    addStress(PW_TEXT("Working", "stress along the %1").with(line.name), "σ_{φ}", normalStressAt(phi),
+              numbers, stresses.along);
+    addStress(PW_TEXT("Working", "stress across the %1").with(line.name), "σ_{φ+90°}",
+              normalStressAt(phi, -1), numbers, stresses.across);
     addStress(PW_TEXT("Working", "shear on the cut that crosses the %1").with(line.name), "τ_{φ}",
-              shearStress(phi), numbers, stresses.shear);
+              shearStressAt(phi), numbers, stresses.shear);
   }
 
   StressForm m_form;
