@@ -2,6 +2,7 @@
 #include "app/figure_command.h"
 
 #include "app/help.h"
+#include "app/naming.h"
 #include "app/offscreen.h"
 #include "app/study_source.h"
 #include "core/figure/figure.h"
@@ -42,21 +43,13 @@ struct Wanted {
   FigureOrder order;
 };
 
-std::string lowered(std::string word) {
-  for (char& letter : word)
-    if (letter >= 'A' && letter <= 'Z')
-      letter = static_cast<char>(letter - 'A' + 'a');
-  return word;
-}
-
 /// By the ending of the file's name; standard output takes SVG.
 Result<PictureKind> kindOf(const std::string& file) {
-  const std::string name = lowered(file);
-  if (name == "-" || name.ends_with(".svg"))
+  if (file == "-" || hasEnding(file, ".svg"))
     return PictureKind::svg;
-  if (name.ends_with(".pdf"))
+  if (hasEnding(file, ".pdf"))
     return PictureKind::pdf;
-  if (name.ends_with(".png"))
+  if (hasEnding(file, ".png"))
     return PictureKind::png;
   return tl::unexpected(Problem{"-o", 0, 0, file,
                                 PW_TEXT("Command", "The ending of “%1” names no kind of picture.").with(file),
@@ -128,18 +121,6 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   if (auto problem = readDpi(arguments, wanted))
     return tl::unexpected(*std::move(problem));
   return wanted;
-}
-
-Problem unknownName(const char* option, const std::string& name, const std::vector<std::string>& names) {
-  std::string list;
-  for (const std::string& one : names)
-    list += (list.empty() ? "“" : ", “") + one + "”";
-  return {option,
-          0,
-          0,
-          name,
-          PW_TEXT("Command", "The study has no “%1”.").with(name),
-          PW_TEXT("Command", "It has: %1.").with(list)};
 }
 
 /// The readout of the point and combination that the options name, else of those that the study shows.

@@ -12,6 +12,8 @@ std::string programHelp() {
 planewright [STUDY]            opens the window, with a study or with a figure that carries one
 planewright resolve ...        prints everything that follows from a study or from three components
 planewright figure STUDY ...   writes the labelled figure as SVG, PDF or PNG
+planewright sheet STUDY ...    writes the calculation sheet as PDF or HTML
+planewright compare A B        tells what changed from one study to another
 planewright validate           recomputes every published value that is shipped with it
 planewright COMMAND --help     explains a command
 planewright --version          prints the version
@@ -19,7 +21,7 @@ planewright --version          prints the version
 A first word that is a command is a command: write ./figure for a file of that name.
 Commands need no display. “-” is standard input or output.
 
-Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font); 5 a self-check disagreed (validate).
+Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font); 5 a self-check disagreed (validate, sheet).
 
 An aid to a licensed engineer: it looks at one point in plane stress. It sees no volume, size, moisture,
 duration, edge, notch or third-direction effects. Local codes govern.
@@ -56,13 +58,25 @@ planewright resolve --sx "80 MPa" --sy "20 MPa" --txy "-30 MPa" --normal "25 deg
 )help"));
 }
 
+std::string compareHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright compare EARLIER LATER [-o FILE]
+
+Tells what changed from one study to another: everything typed that differs, and the results that differ.
+
+-o FILE   writes there; "-" or nothing is standard output
+
+planewright compare beam-A.planewright beam-B.planewright
+)help"));
+}
+
 std::string validateHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright validate [-o FILE]
+  return plain(PW_TEXT("Help", R"help(planewright validate [-o FILE|FILE.html|FILE.pdf]
 
 Recomputes every published value that the program carries and prints it beside the computed one, with its source,
 its place there and how far it can be trusted. Exit code 5 where one disagrees.
 
--o FILE   writes there; "-" or nothing is standard output
+-o FILE   writes there, as a report where the name ends with .html or .pdf, else as text; "-" or nothing is
+          standard output
 )help"));
 }
 
@@ -84,6 +98,27 @@ Without that option the whole study, with all its points and notes, travels insi
 figure brings it back. A STUDY may be such a figure, here and in resolve.
 
 planewright figure beam.planewright -o beam.pdf --width 90
+)help"));
+}
+
+std::string sheetHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright sheet STUDY -o FILE.pdf|.html [options]
+
+Writes the calculation sheet: what governs, everything as typed, the working, the checks, a second route through
+the program, conclusion and lines to sign.
+
+-o FILE                        the ending says the kind; "-" is standard output, as HTML
+--point NAME                   only this point; may be repeated; without it, all
+--depth results|governing|all  how much of the working: none, of the governing combination of each point (without
+                               the option), of every combination
+--paper A4|Letter              of a PDF; A4 without it
+--without-figures              no element and circle
+--without-study                the file does not carry the study
+--since STUDY                  adds what changed since that revision
+
+Exit code 5 where the two routes disagree; the sheet says so at its top.
+
+planewright sheet beam.planewright -o beam-sheet.pdf --point "P1"
 )help"));
 }
 

@@ -10,6 +10,8 @@ std::string programHelp();
 std::string programVersionLines();
 std::string resolveHelp();
 std::string figureHelp();
+std::string sheetHelp();
+std::string compareHelp();
 std::string validateHelp();
 
 } // namespace planewright

@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/compare_command.h"
 #include "app/figure_command.h"
 #include "app/help.h"
 #include "app/resolve_command.h"
+#include "app/sheet_command.h"
 #include "app/validate_command.h"
 #include "app/window_command.h"
 #include "ui/files/file_bytes.h"
@@ -33,13 +35,13 @@ Outcome<Delivery> alone(std::string text, Words rest) {
 }
 
 Problem unknownWord(const std::string& word) {
-  return {
-      "",
-      0,
-      0,
-      word,
-      PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
-      PW_TEXT("Command", "The commands are resolve, figure and validate; planewright --help explains them.")};
+  return {"",
+          0,
+          0,
+          word,
+          PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
+          PW_TEXT("Command", "The commands are resolve, figure, sheet, compare and validate; planewright "
+                             "--help explains them.")};
 }
 
 Outcome<Delivery> commanded(Words words) {
@@ -49,6 +51,10 @@ Outcome<Delivery> commanded(Words words) {
     return resolved(rest);
   if (first == "figure")
     return drawnFigure(rest);
+  if (first == "sheet")
+    return writtenSheet(rest);
+  if (first == "compare")
+    return comparedStudies(rest);
   if (first == "validate")
     return validated(rest);
   if (first == "--help")

@@ -2,12 +2,34 @@
 #include "app/validate_command.h"
 
 #include "app/help.h"
+#include "app/naming.h"
+#include "app/offscreen.h"
 #include "core/evidence/evidence_text.h"
 #include "core/quantity/format.h"
+#include "core/report/evidence_sheet.h"
+#include "core/report/sheet_html.h"
+#include "core/report/sheet_pages.h"
+#include "ui/files/platform_name.h"
+#include "ui/paint/export.h"
 
 #include <array>
 
 namespace planewright {
+
+namespace {
+
+/// By the ending of the file's name; text for any other.
+Outcome<std::string> reportOf(const std::vector<CheckResult>& checks, const std::string& file) {
+  const auto sheet = [&] { return evidenceSheet(checks, platformName()); };
+  if (hasEnding(file, ".html") || hasEnding(file, ".htm"))
+    return sheetHtml(sheet());
+  if (!hasEnding(file, ".pdf"))
+    return evidenceText(checks);
+  const std::vector<Picture> pages = pagesOf(sheet(), Paper::a4);
+  return paintedOffscreen([&] { return pdfOfPages(pages, Palette::paper); });
+}
+
+} // namespace
 
 Outcome<Delivery> validated(std::span<const std::string> words) {
   constexpr std::array known = {OptionRow{"-o"}};
@@ -22,7 +44,10 @@ Outcome<Delivery> validated(std::span<const std::string> words) {
   const Results<std::vector<CheckResult>> checks = publishedChecks();
   if (!checks)
     return tl::unexpected(Failure{Exit::disagrees, checks.error()});
-  Delivery delivery{evidenceText(*checks), *file};
+  Outcome<std::string> bytes = reportOf(*checks, *file);
+  if (!bytes)
+    return tl::unexpected(std::move(bytes).error());
+  Delivery delivery{*std::move(bytes), *file};
   const EvidenceCount count = countOf(*checks);
   if (count.disagreeing > 0) {
     delivery.exit = Exit::disagrees;

@@ -49,6 +49,9 @@ struct ShippedChecks {
 /// The shipped files in the order in which they are reported.
 std::span<const ShippedChecks> shippedChecks();
 
+/// The shipped list of misprints, its heading first.
+std::span<const std::string_view> shippedMisprints();
+
 /// The shipped checks of all files, recomputed.
 Results<std::vector<CheckResult>> publishedChecks();
 

@@ -1,9 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/svg.h"
 
-#include "core/figure/characters.h"
 #include "core/figure/metrics.h"
 #include "core/quantity/angle.h"
+#include "core/words/markup.h"
 
 #include <array>
 #include <cassert>
@@ -33,47 +33,6 @@ std::string colour(Role role, Palette palette) {
   std::string result = "#";
   for (int shift = 20; shift >= 0; shift -= 4)
     result += hex[(rgb >> shift) & 0xF];
-  return result;
-}
-
-bool allowed(char32_t code) {
-  return code == 0x9 || code == 0xA || code == 0xD ||
-         (code >= 0x20 && !(code >= 0x7F && code < 0xA0) && code != 0xFFFE && code != 0xFFFF);
-}
-
-std::string escaped(std::string_view text) {
-  std::string result;
-  for (const Character& character : charactersOf(text)) {
-    if (!allowed(character.code))
-      continue;
-    switch (character.code) {
-    case '&':
-      result += "&amp;";
-      break;
-    case '<':
-      result += "&lt;";
-      break;
-    case '>':
-      result += "&gt;";
-      break;
-    case '"':
-      result += "&quot;";
-      break;
-    case '\'':
-      result += "&apos;";
-      break;
-    case '\t':
-    case '\n':
-    case '\r':
-      result += ' ';
-      break;
-    case 0xFFFD:
-      result += "\uFFFD";
-      break;
-    default:
-      result += character.bytes;
-    }
-  }
   return result;
 }
 
@@ -162,7 +121,7 @@ private:
       const double shift = (run.lowered ? loweredDrop : 0) - (down ? loweredDrop : 0);
       down = run.lowered;
       if (!run.lowered && shift == 0) {
-        result += escaped(run.text);
+        result += markupOf(run.text);
         continue;
       }
       result += "<tspan";
@@ -170,7 +129,7 @@ private:
         result += attribute("font-size", loweredSize * label.size);
       if (shift != 0)
         result += attribute("dy", shift * label.size);
-      result += ">" + escaped(run.text) + "</tspan>";
+      result += ">" + markupOf(run.text) + "</tspan>";
     }
     return result;
   }
@@ -190,8 +149,8 @@ std::string svgOf(const Picture& picture, Palette palette) {
       attribute("viewBox", "0 0 " + width + " " + height) +
       attribute("font-family", "Liberation Sans, Arial, Helvetica, sans-serif") +
       attribute("font-kerning", "none") + attribute("xml:space", "preserve") + ">\n";
-  result += "<title>" + escaped(picture.title) + "</title>\n";
-  result += "<desc>" + escaped(picture.description) + "</desc>\n";
+  result += "<title>" + markupOf(picture.title) + "</title>\n";
+  result += "<desc>" + markupOf(picture.description) + "</desc>\n";
   result += "<rect" + attribute("width", width) + attribute("height", height) +
             attribute("fill", colour(Role::canvas, palette)) + "/>\n";
   for (const auto& part : picture.parts)

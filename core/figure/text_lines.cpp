@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/text_lines.h"
 
-#include "core/figure/characters.h"
 #include "core/figure/metrics.h"
+#include "core/words/characters.h"
 
 #include <cstddef>
 #include <optional>

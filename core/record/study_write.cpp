@@ -15,6 +15,16 @@ void putTextsAs(JsonWriter& json, std::string_view key, const Thing& thing) {
   json.endObject();
 }
 
+/// What a name was given for stands only where it was given.
+void put(JsonWriter& json, const Title& title) {
+  json.key("title").beginObject();
+  for (const TextField<Title>& field : textFieldsOf<Title>())
+    if (const bool isState = field.spot == Spot::titlePreparedFor || field.spot == Spot::titleCheckedFor;
+        !isState || !(title.*field.text).empty())
+      json.key(rowOf(field.spot).key()).text(title.*field.text);
+  json.endObject();
+}
+
 void put(JsonWriter& json, const Convention& convention) {
   json.key("convention").beginObject();
   put(json, "positive", wordOf(convention.positive));
@@ -164,7 +174,7 @@ std::string writeStudy(const Study& study) {
   json.beginObject();
   put(json, "format", studyFormat);
   json.key("version").whole(studyFileVersion);
-  putTextsAs(json, "title", study.title);
+  put(json, study.title);
   putTextsAs(json, "units", study.units);
   put(json, study.convention);
   put(json, "cases", study.cases);

@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/strength/judgement.h"
+#include "core/working/recoverable.h"
 
 #include <algorithm>
 #include <cmath>
@@ -29,7 +30,7 @@ void addFinite(std::vector<Step>& steps, Step step) {
       std::isfinite(step.result) &&
       std::ranges::all_of(step.putIn, [](const NumberPutIn& one) { return std::isfinite(one.value); });
   if (isFinite)
-    steps.push_back(withEnoughDigits(std::move(step)));
+    steps.push_back(recoverable(std::move(step)));
 }
 
 } // namespace

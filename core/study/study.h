@@ -7,9 +7,11 @@
 
 namespace planewright {
 
-/// The title block, all free text.
+/// The title block, all free text. `preparedFor` and `checkedFor` are the fingerprints of the study at which
+/// the names were given.
 struct Title {
-  std::string project, subject, number, revision, prepared, checked, date, notes;
+  std::string project, subject, number, revision, prepared, preparedFor, checked, checkedFor, date, purpose,
+      notes;
   bool operator==(const Title&) const = default;
 };
 

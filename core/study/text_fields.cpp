@@ -10,8 +10,10 @@ const std::vector<TextField<Title>>& textFieldsOf() {
   static const std::vector<TextField<Title>> fields = {
       {Spot::titleProject, &Title::project},   {Spot::titleSubject, &Title::subject},
       {Spot::titleNumber, &Title::number},     {Spot::titleRevision, &Title::revision},
-      {Spot::titlePrepared, &Title::prepared}, {Spot::titleChecked, &Title::checked},
-      {Spot::titleDate, &Title::date},         {Spot::titleNotes, &Title::notes}};
+      {Spot::titlePrepared, &Title::prepared}, {Spot::titlePreparedFor, &Title::preparedFor},
+      {Spot::titleChecked, &Title::checked},   {Spot::titleCheckedFor, &Title::checkedFor},
+      {Spot::titleDate, &Title::date},         {Spot::titlePurpose, &Title::purpose},
+      {Spot::titleNotes, &Title::notes}};
   return fields;
 }
 

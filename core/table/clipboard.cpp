@@ -2,6 +2,7 @@
 #include "core/table/table.h"
 
 #include "core/quantity/format.h"
+#include "core/words/markup.h"
 
 #include <algorithm>
 
@@ -21,28 +22,6 @@ std::string inOneCell(std::string words) {
   std::ranges::replace_if(
       words, [](char c) { return c == '\t' || c == '\n' || c == '\r'; }, ' ');
   return words;
-}
-
-std::string escapedHtml(const std::string& words) {
-  std::string result;
-  for (const char c : words) {
-    if (c == '&')
-      result += "&amp;";
-    else if (c == '<')
-      result += "&lt;";
-    else if (c == '>')
-      result += "&gt;";
-    else
-      result += c;
-  }
-  return result;
-}
-
-std::string htmlRuns(const Text& text, const Translate& translate) {
-  std::string result;
-  for (const Run& run : runs(text, translate))
-    result += run.lowered ? "<sub>" + escapedHtml(run.text) + "</sub>" : escapedHtml(run.text);
-  return result;
 }
 
 std::string htmlCell(const char* tag, bool isNumber, const std::string& content) {
@@ -71,19 +50,19 @@ std::string tabSeparated(const Table& table, const Translate& translate) {
 std::string html(const Table& table, const Translate& translate) {
   std::string result = "<table><tr>";
   for (const Column& column : table.columns) {
-    const std::string unit = column.unit.empty() ? "" : " (" + escapedHtml(column.unit) + ")";
-    result += htmlCell("th", column.isNumber, htmlRuns(column.heading, translate) + unit);
+    const std::string unit = column.unit.empty() ? "" : " (" + markupOf(column.unit) + ")";
+    result += htmlCell("th", column.isNumber, markupOf(column.heading, translate) + unit);
   }
   result += "</tr>\n";
   for (const Row& row : table.rows) {
     result += "<tr>";
     for (std::size_t i = 0; i < row.cells.size(); ++i)
-      result += htmlCell("td", table.columns[i].isNumber, htmlRuns(row.cells[i].shown, translate));
+      result += htmlCell("td", table.columns[i].isNumber, markupOf(row.cells[i].shown, translate));
     result += "</tr>\n";
   }
   result += "</table>\n";
   for (const Text& caution : table.cautions)
-    result += "<p>" + htmlRuns(caution, translate) + "</p>\n";
+    result += "<p>" + markupOf(caution, translate) + "</p>\n";
   return result;
 }
 

@@ -19,10 +19,6 @@ struct Step {
   double scale = 1;   ///< of one `unit`, in the unit of `result`
 };
 
-/// The step with more decimals of the numbers put in, up to six, where the formula does not give the result
-/// from them as they are written: to half of the last decimal shown.
-Step withEnoughDigits(Step step);
-
 /// "12.34 MPa", "−22.50°".
 std::string shownResult(const Step& step);
 /// "σ_{m} = (σ_{x} + σ_{y})/2 = (8.40 + (−0.60))/2 = 3.90 MPa".

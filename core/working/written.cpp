@@ -1,152 +1,55 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/working/written.h"
 
-#include "core/quantity/format.h"
-
-#include <algorithm>
-#include <array>
-#include <cassert>
+#include "core/working/formula_walk.h"
 
 namespace planewright {
 
 namespace {
 
-using Operation = Formula::Operation;
+/// A Medium of FormulaWalk: one line of text.
+struct OneLine {
+  using Piece = std::string;
+  using Held = HeldPiece<Piece>;
 
-/// How tightly the last operation of a line holds its parts together.
-enum class Hold { sum, product, power, atom };
-
-struct Line {
-  std::string words;
-  Hold hold = Hold::atom;
+  static Piece words(const std::string& text) { return text; }
+  static Piece joined(const std::vector<Piece>& pieces) {
+    Piece all;
+    for (const Piece& piece : pieces)
+      all += piece;
+    return all;
+  }
+  static Piece inParentheses(const Piece& piece) { return "(" + piece + ")"; }
+  static Piece betweenBars(const Piece& piece) { return "|" + piece + "|"; }
+  static Piece sign(const std::string& text) { return " " + text + " "; }
+  static Piece root(const Piece& piece) { return "√(" + piece + ")"; }
+  static Held quotient(const Held& a, const Held& b) {
+    const auto held = [](const Held& part, Hold least) {
+      return part.hold < least ? inParentheses(part.piece) : part.piece;
+    };
+    return {held(a, Hold::product) + "/" + held(b, Hold::power), Hold::product};
+  }
+  /// `base` holds together; an exponent that is no single number or symbol needs parentheses.
+  static Piece power(const Piece& base, const Held& exponent) {
+    if (exponent.piece == "2" || exponent.piece == "3")
+      return base + (exponent.piece == "2" ? "²" : "³");
+    return base + "^" + (exponent.hold < Hold::atom ? inParentheses(exponent.piece) : exponent.piece);
+  }
 };
 
-/// In parentheses where the line would fall apart beside what stands next to it.
-std::string held(const Line& line, Hold least) {
-  return line.hold < least ? "(" + line.words + ")" : line.words;
+std::string lineOf(const Formula& formula, const NumbersPutIn* numbers) {
+  const OneLine medium;
+  return FormulaWalk<OneLine>(medium, numbers).piece(formula).piece;
 }
-
-Line ofNumber(const std::string& shown) {
-  return {shown, shown.starts_with("−") ? Hold::sum : Hold::atom};
-}
-
-std::string constant(double value) {
-  const std::string digits = exactNumber(value);
-  return value < 0 ? "−" + digits.substr(1) : digits;
-}
-
-/// Writes a formula; without numbers symbols stand as they are.
-class Writer {
-public:
-  explicit Writer(const NumbersPutIn* numbers) : m_numbers(numbers) {}
-
-  Line line(const Formula& formula) const {
-    switch (formula.operation()) {
-    case Operation::number:
-      return ofNumber(constant(formula.number()));
-    case Operation::angle:
-      return ofNumber(constant(formula.number()) + "°");
-    case Operation::symbol:
-      return ofSymbol(formula.symbol());
-    case Operation::power:
-      return ofPower(line(formula.parts()[0]), line(formula.parts()[1]));
-    case Operation::hypotenuse:
-      return {"√(" + ofPower(line(formula.parts()[0]), {"2"}).words + " + " +
-              ofPower(line(formula.parts()[1]), {"2"}).words + ")"};
-    case Operation::absolute:
-      return {"|" + line(formula.parts()[0]).words + "|"};
-    default:
-      return formula.parts().size() == 2 ? ofTwo(formula) : ofCall(formula);
-    }
-  }
-
-private:
-  Line ofSymbol(const std::string& symbol) const {
-    if (!m_numbers)
-      return {symbol};
-    const auto row = std::ranges::find(*m_numbers, symbol, &NumberPutIn::symbol);
-    assert(row != m_numbers->end());
-    if (row->isAngle)
-      return ofNumber(shownDegrees(Angle::fromDegrees(row->value), row->decimals));
-    Line line = ofNumber(shownNumber(row->value / row->scale, row->decimals));
-    if (row->unit.empty())
-      return line;
-    // A number with its unit is a product of the two.
-    return {line.words + " " + row->unit, std::min(line.hold, Hold::product)};
-  }
-
-  static Line ofPower(const Line& base, const Line& exponent) {
-    if (exponent.words == "2" || exponent.words == "3")
-      return {held(base, Hold::atom) + (exponent.words == "2" ? "²" : "³"), Hold::power};
-    return {held(base, Hold::atom) + "^" + held(exponent, Hold::atom), Hold::power};
-  }
-
-  Line ofTwo(const Formula& formula) const {
-    const Line a = line(formula.parts()[0]);
-    const Line b = line(formula.parts()[1]);
-    switch (formula.operation()) {
-    case Operation::sum:
-      return {held(a, Hold::sum) + " + " + held(b, Hold::product), Hold::sum};
-    case Operation::difference:
-      return {held(a, Hold::sum) + " − " + held(b, Hold::product), Hold::sum};
-    case Operation::product:
-      return {held(a, Hold::product) + productSign(formula) + held(b, Hold::product), Hold::product};
-    case Operation::quotient:
-      return {held(a, Hold::product) + "/" + held(b, Hold::power), Hold::product};
-    default:
-      return ofCall(formula);
-    }
-  }
-
-  /// A number before a symbol needs no sign: 2θ.
-  const char* productSign(const Formula& product) const {
-    const bool joined = !m_numbers && product.parts()[0].operation() == Operation::number &&
-                        product.parts()[1].operation() == Operation::symbol;
-    return joined ? "" : " · ";
-  }
-
-  Line ofCall(const Formula& formula) const {
-    if (formula.operation() == Operation::negative)
-      return {"−" + held(line(formula.parts()[0]), Hold::product), Hold::sum};
-    std::string arguments;
-    for (const Formula& part : formula.parts())
-      arguments += (arguments.empty() ? "" : ", ") + line(part).words;
-    return {nameOf(formula.operation()) + "(" + arguments + ")"};
-  }
-
-  static std::string nameOf(Operation operation) {
-    switch (operation) {
-    case Operation::root:
-      return "√";
-    case Operation::cosine:
-      return "cos";
-    case Operation::sine:
-      return "sin";
-    case Operation::tangent:
-      return "tan";
-    case Operation::arcTangent:
-      return "atan2";
-    case Operation::greatest:
-      return "max";
-    case Operation::least:
-      return "min";
-    default:
-      assert(false && "no call");
-      return {};
-    }
-  }
-
-  const NumbersPutIn* m_numbers;
-};
 
 } // namespace
 
 Text written(const Formula& formula) {
-  return symbol(Writer(nullptr).line(formula).words);
+  return symbol(lineOf(formula, nullptr));
 }
 
 Text written(const Formula& formula, const NumbersPutIn& numbers) {
-  return symbol(Writer(&numbers).line(formula).words);
+  return symbol(lineOf(formula, &numbers));
 }
 
 } // namespace planewright

@@ -78,8 +78,10 @@ inline string anyLineAngleText() {
 }
 
 inline Title anyTitle() {
-  return {anyFreeText(), anyFreeText(), anyFreeText(), anyFreeText(),
-          anyFreeText(), anyFreeText(), anyFreeText(), anyFreeText()};
+  Title title;
+  for (const TextField<Title>& field : textFieldsOf<Title>())
+    title.*field.text = anyFreeText();
+  return title;
 }
 
 inline Units anyUnits() {

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/desk/desk.h"
 
+#include "core/record/fingerprint.h"
+
 #include <QUndoCommand>
 
 namespace planewright {
@@ -55,7 +57,7 @@ Gesture Desk::newCommand() {
 }
 
 std::optional<Problem> Desk::request(const Edits& edits, Gesture gesture, const QString& what) {
-  Result<Study> after = edited(*m_study, edits);
+  Result<Study> after = editedAndSigned(*m_study, edits);
   if (!after)
     return std::move(after).error();
   if (*after != *m_study) {

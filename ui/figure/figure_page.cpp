@@ -4,10 +4,10 @@
 #include "ui/look/font.h"
 #include "ui/look/look.h"
 #include "ui/paint/painter.h"
+#include "ui/paint/true_scale.h"
 
 #include <QPaintEvent>
 #include <QPainter>
-#include <QScreen>
 
 #include <algorithm>
 #include <cmath>
@@ -16,7 +16,6 @@ namespace planewright {
 
 namespace {
 
-constexpr double mmPerInch = 25.4;
 constexpr double textColumn = 170; ///< mm of text on an A4 page with margins of 25 and 15
 constexpr double aroundFigure = 5; ///< mm of the column round the figure at least
 constexpr double ruleHeight = 26;  ///< pixels, and the ground round the column
@@ -50,15 +49,6 @@ void FigurePage::setZoom(Zoom zoom) {
   update();
 }
 
-/// A screen that does not know its size says something absurd; then Qt's usual resolution stands.
-double FigurePage::trueScale() const {
-  constexpr double least = 60;
-  constexpr double greatest = 400;
-  const double stated = screen()->physicalDotsPerInchX();
-  const double dpi = stated >= least && stated <= greatest ? stated : logicalDpiX();
-  return dpi / mmPerInch;
-}
-
 double FigurePage::columnWidth() const {
   return std::max(textColumn, (m_picture ? m_picture->width : 0) + 2 * aroundFigure);
 }
@@ -69,7 +59,7 @@ QSizeF FigurePage::sheet() const {
 
 double FigurePage::pixelsPerMm() const {
   if (m_zoom == Zoom::trueSize)
-    return trueScale();
+    return truePixelsPerMm(*this);
   const double across = (width() - 2 * ground) / sheet().width();
   const double down = (height() - ruleHeight - 2 * ground) / sheet().height();
   return std::max(0.1, std::min(across, down));
@@ -90,7 +80,7 @@ QRectF FigurePage::figureRect() const {
 }
 
 QSize FigurePage::sizeHint() const {
-  const QSizeF size = sheet() * trueScale();
+  const QSizeF size = sheet() * truePixelsPerMm(*this);
   return {static_cast<int>(std::ceil(size.width() + 2 * ground)),
           static_cast<int>(std::ceil(size.height() + ruleHeight + 2 * ground))};
 }

@@ -34,7 +34,6 @@ protected:
   void paintEvent(QPaintEvent* event) override;
 
 private:
-  double trueScale() const;
   double columnWidth() const;
   QSizeF sheet() const;
   QRectF columnRect() const;

@@ -58,18 +58,20 @@ QSize pageOf(const Picture& picture) {
           static_cast<int>(std::ceil(picture.height * pointsPerMm))};
 }
 
-/// Gives the page its true size, the top left corner unmoved, in as many bytes as before: no offset in the
-/// file moves.
-void trimPage(QByteArray& pdf, const Picture& picture) {
+/// Gives each page its true size, the top left corner unmoved, in as many bytes as before: no offset in the
+/// file moves. All pages have the size of the picture.
+void trimPages(QByteArray& pdf, const Picture& picture) {
   const QByteArray key = "/MediaBox [";
-  const qsizetype start = pdf.indexOf(key) + key.size();
-  const qsizetype length = pdf.indexOf(']', start) - start;
   const int top = pageOf(picture).height();
   const QByteArray box = "0 " + QByteArray::number(top - picture.height * pointsPerMm, 'f', 4) + ' ' +
                          QByteArray::number(picture.width * pointsPerMm, 'f', 4) + ' ' +
                          QByteArray::number(top);
-  if (start >= key.size() && box.size() <= length)
-    pdf.replace(start, length, box.leftJustified(length));
+  for (qsizetype at = pdf.indexOf(key); at >= 0; at = pdf.indexOf(key, at)) {
+    at += key.size();
+    const qsizetype length = pdf.indexOf(']', at) - at;
+    if (box.size() <= length)
+      pdf.replace(at, length, box.leftJustified(length));
+  }
 }
 
 } // namespace
@@ -107,42 +109,77 @@ Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi, std::
 }
 
 Result<QByteArray> pdfOf(const Picture& picture, Palette palette, std::string_view study) {
+  return pdfOfPages({picture}, palette, study);
+}
+
+Result<QByteArray> pdfOfPages(const std::vector<Picture>& pages, Palette palette, std::string_view study) {
   const Result<std::string> metadata = study.empty() ? std::string() : xmpWithStudy(study);
   if (!metadata)
     return tl::unexpected(metadata.error());
+  const Picture& first = pages.front();
   QByteArray bytes;
   QBuffer buffer(&bytes);
   if (!buffer.open(QIODevice::WriteOnly))
     return tl::unexpected(paintProblem());
   {
     QPdfWriter writer(&buffer);
-    writer.setTitle(fromUtf8(picture.title));
+    writer.setTitle(fromUtf8(first.title));
     writer.setCreator(creator());
     writer.setDocumentXmpMetadata(QByteArray::fromStdString(*metadata));
     writer.setResolution(pdfResolution);
-    const QPageSize page(pageOf(picture), QString(), QPageSize::ExactMatch);
+    const QPageSize page(pageOf(first), QString(), QPageSize::ExactMatch);
     writer.setPageLayout(QPageLayout(page, QPageLayout::Portrait, QMarginsF()));
     QPainter painter;
     if (!painter.begin(&writer))
       return tl::unexpected(paintProblem());
     painter.scale(pdfResolution / mmPerInch, pdfResolution / mmPerInch);
-    paintPicture(painter, picture, palette);
+    for (const Picture& one : pages) {
+      if (&one != &first && !writer.newPage())
+        return tl::unexpected(paintProblem());
+      paintPicture(painter, one, palette);
+    }
   }
-  trimPage(bytes, picture);
+  trimPages(bytes, first);
   return bytes;
 }
+
+namespace {
+
+Problem printerProblem(const QPrinter& printer) {
+  return {
+      printer.printerName().toStdString(),         0, 0, "", PW_TEXT("Export", "The printer did not start."),
+      PW_TEXT("Export", "Choose another printer.")};
+}
+
+} // namespace
 
 Result<double> printPicture(QPrinter& printer, const Picture& picture, Palette palette) {
   QPainter painter;
   if (!painter.begin(&printer))
-    return tl::unexpected(Problem{printer.printerName().toStdString(), 0, 0, "",
-                                  PW_TEXT("Export", "The printer did not start."),
-                                  PW_TEXT("Export", "Choose another printer.")});
+    return tl::unexpected(printerProblem(printer));
   const QSizeF room = printer.pageLayout().paintRect(QPageLayout::Millimeter).size();
   const double fit = std::min({1.0, room.width() / picture.width, room.height() / picture.height});
   painter.scale(fit * printer.logicalDpiX() / mmPerInch, fit * printer.logicalDpiY() / mmPerInch);
   paintPicture(painter, picture, palette);
   return fit;
+}
+
+Result<void> printPages(QPrinter& printer, const std::vector<Picture>& pages, Palette palette) {
+  printer.setFullPage(true);
+  QPainter painter;
+  if (!painter.begin(&printer))
+    return tl::unexpected(printerProblem(printer));
+  const QSizeF paper = printer.pageLayout().fullRect(QPageLayout::Millimeter).size();
+  for (const Picture& page : pages) {
+    if (&page != &pages.front() && !printer.newPage())
+      return tl::unexpected(printerProblem(printer));
+    const double fit = std::min({1.0, paper.width() / page.width, paper.height() / page.height});
+    painter.save();
+    painter.scale(fit * printer.logicalDpiX() / mmPerInch, fit * printer.logicalDpiY() / mmPerInch);
+    paintPicture(painter, page, palette);
+    painter.restore();
+  }
+  return {};
 }
 
 } // namespace planewright

@@ -22,8 +22,16 @@ Result<QByteArray> pngOf(const Picture& picture, Palette palette, int dpi, std::
 /// carries a study likewise, in its metadata.
 Result<QByteArray> pdfOf(const Picture& picture, Palette palette, std::string_view study = {});
 
+/// Pages of one size, at least one, as one PDF; it carries a study likewise.
+Result<QByteArray> pdfOfPages(const std::vector<Picture>& pages, Palette palette,
+                              std::string_view study = {});
+
 /// Prints the picture at true size at the top left of the printable page, made smaller only when it does not
 /// fit: gives the part of its true size, 1 or less. A Problem when the printer does not start.
 Result<double> printPicture(QPrinter& printer, const Picture& picture, Palette palette);
+
+/// Prints whole pages with their own margins, each on a sheet of paper, made smaller only where the printer
+/// cannot print to their size.
+Result<void> printPages(QPrinter& printer, const std::vector<Picture>& pages, Palette palette);
 
 } // namespace planewright

@@ -2,8 +2,8 @@
 #include "ui/paint/painter.h"
 
 #include "core/figure/advances.h"
-#include "core/figure/characters.h"
 #include "core/figure/metrics.h"
+#include "core/words/characters.h"
 #include "ui/look/font.h"
 #include "ui/look/look.h"
 

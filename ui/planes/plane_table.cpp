@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/planes/plane_table.h"
 
+#include "core/table/document_rows.h"
 #include "ui/look/look.h"
 #include "ui/planes/copied_table.h"
 #include "ui/planes/plane_delegate.h"
@@ -163,6 +164,14 @@ void PlaneTable::goFrom(const QModelIndex& index) {
 
 void PlaneTable::copyAll() {
   putOnClipboard(m_model.table());
+}
+
+void PlaneTable::copyMarkdown() {
+  QApplication::clipboard()->setText(fromUtf8(markdown(m_model.table(), translation())));
+}
+
+void PlaneTable::copyLatex() {
+  QApplication::clipboard()->setText(fromUtf8(latexRows(m_model.table(), translation())));
 }
 
 void PlaneTable::copySelected() {

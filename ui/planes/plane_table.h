@@ -22,6 +22,9 @@ public slots:
   /// Copies the selected cells, or all when at most one is selected that holds no number.
   void copySelected();
   void copyAll();
+  /// The same for documents written in Markdown and LaTeX.
+  void copyMarkdown();
+  void copyLatex();
 
 signals:
   void goTo(int row);

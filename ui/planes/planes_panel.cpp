@@ -95,8 +95,12 @@ void PlanesPanel::showAdopted() {
   m_tabs->setCurrentIndex(m_tabs->count() - 1);
 }
 
+PlaneTable& PlanesPanel::shownTable() const {
+  return m_pages->currentWidget() == m_sweep ? m_sweep->table() : m_planes->table();
+}
+
 void PlanesPanel::copyShown() {
-  (m_pages->currentIndex() == 0 ? m_planes->table() : m_sweep->table()).copyAll();
+  shownTable().copyAll();
 }
 
 } // namespace planewright

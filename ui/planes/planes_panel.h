@@ -11,6 +11,7 @@ class QStackedWidget;
 namespace planewright {
 
 class PlanesPage;
+class PlaneTable;
 class QuietButton;
 class QuietTabs;
 class SweepPage;
@@ -27,6 +28,9 @@ public:
   SweepPage& sweep() const { return *m_sweep; }
   QuietTabs& tabs() const { return *m_tabs; }
   QSize sizeHint() const override { return {830, 300}; }
+
+  /// The table of planes, or the sweep where that is shown.
+  PlaneTable& shownTable() const;
 
   /// Takes another page behind its own, under a tab of this title, and gives it back.
   void adopt(QWidget* page, const QString& title);

@@ -6,6 +6,7 @@
 #include "ui/figure/figure_dialog.h"
 #include "ui/given/given_panel.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/sheet/sheet_dialog.h"
 #include "ui/shell/appearance.h"
 #include "ui/shell/areas.h"
 #include "ui/shell/body.h"
@@ -154,9 +155,11 @@ void MainWindow::showFile(const QString& path) {
   showTitle();
   if (m_figure)
     m_figure->setStudyFile(path);
+  if (m_sheet)
+    m_sheet->setStudyFile(path);
   if (const QString figure = m_filing->restoredFrom(); !figure.isEmpty()) {
-    m_welcome->say(tr("Restored from the figure %1. The study is in no file of its own yet.")
-                       .arg(QFileInfo(figure).fileName()));
+    m_welcome->say(
+        tr("Restored from %1. The study is in no file of its own yet.").arg(QFileInfo(figure).fileName()));
     m_welcome->offer(tr("Save as…"), [this] {
       settleDrafts();
       m_filing->saveAs();

@@ -17,6 +17,7 @@ class Body;
 class CircleView;
 class ElementView;
 class FigureDialog;
+class SheetDialog;
 class GivenPanel;
 class HelpWindow;
 class MaterialsDialog;
@@ -62,6 +63,7 @@ public:
 
 public slots:
   void arrangeFigure();
+  void showSheet();
   /// The point with its drawings and tables; all points in one table.
   void showPointPage();
   void showSummary();
@@ -129,6 +131,7 @@ private:
   QMenu* m_recent = nullptr;
   int m_toldStep = 0; ///< where the undo stack stood when a step was last told
   QPointer<FigureDialog> m_figure;
+  QPointer<SheetDialog> m_sheet;
   QPointer<HelpWindow> m_help;
   QPointer<TitleDialog> m_title;
   QPointer<SlipDialog> m_slips;

@@ -5,6 +5,9 @@
 #include "ui/figure/figure_sharing.h"
 #include "ui/given/given_panel.h"
 #include "ui/look/look.h"
+#include "ui/planes/plane_table.h"
+#include "ui/planes/planes_panel.h"
+#include "ui/sheet/sheet_dialog.h"
 #include "ui/shell/appearance.h"
 #include "ui/shell/areas.h"
 #include "ui/shell/body.h"
@@ -77,6 +80,8 @@ void MainWindow::addFileMenu() {
   add(menu, tr("&Copy figure"), {}, [this] { copyFigureNow(); });
   add(menu, tr("&Print figure…"), QKeySequence::Print, [this] { printFigureNow(); });
   menu.addSeparator();
+  add(menu, tr("Calculation s&heet…"), Qt::CTRL | Qt::SHIFT | Qt::Key_E, [this] { showSheet(); });
+  menu.addSeparator();
   add(menu, tr("&Quit"), QKeySequence(Qt::CTRL | Qt::Key_Q), [this] { close(); });
 }
 
@@ -109,17 +114,23 @@ void MainWindow::addEditMenu() {
     settleDrafts();
     copyStresses(m_desk.study().points, tr("The stresses of all points are on the clipboard."));
   });
+  add(menu, tr("Copy table of planes as &Markdown"), {}, [this] {
+    settleDrafts();
+    m_planes->shownTable().copyMarkdown();
+    m_desk.say(tr("The table is on the clipboard, as Markdown."));
+  });
+  add(menu, tr("Copy table of planes as &LaTeX rows"), {}, [this] {
+    settleDrafts();
+    m_planes->shownTable().copyLatex();
+    m_desk.say(tr("The table is on the clipboard, as rows for LaTeX."));
+  });
+  menu.addSeparator();
   add(menu, tr("Paste ta&ble…"), Qt::CTRL | Qt::SHIFT | Qt::Key_V, [this] { pasteTable(); });
 }
 
 void MainWindow::addStudyMenu() {
   QMenu& menu = *menuBar()->addMenu(tr("&Study"));
-  add(menu, tr("&Title block…"), {}, [this] {
-    if (!m_title)
-      m_title = new TitleDialog(m_desk, this);
-    m_title->show();
-    m_title->raise();
-  });
+  add(menu, tr("&Title block…"), {}, [this] { bringUp(m_title); });
   add(menu, tr("&Stresses"), {}, [this] { m_given->focusFirst(); });
   add(menu, tr("&Units and conventions"), {}, [this] { m_given->focusConventions(); });
   menu.addSeparator();
@@ -237,6 +248,16 @@ void MainWindow::copyFromFocus() {
     return;
   QKeyEvent copy(QEvent::KeyPress, Qt::Key_C, Qt::ControlModifier);
   QApplication::sendEvent(focused, &copy);
+}
+
+void MainWindow::showSheet() {
+  settleDrafts();
+  if (!m_sheet) {
+    m_sheet = new SheetDialog(m_desk, this);
+    connect(m_sheet, &SheetDialog::titleAsked, this, [this] { bringUp(m_title); });
+    m_sheet->setStudyFile(m_filing->path());
+  }
+  bringUp(m_sheet);
 }
 
 void MainWindow::copyFigureNow() {

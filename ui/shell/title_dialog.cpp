@@ -4,6 +4,7 @@
 #include "ui/entry/draft_edit.h"
 #include "ui/entry/entry_field.h"
 #include "ui/look/look.h"
+#include "ui/shell/signing_line.h"
 
 #include <QDialogButtonBox>
 #include <QVBoxLayout>
@@ -34,12 +35,16 @@ TitleDialog::TitleDialog(Desk& desk, QWidget* parent) : QDialog(parent) {
   auto* rows = new QVBoxLayout(this);
   rows->addWidget(new EntryField(desk, nameOfPoint(),
                                  {PW_TEXT("TitleDialog", "point"), tr("name of the shown point")}, this));
-  for (const Spot spot : {Spot::titleProject, Spot::titleSubject, Spot::titleNumber, Spot::titleRevision,
-                          Spot::titlePrepared, Spot::titleChecked, Spot::titleDate, Spot::titleNotes})
+  for (const Spot spot :
+       {Spot::titleProject, Spot::titleSubject, Spot::titleNumber, Spot::titleRevision, Spot::titlePrepared,
+        Spot::titleChecked, Spot::titleDate, Spot::titlePurpose, Spot::titleNotes}) {
     rows->addWidget(new EntryField(desk, boundTo([spot](const Study&) {
                                      return Place{spot, {}, {}};
                                    }),
                                    {rowOf(spot).label, shown(rowOf(spot).label)}, this));
+    if (spot == Spot::titlePrepared || spot == Spot::titleChecked)
+      rows->addWidget(new SigningLine(desk, spot, this));
+  }
   auto* buttons = new QDialogButtonBox(QDialogButtonBox::Close, this);
   connect(buttons, &QDialogButtonBox::rejected, this, &QDialog::close);
   rows->addWidget(buttons);

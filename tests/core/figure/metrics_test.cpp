@@ -2,7 +2,7 @@
 #include "core/figure/metrics.h"
 
 #include "core/figure/advances.h"
-#include "core/figure/characters.h"
+#include "core/words/characters.h"
 
 #include <gtest/gtest.h>
 

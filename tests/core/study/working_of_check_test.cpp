@@ -259,7 +259,7 @@ void holdAgainstTheReading(const Readout& readout, const std::vector<Step>& step
 /// Formulas against the code of core/strength: within 1e-12, or 16 times what rounding of each operation of
 /// the formula can make of it.
 TEST(WorkingOfCheck, everyFormulaConfirmsTheJudgementOfEveryCriterionAndSign) {
-  constexpr int studiesOfEach = 3;
+  constexpr int studiesOfEach = 10;
   Met met;
   EXPECT_TRUE(rc::check([&] {
     for (const Named<Criterion>& row : namesOf<Criterion>())

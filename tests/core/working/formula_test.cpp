@@ -106,28 +106,6 @@ TEST(Step, theResultIsWrittenInItsUnit) {
   EXPECT_EQ(shownResult(step), "368.6 10⁶ mm⁴");
 }
 
-Step difference(double first, double second) {
-  const NumbersPutIn close = {{"a", first, 1, false}, {"b_{1}", second, 1, false}};
-  return {PW_TEXT("Test", "difference"), symbol("d"), a - b, close, first - second, 3, "MPa", {}};
-}
-
-TEST(Step, numbersThatCancelAreWrittenWithMoreDecimals) {
-  EXPECT_EQ(plain(written(withEnoughDigits(difference(5.12345678, 5.11111111)))),
-            "d = a − b1 = 5.123 − 5.111 = 0.012 MPa");
-  EXPECT_EQ(plain(written(withEnoughDigits(difference(5.12345678, 5.1)))),
-            "d = a − b1 = 5.123 − 5.1 = 0.023 MPa");
-}
-
-TEST(Step, numbersThatAreEnoughStayAsTheyAre) {
-  EXPECT_EQ(withEnoughDigits(difference(5.5, 5.1)).putIn, difference(5.5, 5.1).putIn);
-}
-
-TEST(Step, aResultThatDigitsCannotGiveStopsAskingForThem) {
-  const NumbersPutIn third = {{"a", 1.0 / 3, 1, false}};
-  const Step wrong{PW_TEXT("Test", "wrong"), symbol("w"), a, third, 5, 3, "MPa", {}};
-  EXPECT_EQ(withEnoughDigits(wrong).putIn[0].decimals, 7);
-}
-
 TEST(Step, isWrittenAsOneLine) {
   const Step step{PW_TEXT("Test", "mean"), symbol("σ_{m}"), (a + b) / 2, numbers, 0.5, 2, "MPa", {}};
   EXPECT_EQ(plain(written(step)), "σm = (a + b1)/2 = (−3.0 + 4.00)/2 = 0.50 MPa");

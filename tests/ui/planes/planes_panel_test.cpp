@@ -216,6 +216,13 @@ TEST_F(PlanesPanelTest, allIsCopiedAsTextAndAsATable) {
   EXPECT_EQ(QApplication::clipboard()->text().split('\n', Qt::SkipEmptyParts), lines);
 }
 
+TEST_F(PlanesPanelTest, theTableIsCopiedForDocuments) {
+  table.copyMarkdown();
+  EXPECT_TRUE(QApplication::clipboard()->text().startsWith(QStringLiteral("| Plane |")));
+  table.copyLatex();
+  EXPECT_TRUE(QApplication::clipboard()->text().contains(QStringLiteral("\\\\\n\\hline")));
+}
+
 TEST_F(PlanesPanelTest, tabLeavesTheTable) {
   press(Qt::Key_Tab);
   EXPECT_FALSE(table.hasFocus());

@@ -3,6 +3,7 @@
 
 #include "ui/entry/draft_edit.h"
 #include "ui/entry/entry_field.h"
+#include "ui/shell/signing_line.h"
 
 #include <QTest>
 
@@ -54,6 +55,19 @@ TEST_F(TitleDialogTest, followsTheShownPoint) {
   desk.show("P2", {});
   EXPECT_EQ(name.edit().text(), "P2");
   EXPECT_EQ(desk.study().points.front().name, "P1") << "what was not yet taken is dropped";
+}
+
+TEST_F(TitleDialogTest, saysWhetherANameWasGivenForTheStudyAsItIs) {
+  const auto lines = dialog.findChildren<SigningLine*>();
+  ASSERT_EQ(lines.size(), 2);
+  EXPECT_FALSE(lines[1]->isVisible());
+  desk.request({Type{{Spot::titleChecked, {}, {}}, "C. D."}}, desk.newCommand(), {});
+  EXPECT_TRUE(lines[1]->text().startsWith(QStringLiteral("Given for the study as it is")));
+  desk.request({Type{{Spot::sx, "P1", "G"}, "5 MPa"}}, desk.newCommand(), {});
+  EXPECT_TRUE(lines[1]->text().startsWith(QStringLiteral("The study changed since it was checked.")));
+  emit lines[1]->linkActivated(QStringLiteral("again"));
+  EXPECT_TRUE(lines[1]->text().startsWith(QStringLiteral("Given for the study as it is")));
+  EXPECT_FALSE(lines[0]->isVisible());
 }
 
 } // namespace

@@ -156,7 +156,7 @@ TEST_F(WindowTest, aDroppedFigureBringsItsStudyBackAndTheStripSaysSo) {
   drop(window.circle(), figure);
   EXPECT_EQ(window.desk().study(), study);
   EXPECT_TRUE(window.welcome().isVisible());
-  EXPECT_TRUE(window.welcome().sentence().startsWith(QStringLiteral("Restored from the figure beam.svg.")));
+  EXPECT_TRUE(window.welcome().sentence().startsWith(QStringLiteral("Restored from beam.svg.")));
   EXPECT_TRUE(window.windowTitle().startsWith(QStringLiteral("Study from beam.svg")));
   EXPECT_TRUE(window.isWindowModified());
   EXPECT_TRUE(recentFiles().isEmpty()) << "it is no study of its own";

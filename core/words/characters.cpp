@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/figure/characters.h"
+#include "core/words/characters.h"
 
 #include "core/words/utf8.h"
 

@@ -1,0 +1,26 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "app/naming.h"
+
+namespace planewright {
+
+bool hasEnding(const std::string& file, std::string_view ending) {
+  std::string lowered = file;
+  for (char& letter : lowered)
+    if (letter >= 'A' && letter <= 'Z')
+      letter = static_cast<char>(letter - 'A' + 'a');
+  return lowered.ends_with(ending);
+}
+
+Problem unknownName(const char* option, const std::string& name, const std::vector<std::string>& names) {
+  std::string list;
+  for (const std::string& one : names)
+    list += (list.empty() ? "“" : ", “") + one + "”";
+  return {option,
+          0,
+          0,
+          name,
+          PW_TEXT("Command", "The study has no “%1”.").with(name),
+          PW_TEXT("Command", "It has: %1.").with(list)};
+}
+
+} // namespace planewright

@@ -1,0 +1,30 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/words/names.h"
+#include "core/words/problem.h"
+
+namespace planewright {
+
+/// Whether the name of a file ends so, whatever the case of its letters.
+bool hasEnding(const std::string& file, std::string_view ending);
+
+/// That an option names something that the study does not have, with what it has.
+Problem unknownName(const char* option, const std::string& name, const std::vector<std::string>& names);
+
+/// The value that an option names by its word, `usual` without the option; the Problem lists the words.
+template <class Enum>
+Result<Enum> wordOfOption(const char* option, const std::string* given, Enum usual) {
+  if (!given)
+    return usual;
+  if (const auto value = fromWord<Enum>(*given))
+    return *value;
+  std::string words;
+  for (const Named<Enum>& row : namesOf<Enum>())
+    words += (words.empty() ? "" : ", ") + std::string(row.word);
+  return tl::unexpected(Problem{
+      option, 0, 0, *given, PW_TEXT("Command", "“%1” is none of the words of %2.").with(*given).with(option),
+      PW_TEXT("Command", "Take one of these: %1.").with(words)});
+}
+
+} // namespace planewright

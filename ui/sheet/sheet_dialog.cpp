@@ -1,0 +1,260 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/sheet/sheet_dialog.h"
+
+#include "core/record/embedded_study.h"
+#include "core/record/study_file.h"
+#include "core/report/comparison.h"
+#include "core/report/sheet_html.h"
+#include "ui/files/file_bytes.h"
+#include "ui/look/look.h"
+#include "ui/paint/export.h"
+#include "ui/sheet/sheet_options.h"
+#include "ui/sheet/sheet_preview.h"
+
+#include <QButtonGroup>
+#include <QDir>
+#include <QFileDialog>
+#include <QFileInfo>
+#include <QHBoxLayout>
+#include <QLabel>
+#include <QPrintDialog>
+#include <QPrinter>
+#include <QPushButton>
+#include <QScreen>
+#include <QScrollArea>
+#include <QScrollBar>
+#include <QSettings>
+#include <QShowEvent>
+#include <QStandardPaths>
+#include <QToolButton>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+namespace {
+
+constexpr int soon = 150; ///< ms after the last change
+
+} // namespace
+
+SheetDialog::SheetDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_desk(desk) {
+  setWindowTitle(tr("Calculation sheet"));
+  setModal(false);
+  build();
+  m_soon.setSingleShot(true);
+  m_soon.setInterval(soon);
+  connect(&m_soon, &QTimer::timeout, this, &SheetDialog::refresh);
+  connect(&m_desk, &Desk::changed, this, [this] {
+    if (isVisible())
+      m_soon.start();
+  });
+  connect(m_options, &SheetOptions::changed, this, &SheetDialog::arrange);
+}
+
+void SheetDialog::build() {
+  constexpr QSize first(1000, 780);
+  constexpr int optionsWidth = 240;
+  m_options = new SheetOptions(m_desk, rememberedSheet(QSettings()), this);
+  auto* options = new QScrollArea(this);
+  options->setWidget(m_options);
+  options->setWidgetResizable(true);
+  options->setFrameShape(QFrame::NoFrame);
+  options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
+  options->setFixedWidth(optionsWidth);
+  options->setFocusPolicy(Qt::NoFocus);
+  m_sentence = new QLabel(this);
+  m_sentence->setWordWrap(true);
+  m_sentence->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  auto* middle = new QHBoxLayout;
+  middle->setSpacing(14);
+  middle->addWidget(options);
+  middle->addLayout(previewColumn(), 1);
+  auto* column = new QVBoxLayout(this);
+  column->addLayout(middle, 1);
+  column->addWidget(m_sentence);
+  column->addLayout(footer());
+  const QSize frame(20, 50); // of the window manager
+  resize(first.boundedTo(screen()->availableSize() - frame));
+}
+
+QVBoxLayout* SheetDialog::previewColumn() {
+  m_preview = new SheetPreview;
+  auto* scroll = new QScrollArea(this);
+  scroll->setWidget(m_preview);
+  scroll->setWidgetResizable(true);
+  scroll->setFrameShape(QFrame::NoFrame);
+  scroll->setAccessibleName(tr("Pages"));
+  auto* zooms = new QHBoxLayout;
+  auto* group = new QButtonGroup(this);
+  const auto add = [&](const QString& words, SheetPreview::Zoom zoom) {
+    auto* button = new QToolButton(this);
+    button->setText(words);
+    button->setCheckable(true);
+    button->setChecked(zoom == SheetPreview::Zoom::width);
+    group->addButton(button);
+    zooms->addWidget(button);
+    connect(button, &QToolButton::clicked, this, [this, zoom] { m_preview->setZoom(zoom); });
+  };
+  zooms->addStretch();
+  add(tr("Whole width"), SheetPreview::Zoom::width);
+  add(tr("100 %"), SheetPreview::Zoom::trueSize);
+  auto* column = new QVBoxLayout;
+  column->addLayout(zooms);
+  column->addWidget(scroll, 1);
+  return column;
+}
+
+void SheetDialog::addButton(QHBoxLayout& row, const QString& words, void (SheetDialog::*act)()) {
+  auto* button = new QPushButton(words, this);
+  button->setAutoDefault(false);
+  row.addWidget(button);
+  connect(button, &QPushButton::clicked, this, act);
+}
+
+QHBoxLayout* SheetDialog::footer() {
+  auto* row = new QHBoxLayout;
+  addButton(*row, tr("Title block…"), &SheetDialog::titleAsked);
+  addButton(*row, tr("Compare with…"), &SheetDialog::compare);
+  row->addStretch();
+  addButton(*row, tr("Save PDF…"), &SheetDialog::savePdf);
+  addButton(*row, tr("Save HTML…"), &SheetDialog::saveHtml);
+  addButton(*row, tr("Print…"), &SheetDialog::print);
+  return row;
+}
+
+void SheetDialog::setStudyFile(const QString& path) {
+  m_studyFile = path;
+  if (isVisible())
+    m_soon.start();
+}
+
+void SheetDialog::showEvent(QShowEvent* event) {
+  QDialog::showEvent(event);
+  refresh();
+}
+
+void SheetDialog::arrange() {
+  QSettings settings;
+  rememberSheet(settings, m_options->settings());
+  refresh();
+}
+
+Sheet SheetDialog::sheet() const {
+  SheetOrder order;
+  order.points = m_options->points();
+  order.depth = m_options->settings().depth;
+  order.figures = m_options->settings().figures;
+  order.studyName = QFileInfo(m_studyFile).completeBaseName().toStdString();
+  order.earlier = m_earlier;
+  order.earlierName = QFileInfo(m_earlierFile).completeBaseName().toStdString();
+  order.translate = translation();
+  return sheetOf(m_desk.study(), order);
+}
+
+void SheetDialog::refresh() {
+  const Sheet made = sheet();
+  m_preview->setPages(pagesOf(made, m_options->settings().paper, translation()));
+  say(shown(made.routes), made.disagrees);
+}
+
+void SheetDialog::say(const QString& sentence, bool isWrong) {
+  QPalette palette = this->palette();
+  palette.setColor(QPalette::WindowText, lookOf(*this).colour(isWrong ? Role::wrong : Role::ink));
+  m_sentence->setPalette(palette);
+  m_sentence->setText(sentence);
+}
+
+Result<void> SheetDialog::saveTo(const QString& path) {
+  const Sheet made = sheet();
+  const SheetSettings& settings = m_options->settings();
+  const std::string study = settings.carriesStudy ? writeStudy(m_desk.study()) : std::string();
+  if (path.endsWith(QStringLiteral(".html"), Qt::CaseInsensitive)) {
+    const std::string html = sheetHtml(made, translation());
+    const Result<std::string> bytes = study.empty() ? Result<std::string>(html) : htmlWithStudy(html, study);
+    return bytes ? writeAside(path.toStdString(), *bytes) : tl::unexpected(bytes.error());
+  }
+  const Result<QByteArray> bytes =
+      pdfOfPages(pagesOf(made, settings.paper, translation()), Palette::paper, study);
+  return bytes ? writeAside(path.toStdString(), bytes->toStdString()) : tl::unexpected(bytes.error());
+}
+
+QString SheetDialog::offeredPath(const QString& ending) const {
+  const QFileInfo file(m_studyFile);
+  const QString folder = m_studyFile.isEmpty()
+                             ? QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation)
+                             : file.absolutePath();
+  const QString name = m_studyFile.isEmpty() ? tr("sheet") : tr("%1-sheet").arg(file.completeBaseName());
+  return folder + QLatin1Char('/') + name + ending;
+}
+
+void SheetDialog::save(const QString& ending, const QString& kind) {
+  QFileDialog dialog(this, tr("Save the sheet"), offeredPath(ending), kind);
+  dialog.setAcceptMode(QFileDialog::AcceptSave);
+  dialog.setDefaultSuffix(ending.mid(1));
+  dialog.selectFile(offeredPath(ending));
+  if (dialog.exec() != QDialog::Accepted)
+    return;
+  const QString path = dialog.selectedFiles().constFirst();
+  if (const Result<void> saved = saveTo(path); !saved)
+    return say(shown(saved.error()), true);
+  const QString sentence = tr("Saved as %1.").arg(QDir::toNativeSeparators(path));
+  say(sentence);
+  m_desk.say(sentence);
+}
+
+void SheetDialog::savePdf() {
+  save(QStringLiteral(".pdf"), tr("PDF (*.pdf)"));
+}
+
+void SheetDialog::saveHtml() {
+  save(QStringLiteral(".html"), tr("HTML (*.html)"));
+}
+
+Result<void> SheetDialog::compareWith(const QString& path) {
+  const Result<std::string> bytes = bytesOf(path.toStdString(), greatestCarrier);
+  if (!bytes)
+    return tl::unexpected(bytes.error());
+  const Results<OpenedStudy> opened = openedStudy(*bytes);
+  if (!opened)
+    return tl::unexpected(opened.error().front());
+  m_earlier = opened->study;
+  m_earlierFile = path;
+  refresh();
+  const Comparison changes = compared(*m_earlier, m_desk.study());
+  say(tr("%1: %2 input(s) and %3 result(s) differ; the sheet has them under “Changes since another "
+         "revision”.")
+          .arg(QFileInfo(path).fileName())
+          .arg(changes.inputs.size())
+          .arg(changes.results.size()));
+  return {};
+}
+
+void SheetDialog::compare() {
+  const QString file = QFileDialog::getOpenFileName(
+      this, tr("Compare with an earlier revision"), QFileInfo(m_studyFile).absolutePath(),
+      tr("Studies, figures and sheets (*.planewright *.svg *.pdf *.png *.html)"));
+  if (file.isEmpty())
+    return;
+  if (const Result<void> done = compareWith(file); !done)
+    say(shown(done.error()), true);
+}
+
+Result<void> SheetDialog::printTo(QPrinter& printer) {
+  printer.setDocName(windowTitle());
+  return printPages(printer, pagesOf(sheet(), m_options->settings().paper, translation()), Palette::paper);
+}
+
+void SheetDialog::print() {
+  QPrinter printer(QPrinter::HighResolution);
+  printer.setPageSize(
+      QPageSize(m_options->settings().paper == Paper::a4 ? QPageSize::A4 : QPageSize::Letter));
+  QPrintDialog dialog(&printer, this);
+  if (dialog.exec() != QDialog::Accepted)
+    return;
+  if (const Result<void> printed = printTo(printer); !printed)
+    say(shown(printed.error()), true);
+  else
+    say(tr("The sheet is printed."));
+}
+
+} // namespace planewright

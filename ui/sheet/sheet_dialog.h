@@ -1,0 +1,77 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "ui/desk/desk.h"
+#include "ui/sheet/sheet_settings.h"
+
+#include <QDialog>
+#include <QTimer>
+
+class QHBoxLayout;
+class QLabel;
+class QPrinter;
+class QPushButton;
+class QScrollArea;
+class QVBoxLayout;
+
+namespace planewright {
+
+class SheetOptions;
+class SheetPreview;
+
+/// The calculation sheet: follows the study, shows the pages as they will be, saves them as PDF or HTML and
+/// prints them. It opens with the choices used last.
+class SheetDialog : public QDialog {
+  Q_OBJECT
+
+public:
+  explicit SheetDialog(Desk& desk, QWidget* parent = nullptr);
+
+  /// Where the study is saved; empty while it is not. Sheets are offered beside it and bear its name.
+  void setStudyFile(const QString& path);
+
+  SheetPreview& preview() const { return *m_preview; }
+  SheetOptions& options() const { return *m_options; }
+
+  /// Compares with the study in this file, which is an earlier revision; its changes become a section.
+  Result<void> compareWith(const QString& path);
+
+  /// Saves the sheet as it is now, as HTML where the name ends with .html, else as PDF.
+  Result<void> saveTo(const QString& path);
+  /// Prints all pages.
+  Result<void> printTo(QPrinter& printer);
+
+signals:
+  /// The user wants to fill in the title block.
+  void titleAsked();
+
+protected:
+  void showEvent(QShowEvent* event) override;
+
+private:
+  void build();
+  QVBoxLayout* previewColumn();
+  QHBoxLayout* footer();
+  void addButton(QHBoxLayout& row, const QString& words, void (SheetDialog::*act)());
+  void arrange();
+  void refresh();
+  void say(const QString& sentence, bool isWrong = false);
+  Sheet sheet() const;
+  QString offeredPath(const QString& ending) const;
+  void save(const QString& ending, const QString& kind);
+  void savePdf();
+  void saveHtml();
+  void print();
+  void compare();
+
+  Desk& m_desk;
+  QString m_studyFile;
+  SheetOptions* m_options = nullptr;
+  SheetPreview* m_preview = nullptr;
+  QLabel* m_sentence = nullptr;
+  std::optional<Study> m_earlier; ///< the revision that the sheet is compared with
+  QString m_earlierFile;
+  QTimer m_soon; ///< a long sheet is not made anew for each step of a drag
+};
+
+} // namespace planewright
