@@ -85,6 +85,7 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
 
 std::optional<Problem> missingPoint(const Study& study, const std::vector<std::string>& wanted) {
   std::vector<std::string> names;
+  names.reserve(study.points.size());
   for (const Point& point : study.points)
     names.push_back(point.name);
   for (const std::string& name : wanted)

@@ -103,6 +103,7 @@ class ResultList {
 public:
   explicit ResultList(const Study& study) : m_study(study) {
     std::vector<Readout> points;
+    points.reserve(study.points.size());
     for (const Point& point : study.points)
       points.push_back(evaluate(study, point.name));
     add("", PW_TEXT("Comparison", "verdict of the study"), verdictSentence(verdictOf(points)));

@@ -185,7 +185,7 @@ private:
   }
 
   static std::string shownValue(const Step& step) {
-    const std::string shown = shownResult(step);
+    std::string shown = shownResult(step);
     if (step.unit == "°" || step.unit.empty())
       return shown;
     return shown.substr(0, shown.size() - step.unit.size() - 1);

@@ -113,7 +113,7 @@ Typeset FormulaType::bracket(const Piece& held, bool opening) const {
   return set;
 }
 
-Typeset FormulaType::inParentheses(Piece piece) const {
+Typeset FormulaType::inParentheses(const Piece& piece) const {
   if (piece.height() <= taller * m_size)
     return joined({words("("), piece, words(")")});
   return joined({bracket(piece, true), piece, bracket(piece, false)});
@@ -160,7 +160,7 @@ HeldPiece<Typeset> FormulaType::quotient(HeldPiece<Piece> a, HeldPiece<Piece> b)
   return {std::move(set), Hold::product};
 }
 
-Typeset FormulaType::power(Piece base, HeldPiece<Piece> raising) const {
+Typeset FormulaType::power(const Piece& base, HeldPiece<Piece> raising) const {
   Piece exponent = scaled(std::move(raising.piece), exponentSize);
   const double rise = std::max(exponentRise * m_size, base.above - 0.45 * m_size);
   Typeset raised = moved(std::move(exponent), {0.03 * m_size, -rise});
@@ -170,7 +170,7 @@ Typeset FormulaType::power(Piece base, HeldPiece<Piece> raising) const {
   return joined({base, raised});
 }
 
-Typeset FormulaType::root(Piece piece) const {
+Typeset FormulaType::root(const Piece& piece) const {
   const double hook = 0.62 * m_size;
   const double top = -piece.above - 0.14 * m_size;
   const double bottom = piece.below;
@@ -258,15 +258,15 @@ private:
     }
   }
 
-  Typeset withSign(const std::string& sign, Typeset piece) const {
+  Typeset withSign(const std::string& sign, const Typeset& piece) const {
     return sign.empty() ? piece : m_type.joined({m_type.sign(sign), piece});
   }
 
   void add(Typeset piece) {
     if (!m_line.parts.empty() && piece.width > room())
       flush();
-    if (piece.width > room())
-      piece = scaled(std::move(piece), room() / piece.width);
+    if (const double part = room() / piece.width; part < 1)
+      piece = scaled(std::move(piece), part);
     m_line = m_type.joined({m_line, piece});
   }
 

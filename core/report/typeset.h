@@ -31,12 +31,12 @@ public:
 
   Piece words(const std::string& text) const;
   Piece joined(const std::vector<Piece>& pieces) const;
-  Piece inParentheses(Piece piece) const;
+  Piece inParentheses(const Piece& piece) const;
   Piece betweenBars(const Piece& piece) const;
   Piece sign(const std::string& text) const;
   HeldPiece<Piece> quotient(HeldPiece<Piece> a, HeldPiece<Piece> b) const;
-  Piece power(Piece base, HeldPiece<Piece> exponent) const;
-  Piece root(Piece piece) const;
+  Piece power(const Piece& base, HeldPiece<Piece> exponent) const;
+  Piece root(const Piece& piece) const;
 
   double size() const { return m_size; }
 

@@ -79,7 +79,7 @@ Text CheckSteps::named(const Text& name) const {
   return m_isWorst ? PW_TEXT("Working", "%1 at the worst direction").with(name) : name;
 }
 
-Formula CheckSteps::addStrength(CheckLine line) {
+Formula CheckSteps::addStrength(const CheckLine& line) {
   addFinite(m_strengths, stepOf(line));
   return put(line.symbol, line.result, line.dimension);
 }

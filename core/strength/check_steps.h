@@ -30,7 +30,7 @@ public:
 
   /// Adds a step and puts its symbol. What has no finite number makes no step. Strengths stand before all
   /// else, stresses have the decimals of the state, everything else four significant digits.
-  Formula addStrength(CheckLine line);
+  Formula addStrength(const CheckLine& line);
   Formula addStress(CheckLine line);
   Formula add(CheckLine line);
 

@@ -51,7 +51,7 @@ Formula WrittenStrengths::of(StrengthKey key) {
 
 Formula WrittenStrengths::along(bool pulls) {
   const StrengthKey axialKey = pulls ? StrengthKey::alongTension : StrengthKey::alongCompression;
-  const Formula axial = of(axialKey);
+  Formula axial = of(axialKey);
   if (!isMixed(m_given, m_demand))
     return axial;
   const std::string mixed = derived(pulls ? "f_{t,NM}" : "f_{c,NM}");

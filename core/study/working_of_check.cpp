@@ -164,7 +164,7 @@ private:
     const double turn = (direction - m_state.circle.theta1->value).degrees();
     const double toAxis = isFirst ? 0 : 90;
     const double whole = toAxis - 180 * std::round((turn + toAxis) / 180);
-    const Formula difference = Formula::symbol("φ") - Formula::symbol("θ_{1}");
+    Formula difference = Formula::symbol("φ") - Formula::symbol("θ_{1}");
     if (whole == 0)
       return difference;
     return whole > 0 ? difference + Formula::degrees(whole) : difference - Formula::degrees(-whole);

@@ -40,6 +40,7 @@ std::string asIndex(std::string id, const std::vector<std::string>& taken) {
 
 std::vector<std::string> indicesOf(const Readout& readout, const StateReading& state) {
   std::vector<std::string> indices;
+  indices.reserve(state.acting.size());
   for (const ActingCase& acting : state.acting)
     indices.push_back(asIndex(readout.cases[acting.index].id, indices));
   return indices;

@@ -52,7 +52,7 @@ bool isRecoverable(const Step& step) {
 }
 
 Step recoverable(Step step) {
-  const Step before = step;
+  Step before = step;
   while (!isRecoverable(step)) {
     bool more = false;
     for (NumberPutIn& number : step.putIn)
