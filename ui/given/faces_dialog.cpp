@@ -2,7 +2,6 @@
 #include "ui/given/faces_dialog.h"
 
 #include "core/quantity/format.h"
-#include "core/study/cut_text.h"
 #include "core/study/slope_edits.h"
 #include "ui/look/look.h"
 
@@ -15,8 +14,9 @@
 
 namespace planewright {
 
-FacesDialog::FacesDialog(QWidget* parent)
-    : QDialog(parent), m_first(new QLineEdit(this)), m_second(new QLineEdit(this)), m_told(new QLabel(this)) {
+FacesDialog::FacesDialog(Line line, QWidget* parent)
+    : QDialog(parent), m_line(std::move(line)), m_first(new QLineEdit(this)), m_second(new QLineEdit(this)),
+      m_told(new QLabel(this)) {
   setWindowTitle(tr("True slope of the grain from two faces"));
   auto* form = new QFormLayout;
   form->addRow(tr("Slope on the wide face"), m_first);
@@ -52,9 +52,13 @@ void FacesDialog::refresh() {
   else if (!slope)
     m_told->setText(shown(slope.error()));
   else {
-    m_slope = angleText(*slope);
-    m_told->setText(tr("True slope %1 (%2), either way.")
-                        .arg(fromUtf8(shownDegrees(*slope, 2)), fromUtf8(shownSlope(*slope))));
+    m_slope = toleranceText(*slope);
+    const QString old = m_line.tolerance.empty() ? tr("none") : fromUtf8(m_line.tolerance);
+    m_told->setText(
+        tr("True slope %1 (%2), either way. The angle of the line stays %3; its tolerance, now %4, "
+           "becomes %5.")
+            .arg(fromUtf8(shownDegrees(*slope, 2)), fromUtf8(shownSlope(*slope)), fromUtf8(m_line.angle), old,
+                 fromUtf8(m_slope)));
   }
   m_take->setEnabled(!m_slope.empty());
 }

@@ -20,6 +20,8 @@ namespace planewright {
 
 namespace {
 
+constexpr int runsOfSlopes[] = {8, 10, 12, 15, 20}; // 1 in
+
 /// A name for a line of this kind that no other line of the point has.
 std::string freeName(const Point& point, LineKind kind) {
   const std::string word = plain(labelOf(kind), translation());
@@ -76,22 +78,36 @@ void LineGroup::buildSecond() {
 /// A slope whose sense is unknown comes first: taken to one side only it may hide the worse one.
 void LineGroup::buildSlopes() {
   auto* menu = new QMenu(m_slopes);
-  for (const int run : {8, 10, 12, 15, 20})
-    menu->addAction(tr("within 1 in %1 either way").arg(run), this,
-                    [this, run] { takeEitherWay("1 in " + exactNumber(run)); });
+  for (const int run : runsOfSlopes)
+    m_eitherWay << menu->addAction({}, this, [this, run] { takeEitherWay("1 in " + exactNumber(run)); });
   menu->addSeparator();
   menu->addAction(tr("true slope from two faces…"), this, [this] {
-    auto* dialog = new FacesDialog(this);
+    const Line* own = line(m_desk.study());
+    auto* dialog = new FacesDialog(own ? *own : Line(), this);
     dialog->setAttribute(Qt::WA_DeleteOnClose);
     connect(dialog, &QDialog::accepted, this, [this, dialog] { takeEitherWay(dialog->slope()); });
     dialog->open();
   });
   m_slopes->setMenu(menu);
-  m_slopes->setToolTip(tr("The slope of a grain whose sense is not known: angle 0, the slope as tolerance"));
+  m_slopes->setToolTip(
+      tr("The slope of a grain whose sense is not known: the tolerance to either side of the angle above"));
   auto* row = new QHBoxLayout;
   row->addWidget(m_slopes);
   row->addStretch();
   body().addLayout(row);
+}
+
+/// The angle is named where it is not that of the member: it stays as the centre.
+void LineGroup::nameSlopes() {
+  const Line* own = line(m_desk.study());
+  if (!own)
+    return;
+  const bool turned = m_desk.readout().lines[m_index].angle.value != Angle();
+  for (int i = 0; i < m_eitherWay.size(); ++i)
+    m_eitherWay[i]->setText(turned ? tr("within 1 in %1 either way of %2")
+                                         .arg(runsOfSlopes[i])
+                                         .arg(nameForMenu(fromUtf8(own->angle)))
+                                   : tr("within 1 in %1 either way").arg(runsOfSlopes[i]));
 }
 
 void LineGroup::takeEitherWay(const std::string& slope) {
@@ -199,6 +215,7 @@ void LineGroup::refresh() {
   m_fields.back()->setVisible(own && (m_nameWanted || !isNamedByKind()));
   m_kind->menu()->actions().at(m_kind->menu()->actions().size() - 2)->setEnabled(own);
   m_slopes->setVisible(own && own->kind == LineKind::grain);
+  nameSlopes();
   m_second->setVisible(m_index == 0 && shownPoint(m_desk.study()).lines.size() == 1);
   m_sentence->setText(sentence());
   setSummary(summary());

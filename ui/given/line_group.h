@@ -5,6 +5,7 @@
 #include "ui/entry/entry_field.h"
 #include "ui/given/fold_group.h"
 
+class QAction;
 class QLabel;
 
 namespace planewright {
@@ -29,6 +30,7 @@ private:
   EntryBinding boundToLine(Spot spot) const;
   void buildKinds();
   void buildSlopes();
+  void nameSlopes();
   void takeEitherWay(const std::string& slope);
   void buildSecond();
   void addField(EntryBinding binding, EntryWords words);
@@ -48,6 +50,7 @@ private:
   std::size_t m_index;
   QuietButton* m_kind;
   QuietButton* m_slopes;
+  QList<QAction*> m_eitherWay;
   QuietButton* m_second;
   bool m_nameWanted = false;
   QList<EntryField*> m_fields;

@@ -83,7 +83,7 @@ that acts and divided by the partial factor, or multiplied by a factor of your o
 though its stresses are lower. Where stresses come from section forces, the strength along the line is that of the mix of
 axial and bending parts.</p>
 <p><b>The tolerance counts always:</b> the worst of the band is exact, not scanned. A slope of grain whose sense is not known is
-entered as angle 0 with the slope as tolerance (Line, Slope of unknown sense): the sense of τ<sub>xy</sub> decides whether
+entered as the tolerance to either side of the line's angle, which stays (Line, Slope of unknown sense): the sense of τ<sub>xy</sub> decides whether
 the grain is pulled or pressed across.</p>
 <p>The plot shows utilisation over the angle: the shown combination as a full line, the greatest of all dashed, the others as
 hairs; the limit is hatched, the tolerance a strip, the worst a triangle, angles within the limit a bar on the base line.
