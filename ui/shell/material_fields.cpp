@@ -1,7 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/material_fields.h"
 
+#include "core/shipped/shipped_materials.h"
 #include "core/study/material_edits.h"
+#include "core/study/text_fields.h"
+#include "core/study/typed.h"
 #include "ui/entry/complaint.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/entry/value_echo.h"
@@ -12,6 +15,7 @@
 #include <QGridLayout>
 #include <QHBoxLayout>
 #include <QLabel>
+#include <QPushButton>
 #include <QVBoxLayout>
 
 #include <algorithm>
@@ -34,6 +38,18 @@ void alignCaptions(const QList<EntryField*>& fields) {
     width = std::max(width, field->caption().sizeHint().width());
   for (const EntryField* field : fields)
     field->caption().setFixedWidth(width);
+}
+
+/// Whether the duration factors are those that are shipped for the service class; also where there is none.
+bool hasFactorsOfClass(const Study& study, const Material& material) {
+  if (std::ranges::find(serviceClasses(), material.serviceClass) == serviceClasses().end())
+    return true;
+  const Material usual = inServiceClass(material, material.serviceClass);
+  return std::ranges::all_of(textFieldsOf<DurationTexts>(), [&](const TextField<DurationTexts>& field) {
+    const std::string& own = material.durations.*field.text;
+    return !own.empty() &&
+           valueOf(study, field.spot, own) == valueOf(study, field.spot, usual.durations.*field.text);
+  });
 }
 
 bool hasFactors(const Material& material) {
@@ -170,6 +186,13 @@ QWidget* MaterialFields::factors() {
       new QLabel(tr("Strengths are multiplied by the factor of the shortest load that acts, over the partial "
                     "factor. An explicit factor takes the place of both."),
                  box);
+  m_classRemark = new QLabel(box);
+  m_classRemark->setWordWrap(true);
+  m_classButton = new QPushButton(box);
+  m_classButton->setAutoDefault(false);
+  connect(m_classButton, &QPushButton::clicked, this, &MaterialFields::takeFactorsOfClass);
+  rows->addWidget(m_classRemark);
+  rows->addWidget(m_classButton, 0, Qt::AlignLeft);
   rule->setWordWrap(true);
   rule->setForegroundRole(QPalette::PlaceholderText);
   rows->addWidget(rule);
@@ -218,6 +241,46 @@ void MaterialFields::choose(const Choice& choice, const std::string& word) {
   m_complaint->setVisible(problem.has_value());
 }
 
+void MaterialFields::takeFactorsOfClass() {
+  const Material usual = inServiceClass(*shownMaterial(), shownMaterial()->serviceClass);
+  Edits edits;
+  for (const TextField<DurationTexts>& field : textFieldsOf<DurationTexts>())
+    edits.push_back(Type{place(field.spot), usual.durations.*field.text});
+  m_desk.request(edits, m_desk.newCommand(), tr("duration factors of %1").arg(fromUtf8(m_material)));
+  refresh();
+}
+
+void MaterialFields::showClass(const Material& material) {
+  const bool differs = !hasFactorsOfClass(m_desk.study(), material);
+  m_classRemark->setText(
+      tr("The duration factors are not those of service class %1 in EN 1995-1-1: the class alone changes no "
+         "number.")
+          .arg(fromUtf8(material.serviceClass)));
+  m_classButton->setText(tr("Take the factors of service class %1").arg(fromUtf8(material.serviceClass)));
+  m_classRemark->setVisible(differs);
+  m_classButton->setVisible(differs);
+}
+
+QString MaterialFields::classRemark() const {
+  return m_classRemark->isHidden() ? QString() : m_classRemark->text();
+}
+
+QAbstractButton& MaterialFields::classButton() const {
+  return *m_classButton;
+}
+
+QStringList MaterialFields::notTaken() const {
+  QStringList all;
+  const auto add = [&all](const EntryField& field) {
+    if (!field.isTaken())
+      all << tr("“%1” for %2").arg(field.edit().text(), field.name());
+  };
+  add(*m_name);
+  for (const Field& one : m_fields)
+    add(*one.field);
+  return all;
+}
+
 void MaterialFields::turnTo(const std::string& material) {
   if (material != m_material)
     m_complaint->hide();
@@ -257,6 +320,7 @@ void MaterialFields::refresh() {
   choice(Spot::seam).parentWidget()->setVisible(material->kind == MaterialKind::throat);
   for (const auto& [kind, box] : m_strengths)
     box->setVisible(kind == material->kind);
+  showClass(*material);
   // A throat carries its own partial factor.
   m_factors->setVisible(material->kind != MaterialKind::throat || hasFactors(*material));
   const QString use = usedBy(m_desk.study(), m_material);

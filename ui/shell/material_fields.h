@@ -8,7 +8,9 @@
 
 class QComboBox;
 class QGridLayout;
+class QAbstractButton;
 class QLabel;
+class QPushButton;
 
 namespace planewright {
 
@@ -30,6 +32,11 @@ public:
   /// The field of a text; of a strength the one of the kind that is shown.
   EntryField& field(Spot spot) const;
   QComboBox& choice(Spot spot) const;
+  /// What stands in the fields and was not taken, "“-3” for shear strength".
+  QStringList notTaken() const;
+  /// What is said of duration factors that are not those of the service class; empty where they are.
+  QString classRemark() const;
+  QAbstractButton& classButton() const;
   /// Why a kind, basis or seam was not taken.
   QString complaint() const;
 
@@ -56,6 +63,8 @@ private:
   template <class Enum>
   QWidget* addChoice(Spot spot, const QString& caption);
   void choose(const Choice& choice, const std::string& word);
+  void takeFactorsOfClass();
+  void showClass(const Material& material);
   Place place(Spot spot) const;
   const Material* shownMaterial() const;
   void refresh();
@@ -67,6 +76,8 @@ private:
   std::vector<Choice> m_choices;
   std::vector<std::pair<MaterialKind, QWidget*>> m_strengths;
   QWidget* m_factors = nullptr;
+  QLabel* m_classRemark = nullptr;
+  QPushButton* m_classButton = nullptr;
   Complaint* m_complaint;
   QLabel* m_use;
 };

@@ -257,6 +257,19 @@ void MaterialsDialog::complain(const Problem& problem) {
                  Strip::Tone::wrong);
 }
 
+void MaterialsDialog::done(int result) {
+  // The field that has the keys takes what is typed there, or refuses it, when it loses them.
+  if (QWidget* focused = focusWidget())
+    focused->clearFocus();
+  const QStringList left = m_fields->notTaken();
+  QDialog::done(result);
+  if (!left.isEmpty())
+    m_desk.say(left.size() == 1
+                   ? tr("%1 of %2 was not taken.").arg(left.front(), fromUtf8(m_choice.name))
+                   : tr("%1 and %2 more of %3 were not taken.")
+                         .arg(left.front(), QString::number(left.size() - 1), fromUtf8(m_choice.name)));
+}
+
 void MaterialsDialog::open(const MaterialChoice& choice) {
   if (choice.origin != MaterialOrigin::study)
     return take();

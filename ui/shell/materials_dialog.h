@@ -36,6 +36,9 @@ public:
   QString sheet() const;
   void choose(const MaterialChoice& choice);
 
+  /// Says what stands in the fields and was not taken, since it goes with the window.
+  void done(int result) override;
+
 public slots:
   void take();
   void add(planewright::MaterialKind kind);

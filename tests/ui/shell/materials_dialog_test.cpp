@@ -83,6 +83,28 @@ protected:
   std::unique_ptr<MaterialsDialog> m_dialog;
 };
 
+TEST_F(MaterialsTest, anotherServiceClassSaysThatItChangesNoFactorAndOffersThem) {
+  click(QStringLiteral("C24"));
+  press(QStringLiteral("Take into the study"));
+  EXPECT_EQ(m_dialog->fields().classRemark(), QString());
+  type(Spot::serviceClass, "3");
+  EXPECT_TRUE(m_dialog->fields().classRemark().contains(QStringLiteral("not those of service class 3")));
+  m_dialog->fields().classButton().click();
+  EXPECT_EQ(materials().front().durations.permanent, "0.50");
+  EXPECT_EQ(m_dialog->fields().classRemark(), QString());
+  EXPECT_EQ(m_desk.undoStack()->count(), 3);
+}
+
+TEST_F(MaterialsTest, whatIsNotTakenIsSaidWhenTheWindowIsClosed) {
+  click(QStringLiteral("C24"));
+  press(QStringLiteral("Take into the study"));
+  QString said;
+  QObject::connect(&m_desk, &Desk::said, [&said](const QString& message) { said = message; });
+  type(spotOf(StrengthKey::shear), "-4");
+  m_dialog->close();
+  EXPECT_EQ(said, QStringLiteral("“-4” for fv of C24 was not taken."));
+}
+
 TEST_F(MaterialsTest, aShippedMaterialIsReadWithItsTrustAndTakenAsOneStep) {
   click(QStringLiteral("GL24h"));
   EXPECT_TRUE(m_dialog->sheet().contains("read second-hand")) << m_dialog->sheet().toStdString();
