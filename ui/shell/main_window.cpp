@@ -109,7 +109,14 @@ void MainWindow::connectViews() {
           [this](int count, const QString&) { m_stateBar->verdict().setNotTaken(count); });
   connect(&m_stateBar->verdict(), &QAbstractButton::clicked, this, &MainWindow::enterStrength);
   connect(m_strength, &StrengthPanel::materialsWanted, this, &MainWindow::showMaterials);
-  connect(m_summary, &SummaryPage::opened, this, &MainWindow::showPointPage);
+  connect(m_summary, &SummaryPage::opened, this, [this] {
+    if (m_body->hasRoomForStrength())
+      showPointPage();
+    else
+      enterStrength();
+  });
+  connect(m_pages, &QStackedWidget::currentChanged, this,
+          [this] { m_stateBar->verdict().setNamesPoint(m_pages->currentWidget() == m_summary); });
   connect(m_body, &Body::roomForStrengthChanged, this, [this](bool room) {
     if (room)
       m_planes->release();

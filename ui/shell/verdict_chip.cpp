@@ -29,12 +29,19 @@ void VerdictChip::setNotTaken(int entries) {
   refresh();
 }
 
+void VerdictChip::setNamesPoint(bool names) {
+  m_namesPoint = names;
+  refresh();
+}
+
 void VerdictChip::refresh() {
   const Verdict verdict = verdictOf(m_desk.readout());
   QString words = shown(shortVerdict(verdict));
   if (m_notTaken > 0 && verdict.standing != Standing::notChecked)
     words = tr("%1, %n entry not taken", nullptr, m_notTaken)
                 .replace(QStringLiteral("%1"), shown(wordOfStanding(verdict.standing)));
+  if (m_namesPoint)
+    words = tr("this point: %1").arg(words);
   setText(words);
   setAccessibleName(tr("Verdict: %1").arg(words));
   QString tip = shown(verdictSentence(verdict));

@@ -15,6 +15,9 @@ class VerdictChip : public QAbstractButton {
 public:
   VerdictChip(Desk& desk, QWidget* parent);
 
+  /// Beside a page of all points it says of which one it speaks.
+  void setNamesPoint(bool names);
+
   /// How many entries stand in fields that the study has not taken.
   void setNotTaken(int entries);
   QSize sizeHint() const override;
@@ -28,6 +31,7 @@ private:
 
   Desk& m_desk;
   int m_notTaken = 0;
+  bool m_namesPoint = false;
 };
 
 } // namespace planewright

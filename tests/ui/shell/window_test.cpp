@@ -2,6 +2,7 @@
 #include "core/record/embedded_study.h"
 #include "core/record/study_file.h"
 #include "shell_test.h"
+#include "tests/support/judged_study.h"
 #include "ui/circle/circle_plot.h"
 #include "ui/circle/circle_view.h"
 #include "ui/element/element_view.h"
@@ -15,8 +16,10 @@
 #include "ui/shell/state_bar.h"
 #include "ui/shell/status_line.h"
 #include "ui/shell/strip.h"
+#include "ui/shell/verdict_chip.h"
 #include "ui/shell/worked_example.h"
 #include "ui/strength/strength_panel.h"
+#include "ui/strength/summary_page.h"
 
 #include <QAbstractItemView>
 #include <QApplication>
@@ -28,6 +31,7 @@
 #include <QPlainTextEdit>
 #include <QPushButton>
 #include <QSplitter>
+#include <QTableView>
 #include <QTest>
 
 #include <algorithm>
@@ -70,6 +74,23 @@ TEST_F(WindowTest, enterOnTheCircleTypesTheAngleOfTheReadingPlane) {
   QTest::keyClicks(QApplication::focusWidget(), QStringLiteral("33"));
   QTest::keyClick(QApplication::focusWidget(), Qt::Key_Return);
   EXPECT_DOUBLE_EQ(window.desk().readout().reading.value.degrees(), 33);
+}
+
+TEST_F(WindowTest, enterInTheSummaryOfANarrowWindowLandsOnTheStrengths) {
+  MainWindow& window = shown({1024, 700});
+  window.desk().replace(judgedStudy());
+  window.showSummary();
+  QTest::keyClick(&window.summary().table(), Qt::Key_Return);
+  EXPECT_TRUE(window.strength().isVisible());
+  EXPECT_TRUE(window.strength().isAncestorOf(QApplication::focusWidget()));
+}
+
+TEST_F(WindowTest, besideTheSummaryTheVerdictSaysThatItIsOfThisPoint) {
+  MainWindow& window = shown();
+  window.desk().replace(judgedStudy());
+  const QString alone = window.stateBar().verdict().text();
+  window.showSummary();
+  EXPECT_EQ(window.stateBar().verdict().text(), QStringLiteral("this point: ") + alone);
 }
 
 TEST_F(WindowTest, startsWithANewStudyAndTheCursorInItsFirstComponent) {
