@@ -4,6 +4,8 @@
 #include "ui/look/look.h"
 
 #include <QAbstractButton>
+#include <QAbstractItemView>
+#include <QLineEdit>
 #include <QPainter>
 #include <QStyleOption>
 
@@ -13,14 +15,37 @@ RingStyle::RingStyle() : QProxyStyle(QStringLiteral("Fusion")) {}
 
 void RingStyle::drawPrimitive(PrimitiveElement element, const QStyleOption* option, QPainter* painter,
                               const QWidget* widget) const {
-  if (element != PE_FrameFocusRect || !qobject_cast<const QAbstractButton*>(widget))
-    return QProxyStyle::drawPrimitive(element, option, painter, widget);
+  if (element == PE_IndicatorHeaderArrow)
+    if (const auto* header = qstyleoption_cast<const QStyleOptionHeader*>(option)) {
+      QStyleOptionHeader turned = *header;
+      turned.sortIndicator = header->sortIndicator == QStyleOptionHeader::SortUp
+                                 ? QStyleOptionHeader::SortDown
+                                 : QStyleOptionHeader::SortUp;
+      return QProxyStyle::drawPrimitive(element, &turned, painter, widget);
+    }
+  if (element != PE_FrameFocusRect || !qobject_cast<const QAbstractButton*>(widget)) {
+    QProxyStyle::drawPrimitive(element, option, painter, widget);
+    const bool isField = element == PE_FrameLineEdit && qobject_cast<const QLineEdit*>(widget);
+    const bool isList = element == PE_Frame && qobject_cast<const QAbstractItemView*>(widget);
+    if ((isField || isList) && !(option->state & State_HasFocus))
+      drawEdge(*option, *painter, *widget);
+    return;
+  }
   painter->save();
   painter->setRenderHint(QPainter::Antialiasing);
   painter->setPen(QPen(lookOf(*widget).colour(Role::focus), 2));
   painter->setBrush(Qt::NoBrush);
   painter->drawRoundedRect(QRectF(option->rect).adjusted(1, 1, -1, -1), 3, 3);
   painter->restore();
+}
+
+void RingStyle::drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget) const {
+  painter.save();
+  painter.setRenderHint(QPainter::Antialiasing);
+  painter.setPen(QPen(lookOf(widget).colour(Role::other), 1));
+  painter.setBrush(Qt::NoBrush);
+  painter.drawRoundedRect(QRectF(option.rect).adjusted(0.5, 0.5, -0.5, -0.5), 2, 2);
+  painter.restore();
 }
 
 } // namespace planewright

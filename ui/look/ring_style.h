@@ -5,7 +5,9 @@
 
 namespace planewright {
 
-/// The style of the standard widgets, but a button that has the keys wears the ring that fields wear.
+/// The style of the standard widgets, but a button that has the keys wears the ring that fields wear, fields
+/// and lists without the keys have an edge that is seen in the dark too, and the arrow of a sorted column
+/// points to where the values go: downwards when they fall.
 class RingStyle : public QProxyStyle {
   Q_OBJECT
 
@@ -14,6 +16,9 @@ public:
 
   void drawPrimitive(PrimitiveElement element, const QStyleOption* option, QPainter* painter,
                      const QWidget* widget) const override;
+
+private:
+  void drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget) const;
 };
 
 } // namespace planewright
