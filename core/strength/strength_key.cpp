@@ -48,7 +48,7 @@ const StrengthRow& rowOf(StrengthKey key) {
                                                  {tension, "tension", stress},
                                                  {compression, "compression", stress},
                                                  {cohesion, "cohesion", stress, true},
-                                                 {friction, "friction", dimension::angle, false, false},
+                                                 {friction, "friction", dimension::angle, true, false},
                                                  {cutoff, "cutoff", stress, true},
                                                  {fu, "fu", stress, false, false},
                                                  {betaW, "beta_w", dimension::none, false, false},

@@ -53,9 +53,13 @@ private:
                      .with(rowOf(spot).label),
                  PW_TEXT("Study", "Take it out, or give the material another kind."));
     const std::optional<double> value = valueIn(m_study, spot, text);
-    if (key == StrengthKey::friction && value && !(*value > 0 && *value < 90))
-      return add(spot, text, PW_TEXT("Study", "An angle of friction lies between 0° and 90°."),
+    if (key == StrengthKey::friction && value && !(*value >= 0 && *value < 90))
+      return add(spot, text, PW_TEXT("Study", "An angle of friction is at least 0° and less than 90°."),
                  PW_TEXT("Study", "Give it in degrees, such as 30 deg."));
+    if (key == StrengthKey::friction && value && *value == 0 &&
+        valueIn(m_study, spotOf(StrengthKey::cohesion), m_material.cohesion) == 0)
+      return add(spot, text, PW_TEXT("Study", "A plane with neither cohesion nor friction carries nothing."),
+                 PW_TEXT("Study", "Give one of them."));
     if (rowOf(key).mayBeZero && value && *value == 0)
       return;
     positive(spot, text);
@@ -65,8 +69,7 @@ private:
     const std::optional<double> value = valueIn(m_study, spot, text);
     if (value && !(*value > 0))
       add(spot, text, PW_TEXT("Study", "The %1 is not greater than 0.").with(rowOf(spot).label),
-          PW_TEXT("Study",
-                  "Strengths and their factors are given as positive numbers, for compression too."));
+          PW_TEXT("Study", "Give a positive number, for compression too."));
     else if (value && !(*value >= leastValue && *value <= greatestValue))
       add(spot, text,
           PW_TEXT("Study", "The %1 is out of every range that can be meant.").with(rowOf(spot).label),
@@ -143,7 +146,7 @@ private:
     const bool hasSign = spot == Spot::checkF12 || spot == Spot::checkEdge;
     const std::optional<double> value = valueIn(m_study, spot, text);
     if (!hasSign && value && !(*value > 0))
-      add(spot, text, PW_TEXT("Study", "The %1 is not greater than 0.").with(rowOf(spot).label),
+      add(spot, text, PW_TEXT("Study", "The parameter %1 is not greater than 0.").with(rowOf(spot).label),
           PW_TEXT("Study", "Give a positive number."));
   }
 

@@ -1,7 +1,10 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/entry/complaint.h"
 
+#include "core/study/edit.h"
+#include "core/study/text_fields.h"
 #include "ui/look/font.h"
+#include "ui/look/look.h"
 
 #include <gtest/gtest.h>
 
@@ -23,6 +26,19 @@ TEST(Complaint, neverTakesMoreThanThreeLines) {
     EXPECT_LE(lines.size(), 3) << width;
     for (const QString& line : lines)
       EXPECT_LE(QFontMetrics(font).horizontalAdvance(line), width) << line.toStdString();
+  }
+}
+
+TEST(Complaint, aStrengthThatIsNotPositiveIsRefusedInSentencesThatFitTheirField) {
+  Study study = newStudy();
+  study.materials = {Material{}};
+  study.materials[0].name = "C24";
+  for (const StrengthKey key : keysOf(MaterialKind::timber)) {
+    const Result<Study> after = edited(study, Edits{Type{{spotOf(key), "C24", {}}, "-1 MPa"}});
+    ASSERT_FALSE(after);
+    const QStringList lines =
+        complaintLines(shown(after.error().what), shown(after.error().mend), programFont(13), 270);
+    EXPECT_FALSE(lines.join(' ').contains("…")) << lines.join('|').toStdString();
   }
 }
 
