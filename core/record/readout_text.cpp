@@ -78,11 +78,13 @@ private:
     if (!verdict.governing)
       return;
     const Readout& readout = *std::ranges::find(points, verdict.governing->point, &Readout::point);
-    line("", PW_TEXT("Readout", "Governing: %1, point %2, check %3, %4")
-                 .with(shownWorst(readingOf(readout, *verdict.governing)))
-                 .with(readout.point)
-                 .with(readout.checks[verdict.governing->check].id)
-                 .with(readout.states[verdict.governing->state].combination));
+    line("",
+         (verdict.unjudged ? PW_TEXT("Readout", "Governing among those judged: %1, point %2, check %3, %4")
+                           : PW_TEXT("Readout", "Governing: %1, point %2, check %3, %4"))
+             .with(shownWorst(readingOf(readout, *verdict.governing)))
+             .with(readout.point)
+             .with(readout.checks[verdict.governing->check].id)
+             .with(readout.states[verdict.governing->state].combination));
   }
 
   /// A check of a point over all combinations, and what follows for other directions.
@@ -94,27 +96,23 @@ private:
     line("    ", PW_TEXT("Readout", "Limit: %1 (%2)")
                      .with(rowOf(setup.criterion).equation)
                      .with(rowOf(setup.criterion).source));
-    const std::optional<JudgedCheck>& told = verdict.governing ? verdict.governing : verdict.unjudged;
-    if (!told)
-      return;
-    const CheckReading& reading = readingOf(readout, *told);
-    line("    ", PW_TEXT("Readout", "%1: %2")
-                     .with(readout.states[told->state].combination)
-                     .with(shortVerdict(verdict)));
-    judged(setup, reading);
+    if (verdict.unjudged)
+      line("    ", notJudgedSentence(readout, *verdict.unjudged));
+    if (verdict.governing)
+      judged(readout, *verdict.governing);
     if (const auto directions = directionsOf(readout, index))
       for (const Text& sentence : sentencesOf(setup, *directions))
         line("    ", sentence);
-    for (const Text& caution : cautionsOf(setup, reading))
+    for (const Text& caution : cautionsOf(readout, index))
       line("    ", PW_TEXT("Readout", "Caution: %1").with(caution));
   }
 
-  void judged(const CheckSetup& setup, const CheckReading& reading) {
-    if (reading.problem) {
-      line("    ",
-           PW_TEXT("Readout", "Not judged: %1 %2").with(reading.problem->what).with(reading.problem->mend));
-      return;
-    }
+  void judged(const Readout& readout, const JudgedCheck& told) {
+    const CheckSetup& setup = readout.checks[told.check];
+    const CheckReading& reading = readingOf(readout, told);
+    line("    ", PW_TEXT("Readout", "%1: %2")
+                     .with(readout.states[told.state].combination)
+                     .with(shortVerdict(verdictOf(readout, told.state, told.check))));
     line("    ", factorSentence(reading.factor));
     line("    ", multiplierSentence(reading.worst));
     if (const Text worst = worstSentence(setup, reading); !worst.empty())

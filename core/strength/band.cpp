@@ -51,4 +51,15 @@ WorstInBand worstIn(const Judge& judge, const Band& band) {
   return {judge.at(angle), angle};
 }
 
+bool pullsAcross(const TurningState& state, const Band& band) {
+  std::vector<Angle> candidates = {band.nominal, band.from(), band.to()};
+  std::vector<Angle> turning;
+  state.directionsOf(-state.circle.radius, turning);
+  for (const Angle one : turning)
+    candidates.push_back(nearTo(band.nominal, one));
+  return std::ranges::any_of(candidates, [&](Angle angle) {
+    return angle >= band.from() && angle <= band.to() && state.at(angle).across > 0;
+  });
+}
+
 } // namespace planewright

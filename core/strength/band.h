@@ -25,4 +25,7 @@ struct WorstInBand {
 };
 WorstInBand worstIn(const Judge& judge, const Band& band);
 
+/// Whether any direction of the band has tension across the line.
+bool pullsAcross(const TurningState& state, const Band& band);
+
 } // namespace planewright

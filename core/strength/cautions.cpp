@@ -47,18 +47,25 @@ std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, co
     cautions.push_back(PW_TEXT("Strength",
                                "The taper is over 10°: the formula is stated for less (Swedish Wood, "
                                "Design of timber structures, vol. 1; not in the clause)."));
+  if (criterion == Criterion::throat)
+    cautions.push_back(PW_TEXT("Strength",
+                               "A point in plane stress sees one shear on the throat: the other one of "
+                               "EN 1993-1-8, 4.5.3.2 is taken as 0."));
   if (criterion == Criterion::coulomb && !strengths[StrengthKey::cutoff])
     cautions.push_back(
         PW_TEXT("Strength", "No cut-off is given: it counts as 0, so the plane takes no tension."));
   return cautions;
 }
 
-std::optional<Text> cautionOfMode(const Strengths& strengths, Mode mode) {
-  if (strengths.kind != MaterialKind::timber ||
-      (mode != Mode::tensionAcross && mode != Mode::interaction && mode != Mode::tensionAtAngle))
+std::optional<Text> cautionOfTensionAcross(MaterialKind kind) {
+  if (kind != MaterialKind::timber)
     return std::nullopt;
   return PW_TEXT("Strength", "k_{vol} = 1 in tension across the grain: f_{t,90} is for 0.01 m³, and "
                              "(0.01/V)^0.2 is 0.46 at 0.5 m³ (exponent from memory).");
+}
+
+Text limitOfAllPoints() {
+  return PW_TEXT("Strength", "Stresses at single points only; local codes and a licensed engineer decide.");
 }
 
 std::vector<Text> limitsOfPointChecks(MaterialKind kind) {

@@ -10,11 +10,13 @@ namespace planewright {
 std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, const Parameters& parameters,
                              std::optional<Angle> line);
 
-/// What the mode asks to be said: the volume factor with tension across the grain of timber.
-std::optional<Text> cautionOfMode(const Strengths& strengths, Mode mode);
+/// What tension across the line asks to be said: the volume factor of timber.
+std::optional<Text> cautionOfTensionAcross(MaterialKind kind);
 
 /// What a check of the stress at a point does not see, for materials of this kind; the first is the shortest
 /// and stands with every verdict. Each names its source.
 std::vector<Text> limitsOfPointChecks(MaterialKind kind);
+/// The shortest of them for many points.
+Text limitOfAllPoints();
 
 } // namespace planewright

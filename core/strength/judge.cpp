@@ -34,6 +34,7 @@ Result<Judge> Judge::of(Criterion criterion, const Strengths& strengths, const P
   judge.m_criterion = criterion;
   judge.m_strengths = strengths;
   judge.m_state = {demand.stress, circleOf(demand.stress, demand.scale, demand.sz), demand.scale};
+  judge.m_isUnstressed = demand.stress == PlaneStress{} && demand.sz == 0;
   const ActsOn actsOn = rowOf(criterion).actsOn;
   if (actsOn == ActsOn::principal) {
     Result<Judgement> judgement = judgementOfPrincipals(criterion, strengths, demand);
@@ -68,6 +69,7 @@ double Judge::utilisation(Angle direction) const {
 Judgement Judge::at(Angle direction) const {
   Judgement judgement;
   judgement.utilisation = utilisation(direction);
+  judgement.unstressed = m_isUnstressed;
   for (const Branch& branch : m_branches) {
     const std::optional<double> multiplier = multiplierOf(branch, m_state, direction);
     if (multiplier && (!judgement.multiplier || *multiplier < *judgement.multiplier))

@@ -44,6 +44,7 @@ private:
   TurningState m_state;
   std::vector<Branch> m_branches;
   bool m_hasDirection = true;
+  bool m_isUnstressed = false;
   std::optional<Mode> m_fixedMode;
 };
 

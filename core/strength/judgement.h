@@ -33,7 +33,8 @@ struct Judgement {
   double utilisation = 0;
   /// The multiplier on all actions that brings the point to its limit; none where no multiple does.
   std::optional<double> multiplier = std::nullopt;
-  std::optional<Mode> mode = std::nullopt; ///< none for a state of zero
+  std::optional<Mode> mode = std::nullopt; ///< none where the utilisation is 0
+  bool unstressed = false;                 ///< all stresses of the state are 0
   bool operator==(const Judgement&) const = default;
 };
 

@@ -122,7 +122,7 @@ Result<Uniaxial> uniaxialOf(const Demand& demand) {
                                     "here are %1 and %2 MPa.")
                     .with(written(circle.s1))
                     .with(written(circle.s2)),
-                PW_TEXT("Strength", "Take a criterion for combined stresses, such as sum-of-squares.")));
+                PW_TEXT("Strength", "Take a criterion for combined stresses, such as the sum of squares.")));
   if (!circle.theta1)
     return Uniaxial{};
   return Uniaxial{greater, (firstIsGreater ? circle.theta1 : circle.theta2())->value};

@@ -234,7 +234,10 @@ std::optional<double> slopePerDegree(Judges judges, Angle direction) {
   const double ahead = (-3 * here + 4 * at(h) - at(2 * h)) / (2 * h);
   const double behind = (3 * here - 4 * at(-h) + at(-2 * h)) / (2 * h);
   const double steeper = std::abs(ahead) > std::abs(behind) ? ahead : behind;
-  return std::isfinite(steeper) ? std::optional(steeper) : std::nullopt;
+  if (!std::isfinite(steeper))
+    return std::nullopt;
+  constexpr double errorShare = 1e-7; // of differences
+  return std::abs(steeper) <= errorShare * here ? 0 : steeper;
 }
 
 } // namespace planewright

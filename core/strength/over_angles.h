@@ -37,7 +37,8 @@ struct BestDirection {
 BestDirection bestDirection(Judges judges);
 
 /// Change of the greatest utilisation per degree of the direction; at a corner that of the steeper side.
-/// Differences over 1e-3 deg: good to about 1e-7 of the utilisation. None where there is no finite one.
+/// Differences over 1e-3 deg: good to about 1e-7 of the utilisation, and 0 where it is no more than that.
+/// None where there is no finite one.
 std::optional<double> slopePerDegree(Judges judges, Angle direction);
 
 } // namespace planewright

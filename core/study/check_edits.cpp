@@ -51,6 +51,30 @@ void typeCriterion(Edits& edits, const Point& point, const Check& check, Criteri
       edits.push_back(Type{placeIn(point, check.id, field.spot), ""});
 }
 
+/// Judges one more state by the criterion of a row.
+void judge(SideBySide& row, const Readout& readout, std::size_t index, std::size_t check) {
+  const CheckSetup& setup = readout.checks[check];
+  const StateReading& state = readout.states[index];
+  const CheckReading& reading = state.checks[check];
+  const Result<Judge> judge =
+      reading.hasFactor ? Judge::of(row.criterion, reading.factor.value * setup.strengths,
+                                    row.isChosen ? setup.parameters : Parameters{}, demandOf(readout, state))
+                        : tl::unexpected(*reading.problem);
+  if (!judge) {
+    if (!row.problem)
+      row.problem = judge.error();
+    return;
+  }
+  const Band band = setup.band.value_or(Band{});
+  const Judgement nominal = judge->at(band.nominal);
+  const Judgement worst = judge->hasDirection() ? worstIn(*judge, band).judgement : nominal;
+  if (row.state && worst.utilisation <= row.worst.utilisation)
+    return;
+  row.state = index;
+  row.nominal = nominal;
+  row.worst = worst;
+}
+
 } // namespace
 
 std::optional<Edits> insertionOfCheck(const Study& study, const Point& point, const std::string& material) {
@@ -87,29 +111,22 @@ Edits withDirection(const Point& point, const Check& check, const std::string& n
   return edits;
 }
 
-std::vector<SideBySide> criteriaSideBySide(const Readout& readout, const StateReading& state,
-                                           std::size_t check) {
+Standing SideBySide::standing() const {
+  if (state && worst.utilisation > exceedingFrom)
+    return Standing::exceeds;
+  return problem || !state ? Standing::unjudged : Standing::within;
+}
+
+std::vector<SideBySide> criteriaSideBySide(const Readout& readout, std::size_t check) {
   const CheckSetup& setup = readout.checks[check];
-  const CheckReading& reading = state.checks[check];
   std::vector<SideBySide> rows;
   for (const Criterion criterion : criteriaFor(setup.strengths.kind)) {
     SideBySide& row = rows.emplace_back();
     row.criterion = criterion;
     row.isChosen = criterion == setup.criterion;
-    if (!reading.hasFactor) {
-      row.problem = reading.problem;
-      continue;
-    }
-    const Result<Judge> judge =
-        Judge::of(criterion, reading.factor.value * setup.strengths,
-                  row.isChosen ? setup.parameters : Parameters{}, demandOf(readout, state));
-    if (!judge) {
-      row.problem = judge.error();
-      continue;
-    }
-    const Band band = setup.band.value_or(Band{});
-    row.nominal = judge->at(band.nominal);
-    row.worst = judge->hasDirection() ? worstIn(*judge, band).judgement : row.nominal;
+    for (std::size_t i = 0; i < readout.states.size(); ++i)
+      if (readout.states[i].judged)
+        judge(row, readout, i, check);
   }
   return rows;
 }

@@ -2,7 +2,7 @@
 #pragma once
 
 #include "core/study/edit.h"
-#include "core/study/readout.h"
+#include "core/study/verdict.h"
 
 namespace planewright {
 
@@ -17,17 +17,19 @@ Edits withCriterion(const Point& point, const Check& check, Criterion criterion)
 /// Another line or plane, as the criterion acts on.
 Edits withDirection(const Point& point, const Check& check, const std::string& name);
 
-/// What another criterion says of the same stresses, strengths and directions.
+/// What another criterion says of the same stresses, strengths and directions, over all judged states.
 struct SideBySide {
   Criterion criterion = Criterion::sumOfSquares;
   bool isChosen = false;
-  std::optional<Problem> problem;
-  Judgement nominal;
-  Judgement worst;
+  std::optional<Problem> problem;   ///< of the first state that could not be judged
+  std::optional<std::size_t> state; ///< that governs among those judged; of equals the first
+  Judgement nominal;                ///< there
+  Judgement worst;                  ///< there
+  /// As the verdict of a check: what could not be judged is no reassurance.
+  Standing standing() const;
 };
-/// Every criterion that applies to the material of a check, in one judged state, so that the spread is seen;
-/// parameters count for the chosen one only, others have their usual values.
-std::vector<SideBySide> criteriaSideBySide(const Readout& readout, const StateReading& state,
-                                           std::size_t check);
+/// Every criterion that applies to the material of a check, so that the spread is seen; parameters count for
+/// the chosen one only, others have their usual values.
+std::vector<SideBySide> criteriaSideBySide(const Readout& readout, std::size_t check);
 
 } // namespace planewright

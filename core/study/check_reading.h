@@ -20,6 +20,7 @@ struct StrengthFactor {
   std::optional<Duration> duration; ///< the shortest of the combination, where durations count
   double durationFactor = 1;
   double partialFactor = 1;
+  std::optional<double> betaW; ///< of a weld: its criterion divides f_u by this and by partialFactor
   bool operator==(const StrengthFactor&) const = default;
 };
 
@@ -49,6 +50,7 @@ struct CheckReading {
   Judgement worst;
   std::optional<Angle> worstAngle; ///< unfolded, inside the band
   Text pairing;                    ///< how the basis of loads and strengths do not match; empty where they do
+  std::vector<Text> cautions;      ///< that this combination asks for
   bool exceeds() const { return !problem && worst.utilisation > exceedingFrom; }
   bool operator==(const CheckReading&) const = default;
 };

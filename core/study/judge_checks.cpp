@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/judge_checks.h"
 
+#include "core/quantity/format.h"
 #include "core/strength/cautions.h"
 #include "core/study/text_fields.h"
 #include "core/study/typed.h"
@@ -116,6 +117,41 @@ Result<StrengthFactor> factorOf(const Factors& factors, Duration duration) {
   return factor;
 }
 
+/// A weld carries its own partial factor, by which its criterion divides.
+StrengthFactor factorOfWeld(const Strengths& strengths) {
+  StrengthFactor factor;
+  factor.betaW = strengths[StrengthKey::betaW];
+  factor.partialFactor = strengths[StrengthKey::gammaM2].value_or(1);
+  return factor;
+}
+
+/// Factors that raise a strength by half are rare, a point that was left out is not.
+std::vector<Text> cautionsOfFactor(const StrengthFactor& factor) {
+  constexpr double high = 1.5;
+  if (factor.origin == FactorOrigin::given && factor.value > high)
+    return {
+        PW_TEXT("Strength", "The factor of the strengths is %1, which is above 1.5: see that it is meant.")
+            .with(exactNumber(factor.value))};
+  if (factor.duration && factor.durationFactor > high)
+    return {
+        PW_TEXT("Strength", "The duration factor for “%1” is %2, which is above 1.5: see that it is meant.")
+            .with(labelOf(*factor.duration))
+            .with(exactNumber(factor.durationFactor))};
+  return {};
+}
+
+void addCautionsOfState(CheckReading& reading, const Demand& demand, const Judge& judge,
+                        const CheckSetup& setup) {
+  if (!setup.line.empty() && setup.band && pullsAcross(judge.state(), *setup.band))
+    if (auto caution = cautionOfTensionAcross(setup.strengths.kind))
+      reading.cautions.push_back(*std::move(caution));
+  if (setup.criterion == Criterion::taperedEdge && demand.bendingShare < 1 &&
+      !(demand.stress == PlaneStress{}))
+    reading.cautions.push_back(
+        PW_TEXT("Strength", "The stress along the edge is compared with f_{m}: what is no bending, or is "
+                            "typed as a stress, is taken as bending."));
+}
+
 /// Whether strengths are at design level: given so, or characteristic ones with a partial or typed factor.
 bool isDesign(StrengthBasis basis, const Factors& factors) {
   return basis == StrengthBasis::design ||
@@ -124,40 +160,43 @@ bool isDesign(StrengthBasis basis, const Factors& factors) {
 
 Text pairingOf(StrengthBasis basis, const Factors& factors, MaterialKind kind, Basis loads) {
   if (basis == StrengthBasis::testMean)
-    return PW_TEXT("Strength", "against means of tests: not a design check");
+    return PW_TEXT("Strength", "Against means of tests: not a design check.");
   if (kind == MaterialKind::throat) // carries its own partial factor
     return loads == Basis::design
                ? Text{}
-               : PW_TEXT("Strength", "design strengths of the weld against loads that are not design loads");
+               : PW_TEXT("Strength", "Design strengths of the weld against loads that are not design loads.");
   if (basis == StrengthBasis::allowable)
-    return loads == Basis::design ? PW_TEXT("Strength", "allowable strengths against factored design loads")
+    return loads == Basis::design ? PW_TEXT("Strength", "Allowable strengths against factored design loads.")
                                   : Text{};
   if (!isDesign(basis, factors))
-    return PW_TEXT("Strength", "against characteristic strengths: not a design check");
+    return PW_TEXT("Strength", "Against characteristic strengths: not a design check.");
   return loads == Basis::design
              ? Text{}
-             : PW_TEXT("Strength", "design strengths against loads that are not design loads");
+             : PW_TEXT("Strength", "Design strengths against loads that are not design loads.");
 }
 
 CheckReading judged(const Readout& readout, const StateReading& state, const CheckSetup& setup,
                     const Factors& factors) {
   CheckReading reading;
   reading.pairing = pairingOf(setup.basis, factors, setup.strengths.kind, state.basis);
-  const bool scales = setup.strengths.kind != MaterialKind::throat; // it carries its own partial factor
-  const Result<StrengthFactor> factor =
-      scales ? factorOf(factors, shortestOf(readout, state)) : Result<StrengthFactor>(StrengthFactor{});
+  const Result<StrengthFactor> factor = setup.strengths.kind == MaterialKind::throat
+                                            ? factorOfWeld(setup.strengths)
+                                            : factorOf(factors, shortestOf(readout, state));
   if (!factor) {
     reading.hasFactor = false;
     reading.problem = factor.error();
     return reading;
   }
   reading.factor = *factor;
+  reading.cautions = cautionsOfFactor(*factor);
+  const Demand demand = demandOf(readout, state);
   const Result<Judge> judge =
-      Judge::of(setup.criterion, factor->value * setup.strengths, setup.parameters, demandOf(readout, state));
+      Judge::of(setup.criterion, factor->value * setup.strengths, setup.parameters, demand);
   if (!judge) {
     reading.problem = judge.error();
     return reading;
   }
+  addCautionsOfState(reading, demand, *judge, setup);
   if (!setup.band) {
     reading.nominal = reading.worst = judge->at({});
     return reading;

@@ -10,6 +10,7 @@ namespace {
 
 void add(Verdict& sum, const Verdict& one) {
   sum.standing = std::max(sum.standing, one.standing);
+  sum.stressed = sum.stressed || one.stressed;
   if (!sum.unjudged)
     sum.unjudged = one.unjudged;
   if (one.governing && (!sum.governing || one.governing->utilisation > sum.governing->utilisation))
@@ -24,8 +25,9 @@ Verdict verdictOf(const Readout& readout, std::size_t state, std::size_t check) 
   const CheckReading& reading = readout.states[state].checks[check];
   const JudgedCheck judged{readout.point, state, check, reading.problem ? 0 : reading.worst.utilisation};
   if (reading.problem)
-    return {Standing::unjudged, std::nullopt, judged};
-  return {reading.exceeds() ? Standing::exceeds : Standing::within, judged, std::nullopt};
+    return {Standing::unjudged, std::nullopt, judged, false};
+  return {reading.exceeds() ? Standing::exceeds : Standing::within, judged, std::nullopt,
+          !reading.worst.unstressed};
 }
 
 Verdict verdictOfState(const Readout& readout, std::size_t state) {

@@ -27,6 +27,7 @@ struct Verdict {
   Standing standing = Standing::notChecked;
   std::optional<JudgedCheck> governing; ///< the greatest utilisation; of equals the first
   std::optional<JudgedCheck> unjudged;  ///< the first that could not be judged
+  bool stressed = false;                ///< anything that was judged has a stress
   bool operator==(const Verdict&) const = default;
 };
 

@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/table/cautions.h"
 
-#include "core/quantity/format.h"
 #include "core/study/envelope.h"
+#include "core/table/few_names.h"
 
 #include <algorithm>
 
@@ -70,24 +70,16 @@ std::vector<Text> cautionsOf(const Readout& readout) {
 std::vector<Text> cautionsOfEnvelope(const Readout& readout) {
   if (judgedStates(readout) < 2)
     return {};
-  constexpr std::size_t mostNamed = 3;
-  std::string names;
-  std::size_t count = 0;
+  std::vector<std::string> names;
   for (const StateReading& state : readout.states) {
     if (!state.judged || state.acting.empty() || missingCases(readout, state).size() < state.acting.size())
       continue;
-    if (count < mostNamed)
-      names += (count == 0 ? "" : ", ") + state.combination;
-    ++count;
+    names.push_back(state.combination);
   }
-  if (count == 0)
+  if (names.empty())
     return {};
-  const Text named = count <= mostNamed ? verbatim(names)
-                                        : PW_TEXT("Readout", "%1 and %2 more")
-                                              .with(names)
-                                              .with(exactNumber(static_cast<double>(count - mostNamed)));
   return {PW_TEXT("Readout", "Least and greatest values count 0 for %1: none of its cases is listed here.")
-              .with(named)};
+              .with(fewOf(names))};
 }
 
 } // namespace planewright

@@ -5,6 +5,7 @@
 #include "core/strength/cautions.h"
 #include "core/strength/shown_ratio.h"
 #include "core/study/judge_checks.h"
+#include "core/table/few_names.h"
 
 #include <algorithm>
 #include <cmath>
@@ -30,9 +31,10 @@ Text lineOrPlane(const CheckSetup& check) {
 Text ranges(const std::vector<Within>& within) {
   Text all;
   for (const Within& one : within) {
-    const Text range = PW_TEXT("Check", "from %1 to %2")
-                           .with(shownDegrees(roundedTo(one.from, endDecimals, true), endDecimals))
-                           .with(shownDegrees(roundedTo(one.to, endDecimals, false), endDecimals));
+    const ShownEnds ends = shownEndsOf(one);
+    const Text words = one.to.degrees() > 90 ? PW_TEXT("Check", "from %1 over 90° to %2")
+                                             : PW_TEXT("Check", "from %1 to %2");
+    const Text range = words.with(ends.from).with(ends.to);
     all = all.empty() ? range : PW_TEXT("Check", "%1 and %2").with(all).with(range);
   }
   return all;
@@ -47,9 +49,81 @@ bool isJudgedAllRound(const Readout& readout, std::size_t check) {
   return readout.checks[check].band && !verdictOfCheck(readout, check).unjudged;
 }
 
-Text signedSlope(double slope) {
-  const std::string size = shownNumber(std::abs(slope), decimalsFor(std::abs(slope), 2));
-  return verbatim((slope < 0 ? "−" : "+") + size);
+Text slopeSentence(double slope) {
+  if (slope == 0)
+    return PW_TEXT("Check", "Utilisation stands still at the nominal direction.");
+  const Text words = slope > 0
+                         ? PW_TEXT("Check", "Utilisation grows by %1 per degree counter-clockwise at the "
+                                            "nominal direction.")
+                         : PW_TEXT("Check", "Utilisation grows by %1 per degree clockwise at the nominal "
+                                            "direction.");
+  return words.with(shownNumber(std::abs(slope), decimalsFor(std::abs(slope), 2)));
+}
+
+Text bestSentence(const CheckSetup& check, const BestDirection& best) {
+  const Text words = check.plane.empty()
+                         ? PW_TEXT("Check", "Least utilisation %1 at %2 (for choosing a fibre direction, not "
+                                            "for re-describing a member).")
+                         : PW_TEXT("Check", "Least utilisation %1 at %2 (for choosing the direction of a "
+                                            "joint, not for re-describing one that is there).");
+  return words.with(shownUtilisation(best.utilisation)).with(shownDegrees(best.angle, endDecimals));
+}
+
+/// "n = 2.5": the parameter, of which a criterion has one at most, where it is not the usual value.
+Text unusualOf(const Parameters& given) {
+  if (given.n && *given.n != 2)
+    return symbol("n = %1").with(exactNumber(*given.n));
+  if (given.F12)
+    return symbol("F_{12} = %1 MPa⁻²").with(shownNumber(*given.F12, decimalsFor(std::abs(*given.F12))));
+  if (given.kc90 && *given.kc90 != 1)
+    return symbol("k_{c,90} = %1").with(exactNumber(*given.kc90));
+  if (given.edge)
+    return PW_TEXT("Check", "edge at %1").with(shownDegrees(*given.edge, angleDecimals));
+  return {};
+}
+
+/// One way in which bases do not match, and where.
+struct Mismatch {
+  Text what;
+  std::vector<std::string> materials;
+  std::vector<std::string> combinations;
+};
+
+void addNew(std::vector<std::string>& names, const std::string& name) {
+  if (std::ranges::find(names, name) == names.end())
+    names.push_back(name);
+}
+
+std::vector<Text> mismatchesOf(const Readout& readout, std::size_t from, std::size_t to) {
+  std::vector<Mismatch> mismatches;
+  std::vector<std::string> materials;
+  std::vector<std::string> combinations;
+  for (std::size_t i = from; i < to; ++i) {
+    addNew(materials, readout.checks[i].material);
+    for (const StateReading& state : readout.states) {
+      if (!state.judged)
+        continue;
+      addNew(combinations, state.combination);
+      const Text& pairing = state.checks[i].pairing;
+      if (pairing.empty())
+        continue;
+      auto at = std::ranges::find(mismatches, pairing, &Mismatch::what);
+      if (at == mismatches.end())
+        at = mismatches.insert(at, {pairing, {}, {}});
+      addNew(at->materials, readout.checks[i].material);
+      addNew(at->combinations, state.combination);
+    }
+  }
+  std::vector<Text> sentences;
+  for (const Mismatch& one : mismatches) {
+    Text sentence = one.what;
+    if (one.combinations.size() < combinations.size())
+      sentence = PW_TEXT("Check", "%1: %2").with(fewOf(one.combinations)).with(sentence);
+    if (one.materials.size() < materials.size())
+      sentence = PW_TEXT("Check", "%1: %2").with(fewOf(one.materials)).with(sentence);
+    sentences.push_back(sentence);
+  }
+  return sentences;
 }
 
 } // namespace
@@ -63,6 +137,8 @@ const Text& wordOfStanding(Standing standing) {
 Text shortVerdict(const Verdict& verdict) {
   switch (verdict.standing) {
   case Standing::within:
+    if (!verdict.stressed)
+      return PW_TEXT("Check", "within: no stress is given");
     return PW_TEXT("Check", "within, %1 of 1").with(shownUtilisation(verdict.governing->utilisation));
   case Standing::exceeds:
     return PW_TEXT("Check", "exceeds, %1").with(shownUtilisation(verdict.governing->utilisation));
@@ -77,7 +153,9 @@ Text shortVerdict(const Verdict& verdict) {
 Text verdictSentence(const Verdict& verdict) {
   switch (verdict.standing) {
   case Standing::within:
-    return PW_TEXT("Check", "Stress at this point within the stated strengths.");
+    return verdict.stressed
+               ? PW_TEXT("Check", "Stress at this point within the stated strengths.")
+               : PW_TEXT("Check", "No stress is given at this point: none of its strengths is used.");
   case Standing::exceeds:
     return PW_TEXT("Check", "Stress at this point exceeds the stated strengths.");
   case Standing::unjudged:
@@ -85,11 +163,13 @@ Text verdictSentence(const Verdict& verdict) {
   case Standing::notChecked:
     break;
   }
-  return PW_TEXT("Check", "No strengths are given: nothing is judged against any.");
+  return PW_TEXT("Check", "No check yet: nothing is judged against strengths.");
 }
 
 Text checkName(const CheckSetup& check) {
-  const Text name = PW_TEXT("Check", "%1, %2").with(check.material).with(labelOf(check.criterion));
+  Text name = PW_TEXT("Check", "%1, %2").with(check.material).with(labelOf(check.criterion));
+  if (const Text unusual = unusualOf(check.parameters); !unusual.empty())
+    name = PW_TEXT("Check", "%1 (%2)").with(name).with(unusual);
   const std::string& direction = check.line.empty() ? check.plane : check.line;
   return direction.empty() ? name : PW_TEXT("Check", "%1: %2").with(direction).with(name);
 }
@@ -102,23 +182,33 @@ Text shownWorst(const CheckReading& reading) {
   return verbatim(shownUtilisation(reading.worst.utilisation));
 }
 
+Text notJudgedSentence(const Readout& readout, const JudgedCheck& unjudged) {
+  const Problem& problem = *readingOf(readout, unjudged).problem;
+  const Text sentence = PW_TEXT("Check", "Not judged: %1, in %2. %3")
+                            .with(checkName(readout.checks[unjudged.check]))
+                            .with(readout.states[unjudged.state].combination)
+                            .with(problem.what);
+  return problem.mend.empty() ? sentence : PW_TEXT("Check", "%1 %2").with(sentence).with(problem.mend);
+}
+
 Text multiplierSentence(const Judgement& judgement) {
-  if (judgement.utilisation == 0)
+  if (judgement.unstressed)
     return PW_TEXT("Check", "No stress acts.");
   if (!judgement.multiplier)
     return std::isfinite(judgement.utilisation) && judgement.utilisation <= 1
                ? PW_TEXT("Check", "No multiple of all loads reaches the limit.")
                : PW_TEXT("Check", "No multiple of all loads is within the limit.");
   const Text number = verbatim(shownMultiplier(*judgement.multiplier));
-  return *judgement.multiplier >= 1 ? PW_TEXT("Check", "All loads could grow by %1.").with(number)
-                                    : PW_TEXT("Check", "All loads must shrink to %1.").with(number);
+  return *judgement.multiplier >= 1 ? PW_TEXT("Check", "All loads could be multiplied by %1.").with(number)
+                                    : PW_TEXT("Check", "All loads must be multiplied by %1.").with(number);
 }
 
 Text worstSentence(const CheckSetup& check, const CheckReading& reading) {
   if (!check.band || reading.problem || check.band->tolerance == Angle())
     return {};
-  return PW_TEXT("Check", "Worst at %1, inside ± %2; nominal %3.")
+  return PW_TEXT("Check", "Worst at %1, inside %2 ±\u00a0%3; nominal %4.")
       .with(shownDegrees(*reading.worstAngle, angleDecimals))
+      .with(shownDegrees(check.band->nominal, angleDecimals))
       .with(shownDegrees(check.band->tolerance, angleDecimals))
       .with(shownUtilisation(reading.nominal.utilisation));
 }
@@ -129,6 +219,10 @@ Text factorSentence(const StrengthFactor& factor) {
     const double scale = std::pow(10.0, decimalsFor(value, 4));
     return exactNumber(std::round(value * scale) / scale);
   };
+  if (factor.betaW)
+    return PW_TEXT("Check", "f_{u} over β_{w} %1 and γ_{M2} %2.")
+        .with(number(*factor.betaW))
+        .with(number(factor.partialFactor));
   if (factor.origin == FactorOrigin::none)
     return PW_TEXT("Check", "Strengths with factor 1.");
   if (factor.origin == FactorOrigin::given)
@@ -149,11 +243,41 @@ std::vector<Text> cautionsOf(const CheckSetup& check, const CheckReading& readin
   if (!reading.pairing.empty())
     cautions.push_back(reading.pairing);
   cautions.insert(cautions.end(), check.cautions.begin(), check.cautions.end());
-  if (!reading.problem && reading.worst.mode)
-    if (auto caution = cautionOfMode(check.strengths, *reading.worst.mode))
-      cautions.push_back(*std::move(caution));
+  cautions.insert(cautions.end(), reading.cautions.begin(), reading.cautions.end());
   cautions.push_back(limitsOfPointChecks(check.strengths.kind).front());
   return cautions;
+}
+
+std::vector<Text> mismatchesOf(const Readout& readout) {
+  return mismatchesOf(readout, 0, readout.checks.size());
+}
+
+std::vector<Text> mismatchesOf(const Readout& readout, std::size_t check) {
+  return mismatchesOf(readout, check, check + 1);
+}
+
+std::vector<Text> cautionsOf(const Readout& readout, std::size_t check) {
+  const CheckSetup& setup = readout.checks[check];
+  std::vector<Text> cautions = mismatchesOf(readout, check);
+  cautions.insert(cautions.end(), setup.cautions.begin(), setup.cautions.end());
+  for (const StateReading& state : readout.states)
+    if (state.judged)
+      for (const Text& caution : state.checks[check].cautions)
+        if (std::ranges::find(cautions, caution) == cautions.end())
+          cautions.push_back(caution);
+  cautions.push_back(limitsOfPointChecks(setup.strengths.kind).front());
+  return cautions;
+}
+
+ShownEnds shownEndsOf(const Within& within) {
+  constexpr int mostDecimals = 6;
+  for (int decimals = endDecimals;; ++decimals) {
+    const Angle from = roundedTo(within.from, decimals, true);
+    const Angle to = roundedTo(within.to, decimals, false);
+    if (from <= to || decimals == mostDecimals)
+      return {shownDegrees(from, decimals),
+              shownDegrees(to.degrees() > 90 ? to - Angle::fromDegrees(180) : to, decimals)};
+  }
 }
 
 std::vector<Within> directionsWithin(const Readout& readout, std::size_t check) {
@@ -169,7 +293,8 @@ std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_
   directions.within = withinLimit(judges);
   directions.allowed = allowedTolerance(directions.within, setup.band->nominal);
   directions.slope = slopePerDegree(judges, setup.band->nominal);
-  directions.best = bestDirection(judges);
+  if (setup.strengths.kind != MaterialKind::throat)
+    directions.best = bestDirection(judges);
   return directions;
 }
 
@@ -185,16 +310,12 @@ std::vector<Text> sentencesOf(const CheckSetup& check, const DirectionsOfCheck& 
                             .with(ranges(directions.within)));
   if (directions.allowed && !isHalfTurn(directions.within))
     sentences.push_back(
-        PW_TEXT("Check", "Tolerance could be ± %1.")
+        PW_TEXT("Check", "Tolerance could be ±\u00a0%1.")
             .with(shownDegrees(roundedTo(*directions.allowed, endDecimals, false), endDecimals)));
   if (directions.slope)
-    sentences.push_back(PW_TEXT("Check", "%1 per degree.").with(signedSlope(*directions.slope)));
-  if (std::isfinite(directions.best.utilisation))
-    sentences.push_back(
-        PW_TEXT("Check", "Least utilisation %1 at %2 (for choosing a fibre or scarf direction, not for "
-                         "re-describing a member).")
-            .with(shownUtilisation(directions.best.utilisation))
-            .with(shownDegrees(directions.best.angle, endDecimals)));
+    sentences.push_back(slopeSentence(*directions.slope));
+  if (directions.best && std::isfinite(directions.best->utilisation))
+    sentences.push_back(bestSentence(check, *directions.best));
   return sentences;
 }
 

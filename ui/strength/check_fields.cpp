@@ -4,6 +4,7 @@
 #include "core/study/check_edits.h"
 #include "core/study/strength_rules.h"
 #include "core/table/check_words.h"
+#include "ui/entry/value_echo.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 
@@ -16,6 +17,20 @@
 namespace planewright {
 
 namespace {
+
+/// What an empty parameter counts as.
+QString usualOf(Spot spot) {
+  switch (spot) {
+  case Spot::checkN:
+    return CheckFields::tr("2, usual");
+  case Spot::checkKc90:
+    return CheckFields::tr("1, usual");
+  case Spot::checkF12:
+    return CheckFields::tr("−0.5 √(F₁₁ F₂₂), usual");
+  default:
+    return {};
+  }
+}
 
 QLabel* captionOf(const QString& words, QWidget* parent) {
   auto* label = new QLabel(words, parent);
@@ -68,6 +83,12 @@ void CheckFields::addParameter(Spot spot, const QString& meaning) {
     const Check* now = check();
     return Place{spot, shownPoint(study).name, now ? now->id : std::string()};
   });
+  binding.echo = [this, spot](const Study& study, const Readout&, const std::string& typed) {
+    const Check* now = check();
+    if (typed.empty() || !now)
+      return usualOf(spot);
+    return echoOfValue(study, {spot, shownPoint(study).name, now->id}, typed);
+  };
   auto* field = new EntryField(m_desk, std::move(binding), {rowOf(spot).label, meaning}, this);
   auto* grid = static_cast<QGridLayout*>(layout());
   grid->addWidget(field, grid->rowCount(), 0, 1, 2);

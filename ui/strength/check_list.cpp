@@ -78,8 +78,9 @@ void CheckList::refresh() {
     const std::optional<JudgedCheck>& told =
         verdict.standing == Standing::unjudged ? verdict.unjudged : verdict.governing;
     const QString name = shown(checkName(readout.checks[i]));
-    const QString worst = told ? markOf(verdict.standing) + shown(shownWorst(readingOf(readout, *told)))
-                               : shown(wordOfStanding(verdict.standing));
+    const QString worst = told && verdict.standing == Standing::within && !verdict.stressed ? tr("no stress")
+                          : told ? markOf(verdict.standing) + shown(shownWorst(readingOf(readout, *told)))
+                                 : shown(wordOfStanding(verdict.standing));
     auto* item = new QTreeWidgetItem(this, {name, worst});
     item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
     item->setToolTip(0, name);

@@ -4,7 +4,6 @@
 #include "core/strength/cautions.h"
 #include "core/strength/shown_ratio.h"
 #include "core/study/check_edits.h"
-#include "core/study/verdict.h"
 #include "core/table/check_words.h"
 #include "ui/look/look.h"
 
@@ -19,14 +18,6 @@
 namespace planewright {
 
 namespace {
-
-/// The shown state where it is judged, else the one that governs.
-std::size_t stateFor(const Readout& readout, std::size_t check) {
-  if (readout.state().judged)
-    return readout.shown;
-  const Verdict verdict = verdictOfCheck(readout, check);
-  return verdict.governing ? verdict.governing->state : verdict.unjudged->state;
-}
 
 QString remarkOf(const SideBySide& row, const CheckSetup& setup) {
   if (row.problem)
@@ -44,7 +35,7 @@ SideBySideDialog::SideBySideDialog(Desk& desk, std::string check, QWidget* paren
   setWindowTitle(tr("All criteria side by side"));
   setAttribute(Qt::WA_DeleteOnClose);
   m_heading->setWordWrap(true);
-  m_table->setHeaderLabels({tr("criterion"), tr("nominal"), tr("worst"), tr("remark")});
+  m_table->setHeaderLabels({tr("criterion"), tr("nominal"), tr("worst"), tr("combination"), tr("remark")});
   m_table->headerItem()->setTextAlignment(1, Qt::AlignRight);
   m_table->headerItem()->setTextAlignment(2, Qt::AlignRight);
   m_table->setRootIsDecorated(false);
@@ -71,18 +62,19 @@ void SideBySideDialog::refresh() {
     return;
   }
   const auto check = static_cast<std::size_t>(at - readout.checks.begin());
-  const StateReading& state = readout.states[stateFor(readout, check)];
-  m_heading->setText(tr("%1 in %2. Which criterion suits the material is for the engineer to decide.")
-                         .arg(shown(checkName(*at)), fromUtf8(state.combination)));
-  for (const SideBySide& row : criteriaSideBySide(readout, state, check)) {
-    const bool judged = !row.problem;
+  m_heading->setText(tr("%1, the worst of all combinations. Which criterion suits the material is for the "
+                        "engineer to decide.")
+                         .arg(shown(checkName(*at))));
+  for (const SideBySide& row : criteriaSideBySide(readout, check)) {
+    const bool hasNumber = row.standing() != Standing::unjudged;
     auto* item = new QTreeWidgetItem(m_table);
     item->setText(0, shown(labelOf(row.criterion)));
-    item->setText(1, judged ? fromUtf8(shownUtilisation(row.nominal.utilisation)) : QString());
-    item->setText(2, judged ? fromUtf8(shownUtilisation(row.worst.utilisation))
-                            : shown(wordOfStanding(Standing::unjudged)));
-    item->setText(3, remarkOf(row, *at));
-    item->setToolTip(3, item->text(3));
+    item->setText(1, hasNumber ? fromUtf8(shownUtilisation(row.nominal.utilisation)) : QString());
+    item->setText(2, hasNumber ? fromUtf8(shownUtilisation(row.worst.utilisation))
+                               : shown(wordOfStanding(Standing::unjudged)));
+    item->setText(3, hasNumber ? fromUtf8(readout.states[*row.state].combination) : QString());
+    item->setText(4, remarkOf(row, *at));
+    item->setToolTip(4, item->text(4));
     item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
     item->setTextAlignment(2, Qt::AlignRight | Qt::AlignVCenter);
     QFont font = m_table->font();

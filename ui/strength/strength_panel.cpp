@@ -196,8 +196,10 @@ void StrengthPanel::refreshGoverns() {
   m_mode->setText(words.join(QLatin1Char(' ')));
   const bool isShown = told->state == readout.shown;
   const QString combination = fromUtf8(readout.states[told->state].combination);
-  m_governs->setText(isShown ? tr("Governs: %1 (shown)").arg(combination)
-                             : tr("Governs: %1").arg(combination));
+  const QString governs = !verdict.governing ? tr("Not judged: %1")
+                          : verdict.unjudged ? tr("Governs among those judged: %1")
+                                             : tr("Governs: %1");
+  m_governs->setText((isShown ? tr("%1 (shown)").arg(governs) : governs).arg(combination));
   m_governs->setEnabled(!isShown);
 }
 
@@ -231,9 +233,7 @@ void StrengthPanel::refresh() {
   const auto directions = directionsOf(readout, *check);
   m_sentences->setText(directions ? lines(sentencesOf(setup, *directions)) : QString());
   m_sentences->setVisible(directions.has_value());
-  const Verdict verdict = verdictOfCheck(readout, *check);
-  const std::optional<JudgedCheck>& told = verdict.governing ? verdict.governing : verdict.unjudged;
-  m_cautions->setText(told ? lines(cautionsOf(setup, readingOf(readout, *told))) : QString());
+  m_cautions->setText(lines(cautionsOf(readout, *check)));
 }
 
 void StrengthPanel::showSideBySide() {

@@ -58,17 +58,19 @@ QString SummaryModel::textOf(int row, int column) const {
   case check:
     return shown(checkName(one.check));
   case utilisation:
-    return one.verdict.standing == Standing::unjudged ? shown(wordOfStanding(Standing::unjudged))
-                                                      : shown(shownWorst(one.reading));
+    if (one.verdict.standing == Standing::unjudged)
+      return shown(wordOfStanding(Standing::unjudged));
+    return one.verdict.stressed ? shown(shownWorst(one.reading)) : tr("no stress");
   case combination:
     return fromUtf8(one.combination);
   case mode:
     return one.reading.worst.mode && !one.reading.problem ? shown(labelOf(*one.reading.worst.mode))
                                                           : QString();
   case angle:
-    return one.reading.worstAngle && !one.reading.problem
-               ? fromUtf8(shownDegrees(*one.reading.worstAngle, angleDecimals))
-               : QString();
+    if (!one.reading.worstAngle || one.reading.problem)
+      return {};
+    return (one.check.plane.empty() ? tr("line %1") : tr("normal %1"))
+        .arg(fromUtf8(shownDegrees(*one.reading.worstAngle, angleDecimals)));
   default:
     return {};
   }

@@ -50,7 +50,7 @@ SummaryPage::SummaryPage(Desk& desk, QWidget* parent)
   head->addStretch();
   head->addWidget(m_exceeds);
   head->addWidget(m_filter);
-  auto* foot = new QLabel(shown(limitsOfPointChecks(MaterialKind::generic).front()), this);
+  auto* foot = new QLabel(shown(limitOfAllPoints()), this);
   foot->setForegroundRole(QPalette::PlaceholderText);
   auto* rows = new QVBoxLayout(this);
   rows->setContentsMargins(12, 8, 12, 8);

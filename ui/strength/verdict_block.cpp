@@ -24,11 +24,6 @@ Text joined(const Text& first, const Text& second) {
   return PW_TEXT("Check", "%1 %2").with(first).with(second);
 }
 
-/// "(against characteristic strengths: not a design check)".
-Text asSentence(const Text& remark) {
-  return remark.empty() ? remark : PW_TEXT("Check", "(%1)").with(remark);
-}
-
 } // namespace
 
 VerdictBlock::VerdictBlock(Desk& desk, QWidget* parent)
@@ -70,21 +65,22 @@ void VerdictBlock::refresh() {
   const Readout& readout = m_desk.readout();
   const Verdict verdict = verdictOf(readout);
   m_word->setText(shown(wordOfStanding(verdict.standing)));
-  const bool hasNumber = verdict.governing && verdict.standing != Standing::unjudged;
+  const bool hasNumber = verdict.stressed && verdict.governing && verdict.standing != Standing::unjudged;
   m_number->setVisible(hasNumber);
   Text sentences = verdictSentence(verdict);
   if (hasNumber) {
     const CheckReading& reading = readingOf(readout, *verdict.governing);
     m_number->setText(shown(shownWorst(reading)));
-    sentences = joined(sentences, asSentence(reading.pairing));
+    const CheckSetup& check = readout.checks[verdict.governing->check];
+    if (readout.checks.size() > 1)
+      sentences = joined(sentences, PW_TEXT("Check", "By %1.").with(checkName(check)));
     sentences = joined(sentences, multiplierSentence(reading.worst));
-    sentences = joined(sentences, worstSentence(readout.checks[verdict.governing->check], reading));
+    sentences = joined(sentences, worstSentence(check, reading));
   }
-  if (verdict.unjudged) {
-    const Problem& problem = *readingOf(readout, *verdict.unjudged).problem;
-    sentences = joined(sentences, joined(verbatim(readout.states[verdict.unjudged->state].combination + ":"),
-                                         joined(problem.what, problem.mend)));
-  }
+  if (verdict.unjudged)
+    sentences = joined(sentences, notJudgedSentence(readout, *verdict.unjudged));
+  for (const Text& mismatch : mismatchesOf(readout))
+    sentences = joined(sentences, mismatch);
   m_sentences->setText(shownRich(sentences));
   setAccessibleDescription(m_word->text() + QLatin1Char(' ') + m_number->text() + QLatin1Char(' ') +
                            shown(sentences));

@@ -10,7 +10,7 @@ class QLabel;
 namespace planewright {
 
 /// What all checks of the shown point come to over all combinations: the word, the utilisation in large
-/// figures, by how much all loads could grow, where in the band the worst lies.
+/// figures, by how much all loads could be multiplied, where in the band the worst lies.
 class VerdictBlock : public QFrame {
   Q_OBJECT
 

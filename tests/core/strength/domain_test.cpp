@@ -99,9 +99,8 @@ TEST(Cautions, speakWhereACriterionIsKnownToReassure) {
 }
 
 TEST(Cautions, theVolumeFactorIsSaidWithTensionAcrossTheGrain) {
-  EXPECT_TRUE(cautionOfMode(c24(), Mode::tensionAcross));
-  EXPECT_FALSE(cautionOfMode(c24(), Mode::compressionAlong));
-  EXPECT_FALSE(cautionOfMode(graphiteEpoxy(), Mode::tensionAcross));
+  EXPECT_TRUE(cautionOfTensionAcross(MaterialKind::timber));
+  EXPECT_FALSE(cautionOfTensionAcross(MaterialKind::lamina));
 }
 
 // tan = sqrt(tan^2 a + tan^2 b): USDA Wood Handbook for the combination.

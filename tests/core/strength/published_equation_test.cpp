@@ -150,7 +150,7 @@ TEST(LineCriteria, aStateOfZeroHasNoMultiplierAndNoMode) {
   for (const Criterion criterion : criteriaFor(MaterialKind::generic)) {
     const auto judge = Judge::of(criterion, c24(), {}, demandOf({}));
     ASSERT_TRUE(judge) << wordOf(criterion);
-    EXPECT_EQ(judge->at(Angle::fromDegrees(20)), Judgement{}) << wordOf(criterion);
+    EXPECT_EQ(judge->at(Angle::fromDegrees(20)), (Judgement{.unstressed = true})) << wordOf(criterion);
   }
 }
 

@@ -8,6 +8,7 @@
 #include <gtest/gtest.h>
 #include <rapidcheck/gtest.h>
 
+#include <algorithm>
 #include <cmath>
 
 namespace planewright {
@@ -108,9 +109,10 @@ TEST(Checks, basesThatDoNotMatchAreSaid) {
   study.materials[0].partialFactor.clear();
   study.materials[0].durations = {};
   EXPECT_EQ(plain(evaluate(study).states[0].checks[0].pairing),
-            "against characteristic strengths: not a design check");
+            "Against characteristic strengths: not a design check.");
   study.materials[0].basis = StrengthBasis::testMean;
-  EXPECT_EQ(plain(evaluate(study).states[0].checks[0].pairing), "against means of tests: not a design check");
+  EXPECT_EQ(plain(evaluate(study).states[0].checks[0].pairing),
+            "Against means of tests: not a design check.");
 }
 
 TEST(CheckEdits, aNewCheckTakesTheUsualCriterionAndTheFirstLine) {
@@ -176,6 +178,29 @@ TEST(MaterialRules, refuseWhatIsNoStrength) {
   EXPECT_EQ(type(Spot::alongTension, ""), "") << "not given";
 }
 
+TEST(MaterialRules, letAJointHaveCohesionAlone) {
+  Study study = judgedStudy();
+  Material joint;
+  joint.name = "joint";
+  joint.kind = MaterialKind::coulomb;
+  joint.cohesion = "0.5 MPa";
+  study.materials.push_back(joint);
+  const auto type = [&](const std::string& friction) {
+    return refused(study, {Type{{Spot::friction, "joint", {}}, friction}});
+  };
+  EXPECT_EQ(type("0 deg"), "");
+  EXPECT_EQ(type("90 deg"), "An angle of friction is at least 0° and less than 90°.");
+  study = with(study, {Type{{Spot::friction, "joint", {}}, "0 deg"}});
+  study = with(study, withMaterial(study, study.points[0], study.points[0].checks[1], "joint"));
+  study.points[0].stress = {CaseStress{"G", "-5 MPa", "-5 MPa", "0 MPa"},
+                            CaseStress{"S", "-2 MPa", "-1 MPa", "0.1 MPa"}};
+  const Readout readout = evaluate(study);
+  for (const std::size_t state : {0, 1})
+    EXPECT_TRUE(std::isfinite(readout.states[state].checks[1].worst.utilisation))
+        << "nothing is divided by the friction";
+  EXPECT_NE(refused(study, {Type{{Spot::cohesion, "joint", {}}, "0 MPa"}}), "") << "neither would carry";
+}
+
 TEST(References, followMaterialsLinesAndPlanes) {
   Study study = judgedStudy();
   study =
@@ -191,12 +216,38 @@ TEST(References, followMaterialsLinesAndPlanes) {
 
 TEST(SideBySide, hasEveryCriterionOfTheKindAndMarksTheChosen) {
   const Readout readout = evaluate(judgedStudy());
-  const std::vector<SideBySide> rows = criteriaSideBySide(readout, readout.states[1], 0);
+  const std::vector<SideBySide> rows = criteriaSideBySide(readout, 0);
   EXPECT_EQ(rows.size(), criteriaFor(MaterialKind::timber).size());
   for (const SideBySide& row : rows)
     if (row.isChosen) {
       EXPECT_EQ(row.criterion, Criterion::sumOfSquares);
       EXPECT_EQ(row.worst, readout.states[1].checks[0].worst);
+    }
+}
+
+TEST(SideBySide, theRowInUseIsTheVerdictWhateverIsShown) {
+  Study study = judgedStudy();
+  study.points[0].stress[1] = CaseStress{"S", "0.2 MPa", "0 MPa", "0 MPa"};
+  for (const std::string shown : {"1.35 G", "1.35 G + 1.5 S"}) {
+    study.shown.combination = shown;
+    const Readout readout = evaluate(study);
+    const Verdict verdict = verdictOfCheck(readout, 0);
+    const std::vector<SideBySide> rows = criteriaSideBySide(readout, 0);
+    const auto row = std::ranges::find_if(rows, &SideBySide::isChosen);
+    EXPECT_EQ(row->state, verdict.governing->state);
+    EXPECT_EQ(row->worst.utilisation, verdict.governing->utilisation);
+    EXPECT_EQ(row->standing(), verdict.standing);
+  }
+}
+
+TEST(SideBySide, whatIsNotJudgedInOneStateIsNoReassurance) {
+  Study study = judgedStudy();
+  study.points[0].stress[0] = CaseStress{"G", "1 MPa", "0 MPa", "0 MPa"}; // uniaxial, the snow is not
+  for (const SideBySide& row : criteriaSideBySide(evaluate(study), 0))
+    if (row.criterion == Criterion::hankinson) {
+      EXPECT_TRUE(row.problem);
+      EXPECT_EQ(row.state, 0u);
+      EXPECT_EQ(row.standing(), Standing::unjudged);
     }
 }
 

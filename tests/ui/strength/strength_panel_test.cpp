@@ -3,6 +3,7 @@
 
 #include "core/study/verdict.h"
 #include "tests/support/judged_study.h"
+#include "ui/entry/draft_edit.h"
 #include "ui/look/quiet_button.h"
 #include "ui/strength/check_fields.h"
 #include "ui/strength/check_list.h"
@@ -13,6 +14,7 @@
 #include <QMenu>
 #include <QSignalSpy>
 #include <QTest>
+#include <QTreeWidget>
 
 #include <gtest/gtest.h>
 
@@ -90,6 +92,17 @@ TEST_F(StrengthPanelTest, parametersShowWithTheirCriterionOnly) {
   EXPECT_FALSE(fields[0]->isVisible());
 }
 
+TEST_F(StrengthPanelTest, anEmptyParameterSaysWhatItCountsAs) {
+  m_panel.checks().select("grain");
+  type({Spot::checkCriterion, "P1", "grain"}, "hankinson");
+  EntryField& n = *m_panel.fields().fields()[0];
+  EXPECT_EQ(n.echoText(), QStringLiteral("= 2, usual"));
+  QTest::keyClicks(&n.edit(), QStringLiteral("-1"));
+  QTest::keyClick(&n.edit(), Qt::Key_Return);
+  EXPECT_EQ(n.echoText(), QStringLiteral("still 2, usual"));
+  EXPECT_TRUE(n.complaintText().startsWith(QStringLiteral("The parameter n is not greater than 0.")));
+}
+
 TEST_F(StrengthPanelTest, arrowsChooseTheCheckThatThePlotShows) {
   m_panel.checks().setFocus();
   m_panel.checks().select("grain");
@@ -106,6 +119,33 @@ TEST_F(StrengthPanelTest, withoutMaterialsItLeadsToThem) {
   EXPECT_FALSE(m_panel.plot().isVisible());
   QTest::mouseClick(&m_panel.addButton(), Qt::LeftButton);
   EXPECT_EQ(wanted.count(), 1);
+}
+
+TEST_F(StrengthPanelTest, theRowInUseAmongAllCriteriaIsTheVerdict) {
+  for (const std::string& shown : {std::string("1.35 G"), std::string("1.35 G + 1.5 S")}) {
+    m_desk.show("P1", shown);
+    SideBySideDialog dialog(m_desk, "grain", &m_panel);
+    dialog.setAttribute(Qt::WA_DeleteOnClose, false);
+    const QTreeWidgetItem& used = *dialog.table().topLevelItem(0);
+    ASSERT_EQ(used.text(0), QStringLiteral("sum of squares"));
+    EXPECT_EQ(used.text(2), utilisation(0).remove(QStringLiteral("▲ ")));
+    EXPECT_EQ(used.text(3), QStringLiteral("1.35 G + 1.5 S"));
+  }
+}
+
+TEST_F(StrengthPanelTest, aProblemOfAnotherCheckIsNamed) {
+  type({Spot::checkCriterion, "P1", "grain"}, "hankinson");
+  m_panel.checks().select("scarf");
+  EXPECT_TRUE(m_panel.verdict().sentences().contains(
+      QStringLiteral("Not judged: grain: C24, Hankinson, in 1.35 G.")));
+}
+
+TEST_F(StrengthPanelTest, aPointWithoutStressesIsNotPraised) {
+  for (const char* name : {"G", "S"})
+    for (const Spot spot : {Spot::sx, Spot::sy, Spot::txy})
+      type({spot, "P1", name}, "0 MPa");
+  EXPECT_TRUE(m_panel.verdict().sentences().contains(QStringLiteral("No stress is given at this point")));
+  EXPECT_EQ(utilisation(0), QStringLiteral("no stress"));
 }
 
 TEST_F(StrengthPanelTest, allCriteriaStandSideBySide) {

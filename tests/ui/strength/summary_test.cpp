@@ -61,6 +61,15 @@ TEST_F(SummaryTest, enterOpensThePointWithItsGoverningCombination) {
   EXPECT_EQ(m_desk.undoStack()->count(), 0);
 }
 
+TEST_F(SummaryTest, saysWhetherAnAngleIsOfALineOrOfANormal) {
+  for (int row = 0; row < 4; ++row) {
+    const QString check = cell(row, SummaryModel::check);
+    const QString word =
+        check.startsWith(QStringLiteral("scarf")) ? QStringLiteral("normal ") : QStringLiteral("line ");
+    EXPECT_TRUE(cell(row, SummaryModel::angle).startsWith(word)) << check.toStdString();
+  }
+}
+
 TEST_F(SummaryTest, isFilteredByWordsAndByWhatExceeds) {
   QTest::keyClicks(&m_page.filter(), QStringLiteral("glue"));
   EXPECT_EQ(rows(), 2);
