@@ -64,7 +64,7 @@ private:
         left, right, top, size, role, true);
     std::vector<Text> sentences = {checkName(check), verdictSentence(verdict)};
     if (reading.problem)
-      sentences.push_back(reading.problem->what);
+      sentences.push_back(notJudgedSentence(readout, told));
     else {
       sentences.push_back(multiplierSentence(reading.worst));
       sentences.push_back(worstSentence(check, reading));
@@ -73,7 +73,7 @@ private:
     for (const Text& sentence : sentences)
       if (!sentence.empty())
         top = paragraph(sentence, left, right, top, size, Role::ink, false);
-    for (const Text& caution : cautionsOf(check, reading))
+    for (const Text& caution : cautionsOf(readout, told.check))
       top = paragraph(caution, left, right, top, m_setting.small, Role::soft, false);
     return top;
   }
@@ -82,17 +82,21 @@ private:
     const Readout& readout = m_setting.readout;
     const UtilisationCurves curves = utilisationCurvesOf(readout, check);
     const CheckSetup& setup = readout.checks[check];
-    const UtilisationFrame frame = utilisationFrameIn(room, m_setting.small, m_setting.narrow, curves.highest,
-                                                      isFarBeyond(curves.highest), m_setting.order.translate);
+    std::optional<WorstInBand> worst;
+    if (verdict.governing && verdict.governing->check == check)
+      if (const CheckReading& reading = readingOf(readout, *verdict.governing); reading.worstAngle)
+        worst = {reading.worst, *reading.worstAngle};
+    const double keyTop = room.bottom - heightOfKey(curves, m_setting.small);
+    const UtilisationFrame frame =
+        utilisationFrameIn({room.left, room.top, room.right, keyTop}, m_setting.small, m_setting.narrow,
+                           curves.highest, suitsLogarithm(worst), m_setting.order.translate);
+    append(utilisationKey({frame.plot.left, keyTop, room.right, room.bottom}, m_setting.small,
+                          m_setting.narrow, curves, readout.state().combination, m_setting.order.translate));
     append(utilisationGround(frame, setup, directionsWithin(readout, check), m_setting.order.translate));
     for (const UtilisationCurve& other : curves.others)
       append(utilisationLines(frame, other, {Role::other, m_setting.hair, Dash::solid}));
     append(utilisationLines(frame, curves.greatest, {Role::state, m_setting.medium, Dash::shortDash}));
     append(utilisationLines(frame, curves.shown, {Role::state, m_setting.wide, Dash::solid}));
-    std::optional<WorstInBand> worst;
-    if (verdict.governing && verdict.governing->check == check)
-      if (const CheckReading& reading = readingOf(readout, *verdict.governing); reading.worstAngle)
-        worst = {reading.worst, *reading.worstAngle};
     append(utilisationMarks(frame, setup, worst));
   }
 

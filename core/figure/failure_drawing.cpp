@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/failure_drawing.h"
 
+#include "core/figure/metrics.h"
 #include "core/quantity/format.h"
 
 #include <algorithm>
@@ -51,7 +52,9 @@ public:
   explicit Drawing(const FailureFrame& frame) : m_frame(frame) {}
 
   Picture drawn(const std::vector<FailureLine>& lines) {
+    m_names = lines.size() > 1;
     for (const FailureLine& line : lines) {
+      m_role = line.leads ? Role::limit : Role::other;
       for (const double side : {1.0, -1.0})
         drawLine(line, side);
       drawMargin(line);
@@ -64,8 +67,7 @@ private:
   double px(double pixels) const { return pixels * m_frame.unit; }
 
   void stroke(const Stretch& part, double width) {
-    m_picture.parts.emplace_back(
-        Path{{part.from, part.to}, false, Pen{Role::limit, px(width)}, std::nullopt});
+    m_picture.parts.emplace_back(Path{{part.from, part.to}, false, Pen{m_role, px(width)}, std::nullopt});
   }
 
   void drawLine(const FailureLine& line, double side) {
@@ -76,7 +78,7 @@ private:
       const auto part = clipped({place(line.upper[i - 1]), place(line.upper[i])}, m_frame.plot);
       if (!part)
         continue;
-      stroke(*part, lineWidth);
+      stroke(*part, line.leads ? lineWidth : 1);
       hatch(*part, within, walked);
     }
   }
@@ -104,7 +106,7 @@ private:
         Path{{tip, base + px(0.4 * headLength) * across, base - px(0.4 * headLength) * across},
              true,
              std::nullopt,
-             Role::limit});
+             m_role});
   }
 
   void drawMargin(const FailureLine& line) {
@@ -126,15 +128,29 @@ private:
     if (!contains(m_frame.plot, tip))
       return;
     const double side = px(triangle);
-    m_picture.parts.emplace_back(Path{
-        {tip, tip + Vec{-side, -1.7 * side}, tip + Vec{side, -1.7 * side}}, true, std::nullopt, Role::limit});
-    m_picture.parts.emplace_back(Label{tip + Vec{0, -1.7 * side - px(4)},
-                                       runs(verbatim(shownDegrees(line.touch->value, 1)), m_frame.translate),
-                                       m_frame.text, Align::middle, Role::limit, false, true, "first touch"});
+    m_picture.parts.emplace_back(
+        Path{{tip, tip + Vec{-side, -1.7 * side}, tip + Vec{side, -1.7 * side}}, true, std::nullopt, m_role});
+    const std::string angle = shownDegrees(line.touch->value, 1);
+    Label label{tip + Vec{0, -1.7 * side - px(4)},
+                runs(verbatim(m_names ? line.material + " " + angle : angle), m_frame.translate),
+                m_frame.text,
+                Align::middle,
+                m_role,
+                false,
+                true,
+                "first touch"};
+    // Two checks may be touched by the same plane.
+    while (std::ranges::any_of(m_labels, [&](const Box& box) { return overlap(box, boxOf(label)); }))
+      label.at.y -= 1.2 * m_frame.text;
+    m_labels.push_back(boxOf(label));
+    m_picture.parts.emplace_back(std::move(label));
   }
 
   const FailureFrame& m_frame;
   Picture m_picture;
+  std::vector<Box> m_labels;
+  Role m_role = Role::limit; ///< of the line that is drawn
+  bool m_names = false;      ///< several lines say whose they are
 };
 
 } // namespace

@@ -85,6 +85,7 @@ std::optional<Traction> marginEndOf(const CheckSetup& check, const Strengths& st
 
 std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach) {
   std::vector<FailureLine> lines;
+  double greatest = 0;
   const StateReading& state = readout.state();
   const double sense = readout.positive == Positive::tension ? 1 : -1;
   for (std::size_t i = 0; i < state.checks.size(); ++i) {
@@ -97,6 +98,14 @@ std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach) {
       continue;
     FailureLine line;
     line.check = check.id;
+    line.material = check.material;
+    const double utilisation = state.checks[i].worst.utilisation;
+    if (lines.empty() || utilisation > greatest) {
+      for (FailureLine& other : lines)
+        other.leads = false;
+      line.leads = true;
+      greatest = utilisation;
+    }
     line.upper = upperLine(check, strengths, reach);
     line.planeAt = tractionOn(state.stress, NormalAngle{check.band->nominal});
     line.marginEnd = marginEndOf(check, strengths, *judge);

@@ -8,6 +8,8 @@ namespace planewright {
 /// What the strengths of a plane look like on the circle, in N/mm2 and the sense of signs of the study.
 struct FailureLine {
   std::string check;                ///< its id
+  std::string material;             ///< whose strengths it shows
+  bool leads = false;               ///< of the check with the greatest utilisation in the shown state
   std::vector<Traction> upper;      ///< from the side of compression to that of tension, tnt >= 0
   std::optional<NormalAngle> touch; ///< the plane of the shown state that comes nearest to it, or is worst
   Traction touchAt;

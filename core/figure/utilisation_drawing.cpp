@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/utilisation_drawing.h"
 
+#include "core/figure/text_lines.h"
 #include "core/quantity/format.h"
 
 #include <algorithm>
@@ -107,16 +108,16 @@ private:
     std::vector<Box> taken;
     for (const Within& within : m_within)
       if ((within.to - within.from).degrees() < 2 * half) {
-        barEnd(within.from, Align::end, taken);
-        barEnd(within.to, Align::start, taken);
+        const ShownEnds ends = shownEndsOf(within);
+        barEnd(within.from, ends.from, Align::end, taken);
+        barEnd(within.to, ends.to, Align::start, taken);
       }
   }
 
   /// The angle over the end of a bar, on the side away from the bar, where it finds room.
-  void barEnd(Angle end, Align align, std::vector<Box>& taken) {
-    const Text words = verbatim(shownDegrees(folded(end), 1));
+  void barEnd(Angle end, const std::string& shown, Align align, std::vector<Box>& taken) {
     Label one{{m_frame.xOf(folded(end).degrees()), m_frame.plot.bottom - em(barHeight + 0.35)},
-              runs(words, m_translate),
+              runs(verbatim(shown), m_translate),
               m_frame.size,
               align,
               Role::ink,
@@ -167,6 +168,40 @@ double UtilisationFrame::degreesAt(double x) const {
 
 bool isFarBeyond(double highest) {
   return highest > farBeyond;
+}
+
+bool suitsLogarithm(const std::optional<WorstInBand>& worst) {
+  return worst && std::isfinite(worst->judgement.utilisation) && worst->judgement.utilisation > usualTop;
+}
+
+double heightOfKey(const UtilisationCurves& curves, double size) {
+  return curves.greatest.empty() ? 0 : 1.5 * size;
+}
+
+Picture utilisationKey(const Box& row, double size, double pen, const UtilisationCurves& curves,
+                       const std::string& shown, const Translate& translate) {
+  Picture picture;
+  if (curves.greatest.empty())
+    return picture;
+  double left = row.left;
+  const double middle = row.top + 0.7 * size;
+  const auto add = [&](const Text& words, double most, const Pen& sample) {
+    const double start = left + 2.2 * size;
+    const std::vector<Runs> lines = brokenLines(runs(words, translate), most - 2.2 * size, size, false);
+    const Runs& first = lines.front();
+    picture.parts.emplace_back(
+        Path{{{left, middle}, {left + 1.8 * size, middle}}, false, sample, std::nullopt});
+    picture.parts.emplace_back(
+        Label{{start, middle + 0.35 * size}, first, size, Align::start, Role::soft, false, false, {}});
+    left = start + textWidth(first, size, false) + size;
+  };
+  const Text greatest = PW_TEXT("Figure", "greatest of all");
+  const double room = row.right - row.left;
+  const double ofGreatest = 2.4 * size + textWidth(runs(greatest, translate), size, false);
+  if (!curves.shown.empty())
+    add(verbatim(shown), room - ofGreatest - size, {Role::state, 2 * pen, Dash::solid});
+  add(greatest, ofGreatest, {Role::state, 1.4 * pen, Dash::shortDash});
+  return picture;
 }
 
 UtilisationFrame utilisationFrameIn(const Box& room, double size, double pen, double highest,

@@ -30,6 +30,16 @@ UtilisationFrame utilisationFrameIn(const Box& room, double size, double pen, do
                                     bool logarithmic, const Translate& translate);
 /// Whether a logarithmic scale is worth offering.
 bool isFarBeyond(double highest);
+/// Whether the scale is logarithmic until a user chooses another: where the worst of the band would lie over
+/// the linear one.
+bool suitsLogarithm(const std::optional<WorstInBand>& worst);
+
+/// Tells the curves apart in a row of its own: the shown combination and the greatest of all; empty where
+/// there is only one curve.
+Picture utilisationKey(const Box& row, double size, double pen, const UtilisationCurves& curves,
+                       const std::string& shown, const Translate& translate);
+/// Height of that row, 0 where it is empty.
+double heightOfKey(const UtilisationCurves& curves, double size);
 
 /// Band, grid, ticks and their labels, titles, the limit with its hatch above, and the angles within the
 /// limit as bars on the base line.

@@ -69,7 +69,7 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
 }
 
 void UtilisationPlot::setLogarithmic(bool logarithmic) {
-  m_logarithmic = logarithmic;
+  m_chosenScale = logarithmic;
   refresh();
 }
 
@@ -82,18 +82,23 @@ void UtilisationPlot::refresh() {
   const bool wasFar = reachesFar();
   const UtilisationCurves curves = utilisationCurvesOf(m_desk.readout(), *check);
   m_highest = curves.highest;
-  m_logarithmic = m_logarithmic && reachesFar();
-  layOut();
-  drawCurves(curves);
   const Readout& readout = m_desk.readout();
   const CheckSetup& setup = readout.checks[*check];
-  m_ground->show(utilisationGround(m_frame, setup, directionsWithin(readout, *check), translation()),
-                 lookOf(*this));
   std::optional<WorstInBand> worst;
   const Verdict verdict = verdictOfCheck(readout, *check);
   if (verdict.governing)
     if (const CheckReading& reading = readingOf(readout, *verdict.governing); reading.worstAngle)
       worst = {reading.worst, *reading.worstAngle};
+  chooseScale(worst);
+  layOut(curves);
+  drawCurves(curves);
+  Picture ground = utilisationGround(m_frame, setup, directionsWithin(readout, *check), translation());
+  const double bottom = viewport()->height();
+  const Picture key =
+      utilisationKey({m_frame.plot.left, bottom - heightOfKey(curves, textSize), m_frame.plot.right, bottom},
+                     textSize, penUnit, curves, readout.state().combination, translation());
+  ground.parts.insert(ground.parts.end(), key.parts.begin(), key.parts.end());
+  m_ground->show(std::move(ground), lookOf(*this));
   Picture marks = utilisationMarks(m_frame, setup, worst);
   if (hasFocus()) {
     const double x = m_frame.xOf(setup.band->nominal.degrees());
@@ -112,9 +117,17 @@ void UtilisationPlot::refresh() {
     emit reachChanged();
 }
 
-void UtilisationPlot::layOut() {
+/// The scale does not change under a drag, nor is a choice kept where it does not help.
+void UtilisationPlot::chooseScale(const std::optional<WorstInBand>& worst) {
+  if (!reachesFar())
+    m_chosenScale.reset();
+  if (!m_hold)
+    m_logarithmic = reachesFar() && m_chosenScale.value_or(suitsLogarithm(worst));
+}
+
+void UtilisationPlot::layOut(const UtilisationCurves& curves) {
   const planewright::Box room{4, 0, static_cast<double>(viewport()->width()) - 4,
-                              static_cast<double>(viewport()->height())};
+                              viewport()->height() - heightOfKey(curves, textSize)};
   m_frame = utilisationFrameIn(room, textSize, penUnit, m_highest, m_logarithmic, translation());
   const planewright::Box& plot = m_frame.plot;
   const QRectF area(plot.left, plot.top, plot.right - plot.left, plot.bottom - plot.top);

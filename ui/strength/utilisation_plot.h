@@ -60,7 +60,8 @@ private:
     double grip = 0; ///< deg from the cursor to the pointer
   };
 
-  void layOut();
+  void chooseScale(const std::optional<WorstInBand>& worst);
+  void layOut(const UtilisationCurves& curves);
   void drawCurves(const UtilisationCurves& curves);
   void put(QLineSeries& series, const UtilisationCurve& curve);
   std::optional<Place> turnedPlace() const;
@@ -72,6 +73,7 @@ private:
   std::function<std::optional<std::size_t>()> m_selectedIndex;
   UtilisationFrame m_frame;
   bool m_logarithmic = false;
+  std::optional<bool> m_chosenScale; ///< that the user wants logarithmic or not
   double m_highest = 0;
   std::optional<Hold> m_hold;
   KeyStay m_keys;

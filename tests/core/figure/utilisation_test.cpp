@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/figure/failure_drawing.h"
 #include "core/figure/failure_line.h"
 #include "core/figure/figure.h"
 #include "core/figure/metrics.h"
@@ -113,6 +114,48 @@ TEST(FailureLine, isWhereTheUtilisationIsOne) {
       }
     }
   }
+}
+
+TEST(FailureLine, ofSeveralChecksTheWorstLeadsAndTheTrianglesAreNamed) {
+  Study study = judgedStudy();
+  Material weak = study.materials[1];
+  weak.name = "weak";
+  weak.tension = "0.5 MPa";
+  study.materials.push_back(weak);
+  study.points[0].checks.push_back({"second", "weak", Criterion::bond, "", "scarf", {}});
+  const std::vector<FailureLine> lines = failureLinesOf(evaluate(study), 50);
+  ASSERT_EQ(lines.size(), 2);
+  EXPECT_FALSE(lines[0].leads);
+  EXPECT_TRUE(lines[1].leads);
+  const auto at = [](const Traction& one) { return Vec{200 + 20 * one.sn, 200 + 20 * one.tnt}; };
+  const Picture picture = failureDrawing({at, {0, 0, 400, 400}, 1, 12, {}}, lines);
+  std::vector<Label> labels = partsOf<Label>(picture);
+  ASSERT_EQ(labels.size(), 2);
+  EXPECT_TRUE(plain(labels[0].runs).starts_with("glue "));
+  EXPECT_TRUE(plain(labels[1].runs).starts_with("weak "));
+  EXPECT_FALSE(overlap(boxOf(labels[0]), boxOf(labels[1])));
+}
+
+TEST(UtilisationScale, isLogarithmicWhereTheWorstWouldLieOverTheLinearOne) {
+  EXPECT_FALSE(suitsLogarithm(std::nullopt));
+  EXPECT_FALSE(suitsLogarithm(WorstInBand{{1.9}, {}}));
+  EXPECT_TRUE(suitsLogarithm(WorstInBand{{2.1}, {}}));
+  EXPECT_FALSE(suitsLogarithm(WorstInBand{{HUGE_VAL}, {}})) << "no scale shows it";
+}
+
+TEST(UtilisationKey, tellsTheCurvesApartWithinItsRow) {
+  const UtilisationCurves curves = utilisationCurvesOf(readout(), 0);
+  const Picture picture = utilisationKey({10, 0, 210, heightOfKey(curves, 10)}, 10, 1, curves,
+                                         "1.35 G + 1.5 S + a long name of a combination", {});
+  const std::vector<Label> labels = partsOf<Label>(picture);
+  ASSERT_EQ(labels.size(), 2);
+  EXPECT_TRUE(plain(labels[0].runs).starts_with("1.35 G"));
+  EXPECT_EQ(plain(labels[1].runs), "greatest of all");
+  EXPECT_LE(boxOf(labels[1]).right, 210);
+  Study alone = judgedStudy();
+  alone.combinations.pop_back();
+  EXPECT_TRUE(
+      utilisationKey({0, 0, 200, 0}, 10, 1, utilisationCurvesOf(evaluate(alone), 0), "", {}).parts.empty());
 }
 
 TEST(Figure, carriesTheCheckAndItsPlot) {
