@@ -195,7 +195,7 @@ TEST(MaterialRules, letAJointHaveCohesionAlone) {
   study.points[0].stress = {CaseStress{"G", "-5 MPa", "-5 MPa", "0 MPa"},
                             CaseStress{"S", "-2 MPa", "-1 MPa", "0.1 MPa"}};
   const Readout readout = evaluate(study);
-  for (const std::size_t state : {0, 1})
+  for (const std::size_t state : {std::size_t{0}, std::size_t{1}})
     EXPECT_TRUE(std::isfinite(readout.states[state].checks[1].worst.utilisation))
         << "nothing is divided by the friction";
   EXPECT_NE(refused(study, {Type{{Spot::cohesion, "joint", {}}, "0 MPa"}}), "") << "neither would carry";
