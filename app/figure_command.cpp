@@ -126,16 +126,15 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
 /// The readout of the point and combination that the options name, else of those that the study shows.
 Result<Readout> readoutOf(const Study& study, const Arguments& arguments) {
   const std::string* point = arguments.valueOf("--point");
-  std::vector<std::string> names;
-  if (point && !findPoint(study, *point)) {
-    for (const Point& one : study.points)
-      names.push_back(one.name);
-    return tl::unexpected(unknownName("--point", *point, names));
-  }
+  if (point)
+    if (std::optional<Problem> problem = missingPoint(study, *point))
+      return tl::unexpected(*std::move(problem));
   Readout readout = point ? evaluate(study, *point) : evaluate(study);
   const std::string* combination = arguments.valueOf("--combination");
   if (!combination)
     return readout;
+  std::vector<std::string> names;
+  names.reserve(readout.states.size());
   for (const StateReading& state : readout.states)
     names.push_back(state.combination);
   const auto at = std::ranges::find(names, *combination);

@@ -23,4 +23,14 @@ Problem unknownName(const char* option, const std::string& name, const std::vect
           PW_TEXT("Command", "It has: %1.").with(list)};
 }
 
+std::optional<Problem> missingPoint(const Study& study, const std::string& name) {
+  if (findPoint(study, name))
+    return std::nullopt;
+  std::vector<std::string> names;
+  names.reserve(study.points.size());
+  for (const Point& point : study.points)
+    names.push_back(point.name);
+  return unknownName("--point", name, names);
+}
+
 } // namespace planewright

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/study/study.h"
 #include "core/words/names.h"
 #include "core/words/problem.h"
 
@@ -11,6 +12,9 @@ bool hasEnding(const std::string& file, std::string_view ending);
 
 /// That an option names something that the study does not have, with what it has.
 Problem unknownName(const char* option, const std::string& name, const std::vector<std::string>& names);
+
+/// That --point names a point that the study does not have; none where it has it.
+std::optional<Problem> missingPoint(const Study& study, const std::string& name);
 
 /// The value that an option names by its word, `usual` without the option; the Problem lists the words.
 template <class Enum>

@@ -83,17 +83,6 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   return wanted;
 }
 
-std::optional<Problem> missingPoint(const Study& study, const std::vector<std::string>& wanted) {
-  std::vector<std::string> names;
-  names.reserve(study.points.size());
-  for (const Point& point : study.points)
-    names.push_back(point.name);
-  for (const std::string& name : wanted)
-    if (!findPoint(study, name))
-      return unknownName("--point", name, names);
-  return std::nullopt;
-}
-
 Outcome<std::string> bytesOf(const Study& study, const Sheet& sheet, const Wanted& wanted) {
   const std::string carried = wanted.carriesStudy ? writeStudy(study) : std::string();
   if (wanted.isPdf) {
@@ -122,8 +111,9 @@ Outcome<Delivery> writtenSheet(std::span<const std::string> words) {
   const Outcome<Study> study = studyIn(arguments->operands.front());
   if (!study)
     return tl::unexpected(study.error());
-  if (std::optional<Problem> problem = missingPoint(*study, wanted->order.points))
-    return wrongUse(*std::move(problem));
+  for (const std::string& name : wanted->order.points)
+    if (std::optional<Problem> problem = missingPoint(*study, name))
+      return wrongUse(*std::move(problem));
   SheetOrder order = wanted->order;
   if (const std::string* earlier = arguments->valueOf("--since")) {
     Outcome<Study> since = studyIn(*earlier);
@@ -132,12 +122,13 @@ Outcome<Delivery> writtenSheet(std::span<const std::string> words) {
     order.earlier = *std::move(since);
     order.earlierName = studyNameOf(*earlier);
   }
-  const Sheet sheet = sheetOf(*study, order);
+  const std::vector<Readout> points = readoutsOf(*study, order.points);
+  const Sheet sheet = sheetOf(*study, points, order);
   Outcome<std::string> bytes = bytesOf(*study, sheet, *wanted);
   if (!bytes)
     return tl::unexpected(std::move(bytes).error());
   Delivery delivery{*std::move(bytes), wanted->file};
-  addVerdict(delivery, readoutsOf(*study, wanted->order.points));
+  addVerdict(delivery, points);
   if (sheet.disagrees) {
     delivery.exit = Exit::disagrees;
     delivery.facts.push_back(sheet.routes);

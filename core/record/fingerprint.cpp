@@ -66,28 +66,25 @@ Signings signingsOf(const Study& study) {
           signingOf(title.checked, title.checkedFor, fingerprint)};
 }
 
+namespace {
+
+Text shownName(const std::string& name, Signing signing, const Text& changed) {
+  if (signing == Signing::changed)
+    return changed.with(name);
+  return signing == Signing::unbound ? PW_TEXT("Signing", "%1, for an unknown state").with(name)
+                                     : verbatim(name);
+}
+
+} // namespace
+
 Text shownPrepared(const Study& study) {
-  const std::string& name = study.title.prepared;
-  switch (signingsOf(study).prepared) {
-  case Signing::changed:
-    return PW_TEXT("Signing", "%1, changed since prepared").with(name);
-  case Signing::unbound:
-    return PW_TEXT("Signing", "%1, for an unknown state").with(name);
-  default:
-    return verbatim(name);
-  }
+  return shownName(study.title.prepared, signingsOf(study).prepared,
+                   PW_TEXT("Signing", "%1, changed since prepared"));
 }
 
 Text shownChecked(const Study& study) {
-  const std::string& name = study.title.checked;
-  switch (signingsOf(study).checked) {
-  case Signing::changed:
-    return PW_TEXT("Signing", "%1, changed since checked").with(name);
-  case Signing::unbound:
-    return PW_TEXT("Signing", "%1, for an unknown state").with(name);
-  default:
-    return verbatim(name);
-  }
+  return shownName(study.title.checked, signingsOf(study).checked,
+                   PW_TEXT("Signing", "%1, changed since checked"));
 }
 
 Result<Study> editedAndSigned(const Study& study, const Edits& edits) {

@@ -5,6 +5,7 @@
 #include "core/evidence/misprints.h"
 #include "core/evidence/trust.h"
 #include "core/quantity/format.h"
+#include "core/report/digits.h"
 #include "core/report/route_words.h"
 #include "core/report/sheet_writer.h"
 #include "core/words/version.h"
@@ -15,10 +16,6 @@
 namespace planewright {
 
 namespace {
-
-std::string digits(std::size_t number) {
-  return exactNumber(static_cast<double>(number));
-}
 
 std::string number(double value) {
   return shownNumber(value, decimalsFor(std::abs(value), 6));

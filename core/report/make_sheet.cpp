@@ -110,7 +110,10 @@ Text identityOf(const Study& study, const SheetOrder& order) {
 } // namespace
 
 Sheet sheetOf(const Study& study, const SheetOrder& order) {
-  const std::vector<Readout> points = readoutsOf(study, order.points);
+  return sheetOf(study, readoutsOf(study, order.points), order);
+}
+
+Sheet sheetOf(const Study& study, const std::vector<Readout>& points, const SheetOrder& order) {
   const RouteComparison routes = comparedRoutes(points);
   const Verdict verdict = verdictOf(points);
   SheetWriter writer;
@@ -122,7 +125,7 @@ Sheet sheetOf(const Study& study, const SheetOrder& order) {
   writeInputs(writer, study, points);
   for (const Readout& readout : points)
     writePoint(writer, study, readout, order);
-  writeRoutes(writer, study, points, routes);
+  writeRoutes(writer, points, routes);
   if (order.earlier)
     writeChanges(writer, *order.earlier, study, order.earlierName);
   writeClosing(writer, study, points);

@@ -34,5 +34,7 @@ std::vector<Readout> readoutsOf(const Study& study, const std::vector<std::strin
 /// with its value; for each point where its stresses come from, the working, the checks, all combinations;
 /// the second route; conclusion, cautions, what is not covered; lines to sign; sources of the formulas.
 Sheet sheetOf(const Study& study, const SheetOrder& order);
+/// The same where the readouts of its points are at hand.
+Sheet sheetOf(const Study& study, const std::vector<Readout>& points, const SheetOrder& order);
 
 } // namespace planewright

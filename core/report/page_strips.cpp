@@ -23,6 +23,17 @@ PicturePart moved(PicturePart part, Vec offset) {
   return part;
 }
 
+Label lettering(Runs runs, double size, Vec at, Role role, bool bold, Align align) {
+  Label label;
+  label.runs = std::move(runs);
+  label.size = size;
+  label.at = at;
+  label.role = role;
+  label.bold = bold;
+  label.align = align;
+  return label;
+}
+
 namespace {
 
 constexpr double body = points(9);
@@ -46,18 +57,6 @@ public:
   }
 
 private:
-  Label label(Runs runs, double size, Vec at, Role role = Role::ink, bool bold = false,
-              Align align = Align::start) const {
-    Label label;
-    label.runs = std::move(runs);
-    label.size = size;
-    label.at = at;
-    label.role = role;
-    label.bold = bold;
-    label.align = align;
-    return label;
-  }
-
   static Path rule(double fromX, double toX, double y, double width, Role role = Role::ink) {
     return {{{fromX, y}, {toX, y}}, false, Pen{role, width, Dash::solid}, std::nullopt};
   }
@@ -72,7 +71,7 @@ private:
     strip.keepsWithNext = true;
     double base = 0.9 * size;
     for (const Runs& line : brokenLines(runs(words, m_translate), m_width, size, true)) {
-      strip.parts.emplace_back(label(line, size, {0, base}, Role::ink, true));
+      strip.parts.emplace_back(lettering(line, size, {0, base}, Role::ink, true));
       base += 1.25 * size;
     }
     base -= 1.25 * size;
@@ -95,7 +94,7 @@ private:
       PageStrip strip;
       strip.before = i == 0 ? 1.2 : 0;
       strip.height = lineHeight;
-      strip.parts.emplace_back(label(lines[i], body, {indent, 0.76 * lineHeight}, role, strong));
+      strip.parts.emplace_back(lettering(lines[i], body, {indent, 0.76 * lineHeight}, role, strong));
       // Two lines stay together at either end of a paragraph.
       strip.keepsWithNext = i + 1 < lines.size() && (i == 0 || i + 2 == lines.size());
       if (text.voice == Voice::caution)
@@ -116,8 +115,8 @@ private:
       const bool bold = i == 0;
       const double size = points(bold ? 10 : 9);
       for (const Runs& line : brokenLines(runs(box.lines[i], m_translate), m_width - 2 * inner, size, bold)) {
-        strip.parts.emplace_back(
-            label(line, size, {inner, y + 0.8 * size}, bold && box.alarms ? Role::limit : Role::ink, bold));
+        strip.parts.emplace_back(lettering(line, size, {inner, y + 0.8 * size},
+                                           bold && box.alarms ? Role::limit : Role::ink, bold));
         y += 1.42 * size;
       }
     }
@@ -145,7 +144,7 @@ private:
       const double base = strip.height + above;
       if (i == 0) {
         firstBase = base;
-        strip.parts.emplace_back(label({{"=", false}}, body, {symbolWidth, base}, role));
+        strip.parts.emplace_back(lettering({{"=", false}}, body, {symbolWidth, base}, role));
       }
       append(strip, lines[i], {symbolWidth + 1.3 * body, base});
       strip.height = base + below + 0.8;
@@ -161,7 +160,7 @@ private:
     strip.height = 0;
     if (!step.name.empty()) {
       const Runs name = elided(runs(step.name, m_translate), m_width, small, false);
-      strip.parts.emplace_back(label(name, small, {symbolWidth, 0.8 * smallLine}, Role::soft));
+      strip.parts.emplace_back(lettering(name, small, {symbolWidth, 0.8 * smallLine}, Role::soft));
       strip.height = smallLine + 0.5;
     }
     const double base = addLines(
@@ -172,23 +171,17 @@ private:
                Role::soft);
     const Runs symbolRuns = runs(step.symbol, m_translate);
     const double symbolSize = std::min(1.0, (symbolWidth - 1) / textWidth(symbolRuns, body, false)) * body;
-    strip.parts.emplace_back(label(symbolRuns, symbolSize, {0, base}));
+    strip.parts.emplace_back(lettering(symbolRuns, symbolSize, {0, base}));
+    const ShownValue shown = shownValue(step);
     const double right = m_width - besideFormula + symbolWidth + resultGap;
     strip.parts.emplace_back(
-        label({{shownValue(step), false}}, body, {right, base}, Role::ink, true, Align::end));
-    if (step.unit != "°" && !step.unit.empty())
-      strip.parts.emplace_back(label({{step.unit, false}}, body, {right + unitGap, base}));
+        lettering({{shown.number, false}}, body, {right, base}, Role::ink, true, Align::end));
+    if (!shown.unit.empty())
+      strip.parts.emplace_back(lettering({{shown.unit, false}}, body, {right + unitGap, base}));
     if (!block.reference.empty())
       strip.parts.emplace_back(
-          label({{block.reference, false}}, small, {m_width, base}, Role::soft, false, Align::end));
+          lettering({{block.reference, false}}, small, {m_width, base}, Role::soft, false, Align::end));
     add(std::move(strip));
-  }
-
-  static std::string shownValue(const Step& step) {
-    std::string shown = shownResult(step);
-    if (step.unit == "°" || step.unit.empty())
-      return shown;
-    return shown.substr(0, shown.size() - step.unit.size() - 1);
   }
 
   void set(const SheetTable& table) {
@@ -204,7 +197,7 @@ private:
       strip.parts.push_back(moved(part, {left, 0}));
     strip.height = figure.picture.height;
     for (const Runs& line : brokenLines(runs(figure.caption, m_translate), m_width, small, false)) {
-      strip.parts.emplace_back(label(line, small, {0, strip.height + smallLine}, Role::soft));
+      strip.parts.emplace_back(lettering(line, small, {0, strip.height + smallLine}, Role::soft));
       strip.height += smallLine;
     }
     strip.height += 1.5;
@@ -222,12 +215,13 @@ private:
     for (std::size_t i = 0; i < columns.size(); ++i) {
       const double left = across * static_cast<double>(i);
       strip.parts.emplace_back(rule(left, left + across - 5, 14, 0.25));
-      strip.parts.emplace_back(label(runs(columns[i].first, m_translate), small, {left, 17.2}, Role::soft));
+      strip.parts.emplace_back(
+          lettering(runs(columns[i].first, m_translate), small, {left, 17.2}, Role::soft));
       double base = 12.6;
       const std::vector<Runs> name =
           brokenLines(runs(columns[i].second, m_translate), across - 5, body, false);
       for (std::size_t line = name.size(); line > 0; --line, base -= lineHeight)
-        strip.parts.emplace_back(label(name[line - 1], body, {left, base}));
+        strip.parts.emplace_back(lettering(name[line - 1], body, {left, base}));
     }
     add(std::move(strip));
   }

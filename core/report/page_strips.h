@@ -25,6 +25,10 @@ std::vector<PageStrip> stripsOf(const Sheet& sheet, double width, const Translat
 /// A part moved by an offset.
 PicturePart moved(PicturePart part, Vec offset);
 
+/// A label with its base line at a place.
+Label lettering(Runs runs, double size, Vec at, Role role = Role::ink, bool bold = false,
+                Align align = Align::start);
+
 /// Points of type in mm.
 constexpr double points(double size) {
   return size * 25.4 / 72;

@@ -2,6 +2,7 @@
 #include "core/quantity/format.h"
 #include "core/record/fingerprint.h"
 #include "core/report/comparison.h"
+#include "core/report/digits.h"
 #include "core/report/route_words.h"
 #include "core/report/sheet_writer.h"
 #include "core/study/verdict.h"
@@ -14,15 +15,10 @@ namespace planewright {
 
 namespace {
 
-std::string digits(std::size_t number) {
-  return exactNumber(static_cast<double>(number));
-}
-
-SheetTable routeTable(const Study& study, const std::vector<RouteRow>& rows, bool withPlace) {
+SheetTable routeTable(const std::vector<RouteRow>& rows, bool withPlace) {
   SheetTable table;
   if (withPlace)
     table.columns = {{PW_TEXT("Sheet", "Point, combination"), false}};
-  const std::string unit = stressUnitOf(study).name;
   table.columns.push_back({PW_TEXT("Sheet", "Quantity"), false});
   table.columns.push_back({withUnit(PW_TEXT("Sheet", "First route"), "MPa")});
   table.columns.push_back({withUnit(PW_TEXT("Sheet", "Second route"), "MPa")});
@@ -42,8 +38,7 @@ SheetTable routeTable(const Study& study, const std::vector<RouteRow>& rows, boo
 
 } // namespace
 
-void writeRoutes(SheetWriter& sheet, const Study& study, const std::vector<Readout>& points,
-                 const RouteComparison& routes) {
+void writeRoutes(SheetWriter& sheet, const std::vector<Readout>& points, const RouteComparison& routes) {
   sheet.heading(PW_TEXT("Sheet", "Second route within this program"));
   sheet.text(PW_TEXT(
       "Sheet", "Every result is worked out again by another way: the stress tensor as a matrix, summed "
@@ -54,12 +49,12 @@ void writeRoutes(SheetWriter& sheet, const Study& study, const std::vector<Reado
   sheet.text(routesSentence(routes), routes.agrees() ? Voice::plain : Voice::strong);
   if (!routes.agrees()) {
     sheet.subheading(PW_TEXT("Sheet", "Where the two routes disagree"));
-    sheet.table(routeTable(study, routes.disagree, true));
+    sheet.table(routeTable(routes.disagree, true));
   }
   for (const Readout& readout : points) {
     const std::size_t governing = governingStateOf(readout);
     sheet.subheading(PW_TEXT("Sheet", "Both routes at %1").with(pointAndState(readout, governing)));
-    sheet.table(routeTable(study, secondRouteOf(readout, readout.states[governing]), false));
+    sheet.table(routeTable(secondRouteOf(readout, readout.states[governing]), false));
   }
   sheet.text(PW_TEXT("Sheet", "Differences are parts of the size of the terms. Compared: %1 results.")
                  .with(digits(routes.compared)),

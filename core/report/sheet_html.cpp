@@ -106,14 +106,12 @@ private:
 
   void write(const SheetStep& block) {
     const Step& step = block.step;
-    const bool isAngle = step.unit == "°" || step.unit.empty();
-    const std::string shown = shownResult(step);
-    const std::string value = isAngle ? shown : shown.substr(0, shown.size() - step.unit.size() - 1);
+    const ShownValue shown = shownValue(step);
     m_out += "<div class=\"step\">";
     if (!step.name.empty())
       m_out += tagged("span", words(step.name), "name");
     m_out += tagged("span", words(step.symbol)) + tagged("span", "= " + mathml(step.formula)) +
-             tagged("b", markupOf(value)) + tagged("span", isAngle ? "" : markupOf(step.unit)) +
+             tagged("b", markupOf(shown.number)) + tagged("span", markupOf(shown.unit)) +
              tagged("span", markupOf(block.reference), "ref");
     if (!step.putIn.empty())
       m_out += tagged("span", "= " + mathml(step.formula, &step.putIn), "put");

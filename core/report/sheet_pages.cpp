@@ -3,7 +3,7 @@
 
 #include "core/figure/metrics.h"
 #include "core/figure/text_lines.h"
-#include "core/quantity/format.h"
+#include "core/report/digits.h"
 #include "core/report/page_flow.h"
 
 #include <algorithm>
@@ -30,10 +30,6 @@ constexpr double footHeight = 10;
 
 Vec sizeOf(Paper paper) {
   return paper == Paper::a4 ? Vec{210, 297} : Vec{215.9, 279.4};
-}
-
-std::string digits(std::size_t number) {
-  return exactNumber(static_cast<double>(number));
 }
 
 /// Title block and foot of a page.
@@ -89,14 +85,7 @@ private:
 
   void label(Runs runs, double size, Vec at, Role role = Role::soft, bool bold = false,
              Align align = Align::start) {
-    Label label;
-    label.runs = std::move(runs);
-    label.size = size;
-    label.at = at;
-    label.role = role;
-    label.bold = bold;
-    label.align = align;
-    m_page.parts.emplace_back(std::move(label));
+    m_page.parts.emplace_back(lettering(std::move(runs), size, at, role, bold, align));
   }
 
   /// One line at 9 pt, smaller to 7 pt where that is needed, else two lines.

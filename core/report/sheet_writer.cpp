@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/report/sheet_writer.h"
 
-#include "core/quantity/format.h"
+#include "core/report/digits.h"
 #include "core/study/governing.h"
 #include "core/study/verdict.h"
 #include "core/working/recoverable.h"
@@ -9,14 +9,6 @@
 #include <algorithm>
 
 namespace planewright {
-
-namespace {
-
-std::string digits(std::size_t number) {
-  return exactNumber(static_cast<double>(number));
-}
-
-} // namespace
 
 void SheetWriter::heading(Text words) {
   m_subnumber = 0;

@@ -41,8 +41,7 @@ Text withUnit(const Text& heading, const std::string& unit);
 /// The sections of a sheet, each in a file of its own.
 void writeInputs(SheetWriter& sheet, const Study& study, const std::vector<Readout>& points);
 void writePoint(SheetWriter& sheet, const Study& study, const Readout& readout, const SheetOrder& order);
-void writeRoutes(SheetWriter& sheet, const Study& study, const std::vector<Readout>& points,
-                 const RouteComparison& routes);
+void writeRoutes(SheetWriter& sheet, const std::vector<Readout>& points, const RouteComparison& routes);
 void writeChanges(SheetWriter& sheet, const Study& earlier, const Study& study,
                   const std::string& earlierName);
 void writeClosing(SheetWriter& sheet, const Study& study, const std::vector<Readout>& points);

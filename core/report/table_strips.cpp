@@ -110,13 +110,9 @@ private:
       left += m_widths[i] + gap;
     double base = top + 0.9 * m_size;
     for (const Runs& line : lines) {
-      Label label;
-      label.runs = line;
-      label.size = m_size;
-      label.bold = bold;
-      label.align = isWords(at) ? Align::start : Align::end;
-      label.at = {isWords(at) ? left : left + m_widths[at], base};
-      strip.parts.emplace_back(std::move(label));
+      const Vec place = {isWords(at) ? left : left + m_widths[at], base};
+      strip.parts.emplace_back(
+          lettering(line, m_size, place, Role::ink, bold, isWords(at) ? Align::start : Align::end));
       base += 1.22 * m_size;
     }
   }

@@ -230,7 +230,7 @@ public:
       for (const Term& term : chainOf(formula, true))
         addTerm(term);
     else if (formula.operation() == Formula::Operation::product)
-      addFactors({"", formula}, Hold::sum);
+      addFactors({"", formula});
     else
       add(whole);
     flush();
@@ -246,14 +246,13 @@ private:
     const Typeset set = withSign(term.sign, m_walk.held(m_walk.piece(term.formula), least));
     const bool isWide = set.width > m_width - m_type.size();
     if (isWide && term.formula.operation() == Formula::Operation::product)
-      return addFactors(term, least);
+      return addFactors(term);
     add(set);
   }
 
-  void addFactors(const Term& product, Hold) {
-    std::string sign = product.sign;
+  void addFactors(const Term& product) {
     for (const Term& factor : chainOf(product.formula, false)) {
-      const std::string& before = factor.sign.empty() ? sign : factor.sign;
+      const std::string& before = factor.sign.empty() ? product.sign : factor.sign;
       add(withSign(before, m_walk.held(m_walk.piece(factor.formula), Hold::product)));
     }
   }

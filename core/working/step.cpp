@@ -6,9 +6,16 @@
 
 namespace planewright {
 
-std::string shownResult(const Step& step) {
+ShownValue shownValue(const Step& step) {
   const std::string number = shownNumber(step.result / step.scale, step.decimals);
-  return number + (step.unit == "°" || step.unit.empty() ? "" : " ") + step.unit;
+  if (step.unit == "°")
+    return {number + step.unit, {}};
+  return {number, step.unit};
+}
+
+std::string shownResult(const Step& step) {
+  const ShownValue shown = shownValue(step);
+  return shown.unit.empty() ? shown.number : shown.number + " " + shown.unit;
 }
 
 Text written(const Step& step) {

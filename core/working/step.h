@@ -19,7 +19,13 @@ struct Step {
   double scale = 1;   ///< of one `unit`, in the unit of `result`
 };
 
-/// "12.34 MPa", "−22.50°".
+/// A result and the unit that stands behind it: "12.34" and "MPa"; "−22.50°" and nothing.
+struct ShownValue {
+  std::string number;
+  std::string unit;
+};
+ShownValue shownValue(const Step& step);
+/// Both in one: "12.34 MPa", "−22.50°".
 std::string shownResult(const Step& step);
 /// "σ_{m} = (σ_{x} + σ_{y})/2 = (8.40 + (−0.60))/2 = 3.90 MPa".
 Text written(const Step& step);
