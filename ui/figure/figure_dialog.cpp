@@ -5,6 +5,7 @@
 #include "ui/figure/figure_page.h"
 #include "ui/figure/figure_sharing.h"
 #include "ui/files/file_bytes.h"
+#include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
 #include <QButtonGroup>
@@ -74,12 +75,7 @@ QVBoxLayout* FigureDialog::previewColumn() {
   auto* zooms = new QHBoxLayout;
   auto* group = new QButtonGroup(this);
   const auto add = [&](const QString& words, FigurePage::Zoom zoom) {
-    auto* button = new QToolButton(this);
-    button->setText(words);
-    button->setCheckable(true);
-    button->setChecked(zoom == FigurePage::Zoom::fit);
-    group->addButton(button);
-    zooms->addWidget(button);
+    auto* button = choiceButton(*zooms, *group, words, zoom == FigurePage::Zoom::fit);
     connect(button, &QToolButton::clicked, this, [this, zoom] { m_page->setZoom(zoom); });
   };
   zooms->addStretch();
@@ -161,10 +157,7 @@ void FigureDialog::refresh() {
 }
 
 void FigureDialog::say(const QString& sentence, bool isWrong) {
-  QPalette palette = this->palette();
-  palette.setColor(QPalette::WindowText, lookOf(*this).colour(isWrong ? Role::wrong : Role::ink));
-  m_sentence->setPalette(palette);
-  m_sentence->setText(sentence);
+  tell(*m_sentence, sentence, isWrong);
 }
 
 QString FigureDialog::givenUp(const Picture& picture) const {

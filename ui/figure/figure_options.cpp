@@ -3,6 +3,7 @@
 
 #include "core/quantity/expression.h"
 #include "core/quantity/format.h"
+#include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
 #include <QButtonGroup>
@@ -56,18 +57,6 @@ QString FigureOptions::caption() const {
   return m_caption->text();
 }
 
-QVBoxLayout* FigureOptions::group(const QString& heading) {
-  auto* rows = new QVBoxLayout;
-  rows->setSpacing(3);
-  auto* label = new QLabel(heading, this);
-  QFont bold = label->font();
-  bold.setBold(true);
-  label->setFont(bold);
-  rows->addWidget(label);
-  static_cast<QVBoxLayout*>(layout())->addLayout(rows);
-  return rows;
-}
-
 void FigureOptions::addSwitch(QVBoxLayout& group, const QString& words, bool* value) {
   auto* box = new QCheckBox(words, this);
   box->setChecked(*value);
@@ -88,7 +77,7 @@ QRadioButton* FigureOptions::addChoice(QVBoxLayout& group, const QString& words,
 }
 
 void FigureOptions::buildParts() {
-  QVBoxLayout* rows = group(tr("Parts"));
+  QVBoxLayout* rows = headedRows(*this, tr("Parts"));
   FigureParts& parts = m_settings.parts;
   addSwitch(*rows, tr("Title"), &parts.title);
   addSwitch(*rows, tr("Element in the given axes"), &parts.givenElement);
@@ -105,7 +94,7 @@ void FigureOptions::buildParts() {
 }
 
 void FigureOptions::buildWidth() {
-  QVBoxLayout* rows = group(tr("Width"));
+  QVBoxLayout* rows = headedRows(*this, tr("Width"));
   auto* choices = new QButtonGroup(this);
   const bool isOwn = m_settings.width != columnWidth && m_settings.width != pageWidth;
   choices->addButton(addChoice(*rows, tr("90 mm, half a page"), m_settings.width == columnWidth,
@@ -147,7 +136,7 @@ void FigureOptions::takeOwnWidth() {
 }
 
 void FigureOptions::buildText() {
-  QVBoxLayout* rows = group(tr("Text and colour"));
+  QVBoxLayout* rows = headedRows(*this, tr("Text and colour"));
   auto* size = new QHBoxLayout;
   auto* label = new QLabel(tr("Size of the text"), this);
   auto* box = boxOf<double>({7, 7.5, 8, 8.5, 9, 9.5, 10}, m_settings.textPoints, tr("pt"));
@@ -169,7 +158,7 @@ void FigureOptions::buildText() {
 }
 
 void FigureOptions::buildFormat() {
-  QVBoxLayout* rows = group(tr("Format"));
+  QVBoxLayout* rows = headedRows(*this, tr("Format"));
   auto* choices = new QButtonGroup(this);
   const auto add = [&](const QString& words, FigureFormat format) {
     choices->addButton(
@@ -189,7 +178,7 @@ void FigureOptions::buildFormat() {
 }
 
 void FigureOptions::buildCarrying() {
-  QVBoxLayout* rows = group(tr("Study"));
+  QVBoxLayout* rows = headedRows(*this, tr("Study"));
   m_carrying = new QCheckBox(tr("Carry the study inside the file"), this);
   m_carryingWords = new QLabel(this);
   m_carryingWords->setWordWrap(true);

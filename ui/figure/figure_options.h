@@ -38,7 +38,6 @@ signals:
   void changed();
 
 private:
-  QVBoxLayout* group(const QString& heading);
   void addSwitch(QVBoxLayout& group, const QString& words, bool* value);
   QRadioButton* addChoice(QVBoxLayout& group, const QString& words, bool chosen,
                           std::function<void()> choose);

@@ -6,6 +6,7 @@
 #include "core/report/comparison.h"
 #include "core/report/sheet_html.h"
 #include "ui/files/file_bytes.h"
+#include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
 #include "ui/sheet/sheet_options.h"
@@ -87,12 +88,7 @@ QVBoxLayout* SheetDialog::previewColumn() {
   auto* zooms = new QHBoxLayout;
   auto* group = new QButtonGroup(this);
   const auto add = [&](const QString& words, SheetPreview::Zoom zoom) {
-    auto* button = new QToolButton(this);
-    button->setText(words);
-    button->setCheckable(true);
-    button->setChecked(zoom == SheetPreview::Zoom::width);
-    group->addButton(button);
-    zooms->addWidget(button);
+    auto* button = choiceButton(*zooms, *group, words, zoom == SheetPreview::Zoom::width);
     connect(button, &QToolButton::clicked, this, [this, zoom] { m_preview->setZoom(zoom); });
   };
   zooms->addStretch();
@@ -158,10 +154,7 @@ void SheetDialog::refresh() {
 }
 
 void SheetDialog::say(const QString& sentence, bool isWrong) {
-  QPalette palette = this->palette();
-  palette.setColor(QPalette::WindowText, lookOf(*this).colour(isWrong ? Role::wrong : Role::ink));
-  m_sentence->setPalette(palette);
-  m_sentence->setText(sentence);
+  tell(*m_sentence, sentence, isWrong);
 }
 
 Result<void> SheetDialog::saveTo(const QString& path) {

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/sheet/sheet_options.h"
 
+#include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
 #include <QButtonGroup>
@@ -25,20 +26,8 @@ SheetOptions::SheetOptions(Desk& desk, const SheetSettings& settings, QWidget* p
   connect(&m_desk, &Desk::changed, this, &SheetOptions::listPoints);
 }
 
-QVBoxLayout* SheetOptions::group(const QString& heading) {
-  auto* rows = new QVBoxLayout;
-  rows->setSpacing(3);
-  auto* label = new QLabel(heading, this);
-  QFont bold = label->font();
-  bold.setBold(true);
-  label->setFont(bold);
-  rows->addWidget(label);
-  static_cast<QVBoxLayout*>(layout())->addLayout(rows);
-  return rows;
-}
-
 void SheetOptions::buildPoints() {
-  QVBoxLayout* rows = group(tr("Points"));
+  QVBoxLayout* rows = headedRows(*this, tr("Points"));
   m_points = new QListWidget(this);
   m_points->setAccessibleName(tr("Points of the sheet"));
   m_points->setMaximumHeight(130);
@@ -82,7 +71,7 @@ std::vector<std::string> SheetOptions::points() const {
 }
 
 void SheetOptions::buildDepth() {
-  QVBoxLayout* rows = group(tr("Depth"));
+  QVBoxLayout* rows = headedRows(*this, tr("Depth"));
   auto* choices = new QButtonGroup(this);
   for (const Named<Depth>& row : namesOf<Depth>()) {
     QString words = shown(row.label);
@@ -106,7 +95,7 @@ void SheetOptions::buildDepth() {
 }
 
 void SheetOptions::buildPaper() {
-  QVBoxLayout* rows = group(tr("Paper"));
+  QVBoxLayout* rows = headedRows(*this, tr("Paper"));
   auto* choices = new QButtonGroup(this);
   for (const Named<Paper>& row : namesOf<Paper>()) {
     auto* button = new QRadioButton(shown(row.label), this);
@@ -121,7 +110,7 @@ void SheetOptions::buildPaper() {
 }
 
 void SheetOptions::buildCarrying() {
-  QVBoxLayout* rows = group(tr("Study"));
+  QVBoxLayout* rows = headedRows(*this, tr("Study"));
   auto* carrying = new QCheckBox(tr("Carry the study inside the file"), this);
   carrying->setChecked(m_settings.carriesStudy);
   rows->addWidget(carrying);

@@ -9,7 +9,6 @@
 class QCheckBox;
 class QLabel;
 class QListWidget;
-class QVBoxLayout;
 
 namespace planewright {
 
@@ -29,7 +28,6 @@ signals:
   void changed();
 
 private:
-  QVBoxLayout* group(const QString& heading);
   void buildPoints();
   void listPoints();
   void buildDepth();

@@ -1,0 +1,44 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/look/dialog_parts.h"
+
+#include "ui/look/look.h"
+
+#include <QButtonGroup>
+#include <QHBoxLayout>
+#include <QLabel>
+#include <QToolButton>
+#include <QVBoxLayout>
+
+namespace planewright {
+
+QVBoxLayout* headedRows(QWidget& page, const QString& heading) {
+  auto* rows = new QVBoxLayout;
+  rows->setSpacing(3);
+  auto* label = new QLabel(heading, &page);
+  QFont bold = label->font();
+  bold.setBold(true);
+  label->setFont(bold);
+  rows->addWidget(label);
+  static_cast<QVBoxLayout*>(page.layout())->addLayout(rows);
+  return rows;
+}
+
+QToolButton* choiceButton(QHBoxLayout& row, QButtonGroup& group, const QString& words, bool isDown) {
+  auto* button = new QToolButton;
+  button->setText(words);
+  button->setCheckable(true);
+  button->setChecked(isDown);
+  group.addButton(button);
+  row.addWidget(button);
+  return button;
+}
+
+void tell(QLabel& label, const QString& sentence, bool isWrong) {
+  QPalette palette = label.parentWidget()->palette();
+  palette.setColor(QPalette::WindowText,
+                   lookOf(*label.parentWidget()).colour(isWrong ? Role::wrong : Role::ink));
+  label.setPalette(palette);
+  label.setText(sentence);
+}
+
+} // namespace planewright
