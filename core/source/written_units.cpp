@@ -47,10 +47,11 @@ WrittenUnit powerOf(const Unit& length, int power, double value) {
   return {(millions ? "10⁶ " : "10³ ") + unit.name, unit.scale * (millions ? 1e6 : 1e3)};
 }
 
-/// "MPa⁻²".
+/// "MPa⁻²", "(N/mm²)⁻²".
 WrittenUnit inverseSquareOf(const Unit& unit) {
-  const double scale = unit.toBase(1);
-  return {nameForPeople(unit.name) + "⁻²", 1 / (scale * scale)};
+  const WrittenUnit one = ofUnit(unit);
+  const bool isQuotient = one.name.find('/') != std::string::npos;
+  return {(isQuotient ? "(" + one.name + ")" : one.name) + "⁻²", 1 / (one.scale * one.scale)};
 }
 
 WrittenUnit unitFor(const WrittenUnits& units, double value, Dimension dimension) {

@@ -81,7 +81,7 @@ struct Utilise {
     const LineStress s = state.at(direction);
     if (s.shear == 0 && s.along == 0)
       return plane.cohesion > 0 || state.scale == 0 ? 0 : infinity;
-    const double resists = plane.cohesion - s.along * plane.tanPhi;
+    const double resists = resistanceOf(plane, state, direction);
     return resists > 0 ? std::abs(s.shear) / resists : infinity;
   }
   double operator()(const CutOff& cutOff) const {
@@ -159,6 +159,11 @@ void addTurningPoints(const PowerOfAngle& power, std::vector<Angle>& directions)
 LoadTerms termsOf(const SignedForm& form, const LineStress& stresses) {
   const Interaction& piece = pieceOf(form, stresses);
   return {quadraticOf(piece, stresses), linearOf(piece, stresses)};
+}
+
+double resistanceOf(const Mobilised& plane, const TurningState& state, Angle direction) {
+  const double friction = state.at(direction).along * plane.tanPhi;
+  return clean(plane.cohesion - friction, std::max(plane.cohesion, state.scale * plane.tanPhi));
 }
 
 double utilisationOfQuadratic(double a, double b) {

@@ -69,6 +69,9 @@ struct LoadTerms {
 };
 LoadTerms termsOf(const SignedForm& form, const LineStress& stresses);
 
+/// cohesion - s1 tan(phi) at a direction; what is only rounding of the two is 0.
+double resistanceOf(const Mobilised& plane, const TurningState& state, Angle direction);
+
 double utilisationOf(const Branch& branch, const TurningState& state, Angle direction);
 /// The multiplier on all loads that takes this part to 1; none where none does.
 std::optional<double> multiplierOf(const Branch& branch, const TurningState& state, Angle direction);

@@ -76,7 +76,7 @@ Step CheckSteps::stepOf(const CheckLine& line) const {
 }
 
 Text CheckSteps::named(const Text& name) const {
-  return m_isWorst ? PW_TEXT("Working", "%1 at the worst direction").with(name) : name;
+  return m_isWorst ? PW_TEXT("Working", "%1, at the worst direction").with(name) : name;
 }
 
 Formula CheckSteps::addStrength(const CheckLine& line) {

@@ -22,6 +22,9 @@ Result<std::vector<Branch>> planeBranchesOf(Criterion criterion, const Strengths
 std::array<double, 3> principalsOf(const Demand& demand);
 /// The equivalent stress of von Mises.
 double misesOf(const std::array<double, 3>& principals);
+/// The radius of a circle with the mean of the greatest and the least that touches the line of failure of
+/// Mohr and Coulomb, `friction` in degrees.
+double radiusAtFailure(double cohesion, double friction, const std::array<double, 3>& principals);
 /// A criterion of the three principal stresses, which knows no direction.
 Result<Judgement> judgementOfPrincipals(Criterion criterion, const Strengths& strengths,
                                         const Demand& demand);

@@ -37,7 +37,7 @@ Result<Judgement> mohrCoulomb(const Strengths& strengths, const std::array<doubl
   const CosSin phi = cosSin(Angle::fromDegrees(*friction));
   const double radius = s[0] / 2 - s[2] / 2;
   const double mean = s[0] / 2 + s[2] / 2;
-  const double resists = *cohesion * phi.cos - mean * phi.sin;
+  const double resists = radiusAtFailure(*cohesion, *friction, s);
   Judgement judgement;
   judgement.utilisation = resists > 0 ? radius / resists : std::numeric_limits<double>::infinity();
   const double grows = radius + mean * phi.sin;
@@ -58,6 +58,11 @@ std::array<double, 3> principalsOf(const Demand& demand) {
 
 double misesOf(const std::array<double, 3>& s) {
   return std::hypot(s[0] - s[1], s[1] - s[2], s[2] - s[0]) / std::sqrt(2.0);
+}
+
+double radiusAtFailure(double cohesion, double friction, const std::array<double, 3>& s) {
+  const CosSin phi = cosSin(Angle::fromDegrees(friction));
+  return cohesion * phi.cos - (s[0] / 2 + s[2] / 2) * phi.sin;
 }
 
 Result<Judgement> judgementOfPrincipals(Criterion criterion, const Strengths& strengths,

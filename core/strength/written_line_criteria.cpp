@@ -47,13 +47,12 @@ BothSigns bothSigns(WrittenStrengths& strengths) {
 }
 
 /// a, b and the root of u^2 = b u + a that loses no digits.
-void addQuadratic(const WrittenCriterion& at, CheckSteps& steps, const Formula& quadratic,
+void addQuadratic(const WrittenCriterion& at, CheckSteps& steps, const Text& name, const Formula& quadratic,
                   const Formula& linear) {
   const LoadTerms terms =
       termsOf(std::get<SignedForm>(at.judge.branches().front()), at.judge.state().at(at.direction));
   const Text& source = rowOf(at.criterion).source;
-  const Formula a = steps.add({PW_TEXT("Working", "terms quadratic in the stresses"), "a", quadratic,
-                               std::max(terms.a, 0.0), dimension::none, source});
+  const Formula a = steps.add({name, "a", quadratic, std::max(terms.a, 0.0), dimension::none, source});
   const Formula b = steps.add(
       {PW_TEXT("Working", "terms linear in the stresses"), "b", linear, terms.b, dimension::none, source});
   const Formula spread = root(power(b, 2) + 4 * a);
@@ -63,7 +62,8 @@ void addQuadratic(const WrittenCriterion& at, CheckSteps& steps, const Formula& 
 void addHoffman(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths& strengths) {
   const BothSigns f = bothSigns(strengths);
   const Formula along = power(s1, 2) / (f.Xt * f.Xc) - s1 * s2 / (f.Xt * f.Xc);
-  addQuadratic(at, steps, f.quadratic(along), f.linear());
+  addQuadratic(at, steps, PW_TEXT("Working", "terms quadratic in the stresses"), f.quadratic(along),
+               f.linear());
 }
 
 void addTsaiWu(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths& strengths) {
@@ -73,7 +73,11 @@ void addTsaiWu(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths& 
   const Formula along =
       given ? square + 2 * steps.put("F_{12}", *given, dimension::inverseSquareStress) * s1 * s2
             : square - s1 * s2 / root(f.Xt * f.Xc * f.Yt * f.Yc);
-  addQuadratic(at, steps, f.quadratic(along), f.linear());
+  addQuadratic(at, steps,
+               given
+                   ? PW_TEXT("Working", "terms quadratic in the stresses")
+                   : PW_TEXT("Working", "terms quadratic in the stresses, with F_{12} = −√(F_{11} F_{22})/2"),
+               f.quadratic(along), f.linear());
 }
 
 Formula signedForm(const WrittenCriterion& at, WrittenStrengths& strengths) {

@@ -14,7 +14,7 @@ const Formula resists = Formula::symbol("τ_{R}");
 /// Friction and cohesion against the shear: positive only where a ratio makes sense.
 double addResistance(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths& strengths) {
   const auto& plane = std::get<Mobilised>(at.judge.branches().front());
-  const double resistance = plane.cohesion - at.judge.state().at(at.direction).along * plane.tanPhi;
+  const double resistance = resistanceOf(plane, at.judge.state(), at.direction);
   const Formula cohesion = strengths.of(StrengthKey::cohesion);
   const Formula friction = strengths.of(StrengthKey::friction);
   steps.add({PW_TEXT("Working", "shear that the plane resists"), "τ_{R}",

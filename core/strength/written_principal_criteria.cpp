@@ -22,10 +22,9 @@ void addVonMises(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths
 }
 
 void addMohrCoulomb(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths& strengths) {
-  const std::array<double, 3> s = principalsOf(strengths.demand());
-  const CosSin phi = cosSin(Angle::fromDegrees(strengths.valueOf(StrengthKey::friction)));
   const double resistance =
-      strengths.valueOf(StrengthKey::cohesion) * phi.cos - (s[0] / 2 + s[2] / 2) * phi.sin;
+      radiusAtFailure(strengths.valueOf(StrengthKey::cohesion), strengths.valueOf(StrengthKey::friction),
+                      principalsOf(strengths.demand()));
   const Formula cohesion = strengths.of(StrengthKey::cohesion);
   const Formula friction = strengths.of(StrengthKey::friction);
   steps.add({PW_TEXT("Working", "radius of the circle at the line of failure"), "r_{f}",

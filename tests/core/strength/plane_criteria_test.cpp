@@ -62,6 +62,22 @@ TEST(CoulombPlane, withoutCohesionAnUnloadedPlaneOfAStressedBodyHasNoBound) {
   EXPECT_EQ(Judge::of(Criterion::coulomb, coulombPlane(0, 30), {}, demandOf({}))->utilisation({}), 0);
 }
 
+TEST(CoulombPlane, resistsExactlyNothingWhereOnlyRoundingIsLeft) {
+  int nothing = 0;
+  for (int friction = 32; friction < 85; ++friction)
+    for (const PlaneStress& stress :
+         {PlaneStress{0, 0, 5}, PlaneStress{-10, 20, 3}, PlaneStress{900, 4, -70}}) {
+      const auto judge = Judge::of(Criterion::coulomb, coulombPlane(3, friction), {}, demandOf(stress));
+      const Branch& branch = judge->branches().front();
+      for (const Angle turning : turningPointsOf(branch, judge->state())) {
+        const double resists = resistanceOf(std::get<Mobilised>(branch), judge->state(), turning);
+        EXPECT_TRUE(resists == 0 || std::abs(resists) > 1e-9) << friction << ' ' << resists;
+        nothing += resists == 0 ? 1 : 0;
+      }
+    }
+  EXPECT_GT(nothing, 100);
+}
+
 RC_GTEST_PROP(CoulombPlane, theMultiplierTakesTheLoadOntoTheLimit, ()) {
   const Strengths f = coulombPlane(*rc::gen::inRange(1, 1000) / 10.0, *rc::gen::inRange(1, 60),
                                    *rc::gen::inRange(1, 100) / 10.0);

@@ -352,6 +352,16 @@ TEST(WorkingOfCheck, theFormsOfTheCodeAreWrittenAsTheyAre) {
   EXPECT_EQ(lineOf(taper, "u"), "u = |σφ|/(km,α · fm,d) = |−4.0321 MPa|/(0.96541 · 11.077 MPa) = 0.3770");
 }
 
+TEST(WorkingOfCheck, aGivenInteractionIsPutInWithItsUnit) {
+  Study study =
+      judgedBy(Criterion::tsaiWu, {"G", "1.6 MPa", "0.1 MPa", "0.1 MPa"}, {"", "-0.01 MPa^-2", "", ""});
+  EXPECT_NE(lineOf(linesOf(study, 0, 0), "a").find(" + 2 · (−0.01 MPa⁻²) · 2."), std::string::npos)
+      << lineOf(linesOf(study, 0, 0), "a");
+  study.units.stress = "N/mm^2";
+  EXPECT_NE(lineOf(linesOf(study, 0, 0), "a").find("(−0.01 (N/mm²)⁻²)"), std::string::npos)
+      << lineOf(linesOf(study, 0, 0), "a");
+}
+
 TEST(WorkingOfCheck, aSteepTaperIsTheSumOfSquaresItComesFrom) {
   Study study = judgedBy(Criterion::taperedEdge, {"G", "3 MPa", "0 MPa", "0 MPa"}, {"", "", "", "0 deg"});
   study.points[0].lines[0].angle = "89 deg";
