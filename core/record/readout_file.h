@@ -13,12 +13,13 @@ std::string readoutJson(const Study& study, const std::vector<Readout>& points);
 /// columns go by the keys of the JSON; `stress_unit` and `positive` are the study's, `cautions` those of the
 /// state.
 std::string readoutCsv(const Study& study, const std::vector<Readout>& points);
-/// The same for people, with the working of the state, in English or another language.
+/// The same for people, with the working of each state and of each check in the combination that governs it,
+/// in English or another language.
 std::string readoutText(const Study& study, const std::vector<Readout>& points,
                         const Translate& translate = {});
 
 /// How the shown state of a point comes about, for people: where the stresses of its cases come from, with
-/// the signs and limits of each source, and the working of the state.
+/// the signs and limits of each source, the working of the state, and that of its checks.
 std::string workingText(const Study& study, const Readout& readout, const Translate& translate = {});
 
 } // namespace planewright

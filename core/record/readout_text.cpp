@@ -4,6 +4,7 @@
 #include "core/study/envelope.h"
 #include "core/study/governing.h"
 #include "core/study/sum_of_case.h"
+#include "core/study/working_of_check.h"
 #include "core/study/working_of_state.h"
 #include "core/table/cautions.h"
 #include "core/table/check_words.h"
@@ -65,6 +66,11 @@ public:
     line("  ", nameOf(shown, readout.shown < m_study.combinations.size()));
     components(stressFormOf(m_study, shown), shown);
     steps(workingOf(m_study, readout, shown));
+    for (std::size_t i = 0; i < shown.checks.size(); ++i) {
+      nameAndLimit(readout.checks[i]);
+      outcome(readout, verdictOf(readout, readout.shown, i));
+      workingOfCheckIn(readout, shown, i);
+    }
     return std::move(m_out);
   }
 
@@ -87,24 +93,43 @@ private:
              .with(readout.states[verdict.governing->state].combination));
   }
 
-  /// A check of a point over all combinations, and what follows for other directions.
-  void check(const Readout& readout, std::size_t index) {
-    const CheckSetup& setup = readout.checks[index];
-    const Verdict verdict = verdictOfCheck(readout, index);
+  void nameAndLimit(const CheckSetup& setup) {
     m_out += '\n';
     line("  ", PW_TEXT("Readout", "Check %1: %2").with(setup.id).with(checkName(setup)));
     line("    ", PW_TEXT("Readout", "Limit: %1 (%2)")
                      .with(rowOf(setup.criterion).equation)
                      .with(rowOf(setup.criterion).source));
+  }
+
+  void outcome(const Readout& readout, const Verdict& verdict) {
     if (verdict.unjudged)
       line("    ", notJudgedSentence(readout, *verdict.unjudged));
     if (verdict.governing)
       judged(readout, *verdict.governing);
+  }
+
+  /// A check of a point over all combinations, and what follows for other directions.
+  void check(const Readout& readout, std::size_t index) {
+    const CheckSetup& setup = readout.checks[index];
+    const Verdict verdict = verdictOfCheck(readout, index);
+    nameAndLimit(setup);
+    outcome(readout, verdict);
     if (const auto directions = directionsOf(readout, index))
       for (const Text& sentence : sentencesOf(setup, *directions))
         line("    ", sentence);
     for (const Text& caution : cautionsOf(readout, index))
       line("    ", PW_TEXT("Readout", "Caution: %1").with(caution));
+    if (verdict.governing)
+      workingOfCheckIn(readout, readout.states[verdict.governing->state], index);
+  }
+
+  void workingOfCheckIn(const Readout& readout, const StateReading& state, std::size_t check) {
+    const std::vector<Step> steps = workingOfCheck(m_study, readout, state, check);
+    if (steps.empty())
+      return;
+    line("    ", PW_TEXT("Readout", "Working of the check in %1, tension positive").with(state.combination));
+    for (const Step& one : steps)
+      step(one, PW_TEXT("Readout", "%1 (%2)").with(one.name).with(one.source));
   }
 
   void judged(const Readout& readout, const JudgedCheck& told) {
@@ -270,10 +295,13 @@ private:
         std::ranges::all_of(steps, [&](const Step& step) { return step.source == steps.front().source; });
     if (oneSource)
       line("    ", PW_TEXT("Readout", "Working (formulas: %1)").with(steps.front().source));
-    for (const Step& step : steps) {
-      line("    ", oneSource ? step.name : PW_TEXT("Readout", "%1 (%2)").with(step.name).with(step.source));
-      line("      ", planewright::written(step));
-    }
+    for (const Step& one : steps)
+      step(one, oneSource ? one.name : PW_TEXT("Readout", "%1 (%2)").with(one.name).with(one.source));
+  }
+
+  void step(const Step& step, const Text& heading) {
+    line("    ", heading);
+    line("      ", planewright::written(step));
   }
 
   const Study& m_study;

@@ -83,6 +83,16 @@ TEST(ReadoutFile, checksAsApproved) {
   EXPECT_TRUE(matchesApproved("record/judged.txt", readoutText(study, readouts)));
 }
 
+TEST(ReadoutFile, workingOfChecksAsApproved) {
+  Study study = judgedStudy();
+  study.points[0].checks.push_back({"uniaxial", "C24", Criterion::hankinson, "grain", "", {}});
+  study.points[0].checks.push_back({"quadratic", "C24", Criterion::tsaiWu, "grain", "", {}});
+  EXPECT_TRUE(matchesApproved("record/judged_working.txt", workingText(study, evaluate(study))));
+  study.convention.positive = Positive::compression;
+  study.shown.combination = "1.35 G + 1.5 S";
+  EXPECT_TRUE(matchesApproved("record/judged_working_compression.txt", workingText(study, evaluate(study))));
+}
+
 TEST(ReadoutFile, aNewStudyAsApproved) {
   const Study study = newStudy();
   EXPECT_TRUE(matchesApproved("record/new.json", readoutJson(study, readoutsOf(study))));
