@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/figure/arrangement.h"
 #include "core/figure/look.h"
 #include "core/figure/picture.h"
 #include "core/study/readout.h"
@@ -28,6 +29,8 @@ struct FigureOrder {
   double textPoints = 8; ///< size of the text, 7 to 10; indices are 0.7 of it
   bool mono = false;     ///< changes colours only; kept here so that an order says the whole figure
   FigureParts parts;
+  Arrangement arrangement = Arrangement::byWidth;
+  FigureBlocks blocks = usualBlocks;
   Text caption;          ///< under the figure; may be empty
   std::string studyName; ///< the file's name; may be empty
   Translate translate;
@@ -40,10 +43,10 @@ inline constexpr double greatestFigureText = 10;
 /// The colours of the figure: mono, or the light set on white.
 Palette paletteOf(const FigureOrder& order);
 
-/// The labelled figure of the shown state of `readout`, or a Problem when width or text are out of range or
-/// the labels find no room. Labels never overlap, never leave the frame, never stand on a stroke without an
-/// opaque ground. Below 130 mm the circle stands under the elements, and table and conventions are set a
-/// point smaller, yet never below 7 pt.
+/// The labelled figure of the shown state of `readout`, or a Problem when width or text are out of range, the
+/// width does not hold elements and circle beside one another or the labels find no room. Labels never
+/// overlap, never leave the frame, never stand on a stroke without an opaque ground. Below leastWidthBeside
+/// table and conventions are set a point smaller, yet never below 7 pt.
 Result<Picture> figureOf(const Study& study, const Readout& readout, const FigureOrder& order);
 
 } // namespace planewright

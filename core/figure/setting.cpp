@@ -8,14 +8,13 @@ namespace planewright {
 namespace {
 constexpr double mmPerPoint = 25.4 / 72;
 constexpr double leastPoints = 7;
-constexpr double narrowBelow = 130; // mm
 } // namespace
 
 Setting settingOf(const Study& study, const Readout& readout, const FigureOrder& order) {
   const double points = order.textPoints;
   const double smallPoints = std::max(leastPoints, points - 1);
   Setting setting{study, readout, order, stressFormOf(study, readout.state())};
-  setting.isNarrow = order.width < narrowBelow;
+  setting.isNarrow = order.width < leastWidthBeside;
   setting.text = points * mmPerPoint;
   setting.small = smallPoints * mmPerPoint;
   setting.title = setting.isNarrow ? setting.text : setting.text + 2 * mmPerPoint;
