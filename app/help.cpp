@@ -82,15 +82,27 @@ its place there and how far it can be trusted. Exit code 5 where one disagrees.
 
 std::string figureHelp() {
   return plain(PW_TEXT("Help", R"help(planewright figure STUDY -o FILE.svg|.pdf|.png [options]
+planewright figure STUDY --folder FOLDER [--format svg|pdf|png] [--replace] [options]
 
-Writes the labelled figure of one point and combination.
+Writes the labelled figure of one point and combination, or one for each point into a folder; the names of these
+files, made of study, point and combination, are printed.
 
 -o FILE              the ending says the kind; "-" is standard output, as SVG
---point NAME         without it, the point that the study shows, else its first
---combination NAME   without it, the combination that the study shows, else the first
+--folder FOLDER      where the figures of all points go; it is made where it is not there
+--format svg|pdf|png their kind; svg without it
+--replace            writes over files that are there; without it nothing is written then
+--point NAME         without it, the point that the study shows, else its first; with --folder it may be repeated, and
+                     without it all points are drawn
+--combination NAME   without it, the combination that the study shows, else the first; with --folder, the one that
+                     governs each point
 --width MM           width of the figure, 90 to 400 mm; 160 without it
 --text PT            size of the text, 7 to 10 pt; 8 without it
 --mono               black and greys only
+--arrange beside|below|by-width
+                     elements and circle in one row, or one below another; without it, by width: in one row from
+                     130 mm on
+--order LIST         what stands uppermost and to the left, for instance "circle" or "planes,elements"; of elements,
+                     circle, planes, check those left out follow in this order
 --dpi N              resolution of a PNG; 300 without it
 --without-study      the figure alone, for sending outside
 
@@ -98,6 +110,7 @@ Without that option the whole study, with all its points and notes, travels insi
 figure brings it back. A STUDY may be such a figure, here and in resolve.
 
 planewright figure beam.planewright -o beam.pdf --width 90
+planewright figure beam.planewright --folder figures --format pdf
 )help"));
 }
 

@@ -66,6 +66,16 @@ TEST_F(FigureCommand, obeysWidthAndResolution) {
   EXPECT_THAT(contents("a.png"), HasSubstr(std::string("pHYs\0\0\x17\x12\0\0\x17\x12\x01", 13)));
 }
 
+TEST_F(FigureCommand, obeysArrangementAndOrder) {
+  const std::string usual = run("figure \"$demo\" -o -").out;
+  EXPECT_EQ(run("figure \"$demo\" -o - --arrange by-width --order elements").out, usual);
+  EXPECT_EQ(run("figure \"$demo\" -o - --arrange beside").out, usual);
+  const std::string below = run("figure \"$demo\" -o - --arrange below --order circle").out;
+  EXPECT_THAT(below, StartsWith("<?xml"));
+  EXPECT_GT(below.find("Given axes"), below.find("Circle of the state"));
+  EXPECT_LT(usual.find("Given axes"), usual.find("Circle of the state"));
+}
+
 TEST_F(FigureCommand, drawsInMonoWithoutAnyColour) {
   ASSERT_EQ(run("figure \"$demo\" -o a.svg --mono").exit, 0);
   const std::string svg = contents("a.svg");
@@ -90,6 +100,9 @@ TEST_F(FigureCommand, refusesWrongUse) {
   expectWrongUse(run("figure \"$demo\" -o a.svg --width 3e9"), "--width");
   expectWrongUse(run("figure \"$demo\" -o a.svg --width '90 MPa'"), "--width");
   expectWrongUse(run("figure \"$demo\" -o a.svg --text 4"), "--text");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --arrange side"), "beside");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --arrange beside --width 90"), "Take 130 mm or more");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --order circle,round"), "--order: “round” names no part");
   expectWrongUse(run("figure \"$demo\" -o a.svg --mono=yes"), "takes no value");
   expectWrongUse(run("figure \"$demo\" -o a.svg --dpi 300"), "Only a PNG has a resolution");
   expectWrongUse(run("figure \"$demo\" -o a.png --dpi 3.5"), "“3.5” is not a whole number.");
@@ -98,6 +111,52 @@ TEST_F(FigureCommand, refusesWrongUse) {
   expectWrongUse(run("figure \"$demo\" -o a.png --dpi 2400 --width 400"), "too many pixels");
   expectWrongUse(run("figure none -o a.svg"), "there is no such file");
   EXPECT_EQ(files(), 0U);
+}
+
+TEST_F(FigureCommand, writesAFigureForEachPointIntoAFolder) {
+  for (const std::string format : {"svg", "pdf", "png"}) {
+    const Ran ran = run("figure \"$demo\" --folder out/" + format + " --width 90 --format " + format);
+    EXPECT_EQ(ran.exit, 0) << ran.err;
+    EXPECT_EQ(ran.err, "");
+    EXPECT_THAT(ran.out, HasSubstr("out/" + format + "/boat-shed-beam-P2-above-the-post-"));
+    EXPECT_EQ(shell("ls out/" + format + "/*." + format + " | wc -l").out, "4\n") << "points of the demo";
+    EXPECT_EQ(shell("ls out/" + format + "/*").out, shell("sort <<'.'\n" + ran.out + ".").out);
+  }
+  const std::string name = "out/svg/boat-shed-beam-P2-above-the-post-1.35-G+1.5-S.svg";
+  const std::string alone = " --width 90 --point 'P2 above the post' --combination '1.35 G + 1.5 S' -o -";
+  EXPECT_EQ(contents(name), run("figure \"$demo\"" + alone).out) << "the same as one alone";
+}
+
+TEST_F(FigureCommand, writesOnlyNamedPointsInANamedCombination) {
+  const Ran ran =
+      run("figure \"$demo\" --folder . --point 'P2 above the post' --combination '1.35 G' --without-study");
+  EXPECT_EQ(ran.out, "./boat-shed-beam-P2-above-the-post-1.35-G.svg\n") << ran.err;
+  EXPECT_EQ(files(), 1U);
+  expectWrongUse(run("resolve boat-shed-beam-P2-above-the-post-1.35-G.svg"), "This file carries no study.");
+}
+
+TEST_F(FigureCommand, replacesFilesOfAFolderOnlyWhenToldTo) {
+  const std::string words = "figure \"$demo\" --folder . --point 'P2 above the post' --combination '1.35 G'";
+  const std::string name = "boat-shed-beam-P2-above-the-post-1.35-G.svg";
+  put(name, "mine");
+  expectWrongUse(run(words), "has 1 of the 1 files already");
+  EXPECT_EQ(contents(name), "mine");
+  EXPECT_EQ(run(words + " --replace").exit, 0);
+  EXPECT_THAT(contents(name), StartsWith("<?xml"));
+}
+
+TEST_F(FigureCommand, writesNothingIntoAFolderForWrongUse) {
+  expectWrongUse(run("figure \"$demo\" --folder out -o a.svg"), "Leave out -o or --folder.");
+  expectWrongUse(run("figure \"$demo\" --folder out --format gif"), "Take svg, pdf or png.");
+  expectWrongUse(run("figure \"$demo\" --folder out --point none"), "The study has no “none”.");
+  expectWrongUse(run("figure \"$demo\" --folder out --width 90 --arrange beside"), "P2 above the post: ");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --replace"), "belongs to --folder");
+  expectWrongUse(run("figure \"$demo\" -o a.svg --point a --point b"), "Write --folder FOLDER for several.");
+  EXPECT_EQ(files(), 0U);
+  put("taken", "a file");
+  const Ran ran = run("figure \"$demo\" --folder taken");
+  EXPECT_EQ(ran.exit, 3);
+  EXPECT_THAT(ran.err, HasSubstr("The folder “taken” cannot be made"));
 }
 
 TEST_F(FigureCommand, drawsTheNamedPointAndCombination) {

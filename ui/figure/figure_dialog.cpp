@@ -4,6 +4,7 @@
 #include "ui/figure/figure_options.h"
 #include "ui/figure/figure_page.h"
 #include "ui/figure/figure_sharing.h"
+#include "ui/figure/points_dialog.h"
 #include "ui/files/file_bytes.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
@@ -109,6 +110,10 @@ QHBoxLayout* FigureDialog::footer() {
   addButton(*row, tr("Save as…"), &FigureDialog::saveAs);
   addButton(*row, tr("Copy"), &FigureDialog::copy);
   addButton(*row, tr("Print…"), &FigureDialog::print);
+  m_allPoints = new QPushButton(tr("All points…"), this);
+  m_allPoints->setAutoDefault(false);
+  row->addWidget(m_allPoints);
+  connect(m_allPoints, &QPushButton::clicked, this, &FigureDialog::writeAllPoints);
   return row;
 }
 
@@ -145,9 +150,10 @@ void FigureDialog::refresh() {
                      settings.mono ? Palette::mono : Palette::paper);
   for (QPushButton* button : m_needPicture)
     button->setEnabled(made.has_value());
+  m_allPoints->setEnabled(!m_options->problem());
   m_ending->setText(QStringLiteral(".") + QString::fromLatin1(endingOf(settings.format)));
   if (!m_name->isModified()) {
-    m_name->setText(figureName(m_desk, m_studyFile));
+    m_name->setText(figureName(m_desk.readout(), m_studyFile));
     m_name->setCursorPosition(0);
   }
   if (made)
@@ -250,6 +256,17 @@ void FigureDialog::print() {
     say(shown(printed.error()), true);
   else if (!printed->isEmpty())
     say(*printed, false);
+}
+
+void FigureDialog::writeAllPoints() {
+  FigureBatch arranged;
+  arranged.study = m_desk.study();
+  arranged.settings = m_options->settings();
+  arranged.studyFile = m_studyFile;
+  arranged.caption = m_options->caption();
+  auto* dialog = new PointsDialog(m_desk, std::move(arranged), askExisting, this);
+  dialog->setAttribute(Qt::WA_DeleteOnClose);
+  dialog->open();
 }
 
 } // namespace planewright

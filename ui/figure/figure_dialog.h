@@ -18,8 +18,8 @@ namespace planewright {
 class FigureOptions;
 class FigurePage;
 
-/// Arrange figure: follows the study, shows the figure as it will be and saves, copies or prints it. It opens
-/// with the choices used last.
+/// Arrange figure: follows the study, shows the figure as it will be and saves, copies or prints it, or saves
+/// one for each of several points. It opens with the choices used last.
 class FigureDialog : public QDialog {
   Q_OBJECT
 
@@ -51,6 +51,7 @@ private:
   void saveAndTell(const QString& path);
   void copy();
   void print();
+  void writeAllPoints();
 
   Desk& m_desk;
   QString m_studyFile;
@@ -60,6 +61,7 @@ private:
   QLabel* m_sentence = nullptr;
   QLineEdit* m_name = nullptr;
   QLabel* m_ending = nullptr;
+  QPushButton* m_allPoints = nullptr;
   QList<QPushButton*> m_needPicture;
 };
 

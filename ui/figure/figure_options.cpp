@@ -3,6 +3,7 @@
 
 #include "core/quantity/expression.h"
 #include "core/quantity/format.h"
+#include "ui/figure/figure_arrangement.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
@@ -46,6 +47,7 @@ FigureOptions::FigureOptions(const FigureSettings& settings, QWidget* parent)
   column->setContentsMargins(0, 0, 0, 0);
   column->setSpacing(10);
   buildParts();
+  buildArrangement();
   buildWidth();
   buildText();
   buildFormat();
@@ -93,16 +95,27 @@ void FigureOptions::buildParts() {
   rows->addWidget(conventions);
 }
 
+void FigureOptions::buildArrangement() {
+  QVBoxLayout* rows = headedRows(*this, tr("Arrangement"));
+  auto* arrangement = new FigureArrangement(m_settings.arrangement, m_settings.blocks, this);
+  rows->addWidget(arrangement);
+  connect(arrangement, &FigureArrangement::changed, this, [this, arrangement] {
+    m_settings.arrangement = arrangement->arrangement();
+    m_settings.blocks = arrangement->blocks();
+    emit changed();
+  });
+}
+
 void FigureOptions::buildWidth() {
   QVBoxLayout* rows = headedRows(*this, tr("Width"));
   auto* choices = new QButtonGroup(this);
   const bool isOwn = m_settings.width != columnWidth && m_settings.width != pageWidth;
-  choices->addButton(addChoice(*rows, tr("90 mm, half a page"), m_settings.width == columnWidth,
+  choices->addButton(addChoice(*rows, tr("Text column, 90 mm"), m_settings.width == columnWidth,
                                [this] { takeWidth(columnWidth); }));
-  choices->addButton(addChoice(*rows, tr("160 mm, a page"), m_settings.width == pageWidth,
+  choices->addButton(addChoice(*rows, tr("Full page, 160 mm"), m_settings.width == pageWidth,
                                [this] { takeWidth(pageWidth); }));
   auto* own = new QHBoxLayout;
-  auto* button = addChoice(*rows, tr("own width"), isOwn, [this] { takeOwnWidth(); });
+  auto* button = addChoice(*rows, tr("Own width"), isOwn, [this] { takeOwnWidth(); });
   choices->addButton(button);
   rows->removeWidget(button);
   m_ownWidth = new QLineEdit(isOwn ? fromUtf8(exactNumber(m_settings.width)) : QStringLiteral("120"), this);

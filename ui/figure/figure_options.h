@@ -42,6 +42,7 @@ private:
   QRadioButton* addChoice(QVBoxLayout& group, const QString& words, bool chosen,
                           std::function<void()> choose);
   void buildParts();
+  void buildArrangement();
   void buildWidth();
   void buildText();
   void buildFormat();

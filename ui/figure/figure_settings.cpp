@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/figure/figure_settings.h"
 
+#include "ui/look/look.h"
 #include "ui/paint/export.h"
 
 #include <QSettings>
@@ -40,6 +41,10 @@ bool switchIn(const QSettings& settings, const char* key, bool usual) {
   return settings.value(keyOf(key), usual).toBool();
 }
 
+std::string wordIn(const QSettings& settings, const char* key) {
+  return settings.value(keyOf(key)).toString().toStdString();
+}
+
 } // namespace
 
 const char* endingOf(FigureFormat format) {
@@ -62,6 +67,9 @@ FigureSettings rememberedFigure(const QSettings& settings) {
   figure.textPoints =
       numberIn(settings, "figure/text", figure.textPoints, leastFigureText, greatestFigureText);
   figure.mono = switchIn(settings, "figure/mono", false);
+  figure.arrangement =
+      fromWord<Arrangement>(wordIn(settings, "figure/arrangement")).value_or(figure.arrangement);
+  figure.blocks = blocksIn(wordIn(settings, "figure/order")).value_or(figure.blocks);
   for (const FigureFormat format : formats)
     if (settings.value(keyOf("figure/format")).toString() == QLatin1String(endingOf(format)))
       figure.format = format;
@@ -76,6 +84,8 @@ void rememberFigure(QSettings& settings, const FigureSettings& figure) {
   settings.setValue(keyOf("figure/width"), figure.width);
   settings.setValue(keyOf("figure/text"), figure.textPoints);
   settings.setValue(keyOf("figure/mono"), figure.mono);
+  settings.setValue(keyOf("figure/arrangement"), fromUtf8(std::string(wordOf(figure.arrangement))));
+  settings.setValue(keyOf("figure/order"), fromUtf8(listOf(figure.blocks)));
   settings.setValue(keyOf("figure/format"), QString::fromLatin1(endingOf(figure.format)));
   settings.setValue(keyOf("figure/dpi"), figure.dpi);
   settings.setValue(keyOf("figure/study"), figure.carriesStudy);

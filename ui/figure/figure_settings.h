@@ -15,6 +15,8 @@ struct FigureSettings {
   double width = 160; ///< mm
   double textPoints = 8;
   bool mono = false;
+  Arrangement arrangement = Arrangement::byWidth;
+  FigureBlocks blocks = usualBlocks;
   FigureFormat format = FigureFormat::svg;
   int dpi = 300; ///< of a PNG
   bool carriesStudy = true;

@@ -3,6 +3,7 @@
 
 #include "core/figure/svg.h"
 #include "core/record/embedded_study.h"
+#include "ui/files/file_names.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
 
@@ -14,7 +15,6 @@
 #include <QMimeData>
 #include <QPrintDialog>
 #include <QPrinter>
-#include <QRegularExpression>
 #include <QSettings>
 
 #include <cmath>
@@ -28,6 +28,8 @@ FigureOrder orderOf(const FigureSettings& settings, const QString& studyFile, co
   order.width = settings.width;
   order.textPoints = settings.textPoints;
   order.mono = settings.mono;
+  order.arrangement = settings.arrangement;
+  order.blocks = settings.blocks;
   order.parts = settings.parts;
   order.caption = verbatim(caption.trimmed().toStdString());
   order.studyName = QFileInfo(studyFile).completeBaseName().toStdString();
@@ -39,23 +41,16 @@ Palette paletteOf(const FigureSettings& settings) {
   return settings.mono ? Palette::mono : Palette::paper;
 }
 
-/// Every file system takes the result: no separators, no blanks, no leading dot.
-QString inFileName(const std::string& words) {
-  static const QRegularExpression blanks(QStringLiteral("\\s*\\+\\s*"));
-  static const QRegularExpression unwanted(QStringLiteral("[\\s/\\\\:*?\"<>|\\x00-\\x1f]+"));
-  QString name = fromUtf8(words).replace(blanks, QStringLiteral("+"));
-  name.replace(unwanted, QStringLiteral("-"));
-  while (name.startsWith(QLatin1Char('.')) || name.startsWith(QLatin1Char('-')))
-    name.remove(0, 1);
-  constexpr int longest = 60;
-  return name.left(longest);
-}
-
 } // namespace
+
+Result<Picture> figureFor(const Study& study, const Readout& readout, const FigureSettings& settings,
+                          const QString& studyFile, const QString& caption) {
+  return figureOf(study, readout, orderOf(settings, studyFile, caption));
+}
 
 Result<Picture> figureFor(const Desk& desk, const FigureSettings& settings, const QString& studyFile,
                           const QString& caption) {
-  return figureOf(desk.study(), desk.readout(), orderOf(settings, studyFile, caption));
+  return figureFor(desk.study(), desk.readout(), settings, studyFile, caption);
 }
 
 Result<QByteArray> fileBytes(const Picture& picture, const FigureSettings& settings, const Study& study,
@@ -88,15 +83,10 @@ Result<std::unique_ptr<QMimeData>> mimeOf(const Picture& picture, const FigureSe
   return mime;
 }
 
-QString figureName(const Desk& desk, const QString& studyFile) {
+QString figureName(const Readout& readout, const QString& studyFile) {
   const QString study = QFileInfo(studyFile).completeBaseName();
-  const Readout& readout = desk.readout();
-  QStringList parts;
-  for (const std::string& part : {study.isEmpty() ? std::string("figure") : study.toStdString(),
-                                  readout.point, readout.state().combination})
-    if (const QString name = inFileName(part); !name.isEmpty())
-      parts << name;
-  return parts.join(QLatin1Char('-'));
+  return joinedName({study.isEmpty() ? std::string("figure") : study.toStdString(), readout.point,
+                     readout.state().combination});
 }
 
 Result<void> copyFigure(const Desk& desk, const QString& studyFile) {

@@ -11,7 +11,11 @@ class QWidget;
 
 namespace planewright {
 
-/// The study's figure as the settings arrange it. `studyFile` is the file it was saved to, or empty.
+/// The figure of a readout of the study as the settings arrange it. `studyFile` is the file that the study
+/// was saved to, or empty.
+Result<Picture> figureFor(const Study& study, const Readout& readout, const FigureSettings& settings,
+                          const QString& studyFile, const QString& caption = {});
+/// The same of what is shown.
 Result<Picture> figureFor(const Desk& desk, const FigureSettings& settings, const QString& studyFile,
                           const QString& caption = {});
 
@@ -31,7 +35,7 @@ QString printedWords(double part);
 Result<QString> printAsked(const Picture& picture, const FigureSettings& settings, QWidget* parent);
 
 /// Study, point and combination joined to the name of a file, without an ending.
-QString figureName(const Desk& desk, const QString& studyFile);
+QString figureName(const Readout& readout, const QString& studyFile);
 
 /// Puts the figure, arranged as the last one was, on the clipboard (Edit, Copy figure).
 Result<void> copyFigure(const Desk& desk, const QString& studyFile);

@@ -3,6 +3,7 @@
 
 #include "core/record/embedded_study.h"
 #include "core/study/edit.h"
+#include "ui/figure/figure_arrangement.h"
 #include "ui/figure/figure_page.h"
 #include "ui/figure/figure_sharing.h"
 
@@ -14,6 +15,7 @@
 #include <QImage>
 #include <QLabel>
 #include <QLineEdit>
+#include <QListWidget>
 #include <QMimeData>
 #include <QPushButton>
 #include <QRadioButton>
@@ -89,7 +91,7 @@ bool says(const QWidget& dialog, const char* words) {
 TEST_F(Arrange, SavesWhatIsArrangedInEveryFormat) {
   FigureDialog dialog(desk);
   dialog.show();
-  click(button<QRadioButton>(dialog, "90 mm, half a page"));
+  click(button<QRadioButton>(dialog, "Text column, 90 mm"));
   ASSERT_TRUE(dialog.saveTo(path("a.svg")));
   EXPECT_TRUE(contents("a.svg").contains("width=\"90mm\""));
   click(button<QRadioButton>(dialog, "PDF, lines and text"));
@@ -129,7 +131,7 @@ TEST_F(Arrange, SaysWhatIsWrongWithAWidthAndSavesNothing) {
   FigureDialog dialog(desk);
   dialog.show();
   typeWidth(dialog, "40");
-  EXPECT_TRUE(button<QRadioButton>(dialog, "own width").isChecked());
+  EXPECT_TRUE(button<QRadioButton>(dialog, "Own width").isChecked());
   EXPECT_TRUE(says(dialog, "A width of 40 mm is out of range. Take a number from 90 to 400."));
   EXPECT_FALSE(button<QPushButton>(dialog, "Save").isEnabled());
   EXPECT_FALSE(dialog.saveTo(path("a.svg")));
@@ -152,7 +154,7 @@ TEST_F(Arrange, SaysWhichValuesMovedToTheTable) {
     edits.push_back(Type{{Spot::planeNormal, "P1", name}, std::to_string(6 * i) + " deg"});
   }
   desk.request(edits, desk.newGesture(), QString());
-  click(button<QRadioButton>(dialog, "90 mm, half a page"));
+  click(button<QRadioButton>(dialog, "Text column, 90 mm"));
   EXPECT_TRUE(says(dialog, "No room beside the drawings"));
   EXPECT_TRUE(says(dialog, "they stand in the table."));
 }
@@ -166,10 +168,56 @@ TEST_F(Arrange, OpensWithTheChoicesUsedLast) {
     click(button<QRadioButton>(dialog, "PNG, pixels"));
   }
   const FigureDialog dialog(desk);
-  EXPECT_TRUE(button<QRadioButton>(dialog, "own width").isChecked());
+  EXPECT_TRUE(button<QRadioButton>(dialog, "Own width").isChecked());
   EXPECT_EQ(ownWidth(dialog).text(), QStringLiteral("117"));
   EXPECT_TRUE(button<QCheckBox>(dialog, "Mono: black and greys only").isChecked());
   EXPECT_TRUE(button<QRadioButton>(dialog, "PNG, pixels").isChecked());
+}
+
+TEST_F(Arrange, HasWidthsForATextColumnAndAFullPage) {
+  FigureDialog dialog(desk);
+  dialog.show();
+  EXPECT_TRUE(button<QRadioButton>(dialog, "Full page, 160 mm").isChecked());
+  for (const auto& [words, width] :
+       {std::pair{"Text column, 90 mm", "width=\"90mm\""}, {"Full page, 160 mm", "width=\"160mm\""}}) {
+    click(button<QRadioButton>(dialog, words));
+    ASSERT_TRUE(dialog.saveTo(path("a.svg")));
+    EXPECT_TRUE(contents("a.svg").contains(width));
+  }
+}
+
+TEST_F(Arrange, ArrangesPartsAsAskedAndRemembersIt) {
+  {
+    FigureDialog dialog(desk);
+    dialog.show();
+    ASSERT_TRUE(dialog.saveTo(path("usual.svg")));
+    auto& arrangement = *dialog.findChild<FigureArrangement*>();
+    EXPECT_FALSE(button<QPushButton>(arrangement, "Earlier").isEnabled());
+    button<QPushButton>(arrangement, "Later").click();
+    EXPECT_EQ(arrangement.blocks(), *blocksIn("circle"));
+    EXPECT_EQ(arrangement.list().currentRow(), 1) << "it goes on with the same part";
+    ASSERT_TRUE(dialog.saveTo(path("first.svg")));
+    EXPECT_NE(contents("first.svg"), contents("usual.svg"));
+    auto* box = arrangement.findChild<QComboBox*>();
+    box->setCurrentIndex(2);
+    emit box->activated(2);
+  }
+  FigureDialog dialog(desk);
+  const auto& arrangement = *dialog.findChild<FigureArrangement*>();
+  EXPECT_EQ(arrangement.arrangement(), Arrangement::below);
+  EXPECT_EQ(arrangement.blocks(), *blocksIn("circle"));
+}
+
+TEST_F(Arrange, SaysWhatIsWrongWithAWidthForPartsBesideOneAnother) {
+  FigureDialog dialog(desk);
+  dialog.show();
+  auto* box = dialog.findChild<FigureArrangement*>()->findChild<QComboBox*>();
+  box->setCurrentIndex(1);
+  emit box->activated(1);
+  EXPECT_TRUE(button<QPushButton>(dialog, "Save").isEnabled());
+  click(button<QRadioButton>(dialog, "Text column, 90 mm"));
+  EXPECT_TRUE(says(dialog, "Take 130 mm or more, or set them one below another."));
+  EXPECT_FALSE(button<QPushButton>(dialog, "Save").isEnabled());
 }
 
 TEST_F(Arrange, OffersTheResolutionOnlyForAPng) {
@@ -233,14 +281,14 @@ TEST_F(Arrange, LeavesTheStudyOutForSendingOutsideThisTimeOnly) {
   dialog.show();
   button<QPushButton>(dialog, "For sending outside").click();
   EXPECT_FALSE(button<QCheckBox>(dialog, carrying).isChecked());
-  click(button<QRadioButton>(dialog, "90 mm, half a page"));
+  click(button<QRadioButton>(dialog, "Text column, 90 mm"));
   ASSERT_TRUE(dialog.saveTo(path("a.svg")));
   EXPECT_EQ(restored(contents("a.svg")), std::nullopt);
   EXPECT_TRUE(rememberedFigure(QSettings()).carriesStudy);
   dialog.hide();
   dialog.show();
   EXPECT_TRUE(button<QCheckBox>(dialog, carrying).isChecked());
-  EXPECT_TRUE(button<QRadioButton>(dialog, "90 mm, half a page").isChecked());
+  EXPECT_TRUE(button<QRadioButton>(dialog, "Text column, 90 mm").isChecked());
 }
 
 TEST_F(Arrange, SavesBesideTheStudyAndSaysWhere) {
@@ -307,10 +355,11 @@ TEST_F(Arrange, ShowsTheFigureOnWhiteInADarkWindow) {
 }
 
 TEST_F(Arrange, NamesAFileAfterStudyPointAndCombination) {
-  EXPECT_EQ(figureName(desk, QStringLiteral("/a/b/roof: 1.planewright")), QStringLiteral("roof-1-P1-G"));
-  EXPECT_EQ(figureName(desk, QString()), QStringLiteral("figure-P1-G"));
+  EXPECT_EQ(figureName(desk.readout(), QStringLiteral("/a/b/roof: 1.planewright")),
+            QStringLiteral("roof-1-P1-G"));
+  EXPECT_EQ(figureName(desk.readout(), QString()), QStringLiteral("figure-P1-G"));
   desk.request({Insert{{Spot::combination, "1.35 G + 1.5 S", ""}, {}}}, desk.newGesture(), QString());
-  EXPECT_EQ(figureName(desk, QString()), QStringLiteral("figure-P1-1.35-G+1.5-S"));
+  EXPECT_EQ(figureName(desk.readout(), QString()), QStringLiteral("figure-P1-1.35-G+1.5-S"));
 }
 
 } // namespace

@@ -23,6 +23,8 @@ TEST_F(FigureSettingsFile, RemembersEveryChoice) {
   figure.width = 123.5;
   figure.textPoints = 9.5;
   figure.mono = true;
+  figure.arrangement = Arrangement::below;
+  figure.blocks = *blocksIn("circle,planes");
   figure.format = FigureFormat::png;
   figure.dpi = 600;
   figure.carriesStudy = false;
@@ -43,6 +45,8 @@ TEST_F(FigureSettingsFile, TakesNothingOutOfRange) {
   settings.setValue(QStringLiteral("figure/text"), QStringLiteral("nan"));
   settings.setValue(QStringLiteral("figure/format"), QStringLiteral("gif"));
   settings.setValue(QStringLiteral("figure/dpi"), -3);
+  settings.setValue(QStringLiteral("figure/arrangement"), QStringLiteral("round"));
+  settings.setValue(QStringLiteral("figure/order"), QStringLiteral("circle,circle"));
   EXPECT_EQ(rememberedFigure(settings), FigureSettings());
 }
 
