@@ -40,5 +40,9 @@ struct Judgement {
 
 /// A utilisation may exceed 1 by this much for the rounding of its inputs.
 inline constexpr double exceedingFrom = 1 + 1e-9;
+/// What every verdict, angle within the limit and sentence goes by; what is no number exceeds.
+inline bool exceedsLimit(double utilisation) {
+  return !(utilisation <= exceedingFrom);
+}
 
 } // namespace planewright

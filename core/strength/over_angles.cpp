@@ -58,11 +58,11 @@ void append(Stretches& stretches, double from, double to) {
     stretches.push_back({from, to});
 }
 
-/// Stretches of [-90, 90] in which one part stays within 1.
+/// Stretches of [-90, 90] in which one part stays within the limit.
 Stretches withinOf(const Part& part) {
   Stretches within;
   const std::vector<double> ends = part.pieces();
-  const auto holds = [&part](double degrees) { return part.at(degrees) <= 1; };
+  const auto holds = [&part](double degrees) { return !exceedsLimit(part.at(degrees)); };
   for (std::size_t i = 0; i + 1 < ends.size(); ++i) {
     const double from = ends[i];
     const double to = ends[i + 1];
@@ -201,7 +201,8 @@ std::vector<Within> withinLimit(Judges judges) {
     if (one.to - one.from > coinciding.degrees())
       result.push_back({Angle::fromDegrees(one.from), Angle::fromDegrees(one.to)});
   // -90 and 90 are one direction: what ends there goes on.
-  const bool goesRound = result.size() > 1 && within.front().from == -90 && within.back().to == 90;
+  const auto upright = Angle::fromDegrees(90);
+  const bool goesRound = result.size() > 1 && result.front().from == -upright && result.back().to == upright;
   if (goesRound) {
     result.back().to = result.front().to + Angle::fromDegrees(halfTurn);
     result.erase(result.begin());

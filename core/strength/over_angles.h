@@ -14,14 +14,16 @@ using Judges = std::span<const Judge>;
 /// The greatest utilisation of all combinations in a direction.
 double greatestUtilisation(Judges judges, Angle direction);
 
-/// Directions in which no combination exceeds 1, `from` folded and `to` at most a half turn beyond it.
+/// Directions in which no combination exceeds the limit, `from` folded and `to` at most a half turn beyond
+/// it.
 struct Within {
   Angle from;
   Angle to;
   bool operator==(const Within&) const = default;
 };
 /// All of them, from the least `from` on; the half turn [-90, 90] where every direction is within. Ends are
-/// where the utilisation crosses 1, to the last digits of a double.
+/// where the utilisation crosses the limit, to the last digits of a double; what is narrower than coinciding
+/// directions are apart is left out.
 std::vector<Within> withinLimit(Judges judges);
 
 /// The greatest tolerance that keeps every direction round the nominal one within the limit: none where the

@@ -56,4 +56,69 @@ inline PlaneStress uniaxial(double size, Angle axis) {
   return inTurnedAxes({size, 0, 0}, -axis);
 }
 
+inline rc::Gen<Criterion> anyCriterion() {
+  return rc::gen::map(rc::gen::inRange<std::size_t>(0, namesOf<Criterion>().size()),
+                      [](std::size_t i) { return namesOf<Criterion>()[i].value; });
+}
+
+/// The edge of every tapered edge below.
+inline constexpr Angle someEdge = Angle::fromDegrees(20);
+
+/// Strengths that a criterion can judge by. Cohesion and cut-off are often 0, the cut-off often not given.
+inline Strengths anyStrengthsFor(Criterion criterion) {
+  using enum StrengthKey;
+  Strengths f;
+  for (const Named<MaterialKind>& kind : namesOf<MaterialKind>())
+    if (applies(criterion, kind.value))
+      f.kind = kind.value;
+  if (isLineKind(f.kind)) {
+    const MaterialKind kind = f.kind;
+    f = *anyLineStrengths();
+    f.kind = kind;
+    f[alongBending] = 1.5 * *f[alongTension];
+    return f;
+  }
+  for (const StrengthKey key : keysOf(f.kind))
+    f[key] = *rc::gen::inRange(10, 5000) / 10.0;
+  if (has(f.kind, friction))
+    f[friction] = *rc::gen::inRange(1, 60);
+  if (has(f.kind, cohesion) && *rc::gen::inRange(0, 3) == 0)
+    f[cohesion] = 0;
+  if (has(f.kind, cutoff))
+    f[cutoff] = *rc::gen::element<std::optional<double>>(std::nullopt, 0.0, 0.5, 5.0, 100.0);
+  if (has(f.kind, gammaM2))
+    f[betaW] = f[gammaM2] = 1.1;
+  return f;
+}
+
+/// A state that a criterion was published for.
+inline PlaneStress anyStressWithin(Criterion criterion) {
+  const PlaneStress any = *anyStress();
+  switch (criterion) {
+  case Criterion::hankinson:
+    return uniaxial(any.sx, *anyAngle());
+  case Criterion::compressionAtAngle:
+    return uniaxial(-std::abs(any.sx), *anyAngle());
+  case Criterion::taperedEdge:
+    return uniaxial(any.sx, someEdge);
+  default:
+    return any;
+  }
+}
+
+/// The judges of one to four combinations by one of all criteria, on small and great states.
+inline std::vector<Judge> anyJudges(Criterion criterion = *anyCriterion()) {
+  const Strengths f = anyStrengthsFor(criterion);
+  Parameters parameters;
+  parameters.edge = someEdge;
+  if (criterion == Criterion::hankinson)
+    parameters.n = *rc::gen::element(1.5, 2.0, 2.5);
+  const int count = *rc::gen::inRange(1, 5);
+  std::vector<Judge> judges;
+  for (int i = 0; i < count; ++i)
+    judges.push_back(*Judge::of(criterion, f, parameters,
+                                demandOf(*rc::gen::element(0.02, 0.2, 1.0) * anyStressWithin(criterion))));
+  return judges;
+}
+
 } // namespace planewright

@@ -15,18 +15,16 @@ Angle degrees(double value) {
   return Angle::fromDegrees(value);
 }
 
-std::vector<Judge> anyJudges() {
-  const Criterion criterion = *anyLineCriterion();
-  const Strengths f = *anyLineStrengths();
-  const int count = *rc::gen::inRange(1, 5);
-  std::vector<Judge> judges;
-  for (int i = 0; i < count; ++i)
-    judges.push_back(*Judge::of(criterion, f, {}, demandOf(0.02 * *anyStress())));
-  return judges;
-}
-
 bool isWithin(std::span<const Within> within, Angle direction) {
   return allowedTolerance(within, direction).has_value();
+}
+
+/// Whether within 1e-8 deg of a direction some other is on the other side of the limit.
+bool isNextToAnEnd(const std::vector<Judge>& judges, Angle direction) {
+  const auto exceeds = [&](double by) {
+    return exceedsLimit(greatestUtilisation(judges, direction + degrees(by)));
+  };
+  return exceeds(1e-8) != exceeds(0) || exceeds(-1e-8) != exceeds(0);
 }
 
 RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithAScan, ()) {
@@ -35,10 +33,11 @@ RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithAScan, ()) {
   constexpr double step = 0.25;
   for (double at = -90; at <= 90; at += step) {
     const double utilisation = greatestUtilisation(judges, degrees(at));
-    if (isWithin(within, degrees(at)) == (utilisation <= 1))
+    if (isWithin(within, degrees(at)) == !exceedsLimit(utilisation))
       continue;
-    // Only within rounding of an end may the two differ.
-    RC_ASSERT(std::abs(utilisation - 1) <= 1e-9);
+    // Only within rounding of an end may the two differ; at a jump the end itself is one.
+    if (std::abs(utilisation - 1) > 1e-8)
+      RC_ASSERT(isNextToAnEnd(judges, degrees(at)));
   }
 }
 
@@ -49,7 +48,8 @@ RC_GTEST_PROP(AnglesWithinTheLimit, endWhereTheUtilisationIsOne, ()) {
     if ((one.to - one.from).degrees() >= 180)
       continue;
     for (const Angle end : {one.from, one.to})
-      RC_ASSERT(std::abs(greatestUtilisation(judges, end) - 1) <= 1e-9);
+      if (std::abs(greatestUtilisation(judges, end) - 1) > 1e-8)
+        RC_ASSERT(isNextToAnEnd(judges, end));
   }
 }
 
@@ -62,7 +62,7 @@ RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithTheBand, ()) {
   double worst = 0;
   for (const Judge& judge : judges)
     worst = std::max(worst, worstIn(judge, bandOf(nominal, *allowed)).judgement.utilisation);
-  RC_ASSERT(worst <= 1 + 1e-9);
+  RC_ASSERT(worst <= 1 + 1e-8);
   if (allowed->degrees() > 89.9)
     return;
   for (const Judge& judge : judges)
@@ -73,10 +73,11 @@ RC_GTEST_PROP(AnglesWithinTheLimit, agreeWithTheBand, ()) {
 RC_GTEST_PROP(BestDirection, noScanFindsABetterOne, ()) {
   const std::vector<Judge> judges = anyJudges();
   const BestDirection best = bestDirection(judges);
-  RC_ASSERT(std::abs(greatestUtilisation(judges, best.angle) - best.utilisation) <=
-            1e-9 * (1 + best.utilisation));
   for (double at = -90; at < 90; at += 0.1)
     RC_ASSERT(greatestUtilisation(judges, degrees(at)) >= best.utilisation * (1 - 1e-9));
+  if (std::isfinite(best.utilisation))
+    RC_ASSERT(std::abs(greatestUtilisation(judges, best.angle) - best.utilisation) <=
+              1e-9 * (1 + best.utilisation));
 }
 
 TEST(AnglesWithinTheLimit, areTheHalfTurnOrNone) {
@@ -110,6 +111,30 @@ TEST(AnglesWithinTheLimit, endWhereAPlaneWithoutCutOffIsPulled) {
   ASSERT_EQ(within.size(), 1);
   EXPECT_NEAR(within[0].from.degrees(), 45, 1e-9);
   EXPECT_NEAR(within[0].to.degrees(), 135, 1e-9);
+}
+
+/// Two states of a Coulomb plane without a cut-off whose common directions touch the upright in a single one.
+TEST(AnglesWithinTheLimit, doNotGoRoundBySingleDirections) {
+  using enum StrengthKey;
+  Strengths f;
+  f.kind = MaterialKind::coulomb;
+  f[cohesion] = 10;
+  f[friction] = 30;
+  for (const double sense : {1.0, -1.0}) {
+    const double pressed = -std::sqrt(0.75);
+    const std::vector<Judge> judges = {
+        *Judge::of(Criterion::coulomb, f, {}, demandOf({0, 0, -sense})),
+        *Judge::of(Criterion::coulomb, f, {}, demandOf({pressed, pressed, sense}))};
+    const std::vector<Within> within = withinLimit(judges);
+    for (double at = -89.5; at < 90; ++at)
+      EXPECT_EQ(isWithin(within, degrees(at)), greatestUtilisation(judges, degrees(at)) <= 1) << at;
+  }
+}
+
+TEST(AnglesWithinTheLimit, countAsWithinWhatTheVerdictCountsAsWithin) {
+  const auto judge = Judge::of(Criterion::sumOfSquares, c24(), {}, demandOf({14.5 * (1 + 5e-10), 0, 0}));
+  ASSERT_GT(judge->utilisation({}), 1);
+  EXPECT_TRUE(allowedTolerance(withinLimit({&*judge, 1}), {}));
 }
 
 TEST(SlopePerDegree, isThatOfTheSteeperSideAtACorner) {

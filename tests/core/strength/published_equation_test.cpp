@@ -6,6 +6,8 @@
 #include <gtest/gtest.h>
 #include <rapidcheck/gtest.h>
 
+#include <algorithm>
+#include <array>
 #include <cmath>
 
 namespace planewright {
@@ -85,6 +87,129 @@ RC_GTEST_PROP(LineCriteria, areTheirPublishedEquations, ()) {
   const auto expected = static_cast<double>(published(criterion, f).multiplier(s));
   RC_ASSERT(std::abs(*judgement.multiplier - expected) <= 1e-12 * expected);
   RC_ASSERT(std::abs(judgement.utilisation * *judgement.multiplier - 1) <= 1e-14);
+}
+
+/// Left side of the limit of a criterion of one stress s at an angle to the line, from the stresses in the
+/// line's axes; 1 at the limit.
+Real indexOfOneStress(Criterion criterion, const Strengths& f, const Parameters& parameters, Real s,
+                      Real degrees) {
+  using enum StrengthKey;
+  const Real angle = degrees * std::acos(-1.0L) / 180;
+  const Real sine = std::abs(std::sin(angle));
+  const Real cosine = std::abs(std::cos(angle));
+  const bool pulls = s >= 0;
+  const Real across = pulls ? *f[acrossTension] : *f[acrossCompression];
+  if (criterion == Criterion::taperedEdge) {
+    const Real S = (pulls ? 0.75L : 1.5L) * *f[StrengthKey::shear];
+    const Real sum = std::pow(s * cosine * cosine / *f[alongBending], 2) +
+                     std::pow(s * sine * sine / across, 2) + std::pow(s * sine * cosine / S, 2);
+    return std::sqrt(sum);
+  }
+  const bool isOfCode = criterion == Criterion::compressionAtAngle;
+  const Real P = pulls ? *f[alongTension] : *f[alongCompression];
+  const Real Q = isOfCode ? across * parameters.kc90.value_or(1) : across;
+  const Real n = isOfCode ? 2 : parameters.n.value_or(2);
+  const Real N = P * Q / (P * std::pow(sine, n) + Q * std::pow(cosine, n));
+  return std::abs(s) / N;
+}
+
+RC_GTEST_PROP(UniaxialCriteria, areTheirPublishedEquations, ()) {
+  const Criterion criterion =
+      *rc::gen::element(Criterion::hankinson, Criterion::compressionAtAngle, Criterion::taperedEdge);
+  const Strengths f = anyStrengthsFor(criterion);
+  const double size = *anyComponent();
+  RC_PRE(size != 0);
+  const double s = criterion == Criterion::compressionAtAngle ? -std::abs(size) : size;
+  // In the axes of its own stress, so that no rounding of a turn is in the way.
+  const Parameters parameters{*rc::gen::element(1.5, 2.0, 3.0), {}, *rc::gen::element(1.0, 1.5), Angle()};
+  const Angle angle = *anyAngle();
+  const Judgement judgement = Judge::of(criterion, f, parameters, demandOf({s, 0, 0}))->at(angle);
+  const auto expected = static_cast<double>(indexOfOneStress(criterion, f, parameters, s, angle.degrees()));
+  RC_ASSERT(std::abs(judgement.utilisation - expected) <= 1e-12 * expected);
+  RC_ASSERT(std::abs(judgement.utilisation * *judgement.multiplier - 1) <= 1e-14);
+}
+
+/// Principal stresses in long double, greatest first.
+std::array<Real, 3> principalsInLongDouble(const Demand& demand) {
+  const PlaneStress& s = demand.stress;
+  const Real mean = (static_cast<Real>(s.sx) + s.sy) / 2;
+  const Real radius = std::hypot((static_cast<Real>(s.sx) - s.sy) / 2, static_cast<Real>(s.txy));
+  std::array<Real, 3> all = {mean + radius, mean - radius, demand.sz};
+  std::ranges::sort(all, std::greater());
+  return all;
+}
+
+RC_GTEST_PROP(PrincipalCriteria, areTheirPublishedEquations, ()) {
+  using enum StrengthKey;
+  const Criterion criterion =
+      *rc::gen::element(Criterion::vonMises, Criterion::tresca, Criterion::rankine, Criterion::mohrCoulomb);
+  const Strengths f = anyStrengthsFor(criterion);
+  Demand demand = demandOf(*anyStress());
+  demand.sz = *anyComponent();
+  const auto [a, b, c] = principalsInLongDouble(demand);
+  const Real scale = std::max({std::abs(a), std::abs(c), Real(1e-3)});
+  const Judgement judgement = Judge::of(criterion, f, {}, demand)->at({});
+  const auto isNear = [&](double value, Real expected, Real strength) {
+    return std::abs(value - expected) <= 1e-13L * scale / strength + 1e-12L * std::abs(expected);
+  };
+  const Real ft = *f[tension];
+  if (criterion == Criterion::vonMises)
+    RC_ASSERT(isNear(judgement.utilisation,
+                     std::sqrt(((a - b) * (a - b) + (b - c) * (b - c) + (c - a) * (c - a)) / 2) / ft, ft));
+  if (criterion == Criterion::tresca)
+    RC_ASSERT(isNear(judgement.utilisation, (a - c) / ft, ft));
+  if (criterion == Criterion::rankine) {
+    const Real fc = *f[compression];
+    RC_ASSERT(isNear(judgement.utilisation, std::max({a / ft, -c / fc, Real(0)}), std::min(ft, fc)));
+  }
+  if (criterion != Criterion::mohrCoulomb)
+    return;
+  const Real phi = static_cast<Real>(*f[friction]) * std::acos(-1.0L) / 180;
+  const Real resists = *f[cohesion] * std::cos(phi) - (a + c) / 2 * std::sin(phi);
+  const Real grows = (a - c) / 2 + (a + c) / 2 * std::sin(phi);
+  RC_PRE(std::abs(resists) > 1e-6L * scale && std::abs(grows) > 1e-6L * scale);
+  if (resists > 0)
+    RC_ASSERT(std::abs(judgement.utilisation - (a - c) / 2 / resists) <=
+              1e-8L * std::max(Real(1), (a - c) / 2 / resists));
+  else
+    RC_ASSERT(std::isinf(judgement.utilisation));
+  RC_ASSERT(judgement.multiplier.has_value() == (grows > 0));
+  if (grows > 0)
+    RC_ASSERT(std::abs(*judgement.multiplier - *f[cohesion] * std::cos(phi) / grows) <=
+              1e-8L * *judgement.multiplier);
+}
+
+RC_GTEST_PROP(PlaneCriteria, areTheirPublishedEquations, ()) {
+  using enum StrengthKey;
+  const Criterion criterion = *rc::gen::element(Criterion::coulomb, Criterion::throat, Criterion::bond);
+  const Strengths f = anyStrengthsFor(criterion);
+  const Real sn = *anyComponent();
+  const Real t = *anyComponent();
+  RC_PRE(sn != 0 || t != 0);
+  const double utilisation =
+      Judge::of(criterion, f, {}, demandOf({static_cast<double>(sn), 0, static_cast<double>(t)}))
+          ->utilisation({});
+  const auto isNear = [&](Real expected) {
+    return std::abs(utilisation - expected) <= 1e-12L * std::abs(expected);
+  };
+  if (criterion == Criterion::throat) {
+    const Real combined = *f[fu] / (static_cast<Real>(*f[betaW]) * *f[gammaM2]);
+    RC_ASSERT(isNear(
+        std::max(std::sqrt(sn * sn + 3 * t * t) / combined, std::abs(sn) / (0.9L * *f[fu] / *f[gammaM2]))));
+  }
+  if (criterion == Criterion::bond)
+    RC_ASSERT(isNear(std::hypot(std::max(sn, Real(0)) / *f[tension], t / *f[StrengthKey::shear])));
+  if (criterion != Criterion::coulomb)
+    return;
+  const Real slope = std::tan(static_cast<Real>(*f[friction]) * std::acos(-1.0L) / 180);
+  const Real resists = *f[cohesion] - sn * slope;
+  RC_PRE(std::abs(resists) > 1e-3L * std::abs(sn));
+  const Real limit = f[cutoff].value_or(0);
+  if (resists < 0 || (sn > 0 && limit == 0))
+    RC_ASSERT(std::isinf(utilisation));
+  else
+    RC_ASSERT(isNear(std::max(std::abs(t) / resists, sn > 0 ? sn / limit : Real(0))) ||
+              std::abs(utilisation - std::abs(t) / resists) <= 1e-11L * utilisation);
 }
 
 RC_GTEST_PROP(LineCriteria, areProportionalToTheLoad, (bool doubled)) {
