@@ -22,8 +22,7 @@ public:
   double drawn(double left, double right, double top) {
     const Readout& readout = m_setting.readout;
     const Verdict verdict = verdictOf(readout);
-    const std::optional<JudgedCheck>& told =
-        verdict.standing == Standing::unjudged ? verdict.unjudged : verdict.governing;
+    const std::optional<JudgedCheck>& told = toldOf(verdict);
     if (!told)
       return top;
     top += 0.6 * m_setting.text; // below the rule of the table
@@ -66,7 +65,7 @@ private:
     if (reading.problem)
       sentences.push_back(notJudgedSentence(readout, told));
     else {
-      sentences.push_back(multiplierSentence(reading.worst));
+      sentences.push_back(multiplierSentence(reading));
       sentences.push_back(worstSentence(check, reading));
       sentences.push_back(factorSentence(reading.factor));
     }

@@ -3,82 +3,102 @@
 
 #include <algorithm>
 #include <cmath>
+#include <limits>
 
 namespace planewright {
 
 namespace {
 
 constexpr int steps = 48;
+constexpr double unbounded = std::numeric_limits<double>::infinity();
 
 /// Tension positive, tnt >= 0.
 using Upper = std::vector<Traction>;
 
-double value(const Strengths& strengths, StrengthKey key) {
-  return strengths[key].value_or(0);
+/// How far sn may go on the side of a piece where there is no shear.
+double endOf(const Interaction& piece) {
+  if (piece.a11 > 0)
+    return 1 / std::sqrt(piece.a11);
+  return piece.b1 != 0 ? 1 / std::abs(piece.b1) : unbounded;
 }
 
-Upper coulombLine(const Strengths& strengths, double reach) {
-  const double cohesion = value(strengths, StrengthKey::cohesion);
-  const CosSin phi = cosSin(Angle::fromDegrees(value(strengths, StrengthKey::friction)));
-  const double slope = phi.sin / phi.cos;
-  const double end = std::min(value(strengths, StrengthKey::cutoff), cohesion / slope);
-  const auto limit = [&](double sn) { return Traction{sn, std::max(cohesion - sn * slope, 0.0)}; };
-  Upper line = {limit(-reach), limit(end)};
+/// What the parts of a criterion of a plane, taken together, allow.
+struct Limit {
+  double from = -unbounded; ///< the least and the greatest sn
+  double to = unbounded;
+  const Mobilised* plane = nullptr; ///< of these two one bounds the shear
+  const SignedForm* form = nullptr;
+
+  explicit Limit(const Judge& judge) {
+    for (const Branch& branch : judge.branches()) {
+      if (const auto* cutOff = std::get_if<CutOff>(&branch))
+        to = std::min(to, cutOff->limit);
+      if (const auto* mobilised = std::get_if<Mobilised>(&branch)) {
+        plane = mobilised;
+        to = std::min(to, mobilised->cohesion / mobilised->tanPhi);
+      }
+      if (const auto* signs = std::get_if<SignedForm>(&branch)) {
+        from = std::max(from, -endOf(signs->pieces[1][0]));
+        to = std::min(to, endOf(signs->pieces[0][0]));
+        if (signs->pieces[0][0].a66 > 0)
+          form = signs;
+      }
+    }
+  }
+
+  /// The greatest |tnt| at sn.
+  double tntAt(double sn) const {
+    if (plane)
+      return std::max(plane->cohesion - sn * plane->tanPhi, 0.0);
+    const Interaction& piece = form->pieces[sn < 0 ? 1 : 0][0];
+    return std::sqrt(std::max(0.0, 1 - piece.a11 * sn * sn) / piece.a66);
+  }
+
+  /// Where the line is drawn through, ascending; straight between the first two unless all of it is an arc.
+  std::vector<double> through(double reach) const {
+    if (plane)
+      return {-reach, to};
+    const bool isArc = std::isfinite(from);
+    const double start = isArc ? from : 0;
+    std::vector<double> all;
+    if (!isArc)
+      all.push_back(-reach);
+    for (int i = 0; i <= steps; ++i)
+      all.push_back(start + (to - start) * i / steps);
+    return all;
+  }
+};
+
+Upper upperLine(const Limit& limit, double reach) {
+  Upper line;
+  if (std::isfinite(limit.from))
+    line.push_back({limit.from, 0});
+  for (const double sn : limit.through(reach))
+    line.push_back({sn, limit.tntAt(sn)});
   if (line.back().tnt > 0)
-    line.push_back({end, 0});
+    line.push_back({limit.to, 0});
   return line;
 }
 
-/// The arc of an ellipse with these half axes, from sn to the end of the greater sn.
-void addArc(Upper& line, double from, double to, double alongSn, double alongTau) {
-  for (int i = 0; i <= steps; ++i) {
-    const double sn = from + (to - from) * i / steps;
-    line.push_back({sn, alongTau * std::sqrt(std::max(0.0, 1 - (sn / alongSn) * (sn / alongSn)))});
+std::optional<Traction> marginEndOf(const Limit& limit, const Judge& judge, Angle normal) {
+  const LineStress at = judge.state().at(normal);
+  if (limit.plane) {
+    const double tnt = limit.tntAt(at.along);
+    return tnt > 0 && at.along <= limit.to ? std::optional(Traction{at.along, std::copysign(tnt, at.shear)})
+                                           : std::nullopt;
   }
-}
-
-Upper throatLine(const Strengths& strengths) {
-  const double combined = value(strengths, StrengthKey::fu) /
-                          (value(strengths, StrengthKey::betaW) * value(strengths, StrengthKey::gammaM2));
-  const double normal = 0.9 * value(strengths, StrengthKey::fu) / value(strengths, StrengthKey::gammaM2);
-  const double end = std::min(combined, normal);
-  Upper line = {{-end, 0}};
-  addArc(line, -end, end, combined, combined / std::sqrt(3.0));
-  line.push_back({end, 0});
-  return line;
-}
-
-Upper bondLine(const Strengths& strengths, double reach) {
-  const double fs = value(strengths, StrengthKey::shear);
-  Upper line = {{-reach, fs}};
-  addArc(line, 0, value(strengths, StrengthKey::tension), value(strengths, StrengthKey::tension), fs);
-  return line;
-}
-
-Upper upperLine(const CheckSetup& check, const Strengths& strengths, double reach) {
-  switch (check.criterion) {
-  case Criterion::coulomb:
-    return coulombLine(strengths, reach);
-  case Criterion::throat:
-    return throatLine(strengths);
-  default:
-    return bondLine(strengths, reach);
-  }
-}
-
-std::optional<Traction> marginEndOf(const CheckSetup& check, const Strengths& strengths, const Judge& judge) {
-  const LineStress at = judge.state().at(check.band->nominal);
-  if (check.criterion == Criterion::coulomb) {
-    const CosSin phi = cosSin(Angle::fromDegrees(value(strengths, StrengthKey::friction)));
-    const double limit = value(strengths, StrengthKey::cohesion) - at.along * phi.sin / phi.cos;
-    const bool pulled = at.along > value(strengths, StrengthKey::cutoff);
-    return limit > 0 && !pulled ? std::optional(Traction{at.along, std::copysign(limit, at.shear)})
-                                : std::nullopt;
-  }
-  const std::optional<double> multiplier = judge.at(check.band->nominal).multiplier;
+  const std::optional<double> multiplier = judge.at(normal).multiplier;
   if (!multiplier)
     return std::nullopt;
   return Traction{*multiplier * at.along, *multiplier * at.shear};
+}
+
+/// The plane that loads growing together bring to its limit first.
+std::optional<NormalAngle> firstTouchOf(const Judge& judge, Angle normal) {
+  const auto first = worstIn(judge, bandOf(normal, Angle::fromDegrees(90))).first;
+  if (!first || first->multiplier == 0)
+    return std::nullopt;
+  return NormalAngle{folded(first->angle)};
 }
 
 } // namespace
@@ -90,12 +110,13 @@ std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach) {
   const double sense = readout.positive == Positive::tension ? 1 : -1;
   for (std::size_t i = 0; i < state.checks.size(); ++i) {
     const CheckSetup& check = readout.checks[i];
-    if (check.plane.empty() || state.checks[i].problem)
+    if (check.plane.empty())
       continue;
-    const Strengths strengths = state.checks[i].factor.value * check.strengths;
     const Result<Judge> judge = judgeOf(readout, state, i);
     if (!judge)
       continue;
+    const Limit limit(*judge);
+    const Angle normal = check.band->nominal;
     FailureLine line;
     line.check = check.id;
     line.material = check.material;
@@ -106,14 +127,12 @@ std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach) {
       line.leads = true;
       greatest = utilisation;
     }
-    line.upper = upperLine(check, strengths, reach);
-    line.planeAt = tractionOn(state.stress, NormalAngle{check.band->nominal});
-    line.marginEnd = marginEndOf(check, strengths, *judge);
-    const WorstInBand worst = worstIn(*judge, bandOf(check.band->nominal, Angle::fromDegrees(90)));
-    if (std::isfinite(worst.judgement.utilisation) && worst.judgement.utilisation > 0) {
-      line.touch = NormalAngle{folded(worst.angle)};
+    line.upper = upperLine(limit, reach);
+    line.planeAt = tractionOn(state.stress, NormalAngle{normal});
+    line.marginEnd = marginEndOf(limit, *judge, normal);
+    line.touch = firstTouchOf(*judge, normal);
+    if (line.touch)
       line.touchAt = tractionOn(state.stress, *line.touch);
-    }
     // The tensor of a study that counts compression positive is the negated one.
     for (Traction& at : line.upper)
       at.sn *= sense;

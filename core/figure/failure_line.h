@@ -7,11 +7,14 @@ namespace planewright {
 
 /// What the strengths of a plane look like on the circle, in N/mm2 and the sense of signs of the study.
 struct FailureLine {
-  std::string check;                ///< its id
-  std::string material;             ///< whose strengths it shows
-  bool leads = false;               ///< of the check with the greatest utilisation in the shown state
-  std::vector<Traction> upper;      ///< from the side of compression to that of tension, tnt >= 0
-  std::optional<NormalAngle> touch; ///< the plane of the shown state that comes nearest to it, or is worst
+  std::string check;           ///< its id
+  std::string material;        ///< whose strengths it shows
+  bool leads = false;          ///< of the check with the greatest utilisation in the shown state
+  std::vector<Traction> upper; ///< from the side of compression to that of tension, tnt >= 0
+  /// The plane of the shown state that its limit meets first when all loads grow (or shrink) together, and
+  /// its stresses now. None where no multiple of them does, or where the plane takes nothing however small
+  /// they are.
+  std::optional<NormalAngle> touch;
   Traction touchAt;
   /// From the checked plane to its limit: at the same sn for a Coulomb plane, whose clamping resists, else
   /// along the ray on which all loads grow. None where no multiple reaches the limit.

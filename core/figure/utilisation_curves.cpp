@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/utilisation_curves.h"
 
+#include "core/strength/over_angles.h"
+
 #include <algorithm>
 
 namespace planewright {
@@ -9,8 +11,8 @@ namespace {
 
 constexpr int stepsOfHalfTurn = 180;
 
-/// -90 to 90 by whole degrees, with the turning points of all judges between.
-std::vector<double> directionsOf(const std::vector<Judge>& judges) {
+/// -90 to 90 by whole degrees, with the turning points of these judges between.
+std::vector<double> directionsOf(Judges judges) {
   std::vector<double> directions;
   for (int i = 0; i <= stepsOfHalfTurn; ++i)
     directions.push_back(i - stepsOfHalfTurn / 2.0);
@@ -25,19 +27,20 @@ std::vector<double> directionsOf(const std::vector<Judge>& judges) {
   return directions;
 }
 
-UtilisationCurve curveOf(const Judge& judge, const std::vector<double>& directions) {
+/// The greatest of these judges.
+UtilisationCurve curveOf(Judges judges, const std::vector<double>& directions) {
   UtilisationCurve curve;
   curve.reserve(directions.size());
   for (const double degrees : directions)
-    curve.push_back({degrees, std::min(judge.utilisation(Angle::fromDegrees(degrees)), beyondEveryLimit)});
+    curve.push_back(
+        {degrees, std::min(greatestUtilisation(judges, Angle::fromDegrees(degrees)), beyondEveryLimit)});
   return curve;
 }
 
-void raise(UtilisationCurve& greatest, const UtilisationCurve& curve) {
-  if (greatest.empty())
-    greatest = curve;
-  for (std::size_t i = 0; i < curve.size(); ++i)
-    greatest[i].y = std::max(greatest[i].y, curve[i].y);
+void look(double& highest, const UtilisationCurve& curve) {
+  for (const Vec point : curve)
+    if (point.y < beyondEveryLimit)
+      highest = std::max(highest, point.y);
 }
 
 } // namespace
@@ -58,20 +61,21 @@ UtilisationCurves utilisationCurvesOf(const Readout& readout, std::size_t check)
       shown = judges.size();
     judges.push_back(*std::move(judge));
   }
-  const std::vector<double> directions = directionsOf(judges);
   const bool few = judges.size() <= mostOtherCurves + 1;
-  for (std::size_t i = 0; i < judges.size(); ++i) {
-    UtilisationCurve curve = curveOf(judges[i], directions);
-    if (judges.size() > 1)
-      raise(curves.greatest, curve);
-    for (const Vec point : curve)
-      if (point.y < beyondEveryLimit)
-        curves.highest = std::max(curves.highest, point.y);
-    if (i == shown)
-      curves.shown = std::move(curve);
-    else if (few)
-      curves.others.push_back(std::move(curve));
-  }
+  const auto own = [&](std::size_t i) { return Judges(&judges[i], 1); };
+  // The turning points of all in all curves would cost with the square of their number.
+  const std::vector<double> directions = directionsOf(few ? Judges(judges) : shown ? own(*shown) : Judges());
+  if (shown)
+    curves.shown = curveOf(own(*shown), directions);
+  if (judges.size() > 1)
+    curves.greatest = curveOf(judges, directions);
+  for (std::size_t i = 0; few && i < judges.size(); ++i)
+    if (i != shown)
+      curves.others.push_back(curveOf(own(i), directionsOf(own(i))));
+  look(curves.highest, curves.shown);
+  look(curves.highest, curves.greatest);
+  for (const UtilisationCurve& curve : curves.others)
+    look(curves.highest, curve);
   return curves;
 }
 

@@ -14,13 +14,14 @@ inline constexpr double beyondEveryLimit = 1e9;
 /// Up to this many other combinations are drawn as lines of their own.
 inline constexpr std::size_t mostOtherCurves = 24;
 
-/// What one check says of every direction. Points stand at each degree and at the turning points between, so
-/// that no corner is cut.
+/// What one check says of every direction. Points stand at each degree and, so that no corner is cut, at the
+/// turning points between: for few combinations in the greatest those of all, for many those of the shown
+/// one.
 struct UtilisationCurves {
   UtilisationCurve shown;               ///< the shown combination; empty where it is not judged
   UtilisationCurve greatest;            ///< of all judged combinations; empty where there is only one
   std::vector<UtilisationCurve> others; ///< the other judged combinations, where they are few enough
-  double highest = 0;                   ///< the greatest finite utilisation of all
+  double highest = 0;                   ///< the greatest finite utilisation of these curves
 };
 
 /// Empty curves for a check without a direction.

@@ -48,7 +48,7 @@ std::vector<CheckField> subjectOf(const CheckSetup& check) {
 std::vector<CheckField> nominalOf(const CheckSetup& check, const CheckReading& reading) {
   const bool judged = !reading.problem;
   return {{"basis", CheckValue(std::string(wordOf(check.basis)))},
-          {"factor", CheckValue(reading.factor.value)},
+          {"factor", reading.hasFactor ? CheckValue(reading.factor.value) : CheckValue()},
           {"utilisation", judged ? finite(reading.nominal.utilisation) : CheckValue()},
           {"load_multiplier", judged ? finite(reading.nominal.multiplier) : CheckValue()},
           {"mode", judged ? modeOf(reading.nominal) : CheckValue()}};
@@ -59,7 +59,7 @@ std::vector<CheckField> worstOf(const CheckReading& reading) {
   const bool hasBand = judged && reading.worstAngle.has_value();
   return {{"worst_angle", hasBand ? CheckValue(reading.worstAngle->degrees()) : CheckValue()},
           {"worst_utilisation", hasBand ? finite(reading.worst.utilisation) : CheckValue()},
-          {"worst_load_multiplier", hasBand ? finite(reading.worst.multiplier) : CheckValue()},
+          {"worst_load_multiplier", hasBand ? finite(reading.leastMultiplier()) : CheckValue()},
           {"worst_mode", hasBand ? modeOf(reading.worst) : CheckValue()},
           {"exceeds", judged ? CheckValue(reading.exceeds()) : CheckValue()},
           {"pairing", named(plain(reading.pairing))},

@@ -4,6 +4,7 @@
 #include "core/record/csv.h"
 #include "core/record/readout_file.h"
 #include "core/table/cautions.h"
+#include "core/table/check_words.h"
 #include "core/table/table.h"
 
 namespace planewright {
@@ -67,6 +68,7 @@ const Fields& heading() {
                                "exceeds",
                                "pairing",
                                "problem",
+                               "check_cautions",
                                "cautions"};
   return names;
 }
@@ -151,9 +153,9 @@ private:
             edge ? stress(edge->traction.tnt) : ""};
   }
 
-  std::string cautions() const {
+  static std::string joined(const std::vector<Text>& cautions) {
     std::string words;
-    for (const Text& caution : cautionsOf(m_readout, m_state))
+    for (const Text& caution : cautions)
       words += (words.empty() ? "" : " ") + plain(caution);
     return words;
   }
@@ -189,6 +191,7 @@ private:
     fields.push_back(check.band ? angle(check.band->from()) : "");
     fields.push_back(check.band ? angle(check.band->to()) : "");
     append(fields, worstOf(m_state.checks[i]));
+    fields.push_back(joined(cautionsOf(check, m_state.checks[i])));
     return fields;
   }
 
@@ -203,8 +206,8 @@ private:
     append(fields, own.plane, 4);
     append(fields, own.line, 8);
     append(fields, sourceFields(), 4);
-    append(fields, own.check, 19);
-    fields.push_back(cautions());
+    append(fields, own.check, 20);
+    fields.push_back(joined(cautionsOf(m_readout, m_state)));
     return csvRow(fields);
   }
 

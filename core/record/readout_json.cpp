@@ -3,6 +3,7 @@
 #include "core/record/json_writer.h"
 #include "core/record/readout_file.h"
 #include "core/table/cautions.h"
+#include "core/table/check_words.h"
 #include "core/table/table.h"
 
 #include <algorithm>
@@ -65,19 +66,23 @@ private:
     text("combination", readout.states[worst->state].combination);
     text("check", readout.checks[worst->check].id);
     value({"utilisation", finite(reading.worst.utilisation)});
-    value({"load_multiplier", finite(reading.worst.multiplier)});
+    value({"load_multiplier", finite(reading.leastMultiplier())});
     value({"angle", reading.worstAngle ? CheckValue(reading.worstAngle->degrees()) : CheckValue()});
     value({"mode", modeOf(reading.worst)});
     m_json.endObject();
   }
 
+  void cautions(const std::vector<Text>& texts) {
+    m_json.key("cautions").beginList();
+    for (const Text& caution : texts)
+      m_json.text(plain(caution));
+    m_json.endList();
+  }
+
   void point(const Readout& readout) {
     m_json.beginObject();
     text("name", readout.point);
-    m_json.key("cautions").beginList();
-    for (const Text& caution : cautionsOf(readout))
-      m_json.text(plain(caution));
-    m_json.endList();
+    cautions(cautionsOf(readout));
     m_json.key("states").beginList();
     for (const StateReading& one : readout.states)
       state(readout, one);
@@ -195,6 +200,7 @@ private:
     } else
       m_json.null();
     values(worstOf(reading));
+    cautions(cautionsOf(setup, reading));
     m_json.endObject();
   }
 

@@ -139,7 +139,7 @@ private:
                      .with(readout.states[told.state].combination)
                      .with(shortVerdict(verdictOf(readout, told.state, told.check))));
     line("    ", factorSentence(reading.factor));
-    line("    ", multiplierSentence(reading.worst));
+    line("    ", multiplierSentence(reading));
     if (const Text worst = worstSentence(setup, reading); !worst.empty())
       line("    ", worst);
     if (reading.worst.mode)

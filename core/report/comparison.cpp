@@ -132,7 +132,7 @@ private:
     }
     for (std::size_t i = 0; i < readout.checks.size(); ++i) {
       const Verdict verdict = verdictOfCheck(readout, i);
-      const std::optional<JudgedCheck>& told = verdict.unjudged ? verdict.unjudged : verdict.governing;
+      const std::optional<JudgedCheck>& told = toldOf(verdict);
       add(readout.point + "/check/" + readout.checks[i].id,
           PW_TEXT("Comparison", "%1: check %2").with(readout.point).with(readout.checks[i].id),
           told ? PW_TEXT("Comparison", "%1 (%2)")

@@ -55,8 +55,8 @@ std::vector<Text> governingLines(const Study& study, const std::vector<Readout>&
                         .with(pointAndState(readout, verdict.governing->state))
                         .with(checkName(readout.checks[verdict.governing->check])));
     const Text worst = worstSentence(readout.checks[verdict.governing->check], reading);
-    lines.push_back(worst.empty() ? multiplierSentence(reading.worst)
-                                  : symbol("%1 %2").with(multiplierSentence(reading.worst)).with(worst));
+    lines.push_back(worst.empty() ? multiplierSentence(reading)
+                                  : symbol("%1 %2").with(multiplierSentence(reading)).with(worst));
   } else if (const std::optional<GoverningStates> worst = governingOf(points)) {
     const auto told = [&](const Text& name, const Governing& one) {
       const Readout& readout = readoutAt(points, one.point);

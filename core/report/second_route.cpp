@@ -108,25 +108,26 @@ private:
     const CheckSetup& setup = m_readout.checks[index];
     if (reading.problem || !std::isfinite(reading.worst.utilisation))
       return;
-    loaded(setup, reading.worst, reading.worstAngle.value_or(Angle()), index);
+    if (reading.first)
+      loaded(setup, *reading.first, index);
     if (setup.band && setup.band->tolerance != Angle())
       scanned(setup, reading.worst.utilisation, index);
   }
 
   /// The state times its load multiplier stands at the limit.
-  void loaded(const CheckSetup& setup, const Judgement& worst, Angle direction, std::size_t index) {
-    if (!worst.multiplier || *worst.multiplier > 1e6)
+  void loaded(const CheckSetup& setup, const FirstInBand& first, std::size_t index) {
+    if (first.multiplier > 1e6)
       return;
     StateReading atLimit = m_state;
-    atLimit.stress = *worst.multiplier * m_state.stress;
-    atLimit.sz *= *worst.multiplier;
-    atLimit.axial *= *worst.multiplier;
-    atLimit.bending *= *worst.multiplier;
-    atLimit.scale *= *worst.multiplier;
+    atLimit.stress = first.multiplier * m_state.stress;
+    atLimit.sz *= first.multiplier;
+    atLimit.axial *= first.multiplier;
+    atLimit.bending *= first.multiplier;
+    atLimit.scale *= first.multiplier;
     atLimit.circle = circleOf(atLimit.stress, atLimit.scale, atLimit.sz);
     if (const Result<Judge> judge = judgeOf(m_readout, atLimit, index))
       add(PW_TEXT("Route", "%1: utilisation at the load multiplier").with(setup.id), 1,
-          judge->utilisation(direction), 1);
+          judge->utilisation(first.angle), 1);
   }
 
   void scanned(const CheckSetup& setup, double worst, std::size_t index) {

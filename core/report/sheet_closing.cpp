@@ -102,7 +102,7 @@ void writeConclusion(SheetWriter& sheet, const std::vector<Readout>& points) {
   for (const Readout& readout : points)
     for (std::size_t i = 0; i < readout.checks.size(); ++i) {
       const Verdict verdict = verdictOfCheck(readout, i);
-      const std::optional<JudgedCheck>& told = verdict.unjudged ? verdict.unjudged : verdict.governing;
+      const std::optional<JudgedCheck>& told = toldOf(verdict);
       table.rows.push_back({verbatim(readout.point),
                             symbol("%1: %2").with(readout.checks[i].id).with(checkName(readout.checks[i])),
                             shortVerdict(verdict),
@@ -126,8 +126,7 @@ void writeCautions(SheetWriter& sheet, const std::vector<Readout>& points) {
   for (const Readout& readout : points) {
     add(cautionsOf(readout));
     for (std::size_t i = 0; i < readout.checks.size(); ++i)
-      if (const Verdict verdict = verdictOfCheck(readout, i); verdict.governing)
-        add(cautionsOf(readout.checks[i], readingOf(readout, *verdict.governing)));
+      add(cautionsOf(readout, i));
   }
   sheet.subheading(PW_TEXT("Sheet", "Cautions"));
   for (const Text& caution : cautions)

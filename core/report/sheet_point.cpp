@@ -110,7 +110,7 @@ private:
                      .with(state.combination)
                      .with(shortVerdict(verdictOf(m_readout, index, number))),
                  Voice::strong);
-    m_sheet.text(multiplierSentence(reading.worst));
+    m_sheet.text(multiplierSentence(reading));
     m_sheet.text(worstSentence(setup, reading));
     if (reading.worst.mode)
       m_sheet.text(PW_TEXT("Sheet", "Mode: %1").with(labelOf(*reading.worst.mode)));

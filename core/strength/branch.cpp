@@ -126,9 +126,13 @@ struct TurningPoints {
 
   void operator()(const SignedForm& form) {
     at.insert(at.end(), {-state.circle.mean, state.circle.mean});
+    std::vector<Interaction> seen;
     for (const auto& row : form.pieces)
       for (const Interaction& piece : row)
-        stationaryOf(piece, state.circle.mean, state.circle.radius, at);
+        if (std::ranges::find(seen, piece) == seen.end()) {
+          seen.push_back(piece);
+          stationaryOf(piece, state.circle.mean, state.circle.radius, at);
+        }
   }
   void operator()(const PowerOfAngle&) {}
   void operator()(const Mobilised& plane) {
@@ -212,6 +216,13 @@ std::vector<Angle> turningPointsOf(const Branch& branch, const TurningState& sta
   std::visit(points, branch);
   for (const double X : points.at)
     state.directionsOf(X, directions);
+  return directions;
+}
+
+std::vector<Angle> firstTouchesOf(const Branch& branch, const TurningState& state) {
+  std::vector<Angle> directions = turningPointsOf(branch, state);
+  if (const auto* plane = std::get_if<Mobilised>(&branch))
+    state.directionsOf(state.circle.radius * plane->tanPhi / std::hypot(1, plane->tanPhi), directions);
   return directions;
 }
 

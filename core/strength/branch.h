@@ -27,6 +27,7 @@ struct TurningState {
 struct Interaction {
   double a11 = 0, a12 = 0, a22 = 0, a66 = 0;
   double b1 = 0, b2 = 0, b6 = 0; ///< b6 only where all of a is 0
+  bool operator==(const Interaction&) const = default;
 };
 
 /// A form with coefficients by the signs of s1 and s2: [s1 < 0][s2 < 0]. Its utilisation 1/R, where
@@ -77,6 +78,9 @@ double utilisationOf(const Branch& branch, const TurningState& state, Angle dire
 std::optional<double> multiplierOf(const Branch& branch, const TurningState& state, Angle direction);
 /// Directions, folded, between which the utilisation of the part is monotone.
 std::vector<Angle> turningPointsOf(const Branch& branch, const TurningState& state);
+/// Directions, folded, at one of which, or at an end of a range of directions, the multiplier of the part is
+/// least: its turning points, and where |t| + s1 tan(phi) of a Coulomb plane is greatest, at X = r sin(phi).
+std::vector<Angle> firstTouchesOf(const Branch& branch, const TurningState& state);
 
 /// (b + sqrt(b^2 + 4a))/2 for a >= 0, by the form that loses no digits.
 double utilisationOfQuadratic(double a, double b);

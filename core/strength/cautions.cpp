@@ -29,7 +29,7 @@ std::optional<Text> ofTimber(Criterion criterion) {
 } // namespace
 
 std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, const Parameters& parameters,
-                             std::optional<Angle> line) {
+                             const std::optional<Band>& band) {
   std::vector<Text> cautions;
   if (strengths.kind == MaterialKind::timber)
     if (auto caution = ofTimber(criterion))
@@ -42,8 +42,12 @@ std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, co
     cautions.push_back(PW_TEXT("Strength",
                                "The linear sum is published for uniaxial tension and bending at an "
                                "angle; for other states it is an extension of this program."));
-  if (criterion == Criterion::taperedEdge && parameters.edge && line &&
-      apart(*parameters.edge, *line).degrees() > steepTaper)
+  if (criterion == Criterion::compressionAtAngle && parameters.kc90.value_or(1) > 1)
+    cautions.push_back(PW_TEXT("Strength",
+                               "A k_{c,90} above 1 belongs to a bearing with its lengths and supports (EN "
+                               "1995-1-1, 6.1.5), not to the stress at a point."));
+  if (criterion == Criterion::taperedEdge && parameters.edge && band &&
+      (apart(*parameters.edge, band->nominal) + band->tolerance).degrees() > steepTaper)
     cautions.push_back(PW_TEXT("Strength",
                                "The taper is over 10°: the formula is stated for less (Swedish Wood, "
                                "Design of timber structures, vol. 1; not in the clause)."));

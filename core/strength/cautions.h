@@ -1,14 +1,14 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/strength/judge.h"
+#include "core/strength/band.h"
 
 namespace planewright {
 
 /// What must be said beside a verdict of this criterion on this material: where the criterion is known to
-/// reassure, what was assumed. `line` is the direction of the line, for the taper of an edge.
+/// reassure, what was assumed. `band`: the directions that the line may have, for the taper of an edge.
 std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, const Parameters& parameters,
-                             std::optional<Angle> line);
+                             const std::optional<Band>& band);
 
 /// What tension across the line asks to be said: the volume factor of timber.
 std::optional<Text> cautionOfTensionAcross(MaterialKind kind);

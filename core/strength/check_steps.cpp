@@ -76,7 +76,15 @@ Step CheckSteps::stepOf(const CheckLine& line) const {
 }
 
 Text CheckSteps::named(const Text& name) const {
-  return m_isWorst ? PW_TEXT("Working", "%1, at the worst direction").with(name) : name;
+  switch (m_at) {
+  case StepsAt::worst:
+    return PW_TEXT("Working", "%1, at the worst direction").with(name);
+  case StepsAt::first:
+    return PW_TEXT("Working", "%1, at the direction that comes to its limit first").with(name);
+  case StepsAt::nominal:
+    break;
+  }
+  return name;
 }
 
 Formula CheckSteps::addStrength(const CheckLine& line) {

@@ -15,6 +15,13 @@ struct CheckLine {
   Text source;
 };
 
+/// The direction that steps of the working of a check are for.
+enum class StepsAt {
+  nominal,
+  worst, ///< of the greatest utilisation in the band
+  first  ///< that growing loads bring to its limit first
+};
+
 /// Collects the steps of the working of a check. A symbol that was put stands for its number in all lines
 /// that follow, until another number takes its place.
 class CheckSteps {
@@ -34,8 +41,8 @@ public:
   Formula addStress(CheckLine line);
   Formula add(CheckLine line);
 
-  /// From here on names say that the direction is the worst one.
-  void turnToWorst() { m_isWorst = true; }
+  /// From here on names say which direction is meant, where it is not the nominal one.
+  void turnTo(StepsAt at) { m_at = at; }
 
   std::vector<Step> steps() const;
 
@@ -45,7 +52,7 @@ private:
 
   WrittenUnits m_units;
   int m_stressDecimals;
-  bool m_isWorst = false;
+  StepsAt m_at = StepsAt::nominal;
   NumbersPutIn m_numbers;
   std::vector<Step> m_strengths;
   std::vector<Step> m_rest;

@@ -59,6 +59,12 @@ Result<Judge> Judge::of(Criterion criterion, const Strengths& strengths, const P
   return judge;
 }
 
+Parameters forStrengthsTimes(double factor, Parameters parameters) {
+  if (parameters.F12)
+    *parameters.F12 /= factor * factor;
+  return parameters;
+}
+
 double Judge::utilisation(Angle direction) const {
   double greatest = 0;
   for (const Branch& branch : m_branches)
@@ -107,7 +113,7 @@ std::optional<Mode> Judge::modeAt(Angle direction, double utilisation) const {
         {ratioOf(s.along, f(alongBending), f(alongBending), Mode::tensionAlong, Mode::compressionAlong),
          ratioOf(s.across, f(acrossTension), f(acrossCompression), Mode::tensionAcross,
                  Mode::compressionAcross),
-         {Mode::shear, std::abs(s.shear) / ((pulls ? 0.75 : 1.5) * f(StrengthKey::shear))}},
+         {Mode::shear, std::abs(s.shear) / (taperShearFactor(pulls) * f(StrengthKey::shear))}},
         utilisation);
   }
   default:

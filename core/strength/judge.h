@@ -18,6 +18,10 @@ struct Parameters {
   bool operator==(const Parameters&) const = default;
 };
 
+/// The parameters beside strengths that are multiplied by a factor: F12, given for the strengths as they are
+/// given, is divided by its square as F11 and F22 are.
+Parameters forStrengthsTimes(double factor, Parameters parameters);
+
 /// A criterion with its strengths, looking at the state of one combination: what it says of every direction
 /// of the line (or of the normal of the plane).
 class Judge {

@@ -116,6 +116,14 @@ Result<Uniaxial> uniaxialOf(const Demand& demand) {
   const bool firstIsGreater = std::abs(circle.s1) >= std::abs(circle.s2);
   const double greater = firstIsGreater ? circle.s1 : circle.s2;
   const double smaller = firstIsGreater ? circle.s2 : circle.s1;
+  if (std::abs(demand.sz) > uniaxialShare * std::abs(greater))
+    return tl::unexpected(
+        problem(PW_TEXT("Strength", "This criterion is for uniaxial stress only; the principal stresses "
+                                    "here are %1 and %2 MPa, and %3 MPa out of the plane.")
+                    .with(written(circle.s1))
+                    .with(written(circle.s2))
+                    .with(written(demand.sz)),
+                PW_TEXT("Strength", "Take a criterion for combined stresses, such as sum-of-squares.")));
   if (std::abs(smaller) > uniaxialShare * std::abs(greater))
     return tl::unexpected(
         problem(PW_TEXT("Strength", "This criterion is for uniaxial stress only; the principal stresses "
@@ -173,7 +181,7 @@ Result<LineStrengths> taperStrengths(const Strengths& strengths, bool pulls) {
   for (const Result<double>* one : {&X, &Y, &S})
     if (!*one)
       return tl::unexpected(one->error());
-  return LineStrengths{*X, *X, *Y, *Y, (pulls ? 0.75 : 1.5) * *S};
+  return LineStrengths{*X, *X, *Y, *Y, taperShearFactor(pulls) * *S};
 }
 
 Result<std::vector<Branch>> taperedEdge(const Strengths& strengths, const Parameters& parameters,
@@ -206,15 +214,19 @@ Result<double> needed(const Strengths& strengths, StrengthKey key) {
                                 PW_TEXT("Strength", "Give it among the strengths of the material.")));
 }
 
+double taperShearFactor(bool pulls) {
+  return pulls ? 0.75 : 1.5;
+}
+
 Result<double> alongStrengthOf(const Strengths& strengths, const Demand& demand, bool pulls) {
   using enum StrengthKey;
   Result<double> axial = needed(strengths, pulls ? alongTension : alongCompression);
-  const double w = demand.bendingShare;
-  if (!axial || strengths.kind != MaterialKind::timber || w == 0)
+  if (!axial || strengths.kind != MaterialKind::timber || !mixesBending(demand, pulls))
     return axial;
   Result<double> bending = needed(strengths, alongBending);
   if (!bending)
     return bending;
+  const double w = bendingShareAlong(demand);
   return 1 / ((1 - w) / *axial + w / *bending);
 }
 

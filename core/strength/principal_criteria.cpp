@@ -52,6 +52,10 @@ Result<Judgement> mohrCoulomb(const Strengths& strengths, const std::array<doubl
 std::array<double, 3> principalsOf(const Demand& demand) {
   const Circle circle = circleOf(demand.stress, demand.scale, demand.sz);
   std::array<double, 3> s{circle.s1, circle.s2, demand.sz};
+  const double scale = std::max(demand.scale, std::abs(demand.sz));
+  for (double& one : s)
+    if (isRounding(one, scale))
+      one = 0;
   std::ranges::sort(s, std::greater());
   return s;
 }

@@ -66,13 +66,22 @@ void addHoffman(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths&
                f.linear());
 }
 
+Formula givenF12(const WrittenCriterion& at, CheckSteps& steps, const WrittenStrengths& strengths) {
+  Formula given = steps.put("F_{12}", *at.parameters.F12, dimension::inverseSquareStress);
+  if (!strengths.factor())
+    return given;
+  return steps.addStrength({PW_TEXT("Working", "product coefficient of the strengths times the factor"),
+                            strengths.derived("F_{12}"), given / power(Formula::symbol("k"), 2),
+                            *forStrengthsTimes(*strengths.factor(), at.parameters).F12,
+                            dimension::inverseSquareStress, rowOf(at.criterion).source});
+}
+
 void addTsaiWu(const WrittenCriterion& at, CheckSteps& steps, WrittenStrengths& strengths) {
   const BothSigns f = bothSigns(strengths);
   const Formula square = power(s1, 2) / (f.Xt * f.Xc);
-  const auto& given = at.parameters.F12;
-  const Formula along =
-      given ? square + 2 * steps.put("F_{12}", *given, dimension::inverseSquareStress) * s1 * s2
-            : square - s1 * s2 / root(f.Xt * f.Xc * f.Yt * f.Yc);
+  const bool given = at.parameters.F12.has_value();
+  const Formula along = given ? square + 2 * givenF12(at, steps, strengths) * s1 * s2
+                              : square - s1 * s2 / root(f.Xt * f.Xc * f.Yt * f.Yc);
   addQuadratic(at, steps,
                given
                    ? PW_TEXT("Working", "terms quadratic in the stresses")

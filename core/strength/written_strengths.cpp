@@ -52,13 +52,13 @@ Formula WrittenStrengths::of(StrengthKey key) {
 Formula WrittenStrengths::along(bool pulls) {
   const StrengthKey axialKey = pulls ? StrengthKey::alongTension : StrengthKey::alongCompression;
   Formula axial = of(axialKey);
-  if (!isMixed(m_given, m_demand))
+  if (!isMixed(m_given, m_demand) || !mixesBending(m_demand, pulls))
     return axial;
   const std::string mixed = derived(pulls ? "f_{t,NM}" : "f_{c,NM}");
   if (m_steps.knows(mixed))
     return Formula::symbol(mixed);
   const Formula bending = of(StrengthKey::alongBending);
-  const Formula w = m_steps.put("w", m_demand.bendingShare, dimension::none);
+  const Formula w = bendingShare();
   const Result<double> value = alongStrengthOf(m_factor ? *m_factor * m_given : m_given, m_demand, pulls);
   assert(value);
   return m_steps.addStrength({pulls ? PW_TEXT("Working", "strength along the line, axial tension mixed with "
@@ -66,6 +66,20 @@ Formula WrittenStrengths::along(bool pulls) {
                                     : PW_TEXT("Working", "strength along the line, axial compression mixed "
                                                          "with bending"),
                               mixed, 1 / ((1 - w) / axial + w / bending), *value, dimension::stress, source});
+}
+
+/// The share of bending in sx stands for that along the line where nothing else acts.
+Formula WrittenStrengths::bendingShare() {
+  Formula ofSx = m_steps.put("w", m_demand.bendingShare, dimension::none);
+  const double along = bendingShareAlong(m_demand);
+  if (along == m_demand.bendingShare)
+    return ofSx;
+  const Formula sx = absolute(Formula::symbol("σ_{x}"));
+  const Formula sy = absolute(Formula::symbol("σ_{y}"));
+  const Formula shear = absolute(Formula::symbol("τ_{xy}"));
+  return m_steps.addStrength(
+      {PW_TEXT("Working", "share of bending along the line, all else counted as axial"), "w_{φ}",
+       ofSx * sx / (sx + sy + 2 * shear), along, dimension::none, source});
 }
 
 Formula WrittenStrengths::across(bool pulls) {

@@ -21,18 +21,23 @@ public:
 
   Formula of(StrengthKey key);
   /// Along the line in tension (`pulls`) or compression: of timber that of the mix of axial and bending
-  /// parts, whose share is "w" in the steps.
+  /// parts where sx has that sign; the share of bending in sx is "w" in the steps, which have the stresses of
+  /// the x and y faces too.
   Formula along(bool pulls);
   Formula across(bool pulls);
 
   /// What the working calls what is made of this strength: "f_{t,α,d}" for "α" in the place of "0".
   std::string derived(const std::string& symbol) const;
+  /// What the strengths are multiplied by; none where they count as given.
+  const std::optional<double>& factor() const { return m_factor; }
   MaterialKind kind() const { return m_given.kind; }
   const Demand& demand() const { return m_demand; }
   /// As it counts in the criterion; what is not given counts as 0.
   double valueOf(StrengthKey key) const;
 
 private:
+  Formula bendingShare();
+
   CheckSteps& m_steps;
   Strengths m_given;
   std::optional<double> m_factor;

@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/strength/line_criteria.h"
 #include "core/strength/written_parts.h"
 
 #include <algorithm>
@@ -61,7 +62,7 @@ void addTaperedEdge(const WrittenCriterion& at, CheckSteps& steps, WrittenStreng
                     Angle toLine) {
   const Formula X = strengths.of(StrengthKey::alongBending);
   const Formula Y = strengths.across(pulls);
-  const Formula S = (pulls ? 0.75 : 1.5) * strengths.of(StrengthKey::shear);
+  const Formula S = taperShearFactor(pulls) * strengths.of(StrengthKey::shear);
   const Formula s1 = Formula::symbol(stress_symbol::along);
   const Formula s2 = Formula::symbol(stress_symbol::across);
   const Formula t = Formula::symbol(stress_symbol::shear);
@@ -69,7 +70,7 @@ void addTaperedEdge(const WrittenCriterion& at, CheckSteps& steps, WrittenStreng
     return addUtilisationStep(at, steps, root(power(s1 / X, 2) + power(s2 / Y, 2) + power(t / S, 2)));
   const double tangentOf = cosSin(toLine).sin / cosSin(toLine).cos;
   const double f = strengths.valueOf(StrengthKey::alongBending);
-  const double ratioS = f * tangentOf / ((pulls ? 0.75 : 1.5) * strengths.valueOf(StrengthKey::shear));
+  const double ratioS = f * tangentOf / (taperShearFactor(pulls) * strengths.valueOf(StrengthKey::shear));
   const double ratioY =
       f * tangentOf * tangentOf /
       strengths.valueOf(pulls ? StrengthKey::acrossTension : StrengthKey::acrossCompression);

@@ -57,8 +57,8 @@ void judge(SideBySide& row, const Readout& readout, std::size_t index, std::size
   const StateReading& state = readout.states[index];
   const CheckReading& reading = state.checks[check];
   const Result<Judge> judge =
-      reading.hasFactor ? Judge::of(row.criterion, reading.factor.value * setup.strengths,
-                                    row.isChosen ? setup.parameters : Parameters{}, demandOf(readout, state))
+      reading.hasFactor ? judgeBy(row.criterion, setup, row.isChosen ? setup.parameters : Parameters{},
+                                  reading.factor.value, demandOf(readout, state))
                         : tl::unexpected(*reading.problem);
   if (!judge) {
     if (!row.problem)
@@ -112,7 +112,7 @@ Edits withDirection(const Point& point, const Check& check, const std::string& n
 }
 
 Standing SideBySide::standing() const {
-  if (state && worst.utilisation > exceedingFrom)
+  if (state && exceedsLimit(worst.utilisation))
     return Standing::exceeds;
   return problem || !state ? Standing::unjudged : Standing::within;
 }

@@ -49,9 +49,15 @@ struct CheckReading {
   Judgement nominal;
   Judgement worst;
   std::optional<Angle> worstAngle; ///< unfolded, inside the band
-  Text pairing;                    ///< how the basis of loads and strengths do not match; empty where they do
-  std::vector<Text> cautions;      ///< that this combination asks for
-  bool exceeds() const { return !problem && worst.utilisation > exceedingFrom; }
+  /// The direction of the band that loads growing together bring to its limit first, with their multiplier;
+  /// that of `worst` where the utilisation is proportional to the loads. None where no multiple does.
+  std::optional<FirstInBand> first;
+  std::optional<double> leastMultiplier() const {
+    return first ? std::optional(first->multiplier) : std::nullopt;
+  }
+  Text pairing;               ///< how the basis of loads and strengths do not match; empty where they do
+  std::vector<Text> cautions; ///< of this combination alone
+  bool exceeds() const { return !problem && exceedsLimit(worst.utilisation); }
   bool operator==(const CheckReading&) const = default;
 };
 

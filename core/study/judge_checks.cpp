@@ -2,6 +2,8 @@
 #include "core/study/judge_checks.h"
 
 #include "core/quantity/format.h"
+#include "core/quantity/lexer.h"
+#include "core/quantity/slopes.h"
 #include "core/strength/cautions.h"
 #include "core/study/text_fields.h"
 #include "core/study/typed.h"
@@ -64,7 +66,15 @@ std::optional<Band> bandOf(const Readout& readout, const Check& check) {
   return std::nullopt;
 }
 
-CheckSetup setupOf(const Study& study, const Readout& readout, const Check& check, const Material& material) {
+/// A grain typed as a slope, to one side and without a tolerance.
+bool isOneSidedSlope(const Readout& readout, const std::string& name) {
+  const auto line = std::ranges::find(readout.lines, name, &LineReading::name);
+  return line != readout.lines.end() && line->kind == LineKind::grain && line->tolerance == Angle() &&
+         readSlope(line->typed, tokensOf(line->typed), Slopes::line).has_value();
+}
+
+CheckSetup setupOf(const Study& study, const Readout& readout, const Check& check, const Material& material,
+                   const Factors& factors) {
   CheckSetup setup;
   setup.id = check.id;
   setup.material = material.name;
@@ -75,8 +85,17 @@ CheckSetup setupOf(const Study& study, const Readout& readout, const Check& chec
   setup.parameters = parametersOf(study, check.parameters);
   setup.strengths = strengthsOf(study, material);
   setup.basis = material.basis;
-  const std::optional<Angle> direction = setup.band ? std::optional(setup.band->nominal) : std::nullopt;
-  setup.cautions = cautionsOf(check.criterion, setup.strengths, setup.parameters, direction);
+  setup.cautions = cautionsOf(check.criterion, setup.strengths, setup.parameters, setup.band);
+  if (material.kind == MaterialKind::timber) {
+    if (factors.partial && !factors.given && !factors.hasDurations())
+      setup.cautions.push_back(PW_TEXT("Strength", "The material has a partial factor and no factors for the "
+                                                   "duration of loads: k_{mod} counts as 1."));
+    if (isOneSidedSlope(readout, check.line))
+      setup.cautions.push_back(
+          PW_TEXT("Strength", "The slope of the grain counts to one side, and the sign of τ_{xy} decides "
+                              "whether it is pulled or pressed across: where its sense is not known, give 0° "
+                              "with the slope as tolerance."));
+  }
   return setup;
 }
 
@@ -126,39 +145,52 @@ StrengthFactor factorOfWeld(const Strengths& strengths) {
 }
 
 /// Factors that raise a strength by half are rare, a point that was left out is not.
-std::vector<Text> cautionsOfFactor(const StrengthFactor& factor) {
+void addCautionsOfFactor(std::vector<Text>& cautions, const StrengthFactor& factor) {
   constexpr double high = 1.5;
   if (factor.origin == FactorOrigin::given && factor.value > high)
-    return {
+    cautions.push_back(
         PW_TEXT("Strength", "The factor of the strengths is %1, which is above 1.5: see that it is meant.")
-            .with(exactNumber(factor.value))};
+            .with(exactNumber(factor.value)));
   if (factor.duration && factor.durationFactor > high)
-    return {
+    cautions.push_back(
         PW_TEXT("Strength", "The duration factor for “%1” is %2, which is above 1.5: see that it is meant.")
             .with(labelOf(*factor.duration))
-            .with(exactNumber(factor.durationFactor))};
-  return {};
+            .with(exactNumber(factor.durationFactor)));
 }
 
-void addCautionsOfState(CheckReading& reading, const Demand& demand, const Judge& judge,
-                        const CheckSetup& setup) {
+/// What the stresses of this state ask for, and what its criterion leaves out of them.
+void addCautionsOfStress(std::vector<Text>& cautions, const Demand& demand, const Judge& judge,
+                         const CheckSetup& setup) {
+  if (rowOf(setup.criterion).actsOn != ActsOn::principal && !isRounding(demand.sz, demand.scale))
+    cautions.push_back(
+        PW_TEXT("Strength", "σ_{z} acts here, and this criterion does not see it: judge it apart."));
   if (!setup.line.empty() && setup.band && pullsAcross(judge.state(), *setup.band))
     if (auto caution = cautionOfTensionAcross(setup.strengths.kind))
-      reading.cautions.push_back(*std::move(caution));
+      cautions.push_back(*std::move(caution));
   if (setup.criterion == Criterion::taperedEdge && demand.bendingShare < 1 &&
       !(demand.stress == PlaneStress{}))
-    reading.cautions.push_back(
-        PW_TEXT("Strength", "The stress along the edge is compared with f_{m}: what is no bending, or is "
-                            "typed as a stress, is taken as bending."));
+    cautions.push_back(PW_TEXT("Strength",
+                               "The stress along the edge is compared with f_{m}: what is no bending, or is "
+                               "typed as a stress, is taken as bending."));
 }
 
-/// Whether strengths are at design level: given so, or characteristic ones with a partial or typed factor.
-bool isDesign(StrengthBasis basis, const Factors& factors) {
+/// Whether strengths are at design level: given so, or characteristic ones with a partial or typed factor. A
+/// factor of 1 leaves them characteristic, whatever it was made of.
+bool isDesign(StrengthBasis basis, const Factors& factors, double factor) {
   return basis == StrengthBasis::design ||
-         (basis == StrengthBasis::characteristic && (factors.given || factors.partial));
+         (basis == StrengthBasis::characteristic && (factors.given || factors.partial) && factor != 1);
 }
 
-Text pairingOf(StrengthBasis basis, const Factors& factors, MaterialKind kind, Basis loads) {
+Text allowablePairing(Basis loads) {
+  if (loads == Basis::allowable)
+    return {};
+  return loads == Basis::design
+             ? PW_TEXT("Strength", "Allowable strengths against factored design loads.")
+             : PW_TEXT("Strength", "Allowable strengths against a characteristic combination: name it "
+                                   "allowable if it is meant so.");
+}
+
+Text pairingOf(StrengthBasis basis, const Factors& factors, double factor, MaterialKind kind, Basis loads) {
   if (basis == StrengthBasis::testMean)
     return PW_TEXT("Strength", "Against means of tests: not a design check.");
   if (kind == MaterialKind::throat) // carries its own partial factor
@@ -166,9 +198,8 @@ Text pairingOf(StrengthBasis basis, const Factors& factors, MaterialKind kind, B
                ? Text{}
                : PW_TEXT("Strength", "Design strengths of the weld against loads that are not design loads.");
   if (basis == StrengthBasis::allowable)
-    return loads == Basis::design ? PW_TEXT("Strength", "Allowable strengths against factored design loads.")
-                                  : Text{};
-  if (!isDesign(basis, factors))
+    return allowablePairing(loads);
+  if (!isDesign(basis, factors, factor))
     return PW_TEXT("Strength", "Against characteristic strengths: not a design check.");
   return loads == Basis::design
              ? Text{}
@@ -178,33 +209,36 @@ Text pairingOf(StrengthBasis basis, const Factors& factors, MaterialKind kind, B
 CheckReading judged(const Readout& readout, const StateReading& state, const CheckSetup& setup,
                     const Factors& factors) {
   CheckReading reading;
-  reading.pairing = pairingOf(setup.basis, factors, setup.strengths.kind, state.basis);
   const Result<StrengthFactor> factor = setup.strengths.kind == MaterialKind::throat
                                             ? factorOfWeld(setup.strengths)
                                             : factorOf(factors, shortestOf(readout, state));
+  reading.pairing =
+      pairingOf(setup.basis, factors, factor ? factor->value : 0, setup.strengths.kind, state.basis);
   if (!factor) {
     reading.hasFactor = false;
     reading.problem = factor.error();
     return reading;
   }
   reading.factor = *factor;
-  reading.cautions = cautionsOfFactor(*factor);
+  addCautionsOfFactor(reading.cautions, *factor);
   const Demand demand = demandOf(readout, state);
-  const Result<Judge> judge =
-      Judge::of(setup.criterion, factor->value * setup.strengths, setup.parameters, demand);
+  const Result<Judge> judge = judgeBy(setup.criterion, setup, setup.parameters, factor->value, demand);
   if (!judge) {
     reading.problem = judge.error();
     return reading;
   }
-  addCautionsOfState(reading, demand, *judge, setup);
+  addCautionsOfStress(reading.cautions, demand, *judge, setup);
   if (!setup.band) {
     reading.nominal = reading.worst = judge->at({});
+    if (reading.worst.multiplier)
+      reading.first = {*reading.worst.multiplier, Angle()};
     return reading;
   }
   reading.nominal = judge->at(setup.band->nominal);
   const WorstInBand worst = worstIn(*judge, *setup.band);
   reading.worst = worst.judgement;
   reading.worstAngle = worst.angle;
+  reading.first = worst.first;
   return reading;
 }
 
@@ -219,12 +253,17 @@ Demand demandOf(const Readout& readout, const StateReading& state) {
 void judgeChecks(Readout& readout, const Study& study, const Point& point) {
   for (const Check& check : point.checks) {
     const Material& material = *findMaterial(study, check.material);
-    const CheckSetup& setup = readout.checks.emplace_back(setupOf(study, readout, check, material));
     const Factors factors = factorsOf(study, material);
+    const CheckSetup& setup = readout.checks.emplace_back(setupOf(study, readout, check, material, factors));
     for (StateReading& state : readout.states)
       if (state.judged)
         state.checks.push_back(judged(readout, state, setup, factors));
   }
+}
+
+Result<Judge> judgeBy(Criterion criterion, const CheckSetup& setup, const Parameters& parameters,
+                      double factor, const Demand& demand) {
+  return Judge::of(criterion, factor * setup.strengths, forStrengthsTimes(factor, parameters), demand);
 }
 
 Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::size_t check) {
@@ -232,8 +271,7 @@ Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::si
   const CheckReading& reading = state.checks[check];
   if (reading.problem)
     return tl::unexpected(*reading.problem);
-  return Judge::of(setup.criterion, reading.factor.value * setup.strengths, setup.parameters,
-                   demandOf(readout, state));
+  return judgeBy(setup.criterion, setup, setup.parameters, reading.factor.value, demandOf(readout, state));
 }
 
 std::vector<Judge> judgesOf(const Readout& readout, std::size_t check) {

@@ -9,6 +9,10 @@ namespace planewright {
 /// combination: its factor is that of the shortest duration among the acting cases over the partial factor.
 void judgeChecks(Readout& readout, const Study& study, const Point& point);
 
+/// The judge by a criterion of the strengths of a check, times the factor of a combination.
+Result<Judge> judgeBy(Criterion criterion, const CheckSetup& setup, const Parameters& parameters,
+                      double factor, const Demand& demand);
+
 /// The judge of one check and state: for what a check says of other directions.
 Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::size_t check);
 /// Those of all judged states that can be judged, for one check.

@@ -19,6 +19,10 @@ void add(Verdict& sum, const Verdict& one) {
 
 } // namespace
 
+const std::optional<JudgedCheck>& toldOf(const Verdict& verdict) {
+  return verdict.standing == Standing::unjudged ? verdict.unjudged : verdict.governing;
+}
+
 Verdict verdictOf(const Readout& readout, std::size_t state, std::size_t check) {
   if (check >= readout.states[state].checks.size())
     return {};
@@ -75,8 +79,7 @@ Summary summarise(const Study& study) {
       row.point = point.name;
       row.check = readout.checks[check];
       row.verdict = verdictOfCheck(readout, check);
-      const std::optional<JudgedCheck>& told =
-          row.verdict.governing ? row.verdict.governing : row.verdict.unjudged;
+      const std::optional<JudgedCheck>& told = toldOf(row.verdict);
       assert(told && "a study has at least one state that is judged");
       row.combination = readout.states[told->state].combination;
       row.reading = readingOf(readout, *told);

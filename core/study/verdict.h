@@ -31,6 +31,10 @@ struct Verdict {
   bool operator==(const Verdict&) const = default;
 };
 
+/// Whose words stand for a verdict: what could not be judged where all that was judged is within, else what
+/// governs; none where there is nothing to be judged.
+const std::optional<JudgedCheck>& toldOf(const Verdict& verdict);
+
 /// Of one check in one combination; of all checks in one; of one check over all combinations; of all.
 Verdict verdictOf(const Readout& readout, std::size_t state, std::size_t check);
 Verdict verdictOfState(const Readout& readout, std::size_t state);
@@ -45,7 +49,7 @@ struct SummaryRow {
   std::string point;
   CheckSetup check;
   Verdict verdict;
-  std::string combination; ///< that governs, or the first that could not be judged
+  std::string combination; ///< that is told of the verdict
   CheckReading reading;    ///< there
   bool operator==(const SummaryRow&) const = default;
 };

@@ -22,7 +22,7 @@ public:
   WorkingOfCheck(const Study& study, const Readout& readout, const StateReading& state, std::size_t check,
                  const Judge& judge)
       : m_setup(readout.checks[check]), m_reading(state.checks[check]), m_state(state), m_judge(judge),
-        m_demand(demandOf(readout, state)), m_isTurned(readout.positive == Positive::compression),
+        m_demand(demandOf(readout, state)), m_countsCompression(readout.positive == Positive::compression),
         m_steps(writtenUnitsOf(study), stressFormOf(study, state).decimals) {}
 
   std::vector<Step> steps() {
@@ -36,11 +36,18 @@ public:
     at(nominal, m_reading.nominal).addUtilisation(m_steps, strengths);
     const Angle worst = m_reading.worstAngle.value_or(nominal);
     if (worst != nominal) {
-      m_steps.turnToWorst();
+      m_steps.turnTo(StepsAt::worst);
       addStresses(worst, true);
       at(worst, m_reading.worst).addUtilisation(m_steps, strengths);
     }
-    at(worst, m_reading.worst).addMultiplier(m_steps, strengths);
+    if (!m_reading.first)
+      return m_steps.steps();
+    const Angle first = m_reading.first->angle;
+    if (first != worst) {
+      m_steps.turnTo(first == nominal ? StepsAt::nominal : StepsAt::first);
+      addStresses(first, true);
+    }
+    at(first, m_judge.at(first)).addMultiplier(m_steps, strengths);
     return m_steps.steps();
   }
 
@@ -83,22 +90,23 @@ private:
          bending / whole, m_demand.bendingShare, dimension::none, common});
   }
 
-  /// The stresses at a direction: as steps where the working of the state does not have them.
-  void addStresses(Angle direction, bool isWorst) {
+  /// The stresses at a direction: as steps where the working of the state does not have them, as those of
+  /// the nominal one it does.
+  void addStresses(Angle direction, bool isTurned) {
     if (isOfUniaxialStress(m_setup.criterion))
-      addUniaxial(direction, isWorst);
+      addUniaxial(direction, isTurned);
     switch (rowOf(m_setup.criterion).actsOn) {
     case ActsOn::line:
-      return addAlongLine(direction, isWorst);
+      return addAlongLine(direction, isTurned);
     case ActsOn::plane:
-      return addOnPlane(direction, isWorst);
+      return addOnPlane(direction, isTurned);
     case ActsOn::principal:
       return addPrincipals();
     }
   }
 
   /// A formula of the study's stresses as one of those that strengths are asked to carry.
-  Formula tensionPositive(const Formula& formula) const { return m_isTurned ? -formula : formula; }
+  Formula tensionPositive(const Formula& formula) const { return m_countsCompression ? -formula : formula; }
 
   void putGiven(const char* angleSymbol, Angle direction) {
     m_steps.putStress("σ_{x}", m_state.stress.sx);
@@ -112,12 +120,12 @@ private:
       m_steps.putStress(symbol, value);
       return;
     }
-    m_steps.addStress({m_isTurned ? PW_TEXT("Working", "%1, tension positive").with(name) : name, symbol,
-                       tensionPositive(formula), value, dimension::stress, common});
+    m_steps.addStress({m_countsCompression ? PW_TEXT("Working", "%1, tension positive").with(name) : name,
+                       symbol, tensionPositive(formula), value, dimension::stress, common});
   }
 
-  void addAlongLine(Angle direction, bool isWorst) {
-    const bool areSteps = (isWorst || m_isTurned) && !hasAngleForm(m_setup.criterion);
+  void addAlongLine(Angle direction, bool isTurned) {
+    const bool areSteps = (isTurned || m_countsCompression) && !hasAngleForm(m_setup.criterion);
     const LineStress s = m_judge.state().at(direction);
     const Formula phi = Formula::symbol("φ");
     putGiven("φ", direction);
@@ -129,8 +137,8 @@ private:
               stress_symbol::shear, shearStressAt(phi), s.shear, areSteps);
   }
 
-  void addOnPlane(Angle direction, bool isWorst) {
-    const bool areSteps = isWorst || m_isTurned;
+  void addOnPlane(Angle direction, bool isTurned) {
+    const bool areSteps = isTurned || m_countsCompression;
     const LineStress s = m_judge.state().at(direction);
     const Formula theta = Formula::symbol("θ");
     putGiven("θ", direction);
@@ -141,16 +149,16 @@ private:
   }
 
   /// The one principal stress and the angle of its axis to the line, 0 to 90 deg.
-  void addUniaxial(Angle direction, bool isWorst) {
+  void addUniaxial(Angle direction, bool isTurned) {
     const Circle& circle = m_state.circle;
     if (!circle.theta1)
       return;
     const bool isFirst = std::abs(circle.s1) >= std::abs(circle.s2);
     const double value = isFirst ? circle.s1 : circle.s2;
     const Formula principal = m_steps.putStress(isFirst ? "σ_{1}" : "σ_{2}", value);
-    if (!isWorst)
+    if (!isTurned)
       addStress(PW_TEXT("Working", "the one principal stress"), stress_symbol::uniaxial, principal,
-                m_isTurned ? -value : value, true);
+                m_countsCompression ? -value : value, true);
     const Angle axis = (isFirst ? circle.theta1 : circle.theta2())->value;
     m_steps.put("φ", direction.degrees(), dimension::angle);
     m_steps.put("θ_{1}", circle.theta1->value.degrees(), dimension::angle);
@@ -179,12 +187,12 @@ private:
     const Formula greatestOf = greatest({s1, s2, sz});
     const Formula leastOf = least({s1, s2, sz});
     addStress(PW_TEXT("Working", "greatest principal stress"), stress_symbol::greatest,
-              m_isTurned ? leastOf : greatestOf, sorted[0], true);
+              m_countsCompression ? leastOf : greatestOf, sorted[0], true);
     if (m_setup.criterion == Criterion::vonMises)
       addStress(PW_TEXT("Working", "middle principal stress"), stress_symbol::middle,
                 greatest({s2, least({s1, sz})}), sorted[1], true);
     addStress(PW_TEXT("Working", "least principal stress"), stress_symbol::least,
-              m_isTurned ? greatestOf : leastOf, sorted[2], true);
+              m_countsCompression ? greatestOf : leastOf, sorted[2], true);
   }
 
   const CheckSetup& m_setup;
@@ -192,7 +200,7 @@ private:
   const StateReading& m_state;
   const Judge& m_judge;
   Demand m_demand;
-  bool m_isTurned;
+  bool m_countsCompression;
   CheckSteps m_steps;
 };
 

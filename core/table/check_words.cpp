@@ -194,13 +194,28 @@ Text notJudgedSentence(const Readout& readout, const JudgedCheck& unjudged) {
 Text multiplierSentence(const Judgement& judgement) {
   if (judgement.unstressed)
     return PW_TEXT("Check", "No stress acts.");
-  if (!judgement.multiplier)
-    return std::isfinite(judgement.utilisation) && judgement.utilisation <= 1
-               ? PW_TEXT("Check", "No multiple of all loads reaches the limit.")
-               : PW_TEXT("Check", "No multiple of all loads is within the limit.");
-  const Text number = verbatim(shownMultiplier(*judgement.multiplier));
-  return *judgement.multiplier >= 1 ? PW_TEXT("Check", "All loads could be multiplied by %1.").with(number)
-                                    : PW_TEXT("Check", "All loads must be multiplied by %1.").with(number);
+  const bool exceeds = exceedsLimit(judgement.utilisation);
+  // A multiplier of 0 is one of a plane that takes nothing, however small the loads.
+  if (judgement.multiplier.value_or(0) == 0)
+    return exceeds ? PW_TEXT("Check", "No multiple of all loads is within the limit.")
+                   : PW_TEXT("Check", "No multiple of all loads reaches the limit.");
+  if (exceeds)
+    return PW_TEXT("Check", "All loads must be multiplied by %1.")
+        .with(shownMultiplier(*judgement.multiplier));
+  const double grows = std::max(*judgement.multiplier, 1.0); // but for rounding
+  return PW_TEXT("Check", "All loads could be multiplied by %1.").with(shownMultiplier(grows));
+}
+
+Text multiplierSentence(const CheckReading& reading) {
+  Judgement band = reading.worst;
+  band.multiplier = reading.leastMultiplier();
+  Text sentence = multiplierSentence(band);
+  if (reading.worst.unstressed || !reading.first || !reading.worstAngle ||
+      reading.first->angle == *reading.worstAngle || reading.first->multiplier == 0)
+    return sentence;
+  return PW_TEXT("Check", "%1 The direction at %2 comes to its limit first.")
+      .with(sentence)
+      .with(shownDegrees(folded(reading.first->angle), angleDecimals));
 }
 
 Text worstSentence(const CheckSetup& check, const CheckReading& reading) {

@@ -26,8 +26,9 @@ Text shownWorst(const CheckReading& reading);
 Text notJudgedSentence(const Readout& readout, const JudgedCheck& unjudged);
 
 /// "All loads could be multiplied by 1.15.", "All loads must be multiplied by 0.93.", or that no multiple
-/// reaches the limit.
+/// reaches the limit or is within it: in one direction, and in a band, by its least multiplier.
 Text multiplierSentence(const Judgement& judgement);
+Text multiplierSentence(const CheckReading& reading);
 /// "Worst at 8.71°, inside 5.71° ± 3°; nominal 0.81."; empty without a band.
 Text worstSentence(const CheckSetup& check, const CheckReading& reading);
 /// "Strengths times 0.8 (medium term) over 1.25: times 0.64.", what a weld divides by, or that they are taken

@@ -55,7 +55,7 @@ std::optional<double> multiplierToLimit(const Readout& readout) {
   const StateReading& state = readout.state();
   for (std::size_t i = 0; i < state.checks.size(); ++i)
     if (!readout.checks[i].plane.empty() && !state.checks[i].problem)
-      if (const std::optional<double> one = state.checks[i].worst.multiplier;
+      if (const std::optional<double> one = state.checks[i].leastMultiplier();
           one && *one > 0 && *one < most && (!least || *one < *least))
         least = one;
   return least;

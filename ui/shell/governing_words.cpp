@@ -128,8 +128,7 @@ ListDetails pointDetails(const Study& study) {
   for (const Point& point : study.points) {
     const Readout readout = evaluate(study, point.name);
     const Verdict verdict = verdictOf(readout);
-    const std::optional<JudgedCheck>& told =
-        verdict.standing == Standing::unjudged ? verdict.unjudged : verdict.governing;
+    const std::optional<JudgedCheck>& told = toldOf(verdict);
     if (isChecked(readout))
       details.valueHeading = words(QT_TRANSLATE_NOOP("Governing", "worst utilisation"));
     details.values << (told ? shown(shownWorst(readingOf(readout, *told)))

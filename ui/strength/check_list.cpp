@@ -75,8 +75,7 @@ void CheckList::refresh() {
   clear();
   for (std::size_t i = 0; i < readout.checks.size(); ++i) {
     const Verdict verdict = verdictOfCheck(readout, i);
-    const std::optional<JudgedCheck>& told =
-        verdict.standing == Standing::unjudged ? verdict.unjudged : verdict.governing;
+    const std::optional<JudgedCheck>& told = toldOf(verdict);
     const QString name = shown(checkName(readout.checks[i]));
     const QString worst = told && verdict.standing == Standing::within && !verdict.stressed ? tr("no stress")
                           : told ? markOf(verdict.standing) + shown(shownWorst(readingOf(readout, *told)))

@@ -22,8 +22,7 @@ namespace {
 QString remarkOf(const SideBySide& row, const CheckSetup& setup) {
   if (row.problem)
     return shown(row.problem->what);
-  const std::optional<Angle> line = setup.band ? std::optional(setup.band->nominal) : std::nullopt;
-  const std::vector<Text> cautions = cautionsOf(row.criterion, setup.strengths, setup.parameters, line);
+  const std::vector<Text> cautions = cautionsOf(row.criterion, setup.strengths, setup.parameters, setup.band);
   return cautions.empty() ? QString() : shown(cautions.front());
 }
 

@@ -189,11 +189,12 @@ void StrengthPanel::refreshGoverns() {
   if (!told)
     return;
   const CheckReading& reading = readingOf(readout, *told);
-  QStringList words;
+  QStringList mode;
   if (reading.worst.mode && !reading.problem)
-    words << tr("Mode: %1.").arg(shown(labelOf(*reading.worst.mode)));
-  words << shown(factorSentence(reading.factor));
-  m_mode->setText(words.join(QLatin1Char(' ')));
+    mode << tr("Mode: %1.").arg(shown(labelOf(*reading.worst.mode)));
+  if (reading.hasFactor)
+    mode << shown(factorSentence(reading.factor));
+  m_mode->setText(mode.join(QLatin1Char(' ')));
   const bool isShown = told->state == readout.shown;
   const QString combination = fromUtf8(readout.states[told->state].combination);
   const QString governs = !verdict.governing ? tr("Not judged: %1")

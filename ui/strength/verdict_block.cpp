@@ -74,7 +74,7 @@ void VerdictBlock::refresh() {
     const CheckSetup& check = readout.checks[verdict.governing->check];
     if (readout.checks.size() > 1)
       sentences = joined(sentences, PW_TEXT("Check", "By %1.").with(checkName(check)));
-    sentences = joined(sentences, multiplierSentence(reading.worst));
+    sentences = joined(sentences, multiplierSentence(reading));
     sentences = joined(sentences, worstSentence(check, reading));
   }
   if (verdict.unjudged)

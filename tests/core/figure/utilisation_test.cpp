@@ -39,6 +39,29 @@ TEST(UtilisationCurves, ofManyCombinationsLeaveTheOthersOut) {
   const UtilisationCurves curves = utilisationCurvesOf(evaluate(study), 0);
   EXPECT_TRUE(curves.others.empty());
   EXPECT_FALSE(curves.greatest.empty());
+  ASSERT_EQ(curves.greatest.size(), curves.shown.size());
+  EXPECT_LT(curves.greatest.size(), 200) << "the turning points of the shown one alone";
+  for (std::size_t i = 0; i < curves.shown.size(); ++i)
+    EXPECT_GE(curves.greatest[i].y, curves.shown[i].y);
+}
+
+TEST(UtilisationCurves, ofOtherCombinationsHaveTheirOwnTurningPoints) {
+  Study study = judgedStudy();
+  for (int i = 0; i < 20; ++i)
+    study.combinations.push_back({"c" + std::to_string(i), {{"S", std::to_string(i + 1)}}, Basis::design});
+  const Readout now = evaluate(study);
+  const UtilisationCurves curves = utilisationCurvesOf(now, 0);
+  ASSERT_EQ(curves.others.size(), 21);
+  std::size_t state = 0;
+  for (const UtilisationCurve& curve : curves.others) {
+    state += state == now.shown ? 1 : 0;
+    const Result<Judge> judge = judgeOf(now, now.states[state++], 0);
+    EXPECT_LT(curve.size(), 200);
+    double greatest = 0;
+    for (const Vec point : curve)
+      greatest = std::max(greatest, point.y);
+    EXPECT_EQ(greatest, worstIn(*judge, bandOf({}, Angle::fromDegrees(90))).judgement.utilisation);
+  }
 }
 
 TEST(UtilisationFrame, mapsBothWays) {
@@ -156,6 +179,28 @@ TEST(UtilisationKey, tellsTheCurvesApartWithinItsRow) {
   alone.combinations.pop_back();
   EXPECT_TRUE(
       utilisationKey({0, 0, 200, 0}, 10, 1, utilisationCurvesOf(evaluate(alone), 0), "", {}).parts.empty());
+}
+
+/// Clamping grows with the loads too, so that the plane of the greatest ratio may never slip.
+TEST(FailureLine, isTouchedFirstByTheGrowingCircleNotByTheWorstPlane) {
+  Study study = judgedStudy();
+  Material& material = study.materials[1];
+  material = Material{};
+  material.name = "glue";
+  material.kind = MaterialKind::coulomb;
+  material.cohesion = "1 MPa";
+  material.friction = "40 deg";
+  study.points[0].checks[1].criterion = Criterion::coulomb;
+  study.points[0].stress = {CaseStress{"G", "-3 MPa", "-0.6 MPa", "0 MPa"}};
+  study.combinations.resize(1);
+  study.combinations[0] = {"G", {{"G", "1"}}, Basis::design};
+  const Readout now = evaluate(study);
+  const std::vector<FailureLine> lines = failureLinesOf(now, 50);
+  ASSERT_EQ(lines.size(), 1);
+  ASSERT_TRUE(lines[0].touch);
+  // Where |tnt| + sn tan 40 is greatest: cos 2(theta - theta1) = sin 40, 25 deg to either side of theta1
+  // = 90.
+  EXPECT_NEAR(std::abs(lines[0].touch->value.degrees()), 65, 1e-9);
 }
 
 TEST(Figure, carriesTheCheckAndItsPlot) {

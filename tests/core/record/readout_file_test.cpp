@@ -93,6 +93,13 @@ TEST(ReadoutFile, workingOfChecksAsApproved) {
   EXPECT_TRUE(matchesApproved("record/judged_working_compression.txt", workingText(study, evaluate(study))));
 }
 
+TEST(ReadoutFile, aFactorThatTheMaterialDoesNotGiveIsNone) {
+  Study study = judgedStudy();
+  study.materials[0].durations.shortTerm.clear();
+  const std::string json = readoutJson(study, readoutsOf(study));
+  EXPECT_NE(json.find("\"factor\": null"), std::string::npos);
+}
+
 TEST(ReadoutFile, aNewStudyAsApproved) {
   const Study study = newStudy();
   EXPECT_TRUE(matchesApproved("record/new.json", readoutJson(study, readoutsOf(study))));

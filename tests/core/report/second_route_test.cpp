@@ -36,7 +36,7 @@ TEST(SecondRoute, findsEachResultThatIsWrong) {
   EXPECT_TRUE(wrongWhen([](StateReading& state) { state.reading.tnt = -state.reading.tnt; }));
   EXPECT_TRUE(wrongWhen([](StateReading& state) { std::swap(state.lines[0].along, state.lines[0].across); }));
   EXPECT_TRUE(wrongWhen([](StateReading& state) { state.watched[0].sn *= 1.0001; }));
-  EXPECT_TRUE(wrongWhen([](StateReading& state) { *state.checks[0].worst.multiplier *= 1.0001; }));
+  EXPECT_TRUE(wrongWhen([](StateReading& state) { state.checks[0].first->multiplier *= 1.0001; }));
   EXPECT_TRUE(wrongWhen([](StateReading& state) { state.checks[0].worst.utilisation *= 0.999; }));
 }
 

@@ -14,33 +14,9 @@ Angle degrees(double value) {
   return Angle::fromDegrees(value);
 }
 
-/// A judge of any criterion with a direction, on any state.
+/// A judge of any criterion, on any state.
 Judge anyJudge() {
-  const PlaneStress stress = *anyStress();
-  const int which = *rc::gen::inRange(0, 4);
-  if (which == 0) {
-    const Parameters n{*rc::gen::element(1.5, 2.0, 2.5), {}, {}, {}};
-    return *Judge::of(Criterion::hankinson, *anyLineStrengths(), n,
-                      demandOf(uniaxial(stress.sx, *anyAngle())));
-  }
-  if (which == 1) {
-    using enum StrengthKey;
-    Strengths f;
-    f.kind = MaterialKind::coulomb;
-    f[cohesion] = *rc::gen::inRange(0, 1000) / 10.0;
-    f[friction] = *rc::gen::inRange(1, 60);
-    f[cutoff] = *rc::gen::inRange(0, 100) / 10.0;
-    return *Judge::of(Criterion::coulomb, f, {}, demandOf(stress));
-  }
-  if (which == 2) {
-    using enum StrengthKey;
-    Strengths f;
-    f.kind = MaterialKind::bond;
-    f[tension] = *rc::gen::inRange(1, 1000) / 10.0;
-    f[shear] = *rc::gen::inRange(1, 1000) / 10.0;
-    return *Judge::of(Criterion::bond, f, {}, demandOf(stress));
-  }
-  return *Judge::of(*anyLineCriterion(), *anyLineStrengths(), {}, demandOf(stress));
+  return anyJudges().front();
 }
 
 /// Not worse, but for the rounding of a utilisation.
@@ -77,6 +53,36 @@ RC_GTEST_PROP(Band, wideningNeverLowersTheWorst, ()) {
               std::to_string(judge.branches().front().index()));
     last = worst;
   }
+}
+
+RC_GTEST_PROP(Band, noScanFindsASmallerMultiplier, (bool slips)) {
+  const Judge judge = slips ? anyJudges(Criterion::coulomb).front() : anyJudge();
+  const Band band = bandOf(*anyAngle(), degrees(*rc::gen::inRange(0, 9500) / 100.0));
+  const std::optional<FirstInBand> first = worstIn(judge, band).first;
+  if (first)
+    RC_ASSERT(judge.at(first->angle).multiplier == first->multiplier);
+  const double width = (band.to() - band.from()).degrees();
+  for (int i = 0; i <= 400; ++i) {
+    const std::optional<double> at = judge.at(band.from() + degrees(width * i / 400)).multiplier;
+    if (at)
+      RC_ASSERT(first && *at >= first->multiplier * (1 - 1e-9));
+  }
+}
+
+/// The worst utilisation lies where the clamping grows with the loads, and the first touch where it does not.
+TEST(Band, ofAPlaneWithFrictionHasItsLeastMultiplierElsewhere) {
+  using enum StrengthKey;
+  Strengths f;
+  f.kind = MaterialKind::coulomb;
+  f[cohesion] = 1;
+  f[friction] = 40;
+  const auto judge = Judge::of(Criterion::coulomb, f, {}, demandOf({-3, -0.6, 0}));
+  const WorstInBand worst = worstIn(*judge, bandOf(degrees(60), degrees(10)));
+  EXPECT_NEAR(worst.angle.degrees(), 56.82, 0.01);
+  EXPECT_FALSE(worst.judgement.multiplier);
+  ASSERT_TRUE(worst.first);
+  EXPECT_NEAR(worst.first->angle.degrees(), 65, 1e-9);
+  EXPECT_NEAR(worst.first->multiplier, 17.8, 0.1);
 }
 
 TEST(Band, ofNoToleranceIsTheNominalDirection) {

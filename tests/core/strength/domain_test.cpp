@@ -1,9 +1,11 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/strength/cautions.h"
+#include "core/strength/line_criteria.h"
 #include "core/strength/slope_of_faces.h"
 #include "tests/support/strength_gen.h"
 
 #include <gtest/gtest.h>
+#include <rapidcheck/gtest.h>
 
 #include <cmath>
 
@@ -39,6 +41,20 @@ TEST(Domain, theTaperedEdgeWantsTheStressAlongItsEdge) {
   EXPECT_EQ(refused(Criterion::taperedEdge, f, {5, 0, 0}, edgeAt(180.009)), "");
   EXPECT_NE(refused(Criterion::taperedEdge, f, {5, 0, 0}, edgeAt(0.02)), "");
   EXPECT_NE(refused(Criterion::taperedEdge, c24(), {5, 0, 0}, edgeAt(0)), "") << "no bending strength";
+}
+
+TEST(Domain, criteriaOfOneStressTakeNoneOutOfThePlane) {
+  Strengths f = c24();
+  f[StrengthKey::alongBending] = 24;
+  Demand demand = demandOf({-5, 0, 0});
+  const Parameters edge{{}, {}, {}, Angle()};
+  for (const Criterion criterion :
+       {Criterion::hankinson, Criterion::compressionAtAngle, Criterion::taperedEdge}) {
+    demand.sz = -5;
+    EXPECT_FALSE(Judge::of(criterion, f, edge, demand)) << wordOf(criterion);
+    demand.sz = -4e-6;
+    EXPECT_TRUE(Judge::of(criterion, f, edge, demand)) << wordOf(criterion);
+  }
 }
 
 TEST(Domain, surfacesThatAreNotClosedAreRefused) {
@@ -79,10 +95,62 @@ TEST(Domain, bendingNeedsABendingStrengthOnlyWhereThereIsBending) {
   EXPECT_NEAR(judge->utilisation({}), 2.5 / 14.5 + 2.5 / 24, 1e-15);
 }
 
+TEST(Bending, raisesOnlyTheStrengthOfTheSignThatSxHas) {
+  Strengths f = c24();
+  f[StrengthKey::alongBending] = 24;
+  Demand demand = demandOf({5, 0, 0});
+  demand.bendingShare = 1;
+  const auto X = [&](bool pulls) { return *alongStrengthOf(f, demand, pulls); };
+  EXPECT_EQ(X(true), 24);
+  EXPECT_EQ(X(false), 21);
+  demand.stress.sx = -5;
+  EXPECT_EQ(X(true), 14.5);
+  EXPECT_EQ(X(false), 24);
+}
+
+TEST(Bending, countsOnlyForItsShareOfWhatActs) {
+  Strengths f = c24();
+  f[StrengthKey::alongBending] = 24;
+  const auto at = [&](const PlaneStress& stress, double degrees) {
+    Demand demand = demandOf(stress);
+    demand.bendingShare = 1;
+    return Judge::of(Criterion::maximumStress, f, {}, demand)->utilisation(Angle::fromDegrees(degrees));
+  };
+  EXPECT_NEAR(at({0.001, 15, 0}, 90), 15 / 14.5, 1e-4) << "sy is no bending";
+  EXPECT_NEAR(at({0.001, 0, 3}, -10), at({0, 0, 3}, -10), 1e-3) << "nor is shear";
+}
+
+/// 1/X of the mix against the sum of ratios of what bends and what does not, within 45 deg of x.
+RC_GTEST_PROP(Bending, isNeverMoreThanItsShareOfTheStressAlongTheLine, ()) {
+  const PlaneStress stress = *anyStress();
+  const double share = *rc::gen::inRange(0, 101) / 100.0;
+  const double degrees = *rc::gen::inRange(-4500, 4501) / 100.0;
+  Demand demand = demandOf(stress);
+  demand.bendingShare = share;
+  const CosSin turn = cosSin(Angle::fromDegrees(degrees));
+  const double along = inAxesOf(stress, LineAngle{Angle::fromDegrees(degrees)}).along;
+  RC_PRE(along * stress.sx > 0);
+  const double bends = share * stress.sx * turn.cos * turn.cos;
+  RC_ASSERT(bendingShareAlong(demand) * along / stress.sx <=
+            bends / stress.sx + 1e-12 * scaleOf(stress) / std::abs(stress.sx));
+}
+
+TEST(Parameters, aGivenF12GoesWithTheStrengthsThatAFactorScales) {
+  const Strengths lamina = graphiteEpoxy();
+  Parameters given;
+  given.F12 = -0.5 * std::sqrt(1 / (1500.0 * 1500 * 40 * 246));
+  for (const double factor : {1.0, 0.5}) {
+    const auto usual = Judge::of(Criterion::tsaiWu, factor * lamina, {}, demandOf({600, -60, 0}));
+    const auto typed = Judge::of(Criterion::tsaiWu, factor * lamina, forStrengthsTimes(factor, given),
+                                 demandOf({600, -60, 0}));
+    EXPECT_NEAR(typed->utilisation({}), usual->utilisation({}), 1e-14);
+  }
+}
+
 TEST(Cautions, speakWhereACriterionIsKnownToReassure) {
   const auto count = [](Criterion criterion, const Strengths& f, const Parameters& parameters = {},
-                        std::optional<Angle> line = {}) {
-    return cautionsOf(criterion, f, parameters, line).size();
+                        const std::optional<Band>& band = {}) {
+    return cautionsOf(criterion, f, parameters, band).size();
   };
   for (const Criterion criterion : {Criterion::maximumStress, Criterion::norrisPlane,
                                     Criterion::norrisThreePlane, Criterion::tsaiWu, Criterion::hoffman}) {
@@ -94,8 +162,14 @@ TEST(Cautions, speakWhereACriterionIsKnownToReassure) {
   EXPECT_EQ(count(Criterion::hankinson, c24(), {2.5, {}, {}, {}}), 1);
   EXPECT_EQ(count(Criterion::linearSum, c24()), 1);
   const Parameters edge{{}, {}, {}, Angle()};
-  EXPECT_EQ(count(Criterion::taperedEdge, c24(), edge, Angle::fromDegrees(9)), 0);
-  EXPECT_EQ(count(Criterion::taperedEdge, c24(), edge, Angle::fromDegrees(-11)), 1);
+  const auto band = [](double nominal, double tolerance) {
+    return bandOf(Angle::fromDegrees(nominal), Angle::fromDegrees(tolerance));
+  };
+  EXPECT_EQ(count(Criterion::taperedEdge, c24(), edge, band(9, 0)), 0);
+  EXPECT_EQ(count(Criterion::taperedEdge, c24(), edge, band(-11, 0)), 1);
+  EXPECT_EQ(count(Criterion::taperedEdge, c24(), edge, band(9, 2)), 1) << "its farther end";
+  EXPECT_EQ(count(Criterion::compressionAtAngle, c24(), {{}, {}, 1.0, {}}), 0);
+  EXPECT_EQ(count(Criterion::compressionAtAngle, c24(), {{}, {}, 1.5, {}}), 1);
 }
 
 TEST(Cautions, theVolumeFactorIsSaidWithTensionAcrossTheGrain) {

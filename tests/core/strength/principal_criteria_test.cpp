@@ -65,6 +65,15 @@ TEST(PrincipalCriteria, mohrCoulombBeyondTheApexHasNoFiniteNumber) {
   EXPECT_FALSE(judged(Criterion::mohrCoulomb, f, {-5, -5, 0}, -5).multiplier);
 }
 
+TEST(PrincipalCriteria, mohrCoulombWithoutCohesionLeavesRoundingOut) {
+  const Strengths f = isotropic({}, {}, 0, 30);
+  const double leftover = 0.1 + 0.2 - 0.3;
+  ASSERT_NE(leftover, 0);
+  EXPECT_EQ(Judge::of(Criterion::mohrCoulomb, f, {}, {{leftover, 0, 0}, 0, 0.6, 0})->at({}), Judgement{});
+  EXPECT_NEAR(Judge::of(Criterion::mohrCoulomb, f, {}, {{leftover, -2, 0}, 0, 2, 0})->utilisation({}), 2,
+              1e-14);
+}
+
 RC_GTEST_PROP(PrincipalCriteria, doNotCareAboutDirections, ()) {
   const PlaneStress stress = *anyStress();
   const Angle turn = *anyAngle();

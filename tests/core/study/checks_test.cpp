@@ -1,4 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "core/quantity/format.h"
 #include "core/study/check_edits.h"
 #include "core/study/judge_checks.h"
 #include "core/study/verdict.h"
@@ -113,6 +114,100 @@ TEST(Checks, basesThatDoNotMatchAreSaid) {
   study.materials[0].basis = StrengthBasis::testMean;
   EXPECT_EQ(plain(evaluate(study).states[0].checks[0].pairing),
             "Against means of tests: not a design check.");
+}
+
+/// What stands with the first check of the first combination.
+std::string pairingOf(const Study& study) {
+  return plain(evaluate(study).states[0].checks[0].pairing);
+}
+
+TEST(Checks, aFactorOf1LeavesStrengthsCharacteristic) {
+  const std::string none = "Against characteristic strengths: not a design check.";
+  Study study = judgedStudy();
+  study.materials[0].durations = {};
+  study.materials[0].partialFactor = "1";
+  EXPECT_EQ(pairingOf(study), none);
+  study.materials[0].partialFactor = "1.3";
+  EXPECT_EQ(pairingOf(study), "");
+  study.materials[0].factor = "1";
+  EXPECT_EQ(pairingOf(study), none);
+  study.materials[0].factor = "0.5";
+  EXPECT_EQ(pairingOf(study), "");
+}
+
+TEST(Checks, allowableStrengthsAreForAllowableCombinations) {
+  Study study = judgedStudy();
+  study.materials[0].basis = StrengthBasis::allowable;
+  for (const Basis basis : {Basis::design, Basis::characteristic, Basis::allowable}) {
+    study.combinations[0].basis = basis;
+    EXPECT_EQ(pairingOf(study).empty(), basis == Basis::allowable) << wordOf(basis);
+  }
+}
+
+std::size_t cautionsOfFirst(const Study& study) {
+  return evaluate(study).checks[0].cautions.size();
+}
+
+TEST(Checks, timberWithoutDurationFactorsSaysSo) {
+  Study study = judgedStudy();
+  EXPECT_EQ(cautionsOfFirst(study), 0);
+  study.materials[0].durations = {};
+  EXPECT_EQ(cautionsOfFirst(study), 1);
+  study.materials[0].factor = "0.6";
+  EXPECT_EQ(cautionsOfFirst(study), 0) << "the factor stands for both";
+  study.materials[0].factor.clear();
+  study.materials[0].partialFactor.clear();
+  EXPECT_EQ(cautionsOfFirst(study), 0) << "no design strengths at all";
+}
+
+TEST(Checks, aSlopeToOneSideSaysThatTheSignOfTheShearCounts) {
+  Study study = judgedStudy();
+  Line& grain = study.points[0].lines[0];
+  grain.tolerance.clear();
+  EXPECT_EQ(cautionsOfFirst(study), 1);
+  grain.angle = "4 deg";
+  EXPECT_EQ(cautionsOfFirst(study), 0) << "an angle that is known";
+  grain.angle = "0 deg";
+  grain.tolerance = "1 in 15";
+  EXPECT_EQ(cautionsOfFirst(study), 0);
+}
+
+TEST(Checks, aThirdStressThatACriterionDoesNotSeeIsSaid) {
+  Study study = judgedStudy();
+  EXPECT_TRUE(evaluate(study).states[0].checks[0].cautions.empty());
+  study.points[0].stress[1].sz = "0.2 MPa";
+  const Readout readout = evaluate(study);
+  EXPECT_TRUE(readout.states[0].checks[0].cautions.empty()) << "it does not act here";
+  EXPECT_EQ(readout.states[1].checks[0].cautions.size(), 1);
+  EXPECT_EQ(readout.states[1].checks[1].cautions.size(), 1);
+}
+
+TEST(Checks, aTypedF12GoesWithTheFactorOfTheStrengths) {
+  Study study = judgedStudy();
+  study.points[0].checks[0].criterion = Criterion::tsaiWu;
+  const Readout usual = evaluate(study);
+  study.points[0].checks[0].parameters.F12 = exactNumber(-0.5 / std::sqrt(14.5 * 21 * 0.4 * 2.5)) + " MPa^-2";
+  const Readout typed = evaluate(study);
+  for (std::size_t state = 0; state < 2; ++state)
+    EXPECT_NEAR(typed.states[state].checks[0].worst.utilisation,
+                usual.states[state].checks[0].worst.utilisation, 1e-12);
+  const std::vector<SideBySide> rows = criteriaSideBySide(typed, 0);
+  const SideBySide& chosen = *std::ranges::find(rows, true, &SideBySide::isChosen);
+  EXPECT_EQ(chosen.worst, typed.states[*chosen.state].checks[0].worst);
+}
+
+TEST(Verdicts, tellWhatCouldNotBeJudgedUnlessSomethingExceeds) {
+  Study study = with(judgedStudy(), {Type{{Spot::durationShort, "C24", {}}, ""}});
+  const Verdict within = verdictOfCheck(evaluate(study), 0);
+  ASSERT_EQ(within.standing, Standing::unjudged);
+  EXPECT_EQ(toldOf(within)->state, 1);
+  EXPECT_EQ(summarise(study).rows[0].combination, "1.35 G + 1.5 S");
+  EXPECT_TRUE(summarise(study).rows[0].reading.problem);
+  study.points[0].stress[0].sx = "16 MPa";
+  const Verdict exceeds = verdictOfCheck(evaluate(study), 0);
+  ASSERT_EQ(exceeds.standing, Standing::exceeds);
+  EXPECT_EQ(toldOf(exceeds)->state, 0);
+  EXPECT_FALSE(toldOf(Verdict()));
 }
 
 TEST(CheckEdits, aNewCheckTakesTheUsualCriterionAndTheFirstLine) {
