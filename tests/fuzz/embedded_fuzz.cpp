@@ -4,34 +4,20 @@
 #include "core/record/embedded_study.h"
 
 #include "core/record/study_file.h"
-#include "core/words/utf8.h"
+#include "tests/fuzz/promises.h"
 
-#include <algorithm>
 #include <cstdint>
-#include <cstdlib>
 
 using namespace planewright;
 
 namespace {
-
-void require(bool condition) {
-  if (!condition)
-    std::abort();
-}
-
-void checkProblem(const Problem& problem) {
-  require(!problem.what.empty());
-  const std::string words = plain(problem);
-  require(isUtf8(words));
-  require(std::none_of(words.begin(), words.end(), [](unsigned char c) { return c < 0x20 || c == 0x7F; }));
-}
 
 void checkRead(std::string_view bytes) {
   const std::optional<Result<std::string>> carried = carriedStudy(bytes);
   if (carried && *carried)
     require((*carried)->size() <= std::min(bytes.size(), greatestStudyFile));
   else if (carried)
-    checkProblem(carried->error());
+    requireWords(carried->error());
   const Results<OpenedStudy> opened = openedStudy(bytes);
   if (opened) {
     require(opened->isRestored == carried.has_value());
@@ -39,7 +25,7 @@ void checkRead(std::string_view bytes) {
   }
   require(!opened.error().empty());
   for (const Problem& problem : opened.error())
-    checkProblem(problem);
+    requireWords(problem);
 }
 
 void checkCarried(std::string_view study) {

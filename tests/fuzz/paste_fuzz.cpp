@@ -4,20 +4,13 @@
 // refused with Problems that point into the table.
 #include "core/record/copied_points.h"
 #include "core/record/pasted_points.h"
-#include "core/words/utf8.h"
+#include "tests/fuzz/promises.h"
 
-#include <algorithm>
 #include <cstdint>
-#include <cstdlib>
 
 using namespace planewright;
 
 namespace {
-
-void require(bool condition) {
-  if (!condition)
-    std::abort();
-}
 
 /// With a section, so that forces can be taken.
 Study study() {
@@ -39,10 +32,7 @@ void checkTaken(const Study& before, const PastedPoints& pasted) {
 void checkProblem(const Problem& problem, int lines) {
   require(problem.line >= 0 && problem.line <= lines && problem.column >= 0);
   require(problem.column <= static_cast<int>(mostTableColumns) + 1);
-  require(!problem.what.empty());
-  const std::string words = plain(problem);
-  require(isUtf8(words));
-  require(std::none_of(words.begin(), words.end(), [](unsigned char c) { return c < 0x20 || c == 0x7F; }));
+  requireWords(problem);
 }
 
 void check(std::string_view text, const ColumnChoices& choices) {

@@ -5,20 +5,13 @@
 #include "core/record/readout_file.h"
 #include "core/record/study_file.h"
 #include "core/study/edit.h"
-#include "core/words/utf8.h"
+#include "tests/fuzz/promises.h"
 
-#include <algorithm>
 #include <cstdint>
-#include <cstdlib>
 
 using namespace planewright;
 
 namespace {
-
-void require(bool condition) {
-  if (!condition)
-    std::abort();
-}
 
 void checkStudy(const Study& study) {
   require(problemsIn(study).empty());
@@ -36,14 +29,6 @@ void checkReadout(const Study& study) {
   require(!readoutCsv(study, readouts).empty() && !readoutText(study, readouts).empty());
 }
 
-void checkProblem(const Problem& problem, int lines) {
-  require(problem.line >= 1 && problem.line <= lines && problem.column >= 1);
-  require(!problem.what.empty());
-  const std::string words = plain(problem);
-  require(isUtf8(words));
-  require(std::none_of(words.begin(), words.end(), [](unsigned char c) { return c < 0x20 || c == 0x7F; }));
-}
-
 } // namespace
 
 extern "C" int LLVMFuzzerTestOneInput(const std::uint8_t* data, std::size_t size) {
@@ -54,9 +39,6 @@ extern "C" int LLVMFuzzerTestOneInput(const std::uint8_t* data, std::size_t size
     checkReadout(*study);
     return 0;
   }
-  require(!study.error().empty() && study.error().size() <= 100);
-  const auto lines = static_cast<int>(std::count(bytes.begin(), bytes.end(), '\n')) + 1;
-  for (const Problem& problem : study.error())
-    checkProblem(problem, lines);
+  requireWithin(study.error(), bytes);
   return 0;
 }

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/words/problem.h"
 #include "tests/support/approved.h"
 
 #include <set>
@@ -49,6 +50,15 @@ private:
   std::string m_folder;
   std::string m_kind; ///< ".table"
 };
+
+/// "LINE:COLUMN PLACE QUOTED" for each Problem of a file.
+inline std::string listed(const Problems& problems) {
+  std::string lines;
+  for (const Problem& problem : problems)
+    lines += std::to_string(problem.line) + ":" + std::to_string(problem.column) + " " +
+             (problem.place.empty() ? "-" : problem.place) + " " + problem.quoted + "\n";
+  return lines;
+}
 
 /// A name of the corpus as that of a test.
 inline std::string testName(std::string name) {

@@ -15,14 +15,6 @@ const Corpus& corpus() {
   return studies;
 }
 
-std::string listed(const Problems& problems) {
-  std::string lines;
-  for (const Problem& problem : problems)
-    lines += std::to_string(problem.line) + ":" + std::to_string(problem.column) + " " +
-             (problem.place.empty() ? "-" : problem.place) + " " + problem.quoted + "\n";
-  return lines;
-}
-
 class StudyCorpus : public testing::TestWithParam<std::string> {};
 
 TEST_P(StudyCorpus, hasTheExpectedProblems) {
