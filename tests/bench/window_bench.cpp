@@ -10,6 +10,8 @@
 #include "ui/given/given_panel.h"
 #include "ui/look/font.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/strength/strength_panel.h"
+#include "ui/strength/utilisation_plot.h"
 
 #include <QApplication>
 #include <QMouseEvent>
@@ -43,6 +45,22 @@ Study studyWith(int combinations) {
                                   {{study.cases.front().id, "1"}, {"Q", std::to_string(0.1 * i)}},
                                   Basis::design});
   return study; // the first one is the single case with factor 1 and can be drawn by its ear
+}
+
+/// The same with a check of the line against invented strengths of timber.
+Study checked(Study study) {
+  Material timber;
+  timber.name = "timber";
+  timber.kind = MaterialKind::timber;
+  timber.alongTension = "14.5 MPa";
+  timber.alongCompression = "21 MPa";
+  timber.acrossTension = "0.4 MPa";
+  timber.acrossCompression = "2.5 MPa";
+  timber.shear = "4 MPa";
+  study.materials = {timber};
+  Point& point = study.points.front();
+  point.checks = {{"grain", "timber", Criterion::sumOfSquares, point.lines.front().name, "", {}}};
+  return study;
 }
 
 /// The same circles, opaque pens, nothing else: the measure of what painting costs here.
@@ -86,26 +104,31 @@ void paintAll() {
   QCoreApplication::processEvents();
 }
 
-void send(CirclePlot& plot, QEvent::Type type, QPointF at) {
+void send(QAbstractScrollArea& plot, QEvent::Type type, QPointF at,
+          Qt::KeyboardModifiers keys = Qt::ControlModifier) {
   const Qt::MouseButton button = type == QEvent::MouseMove ? Qt::NoButton : Qt::LeftButton;
-  QMouseEvent event(type, at, plot.viewport()->mapToGlobal(at), button, Qt::LeftButton, Qt::ControlModifier);
+  QMouseEvent event(type, at, plot.viewport()->mapToGlobal(at), button, Qt::LeftButton, keys);
   QCoreApplication::sendEvent(plot.viewport(), &event);
 }
 
-/// A window on one desk: the circle alone, or all views as they stand in the program.
+/// What stands in a window, beside the circle as it stands in the program.
+enum class Views { circle, all, allWithStrengths };
+
+/// A window on one desk.
 struct Window {
-  Window(int combinations, bool whole)
-      : desk(studyWith(combinations)), circle(new CircleView(desk, nullptr)) {
-    if (whole)
-      addAll();
-    else
+  Window(int combinations, Views views)
+      : desk(views == Views::allWithStrengths ? checked(studyWith(combinations)) : studyWith(combinations)),
+        circle(new CircleView(desk, nullptr)) {
+    if (views == Views::circle)
       columns.addWidget(circle);
+    else
+      addAll(views == Views::allWithStrengths);
     columns.resize(windowSize);
     columns.show();
     paintAll();
   }
 
-  void addAll() {
+  void addAll(bool withStrengths) {
     auto* drawings = new QSplitter;
     drawings->addWidget(new ElementView(desk));
     drawings->addWidget(circle);
@@ -117,6 +140,11 @@ struct Window {
     columns.addWidget(new GivenPanel(desk));
     columns.addWidget(rows);
     columns.setSizes({300, 1100});
+    if (withStrengths) {
+      strengths = new StrengthPanel(desk);
+      columns.addWidget(strengths);
+      columns.setSizes({300, 780, 320});
+    }
   }
 
   void drag(Samples& samples, Handle handle) {
@@ -138,6 +166,25 @@ struct Window {
     paintAll();
   }
 
+  /// Turns the line by the cursor of the plot of utilisation.
+  void dragCursor(Samples& samples) {
+    UtilisationPlot& plot = strengths->plot();
+    const UtilisationFrame& frame = plot.frame();
+    const auto at = [&](double degrees) {
+      const Vec on = frame.at({degrees, 0.5});
+      return QPointF(on.x, on.y);
+    };
+    const double nominal = desk.readout().checks.front().band->nominal.degrees();
+    send(plot, QEvent::MouseButtonPress, at(nominal), Qt::NoModifier);
+    for (int i = 1; i <= eventsInRound; ++i)
+      samples.time([&] {
+        send(plot, QEvent::MouseMove, at(nominal + 20 * std::sin(0.1 * i)), Qt::NoModifier);
+        paintAll();
+      });
+    send(plot, QEvent::MouseButtonRelease, at(nominal), Qt::NoModifier);
+    paintAll();
+  }
+
   /// Typed stresses: everything follows, the axes too.
   void edit(Samples& samples) {
     const Place place{Spot::sx, desk.readout().point, desk.study().cases.front().id};
@@ -151,6 +198,7 @@ struct Window {
 
   Desk desk;
   CircleView* circle;
+  StrengthPanel* strengths = nullptr;
   QSplitter columns;
 };
 
@@ -178,9 +226,13 @@ bool windowCosts(int combinations) {
   Samples type("circle alone: type a stress");
   Samples turnAll("all views: drag the reading mark");
   Samples typeAll("all views: type a stress");
+  Samples turnLine("with strengths: drag the line");
+  Samples turnJudged("with strengths: drag the mark");
+  Samples typeJudged("with strengths: type a stress");
   HandPainted hand(combinations);
-  Window alone(combinations, false);
-  Window whole(combinations, true);
+  Window alone(combinations, Views::circle);
+  Window whole(combinations, Views::all);
+  Window judged(combinations, Views::allWithStrengths);
   for (int round = 0; round < rounds; ++round) {
     for (int i = 0; i < eventsInRound; ++i)
       byHand.time([&] {
@@ -192,6 +244,9 @@ bool windowCosts(int combinations) {
     alone.edit(type);
     whole.drag(turnAll, Handle::reading);
     whole.edit(typeAll);
+    judged.dragCursor(turnLine);
+    judged.drag(turnJudged, Handle::reading);
+    judged.edit(typeJudged);
   }
   std::printf("%d combination(s), ms: median, 99th percentile, median as a multiple of the circle by hand\n",
               combinations);
@@ -202,6 +257,9 @@ bool windowCosts(int combinations) {
   print(type, byHand, editLimits);
   print(turnAll, byHand, dragLimits);
   print(typeAll, byHand, editLimits);
+  print(turnLine, byHand, dragLimits);
+  print(turnJudged, byHand, dragLimits);
+  print(typeJudged, byHand, editLimits);
   const double worst = std::max({turn.median(), draw.median(), type.median()}) / byHand.median();
   std::printf("  the circle alone costs at most %.1f times the circle by hand; limit %.0f\n", worst,
               ratioLimit);

@@ -1,6 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-// tests/corpus/materials holds one file of materials for each trap, NAME.json, and beside it NAME.problems: as
-// in tests/corpus/study.
+// tests/corpus/materials holds one file of materials for each trap, NAME.json, and beside it NAME.problems:
+// as in tests/corpus/study.
 #include "core/record/materials_file.h"
 #include "tests/support/corpus.h"
 
