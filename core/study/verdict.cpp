@@ -66,6 +66,15 @@ const CheckReading& readingOf(const Readout& readout, const JudgedCheck& judged)
   return readout.states[judged.state].checks[judged.check];
 }
 
+bool isJudgedAlike(const Readout& a, const Readout& b) {
+  return a.point == b.point && a.positive == b.positive && a.shown == b.shown && a.checks == b.checks &&
+         std::ranges::equal(a.states, b.states, [](const StateReading& one, const StateReading& other) {
+           return one.combination == other.combination && one.judged == other.judged &&
+                  one.stress == other.stress && one.sz == other.sz && one.scale == other.scale &&
+                  one.axial == other.axial && one.bending == other.bending && one.checks == other.checks;
+         });
+}
+
 Summary summarise(const Study& study) {
   Summary summary;
   for (const Point& point : study.points) {

@@ -44,6 +44,9 @@ Verdict verdictOf(const std::vector<Readout>& points);
 
 const CheckReading& readingOf(const Readout& readout, const JudgedCheck& judged);
 
+/// Whether all that follows from the checks is the same in two Readouts, whatever plane each of them reads.
+bool isJudgedAlike(const Readout& a, const Readout& b);
+
 /// One row of the summary: a check of a point over all combinations.
 struct SummaryRow {
   std::string point;

@@ -2,6 +2,7 @@
 #include "ui/desk/desk.h"
 
 #include "core/record/fingerprint.h"
+#include "core/study/verdict.h"
 
 #include <QUndoCommand>
 
@@ -91,8 +92,12 @@ void Desk::say(const QString& message) {
 
 void Desk::take(std::shared_ptr<const Study> study) {
   m_study = std::move(study);
-  m_readout = evaluate(*m_study);
+  Readout readout = evaluate(*m_study);
+  const bool isAlike = isJudgedAlike(m_readout, readout);
+  m_readout = std::move(readout);
   Q_EMIT changed();
+  if (!isAlike)
+    Q_EMIT judgedAnew();
 }
 
 } // namespace planewright

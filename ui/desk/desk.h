@@ -48,6 +48,8 @@ public:
 
 signals:
   void changed();
+  /// After changed(), where what follows from the checks is another: for what takes long to work out.
+  void judgedAnew();
   void said(const QString& message);
 
 private:

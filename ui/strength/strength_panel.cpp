@@ -87,7 +87,8 @@ StrengthPanel::StrengthPanel(Desk& desk, QWidget* parent)
   });
   connect(m_plot, &UtilisationPlot::reachChanged, this, &StrengthPanel::refresh);
   connect(m_more, &QAbstractButton::clicked, this, &StrengthPanel::showLimits);
-  connect(&m_desk, &Desk::changed, this, &StrengthPanel::refresh);
+  connect(&m_desk, &Desk::changed, this, &StrengthPanel::refreshAdd);
+  connect(&m_desk, &Desk::judgedAnew, this, &StrengthPanel::refresh);
   refresh();
 }
 
@@ -179,6 +180,10 @@ void StrengthPanel::removeCheck() {
     m_desk.say(shown(*problem));
 }
 
+void StrengthPanel::refreshAdd() {
+  m_add->setText(m_desk.study().materials.empty() ? tr("Materials…") : tr("Add a check"));
+}
+
 void StrengthPanel::refreshGoverns() {
   const Readout& readout = m_desk.readout();
   const std::optional<std::size_t> check = m_checks->selected();
@@ -219,8 +224,7 @@ void StrengthPanel::refresh() {
     return;
   const Readout& readout = m_desk.readout();
   const std::optional<std::size_t> check = m_checks->selected();
-  const bool hasMaterials = !m_desk.study().materials.empty();
-  m_add->setText(hasMaterials ? tr("Add a check") : tr("Materials…"));
+  refreshAdd();
   for (QWidget* widget : std::initializer_list<QWidget*>{m_remove, m_side, m_sentences})
     widget->setVisible(check.has_value());
   refreshGoverns();

@@ -47,6 +47,7 @@ private:
   void addCheck(const std::string& material);
   void removeCheck();
   void refresh();
+  void refreshAdd();
   void refreshGoverns();
   void showGoverning();
   void showLimits();

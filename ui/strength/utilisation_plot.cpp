@@ -65,7 +65,7 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
   setFocusPolicy(Qt::StrongFocus);
   viewport()->setMouseTracking(true);
   setAccessibleName(tr("Utilisation over the angle of the line"));
-  connect(&m_desk, &Desk::changed, this, &UtilisationPlot::refresh);
+  connect(&m_desk, &Desk::judgedAnew, this, &UtilisationPlot::refresh);
 }
 
 void UtilisationPlot::setLogarithmic(bool logarithmic) {

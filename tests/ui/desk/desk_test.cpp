@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/desk/desk.h"
 
+#include "tests/support/judged_study.h"
+
 #include <gtest/gtest.h>
 
 #include <QSignalSpy>
@@ -46,6 +48,24 @@ TEST(Desk, anEditThatChangesNothingLeavesNoStepAndTellsNobody) {
   type(desk, reading, "0", desk.newGesture());
   EXPECT_EQ(desk.undoStack()->count(), 0);
   EXPECT_EQ(changed.count(), 0);
+}
+
+TEST(Desk, aTurnOfTheReadingPlaneJudgesNothingAnew) {
+  Desk desk(judgedStudy());
+  const QSignalSpy changed(&desk, &Desk::changed);
+  const QSignalSpy judged(&desk, &Desk::judgedAnew);
+  type(desk, reading, "30", desk.newGesture());
+  EXPECT_EQ(changed.count(), 1);
+  EXPECT_EQ(judged.count(), 0);
+  type(desk, {Spot::lineAngle, "P1", "grain"}, "1 in 12", desk.newGesture());
+  EXPECT_EQ(judged.count(), 1);
+  type(desk, sx, "2 MPa", desk.newGesture());
+  EXPECT_EQ(judged.count(), 2);
+  desk.undoStack()->undo();
+  EXPECT_EQ(judged.count(), 3);
+  desk.show("P1", "1.35 G + 1.5 S");
+  EXPECT_EQ(judged.count(), 4);
+  EXPECT_EQ(changed.count(), 5);
 }
 
 TEST(Desk, whatIsNotTakenChangesNothing) {
