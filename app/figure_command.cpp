@@ -7,10 +7,8 @@
 #include "app/offscreen.h"
 #include "app/study_source.h"
 #include "core/figure/figure.h"
-#include "core/figure/svg.h"
 #include "core/quantity/expression.h"
-#include "core/record/embedded_study.h"
-#include "ui/paint/export.h"
+#include "ui/figure/figure_sharing.h"
 
 #include <algorithm>
 #include <array>
@@ -229,12 +227,16 @@ Result<Readout> readoutOf(const Study& study, const Wanted& wanted, const std::s
   return readout;
 }
 
+FigureSettings settingsOf(const Wanted& wanted) {
+  return {wanted.order.parts,       wanted.order.width,  wanted.order.textPoints, wanted.order.mono,
+          wanted.order.arrangement, wanted.order.blocks, wanted.format,           wanted.dpi,
+          wanted.carriesStudy};
+}
+
 FigureBatch batchOf(const Study& study, const Wanted& wanted, const std::string& file) {
   FigureBatch batch;
   batch.study = study;
-  batch.settings = {wanted.order.parts,       wanted.order.width,  wanted.order.textPoints, wanted.order.mono,
-                    wanted.order.arrangement, wanted.order.blocks, wanted.format,           wanted.dpi,
-                    wanted.carriesStudy};
+  batch.settings = settingsOf(wanted);
   if (file != "-")
     batch.studyFile = QString::fromStdString(file);
   batch.points = wanted.points;
@@ -244,24 +246,18 @@ FigureBatch batchOf(const Study& study, const Wanted& wanted, const std::string&
   return batch;
 }
 
-Result<std::string> svgOf(const Picture& picture, Palette palette, const std::string& study) {
-  std::string svg = svgOf(picture, palette);
-  return study.empty() ? svg : svgWithStudy(std::move(svg), study);
-}
-
-/// The picture as a file, with a study inside unless its bytes are empty.
-Outcome<std::string> bytesOf(const Picture& picture, const Wanted& wanted, const std::string& study) {
-  const Palette palette = paletteOf(wanted.order);
-  if (wanted.format == FigureFormat::pdf)
-    return paintedOffscreen([&] { return pdfOf(picture, palette, study); });
-  if (wanted.format == FigureFormat::png)
-    return paintedOffscreen([&] { return pngOf(picture, palette, wanted.dpi, study); });
-  Result<std::string> svg = svgOf(picture, palette, study);
+/// The picture as a file, with the study inside where that is wanted.
+Outcome<std::string> bytesOf(const Picture& picture, const Wanted& wanted, const Study& study,
+                             const Readout& readout) {
+  const auto paint = [&] { return fileBytes(picture, settingsOf(wanted), study, readout); };
+  if (wanted.format != FigureFormat::svg)
+    return paintedOffscreen(paint);
+  Result<QByteArray> svg = paint();
   if (!svg) {
     svg.error().place.insert(0, "--");
     return wrongUse(std::move(svg).error());
   }
-  return *std::move(svg);
+  return svg->toStdString();
 }
 
 } // namespace
@@ -295,8 +291,7 @@ Outcome<Delivery> drawnFigure(std::span<const std::string> words) {
     picture.error().place.insert(0, "--"); // its places are called like the options
     return wrongUse(std::move(picture).error());
   }
-  const std::string carried = wanted->carriesStudy ? studyOfFigure(*study, *readout) : std::string();
-  Outcome<std::string> bytes = bytesOf(*picture, *wanted, carried);
+  Outcome<std::string> bytes = bytesOf(*picture, *wanted, *study, *readout);
   if (!bytes)
     return tl::unexpected(std::move(bytes).error());
   return Delivery{*std::move(bytes), wanted->file};

@@ -6,6 +6,7 @@
 #include "ui/figure/figure_sharing.h"
 #include "ui/figure/points_dialog.h"
 #include "ui/files/file_bytes.h"
+#include "ui/files/file_names.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
@@ -25,7 +26,6 @@
 #include <QScrollArea>
 #include <QSettings>
 #include <QShowEvent>
-#include <QStandardPaths>
 #include <QToolButton>
 #include <QVBoxLayout>
 
@@ -181,10 +181,7 @@ QString FigureDialog::givenUp(const Picture& picture) const {
 }
 
 QString FigureDialog::offeredPath() const {
-  const QString folder = m_studyFile.isEmpty()
-                             ? QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation)
-                             : QFileInfo(m_studyFile).absolutePath();
-  return folder + QLatin1Char('/') + m_name->text().trimmed() + m_ending->text();
+  return folderOf(m_studyFile) + QLatin1Char('/') + m_name->text().trimmed() + m_ending->text();
 }
 
 Result<void> FigureDialog::saveTo(const QString& path) {

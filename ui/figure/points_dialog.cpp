@@ -1,12 +1,12 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/figure/points_dialog.h"
 
+#include "ui/files/file_names.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
 #include <QDir>
 #include <QFileDialog>
-#include <QFileInfo>
 #include <QFormLayout>
 #include <QLabel>
 #include <QLineEdit>
@@ -16,7 +16,6 @@
 #include <QProgressBar>
 #include <QPushButton>
 #include <QRadioButton>
-#include <QStandardPaths>
 #include <QVBoxLayout>
 
 #include <algorithm>
@@ -102,10 +101,7 @@ QFormLayout* PointsDialog::choices() {
   auto* states = new QVBoxLayout;
   states->addWidget(m_governing);
   states->addWidget(shownOne);
-  const QString documents = QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation);
-  const QFileInfo study(m_arranged.studyFile);
-  m_folder = new QLineEdit(
-      QDir::toNativeSeparators(m_arranged.studyFile.isEmpty() ? documents : study.absolutePath()), this);
+  m_folder = new QLineEdit(QDir::toNativeSeparators(folderOf(m_arranged.studyFile)), this);
   auto* choose = new QPushButton(tr("Choose…"), this);
   choose->setAutoDefault(false);
   connect(choose, &QPushButton::clicked, this, &PointsDialog::chooseFolder);
@@ -194,10 +190,10 @@ void PointsDialog::write() {
   if (!folder.mkpath(QStringLiteral(".")))
     return tell(*m_sentence, tr("The folder %1 cannot be made. Choose another one.").arg(m_folder->text()),
                 true);
-  begin(m_arranged, std::move(figures));
+  begin(std::move(figures), folder.path());
 }
 
-void PointsDialog::begin(FigureBatch batch, std::vector<PointFigure> figures) {
+void PointsDialog::begin(std::vector<PointFigure> figures, const QString& folder) {
   for (QWidget* widget : m_settled)
     widget->setEnabled(false);
   m_problems->hide();
@@ -206,8 +202,7 @@ void PointsDialog::begin(FigureBatch batch, std::vector<PointFigure> figures) {
   m_progress->show();
   m_close->setText(tr("Stop"));
   m_close->setFocus();
-  const QString folder = QDir::fromNativeSeparators(m_folder->text().trimmed());
-  m_run = std::make_unique<BatchRun>(std::move(batch), std::move(figures), folder);
+  m_run = std::make_unique<BatchRun>(m_arranged, std::move(figures), folder);
   connect(m_run.get(), &BatchRun::progressed, this, [this](int done) {
     m_progress->setValue(done);
     tell(*m_sentence, tr("%1 of %2 …").arg(done).arg(m_run->all()), false);

@@ -49,7 +49,7 @@ private:
   void refresh();
   void chooseFolder();
   void write();
-  void begin(FigureBatch batch, std::vector<PointFigure> figures);
+  void begin(std::vector<PointFigure> figures, const QString& folder);
   void end();
   QString outcomeInWords() const;
 

@@ -3,8 +3,10 @@
 
 #include "ui/look/look.h"
 
+#include <QFileInfo>
 #include <QRegularExpression>
 #include <QSet>
+#include <QStandardPaths>
 #include <QStringList>
 
 namespace planewright {
@@ -45,6 +47,11 @@ std::vector<QString> distinctNames(std::vector<QString> names) {
     taken.insert(name.toCaseFolded());
   }
   return names;
+}
+
+QString folderOf(const QString& path) {
+  return path.isEmpty() ? QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation)
+                        : QFileInfo(path).absolutePath();
 }
 
 } // namespace planewright

@@ -16,4 +16,7 @@ QString joinedName(const std::vector<std::string>& names);
 /// becomes "p1-2".
 std::vector<QString> distinctNames(std::vector<QString> names);
 
+/// The folder of a file; that of documents where the path is empty.
+QString folderOf(const QString& path);
+
 } // namespace planewright

@@ -6,6 +6,7 @@
 #include "core/report/comparison.h"
 #include "core/report/sheet_html.h"
 #include "ui/files/file_bytes.h"
+#include "ui/files/file_names.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
@@ -26,7 +27,6 @@
 #include <QScrollBar>
 #include <QSettings>
 #include <QShowEvent>
-#include <QStandardPaths>
 #include <QToolButton>
 #include <QVBoxLayout>
 
@@ -172,12 +172,9 @@ Result<void> SheetDialog::saveTo(const QString& path) {
 }
 
 QString SheetDialog::offeredPath(const QString& ending) const {
-  const QFileInfo file(m_studyFile);
-  const QString folder = m_studyFile.isEmpty()
-                             ? QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation)
-                             : file.absolutePath();
-  const QString name = m_studyFile.isEmpty() ? tr("sheet") : tr("%1-sheet").arg(file.completeBaseName());
-  return folder + QLatin1Char('/') + name + ending;
+  const QString study = QFileInfo(m_studyFile).completeBaseName();
+  const QString name = m_studyFile.isEmpty() ? tr("sheet") : tr("%1-sheet").arg(study);
+  return folderOf(m_studyFile) + QLatin1Char('/') + name + ending;
 }
 
 void SheetDialog::save(const QString& ending, const QString& kind) {

@@ -1,13 +1,13 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/file_questions.h"
 
+#include "ui/files/file_names.h"
 #include "ui/shell/recent_files.h"
 
 #include <QCoreApplication>
 #include <QDir>
 #include <QFileDialog>
 #include <QMessageBox>
-#include <QStandardPaths>
 
 namespace planewright {
 
@@ -30,9 +30,7 @@ QString filterToOpen() {
 
 /// The folder of the newest file, else that of documents.
 QString folder() {
-  const QString newest = recentFiles().value(0);
-  return newest.isEmpty() ? QStandardPaths::writableLocation(QStandardPaths::DocumentsLocation)
-                          : QFileInfo(newest).absolutePath();
+  return folderOf(recentFiles().value(0));
 }
 
 Unsaved askAboutUnsaved(QWidget& window, const QString& name) {

@@ -27,13 +27,6 @@ FigureOrder arranged(double width, Arrangement arrangement, const char* blocks =
   return order;
 }
 
-Picture figure(const Study& study, const FigureOrder& order) {
-  const Result<Picture> picture = figureOf(study, evaluate(study), order);
-  if (!picture)
-    ADD_FAILURE() << plain(picture.error());
-  return picture ? *picture : Picture{};
-}
-
 /// Where a heading of each block stands; blocks that are not there are not in it.
 std::map<FigureBlock, Vec> headings(const Picture& picture) {
   const std::map<std::string, FigureBlock> words = {

@@ -21,13 +21,6 @@ FigureOrder wide(double width) {
   return order;
 }
 
-Picture figure(const Study& study, const FigureOrder& order) {
-  const Result<Picture> picture = figureOf(study, evaluate(study), order);
-  if (!picture)
-    ADD_FAILURE() << plain(picture.error());
-  return picture ? *picture : Picture{};
-}
-
 Given notch() {
   return {8.4, -0.6, 2.1, 5.71, 3, 30, 0, true};
 }

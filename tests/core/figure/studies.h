@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/figure/figure.h"
 #include "core/quantity/format.h"
 #include "core/study/edit.h"
 #include "core/study/readout.h"
@@ -87,6 +88,14 @@ inline Study someStudy(Dice& dice) {
     study.points.front().planes.push_back(
         {"plane & <" + exactNumber(i) + ">", exactNumber(dice.below(180)) + " deg", ""});
   return study;
+}
+
+/// The figure of what a study shows.
+inline Picture figure(const Study& study, const FigureOrder& order) {
+  const Result<Picture> picture = figureOf(study, evaluate(study), order);
+  if (!picture)
+    ADD_FAILURE() << plain(picture.error());
+  return picture ? *picture : Picture{};
 }
 
 } // namespace planewright
