@@ -27,14 +27,14 @@ enum class Criterion {
   /// The same with the product over X2^2, X2 = Xt or Xc by the sign of s2. Form of Azzi and Tsai given by
   /// Kaw.
   azziTsaiTwoSign,
-  /// s1^2/(Xt Xc) - s1 s2/(Xt Xc) + s2^2/(Yt Yc) + (1/Xt - 1/Xc) s1 + (1/Yt - 1/Yc) s2 + (t/S)^2 = 1, for 4
-  /// Xt
-  /// Xc > Yt Yc. Hoffman 1967.
+  /// s1^2/(Xt Xc) - s1 s2/(Xt Xc) + s2^2/(Yt Yc) + (1/Xt - 1/Xc) s1 + (1/Yt - 1/Yc) s2 + (t/S)^2 = 1,
+  /// for 4 Xt Xc > Yt Yc.
+  /// Hoffman 1967.
   hoffman,
   /// F1 s1 + F2 s2 + F11 s1^2 + F22 s2^2 + F66 t^2 + 2 F12 s1 s2 = 1 with F1 = 1/Xt - 1/Xc, F11 = 1/(Xt Xc),
-  /// F2
-  /// and F22 likewise of Y, F66 = 1/S^2; F12 = -0.5 sqrt(F11 F22) unless given, F12^2 < F11 F22. Tsai and Wu
-  /// 1971.
+  /// F2 and F22 likewise of Y, F66 = 1/S^2; F12 = -0.5 sqrt(F11 F22) unless given,
+  /// F12^2 < F11 F22.
+  /// Tsai and Wu 1971.
   tsaiWu,
   /// |s1|/X + |s2|/Y + |t|/S = 1. Published for uniaxial tension and bending at an angle, for other states an
   /// extension of this program. LVL Handbook Europe 2025, equations 4.15 and 4.16.
@@ -43,8 +43,8 @@ enum class Criterion {
   /// only. EN 1995-1-1, 6.2.2, equation (6.16).
   compressionAtAngle,
   /// sumOfSquares with X = f_m and, for tension along the edge, Y = f_t,90 and S = 0.75 f_v, for compression
-  /// Y
-  /// = f_c,90 and S = 1.5 f_v; uniaxial stress along the edge only, within 0.01 deg. EN 1995-1-1, 6.4.2,
+  /// Y = f_c,90 and S = 1.5 f_v;
+  /// uniaxial stress along the edge only, within 0.01 deg. EN 1995-1-1, 6.4.2,
   /// equations (6.38) to (6.40), numbers from memory.
   taperedEdge,
   /// sqrt(((s1-s2)^2 + (s2-s3)^2 + (s3-s1)^2)/2) = f, s1 to s3 the principal stresses with sz. Common
@@ -59,8 +59,8 @@ enum class Criterion {
   /// sb)/2 + (sa + sb)/2 sin phi), none where that is not positive. Common practice, no source.
   mohrCoulomb,
   /// |t| = c - sn tan phi and sn <= cut-off, which is 0 unless given. The utilisation is the greater of
-  /// |t|/(c
-  /// - sn tan phi) and sn/cut-off, infinite where there is no finite one; R apart, since clamping grows with
+  /// |t|/(c - sn tan phi)
+  /// and sn/cut-off, infinite where there is no finite one; R apart, since clamping grows with
   /// the loads. Common practice, no source.
   coulomb,
   /// sqrt(sn^2 + 3 t^2) = fu/(beta_w gamma_M2) and |sn| = 0.9 fu/gamma_M2; fillet welds only. EN 1993-1-8,
