@@ -89,6 +89,7 @@ StrengthPanel::StrengthPanel(Desk& desk, QWidget* parent)
   connect(m_more, &QAbstractButton::clicked, this, &StrengthPanel::showLimits);
   connect(&m_desk, &Desk::changed, this, &StrengthPanel::refreshAdd);
   connect(&m_desk, &Desk::judgedAnew, this, &StrengthPanel::refresh);
+  refreshAdd();
   refresh();
 }
 
@@ -224,7 +225,6 @@ void StrengthPanel::refresh() {
     return;
   const Readout& readout = m_desk.readout();
   const std::optional<std::size_t> check = m_checks->selected();
-  refreshAdd();
   for (QWidget* widget : std::initializer_list<QWidget*>{m_remove, m_side, m_sentences})
     widget->setVisible(check.has_value());
   refreshGoverns();
