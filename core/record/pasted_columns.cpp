@@ -1,10 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/record/pasted_columns.h"
 
-#include "core/words/utf8.h"
+#include "core/record/heading.h"
 
 #include <algorithm>
-#include <array>
 
 namespace planewright {
 
@@ -70,48 +69,6 @@ const std::vector<KindRow>& kindTable() {
 
 const KindRow& rowOf(ColumnKind kind) {
   return kindTable()[static_cast<std::size_t>(kind)];
-}
-
-/// Without blanks, index signs and capitals, Greek letters by name: "σ_{x}" gives "sigmax".
-string plainHeading(string_view heading) {
-  string plain;
-  std::size_t at = 0;
-  while (const auto point = codePointAt(heading, at)) {
-    const string_view written = heading.substr(at, point->bytes);
-    at += point->bytes;
-    if (string_view(" \t\n_{}-.\xC2\xA0").find(written) != string_view::npos)
-      continue;
-    const bool isCapital = written.size() == 1 && written[0] >= 'A' && written[0] <= 'Z';
-    plain += written == "σ"   ? string("sigma")
-             : written == "τ" ? string("tau")
-             : written == "ₓ" ? string("x")
-             : isCapital      ? string(1, static_cast<char>(written[0] + 32))
-                              : string(written);
-  }
-  return plain;
-}
-
-string_view withoutBlanks(string_view text) {
-  const auto first = text.find_first_not_of(" \t\n");
-  if (first == string_view::npos)
-    return {};
-  return text.substr(first, text.find_last_not_of(" \t\n") - first + 1);
-}
-
-/// A heading cut into its name and what stands in brackets behind it.
-struct Heading {
-  string_view name;
-  std::optional<string_view> unit;
-};
-
-Heading headingOf(string_view cell) {
-  const string_view text = withoutBlanks(cell);
-  for (const auto& [open, close] : {std::pair{'[', ']'}, std::pair{'(', ')'}}) {
-    const std::size_t at = text.find(open);
-    if (at != string_view::npos && at > 0 && text.ends_with(close))
-      return {withoutBlanks(text.substr(0, at)), withoutBlanks(text.substr(at + 1, text.size() - at - 2))};
-  }
-  return {text, std::nullopt};
 }
 
 /// Whether a cell holds a number or an expression of one, also one that is written wrongly.
