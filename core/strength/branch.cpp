@@ -4,6 +4,7 @@
 #include <algorithm>
 #include <cmath>
 #include <limits>
+#include <span>
 
 namespace planewright {
 
@@ -124,16 +125,7 @@ struct TurningPoints {
   const TurningState& state;
   std::vector<double> at{};
 
-  void operator()(const SignedForm& form) {
-    at.insert(at.end(), {-state.circle.mean, state.circle.mean});
-    std::vector<Interaction> seen;
-    for (const auto& row : form.pieces)
-      for (const Interaction& piece : row)
-        if (std::ranges::find(seen, piece) == seen.end()) {
-          seen.push_back(piece);
-          stationaryOf(piece, state.circle.mean, state.circle.radius, at);
-        }
-  }
+  void operator()(const SignedForm& form) { addTurnsOf(form, state.circle.mean, state.circle.radius, at); }
   void operator()(const PowerOfAngle&) {}
   void operator()(const Mobilised& plane) {
     const double radius = state.circle.radius;
@@ -159,6 +151,19 @@ void addTurningPoints(const PowerOfAngle& power, std::vector<Angle>& directions)
 }
 
 } // namespace
+
+void addTurnsOf(const SignedForm& form, double mean, double radius, std::vector<double>& at) {
+  at.insert(at.end(), {-mean, mean});
+  std::array<const Interaction*, 4> seen{};
+  std::size_t count = 0;
+  for (const auto& row : form.pieces)
+    for (const Interaction& piece : row)
+      if (std::ranges::none_of(std::span(seen.data(), count),
+                               [&](const Interaction* other) { return *other == piece; })) {
+        seen[count++] = &piece;
+        stationaryOf(piece, mean, radius, at);
+      }
+}
 
 LoadTerms termsOf(const SignedForm& form, const LineStress& stresses) {
   const Interaction& piece = pieceOf(form, stresses);

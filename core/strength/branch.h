@@ -73,6 +73,10 @@ LoadTerms termsOf(const SignedForm& form, const LineStress& stresses);
 /// cohesion - s1 tan(phi) at a direction; what is only rounding of the two is 0.
 double resistanceOf(const Mobilised& plane, const TurningState& state, Angle direction);
 
+/// Adds where the utilisation of a form turns, as X = along - mean, between principal directions at X = -r
+/// and r: where a piece stands still, and at the corners, where a stress changes its sign.
+void addTurnsOf(const SignedForm& form, double mean, double radius, std::vector<double>& at);
+
 double utilisationOf(const Branch& branch, const TurningState& state, Angle direction);
 /// The multiplier on all loads that takes this part to 1; none where none does.
 std::optional<double> multiplierOf(const Branch& branch, const TurningState& state, Angle direction);

@@ -86,6 +86,13 @@ Judgement Judge::at(Angle direction) const {
   return judgement;
 }
 
+Mode lineModeOf(const LineStrengths& f, const LineStress& s, double utilisation) {
+  return governing({ratioOf(s.along, f.Xt, f.Xc, Mode::tensionAlong, Mode::compressionAlong),
+                    ratioOf(s.across, f.Yt, f.Yc, Mode::tensionAcross, Mode::compressionAcross),
+                    {Mode::shear, std::abs(s.shear) / f.S}},
+                   utilisation);
+}
+
 std::optional<Mode> Judge::modeAt(Angle direction, double utilisation) const {
   using enum StrengthKey;
   const LineStress s = m_state.at(direction);
@@ -117,12 +124,9 @@ std::optional<Mode> Judge::modeAt(Angle direction, double utilisation) const {
         utilisation);
   }
   default:
-    return governing(
-        {ratioOf(s.along, f(alongTension), f(alongCompression), Mode::tensionAlong, Mode::compressionAlong),
-         ratioOf(s.across, f(acrossTension), f(acrossCompression), Mode::tensionAcross,
-                 Mode::compressionAcross),
-         {Mode::shear, std::abs(s.shear) / f(StrengthKey::shear)}},
-        utilisation);
+    return lineModeOf(
+        {f(alongTension), f(alongCompression), f(acrossTension), f(acrossCompression), f(StrengthKey::shear)},
+        s, utilisation);
   }
 }
 

@@ -57,4 +57,8 @@ struct LineStrengths {
   double Xt = 0, Xc = 0, Yt = 0, Yc = 0, S = 0;
 };
 
+/// What stresses in the axes of a line at this utilisation would do: the greatest ratio to a strength where
+/// it alone makes up 0.9 of the utilisation, else the interaction.
+Mode lineModeOf(const LineStrengths& strengths, const LineStress& stresses, double utilisation);
+
 } // namespace planewright

@@ -51,6 +51,16 @@ bool isRounding(double value, double scale) {
   return std::abs(value) <= 8 * std::numeric_limits<double>::epsilon() * scale;
 }
 
+PlaneStress withoutRounding(PlaneStress sum, double scale) {
+  for (double* component : {&sum.sx, &sum.sy, &sum.txy})
+    if (isRounding(*component, scale))
+      *component = 0;
+  if (circleOf(sum, scale).theta1)
+    return sum;
+  const double mean = sum.sx / 2 + sum.sy / 2;
+  return {mean, mean, 0};
+}
+
 double scaleOf(const PlaneStress& stress) {
   return std::max({std::abs(stress.sx), std::abs(stress.sy), std::abs(stress.txy)});
 }

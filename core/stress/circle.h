@@ -37,6 +37,10 @@ Circle circleOf(const PlaneStress& stress);
 /// Whether a value is no more than the rounding of terms of this size that cancelled: |value| <= 8 eps scale.
 bool isRounding(double value, double scale);
 
+/// A sum of terms of this size without what is only their rounding: components, and a radius that is none of
+/// theirs, become 0.
+PlaneStress withoutRounding(PlaneStress sum, double scale);
+
 /// max(|sx|, |sy|, |txy|).
 double scaleOf(const PlaneStress& stress);
 

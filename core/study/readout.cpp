@@ -83,11 +83,7 @@ void addTerm(StateReading& state, double factor, const std::vector<CaseReading>&
 void dropRounding(StateReading& state, double scaleOfThird) {
   if (isRounding(state.sz, scaleOfThird))
     state.sz = 0;
-  dropRounding(state.stress, state.scale);
-  if (circleOf(state.stress, state.scale).theta1)
-    return;
-  const double mean = state.stress.sx / 2 + state.stress.sy / 2;
-  state.stress = {mean, mean, 0};
+  state.stress = withoutRounding(state.stress, state.scale);
 }
 
 void resolve(StateReading& state, const Readout& readout) {
