@@ -11,7 +11,7 @@ function order(part, folders,   list, count, i) {
 
 BEGIN {
   # Each folder includes only folders before it in its row, and its own.
-  order("core", "words quantity working stress source strength study table figure record shipped evidence report")
+  order("core", "words quantity working stress source strength study table figure record screen shipped evidence report")
   order("ui", "look desk entry chart paint files given element circle planes strength figure sheet shell")
   split("given element circle planes strength figure sheet", views, " ")
   for (i in views) isView[views[i]] = 1
