@@ -14,9 +14,7 @@ Result<std::string> bytesOf(const std::string& path, std::size_t most);
 /// The same from an open descriptor; `place` names it in a Problem.
 Result<std::string> bytesFrom(int descriptor, std::size_t most, const std::string& place);
 
-/// Writes a file aside in its folder, syncs it and puts it in the place of the old one: at every moment the
-/// old or the new bytes stand there whole. A link stays a link and the old file's permissions stay. What is
-/// no plain file (a pipe, a device) is written to directly.
+/// Writes a file whole or not at all, as FileAside does.
 Result<void> writeAside(const std::string& path, std::string_view bytes);
 
 /// Writes all bytes to an open descriptor; `place` names it in a Problem.
