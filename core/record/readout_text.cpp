@@ -6,11 +6,11 @@
 #include "core/study/sum_of_case.h"
 #include "core/study/working_of_check.h"
 #include "core/study/working_of_state.h"
+#include "core/table/aligned_rows.h"
 #include "core/table/cautions.h"
 #include "core/table/check_words.h"
 #include "core/table/parts_of_sx.h"
 #include "core/table/table.h"
-#include "core/words/utf8.h"
 
 #include <algorithm>
 
@@ -19,26 +19,6 @@ namespace planewright {
 namespace {
 
 using Cells = std::vector<std::string>;
-
-std::string blanks(std::size_t width, const std::string& beside) {
-  return std::string(width - std::min(width, codePointsIn(beside)), ' ');
-}
-
-/// Rows set in columns: the first to the left, numbers to the right.
-std::string aligned(const std::vector<Cells>& rows, std::string_view indent) {
-  std::vector<std::size_t> widths(rows.front().size());
-  for (const Cells& row : rows)
-    for (std::size_t i = 0; i < row.size(); ++i)
-      widths[i] = std::max(widths[i], codePointsIn(row[i]));
-  std::string lines;
-  for (const Cells& row : rows) {
-    lines += std::string(indent) + row[0] + blanks(widths[0], row[0]);
-    for (std::size_t i = 1; i < row.size(); ++i)
-      lines += "  " + blanks(widths[i], row[i]) + row[i];
-    lines += '\n';
-  }
-  return lines;
-}
 
 /// Writes the readout in one language.
 class TextWriter {
@@ -285,7 +265,7 @@ private:
       for (const Cell& cell : row.cells)
         cells.push_back(words(cell.shown));
     }
-    m_out += aligned(rows, "    ");
+    m_out += alignedRows(rows, "    ");
   }
 
   void steps(const std::vector<Step>& steps) {

@@ -1,0 +1,25 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include "core/screen/field_reader.h"
+#include "core/screen/results.h"
+#include "core/screen/summary.h"
+
+namespace planewright {
+
+/// What was left out on request, and how many points that met.
+struct LeftOut {
+  std::string name;
+  std::size_t points = 0;
+};
+
+/// What is said of a field beside its results, as lines of text: by what it was judged, what was read and
+/// what was left out, how many points exceed, the greatest utilisation beside the one that 99.9 % of the
+/// points do not exceed, the ten worst points, the histogram, and the cautions that belong to the checks.
+/// Utilisations are rounded upwards, multipliers downwards. `point` is the one by which the plan was made; at
+/// least one point of the field is judged.
+std::string summaryText(const Study& study, std::string_view point, const ScreenPlan& plan,
+                        const FieldReading& reading, const FieldResults& results,
+                        const std::vector<LeftOut>& leftOut, const Translate& translate = {});
+
+} // namespace planewright
