@@ -12,6 +12,7 @@ struct Delivery {
   std::string file = "-";
   Exit exit = Exit::done;       ///< once it is delivered
   std::vector<Text> facts = {}; ///< what is said on standard error beside it
+  std::string said = {};        ///< lines of text that stand there below the facts
 };
 
 /// Where -o sends the output: "-" without it. A Problem when that is the study that is read.

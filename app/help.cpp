@@ -13,6 +13,7 @@ planewright [STUDY]            opens the window, with a study or with a figure t
 planewright resolve ...        prints everything that follows from a study or from three components
 planewright figure STUDY ...   writes the labelled figure as SVG, PDF or PNG
 planewright sheet STUDY ...    writes the calculation sheet as PDF or HTML
+planewright screen POINTS ...  judges the points of a table by the checks of a point of a study
 planewright compare A B        tells what changed from one study to another
 planewright validate           recomputes every published value that is shipped with it
 planewright COMMAND --help     explains a command
@@ -21,7 +22,7 @@ planewright --version          prints the version
 A first word that is a command is a command: write ./figure for a file of that name.
 Commands need no display. “-” is standard input or output.
 
-Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font); 5 a self-check disagreed (validate, sheet).
+Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong use or bad input: nothing is written; 3 the machine failed (disk, permission, font); 4 done, but rows or points were left out on request (screen); 5 a self-check disagreed (validate, sheet).
 
 An aid to a licensed engineer: it looks at one point in plane stress. It sees no volume, size, moisture,
 duration, edge, notch or third-direction effects. Local codes govern.
@@ -77,6 +78,33 @@ its place there and how far it can be trusted. Exit code 5 where one disagrees.
 
 -o FILE   writes there, as a report where the name ends with .html or .pdf, else as text; "-" or nothing is
           standard output
+)help"));
+}
+
+std::string screenHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright screen POINTS.csv --study STUDY -o OUT.csv [options]
+
+Judges very many points by the line, tolerance and checks of one point of a study, over all its combinations, and
+writes for each what governs: utilisation, load multiplier, combination, check, mode and worst angle. A summary goes
+to standard error.
+
+POINTS.csv has the columns point,case,sx,sy,txy with a row for each case at a point, or point and three columns for
+each case ("sx G", "sy G", "txy G"). Besides them it may have layer (top, mid, bottom), axes (turn of the row's
+x axis), line (the row's own angle of the line), region, x and y. Units stand behind: "sx [MPa]"; without them the
+study's count.
+
+--study STUDY          combinations, and the point with the checks
+--point NAME           that point; without it, the one that the study shows, else its first
+--check ID             only this check; may be repeated; without it, all that can judge a field
+--column NAME=HEADING  what a column with another heading is: "sx [psi]=SXX"; may be repeated
+--leave-out            goes on without faulty rows; without it they stop the run and nothing is written
+--except NAME          leaves out a point or region, or all whose names begin so ("corner*"); may be repeated
+--except-list FILE     leaves out the points that are named in it, one a line
+--top N                only the N worst points, worst first
+--principals           adds s1, s2 and theta1 of the governing combination
+-o FILE                "-" is standard output
+
+planewright screen deck.csv --study beam.planewright --except "support*" -o worst.csv --top 100
 )help"));
 }
 

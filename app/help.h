@@ -13,5 +13,6 @@ std::string figureHelp();
 std::string sheetHelp();
 std::string compareHelp();
 std::string validateHelp();
+std::string screenHelp();
 
 } // namespace planewright

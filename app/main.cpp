@@ -3,6 +3,7 @@
 #include "app/figure_command.h"
 #include "app/help.h"
 #include "app/resolve_command.h"
+#include "app/screen_command.h"
 #include "app/sheet_command.h"
 #include "app/validate_command.h"
 #include "app/window_command.h"
@@ -40,8 +41,8 @@ Problem unknownWord(const std::string& word) {
           0,
           word,
           PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
-          PW_TEXT("Command", "The commands are resolve, figure, sheet, compare and validate; planewright "
-                             "--help explains them.")};
+          PW_TEXT("Command", "The commands are resolve, figure, sheet, screen, compare and validate; "
+                             "planewright --help explains them.")};
 }
 
 Outcome<Delivery> commanded(Words words) {
@@ -53,6 +54,8 @@ Outcome<Delivery> commanded(Words words) {
     return drawnFigure(rest);
   if (first == "sheet")
     return writtenSheet(rest);
+  if (first == "screen")
+    return screenedField(rest);
   if (first == "compare")
     return comparedStudies(rest);
   if (first == "validate")
@@ -64,13 +67,13 @@ Outcome<Delivery> commanded(Words words) {
   return wrongUse(unknownWord(first));
 }
 
-/// Says each on standard error; gives the number of the exit.
+/// Says each on standard error, and the text below them; gives the number of the exit.
 template <class Said>
-int ended(Exit exit, const std::vector<Said>& said) {
+int ended(Exit exit, const std::vector<Said>& said, const std::string& text = {}) {
   std::string lines;
   for (const Said& one : said)
     lines += "planewright: " + plain(one) + "\n";
-  static_cast<void>(writeTo(STDERR_FILENO, lines, ""));
+  static_cast<void>(writeTo(STDERR_FILENO, lines + text, ""));
   return static_cast<int>(exit);
 }
 
@@ -81,7 +84,7 @@ int run(Words words) {
     return ended(delivery.error().exit, delivery.error().problems);
   if (const Outcome<void> outcome = delivered(*delivery); !outcome)
     return ended(outcome.error().exit, outcome.error().problems);
-  return ended(delivery->exit, delivery->facts);
+  return ended(delivery->exit, delivery->facts, delivery->said);
 }
 
 } // namespace

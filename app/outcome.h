@@ -6,7 +6,7 @@
 namespace planewright {
 
 /// How a command ends. The numbers are what scripts rely on.
-enum class Exit { done = 0, exceeds = 1, wrongUse = 2, machineFailed = 3, disagrees = 5 };
+enum class Exit { done = 0, exceeds = 1, wrongUse = 2, machineFailed = 3, leftOut = 4, disagrees = 5 };
 
 /// A command that came to nothing.
 struct Failure {

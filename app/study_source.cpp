@@ -18,14 +18,16 @@ Outcome<std::string> bytesIn(const std::string& file) {
       isInput ? bytesFrom(STDIN_FILENO, greatestCarrier, "standard input") : bytesOf(file, greatestCarrier);
   if (bytes)
     return *std::move(bytes);
-  // A file that is there and cannot be read is the machine's fault; one that is not there is the caller's.
-  std::error_code failed;
-  if (isInput || std::filesystem::is_regular_file(file, failed))
-    return machineFailed(std::move(bytes).error());
-  return wrongUse(std::move(bytes).error());
+  return tl::unexpected(failedToRead(file, std::move(bytes).error()));
 }
 
 } // namespace
+
+Failure failedToRead(const std::string& file, Problem problem) {
+  std::error_code failed;
+  const bool isThere = file == "-" || std::filesystem::is_regular_file(file, failed);
+  return {isThere ? Exit::machineFailed : Exit::wrongUse, {std::move(problem)}};
+}
 
 Outcome<Study> studyIn(const std::string& file) {
   Outcome<std::string> bytes = bytesIn(file);

@@ -20,7 +20,10 @@ bool hasDisplay() {
 }
 
 bool isCommand(const std::string& word) {
-  return word == "resolve" || word == "figure" || word == "validate" || word.starts_with("-");
+  for (const char* command : {"resolve", "figure", "sheet", "screen", "compare", "validate"})
+    if (word == command)
+      return true;
+  return word.starts_with("-");
 }
 
 } // namespace
