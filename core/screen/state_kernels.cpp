@@ -35,53 +35,63 @@ void widenBounds(const double* __restrict__ values, std::size_t count, Bounds& b
   bounds = {least, greatest};
 }
 
+// Loops of their own, three or six terms at a time: nested in a loop over the terms, GCC would turn them
+// about and gather values one by one.
+
 PW_CLONES
-void combineLane(const double* const* states, const double* factors, std::size_t count,
-                 double* __restrict__ sum) {
-  std::size_t k = 0;
-  if (count >= 3) {
-    const double* __restrict__ a = states[0];
-    const double* __restrict__ b = states[1];
-    const double* __restrict__ c = states[2];
-    const double fa = factors[0];
-    const double fb = factors[1];
-    const double fc = factors[2];
-    for (std::size_t i = 0; i < stateSize; ++i)
-      sum[i] = fa * a[i] + fb * b[i] + fc * c[i];
-    k = 3;
-  } else if (count == 2) {
-    const double* __restrict__ a = states[0];
-    const double* __restrict__ b = states[1];
-    const double fa = factors[0];
-    const double fb = factors[1];
-    for (std::size_t i = 0; i < stateSize; ++i)
-      sum[i] = fa * a[i] + fb * b[i];
-    k = 2;
-  } else if (count == 1) {
-    const double* __restrict__ a = states[0];
-    const double fa = factors[0];
-    for (std::size_t i = 0; i < stateSize; ++i)
-      sum[i] = fa * a[i];
-    k = 1;
-  } else {
-    for (std::size_t i = 0; i < stateSize; ++i)
-      sum[i] = 0;
-  }
-  for (; k + 3 <= count; k += 3) {
-    const double* __restrict__ a = states[k];
-    const double* __restrict__ b = states[k + 1];
-    const double* __restrict__ c = states[k + 2];
-    const double fa = factors[k];
-    const double fb = factors[k + 1];
-    const double fc = factors[k + 2];
-    for (std::size_t i = 0; i < stateSize; ++i)
-      sum[i] = sum[i] + fa * a[i] + fb * b[i] + fc * c[i];
-  }
-  for (; k < count; ++k) {
-    const double* __restrict__ a = states[k];
-    const double fa = factors[k];
-    for (std::size_t i = 0; i < stateSize; ++i)
-      sum[i] = sum[i] + fa * a[i];
+[[gnu::noinline]] static void sumSix(const double* const* states, const double* f, double* __restrict__ sum) {
+  const double* __restrict__ a = states[0];
+  const double* __restrict__ b = states[1];
+  const double* __restrict__ c = states[2];
+  const double* __restrict__ d = states[3];
+  const double* __restrict__ e = states[4];
+  const double* __restrict__ g = states[5];
+  const double fa = f[0], fb = f[1], fc = f[2], fd = f[3], fe = f[4], fg = f[5];
+  for (std::size_t i = 0; i < stateSize; ++i)
+    sum[i] = fa * a[i] + fb * b[i] + fc * c[i] + fd * d[i] + fe * e[i] + fg * g[i];
+}
+
+PW_CLONES
+[[gnu::noinline]] static void sumThree(const double* const* states, const double* f,
+                                       double* __restrict__ sum) {
+  const double* __restrict__ a = states[0];
+  const double* __restrict__ b = states[1];
+  const double* __restrict__ c = states[2];
+  const double fa = f[0], fb = f[1], fc = f[2];
+  for (std::size_t i = 0; i < stateSize; ++i)
+    sum[i] = fa * a[i] + fb * b[i] + fc * c[i];
+}
+
+PW_CLONES
+[[gnu::noinline]] static void addThree(const double* const* states, const double* f,
+                                       double* __restrict__ sum) {
+  const double* __restrict__ a = states[0];
+  const double* __restrict__ b = states[1];
+  const double* __restrict__ c = states[2];
+  const double fa = f[0], fb = f[1], fc = f[2];
+  for (std::size_t i = 0; i < stateSize; ++i)
+    sum[i] = sum[i] + fa * a[i] + fb * b[i] + fc * c[i];
+}
+
+void combineLane(const double* const* states, const double* factors, std::size_t count, double* sum) {
+  // What is missing of the last three is filled up by zeros.
+  static const double zeros[stateSize] = {};
+  const double* some[6];
+  double f[6];
+  const std::size_t first = count > 3 ? 6 : 3;
+  for (std::size_t from = 0; from == 0 || from < count; from += from == 0 ? first : 3) {
+    const std::size_t size = from == 0 ? first : 3;
+    for (std::size_t k = 0; k < size; ++k) {
+      const bool isThere = from + k < count;
+      some[k] = isThere ? states[from + k] : zeros;
+      f[k] = isThere ? factors[from + k] : 0;
+    }
+    if (size == 6)
+      sumSix(some, f, sum);
+    else if (from == 0)
+      sumThree(some, f, sum);
+    else
+      addThree(some, f, sum);
   }
 }
 
