@@ -218,6 +218,8 @@ private:
 
 std::optional<FieldResults> screened(const ScreenPlan& plan, const Field& field, unsigned threads,
                                      const Watch& watch) {
+  if (watch && !watch(0, field.size()))
+    return std::nullopt;
   FieldResults results(field.size());
   std::atomic<std::size_t> next = 0;
   std::atomic<std::size_t> done = 0;

@@ -7,7 +7,8 @@
 
 namespace planewright {
 
-/// Told now and then how many of all points are done, on the thread that asked; false ends the work.
+/// Told before the work and now and then in it how many of all points are done, on the thread that asked;
+/// false ends it.
 using Watch = std::function<bool(std::size_t done, std::size_t all)>;
 
 /// Judges every point of a field that is whole. `threads` of 0 takes all processors, and one below the size
