@@ -3,6 +3,7 @@
 // either taken or counted, what is told points into the table, and no number that is none gets past.
 #include "tests/support/field_reading.h"
 
+#include "core/stress/circle.h"
 #include "core/words/utf8.h"
 
 #include <algorithm>
