@@ -46,31 +46,27 @@ void look(double& highest, const UtilisationCurve& curve) {
 } // namespace
 
 UtilisationCurves utilisationCurvesOf(const Readout& readout, std::size_t check) {
+  return utilisationCurvesOf(readout, check, judgesOf(readout, check));
+}
+
+UtilisationCurves utilisationCurvesOf(const Readout& readout, std::size_t check,
+                                      const JudgesOfCheck& judges) {
   UtilisationCurves curves;
   if (!readout.checks[check].band)
     return curves;
-  std::vector<Judge> judges;
-  std::optional<std::size_t> shown;
-  for (std::size_t i = 0; i < readout.states.size(); ++i) {
-    if (!readout.states[i].judged)
-      continue;
-    Result<Judge> judge = judgeOf(readout, readout.states[i], check);
-    if (!judge)
-      continue;
-    if (i == readout.shown)
-      shown = judges.size();
-    judges.push_back(*std::move(judge));
-  }
-  const bool few = judges.size() <= mostOtherCurves + 1;
-  const auto own = [&](std::size_t i) { return Judges(&judges[i], 1); };
+  const std::vector<Judge>& all = judges.all;
+  const bool few = all.size() <= mostOtherCurves + 1;
+  const auto own = [&](std::size_t i) { return Judges(&all[i], 1); };
   // The turning points of all in all curves would cost with the square of their number.
-  const std::vector<double> directions = directionsOf(few ? Judges(judges) : shown ? own(*shown) : Judges());
-  if (shown)
-    curves.shown = curveOf(own(*shown), directions);
-  if (judges.size() > 1)
-    curves.greatest = curveOf(judges, directions);
-  for (std::size_t i = 0; few && i < judges.size(); ++i)
-    if (i != shown)
+  const std::vector<double> directions = directionsOf(few            ? Judges(all)
+                                                      : judges.shown ? own(*judges.shown)
+                                                                     : Judges());
+  if (judges.shown)
+    curves.shown = curveOf(own(*judges.shown), directions);
+  if (all.size() > 1)
+    curves.greatest = curveOf(all, directions);
+  for (std::size_t i = 0; few && i < all.size(); ++i)
+    if (i != judges.shown)
       curves.others.push_back(curveOf(own(i), directionsOf(own(i))));
   look(curves.highest, curves.shown);
   look(curves.highest, curves.greatest);

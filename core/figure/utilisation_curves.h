@@ -22,9 +22,12 @@ struct UtilisationCurves {
   UtilisationCurve greatest;            ///< of all judged combinations; empty where there is only one
   std::vector<UtilisationCurve> others; ///< the other judged combinations, where they are few enough
   double highest = 0;                   ///< the greatest finite utilisation of these curves
+  bool operator==(const UtilisationCurves&) const = default;
 };
 
 /// Empty curves for a check without a direction.
 UtilisationCurves utilisationCurvesOf(const Readout& readout, std::size_t check);
+/// By the judges of the check.
+UtilisationCurves utilisationCurvesOf(const Readout& readout, std::size_t check, const JudgesOfCheck& judges);
 
 } // namespace planewright

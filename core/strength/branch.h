@@ -20,6 +20,7 @@ struct TurningState {
   LineStress at(Angle direction) const;
   /// The directions, folded, where along - mean = X; none where |X| > r, or r is 0.
   void directionsOf(double X, std::vector<Angle>& directions) const;
+  bool operator==(const TurningState&) const = default;
 };
 
 /// Coefficients of the polynomial of degree 2 in the load: a = a11 s1^2 + a12 s1 s2 + a22 s2^2 + a66 t^2,
@@ -34,6 +35,7 @@ struct Interaction {
 /// a R^2 + b R = 1, is (b + sqrt(b^2 + 4a))/2: stable for b >= 0, and 2a/(sqrt(b^2 + 4a) - b) for b < 0.
 struct SignedForm {
   std::array<std::array<Interaction, 2>, 2> pieces;
+  bool operator==(const SignedForm&) const = default;
 };
 
 /// |s| (sin^n/Q + cos^n/P) of a uniaxial stress s at an angle to the line; s along `axis`.
@@ -41,6 +43,7 @@ struct PowerOfAngle {
   double size = 0;
   Angle axis;
   double P = 1, Q = 1, n = 2;
+  bool operator==(const PowerOfAngle&) const = default;
 };
 
 /// |t| / (cohesion - s1 tan(phi)); infinite where the denominator is not positive. So it is, without
@@ -48,17 +51,20 @@ struct PowerOfAngle {
 struct Mobilised {
   double cohesion = 0;
   double tanPhi = 0;
+  bool operator==(const Mobilised&) const = default;
 };
 
 /// s1 / limit in tension, 0 in compression; infinite in any tension where the limit is 0.
 struct CutOff {
   double limit = 0;
+  bool operator==(const CutOff&) const = default;
 };
 
 /// The same in every direction.
 struct Fixed {
   double utilisation = 0;
   std::optional<double> multiplier;
+  bool operator==(const Fixed&) const = default;
 };
 
 /// One smooth part of a criterion; a criterion is the greatest of its parts.

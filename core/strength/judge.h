@@ -40,6 +40,8 @@ public:
   const std::vector<Branch>& branches() const { return m_branches; }
   const TurningState& state() const { return m_state; }
 
+  bool operator==(const Judge&) const = default;
+
 private:
   std::optional<Mode> modeAt(Angle direction, double utilisation) const;
 

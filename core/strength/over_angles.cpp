@@ -90,6 +90,13 @@ Stretches both(const Stretches& a, const Stretches& b) {
   return common;
 }
 
+double greatestOf(const std::vector<double>& utilisations) {
+  double greatest = 0;
+  for (const double utilisation : utilisations)
+    greatest = std::max(greatest, utilisation);
+  return greatest;
+}
+
 class Best {
 public:
   explicit Best(const std::vector<Part>& parts) : m_parts(parts) {
@@ -100,9 +107,12 @@ public:
   BestDirection found() {
     constexpr double step = 1;
     std::vector<std::pair<double, Stretch>> cells;
+    std::vector<double> before = allAt(-90);
     for (double from = -90; from < 90; from += step) {
-      look(from);
-      cells.push_back({leastIn(from, from + step), {from, from + step}});
+      look(from, greatestOf(before));
+      std::vector<double> after = allAt(from + step);
+      cells.push_back({leastIn({from, from + step}, before, after), {from, from + step}});
+      before = std::move(after);
     }
     std::ranges::stable_sort(cells, {}, &std::pair<double, Stretch>::first);
     for (const auto& [least, cell] : cells)
@@ -112,30 +122,33 @@ public:
   }
 
 private:
-  double greatestAt(double degrees) const {
-    double greatest = 0;
+  std::vector<double> allAt(double degrees) const {
+    std::vector<double> all;
+    all.reserve(m_parts.size());
     for (const Part& part : m_parts)
-      greatest = std::max(greatest, part.at(degrees));
-    return greatest;
+      all.push_back(part.at(degrees));
+    return all;
   }
 
-  void look(double degrees) {
-    if (const double utilisation = greatestAt(degrees); utilisation < m_best.utilisation)
+  void look(double degrees, double utilisation) {
+    if (utilisation < m_best.utilisation)
       m_best = {Angle::fromDegrees(degrees), utilisation};
   }
+  void look(double degrees) { look(degrees, greatestOf(allAt(degrees))); }
 
-  bool isMonotone(std::size_t part, double from, double to) const {
+  bool isMonotone(std::size_t part, const Stretch& cell) const {
     const std::vector<double>& ends = m_pieces[part];
-    const auto next = std::ranges::upper_bound(ends, from);
-    return next == ends.end() || *next >= to;
+    const auto next = std::ranges::upper_bound(ends, cell.from);
+    return next == ends.end() || *next >= cell.to;
   }
 
-  /// What the greatest utilisation in a cell is at least.
-  double leastIn(double from, double to) const {
+  /// What the greatest utilisation in a cell is at least, from those of all parts at its ends.
+  double leastIn(const Stretch& cell, const std::vector<double>& before,
+                 const std::vector<double>& after) const {
     double least = 0;
     for (std::size_t i = 0; i < m_parts.size(); ++i)
-      if (isMonotone(i, from, to))
-        least = std::max(least, std::min(m_parts[i].at(from), m_parts[i].at(to)));
+      if (isMonotone(i, cell))
+        least = std::max(least, std::min(before[i], after[i]));
     return least;
   }
 
@@ -148,9 +161,11 @@ private:
     std::ranges::sort(ends);
     for (const double end : ends)
       look(end);
-    for (std::size_t i = 0; i + 1 < ends.size(); ++i)
-      if (leastIn(ends[i], ends[i + 1]) < m_best.utilisation)
-        meet(ends[i], ends[i + 1]);
+    for (std::size_t i = 0; i + 1 < ends.size(); ++i) {
+      const Stretch piece{ends[i], ends[i + 1]};
+      if (leastIn(piece, allAt(piece.from), allAt(piece.to)) < m_best.utilisation)
+        meet(piece.from, piece.to);
+    }
   }
 
   /// Between turning points the greatest of the rising parts rises and that of the falling ones falls: the

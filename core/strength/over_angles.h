@@ -35,6 +35,7 @@ std::optional<Angle> allowedTolerance(std::span<const Within> within, Angle nomi
 struct BestDirection {
   Angle angle;
   double utilisation = 0;
+  bool operator==(const BestDirection&) const = default;
 };
 BestDirection bestDirection(Judges judges);
 

@@ -274,12 +274,19 @@ Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::si
   return judgeBy(setup.criterion, setup, setup.parameters, reading.factor.value, demandOf(readout, state));
 }
 
-std::vector<Judge> judgesOf(const Readout& readout, std::size_t check) {
-  std::vector<Judge> judges;
-  for (const StateReading& state : readout.states)
-    if (state.judged)
-      if (Result<Judge> judge = judgeOf(readout, state, check))
-        judges.push_back(*std::move(judge));
+JudgesOfCheck judgesOf(const Readout& readout, std::size_t check) {
+  JudgesOfCheck judges;
+  judges.all.reserve(readout.states.size());
+  for (std::size_t i = 0; i < readout.states.size(); ++i) {
+    if (!readout.states[i].judged)
+      continue;
+    Result<Judge> judge = judgeOf(readout, readout.states[i], check);
+    if (!judge)
+      continue;
+    if (i == readout.shown)
+      judges.shown = judges.all.size();
+    judges.all.push_back(*std::move(judge));
+  }
   return judges;
 }
 

@@ -16,7 +16,12 @@ Result<Judge> judgeBy(Criterion criterion, const CheckSetup& setup, const Parame
 /// The judge of one check and state: for what a check says of other directions.
 Result<Judge> judgeOf(const Readout& readout, const StateReading& state, std::size_t check);
 /// Those of all judged states that can be judged, for one check.
-std::vector<Judge> judgesOf(const Readout& readout, std::size_t check);
+struct JudgesOfCheck {
+  std::vector<Judge> all;
+  std::optional<std::size_t> shown; ///< which of them is that of the shown state
+  bool operator==(const JudgesOfCheck&) const = default;
+};
+JudgesOfCheck judgesOf(const Readout& readout, std::size_t check);
 
 /// What a state asks of strengths, with tension positive.
 Demand demandOf(const Readout& readout, const StateReading& state);

@@ -44,11 +44,6 @@ bool isHalfTurn(const std::vector<Within>& within) {
   return within.size() == 1 && (within.front().to - within.front().from).degrees() >= 180;
 }
 
-/// Whether a check has a direction and no combination was left unjudged.
-bool isJudgedAllRound(const Readout& readout, std::size_t check) {
-  return readout.checks[check].band && !verdictOfCheck(readout, check).unjudged;
-}
-
 Text slopeSentence(double slope) {
   if (slope == 0)
     return PW_TEXT("Check", "Utilisation stands still at the nominal direction.");
@@ -295,22 +290,33 @@ ShownEnds shownEndsOf(const Within& within) {
   }
 }
 
+bool isJudgedAllRound(const Readout& readout, std::size_t check) {
+  return readout.checks[check].band && !verdictOfCheck(readout, check).unjudged;
+}
+
 std::vector<Within> directionsWithin(const Readout& readout, std::size_t check) {
-  return isJudgedAllRound(readout, check) ? withinLimit(judgesOf(readout, check)) : std::vector<Within>();
+  return isJudgedAllRound(readout, check) ? withinLimit(judgesOf(readout, check).all) : std::vector<Within>();
 }
 
 std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_t check) {
+  return directionsOf(readout, check, judgesOf(readout, check).all);
+}
+
+std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_t check, Judges judges) {
   const CheckSetup& setup = readout.checks[check];
   if (!isJudgedAllRound(readout, check))
     return std::nullopt;
-  const std::vector<Judge> judges = judgesOf(readout, check);
   DirectionsOfCheck directions;
   directions.within = withinLimit(judges);
-  directions.allowed = allowedTolerance(directions.within, setup.band->nominal);
-  directions.slope = slopePerDegree(judges, setup.band->nominal);
   if (setup.strengths.kind != MaterialKind::throat)
     directions.best = bestDirection(judges);
+  lookFrom(setup.band->nominal, judges, directions);
   return directions;
+}
+
+void lookFrom(Angle nominal, Judges judges, DirectionsOfCheck& directions) {
+  directions.allowed = allowedTolerance(directions.within, nominal);
+  directions.slope = slopePerDegree(judges, nominal);
 }
 
 std::vector<Text> sentencesOf(const CheckSetup& check, const DirectionsOfCheck& directions) {

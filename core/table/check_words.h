@@ -53,12 +53,19 @@ struct DirectionsOfCheck {
   std::optional<Angle> allowed;      ///< the tolerance that the nominal direction could have
   std::optional<double> slope;       ///< change of the utilisation per degree
   std::optional<BestDirection> best; ///< none for a weld, which is where it is
+  bool operator==(const DirectionsOfCheck&) const = default;
 };
+/// Whether a check has a direction and no combination was left unjudged.
+bool isJudgedAllRound(const Readout& readout, std::size_t check);
 /// The directions within the limit alone; none for a check without a direction, or where a combination could
 /// not be judged.
 std::vector<Within> directionsWithin(const Readout& readout, std::size_t check);
 /// None for a check without a direction, or where a combination could not be judged.
 std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_t check);
+/// By the judges of the check.
+std::optional<DirectionsOfCheck> directionsOf(const Readout& readout, std::size_t check, Judges judges);
+/// Works out what is seen from a nominal direction, the tolerance and the slope, where the rest stays.
+void lookFrom(Angle nominal, Judges judges, DirectionsOfCheck& directions);
 
 /// The ends of directions within the limit for people: rounded inwards, so that what is shown holds, and
 /// folded into [-90, 90].

@@ -90,6 +90,11 @@ void Desk::say(const QString& message) {
   Q_EMIT said(message);
 }
 
+const AllRound& Desk::allRound(std::size_t check) {
+  m_allRound.follow(m_readout, check);
+  return m_allRound;
+}
+
 void Desk::take(std::shared_ptr<const Study> study) {
   m_study = std::move(study);
   Readout readout = evaluate(*m_study);

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/figure/all_round.h"
 #include "core/study/edit.h"
 #include "core/study/readout.h"
 
@@ -43,6 +44,8 @@ public:
   void show(const std::string& point, const std::string& combination);
   /// Puts another study on the desk with an empty history (New, Open).
   void replace(Study study);
+  /// What a check of the readout says of every direction; good until the next call.
+  const AllRound& allRound(std::size_t check);
   /// A message for the status line, with what changed.
   void say(const QString& message);
 
@@ -58,6 +61,7 @@ private:
 
   std::shared_ptr<const Study> m_study;
   Readout m_readout;
+  AllRound m_allRound; ///< of the check that was asked for last
   QUndoStack m_undo;
   quint64 m_lastGesture = 0;
   std::optional<Gesture> m_cause;

@@ -10,6 +10,7 @@
 #include "ui/given/faces_dialog.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
+#include "ui/look/steady_label.h"
 
 #include <QHBoxLayout>
 #include <QLabel>
@@ -36,15 +37,14 @@ LineGroup::LineGroup(Desk& desk, std::size_t index, QWidget* parent)
     : FoldGroup(index == 0 ? tr("Line") : tr("Second line"), Role::ink, parent), m_desk(desk), m_index(index),
       m_kind(new QuietButton({}, Role::line, this)),
       m_slopes(new QuietButton(tr("Slope of unknown sense"), Role::focus, this)),
-      m_second(new QuietButton(tr("Second line"), Role::focus, this)), m_sentence(new QLabel(this)) {
+      m_second(new QuietButton(tr("Second line"), Role::focus, this)), m_sentence(new SteadyLabel(this)) {
   buildKinds();
   addName();
   addAngle();
   addTolerance();
   buildSlopes();
   m_fields.move(0, 2);
-  m_sentence->setWordWrap(true);
-  m_sentence->setForegroundRole(QPalette::PlaceholderText);
+  m_sentence->label().setForegroundRole(QPalette::PlaceholderText);
   body().addWidget(m_sentence);
   buildSecond();
   connect(&m_desk, &Desk::changed, this, &LineGroup::refresh);

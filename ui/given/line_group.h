@@ -6,11 +6,11 @@
 #include "ui/given/fold_group.h"
 
 class QAction;
-class QLabel;
 
 namespace planewright {
 
 class QuietButton;
+class SteadyLabel;
 
 /// One physical line in the plane of stress, the first or the second of a point: its kind and name, its angle
 /// and tolerance, and where the normal of the cut that follows it stands.
@@ -54,7 +54,7 @@ private:
   QuietButton* m_second;
   bool m_nameWanted = false;
   QList<EntryField*> m_fields;
-  QLabel* m_sentence;
+  SteadyLabel* m_sentence;
 };
 
 } // namespace planewright

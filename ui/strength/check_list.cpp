@@ -72,7 +72,8 @@ void CheckList::select(const std::string& id) {
 
 void CheckList::refresh() {
   const Readout& readout = m_desk.readout();
-  clear();
+  while (topLevelItemCount() > static_cast<int>(readout.checks.size()))
+    delete takeTopLevelItem(topLevelItemCount() - 1);
   for (std::size_t i = 0; i < readout.checks.size(); ++i) {
     const Verdict verdict = verdictOfCheck(readout, i);
     const std::optional<JudgedCheck>& told = toldOf(verdict);
@@ -80,7 +81,11 @@ void CheckList::refresh() {
     const QString worst = told && verdict.standing == Standing::within && !verdict.stressed ? tr("no stress")
                           : told ? markOf(verdict.standing) + shown(shownWorst(readingOf(readout, *told)))
                                  : shown(wordOfStanding(verdict.standing));
-    auto* item = new QTreeWidgetItem(this, {name, worst});
+    QTreeWidgetItem* item = topLevelItem(static_cast<int>(i));
+    if (!item)
+      item = new QTreeWidgetItem(this);
+    item->setText(0, name);
+    item->setText(1, worst);
     item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
     item->setToolTip(0, name);
     item->setData(0, Qt::UserRole, fromUtf8(readout.checks[i].id));

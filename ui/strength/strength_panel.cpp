@@ -6,6 +6,7 @@
 #include "core/table/check_words.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
+#include "ui/look/steady_label.h"
 #include "ui/strength/check_fields.h"
 #include "ui/strength/check_list.h"
 #include "ui/strength/side_by_side.h"
@@ -24,11 +25,10 @@ namespace planewright {
 
 namespace {
 
-QLabel* wrappedLabel(QPalette::ColorRole role, QWidget* parent) {
-  auto* label = new QLabel(parent);
-  label->setWordWrap(true);
-  label->setForegroundRole(role);
-  label->setTextInteractionFlags(Qt::TextSelectableByMouse);
+SteadyLabel* wrappedLabel(QPalette::ColorRole role, QWidget* parent) {
+  auto* label = new SteadyLabel(parent);
+  label->label().setForegroundRole(role);
+  label->label().setTextInteractionFlags(Qt::TextSelectableByMouse);
   return label;
 }
 
@@ -235,7 +235,7 @@ void StrengthPanel::refresh() {
     return;
   }
   const CheckSetup& setup = readout.checks[*check];
-  const auto directions = directionsOf(readout, *check);
+  const std::optional<DirectionsOfCheck>& directions = m_desk.allRound(*check).directions();
   m_sentences->setText(directions ? lines(sentencesOf(setup, *directions)) : QString());
   m_sentences->setVisible(directions.has_value());
   m_cautions->setText(lines(cautionsOf(readout, *check)));

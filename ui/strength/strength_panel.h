@@ -5,7 +5,6 @@
 
 #include <QWidget>
 
-class QLabel;
 class QScrollArea;
 
 namespace planewright {
@@ -13,6 +12,7 @@ namespace planewright {
 class CheckFields;
 class CheckList;
 class QuietButton;
+class SteadyLabel;
 class UtilisationPlot;
 class VerdictBlock;
 
@@ -61,12 +61,12 @@ private:
   QuietButton* m_remove;
   QuietButton* m_side;
   CheckFields* m_fields;
-  QLabel* m_mode;
+  SteadyLabel* m_mode;
   QuietButton* m_governs;
   QuietButton* m_scale;
   UtilisationPlot* m_plot;
-  QLabel* m_sentences;
-  QLabel* m_cautions;
+  SteadyLabel* m_sentences;
+  SteadyLabel* m_cautions;
   QuietButton* m_more;
 };
 

@@ -15,6 +15,7 @@
 #include <QToolTip>
 #include <QValueAxis>
 
+#include <algorithm>
 #include <cmath>
 
 namespace planewright {
@@ -25,7 +26,9 @@ constexpr double textSize = 11; // px
 constexpr double penUnit = 1;   // px for a width of 0.25 mm
 constexpr double statePen = 2;
 constexpr double greatestPen = 1.4;
-constexpr double groundDepth = 2.5; // the chart draws its series at 4
+constexpr double hair = 1;
+constexpr double groundDepth = 2.5;
+constexpr double othersDepth = 3; // the chart draws its series at 4
 constexpr double marksDepth = 5;
 constexpr double reach = 12; // px to either side of the cursor
 
@@ -42,15 +45,15 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
                                  QWidget* parent)
     : QChartView(parent), m_desk(desk), m_selectedIndex(std::move(selected)), m_x(newAxis()), m_y(newAxis()),
       m_shown(new QLineSeries(chart())), m_greatest(new QLineSeries(chart())),
-      m_ground(new PictureItem(chart(), groundDepth)), m_marks(new PictureItem(chart(), marksDepth)) {
+      m_ground(new PictureItem(chart(), groundDepth)), m_others(new PictureItem(chart(), othersDepth)),
+      m_marks(new PictureItem(chart(), marksDepth)) {
   chart()->addAxis(m_x, Qt::AlignBottom);
   chart()->addAxis(m_y, Qt::AlignLeft);
   chart()->legend()->hide();
   chart()->setMargins({});
   chart()->setBackgroundVisible(false);
-  for (std::size_t i = 0; i < mostOtherCurves; ++i)
-    m_others << new QLineSeries(chart());
-  for (QLineSeries* series : m_others + QList<QLineSeries*>{m_greatest, m_shown}) {
+  m_others->setCacheMode(QGraphicsItem::DeviceCoordinateCache); // they stand still while the line turns
+  for (QLineSeries* series : {m_greatest, m_shown}) {
     chart()->addSeries(series);
     series->attachAxis(m_x);
     series->attachAxis(m_y);
@@ -80,7 +83,8 @@ void UtilisationPlot::refresh() {
   if (!hasPlot || !isVisible())
     return;
   const bool wasFar = reachesFar();
-  const UtilisationCurves curves = utilisationCurvesOf(m_desk.readout(), *check);
+  const AllRound& allRound = m_desk.allRound(*check);
+  const UtilisationCurves& curves = allRound.curves();
   m_highest = curves.highest;
   const Readout& readout = m_desk.readout();
   const CheckSetup& setup = readout.checks[*check];
@@ -92,7 +96,9 @@ void UtilisationPlot::refresh() {
   chooseScale(worst);
   layOut(curves);
   drawCurves(curves);
-  Picture ground = utilisationGround(m_frame, setup, directionsWithin(readout, *check), translation());
+  const std::optional<DirectionsOfCheck>& directions = allRound.directions();
+  Picture ground = utilisationGround(m_frame, setup, directions ? directions->within : std::vector<Within>(),
+                                     translation());
   const double bottom = viewport()->height();
   const Picture key =
       utilisationKey({m_frame.plot.left, bottom - heightOfKey(curves, textSize), m_frame.plot.right, bottom},
@@ -156,13 +162,10 @@ void UtilisationPlot::drawCurves(const UtilisationCurves& curves) {
   m_shown->setPen(QPen(look.colour(Role::state), statePen));
   put(*m_greatest, curves.greatest);
   m_greatest->setPen(QPen(look.colour(Role::state), greatestPen, Qt::DashLine));
-  for (int i = 0; i < m_others.size(); ++i) {
-    const auto index = static_cast<std::size_t>(i);
-    put(*m_others[i], index < curves.others.size() ? curves.others[index] : UtilisationCurve());
-    QPen hair(look.colour(Role::hush), 1);
-    hair.setCosmetic(true);
-    m_others[i]->setPen(hair);
-  }
+  Picture others;
+  for (const UtilisationCurve& other : curves.others)
+    std::ranges::copy(utilisationLines(m_frame, other, {Role::hush, hair}), std::back_inserter(others.parts));
+  m_others->show(std::move(others), look);
 }
 
 std::optional<Place> UtilisationPlot::turnedPlace() const {
@@ -234,7 +237,7 @@ QString UtilisationPlot::tipAt(QPointF pixel) const {
   if (!check)
     return {};
   const Angle angle = Angle::fromDegrees(std::round(m_frame.degreesAt(pixel.x())));
-  const double worst = greatestUtilisation(judgesOf(m_desk.readout(), *check), angle);
+  const double worst = greatestUtilisation(judgesOf(m_desk.readout(), *check).all, angle);
   return tr("%1 at %2, all combinations")
       .arg(fromUtf8(shownUtilisation(worst)), fromUtf8(shownDegrees(angle, 0)));
 }

@@ -81,8 +81,8 @@ private:
   QValueAxis* m_y;
   QLineSeries* m_shown;
   QLineSeries* m_greatest;
-  QList<QLineSeries*> m_others;
   PictureItem* m_ground;
+  PictureItem* m_others;
   PictureItem* m_marks;
 };
 

@@ -4,6 +4,7 @@
 #include "core/table/check_words.h"
 #include "ui/look/look.h"
 #include "ui/look/standing_mark.h"
+#include "ui/look/steady_label.h"
 
 #include <QHBoxLayout>
 #include <QLabel>
@@ -28,14 +29,13 @@ Text joined(const Text& first, const Text& second) {
 
 VerdictBlock::VerdictBlock(Desk& desk, QWidget* parent)
     : QFrame(parent), m_desk(desk), m_word(new QLabel(this)), m_number(new QLabel(this)),
-      m_sentences(new QLabel(this)) {
+      m_sentences(new SteadyLabel(this)) {
   QFont bold = m_word->font();
   bold.setBold(true);
   m_word->setFont(bold);
   QFont large = bold;
   large.setPixelSize(largeFigures);
   m_number->setFont(large);
-  m_sentences->setWordWrap(true);
   auto* head = new QHBoxLayout;
   head->setContentsMargins(markSize + 8, 0, 0, 0);
   head->addWidget(m_word);
@@ -71,6 +71,7 @@ void VerdictBlock::refresh() {
   if (hasNumber) {
     const CheckReading& reading = readingOf(readout, *verdict.governing);
     m_number->setText(shown(shownWorst(reading)));
+    m_number->setFixedSize(m_number->sizeHint()); // a text of the same size moves nothing
     const CheckSetup& check = readout.checks[verdict.governing->check];
     if (readout.checks.size() > 1)
       sentences = joined(sentences, PW_TEXT("Check", "By %1.").with(checkName(check)));

@@ -9,6 +9,8 @@ class QLabel;
 
 namespace planewright {
 
+class SteadyLabel;
+
 /// What all checks of the shown point come to over all combinations: the word, the utilisation in large
 /// figures, by how much all loads could be multiplied, where in the band the worst lies.
 class VerdictBlock : public QFrame {
@@ -30,7 +32,7 @@ private:
   Desk& m_desk;
   QLabel* m_word;
   QLabel* m_number;
-  QLabel* m_sentences;
+  SteadyLabel* m_sentences;
 };
 
 } // namespace planewright
