@@ -58,6 +58,14 @@ std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>&
                       mark.priority,
                       "mark " + exactNumber(static_cast<double>(wishes.size()))});
   }
+  for (const TouchLabel& touch : touchLabelsOf(setting.readout))
+    wishes.push_back({{touch.at.sn - setting.readout.state().circle.mean, 0},
+                      setting.runsOf(touch.longForm),
+                      elided(setting.runsOf(touch.shortForm), 0.2 * setting.order.width, setting.text, false),
+                      touch.role,
+                      false,
+                      touchPriority,
+                      touch.key});
   return wishes;
 }
 
@@ -226,18 +234,17 @@ void drawRound(const CircleDrawing& drawing) {
 /// The strengths of checked planes, under marks and labels.
 void drawFailure(Picture& picture, const Setting& setting, const CircleFit& fit) {
   const double reach = (fit.frame.right - fit.frame.left) / fit.scale + std::abs(fit.mean);
-  const FailureFrame frame{[&fit](const Traction& at) { return fit.at(at); }, fit.frame, setting.narrow,
-                           setting.small, setting.order.translate};
+  const FailureFrame frame{[&fit](const Traction& at) { return fit.at(at); }, fit.frame, setting.narrow};
   const Picture failure = failureDrawing(frame, failureLinesOf(setting.readout, reach));
   picture.parts.insert(picture.parts.end(), failure.parts.begin(), failure.parts.end());
 }
 
-/// Labels are left out from the least wanted on: watched planes first.
-CircleLabels outcomeOf(const PlacedLabels& placed, const std::vector<Mark>& marks) {
-  const std::size_t without = marks.size() - placed.labels.size();
+/// Labels are left out from the least wanted on: first touches and watched planes first.
+CircleLabels outcomeOf(const PlacedLabels& placed, const std::vector<Mark>& marks, std::size_t wishes) {
+  const std::size_t without = wishes - placed.labels.size();
   const auto watched = std::count_if(marks.begin(), marks.end(),
                                      [](const Mark& mark) { return mark.kind == PlaneKind::watched; });
-  return {without <= static_cast<std::size_t>(watched), without};
+  return {without <= static_cast<std::size_t>(watched) + (wishes - marks.size()), without};
 }
 
 } // namespace
@@ -255,8 +262,13 @@ CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box
   plot.top += tauTitleHeight * text;
   const CircleFit fit = circleFitOf(setting, wishes, plot,
                                     leastShare * std::min(area.right - area.left, area.bottom - area.top));
-  for (std::size_t i = 0; i < marks.size(); ++i)
-    place(wishes[i], fit.at(marks[i].at), fit.columns);
+  std::vector<Traction> places;
+  for (const Mark& mark : marks)
+    places.push_back(mark.at);
+  for (const TouchLabel& touch : touchLabelsOf(setting.readout))
+    places.push_back(touch.at);
+  for (std::size_t i = 0; i < wishes.size(); ++i)
+    place(wishes[i], fit.at(places[i]), fit.columns);
   const PlacedLabels placed = placeLabels(wishes, fit.columns);
   drawCircleAxes(picture, setting, fit);
   drawFailure(picture, setting, fit);
@@ -269,7 +281,7 @@ CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box
     labelDoubleAngle(drawing);
   picture.parts.insert(picture.parts.end(), placed.labels.begin(), placed.labels.end());
   noteShortened(picture, placed);
-  return outcomeOf(placed, marks);
+  return outcomeOf(placed, marks, wishes.size());
 }
 
 } // namespace planewright

@@ -2,7 +2,6 @@
 #include "core/figure/failure_drawing.h"
 
 #include "core/figure/metrics.h"
-#include "core/quantity/format.h"
 
 #include <algorithm>
 #include <cmath>
@@ -52,9 +51,8 @@ public:
   explicit Drawing(const FailureFrame& frame) : m_frame(frame) {}
 
   Picture drawn(const std::vector<FailureLine>& lines) {
-    m_names = lines.size() > 1;
     for (const FailureLine& line : lines) {
-      m_role = line.leads ? Role::limit : Role::other;
+      m_role = roleOf(line);
       for (const double side : {1.0, -1.0})
         drawLine(line, side);
       drawMargin(line);
@@ -130,27 +128,11 @@ private:
     const double side = px(triangle);
     m_picture.parts.emplace_back(
         Path{{tip, tip + Vec{-side, -1.7 * side}, tip + Vec{side, -1.7 * side}}, true, std::nullopt, m_role});
-    const std::string angle = shownDegrees(line.touch->value, 1);
-    Label label{tip + Vec{0, -1.7 * side - px(4)},
-                runs(verbatim(m_names ? line.material + " " + angle : angle), m_frame.translate),
-                m_frame.text,
-                Align::middle,
-                m_role,
-                false,
-                true,
-                "first touch"};
-    // Two checks may be touched by the same plane.
-    while (std::ranges::any_of(m_labels, [&](const Box& box) { return overlap(box, boxOf(label)); }))
-      label.at.y -= 1.2 * m_frame.text;
-    m_labels.push_back(boxOf(label));
-    m_picture.parts.emplace_back(std::move(label));
   }
 
   const FailureFrame& m_frame;
   Picture m_picture;
-  std::vector<Box> m_labels;
   Role m_role = Role::limit; ///< of the line that is drawn
-  bool m_names = false;      ///< several lines say whose they are
 };
 
 } // namespace

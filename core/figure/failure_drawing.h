@@ -13,12 +13,10 @@ struct FailureFrame {
   std::function<Vec(const Traction&)> at; ///< a place of the circle's plot on the sheet
   Box plot;                               ///< nothing leaves it
   double unit = 1;                        ///< of the drawing for a pixel of the window
-  double text = 12;                       ///< size of the angle's label
-  Translate translate;
 };
 
 /// Failure lines of both signs with hatch on their failing side, the plane that touches first as a triangle
-/// with its angle, and the margin of the checked plane as a line with two heads.
+/// and the margin of the checked plane as a line with two heads.
 Picture failureDrawing(const FailureFrame& frame, const std::vector<FailureLine>& lines);
 
 } // namespace planewright

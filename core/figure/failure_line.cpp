@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/figure/failure_line.h"
 
+#include "core/quantity/format.h"
+
 #include <algorithm>
 #include <cmath>
 #include <limits>
@@ -141,6 +143,24 @@ std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach) {
     lines.push_back(std::move(line));
   }
   return lines;
+}
+
+std::vector<TouchLabel> touchLabelsOf(const Readout& readout) {
+  std::vector<TouchLabel> labels;
+  const std::vector<FailureLine> lines = failureLinesOf(readout, 0);
+  for (const FailureLine& line : lines) {
+    if (!line.touch)
+      continue;
+    const std::string angle = shownDegrees(line.touch->value, 1);
+    const Text name = verbatim(lines.size() > 1 ? line.material + " " + angle : angle);
+    labels.push_back({line.touchAt, PW_TEXT("Figure", "first touch %1").with(name), name, roleOf(line),
+                      "touch " + line.check});
+  }
+  return labels;
+}
+
+Role roleOf(const FailureLine& line) {
+  return line.leads ? Role::limit : Role::other;
 }
 
 } // namespace planewright

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/figure/picture.h"
 #include "core/study/judge_checks.h"
 
 namespace planewright {
@@ -25,5 +26,19 @@ struct FailureLine {
 /// Those of the checks on planes that the shown state is judged by; `reach` is how far from 0 the line is
 /// wanted, N/mm2, on the side of compression.
 std::vector<FailureLine> failureLinesOf(const Readout& readout, double reach);
+
+/// What is written at the plane that a limit meets first; several lines say whose they are.
+struct TouchLabel {
+  Traction at;
+  Text longForm;
+  Text shortForm;
+  Role role = Role::limit;
+  std::string key;
+};
+std::vector<TouchLabel> touchLabelsOf(const Readout& readout);
+/// The role of a failure line and of all that belongs to it.
+Role roleOf(const FailureLine& line);
+/// As the priority of a Mark: it goes short first.
+inline constexpr int touchPriority = 9;
 
 } // namespace planewright

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/circle/circle_labels.h"
 
+#include "core/figure/failure_line.h"
 #include "core/figure/metrics.h"
 #include "ui/circle/circle_fit.h"
 #include "ui/look/look.h"
@@ -32,6 +33,9 @@ std::vector<LabelWish> wishesOf(const Stage& stage) {
   std::vector<LabelWish> wishes;
   for (const Mark& mark : marksOf(stage.study, stage.readout))
     wishes.push_back(wishOf(mark, stage.pixelOf(mark.at)));
+  for (const TouchLabel& touch : touchLabelsOf(stage.readout))
+    wishes.push_back({vecOf(stage.pixelOf(touch.at)), runs(touch.longForm, translation()),
+                      runs(touch.shortForm, translation()), touch.role, false, touchPriority, touch.key});
   return wishes;
 }
 

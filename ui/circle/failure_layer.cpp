@@ -19,9 +19,7 @@ Picture failureLayer(const Stage& stage) {
   const QRectF plot = stage.scale.plot();
   const FailureFrame frame{[&stage](const Traction& at) { return vecOf(stage.pixelOf(at)); },
                            {plot.left(), plot.top(), plot.right(), plot.bottom()},
-                           1,
-                           circle_size::text,
-                           translation()};
+                           1};
   return failureDrawing(frame, failureLinesOf(stage.readout, reach));
 }
 

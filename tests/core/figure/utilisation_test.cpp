@@ -139,24 +139,30 @@ TEST(FailureLine, isWhereTheUtilisationIsOne) {
   }
 }
 
-TEST(FailureLine, ofSeveralChecksTheWorstLeadsAndTheTrianglesAreNamed) {
+TEST(FailureLine, ofSeveralChecksTheWorstLeadsAndTheTouchesAreNamed) {
   Study study = judgedStudy();
   Material weak = study.materials[1];
   weak.name = "weak";
   weak.tension = "0.5 MPa";
   study.materials.push_back(weak);
   study.points[0].checks.push_back({"second", "weak", Criterion::bond, "", "scarf", {}});
-  const std::vector<FailureLine> lines = failureLinesOf(evaluate(study), 50);
+  const Readout now = evaluate(study);
+  const std::vector<FailureLine> lines = failureLinesOf(now, 50);
   ASSERT_EQ(lines.size(), 2);
   EXPECT_FALSE(lines[0].leads);
   EXPECT_TRUE(lines[1].leads);
-  const auto at = [](const Traction& one) { return Vec{200 + 20 * one.sn, 200 + 20 * one.tnt}; };
-  const Picture picture = failureDrawing({at, {0, 0, 400, 400}, 1, 12, {}}, lines);
-  std::vector<Label> labels = partsOf<Label>(picture);
+  const std::vector<TouchLabel> labels = touchLabelsOf(now);
   ASSERT_EQ(labels.size(), 2);
-  EXPECT_TRUE(plain(labels[0].runs).starts_with("glue "));
-  EXPECT_TRUE(plain(labels[1].runs).starts_with("weak "));
-  EXPECT_FALSE(overlap(boxOf(labels[0]), boxOf(labels[1])));
+  EXPECT_TRUE(plain(labels[0].shortForm).starts_with("glue "));
+  EXPECT_TRUE(plain(labels[1].shortForm).starts_with("weak "));
+  EXPECT_EQ(labels[0].role, Role::other);
+  EXPECT_EQ(labels[1].role, Role::limit);
+  std::vector<std::string> words;
+  for (const Label& label : partsOf<Label>(*figureOf(study, now, {})))
+    if (plain(label.runs).find("weak ") != std::string::npos ||
+        plain(label.runs).find("glue ") != std::string::npos)
+      words.push_back(plain(label.runs));
+  EXPECT_GE(words.size(), 2) << "both stand beside the circle";
 }
 
 TEST(UtilisationScale, isLogarithmicWhereTheWorstWouldLieOverTheLinearOne) {
@@ -201,6 +207,11 @@ TEST(FailureLine, isTouchedFirstByTheGrowingCircleNotByTheWorstPlane) {
   // Where |tnt| + sn tan 40 is greatest: cos 2(theta - theta1) = sin 40, 25 deg to either side of theta1
   // = 90.
   EXPECT_NEAR(std::abs(lines[0].touch->value.degrees()), 65, 1e-9);
+  const std::vector<TouchLabel> labels = touchLabelsOf(now);
+  ASSERT_EQ(labels.size(), 1);
+  EXPECT_EQ(labels[0].at, lines[0].touchAt);
+  EXPECT_TRUE(plain(labels[0].longForm).starts_with("first touch"));
+  EXPECT_NE(plain(labels[0].shortForm).find("65.0°"), std::string::npos);
 }
 
 TEST(Figure, carriesTheCheckAndItsPlot) {
