@@ -263,6 +263,7 @@ CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box
   const CircleFit fit = circleFitOf(setting, wishes, plot,
                                     leastShare * std::min(area.right - area.left, area.bottom - area.top));
   std::vector<Traction> places;
+  places.reserve(wishes.size());
   for (const Mark& mark : marks)
     places.push_back(mark.at);
   for (const TouchLabel& touch : touchLabelsOf(setting.readout))

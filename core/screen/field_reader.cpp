@@ -54,6 +54,7 @@ public:
   Rows(const Study& study, FieldColumns columns) : m_study(study) {
     using enum FieldRole;
     std::vector<std::string> cases;
+    cases.reserve(study.cases.size());
     for (const LoadCase& one : study.cases)
       cases.push_back(one.id);
     m_reading.field = Field(std::move(cases), {columns.has(layer), columns.has(axes), columns.has(line),
