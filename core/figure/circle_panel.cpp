@@ -41,7 +41,8 @@ struct CircleDrawing {
 };
 
 /// Wishes of the marks' labels, for a fit with their places relative to the centre, then with their own.
-std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>& marks) {
+std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>& marks,
+                                const std::vector<TouchLabel>& touches) {
   std::vector<LabelWish> wishes;
   for (const Mark& mark : marks) {
     const Role role = roleOf(mark.kind) == Role::soft ? Role::ink : roleOf(mark.kind);
@@ -58,7 +59,7 @@ std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>&
                       mark.priority,
                       "mark " + exactNumber(static_cast<double>(wishes.size()))});
   }
-  for (const TouchLabel& touch : touchLabelsOf(setting.readout))
+  for (const TouchLabel& touch : touches)
     wishes.push_back({{touch.at.sn - setting.readout.state().circle.mean, 0},
                       setting.runsOf(touch.longForm),
                       elided(setting.runsOf(touch.shortForm), 0.2 * setting.order.width, setting.text, false),
@@ -252,7 +253,8 @@ CircleLabels outcomeOf(const PlacedLabels& placed, const std::vector<Mark>& mark
 CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box& area) {
   const double text = setting.text;
   const std::vector<Mark> marks = marksOf(setting.study, setting.readout);
-  std::vector<LabelWish> wishes = wishesOf(setting, marks);
+  const std::vector<TouchLabel> touches = touchLabelsOf(setting.readout);
+  std::vector<LabelWish> wishes = wishesOf(setting, marks, touches);
   Box plot = area;
   if (!setting.isNarrow) {
     setWords(picture, {area.left, area.top + boxOver * text},
@@ -262,14 +264,10 @@ CircleLabels drawCirclePanel(Picture& picture, const Setting& setting, const Box
   plot.top += tauTitleHeight * text;
   const CircleFit fit = circleFitOf(setting, wishes, plot,
                                     leastShare * std::min(area.right - area.left, area.bottom - area.top));
-  std::vector<Traction> places;
-  places.reserve(wishes.size());
-  for (const Mark& mark : marks)
-    places.push_back(mark.at);
-  for (const TouchLabel& touch : touchLabelsOf(setting.readout))
-    places.push_back(touch.at);
-  for (std::size_t i = 0; i < wishes.size(); ++i)
-    place(wishes[i], fit.at(places[i]), fit.columns);
+  for (std::size_t i = 0; i < wishes.size(); ++i) {
+    const Traction& at = i < marks.size() ? marks[i].at : touches[i - marks.size()].at;
+    place(wishes[i], fit.at(at), fit.columns);
+  }
   const PlacedLabels placed = placeLabels(wishes, fit.columns);
   drawCircleAxes(picture, setting, fit);
   drawFailure(picture, setting, fit);
