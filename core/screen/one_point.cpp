@@ -13,10 +13,6 @@ constexpr double fromX = std::numeric_limits<double>::quiet_NaN();
 /// Utilisations within this share of each other are equal, as in the band of one point.
 constexpr double tieShare = 1e-12;
 
-double clean(double component, double scale) {
-  return isRounding(component, scale) ? 0 : component;
-}
-
 double utilisationAt(const ScreenedForms& forms, const LineStress& stresses) {
   double greatest = 0;
   for (const SignedForm& part : forms.parts) {
@@ -27,7 +23,8 @@ double utilisationAt(const ScreenedForms& forms, const LineStress& stresses) {
 }
 
 LineStress stressesAt(const StateOfLine& state, double X, double shear) {
-  return {clean(state.mean + X, state.scale), clean(state.mean - X, state.scale), clean(shear, state.scale)};
+  return {withoutRounding(state.mean + X, state.scale), withoutRounding(state.mean - X, state.scale),
+          withoutRounding(shear, state.scale)};
 }
 
 /// The sum of a combination at a point with the size of its terms, tension positive.

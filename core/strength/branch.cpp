@@ -12,10 +12,6 @@ namespace {
 
 constexpr double infinity = std::numeric_limits<double>::infinity();
 
-double clean(double component, double scale) {
-  return isRounding(component, scale) ? 0 : component;
-}
-
 double quadraticOf(const Interaction& f, const LineStress& s) {
   return f.a11 * s.along * s.along + f.a12 * s.along * s.across + f.a22 * s.across * s.across +
          f.a66 * s.shear * s.shear;
@@ -172,7 +168,7 @@ LoadTerms termsOf(const SignedForm& form, const LineStress& stresses) {
 
 double resistanceOf(const Mobilised& plane, const TurningState& state, Angle direction) {
   const double friction = state.at(direction).along * plane.tanPhi;
-  return clean(plane.cohesion - friction, std::max(plane.cohesion, state.scale * plane.tanPhi));
+  return withoutRounding(plane.cohesion - friction, std::max(plane.cohesion, state.scale * plane.tanPhi));
 }
 
 double utilisationOfQuadratic(double a, double b) {
@@ -185,9 +181,9 @@ double utilisationOfQuadratic(double a, double b) {
 
 LineStress TurningState::at(Angle direction) const {
   LineStress s = inAxesOf(stress, LineAngle{direction});
-  s.along = clean(s.along, scale);
-  s.across = clean(s.across, scale);
-  s.shear = clean(s.shear, scale);
+  s.along = withoutRounding(s.along, scale);
+  s.across = withoutRounding(s.across, scale);
+  s.shear = withoutRounding(s.shear, scale);
   return s;
 }
 

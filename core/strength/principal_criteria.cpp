@@ -54,8 +54,7 @@ std::array<double, 3> principalsOf(const Demand& demand) {
   std::array<double, 3> s{circle.s1, circle.s2, demand.sz};
   const double scale = std::max(demand.scale, std::abs(demand.sz));
   for (double& one : s)
-    if (isRounding(one, scale))
-      one = 0;
+    one = withoutRounding(one, scale);
   std::ranges::sort(s, std::greater());
   return s;
 }

@@ -51,10 +51,13 @@ bool isRounding(double value, double scale) {
   return std::abs(value) <= 8 * std::numeric_limits<double>::epsilon() * scale;
 }
 
+double withoutRounding(double value, double scale) {
+  return isRounding(value, scale) ? 0 : value;
+}
+
 PlaneStress withoutRounding(PlaneStress sum, double scale) {
   for (double* component : {&sum.sx, &sum.sy, &sum.txy})
-    if (isRounding(*component, scale))
-      *component = 0;
+    *component = withoutRounding(*component, scale);
   if (circleOf(sum, scale).theta1)
     return sum;
   const double mean = sum.sx / 2 + sum.sy / 2;

@@ -37,6 +37,8 @@ Circle circleOf(const PlaneStress& stress);
 /// Whether a value is no more than the rounding of terms of this size that cancelled: |value| <= 8 eps scale.
 bool isRounding(double value, double scale);
 
+/// 0 where a value is only rounding of terms of this size, else the value.
+double withoutRounding(double value, double scale);
 /// A sum of terms of this size without what is only their rounding: components, and a radius that is none of
 /// theirs, become 0.
 PlaneStress withoutRounding(PlaneStress sum, double scale);

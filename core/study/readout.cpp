@@ -21,8 +21,7 @@ Angle angleOf(const Study& study, Spot spot, const std::string& text) {
 /// Of parts that cancel only rounding is left: it is not shown as a stress.
 void dropRounding(PlaneStress& stress, double scale) {
   for (double* component : {&stress.sx, &stress.sy, &stress.txy})
-    if (isRounding(*component, scale))
-      *component = 0;
+    *component = withoutRounding(*component, scale);
 }
 
 /// Sources speak with tension positive.
@@ -81,8 +80,7 @@ void addTerm(StateReading& state, double factor, const std::vector<CaseReading>&
 /// Of several terms that cancel only rounding is left: it is not shown as a stress, nor as a direction.
 /// `scaleOfThird` is to σz what the state's scale is to the components in the plane.
 void dropRounding(StateReading& state, double scaleOfThird) {
-  if (isRounding(state.sz, scaleOfThird))
-    state.sz = 0;
+  state.sz = withoutRounding(state.sz, scaleOfThird);
   state.stress = withoutRounding(state.stress, state.scale);
 }
 

@@ -64,9 +64,8 @@ std::vector<Step> sumOfCase(const Study& study, const CaseStress& stress,
     }
     const double result = typed + (isTurned ? -made : made);
     // Of parts that cancel only rounding is left.
-    steps.push_back(units.step(one.name, one.letters + "}", whole, numbers,
-                               isRounding(result, scale) ? 0 : result, dimension::stress,
-                               PW_TEXT("Working", "the parts of a case add up")));
+    steps.push_back(units.step(one.name, one.letters + "}", whole, numbers, withoutRounding(result, scale),
+                               dimension::stress, PW_TEXT("Working", "the parts of a case add up")));
   }
   return steps;
 }
