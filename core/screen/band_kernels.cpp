@@ -33,6 +33,13 @@ inline Interval intervalOf(double half, double shear, double cos2, double sin2) 
   return {R, hasFirst ? R : high, hasFirst ? 0 : shearHigh, hasSecond ? -R : low, hasSecond ? 0 : shearLow};
 }
 
+/// A value at X, which counts only inside the interval.
+inline double ifInside(const Interval& x, double X, double value) {
+  const bool isAbove = X > x.low;
+  const bool isBelow = X < x.high;
+  return (isAbove & isBelow) ? value : 0;
+}
+
 /// Where one sign piece of squares stands still: X = mean * this; not a number where it does not.
 inline double stillOf(const SquaresForm& f, int along, int across) {
   const double curve = f.a11[along] - f.a12[along][across] + f.a22[across] - f.a66;
@@ -59,16 +66,11 @@ static void keepPlainSquaresInBand(const double* __restrict__ state, const Squar
       const double s2 = mean - X;
       return (s1 < 0 ? press1 : pull1) * s1 * s1 + (s2 < 0 ? press2 : pull2) * s2 * s2 + a66 * squareOfShear;
     };
-    const auto still = [&](double X) {
-      const double value = at(X, (x.R - X) * (x.R + X));
-      const bool isAbove = X > x.low;
-      const bool isBelow = X < x.high;
-      return (isAbove & isBelow) ? value : 0;
-    };
+    const auto inside = [&](double X) { return ifInside(x, X, at(X, (x.R - X) * (x.R + X))); };
     double value = greater(at(x.high, x.shearHigh * x.shearHigh), at(x.low, x.shearLow * x.shearLow));
-    value = greater(value, still(mean * (mean < 0 ? bothPress : bothPull)));
-    value = greater(value, still(mean * pullPress));
-    value = greater(value, still(mean * pressPull));
+    value = greater(value, inside(mean * (mean < 0 ? bothPress : bothPull)));
+    value = greater(value, inside(mean * pullPress));
+    value = greater(value, inside(mean * pressPull));
     keep(value, number, best[i], which[i]);
   }
 }
@@ -94,12 +96,7 @@ static void keepSquaresWithProductsInBand(const double* __restrict__ state, cons
       return (s1 < 0 ? press1 : pull1) * s1 * s1 + a12 * s1 * s2 + (s2 < 0 ? press2 : pull2) * s2 * s2 +
              a66 * squareOfShear;
     };
-    const auto inside = [&](double X) {
-      const double value = at(X, (x.R - X) * (x.R + X));
-      const bool isAbove = X > x.low;
-      const bool isBelow = X < x.high;
-      return (isAbove & isBelow) ? value : 0;
-    };
+    const auto inside = [&](double X) { return ifInside(x, X, at(X, (x.R - X) * (x.R + X))); };
     double value = greater(at(x.high, x.shearHigh * x.shearHigh), at(x.low, x.shearLow * x.shearLow));
     value = greater(value, inside(mean * (mean < 0 ? bothPress : bothPull)));
     value = greater(value, inside(mean * pullPress));
@@ -143,12 +140,7 @@ void keepLinearInBand(const double* __restrict__ state, const LinearForm& form, 
       const double b = f.b1 * s1 + f.b2 * s2;
       return b + __builtin_sqrt(b * b + 4 * notBelowZero(a));
     };
-    const auto still = [&](double X) {
-      const double value = at(X, (x.R - X) * (x.R + X));
-      const bool isAbove = X > x.low;
-      const bool isBelow = X < x.high;
-      return (isAbove & isBelow) ? value : 0;
-    };
+    const auto inside = [&](double X) { return ifInside(x, X, at(X, (x.R - X) * (x.R + X))); };
     const double a1 = mean * twiceDifference;
     const double a0 = mean * mean * sum + f.a66 * x.R * x.R;
     const double b0 = mean * sumOfB;
@@ -158,8 +150,8 @@ void keepLinearInBand(const double* __restrict__ state, const LinearForm& form, 
     const double root = __builtin_sqrt(k * k * a2 * inner);
     const double q = -(H + (H < 0 ? -root : root));
     double twice = greater(at(x.high, x.shearHigh * x.shearHigh), at(x.low, x.shearLow * x.shearLow));
-    twice = greater(twice, still(q * inverseA));
-    twice = greater(twice, still(C / q));
+    twice = greater(twice, inside(q * inverseA));
+    twice = greater(twice, inside(C / q));
     const double u = 0.5 * notBelowZero(twice);
     keep(u * u, number, best[i], which[i]);
   }
@@ -211,10 +203,7 @@ void keepSumInBand(const double* __restrict__ state, const SumForm& form, const 
     };
     const auto still = [&](double ofX, double ofShear) {
       const double X = x.R * ofX;
-      const double value = at(X, x.R * ofShear);
-      const bool isAbove = X > x.low;
-      const bool isBelow = X < x.high;
-      return (isAbove & isBelow) ? value : 0;
+      return ifInside(x, X, at(X, x.R * ofShear));
     };
     double u = greater(at(x.high, x.shearHigh), at(x.low, x.shearLow));
     u = greater(u, still(mean < 0 ? share[3] : share[0], mean < 0 ? shareOfShear[3] : shareOfShear[0]));
