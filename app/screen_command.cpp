@@ -53,12 +53,13 @@ public:
         });
     if (!results)
       return interrupted();
-    if (worstOf(*results, 1).empty())
+    const FieldSummary summary = summaryOf(m_reading.field, *results);
+    if (summary.judged == 0)
       return wrongUse(aboutTable(PW_TEXT("Command", "No point of the table is left to be judged."),
                                  PW_TEXT("Command", "Give each point all cases that act in a combination.")));
     if (Outcome<void> written = write(*results); !written)
       return tl::unexpected(std::move(written).error());
-    return delivery(*results);
+    return delivery(*results, summary);
   }
 
 private:
@@ -211,9 +212,8 @@ private:
     return written ? Outcome<void>() : machineFailed(written.error());
   }
 
-  Delivery delivery(const FieldResults& results) const {
+  Delivery delivery(const FieldResults& results, const FieldSummary& summary) const {
     Delivery delivery;
-    const FieldSummary summary = summaryOf(m_reading.field, results);
     for (Problem fault : m_reading.faults) {
       fault.place = m_order.table;
       delivery.facts.push_back(verbatim(plain(fault)));
@@ -229,7 +229,7 @@ private:
       delivery.exit = Exit::leftOut;
     if (summary.exceeding > 0)
       delivery.exit = Exit::exceeds;
-    delivery.said = summaryText(m_study, m_order.point, m_plan, m_reading, results, m_leftOut);
+    delivery.said = summaryText(m_study, m_order.point, m_plan, m_reading, results, summary, m_leftOut);
     return delivery;
   }
 

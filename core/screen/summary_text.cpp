@@ -28,9 +28,9 @@ std::string count(std::size_t number) {
 class SummaryWriter {
 public:
   SummaryWriter(const ScreenPlan& plan, const FieldReading& reading, const FieldResults& results,
-                const Translate& translate)
-      : m_plan(plan), m_field(reading.field), m_reading(reading), m_results(results),
-        m_summary(summaryOf(reading.field, results)), m_translate(translate) {}
+                const FieldSummary& summary, const Translate& translate)
+      : m_plan(plan), m_field(reading.field), m_reading(reading), m_results(results), m_summary(summary),
+        m_worst(worstOf(results, shownPoints)), m_translate(translate) {}
 
   std::string written(const Readout& readout, const std::vector<LeftOut>& leftOut) {
     judgedBy(readout);
@@ -79,7 +79,7 @@ private:
   }
 
   void outcome() {
-    const std::size_t greatest = worstOf(m_results, 1).front();
+    const std::size_t greatest = m_worst.front();
     line(PW_TEXT("Screen", "Exceeding: %1 of %2 judged points.")
              .with(count(m_summary.exceeding))
              .with(count(m_summary.judged)));
@@ -104,7 +104,7 @@ private:
     head(PW_TEXT("Screen", "check"));
     head(PW_TEXT("Screen", "mode"));
     head(PW_TEXT("Screen", "worst angle"));
-    for (const std::uint32_t point : worstOf(m_results, shownPoints))
+    for (const std::uint32_t point : m_worst)
       rows.push_back(cellsOf(point));
     line(PW_TEXT("Screen", "Worst points:"));
     m_out += alignedRows(rows, indent);
@@ -173,7 +173,8 @@ private:
   const Field& m_field;
   const FieldReading& m_reading;
   const FieldResults& m_results;
-  FieldSummary m_summary;
+  const FieldSummary& m_summary;
+  std::vector<std::uint32_t> m_worst; ///< the worst first
   const Translate& m_translate;
   std::string m_out;
 };
@@ -181,9 +182,9 @@ private:
 } // namespace
 
 std::string summaryText(const Study& study, std::string_view point, const ScreenPlan& plan,
-                        const FieldReading& reading, const FieldResults& results,
+                        const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,
                         const std::vector<LeftOut>& leftOut, const Translate& translate) {
-  return SummaryWriter(plan, reading, results, translate).written(evaluate(study, point), leftOut);
+  return SummaryWriter(plan, reading, results, summary, translate).written(evaluate(study, point), leftOut);
 }
 
 } // namespace planewright

@@ -19,7 +19,7 @@ struct LeftOut {
 /// Utilisations are rounded upwards, multipliers downwards. `point` is the one by which the plan was made; at
 /// least one point of the field is judged.
 std::string summaryText(const Study& study, std::string_view point, const ScreenPlan& plan,
-                        const FieldReading& reading, const FieldResults& results,
+                        const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,
                         const std::vector<LeftOut>& leftOut, const Translate& translate = {});
 
 } // namespace planewright

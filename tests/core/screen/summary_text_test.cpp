@@ -17,7 +17,8 @@ std::string summaryOfTable(const std::string& table, const std::vector<LeftOut>&
   const Study study = judgedStudy();
   const Result<ScreenPlan> plan = screenPlanOf(study, "P1");
   const Results<FieldReading> reading = readingOf(study, table);
-  return summaryText(study, "P1", *plan, *reading, *screened(*plan, reading->field), leftOut);
+  const FieldResults results = *screened(*plan, reading->field);
+  return summaryText(study, "P1", *plan, *reading, results, summaryOf(reading->field, results), leftOut);
 }
 
 TEST(SummaryText, saysWhatWasReadWhatGovernsAndWhatToBearInMind) {
