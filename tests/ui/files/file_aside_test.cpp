@@ -1,33 +1,15 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/files/file_aside.h"
 
-#include "ui/files/file_bytes.h"
+#include "tests/ui/files/folder_test.h"
 #include "ui/files/file_pieces.h"
 
-#include <QTemporaryDir>
-
 #include <gtest/gtest.h>
-
-#include <filesystem>
 
 namespace planewright {
 namespace {
 
-namespace fs = std::filesystem;
-
-class FileAsideTest : public testing::Test {
-protected:
-  std::string path(const char* name) const {
-    return m_folder.filePath(QString::fromLatin1(name)).toStdString();
-  }
-  std::size_t filesInFolder() const {
-    return static_cast<std::size_t>(std::distance(fs::directory_iterator(m_folder.path().toStdString()), {}));
-  }
-  std::string read(const std::string& file) const { return bytesOf(file, 1 << 20).value_or("unread"); }
-
-private:
-  QTemporaryDir m_folder;
-};
+class FileAsideTest : public FolderTest {};
 
 TEST_F(FileAsideTest, TakesTheOldPlaceOnlyWhenFinished) {
   ASSERT_TRUE(writeAside(path("a"), "old"));

@@ -1,8 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
+#include "tests/ui/files/folder_test.h"
 #include "ui/files/descriptor.h"
-#include "ui/files/file_bytes.h"
-
-#include <QTemporaryDir>
 
 #include <gtest/gtest.h>
 
@@ -23,19 +21,7 @@ namespace {
 
 namespace fs = std::filesystem;
 
-class FileBytes : public testing::Test {
-protected:
-  std::string path(const char* name) const {
-    return m_folder.filePath(QString::fromLatin1(name)).toStdString();
-  }
-  std::size_t filesInFolder() const {
-    return static_cast<std::size_t>(std::distance(fs::directory_iterator(m_folder.path().toStdString()), {}));
-  }
-  std::string read(const std::string& file) const { return bytesOf(file, 1 << 20).value_or("unread"); }
-
-private:
-  QTemporaryDir m_folder;
-};
+class FileBytes : public FolderTest {};
 
 mode_t modeOf(const std::string& file) {
   struct stat status {};
