@@ -11,6 +11,10 @@
 
 namespace planewright {
 
+namespace {
+constexpr int room = 5; ///< beside a text, in pixels
+}
+
 RingStyle::RingStyle() : QProxyStyle(QStringLiteral("Fusion")) {}
 
 void RingStyle::drawPrimitive(PrimitiveElement element, const QStyleOption* option, QPainter* painter,
@@ -37,6 +41,19 @@ void RingStyle::drawPrimitive(PrimitiveElement element, const QStyleOption* opti
   painter->setBrush(Qt::NoBrush);
   painter->drawRoundedRect(QRectF(option->rect).adjusted(1, 1, -1, -1), 3, 3);
   painter->restore();
+}
+
+int RingStyle::pixelMetric(PixelMetric metric, const QStyleOption* option, const QWidget* widget) const {
+  const bool isText = metric == PM_FocusFrameHMargin && qobject_cast<const QAbstractItemView*>(widget);
+  if (isText || metric == PM_HeaderMargin)
+    return room;
+  return QProxyStyle::pixelMetric(metric, option, widget);
+}
+
+QRect RingStyle::subElementRect(SubElement element, const QStyleOption* option, const QWidget* widget) const {
+  const QRect rect = QProxyStyle::subElementRect(element, option, widget);
+  const auto* field = qobject_cast<const QLineEdit*>(widget);
+  return element == SE_LineEditContents && field && field->hasFrame() ? rect.adjusted(room, 0, -room, 0) : rect;
 }
 
 void RingStyle::drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget) const {

@@ -211,7 +211,7 @@ void MainWindow::addViewMenu() {
   add(menu, tr("&Usual sizes of the panels"), {}, [this] { m_body->resetSizes(); });
   menu.addSeparator();
   addAppearanceMenu(*menu.addMenu(tr("&Appearance")));
-  QAction* full = add(menu, tr("F&ull screen"), Qt::Key_F11,
+  QAction* full = add(menu, tr("Fu&ll screen"), Qt::Key_F11,
                       [this](bool on) { setWindowState(windowState().setFlag(Qt::WindowFullScreen, on)); });
   full->setCheckable(true);
 }

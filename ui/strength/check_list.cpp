@@ -72,6 +72,7 @@ void CheckList::select(const std::string& id) {
 
 void CheckList::refresh() {
   const Readout& readout = m_desk.readout();
+  const int rowHeight = fontMetrics().height() + 6;
   while (topLevelItemCount() > static_cast<int>(readout.checks.size()))
     delete takeTopLevelItem(topLevelItemCount() - 1);
   for (std::size_t i = 0; i < readout.checks.size(); ++i) {
@@ -84,6 +85,7 @@ void CheckList::refresh() {
     QTreeWidgetItem* item = topLevelItem(static_cast<int>(i));
     if (!item)
       item = new QTreeWidgetItem(this);
+    item->setSizeHint(0, {0, rowHeight});
     item->setText(0, name);
     item->setText(1, worst);
     item->setTextAlignment(1, Qt::AlignRight | Qt::AlignVCenter);
@@ -93,8 +95,7 @@ void CheckList::refresh() {
   if (const auto now = selected())
     setCurrentItem(topLevelItem(static_cast<int>(*now)));
   const int rows = std::clamp(topLevelItemCount(), 1, mostRows);
-  const int rowHeight = topLevelItemCount() > 0 ? visualItemRect(topLevelItem(0)).height() : 0;
-  setFixedHeight(header()->sizeHint().height() + rows * std::max(rowHeight, fontMetrics().height() + 6) + 2);
+  setFixedHeight(header()->sizeHint().height() + rows * rowHeight + 2);
   setVisible(topLevelItemCount() > 0);
 }
 

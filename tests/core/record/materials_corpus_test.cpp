@@ -19,8 +19,9 @@ class MaterialsCorpus : public testing::TestWithParam<std::string> {};
 TEST_P(MaterialsCorpus, hasTheExpectedProblems) {
   const auto materials = readMaterials(corpus().bytesOf(GetParam()));
   EXPECT_TRUE(corpus().matches(GetParam(), materials ? std::string() : listed(materials.error())));
-  if (materials)
+  if (materials) {
     EXPECT_EQ(readMaterials(writeMaterials(*materials)), materials);
+  }
 }
 
 INSTANTIATE_TEST_SUITE_P(Files, MaterialsCorpus, testing::ValuesIn(corpus().names()),

@@ -383,6 +383,17 @@ TEST_F(WindowTest, theKeysOfTheWindowWorkFromEveryField) {
   expectAll("note");
 }
 
+TEST_F(WindowTest, noMenuHasTwoEntriesWithOneLetter) {
+  for (const QMenu* menu : shown().findChildren<QMenu*>()) {
+    QStringList letters;
+    for (const QAction* action : menu->actions())
+      if (const QKeySequence letter = QKeySequence::mnemonic(action->text()); !letter.isEmpty()) {
+        EXPECT_FALSE(letters.contains(letter.toString())) << action->text().toStdString();
+        letters.append(letter.toString());
+      }
+  }
+}
+
 TEST_F(WindowTest, pickersShowAnotherPointWithoutAStep) {
   MainWindow& window = shown();
   Study study = workedExample();
