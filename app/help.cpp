@@ -143,7 +143,7 @@ planewright figure beam.planewright --folder figures --format pdf
 }
 
 std::string sheetHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright sheet STUDY -o FILE.pdf|.html [options]
+  return plain(PW_TEXT("Help", R"help(planewright sheet STUDY -o FILE.pdf|.html|.txt [options]
 
 Writes the calculation sheet: what governs, everything as typed, the working, the checks, a second route through
 the program, conclusion and lines to sign.

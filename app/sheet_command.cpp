@@ -11,6 +11,7 @@
 #include "core/report/make_sheet.h"
 #include "core/report/sheet_html.h"
 #include "core/report/sheet_pages.h"
+#include "core/report/sheet_text.h"
 #include "ui/paint/export.h"
 
 #include <algorithm>
@@ -30,24 +31,28 @@ constexpr std::array known = {OptionRow{"-o"},
                               OptionRow{"--without-figures", Takes::nothing},
                               OptionRow{"--without-study", Takes::nothing}};
 
+enum class SheetKind { html, pdf, text };
+
 /// What the options ask for, before the study is read.
 struct Wanted {
   std::string file;
-  bool isPdf = false;
+  SheetKind kind = SheetKind::html;
   Paper paper = Paper::a4;
   bool carriesStudy = true;
   SheetOrder order;
 };
 
 /// By the ending of the file's name; standard output takes HTML.
-Result<bool> asksForPdf(const std::string& file) {
+Result<SheetKind> kindOf(const std::string& file) {
   if (hasEnding(file, ".pdf"))
-    return true;
+    return SheetKind::pdf;
+  if (hasEnding(file, ".txt"))
+    return SheetKind::text;
   if (file == "-" || hasEnding(file, ".html") || hasEnding(file, ".htm"))
-    return false;
+    return SheetKind::html;
   return tl::unexpected(Problem{"-o", 0, 0, file,
                                 PW_TEXT("Command", "The ending of “%1” names no kind of sheet.").with(file),
-                                PW_TEXT("Command", "End the name with .pdf or .html.")});
+                                PW_TEXT("Command", "End the name with .pdf, .html or .txt.")});
 }
 
 Result<Wanted> wantedBy(const Arguments& arguments) {
@@ -60,20 +65,20 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   const Result<std::string> file = outputOf(arguments);
   if (!file)
     return tl::unexpected(file.error());
-  const Result<bool> isPdf = asksForPdf(*file);
-  if (!isPdf)
-    return tl::unexpected(isPdf.error());
+  const Result<SheetKind> kind = kindOf(*file);
+  if (!kind)
+    return tl::unexpected(kind.error());
   const Result<Depth> depth = wordOfOption("--depth", arguments.valueOf("--depth"), Depth::governing);
   if (!depth)
     return tl::unexpected(depth.error());
-  if (arguments.has("--paper") && !*isPdf)
+  if (arguments.has("--paper") && kind != SheetKind::pdf)
     return tl::unexpected(Problem{"--paper", 0, 0, *arguments.valueOf("--paper"),
                                   PW_TEXT("Command", "Only a PDF has a paper."),
                                   PW_TEXT("Command", "Leave out --paper, or end the name with .pdf.")});
   const Result<Paper> paper = wordOfOption("--paper", arguments.valueOf("--paper"), Paper::a4);
   if (!paper)
     return tl::unexpected(paper.error());
-  Wanted wanted{*file, *isPdf, *paper, !arguments.has("--without-study"), {}};
+  Wanted wanted{*file, *kind, *paper, !arguments.has("--without-study"), {}};
   wanted.order.depth = *depth;
   wanted.order.figures = !arguments.has("--without-figures");
   wanted.order.studyName = studyNameOf(arguments.operands.front());
@@ -84,8 +89,10 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
 }
 
 Outcome<std::string> bytesOf(const Study& study, const Sheet& sheet, const Wanted& wanted) {
+  if (wanted.kind == SheetKind::text)
+    return sheetText(sheet);
   const std::string carried = wanted.carriesStudy ? writeStudy(study) : std::string();
-  if (wanted.isPdf) {
+  if (wanted.kind == SheetKind::pdf) {
     const std::vector<Picture> pages = pagesOf(sheet, wanted.paper);
     return paintedOffscreen([&] { return pdfOfPages(pages, Palette::paper, carried); });
   }

@@ -4,11 +4,11 @@
 #include "app/help.h"
 #include "app/naming.h"
 #include "app/offscreen.h"
-#include "core/evidence/evidence_text.h"
-#include "core/quantity/format.h"
+#include "core/evidence/evidence_count.h"
 #include "core/report/evidence_sheet.h"
 #include "core/report/sheet_html.h"
 #include "core/report/sheet_pages.h"
+#include "core/report/sheet_text.h"
 #include "ui/files/platform_name.h"
 #include "ui/paint/export.h"
 
@@ -24,7 +24,7 @@ Outcome<std::string> reportOf(const std::vector<CheckResult>& checks, const std:
   if (hasEnding(file, ".html") || hasEnding(file, ".htm"))
     return sheetHtml(sheet());
   if (!hasEnding(file, ".pdf"))
-    return evidenceText(checks);
+    return sheetText(sheet());
   const std::vector<Picture> pages = pagesOf(sheet(), Paper::a4);
   return paintedOffscreen([&] { return pdfOfPages(pages, Palette::paper); });
 }
@@ -48,12 +48,9 @@ Outcome<Delivery> validated(std::span<const std::string> words) {
   if (!bytes)
     return tl::unexpected(std::move(bytes).error());
   Delivery delivery{*std::move(bytes), *file};
-  const EvidenceCount count = countOf(*checks);
-  if (count.disagreeing > 0) {
+  delivery.facts = wordsOfCount(*checks);
+  if (countOf(*checks).disagreeing > 0)
     delivery.exit = Exit::disagrees;
-    delivery.facts.push_back(PW_TEXT("Command", "%1 published values disagree.")
-                                 .with(exactNumber(static_cast<double>(count.disagreeing))));
-  }
   return delivery;
 }
 

@@ -31,6 +31,8 @@ bool agreement(const CheckResult& result, const Quantity& quantity) {
 }
 
 Result<Quantity> quantityOf(const CheckInputs& inputs, const CheckResult& asked) {
+  if (inputs.word("typed"))
+    return quantityOfTyped(inputs, asked.quantity);
   if (inputs.word("criterion"))
     return quantityOfStrength(inputs, asked.quantity);
   if (inputs.word("ea") || inputs.word("ex"))

@@ -31,4 +31,8 @@ Result<Quantity> quantityOfStrain(const CheckInputs& inputs, std::string_view wo
 /// multiplier), sigma_eq (the utilisation times f). Any one unit of stress.
 Result<Quantity> quantityOfStrength(const CheckInputs& inputs, std::string_view word);
 
+/// Of a text as a user types it ("typed"), with its unit or as a slope: stress force length moment (in MPa,
+/// N, mm and N mm), angle (of a line, deg).
+Result<Quantity> quantityOfTyped(const CheckInputs& inputs, std::string_view word);
+
 } // namespace planewright

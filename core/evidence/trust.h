@@ -15,6 +15,11 @@ enum class Trust {
 template <>
 const std::vector<Named<Trust>>& namesOf<Trust>();
 
+/// Values from memory and own arithmetic are no evidence from outside.
+constexpr bool isOutside(Trust trust) {
+  return trust == Trust::work || trust == Trust::companion;
+}
+
 /// By what the check says of its basis; without a printed value it is own arithmetic.
 Trust trustOf(const CheckResult& check);
 

@@ -1,11 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/report/evidence_sheet.h"
 
-#include "core/evidence/evidence_text.h"
+#include "core/evidence/evidence_count.h"
 #include "core/evidence/misprints.h"
-#include "core/evidence/trust.h"
-#include "core/quantity/format.h"
-#include "core/report/digits.h"
+#include "core/quantity/shown_count.h"
 #include "core/report/route_words.h"
 #include "core/report/sheet_writer.h"
 #include "core/words/version.h"
@@ -47,21 +45,9 @@ SheetTable tableOf(const std::vector<const CheckResult*>& checks) {
 }
 
 void writeSummary(SheetWriter& sheet, const std::vector<CheckResult>& checks, const std::string& platform) {
-  const EvidenceCount count = countOf(checks);
-  const auto of = [&](Trust trust) {
-    return static_cast<std::size_t>(
-        std::ranges::count_if(checks, [&](const CheckResult& check) { return trustOf(check) == trust; }));
-  };
-  const std::size_t outside = of(Trust::work) + of(Trust::companion);
-  sheet.box({count.disagreeing == 0 ? PW_TEXT("Validate", "All %1 values agree.").with(digits(count.values))
-                                    : PW_TEXT("Validate", "%1 of %2 values disagree.")
-                                          .with(digits(count.disagreeing))
-                                          .with(digits(count.values)),
-             PW_TEXT("Validate", "%1 of them are evidence from outside the program; %2 are not.")
-                 .with(digits(outside))
-                 .with(digits(count.values - outside)),
-             PW_TEXT("Validate", "Planewright %1 on %2").with(programVersion()).with(platform)},
-            count.disagreeing > 0);
+  std::vector<Text> box = wordsOfCount(checks);
+  box.push_back(PW_TEXT("Validate", "Planewright %1 on %2").with(programVersion()).with(platform));
+  sheet.box(std::move(box), countOf(checks).disagreeing > 0);
   sheet.heading(PW_TEXT("Validate", "By what the values rest on"));
   SheetTable table;
   table.columns = {{PW_TEXT("Validate", "Basis"), false},
@@ -69,11 +55,10 @@ void writeSummary(SheetWriter& sheet, const std::vector<CheckResult>& checks, co
                    {PW_TEXT("Validate", "Values")},
                    {PW_TEXT("Validate", "Disagree")}};
   for (const Named<Trust>& row : namesOf<Trust>()) {
-    const auto disagree = static_cast<std::size_t>(std::ranges::count_if(
-        checks, [&](const CheckResult& check) { return trustOf(check) == row.value && !check.agrees; }));
-    const bool isOutside = row.value == Trust::work || row.value == Trust::companion;
-    table.rows.push_back({row.label, isOutside ? PW_TEXT("Validate", "yes") : PW_TEXT("Validate", "no"),
-                          verbatim(digits(of(row.value))), verbatim(digits(disagree))});
+    const EvidenceCount count = countOf(checks, row.value);
+    table.rows.push_back({row.label,
+                          isOutside(row.value) ? PW_TEXT("Validate", "yes") : PW_TEXT("Validate", "no"),
+                          verbatim(shownCount(count.values)), verbatim(shownCount(count.disagreeing))});
   }
   sheet.table(std::move(table));
   sheet.text(PW_TEXT("Validate",

@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/record/fingerprint.h"
 #include "core/report/comparison.h"
-#include "core/report/digits.h"
 #include "core/report/route_words.h"
 #include "core/report/sheet_writer.h"
 #include "core/study/verdict.h"
@@ -57,7 +57,7 @@ void writeRoutes(SheetWriter& sheet, const std::vector<Readout>& points, const R
     sheet.table(routeTable(secondRouteOf(readout, readout.states[governing]), false));
   }
   sheet.text(PW_TEXT("Sheet", "Differences are parts of the size of the terms. Compared: %1 results.")
-                 .with(digits(routes.compared)),
+                 .with(shownCount(routes.compared)),
              Voice::soft);
 }
 

@@ -3,7 +3,7 @@
 
 #include "core/figure/metrics.h"
 #include "core/figure/text_lines.h"
-#include "core/report/digits.h"
+#include "core/quantity/shown_count.h"
 #include "core/report/page_flow.h"
 
 #include <algorithm>
@@ -59,7 +59,7 @@ public:
     cell(1, 0, PW_TEXT("Sheet", "Number"), verbatim(title.number));
     cell(2, 0, PW_TEXT("Sheet", "Revision"), verbatim(title.revision));
     cell(3, 0, PW_TEXT("Sheet", "Page"),
-         PW_TEXT("Sheet", "%1 of %2").with(digits(number)).with(digits(count)), true);
+         PW_TEXT("Sheet", "%1 of %2").with(shownCount(number)).with(shownCount(count)), true);
     cell(0, 1, PW_TEXT("Sheet", "Subject"), verbatim(title.subject));
     cell(1, 1, PW_TEXT("Sheet", "Prepared"), title.prepared);
     cell(2, 1, PW_TEXT("Sheet", "Checked"), title.checked);

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/report/sheet_writer.h"
 
-#include "core/report/digits.h"
+#include "core/quantity/shown_count.h"
 #include "core/study/governing.h"
 #include "core/study/verdict.h"
 #include "core/working/recoverable.h"
@@ -12,12 +12,12 @@ namespace planewright {
 
 void SheetWriter::heading(Text words) {
   m_subnumber = 0;
-  m_blocks.emplace_back(SheetHeading{digits(static_cast<std::size_t>(++m_number)), std::move(words), 1});
+  m_blocks.emplace_back(SheetHeading{shownCount(static_cast<std::size_t>(++m_number)), std::move(words), 1});
 }
 
 void SheetWriter::subheading(Text words) {
-  m_blocks.emplace_back(SheetHeading{digits(static_cast<std::size_t>(m_number)) + "." +
-                                         digits(static_cast<std::size_t>(++m_subnumber)),
+  m_blocks.emplace_back(SheetHeading{shownCount(static_cast<std::size_t>(m_number)) + "." +
+                                         shownCount(static_cast<std::size_t>(++m_subnumber)),
                                      std::move(words), 2});
 }
 
@@ -57,7 +57,7 @@ std::string SheetWriter::referenceTo(const Text& source) {
   auto at = std::ranges::find(m_sources, source);
   if (at == m_sources.end())
     at = m_sources.insert(m_sources.end(), source);
-  return "[" + digits(static_cast<std::size_t>(at - m_sources.begin()) + 1) + "]";
+  return "[" + shownCount(static_cast<std::size_t>(at - m_sources.begin()) + 1) + "]";
 }
 
 void SheetWriter::step(const Step& step) {

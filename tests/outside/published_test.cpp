@@ -31,7 +31,7 @@ std::vector<std::string> rowsOfAllFiles() {
   std::vector<std::string> rows;
   for (const ShippedChecks& file : shippedChecks()) {
     const std::vector<std::string> lines = linesOf(file.name);
-    EXPECT_GE(lines.size(), 30u) << file.name;
+    EXPECT_GE(lines.size(), 25u) << file.name;
     rows.insert(rows.end(), lines.begin() + 1, lines.end());
   }
   return rows;
@@ -40,7 +40,7 @@ std::vector<std::string> rowsOfAllFiles() {
 TEST(Published, everyRowOfEveryFileIsRecomputedInItsOrder) {
   const std::vector<std::string> rows = rowsOfAllFiles();
   const std::vector<CheckResult> checks = results();
-  ASSERT_GE(rows.size(), 290u);
+  ASSERT_GE(rows.size(), 320u);
   ASSERT_EQ(checks.size(), rows.size());
   for (std::size_t i = 0; i < checks.size(); ++i)
     EXPECT_EQ(checks[i].id, rows[i].substr(0, rows[i].find(',')));

@@ -53,7 +53,8 @@ int RingStyle::pixelMetric(PixelMetric metric, const QStyleOption* option, const
 QRect RingStyle::subElementRect(SubElement element, const QStyleOption* option, const QWidget* widget) const {
   const QRect rect = QProxyStyle::subElementRect(element, option, widget);
   const auto* field = qobject_cast<const QLineEdit*>(widget);
-  return element == SE_LineEditContents && field && field->hasFrame() ? rect.adjusted(room, 0, -room, 0) : rect;
+  return element == SE_LineEditContents && field && field->hasFrame() ? rect.adjusted(room, 0, -room, 0)
+                                                                      : rect;
 }
 
 void RingStyle::drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget) const {

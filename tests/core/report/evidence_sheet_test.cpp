@@ -24,7 +24,7 @@ TEST(EvidenceSheet, countsWhatIsFromOutsideApart) {
       EXPECT_GE(trustOf(check), Trust::memory) << check.id;
     }
   const std::string html = sheetHtml(evidenceSheet(checks, "test"));
-  EXPECT_NE(html.find("All 302 values agree."), std::string::npos);
+  EXPECT_NE(html.find("All " + std::to_string(checks.size()) + " values agree."), std::string::npos);
   const auto outside = std::to_string(of(Trust::work) + of(Trust::companion));
   EXPECT_NE(html.find(outside + " of them are evidence from outside the program"), std::string::npos);
 }

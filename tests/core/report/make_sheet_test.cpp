@@ -3,6 +3,7 @@
 
 #include "core/record/fingerprint.h"
 #include "core/report/sheet_html.h"
+#include "core/report/sheet_text.h"
 #include "core/working/recoverable.h"
 #include "tests/support/approved.h"
 #include "tests/support/judged_study.h"
@@ -12,38 +13,10 @@
 namespace planewright {
 namespace {
 
-std::string wordsOf(const Sheet& sheet) {
-  std::string words;
-  for (const SheetBlock& block : sheet.blocks)
-    if (const auto* heading = std::get_if<SheetHeading>(&block))
-      words += "\n" + heading->number + " " + plain(heading->words) + "\n";
-    else if (const auto* text = std::get_if<SheetText>(&block))
-      words += plain(text->words) + "\n";
-    else if (const auto* box = std::get_if<SheetBox>(&block))
-      for (const Text& line : box->lines)
-        words += "| " + plain(line) + "\n";
-    else if (const auto* step = std::get_if<SheetStep>(&block))
-      words += plain(step->step.name) + ": " + plain(written(step->step)) + " " + step->reference + "\n";
-    else if (const auto* table = std::get_if<SheetTable>(&block)) {
-      for (const SheetColumn& column : table->columns)
-        words += plain(column.heading) + "\t";
-      words += "\n";
-      for (const std::vector<Text>& row : table->rows) {
-        for (const Text& cell : row)
-          words += plain(cell) + "\t";
-        words += "\n";
-      }
-    } else if (const auto* figure = std::get_if<SheetFigure>(&block))
-      words += "figure: " + plain(figure->caption) + "\n";
-    else
-      words += "to sign\n";
-  return words;
-}
-
 TEST(Sheet, saysWhatItSaid) {
   SheetOrder order;
   order.studyName = "tie";
-  EXPECT_TRUE(matchesApproved("report/judged.txt", wordsOf(sheetOf(judgedStudy(), order))));
+  EXPECT_TRUE(matchesApproved("report/judged.txt", sheetText(sheetOf(judgedStudy(), order))));
 }
 
 TEST(Sheet, standsFirstWhatGoverns) {
@@ -85,7 +58,7 @@ TEST(Sheet, showsChosenPointsAlone) {
   study.points.back().name = "other";
   SheetOrder order;
   order.points = {"other"};
-  const std::string words = wordsOf(sheetOf(study, order));
+  const std::string words = sheetText(sheetOf(study, order));
   EXPECT_NE(words.find("Point other"), std::string::npos);
   EXPECT_EQ(words.find("Point P1"), std::string::npos);
   EXPECT_NE(words.find("chosen points"), std::string::npos);

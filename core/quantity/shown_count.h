@@ -6,7 +6,7 @@
 namespace planewright {
 
 /// A count as it is written.
-inline std::string digits(std::size_t count) {
+inline std::string shownCount(std::size_t count) {
   return exactNumber(static_cast<double>(count));
 }
 
