@@ -10,24 +10,22 @@
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
+#include "ui/sheet/pages_view.h"
+#include "ui/sheet/report_output.h"
 #include "ui/sheet/sheet_options.h"
 #include "ui/sheet/sheet_preview.h"
 
-#include <QButtonGroup>
 #include <QDir>
 #include <QFileDialog>
 #include <QFileInfo>
 #include <QHBoxLayout>
 #include <QLabel>
-#include <QPrintDialog>
 #include <QPrinter>
 #include <QPushButton>
 #include <QScreen>
 #include <QScrollArea>
-#include <QScrollBar>
 #include <QSettings>
 #include <QShowEvent>
-#include <QToolButton>
 #include <QVBoxLayout>
 
 namespace planewright {
@@ -69,35 +67,15 @@ void SheetDialog::build() {
   auto* middle = new QHBoxLayout;
   middle->setSpacing(14);
   middle->addWidget(options);
-  middle->addLayout(previewColumn(), 1);
+  auto* pages = new PagesView(this);
+  m_preview = &pages->preview();
+  middle->addWidget(pages, 1);
   auto* column = new QVBoxLayout(this);
   column->addLayout(middle, 1);
   column->addWidget(m_sentence);
   column->addLayout(footer());
   const QSize frame(20, 50); // of the window manager
   resize(first.boundedTo(screen()->availableSize() - frame));
-}
-
-QVBoxLayout* SheetDialog::previewColumn() {
-  m_preview = new SheetPreview;
-  auto* scroll = new QScrollArea(this);
-  scroll->setWidget(m_preview);
-  scroll->setWidgetResizable(true);
-  scroll->setFrameShape(QFrame::NoFrame);
-  scroll->setAccessibleName(tr("Pages"));
-  auto* zooms = new QHBoxLayout;
-  auto* group = new QButtonGroup(this);
-  const auto add = [&](const QString& words, SheetPreview::Zoom zoom) {
-    auto* button = choiceButton(*zooms, *group, words, zoom == SheetPreview::Zoom::width);
-    connect(button, &QToolButton::clicked, this, [this, zoom] { m_preview->setZoom(zoom); });
-  };
-  zooms->addStretch();
-  add(tr("Whole width"), SheetPreview::Zoom::width);
-  add(tr("100 %"), SheetPreview::Zoom::trueSize);
-  auto* column = new QVBoxLayout;
-  column->addLayout(zooms);
-  column->addWidget(scroll, 1);
-  return column;
 }
 
 void SheetDialog::addButton(QHBoxLayout& row, const QString& words, void (SheetDialog::*act)()) {
@@ -178,13 +156,9 @@ QString SheetDialog::offeredPath(const QString& ending) const {
 }
 
 void SheetDialog::save(const QString& ending, const QString& kind) {
-  QFileDialog dialog(this, tr("Save the sheet"), offeredPath(ending), kind);
-  dialog.setAcceptMode(QFileDialog::AcceptSave);
-  dialog.setDefaultSuffix(ending.mid(1));
-  dialog.selectFile(offeredPath(ending));
-  if (dialog.exec() != QDialog::Accepted)
+  const QString path = askedReportFile(this, tr("Save the sheet"), offeredPath(ending), kind);
+  if (path.isEmpty())
     return;
-  const QString path = dialog.selectedFiles().constFirst();
   if (const Result<void> saved = saveTo(path); !saved)
     return say(shown(saved.error()), true);
   const QString sentence = tr("Saved as %1.").arg(QDir::toNativeSeparators(path));
@@ -235,15 +209,11 @@ Result<void> SheetDialog::printTo(QPrinter& printer) {
 }
 
 void SheetDialog::print() {
-  QPrinter printer(QPrinter::HighResolution);
-  printer.setPageSize(
-      QPageSize(m_options->settings().paper == Paper::a4 ? QPageSize::A4 : QPageSize::Letter));
-  QPrintDialog dialog(&printer, this);
-  if (dialog.exec() != QDialog::Accepted)
-    return;
-  if (const Result<void> printed = printTo(printer); !printed)
-    say(shown(printed.error()), true);
-  else
+  const auto printed = printedByDialog(this, m_options->settings().paper,
+                                       [this](QPrinter& printer) { return printTo(printer); });
+  if (printed && !*printed)
+    say(shown(printed->error()), true);
+  else if (printed)
     say(tr("The sheet is printed."));
 }
 

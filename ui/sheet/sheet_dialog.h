@@ -10,9 +10,6 @@
 class QHBoxLayout;
 class QLabel;
 class QPrinter;
-class QPushButton;
-class QScrollArea;
-class QVBoxLayout;
 
 namespace planewright {
 
@@ -50,7 +47,6 @@ protected:
 
 private:
   void build();
-  QVBoxLayout* previewColumn();
   QHBoxLayout* footer();
   void addButton(QHBoxLayout& row, const QString& words, void (SheetDialog::*act)());
   void arrange();

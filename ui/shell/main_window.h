@@ -16,6 +16,7 @@ class Areas;
 class Body;
 class CircleView;
 class ElementView;
+class EvidenceDialog;
 class FigureDialog;
 class SheetDialog;
 class GivenPanel;
@@ -81,6 +82,7 @@ private:
   /// made of besides the study.
   template <class Dialog, class... More>
   void bringUp(QPointer<Dialog>& dialog, const More&... more);
+  static void raised(QDialog& dialog);
   void build();
   void connectViews();
   void restoreGeometryAndSizes();
@@ -110,6 +112,7 @@ private:
   void copyFigureNow();
   void printFigureNow();
   void helpOnFocus();
+  void showEvidence();
   void showAbout();
   HelpWindow& help();
 
@@ -133,6 +136,7 @@ private:
   QPointer<FigureDialog> m_figure;
   QPointer<SheetDialog> m_sheet;
   QPointer<HelpWindow> m_help;
+  QPointer<EvidenceDialog> m_evidence;
   QPointer<TitleDialog> m_title;
   QPointer<SlipDialog> m_slips;
   QPointer<WorkingDialog> m_working;

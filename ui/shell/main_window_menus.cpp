@@ -7,6 +7,7 @@
 #include "ui/look/look.h"
 #include "ui/planes/plane_table.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/sheet/evidence_dialog.h"
 #include "ui/sheet/sheet_dialog.h"
 #include "ui/shell/appearance.h"
 #include "ui/shell/areas.h"
@@ -41,13 +42,17 @@ QAction* MainWindow::add(QMenu& menu, const QString& words, const QKeySequence& 
   return action;
 }
 
+void MainWindow::raised(QDialog& dialog) {
+  dialog.show();
+  dialog.raise();
+  dialog.activateWindow();
+}
+
 template <class Dialog, class... More>
 void MainWindow::bringUp(QPointer<Dialog>& dialog, const More&... more) {
   if (!dialog)
     dialog = new Dialog(m_desk, more..., this);
-  dialog->show();
-  dialog->raise();
-  dialog->activateWindow();
+  raised(*dialog);
 }
 
 void MainWindow::addFileMenu() {
@@ -238,6 +243,7 @@ void MainWindow::addHelpMenu() {
     menu.addAction(titleOf(page), this, [this, page] { help().showPage(page); });
   }
   menu.addSeparator();
+  add(menu, tr("Published &values, recomputed…"), {}, [this] { showEvidence(); });
   menu.addAction(tr("&Worked example"), this, &MainWindow::openWorkedExample);
   menu.addAction(tr("&About Planewright"), this, &MainWindow::showAbout);
 }
@@ -258,6 +264,12 @@ void MainWindow::showSheet() {
     m_sheet->setStudyFile(m_filing->path());
   }
   bringUp(m_sheet);
+}
+
+void MainWindow::showEvidence() {
+  if (!m_evidence)
+    m_evidence = new EvidenceDialog(this);
+  raised(*m_evidence);
 }
 
 void MainWindow::copyFigureNow() {
