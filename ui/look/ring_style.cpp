@@ -13,7 +13,8 @@ namespace planewright {
 
 namespace {
 constexpr int room = 5; ///< beside a text, in pixels
-}
+constexpr double corner = 2;
+} // namespace
 
 RingStyle::RingStyle() : QProxyStyle(QStringLiteral("Fusion")) {}
 
@@ -32,7 +33,10 @@ void RingStyle::drawPrimitive(PrimitiveElement element, const QStyleOption* opti
     const bool isField = element == PE_FrameLineEdit && qobject_cast<const QLineEdit*>(widget);
     const bool isList = element == PE_Frame && qobject_cast<const QAbstractItemView*>(widget);
     if ((isField || isList) && !(option->state & State_HasFocus))
-      drawEdge(*option, *painter, *widget);
+      drawEdge(*option, *painter, *widget, corner);
+    const bool isTick = element == PE_IndicatorCheckBox || element == PE_IndicatorItemViewItemCheck;
+    if (widget && (isTick || element == PE_IndicatorRadioButton))
+      drawEdge(*option, *painter, *widget, isTick ? corner : option->rect.width() / 2.0);
     return;
   }
   painter->save();
@@ -57,12 +61,13 @@ QRect RingStyle::subElementRect(SubElement element, const QStyleOption* option, 
                                                                       : rect;
 }
 
-void RingStyle::drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget) const {
+void RingStyle::drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget,
+                         double radius) const {
   painter.save();
   painter.setRenderHint(QPainter::Antialiasing);
   painter.setPen(QPen(lookOf(widget).colour(Role::other), 1));
   painter.setBrush(Qt::NoBrush);
-  painter.drawRoundedRect(QRectF(option.rect).adjusted(0.5, 0.5, -0.5, -0.5), 2, 2);
+  painter.drawRoundedRect(QRectF(option.rect).adjusted(0.5, 0.5, -0.5, -0.5), radius, radius);
   painter.restore();
 }
 

@@ -6,9 +6,9 @@
 namespace planewright {
 
 /// The style of the standard widgets, but a button that has the keys wears the ring that fields wear, fields
-/// and lists without the keys have an edge that is seen in the dark too, the arrow of a sorted column points
-/// to where the values go (downwards when they fall), and texts in fields, lists and headings keep off the
-/// edges and off one another.
+/// and lists without the keys, boxes and rounds to tick have an edge that is seen in the dark too, the arrow
+/// of a sorted column points to where the values go (downwards when they fall), and texts in fields, lists
+/// and headings keep off the edges and off one another.
 class RingStyle : public QProxyStyle {
   Q_OBJECT
 
@@ -21,7 +21,7 @@ public:
   QRect subElementRect(SubElement element, const QStyleOption* option, const QWidget* widget) const override;
 
 private:
-  void drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget) const;
+  void drawEdge(const QStyleOption& option, QPainter& painter, const QWidget& widget, double radius) const;
 };
 
 } // namespace planewright

@@ -34,12 +34,21 @@ namespace {
 
 constexpr int soon = 150; ///< ms after the last change
 
+QLabel* sentenceBelow(QWidget& dialog) {
+  auto* label = new QLabel(&dialog);
+  label->setWordWrap(true);
+  label->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  return label;
+}
+
 } // namespace
 
 SheetDialog::SheetDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_desk(desk) {
   setWindowTitle(tr("Calculation sheet"));
   setModal(false);
   build();
+  m_run = new SheetRun(this);
+  connect(m_run, &SheetRun::made, this, &SheetDialog::take);
   m_soon.setSingleShot(true);
   m_soon.setInterval(soon);
   connect(&m_soon, &QTimer::timeout, this, &SheetDialog::refresh);
@@ -61,9 +70,10 @@ void SheetDialog::build() {
   options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
   options->setFixedWidth(optionsWidth);
   options->setFocusPolicy(Qt::NoFocus);
-  m_sentence = new QLabel(this);
-  m_sentence->setWordWrap(true);
-  m_sentence->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  m_routes = sentenceBelow(*this);
+  m_sentence = sentenceBelow(*this);
+  m_sentence->hide();
+  tell(*m_routes, tr("The pages are being set…"), false);
   auto* middle = new QHBoxLayout;
   middle->setSpacing(14);
   middle->addWidget(options);
@@ -72,6 +82,7 @@ void SheetDialog::build() {
   middle->addWidget(pages, 1);
   auto* column = new QVBoxLayout(this);
   column->addLayout(middle, 1);
+  column->addWidget(m_routes);
   column->addWidget(m_sentence);
   column->addLayout(footer());
   const QSize frame(20, 50); // of the window manager
@@ -113,7 +124,7 @@ void SheetDialog::arrange() {
   refresh();
 }
 
-Sheet SheetDialog::sheet() const {
+SheetOrder SheetDialog::order() const {
   SheetOrder order;
   order.points = m_options->points();
   order.depth = m_options->settings().depth;
@@ -122,17 +133,27 @@ Sheet SheetDialog::sheet() const {
   order.earlier = m_earlier;
   order.earlierName = QFileInfo(m_earlierFile).completeBaseName().toStdString();
   order.translate = translation();
-  return sheetOf(m_desk.study(), order);
+  return order;
+}
+
+Sheet SheetDialog::sheet() const {
+  return sheetOf(m_desk.study(), order());
 }
 
 void SheetDialog::refresh() {
-  const Sheet made = sheet();
-  m_preview->setPages(pagesOf(made, m_options->settings().paper, translation()));
-  say(shown(made.routes), made.disagrees);
+  m_soon.stop();
+  say({});
+  m_run->ask({m_desk.study(), order(), m_options->settings().paper});
+}
+
+void SheetDialog::take(const MadeSheet& made) {
+  m_preview->setPages(made.pages);
+  tell(*m_routes, shown(made.routes), made.disagrees);
 }
 
 void SheetDialog::say(const QString& sentence, bool isWrong) {
   tell(*m_sentence, sentence, isWrong);
+  m_sentence->setVisible(!sentence.isEmpty());
 }
 
 Result<void> SheetDialog::saveTo(const QString& path) {

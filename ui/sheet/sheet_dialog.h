@@ -2,6 +2,7 @@
 #pragma once
 
 #include "ui/desk/desk.h"
+#include "ui/sheet/sheet_run.h"
 #include "ui/sheet/sheet_settings.h"
 
 #include <QDialog>
@@ -16,8 +17,8 @@ namespace planewright {
 class SheetOptions;
 class SheetPreview;
 
-/// The calculation sheet: follows the study, shows the pages as they will be, saves them as PDF or HTML and
-/// prints them. It opens with the choices used last.
+/// The calculation sheet: follows the study soon after it changes, shows the pages as they will be, saves
+/// them as PDF or HTML and prints them. It opens with the choices used last.
 class SheetDialog : public QDialog {
   Q_OBJECT
 
@@ -28,6 +29,8 @@ public:
   void setStudyFile(const QString& path);
 
   SheetPreview& preview() const { return *m_preview; }
+  /// Whether the pages that are shown are those of the study as it is now.
+  bool isUpToDate() const { return !m_soon.isActive() && !m_run->isRunning(); }
   SheetOptions& options() const { return *m_options; }
 
   /// Compares with the study in this file, which is an earlier revision; its changes become a section.
@@ -52,6 +55,8 @@ private:
   void arrange();
   void refresh();
   void say(const QString& sentence, bool isWrong = false);
+  void take(const MadeSheet& made);
+  SheetOrder order() const;
   Sheet sheet() const;
   QString offeredPath(const QString& ending) const;
   void save(const QString& ending, const QString& kind);
@@ -64,9 +69,11 @@ private:
   QString m_studyFile;
   SheetOptions* m_options = nullptr;
   SheetPreview* m_preview = nullptr;
-  QLabel* m_sentence = nullptr;
+  QLabel* m_routes = nullptr;     ///< how the two routes agree on the pages that are shown
+  QLabel* m_sentence = nullptr;   ///< what came of the last action
   std::optional<Study> m_earlier; ///< the revision that the sheet is compared with
   QString m_earlierFile;
+  SheetRun* m_run = nullptr;
   QTimer m_soon; ///< a long sheet is not made anew for each step of a drag
 };
 

@@ -30,7 +30,7 @@ void SheetOptions::buildPoints() {
   QVBoxLayout* rows = headedRows(*this, tr("Points"));
   m_points = new QListWidget(this);
   m_points->setAccessibleName(tr("Points of the sheet"));
-  m_points->setMaximumHeight(130);
+  m_points->setFixedHeight(130);
   rows->addWidget(m_points);
   listPoints();
   connect(m_points, &QListWidget::itemClicked, this, &SheetOptions::changed);

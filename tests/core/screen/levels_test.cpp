@@ -133,8 +133,9 @@ TEST(Principals, areThoseOfTheCircle) {
       EXPECT_NEAR(made[0][i], circle.s1, 5e-16 * larger);
       EXPECT_NEAR(made[1][i], circle.s2, 5e-16 * larger);
       EXPECT_NEAR(made[2][i], circle.radius, 4e-16 * circle.radius);
-      if (circle.theta1)
+      if (circle.theta1) {
         EXPECT_NEAR(made[3][i], circle.theta1->value.degrees(), 5e-14);
+      }
     }
   }
 }

@@ -49,6 +49,12 @@ protected:
     throw std::runtime_error(words);
   }
 
+  /// The pages once they are those of the study as it is now.
+  static const std::vector<Picture>& pagesOf(const SheetDialog& dialog) {
+    EXPECT_TRUE(QTest::qWaitFor([&] { return dialog.isUpToDate(); }));
+    return dialog.preview().pages();
+  }
+
   QByteArray contents(const QString& path) const {
     QFile file(path);
     return file.open(QIODevice::ReadOnly) ? file.readAll() : QByteArray();
@@ -61,21 +67,21 @@ protected:
 TEST_F(SheetDialogTest, showsThePagesAndFollowsTheStudy) {
   SheetDialog dialog(desk);
   dialog.show();
-  const std::vector<Picture> before = dialog.preview().pages();
+  const std::vector<Picture> before = pagesOf(dialog);
   EXPECT_GT(before.size(), 3u);
   desk.request({Type{{Spot::titleSubject, {}, {}}, "Tie at the eaves"}}, desk.newCommand(), {});
-  EXPECT_TRUE(QTest::qWaitFor([&] { return dialog.preview().pages().front() != before.front(); }, 2000));
+  EXPECT_NE(pagesOf(dialog).front(), before.front());
 }
 
 TEST_F(SheetDialogTest, choicesChangeTheSheetAndAreRemembered) {
   {
     SheetDialog dialog(desk);
     dialog.show();
-    const std::size_t pages = dialog.preview().pages().size();
+    const std::size_t pages = pagesOf(dialog).size();
     button<QRadioButton>(dialog, "Inputs and results").click();
-    EXPECT_LT(dialog.preview().pages().size(), pages);
+    EXPECT_LT(pagesOf(dialog).size(), pages);
     button<QRadioButton>(dialog, "Letter").click();
-    EXPECT_DOUBLE_EQ(dialog.preview().pages().front().width, 215.9);
+    EXPECT_DOUBLE_EQ(pagesOf(dialog).front().width, 215.9);
   }
   const SheetSettings remembered = rememberedSheet(QSettings());
   EXPECT_EQ(remembered.depth, Depth::results);
@@ -117,17 +123,31 @@ TEST_F(SheetDialogTest, savesPdfAndHtmlWithAndWithoutTheStudy) {
 TEST_F(SheetDialogTest, comparesWithAnotherRevision) {
   SheetDialog dialog(desk);
   dialog.show();
-  const std::size_t pages = dialog.preview().pages().size();
+  const std::size_t pages = pagesOf(dialog).size();
   const QString file = folder.filePath(QStringLiteral("earlier.pdf"));
   ASSERT_TRUE(dialog.saveTo(file));
   desk.request({Type{{Spot::sx, "P1", "G"}, "6 MPa"}}, desk.newCommand(), {});
   ASSERT_TRUE(dialog.compareWith(file));
-  EXPECT_GE(dialog.preview().pages().size(), pages);
+  EXPECT_GE(pagesOf(dialog).size(), pages);
   bool said = false;
   for (const QLabel* label : dialog.findChildren<QLabel*>())
     said = said || label->text().startsWith(QStringLiteral("earlier.pdf: 1 input(s)"));
   EXPECT_TRUE(said);
   EXPECT_FALSE(dialog.compareWith(folder.filePath(QStringLiteral("nothing.planewright"))));
+}
+
+TEST_F(SheetDialogTest, ofManySheetsAskedForAtOnceTheLastOneIsShown) {
+  SheetRun run;
+  std::vector<MadeSheet> made;
+  QObject::connect(&run, &SheetRun::made, [&](const MadeSheet& sheet) { made.push_back(sheet); });
+  SheetJob job{twoPoints(), {}, Paper::a4};
+  for (const char* subject : {"first", "second", "third", "last"}) {
+    job.study.title.subject = subject;
+    run.ask(job);
+  }
+  EXPECT_TRUE(QTest::qWaitFor([&] { return !run.isRunning(); }));
+  ASSERT_EQ(made.size(), 2u);
+  EXPECT_EQ(made.back().pages, planewright::pagesOf(sheetOf(job.study, job.order), job.paper));
 }
 
 TEST_F(SheetDialogTest, printsAllPages) {
@@ -138,15 +158,16 @@ TEST_F(SheetDialogTest, printsAllPages) {
   const QString file = folder.filePath(QStringLiteral("printed.pdf"));
   printer.setOutputFileName(file);
   ASSERT_TRUE(dialog.printTo(printer));
-  EXPECT_EQ(contents(file).count("/MediaBox"), static_cast<qsizetype>(dialog.preview().pages().size()));
+  EXPECT_EQ(contents(file).count("/MediaBox"), static_cast<qsizetype>(pagesOf(dialog).size()));
 }
 
 TEST_F(SheetDialogTest, pagesLieInsideThePreview) {
   SheetDialog dialog(desk);
   dialog.resize(760, 560);
   dialog.show();
-  SheetPreview& preview = dialog.preview();
+  ASSERT_FALSE(pagesOf(dialog).empty());
   QTest::qWait(20);
+  SheetPreview& preview = dialog.preview();
   for (std::size_t i = 0; i < preview.pages().size(); ++i) {
     EXPECT_GE(preview.pageRect(i).left(), 0);
     EXPECT_LE(preview.pageRect(i).right(), preview.width());
