@@ -77,7 +77,7 @@ private:
     m_out += '\n';
     line("  ", PW_TEXT("Readout", "Check %1: %2").with(setup.id).with(checkName(setup)));
     line("    ", PW_TEXT("Readout", "Limit: %1 (%2)")
-                     .with(rowOf(setup.criterion).equation)
+                     .with(symbol(rowOf(setup.criterion).equation))
                      .with(rowOf(setup.criterion).source));
   }
 

@@ -52,12 +52,12 @@ public:
   }
 
 private:
-  void add(Text quantity, double first, double second, double scale) {
-    m_rows.push_back(
-        {m_readout.point, m_state.combination, std::move(quantity), first, second, scale == 0 ? 1 : scale});
+  void add(Text quantity, const char* unit, double first, double second, double scale) {
+    m_rows.push_back({m_readout.point, m_state.combination, std::move(quantity), unit, first, second,
+                      scale == 0 ? 1 : scale});
   }
   void stress(Text quantity, double first, double second) {
-    add(std::move(quantity), first, second, m_scale);
+    add(std::move(quantity), "MPa", first, second, m_scale);
   }
 
   Matrix summed() const {
@@ -79,7 +79,7 @@ private:
     stress(symbol("σ_{1}"), circle.s1, solver.eigenvalues()(1));
     stress(symbol("σ_{2}"), circle.s2, solver.eigenvalues()(0));
     stress(PW_TEXT("Route", "trace σ_{1} + σ_{2}"), circle.s1 + circle.s2, tensor.trace());
-    add(PW_TEXT("Route", "determinant σ_{1} σ_{2}"), circle.s1 * circle.s2, tensor.determinant(),
+    add(PW_TEXT("Route", "determinant σ_{1} σ_{2}"), "MPa²", circle.s1 * circle.s2, tensor.determinant(),
         m_scale * m_scale);
     if (!circle.theta1)
       return;
@@ -126,7 +126,7 @@ private:
     atLimit.scale *= first.multiplier;
     atLimit.circle = circleOf(atLimit.stress, atLimit.scale, atLimit.sz);
     if (const Result<Judge> judge = judgeOf(m_readout, atLimit, index))
-      add(PW_TEXT("Route", "%1: utilisation at the load multiplier").with(setup.id), 1,
+      add(PW_TEXT("Route", "%1: utilisation at the load multiplier").with(setup.id), "", 1,
           judge->utilisation(first.angle), 1);
   }
 
@@ -140,8 +140,8 @@ private:
                                                  Angle::fromDegrees((2.0 * i / scanSteps - 1) *
                                                                     setup.band->tolerance.degrees())));
     // A scan may miss the worst, never beat it.
-    add(PW_TEXT("Route", "%1: worst in the band is reached by no direction of a scan").with(setup.id), worst,
-        std::max(found, worst), std::max(1.0, worst));
+    add(PW_TEXT("Route", "%1: worst in the band is reached by no direction of a scan").with(setup.id), "",
+        worst, std::max(found, worst), std::max(1.0, worst));
   }
 
   const Readout& m_readout;

@@ -10,7 +10,8 @@ struct RouteRow {
   std::string point;
   std::string combination;
   Text quantity;     ///< "σ_{1}"
-  double first = 0;  ///< as reported: N/mm2, or a plain number
+  std::string unit;  ///< "MPa"; empty of a plain number
+  double first = 0;  ///< as reported
   double second = 0; ///< by the second route
   double scale = 1;  ///< what the difference is measured against: the size of the terms of the state
   double difference() const;

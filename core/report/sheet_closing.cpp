@@ -20,15 +20,15 @@ SheetTable routeTable(const std::vector<RouteRow>& rows, bool withPlace) {
   if (withPlace)
     table.columns = {{PW_TEXT("Sheet", "Point, combination"), false}};
   table.columns.push_back({PW_TEXT("Sheet", "Quantity"), false});
-  table.columns.push_back({withUnit(PW_TEXT("Sheet", "First route"), "MPa")});
-  table.columns.push_back({withUnit(PW_TEXT("Sheet", "Second route"), "MPa")});
+  table.columns.push_back({PW_TEXT("Sheet", "First route")});
+  table.columns.push_back({PW_TEXT("Sheet", "Second route")});
   table.columns.push_back({PW_TEXT("Sheet", "Difference")});
   constexpr int decimals = 9;
   for (const RouteRow& row : rows) {
     std::vector<Text>& cells = table.rows.emplace_back();
     if (withPlace)
       cells.push_back(symbol("%1, %2").with(row.point).with(row.combination));
-    cells.push_back(row.quantity);
+    cells.push_back(withUnit(row.quantity, row.unit));
     cells.push_back(verbatim(shownNumber(row.first, decimals)));
     cells.push_back(verbatim(shownNumber(row.second, decimals)));
     cells.push_back(verbatim(shownDifference(row.difference())));

@@ -28,9 +28,10 @@ th, td { padding: .1em .8em .1em 0; }
 .alarm p:first-child { color: #75222B; font-weight: bold; }
 .box p:first-child, .strong { font-weight: bold; }
 .caution { border-left: 3px solid #75222B; padding-left: .8em; }
-.step { display: grid; grid-template-columns: 5rem 1fr 7rem 4.5rem 2.5rem; break-inside: avoid; margin: .45em 0; }
+.step { display: grid; grid-template-columns: 5rem minmax(0, 1fr) 7rem 4.5rem 2.5rem; row-gap: .3em; break-inside: avoid; margin: .7em 0; }
+.step math { math-style: normal; }
 .step .name { grid-column: 2 / -1; font-size: .8em; }
-.step .put { grid-column: 2; color: #4E5A60; }
+.step .put { grid-column: 2 / -1; color: #4E5A60; }
 .step b { text-align: right; padding-right: .4em; }
 .step .ref { text-align: right; color: #4E5A60; font-size: .8em; }
 .sign td { border-top: 1px solid; width: 33%; vertical-align: top; }

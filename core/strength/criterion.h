@@ -80,7 +80,7 @@ enum class ActsOn { line, plane, principal };
 struct CriterionRow {
   Criterion criterion;
   ActsOn actsOn;
-  const char* equation; ///< the limit, in symbols of the trade
+  const char* equation; ///< the limit, in symbols of the trade, the source of a symbol()
   Text domain;          ///< what it is meant for; empty: any state of plane stress
   Text source;
 };

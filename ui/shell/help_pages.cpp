@@ -64,7 +64,7 @@ QString criterionRow(Criterion criterion) {
   const CriterionRow& row = rowOf(criterion);
   const QString domain = row.domain.empty() ? QString() : QStringLiteral("<br>") + shown(row.domain);
   return QStringLiteral("<tr><td><b>%1</b></td><td>%2%3<br><i>%4</i></td></tr>")
-      .arg(shown(labelOf(criterion)), QString::fromUtf8(row.equation), domain, shown(row.source));
+      .arg(shown(labelOf(criterion)), shownRich(symbol(row.equation)), domain, shown(row.source));
 }
 
 QString strength() {

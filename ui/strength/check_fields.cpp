@@ -125,7 +125,7 @@ void CheckFields::listCriteria() {
         ask(withCriterion(shownPoint(m_desk.study()), *one, criterion), tr("criterion of the check"));
     });
     const CriterionRow& row = rowOf(criterion);
-    action->setToolTip(QString::fromUtf8(row.equation) + QLatin1Char('\n') + shown(row.source));
+    action->setToolTip(shown(symbol(row.equation)) + QLatin1Char('\n') + shown(row.source));
     action->setCheckable(true);
     action->setChecked(criterion == now->criterion);
   }
@@ -159,7 +159,7 @@ void CheckFields::refresh() {
     return;
   m_material->setText(fromUtf8(now->material));
   m_criterion->setText(shown(labelOf(now->criterion)));
-  m_criterion->setToolTip(QString::fromUtf8(rowOf(now->criterion).equation) + QLatin1Char('\n') +
+  m_criterion->setToolTip(shown(symbol(rowOf(now->criterion).equation)) + QLatin1Char('\n') +
                           shown(rowOf(now->criterion).source));
   const std::string& direction = now->line.empty() ? now->plane : now->line;
   m_direction->setText(direction.empty() ? tr("every direction") : fromUtf8(direction));
