@@ -96,7 +96,7 @@ study's count.
 --study STUDY          combinations, and the point with the checks
 --point NAME           that point; without it, the one that the study shows, else its first
 --check ID             only this check; may be repeated; without it, all that can judge a field
---column NAME=HEADING  what a column with another heading is: "sx [psi]=SXX"; may be repeated
+--column NAME=HEADING  what a column with another heading is: "sx [psi]=SXX"; "unread" passes it over; may be repeated
 --leave-out            goes on without faulty rows; without it they stop the run and nothing is written
 --except NAME          leaves out a point or region, or all whose names begin so ("corner*"); may be repeated
 --except-list FILE     leaves out the points that are named in it, one a line

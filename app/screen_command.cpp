@@ -9,15 +9,10 @@
 #include "app/study_source.h"
 #include "core/quantity/format.h"
 #include "core/record/heading.h"
-#include "core/screen/field_csv.h"
 #include "core/screen/leave_out.h"
-#include "core/screen/screened.h"
 #include "core/screen/summary_text.h"
-#include "ui/files/file_aside.h"
+#include "ui/files/field_file.h"
 #include "ui/files/file_bytes.h"
-#include "ui/files/file_pieces.h"
-
-#include <unistd.h>
 
 namespace planewright {
 
@@ -87,45 +82,33 @@ private:
   }
 
   Outcome<void> readTable() {
-    Result<FilePieces> file = FilePieces::of(m_order.table);
-    if (!file)
-      return tl::unexpected(failedToRead(m_order.table, std::move(file).error()));
-    FieldReader reader(m_study, m_plan.acts, m_order.headings);
-    for (std::size_t done = 0;;) {
-      const Result<std::string_view> piece = file->next([] { return !Interrupts::came(); });
-      if (Interrupts::came())
+    const auto watch = [&](std::size_t done, std::size_t all) {
+      m_progress.tell(PW_TEXT("Command", "Reading"), done, all);
+      return !Interrupts::came();
+    };
+    tl::expected<FieldReading, UnreadField> reading =
+        fieldIn(m_order.table, m_study, m_plan, m_order.headings, watch);
+    if (!reading) {
+      UnreadField& unread = reading.error();
+      switch (unread.why) {
+      case UnreadField::Why::ended:
         return interrupted();
-      if (!piece)
-        return tl::unexpected(failedToRead(m_order.table, piece.error()));
-      if (piece->empty())
-        break;
-      if (Results<void> taken = reader.take(*piece); !taken)
-        return refused(std::move(taken).error());
-      done += piece->size();
-      m_progress.tell(PW_TEXT("Command", "Reading"), done, file->size());
+      case UnreadField::Why::unreadable:
+        return tl::unexpected(failedToRead(m_order.table, std::move(unread.problems.front())));
+      default:
+        return refused(std::move(unread.problems));
+      }
     }
-    Results<FieldReading> reading = reader.finish();
-    if (!reading)
-      return refused(std::move(reading).error());
     m_reading = *std::move(reading);
-    if (m_reading.rows == 0)
-      return wrongUse(aboutTable(PW_TEXT("Command", "The table has a header and no row."),
-                                 PW_TEXT("Command", "Give it a row for each point.")));
     if (m_reading.isSound() || m_order.leavesOut)
       return {};
     Problems problems = m_reading.faults;
     problems.push_back(aboutTable(
-        leftOutWords(
-            PW_TEXT("Command", "Rows with a fault: %1 of %2; points that lack something: %3 of %4.")),
+        withFaultCounts(
+            PW_TEXT("Command", "Rows with a fault: %1 of %2; points that lack something: %3 of %4."),
+            m_reading),
         PW_TEXT("Command", "Mend them, or go on without them by --leave-out. Nothing was written.")));
     return refused(std::move(problems));
-  }
-
-  Text leftOutWords(const Text& words) const {
-    return words.with(count(m_reading.faultyRows))
-        .with(count(m_reading.rows))
-        .with(count(m_reading.incompletePoints))
-        .with(count(m_reading.field.size()));
   }
 
   Outcome<void> refused(Problems problems) const {
@@ -189,27 +172,15 @@ private:
   }
 
   Outcome<void> write(const FieldResults& results) {
-    Result<void> written;
-    const auto into = [&](const auto& put) {
-      return writeInto(results, [&](std::string_view bytes) {
-        m_progress.tell(PW_TEXT("Command", "Writing"), 0, 0);
-        written = put(bytes);
-        return written && !Interrupts::came();
-      });
-    };
-    if (m_order.output == "-") {
-      into([](std::string_view bytes) { return writeTo(STDOUT_FILENO, bytes, "standard output"); });
-      return written ? Outcome<void>() : machineFailed(written.error());
-    }
-    Result<FileAside> file = FileAside::to(m_order.output);
-    if (!file)
-      return machineFailed(std::move(file).error());
-    const bool isWhole = into([&](std::string_view bytes) { return file->write(bytes); });
-    if (written && !isWhole)
-      return interrupted();
-    if (written)
-      written = file->finish();
-    return written ? Outcome<void>() : machineFailed(written.error());
+    const Result<bool> isWhole = writeField(
+        m_order.output, [&](const Sink& sink) { return writeInto(results, sink); },
+        [&] {
+          m_progress.tell(PW_TEXT("Command", "Writing"), 0, 0);
+          return !Interrupts::came();
+        });
+    if (!isWhole)
+      return machineFailed(isWhole.error());
+    return *isWhole || m_order.output == "-" ? Outcome<void>() : interrupted();
   }
 
   Delivery delivery(const FieldResults& results, const FieldSummary& summary) const {
@@ -220,8 +191,9 @@ private:
     }
     if (!m_reading.isSound())
       delivery.facts.push_back(
-          leftOutWords(PW_TEXT("Command", "Left out: %1 of %2 rows, for a fault; %3 of %4 points, which lack "
-                                          "something.")));
+          withFaultCounts(PW_TEXT("Command", "Left out: %1 of %2 rows, for a fault; %3 of %4 points, which "
+                                             "lack something."),
+                          m_reading));
     if (summary.leftOut > 0)
       delivery.facts.push_back(
           PW_TEXT("Command", "Points left out on request: %1.").with(count(summary.leftOut)));

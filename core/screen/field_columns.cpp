@@ -67,13 +67,30 @@ public:
       : m_study(study), m_header(header), m_mapped(mapped) {}
 
   Results<FieldColumns> read() {
+    if (takeAll())
+      checkWhole();
+    if (!m_problems.empty())
+      return tl::unexpected(std::move(m_problems));
+    return std::move(m_columns);
+  }
+
+  std::vector<NamedColumn> named() {
+    std::vector<NamedColumn> named;
+    if (takeAll())
+      for (std::size_t i = 0; i < m_columns.columns.size(); ++i)
+        named.push_back({m_columns.columns[i], m_isOfCase[i]});
+    return named;
+  }
+
+private:
+  bool takeAll() {
     m_columns.separator = separatorOf(m_header);
     m_columns.isGiven.assign(m_study.cases.size(), false);
     std::vector<string> cells;
     if (!cutRow(m_header, m_columns.separator, cells)) {
       add(0, {}, PW_TEXT("Field", "A quote in the header is not closed."),
           PW_TEXT("Field", "Close it in the same line."));
-      return tl::unexpected(std::move(m_problems));
+      return false;
     }
     for (const string& cell : cells)
       m_columns.columns.push_back({string(withoutBlanks(cell)), FieldRole::unread, 0, Unit{}});
@@ -81,13 +98,9 @@ public:
       checkMapped(one);
     for (std::size_t i = 0; i < m_columns.columns.size(); ++i)
       take(i);
-    checkWhole();
-    if (!m_problems.empty())
-      return tl::unexpected(std::move(m_problems));
-    return std::move(m_columns);
+    return true;
   }
 
-private:
   static bool isHeading(const string& written, const string& wanted) {
     return written == wanted || headingOf(written).name == wanted;
   }
@@ -101,10 +114,11 @@ private:
     Heading name = headingOf(one.name);
     FieldColumn column;
     nameColumn(column, name.name);
-    if (column.role == FieldRole::unread)
+    if (column.role == FieldRole::unread && name.name != wordOf(FieldRole::unread))
       add(0, one.name, PW_TEXT("Field", "No column can be “%1”.").with(one.name),
-          PW_TEXT("Field", "Take point, layer, case, axes, line, region, x, y, sx, sy, txy, or a stress with "
-                           "its case: “sx G”."));
+          PW_TEXT("Field",
+                  "Take point, layer, case, axes, line, region, x, y, sx, sy, txy, a stress with its "
+                  "case (“sx G”), or unread."));
   }
 
   void nameColumn(FieldColumn& column, string_view name) const {
@@ -261,6 +275,16 @@ const std::vector<Named<FieldRole>>& namesOf() {
 
 bool FieldColumns::has(FieldRole role) const {
   return std::ranges::find(columns, role, &FieldColumn::role) != columns.end();
+}
+
+string nameOfColumn(const Study& study, FieldRole role, std::optional<std::size_t> loadCase) {
+  string name(wordOf(role));
+  return loadCase ? name + " " + study.cases[*loadCase].id : name;
+}
+
+std::vector<NamedColumn> namedColumnsOf(const Study& study, string_view header,
+                                        const std::vector<MappedHeading>& mapped) {
+  return HeaderReader(study, header, mapped).named();
 }
 
 Results<FieldColumns> fieldColumnsOf(const Study& study, string_view header,

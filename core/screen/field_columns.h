@@ -20,11 +20,14 @@ struct FieldColumn {
 };
 
 /// A heading that the caller maps: `name` is one of the names below ("sx", "point", "sx G"), with a unit
-/// behind it if the heading has none or another one counts.
+/// behind it if the heading has none or another one counts; "unread" of a column that is passed over.
 struct MappedHeading {
   std::string name;
   std::string heading;
 };
+
+/// The name by which a heading is mapped to this role: "sx G" of a case of the study, "sx" without one.
+std::string nameOfColumn(const Study& study, FieldRole role, std::optional<std::size_t> loadCase = {});
 
 /// The columns of a table, from its header.
 struct FieldColumns {
@@ -46,5 +49,13 @@ struct FieldColumns {
 /// a mapped heading that the table does not have.
 Results<FieldColumns> fieldColumnsOf(const Study& study, std::string_view header,
                                      const std::vector<MappedHeading>& mapped = {});
+
+/// What each column of a header would be, sound or not; nothing of one that cannot be cut into cells.
+struct NamedColumn {
+  FieldColumn column;
+  bool isOfCase = false; ///< the heading names its case
+};
+std::vector<NamedColumn> namedColumnsOf(const Study& study, std::string_view header,
+                                        const std::vector<MappedHeading>& mapped = {});
 
 } // namespace planewright

@@ -8,8 +8,8 @@
 namespace planewright {
 
 namespace {
-
 constexpr double nearlyAllShare = 0.999;
+} // namespace
 
 std::size_t binOf(double utilisation) {
   for (std::size_t bin = 0; bin < binEnds.size(); ++bin)
@@ -17,8 +17,6 @@ std::size_t binOf(double utilisation) {
       return bin;
   return binEnds.size();
 }
-
-} // namespace
 
 FieldSummary summaryOf(const Field& field, const FieldResults& results) {
   FieldSummary summary;

@@ -12,6 +12,8 @@ namespace planewright {
 inline constexpr std::array<double, 13> binEnds = {0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7,
                                                    0.8, 0.9, 1,   1.2, 1.5, 2};
 using Histogram = std::array<std::size_t, binEnds.size() + 1>;
+/// The bin that a utilisation falls into.
+std::size_t binOf(double utilisation);
 
 /// What all points of a field come to.
 struct FieldSummary {

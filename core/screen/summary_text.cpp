@@ -30,7 +30,8 @@ public:
   SummaryWriter(const ScreenPlan& plan, const FieldReading& reading, const FieldResults& results,
                 const FieldSummary& summary, const Translate& translate)
       : m_plan(plan), m_field(reading.field), m_reading(reading), m_results(results), m_summary(summary),
-        m_worst(worstOf(results, shownPoints)), m_translate(translate) {}
+        m_worst(worstOf(results, shownPoints)),
+        m_sentences(outcomeSentences(reading.field, results, summary)), m_translate(translate) {}
 
   std::string written(const Readout& readout, const std::vector<LeftOut>& leftOut) {
     judgedBy(readout);
@@ -66,11 +67,7 @@ private:
              .with(count(m_reading.rows))
              .with(count(m_reading.faultyRows))
              .with(count(m_reading.notFinite)));
-    line(PW_TEXT("Screen", "Points: %1, judged: %2, incomplete and not judged: %3, left out on request: %4.")
-             .with(count(m_summary.points))
-             .with(count(m_summary.judged))
-             .with(count(m_summary.incomplete))
-             .with(count(m_summary.leftOut)));
+    line(m_sentences[0]);
     for (const LeftOut& one : leftOut)
       indented(PW_TEXT("Screen", "Points left out by “%1”: %2").with(one.name).with(count(one.points)));
     for (const FieldColumn& column : m_reading.columns.columns)
@@ -79,17 +76,9 @@ private:
   }
 
   void outcome() {
-    const std::size_t greatest = m_worst.front();
-    line(PW_TEXT("Screen", "Exceeding: %1 of %2 judged points.")
-             .with(count(m_summary.exceeding))
-             .with(count(m_summary.judged)));
-    line(PW_TEXT("Screen", "Greatest utilisation: %1 at point %2; 99.9 % of the points do not exceed %3.")
-             .with(shownUtilisation(m_results[greatest].utilisation))
-             .with(m_field.nameOf(greatest))
-             .with(shownUtilisation(m_summary.nearlyAll)));
-    indented(PW_TEXT("Screen",
-                     "Where these are far apart the greatest stands for few points, as at a singular "
-                     "corner, and is no verdict by itself."));
+    line(m_sentences[1]);
+    line(m_sentences[2]);
+    indented(m_sentences[3]);
   }
 
   void worst() {
@@ -175,11 +164,38 @@ private:
   const FieldResults& m_results;
   const FieldSummary& m_summary;
   std::vector<std::uint32_t> m_worst; ///< the worst first
+  std::vector<Text> m_sentences;
   const Translate& m_translate;
   std::string m_out;
 };
 
 } // namespace
+
+Text withFaultCounts(const Text& words, const FieldReading& reading) {
+  return words.with(count(reading.faultyRows))
+      .with(count(reading.rows))
+      .with(count(reading.incompletePoints))
+      .with(count(reading.field.size()));
+}
+
+std::vector<Text> outcomeSentences(const Field& field, const FieldResults& results,
+                                   const FieldSummary& summary) {
+  const std::size_t greatest = worstOf(results, 1).front();
+  return {PW_TEXT("Screen", "Points: %1, judged: %2, incomplete and not judged: %3, left out on request: %4.")
+              .with(count(summary.points))
+              .with(count(summary.judged))
+              .with(count(summary.incomplete))
+              .with(count(summary.leftOut)),
+          PW_TEXT("Screen", "Exceeding: %1 of %2 judged points.")
+              .with(count(summary.exceeding))
+              .with(count(summary.judged)),
+          PW_TEXT("Screen", "Greatest utilisation: %1 at point %2; 99.9 % of the points do not exceed %3.")
+              .with(shownUtilisation(results[greatest].utilisation))
+              .with(field.nameOf(greatest))
+              .with(shownUtilisation(summary.nearlyAll)),
+          PW_TEXT("Screen", "Where these are far apart the greatest stands for few points, as at a singular "
+                            "corner, and is no verdict by itself.")};
+}
 
 std::string summaryText(const Study& study, std::string_view point, const ScreenPlan& plan,
                         const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,

@@ -13,6 +13,14 @@ struct LeftOut {
   std::size_t points = 0;
 };
 
+/// "Rows with a fault: %1 of %2; points that lack something: %3 of %4." and its like, with the counts.
+Text withFaultCounts(const Text& words, const FieldReading& reading);
+
+/// Points and how many of them were judged; how many exceed; the greatest utilisation beside the one that
+/// 99.9 % of the points do not exceed, and what that means. At least one point is judged.
+std::vector<Text> outcomeSentences(const Field& field, const FieldResults& results,
+                                   const FieldSummary& summary);
+
 /// What is said of a field beside its results, as lines of text: by what it was judged, what was read and
 /// what was left out, how many points exceed, the greatest utilisation beside the one that 99.9 % of the
 /// points do not exceed, the ten worst points, the histogram, and the cautions that belong to the checks.

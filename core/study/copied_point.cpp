@@ -35,20 +35,23 @@ std::vector<Place> thingsIn(const Point& point) {
 
 } // namespace
 
+Edits editsThatMakePoint(const Study& study, const Point& point, std::optional<std::size_t> index) {
+  Study with = study;
+  with.points.push_back(point);
+  Edits edits = {Insert{{Spot::point, point.name, {}}, index}};
+  for (const Place& thing : thingsIn(point))
+    edits.push_back(Insert{thing, std::nullopt});
+  for (const Place& place : typedPlacesIn(point))
+    edits.push_back(Type{place, textAt(with, place).value_or(std::string())});
+  return edits;
+}
+
 Edits editsThatCopyPoint(const Study& study, const std::string& from, const std::string& to) {
   const Point* point = findPoint(study, from);
   assert(point);
-  const auto index = static_cast<std::size_t>(point - study.points.data()) + 1;
-  Edits edits = {Insert{{Spot::point, to, {}}, index}};
-  const auto of = [&to](Place place) {
-    place.owner = to;
-    return place;
-  };
-  for (const Place& thing : thingsIn(*point))
-    edits.push_back(Insert{of(thing), std::nullopt});
-  for (const Place& place : typedPlacesIn(*point))
-    edits.push_back(Type{of(place), textAt(study, place).value_or(std::string())});
-  return edits;
+  Point copy = *point;
+  copy.name = to;
+  return editsThatMakePoint(study, copy, static_cast<std::size_t>(point - study.points.data()) + 1);
 }
 
 std::string freshPointName(const Study& study, const std::string& like) {

@@ -5,6 +5,10 @@
 
 namespace planewright {
 
+/// What makes a point with all that is said of it at `index`, or at the end. The study has no point of its
+/// name.
+Edits editsThatMakePoint(const Study& study, const Point& point, std::optional<std::size_t> index = {});
+
 /// What makes a point `to` right behind `from` with all that was said of it.
 Edits editsThatCopyPoint(const Study& study, const std::string& from, const std::string& to);
 

@@ -18,6 +18,7 @@ class CircleView;
 class ElementView;
 class EvidenceDialog;
 class FigureDialog;
+class ScreenDialog;
 class SheetDialog;
 class GivenPanel;
 class HelpWindow;
@@ -107,6 +108,7 @@ private:
   void copyFromFocus();
   void pasteTable();
   void importPoints();
+  void screenPoints();
   void showTable(std::string table, const QString& title);
   void copyStresses(const std::vector<Point>& points, const QString& said);
   void copyFigureNow();
@@ -135,6 +137,7 @@ private:
   int m_toldStep = 0; ///< where the undo stack stood when a step was last told
   QPointer<FigureDialog> m_figure;
   QPointer<SheetDialog> m_sheet;
+  QPointer<ScreenDialog> m_screen;
   QPointer<HelpWindow> m_help;
   QPointer<EvidenceDialog> m_evidence;
   QPointer<TitleDialog> m_title;

@@ -5,8 +5,10 @@
 #include "ui/figure/figure_sharing.h"
 #include "ui/given/given_panel.h"
 #include "ui/look/look.h"
+#include "ui/look/strip.h"
 #include "ui/planes/plane_table.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/screen/screen_dialog.h"
 #include "ui/sheet/evidence_dialog.h"
 #include "ui/sheet/sheet_dialog.h"
 #include "ui/shell/appearance.h"
@@ -21,7 +23,6 @@
 #include "ui/shell/recent_files.h"
 #include "ui/shell/slip_dialog.h"
 #include "ui/shell/state_bar.h"
-#include "ui/shell/strip.h"
 #include "ui/shell/things_dialog.h"
 #include "ui/shell/title_dialog.h"
 #include "ui/shell/working_dialog.h"
@@ -80,6 +81,7 @@ void MainWindow::addFileMenu() {
     settleDrafts();
     m_filing->writeTable();
   });
+  add(menu, tr("Screen points…"), {}, [this] { screenPoints(); });
   menu.addSeparator();
   add(menu, tr("&Export figure…"), Qt::CTRL | Qt::Key_E, [this] { arrangeFigure(); });
   add(menu, tr("&Copy figure"), {}, [this] { copyFigureNow(); });
@@ -270,6 +272,15 @@ void MainWindow::showEvidence() {
   if (!m_evidence)
     m_evidence = new EvidenceDialog(this);
   raised(*m_evidence);
+}
+
+void MainWindow::screenPoints() {
+  settleDrafts();
+  if (!m_screen) {
+    m_screen = new ScreenDialog(m_desk, this);
+    connect(m_screen, &ScreenDialog::opened, this, &MainWindow::showPointPage);
+  }
+  bringUp(m_screen);
 }
 
 void MainWindow::copyFigureNow() {

@@ -5,12 +5,12 @@
 #include "core/study/material_edits.h"
 #include "ui/entry/draft_edit.h"
 #include "ui/look/look.h"
+#include "ui/look/strip.h"
 #include "ui/shell/choice_box.h"
 #include "ui/shell/material_fields.h"
 #include "ui/shell/material_words.h"
 #include "ui/shell/materials_list.h"
 #include "ui/shell/problem_list.h"
-#include "ui/shell/strip.h"
 
 #include <QEvent>
 #include <QHBoxLayout>

@@ -4,7 +4,7 @@
 #include "core/record/pasted_points.h"
 #include "ui/entry/complaint.h"
 #include "ui/look/look.h"
-#include "ui/shell/paste_header.h"
+#include "ui/look/meaning_header.h"
 #include "ui/shell/paste_model.h"
 
 #include <QCheckBox>
@@ -72,6 +72,29 @@ protected:
   }
 };
 
+QStringList meaningsOfColumns() {
+  QStringList words = {PasteDialog::tr("choose…")};
+  for (const Named<ColumnKind>& row : namesOf<ColumnKind>())
+    words << shown(row.label);
+  return words;
+}
+
+std::vector<int> chosenIn(const std::vector<PastedColumn>& columns) {
+  std::vector<int> chosen;
+  chosen.reserve(columns.size());
+  for (const PastedColumn& column : columns)
+    chosen.push_back(column.kind ? 1 + static_cast<int>(*column.kind) : 0);
+  return chosen;
+}
+
+std::vector<std::optional<ColumnKind>> kindsIn(const std::vector<int>& chosen) {
+  std::vector<std::optional<ColumnKind>> kinds;
+  kinds.reserve(chosen.size());
+  for (const int one : chosen)
+    kinds.push_back(one > 0 ? std::optional(static_cast<ColumnKind>(one - 1)) : std::nullopt);
+  return kinds;
+}
+
 void makeNote(QLabel& label, const QString& name) {
   label.setWordWrap(true);
   label.setTextFormat(Qt::PlainText);
@@ -82,7 +105,7 @@ void makeNote(QLabel& label, const QString& name) {
 
 PasteDialog::PasteDialog(Desk& desk, std::string table, const QString& title, QWidget* parent)
     : QDialog(parent), m_desk(desk), m_text(std::move(table)), m_model(new PasteModel(*this)),
-      m_meanings(new PasteHeader(this)), m_table(new QTableView(this)),
+      m_meanings(new MeaningHeader(meaningsOfColumns(), this)), m_table(new QTableView(this)),
       m_header(new QCheckBox(tr("The first row has &headings"), this)), m_count(new QLabel(this)),
       m_complaint(new Complaint(this)), m_additions(new QLabel(this)), m_cautions(new QLabel(this)),
       m_next(new QPushButton(tr("&Next wrong row"), this)), m_take(new QPushButton(tr("&Take"), this)) {
@@ -134,11 +157,11 @@ void PasteDialog::connectParts() {
     m_choices = {{}, on};
     preview();
   });
-  connect(m_meanings, &PasteHeader::meaningChosen, this, [this] {
-    m_choices.kinds = m_meanings->chosen();
+  connect(m_meanings, &MeaningHeader::meaningChosen, this, [this] {
+    m_choices.kinds = kindsIn(m_meanings->chosen());
     preview();
   });
-  connect(m_meanings, &PasteHeader::meaningEntered, this, [this](int column) {
+  connect(m_meanings, &MeaningHeader::meaningEntered, this, [this](int column) {
     const int row = std::max(0, m_table->currentIndex().row());
     m_table->scrollTo(m_model->index(row, column));
   });
@@ -167,7 +190,7 @@ QString PasteDialog::complaint() const {
 void PasteDialog::preview() {
   m_model->put(pastedPoints(m_desk.study(), m_text, m_choices));
   const PastedPoints& pasted = m_model->pasted();
-  m_meanings->show(pasted.columns);
+  m_meanings->show(chosenIn(pasted.columns));
   QWidget* before = m_header;
   for (int i = 0; i < m_meanings->meanings(); ++i) {
     setTabOrder(before, &m_meanings->meaning(i));

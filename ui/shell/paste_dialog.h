@@ -15,7 +15,7 @@ class QTableView;
 namespace planewright {
 
 class Complaint;
-class PasteHeader;
+class MeaningHeader;
 class PasteModel;
 struct PastedPoints;
 
@@ -55,7 +55,7 @@ private:
   std::string m_text;
   ColumnChoices m_choices;
   PasteModel* m_model;
-  PasteHeader* m_meanings;
+  MeaningHeader* m_meanings;
   QTableView* m_table;
   QCheckBox* m_header;
   QLabel* m_count;

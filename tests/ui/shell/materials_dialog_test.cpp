@@ -2,11 +2,11 @@
 #include "core/study/material_edits.h"
 #include "shell_test.h"
 #include "ui/entry/draft_edit.h"
+#include "ui/look/strip.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/material_fields.h"
 #include "ui/shell/materials_dialog.h"
 #include "ui/shell/materials_list.h"
-#include "ui/shell/strip.h"
 
 #include <QComboBox>
 #include <QLabel>

@@ -1,9 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "shell_test.h"
+#include "ui/look/strip.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/paste_dialog.h"
 #include "ui/shell/status_line.h"
-#include "ui/shell/strip.h"
 
 #include <QApplication>
 #include <QCheckBox>

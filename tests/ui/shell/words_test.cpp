@@ -1,11 +1,11 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "shell_test.h"
+#include "ui/look/strip.h"
 #include "ui/shell/body.h"
 #include "ui/shell/change_words.h"
 #include "ui/shell/filter_list.h"
 #include "ui/shell/picker.h"
 #include "ui/shell/status_line.h"
-#include "ui/shell/strip.h"
 
 #include <QLabel>
 #include <QLineEdit>

@@ -1,7 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/shell/paste_header.h"
-
-#include "ui/look/look.h"
+#include "ui/look/meaning_header.h"
 
 #include <QComboBox>
 #include <QEvent>
@@ -10,56 +8,60 @@
 
 namespace planewright {
 
-PasteHeader::PasteHeader(QWidget* parent) : QHeaderView(Qt::Horizontal, parent) {
+MeaningHeader::MeaningHeader(const QStringList& meanings, QWidget* parent)
+    : QHeaderView(Qt::Horizontal, parent), m_words(meanings) {
   setDefaultAlignment(Qt::AlignLeft | Qt::AlignVCenter);
   setStretchLastSection(true);
-  connect(this, &QHeaderView::sectionResized, this, &PasteHeader::place);
+  connect(this, &QHeaderView::sectionResized, this, &MeaningHeader::place);
 }
 
-void PasteHeader::show(const std::vector<PastedColumn>& columns) {
-  while (m_meanings.size() > columns.size()) {
+void MeaningHeader::setMeanings(const QStringList& meanings) {
+  if (meanings == m_words)
+    return;
+  m_words = meanings;
+  show({});
+}
+
+void MeaningHeader::show(const std::vector<int>& chosen) {
+  while (m_meanings.size() > chosen.size()) {
     delete m_meanings.back();
     m_meanings.pop_back();
   }
-  while (m_meanings.size() < columns.size())
+  while (m_meanings.size() < chosen.size())
     addMeaning();
-  for (std::size_t i = 0; i < columns.size(); ++i)
-    m_meanings[i]->setCurrentIndex(columns[i].kind ? 1 + static_cast<int>(*columns[i].kind) : 0);
+  for (std::size_t i = 0; i < chosen.size(); ++i)
+    m_meanings[i]->setCurrentIndex(chosen[i]);
   updateGeometry();
   place();
 }
 
-void PasteHeader::addMeaning() {
+void MeaningHeader::addMeaning() {
   auto* list = new QComboBox(viewport());
-  list->addItem(tr("choose…"));
-  for (const Named<ColumnKind>& row : namesOf<ColumnKind>())
-    list->addItem(shown(row.label));
+  list->addItems(m_words);
   list->setAccessibleName(tr("meaning of column %1").arg(m_meanings.size() + 1));
   list->installEventFilter(this);
-  connect(list, &QComboBox::activated, this, &PasteHeader::meaningChosen);
+  connect(list, &QComboBox::activated, this, [this, column = meanings()] { Q_EMIT meaningChosen(column); });
   m_meanings.push_back(list);
   list->show();
 }
 
-std::vector<std::optional<ColumnKind>> PasteHeader::chosen() const {
-  std::vector<std::optional<ColumnKind>> kinds;
-  kinds.reserve(m_meanings.size());
+std::vector<int> MeaningHeader::chosen() const {
+  std::vector<int> chosen;
+  chosen.reserve(m_meanings.size());
   for (const QComboBox* list : m_meanings)
-    kinds.push_back(list->currentIndex() > 0
-                        ? std::optional(static_cast<ColumnKind>(list->currentIndex() - 1))
-                        : std::nullopt);
-  return kinds;
+    chosen.push_back(list->currentIndex());
+  return chosen;
 }
 
-int PasteHeader::meaningHeight() const {
+int MeaningHeader::meaningHeight() const {
   return m_meanings.empty() ? 0 : m_meanings.front()->sizeHint().height();
 }
 
-QSize PasteHeader::sizeHint() const {
+QSize MeaningHeader::sizeHint() const {
   return QHeaderView::sizeHint() + QSize(0, meaningHeight());
 }
 
-QSize PasteHeader::sectionSizeFromContents(int section) const {
+QSize MeaningHeader::sectionSizeFromContents(int section) const {
   constexpr int widest = 260;
   const QSize size = QHeaderView::sectionSizeFromContents(section);
   if (section >= meanings())
@@ -67,21 +69,21 @@ QSize PasteHeader::sectionSizeFromContents(int section) const {
   return {std::clamp(size.width(), meaning(section).sizeHint().width(), widest), size.height()};
 }
 
-void PasteHeader::paintSection(QPainter* painter, const QRect& rect, int section) const {
+void MeaningHeader::paintSection(QPainter* painter, const QRect& rect, int section) const {
   QHeaderView::paintSection(painter, rect.adjusted(0, meaningHeight(), 0, 0), section);
 }
 
-void PasteHeader::place() {
+void MeaningHeader::place() {
   for (int i = 0; i < meanings() && i < count(); ++i)
     meaning(i).setGeometry(sectionViewportPosition(i), 0, sectionSize(i), meaningHeight());
 }
 
-void PasteHeader::resizeEvent(QResizeEvent* event) {
+void MeaningHeader::resizeEvent(QResizeEvent* event) {
   QHeaderView::resizeEvent(event);
   place();
 }
 
-bool PasteHeader::eventFilter(QObject* watched, QEvent* event) {
+bool MeaningHeader::eventFilter(QObject* watched, QEvent* event) {
   const auto at = std::ranges::find(m_meanings, watched);
   if (event->type() == QEvent::FocusIn && at != m_meanings.end())
     Q_EMIT meaningEntered(static_cast<int>(at - m_meanings.begin()));

@@ -1,32 +1,34 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/record/pasted_columns.h"
-
 #include <QHeaderView>
+
+#include <vector>
 
 class QComboBox;
 
 namespace planewright {
 
-/// The headings of a table that is pasted, with a list above each from which its meaning is chosen.
-class PasteHeader : public QHeaderView {
+/// The headings of a table, with a list above each from which its meaning is chosen.
+class MeaningHeader : public QHeaderView {
   Q_OBJECT
 
 public:
-  explicit PasteHeader(QWidget* parent);
+  /// What a column can mean, in the order of the lists.
+  MeaningHeader(const QStringList& meanings, QWidget* parent);
 
-  /// Shows the columns; as many lists as there are columns.
-  void show(const std::vector<PastedColumn>& columns);
+  /// Other meanings than before, where what a table can hold has changed.
+  void setMeanings(const QStringList& meanings);
+  /// Shows what each column means, by its place in the lists; as many lists as there are columns.
+  void show(const std::vector<int>& chosen);
   QComboBox& meaning(int column) const { return *m_meanings[static_cast<std::size_t>(column)]; }
   int meanings() const { return static_cast<int>(m_meanings.size()); }
-  /// What is chosen in each; none where the table is to tell.
-  std::vector<std::optional<ColumnKind>> chosen() const;
+  std::vector<int> chosen() const;
 
   QSize sizeHint() const override;
 
 signals:
-  void meaningChosen();
+  void meaningChosen(int column);
   /// A list has the focus, so that its column is wanted in view.
   void meaningEntered(int column);
 
@@ -41,6 +43,7 @@ private:
   void place();
   int meaningHeight() const;
 
+  QStringList m_words;
   std::vector<QComboBox*> m_meanings;
 };
 

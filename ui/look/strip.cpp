@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/shell/strip.h"
+#include "ui/look/strip.h"
 
 #include "ui/look/look.h"
 
