@@ -4,7 +4,9 @@
 #include "core/quantity/format.h"
 #include "core/screen/field_csv.h"
 #include "core/screen/opened_point.h"
+#include "core/screen/plain_number.h"
 #include "ui/files/field_file.h"
+#include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/look/strip.h"
 
@@ -148,10 +150,8 @@ FieldFilter FieldPage::filter() const {
   FieldFilter filter;
   filter.text = m_text->text().trimmed().toStdString();
   filter.exceedingOnly = m_exceeds->isChecked();
-  bool isNumber = false;
-  const double from = m_from->text().trimmed().toDouble(&isNumber);
-  if (isNumber)
-    filter.from = from;
+  if (const auto from = plainNumber(m_from->text().trimmed().toStdString()))
+    filter.from = *from;
   if (m_combination->currentIndex() > 0)
     filter.combination = static_cast<std::size_t>(m_combination->currentIndex() - 1);
   return filter;
@@ -181,9 +181,17 @@ void FieldPage::takeRows(FieldRows rows) {
   const int row = point ? m_model->rowOf(*point).value_or(0) : 0;
   if (m_model->rowCount() > 0)
     m_table->setCurrentIndex(m_model->index(row, 0));
-  m_count->setText(tr("rows: %1 of %2").arg(m_model->rowCount()).arg(m_field->summary.points));
+  tellRows();
   offer();
   Q_EMIT arranged();
+}
+
+void FieldPage::tellRows() {
+  const QString from = m_from->text().trimmed();
+  if (!from.isEmpty() && !plainNumber(from.toStdString()))
+    tell(*m_count, tr("“%1” is no utilisation. Write a number with a point, as 0.8.").arg(from), true);
+  else
+    tell(*m_count, tr("rows: %1 of %2").arg(m_model->rowCount()).arg(m_field->summary.points), false);
 }
 
 bool FieldPage::isOfStudy() const {

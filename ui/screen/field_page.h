@@ -62,6 +62,7 @@ private:
   QLayout* buttons();
   void arrange();
   void takeRows(FieldRows rows);
+  void tellRows();
   void follow();
   void offer();
   bool isOfStudy() const;

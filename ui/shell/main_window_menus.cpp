@@ -81,10 +81,10 @@ void MainWindow::addFileMenu() {
     settleDrafts();
     m_filing->writeTable();
   });
-  add(menu, tr("Screen points…"), {}, [this] { screenPoints(); });
+  add(menu, tr("S&creen points…"), {}, [this] { screenPoints(); });
   menu.addSeparator();
   add(menu, tr("&Export figure…"), Qt::CTRL | Qt::Key_E, [this] { arrangeFigure(); });
-  add(menu, tr("&Copy figure"), {}, [this] { copyFigureNow(); });
+  add(menu, tr("Copy fi&gure"), {}, [this] { copyFigureNow(); });
   add(menu, tr("&Print figure…"), QKeySequence::Print, [this] { printFigureNow(); });
   menu.addSeparator();
   add(menu, tr("Calculation s&heet…"), Qt::CTRL | Qt::SHIFT | Qt::Key_E, [this] { showSheet(); });

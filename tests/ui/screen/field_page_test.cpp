@@ -4,7 +4,10 @@
 #include "core/study/verdict.h"
 #include "ui/look/strip.h"
 
+#include <QLabel>
 #include <QSignalSpy>
+
+#include <algorithm>
 
 namespace planewright {
 namespace {
@@ -42,6 +45,16 @@ TEST_F(FieldResultsPage, filters) {
   arranged([&] { QTest::keyClicks(&page().from(), "9"); });
   EXPECT_EQ(model().rowCount(), 0);
   EXPECT_FALSE(page().open().isEnabled());
+}
+
+TEST_F(FieldResultsPage, aUtilisationThatDoesNotReadIsSaid) {
+  screen(threePoints);
+  arranged([&] { QTest::keyClick(&page().from(), Qt::Key_X); });
+  EXPECT_EQ(model().rowCount(), 3);
+  const auto labels = page().findChildren<QLabel*>();
+  EXPECT_TRUE(std::ranges::any_of(labels, [](const QLabel* label) {
+    return label->text() == QString::fromUtf8("“x” is no utilisation. Write a number with a point, as 0.8.");
+  }));
 }
 
 TEST_F(FieldResultsPage, opensARowAsAPointInOneStep) {
