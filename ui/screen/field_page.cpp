@@ -9,6 +9,7 @@
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/look/strip.h"
+#include "ui/screen/histogram_view.h"
 
 #include <QCheckBox>
 #include <QComboBox>
@@ -32,7 +33,8 @@ FieldPage::FieldPage(Desk& desk, QWidget* parent)
       m_text(new QLineEdit(this)), m_from(new QLineEdit(this)),
       m_exceeds(new QCheckBox(tr("e&xceeding only"), this)), m_combination(new QComboBox(this)),
       m_count(new QLabel(this)), m_model(new FieldModel(this)), m_table(new QTableView(this)),
-      m_summary(new QPlainTextEdit(this)), m_open(new QPushButton(tr("&Open as a point"), this)) {
+      m_histogram(new HistogramView(this)), m_summary(new QPlainTextEdit(this)),
+      m_open(new QPushButton(tr("&Open as a point"), this)) {
   m_heading->setWordWrap(true);
   m_heading->setTextFormat(Qt::PlainText);
   m_summary->setReadOnly(true);
@@ -41,7 +43,7 @@ FieldPage::FieldPage(Desk& desk, QWidget* parent)
   m_summary->setAccessibleName(tr("Summary of the field"));
   auto* parts = new QSplitter(this);
   parts->addWidget(tableColumn());
-  parts->addWidget(m_summary);
+  parts->addWidget(summaryColumn());
   parts->setChildrenCollapsible(false);
   parts->setStretchFactor(0, 3);
   parts->setStretchFactor(1, 2);
@@ -54,6 +56,7 @@ FieldPage::FieldPage(Desk& desk, QWidget* parent)
   connect(m_from, &QLineEdit::textEdited, this, &FieldPage::arrange);
   connect(m_exceeds, &QCheckBox::clicked, this, &FieldPage::arrange);
   connect(m_combination, &QComboBox::activated, this, &FieldPage::arrange);
+  connect(m_histogram, &HistogramView::choiceMoved, this, &FieldPage::arrange);
   connect(m_model, &FieldModel::sortWanted, this, [this](const FieldSort& sort) {
     m_sort = sort;
     arrange();
@@ -100,6 +103,16 @@ QWidget* FieldPage::tableColumn() {
   return column;
 }
 
+QWidget* FieldPage::summaryColumn() {
+  auto* column = new QWidget(this);
+  auto* rows = new QVBoxLayout(column);
+  rows->setContentsMargins(0, 0, 0, 0);
+  rows->addWidget(new QLabel(tr("Points by utilisation"), column));
+  rows->addWidget(m_histogram);
+  rows->addWidget(m_summary, 1);
+  return column;
+}
+
 QLayout* FieldPage::buttons() {
   auto* another = new QPushButton(tr("Screen &another…"), this);
   auto* save = new QPushButton(tr("&Save results…"), this);
@@ -128,6 +141,7 @@ void FieldPage::show(std::shared_ptr<const ScreenedField> field) {
   m_summary->setPlainText(
       fromUtf8(summaryText(m_field->study, m_field->order.point, m_field->plan, m_field->reading,
                            m_field->results, m_field->summary, m_field->leftOut, translation())));
+  m_histogram->show(m_field->summary.histogram);
   m_combination->clear();
   m_combination->addItem(tr("all combinations"));
   for (const ScreenedCombination& one : m_field->plan.combinations)
@@ -154,6 +168,7 @@ FieldFilter FieldPage::filter() const {
     filter.from = *from;
   if (m_combination->currentIndex() > 0)
     filter.combination = static_cast<std::size_t>(m_combination->currentIndex() - 1);
+  filter.bin = m_histogram->chosen();
   return filter;
 }
 

@@ -19,6 +19,7 @@ class QTableView;
 
 namespace planewright {
 
+class HistogramView;
 class Strip;
 
 /// The results of a screened field: a row for each point, to sort, to filter, to open as a point of the study
@@ -42,6 +43,7 @@ public:
   QCheckBox& exceedsOnly() const { return *m_exceeds; }
   QComboBox& combination() const { return *m_combination; }
   QPushButton& open() const { return *m_open; }
+  HistogramView& histogram() const { return *m_histogram; }
   QPlainTextEdit& summary() const { return *m_summary; }
   Strip& strip() const { return *m_strip; }
   QString heading() const;
@@ -59,6 +61,7 @@ protected:
 
 private:
   QWidget* tableColumn();
+  QWidget* summaryColumn();
   QLayout* buttons();
   void arrange();
   void takeRows(FieldRows rows);
@@ -80,6 +83,7 @@ private:
   QLabel* m_count;
   FieldModel* m_model;
   QTableView* m_table;
+  HistogramView* m_histogram;
   QPlainTextEdit* m_summary;
   QPushButton* m_open;
   Beside m_rows;

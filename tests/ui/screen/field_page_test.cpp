@@ -3,6 +3,7 @@
 
 #include "core/study/verdict.h"
 #include "ui/look/strip.h"
+#include "ui/screen/histogram_view.h"
 
 #include <QLabel>
 #include <QSignalSpy>
@@ -55,6 +56,26 @@ TEST_F(FieldResultsPage, aUtilisationThatDoesNotReadIsSaid) {
   EXPECT_TRUE(std::ranges::any_of(labels, [](const QLabel* label) {
     return label->text() == QString::fromUtf8("“x” is no utilisation. Write a number with a point, as 0.8.");
   }));
+}
+
+TEST_F(FieldResultsPage, aBarShowsItsPointsAloneAndOnceMoreAll) {
+  screen(threePoints);
+  HistogramView& bars = page().histogram();
+  int found = 0;
+  for (std::size_t bin = 0; bin <= binEnds.size(); ++bin) {
+    arranged([&] { QTest::mouseClick(&bars, Qt::LeftButton, {}, bars.rowOf(bin).center()); });
+    EXPECT_EQ(bars.chosen(), bin);
+    found += model().rowCount();
+    for (int row = 0; row < model().rowCount(); ++row)
+      EXPECT_EQ(column(FieldKey::point)[row] == QStringLiteral("n2"), bin >= 10) << "bin " << bin;
+  }
+  EXPECT_EQ(found, 3);
+  arranged([&] { QTest::keyClick(&bars, Qt::Key_Space); });
+  EXPECT_EQ(bars.chosen(), std::nullopt);
+  EXPECT_EQ(model().rowCount(), 3);
+  QTest::keyClick(&bars, Qt::Key_Up);
+  arranged([&] { QTest::keyClick(&bars, Qt::Key_Space); });
+  EXPECT_EQ(bars.chosen(), binEnds.size() - 1);
 }
 
 TEST_F(FieldResultsPage, opensARowAsAPointInOneStep) {
