@@ -62,9 +62,13 @@ FieldPage::FieldPage(Desk& desk, QWidget* parent)
     arrange();
   });
   connect(m_table, &QTableView::doubleClicked, this, &FieldPage::openCurrent);
-  connect(m_table->selectionModel(), &QItemSelectionModel::currentChanged, this, &FieldPage::offer);
+  connect(m_table->selectionModel(), &QItemSelectionModel::currentChanged, this,
+          [this] { offer(m_field && isOfStudy()); });
   connect(m_open, &QPushButton::clicked, this, &FieldPage::openCurrent);
-  connect(&m_desk, &Desk::changed, this, &FieldPage::follow);
+  connect(&m_desk, &Desk::changed, this, [this] {
+    if (isVisible())
+      follow();
+  });
 }
 
 QWidget* FieldPage::tableColumn() {
@@ -197,7 +201,7 @@ void FieldPage::takeRows(FieldRows rows) {
   if (m_model->rowCount() > 0)
     m_table->setCurrentIndex(m_model->index(row, 0));
   tellRows();
-  offer();
+  offer(isOfStudy());
   Q_EMIT arranged();
 }
 
@@ -216,16 +220,22 @@ bool FieldPage::isOfStudy() const {
 void FieldPage::follow() {
   if (!m_field)
     return;
-  if (isOfStudy())
+  const bool isOfStudy = this->isOfStudy();
+  if (isOfStudy)
     m_strip->hide();
   else
     m_strip->say(tr("The study has changed since: these results are of the study as it was. Screen again."),
                  Strip::Tone::wrong);
-  offer();
+  offer(isOfStudy);
 }
 
-void FieldPage::offer() {
-  m_open->setEnabled(m_field && m_table->currentIndex().isValid() && isOfStudy());
+void FieldPage::showEvent(QShowEvent* event) {
+  QWidget::showEvent(event);
+  follow();
+}
+
+void FieldPage::offer(bool isOfStudy) {
+  m_open->setEnabled(isOfStudy && m_table->currentIndex().isValid());
 }
 
 void FieldPage::openCurrent() {

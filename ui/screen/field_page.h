@@ -57,6 +57,7 @@ signals:
   void arranged();
 
 protected:
+  void showEvent(QShowEvent* event) override;
   bool eventFilter(QObject* watched, QEvent* event) override;
 
 private:
@@ -67,7 +68,7 @@ private:
   void takeRows(FieldRows rows);
   void tellRows();
   void follow();
-  void offer();
+  void offer(bool isOfStudy);
   bool isOfStudy() const;
   FieldFilter filter() const;
 

@@ -66,7 +66,10 @@ FieldSetup::FieldSetup(Desk& desk, QWidget* parent)
   });
   connect(m_meanings, &MeaningHeader::meaningEntered, this,
           [this](int column) { m_preview->scrollTo(m_rows->index(0, column)); });
-  connect(&m_desk, &Desk::changed, this, &FieldSetup::listPoints);
+  connect(&m_desk, &Desk::changed, this, [this] {
+    if (isVisible())
+      listPoints();
+  });
   listPoints();
   settle({});
 }
@@ -140,6 +143,11 @@ QString FieldSetup::complaints() const {
 void FieldSetup::setTable(const QString& path) {
   m_path->setText(QDir::toNativeSeparators(path));
   readStart();
+}
+
+void FieldSetup::showEvent(QShowEvent* event) {
+  QWidget::showEvent(event);
+  listPoints();
 }
 
 void FieldSetup::listPoints() {

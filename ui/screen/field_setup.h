@@ -57,6 +57,9 @@ signals:
   void cancelled();
   void tableWanted();
 
+protected:
+  void showEvent(QShowEvent* event) override;
+
 private:
   QFormLayout* entries();
   void build();
