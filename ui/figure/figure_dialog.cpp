@@ -13,7 +13,6 @@
 #include <QButtonGroup>
 #include <QClipboard>
 #include <QDir>
-#include <QFileDialog>
 #include <QFileInfo>
 #include <QGuiApplication>
 #include <QHBoxLayout>
@@ -52,9 +51,7 @@ void FigureDialog::build() {
   options->setFrameShape(QFrame::NoFrame);
   options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
   options->setFixedWidth(optionsWidth);
-  m_sentence = new QLabel(this);
-  m_sentence->setWordWrap(true);
-  m_sentence->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  m_sentence = sentenceIn(*this);
   auto* middle = new QHBoxLayout;
   middle->setSpacing(14);
   middle->addWidget(options);
@@ -63,8 +60,7 @@ void FigureDialog::build() {
   column->addLayout(middle, 1);
   column->addWidget(m_sentence);
   column->addLayout(footer());
-  const QSize frame(20, 50); // of the window manager
-  resize(first.boundedTo(screen()->availableSize() - frame));
+  resizeOnScreen(*this, first);
 }
 
 QVBoxLayout* FigureDialog::previewColumn() {
@@ -223,13 +219,10 @@ void FigureDialog::save() {
 
 void FigureDialog::saveAs() {
   const QString ending = m_ending->text();
-  QFileDialog dialog(this, tr("Save figure"), offeredPath(),
-                     tr("%1 figure (*%2)").arg(ending.mid(1).toUpper(), ending));
-  dialog.setAcceptMode(QFileDialog::AcceptSave);
-  dialog.setDefaultSuffix(ending.mid(1));
-  dialog.selectFile(offeredPath());
-  if (dialog.exec() == QDialog::Accepted)
-    saveAndTell(dialog.selectedFiles().constFirst());
+  const QString path = askedFileToSave(*this, tr("Save figure"), offeredPath(),
+                                       tr("%1 figure (*%2)").arg(ending.mid(1).toUpper(), ending));
+  if (!path.isEmpty())
+    saveAndTell(path);
 }
 
 void FigureDialog::copy() {

@@ -117,9 +117,7 @@ QFormLayout* PointsDialog::choices() {
 
 QVBoxLayout* PointsDialog::outcome() {
   constexpr int linesOfProblems = 96; // pixels
-  m_sentence = new QLabel(this);
-  m_sentence->setWordWrap(true);
-  m_sentence->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  m_sentence = sentenceIn(*this);
   m_progress = new QProgressBar(this);
   m_progress->setTextVisible(false);
   m_progress->hide();

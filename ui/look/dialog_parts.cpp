@@ -4,8 +4,11 @@
 #include "ui/look/look.h"
 
 #include <QButtonGroup>
+#include <QFileDialog>
+#include <QFileInfo>
 #include <QHBoxLayout>
 #include <QLabel>
+#include <QScreen>
 #include <QToolButton>
 #include <QVBoxLayout>
 
@@ -31,6 +34,26 @@ QToolButton* choiceButton(QHBoxLayout& row, QButtonGroup& group, const QString& 
   group.addButton(button);
   row.addWidget(button);
   return button;
+}
+
+QLabel* sentenceIn(QWidget& dialog) {
+  auto* label = new QLabel(&dialog);
+  label->setWordWrap(true);
+  label->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  return label;
+}
+
+void resizeOnScreen(QWidget& dialog, const QSize& size) {
+  const QSize frame(20, 50); // of the window manager
+  dialog.resize(size.boundedTo(dialog.screen()->availableSize() - frame));
+}
+
+QString askedFileToSave(QWidget& over, const QString& title, const QString& offered, const QString& kind) {
+  QFileDialog dialog(&over, title, offered, kind);
+  dialog.setAcceptMode(QFileDialog::AcceptSave);
+  dialog.setDefaultSuffix(QFileInfo(offered).suffix());
+  dialog.selectFile(offered);
+  return dialog.exec() == QDialog::Accepted ? dialog.selectedFiles().constFirst() : QString();
 }
 
 void tell(QLabel& label, const QString& sentence, bool isWrong) {

@@ -6,6 +6,7 @@
 class QButtonGroup;
 class QHBoxLayout;
 class QLabel;
+class QSize;
 class QToolButton;
 class QVBoxLayout;
 class QWidget;
@@ -17,6 +18,16 @@ QVBoxLayout* headedRows(QWidget& page, const QString& heading);
 
 /// One of the buttons of which one is down, at the end of a row.
 QToolButton* choiceButton(QHBoxLayout& row, QButtonGroup& group, const QString& words, bool isDown);
+
+/// A label for sentences of a dialog, which can be copied.
+QLabel* sentenceIn(QWidget& dialog);
+
+/// Gives a dialog its first size, smaller where the screen is.
+void resizeOnScreen(QWidget& dialog, const QSize& size);
+
+/// Asks for the file to save to; empty when it is cancelled. `offered` ends with the ending that a name typed
+/// without one gets; `kind` says it, as "PDF (*.pdf)".
+QString askedFileToSave(QWidget& over, const QString& title, const QString& offered, const QString& kind);
 
 /// Shows a sentence in ink, or in the colour of what is wrong.
 void tell(QLabel& label, const QString& sentence, bool isWrong);

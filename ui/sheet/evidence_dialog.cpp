@@ -22,33 +22,18 @@
 #include <QLabel>
 #include <QPrinter>
 #include <QPushButton>
-#include <QScreen>
 #include <QSettings>
 #include <QVBoxLayout>
 
 namespace planewright {
 
-namespace {
-
-/// The paper that sheets were made for last.
-Paper paperOfSheets() {
-  return rememberedSheet(QSettings()).paper;
-}
-
-std::vector<Picture> pagesOfReport(const Sheet& report) {
-  return pagesOf(report, paperOfSheets(), translation());
-}
-
-} // namespace
-
 EvidenceDialog::EvidenceDialog(QWidget* parent) : EvidenceDialog(publishedChecks(), parent) {}
 
-EvidenceDialog::EvidenceDialog(Results<std::vector<CheckResult>> checks, QWidget* parent) : QDialog(parent) {
+EvidenceDialog::EvidenceDialog(Results<std::vector<CheckResult>> checks, QWidget* parent)
+    : QDialog(parent), m_paper(rememberedSheet(QSettings()).paper) {
   constexpr QSize first(900, 780);
   setWindowTitle(tr("Published values, recomputed"));
-  m_sentence = new QLabel(this);
-  m_sentence->setWordWrap(true);
-  m_sentence->setTextInteractionFlags(Qt::TextSelectableByMouse);
+  m_sentence = sentenceIn(*this);
   auto* view = new PagesView(this);
   m_preview = &view->preview();
   auto* column = new QVBoxLayout(this);
@@ -56,7 +41,7 @@ EvidenceDialog::EvidenceDialog(Results<std::vector<CheckResult>> checks, QWidget
   column->addWidget(m_sentence);
   if (checks) {
     m_report = evidenceSheet(*checks, platformName());
-    m_preview->setPages(pagesOfReport(m_report));
+    m_preview->setPages(pagesOf(m_report, m_paper, translation()));
     column->addLayout(footer());
     QStringList words;
     for (const Text& sentence : wordsOfCount(*checks))
@@ -65,8 +50,7 @@ EvidenceDialog::EvidenceDialog(Results<std::vector<CheckResult>> checks, QWidget
   } else {
     say(shown(checks.error().front()), true);
   }
-  const QSize frame(20, 50); // of the window manager
-  resize(first.boundedTo(screen()->availableSize() - frame));
+  resizeOnScreen(*this, first);
 }
 
 QHBoxLayout* EvidenceDialog::footer() {
@@ -94,13 +78,13 @@ Result<void> EvidenceDialog::saveTo(const QString& path) {
     return writeAside(path.toStdString(), sheetHtml(m_report, translation()));
   if (path.endsWith(QStringLiteral(".txt"), Qt::CaseInsensitive))
     return writeAside(path.toStdString(), sheetText(m_report, translation()));
-  const Result<QByteArray> bytes = pdfOfPages(pagesOfReport(m_report), Palette::paper);
+  const Result<QByteArray> bytes = pdfOfPages(m_preview->pages(), Palette::paper);
   return bytes ? writeAside(path.toStdString(), bytes->toStdString()) : tl::unexpected(bytes.error());
 }
 
 void EvidenceDialog::save(const QString& ending, const QString& kind) {
   const QString offered = folderOf(QString()) + QLatin1Char('/') + tr("published-values") + ending;
-  const QString path = askedReportFile(this, tr("Save the report"), offered, kind);
+  const QString path = askedFileToSave(*this, tr("Save the report"), offered, kind);
   if (path.isEmpty())
     return;
   if (const Result<void> saved = saveTo(path); !saved)
@@ -111,12 +95,11 @@ void EvidenceDialog::save(const QString& ending, const QString& kind) {
 
 Result<void> EvidenceDialog::printTo(QPrinter& printer) {
   printer.setDocName(windowTitle());
-  return printPages(printer, pagesOfReport(m_report), Palette::paper);
+  return printPages(printer, m_preview->pages(), Palette::paper);
 }
 
 void EvidenceDialog::print() {
-  const auto printed =
-      printedByDialog(this, paperOfSheets(), [this](QPrinter& printer) { return printTo(printer); });
+  const auto printed = printedByDialog(this, m_paper, [this](QPrinter& printer) { return printTo(printer); });
   if (printed && !*printed)
     say(shown(printed->error()), true);
   else if (printed)

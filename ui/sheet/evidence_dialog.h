@@ -2,7 +2,7 @@
 #pragma once
 
 #include "core/evidence/evidence.h"
-#include "core/report/sheet.h"
+#include "core/report/sheet_pages.h"
 
 #include <QDialog>
 
@@ -38,6 +38,7 @@ private:
   void save(const QString& ending, const QString& kind);
   void print();
 
+  Paper m_paper; ///< that sheets were made for last
   Sheet m_report;
   SheetPreview* m_preview = nullptr;
   QLabel* m_sentence = nullptr;

@@ -2,8 +2,7 @@
 #pragma once
 
 #include "core/report/sheet_pages.h"
-
-#include <QString>
+#include "core/words/problem.h"
 
 #include <functional>
 #include <optional>
@@ -12,10 +11,6 @@ class QPrinter;
 class QWidget;
 
 namespace planewright {
-
-/// Asks for the file that a report goes to; empty when it is cancelled. `offered` ends with the ending that a
-/// name typed without one gets; `kind` says it, as "PDF (*.pdf)".
-QString askedReportFile(QWidget* over, const QString& title, const QString& offered, const QString& kind);
 
 /// Asks for a printer and prints on it; none when it is cancelled.
 std::optional<Result<void>> printedByDialog(QWidget* over, Paper paper,

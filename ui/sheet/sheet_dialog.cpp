@@ -22,7 +22,6 @@
 #include <QLabel>
 #include <QPrinter>
 #include <QPushButton>
-#include <QScreen>
 #include <QScrollArea>
 #include <QSettings>
 #include <QShowEvent>
@@ -33,13 +32,6 @@ namespace planewright {
 namespace {
 
 constexpr int soon = 150; ///< ms after the last change
-
-QLabel* sentenceBelow(QWidget& dialog) {
-  auto* label = new QLabel(&dialog);
-  label->setWordWrap(true);
-  label->setTextInteractionFlags(Qt::TextSelectableByMouse);
-  return label;
-}
 
 } // namespace
 
@@ -70,8 +62,8 @@ void SheetDialog::build() {
   options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
   options->setFixedWidth(optionsWidth);
   options->setFocusPolicy(Qt::NoFocus);
-  m_routes = sentenceBelow(*this);
-  m_sentence = sentenceBelow(*this);
+  m_routes = sentenceIn(*this);
+  m_sentence = sentenceIn(*this);
   m_sentence->hide();
   tell(*m_routes, tr("The pages are being set…"), false);
   auto* middle = new QHBoxLayout;
@@ -85,8 +77,7 @@ void SheetDialog::build() {
   column->addWidget(m_routes);
   column->addWidget(m_sentence);
   column->addLayout(footer());
-  const QSize frame(20, 50); // of the window manager
-  resize(first.boundedTo(screen()->availableSize() - frame));
+  resizeOnScreen(*this, first);
 }
 
 void SheetDialog::addButton(QHBoxLayout& row, const QString& words, void (SheetDialog::*act)()) {
@@ -177,7 +168,7 @@ QString SheetDialog::offeredPath(const QString& ending) const {
 }
 
 void SheetDialog::save(const QString& ending, const QString& kind) {
-  const QString path = askedReportFile(this, tr("Save the sheet"), offeredPath(ending), kind);
+  const QString path = askedFileToSave(*this, tr("Save the sheet"), offeredPath(ending), kind);
   if (path.isEmpty())
     return;
   if (const Result<void> saved = saveTo(path); !saved)

@@ -242,9 +242,7 @@ void MainWindow::arrangeFigure() {
     m_figure = new FigureDialog(m_desk, this);
     m_figure->setStudyFile(m_filing->path());
   }
-  m_figure->show();
-  m_figure->raise();
-  m_figure->activateWindow();
+  raised(*m_figure);
 }
 
 HelpWindow& MainWindow::help() {

@@ -175,9 +175,7 @@ void MainWindow::addListsOfStudy(QMenu& menu) {
     settleDrafts();
     if (!dialog)
       dialog = new ThingsDialog(m_desk, things(), this);
-    dialog->show();
-    dialog->raise();
-    dialog->activateWindow();
+    raised(*dialog);
   };
   add(menu, tr("P&oints…"), {}, [this, open] { open(m_points, points); });
   add(menu, tr("S&ections…"), {}, [this, open] { open(m_sections, sections); });
