@@ -2,7 +2,7 @@
 #include "app/figure_folder.h"
 
 #include "app/offscreen.h"
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "ui/files/file_bytes.h"
 
 #include <algorithm>
@@ -26,15 +26,14 @@ std::optional<Problem> existingProblem(const std::string& folder, const std::vec
   const auto first = std::ranges::find_if(figures, exists);
   if (first == figures.end())
     return std::nullopt;
-  const auto count = [](auto number) { return exactNumber(static_cast<double>(number)); };
   return Problem{"--folder",
                  0,
                  0,
                  folder,
                  PW_TEXT("Command", "“%1” has %2 of the %3 files already, “%4” among them.")
                      .with(folder)
-                     .with(count(std::ranges::count_if(figures, exists)))
-                     .with(count(figures.size()))
+                     .with(shownCount(static_cast<std::size_t>(std::ranges::count_if(figures, exists))))
+                     .with(shownCount(figures.size()))
                      .with(first->file.toStdString()),
                  PW_TEXT("Command", "Take another folder, or --replace.")};
 }

@@ -8,6 +8,7 @@
 #include "app/screen_options.h"
 #include "app/study_source.h"
 #include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/record/heading.h"
 #include "core/screen/leave_out.h"
 #include "core/screen/summary_text.h"
@@ -19,10 +20,6 @@ namespace planewright {
 namespace {
 
 constexpr std::size_t greatestList = std::size_t{64} << 20;
-
-std::string count(std::size_t number) {
-  return exactNumber(static_cast<double>(number));
-}
 
 /// What the caller gets to see of an interrupt; the program then ends by it.
 tl::unexpected<Failure> interrupted() {
@@ -153,7 +150,7 @@ private:
       return wrongUse(
           {m_order.exceptList, 0, 0, unmet.front(),
            PW_TEXT("Command", "The table has no point for %1 of the names in the list, such as “%2”.")
-               .with(count(unmet.size()))
+               .with(shownCount(unmet.size()))
                .with(unmet.front()),
            PW_TEXT("Command", "Write one name of a point a line, as it stands in the table.")});
     m_leftOut.push_back({m_order.exceptList, listed});
@@ -196,7 +193,7 @@ private:
                           m_reading));
     if (summary.leftOut > 0)
       delivery.facts.push_back(
-          PW_TEXT("Command", "Points left out on request: %1.").with(count(summary.leftOut)));
+          PW_TEXT("Command", "Points left out on request: %1.").with(shownCount(summary.leftOut)));
     if (!m_reading.isSound() || summary.leftOut > 0)
       delivery.exit = Exit::leftOut;
     if (summary.exceeding > 0)

@@ -6,7 +6,7 @@
 #include "core/figure/signs.h"
 #include "core/figure/strokes.h"
 #include "core/figure/text_lines.h"
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 
 #include <algorithm>
 #include <cmath>
@@ -57,7 +57,7 @@ std::vector<LabelWish> wishesOf(const Setting& setting, const std::vector<Mark>&
                       role,
                       bold,
                       mark.priority,
-                      "mark " + exactNumber(static_cast<double>(wishes.size()))});
+                      "mark " + shownCount(wishes.size())});
   }
   for (const TouchLabel& touch : touches)
     wishes.push_back({{touch.at.sn - setting.readout.state().circle.mean, 0},

@@ -4,6 +4,7 @@
 #include "core/figure/conventions.h"
 #include "core/figure/text_lines.h"
 #include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/words/version.h"
 
 #include <algorithm>
@@ -99,7 +100,7 @@ double drawConventions(Picture& picture, const Setting& setting, double left, do
   if (unnamed > 0)
     append(text,
            setting.runsOf(PW_TEXT("Figure", "Without room for their names on the circle: %1 watched planes.")
-                              .with(exactNumber(static_cast<double>(unnamed)))));
+                              .with(shownCount(unnamed))));
   for (const Text& sentence : conventionsOf(setting.study, setting.readout))
     append(text, setting.runsOf(sentence));
   const std::vector<Runs> lines = brokenLines(text, right - left, size, false);

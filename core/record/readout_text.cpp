@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/record/readout_file.h"
 #include "core/study/envelope.h"
 #include "core/study/governing.h"
@@ -215,8 +216,7 @@ private:
       line("    ", PW_TEXT("Readout", "Sources are worked out with tension positive; here the study counts "
                                       "compression positive."));
     for (std::size_t i = 0; i < sources.size() && sources.size() > 1; ++i)
-      line("    ",
-           PW_TEXT("Readout", "%1: %2").with(exactNumber(static_cast<double>(i + 1))).with(sources[i].name));
+      line("    ", PW_TEXT("Readout", "%1: %2").with(shownCount(i + 1)).with(sources[i].name));
     steps(sum);
   }
 

@@ -21,7 +21,6 @@ constexpr std::size_t longestRow = 1'000'000; // bytes
 constexpr double none = std::numeric_limits<double>::quiet_NaN();
 // As in a study, so that each point can be opened as one of it.
 constexpr double greatestValue = 1e100;
-constexpr std::size_t longestName = 200;
 
 std::string quotedStart(std::string_view text) {
   constexpr std::size_t longest = 40;

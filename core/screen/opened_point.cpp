@@ -13,8 +13,6 @@ namespace planewright {
 
 namespace {
 
-constexpr std::size_t longestName = 200; // bytes, of a key
-
 /// What of a study counts when a field is judged by this point.
 Study judgingPartOf(const Study& study, std::string_view point) {
   Study part;

@@ -12,8 +12,12 @@ namespace planewright {
 
 namespace {
 
+bool isDigit(char c) {
+  return c >= '0' && c <= '9';
+}
+
 bool isDigitOrPoint(char c) {
-  return (c >= '0' && c <= '9') || c == '.';
+  return isDigit(c) || c == '.';
 }
 
 /// Of a number that no double holds, whether it is too small for one.
@@ -22,10 +26,6 @@ bool isTiny(std::string_view text) {
   if (exponent != std::string_view::npos)
     return text.substr(exponent + 1).starts_with('-');
   return text.find('.') < text.find_first_of("123456789");
-}
-
-bool isDigit(char c) {
-  return c >= '0' && c <= '9';
 }
 
 /// A decimal without exponent whose digits and power of ten are doubles each: one division rounds it right.

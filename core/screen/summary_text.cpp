@@ -2,6 +2,7 @@
 #include "core/screen/summary_text.h"
 
 #include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/strength/cautions.h"
 #include "core/strength/shown_ratio.h"
 #include "core/table/aligned_rows.h"
@@ -19,10 +20,6 @@ constexpr int angleDecimals = 2;
 constexpr std::string_view indent = "  ";
 
 using Cells = std::vector<std::string>;
-
-std::string count(std::size_t number) {
-  return exactNumber(static_cast<double>(number));
-}
 
 /// Writes the summary in one language.
 class SummaryWriter {
@@ -51,7 +48,7 @@ private:
   void judgedBy(const Readout& readout) {
     line(PW_TEXT("Screen", "Judged by point %1, over %2 combinations.")
              .with(readout.point)
-             .with(count(m_plan.combinations.size())));
+             .with(shownCount(m_plan.combinations.size())));
     for (const ScreenedCheck& check : m_plan.checks)
       indented(PW_TEXT("Screen", "Check %1: %2, line %3 ± %4")
                    .with(check.setup.id)
@@ -64,12 +61,12 @@ private:
 
   void read(const std::vector<LeftOut>& leftOut) {
     line(PW_TEXT("Screen", "Rows: %1, of them faulty and left out: %2, of these not finite: %3.")
-             .with(count(m_reading.rows))
-             .with(count(m_reading.faultyRows))
-             .with(count(m_reading.notFinite)));
+             .with(shownCount(m_reading.rows))
+             .with(shownCount(m_reading.faultyRows))
+             .with(shownCount(m_reading.notFinite)));
     line(m_sentences[0]);
     for (const LeftOut& one : leftOut)
-      indented(PW_TEXT("Screen", "Points left out by “%1”: %2").with(one.name).with(count(one.points)));
+      indented(PW_TEXT("Screen", "Points left out by “%1”: %2").with(one.name).with(shownCount(one.points)));
     for (const FieldColumn& column : m_reading.columns.columns)
       if (column.role == FieldRole::unread)
         indented(PW_TEXT("Screen", "Column not read: %1").with(column.heading));
@@ -123,7 +120,7 @@ private:
       const std::string end = shownNumber(binEnds[isLast ? bin - 1 : bin], 1);
       rows.push_back(
           {words((isLast ? PW_TEXT("Screen", "above %1") : PW_TEXT("Screen", "up to %1")).with(end)),
-           count(m_summary.histogram[bin])});
+           shownCount(m_summary.histogram[bin])});
     }
     // The bars stand behind the aligned numbers; any point at all has a stroke.
     const std::string lines = alignedRows(rows, indent);
@@ -172,23 +169,23 @@ private:
 } // namespace
 
 Text withFaultCounts(const Text& words, const FieldReading& reading) {
-  return words.with(count(reading.faultyRows))
-      .with(count(reading.rows))
-      .with(count(reading.incompletePoints))
-      .with(count(reading.field.size()));
+  return words.with(shownCount(reading.faultyRows))
+      .with(shownCount(reading.rows))
+      .with(shownCount(reading.incompletePoints))
+      .with(shownCount(reading.field.size()));
 }
 
 std::vector<Text> outcomeSentences(const Field& field, const FieldResults& results,
                                    const FieldSummary& summary) {
   const std::size_t greatest = worstOf(results, 1).front();
   return {PW_TEXT("Screen", "Points: %1, judged: %2, incomplete and not judged: %3, left out on request: %4.")
-              .with(count(summary.points))
-              .with(count(summary.judged))
-              .with(count(summary.incomplete))
-              .with(count(summary.leftOut)),
+              .with(shownCount(summary.points))
+              .with(shownCount(summary.judged))
+              .with(shownCount(summary.incomplete))
+              .with(shownCount(summary.leftOut)),
           PW_TEXT("Screen", "Exceeding: %1 of %2 judged points.")
-              .with(count(summary.exceeding))
-              .with(count(summary.judged)),
+              .with(shownCount(summary.exceeding))
+              .with(shownCount(summary.judged)),
           PW_TEXT("Screen", "Greatest utilisation: %1 at point %2; 99.9 % of the points do not exceed %3.")
               .with(shownUtilisation(results[greatest].utilisation))
               .with(field.nameOf(greatest))

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/source/pieces.h"
 
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 
 #include <algorithm>
 #include <cassert>
@@ -84,9 +84,8 @@ Pieces ofBlocks(const Section& section) {
   Pieces pieces;
   for (const Block& block : blocksOf(section)) {
     const bool straight = std::fmod(block.turn.degrees(), 90) == 0;
-    pieces.push_back(
-        pieceOf(PW_TEXT("Source", "block %1").with(exactNumber(static_cast<double>(pieces.size() + 1))),
-                polygon(cornersOf(block)), straight ? Piece::Kind::plate : Piece::Kind::other));
+    pieces.push_back(pieceOf(PW_TEXT("Source", "block %1").with(shownCount(pieces.size() + 1)),
+                             polygon(cornersOf(block)), straight ? Piece::Kind::plate : Piece::Kind::other));
   }
   return pieces;
 }

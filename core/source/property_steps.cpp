@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/source/pieces.h"
 #include "core/source/section_properties.h"
 
@@ -53,7 +53,7 @@ std::vector<Part> partsOf(const Section& section) {
   }
   for (std::size_t i = 0; i < parts.size(); ++i) {
     parts[i].own = aboutCentroid(parts[i].own);
-    parts[i].index = exactNumber(static_cast<double>(i + 1));
+    parts[i].index = shownCount(i + 1);
   }
   return parts;
 }
@@ -221,7 +221,7 @@ private:
 
   NumbersPutIn blockSizes(const Part& part) const {
     const std::vector<Block> blocks = blocksOf(m_section);
-    const auto isPart = [&](std::size_t i) { return exactNumber(static_cast<double>(i + 1)) == part.index; };
+    const auto isPart = [&](std::size_t i) { return shownCount(i + 1) == part.index; };
     std::size_t i = 0;
     while (!isPart(i))
       ++i;

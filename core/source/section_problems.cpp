@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/source/block_contact.h"
 
 #include <algorithm>
@@ -117,8 +118,8 @@ private:
         if (contactOf(blocks[i], blocks[k]) == Contact::overlapping)
           add(blockKey(static_cast<int>(i) + 1, "b"),
               PW_TEXT("Source", "Block %1 overlaps block %2.")
-                  .with(exactNumber(static_cast<double>(i + 1)))
-                  .with(exactNumber(static_cast<double>(k + 1))),
+                  .with(shownCount(i + 1))
+                  .with(shownCount(k + 1)),
               PW_TEXT("Source", "Move one of them so that they only touch."));
     for (const int number : looseBlocks(blocks))
       add(blockKey(number, "b"),

@@ -3,7 +3,7 @@
 
 #include "core/study/combination_text.h"
 
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 
 #include <algorithm>
 #include <unordered_set>
@@ -155,8 +155,7 @@ Problems tooMany() {
        0,
        0,
        {},
-       PW_TEXT("Combination", "These cases make more than %1 combinations.")
-           .with(exactNumber(static_cast<double>(mostBuilt))),
+       PW_TEXT("Combination", "These cases make more than %1 combinations.").with(shownCount(mostBuilt)),
        PW_TEXT("Combination", "Let cases that never meet exclude each other, or type the combinations that "
                               "matter.")}};
 }

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/study/sum_of_case.h"
 
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 #include "core/stress/circle.h"
 #include "core/study/typed.h"
 
@@ -47,7 +47,7 @@ std::vector<Step> sumOfCase(const Study& study, const CaseStress& stress,
       const double part = sources[i].contribution.stress.*one.of;
       if (part == 0)
         continue;
-      const std::string symbol = one.letters + "," + exactNumber(static_cast<double>(i + 1)) + "}";
+      const std::string symbol = one.letters + "," + shownCount(i + 1) + "}";
       numbers.push_back(units.put(symbol, part, dimension::stress));
       sum = sum ? *sum + Formula::symbol(symbol) : Formula::symbol(symbol);
       made += part;

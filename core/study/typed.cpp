@@ -10,7 +10,6 @@ namespace planewright {
 
 namespace {
 
-constexpr std::size_t longestName = 200;
 constexpr std::size_t longestFreeText = 20000;
 // Sums of a thousand products of two such values are still finite, so no state overflows.
 constexpr double greatestValue = 1e100;

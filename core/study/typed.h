@@ -13,6 +13,8 @@ Result<std::string> keptText(const Study& study, const Place& place, const Slot&
 /// text where it may be empty. Not of sizes, whose dimension goes by their key.
 double valueOf(const Study& study, Spot spot, const std::string& text);
 
+inline constexpr std::size_t longestName = 200; ///< bytes, of a key
+
 /// Why a name cannot be a key: empty, blank at an end, control characters, longer than 200 bytes, broken
 /// UTF-8. Empty for a good name.
 Text faultOfName(std::string_view name);

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/table/few_names.h"
 
-#include "core/quantity/format.h"
+#include "core/quantity/shown_count.h"
 
 #include <algorithm>
 
@@ -14,9 +14,7 @@ Text fewOf(const std::vector<std::string>& names) {
     first += (i == 0 ? "" : ", ") + names[i];
   if (names.size() <= mostNamed)
     return verbatim(first);
-  return PW_TEXT("Readout", "%1 and %2 more")
-      .with(first)
-      .with(exactNumber(static_cast<double>(names.size() - mostNamed)));
+  return PW_TEXT("Readout", "%1 and %2 more").with(first).with(shownCount(names.size() - mostNamed));
 }
 
 } // namespace planewright
