@@ -37,7 +37,11 @@ constexpr std::array shades = {Shade{Role::ink, 0x1C2529, 0xE6EBE9, 0x000000},
                                Shade{Role::focus, 0x0B6E8A, 0x5CC6E0, 0x000000},
                                Shade{Role::selection, 0xD5E6EA, 0x1F4450, 0xE2E2E2},
                                Shade{Role::safeGround, 0xD6E9DF, 0x1F3A31, 0xFFFFFF},
-                               Shade{Role::safeEdge, 0x2E7D68, 0x58A98E, 0x000000}};
+                               Shade{Role::safeEdge, 0x2E7D68, 0x58A98E, 0x000000},
+                               Shade{Role::utilised50, 0xD8E3E2, 0x2E3A3F, 0xDEDEDE},
+                               Shade{Role::utilised80, 0x93A7AD, 0x546E73, 0xA3A3A3},
+                               Shade{Role::utilised95, 0x526F7B, 0x7DA7AC, 0x6B6B6B},
+                               Shade{Role::utilised100, 0x0B3C4C, 0xA8E4E8, 0x373737}};
 
 constexpr bool inOrder() {
   for (std::size_t i = 0; i < shades.size(); ++i)

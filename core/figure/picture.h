@@ -33,7 +33,12 @@ enum class Role {
   focus,
   selection,
   safeGround,
-  safeEdge
+  safeEdge,
+  // classes of utilisation in a map of a field, one hue in even steps of lightness; what exceeds is `limit`
+  utilised50,
+  utilised80,
+  utilised95,
+  utilised100
 };
 
 /// Kinds of stroke, equal in colour and mono.

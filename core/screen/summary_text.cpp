@@ -40,6 +40,13 @@ public:
     return std::move(m_out);
   }
 
+  std::string notes(const Readout& readout, const std::vector<LeftOut>& leftOut) {
+    judgedBy(readout);
+    read(leftOut);
+    cautions(readout);
+    return std::move(m_out);
+  }
+
 private:
   std::string words(const Text& text) const { return plain(text, m_translate); }
   void line(const Text& text) { m_out += words(text) + "\n"; }
@@ -198,6 +205,12 @@ std::string summaryText(const Study& study, std::string_view point, const Screen
                         const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,
                         const std::vector<LeftOut>& leftOut, const Translate& translate) {
   return SummaryWriter(plan, reading, results, summary, translate).written(evaluate(study, point), leftOut);
+}
+
+std::string fieldNotes(const Study& study, std::string_view point, const ScreenPlan& plan,
+                       const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,
+                       const std::vector<LeftOut>& leftOut, const Translate& translate) {
+  return SummaryWriter(plan, reading, results, summary, translate).notes(evaluate(study, point), leftOut);
 }
 
 } // namespace planewright

@@ -30,4 +30,10 @@ std::string summaryText(const Study& study, std::string_view point, const Screen
                         const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,
                         const std::vector<LeftOut>& leftOut, const Translate& translate = {});
 
+/// The part of it that neither a table of the points nor a drawing of their number by utilisation shows: by
+/// what was judged, what was read and left out, and the cautions; a line for each.
+std::string fieldNotes(const Study& study, std::string_view point, const ScreenPlan& plan,
+                       const FieldReading& reading, const FieldResults& results, const FieldSummary& summary,
+                       const std::vector<LeftOut>& leftOut, const Translate& translate = {});
+
 } // namespace planewright

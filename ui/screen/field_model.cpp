@@ -130,6 +130,14 @@ QString FieldModel::textOfJudged(const PointResult& result, FieldKey key) const 
   }
 }
 
+QString FieldModel::linesOf(std::uint32_t point) const {
+  QStringList lines;
+  for (int column = 0; column < columnCount(); ++column)
+    if (const QString text = textOf(point, keyOf(column)); !text.isEmpty())
+      lines << tr("%1: %2").arg(headerData(column, Qt::Horizontal, Qt::DisplayRole).toString(), text);
+  return lines.join(QLatin1Char('\n'));
+}
+
 QVariant FieldModel::data(const QModelIndex& index, int role) const {
   if (!index.isValid() || !m_field)
     return {};

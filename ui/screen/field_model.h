@@ -11,8 +11,6 @@
 
 namespace planewright {
 
-using FieldRows = std::shared_ptr<const std::vector<std::uint32_t>>;
-
 /// The points of a screened field that are wanted, in the order that is wanted: an index of them that is made
 /// elsewhere, beside the window. Texts are made of what is looked at.
 class FieldModel : public QAbstractTableModel {
@@ -21,6 +19,8 @@ class FieldModel : public QAbstractTableModel {
 public:
   explicit FieldModel(QObject* parent) : QAbstractTableModel(parent) {}
 
+  const std::shared_ptr<const ScreenedField>& field() const { return m_field; }
+  const FieldRows& rows() const { return m_rows; }
   /// Another field, without rows until they come; or none.
   void show(std::shared_ptr<const ScreenedField> field);
   void take(FieldRows rows);
@@ -37,6 +37,8 @@ public:
   std::uint32_t pointAt(int row) const { return (*m_rows)[static_cast<std::size_t>(row)]; }
   /// The row of a point, where it is wanted.
   std::optional<int> rowOf(std::uint32_t point) const;
+  /// What the table has of a point, a line for each value.
+  QString linesOf(std::uint32_t point) const;
 
 signals:
   void sortWanted(const planewright::FieldSort& sort);

@@ -9,12 +9,13 @@
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/look/strip.h"
+#include "ui/screen/field_map_view.h"
 #include "ui/screen/histogram_view.h"
+#include "ui/screen/map_legend.h"
 
 #include <QCheckBox>
 #include <QComboBox>
 #include <QFileInfo>
-#include <QFontDatabase>
 #include <QHBoxLayout>
 #include <QHeaderView>
 #include <QKeyEvent>
@@ -23,6 +24,7 @@
 #include <QPlainTextEdit>
 #include <QPushButton>
 #include <QSplitter>
+#include <QTabWidget>
 #include <QTableView>
 #include <QVBoxLayout>
 
@@ -33,20 +35,16 @@ FieldPage::FieldPage(Desk& desk, QWidget* parent)
       m_text(new QLineEdit(this)), m_from(new QLineEdit(this)),
       m_exceeds(new QCheckBox(tr("e&xceeding only"), this)), m_combination(new QComboBox(this)),
       m_count(new QLabel(this)), m_model(new FieldModel(this)), m_table(new QTableView(this)),
-      m_histogram(new HistogramView(this)), m_summary(new QPlainTextEdit(this)),
-      m_open(new QPushButton(tr("&Open as a point"), this)) {
+      m_histogram(new HistogramView(this)), m_legend(new MapLegend(this)), m_notes(new QPlainTextEdit(this)),
+      m_views(new QTabWidget(this)), m_open(new QPushButton(tr("&Open as a point"), this)) {
   m_heading->setWordWrap(true);
   m_heading->setTextFormat(Qt::PlainText);
-  m_summary->setReadOnly(true);
-  m_summary->setLineWrapMode(QPlainTextEdit::NoWrap);
-  m_summary->setFont(QFontDatabase::systemFont(QFontDatabase::FixedFont));
-  m_summary->setAccessibleName(tr("Summary of the field"));
   auto* parts = new QSplitter(this);
   parts->addWidget(tableColumn());
-  parts->addWidget(summaryColumn());
+  buildViews();
+  parts->addWidget(m_views);
   parts->setChildrenCollapsible(false);
-  parts->setStretchFactor(0, 3);
-  parts->setStretchFactor(1, 2);
+  parts->setSizes({5000, 4000}); // in this proportion, whatever the width
   auto* rows = new QVBoxLayout(this);
   rows->addWidget(m_strip);
   rows->addWidget(m_heading);
@@ -107,14 +105,32 @@ QWidget* FieldPage::tableColumn() {
   return column;
 }
 
-QWidget* FieldPage::summaryColumn() {
-  auto* column = new QWidget(this);
-  auto* rows = new QVBoxLayout(column);
-  rows->setContentsMargins(0, 0, 0, 0);
-  rows->addWidget(new QLabel(tr("Points by utilisation"), column));
+void FieldPage::buildViews() {
+  // It shares the choice of rows with the table, which has it once it has a model.
+  m_map = new FieldMapView(*m_model, *m_table->selectionModel(), this);
+  m_notes->setReadOnly(true);
+  m_notes->setTabChangesFocus(true);
+  m_notes->setAccessibleName(tr("What was judged and read, and cautions"));
+  m_views->addTab(mapPage(), tr("&Map"));
+  m_views->addTab(barsPage(), tr("&Bars"));
+  m_views->addTab(m_notes, tr("&Notes"));
+}
+
+QWidget* FieldPage::mapPage() {
+  auto* page = new QWidget(this);
+  auto* rows = new QVBoxLayout(page);
+  rows->addWidget(m_map, 1);
+  rows->addWidget(m_legend);
+  return page;
+}
+
+QWidget* FieldPage::barsPage() {
+  auto* page = new QWidget(this);
+  auto* rows = new QVBoxLayout(page);
+  rows->addWidget(new QLabel(tr("Points by utilisation"), page));
   rows->addWidget(m_histogram);
-  rows->addWidget(m_summary, 1);
-  return column;
+  rows->addStretch();
+  return page;
 }
 
 QLayout* FieldPage::buttons() {
@@ -142,9 +158,11 @@ void FieldPage::show(std::shared_ptr<const ScreenedField> field) {
   for (const Text& sentence : outcomeSentences(m_field->reading.field, m_field->results, m_field->summary))
     sentences << shown(sentence);
   m_heading->setText(sentences.join(QLatin1Char(' ')));
-  m_summary->setPlainText(
-      fromUtf8(summaryText(m_field->study, m_field->order.point, m_field->plan, m_field->reading,
-                           m_field->results, m_field->summary, m_field->leftOut, translation())));
+  m_notes->setPlainText(
+      fromUtf8(fieldNotes(m_field->study, m_field->order.point, m_field->plan, m_field->reading,
+                          m_field->results, m_field->summary, m_field->leftOut, translation())));
+  m_views->setTabVisible(0, m_field->extent.has_value());
+  m_views->setCurrentIndex(m_field->extent ? 0 : 1);
   m_histogram->show(m_field->summary.histogram);
   m_combination->clear();
   m_combination->addItem(tr("all combinations"));
@@ -201,6 +219,7 @@ void FieldPage::takeRows(FieldRows rows) {
   if (m_model->rowCount() > 0)
     m_table->setCurrentIndex(m_model->index(row, 0));
   tellRows();
+  tellClasses();
   offer(isOfStudy());
   Q_EMIT arranged();
 }
@@ -211,6 +230,16 @@ void FieldPage::tellRows() {
     tell(*m_count, tr("“%1” is no utilisation. Write a number with a point, as 0.8.").arg(from), true);
   else
     tell(*m_count, tr("rows: %1 of %2").arg(m_model->rowCount()).arg(m_field->summary.points), false);
+}
+
+void FieldPage::tellClasses() {
+  using enum MapClass;
+  std::vector<MapClass> classes = {upTo50, upTo80, upTo95, upTo100, exceeding};
+  if (m_field->summary.judged < m_field->summary.points)
+    classes.push_back(notJudged);
+  if (static_cast<std::size_t>(m_model->rowCount()) < m_field->summary.points)
+    classes.push_back(notWanted);
+  m_legend->show(std::move(classes));
 }
 
 bool FieldPage::isOfStudy() const {

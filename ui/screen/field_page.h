@@ -15,11 +15,14 @@ class QLabel;
 class QLineEdit;
 class QPlainTextEdit;
 class QPushButton;
+class QTabWidget;
 class QTableView;
 
 namespace planewright {
 
+class FieldMapView;
 class HistogramView;
+class MapLegend;
 class Strip;
 
 /// The results of a screened field: a row for each point, to sort, to filter, to open as a point of the study
@@ -44,7 +47,9 @@ public:
   QComboBox& combination() const { return *m_combination; }
   QPushButton& open() const { return *m_open; }
   HistogramView& histogram() const { return *m_histogram; }
-  QPlainTextEdit& summary() const { return *m_summary; }
+  FieldMapView& map() const { return *m_map; }
+  QPlainTextEdit& notes() const { return *m_notes; }
+  QTabWidget& views() const { return *m_views; }
   Strip& strip() const { return *m_strip; }
   QString heading() const;
 
@@ -62,11 +67,14 @@ protected:
 
 private:
   QWidget* tableColumn();
-  QWidget* summaryColumn();
+  void buildViews();
+  QWidget* mapPage();
+  QWidget* barsPage();
   QLayout* buttons();
   void arrange();
   void takeRows(FieldRows rows);
   void tellRows();
+  void tellClasses();
   void follow();
   void offer(bool isOfStudy);
   bool isOfStudy() const;
@@ -85,7 +93,10 @@ private:
   FieldModel* m_model;
   QTableView* m_table;
   HistogramView* m_histogram;
-  QPlainTextEdit* m_summary;
+  FieldMapView* m_map = nullptr;
+  MapLegend* m_legend;
+  QPlainTextEdit* m_notes;
+  QTabWidget* m_views;
   QPushButton* m_open;
   Beside m_rows;
   Beside m_saving;

@@ -73,6 +73,7 @@ Results<std::shared_ptr<const ScreenedField>> screenedWhole(const Study& study, 
     return tl::unexpected(Problems{});
   field->results = *std::move(results);
   field->summary = summaryOf(field->reading.field, field->results);
+  field->extent = extentOf(field->reading.field);
   if (field->summary.judged == 0)
     return refused({order.table, 0, 0, "", PW_TEXT("Screen", "No point of the table is left to be judged."),
                     PW_TEXT("Screen", "Give each point all cases that act in a combination.")});

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/screen/field_map.h"
 #include "core/screen/plan.h"
 #include "core/screen/summary_text.h"
 
@@ -27,7 +28,11 @@ struct ScreenedField {
   std::vector<LeftOut> leftOut;
   FieldResults results{0};
   FieldSummary summary;
+  std::optional<FieldExtent> extent; ///< of the places, where any are given
 };
+
+/// Points of a field in the order in which they are wanted.
+using FieldRows = std::shared_ptr<const std::vector<std::uint32_t>>;
 
 /// How far a screening is; written by its thread and read by the window.
 struct FieldProgress {

@@ -7,6 +7,7 @@
 #include "ui/given/given_panel.h"
 #include "ui/look/strip.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/screen/screen_dialog.h"
 #include "ui/sheet/sheet_dialog.h"
 #include "ui/shell/appearance.h"
 #include "ui/shell/areas.h"
@@ -76,6 +77,7 @@ MainWindow::MainWindow(FileQuestions questions)
 MainWindow::~MainWindow() {
   m_desk.undoStack()->disconnect(this);
   delete m_areas;
+  delete m_screen;
   qDeleteAll(findChildren<QWidget*>(Qt::FindDirectChildrenOnly));
 }
 
@@ -288,6 +290,8 @@ void MainWindow::closeEvent(QCloseEvent* event) {
   QSettings settings;
   settings.setValue(QStringLiteral("geometry"), saveGeometry());
   m_body->store(settings);
+  if (m_screen)
+    m_screen->hide();
   event->accept();
 }
 

@@ -275,10 +275,14 @@ void MainWindow::showEvidence() {
 void MainWindow::screenPoints() {
   settleDrafts();
   if (!m_screen) {
-    m_screen = new ScreenDialog(m_desk, this);
-    connect(m_screen, &ScreenDialog::opened, this, &MainWindow::showPointPage);
+    m_screen = new ScreenDialog(m_desk);
+    connect(m_screen, &ScreenDialog::opened, this, [this] {
+      showPointPage();
+      activateWindow();
+      raise();
+    });
   }
-  bringUp(m_screen);
+  raised(*m_screen);
 }
 
 void MainWindow::copyFigureNow() {

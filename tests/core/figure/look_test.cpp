@@ -60,6 +60,22 @@ TEST_P(Contrast, ofAidsIsEnoughToBeSeen) {
   holds({hush, grain, grid, rule, band}, {canvas}, seen);
 }
 
+// L* of CIE 1976 from the relative luminance.
+double lightness(Role role, Palette palette) {
+  return 116 * std::cbrt(luminance(colourOf(role, palette))) - 16;
+}
+
+TEST_P(Contrast, ofClassesOfUtilisationIsInEvenSteps) {
+  using enum Role;
+  holds({utilised50}, {canvas}, seen);
+  const double whole = lightness(utilised100, GetParam()) - lightness(utilised50, GetParam());
+  Role before = utilised50;
+  for (const Role role : {utilised80, utilised95, utilised100}) {
+    EXPECT_NEAR((lightness(role, GetParam()) - lightness(before, GetParam())) / whole, 1.0 / 3, 0.01);
+    before = role;
+  }
+}
+
 INSTANTIATE_TEST_SUITE_P(Palettes, Contrast,
                          testing::Values(Palette::light, Palette::dark, Palette::mono, Palette::paper));
 

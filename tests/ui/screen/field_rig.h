@@ -76,4 +76,18 @@ inline constexpr auto threePoints = "point,region,sx G,sy G,txy G,sx S,sy S,txy 
                                     "n2,corner,4,0.1,0.3,5,0.05,0.2\n"
                                     "n10,deck,0.5,0,0,0,0,0\n";
 
+/// A mesh of 30 by 10 points, 100 mm apart; those of the right side exceed, and n17 has no place.
+inline QByteArray mesh() {
+  QByteArray table = "point,x [m],y [m],sx G,sy G,txy G,sx S,sy S,txy S\n";
+  for (int i = 0; i < 300; ++i) {
+    const int column = i % 30;
+    const QByteArray place =
+        i == 17 ? QByteArray(",")
+                : QByteArray::number(column / 10.0) + ',' + QByteArray::number(i / 30 / 10.0);
+    table += 'n' + QByteArray::number(i) + ',' + place + ',' + QByteArray::number(column / 5.0) +
+             ",0,0.1,2,0.05,0.1\n";
+  }
+  return table;
+}
+
 } // namespace planewright

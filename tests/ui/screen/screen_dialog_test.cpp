@@ -14,7 +14,10 @@ TEST_F(ScreenPoints, showsTheWorstFirstWithWhatWasCounted) {
   EXPECT_EQ(column(FieldKey::point), (QStringList{"n2", "n1", "n10"}));
   EXPECT_EQ(column(FieldKey::region), (QStringList{"corner", "deck", "deck"}));
   EXPECT_TRUE(page().heading().contains("Points: 3, judged: 3"));
-  EXPECT_TRUE(page().summary().toPlainText().contains("Points by utilisation:"));
+  EXPECT_TRUE(page().notes().toPlainText().startsWith("Judged by point P1, over "));
+  EXPECT_TRUE(page().notes().toPlainText().contains("Caution: "));
+  EXPECT_FALSE(page().notes().toPlainText().contains("Worst points"));
+  EXPECT_FALSE(page().views().isTabVisible(0)); // no places, no map
 }
 
 TEST_F(ScreenPoints, mapsHeadingsThatDiffer) {

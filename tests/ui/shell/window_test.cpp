@@ -10,6 +10,7 @@
 #include "ui/look/look.h"
 #include "ui/look/strip.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/screen/screen_dialog.h"
 #include "ui/shell/body.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/picker.h"
@@ -407,6 +408,31 @@ TEST_F(WindowTest, pickersShowAnotherPointWithoutAStep) {
   EXPECT_FALSE(window.isWindowModified());
   QTest::keyClick(&window, Qt::Key_PageUp, Qt::ControlModifier);
   EXPECT_EQ(window.desk().readout().point, study.points[0].name);
+}
+
+TEST_F(WindowTest, aFieldHasAWindowOfItsOwnThatGoesWithThisOne) {
+  MainWindow& window = shown();
+  window.openWorkedExample();
+  const auto fields = [] {
+    QList<ScreenDialog*> found;
+    for (QWidget* widget : QApplication::topLevelWidgets())
+      if (auto* dialog = qobject_cast<ScreenDialog*>(widget); dialog && dialog->isVisible())
+        found << dialog;
+    return found;
+  };
+  EXPECT_TRUE(fields().isEmpty());
+  const QList<QAction*> actions = window.findChildren<QAction*>();
+  const auto action = std::ranges::find(actions, QStringLiteral("S&creen points…"),
+                                        [](const QAction* one) { return one->text(); });
+  ASSERT_NE(action, actions.end());
+  (*action)->trigger();
+  ASSERT_EQ(fields().size(), 1);
+  EXPECT_EQ(fields()[0]->parentWidget(), nullptr); // one that has a parent would lie over it always
+  window.showSummary();
+  Q_EMIT fields()[0]->opened();
+  EXPECT_TRUE(window.body().isVisible());
+  EXPECT_TRUE(window.close());
+  EXPECT_TRUE(fields().isEmpty());
 }
 
 /// Rectangle of a widget in the window.
