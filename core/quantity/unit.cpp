@@ -37,7 +37,7 @@ double scaled(double value, double numerator, double denominator) {
 
 } // namespace
 
-double Unit::toBase(double value) const {
+double Unit::scaledToBase(double value) const {
   return scaled(value, numerator, denominator);
 }
 double Unit::fromBase(double value) const {

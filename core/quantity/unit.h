@@ -48,9 +48,13 @@ struct Unit {
   double denominator = 1;
 
   /// Relative error at most two roundings; finite wherever the result is.
-  double toBase(double value) const;
+  double toBase(double value) const { return isBase() ? value : scaledToBase(value); }
   double fromBase(double value) const;
   bool operator==(const Unit&) const = default;
+
+private:
+  bool isBase() const { return numerator == 1 && denominator == 1; }
+  double scaledToBase(double value) const;
 };
 
 /// One row of the table of units, with the source of its factor.

@@ -45,6 +45,11 @@ double Field::yOf(std::size_t point) const {
   return m_columns.y ? m_ys[point] : none;
 }
 
+bool Field::hasStress(std::size_t loadCase, std::size_t point) const {
+  const double* rows = block(loadCase, point / blockSize);
+  return rows && !std::isnan(rows[point % blockSize]);
+}
+
 PlaneStress Field::stressOf(std::size_t loadCase, std::size_t point) const {
   const double* rows = block(loadCase, point / blockSize);
   if (!rows)

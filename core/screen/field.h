@@ -56,6 +56,7 @@ public:
   /// Where the point lies, mm; NaN where that is not given.
   double xOf(std::size_t point) const;
   double yOf(std::size_t point) const;
+  bool hasStress(std::size_t loadCase, std::size_t point) const;
   PlaneStress stressOf(std::size_t loadCase, std::size_t point) const;
   PointStanding standingOf(std::size_t point) const { return m_standings[point]; }
 

@@ -217,7 +217,7 @@ private:
     Field& field = m_reading.field;
     const bool isWide = m_reading.columns.isWide;
     const std::optional<std::size_t> known = m_index->find(m_row.name, m_row.layer);
-    if (known && (isWide || !std::isnan(field.stressOf(m_row.loadCase, *known).sx))) {
+    if (known && (isWide || field.hasStress(m_row.loadCase, *known))) {
       field.setStanding(*known, PointStanding::incomplete);
       fault(0, quotedStart(m_row.name),
             PW_TEXT("Field", "The point “%1” has this a second time.").with(quotedStart(m_row.name)),
@@ -274,7 +274,7 @@ private:
     for (std::size_t point = 0; point < field.size(); ++point) {
       bool isWhole = field.standingOf(point) == PointStanding::whole;
       for (std::size_t k = 0; isWhole && k < acts.size(); ++k)
-        if (acts[k] && std::isnan(field.stressOf(k, point).sx)) {
+        if (acts[k] && !field.hasStress(k, point)) {
           isWhole = false;
           lacks(point, k);
         }

@@ -332,6 +332,11 @@ void registerAll() {
   add("write by fprintf", writeByPrintf);
   if (!longTable.empty())
     add("read long", [](benchmark::State& s) { read(s, longTable); });
+  if (!longTable.empty())
+    add("read bare", [](benchmark::State& s) {
+      for (auto _ : s)
+        benchmark::DoNotOptimize(readBare(longTable));
+    });
 }
 
 } // namespace

@@ -3,7 +3,9 @@
 
 #include <Eigen/Dense>
 
+#include <charconv>
 #include <cmath>
+#include <cstring>
 #include <numbers>
 
 #include <immintrin.h>
@@ -111,6 +113,26 @@ void BandScan::keep(const double* state, const SquaresForm& form, double* best, 
 
 void BandScan::keep(const double* state, const LinearForm& form, double* best, double* which) const {
   scan(state, form, &keepLinear, best, which);
+}
+
+double readBare(std::string_view table) {
+  const char* at = table.data();
+  const char* const end = at + table.size();
+  const auto behind = [&](char c) {
+    at = static_cast<const char*>(std::memchr(at, c, static_cast<std::size_t>(end - at))) + 1;
+  };
+  double sum = 0;
+  behind('\n');
+  while (at < end) {
+    behind(',');
+    behind(',');
+    for (int i = 0; i < 3; ++i) {
+      double value = 0;
+      at = std::from_chars(at, end, value).ptr + 1;
+      sum += value;
+    }
+  }
+  return sum;
 }
 
 void principalByEigen(const double* sx, const double* sy, const double* txy, double* const made[4],

@@ -3,6 +3,7 @@
 
 #include "core/screen/kernels.h"
 
+#include <string_view>
 #include <vector>
 
 namespace planewright {
@@ -37,5 +38,9 @@ private:
 /// Principal values and direction of each point by Eigen's closed form for 2 by 2; `made` has four rows.
 void principalByEigen(const double* sx, const double* sy, const double* txy, double* const made[4],
                       std::size_t size);
+
+/// The sum of the three numbers of each row point,case,sx,sy,txy: by the library's reader of numbers and
+/// nothing else, without a check, a name or a place to keep them. Reading can hardly be faster on one thread.
+double readBare(std::string_view table);
 
 } // namespace planewright
