@@ -41,9 +41,7 @@ public:
     const Reach down = reachOf(at.y, m_size, m_view.height);
     for (int y = down.from; y < down.to; ++y)
       for (int x = across.from; x < across.to; ++x)
-        put(point, mapClass,
-            static_cast<std::size_t>(y) * static_cast<std::size_t>(m_view.width) +
-                static_cast<std::size_t>(x));
+        put(point, mapClass, m_pixels.indexOf(x, y));
   }
 
   FieldMapPixels taken() && { return std::move(m_pixels); }
@@ -138,8 +136,7 @@ std::optional<std::uint32_t> FieldMapPixels::pointNear(int x, int y, int reach) 
   int least = reach * reach + 1;
   for (int row = std::max(y - reach, 0); row <= std::min(y + reach, height - 1); ++row)
     for (int column = std::max(x - reach, 0); column <= std::min(x + reach, width - 1); ++column) {
-      const std::uint32_t point = points[static_cast<std::size_t>(row) * static_cast<std::size_t>(width) +
-                                         static_cast<std::size_t>(column)];
+      const std::uint32_t point = points[indexOf(column, row)];
       const int distance = (row - y) * (row - y) + (column - x) * (column - x);
       if (point == noPoint || distance >= least)
         continue;

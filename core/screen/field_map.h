@@ -60,6 +60,10 @@ struct FieldMapPixels {
   std::vector<std::uint32_t> points;
   std::vector<MapClass> classes;
 
+  /// Where a pixel of the map stands in both.
+  std::size_t indexOf(int x, int y) const {
+    return static_cast<std::size_t>(y) * static_cast<std::size_t>(width) + static_cast<std::size_t>(x);
+  }
   /// The point that is seen at a pixel, or else the one seen nearest to it within `reach` pixels; none
   /// outside.
   std::optional<std::uint32_t> pointNear(int x, int y, int reach) const;

@@ -27,7 +27,6 @@ public:
   SummaryWriter(const ScreenPlan& plan, const FieldReading& reading, const FieldResults& results,
                 const FieldSummary& summary, const Translate& translate)
       : m_plan(plan), m_field(reading.field), m_reading(reading), m_results(results), m_summary(summary),
-        m_worst(worstOf(results, shownPoints)),
         m_sentences(outcomeSentences(reading.field, results, summary)), m_translate(translate) {}
 
   std::string written(const Readout& readout, const std::vector<LeftOut>& leftOut) {
@@ -97,7 +96,7 @@ private:
     head(PW_TEXT("Screen", "check"));
     head(PW_TEXT("Screen", "mode"));
     head(PW_TEXT("Screen", "worst angle"));
-    for (const std::uint32_t point : m_worst)
+    for (const std::uint32_t point : worstOf(m_results, shownPoints))
       rows.push_back(cellsOf(point));
     line(PW_TEXT("Screen", "Worst points:"));
     m_out += alignedRows(rows, indent);
@@ -167,7 +166,6 @@ private:
   const FieldReading& m_reading;
   const FieldResults& m_results;
   const FieldSummary& m_summary;
-  std::vector<std::uint32_t> m_worst; ///< the worst first
   std::vector<Text> m_sentences;
   const Translate& m_translate;
   std::string m_out;

@@ -37,8 +37,11 @@ FieldMapView::FieldMapView(const FieldModel& model, QItemSelectionModel& current
   setSizePolicy(QSizePolicy::Expanding, QSizePolicy::Expanding);
   // A field has rows only after it has come.
   connect(&m_model, &QAbstractItemModel::modelReset, this, [this] {
-    if (!m_picture || m_model.field() != m_picture->order.field) {
+    if (m_model.field() != m_asked.field) {
+      // Of the field before, which may be large, nothing is kept.
+      m_drawing.stop();
       m_picture.reset();
+      m_asked = {};
       showAll();
     }
     update();
@@ -47,8 +50,8 @@ FieldMapView::FieldMapView(const FieldModel& model, QItemSelectionModel& current
   connect(&m_current, &QItemSelectionModel::currentChanged, this, qOverload<>(&QWidget::update));
 }
 
-int FieldMapView::unit() const {
-  return std::max(static_cast<int>(std::lround(devicePixelRatioF())), 1);
+bool FieldMapView::hasMap() const {
+  return m_model.field() && m_model.field()->extent;
 }
 
 QSize FieldMapView::mapSize() const {
@@ -70,7 +73,7 @@ MapView FieldMapView::view() const {
 }
 
 MapOrder FieldMapView::order() const {
-  return {m_model.field(), m_model.rows(), view(), unit(), lookOf(*this)};
+  return {m_model.field(), m_model.rows(), view(), patternUnit(*this), lookOf(*this)};
 }
 
 bool FieldMapView::isDrawn() const {
@@ -86,7 +89,6 @@ void FieldMapView::ask(const MapOrder& order) {
     return [this, picture = std::move(picture)] {
       m_picture = picture;
       update();
-      Q_EMIT drawn();
     };
   });
 }
@@ -153,7 +155,7 @@ void FieldMapView::paintEvent(QPaintEvent*) {
   QPainter painter(this);
   const Look look = lookOf(*this);
   painter.fillRect(QRect(QPoint(), mapSize()), look.colour(Role::canvas));
-  if (!m_model.field() || !m_model.field()->extent || (m_model.rows()->empty() && !m_picture))
+  if (!hasMap() || (m_model.rows()->empty() && !m_picture))
     return;
   // What is asked for follows from how the widget stands now, whatever has changed it.
   if (const MapOrder wanted = order(); wanted != m_asked)
@@ -238,7 +240,7 @@ void FieldMapView::mousePressEvent(QMouseEvent* event) {
 }
 
 void FieldMapView::mouseMoveEvent(QMouseEvent* event) {
-  if (!(event->buttons() & Qt::LeftButton) || !m_model.field() || !m_model.field()->extent)
+  if (!(event->buttons() & Qt::LeftButton) || !hasMap())
     return;
   m_isMoving =
       m_isMoving || (event->position() - m_pressed).manhattanLength() >= QApplication::startDragDistance();
@@ -255,14 +257,14 @@ void FieldMapView::mouseReleaseEvent(QMouseEvent* event) {
 }
 
 void FieldMapView::wheelEvent(QWheelEvent* event) {
-  if (!m_model.field() || !m_model.field()->extent)
+  if (!hasMap())
     return;
   zoom(std::pow(stepOfZoom, event->angleDelta().y() / notch), event->position());
   event->accept();
 }
 
 void FieldMapView::keyPressEvent(QKeyEvent* event) {
-  if (!m_model.field() || !m_model.field()->extent)
+  if (!hasMap())
     return QWidget::keyPressEvent(event);
   const QPointF middle(mapSize().width() / 2.0, mapSize().height() / 2.0);
   switch (event->key()) {

@@ -36,9 +36,6 @@ public:
   QSize sizeHint() const override { return {320, 260}; }
   QSize minimumSizeHint() const override { return {160, 120}; }
 
-signals:
-  void drawn();
-
 protected:
   bool event(QEvent* event) override;
   void paintEvent(QPaintEvent* event) override;
@@ -49,7 +46,7 @@ protected:
   void keyPressEvent(QKeyEvent* event) override;
 
 private:
-  int unit() const;
+  bool hasMap() const;
   QSize mapSize() const;
   MapView view() const;
   MapOrder order() const;

@@ -6,8 +6,6 @@
 
 #include <QPainter>
 
-#include <cmath>
-
 namespace planewright {
 
 namespace {
@@ -79,10 +77,9 @@ QSize MapLegend::sizeHint() const {
 void MapLegend::paintEvent(QPaintEvent*) {
   QPainter painter(this);
   const Look look = lookOf(*this);
-  const int unit = std::max(static_cast<int>(std::lround(devicePixelRatioF())), 1);
   for (const Entry& entry : laidOut(width())) {
     const QRect square(entry.room.left(), entry.room.center().y() - patch / 2, patch, patch);
-    painter.drawImage(square, mapPatch(entry.mapClass, square.size(), unit, look));
+    painter.drawImage(square, mapPatch(entry.mapClass, square.size(), patternUnit(*this), look));
     painter.setPen(look.colour(Role::soft));
     painter.drawRect(square.adjusted(0, 0, -1, -1));
     painter.setPen(look.colour(Role::ink));

@@ -1,14 +1,16 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/screen/map_picture.h"
 
+#include <algorithm>
 #include <array>
+#include <cmath>
 
 namespace planewright {
 
 namespace {
 
-constexpr int leastMark =
-    2; ///< pixels of the window; patterns below repeat so that each mark shows some of them
+// Pixels of the window. The patterns below repeat so that the least mark shows some of them.
+constexpr int leastMark = 2;
 constexpr int greatestMark = 14;
 
 /// The colours of the classes, pixel for pixel.
@@ -46,7 +48,23 @@ private:
   std::array<QRgb, 8> m_colours{};
 };
 
+/// An image whose pixels have the classes that `classAt` gives.
+template <class ClassAt>
+QImage drawn(int width, int height, const Colours& colours, ClassAt classAt) {
+  QImage image(width, height, QImage::Format_RGB32);
+  for (int y = 0; y < height; ++y) {
+    auto* line = reinterpret_cast<QRgb*>(image.scanLine(y));
+    for (int x = 0; x < width; ++x)
+      line[x] = colours.at(classAt(x, y), x, y);
+  }
+  return image;
+}
+
 } // namespace
+
+int patternUnit(const QPaintDevice& device) {
+  return std::max(static_cast<int>(std::lround(device.devicePixelRatioF())), 1);
+}
 
 std::shared_ptr<const MapPicture> mapPicture(MapOrder order, const GoesOn& goesOn) {
   const FieldExtent& extent = *order.field->extent;
@@ -55,24 +73,15 @@ std::shared_ptr<const MapPicture> mapPicture(MapOrder order, const GoesOn& goesO
       fieldMapPixels(order.field->reading.field, order.field->results, *order.rows, order.view, size, goesOn);
   if (!pixels)
     return nullptr;
-  QImage image(pixels->width, pixels->height, QImage::Format_RGB32);
-  const Colours colours(order.look, order.unit);
-  std::size_t pixel = 0;
-  for (int y = 0; y < image.height(); ++y) {
-    auto* line = reinterpret_cast<QRgb*>(image.scanLine(y));
-    for (int x = 0; x < image.width(); ++x)
-      line[x] = colours.at(pixels->classes[pixel++], x, y);
-  }
+  QImage image = drawn(pixels->width, pixels->height, Colours(order.look, order.unit),
+                       [&](int x, int y) { return pixels->classes[pixels->indexOf(x, y)]; });
   return std::make_shared<const MapPicture>(
       MapPicture{std::move(order), *std::move(pixels), std::move(image)});
 }
 
 QImage mapPatch(MapClass mapClass, QSize size, int unit, const Look& look) {
-  QImage image(size * unit, QImage::Format_RGB32);
-  const Colours colours(look, unit);
-  for (int y = 0; y < image.height(); ++y)
-    for (int x = 0; x < image.width(); ++x)
-      image.setPixel(x, y, colours.at(mapClass, x, y));
+  QImage image = drawn(size.width() * unit, size.height() * unit, Colours(look, unit),
+                       [mapClass](int, int) { return mapClass; });
   image.setDevicePixelRatio(unit);
   return image;
 }

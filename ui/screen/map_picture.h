@@ -26,6 +26,9 @@ struct MapPicture {
   QImage image;
 };
 
+/// Pixels of a widget's device for one of the window, as patterns are made of whole ones.
+int patternUnit(const QPaintDevice& device);
+
 /// Draws a map; none where it was ended. The order has a field with an extent.
 std::shared_ptr<const MapPicture> mapPicture(MapOrder order, const GoesOn& goesOn);
 

@@ -137,8 +137,8 @@ private:
   int m_toldStep = 0; ///< where the undo stack stood when a step was last told
   QPointer<FigureDialog> m_figure;
   QPointer<SheetDialog> m_sheet;
-  QPointer<ScreenDialog>
-      m_screen; ///< a window of its own: as a dialog of this one it would always lie over it
+  // A window of its own: as a dialog of this one it would always lie over it.
+  QPointer<ScreenDialog> m_screen;
   QPointer<HelpWindow> m_help;
   QPointer<EvidenceDialog> m_evidence;
   QPointer<TitleDialog> m_title;
