@@ -78,6 +78,26 @@ bool isPlaced(const Field& field, std::size_t point) {
   return !std::isnan(field.xOf(point)) && !std::isnan(field.yOf(point));
 }
 
+std::optional<std::uint32_t> neighbourOf(const Field& field, const std::vector<std::uint32_t>& among,
+                                         double x, double y, MapWay way) {
+  const bool isAcross = way == MapWay::left || way == MapWay::right;
+  const double sign = way == MapWay::right || way == MapWay::up ? 1 : -1;
+  std::optional<std::uint32_t> nearest;
+  double least = HUGE_VAL;
+  for (const std::uint32_t point : among) {
+    const double byX = field.xOf(point) - x;
+    const double byY = field.yOf(point) - y;
+    const double ahead = sign * (isAcross ? byX : byY);
+    const double aside = std::abs(isAcross ? byY : byX);
+    // A place that is not known is NaN and compares false.
+    if (ahead > 0 && aside <= ahead && std::hypot(ahead, aside) < least) {
+      least = std::hypot(ahead, aside);
+      nearest = point;
+    }
+  }
+  return nearest;
+}
+
 std::optional<FieldExtent> extentOf(const Field& field) {
   std::optional<FieldExtent> extent;
   for (std::size_t point = 0; point < field.size(); ++point) {

@@ -35,6 +35,13 @@ struct FieldExtent {
 /// None where no point has a place.
 std::optional<FieldExtent> extentOf(const Field& field);
 
+/// A way to go from a point of a map, y upwards.
+enum class MapWay { left, right, up, down };
+/// Of the points of `among` that lie within 45 degrees of a way from (x, y) mm, the nearest; of equals
+/// the first in `among`. None where none lies there.
+std::optional<std::uint32_t> neighbourOf(const Field& field, const std::vector<std::uint32_t>& among,
+                                         double x, double y, MapWay way);
+
 /// What part of the plane a map of `width` by `height` pixels shows; x to the right, y upwards, one scale.
 struct MapView {
   int width = 0, height = 0;       ///< pixels

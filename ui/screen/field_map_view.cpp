@@ -28,6 +28,21 @@ constexpr double stepOfZoom = 1.25;
 constexpr int stepOfMove = 40;
 constexpr double notch = 120; ///< of a wheel, in its eighths of a degree
 
+std::optional<MapWay> wayOf(int key) {
+  switch (key) {
+  case Qt::Key_Left:
+    return MapWay::left;
+  case Qt::Key_Right:
+    return MapWay::right;
+  case Qt::Key_Up:
+    return MapWay::up;
+  case Qt::Key_Down:
+    return MapWay::down;
+  default:
+    return std::nullopt;
+  }
+}
+
 } // namespace
 
 FieldMapView::FieldMapView(const FieldModel& model, QItemSelectionModel& current, QWidget* parent)
@@ -145,8 +160,29 @@ QPointF FieldMapView::placeOf(std::uint32_t point) const {
 }
 
 void FieldMapView::pick(QPointF at) {
-  const std::optional<std::uint32_t> point = pointAt(at);
-  if (const std::optional<int> row = point ? m_model.rowOf(*point) : std::nullopt)
+  if (const std::optional<std::uint32_t> point = pointAt(at))
+    choose(*point);
+}
+
+// From the middle of the view where no point with a place is chosen.
+void FieldMapView::pick(MapWay way) {
+  const Field& field = m_model.field()->reading.field;
+  const MapView view = this->view();
+  Vec from = {view.centreX, view.centreY};
+  if (const std::optional<std::uint32_t> point = current(); point && isPlaced(field, *point))
+    from = {field.xOf(*point), field.yOf(*point)};
+  const std::optional<std::uint32_t> point = neighbourOf(field, *m_model.rows(), from.x, from.y, way);
+  if (!point)
+    return;
+  choose(*point);
+  if (!QRectF(QPointF(), mapSize()).contains(placeOf(*point))) {
+    m_centre = QPointF(field.xOf(*point), field.yOf(*point));
+    update();
+  }
+}
+
+void FieldMapView::choose(std::uint32_t point) {
+  if (const std::optional<int> row = m_model.rowOf(point))
     m_current.setCurrentIndex(m_model.index(*row, 0),
                               QItemSelectionModel::ClearAndSelect | QItemSelectionModel::Rows);
 }
@@ -155,7 +191,7 @@ void FieldMapView::paintEvent(QPaintEvent*) {
   QPainter painter(this);
   const Look look = lookOf(*this);
   painter.fillRect(QRect(QPoint(), mapSize()), look.colour(Role::canvas));
-  if (!hasMap() || (m_model.rows()->empty() && !m_picture))
+  if (!hasMap())
     return;
   // What is asked for follows from how the widget stands now, whatever has changed it.
   if (const MapOrder wanted = order(); wanted != m_asked)
@@ -266,6 +302,9 @@ void FieldMapView::wheelEvent(QWheelEvent* event) {
 void FieldMapView::keyPressEvent(QKeyEvent* event) {
   if (!hasMap())
     return QWidget::keyPressEvent(event);
+  if (event->modifiers() & Qt::ControlModifier)
+    if (const std::optional<MapWay> way = wayOf(event->key()))
+      return pick(*way);
   const QPointF middle(mapSize().width() / 2.0, mapSize().height() / 2.0);
   switch (event->key()) {
   case Qt::Key_Plus:

@@ -17,7 +17,8 @@ class FieldModel;
 
 /// A map of the points of a table, coloured by utilisation, at one scale with y upwards. A click makes the
 /// point that is seen there the current row; the current row has a ring. The wheel or + and - zoom, a drag or
-/// the arrows move, Home shows all. It is drawn beside the window.
+/// the arrows move, Home shows all; Ctrl and an arrow choose the nearest point that way. It is drawn beside
+/// the window.
 class FieldMapView : public QWidget {
   Q_OBJECT
 
@@ -54,6 +55,8 @@ private:
   void zoom(double factor, QPointF around);
   void move(QPointF pixels);
   void pick(QPointF at);
+  void pick(MapWay way);
+  void choose(std::uint32_t point);
   std::optional<std::uint32_t> current() const;
   void drawMap(QPainter& painter) const;
   void drawRing(QPainter& painter) const;

@@ -24,6 +24,7 @@
 #include <QPlainTextEdit>
 #include <QPushButton>
 #include <QSplitter>
+#include <QTabBar>
 #include <QTabWidget>
 #include <QTableView>
 #include <QVBoxLayout>
@@ -111,6 +112,7 @@ void FieldPage::buildViews() {
   m_notes->setReadOnly(true);
   m_notes->setTabChangesFocus(true);
   m_notes->setAccessibleName(tr("What was judged and read, and cautions"));
+  m_views->tabBar()->setAccessibleName(tr("Map, bars and notes"));
   m_views->addTab(mapPage(), tr("&Map"));
   m_views->addTab(barsPage(), tr("&Bars"));
   m_views->addTab(m_notes, tr("&Notes"));
@@ -138,6 +140,7 @@ QLayout* FieldPage::buttons() {
   auto* save = new QPushButton(tr("&Save results…"), this);
   for (QPushButton* button : {another, save, m_open})
     button->setAutoDefault(false);
+  setTabOrder(save, m_open);
   connect(another, &QPushButton::clicked, this, &FieldPage::anotherWanted);
   connect(save, &QPushButton::clicked, this, &FieldPage::saveWanted);
   auto* row = new QHBoxLayout;

@@ -47,11 +47,10 @@ FieldSetup::FieldSetup(Desk& desk, QWidget* parent)
     : QWidget(parent), m_desk(desk), m_path(new QLineEdit(this)),
       m_choose(new QPushButton(tr("&Choose…"), this)), m_rows(new QStandardItemModel(this)),
       m_meanings(new MeaningHeader(ColumnMeanings::meaningsFor(desk.study()), this)),
-      m_preview(new QTableView(this)), m_judging(new QComboBox(this)),
-      m_leavesOut(new QCheckBox(tr("Leave &faulty rows out"), this)), m_except(new QLineEdit(this)),
-      m_sentence(new QLabel(this)), m_complaints(new QPlainTextEdit(this)),
-      m_progress(new QProgressBar(this)), m_start(new QPushButton(tr("&Screen"), this)),
-      m_cancel(new QPushButton(tr("Cancel"), this)) {
+      m_preview(new QTableView(this)), m_judging(new QComboBox(this)), m_except(new QLineEdit(this)),
+      m_leavesOut(new QCheckBox(tr("Leave &faulty rows out"), this)), m_sentence(new QLabel(this)),
+      m_complaints(new QPlainTextEdit(this)), m_progress(new QProgressBar(this)),
+      m_start(new QPushButton(tr("&Screen"), this)), m_cancel(new QPushButton(tr("Cancel"), this)) {
   build();
   connect(m_choose, &QPushButton::clicked, this, &FieldSetup::tableWanted);
   connect(m_path, &QLineEdit::editingFinished, this, [this] {

@@ -79,8 +79,8 @@ private:
   MeaningHeader* m_meanings;
   QTableView* m_preview;
   QComboBox* m_judging;
-  QCheckBox* m_leavesOut;
   QLineEdit* m_except;
+  QCheckBox* m_leavesOut;
   QLabel* m_sentence;
   QPlainTextEdit* m_complaints;
   QProgressBar* m_progress;

@@ -6,6 +6,7 @@
 #include "ui/screen/field_page.h"
 #include "ui/screen/field_setup.h"
 
+#include <QAction>
 #include <QFileDialog>
 #include <QFileInfo>
 #include <QPushButton>
@@ -34,6 +35,10 @@ ScreenDialog::ScreenDialog(Desk& desk, QWidget* parent)
   connect(m_page, &FieldPage::anotherWanted, this, [this] { m_pages->setCurrentWidget(m_setup); });
   connect(m_page, &FieldPage::saveWanted, this, &ScreenDialog::chooseResults);
   connect(m_page, &FieldPage::opened, this, &ScreenDialog::opened);
+  auto* help = new QAction(this);
+  help->setShortcut(QKeySequence::HelpContents);
+  addAction(help);
+  connect(help, &QAction::triggered, this, &ScreenDialog::helpWanted);
 }
 
 bool ScreenDialog::showsResults() const {

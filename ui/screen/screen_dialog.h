@@ -35,6 +35,7 @@ public:
 signals:
   /// A point of the field was made one of the study, and is shown.
   void opened();
+  void helpWanted();
 
 private:
   void chooseTable();

@@ -95,6 +95,36 @@ Drag the line's cursor to try other angles. "All criteria side by side" shows ho
       .arg(rows);
 }
 
+QString screening() {
+  return words(QT_TRANSLATE_NOOP("Help", R"help(
+<p>File, Screen points judges the points of a table, a million of them too, by the line, the tolerance and the checks of
+one point of the study, over all combinations. It finds the few that are worth opening.</p>
+<p><b>The table</b> is CSV in UTF-8, with a row for each case at a point (<code>point,case,sx,sy,txy</code>) or with three
+columns for each case (<code>sx G</code>, <code>sy G</code>, <code>txy G</code>). A heading may name its unit, as in
+<code>sx [MPa]</code>; without one the study's unit counts. <code>layer</code> (top, mid, bottom), <code>axes</code> (of the
+row's own stresses), <code>line</code> (of its own), <code>region</code>, <code>x</code> and <code>y</code> may stand beside
+them. What a column with another heading means is chosen from the list above it.</p>
+<p>A row with a fault, NaN and infinity among them, stops the run and is told with its line; "Leave faulty rows out" goes
+on, and they are counted. Points and regions are left out by name; <code>corner*</code> is all names that begin so.</p>
+<p><b>The greatest value is not yet a verdict.</b> At a re-entrant corner or under a point load the stresses of an analysis
+grow with every refinement of its mesh. The value that 99.9 % of the points stay within stands beside the greatest one.</p>
+<p><b>Map</b> (where the table has x and y): the classes are in the legend, hatched exceeds, pale is kept back by a
+filter. The ring is at the chosen row. <b>Bars</b> count the points by utilisation; a bar shows its points alone. <b>Notes</b> say what was
+judged and read, and the cautions.</p>
+<p>Open as a point makes the chosen row a point of the study, with its cases and the checks that judged it, in one step that
+can be undone.</p>
+<table cellpadding="4">
+<tr><td><b>Enter</b></td><td>in the table: open the row as a point of the study</td></tr>
+<tr><td><b>Alt+M, Alt+B, Alt+N</b></td><td>map, bars, notes</td></tr>
+<tr><td><b>click; wheel; drag</b></td><td>on the map: choose the point; closer or wider about the pointer; move</td></tr>
+<tr><td><b>+, −; arrows; Home</b></td><td>on the map: closer, wider; move; all of the field</td></tr>
+<tr><td><b>Ctrl+arrows</b></td><td>on the map: choose the nearest point that way</td></tr>
+<tr><td><b>Up, Down; Space</b></td><td>on the bars: to a bar; its points alone, and once more all</td></tr>
+<tr><td><b>Esc</b></td><td>cancel what is running; close the window</td></tr>
+</table>
+)help"));
+}
+
 QString keys() {
   return words(QT_TRANSLATE_NOOP("Help", R"help(
 <table cellpadding="4">
@@ -148,6 +178,8 @@ QString titleOf(HelpPage page) {
     return words(QT_TRANSLATE_NOOP("Help", "Conventions"));
   case HelpPage::strength:
     return words(QT_TRANSLATE_NOOP("Help", "Strength"));
+  case HelpPage::screening:
+    return words(QT_TRANSLATE_NOOP("Help", "Screening a field"));
   case HelpPage::keys:
     return words(QT_TRANSLATE_NOOP("Help", "Keys"));
   case HelpPage::cautions:
@@ -160,6 +192,7 @@ QString htmlOf(HelpPage page, const Look& look) {
   const QString body = page == HelpPage::entries       ? entries()
                        : page == HelpPage::conventions ? conventions()
                        : page == HelpPage::strength    ? strength()
+                       : page == HelpPage::screening   ? screening()
                        : page == HelpPage::keys        ? keys()
                                                        : cautions();
   return QStringLiteral("<body style=\"color:%1\"><h2>%2</h2>%3</body>")

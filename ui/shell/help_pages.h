@@ -8,8 +8,8 @@
 namespace planewright {
 
 /// The pages of Help, in their order.
-enum class HelpPage { entries, conventions, strength, keys, cautions };
-inline constexpr int helpPageCount = 5;
+enum class HelpPage { entries, conventions, strength, screening, keys, cautions };
+inline constexpr int helpPageCount = 6;
 
 QString titleOf(HelpPage page);
 /// The page as HTML; its pictures are named "picture:given" and "picture:turned".

@@ -281,6 +281,7 @@ void MainWindow::screenPoints() {
       activateWindow();
       raise();
     });
+    connect(m_screen, &ScreenDialog::helpWanted, this, [this] { help().showPage(HelpPage::screening); });
   }
   raised(*m_screen);
 }

@@ -100,6 +100,43 @@ RC_GTEST_PROP(FieldMap, allPlacesLieInsideWithOneScaleAndYUpwards, (const std::u
   RC_ASSERT(std::abs(up.x - middle.x - 1) < 1e-6 && std::abs(up.y - middle.y + 2) < 1e-6);
 }
 
+TEST(FieldMap, theNeighbourIsTheNearestThatWay) {
+  const Mapped mapped({{0, 0, 1}, {10, 4, 1}, {5, 6, 1}, {0, 0, 1}, {NAN, 1, 1}, {-3, 3, 1}, {-1, -9, 1}});
+  const auto from = [&](double x, double y, MapWay way) {
+    return neighbourOf(mapped.field, mapped.all(), x, y, way);
+  };
+  EXPECT_EQ(from(0, 0, MapWay::right), 1U);
+  EXPECT_EQ(from(0, 0, MapWay::up), 5U); // on the border of two ways
+  EXPECT_EQ(from(0, 0, MapWay::left), 5U);
+  EXPECT_EQ(from(0, 0, MapWay::down), 6U);
+  EXPECT_EQ(from(10, 4, MapWay::right), std::nullopt);
+  EXPECT_EQ(from(-1, -9, MapWay::up), 0U); // the first of two on one spot
+  EXPECT_EQ(neighbourOf(mapped.field, {6}, 0, 0, MapWay::up), std::nullopt);
+}
+
+RC_GTEST_PROP(FieldMap, aStepToANeighbourCanBeTakenBack, ()) {
+  std::vector<Place> places;
+  for (int i = 0; i < 30; ++i)
+    places.push_back({i % 6 * 2.0, i / 6 * 3.0, 1});
+  const Mapped mapped(places);
+  const auto at = *rc::gen::inRange(0U, 30U);
+  const auto step = [&](std::uint32_t point, MapWay way) {
+    return neighbourOf(mapped.field, mapped.all(), mapped.field.xOf(point), mapped.field.yOf(point), way);
+  };
+  if (const auto right = step(at, MapWay::right)) {
+    RC_ASSERT(*right == at + 1);
+    RC_ASSERT(step(*right, MapWay::left) == at);
+  } else {
+    RC_ASSERT(at % 6 == 5);
+  }
+  if (const auto up = step(at, MapWay::up)) {
+    RC_ASSERT(*up == at + 6);
+    RC_ASSERT(step(*up, MapWay::down) == at);
+  } else {
+    RC_ASSERT(at >= 24);
+  }
+}
+
 TEST(FieldMap, placesWithoutExtentLieInTheMiddle) {
   for (const double value : {0.0, 3e5, -1e300, 1.7e308}) {
     const MapView view = wholeOf(*extentOf(Mapped({{value, value, 0}, {value, value, 0}}).field), 100, 60, 8);

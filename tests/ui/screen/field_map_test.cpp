@@ -146,6 +146,41 @@ TEST_F(FieldMapPage, aDragMovesItAndPicksNothing) {
   EXPECT_LT(top, map().height());
 }
 
+TEST_F(FieldMapPage, controlAndAnArrowChooseTheNextPointThatWay) {
+  screenMesh();
+  const auto press = [&](Qt::Key key) { QTest::keyClick(&map(), key, Qt::ControlModifier); };
+  page().table().setCurrentIndex(model().index(*model().rowOf(150), 0));
+  press(Qt::Key_Right);
+  EXPECT_EQ(current(), 151U);
+  press(Qt::Key_Up);
+  EXPECT_EQ(current(), 181U);
+  press(Qt::Key_Left);
+  press(Qt::Key_Down);
+  EXPECT_EQ(current(), 150U);
+  page().table().setCurrentIndex(model().index(*model().rowOf(0), 0));
+  press(Qt::Key_Down);
+  EXPECT_EQ(current(), 0U);
+  // Where the next one lies outside, the map goes there.
+  for (int i = 0; i < 15; ++i)
+    QTest::keyClick(&map(), Qt::Key_Plus);
+  press(Qt::Key_Right);
+  EXPECT_EQ(current(), 1U);
+  EXPECT_TRUE(map().rect().contains(map().placeOf(1).toPoint()));
+}
+
+TEST_F(FieldMapPage, isDrawnWhereAFilterLetsNothingThroughBeforeItIsFirstShown) {
+  m_dialog.setup().setTable(written(mesh()));
+  m_dialog.hide();
+  run();
+  QSignalSpy spy(&page(), &FieldPage::arranged);
+  page().from().setText("99");
+  Q_EMIT page().from().textEdited("99");
+  ASSERT_TRUE(QTest::qWaitFor([&] { return model().rowCount() == 0; }, 10000));
+  m_dialog.show();
+  drawn();
+  EXPECT_GT(pixelsOf(Role::hush, 299), 10);
+}
+
 TEST_F(FieldMapPage, tellsWhatTheTableHasOfAPoint) {
   screenMesh();
   const QString lines = model().linesOf(29);

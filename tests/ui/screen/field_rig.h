@@ -80,10 +80,10 @@ inline constexpr auto threePoints = "point,region,sx G,sy G,txy G,sx S,sy S,txy 
 inline QByteArray mesh() {
   QByteArray table = "point,x [m],y [m],sx G,sy G,txy G,sx S,sy S,txy S\n";
   for (int i = 0; i < 300; ++i) {
-    const int column = i % 30;
+    const int column = i % 30, row = i / 30;
     const QByteArray place =
         i == 17 ? QByteArray(",")
-                : QByteArray::number(column / 10.0) + ',' + QByteArray::number(i / 30 / 10.0);
+                : QByteArray::number(column / 10.0) + ',' + QByteArray::number(row / 10.0);
     table += 'n' + QByteArray::number(i) + ',' + place + ',' + QByteArray::number(column / 5.0) +
              ",0,0.1,2,0.05,0.1\n";
   }
