@@ -36,6 +36,20 @@ void syncFolderOf(const fs::path& target) {
     ::fsync(open.number());
 }
 
+/// Gives the old file a second name, at no moment taking away the first. Where the disk knows no second names
+/// it is copied; a previous version that cannot be kept does not hold up the new one.
+void keepBeside(const std::string& target) {
+  const std::string aside = target + "~" + std::to_string(::getpid());
+  std::error_code failed;
+  fs::create_hard_link(target, aside, failed);
+  if (failed)
+    fs::copy_file(target, aside, failed);
+  if (!failed)
+    fs::rename(aside, target + "~", failed);
+  if (failed)
+    fs::remove(aside, failed);
+}
+
 } // namespace
 
 int errorOfWriting(int descriptor, std::string_view bytes) {
@@ -59,7 +73,8 @@ Result<FileAside> FileAside::to(const std::string& path) {
 
 FileAside::FileAside(FileAside&& other) noexcept
     : m_path(std::move(other.m_path)), m_target(std::move(other.m_target)),
-      m_aside(std::exchange(other.m_aside, {})), m_mode(other.m_mode), m_file(std::move(other.m_file)) {}
+      m_aside(std::exchange(other.m_aside, {})), m_mode(other.m_mode), m_keepsPrevious(other.m_keepsPrevious),
+      m_file(std::move(other.m_file)) {}
 
 FileAside::~FileAside() {
   if (!m_aside.empty())
@@ -114,6 +129,8 @@ int FileAside::errorOfPutting() {
     return errno;
   if (const int error = m_file.errorOfClosing())
     return error;
+  if (m_mode && m_keepsPrevious)
+    keepBeside(m_target);
   if (::rename(m_aside.c_str(), m_target.c_str()) != 0)
     return errno;
   m_aside.clear();

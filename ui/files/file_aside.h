@@ -22,6 +22,8 @@ public:
   /// What was not finished is gone.
   ~FileAside();
 
+  /// The old file will stay beside the new one, under its name with a tilde behind it.
+  void keepPrevious() { m_keepsPrevious = true; }
   Result<void> write(std::string_view bytes);
   /// Syncs what was written and puts it in place. After a Problem nothing more can be done with it.
   Result<void> finish();
@@ -36,6 +38,7 @@ private:
   std::string m_target;         ///< where its links lead
   std::string m_aside;          ///< empty where the target is written to directly, and when it is in place
   std::optional<mode_t> m_mode; ///< of the old file
+  bool m_keepsPrevious = false;
   Descriptor m_file;
 };
 

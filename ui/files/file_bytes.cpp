@@ -44,13 +44,26 @@ Result<void> writeTo(int descriptor, std::string_view bytes, const std::string& 
   return {};
 }
 
-Result<void> writeAside(const std::string& path, std::string_view bytes) {
-  Result<FileAside> file = FileAside::to(path);
+namespace {
+
+Result<void> writeTo(Result<FileAside> file, std::string_view bytes, bool keepsPrevious) {
   if (!file)
     return tl::unexpected(std::move(file).error());
+  if (keepsPrevious)
+    file->keepPrevious();
   if (Result<void> written = file->write(bytes); !written)
     return written;
   return file->finish();
+}
+
+} // namespace
+
+Result<void> writeAside(const std::string& path, std::string_view bytes) {
+  return writeTo(FileAside::to(path), bytes, false);
+}
+
+Result<void> writeKeepingPrevious(const std::string& path, std::string_view bytes) {
+  return writeTo(FileAside::to(path), bytes, true);
 }
 
 bool isSameFile(const std::string& a, const std::string& b) {

@@ -17,6 +17,9 @@ Result<std::string> bytesFrom(int descriptor, std::size_t most, const std::strin
 /// Writes a file whole or not at all, as FileAside does.
 Result<void> writeAside(const std::string& path, std::string_view bytes);
 
+/// The same, and the file that was there stays beside it under its name with a tilde behind it.
+Result<void> writeKeepingPrevious(const std::string& path, std::string_view bytes);
+
 /// Writes all bytes to an open descriptor; `place` names it in a Problem.
 Result<void> writeTo(int descriptor, std::string_view bytes, const std::string& place);
 

@@ -4,7 +4,7 @@
 #include "ui/desk/desk.h"
 
 // Qt's reader of headers stumbles where these come first.
-#include "ui/screen/beside.h"
+#include "ui/desk/beside.h"
 #include "ui/screen/field_model.h"
 
 #include <QWidget>

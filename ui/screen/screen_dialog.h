@@ -4,7 +4,7 @@
 #include "ui/desk/desk.h"
 
 // Qt's reader of headers stumbles where these come first.
-#include "ui/screen/beside.h"
+#include "ui/desk/beside.h"
 #include "ui/screen/screened_field.h"
 
 #include <QDialog>

@@ -8,6 +8,7 @@
 #include <QDir>
 #include <QFileDialog>
 #include <QMessageBox>
+#include <QPushButton>
 
 namespace planewright {
 
@@ -44,6 +45,51 @@ Unsaved askAboutUnsaved(QWidget& window, const QString& name) {
   return answer == QMessageBox::Save      ? Unsaved::save
          : answer == QMessageBox::Discard ? Unsaved::drop
                                           : Unsaved::stay;
+}
+
+Elsewhere askAboutOpenElsewhere(QWidget& window, const QString& name, const Holder& holder) {
+  QMessageBox box(
+      QMessageBox::NoIcon, words(QT_TRANSLATE_NOOP("FileQuestions", "Open elsewhere")),
+      words(QT_TRANSLATE_NOOP("FileQuestions", "“%1” is open in another window: process %2 on %3."))
+          .arg(name)
+          .arg(holder.process)
+          .arg(holder.host),
+      QMessageBox::Cancel, &window);
+  box.setInformativeText(words(QT_TRANSLATE_NOOP(
+      "FileQuestions",
+      "Read-only, it is not saved over here. Taken over, the other window is asked before it "
+      "saves over it.")));
+  const QPushButton* readOnly =
+      box.addButton(words(QT_TRANSLATE_NOOP("FileQuestions", "Open &read-only")), QMessageBox::AcceptRole);
+  const QPushButton* takeOver =
+      box.addButton(words(QT_TRANSLATE_NOOP("FileQuestions", "&Take over")), QMessageBox::DestructiveRole);
+  box.exec();
+  return box.clickedButton() == readOnly   ? Elsewhere::readOnly
+         : box.clickedButton() == takeOver ? Elsewhere::takeOver
+                                           : Elsewhere::stay;
+}
+
+Overwrite askAboutObstacle(QWidget& window, const QString& name, Obstacle obstacle) {
+  const bool isOpen = obstacle == Obstacle::openElsewhere;
+  QMessageBox box(
+      QMessageBox::NoIcon, words(QT_TRANSLATE_NOOP("FileQuestions", "Save over it?")),
+      (isOpen ? words(QT_TRANSLATE_NOOP("FileQuestions", "“%1” is open in another window."))
+              : words(QT_TRANSLATE_NOOP("FileQuestions",
+                                        "“%1” was changed on the disk since it was opened or saved here.")))
+          .arg(name),
+      QMessageBox::Cancel, &window);
+  box.setInformativeText(words(QT_TRANSLATE_NOOP(
+      "FileQuestions", "What is saved over stays beside it, with a tilde (~) behind its name.")));
+  const QPushButton* saveAs =
+      box.addButton(words(QT_TRANSLATE_NOOP("FileQuestions", "Save &as…")), QMessageBox::AcceptRole);
+  const QPushButton* replace =
+      box.addButton(isOpen ? words(QT_TRANSLATE_NOOP("FileQuestions", "&Take over and save"))
+                           : words(QT_TRANSLATE_NOOP("FileQuestions", "Save &over it")),
+                    QMessageBox::DestructiveRole);
+  box.exec();
+  return box.clickedButton() == saveAs    ? Overwrite::saveAs
+         : box.clickedButton() == replace ? Overwrite::replace
+                                          : Overwrite::stay;
 }
 
 QString askPathToOpen(QWidget& window) {
@@ -83,11 +129,16 @@ QString askPathToExport(QWidget& window, const QString& proposed) {
 } // namespace
 
 FileQuestions askedOver(QWidget& window) {
-  return {[&window](const QString& name) { return askAboutUnsaved(window, name); },
-          [&window] { return askPathToOpen(window); },
-          [&window](const QString& proposed) { return askPathToSave(window, proposed); },
-          [&window] { return askPathToImport(window); },
-          [&window](const QString& proposed) { return askPathToExport(window, proposed); }};
+  return {
+      [&window](const QString& name) { return askAboutUnsaved(window, name); },
+      [&window] { return askPathToOpen(window); },
+      [&window](const QString& proposed) { return askPathToSave(window, proposed); },
+      [&window] { return askPathToImport(window); },
+      [&window](const QString& proposed) { return askPathToExport(window, proposed); },
+      [&window](const QString& name, const Holder& holder) {
+        return askAboutOpenElsewhere(window, name, holder);
+      },
+      [&window](const QString& name, Obstacle obstacle) { return askAboutObstacle(window, name, obstacle); }};
 }
 
 } // namespace planewright

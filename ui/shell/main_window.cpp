@@ -15,14 +15,13 @@
 #include "ui/shell/change_words.h"
 #include "ui/shell/file_questions.h"
 #include "ui/shell/help_window.h"
-#include "ui/shell/problem_list.h"
-#include "ui/shell/recent_files.h"
+#include "ui/shell/recovery.h"
 #include "ui/shell/state_bar.h"
 #include "ui/shell/status_line.h"
 #include "ui/shell/title_dialog.h"
+#include "ui/shell/unsaved_dialog.h"
 #include "ui/shell/verdict_chip.h"
 #include "ui/shell/window_icon.h"
-#include "ui/shell/worked_example.h"
 #include "ui/strength/strength_panel.h"
 #include "ui/strength/summary_page.h"
 
@@ -53,6 +52,7 @@ MainWindow::MainWindow() : MainWindow(askedOver(*this)) {}
 
 MainWindow::MainWindow(FileQuestions questions)
     : m_desk(newStudy()), m_filing(new Filing(m_desk, std::move(questions), this)),
+      m_recovery(new Recovery(m_desk, *m_filing, recoveryPath(), this)),
       m_stateBar(new StateBar(m_desk, this)), m_welcome(new Strip(this)), m_trouble(new Strip(this)),
       m_given(new GivenPanel(m_desk)), m_element(new ElementView(m_desk)),
       m_circle(new CircleView(m_desk, nullptr)), m_planes(new PlanesPanel(m_desk)),
@@ -73,8 +73,10 @@ MainWindow::MainWindow(FileQuestions questions)
   qApp->installEventFilter(this);
 }
 
-// Views end before the desk that they look at; the follower of the focus before the areas.
+// Views end before the desk that they look at; the follower of the focus before the areas. What is unsaved is
+// kept while the study still is there.
 MainWindow::~MainWindow() {
+  delete m_recovery;
   m_desk.undoStack()->disconnect(this);
   delete m_areas;
   delete m_screen;
@@ -132,6 +134,11 @@ void MainWindow::connectViews() {
   connect(m_filing, &Filing::fileChanged, this, &MainWindow::showFile);
   connect(m_filing, &Filing::begun, m_given, &GivenPanel::focusFirst);
   connect(m_filing, &Filing::refused, this, &MainWindow::showRefusal);
+  connect(m_recovery, &Recovery::troubled, this, [this](const Problem& problem) {
+    m_trouble->say(
+        tr("Unsaved changes cannot be kept for the next start. %1 Save often.").arg(shown(problem)),
+        Strip::Tone::wrong);
+  });
 }
 
 void MainWindow::restoreGeometryAndSizes() {
@@ -139,66 +146,6 @@ void MainWindow::restoreGeometryAndSizes() {
   if (!restoreGeometry(settings.value(QStringLiteral("geometry")).toByteArray()))
     resize(1400, 900);
   m_body->restore(settings);
-}
-
-bool MainWindow::open(const QString& path) {
-  settleDrafts();
-  return m_filing->open(path);
-}
-
-void MainWindow::beginStudy() {
-  settleDrafts();
-  m_filing->begin();
-}
-
-void MainWindow::openWorkedExample() {
-  settleDrafts();
-  m_filing->openUnnamed(workedExample());
-}
-
-void MainWindow::showFile(const QString& path) {
-  m_trouble->hide();
-  if (!path.isEmpty())
-    rememberFile(path);
-  listRecent();
-  showTitle();
-  if (m_figure)
-    m_figure->setStudyFile(path);
-  if (m_sheet)
-    m_sheet->setStudyFile(path);
-  if (const QString figure = m_filing->restoredFrom(); !figure.isEmpty()) {
-    m_welcome->say(
-        tr("Restored from %1. The study is in no file of its own yet.").arg(QFileInfo(figure).fileName()));
-    m_welcome->offer(tr("Save as…"), [this] {
-      settleDrafts();
-      m_filing->saveAs();
-    });
-  } else if (isWorkedExample(m_desk.study())) {
-    m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
-    m_welcome->offer(tr("New study"), [this] { beginStudy(); });
-    m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
-  } else if (m_desk.study() == newStudy()) {
-    m_welcome->say(tr("A new study: type the stresses of your point."));
-    m_welcome->offer(tr("Open the worked example"), [this] { openWorkedExample(); });
-    m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
-  } else {
-    m_welcome->hide();
-  }
-}
-
-void MainWindow::showTitle() {
-  setWindowTitle(tr("%1[*] – Planewright").arg(m_filing->name()));
-  setWindowModified(m_filing->hasChanges());
-}
-
-void MainWindow::showRefusal(const QString& path, const Problems& problems) {
-  const QString file = QFileInfo(path).fileName();
-  m_trouble->say(tr("%1: %2").arg(file, problems.empty() ? QString() : shown(problems.front())),
-                 Strip::Tone::wrong);
-  if (problems.size() > 1)
-    m_trouble->offer(tr("All %1 problems").arg(problems.size()), [this, file, problems] {
-      (new ProblemList(tr("Problems in %1").arg(file), problems, this))->show();
-    });
 }
 
 void MainWindow::tellStep(int index) {

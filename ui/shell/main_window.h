@@ -31,8 +31,10 @@ class StrengthPanel;
 class SummaryPage;
 class StatusLine;
 class Strip;
+class Recovery;
 class ThingsDialog;
 class TitleDialog;
+class UnsavedDialog;
 
 /// The window: state bar, panels and status line over one desk. The only place where views, files and menus
 /// meet.
@@ -47,6 +49,9 @@ public:
 
   /// Opens a study; false, with the reasons in the window, when it cannot be read.
   bool open(const QString& path);
+
+  /// Shows what windows that ended left unsaved, if anything.
+  void offerUnsaved();
 
   Desk& desk() { return m_desk; }
   Filing& filing() { return *m_filing; }
@@ -103,6 +108,7 @@ private:
   void beginStudy();
   void showFile(const QString& path);
   void showTitle();
+  void showUnsaved();
   void showRefusal(const QString& path, const Problems& problems);
   void tellStep(int index);
   void copyFromFocus();
@@ -120,6 +126,7 @@ private:
 
   Desk m_desk;
   Filing* m_filing;
+  Recovery* m_recovery;
   StateBar* m_stateBar;
   Strip* m_welcome;
   Strip* m_trouble;
@@ -142,6 +149,7 @@ private:
   QPointer<HelpWindow> m_help;
   QPointer<EvidenceDialog> m_evidence;
   QPointer<TitleDialog> m_title;
+  QPointer<UnsavedDialog> m_unsaved;
   QPointer<SlipDialog> m_slips;
   QPointer<WorkingDialog> m_working;
   QPointer<MaterialsDialog> m_materials;

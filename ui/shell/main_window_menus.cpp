@@ -66,6 +66,7 @@ void MainWindow::addFileMenu() {
   m_recent = menu.addMenu(tr("Open &recent"));
   connect(m_recent, &QMenu::aboutToShow, this, &MainWindow::listRecent);
   listRecent();
+  add(menu, tr("&Unsaved studies…"), {}, [this] { showUnsaved(); });
   menu.addSeparator();
   add(menu, tr("&Save"), QKeySequence::Save, [this] {
     settleDrafts();

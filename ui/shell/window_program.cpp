@@ -31,6 +31,7 @@ int runWindow(int& argc, char** argv, const QString& path) {
   window.show();
   if (!path.isEmpty())
     window.open(path);
+  window.offerUnsaved();
   return QApplication::exec();
 }
 

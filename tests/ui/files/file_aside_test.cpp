@@ -23,6 +23,18 @@ TEST_F(FileAsideTest, TakesTheOldPlaceOnlyWhenFinished) {
   EXPECT_EQ(filesInFolder(), 1U);
 }
 
+TEST_F(FileAsideTest, keepsThePreviousVersionWhereItIsAsked) {
+  ASSERT_TRUE(writeKeepingPrevious(path("a"), "first"));
+  EXPECT_EQ(filesInFolder(), 1U);
+  ASSERT_TRUE(writeKeepingPrevious(path("a"), "second"));
+  ASSERT_TRUE(writeKeepingPrevious(path("a"), "third"));
+  EXPECT_EQ(read(path("a")), "third");
+  EXPECT_EQ(read(path("a~")), "second");
+  ASSERT_TRUE(writeAside(path("a"), "fourth"));
+  EXPECT_EQ(read(path("a~")), "second");
+  EXPECT_EQ(filesInFolder(), 2U);
+}
+
 TEST_F(FileAsideTest, IsGoneWhenItIsGivenUp) {
   ASSERT_TRUE(writeAside(path("a"), "old"));
   for (const char* name : {"a", "b"}) {

@@ -82,8 +82,7 @@ inline QByteArray mesh() {
   for (int i = 0; i < 300; ++i) {
     const int column = i % 30, row = i / 30;
     const QByteArray place =
-        i == 17 ? QByteArray(",")
-                : QByteArray::number(column / 10.0) + ',' + QByteArray::number(row / 10.0);
+        i == 17 ? QByteArray(",") : QByteArray::number(column / 10.0) + ',' + QByteArray::number(row / 10.0);
     table += 'n' + QByteArray::number(i) + ',' + place + ',' + QByteArray::number(column / 5.0) +
              ",0,0.1,2,0.05,0.1\n";
   }

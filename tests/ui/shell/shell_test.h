@@ -10,6 +10,8 @@
 
 #include <gtest/gtest.h>
 
+#include <vector>
+
 namespace planewright {
 
 /// A folder and settings of its own for each test, and a person who answers the questions about files.
@@ -35,7 +37,16 @@ protected:
               m_proposedPath = proposed;
               return m_savePath;
             },
-            [this] { return m_importPath; }, [this](const QString&) { return m_exportPath; }};
+            [this] { return m_importPath; },
+            [this](const QString&) { return m_exportPath; },
+            [this](const QString&, const Holder&) {
+              ++m_askedElsewhere;
+              return m_elsewhere;
+            },
+            [this](const QString&, Obstacle obstacle) {
+              m_obstacles.push_back(obstacle);
+              return m_overwrite;
+            }};
   }
 
   static void type(Desk& desk, Spot spot, const std::string& text) {
@@ -54,6 +65,10 @@ protected:
   QString m_importPath;
   QString m_exportPath;
   int m_askedUnsaved = 0;
+  Elsewhere m_elsewhere = Elsewhere::stay;
+  int m_askedElsewhere = 0;
+  Overwrite m_overwrite = Overwrite::stay;
+  std::vector<Obstacle> m_obstacles;
 
 private:
   QTemporaryDir m_folder;

@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "ui/screen/beside.h"
+#include "ui/desk/beside.h"
 
 namespace planewright {
 
