@@ -9,6 +9,7 @@
 #include "core/figure/figure.h"
 #include "core/quantity/expression.h"
 #include "ui/figure/figure_sharing.h"
+#include "ui/look/look.h"
 
 #include <algorithm>
 #include <array>
@@ -32,6 +33,7 @@ constexpr std::array known = {OptionRow{"-o"},
                               OptionRow{"--arrange"},
                               OptionRow{"--order"},
                               OptionRow{"--dpi"},
+                              OptionRow{"--language"},
                               OptionRow{"--without-study", Takes::nothing}};
 
 constexpr int usualDpi = 300;
@@ -192,6 +194,9 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   wanted.carriesStudy = !arguments.has("--without-study");
   wanted.order.mono = arguments.has("--mono");
   wanted.order.studyName = studyNameOf(arguments.operands.front());
+  if (auto problem = speakAs(arguments.valueOf("--language")))
+    return tl::unexpected(*std::move(problem));
+  wanted.order.translate = translation();
   if (auto problem = readArrangement(arguments, wanted.order))
     return tl::unexpected(*std::move(problem));
   const Unit mm{"mm", dimension::length, 1, 1};

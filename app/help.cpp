@@ -1,13 +1,14 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "app/help.h"
 
-#include "core/words/text.h"
 #include "core/words/version.h"
 
 namespace planewright {
 
+// The command line speaks English alone: scripts and other people's notes quote it.
+
 std::string programHelp() {
-  return plain(PW_TEXT("Help", R"help(Planewright: plane stress at a point, resolved to the line that matters.
+  return R"help(Planewright: plane stress at a point, resolved to the line that matters.
 
 planewright [STUDY]            opens the window, with a study or with a figure that carries one
 planewright resolve ...        prints everything that follows from a study or from three components
@@ -26,19 +27,18 @@ Exit codes: 0 done; 1 done, and a check exceeds or could not be judged; 2 wrong 
 
 An aid to a licensed engineer: it looks at one point in plane stress. It sees no volume, size, moisture,
 duration, edge, notch or third-direction effects. Local codes govern.
-)help"));
+)help";
 }
 
 std::string programVersionLines() {
-  return plain(PW_TEXT("Help", R"help(Planewright %1
+  return "Planewright " + std::string(programVersion()) + R"help(
 Free software under the GNU General Public License, version 3 or later; there is no warranty.
 Figures are set in Liberation Sans, under the SIL Open Font License 1.1.
-)help")
-                   .with(programVersion()));
+)help";
 }
 
 std::string resolveHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright resolve STUDY [options]
+  return R"help(planewright resolve STUDY [options]
 planewright resolve --sx STRESS --sy STRESS --txy STRESS [--sz STRESS] [options]
 
 Prints everything that follows from a study, or from three components. Without a study, numbers without a unit
@@ -56,33 +56,33 @@ The cut that crosses a line has its normal along the line; the cut that follows 
 Shear τxy is positive on the +x face in the +y direction.
 
 planewright resolve --sx "80 MPa" --sy "20 MPa" --txy "-30 MPa" --normal "25 deg" --line "1 in 10" --format json
-)help"));
+)help";
 }
 
 std::string compareHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright compare EARLIER LATER [-o FILE]
+  return R"help(planewright compare EARLIER LATER [-o FILE]
 
 Tells what changed from one study to another: everything typed that differs, and the results that differ.
 
 -o FILE   writes there; "-" or nothing is standard output
 
 planewright compare beam-A.planewright beam-B.planewright
-)help"));
+)help";
 }
 
 std::string validateHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright validate [-o FILE|FILE.html|FILE.pdf]
+  return R"help(planewright validate [-o FILE|FILE.html|FILE.pdf]
 
 Recomputes every published value that the program carries and prints it beside the computed one, with its source,
 its place there and how far it can be trusted. Exit code 5 where one disagrees.
 
 -o FILE   writes there, as a report where the name ends with .html or .pdf, else as text; "-" or nothing is
           standard output
-)help"));
+)help";
 }
 
 std::string screenHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright screen POINTS.csv --study STUDY -o OUT.csv [options]
+  return R"help(planewright screen POINTS.csv --study STUDY -o OUT.csv [options]
 
 Judges very many points by the line, tolerance and checks of one point of a study, over all its combinations, and
 writes for each what governs: utilisation, load multiplier, combination, check, mode and worst angle. A summary goes
@@ -105,11 +105,11 @@ study's count.
 -o FILE                "-" is standard output
 
 planewright screen deck.csv --study beam.planewright --except "support*" -o worst.csv --top 100
-)help"));
+)help";
 }
 
 std::string figureHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright figure STUDY -o FILE.svg|.pdf|.png [options]
+  return R"help(planewright figure STUDY -o FILE.svg|.pdf|.png [options]
 planewright figure STUDY --folder FOLDER [--format svg|pdf|png] [--replace] [options]
 
 Writes the labelled figure of one point and combination, or one for each point into a folder; the names of these
@@ -132,6 +132,7 @@ files, made of study, point and combination, are printed.
 --order LIST         what stands uppermost and to the left, for instance "circle" or "planes,elements"; of elements,
                      circle, planes, check those left out follow in this order
 --dpi N              resolution of a PNG; 300 without it
+--language CODE      of the words: en or de; en without it
 --without-study      the figure alone, for sending outside
 
 Without that option the whole study, with all its points and notes, travels inside the file, and opening the
@@ -139,11 +140,11 @@ figure brings it back. A STUDY may be such a figure, here and in resolve.
 
 planewright figure beam.planewright -o beam.pdf --width 90
 planewright figure beam.planewright --folder figures --format pdf
-)help"));
+)help";
 }
 
 std::string sheetHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright sheet STUDY -o FILE.pdf|.html|.txt [options]
+  return R"help(planewright sheet STUDY -o FILE.pdf|.html|.txt [options]
 
 Writes the calculation sheet: what governs, everything as typed, the working, the checks, a second route through
 the program, conclusion and lines to sign.
@@ -153,6 +154,7 @@ the program, conclusion and lines to sign.
 --depth results|governing|all  how much of the working: none, of the governing combination of each point (without
                                the option), of every combination
 --paper A4|Letter              of a PDF; A4 without it
+--language CODE                of the words: en or de; en without it
 --without-figures              no element and circle
 --without-study                the file does not carry the study
 --since STUDY                  adds what changed since that revision
@@ -160,7 +162,7 @@ the program, conclusion and lines to sign.
 Exit code 5 where the two routes disagree; the sheet says so at its top.
 
 planewright sheet beam.planewright -o beam-sheet.pdf --point "P1"
-)help"));
+)help";
 }
 
 } // namespace planewright

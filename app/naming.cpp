@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "app/naming.h"
 
+#include "ui/look/language.h"
+
 namespace planewright {
 
 bool hasEnding(const std::string& file, std::string_view ending) {
@@ -31,6 +33,20 @@ std::optional<Problem> missingPoint(const Study& study, const std::string& name)
   for (const Point& point : study.points)
     names.push_back(point.name);
   return unknownName("--point", name, names);
+}
+
+std::optional<Problem> speakAs(const std::string* code) {
+  if (!code || speak(QString::fromStdString(*code)))
+    return std::nullopt;
+  std::string codes;
+  for (const Language& one : languages())
+    codes += (codes.empty() ? "" : ", ") + one.code.toStdString();
+  return Problem{"--language",
+                 0,
+                 0,
+                 *code,
+                 PW_TEXT("Command", "“%1” is no language of the program.").with(*code),
+                 PW_TEXT("Command", "Take one of these: %1.").with(codes)};
 }
 
 } // namespace planewright

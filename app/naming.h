@@ -16,6 +16,9 @@ Problem unknownName(const char* option, const std::string& name, const std::vect
 /// That --point names a point that the study does not have; none where it has it.
 std::optional<Problem> missingPoint(const Study& study, const std::string& name);
 
+/// Has the outputs speak the language that --language names; English without it.
+std::optional<Problem> speakAs(const std::string* code);
+
 /// The value that an option names by its word, `usual` without the option; the Problem lists the words.
 template <class Enum>
 Result<Enum> wordOfOption(const char* option, const std::string* given, Enum usual) {

@@ -12,6 +12,7 @@
 #include "core/report/sheet_html.h"
 #include "core/report/sheet_pages.h"
 #include "core/report/sheet_text.h"
+#include "ui/look/look.h"
 #include "ui/paint/export.h"
 
 #include <algorithm>
@@ -28,6 +29,7 @@ constexpr std::array known = {OptionRow{"-o"},
                               OptionRow{"--depth"},
                               OptionRow{"--since"},
                               OptionRow{"--paper"},
+                              OptionRow{"--language"},
                               OptionRow{"--without-figures", Takes::nothing},
                               OptionRow{"--without-study", Takes::nothing}};
 
@@ -82,6 +84,9 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   wanted.order.depth = *depth;
   wanted.order.figures = !arguments.has("--without-figures");
   wanted.order.studyName = studyNameOf(arguments.operands.front());
+  if (auto problem = speakAs(arguments.valueOf("--language")))
+    return tl::unexpected(*std::move(problem));
+  wanted.order.translate = translation();
   for (const GivenOption& option : arguments.options)
     if (option.name == "--point")
       wanted.order.points.push_back(option.value);
@@ -90,15 +95,15 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
 
 Outcome<std::string> bytesOf(const Study& study, const Sheet& sheet, const Wanted& wanted) {
   if (wanted.kind == SheetKind::text)
-    return sheetText(sheet);
+    return sheetText(sheet, wanted.order.translate);
   const std::string carried = wanted.carriesStudy ? writeStudy(study) : std::string();
   if (wanted.kind == SheetKind::pdf) {
-    const std::vector<Picture> pages = pagesOf(sheet, wanted.paper);
+    const std::vector<Picture> pages = pagesOf(sheet, wanted.paper, wanted.order.translate);
     return paintedOffscreen([&] { return pdfOfPages(pages, Palette::paper, carried); });
   }
   if (carried.empty())
-    return sheetHtml(sheet);
-  Result<std::string> html = htmlWithStudy(sheetHtml(sheet), carried);
+    return sheetHtml(sheet, wanted.order.translate);
+  Result<std::string> html = htmlWithStudy(sheetHtml(sheet, wanted.order.translate), carried);
   if (!html)
     return wrongUse(std::move(html).error());
   return *std::move(html);

@@ -13,8 +13,8 @@ struct Colour {
   bool operator==(const Colour&) const = default;
 };
 
-/// Paper is the light set on white.
-enum class Palette { light, dark, mono, paper };
+/// Paper is the light set on white; contrast is for eyes that need much of it, on black.
+enum class Palette { light, dark, mono, paper, contrast };
 
 /// The colour of a role in a palette. Figures use paper or mono, whatever the window wears.
 Colour colourOf(Role role, Palette palette);

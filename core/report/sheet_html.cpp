@@ -55,7 +55,8 @@ public:
   std::string page(const Sheet& sheet) {
     const std::string name =
         markupOf(sheet.title.subject.empty() ? sheet.title.project : sheet.title.subject);
-    m_out = "<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n<title>" +
+    m_out = "<!DOCTYPE html>\n<html lang=\"" + words(PW_TEXT("Language", "en")) +
+            "\">\n<head>\n<meta charset=\"utf-8\">\n<title>" +
             (name.empty() ? words(PW_TEXT("Sheet", "Calculation sheet")) : name) + "</title>\n<style>" +
             std::string(style) + "</style>\n</head>\n<body>\n";
     title(sheet.title);

@@ -6,7 +6,7 @@
 #include "ui/figure/figure_sharing.h"
 #include "ui/figure/points_dialog.h"
 #include "ui/files/file_bytes.h"
-#include "ui/files/file_names.h"
+#include "ui/files/folders.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
@@ -177,7 +177,7 @@ QString FigureDialog::givenUp(const Picture& picture) const {
 }
 
 QString FigureDialog::offeredPath() const {
-  return folderOf(m_studyFile) + QLatin1Char('/') + m_name->text().trimmed() + m_ending->text();
+  return outputFolder(m_studyFile) + QLatin1Char('/') + m_name->text().trimmed() + m_ending->text();
 }
 
 Result<void> FigureDialog::saveTo(const QString& path) {

@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/figure/points_dialog.h"
 
-#include "ui/files/file_names.h"
+#include "ui/files/folders.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
@@ -101,7 +101,7 @@ QFormLayout* PointsDialog::choices() {
   auto* states = new QVBoxLayout;
   states->addWidget(m_governing);
   states->addWidget(shownOne);
-  m_folder = new QLineEdit(QDir::toNativeSeparators(folderOf(m_arranged.studyFile)), this);
+  m_folder = new QLineEdit(QDir::toNativeSeparators(outputFolder(m_arranged.studyFile)), this);
   auto* choose = new QPushButton(tr("Choose…"), this);
   choose->setAutoDefault(false);
   connect(choose, &QPushButton::clicked, this, &PointsDialog::chooseFolder);

@@ -36,11 +36,7 @@ QFrame* rule(QWidget* parent) {
 
 } // namespace
 
-GivenPanel::GivenPanel(Desk& desk, QWidget* parent) : QScrollArea(parent), m_desk(desk) {
-  setWidgetResizable(true);
-  setFrameShape(QFrame::NoFrame);
-  setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
-  setFocusPolicy(Qt::NoFocus);
+GivenPanel::GivenPanel(Desk& desk, QWidget* parent) : ColumnArea(parent), m_desk(desk) {
   setAccessibleName(tr("Given"));
   setProperty("areaKeys", tr("Enter takes an entry, Esc puts it back, F8 next entry not taken"));
   auto* content = new QWidget(this);

@@ -2,8 +2,7 @@
 #pragma once
 
 #include "ui/desk/desk.h"
-
-#include <QScrollArea>
+#include "ui/look/column_area.h"
 
 class QLabel;
 
@@ -20,7 +19,7 @@ class StressGroup;
 
 /// Everything that is given, in groups that fold: what counts positive, stress, line, reading plane,
 /// conventions, notes.
-class GivenPanel : public QScrollArea {
+class GivenPanel : public ColumnArea {
   Q_OBJECT
 
 public:
@@ -28,7 +27,6 @@ public:
   ~GivenPanel() override;
 
   QSize sizeHint() const override { return {300, 600}; }
-  QSize minimumSizeHint() const override { return {264, 200}; }
 
 public slots:
   /// Puts the cursor into the first component, its text selected.

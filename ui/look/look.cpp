@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/look/look.h"
 
-#include <QCoreApplication>
 #include <QWidget>
 
 namespace planewright {
@@ -11,8 +10,10 @@ QColor Look::colour(Role role) const {
 }
 
 Look lookOf(const QWidget& widget) {
-  const bool dark = widget.palette().color(QPalette::Window).lightnessF() < 0.5F;
-  return {dark ? Palette::dark : Palette::light};
+  const QColor window = widget.palette().color(QPalette::Window);
+  if (window == Look{Palette::contrast}.colour(Role::window))
+    return {Palette::contrast};
+  return {window.lightnessF() < 0.5F ? Palette::dark : Palette::light};
 }
 
 QPalette paletteFor(const Look& look) {
@@ -44,12 +45,6 @@ QPalette paletteFor(const Look& look) {
     palette.setColor(group, QPalette::Shadow, look.colour(Role::soft));
   }
   return palette;
-}
-
-Translate translation() {
-  return [](const std::string& context, const std::string& source) {
-    return QCoreApplication::translate(context.c_str(), source.c_str()).toStdString();
-  };
 }
 
 QString shown(const Text& text) {

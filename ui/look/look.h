@@ -19,7 +19,7 @@ struct Look {
   bool operator==(const Look&) const = default;
 };
 
-/// Light or dark, by the lightness of the widget's window colour. Views call it when they paint.
+/// Light, dark or of much contrast, by the widget's window colour. Views call it when they paint.
 Look lookOf(const QWidget& widget);
 /// The palette that makes the standard widgets wear a Look.
 QPalette paletteFor(const Look& look);

@@ -7,7 +7,7 @@
 #include "core/report/sheet_pages.h"
 #include "core/report/sheet_text.h"
 #include "ui/files/file_bytes.h"
-#include "ui/files/file_names.h"
+#include "ui/files/folders.h"
 #include "ui/files/platform_name.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
@@ -83,7 +83,7 @@ Result<void> EvidenceDialog::saveTo(const QString& path) {
 }
 
 void EvidenceDialog::save(const QString& ending, const QString& kind) {
-  const QString offered = folderOf(QString()) + QLatin1Char('/') + tr("published-values") + ending;
+  const QString offered = outputFolder(QString()) + QLatin1Char('/') + tr("published-values") + ending;
   const QString path = askedFileToSave(*this, tr("Save the report"), offered, kind);
   if (path.isEmpty())
     return;

@@ -6,7 +6,7 @@
 #include "core/report/comparison.h"
 #include "core/report/sheet_html.h"
 #include "ui/files/file_bytes.h"
-#include "ui/files/file_names.h"
+#include "ui/files/folders.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
@@ -164,7 +164,7 @@ Result<void> SheetDialog::saveTo(const QString& path) {
 QString SheetDialog::offeredPath(const QString& ending) const {
   const QString study = QFileInfo(m_studyFile).completeBaseName();
   const QString name = m_studyFile.isEmpty() ? tr("sheet") : tr("%1-sheet").arg(study);
-  return folderOf(m_studyFile) + QLatin1Char('/') + name + ending;
+  return outputFolder(m_studyFile) + QLatin1Char('/') + name + ending;
 }
 
 void SheetDialog::save(const QString& ending, const QString& kind) {

@@ -9,27 +9,52 @@
 #include <QScreen>
 #include <QSettings>
 
+#include <algorithm>
 #include <array>
 
 namespace planewright {
 
 namespace {
 
-constexpr std::array words{"system", "light", "dark"};
+constexpr std::array words{"system", "light", "dark", "contrast"};
 QString key() {
   return QStringLiteral("appearance");
 }
 
-/// The system's own palette shows through when the application sets none.
-bool systemIsDark() {
+QString textKey() {
+  return QStringLiteral("textPercent");
+}
+
+/// Of the system's own palette, which shows through when the application sets none. One of much contrast has
+/// light words on black, or nearly.
+Palette systemPalette() {
   QApplication::setPalette(QPalette());
-  return QApplication::palette().color(QPalette::Window).lightnessF() < 0.5F;
+  const QPalette palette = QApplication::palette();
+  const float ground = palette.color(QPalette::Window).lightnessF();
+  const float ink = palette.color(QPalette::WindowText).lightnessF();
+  if (ground < 0.02F && ink > 0.98F)
+    return Palette::contrast;
+  return ground < 0.5F ? Palette::dark : Palette::light;
+}
+
+Palette paletteOf(Appearance appearance) {
+  switch (appearance) {
+  case Appearance::light:
+    return Palette::light;
+  case Appearance::dark:
+    return Palette::dark;
+  case Appearance::contrast:
+    return Palette::contrast;
+  case Appearance::system:
+    break;
+  }
+  return systemPalette();
 }
 
 /// 13 px where a text of 100 % has 96 px to the inch; systems enlarge their texts by that number.
 double textPixels() {
   const QScreen* screen = QApplication::primaryScreen();
-  return 13 * (screen ? screen->logicalDotsPerInchY() / 96 : 1);
+  return 13 * (screen ? screen->logicalDotsPerInchY() / 96 : 1) * chosenTextPercent() / 100.0;
 }
 
 } // namespace
@@ -47,12 +72,20 @@ void chooseAppearance(Appearance appearance) {
   dressApplication();
 }
 
+int chosenTextPercent() {
+  const int percent = QSettings().value(textKey()).toInt();
+  return std::ranges::find(textPercents, percent) != textPercents.end() ? percent : textPercents.front();
+}
+
+void chooseTextPercent(int percent) {
+  QSettings().setValue(textKey(), percent);
+  dressApplication();
+}
+
 void dressApplication() {
   QApplication::setStyle(new RingStyle);
   QApplication::setFont(programFont(textPixels()));
-  const Appearance appearance = chosenAppearance();
-  const bool dark = appearance == Appearance::dark || (appearance == Appearance::system && systemIsDark());
-  QApplication::setPalette(paletteFor(Look{dark ? Palette::dark : Palette::light}));
+  QApplication::setPalette(paletteFor(Look{paletteOf(chosenAppearance())}));
 }
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #include "ui/shell/file_questions.h"
 
 #include "ui/files/file_names.h"
+#include "ui/files/folders.h"
 #include "ui/shell/recent_files.h"
 
 #include <QCoreApplication>
@@ -29,9 +30,10 @@ QString filterToOpen() {
                                  "*.pdf *.png *.html);;All files (*)"));
 }
 
-/// The folder of the newest file, else that of documents.
+/// The folder that the user chose, else that of the newest file, else that of documents.
 QString folder() {
-  return folderOf(recentFiles().value(0));
+  const QString chosen = chosenFolder(Folder::studies);
+  return chosen.isEmpty() ? folderOf(recentFiles().value(0)) : chosen;
 }
 
 Unsaved askAboutUnsaved(QWidget& window, const QString& name) {

@@ -7,6 +7,7 @@
 #include "core/record/study_file.h"
 #include "ui/files/file_bytes.h"
 #include "ui/look/look.h"
+#include "ui/shell/preferences.h"
 #include "ui/shell/table_words.h"
 
 #include <QDateTime>
@@ -44,7 +45,7 @@ QString Filing::name() const {
 }
 
 bool Filing::begin() {
-  return openUnnamed(newStudy());
+  return openUnnamed(preferredStudy());
 }
 
 bool Filing::open() {

@@ -15,6 +15,7 @@
 #include "ui/shell/change_words.h"
 #include "ui/shell/file_questions.h"
 #include "ui/shell/help_window.h"
+#include "ui/shell/preferences.h"
 #include "ui/shell/recovery.h"
 #include "ui/shell/state_bar.h"
 #include "ui/shell/status_line.h"
@@ -51,7 +52,7 @@ QString draggedFile(const QMimeData& data) {
 MainWindow::MainWindow() : MainWindow(askedOver(*this)) {}
 
 MainWindow::MainWindow(FileQuestions questions)
-    : m_desk(newStudy()), m_filing(new Filing(m_desk, std::move(questions), this)),
+    : m_desk(preferredStudy()), m_filing(new Filing(m_desk, std::move(questions), this)),
       m_recovery(new Recovery(m_desk, *m_filing, recoveryPath(), this)),
       m_stateBar(new StateBar(m_desk, this)), m_welcome(new Strip(this)), m_trouble(new Strip(this)),
       m_given(new GivenPanel(m_desk)), m_element(new ElementView(m_desk)),

@@ -24,6 +24,7 @@ class GivenPanel;
 class HelpWindow;
 class MaterialsDialog;
 class PlanesPanel;
+class PreferencesDialog;
 class SlipDialog;
 class WorkingDialog;
 class StateBar;
@@ -109,6 +110,7 @@ private:
   void showFile(const QString& path);
   void showTitle();
   void showUnsaved();
+  void showPreferences();
   void showRefusal(const QString& path, const Problems& problems);
   void tellStep(int index);
   void copyFromFocus();
@@ -150,6 +152,7 @@ private:
   QPointer<EvidenceDialog> m_evidence;
   QPointer<TitleDialog> m_title;
   QPointer<UnsavedDialog> m_unsaved;
+  QPointer<PreferencesDialog> m_preferences;
   QPointer<SlipDialog> m_slips;
   QPointer<WorkingDialog> m_working;
   QPointer<MaterialsDialog> m_materials;

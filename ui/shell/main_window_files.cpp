@@ -6,6 +6,7 @@
 #include "ui/sheet/sheet_dialog.h"
 #include "ui/shell/help_window.h"
 #include "ui/shell/main_window.h"
+#include "ui/shell/preferences.h"
 #include "ui/shell/problem_list.h"
 #include "ui/shell/recent_files.h"
 #include "ui/shell/unsaved_dialog.h"
@@ -56,7 +57,7 @@ void MainWindow::showFile(const QString& path) {
     m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
     m_welcome->offer(tr("New study"), [this] { beginStudy(); });
     m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
-  } else if (m_desk.study() == newStudy()) {
+  } else if (m_desk.study() == preferredStudy()) {
     m_welcome->say(tr("A new study: type the stresses of your point."));
     m_welcome->offer(tr("Open the worked example"), [this] { openWorkedExample(); });
     m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });

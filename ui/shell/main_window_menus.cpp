@@ -20,6 +20,7 @@
 #include "ui/shell/main_window.h"
 #include "ui/shell/materials_dialog.h"
 #include "ui/shell/picker.h"
+#include "ui/shell/preferences_dialog.h"
 #include "ui/shell/recent_files.h"
 #include "ui/shell/slip_dialog.h"
 #include "ui/shell/state_bar.h"
@@ -134,6 +135,8 @@ void MainWindow::addEditMenu() {
   });
   menu.addSeparator();
   add(menu, tr("Paste ta&ble…"), Qt::CTRL | Qt::SHIFT | Qt::Key_V, [this] { pasteTable(); });
+  menu.addSeparator();
+  add(menu, tr("Pre&ferences…"), QKeySequence::Preferences, [this] { showPreferences(); });
 }
 
 void MainWindow::addStudyMenu() {
@@ -226,7 +229,8 @@ void MainWindow::addAppearanceMenu(QMenu& menu) {
   auto* group = new QActionGroup(this);
   for (const auto& [appearance, words] : {std::pair{Appearance::system, tr("As the &system")},
                                           {Appearance::light, tr("&Light")},
-                                          {Appearance::dark, tr("&Dark")}}) {
+                                          {Appearance::dark, tr("&Dark")},
+                                          {Appearance::contrast, tr("High &contrast")}}) {
     QAction* action =
         menu.addAction(words, this, [appearance = appearance] { chooseAppearance(appearance); });
     action->setCheckable(true);
@@ -255,6 +259,19 @@ void MainWindow::copyFromFocus() {
     return;
   QKeyEvent copy(QEvent::KeyPress, Qt::Key_C, Qt::ControlModifier);
   QApplication::sendEvent(focused, &copy);
+}
+
+void MainWindow::showPreferences() {
+  settleDrafts();
+  if (m_preferences)
+    m_preferences->close();
+  m_preferences = new PreferencesDialog(this);
+  m_preferences->setAttribute(Qt::WA_DeleteOnClose);
+  connect(m_preferences, &PreferencesDialog::kept, this, [this](bool needsStart) {
+    m_desk.say(needsStart ? tr("The preferences are kept. The language changes with the next start.")
+                          : tr("The preferences are kept."));
+  });
+  raised(*m_preferences);
 }
 
 void MainWindow::showSheet() {

@@ -43,7 +43,8 @@ QString strengthRows(const Material& material, const QString& soft) {
     const std::string& text = strengthText(material, key);
     const Text& symbol = labelOf(material.kind, key);
     const Text& meaning = rowOf(spotOf(key)).label;
-    rows += row(shownRich(symbol), text.empty() ? words("not given").toStdString() : text,
+    rows += row(shownRich(symbol),
+                text.empty() ? words(QT_TRANSLATE_NOOP("Material", "not given")).toStdString() : text,
                 symbol == meaning ? QString() : shown(meaning), soft);
   }
   if (material.kind == MaterialKind::throat)
@@ -66,7 +67,8 @@ QString factorRows(const Material& material, const QString& soft) {
 }
 
 QString sentence(const QString& caption, const std::string& text, const QString& soft) {
-  const QString shownText = text.empty() ? words("not told").toHtmlEscaped() : escaped(text);
+  const QString shownText =
+      text.empty() ? words(QT_TRANSLATE_NOOP("Material", "not told")).toHtmlEscaped() : escaped(text);
   return QStringLiteral(
              "<p style=\"margin-top:0;margin-bottom:3px\"><span style=\"color:%1\">%2:</span> %3</p>")
       .arg(soft, caption.toHtmlEscaped(), shownText);
@@ -77,13 +79,16 @@ QString sentence(const QString& caption, const std::string& text, const QString&
 QString usedBy(const Study& study, const std::string& material) {
   QStringList checks;
   for (const Place& check : checksBy(study, material))
-    checks << words("“%1” of %2").arg(fromUtf8(check.item), fromUtf8(check.owner));
+    checks << words(QT_TRANSLATE_NOOP("Material", "“%1” of %2"))
+                  .arg(fromUtf8(check.item), fromUtf8(check.owner));
   if (checks.isEmpty())
     return {};
   constexpr qsizetype most = 6;
   if (checks.size() > most)
-    checks = checks.first(most - 1) << words("%1 more").arg(checks.size() - most + 1);
-  return words("Checks by it: %1. When the material is removed, they go with it.")
+    checks = checks.first(most - 1)
+             << words(QT_TRANSLATE_NOOP("Material", "%1 more")).arg(checks.size() - most + 1);
+  return words(QT_TRANSLATE_NOOP("Material",
+                                 "Checks by it: %1. When the material is removed, they go with it."))
       .arg(checks.join(QStringLiteral(", ")));
 }
 
@@ -92,14 +97,14 @@ QString sheetOf(const Material& material, const Look& look) {
   return QStringLiteral("<p style=\"margin-bottom:2px\"><span style=\"font-size:17px\"><b>%1</b></span></p>"
                         "<p style=\"margin-top:0;margin-bottom:8px;color:%2\">%3</p>")
              .arg(escaped(material.name), soft,
-                  words("%1; %2 strengths")
+                  words(QT_TRANSLATE_NOOP("Material", "%1; %2 strengths"))
                       .arg(shown(labelOf(material.kind)), shown(labelOf(material.basis)))
                       .toHtmlEscaped()) +
-         sentence(words("How read"), material.trust, soft) +
-         sentence(words("Source"), material.source, soft) +
-         sentence(words("Edition"), material.edition, soft) +
-         part(words("Strengths"), strengthRows(material, soft)) +
-         part(words("Factors"), factorRows(material, soft));
+         sentence(words(QT_TRANSLATE_NOOP("Material", "How read")), material.trust, soft) +
+         sentence(words(QT_TRANSLATE_NOOP("Material", "Source")), material.source, soft) +
+         sentence(words(QT_TRANSLATE_NOOP("Material", "Edition")), material.edition, soft) +
+         part(words(QT_TRANSLATE_NOOP("Material", "Strengths")), strengthRows(material, soft)) +
+         part(words(QT_TRANSLATE_NOOP("Material", "Factors")), factorRows(material, soft));
 }
 
 } // namespace planewright

@@ -21,7 +21,7 @@ QString words(const char* source) {
 
 /// A column over a typed spot of the thing at the row's place.
 ThingColumn typedColumn(const QString& heading, Spot spot,
-                        std::function<Place(const Study&, std::size_t)> place) {
+                        const std::function<Place(const Study&, std::size_t)>& place) {
   const auto spotOf = [spot, place](const Study& study, std::size_t row) {
     return Place{spot, place(study, row).owner, {}};
   };
@@ -37,8 +37,8 @@ ThingColumn typedColumn(const QString& heading, Spot spot,
 /// A column over a word, shown and chosen by its label.
 template <class Enum>
 ThingColumn wordColumn(const QString& heading, Spot spot,
-                       std::function<Place(const Study&, std::size_t)> place) {
-  ThingColumn column = typedColumn(heading, spot, std::move(place));
+                       const std::function<Place(const Study&, std::size_t)>& place) {
+  ThingColumn column = typedColumn(heading, spot, place);
   const auto wordText = column.text;
   column.text = [wordText](const Study& study, std::size_t row) {
     const auto value = fromWord<Enum>(wordText(study, row).toStdString());
@@ -57,7 +57,7 @@ ThingColumn wordColumn(const QString& heading, Spot spot,
 }
 
 /// The column of the key: typing in it renames the thing and what refers to it.
-ThingColumn keyColumn(const QString& heading, std::function<Place(const Study&, std::size_t)> place) {
+ThingColumn keyColumn(const QString& heading, const std::function<Place(const Study&, std::size_t)>& place) {
   return {heading, [place](const Study& study, std::size_t row) { return fromUtf8(place(study, row).owner); },
           [place](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
             return Edits{Rename{place(study, row), typed}};
@@ -105,17 +105,17 @@ Things loadCases() {
   const auto place = [](const Study& study, std::size_t row) {
     return Place{Spot::loadCase, study.cases[row].id, {}};
   };
-  ThingColumn id = keyColumn(words("Case"), place);
+  ThingColumn id = keyColumn(words(QT_TRANSLATE_NOOP("Things", "Case")), place);
   id.edits = [](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
     return editsThatRenameCase(study, study.cases[row].id, typed);
   };
-  return {words("Load cases"),
-          words("load case"),
+  return {words(QT_TRANSLATE_NOOP("Things", "Load cases")),
+          words(QT_TRANSLATE_NOOP("Things", "load case")),
           [](const Study& study) { return study.cases.size(); },
-          {id, typedColumn(words("Name"), Spot::caseName, place),
-           wordColumn<Nature>(words("Nature"), Spot::caseNature, place),
-           wordColumn<Duration>(words("Duration"), Spot::caseDuration, place),
-           typedColumn(words("Never together with"), Spot::caseExcludes, place)},
+          {id, typedColumn(words(QT_TRANSLATE_NOOP("Things", "Name")), Spot::caseName, place),
+           wordColumn<Nature>(words(QT_TRANSLATE_NOOP("Things", "Nature")), Spot::caseNature, place),
+           wordColumn<Duration>(words(QT_TRANSLATE_NOOP("Things", "Duration")), Spot::caseDuration, place),
+           typedColumn(words(QT_TRANSLATE_NOOP("Things", "Never together with")), Spot::caseExcludes, place)},
           newCase,
           place,
           {},
@@ -130,16 +130,16 @@ Things combinations() {
     return Place{Spot::combination, study.combinations[row].name, {}};
   };
   const ThingColumn terms{
-      words("Factors"),
+      words(QT_TRANSLATE_NOOP("Things", "Factors")),
       [](const Study& study, std::size_t row) { return fromUtf8(textOf(study.combinations[row])); },
       [](const Study& study, std::size_t row, const std::string& typed) {
         return editsThatSet(study, study.combinations[row].name, typed);
       }};
-  return {words("Combinations"),
-          words("combination"),
+  return {words(QT_TRANSLATE_NOOP("Things", "Combinations")),
+          words(QT_TRANSLATE_NOOP("Things", "combination")),
           [](const Study& study) { return study.combinations.size(); },
-          {keyColumn(words("Name"), place), terms,
-           wordColumn<Basis>(words("Basis"), Spot::combinationBasis, place)},
+          {keyColumn(words(QT_TRANSLATE_NOOP("Things", "Name")), place), terms,
+           wordColumn<Basis>(words(QT_TRANSLATE_NOOP("Things", "Basis")), Spot::combinationBasis, place)},
           editsThatAddNext,
           place,
           {},
@@ -155,10 +155,11 @@ Things points() {
   const auto place = [](const Study& study, std::size_t row) {
     return Place{Spot::point, study.points[row].name, {}};
   };
-  return {words("Points"),
-          words("point"),
+  return {words(QT_TRANSLATE_NOOP("Things", "Points")),
+          words(QT_TRANSLATE_NOOP("Things", "point")),
           [](const Study& study) { return study.points.size(); },
-          {keyColumn(words("Point"), place), typedColumn(words("Note"), Spot::pointNote, place)},
+          {keyColumn(words(QT_TRANSLATE_NOOP("Things", "Point")), place),
+           typedColumn(words(QT_TRANSLATE_NOOP("Things", "Note")), Spot::pointNote, place)},
           [](const Study& study) {
             const std::string name = freshPointName(study, study.points.back().name);
             Edits edits = {Insert{{Spot::point, name, {}}, std::nullopt}};
@@ -176,7 +177,8 @@ Things sections() {
   const auto place = [](const Study& study, std::size_t row) {
     return Place{Spot::section, study.sections[row].name, {}};
   };
-  ThingColumn shape = wordColumn<SectionShape>(words("Shape"), Spot::sectionShape, place);
+  ThingColumn shape =
+      wordColumn<SectionShape>(words(QT_TRANSLATE_NOOP("Things", "Shape")), Spot::sectionShape, place);
   shape.edits = [](const Study& study, std::size_t row, const std::string& typed) -> Result<Edits> {
     const std::string& name = study.sections[row].name;
     for (const Named<SectionShape>& one : namesOf<SectionShape>())
@@ -184,13 +186,14 @@ Things sections() {
         return editsThatReshape(study, name, one.value);
     return Edits{Type{{Spot::sectionShape, name, {}}, typed}};
   };
-  return {words("Sections"),
-          words("section"),
+  return {words(QT_TRANSLATE_NOOP("Things", "Sections")),
+          words(QT_TRANSLATE_NOOP("Things", "section")),
           [](const Study& study) { return study.sections.size(); },
-          {keyColumn(words("Section"), place),
+          {keyColumn(words(QT_TRANSLATE_NOOP("Things", "Section")), place),
            shape,
-           {words("Sizes"), [](const Study& study, std::size_t row) { return sizesOf(study.sections[row]); }},
-           {words("Points in it"),
+           {words(QT_TRANSLATE_NOOP("Things", "Sizes")),
+            [](const Study& study, std::size_t row) { return sizesOf(study.sections[row]); }},
+           {words(QT_TRANSLATE_NOOP("Things", "Points in it")),
             [](const Study& study, std::size_t row) {
               return joined(pointsIn(study, study.sections[row].name));
             }}},

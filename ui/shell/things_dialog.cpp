@@ -158,14 +158,15 @@ void ThingsDialog::complain(const Problem& problem) {
   m_complaint->show();
 }
 
-// The first few; hundreds of rows may be wrong in the same way.
+// The first few; hundreds of rows may be wrong in the same way. Asked while rows go, the table still has what
+// the study has not.
 QString ThingsDialog::cautions() const {
   const Things& things = m_model->things();
   constexpr int most = 3;
   QStringList sentences;
   int count = 0;
-  for (int i = 0; things.caution && i < m_model->rowCount(); ++i) {
-    const QString one = things.caution(m_desk.study(), static_cast<std::size_t>(i));
+  for (std::size_t i = 0; things.caution && i < things.count(m_desk.study()); ++i) {
+    const QString one = things.caution(m_desk.study(), i);
     if (one.isEmpty())
       continue;
     if (count++ < most)

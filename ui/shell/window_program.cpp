@@ -2,6 +2,7 @@
 #include "ui/shell/window_program.h"
 
 #include "ui/look/font.h"
+#include "ui/look/language.h"
 #include "ui/shell/appearance.h"
 #include "ui/shell/main_window.h"
 
@@ -26,6 +27,7 @@ int runWindow(int& argc, char** argv, const QString& path) {
                                                       "is damaged: build or install it again."));
     return 3;
   }
+  speak(languageOfWindow());
   dressApplication();
   MainWindow window;
   window.show();

@@ -4,6 +4,7 @@
 #include "core/strength/cautions.h"
 #include "core/study/check_edits.h"
 #include "core/table/check_words.h"
+#include "ui/look/column_area.h"
 #include "ui/look/look.h"
 #include "ui/look/quiet_button.h"
 #include "ui/look/steady_label.h"
@@ -18,7 +19,7 @@
 #include <QMenu>
 #include <QMessageBox>
 #include <QPainter>
-#include <QScrollArea>
+
 #include <QVBoxLayout>
 
 namespace planewright {
@@ -51,7 +52,7 @@ QString lines(const std::vector<Text>& texts) {
 } // namespace
 
 StrengthPanel::StrengthPanel(Desk& desk, QWidget* parent)
-    : QWidget(parent), m_desk(desk), m_scroll(new QScrollArea(this)), m_verdict(new VerdictBlock(desk, this)),
+    : QWidget(parent), m_desk(desk), m_scroll(new ColumnArea(this)), m_verdict(new VerdictBlock(desk, this)),
       m_checks(new CheckList(desk, this)), m_add(new QuietButton(tr("Add a check"), Role::focus, this)),
       m_remove(new QuietButton(tr("Remove"), Role::focus, this)),
       m_side(new QuietButton(tr("All criteria side by side"), Role::focus, this)),
@@ -121,14 +122,9 @@ void StrengthPanel::build() {
   rows->addLayout(rowOf({m_more}));
   rows->addStretch();
   m_scroll->setWidget(inside);
-  m_scroll->setWidgetResizable(true);
-  m_scroll->setFrameShape(QFrame::NoFrame);
-  m_scroll->setFocusPolicy(Qt::NoFocus);
-  m_scroll->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
   auto* all = new QVBoxLayout(this);
   all->setContentsMargins(0, 0, 0, 0);
   all->addWidget(m_scroll);
-  setMinimumWidth(264);
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
   setAccessibleName(tr("Strength"));

@@ -5,9 +5,9 @@
 
 #include <QWidget>
 
-class QScrollArea;
-
 namespace planewright {
+
+class ColumnArea;
 
 class CheckFields;
 class CheckList;
@@ -54,7 +54,7 @@ private:
   void showSideBySide();
 
   Desk& m_desk;
-  QScrollArea* m_scroll;
+  ColumnArea* m_scroll;
   VerdictBlock* m_verdict;
   CheckList* m_checks;
   QuietButton* m_add;

@@ -77,7 +77,19 @@ TEST_P(Contrast, ofClassesOfUtilisationIsInEvenSteps) {
 }
 
 INSTANTIATE_TEST_SUITE_P(Palettes, Contrast,
-                         testing::Values(Palette::light, Palette::dark, Palette::mono, Palette::paper));
+                         testing::Values(Palette::light, Palette::dark, Palette::mono, Palette::paper,
+                                         Palette::contrast));
+
+// The same guidelines, success criterion 1.4.6: 7 for text; and strokes as words are elsewhere.
+TEST(Look, theSetOfMuchContrastHasIt) {
+  using enum Role;
+  for (const Role front : {ink, soft, state, reading, line, limit, wrong})
+    EXPECT_GE(contrast(front, canvas, Palette::contrast), 7) << "role " << static_cast<int>(front);
+  for (const Role ground : {band, selection, safeGround, wrongGround})
+    EXPECT_GE(contrast(ink, ground, Palette::contrast), 7) << "role " << static_cast<int>(ground);
+  for (const Role front : {other, focus, safeEdge, rule})
+    EXPECT_GE(contrast(front, canvas, Palette::contrast), text) << "role " << static_cast<int>(front);
+}
 
 } // namespace
 } // namespace planewright

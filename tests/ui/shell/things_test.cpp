@@ -46,6 +46,16 @@ TEST_F(ThingsTest, casesAreAddedNamedAndExcludedEachAsOneStep) {
   EXPECT_EQ(m_desk.study().cases[2].duration, Duration::medium);
 }
 
+TEST_F(ThingsTest, anotherStudyWithFewerThingsComesWhileTheLastRowIsChosen) {
+  ThingsDialog dialog(m_desk, combinations(), nullptr);
+  dialog.show();
+  for (int i = 0; i < 3; ++i)
+    dialog.add();
+  ASSERT_EQ(dialog.table().currentIndex().row(), 2);
+  m_desk.replace(newStudy());
+  EXPECT_EQ(dialog.table().model()->rowCount(), 0);
+}
+
 TEST_F(ThingsTest, whatIsNotTakenIsToldInTheWindow) {
   ThingsDialog dialog(m_desk, loadCases(), nullptr);
   dialog.show();
