@@ -6886,6 +6886,10 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
         <source>Draw the x face</source>
         <translation>x-Fläche ziehen</translation>
     </message>
+    <message>
+        <source>normal stress %1, shear stress %2; principal stresses %3 and %4</source>
+        <translation>Normalspannung %1, Schubspannung %2; Hauptspannungen %3 und %4</translation>
+    </message>
 </context>
 <context>
     <name>planewright::CircleView</name>
@@ -7453,6 +7457,10 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
     <message>
         <source>The figure is on the clipboard, as SVG, PDF and pixels.</source>
         <translation>Die Abbildung ist in der Zwischenablage, als SVG, PDF und Pixelbild.</translation>
+    </message>
+    <message>
+        <source>Preview</source>
+        <translation>Vorschau</translation>
     </message>
 </context>
 <context>
@@ -9925,6 +9933,10 @@ Eingabetaste zeigt diese Kombination</translation>
     <message>
         <source>%1 at %2, all combinations</source>
         <translation>%1 bei %2, alle Kombinationen</translation>
+    </message>
+    <message>
+        <source>%1 degrees</source>
+        <translation>%1 Grad</translation>
     </message>
 </context>
 <context>

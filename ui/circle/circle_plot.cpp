@@ -1,10 +1,13 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/circle/circle_plot.h"
 
+#include "core/study/stress_form.h"
 #include "ui/circle/circle_words.h"
 #include "ui/circle/failure_layer.h"
 #include "ui/circle/others.h"
 #include "ui/circle/ranges.h"
+#include "ui/look/dial_access.h"
+#include "ui/look/look.h"
 #include "ui/paint/picture_item.h"
 
 #include <QChart>
@@ -55,6 +58,12 @@ CirclePlot::CirclePlot(Desk& desk, QWidget* parent)
       m_still(new PictureItem(chart(), overSeries)), m_reading(new PictureItem(chart(), overSeries + 1)),
       m_ear(new PictureItem(chart(), overSeries + 2)), m_names(new PictureItem(chart(), overSeries + 3)),
       m_focus(new PictureItem(chart(), overSeries + 4)) {
+  // Before anything asks for the plot's interface, which Qt keeps from then on.
+  makeDial(*this, {[this] { return reading().degrees(); },
+                   [this](double degrees) { turnTo(Angle::fromDegrees(degrees)); },
+                   [this] { return tr("%1 degrees").arg(reading().degrees(), 0, 'f', angleDecimals); },
+                   [this] { return stressesInWords(); }});
+  setAccessibleName(tr("Reading plane on the circle"));
   attach(m_circle);
   setFocusPolicy(Qt::StrongFocus);
   viewport()->setMouseTracking(true);
@@ -62,6 +71,14 @@ CirclePlot::CirclePlot(Desk& desk, QWidget* parent)
   m_settle.setInterval(motionGap);
   connect(&m_settle, &QTimer::timeout, this, &CirclePlot::rest);
   connect(&m_desk, &Desk::changed, this, &CirclePlot::follow);
+}
+
+QString CirclePlot::stressesInWords() const {
+  const StateReading& state = m_desk.readout().state();
+  const StressForm form = stressFormOf(m_desk.study(), state);
+  const auto words = [&](double stress) { return fromUtf8(form.withUnit(stress)); };
+  return tr("normal stress %1, shear stress %2; principal stresses %3 and %4")
+      .arg(words(state.reading.sn), words(state.reading.tnt), words(state.circle.s1), words(state.circle.s2));
 }
 
 void CirclePlot::setFit(Fit fit) {
@@ -80,6 +97,7 @@ EqualScale CirclePlot::fittedTo(const QRectF& plot) const {
 
 /// During a drag of its own the axes stand still, else the circle would run away under the hand.
 void CirclePlot::follow() {
+  announceDial(*this);
   const bool moving = m_drag || m_settle.isActive();
   if (moving && !m_ride)
     m_ride = m_labels;

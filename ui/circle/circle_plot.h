@@ -39,6 +39,8 @@ public:
   bool isDragging() const { return m_drag.has_value(); }
   /// What is said about this place of the widget.
   QString tipAt(QPointF pixel) const;
+  /// What the circle reads out, without a picture.
+  QString stressesInWords() const;
   /// Turns the reading plane as one step of its own.
   void turnTo(Angle normal);
 

@@ -1,7 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/circle/circle_view.h"
 
-#include "ui/circle/circle_access.h"
 #include "ui/circle/circle_plot.h"
 #include "ui/look/quiet_button.h"
 
@@ -63,7 +62,6 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
   setAccessibleName(tr("Circle"));
   setFocusProxy(m_plot);
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
-  makeAccessible(*m_plot, desk);
   connect(m_plot, &CirclePlot::angleEntryWanted, this, &CircleView::angleEntryWanted);
   showFit();
 }

@@ -3,9 +3,9 @@
 
 #include "core/quantity/format.h"
 #include "core/study/cut_text.h"
-#include "ui/element/accessible.h"
 #include "ui/element/angle_field.h"
 #include "ui/element/exact_words.h"
+#include "ui/look/dial_access.h"
 #include "ui/look/look.h"
 #include "ui/paint/painter.h"
 
@@ -22,16 +22,24 @@ ElementView::ElementView(Desk& desk, QWidget* parent) : QWidget(parent), m_desk(
   setMouseTracking(true);
   setAttribute(Qt::WA_OpaquePaintEvent);
   // Before anything asks for the view's interface, which Qt keeps from then on.
-  installElementAccessibility();
+  makeDial(*this, {[this] { return angleOf(m_current).value_or(Angle()).degrees(); },
+                   [this](double degrees) { turn(m_current, Angle::fromDegrees(degrees)); },
+                   [this] { return wordsOf(m_current); }, [this] { return wordsOfAll(); }});
   setAccessibleName(tr("Element"));
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
   connect(&m_desk, &Desk::changed, this, &ElementView::follow);
 }
 
+QString ElementView::wordsOfAll() const {
+  const QString reading = wordsOf(ElementHandle::reading);
+  const QString line = wordsOf(ElementHandle::line);
+  return line.isEmpty() ? reading : reading + QStringLiteral("; ") + line;
+}
+
 void ElementView::follow() {
   if (m_current == ElementHandle::line && m_desk.readout().lines.empty())
     setCurrent(ElementHandle::reading);
-  announceElement(*this);
+  announceDial(*this);
   update();
 }
 
@@ -188,7 +196,7 @@ void ElementView::setCurrent(ElementHandle handle) {
   if (handle == m_current)
     return;
   m_current = handle;
-  announceElement(*this);
+  announceDial(*this);
   update();
   Q_EMIT currentHandleChanged();
 }

@@ -57,6 +57,7 @@ protected:
   void changeEvent(QEvent* event) override;
 
 private:
+  QString wordsOfAll() const;
   void follow();
   ElementGlance glance() const;
   ElementGeometry geometry() const;

@@ -7,6 +7,7 @@
 #include "ui/figure/points_dialog.h"
 #include "ui/files/file_bytes.h"
 #include "ui/files/folders.h"
+#include "ui/look/column_area.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 
@@ -43,14 +44,9 @@ FigureDialog::FigureDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_des
 
 void FigureDialog::build() {
   constexpr QSize first(980, 760);
-  constexpr int optionsWidth = 250;
   m_options = new FigureOptions(rememberedFigure(QSettings()), this);
-  auto* options = new QScrollArea(this);
+  auto* options = new ColumnArea(this);
   options->setWidget(m_options);
-  options->setWidgetResizable(true);
-  options->setFrameShape(QFrame::NoFrame);
-  options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
-  options->setFixedWidth(optionsWidth);
   m_sentence = sentenceIn(*this);
   auto* middle = new QHBoxLayout;
   middle->setSpacing(14);
@@ -66,6 +62,7 @@ void FigureDialog::build() {
 QVBoxLayout* FigureDialog::previewColumn() {
   m_page = new FigurePage;
   m_scroll = new QScrollArea(this);
+  m_scroll->setAccessibleName(tr("Preview"));
   m_scroll->setWidget(m_page);
   m_scroll->setWidgetResizable(true);
   m_scroll->setFrameShape(QFrame::NoFrame);

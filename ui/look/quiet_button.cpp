@@ -23,6 +23,12 @@ QuietButton::QuietButton(const QString& words, Role role, QWidget* parent)
   setCursor(Qt::PointingHandCursor);
 }
 
+void QuietButton::setText(const QString& words) {
+  QToolButton::setText(words);
+  if (!accessibleName().isEmpty() && accessibleName() != words)
+    setAccessibleDescription(words);
+}
+
 QFont QuietButton::ownFont() const {
   QFont result = font();
   result.setBold(menu() != nullptr);

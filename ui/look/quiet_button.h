@@ -13,6 +13,8 @@ class QuietButton : public QToolButton {
 
 public:
   QuietButton(const QString& words, Role role, QWidget* parent);
+  /// Also told by a reader of the screen, beside a name of the button's own ("criterion": "sum of squares").
+  void setText(const QString& words);
   QSize sizeHint() const override;
   QSize minimumSizeHint() const override { return sizeHint(); }
 

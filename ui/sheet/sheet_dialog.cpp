@@ -7,6 +7,7 @@
 #include "core/report/sheet_html.h"
 #include "ui/files/file_bytes.h"
 #include "ui/files/folders.h"
+#include "ui/look/column_area.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
 #include "ui/paint/export.h"
@@ -22,7 +23,6 @@
 #include <QLabel>
 #include <QPrinter>
 #include <QPushButton>
-#include <QScrollArea>
 #include <QSettings>
 #include <QShowEvent>
 #include <QVBoxLayout>
@@ -53,15 +53,9 @@ SheetDialog::SheetDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_desk(
 
 void SheetDialog::build() {
   constexpr QSize first(1000, 780);
-  constexpr int optionsWidth = 240;
   m_options = new SheetOptions(m_desk, rememberedSheet(QSettings()), this);
-  auto* options = new QScrollArea(this);
+  auto* options = new ColumnArea(this);
   options->setWidget(m_options);
-  options->setWidgetResizable(true);
-  options->setFrameShape(QFrame::NoFrame);
-  options->setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
-  options->setFixedWidth(optionsWidth);
-  options->setFocusPolicy(Qt::NoFocus);
   m_routes = sentenceIn(*this);
   m_sentence = sentenceIn(*this);
   m_sentence->hide();

@@ -3,6 +3,7 @@
 
 #include "ui/look/font.h"
 #include "ui/look/look.h"
+#include "ui/look/press_access.h"
 #include "ui/look/ring_style.h"
 
 #include <QApplication>
@@ -83,6 +84,7 @@ void chooseTextPercent(int percent) {
 }
 
 void dressApplication() {
+  installPressAccess();
   QApplication::setStyle(new RingStyle);
   QApplication::setFont(programFont(textPixels()));
   QApplication::setPalette(paletteFor(Look{paletteOf(chosenAppearance())}));

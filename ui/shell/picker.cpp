@@ -32,10 +32,10 @@ Picker::Picker(const QString& caption, const QString& keys, QWidget* parent)
     : QWidget(parent), m_name(new QPushButton(this)),
       m_previous(arrow(Qt::LeftArrow, tr("Previous (%1+PageUp)").arg(keys), this)),
       m_next(arrow(Qt::RightArrow, tr("Next (%1+PageDown)").arg(keys), this)), m_count(new QLabel(this)) {
-  build(caption, keys);
+  build(caption);
 }
 
-void Picker::build(const QString& caption, const QString& keys) {
+void Picker::build(const QString& caption) {
   auto* row = new QHBoxLayout(this);
   row->setContentsMargins(0, 0, 0, 0);
   row->setSpacing(4);
@@ -48,7 +48,6 @@ void Picker::build(const QString& caption, const QString& keys) {
   row->addWidget(m_count);
   dress();
   m_name->setAccessibleName(caption);
-  m_name->setAccessibleDescription(keys);
   label->setBuddy(m_name);
   connect(m_name, &QPushButton::clicked, this, &Picker::openList);
   connect(m_previous, &QToolButton::clicked, this, &Picker::previous);
@@ -95,6 +94,7 @@ void Picker::writeName() {
   const int room = std::max(0, m_name->width() - 20);
   m_name->setText(nameForMenu(m_name->fontMetrics().elidedText(name, Qt::ElideRight, room)));
   m_name->setToolTip(name);
+  m_name->setAccessibleDescription(name);
 }
 
 FilterList* Picker::openList() {

@@ -41,7 +41,7 @@ protected:
 
 private:
   void dress();
-  void build(const QString& caption, const QString& keys);
+  void build(const QString& caption);
   void step(int by);
   void writeName();
 

@@ -6,6 +6,7 @@
 #include "core/study/cut_text.h"
 #include "core/study/named_directions.h"
 #include "ui/desk/turning.h"
+#include "ui/look/dial_access.h"
 #include "ui/paint/picture_item.h"
 
 #include <QChart>
@@ -47,6 +48,12 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
       m_shown(new QLineSeries(chart())), m_greatest(new QLineSeries(chart())),
       m_ground(new PictureItem(chart(), groundDepth)), m_others(new PictureItem(chart(), othersDepth)),
       m_marks(new PictureItem(chart(), marksDepth)) {
+  // Before anything asks for the plot's interface, which Qt keeps from then on.
+  makeDial(*this,
+           {[this] { return turnedPlace() ? nominal().degrees() : 0; },
+            [this](double degrees) { turnTo(degrees, m_desk.newCommand()); },
+            [this] { return tr("%1 degrees").arg(turnedPlace() ? nominal().degrees() : 0, 0, 'f', 2); },
+            [this] { return accessibleDescription(); }});
   chart()->addAxis(m_x, Qt::AlignBottom);
   chart()->addAxis(m_y, Qt::AlignLeft);
   chart()->legend()->hide();
@@ -119,6 +126,7 @@ void UtilisationPlot::refresh() {
       tr("%1 at %2")
           .arg(worst ? fromUtf8(shownUtilisation(worst->judgement.utilisation)) : QString(),
                fromUtf8(shownDegrees(setup.band->nominal, 2))));
+  announceDial(*this);
   if (wasFar != reachesFar())
     emit reachChanged();
 }

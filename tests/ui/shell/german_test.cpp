@@ -103,7 +103,7 @@ TEST_F(German, noWordOfAButtonOrALabelIsCut) {
     followEveryMenu(window);
     window.showPointPage();
     QCoreApplication::processEvents();
-    for (const ColumnArea* column : window.findChildren<ColumnArea*>())
+    for (const ColumnArea* column : window.findChildren<ColumnArea*>()) // of its dialogs too
       EXPECT_TRUE(!column->isVisible() || column->widget()->width() <= column->viewport()->width())
           << column->widget()->width() << " at " << size.width();
     for (QWidget* top : QApplication::topLevelWidgets())
