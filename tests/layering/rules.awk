@@ -12,7 +12,7 @@ function order(part, folders,   list, count, i) {
 BEGIN {
   # Each folder includes only folders before it in its row, and its own.
   order("core", "words quantity working stress source strength study table figure record screen shipped evidence report")
-  order("ui", "look desk entry chart paint files given element circle planes strength figure sheet screen shell")
+  order("ui", "look desk entry chart paint files manual given element circle planes strength figure sheet screen shell")
   split("given element circle planes strength figure sheet screen", views, " ")
   for (i in views) isView[views[i]] = 1
   edge = "(^|[^A-Za-z0-9_])"

@@ -60,6 +60,7 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
   column->addWidget(m_plot, 1);
 
   setAccessibleName(tr("Circle"));
+  setProperty("helpPlace", "drawings#circle");
   setFocusProxy(m_plot);
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
   connect(m_plot, &CirclePlot::angleEntryWanted, this, &CircleView::angleEntryWanted);

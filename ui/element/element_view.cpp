@@ -26,6 +26,7 @@ ElementView::ElementView(Desk& desk, QWidget* parent) : QWidget(parent), m_desk(
                    [this](double degrees) { turn(m_current, Angle::fromDegrees(degrees)); },
                    [this] { return wordsOf(m_current); }, [this] { return wordsOfAll(); }});
   setAccessibleName(tr("Element"));
+  setProperty("helpPlace", "drawings#element");
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
   connect(&m_desk, &Desk::changed, this, &ElementView::follow);
 }

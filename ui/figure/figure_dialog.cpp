@@ -33,6 +33,7 @@ namespace planewright {
 
 FigureDialog::FigureDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_desk(desk) {
   setWindowTitle(tr("Arrange figure"));
+  setProperty("helpPlace", "figures#arrange");
   setModal(false);
   build();
   connect(&m_desk, &Desk::changed, this, [this] {

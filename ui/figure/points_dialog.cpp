@@ -39,6 +39,7 @@ Existing askExisting(QWidget& over, const QString& folder, int existing, int all
 PointsDialog::PointsDialog(Desk& desk, FigureBatch arranged, AskExisting ask, QWidget* parent)
     : QDialog(parent), m_desk(desk), m_arranged(std::move(arranged)), m_ask(std::move(ask)) {
   setWindowTitle(tr("Figures of all points"));
+  setProperty("helpPlace", "figures#all-points");
   setWindowModality(Qt::WindowModal);
   resize(560, 560);
   auto* rows = new QVBoxLayout(this);

@@ -51,6 +51,7 @@ protected:
 } // namespace
 
 CaseStrip::CaseStrip(QWidget* parent) : QWidget(parent) {
+  setProperty("helpPlace", "combinations#cases");
   auto* line = new QHBoxLayout(this);
   line->setContentsMargins(0, 0, 0, 0);
   line->setSpacing(4);

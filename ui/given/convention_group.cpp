@@ -47,6 +47,7 @@ void check(const QList<ChoiceButton*>& buttons, int which) {
 
 ConventionGroup::ConventionGroup(Desk& desk, QWidget* parent)
     : FoldGroup(tr("Conventions"), Role::ink, parent), m_desk(desk) {
+  setProperty("helpPlace", "conventions#choose");
   auto* grid = new QGridLayout;
   grid->setSpacing(6);
   addChoices<Positive>(*grid, m_positive);

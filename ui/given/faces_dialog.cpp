@@ -18,6 +18,7 @@ FacesDialog::FacesDialog(Line line, QWidget* parent)
     : QDialog(parent), m_line(std::move(line)), m_first(new QLineEdit(this)), m_second(new QLineEdit(this)),
       m_told(new QLabel(this)) {
   setWindowTitle(tr("True slope of the grain from two faces"));
+  setProperty("helpPlace", "lines#faces");
   auto* form = new QFormLayout;
   form->addRow(tr("Slope on the wide face"), m_first);
   form->addRow(tr("Slope on the narrow face"), m_second);

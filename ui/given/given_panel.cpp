@@ -38,6 +38,7 @@ QFrame* rule(QWidget* parent) {
 
 GivenPanel::GivenPanel(Desk& desk, QWidget* parent) : ColumnArea(parent), m_desk(desk) {
   setAccessibleName(tr("Given"));
+  setProperty("helpPlace", "given#typed");
   setProperty("areaKeys", tr("Enter takes an entry, Esc puts it back, F8 next entry not taken"));
   auto* content = new QWidget(this);
   buildHeading(content);

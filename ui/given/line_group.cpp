@@ -38,6 +38,7 @@ LineGroup::LineGroup(Desk& desk, std::size_t index, QWidget* parent)
       m_kind(new QuietButton({}, Role::line, this)),
       m_slopes(new QuietButton(tr("Slope of unknown sense"), Role::focus, this)),
       m_second(new QuietButton(tr("Second line"), Role::focus, this)), m_sentence(new SteadyLabel(this)) {
+  setProperty("helpPlace", "lines#angle");
   buildKinds();
   addName();
   addAngle();
@@ -66,6 +67,7 @@ EntryBinding LineGroup::boundToLine(Spot spotOf) const {
 }
 
 void LineGroup::buildSecond() {
+  m_second->setProperty("helpPlace", "lines#second");
   m_second->setToolTip(
       tr("A second direction of the material at this point, such as the bond beside the grain"));
   auto* row = new QHBoxLayout;
@@ -89,6 +91,7 @@ void LineGroup::buildSlopes() {
     dialog->open();
   });
   m_slopes->setMenu(menu);
+  m_slopes->setProperty("helpPlace", "lines#slopes");
   m_slopes->setToolTip(
       tr("The slope of a grain whose sense is not known: the tolerance to either side of the angle above"));
   auto* row = new QHBoxLayout;

@@ -22,6 +22,7 @@ Place noteOfShownPoint(const Study& study) {
 } // namespace
 
 NoteField::NoteField(Desk& desk, QWidget* parent) : QPlainTextEdit(parent), m_desk(desk) {
+  setProperty("helpPlace", "given#notes");
   setTabChangesFocus(true);
   setAccessibleName(tr("note on this point"));
   setFrameShape(QFrame::NoFrame);

@@ -26,6 +26,7 @@ Place readingSpot(const Study& study) {
 ReadingGroup::ReadingGroup(Desk& desk, QWidget* parent)
     : FoldGroup(tr("Reading plane"), Role::reading, parent), m_desk(desk),
       m_goTo(new QuietButton(tr("Go to"), Role::focus, this)) {
+  setProperty("helpPlace", "lines#reading");
   auto* menu = new QMenu(m_goTo);
   m_goTo->setMenu(menu);
   m_goTo->setAccessibleName(tr("go to a named direction"));

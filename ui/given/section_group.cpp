@@ -57,6 +57,7 @@ SectionGroup::SectionGroup(Desk& desk, QWidget* parent)
       m_dropBlock(new QuietButton(tr("Remove the last"), Role::focus, this)), m_sizeRows(new QWidget(this)),
       m_rest(new QWidget(this)), m_drawn(new QLabel(m_rest)), m_properties(new QLabel(m_rest)),
       m_view(new SectionView(desk, m_rest)) {
+  setProperty("helpPlace", "given#section");
   buildButtons();
   body().addLayout(rowOf({m_shape}));
   auto* sizes = new QVBoxLayout(m_sizeRows);

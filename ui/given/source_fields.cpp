@@ -53,6 +53,9 @@ SourceFields::SourceFields(Desk& desk, Spot source, CaseId caseId, QWidget* pare
   rows->addLayout(head);
   m_remove->setAccessibleName(tr("remove %1").arg(shown(rowOf(source).label)));
   connect(m_remove, &QAbstractButton::clicked, this, &SourceFields::remove);
+  setProperty("helpPlace", source == Spot::forces     ? "given#section-forces"
+                           : source == Spot::pressure ? "given#pressure"
+                                                      : "given#rosette");
   if (source == Spot::forces)
     addForces();
   else if (source == Spot::pressure)

@@ -54,6 +54,7 @@ StressGroup::StressGroup(Desk& desk, QWidget* parent)
       m_addThird(new QuietButton(tr("Third direction"), Role::focus, this)),
       m_addAxes(new QuietButton(tr("Inclined axes"), Role::focus, this)),
       m_addEdge(new QuietButton(tr("Free edge"), Role::focus, this)) {
+  setProperty("helpPlace", "given#typed");
   // Before the fields, so that they ask for the case that is to be seen.
   connect(&m_desk, &Desk::changed, this, &StressGroup::followShown);
   followShown();
@@ -102,6 +103,7 @@ void StressGroup::addSources() {
     menu->addAction(shown(rowOf(spot).label), source, &SourceFields::add);
   }
   m_addSource->setMenu(menu);
+  m_addSource->setProperty("helpPlace", "given#sources");
   m_addSource->setToolTip(
       tr("Section forces, pressure in a thin wall or measured strains: they add to the typed stresses"));
   m_whole->setWordWrap(true);
@@ -115,6 +117,7 @@ void StressGroup::addDirection(Spot spot, const Text& caption, const QString& me
   });
   binding.echo = std::move(echo);
   auto* field = new EntryField(m_desk, std::move(binding), {caption, meaning, false}, this);
+  field->setProperty("helpPlace", spot == Spot::axes ? "given#axes" : "given#free-edge");
   body().addWidget(field);
   m_fields += field;
 }
@@ -145,6 +148,9 @@ void StressGroup::buildMore() {
   body().addWidget(m_sum);
   m_caution->setWordWrap(true);
   body().addWidget(m_caution);
+  m_addThird->setProperty("helpPlace", "given#third");
+  m_addAxes->setProperty("helpPlace", "given#axes");
+  m_addEdge->setProperty("helpPlace", "given#free-edge");
   m_addThird->setToolTip(
       tr("A normal stress out of the plane; it counts only in the absolute greatest shear"));
   m_addAxes->setToolTip(tr("Draw the element in the axes of an inclined member; no stress changes"));

@@ -27,6 +27,7 @@ PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
   setAccessibleName(tr("Planes"));
+  setProperty("helpPlace", "planes#table");
   m_tabs->addTab(tr("Planes"));
   m_tabs->addTab(tr("Sweep"));
   m_pages->addWidget(m_planes);

@@ -37,6 +37,7 @@ SweepPage::SweepPage(Desk& desk, QWidget* parent)
     : QWidget(parent), m_desk(desk), m_model(new SweepModel(desk, this)),
       m_table(new PlaneTable(*m_model, this)), m_step(new DraftEdit(this)), m_complaint(new Complaint(this)) {
   auto* caption = new QLabel(tr("step"), this);
+  setProperty("helpPlace", "planes#sweep");
   caption->setBuddy(m_step);
   m_step->setAccessibleName(tr("step of the sweep"));
   m_step->setFixedWidth(fontMetrics().horizontalAdvance(QStringLiteral("0000000000")) + 24);

@@ -49,6 +49,7 @@ FieldMapView::FieldMapView(const FieldModel& model, QItemSelectionModel& current
     : QWidget(parent), m_model(model), m_current(current) {
   setFocusPolicy(Qt::StrongFocus);
   setAccessibleName(tr("Map of the field by utilisation"));
+  setProperty("helpPlace", "screening#map");
   setSizePolicy(QSizePolicy::Expanding, QSizePolicy::Expanding);
   // A field has rows only after it has come.
   connect(&m_model, &QAbstractItemModel::modelReset, this, [this] {

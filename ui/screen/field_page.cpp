@@ -38,6 +38,7 @@ FieldPage::FieldPage(Desk& desk, QWidget* parent)
       m_count(new QLabel(this)), m_model(new FieldModel(this)), m_table(new QTableView(this)),
       m_histogram(new HistogramView(this)), m_legend(new MapLegend(this)), m_notes(new QPlainTextEdit(this)),
       m_views(new QTabWidget(this)), m_open(new QPushButton(tr("&Open as a point"), this)) {
+  setProperty("helpPlace", "screening#results");
   m_heading->setWordWrap(true);
   m_heading->setTextFormat(Qt::PlainText);
   auto* parts = new QSplitter(this);

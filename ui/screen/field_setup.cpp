@@ -51,6 +51,7 @@ FieldSetup::FieldSetup(Desk& desk, QWidget* parent)
       m_leavesOut(new QCheckBox(tr("Leave &faulty rows out"), this)), m_sentence(new QLabel(this)),
       m_complaints(new QPlainTextEdit(this)), m_progress(new QProgressBar(this)),
       m_start(new QPushButton(tr("&Screen"), this)), m_cancel(new QPushButton(tr("Cancel"), this)) {
+  setProperty("helpPlace", "screening#table");
   build();
   connect(m_choose, &QPushButton::clicked, this, &FieldSetup::tableWanted);
   connect(m_path, &QLineEdit::editingFinished, this, [this] {

@@ -34,6 +34,7 @@ bool isExceeding(std::size_t bin) {
 HistogramView::HistogramView(QWidget* parent) : QWidget(parent) {
   setFocusPolicy(Qt::StrongFocus);
   setAccessibleName(tr("Points by utilisation"));
+  setProperty("helpPlace", "screening#bars");
   setToolTip(tr("Click on a bar to see its points alone, and once more for all."));
   setSizePolicy(QSizePolicy::Preferred, QSizePolicy::Fixed);
 }

@@ -6,7 +6,6 @@
 #include "ui/screen/field_page.h"
 #include "ui/screen/field_setup.h"
 
-#include <QAction>
 #include <QFileDialog>
 #include <QFileInfo>
 #include <QPushButton>
@@ -21,6 +20,7 @@ ScreenDialog::ScreenDialog(Desk& desk, QWidget* parent)
       m_page(new FieldPage(desk, this)) {
   constexpr int betweenLooks = 50; // ms
   setWindowTitle(tr("Screen points"));
+  setProperty("helpPlace", "screening#table");
   resize(1000, 640);
   m_pages->addWidget(m_setup);
   m_pages->addWidget(m_page);
@@ -35,10 +35,6 @@ ScreenDialog::ScreenDialog(Desk& desk, QWidget* parent)
   connect(m_page, &FieldPage::anotherWanted, this, [this] { m_pages->setCurrentWidget(m_setup); });
   connect(m_page, &FieldPage::saveWanted, this, &ScreenDialog::chooseResults);
   connect(m_page, &FieldPage::opened, this, &ScreenDialog::opened);
-  auto* help = new QAction(this);
-  help->setShortcut(QKeySequence::HelpContents);
-  addAction(help);
-  connect(help, &QAction::triggered, this, &ScreenDialog::helpWanted);
 }
 
 bool ScreenDialog::showsResults() const {

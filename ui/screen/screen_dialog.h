@@ -35,7 +35,6 @@ public:
 signals:
   /// A point of the field was made one of the study, and is shown.
   void opened();
-  void helpWanted();
 
 private:
   void chooseTable();

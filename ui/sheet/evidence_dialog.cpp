@@ -33,6 +33,7 @@ EvidenceDialog::EvidenceDialog(Results<std::vector<CheckResult>> checks, QWidget
     : QDialog(parent), m_paper(rememberedSheet(QSettings()).paper) {
   constexpr QSize first(900, 780);
   setWindowTitle(tr("Published values, recomputed"));
+  setProperty("helpPlace", "sheets#evidence");
   m_sentence = sentenceIn(*this);
   auto* view = new PagesView(this);
   m_preview = &view->preview();

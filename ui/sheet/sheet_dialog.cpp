@@ -37,6 +37,7 @@ constexpr int soon = 150; ///< ms after the last change
 
 SheetDialog::SheetDialog(Desk& desk, QWidget* parent) : QDialog(parent), m_desk(desk) {
   setWindowTitle(tr("Calculation sheet"));
+  setProperty("helpPlace", "sheets#window");
   setModal(false);
   build();
   m_run = new SheetRun(this);

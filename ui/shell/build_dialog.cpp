@@ -62,6 +62,7 @@ void BuildDialog::followCases() {
 
 void BuildDialog::build() {
   setWindowTitle(tr("Build combinations"));
+  setProperty("helpPlace", "combinations#build");
   resize(720, 520);
   setAttribute(Qt::WA_DeleteOnClose);
   const CombinationFactors start = recommendedFactors(m_desk.study());

@@ -5,6 +5,7 @@
 #include "ui/element/element_view.h"
 #include "ui/figure/figure_dialog.h"
 #include "ui/given/given_panel.h"
+#include "ui/look/look.h"
 #include "ui/look/strip.h"
 #include "ui/planes/planes_panel.h"
 #include "ui/screen/screen_dialog.h"
@@ -14,7 +15,7 @@
 #include "ui/shell/body.h"
 #include "ui/shell/change_words.h"
 #include "ui/shell/file_questions.h"
-#include "ui/shell/help_window.h"
+#include "ui/shell/help_key.h"
 #include "ui/shell/preferences.h"
 #include "ui/shell/recovery.h"
 #include "ui/shell/state_bar.h"
@@ -60,7 +61,8 @@ MainWindow::MainWindow(FileQuestions questions)
       m_strength(new StrengthPanel(m_desk)), m_summary(new SummaryPage(m_desk)),
       m_body(new Body({m_given, m_element, m_circle, m_planes, m_strength}, this)),
       m_pages(new QStackedWidget(this)), m_status(new StatusLine(this)),
-      m_areas(new Areas({m_stateBar, m_given, m_element, m_circle, m_planes, m_strength, m_summary}, this)) {
+      m_areas(new Areas({m_stateBar, m_given, m_element, m_circle, m_planes, m_strength, m_summary}, this)),
+      m_help(new HelpKey(*this)) {
   build();
   addFileMenu();
   addEditMenu();
@@ -100,6 +102,7 @@ void MainWindow::build() {
   setCentralWidget(page);
   setWindowIcon(windowIcon());
   setMinimumSize(800, 560);
+  setProperty("helpPlace", "window#areas");
   setAcceptDrops(true);
   QWidget::setTabOrder(&m_stateBar->figureButton(), m_given);
 }
@@ -193,20 +196,6 @@ void MainWindow::arrangeFigure() {
     m_figure->setStudyFile(m_filing->path());
   }
   raised(*m_figure);
-}
-
-HelpWindow& MainWindow::help() {
-  if (!m_help)
-    m_help = new HelpWindow(this);
-  return *m_help;
-}
-
-void MainWindow::helpOnFocus() {
-  const QWidget* area = m_areas->current();
-  help().showPage(area == m_given                           ? HelpPage::entries
-                  : area == m_element || area == m_circle   ? HelpPage::conventions
-                  : area == m_strength || area == m_summary ? HelpPage::strength
-                                                            : HelpPage::keys);
 }
 
 bool MainWindow::event(QEvent* event) {

@@ -21,7 +21,7 @@ class FigureDialog;
 class ScreenDialog;
 class SheetDialog;
 class GivenPanel;
-class HelpWindow;
+class HelpKey;
 class MaterialsDialog;
 class PlanesPanel;
 class PreferencesDialog;
@@ -68,6 +68,7 @@ public:
   /// The strip that greets, and the one that tells of files.
   Strip& welcome() const { return *m_welcome; }
   Strip& trouble() const { return *m_trouble; }
+  HelpKey& help() const { return *m_help; }
 
 public slots:
   void arrangeFigure();
@@ -121,10 +122,8 @@ private:
   void copyStresses(const std::vector<Point>& points, const QString& said);
   void copyFigureNow();
   void printFigureNow();
-  void helpOnFocus();
   void showEvidence();
   void showAbout();
-  HelpWindow& help();
 
   Desk m_desk;
   Filing* m_filing;
@@ -142,13 +141,13 @@ private:
   QStackedWidget* m_pages;
   StatusLine* m_status;
   Areas* m_areas;
+  HelpKey* m_help;
   QMenu* m_recent = nullptr;
   int m_toldStep = 0; ///< where the undo stack stood when a step was last told
   QPointer<FigureDialog> m_figure;
   QPointer<SheetDialog> m_sheet;
   // A window of its own: as a dialog of this one it would always lie over it.
   QPointer<ScreenDialog> m_screen;
-  QPointer<HelpWindow> m_help;
   QPointer<EvidenceDialog> m_evidence;
   QPointer<TitleDialog> m_title;
   QPointer<UnsavedDialog> m_unsaved;

@@ -4,7 +4,7 @@
 #include "ui/look/look.h"
 #include "ui/look/strip.h"
 #include "ui/sheet/sheet_dialog.h"
-#include "ui/shell/help_window.h"
+#include "ui/shell/help_key.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/preferences.h"
 #include "ui/shell/problem_list.h"
@@ -56,11 +56,11 @@ void MainWindow::showFile(const QString& path) {
   } else if (isWorkedExample(m_desk.study())) {
     m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
     m_welcome->offer(tr("New study"), [this] { beginStudy(); });
-    m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
+    m_welcome->offer(tr("Conventions in pictures"), [this] { m_help->show(QStringLiteral("conventions")); });
   } else if (m_desk.study() == preferredStudy()) {
     m_welcome->say(tr("A new study: type the stresses of your point."));
     m_welcome->offer(tr("Open the worked example"), [this] { openWorkedExample(); });
-    m_welcome->offer(tr("Conventions in two pictures"), [this] { help().showPage(HelpPage::conventions); });
+    m_welcome->offer(tr("Conventions in pictures"), [this] { m_help->show(QStringLiteral("conventions")); });
   } else {
     m_welcome->hide();
   }

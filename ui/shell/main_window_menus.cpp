@@ -16,7 +16,7 @@
 #include "ui/shell/body.h"
 #include "ui/shell/build_dialog.h"
 #include "ui/shell/governing_words.h"
-#include "ui/shell/help_window.h"
+#include "ui/shell/help_key.h"
 #include "ui/shell/main_window.h"
 #include "ui/shell/materials_dialog.h"
 #include "ui/shell/picker.h"
@@ -241,12 +241,11 @@ void MainWindow::addAppearanceMenu(QMenu& menu) {
 
 void MainWindow::addHelpMenu() {
   QMenu& menu = *menuBar()->addMenu(tr("&Help"));
-  add(menu, tr("&Help on this area"), QKeySequence::HelpContents, [this] { helpOnFocus(); });
+  add(menu, tr("&Help on this place"), QKeySequence::HelpContents, [this] { m_help->showForFocus(); });
   menu.addSeparator();
-  for (int i = 0; i < helpPageCount; ++i) {
-    const auto page = static_cast<HelpPage>(i);
-    menu.addAction(titleOf(page), this, [this, page] { help().showPage(page); });
-  }
+  add(menu, tr("Hand&book"), {}, [this] { m_help->show(QStringLiteral("first-figure")); });
+  add(menu, tr("&Keys"), {}, [this] { m_help->show(QStringLiteral("keys")); });
+  add(menu, tr("&Cautions"), {}, [this] { m_help->show(QStringLiteral("cautions")); });
   menu.addSeparator();
   add(menu, tr("Published &values, recomputed…"), {}, [this] { showEvidence(); });
   menu.addAction(tr("&Worked example"), this, &MainWindow::openWorkedExample);
@@ -299,7 +298,6 @@ void MainWindow::screenPoints() {
       activateWindow();
       raise();
     });
-    connect(m_screen, &ScreenDialog::helpWanted, this, [this] { help().showPage(HelpPage::screening); });
   }
   raised(*m_screen);
 }

@@ -77,6 +77,7 @@ MaterialsDialog::MaterialsDialog(Desk& desk, const std::string& ownPath, QWidget
 
 void MaterialsDialog::build() {
   setWindowTitle(tr("Materials"));
+  setProperty("helpPlace", "strength#materials");
   resize(940, 640);
   m_list = new MaterialsList(this);
   m_fields = new MaterialFields(m_desk, this);

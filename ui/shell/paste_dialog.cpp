@@ -110,6 +110,7 @@ PasteDialog::PasteDialog(Desk& desk, std::string table, const QString& title, QW
       m_complaint(new Complaint(this)), m_additions(new QLabel(this)), m_cautions(new QLabel(this)),
       m_next(new QPushButton(tr("&Next wrong row"), this)), m_take(new QPushButton(tr("&Take"), this)) {
   setWindowTitle(title);
+  setProperty("helpPlace", "files#tables");
   build();
   connectParts();
   preview();

@@ -13,6 +13,7 @@ ProblemList::ProblemList(const QString& heading, const Problems& problems, QWidg
     : QDialog(parent) {
   setAttribute(Qt::WA_DeleteOnClose);
   setWindowTitle(heading);
+  setProperty("helpPlace", "troubleshooting#files");
   resize(720, 400);
   QStringList lines;
   for (const Problem& problem : problems)

@@ -28,6 +28,7 @@ SlipDialog::SlipDialog(Desk& desk, QWidget* parent)
 
 void SlipDialog::build() {
   setWindowTitle(tr("Compare somebody else's number"));
+  setProperty("helpPlace", "lines#slips");
   resize(460, 300);
   for (const Named<Asked>& row : namesOf<Asked>())
     m_question->addItem(shown(row.label));

@@ -37,6 +37,8 @@ StateBar::StateBar(Desk& desk, QWidget* parent)
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
   setAccessibleName(tr("What is shown"));
+  setProperty("helpPlace", "window#state-bar");
+  m_figure->setProperty("helpPlace", "figures#arrange");
   setProperty("areaKeys", tr("Ctrl+PageUp/PageDown point, Alt+PageUp/PageDown combination"));
   connect(m_points, &Picker::chosen, this,
           [this](const QString& name) { m_desk.show(name.toStdString(), m_desk.study().shown.combination); });

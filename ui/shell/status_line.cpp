@@ -38,6 +38,7 @@ StatusLine::StatusLine(QWidget* parent)
   m_right->setAlignment(Qt::AlignRight | Qt::AlignVCenter);
   setFixedHeight(std::max(24, fontMetrics().height() + 6));
   setAccessibleName(tr("Status"));
+  setProperty("helpPlace", "window#status-line");
   connect(m_left, &QLabel::linkActivated, this, [this](const QString& link) {
     if (link == QLatin1String("entry"))
       Q_EMIT notTakenClicked();

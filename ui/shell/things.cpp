@@ -111,6 +111,7 @@ Things loadCases() {
   };
   return {words(QT_TRANSLATE_NOOP("Things", "Load cases")),
           words(QT_TRANSLATE_NOOP("Things", "load case")),
+          "combinations#cases",
           [](const Study& study) { return study.cases.size(); },
           {id, typedColumn(words(QT_TRANSLATE_NOOP("Things", "Name")), Spot::caseName, place),
            wordColumn<Nature>(words(QT_TRANSLATE_NOOP("Things", "Nature")), Spot::caseNature, place),
@@ -137,6 +138,7 @@ Things combinations() {
       }};
   return {words(QT_TRANSLATE_NOOP("Things", "Combinations")),
           words(QT_TRANSLATE_NOOP("Things", "combination")),
+          "combinations#list",
           [](const Study& study) { return study.combinations.size(); },
           {keyColumn(words(QT_TRANSLATE_NOOP("Things", "Name")), place), terms,
            wordColumn<Basis>(words(QT_TRANSLATE_NOOP("Things", "Basis")), Spot::combinationBasis, place)},
@@ -157,6 +159,7 @@ Things points() {
   };
   return {words(QT_TRANSLATE_NOOP("Things", "Points")),
           words(QT_TRANSLATE_NOOP("Things", "point")),
+          "combinations#points",
           [](const Study& study) { return study.points.size(); },
           {keyColumn(words(QT_TRANSLATE_NOOP("Things", "Point")), place),
            typedColumn(words(QT_TRANSLATE_NOOP("Things", "Note")), Spot::pointNote, place)},
@@ -188,6 +191,7 @@ Things sections() {
   };
   return {words(QT_TRANSLATE_NOOP("Things", "Sections")),
           words(QT_TRANSLATE_NOOP("Things", "section")),
+          "given#section",
           [](const Study& study) { return study.sections.size(); },
           {keyColumn(words(QT_TRANSLATE_NOOP("Things", "Section")), place),
            shape,

@@ -22,7 +22,8 @@ struct ThingColumn {
 /// A list of a study as a table to edit: cases, combinations, points, sections.
 struct Things {
   QString title;
-  QString one; ///< "load case", for the words of undo
+  QString one;                     ///< "load case", for the words of undo
+  const char* helpPlace = nullptr; ///< where the manual tells of the list
   std::function<std::size_t(const Study&)> count;
   std::vector<ThingColumn> columns;
   std::function<Edits(const Study&)> add; ///< a new thing at the end

@@ -77,6 +77,7 @@ ThingsDialog::ThingsDialog(Desk& desk, Things things, QWidget* parent)
 void ThingsDialog::build() {
   const Things& things = m_model->things();
   setWindowTitle(things.title);
+  setProperty("helpPlace", things.helpPlace);
   resize(680, 360);
   m_table->setModel(m_model);
   m_table->setItemDelegate(new ThingDelegate(*m_model, m_table));

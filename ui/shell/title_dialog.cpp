@@ -31,6 +31,7 @@ EntryBinding nameOfPoint() {
 
 TitleDialog::TitleDialog(Desk& desk, QWidget* parent) : QDialog(parent) {
   setWindowTitle(tr("Title block"));
+  setProperty("helpPlace", "sheets#title-block");
   resize(520, 10);
   auto* rows = new QVBoxLayout(this);
   rows->addWidget(new EntryField(desk, nameOfPoint(),

@@ -54,6 +54,7 @@ UnsavedDialog::UnsavedDialog(Recovery& recovery, QWidget* parent)
       m_changes(new QPlainTextEdit(this)), m_open(new QPushButton(tr("&Open"), this)),
       m_discard(new QPushButton(tr("&Discard"), this)) {
   setWindowTitle(tr("Unsaved studies"));
+  setProperty("helpPlace", "files#unsaved");
   resizeOnScreen(*this, {760, 520});
   m_studies->setHeaderLabels({tr("study"), tr("last change"), tr("file")});
   m_studies->setAccessibleName(tr("Unsaved studies"));

@@ -18,6 +18,7 @@ constexpr int chipHeight = 26;
 } // namespace
 
 VerdictChip::VerdictChip(Desk& desk, QWidget* parent) : QAbstractButton(parent), m_desk(desk) {
+  setProperty("helpPlace", "strength#verdict");
   setFocusPolicy(Qt::TabFocus);
   setCursor(Qt::PointingHandCursor);
   connect(&m_desk, &Desk::changed, this, &VerdictChip::refresh);

@@ -15,6 +15,7 @@ namespace planewright {
 WorkingDialog::WorkingDialog(Desk& desk, QWidget* parent)
     : QDialog(parent), m_desk(desk), m_text(new QPlainTextEdit(this)) {
   setWindowTitle(tr("Working of the shown stresses"));
+  setProperty("helpPlace", "strength#working");
   resize(760, 560);
   m_text->setReadOnly(true);
   m_text->setTextInteractionFlags(Qt::TextSelectableByMouse | Qt::TextSelectableByKeyboard);

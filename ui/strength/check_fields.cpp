@@ -44,6 +44,7 @@ CheckFields::CheckFields(Desk& desk, std::function<std::optional<std::size_t>()>
     : QWidget(parent), m_desk(desk), m_selectedIndex(std::move(selected)),
       m_material(new QuietButton({}, Role::focus, this)), m_criterion(new QuietButton({}, Role::focus, this)),
       m_direction(new QuietButton({}, Role::line, this)) {
+  setProperty("helpPlace", "strength#checks");
   auto* grid = new QGridLayout(this);
   grid->setContentsMargins(0, 0, 0, 0);
   grid->setVerticalSpacing(2);

@@ -43,6 +43,7 @@ CheckList::CheckList(Desk& desk, QWidget* parent) : QTreeWidget(parent), m_desk(
   setTabKeyNavigation(false);
   setHorizontalScrollBarPolicy(Qt::ScrollBarAlwaysOff);
   setAccessibleName(tr("Checks of the point"));
+  setProperty("helpPlace", "strength#checks");
   connect(this, &QTreeWidget::itemPressed, this, [this](QTreeWidgetItem* item) {
     m_selected = item->data(0, Qt::UserRole).toString().toStdString();
     emit selectionMoved();

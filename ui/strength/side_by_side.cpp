@@ -32,6 +32,7 @@ SideBySideDialog::SideBySideDialog(Desk& desk, std::string check, QWidget* paren
     : QDialog(parent), m_desk(desk), m_check(std::move(check)), m_heading(new QLabel(this)),
       m_table(new QTreeWidget(this)) {
   setWindowTitle(tr("All criteria side by side"));
+  setProperty("helpPlace", "strength#side-by-side");
   setAttribute(Qt::WA_DeleteOnClose);
   m_heading->setWordWrap(true);
   m_table->setHeaderLabels({tr("criterion"), tr("nominal"), tr("worst"), tr("combination"), tr("remark")});

@@ -128,6 +128,7 @@ void StrengthPanel::build() {
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
   setAccessibleName(tr("Strength"));
+  setProperty("helpPlace", "strength#verdict");
   setProperty("areaKeys", tr("Up/Down choose a check, Del removes it; on the plot Left/Right turn the line"));
 }
 

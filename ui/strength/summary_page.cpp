@@ -58,6 +58,7 @@ SummaryPage::SummaryPage(Desk& desk, QWidget* parent)
   rows->addWidget(m_table, 1);
   rows->addWidget(foot);
   setAccessibleName(tr("Summary"));
+  setProperty("helpPlace", "combinations#summary");
   setFocusProxy(m_table);
   setProperty("areaKeys", tr("Enter opens the point with its governing combination, Ctrl+1 goes back"));
   connect(m_filter, &QLineEdit::textEdited, m_rows, &SummaryFilter::narrow);

@@ -75,6 +75,7 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
   setFocusPolicy(Qt::StrongFocus);
   viewport()->setMouseTracking(true);
   setAccessibleName(tr("Utilisation over the angle of the line"));
+  setProperty("helpPlace", "strength#plot");
   connect(&m_desk, &Desk::judgedAnew, this, &UtilisationPlot::refresh);
 }
 

@@ -5,7 +5,6 @@
 #include "ui/screen/histogram_view.h"
 
 #include <QApplication>
-#include <QSignalSpy>
 
 namespace planewright {
 namespace {
@@ -62,12 +61,6 @@ TEST_F(ScreenByKeyboard, tabGoesThroughTheResultsAsTheyAreRead) {
   EXPECT_TRUE(page().notes().isVisible());
   QTest::keyClick(&m_dialog, Qt::Key_M, Qt::AltModifier);
   EXPECT_TRUE(page().map().isVisible());
-}
-
-TEST_F(ScreenByKeyboard, fOneAsksForHelp) {
-  QSignalSpy wanted(&m_dialog, &ScreenDialog::helpWanted);
-  QTest::keyClick(&m_dialog, Qt::Key_F1);
-  EXPECT_EQ(wanted.count(), 1);
 }
 
 } // namespace

@@ -1,0 +1,116 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#include "ui/manual/manual_html.h"
+
+#include "core/strength/criterion.h"
+#include "ui/look/look.h"
+#include "ui/manual/manual.h"
+#include "ui/manual/pictures.h"
+
+#include <QCoreApplication>
+#include <QRegularExpression>
+
+#include <functional>
+
+namespace planewright {
+
+namespace {
+
+QString words(const char* source) {
+  return QCoreApplication::translate("Manual", source);
+}
+
+/// The text with each match of the pattern replaced by what `with` makes of it.
+QString replaced(const QString& text, const QRegularExpression& pattern,
+                 const std::function<QString(const QRegularExpressionMatch&)>& with) {
+  QString result;
+  qsizetype end = 0;
+  for (const QRegularExpressionMatch& match : pattern.globalMatch(text)) {
+    result += QStringView(text).mid(end, match.capturedStart() - end);
+    result += with(match);
+    end = match.capturedEnd();
+  }
+  result += QStringView(text).mid(end);
+  return result;
+}
+
+QString kindsOf(Criterion criterion) {
+  QStringList kinds;
+  for (const Named<MaterialKind>& kind : namesOf<MaterialKind>())
+    if (applies(criterion, kind.value))
+      kinds += shown(kind.label);
+  return kinds.join(QStringLiteral(", "));
+}
+
+QString row(const QString& name, const QString& value) {
+  return QStringLiteral("<tr><td>%1</td><td>%2</td></tr>\n").arg(name, value);
+}
+
+QString factsOf(const Named<Criterion>& named) {
+  const CriterionRow& facts = rowOf(named.value);
+  QString rows = row(words(QT_TRANSLATE_NOOP("Manual", "Limit")), shownRich(symbol(facts.equation))) +
+                 row(words(QT_TRANSLATE_NOOP("Manual", "Materials")), kindsOf(named.value));
+  if (!facts.domain.empty())
+    rows += row(words(QT_TRANSLATE_NOOP("Manual", "Meant for")), shownRich(facts.domain));
+  rows += row(words(QT_TRANSLATE_NOOP("Manual", "Source")), shownRich(facts.source));
+  const QString id = fromUtf8(std::string(named.word));
+  return QStringLiteral("<h3><a name=\"%1\">%2</a></h3>\n<table>\n%3</table>\n")
+      .arg(id, shown(named.label).toHtmlEscaped(), rows);
+}
+
+QString criterion(const QString& id) {
+  for (const Named<Criterion>& named : namesOf<Criterion>())
+    if (fromUtf8(std::string(named.word)) == id)
+      return factsOf(named);
+  return {};
+}
+
+QString withCriteria(const QString& html) {
+  static const QRegularExpression place(QStringLiteral("\\{\\{criterion ([a-z0-9-]+)\\}\\}"));
+  return replaced(html, place,
+                  [](const QRegularExpressionMatch& match) { return criterion(match.captured(1)); });
+}
+
+/// In the program a picture is at most as wide as a page beside the contents.
+QSize shownSize(const QString& name, ManualMedium medium) {
+  const QSize size = pictureSize(name);
+  if (medium == ManualMedium::file || size.width() <= mostPictureWidth)
+    return size;
+  return {mostPictureWidth, size.height() * mostPictureWidth / size.width()};
+}
+
+QString withPictures(const QString& html, ManualMedium medium) {
+  static const QRegularExpression picture(QStringLiteral("<img src=\"([^\"]*)\""));
+  return replaced(html, picture, [medium](const QRegularExpressionMatch& match) {
+    const QString name = match.captured(1);
+    const QSize size = shownSize(name, medium);
+    return QStringLiteral("<img src=\"%1\" width=\"%2\" height=\"%3\"")
+        .arg(medium == ManualMedium::file ? fileOfPicture(name) : name)
+        .arg(size.width())
+        .arg(size.height());
+  });
+}
+
+/// "lines#slopes" is called "lines.html#slopes" in a file; a heading that is a place carries an id there.
+QString withFileNames(const QString& html) {
+  static const QRegularExpression link(QStringLiteral("<a href=\"([a-z-]*)(#[^\"]*)?\""));
+  QString result = replaced(html, link, [](const QRegularExpressionMatch& match) {
+    const QString file =
+        match.captured(1).isEmpty() ? QString() : match.captured(1) + QStringLiteral(".html");
+    return QStringLiteral("<a href=\"%1%2\"").arg(file, match.captured(2));
+  });
+  return result.replace(QStringLiteral("<a name="), QStringLiteral("<a id="));
+}
+
+} // namespace
+
+QString manualHtml(const QString& page, const QString& language, ManualMedium medium) {
+  const QString html = withPictures(withCriteria(manualSource(page, language)), medium);
+  return medium == ManualMedium::file ? withFileNames(html) : html;
+}
+
+QString fileOfPicture(const QString& name) {
+  const QString kind = isDrawn(name) ? QStringLiteral(".svg") : QStringLiteral(".png");
+  return QStringLiteral("pictures/") + name.section(QLatin1Char(':'), 1) + kind;
+}
+
+} // namespace planewright
