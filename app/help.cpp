@@ -17,6 +17,7 @@ planewright sheet STUDY ...    writes the calculation sheet as PDF or HTML
 planewright screen POINTS ...  judges the points of a table by the checks of a point of a study
 planewright compare A B        tells what changed from one study to another
 planewright validate           recomputes every published value that is shipped with it
+planewright manual ...         writes the handbook as HTML into a folder
 planewright COMMAND --help     explains a command
 planewright --version          prints the version
 
@@ -79,6 +80,20 @@ its place there and how far it can be trusted. Exit code 5 where one disagrees.
 -o FILE   writes there, as a report where the name ends with .html or .pdf, else as text; "-" or nothing is
           standard output
 )help";
+}
+
+std::string manualHelp() {
+  return plain(PW_TEXT("Help", R"help(planewright manual -o FOLDER [--replace] [--language NAME]
+
+Writes the handbook as HTML into a folder, with its pictures and its style beside it; nothing in it leads outside.
+Prints the name of the page to begin with.
+
+-o FOLDER        where it goes; it is made where it is not there
+--replace        writes over files that are there; without it nothing is written then
+--language NAME  in which language, as “en”; without it, that of the program
+
+planewright manual -o handbook
+)help"));
 }
 
 std::string screenHelp() {

@@ -13,6 +13,7 @@ std::string figureHelp();
 std::string sheetHelp();
 std::string compareHelp();
 std::string validateHelp();
+std::string manualHelp();
 std::string screenHelp();
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #include "app/compare_command.h"
 #include "app/figure_command.h"
 #include "app/help.h"
+#include "app/manual_command.h"
 #include "app/resolve_command.h"
 #include "app/screen_command.h"
 #include "app/sheet_command.h"
@@ -41,7 +42,7 @@ Problem unknownWord(const std::string& word) {
           0,
           word,
           PW_TEXT("Command", "“%1” is neither a command nor a file.").with(word),
-          PW_TEXT("Command", "The commands are resolve, figure, sheet, screen, compare and validate; "
+          PW_TEXT("Command", "The commands are resolve, figure, sheet, screen, compare, validate and manual; "
                              "planewright --help explains them.")};
 }
 
@@ -60,6 +61,8 @@ Outcome<Delivery> commanded(Words words) {
     return comparedStudies(rest);
   if (first == "validate")
     return validated(rest);
+  if (first == "manual")
+    return writtenManual(rest);
   if (first == "--help")
     return alone(programHelp(), rest);
   if (first == "--version")

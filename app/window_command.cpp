@@ -20,7 +20,7 @@ bool hasDisplay() {
 }
 
 bool isCommand(const std::string& word) {
-  for (const char* command : {"resolve", "figure", "sheet", "screen", "compare", "validate"})
+  for (const char* command : {"resolve", "figure", "sheet", "screen", "compare", "validate", "manual"})
     if (word == command)
       return true;
   return word.starts_with("-");
