@@ -83,7 +83,7 @@ its place there and how far it can be trusted. Exit code 5 where one disagrees.
 }
 
 std::string manualHelp() {
-  return plain(PW_TEXT("Help", R"help(planewright manual -o FOLDER [--replace] [--language NAME]
+  return R"help(planewright manual -o FOLDER [--replace] [--language NAME]
 
 Writes the handbook as HTML into a folder, with its pictures and its style beside it; nothing in it leads outside.
 Prints the name of the page to begin with.
@@ -93,7 +93,7 @@ Prints the name of the page to begin with.
 --language NAME  in which language, as “en”; without it, that of the program
 
 planewright manual -o handbook
-)help"));
+)help";
 }
 
 std::string screenHelp() {

@@ -4,6 +4,7 @@
 #include "app/help.h"
 #include "app/output_folder.h"
 #include "ui/files/file_bytes.h"
+#include "ui/look/language.h"
 #include "ui/manual/manual.h"
 #include "ui/manual/manual_web.h"
 
@@ -31,8 +32,10 @@ Result<QString> languageOf(const Arguments& arguments) {
   if (!wanted)
     return manualLanguage();
   const QStringList there = manualLanguages();
-  if (const QString language = QString::fromStdString(*wanted); there.contains(language))
+  if (const QString language = QString::fromStdString(*wanted); there.contains(language)) {
+    speak(language); // what the program itself says of criteria
     return language;
+  }
   return tl::unexpected(Problem{
       "--language", 0, 0, *wanted, PW_TEXT("Command", "The handbook is not there in “%1”.").with(*wanted),
       PW_TEXT("Command", "It is there in: %1.").with(there.join(QStringLiteral(", ")).toStdString())});

@@ -630,10 +630,6 @@
         <translation>„%1“ ist weder ein Befehl noch eine Datei.</translation>
     </message>
     <message>
-        <source>The commands are resolve, figure, sheet, screen, compare and validate; planewright --help explains them.</source>
-        <translation>Die Befehle sind resolve, figure, sheet, screen, compare und validate; planewright --help erklärt sie.</translation>
-    </message>
-    <message>
         <source>The study has no “%1”.</source>
         <translation>Die Studie hat kein „%1“.</translation>
     </message>
@@ -852,6 +848,26 @@
     <message>
         <source>“%1” is no language of the program.</source>
         <translation>„%1“ ist keine Sprache des Programms.</translation>
+    </message>
+    <message>
+        <source>The commands are resolve, figure, sheet, screen, compare, validate and manual; planewright --help explains them.</source>
+        <translation>Die Befehle sind resolve, figure, sheet, screen, compare, validate und manual; planewright --help erklärt sie.</translation>
+    </message>
+    <message>
+        <source>No folder is given for the handbook.</source>
+        <translation>Es ist kein Ordner für das Handbuch angegeben.</translation>
+    </message>
+    <message>
+        <source>Write planewright manual -o FOLDER.</source>
+        <translation>planewright manual -o FOLDER schreiben.</translation>
+    </message>
+    <message>
+        <source>The handbook is not there in “%1”.</source>
+        <translation>Das Handbuch gibt es nicht in „%1“.</translation>
+    </message>
+    <message>
+        <source>It is there in: %1.</source>
+        <translation>Es gibt es in: %1.</translation>
     </message>
 </context>
 <context>
@@ -2663,176 +2679,6 @@
     </message>
 </context>
 <context>
-    <name>Help</name>
-    <message>
-        <source>
-&lt;p&gt;Type a component the way the hand calculation has it, with its units; below the field stands what it comes to.&lt;/p&gt;
-&lt;p&gt;&lt;code&gt;-18.6 kN/(90 mm*240 mm)&lt;/code&gt; &amp;nbsp; &lt;code&gt;1.5*12 kN/(90 mm*240 mm)&lt;/code&gt; &amp;nbsp; &lt;code&gt;0.4*sqrt(3) MPa&lt;/code&gt;&lt;/p&gt;
-&lt;table cellpadding=&quot;3&quot;&gt;
-&lt;tr&gt;&lt;td&gt;Operators&lt;/td&gt;&lt;td&gt;&lt;code&gt;+ - * / ^&lt;/code&gt;, parentheses; &lt;code&gt;sqrt abs min max sin cos tan&lt;/code&gt;; &lt;code&gt;pi&lt;/code&gt;&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;Stress&lt;/td&gt;&lt;td&gt;Pa kPa MPa GPa psi ksi psf bar, or a force over an area&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;Force&lt;/td&gt;&lt;td&gt;N kN MN lbf kip kgf tf&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;Length&lt;/td&gt;&lt;td&gt;um mm cm m in ft&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;Angle&lt;/td&gt;&lt;td&gt;deg rad; a plain number is in degrees&lt;/td&gt;&lt;/tr&gt;
-&lt;/table&gt;
-&lt;p&gt;A unit binds tighter than &lt;code&gt;*&lt;/code&gt; and &lt;code&gt;/&lt;/code&gt;: &lt;code&gt;12 kN / 100 mm^2&lt;/code&gt; is 12 kN over 100 square
-millimetres. A number without a unit takes the study&apos;s unit and is completed with it, so that another unit never
-changes a stress.&lt;/p&gt;
-&lt;p&gt;The angle and the tolerance of a line also read slopes: &lt;code&gt;1 in 12&lt;/code&gt;, &lt;code&gt;1:12&lt;/code&gt;, the angle &lt;code&gt;8 %&lt;/code&gt; too.
-The echo gives both, 5.71° and 1 in 10, so that 10 for 1 in 10 is seen at once. The normal of a plane takes no slope.&lt;/p&gt;
-&lt;p&gt;Edit, Paste table reads a table from a spreadsheet: a row for each case, with headings such as &lt;code&gt;point&lt;/code&gt;,
-&lt;code&gt;case&lt;/code&gt;, &lt;code&gt;sx [MPa]&lt;/code&gt;, &lt;code&gt;sy&lt;/code&gt;, &lt;code&gt;txy&lt;/code&gt; or &lt;code&gt;N&lt;/code&gt;, &lt;code&gt;V&lt;/code&gt;, &lt;code&gt;M&lt;/code&gt;;
-a new point lies in a section of the study by &lt;code&gt;section&lt;/code&gt;, &lt;code&gt;y&lt;/code&gt;, &lt;code&gt;z&lt;/code&gt;, &lt;code&gt;view&lt;/code&gt;. It shows
-what would be kept and takes all of it or nothing.&lt;/p&gt;
-&lt;p&gt;A decimal comma is not read in a field; write 1.5. In a table it is, where it can mean nothing else. A text that does not read stays in its field, marked, with what is wrong and
-how to mend it; the study keeps the last text that did.&lt;/p&gt;
-</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>
-&lt;table cellpadding=&quot;6&quot;&gt;&lt;tr&gt;
-&lt;td&gt;&lt;img src=&quot;picture:given&quot; width=&quot;300&quot; height=&quot;250&quot;&gt;&lt;/td&gt;
-&lt;td&gt;&lt;img src=&quot;picture:turned&quot; width=&quot;300&quot; height=&quot;250&quot;&gt;&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;Given: positive components, tension positive.&lt;/td&gt;
-&lt;td&gt;Turned: the heavy face is the cut; its normal n stands at θ.&lt;/td&gt;&lt;/tr&gt;&lt;/table&gt;
-&lt;p&gt;x runs along the member, y up; everything is seen from +z. All angles are measured from +x, counter-clockwise, and
-reported from −90° (excluded) to 90°.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;A plane is named by its normal.&lt;/b&gt; The cut itself runs 90° further; the table has both. τ&lt;sub&gt;nt&lt;/sub&gt; is positive
-towards t, the normal turned by +90°.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;A line has an angle of its own&lt;/b&gt;, φ. The cut that &lt;i&gt;crosses&lt;/i&gt; the line has its normal along it, at φ: its normal
-stress acts &lt;i&gt;along&lt;/i&gt; the line. The cut that &lt;i&gt;follows&lt;/i&gt; the line has its normal at φ + 90°: its normal stress acts
-&lt;i&gt;across&lt;/i&gt; the line. Both carry the same shear with opposite signs.&lt;/p&gt;
-&lt;p&gt;On the circle τ&lt;sub&gt;nt&lt;/sub&gt; is drawn positive downwards, so that the circle turns the way the element turns, by twice
-the angle. A study may choose upwards; then the circle turns the other way.&lt;/p&gt;
-&lt;p&gt;A study may count compression positive: then every typed and reported component has the opposite sign. The arrows of
-the element show what the body feels and do not change.&lt;/p&gt;
-</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>
-&lt;p&gt;A check asks whether the stresses of a point are within the strengths of a material, along and across its line or on a
-watched plane, over all combinations and over the tolerance of the angle. Take a material into the study (Study,
-Materials), then Strength, Add a check.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;Utilisation&lt;/b&gt; is 1 over the load multiplier: the factor on all loads together that brings the point to its limit.
-It is rounded upwards, the multiplier downwards. For planes with friction it is the mobilised ratio, since clamping grows
-with the loads too.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;Strength belongs to the combination:&lt;/b&gt; characteristic strengths are multiplied by the factor of the shortest duration
-that acts and divided by the partial factor, or multiplied by a factor of your own. So a permanent combination can govern
-though its stresses are lower. Where stresses come from section forces, the strength along the line is that of the mix of
-axial and bending parts.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;The tolerance counts always:&lt;/b&gt; the worst of the band is exact, not scanned. A slope of grain whose sense is not known is
-entered as the tolerance to either side of the line&apos;s angle, which stays (Line, Slope of unknown sense): the sense of τ&lt;sub&gt;xy&lt;/sub&gt; decides whether
-the grain is pulled or pressed across.&lt;/p&gt;
-&lt;p&gt;The plot shows utilisation over the angle: the shown combination as a full line, the greatest of all dashed, the others as
-hairs; the limit is hatched, the tolerance a strip, the worst a triangle, angles within the limit a bar on the base line.
-Drag the line&apos;s cursor to try other angles. &quot;All criteria side by side&quot; shows how much of the answer is the criterion.&lt;/p&gt;
-&lt;p&gt;A combination outside what a criterion was published for is not judged, and then nothing is said of the point.&lt;/p&gt;
-&lt;p&gt;1 = along the line, 2 = across it, τ = shear; X and Y by the sign of the stress.&lt;/p&gt;
-&lt;table cellpadding=&quot;4&quot;&gt;%1&lt;/table&gt;
-</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>
-&lt;p&gt;File, Screen points judges the points of a table, a million of them too, by the line, the tolerance and the checks of
-one point of the study, over all combinations. It finds the few that are worth opening.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;The table&lt;/b&gt; is CSV in UTF-8, with a row for each case at a point (&lt;code&gt;point,case,sx,sy,txy&lt;/code&gt;) or with three
-columns for each case (&lt;code&gt;sx G&lt;/code&gt;, &lt;code&gt;sy G&lt;/code&gt;, &lt;code&gt;txy G&lt;/code&gt;). A heading may name its unit, as in
-&lt;code&gt;sx [MPa]&lt;/code&gt;; without one the study&apos;s unit counts. &lt;code&gt;layer&lt;/code&gt; (top, mid, bottom), &lt;code&gt;axes&lt;/code&gt; (of the
-row&apos;s own stresses), &lt;code&gt;line&lt;/code&gt; (of its own), &lt;code&gt;region&lt;/code&gt;, &lt;code&gt;x&lt;/code&gt; and &lt;code&gt;y&lt;/code&gt; may stand beside
-them. What a column with another heading means is chosen from the list above it.&lt;/p&gt;
-&lt;p&gt;A row with a fault, NaN and infinity among them, stops the run and is told with its line; &quot;Leave faulty rows out&quot; goes
-on, and they are counted. Points and regions are left out by name; &lt;code&gt;corner*&lt;/code&gt; is all names that begin so.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;The greatest value is not yet a verdict.&lt;/b&gt; At a re-entrant corner or under a point load the stresses of an analysis
-grow with every refinement of its mesh. The value that 99.9 % of the points stay within stands beside the greatest one.&lt;/p&gt;
-&lt;p&gt;&lt;b&gt;Map&lt;/b&gt; (where the table has x and y): the classes are in the legend, hatched exceeds, pale is kept back by a
-filter. The ring is at the chosen row. &lt;b&gt;Bars&lt;/b&gt; count the points by utilisation; a bar shows its points alone. &lt;b&gt;Notes&lt;/b&gt; say what was
-judged and read, and the cautions.&lt;/p&gt;
-&lt;p&gt;Open as a point makes the chosen row a point of the study, with its cases and the checks that judged it, in one step that
-can be undone.&lt;/p&gt;
-&lt;table cellpadding=&quot;4&quot;&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Enter&lt;/b&gt;&lt;/td&gt;&lt;td&gt;in the table: open the row as a point of the study&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Alt+M, Alt+B, Alt+N&lt;/b&gt;&lt;/td&gt;&lt;td&gt;map, bars, notes&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;click; wheel; drag&lt;/b&gt;&lt;/td&gt;&lt;td&gt;on the map: choose the point; closer or wider about the pointer; move&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;+, −; arrows; Home&lt;/b&gt;&lt;/td&gt;&lt;td&gt;on the map: closer, wider; move; all of the field&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+arrows&lt;/b&gt;&lt;/td&gt;&lt;td&gt;on the map: choose the nearest point that way&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Up, Down; Space&lt;/b&gt;&lt;/td&gt;&lt;td&gt;on the bars: to a bar; its points alone, and once more all&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Esc&lt;/b&gt;&lt;/td&gt;&lt;td&gt;cancel what is running; close the window&lt;/td&gt;&lt;/tr&gt;
-&lt;/table&gt;
-</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>
-&lt;table cellpadding=&quot;4&quot;&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;F1&lt;/b&gt;&lt;/td&gt;&lt;td&gt;help on the focused area&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;F6, Shift+F6&lt;/b&gt;&lt;/td&gt;&lt;td&gt;next, previous area&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Tab&lt;/b&gt;&lt;/td&gt;&lt;td&gt;next field; inside a drawing the next handle&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;F8, Shift+F8&lt;/b&gt;&lt;/td&gt;&lt;td&gt;next, previous entry that is not taken&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Left, Down; Right, Up&lt;/b&gt;&lt;/td&gt;&lt;td&gt;turn a handle by −1°, +1°; with Shift 0.1°, with Ctrl 15°&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;PageUp, PageDown&lt;/b&gt;&lt;/td&gt;&lt;td&gt;on a handle: next, previous named direction&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Home, Enter, Esc&lt;/b&gt;&lt;/td&gt;&lt;td&gt;on a handle: to 0°; type an angle; a drag back to its start&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl, Shift&lt;/b&gt;&lt;/td&gt;&lt;td&gt;in a drag: turn freely; turn at a tenth&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;F2, Enter&lt;/b&gt;&lt;/td&gt;&lt;td&gt;in Planes: edit; bring the reading plane there, or show the combination of a least or greatest value&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+Enter&lt;/b&gt;&lt;/td&gt;&lt;td&gt;in Planes: the other plane with the same stress&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Insert, Delete&lt;/b&gt;&lt;/td&gt;&lt;td&gt;in Planes: watch the reading plane; remove&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+PageUp, Ctrl+PageDown&lt;/b&gt;&lt;/td&gt;&lt;td&gt;previous, next point&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Alt+PageUp, Alt+PageDown&lt;/b&gt;&lt;/td&gt;&lt;td&gt;previous, next combination&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+G&lt;/b&gt;&lt;/td&gt;&lt;td&gt;the combination with the greatest utilisation at this point; without checks the greatest σ&lt;sub&gt;1&lt;/sub&gt;, again: the greatest shear in the plane&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+Shift+G&lt;/b&gt;&lt;/td&gt;&lt;td&gt;the same over all points of the study&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+Shift+V&lt;/b&gt;&lt;/td&gt;&lt;td&gt;paste a table of stresses or section forces&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+1, Ctrl+2&lt;/b&gt;&lt;/td&gt;&lt;td&gt;the point with its drawings; the summary of all points&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+E, Ctrl+0&lt;/b&gt;&lt;/td&gt;&lt;td&gt;arrange the figure; fit the circle&lt;/td&gt;&lt;/tr&gt;
-&lt;tr&gt;&lt;td&gt;&lt;b&gt;Ctrl+N, O, S, P, Q, Z, C; F11&lt;/b&gt;&lt;/td&gt;&lt;td&gt;as everywhere&lt;/td&gt;&lt;/tr&gt;
-&lt;/table&gt;
-</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>
-&lt;p&gt;&lt;b&gt;Planewright looks at one point in plane stress.&lt;/b&gt; It is an aid to a licensed engineer, who decides, under the
-code that governs where the structure stands. It is no design check.&lt;/p&gt;
-&lt;p&gt;It does not see:&lt;/p&gt;
-&lt;ul&gt;
-&lt;li&gt;the stressed volume, effects of size and depth;&lt;/li&gt;
-&lt;li&gt;moisture, temperature, duration of load, fatigue;&lt;/li&gt;
-&lt;li&gt;notches, holes, edges, ends, curved parts, ply drops, where stresses out of the plane are not small;&lt;/li&gt;
-&lt;li&gt;stresses in the third direction beyond the one normal stress that may be given;&lt;/li&gt;
-&lt;li&gt;the scatter of a material, buckling, and whatever acts at another point.&lt;/li&gt;
-&lt;/ul&gt;
-&lt;p&gt;The components are taken as they are typed: an error in them is an error in everything that follows. Compare the
-signs with the picture of positive stresses before trusting a result.&lt;/p&gt;
-</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>Entries and units</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>Conventions</source>
-        <translation type="unfinished">Konventionen</translation>
-    </message>
-    <message>
-        <source>Strength</source>
-        <translation type="unfinished">Festigkeit</translation>
-    </message>
-    <message>
-        <source>Screening a field</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>Keys</source>
-        <translation type="unfinished"></translation>
-    </message>
-    <message>
-        <source>Cautions</source>
-        <translation type="unfinished">Hinweise</translation>
-    </message>
-</context>
-<context>
     <name>Inverse</name>
     <message>
         <source>%1 reaches only %2 to %3.</source>
@@ -2891,6 +2737,38 @@ signs with the picture of positive stresses before trusting a result.&lt;/p&gt;
     <message>
         <source>line</source>
         <translation>Linie</translation>
+    </message>
+</context>
+<context>
+    <name>Manual</name>
+    <message>
+        <source>en</source>
+        <comment>the folder in resources/manual with the manual in this language</comment>
+        <translation>de</translation>
+    </message>
+    <message>
+        <source>Limit</source>
+        <translation>Grenzbedingung</translation>
+    </message>
+    <message>
+        <source>Materials</source>
+        <translation>Materialien</translation>
+    </message>
+    <message>
+        <source>Meant for</source>
+        <translation>Gedacht für</translation>
+    </message>
+    <message>
+        <source>Source</source>
+        <translation>Quelle</translation>
+    </message>
+    <message>
+        <source>Planewright handbook</source>
+        <translation>Handbuch zu Planewright</translation>
+    </message>
+    <message>
+        <source>Plane stress at a point, resolved to the line that matters. An aid to a licensed engineer; the code that governs locally decides.</source>
+        <translation>Ebener Spannungszustand in einem Punkt, zerlegt auf die Linie, auf die es ankommt. Eine Hilfe für zugelassene Ingenieurinnen und Ingenieure; es entscheidet die örtlich geltende Norm.</translation>
     </message>
 </context>
 <context>
@@ -7681,16 +7559,44 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
 <context>
     <name>planewright::HelpWindow</name>
     <message>
-        <source>Help</source>
-        <translation>Hilfe</translation>
-    </message>
-    <message>
         <source>Pages</source>
         <translation>Seiten</translation>
     </message>
     <message>
         <source>Page</source>
         <translation>Seite</translation>
+    </message>
+    <message>
+        <source>Handbook</source>
+        <translation>Handbuch</translation>
+    </message>
+    <message>
+        <source>Search (Ctrl+F)</source>
+        <translation>Suchen (Strg+F)</translation>
+    </message>
+    <message>
+        <source>Search</source>
+        <translation>Suchen</translation>
+    </message>
+    <message>
+        <source>Back (Alt+Left)</source>
+        <translation>Zurück (Alt+Links)</translation>
+    </message>
+    <message>
+        <source>Forward (Alt+Right)</source>
+        <translation>Vorwärts (Alt+Rechts)</translation>
+    </message>
+    <message>
+        <source>%1 (%2)</source>
+        <translation>%1 (%2)</translation>
+    </message>
+    <message>
+        <source>These words stand on no page together.</source>
+        <translation>Diese Wörter stehen auf keiner Seite zusammen.</translation>
+    </message>
+    <message>
+        <source>Enter goes to the next place, Esc shows all pages.</source>
+        <translation>Die Eingabetaste geht zur nächsten Stelle, Esc zeigt alle Seiten.</translation>
     </message>
 </context>
 <context>
@@ -7844,10 +7750,6 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
     <message>
         <source>New study</source>
         <translation>Neue Studie</translation>
-    </message>
-    <message>
-        <source>Conventions in two pictures</source>
-        <translation>Vereinbarungen in zwei Bildern</translation>
     </message>
     <message>
         <source>A new study: type the stresses of your point.</source>
@@ -8130,10 +8032,6 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
         <translation>&amp;Hilfe</translation>
     </message>
     <message>
-        <source>&amp;Help on this area</source>
-        <translation>&amp;Hilfe zu diesem Bereich</translation>
-    </message>
-    <message>
         <source>Published &amp;values, recomputed…</source>
         <translation>Veröffentlichte &amp;Werte, nachgerechnet…</translation>
     </message>
@@ -8180,6 +8078,26 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
     <message>
         <source>The preferences are kept.</source>
         <translation>Die Einstellungen sind übernommen.</translation>
+    </message>
+    <message>
+        <source>Conventions in pictures</source>
+        <translation>Vereinbarungen in Bildern</translation>
+    </message>
+    <message>
+        <source>&amp;Help on this place</source>
+        <translation>&amp;Hilfe zu dieser Stelle</translation>
+    </message>
+    <message>
+        <source>Hand&amp;book</source>
+        <translation>Hand&amp;buch</translation>
+    </message>
+    <message>
+        <source>&amp;Keys</source>
+        <translation>&amp;Tasten</translation>
+    </message>
+    <message>
+        <source>&amp;Cautions</source>
+        <translation>&amp;Warnhinweise</translation>
     </message>
 </context>
 <context>

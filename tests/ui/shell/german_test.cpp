@@ -26,8 +26,7 @@ public:
   bool isEmpty() const override { return false; }
   QString translate(const char* context, const char* source, const char* comment, int n) const override {
     // The toolkit's own contexts begin with its letter; symbols of the trade are equal in every language.
-    const bool isOurs = context && *context != 'Q' && qstrcmp(context, "Symbol") != 0 &&
-                        qstrcmp(context, "Help") != 0 && source && *source;
+    const bool isOurs = context && *context != 'Q' && qstrcmp(context, "Symbol") != 0 && source && *source;
     if (isOurs && m_german.translate(context, source, comment, n).isEmpty())
       m_missing.insert(std::string(context) + " | " + source);
     return {};
