@@ -43,6 +43,7 @@ Result<QString> languageOf(const Arguments& arguments) {
 
 std::vector<std::string> namesOf(const std::vector<ManualFile>& files) {
   std::vector<std::string> names;
+  names.reserve(files.size());
   for (const ManualFile& file : files)
     names.push_back(file.name.toStdString());
   return names;
