@@ -20,6 +20,8 @@ int runWindow(int& argc, char** argv, const QString& path) {
   QCoreApplication::setOrganizationName(QStringLiteral("planewright"));
   QCoreApplication::setApplicationName(QStringLiteral("planewright"));
   QGuiApplication::setApplicationDisplayName({});
+  // By this a desktop knows which entry and icon the window belongs to.
+  QGuiApplication::setDesktopFileName(QStringLiteral("planewright"));
   if (!loadProgramFont()) {
     QMessageBox::critical(nullptr, QStringLiteral("Planewright"),
                           QCoreApplication::translate("Program",
