@@ -10,6 +10,7 @@ build_packages=(ninja-build cmake g++ qt6-base-dev qt6-charts-dev libqt6opengl6-
 test_packages=(libgtest-dev libgmock-dev librapidcheck-dev poppler-utils librsvg2-bin locales
   python3-pyatspi at-spi2-core dbus xvfb xauth desktop-file-utils appstream shared-mime-info libxml2-utils libglib2.0-bin
   mandoc man-db)
+package_packages=(dpkg-dev file)
 check_packages=(clang-16 clang-tidy-16 clang-format libclang-rt-16-dev)
 
 say() { printf '%s\n' "$*" >&2; }
