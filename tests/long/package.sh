@@ -18,6 +18,8 @@ if [ -z "${APART-}" ]; then
   exec env APART=1 unshare --mount --pid --fork --kill-child --mount-proc "$0" "$@"
 fi
 
+trap 'exit 130' INT TERM # which the first process of such a world would not heed by itself
+
 work=$root/.build/package
 log=$(realpath -m "${1:-$work/package.log}")
 system=$work/system
@@ -116,12 +118,15 @@ rm "$system/tmp/planewright.deb"
 must inside dpkg-query -W planewright
 must inside dpkg --verify planewright
 missing=$(inside ldd /usr/bin/planewright | grep 'not found') && fail "$missing"
-echo "Fonts of the system: $(inside find /usr/share/fonts -name '*.ttf' | wc -l)"
+listing >"$work/installed"
+added=$(comm -13 <(cut -d' ' -f1 "$work/before" | uniq) <(cut -d' ' -f1 "$work/installed" | uniq))
+echo "$(wc -l <<<"$added") files, folders and links more, of these with its name: $(grep -c planewright <<<"$added")"
 
 part "commands, as a user, without a display"
 as_user sh -c 'cp /usr/share/doc/planewright/examples/boat-shed-beam.planewright beam.planewright && mkdir made'
 must as_user --unset=DISPLAY planewright --version
-as_user planewright validate | tail -n 1
+as_user --unset=DISPLAY planewright validate >"$work/validated" 2>&1 || fail "planewright validate"
+grep '^planewright: All' "$work/validated" || fail "planewright validate"
 for kind in svg pdf png; do
   must as_user --unset=DISPLAY planewright figure beam.planewright -o "made/beam.$kind"
 done
@@ -156,7 +161,7 @@ opened_by() { # COMMAND...: opens the study, sees its window and ends the progra
 }
 opened_by XDG_CURRENT_DESKTOP=GNOME gio open beam.planewright
 opened_by XDG_CURRENT_DESKTOP=X-Generic xdg-open beam.planewright
-kill "$(cat "$system/tmp/.X97-lock")" && wait $display
+kill "$(cat "$system/tmp/.X97-lock")" && wait $display 2>/dev/null
 rm -rf "$system"/tmp/.X*
 
 part "the package is purged"
