@@ -47,15 +47,15 @@ void settle(
 QByteArray inventedField() {
   QByteArray table =
       "point,region,x [m],y [m],sx G,sy G,txy G,sx S,sy S,txy S,sx W,sy W,txy W,sx M,sy M,txy M\n";
-  constexpr int columns = 72;
-  constexpr int rows = 36;
+  constexpr int columns = 97;
+  constexpr int rows = 49;
   for (int row = 0; row < rows; ++row)
     for (int column = 0; column < columns; ++column) {
       const double x = 24.0 * column / (columns - 1);
       const double y = 12.0 * row / (rows - 1);
       const double middle = std::sin(x / 24 * 3.14159) * std::sin(y / 12 * 3.14159);
       const double corner = 1 / (0.6 + std::hypot(x - 24, y));
-      const double along = 1.8 * middle + 0.4 * corner;
+      const double along = 2.3 * middle + 0.4 * corner;
       const double across = 0.02 * middle + 0.05 * corner;
       const double shear = 0.25 * std::cos(x / 24 * 3.14159) + 0.2 * corner;
       const QString region = corner > 0.5 ? QStringLiteral("corner") : QStringLiteral("deck");
@@ -118,6 +118,8 @@ private:
 
   void writeWindow() {
     write(QStringLiteral("whole"), m_window);
+    m_window.resize(1680, 780);
+    settle();
     write(QStringLiteral("element"), m_window.element());
     write(QStringLiteral("circle"), m_window.circle());
     write(QStringLiteral("planes"), m_window.planes());

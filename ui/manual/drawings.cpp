@@ -54,9 +54,9 @@ Picture elementOf(const Study& study, bool turned) {
   const Readout readout = evaluate(study);
   Picture picture;
   picture.width = 300;
-  picture.height = 250;
+  picture.height = 216;
   ElementOrder order;
-  order.centre = {picture.width / 2, picture.height / 2};
+  order.centre = {picture.width / 2, 112};
   order.outer = 104;
   order.turned = turned;
   order.wide = 2;
@@ -111,6 +111,7 @@ Picture larger(Picture picture, double factor) {
 /// The circle of the figure: the shear axis drawn downwards, or upwards.
 Picture circleOf(ShearAxis axis) {
   Study study = exampleOfSigns();
+  study.points.front().reading = "60 deg"; // far enough from σ1 to be told from it
   study.convention.shearAxis = axis;
   const Readout readout = evaluate(study);
   FigureOrder order;

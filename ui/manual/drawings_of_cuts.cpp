@@ -137,10 +137,11 @@ Picture gaugesOfRosette() {
   angleArc(picture, frame, 66, 45, Role::soft);
   angleArc(picture, frame, 44, 90, Role::soft);
   label(picture, frame.in(24, 72, -4), "α_{b}", Role::soft);
-  label(picture, frame.in(68, 48, 2), "α_{c}", Role::soft, Align::middle);
+  label(picture, frame.in(60, 26), "α_{c}", Role::soft, Align::middle);
   for (const Gauge& gauge : {Gauge{0, "a"}, Gauge{45, "b"}, Gauge{90, "c"}}) {
     line(picture, frame.in(gauge.angle, 78), frame.in(gauge.angle, 118), {Role::state, 7, Dash::solid});
-    label(picture, frame.in(gauge.angle, 98, gauge.angle == 0 ? 12 : -10), gauge.name, Role::state);
+    label(picture, frame.in(gauge.angle, 96, gauge.angle == 0 ? 12 : 14), gauge.name, Role::state,
+          Align::end);
   }
   return picture;
 }

@@ -53,8 +53,9 @@ QString factsOf(const Named<Criterion>& named) {
     rows += row(words(QT_TRANSLATE_NOOP("Manual", "Meant for")), shownRich(facts.domain));
   rows += row(words(QT_TRANSLATE_NOOP("Manual", "Source")), shownRich(facts.source));
   const QString id = fromUtf8(std::string(named.word));
-  return QStringLiteral("<h3><a name=\"%1\">%2</a></h3>\n<table>\n%3</table>\n")
-      .arg(id, shown(named.label).toHtmlEscaped(), rows);
+  QString heading = shown(named.label).toHtmlEscaped();
+  heading[0] = heading[0].toUpper();
+  return QStringLiteral("<h3><a name=\"%1\">%2</a></h3>\n<table>\n%3</table>\n").arg(id, heading, rows);
 }
 
 QString criterion(const QString& id) {
@@ -78,7 +79,9 @@ QSize shownSize(const QString& name, ManualMedium medium) {
   return {mostPictureWidth, size.height() * mostPictureWidth / size.width()};
 }
 
-QString withPictures(const QString& html, ManualMedium medium) {
+/// A picture that is a paragraph of its own is one of a class, for its style.
+QString withPictures(QString html, ManualMedium medium) {
+  html.replace(QStringLiteral("<p><img "), QStringLiteral("<p class=\"picture\"><img "));
   static const QRegularExpression picture(QStringLiteral("<img src=\"([^\"]*)\""));
   return replaced(html, picture, [medium](const QRegularExpressionMatch& match) {
     const QString name = match.captured(1);

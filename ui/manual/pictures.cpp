@@ -45,7 +45,9 @@ QImage pictureImage(const QString& name, const Look& look, int width) {
   if (!isPicture(name))
     return {};
   if (!isDrawn(name))
-    return QImage(pathOf(name)).scaledToWidth(width, Qt::SmoothTransformation);
+    return QImage(pathOf(name)) // scaled among its few colours it would be dithered
+        .convertToFormat(QImage::Format_RGB32)
+        .scaledToWidth(width, Qt::SmoothTransformation);
   const Picture picture = drawing(nameIn(name));
   const double scale = width / picture.width;
   QImage image(width, qRound(picture.height * scale), QImage::Format_RGB32);

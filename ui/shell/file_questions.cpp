@@ -41,6 +41,7 @@ Unsaved askAboutUnsaved(QWidget& window, const QString& name) {
       QMessageBox::NoIcon, words(QT_TRANSLATE_NOOP("FileQuestions", "Unsaved changes")),
       words(QT_TRANSLATE_NOOP("FileQuestions", "“%1” has changes that are in no file.")).arg(name),
       QMessageBox::Save | QMessageBox::Discard | QMessageBox::Cancel, &window);
+  box.setProperty("helpPlace", "files#unsaved");
   box.setInformativeText(words(QT_TRANSLATE_NOOP("FileQuestions", "Save them before going on?")));
   box.setDefaultButton(QMessageBox::Save);
   const int answer = box.exec();
@@ -57,6 +58,7 @@ Elsewhere askAboutOpenElsewhere(QWidget& window, const QString& name, const Hold
           .arg(holder.process)
           .arg(holder.host),
       QMessageBox::Cancel, &window);
+  box.setProperty("helpPlace", "files#locks");
   box.setInformativeText(words(QT_TRANSLATE_NOOP(
       "FileQuestions",
       "Read-only, it is not saved over here. Taken over, the other window is asked before it "
@@ -80,6 +82,7 @@ Overwrite askAboutObstacle(QWidget& window, const QString& name, Obstacle obstac
                                         "“%1” was changed on the disk since it was opened or saved here.")))
           .arg(name),
       QMessageBox::Cancel, &window);
+  box.setProperty("helpPlace", "files#changed");
   box.setInformativeText(words(QT_TRANSLATE_NOOP(
       "FileQuestions", "What is saved over stays beside it, with a tilde (~) behind its name.")));
   const QPushButton* saveAs =

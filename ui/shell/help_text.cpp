@@ -16,20 +16,21 @@ namespace {
 /// A page is called "manual:/lines", so that a link to "keys" on it is taken as one to its neighbour.
 constexpr auto pageScheme = QLatin1String("manual");
 
+// Headings are anchors, so that links have the palette's colour and not one of the style's.
 QString styleFor(const Look& look) {
-  return QStringLiteral(
-             "body { color: %1; } h2 { font-size: 20px; margin-top: 4px; margin-bottom: 10px; }"
-             "h3 { font-size: 15px; margin-top: 18px; margin-bottom: 4px; }"
-             "p, ul, ol { margin-top: 4px; margin-bottom: 8px; line-height: 130%; }"
-             "li { margin-bottom: 3px; }"
-             "table { margin-top: 4px; margin-bottom: 8px; border-collapse: collapse; }"
-             "td, th { padding: 4px 14px 4px 0px; border-bottom: 1px solid %2; border-top: 1px solid %2;"
-             "border-left: 0px; border-right: 0px; vertical-align: top; text-align: left; }"
-             "code, pre { font-family: 'Liberation Mono', 'DejaVu Sans Mono', monospace; background-color: "
-             "%3; }"
-             "a { color: %4; }")
-      .arg(look.colour(Role::ink).name(), look.colour(Role::rule).name(), look.colour(Role::window).name(),
-           look.colour(Role::focus).name());
+  return QStringLiteral("body { color: %1; } h2 { font-size: 20px; margin-top: 4px; margin-bottom: 10px; }"
+                        "h3 { font-size: 15px; margin-top: 18px; margin-bottom: 4px; }"
+                        "p, ul, ol { margin-top: 4px; margin-bottom: 8px; line-height: 130%; }"
+                        "p.picture { line-height: 100%; }"
+                        "li { margin-bottom: 3px; }"
+                        "pre { margin-top: 4px; margin-bottom: 8px; }"
+                        "table { margin-top: 4px; margin-bottom: 8px; border-collapse: collapse; }"
+                        "td, th { padding: 4px 14px 4px 0px; border-bottom: 1px solid %2;"
+                        "border-top: 1px solid %2; border-left: 0px; border-right: 0px;"
+                        "vertical-align: top; text-align: left; }"
+                        "code, pre { font-family: 'Liberation Mono', 'DejaVu Sans Mono', monospace;"
+                        "background-color: %3; }")
+      .arg(look.colour(Role::ink).name(), look.colour(Role::rule).name(), look.colour(Role::window).name());
 }
 
 } // namespace

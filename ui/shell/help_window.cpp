@@ -33,6 +33,7 @@ HelpWindow::HelpWindow(QWidget* parent)
   m_search->setAccessibleName(tr("Search"));
   m_search->setClearButtonEnabled(true);
   m_contents->setAccessibleName(tr("Pages"));
+  m_contents->setSpacing(2);
   m_text->setAccessibleName(tr("Page"));
   m_found->setWordWrap(true);
   m_back = button(QStringLiteral("←"), tr("Back (Alt+Left)"), &HelpWindow::back);

@@ -160,6 +160,8 @@ void CheckFields::refresh() {
     return;
   m_material->setText(fromUtf8(now->material));
   m_criterion->setText(shown(labelOf(now->criterion)));
+  m_criterion->setProperty("helpPlace",
+                           QLatin1String("criteria#") + QLatin1String(nameRow(now->criterion).word));
   m_criterion->setToolTip(shown(symbol(rowOf(now->criterion).equation)) + QLatin1Char('\n') +
                           shown(rowOf(now->criterion).source));
   const std::string& direction = now->line.empty() ? now->plane : now->line;

@@ -248,6 +248,7 @@ void StrengthPanel::showLimits() {
   const MaterialKind kind = check ? m_desk.readout().checks[*check].strengths.kind : MaterialKind::generic;
   auto* box = new QMessageBox(QMessageBox::NoIcon, tr("What a check at a point does not see"),
                               lines(limitsOfPointChecks(kind)), QMessageBox::Close, this);
+  box->setProperty("helpPlace", "cautions#not-seen");
   box->setTextFormat(Qt::RichText);
   box->setAttribute(Qt::WA_DeleteOnClose);
   box->open();

@@ -9,12 +9,15 @@
 #include "ui/shell/main_window.h"
 #include "ui/shell/problem_list.h"
 #include "ui/shell/state_bar.h"
+#include "ui/strength/strength_panel.h"
 
 #include <QApplication>
 #include <QClipboard>
 #include <QMenuBar>
 #include <QPushButton>
 #include <QTest>
+
+#include <functional>
 
 namespace planewright {
 namespace {
@@ -56,7 +59,19 @@ protected:
 
   /// What a menu entry that begins so opens.
   QWidget* opened(const char* menu, const char* entry) {
-    const QWidgetList before = QApplication::topLevelWidgets();
+    return openedBy([&] { choose(menu, entry); });
+  }
+  /// What a button opens.
+  static QWidget* openedBy(QWidget& within, const char* words) {
+    return openedBy([&] {
+      for (auto* button : within.findChildren<QAbstractButton*>())
+        if (button->text().remove(QLatin1Char('&')) == QString::fromUtf8(words))
+          button->click();
+    });
+  }
+
+private:
+  void choose(const char* menu, const char* entry) {
     for (const QAction* one : m_window.menuBar()->actions()) {
       if (one->text().remove(QLatin1Char('&')) != QLatin1String(menu))
         continue;
@@ -64,6 +79,11 @@ protected:
         if (action->text().remove(QLatin1Char('&')).startsWith(QString::fromUtf8(entry)))
           action->trigger();
     }
+  }
+
+  static QWidget* openedBy(const std::function<void()>& act) {
+    const QWidgetList before = QApplication::topLevelWidgets();
+    act();
     QCoreApplication::processEvents();
     for (QWidget* widget : QApplication::topLevelWidgets())
       if (!before.contains(widget) && widget->isVisible() && qobject_cast<QDialog*>(widget))
@@ -71,6 +91,7 @@ protected:
     return nullptr;
   }
 
+protected:
   QString placeShownOn(QWidget& widget) {
     QTest::keyClick(&widget, Qt::Key_F1);
     return m_window.help().help().place();
@@ -103,6 +124,16 @@ TEST_F(HelpPlaces, areThereForEveryWidgetOfTheDialogs) {
 }
 
 TEST_F(HelpPlaces, areThereForDialogsOfDialogs) {
+  QWidget* figure = opened("File", "Export figure");
+  ASSERT_NE(figure, nullptr);
+  for (const auto& [within, words] :
+       {std::pair{figure, "All points…"},
+        {static_cast<QWidget*>(&m_window.strength()), "All criteria side by side"},
+        {static_cast<QWidget*>(&m_window.strength()), "More"}}) {
+    const QWidget* dialog = openedBy(*within, words);
+    ASSERT_NE(dialog, nullptr) << words;
+    EXPECT_GT(widgetsWithPlaceIn(*dialog), 0) << words;
+  }
   const FacesDialog faces(Line(), &m_window);
   EXPECT_GT(widgetsWithPlaceIn(faces), 2);
   const ProblemList problems(QStringLiteral("Problems"), {}, &m_window);
@@ -113,6 +144,13 @@ TEST_F(HelpPlaces, areShownByFOneInTheWindow) {
   m_window.given().focusFirst();
   EXPECT_EQ(placeShownOn(*m_window.focusWidget()), QStringLiteral("given#typed"));
   EXPECT_EQ(placeShownOn(m_window.stateBar().figureButton()), QStringLiteral("figures#arrange"));
+}
+
+TEST_F(HelpPlaces, leadToTheCriterionOfACheck) {
+  QStringList places;
+  for (const auto* button : m_window.strength().findChildren<QAbstractButton*>())
+    places += helpPlaceOf(button);
+  EXPECT_TRUE(places.contains(QStringLiteral("criteria#sum-of-squares")));
 }
 
 TEST_F(HelpPlaces, areShownByFOneInDialogs) {
