@@ -2756,7 +2756,7 @@
     </message>
     <message>
         <source>Meant for</source>
-        <translation>Gedacht für</translation>
+        <translation>Gültig für</translation>
     </message>
     <message>
         <source>Source</source>
