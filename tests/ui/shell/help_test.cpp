@@ -110,7 +110,7 @@ TEST_F(HelpTest, wearsThePaletteAndStaysWhereItWas) {
   EXPECT_EQ(m_help.place(), QStringLiteral("conventions#circle"));
   EXPECT_NEAR(m_help.text().verticalScrollBar()->value(), at, 5);
   const QImage page = m_help.text().grab().toImage();
-  EXPECT_LT(page.pixelColor(page.width() / 2, page.height() / 2).lightnessF(), 0.5F);
+  EXPECT_LT(page.pixelColor(3, page.height() / 2).lightnessF(), 0.5F); // beside the words
   chooseAppearance(Appearance::system);
 }
 
