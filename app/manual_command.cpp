@@ -2,6 +2,7 @@
 #include "app/manual_command.h"
 
 #include "app/help.h"
+#include "app/naming.h"
 #include "app/output_folder.h"
 #include "ui/files/file_bytes.h"
 #include "ui/look/language.h"
@@ -26,11 +27,13 @@ Result<OutputFolder> folderOf(const Arguments& arguments) {
                                 PW_TEXT("Command", "Write planewright manual -o FOLDER.")});
 }
 
-/// By the name of its folder; without one, that of the program.
+/// The program speaks it too, for what it fills in.
 Result<QString> languageOf(const Arguments& arguments) {
   const std::string* wanted = arguments.valueOf("--language");
   if (!wanted)
     return manualLanguage();
+  if (auto problem = speakAs(wanted))
+    return tl::unexpected(*std::move(problem));
   const QStringList there = manualLanguages();
   if (const QString language = QString::fromStdString(*wanted); there.contains(language)) {
     speak(language); // what the program itself says of criteria

@@ -2742,11 +2742,6 @@
 <context>
     <name>Manual</name>
     <message>
-        <source>en</source>
-        <comment>the folder in resources/manual with the manual in this language</comment>
-        <translation>de</translation>
-    </message>
-    <message>
         <source>Limit</source>
         <translation>Grenzbedingung</translation>
     </message>

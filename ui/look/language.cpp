@@ -29,6 +29,11 @@ std::vector<std::unique_ptr<QTranslator>>& spoken() {
   return translators;
 }
 
+QString& spokenCode() {
+  static QString code = languages().front().code;
+  return code;
+}
+
 std::unique_ptr<QTranslator> catalogue(const QString& name) {
   auto translator = std::make_unique<QTranslator>();
   if (!translator->load(QStringLiteral(":/planewright/languages/") + name))
@@ -80,7 +85,12 @@ bool speak(const QString& code) {
         QCoreApplication::installTranslator(translator.get());
       spoken().push_back(std::move(translator));
     }
+  spokenCode() = code;
   return true;
+}
+
+QString spokenLanguage() {
+  return spokenCode();
 }
 
 Translate translation() {

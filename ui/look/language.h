@@ -27,5 +27,7 @@ QString languageOfWindow();
 /// Has this process speak a language: what translation() gives, and windows that are made from now on. Of a
 /// language that the program does not speak nothing changes, and the answer is false.
 bool speak(const QString& code);
+/// What speak() was last told; English before.
+QString spokenLanguage();
 
 } // namespace planewright

@@ -52,8 +52,12 @@ QString shown(const Text& text) {
 }
 
 QString shownRich(const Text& text) {
+  return richText(runs(text, translation()));
+}
+
+QString richText(const Runs& runs) {
   QString result;
-  for (const Run& run : runs(text, translation())) {
+  for (const Run& run : runs) {
     const QString words = QString::fromStdString(run.text).toHtmlEscaped();
     result += run.lowered ? QStringLiteral("<sub>%1</sub>").arg(words) : words;
   }

@@ -27,6 +27,8 @@ QPalette paletteFor(const Look& look);
 /// A core text in the language of the program, without and with lowered indices (as rich text).
 QString shown(const Text& text);
 QString shownRich(const Text& text);
+/// Runs as rich text, what is lowered as indices.
+QString richText(const Runs& runs);
 QString shown(const Problem& problem);
 /// The translation that core's figures and outputs take.
 Translate translation();

@@ -1,7 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/manual/manual.h"
 
-#include <QCoreApplication>
+#include "ui/look/language.h"
+#include "ui/look/look.h"
+
 #include <QDir>
 #include <QFile>
 #include <QRegularExpression>
@@ -44,11 +46,9 @@ QStringList manualLanguages() {
   return languages;
 }
 
-// A translation of the program says the name of the folder that goes with it.
 QString manualLanguage() {
-  const QString wanted = QCoreApplication::translate(
-      "Manual", "en", "the folder in resources/manual with the manual in this language");
-  return manualLanguages().contains(wanted) ? wanted : english();
+  const QString spoken = spokenLanguage();
+  return manualLanguages().contains(spoken) ? spoken : english();
 }
 
 QString manualSource(const QString& page, const QString& language) {
@@ -61,6 +61,14 @@ QString manualTitle(const QString& page, const QString& language) {
   QString title = heading.match(manualSource(page, language)).captured(1);
   static const QRegularExpression tags(QStringLiteral("<[^>]*>"));
   return title.remove(tags);
+}
+
+Runs manualRuns(const Text& text, const QString& language) {
+  return runs(text, language == english() ? Translate() : translation());
+}
+
+QString manualWords(const Text& text, const QString& language) {
+  return fromUtf8(plain(manualRuns(text, language)));
 }
 
 QStringList anchorsIn(const QString& html) {

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/words/text.h"
+
 #include <QString>
 #include <QStringList>
 
@@ -17,8 +19,8 @@ ManualPlace manualPlace(const QString& written);
 /// The names of the pages, in the order in which they are read.
 const QStringList& manualPages();
 
-/// The languages that the program carries the manual in, and the one of the program; English where the
-/// manual is not there in it.
+/// The languages that the program carries the manual in, and the one that the program speaks; English where
+/// the manual is not there in it.
 QStringList manualLanguages();
 QString manualLanguage();
 
@@ -27,6 +29,9 @@ QString manualLanguage();
 QString manualSource(const QString& page, const QString& language);
 /// The words of its first heading.
 QString manualTitle(const QString& page, const QString& language);
+/// A text of the program as a page of this language has it: the manual does not mix languages.
+Runs manualRuns(const Text& text, const QString& language);
+QString manualWords(const Text& text, const QString& language);
 /// The names of all anchors in HTML, in their order.
 QStringList anchorsIn(const QString& html);
 

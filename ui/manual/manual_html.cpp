@@ -6,7 +6,6 @@
 #include "ui/manual/manual.h"
 #include "ui/manual/pictures.h"
 
-#include <QCoreApplication>
 #include <QRegularExpression>
 
 #include <functional>
@@ -14,10 +13,6 @@
 namespace planewright {
 
 namespace {
-
-QString words(const char* source) {
-  return QCoreApplication::translate("Manual", source);
-}
 
 /// The text with each match of the pattern replaced by what `with` makes of it.
 QString replaced(const QString& text, const QRegularExpression& pattern,
@@ -33,42 +28,55 @@ QString replaced(const QString& text, const QRegularExpression& pattern,
   return result;
 }
 
-QString kindsOf(Criterion criterion) {
-  QStringList kinds;
-  for (const Named<MaterialKind>& kind : namesOf<MaterialKind>())
-    if (applies(criterion, kind.value))
-      kinds += shown(kind.label);
-  return kinds.join(QStringLiteral(", "));
-}
+/// What the program knows of a criterion, in the language of a page.
+class Facts {
+public:
+  explicit Facts(QString language) : m_language(std::move(language)) {}
 
-QString row(const QString& name, const QString& value) {
-  return QStringLiteral("<tr><td>%1</td><td>%2</td></tr>\n").arg(name, value);
-}
+  /// Nothing for a criterion that is not there.
+  QString of(const QString& id) const {
+    for (const Named<Criterion>& named : namesOf<Criterion>())
+      if (id == QLatin1String(named.word))
+        return of(named);
+    return {};
+  }
 
-QString factsOf(const Named<Criterion>& named) {
-  const CriterionRow& facts = rowOf(named.value);
-  QString rows = row(words(QT_TRANSLATE_NOOP("Manual", "Limit")), shownRich(symbol(facts.equation))) +
-                 row(words(QT_TRANSLATE_NOOP("Manual", "Materials")), kindsOf(named.value));
-  if (!facts.domain.empty())
-    rows += row(words(QT_TRANSLATE_NOOP("Manual", "Meant for")), shownRich(facts.domain));
-  rows += row(words(QT_TRANSLATE_NOOP("Manual", "Source")), shownRich(facts.source));
-  const QString id = fromUtf8(std::string(named.word));
-  QString heading = shown(named.label).toHtmlEscaped();
-  heading[0] = heading[0].toUpper();
-  return QStringLiteral("<h3><a name=\"%1\">%2</a></h3>\n<table>\n%3</table>\n").arg(id, heading, rows);
-}
+private:
+  QString of(const Named<Criterion>& named) const {
+    const CriterionRow& facts = rowOf(named.value);
+    QString rows = row(PW_TEXT("Manual", "Limit"), rich(symbol(facts.equation))) +
+                   row(PW_TEXT("Manual", "Materials"), kindsOf(named.value));
+    if (!facts.domain.empty())
+      rows += row(PW_TEXT("Manual", "Meant for"), rich(facts.domain));
+    rows += row(PW_TEXT("Manual", "Source"), rich(facts.source));
+    QString heading = rich(named.label);
+    heading[0] = heading[0].toUpper();
+    return QStringLiteral("<h3><a name=\"%1\">%2</a></h3>\n<table>\n%3</table>\n")
+        .arg(QLatin1String(named.word), heading, rows);
+  }
 
-QString criterion(const QString& id) {
-  for (const Named<Criterion>& named : namesOf<Criterion>())
-    if (fromUtf8(std::string(named.word)) == id)
-      return factsOf(named);
-  return {};
-}
+  QString kindsOf(Criterion criterion) const {
+    QStringList kinds;
+    for (const Named<MaterialKind>& kind : namesOf<MaterialKind>())
+      if (applies(criterion, kind.value))
+        kinds += rich(kind.label);
+    return kinds.join(QStringLiteral(", "));
+  }
 
-QString withCriteria(const QString& html) {
+  QString row(const Text& name, const QString& value) const {
+    return QStringLiteral("<tr><td>%1</td><td>%2</td></tr>\n").arg(rich(name), value);
+  }
+
+  QString rich(const Text& text) const { return richText(manualRuns(text, m_language)); }
+
+  QString m_language;
+};
+
+QString withCriteria(const QString& html, const QString& language) {
   static const QRegularExpression place(QStringLiteral("\\{\\{criterion ([a-z0-9-]+)\\}\\}"));
+  const Facts facts(language);
   return replaced(html, place,
-                  [](const QRegularExpressionMatch& match) { return criterion(match.captured(1)); });
+                  [&facts](const QRegularExpressionMatch& match) { return facts.of(match.captured(1)); });
 }
 
 /// In the program a picture is at most as wide as a page beside the contents.
@@ -107,7 +115,7 @@ QString withFileNames(const QString& html) {
 } // namespace
 
 QString manualHtml(const QString& page, const QString& language, ManualMedium medium) {
-  const QString html = withPictures(withCriteria(manualSource(page, language)), medium);
+  const QString html = withPictures(withCriteria(manualSource(page, language), language), medium);
   return medium == ManualMedium::file ? withFileNames(html) : html;
 }
 

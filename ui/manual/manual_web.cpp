@@ -7,21 +7,12 @@
 #include "ui/manual/manual_html.h"
 #include "ui/manual/pictures.h"
 
-#include <QCoreApplication>
 #include <QFile>
 #include <QRegularExpression>
 
 namespace planewright {
 
 namespace {
-
-QString words(const char* source) {
-  return QCoreApplication::translate("Manual", source);
-}
-
-QString handbook() {
-  return words(QT_TRANSLATE_NOOP("Manual", "Planewright handbook"));
-}
 
 QString fileOf(const QString& page) {
   return page + QStringLiteral(".html");
@@ -30,7 +21,9 @@ QString fileOf(const QString& page) {
 /// One manual in one language.
 class Web {
 public:
-  explicit Web(QString language) : m_language(std::move(language)) {
+  explicit Web(QString language)
+      : m_language(std::move(language)),
+        m_handbook(manualWords(PW_TEXT("Manual", "Planewright handbook"), m_language)) {
     for (const QString& page : manualPages())
       m_titles += manualTitle(page, m_language);
   }
@@ -49,21 +42,21 @@ private:
   QByteArray contentsPage() const {
     const QString body =
         QStringLiteral("<h1>%1</h1>\n<p>%2</p>\n%3")
-            .arg(handbook(),
-                 words(QT_TRANSLATE_NOOP(
-                     "Manual",
-                     "Plane stress at a point, resolved to the line that matters. An aid to a licensed "
-                     "engineer; the code that governs locally decides.")),
+            .arg(m_handbook,
+                 manualWords(PW_TEXT("Manual",
+                                     "Plane stress at a point, resolved to the line that matters. An "
+                                     "aid to a licensed engineer; the code that governs locally decides."),
+                             m_language),
                  contents(-1));
-    return document(handbook(), QStringLiteral("<main class=\"contents\">\n%1</main>\n").arg(body));
+    return document(m_handbook, QStringLiteral("<main class=\"contents\">\n%1</main>\n").arg(body));
   }
 
   QByteArray page(qsizetype index) const {
     const QString text = manualHtml(manualPages()[index], m_language, ManualMedium::file);
     const QString body =
         QStringLiteral("<nav>\n<p><a href=\"index.html\">%1</a></p>\n%2</nav>\n<main>\n%3%4</main>\n")
-            .arg(handbook(), contents(index), text, neighbours(index));
-    return document(m_titles[index] + QStringLiteral(" – ") + handbook(), body);
+            .arg(m_handbook, contents(index), text, neighbours(index));
+    return document(m_titles[index] + QStringLiteral(" – ") + m_handbook, body);
   }
 
   /// The list of pages, the one at hand marked.
@@ -114,6 +107,7 @@ private:
   }
 
   QString m_language;
+  QString m_handbook;
   QStringList m_titles;
 };
 

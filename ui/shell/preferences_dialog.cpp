@@ -23,6 +23,7 @@ namespace planewright {
 
 PreferencesDialog::PreferencesDialog(QWidget* parent) : QDialog(parent), m_rows(new QVBoxLayout) {
   setWindowTitle(tr("Preferences"));
+  setProperty("helpPlace", "window#preferences");
   auto* page = new QWidget(this);
   page->setLayout(m_rows);
   auto* scroll = new QScrollArea(this);

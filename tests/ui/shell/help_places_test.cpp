@@ -112,11 +112,11 @@ TEST_F(HelpPlaces, areThereForEveryWidgetOfTheDialogs) {
   };
   for (const Entry& entry :
        {Entry{"File", "Unsaved"}, Entry{"File", "Screen points"}, Entry{"File", "Export figure"},
-        Entry{"File", "Calculation sheet"}, Entry{"Edit", "Paste table"}, Entry{"Study", "Title"},
-        Entry{"Study", "Points"}, Entry{"Study", "Sections"}, Entry{"Study", "Load cases"},
-        Entry{"Study", "Combinations"}, Entry{"Study", "Build"}, Entry{"Study", "Materials"},
-        Entry{"Study", "Compare"}, Entry{"Study", "Working"}, Entry{"Help", "Published"},
-        Entry{"Help", "Handbook"}}) {
+        Entry{"File", "Calculation sheet"}, Entry{"Edit", "Paste table"}, Entry{"Edit", "Preferences"},
+        Entry{"Study", "Title"}, Entry{"Study", "Points"}, Entry{"Study", "Sections"},
+        Entry{"Study", "Load cases"}, Entry{"Study", "Combinations"}, Entry{"Study", "Build"},
+        Entry{"Study", "Materials"}, Entry{"Study", "Compare"}, Entry{"Study", "Working"},
+        Entry{"Help", "Published"}, Entry{"Help", "Handbook"}}) {
     const QWidget* dialog = opened(entry.menu, entry.words);
     ASSERT_NE(dialog, nullptr) << entry.words;
     EXPECT_GT(widgetsWithPlaceIn(*dialog), 0) << entry.words;
