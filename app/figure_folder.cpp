@@ -13,6 +13,7 @@ namespace {
 
 std::vector<std::string> namesOf(const std::vector<PointFigure>& figures) {
   std::vector<std::string> names;
+  names.reserve(figures.size());
   for (const PointFigure& figure : figures)
     names.push_back(figure.file.toStdString());
   return names;
