@@ -2,6 +2,7 @@
 #include "ui/given/fold_group.h"
 
 #include "ui/look/look.h"
+#include "ui/look/steady_label.h"
 
 #include <QApplication>
 #include <QHBoxLayout>
@@ -62,11 +63,10 @@ void FoldHeading::paintEvent(QPaintEvent*) {
 }
 
 FoldGroup::FoldGroup(const QString& title, Role role, QWidget* parent)
-    : QWidget(parent), m_heading(new FoldHeading(title, role, this)), m_summary(new QLabel(this)),
+    : QWidget(parent), m_heading(new FoldHeading(title, role, this)), m_summary(new SteadyLabel(this)),
       m_content(new QWidget(this)), m_body(new QVBoxLayout(m_content)) {
   m_summary->setForegroundRole(QPalette::PlaceholderText);
-  m_summary->setAlignment(Qt::AlignRight | Qt::AlignVCenter);
-  m_summary->setWordWrap(true);
+  m_summary->label().setAlignment(Qt::AlignRight | Qt::AlignVCenter);
   m_summary->hide();
   m_body->setContentsMargins(0, 0, 0, 0);
   m_body->setSpacing(4);

@@ -6,10 +6,11 @@
 #include <QAbstractButton>
 #include <QWidget>
 
-class QLabel;
 class QVBoxLayout;
 
 namespace planewright {
+
+class SteadyLabel;
 
 /// The heading that folds a group: a triangle and a bold title in the colour of its role.
 class FoldHeading : public QAbstractButton {
@@ -49,7 +50,7 @@ private:
   void showFold();
 
   FoldHeading* m_heading;
-  QLabel* m_summary;
+  SteadyLabel* m_summary;
   QWidget* m_content;
   QWidget* m_corner = nullptr;
   QVBoxLayout* m_body;

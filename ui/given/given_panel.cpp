@@ -12,6 +12,7 @@
 #include "ui/given/sense_key.h"
 #include "ui/given/stress_group.h"
 #include "ui/look/look.h"
+#include "ui/look/steady_label.h"
 
 #include <QFrame>
 #include <QHBoxLayout>
@@ -44,12 +45,9 @@ GivenPanel::GivenPanel(Desk& desk, QWidget* parent) : ColumnArea(parent), m_desk
   buildHeading(content);
   buildGroups(content);
   setWidget(content);
-  orderTabs();
-  watchFields();
-  connect(m_section, &SectionGroup::fieldsChanged, this, [this] {
-    watchFields();
-    orderTabs();
-  });
+  takeFields();
+  connect(m_stress, &StressGroup::fieldsChanged, this, &GivenPanel::takeFields);
+  connect(m_section, &SectionGroup::fieldsChanged, this, &GivenPanel::takeFields);
   connect(&m_desk, &Desk::changed, this, &GivenPanel::refresh);
   refresh();
 }
@@ -71,10 +69,9 @@ void GivenPanel::buildHeading(QWidget* content) {
   QFont bold = font();
   bold.setBold(true);
   heading->setFont(bold);
-  m_fact = new QLabel(content);
+  m_fact = new SteadyLabel(content);
   m_fact->setForegroundRole(QPalette::PlaceholderText);
-  m_fact->setAlignment(Qt::AlignRight | Qt::AlignVCenter);
-  m_fact->setWordWrap(true);
+  m_fact->label().setAlignment(Qt::AlignRight | Qt::AlignVCenter);
   auto* line = new QHBoxLayout;
   line->addWidget(heading);
   line->addWidget(m_fact, 1);
@@ -90,24 +87,34 @@ void GivenPanel::buildGroups(QWidget* content) {
   m_stress = new StressGroup(m_desk, content);
   m_section = new SectionGroup(m_desk, content);
   m_line = new LineGroup(m_desk, 0, content);
-  m_secondLine = new LineGroup(m_desk, 1, content);
   m_reading = new ReadingGroup(m_desk, content);
   m_conventions = new ConventionGroup(m_desk, content);
   m_notes = new FoldGroup(tr("Notes"), Role::ink, content);
   m_note = new NoteField(m_desk, m_notes);
   m_notes->body().addWidget(m_note);
   m_notes->setFolded(true);
-  for (FoldGroup* group : std::initializer_list<FoldGroup*>{m_stress, m_section, m_line, m_secondLine,
-                                                            m_reading, m_conventions, m_notes}) {
-    if (group != m_stress) {
-      QFrame* above = rule(content);
-      rows->addWidget(above);
-      if (group == m_secondLine)
-        m_secondRule = above;
-    }
+  for (FoldGroup* group :
+       std::initializer_list<FoldGroup*>{m_stress, m_section, m_line, m_reading, m_conventions, m_notes}) {
+    if (group != m_stress)
+      rows->addWidget(rule(content));
     rows->addWidget(group);
   }
   rows->addStretch(1);
+}
+
+void GivenPanel::makeSecondLine() {
+  m_secondLine = new LineGroup(m_desk, 1, widget());
+  m_secondRule = rule(widget());
+  auto* rows = static_cast<QVBoxLayout*>(widget()->layout());
+  const int below = rows->indexOf(m_line) + 1;
+  rows->insertWidget(below, m_secondRule);
+  rows->insertWidget(below + 1, m_secondLine);
+  takeFields();
+}
+
+void GivenPanel::takeFields() {
+  watchFields();
+  orderTabs();
 }
 
 // Tab goes down what an engineer types first: components and their sources, the section, line, reading plane;
@@ -123,15 +130,18 @@ void GivenPanel::orderTabs() {
   add(m_section->fields());
   add(ofStress.mid(ofStress.size() - 1)); // the free edge
   add(m_line->fields().mid(0, 2));
-  add(m_secondLine->fields().mid(0, 2));
+  if (m_secondLine)
+    add(m_secondLine->fields().mid(0, 2));
   add(m_reading->fields());
   order += m_reading->buttons();
   order += QList<QWidget*>{&m_section->heading()} + m_section->buttons();
   order += QList<QWidget*>{&m_stress->heading()} + m_stress->buttons();
   order += QList<QWidget*>{&m_line->heading()} + m_line->buttons();
   add(m_line->fields().mid(2));
-  order += QList<QWidget*>{&m_secondLine->heading()} + m_secondLine->buttons();
-  add(m_secondLine->fields().mid(2));
+  if (m_secondLine) {
+    order += QList<QWidget*>{&m_secondLine->heading()} + m_secondLine->buttons();
+    add(m_secondLine->fields().mid(2));
+  }
   order += QList<QWidget*>{&m_reading->heading(), &m_conventions->heading()} + m_conventions->buttons();
   add(m_conventions->fields());
   order += QList<QWidget*>{&m_notes->heading(), m_note};
@@ -140,18 +150,23 @@ void GivenPanel::orderTabs() {
 }
 
 QList<EntryField*> GivenPanel::fields() const {
-  return m_stress->fields() + m_section->fields() + m_line->fields() + m_secondLine->fields() +
-         m_reading->fields() + m_conventions->fields();
+  const QList<EntryField*> second = m_secondLine ? m_secondLine->fields() : QList<EntryField*>();
+  return m_stress->fields() + m_section->fields() + m_line->fields() + second + m_reading->fields() +
+         m_conventions->fields();
 }
 
 void GivenPanel::refresh() {
   m_fact->setText(tr("bare numbers in %1").arg(fromUtf8(m_desk.study().units.stress)));
   const QString note = fromUtf8(shownPoint(m_desk.study()).note);
   const bool hasSecond = shownPoint(m_desk.study()).lines.size() > 1;
-  if (!hasSecond)
-    FoldGroup::keepKeys(*m_secondLine, m_line->heading());
-  m_secondLine->setVisible(hasSecond);
-  m_secondRule->setVisible(hasSecond);
+  if (hasSecond && !m_secondLine)
+    makeSecondLine();
+  if (m_secondLine) {
+    if (!hasSecond)
+      FoldGroup::keepKeys(*m_secondLine, m_line->heading());
+    m_secondLine->setVisible(hasSecond);
+    m_secondRule->setVisible(hasSecond);
+  }
   m_notes->setSummary(note.isEmpty() ? tr("none") : note.section(QLatin1Char('\n'), 0, 0));
   countProblems();
 }

@@ -4,8 +4,6 @@
 #include "ui/desk/desk.h"
 #include "ui/look/column_area.h"
 
-class QLabel;
-
 namespace planewright {
 
 class ConventionGroup;
@@ -15,6 +13,7 @@ class LineGroup;
 class NoteField;
 class ReadingGroup;
 class SectionGroup;
+class SteadyLabel;
 class StressGroup;
 
 /// Everything that is given, in groups that fold: what counts positive, stress, line, reading plane,
@@ -47,6 +46,8 @@ signals:
 private:
   void buildGroups(QWidget* content);
   void buildHeading(QWidget* content);
+  void makeSecondLine();
+  void takeFields();
   void watchFields();
   void orderTabs();
   void refresh();
@@ -56,11 +57,11 @@ private:
   QList<EntryField*> fields() const;
 
   Desk& m_desk;
-  QLabel* m_fact;
+  SteadyLabel* m_fact;
   StressGroup* m_stress;
   SectionGroup* m_section;
   LineGroup* m_line;
-  LineGroup* m_secondLine;
+  LineGroup* m_secondLine = nullptr; ///< made when a point first has a second line
   QWidget* m_secondRule = nullptr;
   ReadingGroup* m_reading;
   ConventionGroup* m_conventions;

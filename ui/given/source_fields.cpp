@@ -32,6 +32,17 @@ QString sizesOf(const TypedSection& section) {
   return sizes.join(QStringLiteral(" × "));
 }
 
+Spot firstOf(Spot source) {
+  switch (source) {
+  case Spot::forces:
+    return Spot::forceN;
+  case Spot::pressure:
+    return Spot::pressureP;
+  default:
+    return Spot::gaugeStrainA;
+  }
+}
+
 bool isOfIsotropic(Spot spot) {
   return spot == Spot::rosetteE || spot == Spot::rosetteNu;
 }
@@ -39,29 +50,37 @@ bool isOfIsotropic(Spot spot) {
 } // namespace
 
 SourceFields::SourceFields(Desk& desk, Spot source, CaseId caseId, QWidget* parent)
-    : QWidget(parent), m_desk(desk), m_source(source), m_caseId(std::move(caseId)),
-      m_remove(new QuietButton(tr("remove"), Role::focus, this)) {
+    : QWidget(parent), m_desk(desk), m_source(source), m_caseId(std::move(caseId)) {
+  setProperty("helpPlace", source == Spot::forces     ? "given#section-forces"
+                           : source == Spot::pressure ? "given#pressure"
+                                                      : "given#rosette");
+}
+
+void SourceFields::make() {
+  makeHead();
+  if (m_source == Spot::forces)
+    addForces();
+  else if (m_source == Spot::pressure)
+    addPressure();
+  else
+    addRosette();
+  Q_EMIT made();
+}
+
+void SourceFields::makeHead() {
   auto* rows = new QVBoxLayout(this);
   rows->setContentsMargins(0, 4, 0, 0);
   rows->setSpacing(4);
   auto* head = new QHBoxLayout;
-  auto* title = new QLabel(shown(rowOf(source).label), this);
+  auto* title = new QLabel(shown(rowOf(m_source).label), this);
   title->setForegroundRole(QPalette::PlaceholderText);
+  m_remove = new QuietButton(tr("remove"), Role::focus, this);
+  m_remove->setAccessibleName(tr("remove %1").arg(shown(rowOf(m_source).label)));
+  connect(m_remove, &QAbstractButton::clicked, this, &SourceFields::remove);
   head->addWidget(title);
   head->addStretch();
   head->addWidget(m_remove);
   rows->addLayout(head);
-  m_remove->setAccessibleName(tr("remove %1").arg(shown(rowOf(source).label)));
-  connect(m_remove, &QAbstractButton::clicked, this, &SourceFields::remove);
-  setProperty("helpPlace", source == Spot::forces     ? "given#section-forces"
-                           : source == Spot::pressure ? "given#pressure"
-                                                      : "given#rosette");
-  if (source == Spot::forces)
-    addForces();
-  else if (source == Spot::pressure)
-    addPressure();
-  else
-    addRosette();
 }
 
 Place SourceFields::place(const Study& study, Spot spot) const {
@@ -129,11 +148,13 @@ void SourceFields::addChoice(Spot spot, const QString& meaning) {
 }
 
 QList<QWidget*> SourceFields::buttons() const {
+  if (!m_remove)
+    return {};
   return m_choice ? QList<QWidget*>{m_choice, m_remove} : QList<QWidget*>{m_remove};
 }
 
 bool SourceFields::isPresent() const {
-  return textAt(m_desk.study(), place(m_desk.study(), m_spots.front())).has_value();
+  return textAt(m_desk.study(), place(m_desk.study(), firstOf(m_source))).has_value();
 }
 
 // Section forces need a section, and measured strains a case that is measured.
@@ -203,6 +224,8 @@ void SourceFields::add() {
 
 void SourceFields::refresh() {
   const bool present = isPresent();
+  if (present && m_fields.empty())
+    make(); // while hidden, so that all of it is shown together
   setVisible(present);
   if (!present)
     return;

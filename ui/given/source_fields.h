@@ -13,7 +13,7 @@ namespace planewright {
 class QuietButton;
 
 /// One source of the stresses of a case: section forces, pressure or a rosette. Its fields are seen where the
-/// case at the shown point has the source.
+/// case at the shown point has the source, and made when it first has.
 class SourceFields : public QWidget {
   Q_OBJECT
 
@@ -29,7 +29,13 @@ public:
   void add();
   void refresh();
 
+signals:
+  /// The fields are there from now on.
+  void made();
+
 private:
+  void make();
+  void makeHead();
   void addField(Spot spot, const QString& meaning);
   void addForces();
   void addPressure();
@@ -50,7 +56,7 @@ private:
   QList<EntryField*> m_fields;
   QList<Spot> m_spots; ///< of the fields
   QuietButton* m_choice = nullptr;
-  QuietButton* m_remove;
+  QuietButton* m_remove = nullptr;
 };
 
 } // namespace planewright

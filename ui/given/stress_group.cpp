@@ -100,6 +100,7 @@ void StressGroup::addSources() {
         m_desk, spot, [this](const Study& study) { return caseId(study); }, this);
     body().addWidget(source);
     m_sources += source;
+    connect(source, &SourceFields::made, this, &StressGroup::fieldsChanged);
     menu->addAction(shown(rowOf(spot).label), source, &SourceFields::add);
   }
   m_addSource->setMenu(menu);

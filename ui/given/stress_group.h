@@ -29,6 +29,10 @@ public:
   bool isOfCase(const EntryField& field) const;
   QList<QWidget*> buttons() const;
 
+signals:
+  /// Other fields stand here than before.
+  void fieldsChanged();
+
 private:
   void addStress(Spot spot, const QString& meaning, decltype(EntryBinding::echo) echo);
   void addComponent(Spot spot, const QString& meaning);

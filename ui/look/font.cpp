@@ -2,6 +2,7 @@
 #include "ui/look/font.h"
 
 #include <QFontDatabase>
+#include <QResource>
 #include <QStringList>
 
 #include <algorithm>
@@ -11,8 +12,10 @@ namespace planewright {
 namespace {
 
 bool load(const char* file) {
-  const int id =
-      QFontDatabase::addApplicationFont(QStringLiteral(":/planewright/fonts/") + QLatin1String(file));
+  // Built in as it is, so that it is used where it lies.
+  const QResource font(QStringLiteral(":/planewright/fonts/") + QLatin1String(file));
+  const int id = QFontDatabase::addApplicationFontFromData(
+      QByteArray::fromRawData(reinterpret_cast<const char*>(font.data()), font.size()));
   return id >= 0 && QFontDatabase::applicationFontFamilies(id).contains(QLatin1String(programFamily));
 }
 

@@ -2,6 +2,7 @@
 #include "ui/look/ring_style.h"
 
 #include "ui/look/look.h"
+#include "ui/look/more_icon.h"
 
 #include <QAbstractButton>
 #include <QAbstractItemView>
@@ -52,6 +53,11 @@ int RingStyle::pixelMetric(PixelMetric metric, const QStyleOption* option, const
   if (isText || metric == PM_HeaderMargin)
     return room;
   return QProxyStyle::pixelMetric(metric, option, widget);
+}
+
+QIcon RingStyle::standardIcon(StandardPixmap icon, const QStyleOption* option, const QWidget* widget) const {
+  return icon == SP_ToolBarHorizontalExtensionButton ? moreIcon()
+                                                     : QProxyStyle::standardIcon(icon, option, widget);
 }
 
 QRect RingStyle::subElementRect(SubElement element, const QStyleOption* option, const QWidget* widget) const {

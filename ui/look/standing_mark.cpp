@@ -12,7 +12,6 @@ constexpr double stroke = 1.8;
 void paintSign(QPainter& painter, const QRectF& box, const QString& sign) {
   QFont font = painter.font();
   font.setBold(true);
-  font.setPixelSize(static_cast<int>(box.height()));
   painter.setFont(font);
   painter.drawText(box, Qt::AlignCenter, sign);
 }

@@ -20,18 +20,27 @@ void SteadyLabel::setText(const QString& text) {
   if (text == m_label->text())
     return;
   m_label->setText(text);
+  m_heights.clear();
   if (heightForWidth(width()) != height())
     updateGeometry();
 }
 
 int SteadyLabel::heightForWidth(int width) const {
-  return m_label->heightForWidth(width);
+  const auto known = m_heights.constFind(width);
+  if (known != m_heights.cend())
+    return *known;
+  return *m_heights.insert(width, m_label->heightForWidth(width));
 }
 QSize SteadyLabel::sizeHint() const {
   return m_label->sizeHint();
 }
 QSize SteadyLabel::minimumSizeHint() const {
   return m_label->minimumSizeHint();
+}
+
+void SteadyLabel::changeEvent(QEvent* event) {
+  m_heights.clear();
+  QWidget::changeEvent(event);
 }
 
 void SteadyLabel::resizeEvent(QResizeEvent*) {

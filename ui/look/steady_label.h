@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include <QHash>
 #include <QWidget>
 
 class QLabel;
@@ -13,6 +14,7 @@ class SteadyLabel : public QWidget {
 public:
   explicit SteadyLabel(QWidget* parent = nullptr);
 
+  /// To be set up before it is laid out.
   QLabel& label() { return *m_label; }
   QString text() const;
   void setText(const QString& text);
@@ -23,10 +25,12 @@ public:
   QSize minimumSizeHint() const override;
 
 protected:
+  void changeEvent(QEvent* event) override;
   void resizeEvent(QResizeEvent* event) override;
 
 private:
-  QLabel* m_label; ///< lies in no layout, which would pass on each change
+  QLabel* m_label;                   ///< lies in no layout, which would pass on each change
+  mutable QHash<int, int> m_heights; ///< by width: one turn of a layout asks a dozen times
 };
 
 } // namespace planewright

@@ -2,6 +2,7 @@
 #include "ui/look/strip.h"
 
 #include "ui/look/look.h"
+#include "ui/look/steady_label.h"
 
 #include <QEvent>
 #include <QHBoxLayout>
@@ -12,7 +13,7 @@
 
 namespace planewright {
 
-Strip::Strip(QWidget* parent) : QWidget(parent), m_label(new QLabel(this)), m_scope(new QObject(this)) {
+Strip::Strip(QWidget* parent) : QWidget(parent), m_label(new SteadyLabel(this)), m_scope(new QObject(this)) {
   auto* row = new QHBoxLayout(this);
   row->setContentsMargins(12, 4, 8, 4);
   row->addWidget(m_label, 1);
@@ -22,11 +23,10 @@ Strip::Strip(QWidget* parent) : QWidget(parent), m_label(new QLabel(this)), m_sc
   away->setAccessibleName(tr("Put this line away"));
   away->setToolTip(away->accessibleName());
   row->addWidget(away, 0, Qt::AlignTop);
-  m_label->setTextFormat(Qt::RichText);
-  m_label->setWordWrap(true);
-  m_label->setTextInteractionFlags(Qt::LinksAccessibleByMouse | Qt::LinksAccessibleByKeyboard);
+  m_label->label().setTextFormat(Qt::RichText);
+  m_label->label().setTextInteractionFlags(Qt::LinksAccessibleByMouse | Qt::LinksAccessibleByKeyboard);
   connect(away, &QToolButton::clicked, this, &QWidget::hide);
-  connect(m_label, &QLabel::linkActivated, this,
+  connect(&m_label->label(), &QLabel::linkActivated, this,
           [this](const QString& link) { Q_EMIT linkClicked(QUrl::fromPercentEncoding(link.toLatin1())); });
   hide();
 }

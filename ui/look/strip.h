@@ -4,9 +4,10 @@
 #include <QWidget>
 
 class QHBoxLayout;
-class QLabel;
 
 namespace planewright {
+
+class SteadyLabel;
 
 /// A line under the state bar: a sentence, links that act on it, and a cross to put it away.
 class Strip : public QWidget {
@@ -44,7 +45,7 @@ protected:
 private:
   void write();
 
-  QLabel* m_label;
+  SteadyLabel* m_label;
   QObject* m_scope; ///< lives as long as the sentence; its links end with it
   QString m_sentence;
   QStringList m_offers;

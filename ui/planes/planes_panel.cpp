@@ -22,7 +22,8 @@ constexpr int ownPages = 2; ///< the tables; what is adopted comes behind them
 
 PlanesPanel::PlanesPanel(Desk& desk, QWidget* parent)
     : QWidget(parent), m_desk(desk), m_tabs(new QuietTabs(this)), m_pages(new QStackedWidget(this)),
-      m_planes(new PlanesPage(desk, m_pages)), m_sweep(new SweepPage(desk, m_pages)),
+      m_planes(new PlanesPage(desk, m_pages)),
+      m_sweep(new Later<SweepPage>([&desk](QWidget* place) { return new SweepPage(desk, place); }, m_pages)),
       m_copy(new QuietButton(tr("Copy table"), Role::focus, this)), m_range(new QLabel(this)) {
   setAutoFillBackground(true);
   setBackgroundRole(QPalette::AlternateBase);
@@ -96,8 +97,12 @@ void PlanesPanel::showAdopted() {
   m_tabs->setCurrentIndex(m_tabs->count() - 1);
 }
 
+SweepPage& PlanesPanel::sweep() const {
+  return m_sweep->page();
+}
+
 PlaneTable& PlanesPanel::shownTable() const {
-  return m_pages->currentWidget() == m_sweep ? m_sweep->table() : m_planes->table();
+  return m_pages->currentWidget() == m_sweep ? sweep().table() : m_planes->table();
 }
 
 void PlanesPanel::copyShown() {

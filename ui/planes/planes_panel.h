@@ -2,6 +2,7 @@
 #pragma once
 
 #include "ui/desk/desk.h"
+#include "ui/look/later.h"
 
 #include <QWidget>
 
@@ -25,7 +26,7 @@ public:
   ~PlanesPanel() override;
 
   PlanesPage& planes() const { return *m_planes; }
-  SweepPage& sweep() const { return *m_sweep; }
+  SweepPage& sweep() const;
   QuietTabs& tabs() const { return *m_tabs; }
   QSize sizeHint() const override { return {830, 300}; }
 
@@ -46,7 +47,7 @@ private:
   QuietTabs* m_tabs;
   QStackedWidget* m_pages;
   PlanesPage* m_planes;
-  SweepPage* m_sweep;
+  Later<SweepPage>* m_sweep;
   QuietButton* m_copy;
   QLabel* m_range; ///< what must stand with least and greatest values
 };

@@ -58,7 +58,8 @@ MainWindow::MainWindow(FileQuestions questions)
       m_stateBar(new StateBar(m_desk, this)), m_welcome(new Strip(this)), m_trouble(new Strip(this)),
       m_given(new GivenPanel(m_desk)), m_element(new ElementView(m_desk)),
       m_circle(new CircleView(m_desk, nullptr)), m_planes(new PlanesPanel(m_desk)),
-      m_strength(new StrengthPanel(m_desk)), m_summary(new SummaryPage(m_desk)),
+      m_strength(new StrengthPanel(m_desk)),
+      m_summary(new Later<SummaryPage>([this](QWidget* parent) { return newSummary(parent); }, nullptr)),
       m_body(new Body({m_given, m_element, m_circle, m_planes, m_strength}, this)),
       m_pages(new QStackedWidget(this)), m_status(new StatusLine(this)),
       m_areas(new Areas({m_stateBar, m_given, m_element, m_circle, m_planes, m_strength, m_summary}, this)),
@@ -107,6 +108,21 @@ void MainWindow::build() {
   QWidget::setTabOrder(&m_stateBar->figureButton(), m_given);
 }
 
+SummaryPage& MainWindow::summary() const {
+  return m_summary->page();
+}
+
+SummaryPage* MainWindow::newSummary(QWidget* parent) {
+  auto* summary = new SummaryPage(m_desk, parent);
+  connect(summary, &SummaryPage::opened, this, [this] {
+    if (m_body->hasRoomForStrength())
+      showPointPage();
+    else
+      enterStrength();
+  });
+  return summary;
+}
+
 void MainWindow::connectViews() {
   connect(&m_desk, &Desk::said, this, [this](const QString& message) { m_status->say(message); });
   connect(m_desk.undoStack(), &QUndoStack::indexChanged, this, &MainWindow::tellStep);
@@ -117,12 +133,6 @@ void MainWindow::connectViews() {
           [this](int count, const QString&) { m_stateBar->verdict().setNotTaken(count); });
   connect(&m_stateBar->verdict(), &QAbstractButton::clicked, this, &MainWindow::enterStrength);
   connect(m_strength, &StrengthPanel::materialsWanted, this, &MainWindow::showMaterials);
-  connect(m_summary, &SummaryPage::opened, this, [this] {
-    if (m_body->hasRoomForStrength())
-      showPointPage();
-    else
-      enterStrength();
-  });
   connect(m_pages, &QStackedWidget::currentChanged, this,
           [this] { m_stateBar->verdict().setNamesPoint(m_pages->currentWidget() == m_summary); });
   connect(m_body, &Body::roomForStrengthChanged, this, [this](bool room) {

@@ -2,6 +2,7 @@
 #pragma once
 
 #include "ui/desk/desk.h"
+#include "ui/look/later.h"
 #include "ui/shell/filing.h"
 
 #include <QMainWindow>
@@ -64,7 +65,7 @@ public:
   CircleView& circle() const { return *m_circle; }
   PlanesPanel& planes() const { return *m_planes; }
   StrengthPanel& strength() const { return *m_strength; }
-  SummaryPage& summary() const { return *m_summary; }
+  SummaryPage& summary() const;
   /// The strip that greets, and the one that tells of files.
   Strip& welcome() const { return *m_welcome; }
   Strip& trouble() const { return *m_trouble; }
@@ -93,6 +94,7 @@ private:
   static void raised(QDialog& dialog);
   void build();
   void connectViews();
+  SummaryPage* newSummary(QWidget* parent);
   void restoreGeometryAndSizes();
 
   void addFileMenu();
@@ -136,7 +138,7 @@ private:
   CircleView* m_circle;
   PlanesPanel* m_planes;
   StrengthPanel* m_strength;
-  SummaryPage* m_summary;
+  Later<SummaryPage>* m_summary;
   Body* m_body;
   QStackedWidget* m_pages;
   StatusLine* m_status;

@@ -53,13 +53,13 @@ void MainWindow::showFile(const QString& path) {
       settleDrafts();
       m_filing->saveAs();
     });
-  } else if (isWorkedExample(m_desk.study())) {
-    m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
-    m_welcome->offer(tr("New study"), [this] { beginStudy(); });
-    m_welcome->offer(tr("Conventions in pictures"), [this] { m_help->show(QStringLiteral("conventions")); });
   } else if (m_desk.study() == preferredStudy()) {
     m_welcome->say(tr("A new study: type the stresses of your point."));
     m_welcome->offer(tr("Open the worked example"), [this] { openWorkedExample(); });
+    m_welcome->offer(tr("Conventions in pictures"), [this] { m_help->show(QStringLiteral("conventions")); });
+  } else if (isWorkedExample(m_desk.study())) {
+    m_welcome->say(tr("Worked example, invented. Start your own: Ctrl+N."));
+    m_welcome->offer(tr("New study"), [this] { beginStudy(); });
     m_welcome->offer(tr("Conventions in pictures"), [this] { m_help->show(QStringLiteral("conventions")); });
   } else {
     m_welcome->hide();

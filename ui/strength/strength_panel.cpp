@@ -60,8 +60,7 @@ StrengthPanel::StrengthPanel(Desk& desk, QWidget* parent)
           desk, [this] { return m_checks->selected(); }, this)),
       m_mode(wrappedLabel(QPalette::WindowText, this)), m_governs(new QuietButton({}, Role::focus, this)),
       m_scale(new QuietButton({}, Role::focus, this)),
-      m_plot(new UtilisationPlot(
-          desk, [this] { return m_checks->selected(); }, this)),
+      m_plot(new Later<UtilisationPlot>([this](QWidget* place) { return newPlot(place); }, this)),
       m_sentences(wrappedLabel(QPalette::WindowText, this)),
       m_cautions(wrappedLabel(QPalette::PlaceholderText, this)),
       m_more(new QuietButton(tr("More"), Role::focus, this)) {
@@ -77,21 +76,32 @@ StrengthPanel::StrengthPanel(Desk& desk, QWidget* parent)
   connect(m_checks, &CheckList::removalWanted, this, &StrengthPanel::removeCheck);
   connect(m_checks, &CheckList::selectionMoved, this, [this] {
     m_fields->refresh();
-    m_plot->refresh();
+    if (m_plot->isMade())
+      plot().refresh();
     refresh();
   });
   connect(m_side, &QAbstractButton::clicked, this, &StrengthPanel::showSideBySide);
   connect(m_governs, &QAbstractButton::clicked, this, &StrengthPanel::showGoverning);
   connect(m_scale, &QAbstractButton::clicked, this, [this] {
-    m_plot->setLogarithmic(!m_plot->isLogarithmic());
+    plot().setLogarithmic(!plot().isLogarithmic());
     refresh();
   });
-  connect(m_plot, &UtilisationPlot::reachChanged, this, &StrengthPanel::refresh);
   connect(m_more, &QAbstractButton::clicked, this, &StrengthPanel::showLimits);
   connect(&m_desk, &Desk::changed, this, &StrengthPanel::refreshAdd);
   connect(&m_desk, &Desk::judgedAnew, this, &StrengthPanel::refresh);
   refreshAdd();
   refresh();
+}
+
+UtilisationPlot* StrengthPanel::newPlot(QWidget* place) {
+  auto* plot = new UtilisationPlot(
+      m_desk, [this] { return m_checks->selected(); }, place);
+  connect(plot, &UtilisationPlot::reachChanged, this, &StrengthPanel::refresh);
+  return plot;
+}
+
+UtilisationPlot& StrengthPanel::plot() const {
+  return m_plot->page();
 }
 
 void StrengthPanel::build() {
@@ -116,6 +126,7 @@ void StrengthPanel::build() {
   rows->addWidget(m_mode);
   rows->addLayout(rowOf({m_governs}));
   rows->addWidget(m_plot);
+  m_plot->hide();
   rows->addLayout(rowOf({m_scale}));
   rows->addWidget(m_sentences);
   rows->addWidget(m_cautions);
@@ -225,8 +236,11 @@ void StrengthPanel::refresh() {
   for (QWidget* widget : std::initializer_list<QWidget*>{m_remove, m_side, m_sentences})
     widget->setVisible(check.has_value());
   refreshGoverns();
-  m_scale->setVisible(check && m_plot->reachesFar());
-  m_scale->setText(m_plot->isLogarithmic() ? tr("Scale: logarithmic") : tr("Scale: 0 to 2"));
+  const bool hasPlot = check && readout.checks[*check].band;
+  m_plot->setVisible(hasPlot);
+  m_scale->setVisible(hasPlot && plot().reachesFar());
+  if (hasPlot)
+    m_scale->setText(plot().isLogarithmic() ? tr("Scale: logarithmic") : tr("Scale: 0 to 2"));
   if (!check) {
     m_cautions->setText(shown(limitsOfPointChecks(MaterialKind::generic).front()));
     return;

@@ -2,6 +2,7 @@
 #pragma once
 
 #include "ui/desk/desk.h"
+#include "ui/look/later.h"
 
 #include <QWidget>
 
@@ -27,7 +28,7 @@ public:
   VerdictBlock& verdict() const { return *m_verdict; }
   CheckList& checks() const { return *m_checks; }
   CheckFields& fields() const { return *m_fields; }
-  UtilisationPlot& plot() const { return *m_plot; }
+  UtilisationPlot& plot() const;
   QuietButton& addButton() const { return *m_add; }
   QString sentences() const;
   QString cautions() const;
@@ -42,6 +43,7 @@ protected:
   void paintEvent(QPaintEvent* event) override;
 
 private:
+  UtilisationPlot* newPlot(QWidget* place);
   void build();
   void listMaterials();
   void addCheck(const std::string& material);
@@ -64,7 +66,7 @@ private:
   SteadyLabel* m_mode;
   QuietButton* m_governs;
   QuietButton* m_scale;
-  UtilisationPlot* m_plot;
+  Later<UtilisationPlot>* m_plot;
   SteadyLabel* m_sentences;
   SteadyLabel* m_cautions;
   QuietButton* m_more;

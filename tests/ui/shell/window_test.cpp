@@ -9,7 +9,9 @@
 #include "ui/given/given_panel.h"
 #include "ui/look/look.h"
 #include "ui/look/strip.h"
+#include "ui/planes/plane_table.h"
 #include "ui/planes/planes_panel.h"
+#include "ui/planes/sweep_page.h"
 #include "ui/screen/screen_dialog.h"
 #include "ui/shell/body.h"
 #include "ui/shell/main_window.h"
@@ -21,6 +23,7 @@
 #include "ui/shell/worked_example.h"
 #include "ui/strength/strength_panel.h"
 #include "ui/strength/summary_page.h"
+#include "ui/strength/utilisation_plot.h"
 
 #include <QAbstractItemView>
 #include <QApplication>
@@ -32,6 +35,7 @@
 #include <QPlainTextEdit>
 #include <QPushButton>
 #include <QSplitter>
+#include <QTabBar>
 #include <QTableView>
 #include <QTest>
 
@@ -67,6 +71,25 @@ protected:
   }
   std::unique_ptr<MainWindow> m_window;
 };
+
+TEST_F(WindowTest, makesWhatIsNotShownWhenItFirstIs) {
+  MainWindow& window = shown();
+  EXPECT_TRUE(window.findChildren<SummaryPage*>().isEmpty());
+  EXPECT_TRUE(window.findChildren<SweepPage*>().isEmpty());
+  EXPECT_TRUE(window.findChildren<UtilisationPlot*>().isEmpty());
+  window.openWorkedExample();
+  EXPECT_EQ(window.findChildren<UtilisationPlot*>().size(), 1);
+  QTest::keyClick(&window, Qt::Key_2, Qt::ControlModifier);
+  ASSERT_EQ(window.findChildren<SummaryPage*>().size(), 1);
+  EXPECT_TRUE(window.summary().table().isVisible());
+  EXPECT_TRUE(window.summary().table().hasFocus());
+  EXPECT_GT(window.summary().table().model()->rowCount(), 0);
+  QTest::keyClick(&window, Qt::Key_1, Qt::ControlModifier);
+  auto* tabs = window.findChild<PlanesPanel*>()->findChild<QTabBar*>();
+  tabs->setCurrentIndex(1);
+  ASSERT_EQ(window.findChildren<SweepPage*>().size(), 1);
+  EXPECT_GT(window.findChild<SweepPage*>()->table().model()->rowCount(), 4);
+}
 
 TEST_F(WindowTest, enterOnTheCircleTypesTheAngleOfTheReadingPlane) {
   MainWindow& window = shown();

@@ -1,0 +1,47 @@
+// SPDX-License-Identifier: GPL-3.0-or-later
+#pragma once
+
+#include <QVBoxLayout>
+#include <QVariant>
+#include <QWidget>
+
+#include <functional>
+#include <utility>
+
+namespace planewright {
+
+/// The place of a page that is made when it is first shown or asked for, so that a window opens without it.
+template <class Page>
+class Later : public QWidget {
+public:
+  /// `make` makes the page in the parent that it is given.
+  Later(std::function<Page*(QWidget*)> make, QWidget* parent) : QWidget(parent), m_make(std::move(make)) {}
+
+  Page& page() {
+    if (!m_page)
+      build();
+    return *m_page;
+  }
+  bool isMade() const { return m_page; }
+
+protected:
+  void showEvent(QShowEvent* event) override {
+    page();
+    QWidget::showEvent(event);
+  }
+
+private:
+  void build() {
+    m_page = m_make(this);
+    auto* whole = new QVBoxLayout(this);
+    whole->setContentsMargins(0, 0, 0, 0);
+    whole->addWidget(m_page);
+    setFocusProxy(m_page);
+    m_page->show();
+  }
+
+  std::function<Page*(QWidget*)> m_make;
+  Page* m_page = nullptr;
+};
+
+} // namespace planewright
