@@ -2,6 +2,8 @@
 #include "ui/chart/frame.h"
 
 #include "ui/chart/tick_item.h"
+#include "ui/chart/zoomed_chart.h"
+#include "ui/look/zoom.h"
 
 #include <QChart>
 #include <QEvent>
@@ -22,6 +24,7 @@ constexpr double rowsBelow = 38;
 constexpr double marginRight = 16;
 constexpr double marginLeft = 8;
 constexpr double leastExtent = 40;
+constexpr QSize least = {240, 200};
 
 /// An axis that only maps: grid, ticks and labels are the frame's own. Those of the chart cost it a layout of
 /// every label at each new range, and its softened grid lines cost more than all else in the plot.
@@ -51,8 +54,12 @@ EqualScaleFrame::EqualScaleFrame(QWidget* parent)
   viewport()->setAttribute(Qt::WA_OpaquePaintEvent);
   viewport()->setAutoFillBackground(false);
   setFrameShape(QFrame::NoFrame);
-  setMinimumSize(240, 200);
+  setMinimumSize(least);
   putColours();
+}
+
+double EqualScaleFrame::zoom() const {
+  return zoomOf(*this, least);
 }
 
 void EqualScaleFrame::attach(QXYSeries* series) {
@@ -67,11 +74,12 @@ QPointF EqualScaleFrame::chartPoint(QPointF values) const {
 
 QRectF EqualScaleFrame::plotFor(double tickWidth) const {
   const double left = marginLeft + tickWidth + tickGap;
-  return {left, rowAbove, std::max(leastExtent, width() - left - marginRight),
-          std::max(leastExtent, height() - rowAbove - rowsBelow)};
+  return {left, rowAbove, std::max(leastExtent, extent().width() - left - marginRight),
+          std::max(leastExtent, extent().height() - rowAbove - rowsBelow)};
 }
 
 void EqualScaleFrame::refit() {
+  zoomTo(*this, zoom());
   // Twice, because the width of the tick labels follows from the scale: first with a usual width.
   const EqualScale guess = fittedTo(plotFor(widthOfTickLabels({"\u221200"})));
   showScale(fittedTo(plotFor(widthOfTickLabels(TickMarks(guess).yLabels))));
@@ -110,6 +118,8 @@ void EqualScaleFrame::resizeEvent(QResizeEvent* event) {
 
 void EqualScaleFrame::changeEvent(QEvent* event) {
   QChartView::changeEvent(event);
+  if (event->type() == QEvent::FontChange)
+    return refit();
   if (event->type() != QEvent::PaletteChange)
     return;
   putColours();

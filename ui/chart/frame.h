@@ -29,6 +29,8 @@ public:
   /// The values between two neighbouring ticks.
   double tick() const { return m_tick; }
   Look look() const { return lookOf(*this); }
+  /// How much larger than its own pixels the drawing stands in the widget, which follows the size of text.
+  double zoom() const;
 
 protected:
   /// The scale that shows what must be seen in a plot of this place and size.
@@ -36,6 +38,9 @@ protected:
   /// Called after the scale or the colours have changed: everything inside is to be drawn anew.
   virtual void arrange() = 0;
 
+  /// The size of the drawing, and a place of the widget in it.
+  QSizeF extent() const { return QSizeF(size()) / zoom(); }
+  QPointF inDrawing(QPointF widget) const { return widget / zoom(); }
   /// Fits the scale to the size of the widget, draws the frame and arranges.
   void refit();
   /// Binds a series to the axes; its points are those of `chartPoint`.

@@ -59,7 +59,7 @@ std::optional<Handle> CirclePlot::handleUnder(QPointF pixel) const {
   std::optional<Handle> nearest;
   double least = targetReach;
   for (const Handle handle : {Handle::reading, Handle::ear})
-    if (const std::optional<QPointF> at = handleAt(handle); at && distance(*at, pixel) <= least) {
+    if (const std::optional<QPointF> at = placeOf(handle); at && distance(*at, pixel) <= least) {
       least = distance(*at, pixel);
       nearest = handle;
     }
@@ -67,6 +67,10 @@ std::optional<Handle> CirclePlot::handleUnder(QPointF pixel) const {
 }
 
 QString CirclePlot::tipAt(QPointF pixel) const {
+  return tipOf(inDrawing(pixel));
+}
+
+QString CirclePlot::tipOf(QPointF pixel) const {
   const Stage now = stage();
   const std::optional<Handle> handle = handleUnder(pixel);
   if (handle == Handle::reading)
@@ -98,7 +102,7 @@ bool CirclePlot::viewportEvent(QEvent* event) {
 void CirclePlot::mousePressEvent(QMouseEvent* event) {
   if (event->button() != Qt::LeftButton || m_drag)
     return;
-  const QPointF pixel = event->position();
+  const QPointF pixel = inDrawing(event->position());
   if (const std::optional<Handle> handle = handleUnder(pixel))
     startDrag(*handle, pixel);
   else if (const StateReading* other = nearestOther(stage(), pixel, hoverReach))
@@ -122,7 +126,7 @@ void CirclePlot::startDrag(Handle handle, QPointF pixel) {
 }
 
 void CirclePlot::mouseMoveEvent(QMouseEvent* event) {
-  const QPointF pixel = event->position();
+  const QPointF pixel = inDrawing(event->position());
   // A release that went elsewhere ends the drag as well.
   if (m_drag && !(event->buttons() & Qt::LeftButton))
     endDrag();

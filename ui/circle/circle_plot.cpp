@@ -87,12 +87,18 @@ void CirclePlot::setFit(Fit fit) {
 }
 
 std::optional<QPointF> CirclePlot::handleAt(Handle handle) const {
+  const std::optional<QPointF> place = placeOf(handle);
+  return place ? std::optional(*place * zoom()) : std::nullopt;
+}
+
+/// In the drawing's own pixels.
+std::optional<QPointF> CirclePlot::placeOf(Handle handle) const {
   return handle == Handle::ear ? earAt(stage()) : std::optional(readingAt(stage()));
 }
 
 EqualScale CirclePlot::fittedTo(const QRectF& plot) const {
   const QSizeF panel = parentWidget() ? parentWidget()->size() : size();
-  return fittedCircle(m_desk.study(), m_desk.readout(), m_fit, plot, panel);
+  return fittedCircle(m_desk.study(), m_desk.readout(), m_fit, plot, panel / zoom());
 }
 
 /// During a drag of its own the axes stand still, else the circle would run away under the hand.
@@ -180,7 +186,7 @@ void CirclePlot::arrangeHandles() {
   m_reading->show(readingLayer(now, snapped), look());
   m_ear->show(earLayer(now), look());
   m_focus->show(hasFocus() ? focusLayer(now, m_handle) : Picture(), look());
-  m_words->show(wordsLayer(now, size(), snapped ? snapNote(turning->on()) : Text()), look());
+  m_words->show(wordsLayer(now, extent(), snapped ? snapNote(turning->on()) : Text()), look());
 }
 
 } // namespace planewright

@@ -72,7 +72,9 @@ private:
   void arrangeLabels();
   void arrangeHandles();
 
+  std::optional<QPointF> placeOf(Handle handle) const;
   std::optional<Handle> handleUnder(QPointF pixel) const;
+  QString tipOf(QPointF pixel) const;
   void startDrag(Handle handle, QPointF pixel);
   void endDrag();
   void cancelDrag();

@@ -26,7 +26,7 @@ QLabel* newHeading(const QString& words, QWidget* parent) {
 } // namespace
 
 CircleView::CircleView(Desk& desk, QWidget* parent)
-    : QWidget(parent), m_plot(new CirclePlot(desk, this)),
+    : QWidget(parent), m_heading(newHeading(tr("Circle"), this)), m_plot(new CirclePlot(desk, this)),
       m_menu(new QuietButton(QString(), Role::soft, this)) {
   auto* menu = new QMenu(m_menu);
   auto* group = new QActionGroup(menu);
@@ -50,7 +50,7 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
 
   auto* row = new QHBoxLayout;
   row->setContentsMargins(12, 4, 8, 0);
-  row->addWidget(newHeading(tr("Circle"), this));
+  row->addWidget(m_heading);
   row->addStretch();
   row->addWidget(m_menu);
   auto* column = new QVBoxLayout(this);
@@ -65,6 +65,13 @@ CircleView::CircleView(Desk& desk, QWidget* parent)
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
   connect(m_plot, &CirclePlot::angleEntryWanted, this, &CircleView::angleEntryWanted);
   showFit();
+}
+
+/// Where both have no room, the fit matters more than the heading, which the drawing explains.
+void CircleView::resizeEvent(QResizeEvent* event) {
+  QWidget::resizeEvent(event);
+  constexpr int gaps = 40;
+  m_heading->setVisible(m_heading->sizeHint().width() + m_menu->sizeHint().width() + gaps <= width());
 }
 
 /// The heading stands on the same ground as the drawing.

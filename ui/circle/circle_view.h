@@ -4,6 +4,7 @@
 #include <QWidget>
 
 class QAction;
+class QLabel;
 
 namespace planewright {
 
@@ -29,11 +30,13 @@ signals:
   void angleEntryWanted();
 
 protected:
+  void resizeEvent(QResizeEvent* event) override;
   void paintEvent(QPaintEvent* event) override;
 
 private:
   void showFit();
 
+  QLabel* m_heading;
   CirclePlot* m_plot;
   QuietButton* m_menu;
   QAction* m_this;

@@ -7,6 +7,7 @@
 #include "ui/element/exact_words.h"
 #include "ui/look/dial_access.h"
 #include "ui/look/look.h"
+#include "ui/look/zoom.h"
 #include "ui/paint/painter.h"
 
 #include <QHelpEvent>
@@ -29,6 +30,10 @@ ElementView::ElementView(Desk& desk, QWidget* parent) : QWidget(parent), m_desk(
   setProperty("helpPlace", "drawings#element");
   setProperty("areaKeys", tr("Left/Right turn by 1°, Shift 0.1°, Ctrl 15°"));
   connect(&m_desk, &Desk::changed, this, &ElementView::follow);
+}
+
+double ElementView::zoom() const {
+  return zoomOf(*this, least);
 }
 
 QString ElementView::wordsOfAll() const {
@@ -56,7 +61,7 @@ void ElementView::setSnapping(bool snapping) {
 
 ElementGlance ElementView::glance() const {
   ElementGlance glance = m_glance;
-  glance.size = size();
+  glance.size = QSizeF(size()) / zoom();
   glance.focused = hasFocus() ? m_current : ElementHandle::none;
   if (m_drag) {
     glance.held = m_drag->handle();
@@ -67,7 +72,7 @@ ElementGlance ElementView::glance() const {
 }
 
 ElementGeometry ElementView::geometry() const {
-  return fittedElement(size(), m_desk.readout().axes);
+  return fittedElement(QSizeF(size()) / zoom(), m_desk.readout().axes);
 }
 
 Picture ElementView::picture() const {
@@ -86,12 +91,12 @@ std::optional<QPointF> ElementView::placeOf(ElementHandle handle) const {
   const bool reading = handle == ElementHandle::reading;
   const Angle shown = reading ? m_glance.knob.shown(*angle) : *angle;
   const Vec at = geometry().pixel(shown, reading ? part::knob : part::lineEnd);
-  return QPointF(at.x, at.y);
+  return QPointF(at.x, at.y) * zoom();
 }
 
-ElementHandle ElementView::handleAt(QPointF at) const {
+ElementHandle ElementView::handleAt(QPointF drawn) const {
   const Angle knob = m_glance.knob.shown(m_desk.readout().reading.value);
-  return geometry().handleAt(at, knob, angleOf(ElementHandle::line));
+  return geometry().handleAt(drawn, knob, angleOf(ElementHandle::line));
 }
 
 Facing& ElementView::facingOf(ElementHandle handle) {
@@ -104,6 +109,7 @@ void ElementView::paintEvent(QPaintEvent*) {
   const Look look = lookOf(*this);
   QPainter painter(this);
   painter.fillRect(rect(), look.colour(Role::canvas));
+  painter.scale(zoom(), zoom());
   paintPicture(painter, scene.picture, look.palette);
 }
 
@@ -115,14 +121,14 @@ void ElementView::changeEvent(QEvent* event) {
 // --- the hand
 
 void ElementView::mousePressEvent(QMouseEvent* event) {
-  const ElementHandle handle = handleAt(event->position());
+  const ElementHandle handle = handleAt(inDrawing(event->position()));
   const std::optional<ElementHold> hold = holdOf(m_desk.readout(), handle);
   if (event->button() != Qt::LeftButton || !hold || m_drag)
     return;
   QToolTip::hideText();
   setCurrent(handle);
   m_keys.end();
-  m_drag.emplace(m_desk.study(), *hold, facingOf(handle), event->position(), m_desk.newGesture());
+  m_drag.emplace(m_desk.study(), *hold, facingOf(handle), inDrawing(event->position()), m_desk.newGesture());
   setCursor(Qt::ClosedHandCursor);
   update();
 }
@@ -132,28 +138,28 @@ void ElementView::mouseMoveEvent(QMouseEvent* event) {
   if (m_drag && !(event->buttons() & Qt::LeftButton))
     endDrag();
   if (m_drag)
-    dragTo(event->position(), event->modifiers());
+    dragTo(inDrawing(event->position()), event->modifiers());
   else
-    setCursorFor(handleAt(event->position()));
+    setCursorFor(handleAt(inDrawing(event->position())));
 }
 
 void ElementView::mouseReleaseEvent(QMouseEvent* event) {
   if (event->button() != Qt::LeftButton || !m_drag)
     return;
-  dragTo(event->position(), event->modifiers());
+  dragTo(inDrawing(event->position()), event->modifiers());
   endDrag();
-  setCursorFor(handleAt(event->position()));
+  setCursorFor(handleAt(inDrawing(event->position())));
 }
 
 void ElementView::leaveEvent(QEvent*) {
   setCursorFor(ElementHandle::none);
 }
 
-void ElementView::dragTo(QPointF at, Qt::KeyboardModifiers held) {
+void ElementView::dragTo(QPointF drawn, Qt::KeyboardModifiers held) {
   const std::optional<ElementHold> hold = holdOf(m_desk.readout(), m_drag->handle());
   if (!hold || hold->place != m_drag->place())
     return;
-  const std::optional<std::string> text = m_drag->moved(geometry(), *hold, at, held, m_glance.snapping);
+  const std::optional<std::string> text = m_drag->moved(geometry(), *hold, drawn, held, m_glance.snapping);
   if (text)
     type(*hold, *text, m_drag->gesture(), m_drag->wanted());
 }
@@ -290,8 +296,8 @@ QString ElementView::wordsOf(ElementHandle handle) const {
   return tr("reading plane, normal at %1 degrees").arg(degrees);
 }
 
-QString ElementView::tipAt(QPointF at) const {
-  switch (handleAt(at)) {
+QString ElementView::tipAt(QPointF drawn) const {
+  switch (handleAt(drawn)) {
   case ElementHandle::reading:
     return tr("turn the reading plane");
   case ElementHandle::line:
@@ -299,7 +305,7 @@ QString ElementView::tipAt(QPointF at) const {
   case ElementHandle::none:
     break;
   }
-  return exactWords(m_desk.study(), m_desk.readout(), picture(), at);
+  return exactWords(m_desk.study(), m_desk.readout(), picture(), drawn);
 }
 
 void ElementView::setCursorFor(ElementHandle handle) {
@@ -312,7 +318,7 @@ void ElementView::setCursorFor(ElementHandle handle) {
 bool ElementView::event(QEvent* event) {
   if (event->type() == QEvent::ToolTip) {
     const auto* help = static_cast<QHelpEvent*>(event);
-    const QString tip = m_drag ? QString() : tipAt(help->pos());
+    const QString tip = m_drag ? QString() : tipAt(inDrawing(help->pos()));
     if (tip.isEmpty())
       QToolTip::hideText();
     else

@@ -29,7 +29,7 @@ public:
   ElementHandle currentHandle() const { return m_current; }
   /// Where a handle stands in the widget: the knob, the bar nearer to +x; none for bars without a line.
   std::optional<QPointF> placeOf(ElementHandle handle) const;
-  /// The picture that is painted.
+  /// The picture that is painted, in pixels of its own: it grows with the size of text.
   Picture picture() const;
   /// The angle of a handle (deg, folded) and what it means in words; none for bars without a line.
   std::optional<Angle> angleOf(ElementHandle handle) const;
@@ -38,7 +38,7 @@ public:
   void turn(ElementHandle handle, Angle to);
 
   QSize sizeHint() const override { return {520, 480}; }
-  QSize minimumSizeHint() const override { return {260, 260}; }
+  QSize minimumSizeHint() const override { return least; }
 
 signals:
   void currentHandleChanged();
@@ -57,17 +57,21 @@ protected:
   void changeEvent(QEvent* event) override;
 
 private:
+  static constexpr QSize least = {260, 260};
+
+  double zoom() const;
+  QPointF inDrawing(QPointF widget) const { return widget / zoom(); }
   QString wordsOfAll() const;
   void follow();
   ElementGlance glance() const;
   ElementGeometry geometry() const;
-  ElementHandle handleAt(QPointF at) const;
+  ElementHandle handleAt(QPointF drawn) const;
   Facing& facingOf(ElementHandle handle);
   QString whatTurns(ElementHandle handle) const;
-  QString tipAt(QPointF at) const;
+  QString tipAt(QPointF drawn) const;
   void setCurrent(ElementHandle handle);
   void setCursorFor(ElementHandle handle);
-  void dragTo(QPointF at, Qt::KeyboardModifiers held);
+  void dragTo(QPointF drawn, Qt::KeyboardModifiers held);
   void putBack();
   void endDrag();
   std::optional<Problem> type(const ElementHold& hold, const std::string& text, Gesture gesture,

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/look/column_area.h"
 
+#include "ui/look/zoom.h"
+
 #include <QEvent>
 #include <QScrollBar>
 
@@ -18,8 +20,10 @@ ColumnArea::ColumnArea(QWidget* parent) : QScrollArea(parent) {
 QSize ColumnArea::minimumSizeHint() const {
   constexpr int leastHeight = 200;
   const int content = widget() ? widget()->minimumSizeHint().width() : 0;
+  // Half of what the text grows by: the drawings need their room too.
+  const int most = qRound(mostColumn * (1 + font().pixelSize() / plainText) / 2);
   const int needed = content + verticalScrollBar()->sizeHint().width();
-  return {std::clamp(needed, leastColumn, mostColumn), leastHeight};
+  return {std::clamp(needed, leastColumn, most), leastHeight};
 }
 
 bool ColumnArea::eventFilter(QObject* watched, QEvent* event) {

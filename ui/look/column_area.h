@@ -13,7 +13,7 @@ class ColumnArea : public QScrollArea {
 
 public:
   static constexpr int leastColumn = 264; ///< pixels
-  static constexpr int mostColumn = 460;
+  static constexpr int mostColumn = 460;  ///< where the text is at 100 %
 
   explicit ColumnArea(QWidget* parent = nullptr);
 

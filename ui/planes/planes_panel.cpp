@@ -83,6 +83,7 @@ void PlanesPanel::showPage(int index) {
 void PlanesPanel::adopt(QWidget* page, const QString& title) {
   m_pages->addWidget(page);
   m_tabs->addTab(title);
+  m_tabs->updateGeometry(); // a hidden bar does not ask for the room itself
 }
 
 void PlanesPanel::release() {

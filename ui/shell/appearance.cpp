@@ -5,6 +5,7 @@
 #include "ui/look/look.h"
 #include "ui/look/press_access.h"
 #include "ui/look/ring_style.h"
+#include "ui/look/zoom.h"
 
 #include <QApplication>
 #include <QScreen>
@@ -52,10 +53,10 @@ Palette paletteOf(Appearance appearance) {
   return systemPalette();
 }
 
-/// 13 px where a text of 100 % has 96 px to the inch; systems enlarge their texts by that number.
+/// The plain size where a text of 100 % has 96 px to the inch; systems enlarge their texts by that number.
 double textPixels() {
   const QScreen* screen = QApplication::primaryScreen();
-  return 13 * (screen ? screen->logicalDotsPerInchY() / 96 : 1) * chosenTextPercent() / 100.0;
+  return plainText * (screen ? screen->logicalDotsPerInchY() / 96 : 1) * chosenTextPercent() / 100.0;
 }
 
 } // namespace

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "ui/shell/body.h"
 
+#include "ui/look/zoom.h"
+
 #include <QHBoxLayout>
 #include <QSettings>
 #include <QSplitter>
@@ -103,7 +105,7 @@ void Body::resetSizes() {
 }
 
 bool Body::hasRoomForStrength() const {
-  return width() >= leastForStrength;
+  return width() >= leastForStrength * font().pixelSize() / plainText;
 }
 
 void Body::showStrength() {

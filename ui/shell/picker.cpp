@@ -29,7 +29,7 @@ QToolButton* arrow(Qt::ArrowType type, const QString& name, QWidget* parent) {
 } // namespace
 
 Picker::Picker(const QString& caption, const QString& keys, QWidget* parent)
-    : QWidget(parent), m_name(new QPushButton(this)),
+    : QWidget(parent), m_caption(new QLabel(caption, this)), m_name(new QPushButton(this)),
       m_previous(arrow(Qt::LeftArrow, tr("Previous (%1+PageUp)").arg(keys), this)),
       m_next(arrow(Qt::RightArrow, tr("Next (%1+PageDown)").arg(keys), this)), m_count(new QLabel(this)) {
   build(caption);
@@ -39,16 +39,15 @@ void Picker::build(const QString& caption) {
   auto* row = new QHBoxLayout(this);
   row->setContentsMargins(0, 0, 0, 0);
   row->setSpacing(4);
-  auto* label = new QLabel(caption, this);
-  row->addWidget(label);
-  row->addSpacing(4);
+  row->addWidget(m_caption);
   row->addWidget(m_name);
   row->addWidget(m_previous);
   row->addWidget(m_next);
   row->addWidget(m_count);
   dress();
   m_name->setAccessibleName(caption);
-  label->setBuddy(m_name);
+  m_caption->setBuddy(m_name);
+  m_caption->setContentsMargins(0, 0, 4, 0);
   connect(m_name, &QPushButton::clicked, this, &Picker::openList);
   connect(m_previous, &QToolButton::clicked, this, &Picker::previous);
   connect(m_next, &QToolButton::clicked, this, &Picker::next);
@@ -82,6 +81,10 @@ void Picker::show(const QStringList& names, qsizetype current) {
 void Picker::setNameWidth(int width) {
   m_name->setFixedWidth(width);
   writeName();
+}
+
+void Picker::showCaption(bool shown) {
+  m_caption->setVisible(shown);
 }
 
 void Picker::resizeEvent(QResizeEvent* event) {

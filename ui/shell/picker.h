@@ -23,6 +23,8 @@ public:
   void show(const QStringList& names, qsizetype current);
   /// The width of the button that carries the name.
   void setNameWidth(int width);
+  /// Where there is no room the caption is only spoken.
+  void showCaption(bool shown);
   /// Asked when the list opens, for what stands behind the names that were shown last.
   void setDetails(std::function<ListDetails()> details) { m_details = std::move(details); }
   /// Opens the list of names.
@@ -45,6 +47,7 @@ private:
   void step(int by);
   void writeName();
 
+  QLabel* m_caption;
   QPushButton* m_name;
   QToolButton* m_previous;
   QToolButton* m_next;

@@ -15,7 +15,8 @@ namespace planewright {
 namespace {
 
 /// A narrower bar has shorter names and does not say what governs.
-constexpr int roomy = 1100;
+constexpr int roomy = 85; // in sizes of the text, as is the next
+constexpr int leastForCaptions = 70;
 
 } // namespace
 
@@ -66,12 +67,14 @@ void StateBar::refreshGoverns() {
   const QString how = governsInWords(m_desk.readout(), m_desk.readout().shown);
   m_governs->setToolTip(how);
   m_governs->setAccessibleDescription(how);
-  m_governs->setVisible(!how.isEmpty() && width() >= roomy);
+  m_governs->setVisible(!how.isEmpty() && width() >= roomy * font().pixelSize());
 }
 
 void StateBar::resizeEvent(QResizeEvent* event) {
   QWidget::resizeEvent(event);
-  const int name = width() < roomy ? 128 : 200;
+  const int name = width() < roomy * font().pixelSize() ? 128 : 200;
+  for (Picker* picker : {m_points, m_combinations})
+    picker->showCaption(width() >= leastForCaptions * font().pixelSize());
   m_points->setNameWidth(name);
   m_combinations->setNameWidth(name);
   refreshGoverns();

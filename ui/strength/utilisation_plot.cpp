@@ -5,8 +5,10 @@
 #include "core/strength/shown_ratio.h"
 #include "core/study/cut_text.h"
 #include "core/study/named_directions.h"
+#include "ui/chart/zoomed_chart.h"
 #include "ui/desk/turning.h"
 #include "ui/look/dial_access.h"
+#include "ui/look/zoom.h"
 #include "ui/paint/picture_item.h"
 
 #include <QChart>
@@ -24,7 +26,8 @@ namespace planewright {
 namespace {
 
 constexpr double textSize = 11; // px
-constexpr double penUnit = 1;   // px for a width of 0.25 mm
+constexpr QSize least = {220, 176};
+constexpr double penUnit = 1; // px for a width of 0.25 mm
 constexpr double statePen = 2;
 constexpr double greatestPen = 1.4;
 constexpr double hair = 1;
@@ -68,7 +71,7 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
   setViewportUpdateMode(QGraphicsView::BoundingRectViewportUpdate);
   setRenderHint(QPainter::Antialiasing);
   setFrameShape(QFrame::NoFrame);
-  setMinimumSize(220, 176);
+  setMinimumSize(least);
   QSizePolicy policy(QSizePolicy::Expanding, QSizePolicy::Preferred);
   policy.setHeightForWidth(true);
   setSizePolicy(policy);
@@ -77,6 +80,10 @@ UtilisationPlot::UtilisationPlot(Desk& desk, std::function<std::optional<std::si
   setAccessibleName(tr("Utilisation over the angle of the line"));
   setProperty("helpPlace", "strength#plot");
   connect(&m_desk, &Desk::judgedAnew, this, &UtilisationPlot::refresh);
+}
+
+double UtilisationPlot::zoom() const {
+  return zoomOf(*this, least);
 }
 
 void UtilisationPlot::setLogarithmic(bool logarithmic) {
@@ -102,12 +109,13 @@ void UtilisationPlot::refresh() {
     if (const CheckReading& reading = readingOf(readout, *verdict.governing); reading.worstAngle)
       worst = {reading.worst, *reading.worstAngle};
   chooseScale(worst);
+  zoomTo(*this, zoom());
   layOut(curves);
   drawCurves(curves);
   const std::optional<DirectionsOfCheck>& directions = allRound.directions();
   Picture ground = utilisationGround(m_frame, setup, directions ? directions->within : std::vector<Within>(),
                                      translation());
-  const double bottom = viewport()->height();
+  const double bottom = viewport()->height() / zoom();
   const Picture key =
       utilisationKey({m_frame.plot.left, bottom - heightOfKey(curves, textSize), m_frame.plot.right, bottom},
                      textSize, penUnit, curves, readout.state().combination, translation());
@@ -141,8 +149,8 @@ void UtilisationPlot::chooseScale(const std::optional<WorstInBand>& worst) {
 }
 
 void UtilisationPlot::layOut(const UtilisationCurves& curves) {
-  const planewright::Box room{4, 0, static_cast<double>(viewport()->width()) - 4,
-                              viewport()->height() - heightOfKey(curves, textSize)};
+  const planewright::Box room{4, 0, viewport()->width() / zoom() - 4,
+                              viewport()->height() / zoom() - heightOfKey(curves, textSize)};
   m_frame = utilisationFrameIn(room, textSize, penUnit, m_highest, m_logarithmic, translation());
   const planewright::Box& plot = m_frame.plot;
   const QRectF area(plot.left, plot.top, plot.right - plot.left, plot.bottom - plot.top);
@@ -201,23 +209,23 @@ void UtilisationPlot::turnTo(double degrees, Gesture gesture) {
 void UtilisationPlot::mousePressEvent(QMouseEvent* event) {
   if (event->button() != Qt::LeftButton || !turnedPlace())
     return;
-  const double at = m_frame.degreesAt(event->position().x());
+  const double at = m_frame.degreesAt(inDrawing(event->position()).x());
   const double off = at - nominal().degrees();
-  if (std::abs(m_frame.xOf(nominal().degrees()) - event->position().x()) > reach)
+  if (std::abs(m_frame.xOf(nominal().degrees()) - inDrawing(event->position()).x()) > reach)
     return;
   m_hold = Hold{m_desk.newGesture(), textAt(m_desk.study(), *turnedPlace()).value_or(std::string()), off};
 }
 
 void UtilisationPlot::mouseMoveEvent(QMouseEvent* event) {
   if (!m_hold) {
-    const bool near =
-        turnedPlace() && std::abs(m_frame.xOf(nominal().degrees()) - event->position().x()) <= reach;
+    const bool near = turnedPlace() &&
+                      std::abs(m_frame.xOf(nominal().degrees()) - inDrawing(event->position()).x()) <= reach;
     viewport()->setCursor(near ? Qt::SizeHorCursor : Qt::ArrowCursor);
     return;
   }
   const double pixel = 180 / (m_frame.plot.right - m_frame.plot.left);
   const double step = decadeBelow(pixel) / (event->modifiers() & Qt::ShiftModifier ? 10 : 1);
-  const double to = m_frame.degreesAt(event->position().x()) - m_hold->grip;
+  const double to = m_frame.degreesAt(inDrawing(event->position()).x()) - m_hold->grip;
   turnTo(roundedTo(std::clamp(to, -90.0, 90.0), step), m_hold->gesture);
 }
 
@@ -241,11 +249,11 @@ void UtilisationPlot::keyPressEvent(QKeyEvent* event) {
   m_keys.pressed(m_desk);
 }
 
-QString UtilisationPlot::tipAt(QPointF pixel) const {
+QString UtilisationPlot::tipAt(QPointF drawn) const {
   const std::optional<std::size_t> check = m_selectedIndex();
   if (!check)
     return {};
-  const Angle angle = Angle::fromDegrees(std::round(m_frame.degreesAt(pixel.x())));
+  const Angle angle = Angle::fromDegrees(std::round(m_frame.degreesAt(drawn.x())));
   const double worst = greatestUtilisation(judgesOf(m_desk.readout(), *check).all, angle);
   return tr("%1 at %2, all combinations")
       .arg(fromUtf8(shownUtilisation(worst)), fromUtf8(shownDegrees(angle, 0)));
@@ -255,7 +263,7 @@ bool UtilisationPlot::viewportEvent(QEvent* event) {
   if (event->type() != QEvent::ToolTip)
     return QChartView::viewportEvent(event);
   const auto* help = static_cast<QHelpEvent*>(event);
-  QToolTip::showText(help->globalPos(), m_hold ? QString() : tipAt(help->pos()), viewport());
+  QToolTip::showText(help->globalPos(), m_hold ? QString() : tipAt(inDrawing(help->pos())), viewport());
   return true;
 }
 
@@ -271,7 +279,7 @@ void UtilisationPlot::showEvent(QShowEvent* event) {
 
 void UtilisationPlot::changeEvent(QEvent* event) {
   QChartView::changeEvent(event);
-  if (event->type() == QEvent::PaletteChange)
+  if (event->type() == QEvent::PaletteChange || event->type() == QEvent::FontChange)
     refresh();
 }
 

@@ -30,10 +30,13 @@ public:
   void setLogarithmic(bool logarithmic);
   /// Whether the shown curves reach far beyond the limit, so that a logarithmic scale helps.
   bool reachesFar() const { return isFarBeyond(m_highest); }
+  /// In the pixels of the drawing.
   const UtilisationFrame& frame() const { return m_frame; }
   QSize sizeHint() const override { return {300, 240}; }
   bool hasHeightForWidth() const override { return true; }
   int heightForWidth(int width) const override { return width * 4 / 5; }
+  /// How much larger than its own pixels the drawing stands in the widget, which follows the size of text.
+  double zoom() const;
   /// After another check was selected.
   void refresh();
 
@@ -67,7 +70,8 @@ private:
   std::optional<Place> turnedPlace() const;
   Angle nominal() const;
   void turnTo(double degrees, Gesture gesture);
-  QString tipAt(QPointF pixel) const;
+  QPointF inDrawing(QPointF widget) const { return widget / zoom(); }
+  QString tipAt(QPointF drawn) const;
 
   Desk& m_desk;
   std::function<std::optional<std::size_t>()> m_selectedIndex;
