@@ -34,6 +34,7 @@ constexpr std::array known = {OptionRow{"-o"},
                               OptionRow{"--order"},
                               OptionRow{"--dpi"},
                               OptionRow{"--language"},
+                              OptionRow{"--decimal"},
                               OptionRow{"--without-study", Takes::nothing}};
 
 constexpr int usualDpi = 300;
@@ -197,6 +198,11 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   if (auto problem = speakAs(arguments.valueOf("--language")))
     return tl::unexpected(*std::move(problem));
   wanted.order.translate = translation();
+  const Result<DecimalSign> decimal =
+      wordOfOption("--decimal", arguments.valueOf("--decimal"), DecimalSign::point);
+  if (!decimal)
+    return tl::unexpected(decimal.error());
+  wanted.order.decimal = *decimal;
   if (auto problem = readArrangement(arguments, wanted.order))
     return tl::unexpected(*std::move(problem));
   const Unit mm{"mm", dimension::length, 1, 1};

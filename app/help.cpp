@@ -148,6 +148,8 @@ files, made of study, point and combination, are printed.
                      circle, planes, check those left out follow in this order
 --dpi N              resolution of a PNG; 300 without it
 --language CODE      of the words: en or de; en without it
+--decimal point|comma
+                     in the numbers; point without it. What is typed keeps its points
 --without-study      the figure alone, for sending outside
 
 Without that option the whole study, with all its points and notes, travels inside the file, and opening the
@@ -170,6 +172,7 @@ the program, conclusion and lines to sign.
                                the option), of every combination
 --paper A4|Letter              of a PDF; A4 without it
 --language CODE                of the words: en or de; en without it
+--decimal point|comma          in the numbers; point without it. What is typed keeps its points
 --without-figures              no element and circle
 --without-study                the file does not carry the study
 --since STUDY                  adds what changed since that revision

@@ -30,6 +30,7 @@ constexpr std::array known = {OptionRow{"-o"},
                               OptionRow{"--since"},
                               OptionRow{"--paper"},
                               OptionRow{"--language"},
+                              OptionRow{"--decimal"},
                               OptionRow{"--without-figures", Takes::nothing},
                               OptionRow{"--without-study", Takes::nothing}};
 
@@ -87,6 +88,11 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   if (auto problem = speakAs(arguments.valueOf("--language")))
     return tl::unexpected(*std::move(problem));
   wanted.order.translate = translation();
+  const Result<DecimalSign> decimal =
+      wordOfOption("--decimal", arguments.valueOf("--decimal"), DecimalSign::point);
+  if (!decimal)
+    return tl::unexpected(decimal.error());
+  wanted.order.decimal = *decimal;
   for (const GivenOption& option : arguments.options)
     if (option.name == "--point")
       wanted.order.points.push_back(option.value);

@@ -202,6 +202,7 @@ Palette paletteOf(const FigureOrder& order) {
 Result<Picture> figureOf(const Study& study, const Readout& readout, const FigureOrder& order) {
   if (const std::optional<Problem> problem = problemIn(order))
     return tl::unexpected(*problem);
+  const WritesDecimals decimals(order.decimal);
   Sheet sheet{{}, settingOf(study, readout, order)};
   sheet.right = order.width - margin;
   Picture& picture = sheet.picture;

@@ -4,6 +4,7 @@
 #include "core/figure/arrangement.h"
 #include "core/figure/look.h"
 #include "core/figure/picture.h"
+#include "core/quantity/decimal_sign.h"
 #include "core/study/readout.h"
 #include "core/words/problem.h"
 
@@ -33,6 +34,7 @@ struct FigureOrder {
   FigureBlocks blocks = usualBlocks;
   Text caption;          ///< under the figure; may be empty
   std::string studyName; ///< the file's name; may be empty
+  DecimalSign decimal = DecimalSign::point;
   Translate translate;
 };
 inline constexpr double leastFigureWidth = 90;

@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
 
+#include "core/quantity/decimal_sign.h"
+
 #include <algorithm>
 #include <array>
 #include <cassert>
@@ -109,8 +111,8 @@ std::string shownNumber(double value, int decimals) {
   if (decimals > mostDigits && std::abs(value) <= 0.5 * std::pow(10.0, -decimals))
     return "0";
   if (decimals < 0 || decimals > mostDigits || std::abs(value) >= 1e15)
-    return withTrueMinus(written(value + 0.0, std::chars_format::scientific, 3));
-  const std::string digits = written(std::abs(value), std::chars_format::fixed, decimals);
+    return withDecimalSign(withTrueMinus(written(value + 0.0, std::chars_format::scientific, 3)));
+  const std::string digits = withDecimalSign(written(std::abs(value), std::chars_format::fixed, decimals));
   return value < 0 && !isZero(digits) ? "−" + digits : digits;
 }
 
@@ -140,7 +142,7 @@ std::string shownSlope(Angle angle) {
     return {};
   const Decimal number = decimalOf(run, 3);
   const std::string text = number.exponent < mostDigits ? fixed(number) : scientific(number);
-  return (angle.degrees() < 0 ? "−1 in " : "1 in ") + text;
+  return (angle.degrees() < 0 ? "−1 in " : "1 in ") + withDecimalSign(text);
 }
 
 } // namespace planewright

@@ -16,7 +16,8 @@ std::string exactNumber(double value);
 /// numbers that become typed texts of a study.
 std::string shortestNumber(double value);
 
-/// `value` with a fixed count of decimals for people: U+2212 for minus, never "-0.00".
+/// `value` with a fixed count of decimals for people: U+2212 for minus, never "-0.00", the decimal sign as
+/// WritesDecimals has it.
 /// From 1e15 upwards and for counts outside 0..15 the form is 1.234e+20; with more than 15 decimals what
 /// rounds to nothing is "0".
 std::string shownNumber(double value, int decimals);

@@ -27,6 +27,7 @@ void read(const Json& json, Reading& reading, Convention& convention) {
   object.word("positive", convention.positive);
   object.word("shear_axis", convention.shearAxis);
   object.word("shear_force", convention.shearForce);
+  object.word("digits", convention.digits);
   object.refuseUnread();
 }
 

@@ -25,11 +25,14 @@ void put(JsonWriter& json, const Title& title) {
   json.endObject();
 }
 
+/// The usual count of digits is not written: what was signed before there was a choice stays signed.
 void put(JsonWriter& json, const Convention& convention) {
   json.key("convention").beginObject();
   put(json, "positive", wordOf(convention.positive));
   put(json, "shear_axis", wordOf(convention.shearAxis));
   put(json, "shear_force", wordOf(convention.shearForce));
+  if (convention.digits != Convention().digits)
+    put(json, "digits", wordOf(convention.digits));
   json.endObject();
 }
 

@@ -110,10 +110,12 @@ Text identityOf(const Study& study, const SheetOrder& order) {
 } // namespace
 
 Sheet sheetOf(const Study& study, const SheetOrder& order) {
+  const WritesDecimals decimals(order.decimal);
   return sheetOf(study, readoutsOf(study, order.points), order);
 }
 
 Sheet sheetOf(const Study& study, const std::vector<Readout>& points, const SheetOrder& order) {
+  const WritesDecimals decimals(order.decimal);
   const RouteComparison routes = comparedRoutes(points);
   const Verdict verdict = verdictOf(points);
   SheetWriter writer;
@@ -139,6 +141,7 @@ Sheet sheetOf(const Study& study, const std::vector<Readout>& points, const Shee
                                    "Local codes and a licensed engineer decide.");
   sheet.identity = identityOf(study, order);
   sheet.routes = routesSentence(routes);
+  sheet.decimal = order.decimal;
   sheet.disagrees = !routes.agrees();
   sheet.exceeds = verdict.standing == Standing::exceeds || verdict.standing == Standing::unjudged ||
                   verdict.unjudged.has_value();

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/quantity/decimal_sign.h"
 #include "core/report/sheet.h"
 #include "core/study/readout.h"
 #include "core/words/problem.h"
@@ -24,7 +25,8 @@ struct SheetOrder {
   std::string studyName;        ///< the file's name; may be empty
   std::optional<Study> earlier; ///< the revision with which the study is compared
   std::string earlierName;      ///< its file's name
-  Translate translate;          ///< for the figures
+  DecimalSign decimal = DecimalSign::point;
+  Translate translate; ///< for the figures
 };
 
 /// The readouts of the points with these names, in the order of the study; of all without names.

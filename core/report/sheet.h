@@ -2,6 +2,7 @@
 #pragma once
 
 #include "core/figure/picture.h"
+#include "core/quantity/decimal_sign.h"
 #include "core/report/second_route.h"
 #include "core/working/step.h"
 
@@ -82,11 +83,12 @@ struct SheetTitle {
 struct Sheet {
   SheetTitle title;
   std::vector<SheetBlock> blocks;
-  Text caution;           ///< at the foot of every page
-  Text identity;          ///< file, fingerprint and version, at the foot of every page
-  Text routes;            ///< how the two routes agree, at the foot of every page
-  bool disagrees = false; ///< the two routes do
-  bool exceeds = false;   ///< some judged combination does, or a check could not be judged
+  Text caution;                             ///< at the foot of every page
+  Text identity;                            ///< file, fingerprint and version, at the foot of every page
+  Text routes;                              ///< how the two routes agree, at the foot of every page
+  DecimalSign decimal = DecimalSign::point; ///< of all numbers, also of those that are written later
+  bool disagrees = false;                   ///< the two routes do
+  bool exceeds = false;                     ///< some judged combination does, or a check could not be judged
 };
 
 } // namespace planewright

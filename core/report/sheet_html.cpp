@@ -157,6 +157,7 @@ private:
 } // namespace
 
 std::string sheetHtml(const Sheet& sheet, const Translate& translate) {
+  const WritesDecimals decimals(sheet.decimal);
   return HtmlWriter(translate).page(sheet);
 }
 

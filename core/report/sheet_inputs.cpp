@@ -108,10 +108,10 @@ private:
     constexpr int significant = 7;
     const double inUnit = kind.unit.fromBase(value);
     std::string shown = shownNumber(inUnit, decimalsFor(std::abs(inUnit), significant));
-    if (shown.find('.') != std::string::npos && shown.find('e') == std::string::npos) {
+    constexpr auto signs = ".,";
+    if (shown.find_first_of(signs) != std::string::npos && shown.find('e') == std::string::npos) {
       shown.erase(shown.find_last_not_of('0') + 1);
-      if (shown.back() == '.')
-        shown.pop_back();
+      shown.erase(shown.find_last_not_of(signs) + 1);
     }
     if (kind.dimension == dimension::angle)
       return shown + "°";

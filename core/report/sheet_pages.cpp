@@ -120,6 +120,7 @@ private:
 } // namespace
 
 std::vector<Picture> pagesOf(const Sheet& sheet, Paper paper, const Translate& translate) {
+  const WritesDecimals decimals(sheet.decimal);
   const Vec size = sizeOf(paper);
   const double bodyTop = top + titleHeight + titleGap;
   const std::vector<std::vector<PicturePart>> bodies =

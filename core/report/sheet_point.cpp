@@ -44,6 +44,7 @@ private:
     Readout shown = m_readout;
     shown.shown = m_governing;
     FigureOrder order;
+    order.decimal = m_order.decimal;
     order.width = figureWidth;
     order.parts = {false, false, true, true, false, false, false, false, true};
     order.translate = m_order.translate;

@@ -93,6 +93,7 @@ private:
 } // namespace
 
 std::string sheetText(const Sheet& sheet, const Translate& translate) {
+  const WritesDecimals decimals(sheet.decimal);
   return TextWriter(translate).text(sheet);
 }
 

@@ -20,6 +20,16 @@ const std::vector<Named<ShearAxis>>& namesOf() {
 }
 
 template <>
+const std::vector<Named<Digits>>& namesOf() {
+  static const std::vector<Named<Digits>> names = {
+      {Digits::three, "3", PW_TEXT("Convention", "3 significant digits")},
+      {Digits::four, "4", PW_TEXT("Convention", "4 significant digits")},
+      {Digits::five, "5", PW_TEXT("Convention", "5 significant digits")},
+      {Digits::six, "6", PW_TEXT("Convention", "6 significant digits")}};
+  return names;
+}
+
+template <>
 const std::vector<Named<LineKind>>& namesOf() {
   static const std::vector<Named<LineKind>> names = {{LineKind::grain, "grain", PW_TEXT("Line", "grain")},
                                                      {LineKind::fibre, "fibre", PW_TEXT("Line", "fibre")},

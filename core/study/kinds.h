@@ -10,6 +10,8 @@ enum class Positive { tension, compression };
 /// How the shear axis of the circle is drawn: tnt positive downwards, so that the circle turns the way the
 /// element turns, or upwards, so that it turns the other way.
 enum class ShearAxis { tensorDown, tensorUp };
+/// Significant digits of the greatest stress of a state, after which all stresses of it are written.
+enum class Digits { three, four, five, six };
 /// What a line in the plane of stress is.
 enum class LineKind { grain, fibre, weld, bond, other };
 /// The nature of an action; `measured`: its stresses come from strains that were measured.
@@ -27,6 +29,8 @@ template <>
 const std::vector<Named<Positive>>& namesOf<Positive>();
 template <>
 const std::vector<Named<ShearAxis>>& namesOf<ShearAxis>();
+template <>
+const std::vector<Named<Digits>>& namesOf<Digits>();
 template <>
 const std::vector<Named<LineKind>>& namesOf<LineKind>();
 template <>

@@ -61,6 +61,7 @@ const vector<SpotRow>& spotTable() {
       {Spot::positive, "convention/positive", PW_TEXT("Place", "positive normal stress"), word},
       {Spot::shearAxis, "convention/shear_axis", PW_TEXT("Place", "shear axis of the circle"), word},
       {Spot::shearForce, "convention/shear_force", PW_TEXT("Place", "sense of V_{y}"), word},
+      {Spot::digits, "convention/digits", PW_TEXT("Place", "digits of stresses"), word},
       {Spot::caseName, "cases/*/name", PW_TEXT("Place", "name of the case"), freeText},
       {Spot::caseNature, "cases/*/nature", PW_TEXT("Place", "nature of the action"), word},
       {Spot::caseDuration, "cases/*/duration", PW_TEXT("Place", "duration of the action"), word},

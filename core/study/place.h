@@ -43,6 +43,7 @@ enum class Spot {
   positive,
   shearAxis,
   shearForce,
+  digits,
   caseName,
   caseNature,
   caseDuration,

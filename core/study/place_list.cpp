@@ -42,7 +42,7 @@ std::vector<Place> typedPlacesInHead() {
   const Study none;
   addTexts(places, &none.title);
   addTexts(places, &none.units);
-  add(places, {Spot::positive, Spot::shearAxis, Spot::shearForce});
+  add(places, {Spot::positive, Spot::shearAxis, Spot::shearForce, Spot::digits});
   return places;
 }
 

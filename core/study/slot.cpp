@@ -34,6 +34,8 @@ Slot slotOfStudy(Study& study, Spot spot) {
     return &study.convention.shearAxis;
   case Spot::shearForce:
     return &study.convention.shearForce;
+  case Spot::digits:
+    return &study.convention.digits;
   default:
     break;
   }

@@ -10,8 +10,8 @@ namespace planewright {
 /// Where a place lives inside a study: the text itself, or a list of ids, or the word of an enum. For the
 /// edits and the reader of texts only; monostate when the place does not exist or holds no text.
 using Slot = std::variant<std::monostate, std::string*, std::vector<std::string>*, Positive*, ShearAxis*,
-                          ShearRule*, LineKind*, Nature*, Duration*, Basis*, SectionShape*, View*, Ends*,
-                          Elasticity*, MaterialKind*, StrengthBasis*, Seam*, Criterion*>;
+                          ShearRule*, Digits*, LineKind*, Nature*, Duration*, Basis*, SectionShape*, View*,
+                          Ends*, Elasticity*, MaterialKind*, StrengthBasis*, Seam*, Criterion*>;
 
 Slot slotOf(Study& study, const Place& place);
 

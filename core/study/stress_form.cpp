@@ -26,7 +26,8 @@ double largestIn(const StateReading& state) {
 
 StressForm formFor(const Study& study, double largest) {
   const Unit unit = stressUnitOf(study);
-  return {unit, decimalsFor(unit.fromBase(largest))};
+  const int significant = 3 + static_cast<int>(study.convention.digits);
+  return {unit, decimalsFor(unit.fromBase(largest), significant)};
 }
 
 } // namespace

@@ -13,8 +13,8 @@ inline constexpr int angleDecimals = 2;
 Unit stressUnitOf(const Study& study);
 
 /// How the stresses of one state are written, wherever they stand: in the study's unit, with the decimals
-/// that give four significant digits to the greatest |stress| of any plane (and to σz), so that they do not
-/// change while a plane turns. The unit's text is read once for all of them.
+/// that give the study's count of significant digits to the greatest |stress| of any plane (and to σz), so
+/// that they do not change while a plane turns. The unit's text is read once for all of them.
 struct StressForm {
   Unit unit;
   int decimals = 0;

@@ -28,6 +28,7 @@ struct Convention {
   Positive positive = Positive::tension;
   ShearAxis shearAxis = ShearAxis::tensorDown;
   ShearRule shearForce = ShearRule::upward; ///< sense of V_y in section forces
+  Digits digits = Digits::four;
   bool operator==(const Convention&) const = default;
 };
 

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/table/check_words.h"
 
+#include "core/quantity/decimal_sign.h"
 #include "core/quantity/format.h"
 #include "core/strength/cautions.h"
 #include "core/strength/shown_ratio.h"
@@ -67,11 +68,11 @@ Text bestSentence(const CheckSetup& check, const BestDirection& best) {
 /// "n = 2.5": the parameter, of which a criterion has one at most, where it is not the usual value.
 Text unusualOf(const Parameters& given) {
   if (given.n && *given.n != 2)
-    return symbol("n = %1").with(exactNumber(*given.n));
+    return symbol("n = %1").with(withDecimalSign(exactNumber(*given.n)));
   if (given.F12)
     return symbol("F_{12} = %1 MPa⁻²").with(shownNumber(*given.F12, decimalsFor(std::abs(*given.F12))));
   if (given.kc90 && *given.kc90 != 1)
-    return symbol("k_{c,90} = %1").with(exactNumber(*given.kc90));
+    return symbol("k_{c,90} = %1").with(withDecimalSign(exactNumber(*given.kc90)));
   if (given.edge)
     return PW_TEXT("Check", "edge at %1").with(shownDegrees(*given.edge, angleDecimals));
   return {};
@@ -227,7 +228,7 @@ Text factorSentence(const StrengthFactor& factor) {
   // Factors are short decimals; their quotient is cut to four digits.
   const auto number = [](double value) {
     const double scale = std::pow(10.0, decimalsFor(value, 4));
-    return exactNumber(std::round(value * scale) / scale);
+    return withDecimalSign(exactNumber(std::round(value * scale) / scale));
   };
   if (factor.betaW)
     return PW_TEXT("Check", "f_{u} over β_{w} %1 and γ_{M2} %2.")

@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/quantity/decimal_sign.h"
 #include "core/quantity/format.h"
 #include "core/working/formula.h"
 
@@ -83,7 +84,7 @@ public:
 
 private:
   static std::string constant(double value) {
-    const std::string digits = exactNumber(value);
+    const std::string digits = withDecimalSign(exactNumber(value));
     return value < 0 ? "−" + digits.substr(1) : digits;
   }
 

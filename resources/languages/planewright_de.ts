@@ -951,6 +951,22 @@
         <source>τ_{nt} drawn + up</source>
         <translation>τ_{nt} + nach oben aufgetragen</translation>
     </message>
+    <message>
+        <source>3 significant digits</source>
+        <translation>3 gültige Stellen</translation>
+    </message>
+    <message>
+        <source>4 significant digits</source>
+        <translation>4 gültige Stellen</translation>
+    </message>
+    <message>
+        <source>5 significant digits</source>
+        <translation>5 gültige Stellen</translation>
+    </message>
+    <message>
+        <source>6 significant digits</source>
+        <translation>6 gültige Stellen</translation>
+    </message>
 </context>
 <context>
     <name>Criterion</name>
@@ -1101,6 +1117,17 @@
     <message>
         <source>own form, common practice, no source</source>
         <translation>eigene Form, übliche Praxis, ohne Quelle</translation>
+    </message>
+</context>
+<context>
+    <name>Decimal sign</name>
+    <message>
+        <source>point: 0.5</source>
+        <translation>Punkt: 0.5</translation>
+    </message>
+    <message>
+        <source>comma: 0,5</source>
+        <translation>Komma: 0,5</translation>
     </message>
 </context>
 <context>
@@ -3554,6 +3581,10 @@
     <message>
         <source>shown combination</source>
         <translation>gezeigte Kombination</translation>
+    </message>
+    <message>
+        <source>digits of stresses</source>
+        <translation>Stellenzahl der Spannungen</translation>
     </message>
 </context>
 <context>
@@ -6845,6 +6876,10 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
         <source>%1, %2</source>
         <translation>%1, %2</translation>
     </message>
+    <message>
+        <source>digits of stresses</source>
+        <translation>Stellenzahl der Spannungen</translation>
+    </message>
 </context>
 <context>
     <name>planewright::ElementView</name>
@@ -8814,6 +8849,14 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
     <message>
         <source>that of the study</source>
         <translation>der der Studie</translation>
+    </message>
+    <message>
+        <source>stresses with</source>
+        <translation>Spannungen mit</translation>
+    </message>
+    <message>
+        <source>decimal sign of figures and sheets</source>
+        <translation>Dezimalzeichen in Abbildungen und Rechenblättern</translation>
     </message>
 </context>
 <context>

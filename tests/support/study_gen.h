@@ -305,7 +305,7 @@ inline rc::Gen<Study> anyStudy() {
     Study study;
     study.title = anyTitle();
     study.units = anyUnits();
-    study.convention = {anyWord<Positive>(), anyWord<ShearAxis>(), anyWord<ShearRule>()};
+    study.convention = {anyWord<Positive>(), anyWord<ShearAxis>(), anyWord<ShearRule>(), anyWord<Digits>()};
     study.cases = anyCases();
     study.combinations = anyCombinations(study.cases);
     study.materials = anyMaterials();

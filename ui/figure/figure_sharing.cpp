@@ -5,6 +5,7 @@
 #include "core/record/embedded_study.h"
 #include "ui/files/file_names.h"
 #include "ui/look/look.h"
+#include "ui/look/printed_numbers.h"
 #include "ui/paint/export.h"
 
 #include <QClipboard>
@@ -33,6 +34,7 @@ FigureOrder orderOf(const FigureSettings& settings, const QString& studyFile, co
   order.parts = settings.parts;
   order.caption = verbatim(caption.trimmed().toStdString());
   order.studyName = QFileInfo(studyFile).completeBaseName().toStdString();
+  order.decimal = chosenDecimalSign();
   order.translate = translation();
   return order;
 }

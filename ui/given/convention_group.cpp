@@ -53,8 +53,10 @@ ConventionGroup::ConventionGroup(Desk& desk, QWidget* parent)
   addChoices<Positive>(*grid, m_positive);
   addChoices<ShearAxis>(*grid, m_shearAxis);
   body().addLayout(grid);
-  addShearForce();
+  // It counts only in section forces, but whoever types them must see it.
+  m_shearForce = addWord<ShearRule>(Spot::shearForce, tr("sense of the shear force"));
   addUnits();
+  m_digits = addWord<Digits>(Spot::digits, tr("digits of stresses"));
   setFolded(true);
   connect(&m_desk, &Desk::changed, this, &ConventionGroup::refresh);
   refresh();
@@ -92,25 +94,25 @@ void ConventionGroup::addUnits() {
   }
 }
 
-// It counts only in section forces, but whoever types them must see it.
-void ConventionGroup::addShearForce() {
-  m_shearForce = new QuietButton({}, Role::focus, this);
-  m_shearForce->setAccessibleName(shown(rowOf(Spot::shearForce).label));
-  auto* menu = new QMenu(m_shearForce);
-  for (const Named<ShearRule>& row : namesOf<ShearRule>())
-    menu->addAction(shown(row.label), this, [this, word = std::string(row.word)] {
-      m_desk.request({Type{{Spot::shearForce, {}, {}}, word}}, m_desk.newCommand(),
-                     tr("sense of the shear force"));
+template <class Enum>
+QuietButton* ConventionGroup::addWord(Spot spot, const QString& what) {
+  auto* button = new QuietButton({}, Role::focus, this);
+  button->setAccessibleName(shown(rowOf(spot).label));
+  auto* menu = new QMenu(button);
+  for (const Named<Enum>& row : namesOf<Enum>())
+    menu->addAction(shown(row.label), this, [this, spot, what, word = std::string(row.word)] {
+      m_desk.request({Type{{spot, {}, {}}, word}}, m_desk.newCommand(), what);
     });
-  m_shearForce->setMenu(menu);
+  button->setMenu(menu);
   auto* line = new QHBoxLayout;
-  line->addWidget(m_shearForce);
+  line->addWidget(button);
   line->addStretch();
   body().addLayout(line);
+  return button;
 }
 
 QList<QWidget*> ConventionGroup::buttons() const {
-  return {m_positive.at(0), m_positive.at(1), m_shearAxis.at(0), m_shearAxis.at(1), m_shearForce};
+  return {m_positive.at(0), m_positive.at(1), m_shearAxis.at(0), m_shearAxis.at(1), m_shearForce, m_digits};
 }
 
 void ConventionGroup::choose(Positive positive) {
@@ -138,6 +140,8 @@ void ConventionGroup::refresh() {
                                                                    : tr("Vy = dMz/dx"));
   m_shearForce->setToolTip(shown(labelOf(convention.shearForce)));
   m_shearForce->updateGeometry();
+  m_digits->setText(shown(labelOf(convention.digits)));
+  m_digits->updateGeometry();
   setSummary(
       tr("%1, %2").arg(shown(shortLabel(convention.positive)), shown(shortLabel(convention.shearAxis))));
 }

@@ -25,7 +25,9 @@ public:
 private:
   template <class Enum>
   void addChoices(QGridLayout& grid, QList<ChoiceButton*>& buttons);
-  void addShearForce();
+  /// A button that names the chosen word of a spot and opens a menu of all.
+  template <class Enum>
+  QuietButton* addWord(Spot spot, const QString& what);
   void addUnits();
   void choose(Positive positive);
   void choose(ShearAxis axis);
@@ -35,6 +37,7 @@ private:
   QList<ChoiceButton*> m_positive;
   QList<ChoiceButton*> m_shearAxis;
   QuietButton* m_shearForce;
+  QuietButton* m_digits;
   QList<EntryField*> m_fields;
 };
 

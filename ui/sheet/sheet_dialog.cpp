@@ -10,6 +10,7 @@
 #include "ui/look/column_area.h"
 #include "ui/look/dialog_parts.h"
 #include "ui/look/look.h"
+#include "ui/look/printed_numbers.h"
 #include "ui/paint/export.h"
 #include "ui/sheet/pages_view.h"
 #include "ui/sheet/report_output.h"
@@ -118,6 +119,7 @@ SheetOrder SheetDialog::order() const {
   order.studyName = QFileInfo(m_studyFile).completeBaseName().toStdString();
   order.earlier = m_earlier;
   order.earlierName = QFileInfo(m_earlierFile).completeBaseName().toStdString();
+  order.decimal = chosenDecimalSign();
   order.translate = translation();
   return order;
 }

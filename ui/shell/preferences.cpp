@@ -5,6 +5,7 @@
 #include "ui/files/folders.h"
 #include "ui/look/language.h"
 #include "ui/look/look.h"
+#include "ui/look/printed_numbers.h"
 
 #include <QSettings>
 
@@ -58,7 +59,9 @@ Preferences preferences() {
   readWord(settings, "new/positive", preferences.convention.positive);
   readWord(settings, "new/shearAxis", preferences.convention.shearAxis);
   readWord(settings, "new/shearForce", preferences.convention.shearForce);
+  readWord(settings, "new/digits", preferences.convention.digits);
   preferences.paper = rememberedSheet(settings).paper;
+  preferences.decimal = chosenDecimalSign();
   preferences.studiesFolder = chosenFolder(Folder::studies);
   preferences.outputsFolder = chosenFolder(Folder::outputs);
   return preferences;
@@ -78,9 +81,11 @@ void prefer(const Preferences& wanted) {
   keepWord(settings, "new/positive", wanted.convention.positive);
   keepWord(settings, "new/shearAxis", wanted.convention.shearAxis);
   keepWord(settings, "new/shearForce", wanted.convention.shearForce);
+  keepWord(settings, "new/digits", wanted.convention.digits);
   SheetSettings sheet = rememberedSheet(settings);
   sheet.paper = wanted.paper;
   rememberSheet(settings, sheet);
+  chooseDecimalSign(wanted.decimal);
   chooseFolder(Folder::studies, wanted.studiesFolder);
   chooseFolder(Folder::outputs, wanted.outputsFolder);
   chooseTextPercent(wanted.textPercent);

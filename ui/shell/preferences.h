@@ -1,6 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "core/quantity/decimal_sign.h"
 #include "core/study/study.h"
 #include "ui/sheet/sheet_settings.h"
 #include "ui/shell/appearance.h"
@@ -16,8 +17,9 @@ struct Preferences {
   Convention convention; ///< of new studies
   Title title;           ///< of new studies: project, prepared and purpose count
   Paper paper = Paper::a4;
-  QString studiesFolder; ///< empty: that of the newest file
-  QString outputsFolder; ///< empty: that of the study
+  DecimalSign decimal = DecimalSign::point; ///< of figures and sheets
+  QString studiesFolder;                    ///< empty: that of the newest file
+  QString outputsFolder;                    ///< empty: that of the study
   bool operator==(const Preferences&) const = default;
 };
 

@@ -177,6 +177,7 @@ void PreferencesDialog::addStudies() {
   addWord(form, tr("positive normal stress"), &Convention::positive);
   addWord(form, tr("shear on the circle"), &Convention::shearAxis);
   addWord(form, tr("shear force"), &Convention::shearForce);
+  addWord(form, tr("stresses with"), &Convention::digits);
   addTitle(form, tr("project"), &Title::project);
   addTitle(form, tr("prepared by"), &Title::prepared);
   addTitle(form, tr("purpose"), &Title::purpose);
@@ -192,6 +193,13 @@ void PreferencesDialog::addOutputs() {
       form, tr("paper of sheets"), papers,
       [](const Preferences& preferences) { return static_cast<int>(preferences.paper); },
       [](Preferences& preferences, int place) { preferences.paper = static_cast<Paper>(place); });
+  QStringList signs;
+  for (const Named<DecimalSign>& row : namesOf<DecimalSign>())
+    signs << shown(row.label);
+  addChoice(
+      form, tr("decimal sign of figures and sheets"), signs,
+      [](const Preferences& preferences) { return static_cast<int>(preferences.decimal); },
+      [](Preferences& preferences, int place) { preferences.decimal = static_cast<DecimalSign>(place); });
   addFolder(form, tr("folder of figures and sheets"), tr("that of the study"), &Preferences::outputsFolder);
 }
 

@@ -10,6 +10,10 @@
 
 #include <gtest/gtest.h>
 
+#include <algorithm>
+#include <regex>
+#include <sstream>
+
 namespace planewright {
 namespace {
 
@@ -17,6 +21,35 @@ TEST(Sheet, saysWhatItSaid) {
   SheetOrder order;
   order.studyName = "tie";
   EXPECT_TRUE(matchesApproved("report/judged.txt", sheetText(sheetOf(judgedStudy(), order))));
+}
+
+/// Where two texts differ: "12.8|12,8", in the order of the text.
+std::vector<std::string> differences(const std::string& before, const std::string& after) {
+  std::vector<std::string> found;
+  for (std::size_t i = 0; i < before.size() && i < after.size(); ++i)
+    if (before[i] != after[i])
+      found.push_back(std::string{before[i], after[i]});
+  return found;
+}
+
+TEST(Sheet, hasTheDecimalSignInItsNumbersAndWhatIsTypedAsItWas) {
+  SheetOrder order;
+  order.depth = Depth::all;
+  const Study study = judgedStudy();
+  const std::string point = sheetText(sheetOf(study, order));
+  order.decimal = DecimalSign::comma;
+  const std::string comma = sheetText(sheetOf(study, order));
+  ASSERT_EQ(point.size(), comma.size());
+  const std::vector<std::string> changes = differences(point, comma);
+  EXPECT_GT(changes.size(), 200U);
+  EXPECT_TRUE(std::ranges::all_of(changes, [](const std::string& one) { return one == ".,"; }));
+  // What is left with a point is typed, a heading or the name of a combination: no line of working has one.
+  std::istringstream lines(comma);
+  for (std::string line; std::getline(lines, line);)
+    if (line.find(" = ") != std::string::npos && line.ends_with(" MPa [4]")) {
+      EXPECT_FALSE(std::regex_search(line, std::regex("[0-9]\\.[0-9]"))) << line;
+    }
+  EXPECT_NE(comma.find("1.35 G + 1.5 S"), std::string::npos);
 }
 
 TEST(Sheet, standsFirstWhatGoverns) {
