@@ -252,12 +252,16 @@ void MainWindow::addHelpMenu() {
   menu.addAction(tr("&About Planewright"), this, &MainWindow::showAbout);
 }
 
+// Told to the widgets themselves: to the application the key would be this command again, without an end.
 void MainWindow::copyFromFocus() {
-  QWidget* focused = QApplication::focusWidget();
-  if (!focused)
-    return;
   QKeyEvent copy(QEvent::KeyPress, Qt::Key_C, Qt::ControlModifier);
-  QApplication::sendEvent(focused, &copy);
+  for (QWidget* widget = QApplication::focusWidget(); widget && widget != this;
+       widget = widget->parentWidget()) {
+    copy.accept();
+    static_cast<QObject*>(widget)->event(&copy);
+    if (copy.isAccepted())
+      return;
+  }
 }
 
 void MainWindow::showPreferences() {

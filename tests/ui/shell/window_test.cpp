@@ -72,6 +72,13 @@ protected:
   std::unique_ptr<MainWindow> m_window;
 };
 
+TEST_F(WindowTest, copyWhereNothingIsToCopyIsNoCommandWithoutAnEnd) {
+  MainWindow& window = shown();
+  window.element().setFocus();
+  QTest::keyClick(&window.element(), Qt::Key_C, Qt::ControlModifier);
+  EXPECT_TRUE(window.isVisible());
+}
+
 TEST_F(WindowTest, makesWhatIsNotShownWhenItFirstIs) {
   MainWindow& window = shown();
   EXPECT_TRUE(window.findChildren<SummaryPage*>().isEmpty());
