@@ -8855,8 +8855,8 @@ daher bliebe offen, welcher Lastfall zu ändern ist.</translation>
         <translation>Spannungen mit</translation>
     </message>
     <message>
-        <source>decimal sign of figures and sheets</source>
-        <translation>Dezimalzeichen in Abbildungen und Rechenblättern</translation>
+        <source>decimal sign</source>
+        <translation>Dezimalzeichen</translation>
     </message>
 </context>
 <context>

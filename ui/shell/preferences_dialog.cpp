@@ -197,7 +197,7 @@ void PreferencesDialog::addOutputs() {
   for (const Named<DecimalSign>& row : namesOf<DecimalSign>())
     signs << shown(row.label);
   addChoice(
-      form, tr("decimal sign of figures and sheets"), signs,
+      form, tr("decimal sign"), signs,
       [](const Preferences& preferences) { return static_cast<int>(preferences.decimal); },
       [](Preferences& preferences, int place) { preferences.decimal = static_cast<DecimalSign>(place); });
   addFolder(form, tr("folder of figures and sheets"), tr("that of the study"), &Preferences::outputsFolder);

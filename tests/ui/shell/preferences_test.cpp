@@ -4,6 +4,7 @@
 #include "shell_test.h"
 #include "ui/files/folders.h"
 #include "ui/look/language.h"
+#include "ui/look/printed_numbers.h"
 #include "ui/shell/main_window.h"
 
 #include <QApplication>
@@ -54,7 +55,9 @@ TEST_F(PreferencesTest, whatIsChosenIsKeptAndCounts) {
   list(dialog, "stress in").setCurrentText("psi");
   list(dialog, "moment in").setCurrentText("kip*ft");
   list(dialog, "positive normal stress").setCurrentIndex(1);
+  list(dialog, "stresses with").setCurrentIndex(3);
   list(dialog, "paper of sheets").setCurrentIndex(1);
+  list(dialog, "decimal sign").setCurrentIndex(1);
   text(dialog, "project").setText("  Boat sheds ");
   text(dialog, "folder of studies").setText(file(""));
   const Preferences chosen = dialog.chosen();
@@ -65,6 +68,7 @@ TEST_F(PreferencesTest, whatIsChosenIsKeptAndCounts) {
   EXPECT_EQ(languageOfWindow(), "de");
   EXPECT_EQ(QApplication::palette().color(QPalette::Window), QColor(Qt::black));
   EXPECT_EQ(rememberedSheet(QSettings()).paper, Paper::letter);
+  EXPECT_EQ(chosenDecimalSign(), DecimalSign::comma);
   EXPECT_EQ(chosenFolder(Folder::studies), file(""));
 
   MainWindow window(answers());
@@ -74,6 +78,7 @@ TEST_F(PreferencesTest, whatIsChosenIsKeptAndCounts) {
   EXPECT_EQ(study.points[0].stress[0].sx, "0 psi");
   EXPECT_EQ(study.units.moment, "kip*ft");
   EXPECT_EQ(study.convention.positive, Positive::compression);
+  EXPECT_EQ(study.convention.digits, Digits::six);
   EXPECT_EQ(study.title.project, "Boat sheds");
 }
 
