@@ -142,7 +142,7 @@ void PlaneTable::keyPressEvent(QKeyEvent* event) {
     goFrom(currentIndex());
   else if (event->key() == Qt::Key_Insert)
     Q_EMIT insertPressed();
-  else if (event->key() == Qt::Key_Delete)
+  else if (event->key() == Qt::Key_Delete && currentIndex().isValid())
     Q_EMIT deletePressed(currentIndex().row());
   else
     QTableView::keyPressEvent(event);
@@ -156,6 +156,8 @@ void PlaneTable::mouseDoubleClickEvent(QMouseEvent* event) {
 
 // From a value of another combination to that combination, else to the plane of the row.
 void PlaneTable::goFrom(const QModelIndex& index) {
+  if (!index.isValid())
+    return; // rows that came anew have no current one
   if (const QString combination = m_model.combinationIn(index); !combination.isEmpty())
     Q_EMIT combinationWanted(combination);
   else

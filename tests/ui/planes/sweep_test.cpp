@@ -53,6 +53,15 @@ TEST(SweepModel, theNearestRowIsTinted) {
   EXPECT_EQ(model.index(model.tintedRow(), 1).data().toString(), QString::fromUtf8("90.00°"));
 }
 
+TEST_F(SweepTest, enterAfterTheRowsCameAnewGoesNowhere) {
+  type("30");
+  page.table().setCurrentIndex({});
+  const std::string before = desk.study().points[0].reading;
+  for (const Qt::Key key : {Qt::Key_Return, Qt::Key_Delete})
+    QTest::keyClick(&page.table(), key);
+  EXPECT_EQ(desk.study().points[0].reading, before);
+}
+
 TEST_F(SweepTest, theStepIsAnExpression) {
   EXPECT_EQ(page.step().text(), "5 deg");
   type("90/4");
