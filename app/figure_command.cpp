@@ -195,14 +195,8 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   wanted.carriesStudy = !arguments.has("--without-study");
   wanted.order.mono = arguments.has("--mono");
   wanted.order.studyName = studyNameOf(arguments.operands.front());
-  if (auto problem = speakAs(arguments.valueOf("--language")))
+  if (auto problem = readVoice(arguments, wanted.order))
     return tl::unexpected(*std::move(problem));
-  wanted.order.translate = translation();
-  const Result<DecimalSign> decimal =
-      wordOfOption("--decimal", arguments.valueOf("--decimal"), DecimalSign::point);
-  if (!decimal)
-    return tl::unexpected(decimal.error());
-  wanted.order.decimal = *decimal;
   if (auto problem = readArrangement(arguments, wanted.order))
     return tl::unexpected(*std::move(problem));
   const Unit mm{"mm", dimension::length, 1, 1};

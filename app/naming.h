@@ -1,9 +1,12 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
+#include "app/arguments.h"
+#include "core/quantity/decimal_sign.h"
 #include "core/study/study.h"
 #include "core/words/names.h"
 #include "core/words/problem.h"
+#include "ui/look/look.h"
 
 namespace planewright {
 
@@ -32,6 +35,19 @@ Result<Enum> wordOfOption(const char* option, const std::string* given, Enum usu
   return tl::unexpected(Problem{
       option, 0, 0, *given, PW_TEXT("Command", "“%1” is none of the words of %2.").with(*given).with(option),
       PW_TEXT("Command", "Take one of these: %1.").with(words)});
+}
+
+/// The language and the decimal sign in which an Order is printed, as --language and --decimal say.
+template <class Order>
+std::optional<Problem> readVoice(const Arguments& arguments, Order& order) {
+  if (std::optional<Problem> problem = speakAs(arguments.valueOf("--language")))
+    return problem;
+  order.translate = translation();
+  Result<DecimalSign> decimal = wordOfOption("--decimal", arguments.valueOf("--decimal"), order.decimal);
+  if (!decimal)
+    return std::move(decimal).error();
+  order.decimal = *decimal;
+  return std::nullopt;
 }
 
 } // namespace planewright

@@ -85,14 +85,8 @@ Result<Wanted> wantedBy(const Arguments& arguments) {
   wanted.order.depth = *depth;
   wanted.order.figures = !arguments.has("--without-figures");
   wanted.order.studyName = studyNameOf(arguments.operands.front());
-  if (auto problem = speakAs(arguments.valueOf("--language")))
+  if (auto problem = readVoice(arguments, wanted.order))
     return tl::unexpected(*std::move(problem));
-  wanted.order.translate = translation();
-  const Result<DecimalSign> decimal =
-      wordOfOption("--decimal", arguments.valueOf("--decimal"), DecimalSign::point);
-  if (!decimal)
-    return tl::unexpected(decimal.error());
-  wanted.order.decimal = *decimal;
   for (const GivenOption& option : arguments.options)
     if (option.name == "--point")
       wanted.order.points.push_back(option.value);

@@ -3,6 +3,7 @@
 // beyond the last second, and no file may be half. PLANEWRIGHT_KILLS says how often (a few, if not given),
 // and PLANEWRIGHT_KILLS_SEED with what dice; both are printed.
 #include "core/record/study_file.h"
+#include "tests/support/from_environment.h"
 #include "ui/files/file_bytes.h"
 #include "ui/files/recovery_folder.h"
 
@@ -30,11 +31,6 @@ namespace {
 
 using namespace std::chrono_literals;
 using Clock = std::chrono::steady_clock;
-
-int fromEnvironment(const char* name, int otherwise) {
-  const char* value = std::getenv(name);
-  return value ? std::atoi(value) : otherwise;
-}
 
 /// The program beside this one, so that both can be copied away from a build that goes on.
 std::string sessionProgram() {

@@ -4,6 +4,7 @@
 // what the program then holds in memory must not have grown. PLANEWRIGHT_SOAK says how many gestures (a few,
 // if not given), and PLANEWRIGHT_SOAK_SEED with what dice; both are printed.
 #include "core/record/study_file.h"
+#include "tests/support/from_environment.h"
 #include "tests/ui/shell/shell_test.h"
 #include "ui/circle/circle_plot.h"
 #include "ui/circle/circle_view.h"
@@ -38,11 +39,6 @@ extern "C" std::size_t __sanitizer_get_current_allocated_bytes();
 
 namespace planewright {
 namespace {
-
-int fromEnvironment(const char* name, int otherwise) {
-  const char* value = std::getenv(name);
-  return value ? std::atoi(value) : otherwise;
-}
 
 std::size_t bytesInUse() {
 #if defined(__SANITIZE_ADDRESS__)

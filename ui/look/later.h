@@ -2,7 +2,6 @@
 #pragma once
 
 #include <QVBoxLayout>
-#include <QVariant>
 #include <QWidget>
 
 #include <functional>

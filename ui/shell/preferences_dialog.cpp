@@ -18,6 +18,8 @@
 #include <QVBoxLayout>
 
 #include <algorithm>
+#include <type_traits>
+#include <utility>
 
 namespace planewright {
 
@@ -82,17 +84,16 @@ QLineEdit* PreferencesDialog::addText(QFormLayout& form, const QString& caption,
   return edit;
 }
 
-template <class Enum>
-void PreferencesDialog::addWord(QFormLayout& form, const QString& caption, Enum Convention::*word) {
+template <class At>
+void PreferencesDialog::addWord(QFormLayout& form, const QString& caption, At at) {
+  using Enum = std::remove_cvref_t<decltype(at(std::declval<Preferences&>()))>;
   QStringList words;
   for (const Named<Enum>& row : namesOf<Enum>())
     words << shown(row.label);
   addChoice(
       form, caption, words,
-      [word](const Preferences& preferences) { return static_cast<int>(preferences.convention.*word); },
-      [word](Preferences& preferences, int place) {
-        preferences.convention.*word = static_cast<Enum>(place);
-      });
+      [at](const Preferences& preferences) { return static_cast<int>(at(preferences)); },
+      [at](Preferences& preferences, int place) { at(preferences) = static_cast<Enum>(place); });
 }
 
 void PreferencesDialog::addUnit(QFormLayout& form, const QString& caption, const QStringList& units,
@@ -174,10 +175,16 @@ void PreferencesDialog::addStudies() {
   addUnit(form, tr("length in"), {"mm", "cm", "m", "in", "ft"}, &Units::length);
   addUnit(form, tr("moment in"), {"kN*m", "N*m", "N*mm", "kN*mm", "lbf*ft", "lbf*in", "kip*ft", "kip*in"},
           &Units::moment);
-  addWord(form, tr("positive normal stress"), &Convention::positive);
-  addWord(form, tr("shear on the circle"), &Convention::shearAxis);
-  addWord(form, tr("shear force"), &Convention::shearForce);
-  addWord(form, tr("stresses with"), &Convention::digits);
+  addWord(
+      form, tr("positive normal stress"),
+      [](auto& preferences) -> auto& { return preferences.convention.positive; });
+  addWord(
+      form, tr("shear on the circle"),
+      [](auto& preferences) -> auto& { return preferences.convention.shearAxis; });
+  addWord(
+      form, tr("shear force"), [](auto& preferences) -> auto& { return preferences.convention.shearForce; });
+  addWord(
+      form, tr("stresses with"), [](auto& preferences) -> auto& { return preferences.convention.digits; });
   addTitle(form, tr("project"), &Title::project);
   addTitle(form, tr("prepared by"), &Title::prepared);
   addTitle(form, tr("purpose"), &Title::purpose);
@@ -186,20 +193,10 @@ void PreferencesDialog::addStudies() {
 
 void PreferencesDialog::addOutputs() {
   QFormLayout& form = *group(tr("Figures and sheets"));
-  QStringList papers;
-  for (const Named<Paper>& row : namesOf<Paper>())
-    papers << shown(row.label);
-  addChoice(
-      form, tr("paper of sheets"), papers,
-      [](const Preferences& preferences) { return static_cast<int>(preferences.paper); },
-      [](Preferences& preferences, int place) { preferences.paper = static_cast<Paper>(place); });
-  QStringList signs;
-  for (const Named<DecimalSign>& row : namesOf<DecimalSign>())
-    signs << shown(row.label);
-  addChoice(
-      form, tr("decimal sign"), signs,
-      [](const Preferences& preferences) { return static_cast<int>(preferences.decimal); },
-      [](Preferences& preferences, int place) { preferences.decimal = static_cast<DecimalSign>(place); });
+  addWord(
+      form, tr("paper of sheets"), [](auto& preferences) -> auto& { return preferences.paper; });
+  addWord(
+      form, tr("decimal sign"), [](auto& preferences) -> auto& { return preferences.decimal; });
   addFolder(form, tr("folder of figures and sheets"), tr("that of the study"), &Preferences::outputsFolder);
 }
 

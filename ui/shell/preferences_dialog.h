@@ -39,8 +39,9 @@ private:
   QLineEdit* addText(QFormLayout& form, const QString& caption,
                      std::function<QString(const Preferences&)> text,
                      std::function<void(Preferences&, const QString&)> take);
-  template <class Enum>
-  void addWord(QFormLayout& form, const QString& caption, Enum Convention::*word);
+  /// The words of an enum; `at` gives its place in the Preferences.
+  template <class At>
+  void addWord(QFormLayout& form, const QString& caption, At at);
   void addUnit(QFormLayout& form, const QString& caption, const QStringList& units, std::string Units::*unit);
   void addTitle(QFormLayout& form, const QString& caption, std::string Title::*title);
   void addFolder(QFormLayout& form, const QString& caption, const QString& otherwise,
