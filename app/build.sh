@@ -8,7 +8,7 @@ root=$(cd "$(dirname "${BASH_SOURCE[0]}")/.." && pwd)
 build_packages=(ninja-build cmake g++ qt6-base-dev qt6-charts-dev libqt6opengl6-dev qt6-tools-dev
   qt6-l10n-tools qt6-translations-l10n libeigen3-dev nlohmann-json3-dev libexpected-dev nettle-dev fonts-liberation2)
 test_packages=(libgtest-dev libgmock-dev librapidcheck-dev poppler-utils librsvg2-bin locales
-  python3-pyatspi at-spi2-core dbus xvfb xauth desktop-file-utils appstream shared-mime-info libxml2-utils libglib2.0-bin
+  python3-pyatspi at-spi2-core dbus xvfb desktop-file-utils appstream shared-mime-info libxml2-utils libglib2.0-bin
   mandoc man-db)
 package_packages=(dpkg-dev file)
 check_packages=(clang-16 clang-tidy-16 clang-format libclang-rt-16-dev)

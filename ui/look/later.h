@@ -16,6 +16,9 @@ public:
   /// `make` makes the page in the parent that it is given.
   Later(std::function<Page*(QWidget*)> make, QWidget* parent) : QWidget(parent), m_make(std::move(make)) {}
 
+  /// The page ends first: a place that ends would take the keys from a page that still asks what is no more.
+  ~Later() override { delete m_page; }
+
   Page& page() {
     if (!m_page)
       build();

@@ -16,7 +16,7 @@ def check(holds, words):
         faults.append(words)
 
 
-def waited_for(found, what, seconds=20):
+def waited_for(found, what, seconds=60):
     """What `found` gives once it gives something."""
     end = time.time() + seconds
     while time.time() < end:
@@ -71,6 +71,10 @@ def named(root, name, role=None):
     return None
 
 
+def starting(root, words):
+    return next((node for node in parts(root) if node.name.startswith(words)), None)
+
+
 def write_tree(root, path):
     def lines(node, depth):
         value, table = value_of(node), table_of(node)
@@ -100,7 +104,7 @@ def write_tree(root, path):
 app = waited_for(application, "the program")
 window = waited_for(lambda: next((f for f in app if "study" in f.name), None), "its window")
 waited_for(lambda: named(window, "Element", "dial"), "the element")
-time.sleep(1)
+waited_for(lambda: named(window, "Utilisation over the angle of the line", "dial"), "the plot of utilisation")
 write_tree(window, sys.argv[1])
 
 
@@ -133,7 +137,7 @@ check(abs(plot.queryValue().currentValue - 4.7636) < 1e-3, "the plot's value")
 # What turns by its value turns everything.
 element.queryValue().currentValue = -35
 waited_for(lambda: circle.queryValue().currentValue == -35, "the circle after the element was turned")
-field = next(n for n in parts(window) if n.name.startswith("normal at,"))
+field = starting(window, "normal at,")
 waited_for(lambda: "-35" in field.queryText().getText(0, -1), "the field after the element was turned")
 plot.queryValue().currentValue = 8
 waited_for(lambda: "at 8.0 degrees" in element.description, "the line after the plot was turned")
@@ -148,7 +152,7 @@ checks = table_of(named(window, "Checks of the point"))
 check(checks is not None and checks.nRows == 2, "the checks are no table")
 
 # Another case is chosen by a press; the fields show what it has.
-moment = next(n for n in parts(window) if n.name.startswith("Mz,"))
+moment = waited_for(lambda: starting(window, "Mz,"), "the field of the moment")
 check("5.2 kN" in moment.queryText().getText(0, -1), "the moment of case G")
 named(window, "case S").queryAction().doAction(0)
 waited_for(lambda: "8.1 kN" in moment.queryText().getText(0, -1), "the moment of case S")
