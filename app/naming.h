@@ -2,8 +2,8 @@
 #pragma once
 
 #include "app/arguments.h"
-#include "core/quantity/decimal_sign.h"
 #include "core/study/study.h"
+#include "core/words/decimal_sign.h"
 #include "core/words/names.h"
 #include "core/words/problem.h"
 #include "ui/look/look.h"

@@ -4,8 +4,8 @@
 #include "core/figure/arrangement.h"
 #include "core/figure/look.h"
 #include "core/figure/picture.h"
-#include "core/quantity/decimal_sign.h"
 #include "core/study/readout.h"
+#include "core/words/decimal_sign.h"
 #include "core/words/problem.h"
 
 namespace planewright {

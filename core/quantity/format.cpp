@@ -1,7 +1,7 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/quantity/format.h"
 
-#include "core/quantity/decimal_sign.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 #include <array>

@@ -1,9 +1,9 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/quantity/decimal_sign.h"
 #include "core/report/sheet.h"
 #include "core/study/readout.h"
+#include "core/words/decimal_sign.h"
 #include "core/words/problem.h"
 
 namespace planewright {

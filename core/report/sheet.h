@@ -2,8 +2,8 @@
 #pragma once
 
 #include "core/figure/picture.h"
-#include "core/quantity/decimal_sign.h"
 #include "core/report/second_route.h"
+#include "core/words/decimal_sign.h"
 #include "core/working/step.h"
 
 namespace planewright {

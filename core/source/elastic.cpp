@@ -2,6 +2,7 @@
 #include "core/source/elastic.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 namespace planewright {
 
@@ -22,7 +23,8 @@ struct Judged {
   void operator()(const Isotropic& material) {
     positive("E", material.E, PW_TEXT("Source", "modulus of elasticity"));
     if (!(material.nu > -1 && material.nu <= 0.5))
-      add("nu", PW_TEXT("Source", "Poisson's ratio %1 is out of range.").with(exactNumber(material.nu)),
+      add("nu",
+          PW_TEXT("Source", "Poisson's ratio %1 is out of range.").with(numberText(exactNumber(material.nu))),
           PW_TEXT("Source", "It lies between −1 and 0.5; for most metals near 0.3."));
   }
 
@@ -36,7 +38,7 @@ struct Judged {
           PW_TEXT("Source",
                   "With ν_{12} = %1 its square is not less than E along the line over E across it: no "
                   "material is like that.")
-              .with(exactNumber(material.nu12)),
+              .with(numberText(exactNumber(material.nu12))),
           PW_TEXT("Source", "ν_{12} is the contraction across the line when stressed along it; ν_{21} is the "
                             "smaller one."));
   }

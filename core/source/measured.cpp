@@ -2,6 +2,7 @@
 #include "core/source/measured.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 #include <cmath>
 #include <string>
@@ -166,7 +167,7 @@ std::vector<Text> cautionsOf(const RosetteSolution& solution, const Elastic& ela
   if (solution.errorGain > cautionedErrorGain)
     cautions.push_back(
         PW_TEXT("Source", "The gauges are nearly parallel: an error of reading can grow %1 times.")
-            .with(shownNumber(solution.errorGain, 0)));
+            .with(numberText(shownNumber(solution.errorGain, 0))));
   cautions.push_back(PW_TEXT("Source",
                              "Gauges see the surface alone, and strains of temperature and moisture as "
                              "well as those of stress."));

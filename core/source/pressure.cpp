@@ -2,6 +2,7 @@
 #include "core/source/pressure.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 namespace planewright {
 
@@ -41,8 +42,8 @@ std::vector<Text> cautionsOf(const Vessel& vessel) {
   if (vessel.innerRadius / vessel.thickness < thinFrom)
     cautions.push_back(PW_TEXT("Source", "r/t = %1 is below 10: the wall is not thin, and its inner face has "
                                          "%2 times this hoop stress (thick wall, Lamé).")
-                           .with(shownNumber(vessel.innerRadius / vessel.thickness, 1))
-                           .with(shownNumber(innerFaceShare(vessel), 2)));
+                           .with(numberText(shownNumber(vessel.innerRadius / vessel.thickness, 1)))
+                           .with(numberText(shownNumber(innerFaceShare(vessel), 2))));
   if (vessel.pressure < 0)
     cautions.push_back(PW_TEXT("Source", "Pressure from outside: buckling of the wall is not seen here."));
   if (vessel.pressure != 0)

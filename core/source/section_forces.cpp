@@ -2,6 +2,7 @@
 #include "core/source/section_forces.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 #include <cmath>
@@ -22,8 +23,8 @@ Problem problem(Text what, Text mend) {
   return {{}, 0, 0, {}, std::move(what), std::move(mend)};
 }
 
-std::string inMillimetres(double length) {
-  return shownNumber(length, decimalsFor(std::abs(length)));
+Text inMillimetres(double length) {
+  return numberText(shownNumber(length, decimalsFor(std::abs(length))));
 }
 
 Text ofTaperedMembers() {

@@ -3,6 +3,7 @@
 
 #include "core/quantity/format.h"
 #include "core/source/seen.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 #include <array>
@@ -149,8 +150,8 @@ private:
       m_result.cautions.push_back(PW_TEXT("Source",
                                           "The cut lies at a junction: the thinner side is taken, b = %1 "
                                           "mm; on the other side b = %2 mm.")
-                                      .with(shownNumber(cut.width, decimalsFor(cut.width)))
-                                      .with(shownNumber(cut.wider, decimalsFor(cut.wider))));
+                                      .with(numberText(shownNumber(cut.width, decimalsFor(cut.width))))
+                                      .with(numberText(shownNumber(cut.wider, decimalsFor(cut.wider)))));
     const bool isOnAnAxis = std::abs(m_seen.v) <= m_seen.slack() || std::abs(m_seen.w) <= m_seen.slack();
     const bool isTurned = m_model.section.shape == SectionShape::built;
     if (!m_seen.region.upright && (isTurned || !isOnAnAxis))
@@ -190,7 +191,7 @@ private:
              ? PW_TEXT("Source", "V also gives τ_{xz} = %1 MPa at this fibre, across the plane that is seen.")
              : PW_TEXT("Source",
                        "V also gives τ_{xy} = %1 MPa at this fibre, across the plane that is seen."))
-            .with(shownNumber(value, decimalsFor(std::abs(value)))));
+            .with(numberText(shownNumber(value, decimalsFor(std::abs(value))))));
   }
 
   const SectionModel& m_model;

@@ -2,6 +2,7 @@
 #include "core/source/strain.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 #include <cmath>
@@ -81,9 +82,9 @@ Result<RosetteSolution> solved(const Rosette& rosette) {
                 PW_TEXT("Source",
                         "The gauges at %1, %2 and %3 are too nearly parallel: an error of reading would grow "
                         "more than %4 times.")
-                    .with(shownDegrees(a.direction, 2))
-                    .with(shownDegrees(b.direction, 2))
-                    .with(shownDegrees(c.direction, 2))
+                    .with(numberText(shownDegrees(a.direction, 2)))
+                    .with(numberText(shownDegrees(b.direction, 2)))
+                    .with(numberText(shownDegrees(c.direction, 2)))
                     .with(exactNumber(greatestErrorGain)),
                 PW_TEXT("Source", "Give three directions that differ, such as 0, 45 and 90 deg.")});
   return result;

@@ -1,5 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/strength/cautions.h"
+#include "core/words/decimal_sign.h"
 
 namespace planewright {
 
@@ -13,14 +14,17 @@ std::optional<Text> ofTimber(Criterion criterion) {
   case Criterion::norrisPlane:
   case Criterion::norrisThreePlane:
     return PW_TEXT("Strength", "For timber pulled at a small angle to the grain this criterion promises more "
-                               "than tests show: C24 at 1 in 10 keeps all of f_{t,0} by it, 0.61 to 0.81 by "
-                               "published tests and rules. See the other criteria beside it.");
+                               "than tests show: C24 at 1 in 10 keeps all of f_{t,0} by it, %1 to %2 by "
+                               "published tests and rules. See the other criteria beside it.")
+        .with(numberText("0.61"))
+        .with(numberText("0.81"));
   case Criterion::tsaiWu:
   case Criterion::hoffman:
     return PW_TEXT("Strength",
                    "With characteristic strengths of timber this criterion can promise more than f_{c,0}: "
-                   "C24 pressed at 15° takes 25.96 MPa by Tsai and Wu against f_{c,0} = 21 MPa, because "
-                   "f_{t,90} is far below f_{c,90}. See the other criteria beside it.");
+                   "C24 pressed at 15° takes %1 MPa by Tsai and Wu against f_{c,0} = 21 MPa, because "
+                   "f_{t,90} is far below f_{c,90}. See the other criteria beside it.")
+        .with(numberText("25.96"));
   default:
     return std::nullopt;
   }
@@ -64,8 +68,12 @@ std::vector<Text> cautionsOf(Criterion criterion, const Strengths& strengths, co
 std::optional<Text> cautionOfTensionAcross(MaterialKind kind) {
   if (kind != MaterialKind::timber)
     return std::nullopt;
-  return PW_TEXT("Strength", "k_{vol} = 1 in tension across the grain: f_{t,90} is for 0.01 m³, and "
-                             "(0.01/V)^0.2 is 0.46 at 0.5 m³ (exponent from memory).");
+  return PW_TEXT("Strength", "k_{vol} = 1 in tension across the grain: f_{t,90} is for %1 m³, and "
+                             "(%1/V)^%2 is %3 at %4 m³ (exponent from memory).")
+      .with(numberText("0.01"))
+      .with(numberText("0.2"))
+      .with(numberText("0.46"))
+      .with(numberText("0.5"));
 }
 
 Text limitOfAllPoints() {

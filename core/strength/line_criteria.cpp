@@ -2,6 +2,7 @@
 #include "core/strength/line_criteria.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 #include <cmath>
@@ -18,7 +19,7 @@ Problem problem(Text what, Text mend) {
 }
 
 Text written(double value) {
-  return verbatim(shownNumber(value, 4));
+  return numberText(shownNumber(value, 4));
 }
 
 /// A form whose pieces differ by the signs of s1 and s2.

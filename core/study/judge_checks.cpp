@@ -7,6 +7,7 @@
 #include "core/strength/cautions.h"
 #include "core/study/text_fields.h"
 #include "core/study/typed.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 
@@ -149,13 +150,15 @@ void addCautionsOfFactor(std::vector<Text>& cautions, const StrengthFactor& fact
   constexpr double high = 1.5;
   if (factor.origin == FactorOrigin::given && factor.value > high)
     cautions.push_back(
-        PW_TEXT("Strength", "The factor of the strengths is %1, which is above 1.5: see that it is meant.")
-            .with(exactNumber(factor.value)));
+        PW_TEXT("Strength", "The factor of the strengths is %1, which is above %2: see that it is meant.")
+            .with(numberText(exactNumber(factor.value)))
+            .with(numberText(exactNumber(high))));
   if (factor.duration && factor.durationFactor > high)
     cautions.push_back(
-        PW_TEXT("Strength", "The duration factor for “%1” is %2, which is above 1.5: see that it is meant.")
+        PW_TEXT("Strength", "The duration factor for “%1” is %2, which is above %3: see that it is meant.")
             .with(labelOf(*factor.duration))
-            .with(exactNumber(factor.durationFactor)));
+            .with(numberText(exactNumber(factor.durationFactor)))
+            .with(numberText(exactNumber(high))));
 }
 
 /// What the stresses of this state ask for, and what its criterion leaves out of them.

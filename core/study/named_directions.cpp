@@ -2,6 +2,7 @@
 #include "core/study/named_directions.h"
 
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 
@@ -37,7 +38,7 @@ void addMultiples(Directions& directions) {
     const bool stands = std::ranges::any_of(
         named, [&](const NamedDirection& direction) { return coincide(direction.angle, angle); });
     if (!stands)
-      directions.push_back({angle, verbatim(shownDegrees(angle, 0)), false});
+      directions.push_back({angle, numberText(shownDegrees(angle, 0)), false});
   }
 }
 

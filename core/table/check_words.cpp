@@ -1,12 +1,12 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/table/check_words.h"
 
-#include "core/quantity/decimal_sign.h"
 #include "core/quantity/format.h"
 #include "core/strength/cautions.h"
 #include "core/strength/shown_ratio.h"
 #include "core/study/judge_checks.h"
 #include "core/table/few_names.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 #include <cmath>

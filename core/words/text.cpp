@@ -1,6 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #include "core/words/text.h"
 
+#include "core/words/decimal_sign.h"
+
 #include <cassert>
 
 namespace planewright {
@@ -35,8 +37,8 @@ void append(Runs& result, std::string_view words, bool lowered) {
 }
 
 void render(Runs& result, const Text& text, const Translate& translate, bool lowered) {
-  if (text.context.empty()) {
-    append(result, text.source, lowered);
+  if (text.context.empty() || text.context == numberContext) {
+    append(result, text.context.empty() ? text.source : withDecimalSign(text.source), lowered);
     return;
   }
   const std::string source = translate ? translate(text.context, text.source) : text.source;

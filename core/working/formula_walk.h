@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/quantity/decimal_sign.h"
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 #include "core/working/formula.h"
 
 #include <algorithm>

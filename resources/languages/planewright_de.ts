@@ -5530,14 +5530,6 @@
 <context>
     <name>Strength</name>
     <message>
-        <source>For timber pulled at a small angle to the grain this criterion promises more than tests show: C24 at 1 in 10 keeps all of f_{t,0} by it, 0.61 to 0.81 by published tests and rules. See the other criteria beside it.</source>
-        <translation>Für Holz unter Zug in kleinem Winkel zur Faser verspricht dieses Kriterium mehr, als Versuche zeigen: Nach ihm behält C24 bei 1:10 das volle f_{t,0}, nach veröffentlichten Versuchen und Regeln das 0.61- bis 0.81-Fache. Zum Vergleich die anderen Kriterien ansehen.</translation>
-    </message>
-    <message>
-        <source>With characteristic strengths of timber this criterion can promise more than f_{c,0}: C24 pressed at 15° takes 25.96 MPa by Tsai and Wu against f_{c,0} = 21 MPa, because f_{t,90} is far below f_{c,90}. See the other criteria beside it.</source>
-        <translation>Mit charakteristischen Festigkeiten von Holz kann dieses Kriterium mehr als f_{c,0} versprechen: C24 unter Druck bei 15° trägt nach Tsai und Wu 25.96 MPa gegenüber f_{c,0} = 21 MPa, weil f_{t,90} weit unter f_{c,90} liegt. Zum Vergleich die anderen Kriterien ansehen.</translation>
-    </message>
-    <message>
         <source>With an exponent above 2 Hankinson&apos;s formula exceeds the strength along the line at small angles.</source>
         <translation>Mit einem Exponenten über 2 überschreitet die Formel von Hankinson bei kleinen Winkeln die Festigkeit längs der Linie.</translation>
     </message>
@@ -5560,10 +5552,6 @@
     <message>
         <source>No cut-off is given: it counts as 0, so the plane takes no tension.</source>
         <translation>Keine Zuggrenze ist angegeben: Sie zählt als 0, die Ebene nimmt also keinen Zug auf.</translation>
-    </message>
-    <message>
-        <source>k_{vol} = 1 in tension across the grain: f_{t,90} is for 0.01 m³, and (0.01/V)^0.2 is 0.46 at 0.5 m³ (exponent from memory).</source>
-        <translation>k_{vol} = 1 bei Zug quer zur Faser: f_{t,90} gilt für 0.01 m³, und (0.01/V)^0.2 ist 0.46 bei 0.5 m³ (Exponent aus dem Gedächtnis).</translation>
     </message>
     <message>
         <source>Stresses at single points only; local codes and a licensed engineer decide.</source>
@@ -5734,14 +5722,6 @@
         <translation>Bei den Beiwerten des Materials angeben.</translation>
     </message>
     <message>
-        <source>The factor of the strengths is %1, which is above 1.5: see that it is meant.</source>
-        <translation>Der Beiwert der Festigkeiten ist %1, das ist mehr als 1.5: prüfen, ob es so gemeint ist.</translation>
-    </message>
-    <message>
-        <source>The duration factor for “%1” is %2, which is above 1.5: see that it is meant.</source>
-        <translation>Der Beiwert der Einwirkungsdauer „%1“ ist %2, das ist mehr als 1.5: prüfen, ob es so gemeint ist.</translation>
-    </message>
-    <message>
         <source>σ_{z} acts here, and this criterion does not see it: judge it apart.</source>
         <translation>Hier wirkt σ_{z}, und dieses Kriterium erfasst es nicht: gesondert beurteilen.</translation>
     </message>
@@ -5772,6 +5752,26 @@
     <message>
         <source>Design strengths against loads that are not design loads.</source>
         <translation>Bemessungsfestigkeiten gegenüber Lasten, die keine Bemessungslasten sind.</translation>
+    </message>
+    <message>
+        <source>For timber pulled at a small angle to the grain this criterion promises more than tests show: C24 at 1 in 10 keeps all of f_{t,0} by it, %1 to %2 by published tests and rules. See the other criteria beside it.</source>
+        <translation>Für Holz unter Zug in kleinem Winkel zur Faser verspricht dieses Kriterium mehr, als Versuche zeigen: Nach ihm behält C24 bei 1:10 das volle f_{t,0}, nach veröffentlichten Versuchen und Regeln das %1- bis %2-Fache. Zum Vergleich die anderen Kriterien ansehen.</translation>
+    </message>
+    <message>
+        <source>With characteristic strengths of timber this criterion can promise more than f_{c,0}: C24 pressed at 15° takes %1 MPa by Tsai and Wu against f_{c,0} = 21 MPa, because f_{t,90} is far below f_{c,90}. See the other criteria beside it.</source>
+        <translation>Mit charakteristischen Festigkeiten von Holz kann dieses Kriterium mehr als f_{c,0} versprechen: C24 unter Druck bei 15° trägt nach Tsai und Wu %1 MPa gegenüber f_{c,0} = 21 MPa, weil f_{t,90} weit unter f_{c,90} liegt. Zum Vergleich die anderen Kriterien ansehen.</translation>
+    </message>
+    <message>
+        <source>k_{vol} = 1 in tension across the grain: f_{t,90} is for %1 m³, and (%1/V)^%2 is %3 at %4 m³ (exponent from memory).</source>
+        <translation>k_{vol} = 1 bei Zug quer zur Faser: f_{t,90} gilt für %1 m³, und (%1/V)^%2 ist %3 bei %4 m³ (Exponent aus dem Gedächtnis).</translation>
+    </message>
+    <message>
+        <source>The factor of the strengths is %1, which is above %2: see that it is meant.</source>
+        <translation>Der Beiwert der Festigkeiten ist %1, das ist mehr als %2: prüfen, ob es so gemeint ist.</translation>
+    </message>
+    <message>
+        <source>The duration factor for “%1” is %2, which is above %3: see that it is meant.</source>
+        <translation>Der Beiwert der Einwirkungsdauer „%1“ ist %2, das ist mehr als %3: prüfen, ob es so gemeint ist.</translation>
     </message>
 </context>
 <context>

@@ -44,7 +44,7 @@ QComboBox* boxOf(std::vector<Number> numbers, Number present, const QString& uni
 FigureOptions::FigureOptions(const FigureSettings& settings, QWidget* parent)
     : QWidget(parent), m_settings(settings), m_carryingChosen(settings.carriesStudy) {
   auto* column = new QVBoxLayout(this);
-  column->setContentsMargins(0, 0, 0, 0);
+  column->setContentsMargins(0, 0, gapToBar, 0);
   column->setSpacing(10);
   buildParts();
   buildArrangement();

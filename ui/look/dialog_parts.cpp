@@ -21,6 +21,7 @@ QVBoxLayout* headedRows(QWidget& page, const QString& heading) {
   QFont bold = label->font();
   bold.setBold(true);
   label->setFont(bold);
+  label->setSizePolicy(QSizePolicy::Preferred, QSizePolicy::Fixed);
   rows->addWidget(label);
   static_cast<QVBoxLayout*>(page.layout())->addLayout(rows);
   return rows;

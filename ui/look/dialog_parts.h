@@ -13,6 +13,8 @@ class QWidget;
 
 namespace planewright {
 
+constexpr int gapToBar = 8; ///< pixels between what stands in a column and its scroll bar
+
 /// Rows under a bold heading, at the end of the page's own column.
 QVBoxLayout* headedRows(QWidget& page, const QString& heading);
 

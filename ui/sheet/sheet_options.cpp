@@ -16,7 +16,7 @@ namespace planewright {
 SheetOptions::SheetOptions(Desk& desk, const SheetSettings& settings, QWidget* parent)
     : QWidget(parent), m_desk(desk), m_settings(settings) {
   auto* column = new QVBoxLayout(this);
-  column->setContentsMargins(0, 0, 0, 0);
+  column->setContentsMargins(0, 0, gapToBar, 0);
   column->setSpacing(12);
   buildPoints();
   buildDepth();

@@ -1,8 +1,8 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
 #pragma once
 
-#include "core/quantity/decimal_sign.h"
 #include "core/study/study.h"
+#include "core/words/decimal_sign.h"
 #include "ui/sheet/sheet_settings.h"
 #include "ui/shell/appearance.h"
 

@@ -52,6 +52,14 @@ TEST(Sheet, hasTheDecimalSignInItsNumbersAndWhatIsTypedAsItWas) {
   EXPECT_NE(comma.find("1.35 G + 1.5 S"), std::string::npos);
 }
 
+TEST(Sheet, hasTheDecimalSignInTheNumbersOfItsCautions) {
+  Study study = judgedStudy();
+  study.points[0].stress[1].sy = "0.4 MPa";
+  SheetOrder order;
+  order.decimal = DecimalSign::comma;
+  EXPECT_NE(sheetText(sheetOf(study, order)).find("(0,01/V)^0,2 is 0,46 at 0,5 m³"), std::string::npos);
+}
+
 TEST(Sheet, standsFirstWhatGoverns) {
   const Sheet sheet = sheetOf(judgedStudy(), {});
   const auto* box = std::get_if<SheetBox>(&sheet.blocks.front());

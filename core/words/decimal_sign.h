@@ -2,6 +2,10 @@
 #pragma once
 
 #include "core/words/names.h"
+#include "core/words/text.h"
+
+#include <string>
+#include <string_view>
 
 namespace planewright {
 
@@ -25,5 +29,11 @@ private:
 
 /// A number for people, written with the point, as this thread writes it now.
 std::string withDecimalSign(std::string number);
+
+/// A number within a Text that is kept: `written` with the point, shown as the thread that shows it writes
+/// numbers.
+Text numberText(std::string_view written);
+/// The context of such Texts, which no translator sees.
+inline constexpr std::string_view numberContext = "Number";
 
 } // namespace planewright

@@ -1,6 +1,6 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/quantity/decimal_sign.h"
 #include "core/quantity/format.h"
+#include "core/words/decimal_sign.h"
 
 #include <gtest/gtest.h>
 
@@ -24,6 +24,14 @@ TEST(DecimalSigns, areForPeopleOnlyAndForAWhile) {
     EXPECT_EQ(shownNumber(0.5, 1), "0.5");
   }
   EXPECT_EQ(shownNumber(0.5, 1), "0.5");
+}
+
+TEST(DecimalSigns, ofKeptTextsAreChosenWhereTheyAreShown) {
+  const Text text = PW_TEXT("Test", "b = %1 mm").with(numberText(shownNumber(12.5, 1))).with("EN 1.2");
+  EXPECT_EQ(plain(text), "b = 12.5 mm");
+  const WritesDecimals comma(DecimalSign::comma);
+  EXPECT_EQ(plain(text, [](const std::string&, const std::string&) { return "%2: b = %1 mm"; }),
+            "EN 1.2: b = 12,5 mm");
 }
 
 TEST(DecimalSigns, areThoseOfOneThread) {

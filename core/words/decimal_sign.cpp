@@ -1,5 +1,5 @@
 // SPDX-License-Identifier: GPL-3.0-or-later
-#include "core/quantity/decimal_sign.h"
+#include "core/words/decimal_sign.h"
 
 #include <algorithm>
 
@@ -32,6 +32,10 @@ std::string withDecimalSign(std::string number) {
   if (writtenSign == DecimalSign::comma)
     std::ranges::replace(number, '.', ',');
   return number;
+}
+
+Text numberText(std::string_view written) {
+  return {std::string(numberContext), std::string(written), {}};
 }
 
 } // namespace planewright
