@@ -80,6 +80,14 @@ void CaseStrip::rebuild(const std::vector<LoadCase>& cases) {
     for (const LoadCase& one : cases)
       addSegment(one);
   static_cast<QHBoxLayout*>(layout())->addStretch();
+  Q_EMIT rebuilt();
+}
+
+QList<QWidget*> CaseStrip::buttons() const {
+  QList<QWidget*> buttons;
+  for (auto* button : findChildren<QAbstractButton*>())
+    buttons += button;
+  return buttons;
 }
 
 void CaseStrip::addSegment(const LoadCase& one) {

@@ -16,8 +16,12 @@ public:
   explicit CaseStrip(QWidget* parent);
   void showCases(const Study& study, const std::string& current);
 
+  QList<QWidget*> buttons() const;
+
 signals:
   void chosen(const std::string& id);
+  /// Other buttons stand here than before.
+  void rebuilt();
 
 private:
   void rebuild(const std::vector<LoadCase>& cases);

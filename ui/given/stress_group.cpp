@@ -69,6 +69,7 @@ StressGroup::StressGroup(Desk& desk, QWidget* parent)
             });
   addAxes();
   buildMore();
+  connect(m_strip, &CaseStrip::rebuilt, this, &StressGroup::fieldsChanged);
   connect(m_strip, &CaseStrip::chosen, this, &StressGroup::chooseCase);
   connect(&m_desk, &Desk::changed, this, &StressGroup::refresh);
   refresh();
@@ -189,7 +190,7 @@ bool StressGroup::isOfCase(const EntryField& field) const {
 }
 
 QList<QWidget*> StressGroup::buttons() const {
-  QList<QWidget*> buttons = {m_addSource};
+  QList<QWidget*> buttons = m_strip->buttons() + QList<QWidget*>{m_addSource};
   for (const SourceFields* source : m_sources)
     buttons += source->buttons();
   return buttons + QList<QWidget*>{m_addThird, m_addAxes, m_addEdge};

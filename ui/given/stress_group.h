@@ -30,7 +30,7 @@ public:
   QList<QWidget*> buttons() const;
 
 signals:
-  /// Other fields stand here than before.
+  /// Other fields or buttons stand here than before.
   void fieldsChanged();
 
 private:

@@ -35,11 +35,30 @@ protected:
 private:
   void build() {
     m_page = m_make(this);
+    takePlaceInTabs();
     auto* whole = new QVBoxLayout(this);
     whole->setContentsMargins(0, 0, 0, 0);
     whole->addWidget(m_page);
     setFocusProxy(m_page);
     m_page->show();
+  }
+
+  static bool takesTab(const QWidget& widget) {
+    return widget.focusPolicy() & Qt::TabFocus && !widget.focusProxy();
+  }
+  /// What is made last would be reached last, not where it stands.
+  void takePlaceInTabs() {
+    QList<QWidget*> inside;
+    for (QWidget* next = nextInFocusChain(); next != this; next = next->nextInFocusChain())
+      if (isAncestorOf(next) && takesTab(*next))
+        inside += next;
+    QWidget* before = previousInFocusChain();
+    while (before != this && !takesTab(*before))
+      before = before->previousInFocusChain();
+    for (QWidget* one : inside) {
+      QWidget::setTabOrder(before, one);
+      before = one;
+    }
   }
 
   std::function<Page*(QWidget*)> m_make;

@@ -9,6 +9,7 @@
 #include <QLineEdit>
 #include <QPainter>
 #include <QStyleOption>
+#include <QTextFormat>
 
 namespace planewright {
 
@@ -58,6 +59,19 @@ int RingStyle::pixelMetric(PixelMetric metric, const QStyleOption* option, const
 QIcon RingStyle::standardIcon(StandardPixmap icon, const QStyleOption* option, const QWidget* widget) const {
   return icon == SP_ToolBarHorizontalExtensionButton ? moreIcon()
                                                      : QProxyStyle::standardIcon(icon, option, widget);
+}
+
+int RingStyle::styleHint(StyleHint hint, const QStyleOption* option, const QWidget* widget,
+                         QStyleHintReturn* data) const {
+  if (auto* ring = hint == SH_TextControl_FocusIndicatorTextCharFormat && widget
+                       ? qstyleoption_cast<QStyleHintReturnVariant*>(data)
+                       : nullptr) {
+    QTextCharFormat format;
+    format.setProperty(QTextFormat::OutlinePen, QPen(lookOf(*widget).colour(Role::focus), 2));
+    ring->variant = format;
+    return 1;
+  }
+  return QProxyStyle::styleHint(hint, option, widget, data);
 }
 
 QRect RingStyle::subElementRect(SubElement element, const QStyleOption* option, const QWidget* widget) const {

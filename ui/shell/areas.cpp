@@ -3,6 +3,7 @@
 
 #include <QApplication>
 #include <QEvent>
+#include <QScrollArea>
 #include <QVariant>
 #include <QWidget>
 
@@ -67,6 +68,11 @@ void Areas::follow(QWidget* focused) {
   if (!focused)
     return;
   m_focused = focused;
+  // Keys that come from elsewhere find their place in view; under the mouse nothing moves.
+  if (QApplication::mouseButtons() == Qt::NoButton)
+    for (QWidget* above = focused->parentWidget(); above; above = above->parentWidget())
+      if (auto* scrolled = qobject_cast<QScrollArea*>(above))
+        scrolled->ensureWidgetVisible(focused);
   for (QWidget* area : m_areas)
     if (area == focused || area->isAncestorOf(focused))
       m_current = area;

@@ -59,9 +59,8 @@ StrengthPanel::StrengthPanel(Desk& desk, QWidget* parent)
       m_fields(new CheckFields(
           desk, [this] { return m_checks->selected(); }, this)),
       m_mode(wrappedLabel(QPalette::WindowText, this)), m_governs(new QuietButton({}, Role::focus, this)),
-      m_scale(new QuietButton({}, Role::focus, this)),
       m_plot(new Later<UtilisationPlot>([this](QWidget* place) { return newPlot(place); }, this)),
-      m_sentences(wrappedLabel(QPalette::WindowText, this)),
+      m_scale(new QuietButton({}, Role::focus, this)), m_sentences(wrappedLabel(QPalette::WindowText, this)),
       m_cautions(wrappedLabel(QPalette::PlaceholderText, this)),
       m_more(new QuietButton(tr("More"), Role::focus, this)) {
   build();

@@ -65,8 +65,8 @@ private:
   CheckFields* m_fields;
   SteadyLabel* m_mode;
   QuietButton* m_governs;
-  QuietButton* m_scale;
   Later<UtilisationPlot>* m_plot;
+  QuietButton* m_scale;
   SteadyLabel* m_sentences;
   SteadyLabel* m_cautions;
   QuietButton* m_more;

@@ -2,8 +2,13 @@
 #include "core/record/study_file.h"
 #include "core/study/readout.h"
 #include "shell_test.h"
+#include "ui/circle/circle_view.h"
+#include "ui/element/element_view.h"
 #include "ui/given/given_panel.h"
+#include "ui/planes/planes_panel.h"
 #include "ui/shell/main_window.h"
+#include "ui/shell/state_bar.h"
+#include "ui/strength/strength_panel.h"
 
 #include <QAbstractButton>
 #include <QApplication>
@@ -13,6 +18,8 @@
 #include <QPushButton>
 #include <QTest>
 #include <QTimer>
+
+#include <gmock/gmock.h>
 
 namespace planewright {
 namespace {
@@ -122,6 +129,53 @@ protected:
 
   MainWindow m_window{answers()};
 };
+
+/// The area of the window in which a widget stands, by its name.
+std::string areaOf(const MainWindow& window, const QWidget& widget) {
+  const std::pair<const char*, const QWidget*> areas[] = {
+      {"given", &window.given()},     {"strength", &window.strength()}, {"bar", &window.stateBar()},
+      {"element", &window.element()}, {"circle", &window.circle()},     {"planes", &window.planes()}};
+  for (const auto& [name, area] : areas)
+    if (area == &widget || area->isAncestorOf(&widget))
+      return name;
+  return "line under the bar";
+}
+
+/// Whether it stands, at least in part, in the view of whatever scrolls it.
+bool isInView(const QWidget& widget) {
+  QRect seen = widget.rect();
+  const QWidget* at = &widget;
+  for (; !at->isWindow(); at = at->parentWidget())
+    seen = seen.translated(at->pos()).intersected(at->parentWidget()->rect());
+  return !seen.isEmpty();
+}
+
+TEST_F(ByKeyboard, tabGoesFromAreaToAreaThroughAllThatIsSeen) {
+  m_window.openWorkedExample();
+  m_window.resize(1600, 1000);
+  QTest::qWait(20);
+  m_window.given().focusFirst();
+  const QWidget* first = focused();
+  std::vector<std::string> areas = {"given"};
+  QStringList stops;
+  do {
+    press(Qt::Key_Tab);
+    ASSERT_TRUE(focused());
+    const auto* button = qobject_cast<QAbstractButton*>(focused());
+    stops += button && button->accessibleName().isEmpty() ? button->text() : focused()->accessibleName();
+    EXPECT_TRUE(isInView(*focused())) << stops.last().toStdString();
+    if (const std::string area = areaOf(m_window, *focused()); area != areas.back())
+      areas.push_back(area);
+  } while (focused() != first && stops.size() < 200);
+  EXPECT_THAT(areas, testing::ElementsAre("given", "strength", "bar", "line under the bar", "element",
+                                          "circle", "planes", "given"));
+  const qsizetype plot = stops.indexOf(QStringLiteral("Utilisation over the angle of the line"));
+  ASSERT_GT(plot, 0);
+  EXPECT_EQ(stops.at(plot + 1), "Scale: 0 to 2") << "the plot stands before its scale";
+  const qsizetype chosen = stops.indexOf(QStringLiteral("case G"));
+  ASSERT_GT(chosen, 0);
+  EXPECT_EQ(stops.at(chosen - 1), "Stress") << "the choice of the case follows its heading";
+}
 
 TEST_F(ByKeyboard, threeCasesBuiltCombinationsAndThreePointsFromThreeSources) {
   addTwice("Load cases");
