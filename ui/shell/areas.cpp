@@ -37,10 +37,23 @@ QWidget* entryOf(QWidget& area) {
   return nullptr;
 }
 
+/// Keys that come from elsewhere in the window find their place in view; under the mouse nothing moves.
+void bringIntoView(QWidget& focused) {
+  if (QApplication::mouseButtons() != Qt::NoButton)
+    return;
+  for (QWidget* above = focused.parentWidget(); above; above = above->parentWidget())
+    if (auto* scrolled = qobject_cast<QScrollArea*>(above))
+      scrolled->ensureWidgetVisible(&focused);
+}
+
 } // namespace
 
 Areas::Areas(const QList<QWidget*>& areas, QObject* parent) : QObject(parent), m_areas(areas) {
-  connect(qApp, &QApplication::focusChanged, this, [this](QWidget*, QWidget* now) { follow(now); });
+  connect(qApp, &QApplication::focusChanged, this, [this](QWidget* before, QWidget* now) {
+    follow(now);
+    if (before && now && before->window() == now->window())
+      bringIntoView(*now);
+  });
   for (QWidget* area : m_areas)
     area->installEventFilter(this);
 }
@@ -68,11 +81,6 @@ void Areas::follow(QWidget* focused) {
   if (!focused)
     return;
   m_focused = focused;
-  // Keys that come from elsewhere find their place in view; under the mouse nothing moves.
-  if (QApplication::mouseButtons() == Qt::NoButton)
-    for (QWidget* above = focused->parentWidget(); above; above = above->parentWidget())
-      if (auto* scrolled = qobject_cast<QScrollArea*>(above))
-        scrolled->ensureWidgetVisible(focused);
   for (QWidget* area : m_areas)
     if (area == focused || area->isAncestorOf(focused))
       m_current = area;

@@ -16,6 +16,7 @@
 #include <QLabel>
 #include <QMenu>
 #include <QPushButton>
+#include <QScrollBar>
 #include <QTest>
 #include <QTimer>
 
@@ -175,6 +176,24 @@ TEST_F(ByKeyboard, tabGoesFromAreaToAreaThroughAllThatIsSeen) {
   const qsizetype chosen = stops.indexOf(QStringLiteral("case G"));
   ASSERT_GT(chosen, 0);
   EXPECT_EQ(stops.at(chosen - 1), "Stress") << "the choice of the case follows its heading";
+}
+
+TEST_F(ByKeyboard, whoComesBackFromAnotherWindowFindsTheColumnWhereItWas) {
+  m_window.openWorkedExample();
+  m_window.given().focusFirst();
+  const QWidget* first = focused();
+  QScrollBar& bar = *m_window.given().verticalScrollBar();
+  QTest::qWait(20);
+  ASSERT_GT(bar.maximum(), 300);
+  bar.setValue(bar.maximum());
+  QWidget another;
+  another.show();
+  another.activateWindow();
+  ASSERT_TRUE(QTest::qWaitForWindowActive(&another));
+  m_window.activateWindow();
+  ASSERT_TRUE(QTest::qWaitForWindowActive(&m_window));
+  EXPECT_EQ(focused(), first);
+  EXPECT_EQ(bar.value(), bar.maximum());
 }
 
 TEST_F(ByKeyboard, threeCasesBuiltCombinationsAndThreePointsFromThreeSources) {
